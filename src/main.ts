@@ -1,0 +1,2 @@
+// Joins the commands and the screens; the only place that catches.
+console.log("joulewright");
