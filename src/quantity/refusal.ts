@@ -21,7 +21,9 @@ export interface Refusal {
 }
 
 /** Either a value or what was wrong with its input; never both. */
-export type Read<T> = { readonly ok: true; readonly value: T } | { readonly ok: false; readonly refusals: readonly Refusal[] };
+export type Read<T> =
+  | { readonly ok: true; readonly value: T }
+  | { readonly ok: false; readonly refusals: readonly Refusal[] };
 
 export const accepted = <T>(value: T): Read<T> => ({ ok: true, value });
 export const refused = (...refusals: readonly Refusal[]): Read<never> => ({ ok: false, refusals });
