@@ -1,0 +1,61 @@
+// The balancing resistor: the largest preferred value that still shares safely, as k equal elements within volts and watts.
+//
+// | symbol | in code | unit | meaning |
+// | ------ | ------- | ---- | ------- |
+// | R_max  | most    | ohm  | largest resistance that shares safely |
+// | k      | elements | 1   | elements in series, the least that is within volts and watts |
+// | V_1    | worst   | V    | worst holding voltage at the chosen R |
+//
+// Each element is the largest preferred value at most R_max/k; V_1/k <= working voltage, V_1^2/(R(1 - q))/k <= derated power.
+// Because V_1 >= V_1(R -> 0) and R <= R_max, no k below the start used here can pass. Source: [joulewright-design] section 3.
+
+import type { ResistorFamily } from "../catalog/index.ts";
+import { lastAtMost } from "../quantity/index.ts";
+import { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
+import { largestBalance } from "./share.ts";
+
+/** More elements than this in one position is no balancing resistor that anyone builds. */
+const MOST_ELEMENTS = 400;
+
+/** A chosen resistor of one position. */
+export interface Choice {
+  resistance: number;
+  element: number;
+  elements: number;
+  /** Worst holding voltage across the position, V. */
+  worst: number;
+}
+
+/** Power in one element at the worst holding voltage with the resistor at its low end, W. */
+export const elementPower = (worst: number, resistance: number, spread: number, elements: number): number =>
+  (worst * worst) / (resistance * (1 - spread)) / elements;
+
+/**
+ * Chooses from one family; false when none does (the spread leaves no R, or the family has no value so small).
+ * `bank.spread` is the family's tolerance. The result is written into `choice`, because the search calls this for every layout.
+ */
+export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorFamily, choice: Choice): boolean {
+  const endless = largestBalance(bank, limit);
+  const most = bank.hold === Number.POSITIVE_INFINITY ? endless : largestBalanceForHold(bank, limit, endless);
+  const { values, voltage, lowest, highest } = family;
+  if (!(most > 0) || most < lowest * (1 - 1e-9)) return false;
+  const watts = family.power * family.derating;
+  const floor = bank.voltage / bank.series;
+  const reach = Math.min(most, highest * MOST_ELEMENTS);
+  const start = Math.max(floor / voltage, (floor * floor) / (reach * (1 + bank.spread)) / watts, 1);
+  for (let k = Math.max(1, Math.ceil(start * (1 - 1e-9))); k <= MOST_ELEMENTS; k++) {
+    const index = lastAtMost(values, Math.min(most / k, highest));
+    if (index < 0) return false;
+    const element = values[index] as number;
+    const resistance = element * k;
+    const worst = holdWorst(bank, resistance);
+    if (worst / k > voltage * (1 + 1e-9)) continue;
+    if (elementPower(worst, resistance, bank.spread, k) > watts * (1 + 1e-9)) continue;
+    choice.resistance = resistance;
+    choice.element = element;
+    choice.elements = k;
+    choice.worst = worst;
+    return true;
+  }
+  return false;
+}
