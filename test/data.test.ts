@@ -154,7 +154,9 @@ describe("bigCatalogue(rows, seed)", () => {
     const rows = parse(bigCatalogue(2000, 5), { columns: true }) as Record<string, string>[];
     expect(rows.length).toBe(2000);
     expect(new Set(rows.map((row) => row.part)).size).toBe(2000);
-    expect(Object.keys(rows[0]!).map(name)).toSatisfy((heads: string[]) => heads.every((h) => CAPACITOR_COLUMNS.has(h)));
+    expect(Object.keys(rows[0]!).map(name)).toSatisfy((heads: string[]) =>
+      heads.every((h) => CAPACITOR_COLUMNS.has(h)),
+    );
     for (const row of rows) {
       expect(Number(row["capacitance [uF]"])).toBeGreaterThan(0);
       expect(Number(row.price)).toBeGreaterThan(0);
