@@ -192,11 +192,16 @@ function bindHeadings(
   return accepted({ bound, notes });
 }
 
-/** Scale of bare numbers below a heading; null when only cells with their own unit are accepted, undefined for a wrong unit. */
+/**
+ * Scale of bare numbers below a heading; null when only cells with their own unit are accepted, undefined for a wrong unit.
+ * A fraction without a unit is a plain fraction (`derating` 0.85); a tolerance is not, because 20 is written as often as 0.2.
+ */
 function headingScale(column: Column, unit: string | undefined): Scale | null | undefined {
   const dimension =
     column.type.kind === "quantity" ? column.type.dimension : column.type.kind === "tolerance" ? "fraction" : null;
   if (dimension === null || dimension === "count") return { exponent: 0, factor: 1 };
-  if (unit === undefined || unit.trim() === "") return null;
+  if (unit === undefined || unit.trim() === "") {
+    return column.type.kind === "quantity" && dimension === "fraction" ? { exponent: 0, factor: 1 } : null;
+  }
   return unitScale(unit.trim(), dimension) ?? undefined;
 }

@@ -12,7 +12,8 @@ export interface Shape {
 }
 
 /** Resistors come one a stage when cross-tied, one a unit in strings. */
-export const positionsOf = ({ series, parallel, ties }: Shape): number => (ties === "cross-tied" ? series : series * parallel);
+export const positionsOf = ({ series, parallel, ties }: Shape): number =>
+  ties === "cross-tied" ? series : series * parallel;
 
 /** Units that share one balancing resistor. */
 export const sharingOf = ({ parallel, ties }: Shape): number => (ties === "cross-tied" ? parallel : 1);
@@ -39,7 +40,14 @@ export interface Balancing extends Choice {
   cost: number;
 }
 
-export const newBalancing = (): Balancing => ({ family: -1, cost: 0, resistance: 0, element: 0, elements: 0, worst: 0 });
+export const newBalancing = (): Balancing => ({
+  family: -1,
+  cost: 0,
+  resistance: 0,
+  element: 0,
+  elements: 0,
+  worst: 0,
+});
 
 const trial: Choice = { resistance: 0, element: 0, elements: 0, worst: 0 };
 const bill = { quantity: 0, cost: 0 };

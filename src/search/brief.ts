@@ -1,7 +1,18 @@
 // What is wanted: the brief, read from JSON or flags, every value a number in SI or text with a unit.
 
 import { z } from "zod";
-import { accepted, type Dimension, example, formatQuantity, isCurrency, nearestWord, parseQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
+import {
+  accepted,
+  type Dimension,
+  example,
+  formatQuantity,
+  isCurrency,
+  nearestWord,
+  parseQuantity,
+  type Read,
+  type Refusal,
+  refused,
+} from "../quantity/index.ts";
 
 export const BASES = ["worst case", "nominal", "statistical"] as const;
 export type Basis = (typeof BASES)[number];
@@ -41,7 +52,11 @@ function whole(least: number, most: number) {
   return z.union([z.number(), z.string()]).transform((raw, context): number => {
     const value = typeof raw === "number" ? raw : /^\s*\d+\s*$/.test(raw) ? Number(raw) : Number.NaN;
     if (Number.isInteger(value) && value >= least && value <= most) return value;
-    context.addIssue({ code: "custom", message: `a whole number from ${least} to ${most}`, params: { read: JSON.stringify(raw) } });
+    context.addIssue({
+      code: "custom",
+      message: `a whole number from ${least} to ${most}`,
+      params: { read: JSON.stringify(raw) },
+    });
     return z.NEVER;
   });
 }
@@ -50,15 +65,26 @@ const hold = z.union([z.number(), z.string()]).transform((raw, context): number 
   if (typeof raw === "string" && /^\s*for ?ever\s*$/i.test(raw)) return Number.POSITIVE_INFINITY;
   const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, "time");
   if (read.ok && read.value >= 0 && read.value <= 1e9) return read.value;
-  context.addIssue({ code: "custom", message: '"for ever", or a time such as "30 s" from 0 s up', params: { read: JSON.stringify(raw) } });
+  context.addIssue({
+    code: "custom",
+    message: '"for ever", or a time such as "30 s" from 0 s up',
+    params: { read: JSON.stringify(raw) },
+  });
   return z.NEVER;
 });
 
 const basis = z.string().transform((raw, context): Basis => {
-  const plain = raw.trim().toLowerCase().replace(/[\s_-]+/g, " ");
+  const plain = raw
+    .trim()
+    .toLowerCase()
+    .replace(/[\s_-]+/g, " ");
   const found = BASES.find((b) => b === plain);
   if (found) return found;
-  context.addIssue({ code: "custom", message: BASES.map((b) => `"${b}"`).join(", "), params: { read: JSON.stringify(raw) } });
+  context.addIssue({
+    code: "custom",
+    message: BASES.map((b) => `"${b}"`).join(", "),
+    params: { read: JSON.stringify(raw) },
+  });
   return z.NEVER;
 });
 
@@ -119,7 +145,12 @@ const REQUIRED: Readonly<Record<string, string>> = {
 export function readBrief(input: unknown, file?: string): Read<Brief> {
   if (typeof input !== "object" || input === null || Array.isArray(input)) {
     const read = Array.isArray(input) ? "a list" : String(input);
-    return refused({ code: "bad-brief", place: file ? { file } : {}, read, want: "an object with energy, voltage and ripple" });
+    return refused({
+      code: "bad-brief",
+      place: file ? { file } : {},
+      read,
+      want: "an object with energy, voltage and ripple",
+    });
   }
   const result = briefSchema.safeParse(input);
   if (result.success) return accepted(result.data);
@@ -127,15 +158,28 @@ export function readBrief(input: unknown, file?: string): Read<Brief> {
   for (const issue of result.error.issues) {
     const field = issue.path.map(String).join(".");
     const place = { ...(file ? { file } : {}), ...(field ? { field } : {}) };
-    const raw = issue.path.reduce<unknown>((node, key) => (node as Record<PropertyKey, unknown> | undefined)?.[key], input);
+    const raw = issue.path.reduce<unknown>(
+      (node, key) => (node as Record<PropertyKey, unknown> | undefined)?.[key],
+      input,
+    );
     if (issue.code === "unrecognized_keys") {
       for (const key of issue.keys) {
         const near = nearestWord(key, BRIEF_KEYS);
         const want = near === null ? `one of ${BRIEF_KEYS.join(", ")}` : `perhaps "${near}"`;
-        faults.push({ code: "unknown-key", place: { ...place, field: field ? `${field}.${key}` : key }, read: JSON.stringify(key), want });
+        faults.push({
+          code: "unknown-key",
+          place: { ...place, field: field ? `${field}.${key}` : key },
+          read: JSON.stringify(key),
+          want,
+        });
       }
     } else if (issue.code === "custom") {
-      faults.push({ code: "bad-value", place, read: String(issue.params?.["read"] ?? JSON.stringify(raw)), want: issue.message });
+      faults.push({
+        code: "bad-value",
+        place,
+        read: String(issue.params?.read ?? JSON.stringify(raw)),
+        want: issue.message,
+      });
     } else {
       const read = raw === undefined ? "nothing" : JSON.stringify(raw);
       const want = REQUIRED[field] ?? issue.message;

@@ -18,7 +18,11 @@ export const idOf = (table: LayoutTable, parts: readonly Capacitor[], row: numbe
   });
 
 /** Compares two rows of a table; `by` comes first, then the standing order. */
-export function comparison(table: LayoutTable, parts: readonly Capacitor[], by: Ranking): (a: number, b: number) => number {
+export function comparison(
+  table: LayoutTable,
+  parts: readonly Capacitor[],
+  by: Ranking,
+): (a: number, b: number) => number {
   const { cost, units, volume, stress } = table;
   const first = table[by];
   const unassessed = (row: number): number => (stress[row] === Number.POSITIVE_INFINITY ? 1 : 0);

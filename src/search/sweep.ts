@@ -82,14 +82,19 @@ function sweepPart(input: SweepInput, index: number, table: LayoutTable): Reason
     const volume = candidate.volume === null ? Number.POSITIVE_INFINITY : candidate.volume * units;
     const mass = candidate.mass === null ? Number.POSITIVE_INFINITY : candidate.mass * units;
     if (over(volume, brief.maxVolume)) {
-      ceiling(candidate.volume === null ? "volume-unknown" : "volume-limit", finiteOrNull(volume), brief.maxVolume as number);
+      ceiling(
+        candidate.volume === null ? "volume-unknown" : "volume-limit",
+        finiteOrNull(volume),
+        brief.maxVolume as number,
+      );
       break;
     }
     if (over(mass, brief.maxMass)) {
       ceiling(candidate.mass === null ? "mass-unknown" : "mass-limit", finiteOrNull(mass), brief.maxMass as number);
       break;
     }
-    const charging = candidate.tolerance === null ? Number.POSITIVE_INFINITY : chargingWorst(voltage, n, candidate.tolerance);
+    const charging =
+      candidate.tolerance === null ? Number.POSITIVE_INFINITY : chargingWorst(voltage, n, candidate.tolerance);
     for (let tied = n > 1 && p > 1 ? 1 : 0; tied >= 0; tied--) {
       let worst = charging;
       let resistors = 0;
