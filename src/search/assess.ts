@@ -84,18 +84,7 @@ export function assess(input: AssessInput): LayoutResult {
     share,
     balance: chosen,
     bleed: {
-      seconds:
-        chosen === null
-          ? null
-          : bleedSeconds(
-              chosen,
-              capacitance.high ?? capacitance.nominal,
-              series,
-              voltage,
-              brief.touchSafe,
-              parallel,
-              ties === "cross-tied",
-            ),
+      seconds: chosen === null ? null : bleedSeconds(chosen, layout, capacitance.high ?? capacitance.nominal, brief),
       toVoltage: brief.touchSafe,
     },
     cost: costOf({ capacitors, resistors, hasResistors: chosen !== null, candidate, currency, family }),

@@ -1,6 +1,8 @@
 // When nothing fits: the least change of each single demand that would make something fit, each found by trying.
 
 import { requiredCapacitance } from "../bank/index.ts";
+import { purchase } from "../catalog/index.ts";
+import { minorDigits } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { idOf } from "./rank.ts";
 import type { Change } from "./result.ts";
