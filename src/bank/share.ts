@@ -19,7 +19,9 @@
 import type { Tolerance } from "../quantity/index.ts";
 
 /** How much a unit leaks at worst; null is unknown. */
-export type Leak = { readonly kind: "current"; readonly amperes: number } | { readonly kind: "insulation"; readonly ohms: number };
+export type Leak =
+  | { readonly kind: "current"; readonly amperes: number }
+  | { readonly kind: "insulation"; readonly ohms: number };
 
 /** Largest voltage of any stage while charging, V. */
 export const chargingWorst = (voltage: number, series: number, { low, high }: Tolerance): number =>
@@ -30,10 +32,17 @@ export const chargingLeast = (voltage: number, series: number, { low, high }: To
   (voltage * (1 - low)) / (1 - low + (series - 1) * (1 + high));
 
 /** What the lowest-capacitance and highest-capacitance stage keep after a dump from equal sharing, V (low is negative). */
-export function leftAfterDump(voltage: number, series: number, tolerance: Tolerance): { readonly low: number; readonly high: number } {
+export function leftAfterDump(
+  voltage: number,
+  series: number,
+  tolerance: Tolerance,
+): { readonly low: number; readonly high: number } {
   if (series === 1) return { low: 0, high: 0 };
   const even = voltage / series;
-  return { low: even - chargingWorst(voltage, series, tolerance), high: even - chargingLeast(voltage, series, tolerance) };
+  return {
+    low: even - chargingWorst(voltage, series, tolerance),
+    high: even - chargingLeast(voltage, series, tolerance),
+  };
 }
 
 export interface HoldingChain {
@@ -71,7 +80,8 @@ export function largestBalance(chain: HoldingChain, limit: number): number {
   const rest = 1 - spread;
   const bracket = limit * ((series - 1) / (1 + spread) + 1 / rest) - voltage / rest;
   if (bracket <= 0) return 0;
-  if (leak.kind === "current") return leak.amperes > 0 ? bracket / ((series - 1) * sharing * leak.amperes) : Number.POSITIVE_INFINITY;
+  if (leak.kind === "current")
+    return leak.amperes > 0 ? bracket / ((series - 1) * sharing * leak.amperes) : Number.POSITIVE_INFINITY;
   const pull = (voltage - limit) * (sharing / leak.ohms);
   return pull > 0 ? bracket / pull : Number.POSITIVE_INFINITY;
 }

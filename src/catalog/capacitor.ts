@@ -2,8 +2,8 @@
 
 import { z } from "zod";
 import type { Tolerance } from "../quantity/index.ts";
-import { above, type Column, fromZero, PURCHASE_COLUMNS, text } from "./column.ts";
 import type { PriceBreak } from "./cell.ts";
+import { above, type Column, fromZero, PURCHASE_COLUMNS, text } from "./column.ts";
 
 /** Where a value comes from. A value that is absent is unknown. `assumed` names its rule. */
 export type ValueState =
@@ -97,8 +97,17 @@ export const CAPACITOR_COLUMNS: readonly Column[] = [
   { heading: "reversal", key: "reversal", type: fromZero("fraction", 1) },
   { heading: "rated shots", key: "ratedShots", type: { kind: "quantity", dimension: "count", least: 1, most: 1e12 } },
   { heading: "life exponent", key: "lifeExponent", type: { kind: "quantity", dimension: "count", least: 0, most: 40 } },
-  { heading: "reversal exponent", key: "reversalExponent", type: { kind: "quantity", dimension: "count", least: 0, most: 40 } },
-  { heading: "thermal resistance", also: ["thermal resistance [k/w]"], key: "thermalResistance", type: { kind: "quantity", dimension: "count", least: 1e-4, most: 1e5 } },
+  {
+    heading: "reversal exponent",
+    key: "reversalExponent",
+    type: { kind: "quantity", dimension: "count", least: 0, most: 40 },
+  },
+  {
+    heading: "thermal resistance",
+    also: ["thermal resistance [k/w]"],
+    key: "thermalResistance",
+    type: { kind: "quantity", dimension: "count", least: 1e-4, most: 1e5 },
+  },
   { heading: "rupture energy", key: "ruptureEnergy", type: above("energy", 1e-3, 1e8) },
   { heading: "diameter", key: "diameter", type: above("length", 1e-4, 10) },
   { heading: "length", key: "length", type: above("length", 1e-4, 10) },

@@ -4,7 +4,13 @@ import type { Dimension } from "../quantity/index.ts";
 
 export type ColumnKind =
   /** A number in SI, in the heading's unit or the cell's own. */
-  | { readonly kind: "quantity"; readonly dimension: Dimension; readonly least: number; readonly most: number; readonly open?: boolean }
+  | {
+      readonly kind: "quantity";
+      readonly dimension: Dimension;
+      readonly least: number;
+      readonly most: number;
+      readonly open?: boolean;
+    }
   | { readonly kind: "whole"; readonly least: number; readonly most: number }
   | { readonly kind: "tolerance" }
   | { readonly kind: "text"; readonly longest: number }

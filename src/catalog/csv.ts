@@ -27,14 +27,18 @@ export function separatorOf(text: string): Separator {
  * Hands each record to `take` with the line it starts on, in order, so that a long table is never held twice.
  * Refuses text that is empty or binary; a record that cannot be split costs itself and is listed in `faults`.
  */
-export function readRecords(
-  text: string,
-  take: (cells: readonly string[], line: number) => void,
-): Read<CsvSummary> {
+export function readRecords(text: string, take: (cells: readonly string[], line: number) => void): Read<CsvSummary> {
   const body = text.charCodeAt(0) === 0xfeff ? text.slice(1) : text;
-  if (body.trim() === "") return refused({ code: "empty-file", place: {}, read: "nothing", want: "a heading row and rows below it" });
+  if (body.trim() === "")
+    return refused({ code: "empty-file", place: {}, read: "nothing", want: "a heading row and rows below it" });
   const nul = body.indexOf("\u0000");
-  if (nul >= 0) return refused({ code: "binary-file", place: {}, read: `a zero byte at character ${nul + 1}`, want: "text, UTF-8, comma, semicolon or tab separated" });
+  if (nul >= 0)
+    return refused({
+      code: "binary-file",
+      place: {},
+      read: `a zero byte at character ${nul + 1}`,
+      want: "text, UTF-8, comma, semicolon or tab separated",
+    });
   const separator = separatorOf(body);
   const faults: Refusal[] = [];
   parse(body, {

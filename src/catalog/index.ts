@@ -12,5 +12,11 @@ export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
 export { cheapest, isPriced, leastBuyable, type Purchase, purchase, unitPriceAt } from "./purchase.ts";
 export { type Catalogue, readCapacitors } from "./readCapacitors.ts";
-export { DEFAULT_FAMILY, RESISTOR_COLUMNS, type ResistorCatalogue, type ResistorFamily, readResistors } from "./resistor.ts";
+export {
+  DEFAULT_FAMILY,
+  RESISTOR_COLUMNS,
+  type ResistorCatalogue,
+  type ResistorFamily,
+  readResistors,
+} from "./resistor.ts";
 export { assumedLeakage, RULES, stateOf } from "./states.ts";

@@ -43,7 +43,12 @@ export function readMeasured(source: string, file: string): Read<MeasuredLot> {
     const first = seen.get(unit.serial);
     if (first !== undefined) {
       const want = `each serial once; line ${first} has it already`;
-      faults.push({ code: "duplicate-serial", place: { file, line, field: "serial" }, read: JSON.stringify(unit.serial), want });
+      faults.push({
+        code: "duplicate-serial",
+        place: { file, line, field: "serial" },
+        read: JSON.stringify(unit.serial),
+        want,
+      });
       return;
     }
     seen.set(unit.serial, line);

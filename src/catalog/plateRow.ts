@@ -12,7 +12,10 @@ interface PlateRow {
   readonly breakdownField?: number | undefined;
 }
 
-export function plateCapacitor(row: PlateRow, place: Place): Read<{ readonly capacitance: number; readonly voltage?: number }> {
+export function plateCapacitor(
+  row: PlateRow,
+  place: Place,
+): Read<{ readonly capacitance: number; readonly voltage?: number }> {
   const { plateArea, gap, permittivity = 1, plates = 2, breakdownField } = row;
   if (plateArea === undefined || gap === undefined) {
     return refused({ code: "missing-value", place, read: "plates without area or gap", want: "plate area and gap" });

@@ -32,7 +32,8 @@ export function unitPriceAt(terms: PurchaseTerms, quantity: number): number | nu
 const inPacks = (quantity: number, pack: number): number => Math.ceil(quantity / pack) * pack;
 
 /** True when a price is known at some quantity. */
-export const isPriced = (terms: PurchaseTerms): boolean => terms.price !== undefined || (terms.priceBreaks?.length ?? 0) > 0;
+export const isPriced = (terms: PurchaseTerms): boolean =>
+  terms.price !== undefined || (terms.priceBreaks?.length ?? 0) > 0;
 
 /**
  * Least quantity that can be bought to have `needed`, zero when the hand suffices; null when not enough can be had.

@@ -30,7 +30,12 @@ export function readCapacitors(text: string, file: string): Read<Catalogue> {
     const first = seen.get(read.value.part);
     if (first !== undefined) {
       const want = `a name of its own for each row; line ${first} has it already`;
-      faults.push({ code: "duplicate-part", place: { file, line: row.line, field: "part" }, read: JSON.stringify(read.value.part), want });
+      faults.push({
+        code: "duplicate-part",
+        place: { file, line: row.line, field: "part" },
+        read: JSON.stringify(read.value.part),
+        want,
+      });
       return;
     }
     seen.set(read.value.part, row.line);
@@ -38,18 +43,31 @@ export function readCapacitors(text: string, file: string): Read<Catalogue> {
   });
   if (!table.ok) return table;
   const all = [...table.value.faults, ...faults].sort((a, b) => (a.place.line ?? 1e12) - (b.place.line ?? 1e12));
-  return accepted({ parts, faults: all.slice(0, MOST_FAULTS + 1), notes: [...table.value.notes, ...notes], rowCount: table.value.rowCount });
+  return accepted({
+    parts,
+    faults: all.slice(0, MOST_FAULTS + 1),
+    notes: [...table.value.notes, ...notes],
+    rowCount: table.value.rowCount,
+  });
 }
 
 function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> {
-  const { measured, assumed, plateArea, gap, permittivity, plates, breakdownField, ...values } = row.values as Record<string, never>;
+  const { measured, assumed, plateArea, gap, permittivity, plates, breakdownField, ...values } = row.values as Record<
+    string,
+    never
+  >;
   const place = { file, line: row.line };
   let states: Record<string, ValueState> = {};
   if (measured !== undefined || assumed !== undefined) {
     const named = namedStates(measured, assumed);
     states = named.states;
     for (const name of named.strange) {
-      notes.push({ code: "unknown-column-name", place, read: JSON.stringify(name), want: "a heading of this catalogue in `measured` or `assumed`" });
+      notes.push({
+        code: "unknown-column-name",
+        place,
+        read: JSON.stringify(name),
+        want: "a heading of this catalogue in `measured` or `assumed`",
+      });
     }
   }
   const unit: Record<string, unknown> = values;
@@ -61,22 +79,27 @@ function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> 
       unit[key] = value;
       states[key] = { state: "assumed", rule: RULES.plate };
     }
-    unit["technology"] ??= "home-made plates";
+    unit.technology ??= "home-made plates";
   }
   for (const key of ["capacitance", "voltage"]) {
     if (unit[key] !== undefined) continue;
-    return refused({ code: "missing-value", place: { ...place, field: key }, read: "a blank cell or no such column", want: `a value for ${key}, or plate area, gap, plates and breakdown field` });
+    return refused({
+      code: "missing-value",
+      place: { ...place, field: key },
+      read: "a blank cell or no such column",
+      want: `a value for ${key}, or plate area, gap, plates and breakdown field`,
+    });
   }
-  if (unit["polarised"] === undefined) {
-    const polarised = polarityOf(unit["technology"] as string | undefined);
+  if (unit.polarised === undefined) {
+    const polarised = polarityOf(unit.technology as string | undefined);
     if (polarised !== undefined) {
-      unit["polarised"] = polarised;
-      states["polarised"] = { state: "assumed", rule: RULES.polarity };
+      unit.polarised = polarised;
+      states.polarised = { state: "assumed", rule: RULES.polarity };
     }
   }
-  if (unit["polarised"] === true && unit["leakage"] === undefined && unit["insulation"] === undefined) {
-    unit["leakage"] = assumedLeakage(unit["capacitance"] as number, unit["voltage"] as number);
-    states["leakage"] = { state: "assumed", rule: RULES.leakage };
+  if (unit.polarised === true && unit.leakage === undefined && unit.insulation === undefined) {
+    unit.leakage = assumedLeakage(unit.capacitance as number, unit.voltage as number);
+    states.leakage = { state: "assumed", rule: RULES.leakage };
   }
   const gate = capacitorSchema.safeParse(unit);
   if (!gate.success) {
@@ -89,8 +112,8 @@ function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> 
       })),
     );
   }
-  unit["states"] = states;
-  unit["file"] = file;
-  unit["line"] = row.line;
+  unit.states = states;
+  unit.file = file;
+  unit.line = row.line;
   return accepted(unit as unknown as Capacitor);
 }

@@ -1,6 +1,14 @@
 // A resistor family as sold: one construction, a series of preferred values, its limits and price; and the reader of such a catalogue.
 
-import { accepted, type Read, type Refusal, SERIES_NAMES, type SeriesName, seriesBetween, type Tolerance } from "../quantity/index.ts";
+import {
+  accepted,
+  type Read,
+  type Refusal,
+  SERIES_NAMES,
+  type SeriesName,
+  seriesBetween,
+  type Tolerance,
+} from "../quantity/index.ts";
 import type { PurchaseTerms } from "./capacitor.ts";
 import { above, type Column, fromZero, PURCHASE_COLUMNS, text } from "./column.ts";
 import { readTable } from "./table.ts";
@@ -52,7 +60,13 @@ export const RESISTOR_COLUMNS: readonly Column[] = [
   { heading: "tolerance", key: "tolerance", type: { kind: "tolerance" }, required: true },
   { heading: "power", key: "power", type: above("power", 1e-4, 1e6), required: true },
   { heading: "derating", key: "derating", type: above("fraction", 0.01, 1) },
-  { heading: "voltage", also: ["working voltage", "limiting voltage"], key: "voltage", type: above("voltage", 0.1, 1e7), required: true },
+  {
+    heading: "voltage",
+    also: ["working voltage", "limiting voltage"],
+    key: "voltage",
+    type: above("voltage", 0.1, 1e7),
+    required: true,
+  },
   { heading: "pulse energy", key: "pulseEnergy", type: fromZero("energy", 1e9) },
   ...PURCHASE_COLUMNS,
   { heading: "note", also: ["notes"], key: "note", type: text(1000) },
@@ -79,8 +93,10 @@ export function readResistors(source: string, file: string): Read<ResistorCatalo
     const fault = (code: string, read: string, want: string): void => {
       faults.push({ code, place: { file, line }, read, want });
     };
-    if (lowest > highest) return fault("contradiction", `lowest ${lowest} ohm above highest ${highest} ohm`, "lowest at most highest");
-    if (families.some((f) => f.family === row.family)) return fault("duplicate-part", JSON.stringify(row.family), "a name of its own for each row");
+    if (lowest > highest)
+      return fault("contradiction", `lowest ${lowest} ohm above highest ${highest} ohm`, "lowest at most highest");
+    if (families.some((f) => f.family === row.family))
+      return fault("duplicate-part", JSON.stringify(row.family), "a name of its own for each row");
     const made = family({
       ...(terms as ResistorFamily),
       series: row.series ?? DEFAULT_FAMILY.series,
@@ -90,7 +106,12 @@ export function readResistors(source: string, file: string): Read<ResistorCatalo
       derating: row.derating ?? DEFAULT_FAMILY.derating,
       assumed: false,
     });
-    if (made.values.length === 0) return fault("contradiction", `no ${made.series} value from ${lowest} to ${highest} ohm`, "a range that holds a preferred value");
+    if (made.values.length === 0)
+      return fault(
+        "contradiction",
+        `no ${made.series} value from ${lowest} to ${highest} ohm`,
+        "a range that holds a preferred value",
+      );
     families.push(made);
   });
   if (!table.ok) return table;

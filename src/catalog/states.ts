@@ -18,7 +18,10 @@ export function stateOf(unit: Capacitor, key: keyof Capacitor): ValueState | { r
 }
 
 /** States named by the `measured` and `assumed` cells of a row ("capacitance; esr"); unknown names come back. */
-export function namedStates(measured: string | undefined, assumed: string | undefined): { readonly states: Record<string, ValueState>; readonly strange: readonly string[] } {
+export function namedStates(
+  measured: string | undefined,
+  assumed: string | undefined,
+): { readonly states: Record<string, ValueState>; readonly strange: readonly string[] } {
   const states: Record<string, ValueState> = {};
   const strange: string[] = [];
   const mark = (cell: string | undefined, state: ValueState): void => {

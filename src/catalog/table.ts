@@ -1,6 +1,15 @@
 // A delimited table to records by its columns: headings understood, every fault placed, a bad row costs only itself.
 
-import { accepted, nearestWord, type Place, type Read, type Refusal, refused, type Scale, unitScale } from "../quantity/index.ts";
+import {
+  accepted,
+  nearestWord,
+  type Place,
+  type Read,
+  type Refusal,
+  refused,
+  type Scale,
+  unitScale,
+} from "../quantity/index.ts";
 import { readCell } from "./cell.ts";
 import type { Column } from "./column.ts";
 import { readRecords } from "./csv.ts";
@@ -35,7 +44,12 @@ export const MOST_FAULTS = 1000;
  * Reads a table and hands over each good row, in order.
  * Refuses the whole only when nothing can be read from it: empty, binary, no heading understood, a required or repeated heading.
  */
-export function readTable(text: string, columns: readonly Column[], file: string, take: (row: Row) => void): Read<TableReport> {
+export function readTable(
+  text: string,
+  columns: readonly Column[],
+  file: string,
+  take: (row: Row) => void,
+): Read<TableReport> {
   const faults: Refusal[] = [];
   const notes: Refusal[] = [];
   let lost = 0;
@@ -66,12 +80,19 @@ export function readTable(text: string, columns: readonly Column[], file: string
   });
   if (!separated.ok) return refused(...separated.refusals.map((r) => ({ ...r, place: { file } })));
   if (fatal !== null) return refused(...(fatal as readonly Refusal[]));
-  if (bound === null) return refused({ code: "empty-file", place: { file }, read: "nothing", want: "a heading row and rows below it" });
+  if (bound === null)
+    return refused({ code: "empty-file", place: { file }, read: "nothing", want: "a heading row and rows below it" });
   for (const broken of separated.value.faults) fault(broken, broken.place);
   if (lost > 0) {
-    faults.push({ code: "more-faults", place: { file }, read: `${lost} more faults`, want: "the faults above mended first" });
+    faults.push({
+      code: "more-faults",
+      place: { file },
+      read: `${lost} more faults`,
+      want: "the faults above mended first",
+    });
   }
-  if (rowCount === 0) notes.push({ code: "no-rows", place: { file }, read: "a heading and no rows", want: "at least one row" });
+  if (rowCount === 0)
+    notes.push({ code: "no-rows", place: { file }, read: "a heading and no rows", want: "at least one row" });
   return accepted({ faults, notes, rowCount });
 }
 
@@ -122,19 +143,35 @@ function bindHeadings(
     const plain = name.trim().toLowerCase().replace(/\s+/g, " ");
     const column = columns.find((c) => c.heading === plain || c.also?.includes(plain));
     if (column === undefined) {
-      const near = nearestWord(plain, columns.map((c) => c.heading));
-      const want = near === null ? "a heading of the catalogue format; this column is passed over" : `perhaps "${near}"; this column is passed over`;
+      const near = nearestWord(
+        plain,
+        columns.map((c) => c.heading),
+      );
+      const want =
+        near === null
+          ? "a heading of the catalogue format; this column is passed over"
+          : `perhaps "${near}"; this column is passed over`;
       notes.push({ code: "unknown-heading", place, read: JSON.stringify(cell), want });
       return;
     }
     if (bound.some((b) => b.column === column)) {
-      faults.push({ code: "duplicate-heading", place, read: JSON.stringify(cell), want: `"${column.heading}" once only` });
+      faults.push({
+        code: "duplicate-heading",
+        place,
+        read: JSON.stringify(cell),
+        want: `"${column.heading}" once only`,
+      });
       return;
     }
     const scaled = headingScale(column, unit);
     if (scaled === undefined) {
       const dimension = column.type.kind === "quantity" ? column.type.dimension : "fraction";
-      faults.push({ code: "unknown-unit", place, read: JSON.stringify(cell), want: `a unit of ${dimension} in the brackets` });
+      faults.push({
+        code: "unknown-unit",
+        place,
+        read: JSON.stringify(cell),
+        want: `a unit of ${dimension} in the brackets`,
+      });
       return;
     }
     bound.push({ column, index, scale: scaled, needsUnit: scaled === null });
@@ -143,18 +180,28 @@ function bindHeadings(
     if (bound.some((b) => b.column === column)) continue;
     const seen = cells.map((c) => c.trim()).filter((c) => c !== "");
     const read = seen.length > 0 ? `headings ${seen.slice(0, 12).join(", ")}` : "no headings";
-    faults.push({ code: "missing-heading", place: { ...at, field: column.heading }, read, want: `a heading "${column.heading}"` });
+    faults.push({
+      code: "missing-heading",
+      place: { ...at, field: column.heading },
+      read,
+      want: `a heading "${column.heading}"`,
+    });
   }
   if (faults.length > 0) return refused(...faults);
   bound.sort((a, b) => columns.indexOf(a.column) - columns.indexOf(b.column));
   return accepted({ bound, notes });
 }
 
-/** Scale of bare numbers below a heading; null when only cells with their own unit are accepted, undefined for a wrong unit. */
+/**
+ * Scale of bare numbers below a heading; null when only cells with their own unit are accepted, undefined for a wrong unit.
+ * A fraction without a unit is a plain fraction (`derating` 0.85); a tolerance is not, because 20 is written as often as 0.2.
+ */
 function headingScale(column: Column, unit: string | undefined): Scale | null | undefined {
   const dimension =
     column.type.kind === "quantity" ? column.type.dimension : column.type.kind === "tolerance" ? "fraction" : null;
   if (dimension === null || dimension === "count") return { exponent: 0, factor: 1 };
-  if (unit === undefined || unit.trim() === "") return null;
+  if (unit === undefined || unit.trim() === "") {
+    return column.type.kind === "quantity" && dimension === "fraction" ? { exponent: 0, factor: 1 } : null;
+  }
   return unitScale(unit.trim(), dimension) ?? undefined;
 }
