@@ -51,6 +51,7 @@ export function findingsOf(input: FindingsInput): readonly Finding[] {
     reverse(input),
     energy(input),
     bleed(input),
+    ...hazards(input),
   ];
 }
 
@@ -188,7 +189,7 @@ function bleed({ result }: FindingsInput): Finding {
 }
 
 /** What can hurt, by the rules of the hazard layer; its own bleed finding is the one above. */
-function _hazards({ result, unit, brief }: FindingsInput): readonly Finding[] {
+function hazards({ result, unit, brief }: FindingsInput): readonly Finding[] {
   const findings = hazardFindings({
     capacitance: result.capacitance.high ?? result.capacitance.nominal,
     voltage: brief.voltage * (1 + brief.overshoot),
