@@ -1,7 +1,6 @@
 // The seeded witness of the tail: banks drawn at random and counted, in chunks that add up the same in any order.
 import { streamState } from "./random.ts";
-import type { TailCase } from "./tail.ts";
-import { lawRange, lawSteps } from "./tailLaw.ts";
+import { lawRange, lawSteps, type TailCase } from "./tailLaw.ts";
 
 export const BINS = 512;
 

@@ -16,17 +16,10 @@
  * Units are independent. What a whole lot has in common (all 5 % high) divides out of every share.
  * Source: [methods-derived] 1.3; [Galambos1996] I.1, I.3 for the bounds of a union
  */
-import { below, convolve, type Lattice, power, reciprocal, sigmasAcross, trimmed } from "./tailLattice.ts";
-import { lawMasses, lawRange, type UnitLaw } from "./tailLaw.ts";
-
-export interface TailCase {
-  readonly law: UnitLaw;
-  readonly ties: "cross-tied" | "strings";
-  readonly n: number;
-  readonly p: number;
-  /** Unit limit over bank voltage, both in V. */
-  readonly share: number;
-}
+import { LEAST_LOT, lawRange, type TailCase } from "./tailLaw.ts";
+import { lotStages } from "./tailLot.ts";
+import { type Stages, singleRisk, smoothStages, tailWindows, type Windows } from "./tailStages.ts";
+import { highestShare, pairShare } from "./tailUnion.ts";
 
 export interface Tail {
   /** Chance that any unit of the bank exceeds its limit, 0 to 1. */
@@ -44,12 +37,6 @@ const exactly = (exceed: number): Tail => ({ exceed, error: 0, unionBound: excee
 const RARE = 0.02;
 /** Fineness of the three lattices, each step half the one before. */
 const LEVELS = [1, 2, 4];
-/** At scale 1: cells of a stage's window, at least so many of a unit's, and so many to one sigma of 1/C. */
-const STAGE_CELLS = 192;
-const UNIT_CELLS = { uniform: 8, normal: 20, lot: 32 };
-/** And never more cells of 1/C than this: a lot's stray value can stand any number of sigmas off. */
-const MOST_CELLS = 400;
-const SIGMA_CELLS = 6;
 const ROUNDING = 1e-9;
 
 /** Chance that any unit exceeds `share` of the bank's voltage while charging. Call with n >= 1, p >= 1, share > 0. */
@@ -68,28 +55,6 @@ export function exceedRisk(given: TailCase): Tail {
   };
 }
 
-interface Window {
-  readonly low: number;
-  readonly high: number;
-}
-
-/** Capacitances (F) of a unit that can take part in an excess: in the stage that is over, and in the others. Null: none can. */
-function windows(given: TailCase, kappa: number): { readonly victim: Window; readonly other: Window } | null {
-  const { n, p, law } = given;
-  const { low, high } = lawRange(law);
-  const largest = 1 / (p * low);
-  const least = 1 / (p * high);
-  if (kappa * largest <= (n - 1) * least * (1 + 1e-12)) return null;
-  const stageMost = kappa / ((n - 1) * least);
-  const stageLeast = 1 / (kappa * largest - (n - 2) * least);
-  // A lot may leave a single value on one side; its window still needs a width.
-  const hair = 1e-9 * low;
-  return {
-    victim: { low, high: Math.max(low + hair, Math.min(high, stageMost - (p - 1) * low)) },
-    other: { low: Math.min(high - hair, Math.max(low, stageLeast - (p - 1) * high)), high },
-  };
-}
-
 function chainRisk(given: TailCase): Tail {
   const { n, share, law } = given;
   const { low, high } = lawRange(law);
@@ -97,145 +62,63 @@ function chainRisk(given: TailCase): Tail {
   if (high - low <= 1e-9 * low) return exactly(1 / n > share ? 1 : 0);
   if (share < 1 / n) return exactly(1);
   const kappa = (1 - share) / share;
-  const span = windows(given, kappa);
+  const span = tailWindows(given, kappa);
   if (span === null) return exactly(0);
-  const levels = LEVELS.map((scale) => stagesOn(given, span, scale));
-  const [rough, middle, fine] = levels.map((level) => singleRisk(level, kappa)) as [number, number, number];
-  // The lattice is right to the square of its step for a smooth law; a lot's values fall where they fall.
-  const smooth = law.kind !== "lot" && rough > 0;
-  const single = smooth ? extrapolated(middle, fine) : fine;
-  const before = smooth ? extrapolated(rough, middle) : middle;
-  const off = Math.abs(single - before) + ROUNDING * single;
+  const { single, off, stages } = lotSingle(given, kappa) ?? smoothSingle(given, kappa, span);
   const sum = n * single;
-  const [, coarse] = levels as [Stages, Stages, Stages];
-  const joint = sum > RARE ? highestShare(coarse, kappa, n) : pairShare(coarse, kappa, n);
+  const joint = sum > RARE ? highestShare(stages, kappa, n) : pairShare(stages, kappa, n);
   const exceed = Math.min(1, sum * joint.kept);
   return { exceed, error: n * off + sum * joint.error, unionBound: sum, unionExcess: sum - exceed };
+}
+
+interface Single {
+  /** Chance that one given stage is over, and what it may be off by. */
+  readonly single: number;
+  readonly off: number;
+  readonly stages: Stages;
+}
+
+function smoothSingle(given: TailCase, kappa: number, span: Windows): Single {
+  const levels = LEVELS.map((scale) => smoothStages(given, span, scale)) as [Stages, Stages, Stages];
+  const [rough, middle, fine] = levels.map((level) => singleRisk(level, kappa)) as [number, number, number];
+  // The lattice is right to the square of its step for a smooth law; a lot's values fall where they fall.
+  const smooth = given.law.kind !== "lot" && rough > 0;
+  const single = smooth ? extrapolated(middle, fine) : fine;
+  const before = smooth ? extrapolated(rough, middle) : middle;
+  return { single, off: Math.abs(single - before) + ROUNDING * single, stages: levels[1] };
+}
+
+/** A lot of few values, as what it is: separate values. Null when their combinations are too many. */
+function lotSingle(given: TailCase, kappa: number): Single | null {
+  const found = lotStages(given);
+  if (found === null) return null;
+  const { stages, blur } = found;
+  const single = singleRisk(stages, kappa);
+  let spread = 0;
+  for (const [k, mass] of stages.victim.masses.entries()) {
+    const value = kappa * stages.victim.values[k]!;
+    spread += mass * (stages.butOneBelow(value + blur) - stages.butOneBelow(value - blur));
+  }
+  return { single, off: spread / 2 + 1e-12 * single, stages };
 }
 
 /** A chance spans decades, so it is its logarithm that goes as the square of the step. */
 const extrapolated = (coarse: number, fine: number): number => Math.exp((4 * Math.log(fine) - Math.log(coarse)) / 3);
 
-interface Stages {
-  /** 1/C of the stage that is over, at the nodes its capacitance has. */
-  readonly victim: { readonly values: Float64Array; readonly masses: Float64Array };
-  /** 1/C of one other stage, and the sum of n - 2 and n - 1 of them. */
-  readonly other: Lattice;
-  readonly butTwo: Lattice | null;
-  readonly butOne: Lattice;
-}
+export type TailFault =
+  | "lot too small for a distribution"
+  | "capacitance not above zero"
+  | "share not above zero"
+  | "counts not whole numbers from 1";
 
-function stagesOn(given: TailCase, span: { readonly victim: Window; readonly other: Window }, scale: number): Stages {
-  const { n, p, law } = given;
-  const cells = scale * Math.max(Math.ceil(STAGE_CELLS / p), UNIT_CELLS[law.kind]);
-  const stage = ({ low, high }: Window): Lattice =>
-    power({ first: low, step: (high - low) / cells, masses: lawMasses(law, low, high, cells) }, p);
-  const over = stage(span.victim);
-  const company = stage(span.other);
-  const wide = Math.max(STAGE_CELLS / (n - 1), SIGMA_CELLS * sigmasAcross(company));
-  const other = trimmed(reciprocal(company, scale * Math.ceil(Math.min(wide, MOST_CELLS))));
-  const butTwo = n > 2 ? power(other, n - 2) : null;
-  return {
-    victim: {
-      values: over.masses.map((_, k) => 1 / (over.first + k * over.step)),
-      masses: over.masses,
-    },
-    other,
-    butTwo,
-    butOne: butTwo === null ? other : convolve(butTwo, other),
-  };
-}
-
-/** Chance that one given stage is over. */
-function singleRisk(stages: Stages, kappa: number): number {
-  const chance = below(stages.butOne);
-  let sum = 0;
-  for (const [k, mass] of stages.victim.masses.entries()) sum += mass * chance(kappa * stages.victim.values[k]!);
-  return sum;
-}
-
-interface Kept {
-  /** Share of the sum over stages that remains once a bank with two stages over counts once. */
-  readonly kept: number;
-  readonly error: number;
-}
-
-/** Points that stand for the stage that is over, where pairs or maxima of stages are summed. */
-const POINTS = 96;
-
-function victimPoints(stages: Stages): Lattice {
-  const { values, masses } = stages.victim;
-  const first = values.at(-1)!;
-  const step = (values[0]! - first) / POINTS;
-  const points = new Float64Array(POINTS + 1);
-  for (const [k, mass] of masses.entries()) {
-    const place = (values[k]! - first) / step;
-    const node = Math.min(Math.floor(place), POINTS - 1);
-    points[node]! += mass * (1 - (place - node));
-    points[node + 1]! += mass * (place - node);
-  }
-  return { first, step, masses: points };
-}
-
-function pairShare(stages: Stages, kappa: number, n: number): Kept {
-  if (stages.butTwo === null || kappa <= 1) return { kept: 1, error: 0 };
-  const chance = below(stages.butTwo);
-  const { first, step, masses } = victimPoints(stages);
-  let pairs = 0;
-  for (let i = 0; i < masses.length; i++) {
-    const x = first + i * step;
-    for (let j = 0; j <= i; j++) {
-      const y = first + j * step;
-      pairs += (i === j ? 1 : 2) * masses[i]! * masses[j]! * chance(kappa * y - x);
-    }
-  }
-  // Two at once, against the sum over stages: Bonferroni below, Hunter above.
-  const lost = ((n - 1) / 2) * (pairs / singleRisk(stages, kappa));
-  return { kept: 1 - lost, error: lost * (1 - 2 / n) };
-}
-
-/** Of the banks in which a given stage is over, those in which it is the highest. */
-function highestShare(stages: Stages, kappa: number, n: number): Kept {
-  if (stages.butTwo === null || kappa <= 1) return { kept: 1, error: 0 };
-  const { first, step, masses } = victimPoints(stages);
-  const thin = thinned(stages.other, 128);
-  const free = below(power(thin, n - 1));
-  let all = 0;
-  let highest = 0;
-  for (const [i, mass] of masses.entries()) {
-    const x = first + i * step;
-    const limit = kappa * x;
-    const chance = mass * free(limit);
-    if (chance <= 1e-7 * all) continue;
-    all += chance;
-    highest += mass * Math.min(free(limit), below(power(cutAt(thin, x), n - 1))(limit));
-  }
-  const kept = highest / all;
-  return { kept, error: 0.02 * (1 - kept) };
-}
-
-function thinned(lattice: Lattice, cells: number): Lattice {
-  if (lattice.masses.length <= cells + 1) return lattice;
-  const step = ((lattice.masses.length - 1) * lattice.step) / cells;
-  const masses = new Float64Array(cells + 1);
-  for (const [k, mass] of lattice.masses.entries()) {
-    const place = (k * lattice.step) / step;
-    const node = Math.min(Math.floor(place), cells - 1);
-    masses[node]! += mass * (1 - (place - node));
-    masses[node + 1]! += mass * (place - node);
-  }
-  return { first: lattice.first, step, masses };
-}
-
-/** The part of a lattice at or below a value; the node astride it in proportion. */
-function cutAt(lattice: Lattice, value: number): Lattice {
-  const place = (value - lattice.first) / lattice.step + 0.5;
-  const whole = Math.min(Math.max(Math.floor(place), 0), lattice.masses.length);
-  const masses = lattice.masses.slice(0, Math.min(whole + 1, lattice.masses.length));
-  if (whole < lattice.masses.length) masses[whole]! *= Math.max(0, place - whole);
-  return {
-    first: lattice.first,
-    step: lattice.step,
-    masses: masses.length > 1 ? masses : Float64Array.of(masses[0] ?? 0, 0),
-  };
+/** What keeps a case from being one at all; empty when `exceedRisk` may be asked. */
+export function tailFaults(given: TailCase): readonly TailFault[] {
+  const faults: TailFault[] = [];
+  const { law, n, p, share } = given;
+  if (law.kind === "lot" && law.values.length < LEAST_LOT) faults.push("lot too small for a distribution");
+  const { low, high } = lawRange(law);
+  if (!(low > 0 && Number.isFinite(high) && high >= low)) faults.push("capacitance not above zero");
+  if (!(share > 0)) faults.push("share not above zero");
+  if (![n, p].every((count) => Number.isInteger(count) && count >= 1)) faults.push("counts not whole numbers from 1");
+  return faults;
 }

@@ -11,6 +11,15 @@ export type UnitLaw =
   /** F; each measured value equally likely. Needs `LEAST_LOT` values to be called a distribution. */
   | { readonly kind: "lot"; readonly values: readonly number[] };
 
+export interface TailCase {
+  readonly law: UnitLaw;
+  readonly ties: "cross-tied" | "strings";
+  readonly n: number;
+  readonly p: number;
+  /** Unit limit over bank voltage, both in V. */
+  readonly share: number;
+}
+
 /** Fewer measured units than this say nothing about a tail. Common practice, no source. */
 export const LEAST_LOT = 5;
 
