@@ -44,14 +44,11 @@ export function step(slope: Slope, at: { readonly x: number; readonly h: number 
   slope(x + h / 5, trial, k2);
   for (let i = 0; i < size; i++) trial[i] = y[i]! + h * ((3 / 40) * k1[i]! + (9 / 40) * k2[i]!);
   slope(x + 0.3 * h, trial, k3);
-  for (let i = 0; i < size; i++)
-    trial[i] = y[i]! + h * ((44 / 45) * k1[i]! - (56 / 15) * k2[i]! + (32 / 9) * k3[i]!);
+  for (let i = 0; i < size; i++) trial[i] = y[i]! + h * ((44 / 45) * k1[i]! - (56 / 15) * k2[i]! + (32 / 9) * k3[i]!);
   slope(x + 0.8 * h, trial, k4);
   for (let i = 0; i < size; i++)
     trial[i] =
-      y[i]! +
-      h *
-        ((19372 / 6561) * k1[i]! - (25360 / 2187) * k2[i]! + (64448 / 6561) * k3[i]! - (212 / 729) * k4[i]!);
+      y[i]! + h * ((19372 / 6561) * k1[i]! - (25360 / 2187) * k2[i]! + (64448 / 6561) * k3[i]! - (212 / 729) * k4[i]!);
   slope(x + (8 / 9) * h, trial, k5);
   for (let i = 0; i < size; i++)
     trial[i] =

@@ -66,7 +66,14 @@ export function lampFindings(
       }),
     ),
     outOfRange(
-      atMost({ id: "lamp.width.most", value: shot.width, limit: LAW_WIDTHS.most, unit: "s", source: "lamp-faq", note: law }),
+      atMost({
+        id: "lamp.width.most",
+        value: shot.width,
+        limit: LAW_WIDTHS.most,
+        unit: "s",
+        source: "lamp-faq",
+        note: law,
+      }),
     ),
     outOfRange(
       atLeast({

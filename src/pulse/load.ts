@@ -77,7 +77,8 @@ export function checkCircuit(circuit: Circuit): Read<Circuit> {
     need("steadyCurrent", load.current, true);
     need("steadySeconds", load.seconds, true);
   }
-  const inner = load.kind === "lamp" ? checkLamp(load.lamp) : load.kind === "recorded" ? checkSamples(load.samples) : null;
+  const inner =
+    load.kind === "lamp" ? checkLamp(load.lamp) : load.kind === "recorded" ? checkSamples(load.samples) : null;
   if (inner !== null && !inner.ok) faults.push(...inner.refusals);
   return faults.length > 0 ? refused(...faults) : accepted(circuit);
 }

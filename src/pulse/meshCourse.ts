@@ -146,7 +146,8 @@ export function courseOf(m: eq.NormalMesh, oneWay: boolean, tolerance: number): 
     }
     y[eq.ROOT] = 0;
     const voltage = y[eq.VOLTAGE]!;
-    if (oneWay || Math.abs(voltage) <= m.drop || voltage * voltage < SPENT || ++halves >= MOST_HALVES) return finish(true);
+    if (oneWay || Math.abs(voltage) <= m.drop || voltage * voltage < SPENT || ++halves >= MOST_HALVES)
+      return finish(true);
     side = voltage > 0 ? 1 : -1;
     // the drop turns about with the current, which can by itself push the terminals below the clamp
     if (m.clampDrop !== null && m.outerL > 0 && eq.terminalVoltage(m, side, y) + m.clampDrop <= 0) {

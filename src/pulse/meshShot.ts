@@ -112,7 +112,10 @@ export function meshShot(mesh: Mesh, tolerance: number = FINE): Read<Shot> {
     at: (moment) => {
       const y = find(moment / time);
       const over = moment / time > end[eq.TIME]!;
-      return { current: over ? 0 : y[eq.ROOT]! * Math.abs(y[eq.ROOT]!) * current, voltage: y[eq.VOLTAGE]! * mesh.voltage };
+      return {
+        current: over ? 0 : y[eq.ROOT]! * Math.abs(y[eq.ROOT]!) * current,
+        voltage: y[eq.VOLTAGE]! * mesh.voltage,
+      };
     },
   });
 }

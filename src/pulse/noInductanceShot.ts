@@ -35,7 +35,8 @@ export function noInductanceShot(mesh: Mesh): Read<Shot> {
   const start = rootOf(lamp, resistance, voltage - drop);
   const action = capacitance * ((lamp * start ** 3) / 3 + (resistance * start ** 4) / 2);
   const lampIntegral = capacitance * ((lamp * start ** 2) / 2 + (2 * resistance * start ** 3) / 3);
-  const timeAt = (u: number): number => capacitance * (lamp * (1 / u - 1 / start) + 2 * resistance * Math.log(start / u));
+  const timeAt = (u: number): number =>
+    capacitance * (lamp * (1 / u - 1 / start) + 2 * resistance * Math.log(start / u));
   const stateAt = (time: number): { current: number; voltage: number } => {
     // halving in ln u, since the tail spans many decades
     let [low, high] = [Math.log(start) - 40, Math.log(start)];
