@@ -34,6 +34,7 @@ export { type LifeCase, type LifeRatio, lifeRatio, type Stress } from "./life.ts
 export { type BusPath, type Circuit, type Clamp, checkCircuit, IDEAL_SWITCH, type Load, type Switch } from "./load.ts";
 export { type Bounds, type PulseBank, pulseBankOf } from "./loopMesh.ts";
 export { actionToZeroOf, type Peaks, peakCurrentOf, peaksOf } from "./peaks.ts";
+export { type QuickLayout, quickBankPeak, quickPeakFactor } from "./peakTable.ts";
 export { type Discharge, type DischargeEnergy, dischargeOf } from "./pulse.ts";
 export { type Duty, type Heating, heatingOf, highestRate, rateFindings } from "./rate.ts";
 export { type RingBus, ringBus } from "./ringBus.ts";
