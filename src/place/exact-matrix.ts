@@ -29,7 +29,9 @@ export interface ExactProblem {
   /** Stop at this gap or below. */
   readonly target: number;
   /** May these units form a stage? Absent: any may. */
-  readonly allowed?: (mask: number) => boolean;
+  readonly allowed?: ((mask: number) => boolean) | undefined;
+  /** Units that must be used, as a mask; default none. */
+  readonly must?: number;
 }
 
 export interface ExactAnswer {
@@ -52,7 +54,7 @@ const unitsOf = (mask: number): number[] => Array.from({ length: MOST_UNITS }, (
 
 /** Gives the gap in hand now and then; the answer at the end. */
 export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<number, ExactAnswer> {
-  const { values, stages, size, allowed } = problem;
+  const { values, stages, size, allowed, must = 0 } = problem;
   const units = values.length;
   const all = subsetBuilder(units, size).fill(values, units, size);
   let count = all.counts[size]!;
@@ -82,6 +84,7 @@ export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<num
   const record = (): void => {
     const found = stageGap(chosen, stages);
     if (found >= gap) return;
+    if (must !== 0 && (held.reduce((all, mask) => all | mask, 0) & must) !== must) return;
     gap = found;
     best = Array.from(held, unitsOf);
   };

@@ -1,0 +1,3 @@
+// What the layers above may use of quantity.
+export * from "./finding.ts";
+export * from "./refusal.ts";
