@@ -1,0 +1,134 @@
+// Finds the cheapest blend and proves it, or says how far the best one found may be from it when told to stop.
+import { type Ascent, ascendCost, ascendFeasibility, ascendFrom } from "./ascent.ts";
+import { buildCore, standing, survivingOptions } from "./core.ts";
+import { BOUND_SLACK, type Multipliers, wholeBound } from "./dual.ts";
+import { isFittingBlend, tidyCounts } from "./evaluate.ts";
+import type { BlendCount, BlendModel } from "./model.ts";
+import { buildPool, type Pool, stringsToReach } from "./pool.ts";
+import { type Budget, walkCore } from "./walk.ts";
+
+export interface BlendLimits {
+  /** Most steps of work; a step is one look at one option, well under a microsecond. Absent: no limit. */
+  readonly work?: number;
+  /** Asked every thousand steps or so; true ends the search. */
+  readonly stop?: () => boolean;
+}
+
+export interface FoundBlend {
+  readonly counts: readonly BlendCount[];
+  /** Whole minor units of money. */
+  readonly cost: number;
+}
+
+export interface BlendAnswer {
+  /** `stopped` means that `best` may not be the cheapest, or that a blend may exist where none was found. */
+  readonly status: "optimal" | "infeasible" | "stopped";
+  readonly best: FoundBlend | null;
+  /** No blend costs less than this; Infinity when none exists. */
+  readonly lowerBound: number;
+  /** (cost - lowerBound)/cost; 0 when proven, null when nothing was found. */
+  readonly gap: number | null;
+  /** Prices behind the bound: of the cost, or (cost = 0) those that prove that no blend exists. */
+  readonly prices: Multipliers;
+  /** Steps of work spent, and the size of the last core walked. */
+  readonly work: number;
+  readonly coreOptions: number;
+  readonly corePairs: number;
+}
+
+/** Thresholds rise from the bound by this fraction of it, then four times as far each time. */
+const FIRST_RISE = 0.002;
+const RISE = 4;
+/** After so many rises without a blend, everything is searched. */
+const MOST_RISES = 5;
+/** With so few options left under the best blend known, no rising threshold is needed. */
+const FEW_OPTIONS = 24;
+
+export const NO_PRICES: Multipliers = { cost: 1, capacity: 0, volume: 0, mass: 0, units: 0 };
+
+/** Cheapest bank of one string type, or null. */
+export function bestSingle(model: BlendModel, pool: Pool): FoundBlend | null {
+  let best: FoundBlend | null = null;
+  for (let k = 0; k < pool.size; k += 1) {
+    const strings = stringsToReach(1, pool.capacity[k]!);
+    if (strings > pool.most[k]!) continue;
+    const from = model.options[pool.option[k]!]!;
+    if (best !== null && from.floor && from.floor.fixed + from.floor.perString * strings >= best.cost) continue;
+    const cost = from.costs[strings]!;
+    if (best !== null && cost >= best.cost) continue;
+    const counts = [{ option: pool.option[k]!, strings }];
+    if (isFittingBlend(model, counts)) best = { counts, cost };
+  }
+  return best;
+}
+
+/** One more than any blend can cost. */
+function beyondAnyCost(model: BlendModel, pool: Pool): number {
+  const dearest = Array.from({ length: pool.size }, (_, k) => model.options[pool.option[k]!]!.costs[pool.most[k]!]!);
+  dearest.sort((a, b) => b - a);
+  return dearest.slice(0, model.maxTypes).reduce((sum, cost) => sum + cost, 0) + 1;
+}
+
+/** The cheapest blend of `model`, which must be sound (see `blendModelFaults`). */
+export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAnswer {
+  const budget: Budget = { spent: 0, most: limits.work ?? Number.POSITIVE_INFINITY, stop: limits.stop ?? (() => false) };
+  const pool = buildPool(model, null, false);
+  let best = bestSingle(model, pool);
+  let core = { options: 0, pairs: 0 };
+  let lower = 0;
+  let ascent: Ascent = { prices: NO_PRICES, value: 0 };
+  const answer = (status: BlendAnswer["status"], prices = ascent.prices): BlendAnswer => ({
+    status,
+    best,
+    lowerBound: status === "optimal" ? best!.cost : status === "infeasible" ? Number.POSITIVE_INFINITY : lower,
+    gap: best === null ? null : status === "optimal" || best.cost === 0 ? 0 : (best.cost - lower) / best.cost,
+    prices,
+    work: budget.spent,
+    coreOptions: core.options,
+    corePairs: core.pairs,
+  });
+
+  const reach = best === null ? ascendFeasibility(pool, model.maxTypes) : null;
+  if (reach !== null && reach.value > 1e-9) return answer("infeasible", reach.prices);
+  ascent = ascendCost(pool, model.maxTypes, best === null ? Number.POSITIVE_INFINITY : best.cost - 1 + 2 * BOUND_SLACK);
+  lower = Math.max(0, wholeBound(ascent.value));
+  const at = standing(pool, ascent.prices, model.maxTypes);
+  let ceiling = best === null ? Number.POSITIVE_INFINITY : best.cost;
+  let rise = Math.max(1, Math.ceil(FIRST_RISE * lower));
+  for (let round = 0; lower < ceiling; round += 1) {
+    if (ceiling === Number.POSITIVE_INFINITY && round >= MOST_RISES) ceiling = beyondAnyCost(model, pool);
+    let threshold = Math.min(ceiling, lower + rise);
+    let options = survivingOptions(pool, at, threshold);
+    if (threshold < ceiling && (round >= MOST_RISES || ceiling < Number.POSITIVE_INFINITY)) {
+      const all = survivingOptions(pool, at, ceiling);
+      if (round >= MOST_RISES || all.length <= FEW_OPTIONS) {
+        threshold = ceiling;
+        options = all;
+      }
+    }
+    rise *= RISE;
+    const near = buildPool(model, options, true);
+    const closer = ascendFrom(near, model.maxTypes, ascent.prices, threshold - 1 + 2 * BOUND_SLACK, 16);
+    lower = Math.max(lower, Math.min(threshold, wholeBound(closer.value)));
+    if (lower >= threshold) continue;
+    const left = buildCore(model, near, closer.value >= ascent.value ? closer.prices : ascent.prices, threshold);
+    core = { options: left.columns.length, pairs: left.pairs };
+    let met = false;
+    const complete = walkCore({
+      core: left,
+      threshold,
+      feasibility: reach?.prices ?? null,
+      budget,
+      found: (counts, cost) => {
+        if ((best !== null && cost >= best.cost) || !isFittingBlend(model, counts)) return Math.min(threshold, best?.cost ?? threshold);
+        best = { counts: tidyCounts(counts), cost };
+        met = true;
+        return cost;
+      },
+    });
+    if (!complete) return answer("stopped");
+    if (met) return answer("optimal");
+    lower = threshold;
+  }
+  return answer(best === null ? "infeasible" : "optimal");
+}
