@@ -113,18 +113,30 @@ export function optionOf(part: InventedPart, most: number, partIndex: number): B
   return { capacity, volume, mass, units: series, maxStrings: costs.length - 1, costs, partIndex };
 }
 
-/** A bank picked by cost per farad, for the size of the ceilings; it may fall short. */
+/** What the `maxTypes` largest options bring together: a need above it would be trivially out of reach. */
+function mostCapacity(options: readonly BlendOption[], maxTypes: number): number {
+  const each = options.map((o) => o.capacity * o.maxStrings).sort((a, b) => b - a);
+  return each.slice(0, maxTypes).reduce((sum, value) => sum + value, 0);
+}
+
+/** A bank picked by cost per farad among options that bring their part of what is missing, for the size of the ceilings. */
 function greedy(options: readonly BlendOption[], need: number, maxTypes: number) {
-  const rate = (o: BlendOption): number => o.costs[o.maxStrings]! / (o.capacity * o.maxStrings);
-  const order = options.filter((o) => o.maxStrings > 0).sort((a, b) => rate(a) - rate(b));
-  const sum = { capacity: 0, volume: 0, mass: 0, types: 0 };
-  for (const o of order) {
-    if (sum.capacity >= need || sum.types >= maxTypes) break;
-    const x = Math.min(o.maxStrings, Math.ceil((need - sum.capacity) / o.capacity));
-    sum.capacity += x * o.capacity;
-    sum.volume += x * o.volume;
-    sum.mass += x * o.mass;
-    sum.types += 1;
+  const all = (o: BlendOption): number => o.capacity * o.maxStrings;
+  const rate = (o: BlendOption): number => o.costs[o.maxStrings]! / all(o);
+  const left = new Set(options.filter((o) => o.maxStrings > 0));
+  const sum = { capacity: 0, volume: 0, mass: 0 };
+  for (let slots = maxTypes; slots > 0 && sum.capacity < need && left.size > 0; slots -= 1) {
+    const share = (need - sum.capacity) / slots;
+    const able = [...left].filter((o) => all(o) >= share);
+    const pick =
+      able.length > 0
+        ? able.reduce((a, b) => (rate(b) < rate(a) ? b : a))
+        : [...left].reduce((a, b) => (all(b) > all(a) ? b : a));
+    const x = Math.min(pick.maxStrings, Math.ceil((need - sum.capacity) / pick.capacity));
+    sum.capacity += x * pick.capacity;
+    sum.volume += x * pick.volume;
+    sum.mass += x * pick.mass;
+    left.delete(pick);
   }
   return sum;
 }
@@ -144,12 +156,14 @@ export function inventInstance(recipe: Recipe): Instance {
     parts.push(part);
     options.push(optionOf(part, Math.min(most, Math.ceil(requirement / part.capacity)), k));
   }
-  const bank = greedy(options, requirement, maxTypes);
+  const reach = mostCapacity(options, maxTypes);
+  const within = reach > 0 ? Math.min(requirement, 0.85 * reach) : requirement;
+  const bank = greedy(options, within, maxTypes);
   const factor = recipe.ceiling ?? 1;
   const ceilings = {
     volume: bank.volume * (0.75 + 0.9 * random()) * factor,
     mass: bank.mass * (0.75 + 0.9 * random()) * factor,
     units: Number.POSITIVE_INFINITY,
   };
-  return { model: { options, requirement, ceilings, maxTypes }, parts };
+  return { model: { options, requirement: within, ceilings, maxTypes }, parts };
 }

@@ -1,5 +1,6 @@
 // Finds good prices for the Lagrangian bound: bisection on the price of capacity, then an ellipsoid over all prices.
 import { type DualPoint, dualPoint, evaluateDual, type Multipliers } from "./dual.ts";
+import { climb as climbEllipsoid, type Hill } from "./ellipsoid.ts";
 import type { Pool } from "./pool.ts";
 
 export interface Ascent {
@@ -16,7 +17,7 @@ interface Climb {
   readonly enough: number;
 }
 
-const pricesFrom = (weight: 0 | 1, at: ArrayLike<number>): Multipliers => ({
+export const pricesFrom = (weight: 0 | 1, at: ArrayLike<number>): Multipliers => ({
   cost: weight,
   capacity: at[0]!,
   volume: at[1]!,
@@ -71,58 +72,20 @@ function dearest(pool: Pool): number {
   return high;
 }
 
-/** Deep-cut ellipsoid from `centre` (4 prices) over the rows in `live`; keeps the best value seen. */
-function climbEllipsoid(climb: Climb, from: ArrayLike<number>, radius: number, live: readonly number[], steps: number): Ascent {
-  const n = live.length;
-  const at = Float64Array.from(from);
-  const shape = new Float64Array(n * n);
-  for (let i = 0; i < n; i += 1) shape[i * n + i] = radius * radius;
-  const cut = new Float64Array(n);
-  const pull = new Float64Array(n);
-  let best: Ascent = { prices: pricesFrom(climb.weight, at), value: Number.NEGATIVE_INFINITY };
-  for (let step = 0; step < steps; step += 1) {
-    let negative = -1;
-    for (let i = 0; i < n; i += 1) if (at[live[i]!]! < 0 && (negative < 0 || at[live[i]!]! < at[live[negative]!]!)) negative = i;
-    let shortfall: number;
-    if (negative >= 0) {
-      cut.fill(0);
-      cut[negative] = 1;
-      shortfall = -at[live[negative]!]!;
-    } else {
-      evaluateDual(climb.pool, pricesFrom(climb.weight, at), climb.maxTypes, climb.point);
-      if (climb.point.value > best.value) best = { prices: pricesFrom(climb.weight, at), value: climb.point.value };
-      if (best.value >= climb.enough) return best;
-      for (let i = 0; i < n; i += 1) cut[i] = climb.point.slope[live[i]!]!;
-      shortfall = best.value - climb.point.value;
-    }
-    let length = 0;
-    for (let i = 0; i < n; i += 1) {
-      let sum = 0;
-      for (let j = 0; j < n; j += 1) sum += shape[i * n + j]! * cut[j]!;
-      pull[i] = sum;
-      length += sum * cut[i]!;
-    }
-    length = Math.sqrt(Math.max(0, length));
-    if (negative < 0 && length <= Math.max(0.2 * climb.weight, 1e-7 * Math.abs(best.value))) break;
-    const depth = length === 0 ? 1 : shortfall / length;
-    if (depth >= 1) break;
-    if (n === 1) {
-      const half = Math.sqrt(shape[0]!);
-      const edge = at[live[0]!]! + Math.sign(cut[0]!) * half;
-      const inner = at[live[0]!]! + Math.sign(cut[0]!) * depth * half;
-      at[live[0]!] = (edge + inner) / 2;
-      shape[0] = ((edge - inner) / 2) ** 2;
-      continue;
-    }
-    const move = (1 + n * depth) / (n + 1) / length;
-    for (let i = 0; i < n; i += 1) at[live[i]!] = at[live[i]!]! + move * pull[i]!;
-    const grow = ((n * n) / (n * n - 1)) * (1 - depth * depth);
-    const shrink = (2 * (1 + n * depth)) / ((n + 1) * (1 + depth)) / (length * length);
-    for (let i = 0; i < n; i += 1) {
-      for (let j = 0; j < n; j += 1) shape[i * n + j] = grow * (shape[i * n + j]! - shrink * pull[i]! * pull[j]!);
-    }
-  }
-  return best;
+const hillOf = (climb: Climb, live: readonly number[]): Hill => ({
+  look: (at, slope) => {
+    evaluateDual(climb.pool, pricesFrom(climb.weight, at), climb.maxTypes, climb.point);
+    slope.set(climb.point.slope);
+    return climb.point.value;
+  },
+  live,
+  enough: climb.enough,
+  fine: climb.weight === 1 ? 0.2 : 1e-9,
+});
+
+function climbFrom(climb: Climb, from: readonly number[], radius: number, live: readonly number[], steps: number): Ascent {
+  const top = climbEllipsoid(hillOf(climb, live), from, radius, steps);
+  return { prices: pricesFrom(climb.weight, top.at), value: top.value };
 }
 
 /** Prices whose bound on the cost is as high as was found; never below 0, and it stops early at `enough`. */
@@ -136,7 +99,7 @@ export function ascendCost(pool: Pool, maxTypes: number, enough: number): Ascent
   let radius = 2 * first.at + 1;
   for (let round = 0; round < 3; round += 1) {
     const p = best.prices;
-    const next = climbEllipsoid(climb, [p.capacity, p.volume, p.mass, p.units], radius, live, 45 * live.length);
+    const next = climbFrom(climb, [p.capacity, p.volume, p.mass, p.units], radius, live, 45 * live.length);
     if (next.value <= best.value + Math.max(0.5, 1e-6 * best.value)) return next.value > best.value ? next : best;
     best = next;
     if (best.value >= enough) break;
@@ -151,7 +114,7 @@ export function ascendFrom(pool: Pool, maxTypes: number, known: Multipliers, eno
   const live = [0, ...liveRows(pool)];
   const from = [known.capacity, known.volume, known.mass, known.units];
   const radius = 0.3 * (known.capacity + known.volume + known.mass + known.units) + 1;
-  return climbEllipsoid(climb, from, radius, live, steps * live.length);
+  return climbFrom(climb, from, radius, live, steps * live.length);
 }
 
 /**
@@ -160,9 +123,9 @@ export function ascendFrom(pool: Pool, maxTypes: number, known: Multipliers, eno
  */
 export function ascendFeasibility(pool: Pool, maxTypes: number): Ascent {
   const climb: Climb = { pool, maxTypes, weight: 0, point: dualPoint(), enough: 1e-9 };
-  const start = climbEllipsoid(climb, [1, 0, 0, 0], 0, [], 1);
+  const start = climbFrom(climb, [1, 0, 0, 0], 0, [], 1);
   const live = liveRows(pool);
   if (live.length === 0 || start.value > 1e-9) return start;
-  const next = climbEllipsoid(climb, [1, 0.2, 0.2, 0.2].map((p, i) => (i === 0 || live.includes(i) ? p : 0)), 2, live, 40 * live.length);
+  const next = climbFrom(climb, [1, 0.2, 0.2, 0.2].map((p, i) => (i === 0 || live.includes(i) ? p : 0)), 2, live, 40 * live.length);
   return next.value > start.value ? next : start;
 }

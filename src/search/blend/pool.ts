@@ -34,17 +34,22 @@ export function stringsToReach(need: number, each: number): number {
   return count;
 }
 
+/** Most whole strings under a ceiling, settled by multiplication. */
+function stringsUnder(room: number, each: number): number {
+  if (each === 0 || room === Number.POSITIVE_INFINITY) return Number.POSITIVE_INFINITY;
+  let count = Math.floor(room / each);
+  while (count > 0 && count * each > room) count -= 1;
+  while ((count + 1) * each <= room) count += 1;
+  return count;
+}
+
 /** Most strings of the option that could ever be of use. */
 export function usefulStrings(model: BlendModel, option: BlendOption): number {
-  let most = Math.min(option.maxStrings, stringsToReach(capacityNeeded(model.requirement), option.capacity));
-  for (const name of CEILING_NAMES) {
-    const room = roomUnder(model.ceilings[name]);
-    const each = option[name];
-    if (each === 0 || room === Number.POSITIVE_INFINITY) continue;
-    most = Math.min(most, Math.floor(room / each));
-    if ((most + 1) * each <= room && most < option.maxStrings) most += 1;
-  }
-  return Math.max(0, Math.min(most, option.maxStrings, stringsToReach(capacityNeeded(model.requirement), option.capacity)));
+  return Math.min(
+    option.maxStrings,
+    stringsToReach(capacityNeeded(model.requirement), option.capacity),
+    ...CEILING_NAMES.map((name) => stringsUnder(roomUnder(model.ceilings[name]), option[name])),
+  );
 }
 
 /** Corners of the lower convex hull of costs[1..most]. */

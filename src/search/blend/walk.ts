@@ -1,5 +1,5 @@
 // Walks depth first through the blends of a core that cost less than a threshold, pruned by three bounds.
-import { buildCapacityBound, type CapacityBound, stepsFor, stepsWithin } from "./capacityBound.ts";
+import { type CapacityBound, stepsFor } from "./capacityBound.ts";
 import type { Core } from "./core.ts";
 import { BOUND_SLACK, type Multipliers } from "./dual.ts";
 import type { BlendCount } from "./model.ts";
@@ -21,19 +21,20 @@ export interface Walk {
   /** Told of every blend found; answers the threshold from then on. Costs are as tabulated. */
   readonly found: (counts: readonly BlendCount[], cost: number) => number;
   readonly budget: Budget;
+  /** Counts capacity in steps; null before it is worth its making. */
+  readonly bound: CapacityBound | null;
+  /** Most work for this walk. */
+  readonly most: number;
 }
 
-/** Work after which the capacity bound is built, then built finer. */
-const BOUND_STAGES = [
-  { after: 4_000, effort: 4e6 },
-  { after: 200_000, effort: 1e8 },
-] as const;
+/** `capped` when the walk used up its own share, `stopped` when the budget of the whole search ended. */
+export type WalkEnd = "complete" | "capped" | "stopped";
 
 const TINY = 1e-12;
 
-/** Walks the whole core; false when the budget ended first. */
-export function walkCore(walk: Walk): boolean {
-  const { core, budget } = walk;
+/** Walks the core. */
+export function walkCore(walk: Walk): WalkEnd {
+  const { core, budget, bound } = walk;
   const { columns, prices } = core;
   const count = columns.length;
   const offset = prices.capacity - prices.volume - prices.mass - prices.units;
@@ -43,10 +44,8 @@ export function walkCore(walk: Walk): boolean {
   const path: BlendCount[] = [];
   const parts: number[] = [];
   let limit = walk.threshold - 1 + BOUND_SLACK;
-  let bound: CapacityBound | null = null;
-  let stage = 0;
   let own = 0;
-  let ended = false;
+  let end: WalkEnd = "complete";
 
   const best = (from: number, types: number): number => negative[Math.min(count, from + types)]! - negative[Math.min(count, from)]!;
 
@@ -57,13 +56,8 @@ export function walkCore(walk: Walk): boolean {
   const spend = (): void => {
     own += 1;
     budget.spent += 1;
-    if (budget.spent >= budget.most || ((budget.spent & 1023) === 0 && budget.stop())) ended = true;
-    const next = BOUND_STAGES[stage];
-    if (next && own > next.after) {
-      const steps = stepsWithin(core, next.effort);
-      if (bound === null || steps > 1.5 * bound.steps) bound = buildCapacityBound(core, steps);
-      stage += 1;
-    }
+    if (budget.spent >= budget.most || ((budget.spent & 1023) === 0 && budget.stop())) end = "stopped";
+    else if (own >= walk.most) end = "capped";
   };
 
   const explore = (from: number, left: number, cost: number, got: number, volume: number, mass: number, units: number, reduced: number): void => {
@@ -73,7 +67,7 @@ export function walkCore(walk: Walk): boolean {
       const after = offset + reduced + best(i + 1, left - 1);
       if (after + column.reduced[0]! > limit) return;
       spend();
-      if (ended) return;
+      if (end !== "complete") return;
       if (parts.includes(column.part)) continue;
       const alone = stringsToReach(need, column.capacity);
       if (alone <= column.most) {
@@ -104,20 +98,20 @@ export function walkCore(walk: Walk): boolean {
         const c = cost + column.costs[x]!;
         if (bound !== null) {
           const rest = bound.table[bound.row(i + 1, left - 1) + stepsFor(bound, 1 - g)]!;
-          if (c + rest - prices.volume * (1 - v) - prices.mass * (1 - w) - prices.units * (1 - u) > limit) continue;
+          if (c + rest - bound.prices.volume * (1 - v) - bound.prices.mass * (1 - w) - bound.prices.units * (1 - u) > limit) continue;
         }
         path.push({ option: column.option, strings: x });
         parts.push(column.part);
         explore(i + 1, left - 1, c, g, v, w, u, reduced + column.reduced[at]!);
         path.pop();
         parts.pop();
-        if (ended) return;
+        if (end !== "complete") return;
       }
     }
   };
 
   explore(0, core.maxTypesHere, 0, 0, 0, 0, 0, 0);
-  return !ended;
+  return end;
 }
 
 /** Sums of the columns' least reduced costs where below 0, in the core's order. */
