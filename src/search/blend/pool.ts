@@ -26,9 +26,13 @@ export interface Pool {
   readonly hullCost: Float64Array;
 }
 
+/** Above this no table reaches, and neighbouring counts would soon be one number. */
+const MOST_COUNT = 2 ** 31;
+
 /** Least count of `each` that reaches `need`, settled by multiplication, not by the rounded quotient. */
 export function stringsToReach(need: number, each: number): number {
   let count = Math.max(0, Math.ceil(need / each));
+  if (count > MOST_COUNT) return count;
   while (count > 0 && (count - 1) * each >= need) count -= 1;
   while (count * each < need) count += 1;
   return count;
@@ -38,6 +42,7 @@ export function stringsToReach(need: number, each: number): number {
 function stringsUnder(room: number, each: number): number {
   if (each === 0 || room === Number.POSITIVE_INFINITY) return Number.POSITIVE_INFINITY;
   let count = Math.floor(room / each);
+  if (count > MOST_COUNT) return count;
   while (count > 0 && count * each > room) count -= 1;
   while ((count + 1) * each <= room) count += 1;
   return count;
