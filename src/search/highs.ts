@@ -42,7 +42,9 @@ const load = (): Promise<Engine> => {
 /** Minimises the programme. Never throws for what the programme holds. */
 export async function solveWithHighs(program: Program, limits: HighsLimits = {}): Promise<HighsAnswer> {
   if (program.columns.length === 0) {
-    return isProgramPoint(program, []) ? { status: "optimal", values: [], cost: 0, bound: 0 } : { status: "infeasible" };
+    return isProgramPoint(program, [])
+      ? { status: "optimal", values: [], cost: 0, bound: 0 }
+      : { status: "infeasible" };
   }
   const highs = await load();
   const model = highs.createModel();
@@ -61,7 +63,8 @@ export async function solveWithHighs(program: Program, limits: HighsLimits = {})
     const whole = program.columns.some((column) => column.whole);
     const bound = Number(model.info.get(whole ? "mip_dual_bound" : "objective_function_value"));
     const values = status === 7 || status === 13 ? checked(program, model.getSolution().colValue) : null;
-    if (status === 7 && values !== null) return { status: "optimal", values, cost: programCost(program, values), bound };
+    if (status === 7 && values !== null)
+      return { status: "optimal", values, cost: programCost(program, values), bound };
     const why = status === 7 ? "check" : status === 13 ? "time" : "engine";
     return { status: "unknown", why, values, bound: why === "time" && Number.isFinite(bound) ? bound : null };
   } finally {
@@ -95,7 +98,14 @@ function modelData(program: Program, sense: Engine["constants"]["objectiveSense"
     colUpper: program.columns.map((column) => column.most),
     rowLower: program.rows.map((row) => row.least),
     rowUpper: program.rows.map((row) => row.most),
-    matrix: { format: "csr" as const, numRows: program.rows.length, numCols: program.columns.length, starts, indices, values },
+    matrix: {
+      format: "csr" as const,
+      numRows: program.rows.length,
+      numCols: program.columns.length,
+      starts,
+      indices,
+      values,
+    },
     integrality: program.columns.map((column) => (column.whole ? (1 as const) : (0 as const))),
   };
 }

@@ -13,7 +13,8 @@
 // - it reports no proof: a linear optimum counts only with dual prices that reach the same cost; a whole-number one is a claim.
 // It cannot be interrupted: callers that need to stop it run it in a worker. Large programmes are refused.
 import engine, { type Model as EngineModel } from "javascript-lp-solver";
-import { isProgramPoint, type Program, programCost, type ProgramRow, relaxed, roundedValues } from "./blend/program.ts";
+import { isProgramPoint, type Program, programCost, relaxed, roundedValues } from "./blend/program.ts";
+import { type Scaled, type ScaledRow, scaleProgram } from "./blend/programScale.ts";
 
 export interface SolveLimits {
   /** Engine time, ms; needs `clock`, for the engine does not tell when it gave up. */
@@ -53,64 +54,6 @@ export type LinearAnswer =
 const solver = engine as unknown as { readonly Solve: (model: EngineModel) => unknown };
 
 const DEFAULT_COLUMNS = 250;
-/** Scaled terms outside this range would drown in the engine's absolute 1e-8. */
-const SMALLEST_TERM = 1e-6;
-const LARGEST_TERM = 1e6;
-
-/** A row as `sum >= limit`, divided so that its limit (or, at 0, its largest term) is 1. */
-interface ScaledRow {
-  readonly terms: readonly (readonly [number, number])[];
-  readonly limit: number;
-  /** The row it came from, and what one unit of its limit is worth here. */
-  readonly from: number;
-  readonly factor: number;
-}
-
-interface Scaled {
-  readonly rows: readonly ScaledRow[];
-  /** Column values are multiplied by this for the engine. */
-  readonly stretch: readonly number[];
-  readonly costs: readonly number[];
-  readonly costScale: number;
-}
-
-/** Rows of one direction, bounds included, scaled; null when a row without terms cannot hold; "scale" when too wide. */
-function scale(program: Program): Scaled | null | "scale" {
-  const halves: { terms: readonly (readonly [number, number])[]; limit: number; from: number; sign: number }[] = [];
-  const half = (row: ProgramRow, from: number, sign: number, limit: number): void => {
-    if (Math.abs(limit) !== Number.POSITIVE_INFINITY) halves.push({ terms: row.terms, limit, from, sign });
-  };
-  program.rows.forEach((row, at) => {
-    half(row, at, 1, row.least);
-    half(row, at, -1, row.most);
-  });
-  program.columns.forEach(({ most }, at) => {
-    if (most < Number.POSITIVE_INFINITY) halves.push({ terms: [[at, 1]], limit: most, from: -1, sign: -1 });
-  });
-  const largest = new Array<number>(program.columns.length).fill(0);
-  const rows: ScaledRow[] = [];
-  for (const { terms, limit, from, sign } of halves) {
-    const live = terms.filter(([, value]) => value !== 0);
-    if (live.length === 0) {
-      if (sign * limit > 0) return null;
-      continue;
-    }
-    const size = limit !== 0 ? Math.abs(limit) : Math.max(...live.map(([, value]) => Math.abs(value)));
-    const factor = sign / size;
-    rows.push({ terms: live.map(([at, value]) => [at, value * factor]), limit: limit * factor, from, factor });
-    if (from >= 0) for (const [at, value] of live) largest[at] = Math.max(largest[at]!, Math.abs(value * factor));
-  }
-  const stretch = program.columns.map(({ whole }, at) => (whole || largest[at] === 0 ? 1 : largest[at]!));
-  const fitted = rows.map((row) => ({ ...row, terms: row.terms.map(([at, value]) => [at, value / stretch[at]!] as const) }));
-  const costs = program.columns.map(({ cost }, at) => cost / stretch[at]!);
-  const costScale = Math.max(1e-300, ...costs.map(Math.abs));
-  for (const { terms, from } of fitted) {
-    if (from < 0) continue;
-    for (const [, value] of terms) if (Math.abs(value) < SMALLEST_TERM || Math.abs(value) > LARGEST_TERM) return "scale";
-  }
-  return { rows: fitted, stretch, costs, costScale };
-}
-
 interface EngineAnswer {
   readonly feasible: boolean;
   readonly bounded: boolean;
@@ -142,7 +85,14 @@ function runEngine({ costs, rows, whole, milliseconds }: EngineTask): EngineAnsw
     constraints,
     variables,
     ...(Object.keys(ints).length === 0 ? {} : { ints }),
-    options: { presolve: false, useIncremental: false, useMIRCuts: false, exitOnCycles: true, tolerance: 0, ...(milliseconds === undefined ? {} : { timeout: milliseconds }) },
+    options: {
+      presolve: false,
+      useIncremental: false,
+      useMIRCuts: false,
+      exitOnCycles: true,
+      tolerance: 0,
+      ...(milliseconds === undefined ? {} : { timeout: milliseconds }),
+    },
   }) as Readonly<Record<string, unknown>>;
   const values = costs.map((_, at) => {
     const value = answer[`v${at}`];
@@ -151,23 +101,33 @@ function runEngine({ costs, rows, whole, milliseconds }: EngineTask): EngineAnsw
   return { feasible: answer.feasible === true, bounded: answer.bounded !== false, values };
 }
 
-const tooMany = (program: Program, limits: SolveLimits): boolean => program.columns.length > (limits.mostColumns ?? DEFAULT_COLUMNS);
+const tooMany = (program: Program, limits: SolveLimits): boolean =>
+  program.columns.length > (limits.mostColumns ?? DEFAULT_COLUMNS);
 
 /** A whole-number programme. The answer is a claim: compare it with another engine's. */
 export function solveWhole(program: Program, limits: SolveLimits = {}): WholeAnswer {
   if (tooMany(program, limits)) return { status: "unknown", why: "size" };
-  const scaled = scale(program);
+  const scaled = scaleProgram(program);
   if (scaled === "scale") return { status: "unknown", why: "scale" };
   if (scaled === null) return { status: "claimed infeasible" };
   const { milliseconds, clock } = limits;
   // Without a clock a time-out could not be told from an answer, so none is set.
   const timed = milliseconds !== undefined && clock !== undefined && milliseconds > 0;
   const start = clock?.() ?? 0;
-  const answer = runEngine({ costs: scaled.costs, rows: scaled.rows, whole: program.columns.map((c) => c.whole), milliseconds: timed ? milliseconds : undefined });
+  const answer = runEngine({
+    costs: scaled.costs,
+    rows: scaled.rows,
+    whole: program.columns.map((c) => c.whole),
+    milliseconds: timed ? milliseconds : undefined,
+  });
   if (timed && (clock?.() ?? 0) - start >= 0.95 * milliseconds) return { status: "unknown", why: "time" };
   if (!answer.feasible) return { status: "claimed infeasible" };
-  const values = roundedValues(program, answer.values.map((value, at) => value / scaled.stretch[at]!));
-  if (!answer.bounded || values === null || !isProgramPoint(program, values)) return { status: "unknown", why: "check" };
+  const values = roundedValues(
+    program,
+    answer.values.map((value, at) => value / scaled.stretch[at]!),
+  );
+  if (!answer.bounded || values === null || !isProgramPoint(program, values))
+    return { status: "unknown", why: "check" };
   return { status: "claimed", values, cost: programCost(program, values) };
 }
 
@@ -175,7 +135,7 @@ export function solveWhole(program: Program, limits: SolveLimits = {}): WholeAns
 export function solveLinear(whole: Program, limits: SolveLimits = {}): LinearAnswer {
   const program = relaxed(whole);
   if (tooMany(program, limits)) return { status: "unknown", why: "size" };
-  const scaled = scale(program);
+  const scaled = scaleProgram(program);
   if (scaled === "scale") return { status: "unknown", why: "scale" };
   if (scaled === null) return { status: "infeasible", missing: 1 };
   const costs = scaled.costs.map((cost) => cost / scaled.costScale);
@@ -188,7 +148,8 @@ export function solveLinear(whole: Program, limits: SolveLimits = {}): LinearAns
   const cost = programCost(program, values);
   const bound = scaled.costScale * scaled.rows.reduce((sum, row, at) => sum + row.limit * duals[at]!, 0);
   // The engine hands out values rounded to 1e-8, so the scaled costs cannot agree more closely than some of those.
-  if (Math.abs(cost - bound) > 1e-6 * Math.abs(cost) + 1e-7 * scaled.costScale) return { status: "unknown", why: "check" };
+  if (Math.abs(cost - bound) > 1e-6 * Math.abs(cost) + 1e-7 * scaled.costScale)
+    return { status: "unknown", why: "check" };
   const prices = new Array<number>(program.rows.length).fill(0);
   scaled.rows.forEach(({ from, factor }, at) => {
     if (from >= 0) prices[from] = prices[from]! + duals[at]! * factor * scaled.costScale;

@@ -3,7 +3,10 @@ import { capacityNeeded, isFittingBlend, roomUnder } from "../../src/search/blen
 import type { BlendCount, BlendModel } from "../../src/search/blend/model.ts";
 
 /** Least cost over all fitting blends, or null. `visit` sees every blend that has no string to spare in its last option. */
-export function bruteForce(model: BlendModel, visit?: (counts: readonly BlendCount[], cost: number) => void): number | null {
+export function bruteForce(
+  model: BlendModel,
+  visit?: (counts: readonly BlendCount[], cost: number) => void,
+): number | null {
   const { options, maxTypes, ceilings } = model;
   const need = capacityNeeded(model.requirement);
   let best: number | null = null;
@@ -24,7 +27,14 @@ export function bruteForce(model: BlendModel, visit?: (counts: readonly BlendCou
         if (mass + x * o.mass > roomUnder(ceilings.mass) * (1 + 1e-12)) break;
         if (visit === undefined && best !== null && cost + o.costs[x]! >= best) break;
         path.push({ option: k, strings: x });
-        go(k + 1, cost + o.costs[x]!, capacity + x * o.capacity, volume + x * o.volume, mass + x * o.mass, units + x * o.units);
+        go(
+          k + 1,
+          cost + o.costs[x]!,
+          capacity + x * o.capacity,
+          volume + x * o.volume,
+          mass + x * o.mass,
+          units + x * o.units,
+        );
         path.pop();
         if (capacity + x * o.capacity >= need) break;
       }

@@ -1,6 +1,7 @@
 // Invented catalogues of string types, from a seed: the marketplaces that the blend search is tried on.
+
+import type { BlendModel, BlendOption } from "../../src/search/blend/model.ts";
 import { tabulateCosts } from "../../src/search/blend/tabulate.ts";
-import { type BlendModel, type BlendOption } from "../../src/search/blend/model.ts";
 
 /** Numbers in [0, 1) from a seed (mulberry32, public domain, from memory). */
 export function chance(seed: number): () => number {
@@ -78,7 +79,7 @@ function inventPart(random: () => number, voltage: number, stockFactor: number):
   const tolerance = 0.05 + 0.15 * random();
   // Least n whose worst stage, one low among many high, stays within the rating.
   let series = Math.max(1, Math.ceil(voltage / rated));
-  while (series > 1 && (voltage / (1 + ((series - 1) * (1 - tolerance)) / (1 + tolerance))) > rated) series += 1;
+  while (series > 1 && voltage / (1 + ((series - 1) * (1 - tolerance)) / (1 + tolerance)) > rated) series += 1;
   const joules = 0.5 * unit * rated * rated;
   const volume = (joules / kind.density) * between(random, 0.7, 1.6);
   const price = Math.max(5, Math.round(100 * (0.3 + joules * kind.euro * between(random, 0.5, 2))));

@@ -44,12 +44,27 @@ export function tierProgram(instance: Instance, tight: boolean): Program {
       units.push([p, part.pack]);
       any.push([z, 1]);
       chosen.push([z, 1]);
-      rows.push({ terms: [[p, part.pack], [z, -(tight ? fewest * part.pack : low)]], least: 0, most: open });
-      rows.push({ terms: [[p, part.pack], [z, -(tight ? packs * part.pack : high)]], least: -open, most: 0 });
+      rows.push({
+        terms: [
+          [p, part.pack],
+          [z, -(tight ? fewest * part.pack : low)],
+        ],
+        least: 0,
+        most: open,
+      });
+      rows.push({
+        terms: [
+          [p, part.pack],
+          [z, -(tight ? packs * part.pack : high)],
+        ],
+        least: -open,
+        most: 0,
+      });
     });
     rows.push({ terms: units, least: 0, most: open });
     rows.push({ terms: any, least: -open, most: 1 });
-    if (tight) rows.push({ terms: [[x, 1], ...any.map(([z]) => [z, -most] as [number, number])], least: -open, most: 0 });
+    if (tight)
+      rows.push({ terms: [[x, 1], ...any.map(([z]) => [z, -most] as [number, number])], least: -open, most: 0 });
   });
   rows.push({ terms: capacity, least: 1, most: open });
   rows.push({ terms: volume, least: -open, most: 1 });

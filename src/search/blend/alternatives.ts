@@ -1,8 +1,9 @@
 // Other good blends: the cheapest of each different kind, within a stated share of the cheapest of all.
 import { isFittingBlend, tidyCounts } from "./evaluate.ts";
-import type { BlendLimits, FoundBlend } from "./findBlend.ts";
+import type { BlendLimits } from "./findBlend.ts";
 import type { BlendCount, BlendModel } from "./model.ts";
 import { searchUnder } from "./searchUnder.ts";
+import type { FoundBlend } from "./singles.ts";
 
 export interface AlternativesWanted {
   /** Least cost known to be the cheapest, whole minor units. */
@@ -29,7 +30,11 @@ export interface Alternatives {
 export const optionsUsed = (counts: readonly BlendCount[]): string => counts.map(({ option }) => option).join("+");
 
 /** The cheapest blend of each kind, as many as wanted. Each uses no option that it could leave out. */
-export function findAlternatives(model: BlendModel, wanted: AlternativesWanted, limits: BlendLimits = {}): Alternatives {
+export function findAlternatives(
+  model: BlendModel,
+  wanted: AlternativesWanted,
+  limits: BlendLimits = {},
+): Alternatives {
   const kindOf = wanted.kindOf ?? optionsUsed;
   const highest = Math.floor(wanted.cheapest * (1 + wanted.within) + 1e-9) + 1;
   const byKind = new Map<string, Alternative>();
@@ -45,11 +50,14 @@ export function findAlternatives(model: BlendModel, wanted: AlternativesWanted, 
       const counts = tidyCounts(found);
       const kind = kindOf(counts);
       const known = byKind.get(kind);
-      if ((known === undefined || cost < known.cost) && isFittingBlend(model, counts)) byKind.set(kind, { kind, counts, cost });
+      if ((known === undefined || cost < known.cost) && isFittingBlend(model, counts))
+        byKind.set(kind, { kind, counts, cost });
       return threshold();
     },
     limits,
   );
-  const blends = [...byKind.values()].sort((a, b) => a.cost - b.cost || (a.kind < b.kind ? -1 : 1)).slice(0, wanted.most);
+  const blends = [...byKind.values()]
+    .sort((a, b) => a.cost - b.cost || (a.kind < b.kind ? -1 : 1))
+    .slice(0, wanted.most);
   return { blends, complete };
 }

@@ -83,7 +83,13 @@ const hillOf = (climb: Climb, live: readonly number[]): Hill => ({
   fine: climb.weight === 1 ? 0.2 : 1e-9,
 });
 
-function climbFrom(climb: Climb, from: readonly number[], radius: number, live: readonly number[], steps: number): Ascent {
+function climbFrom(
+  climb: Climb,
+  from: readonly number[],
+  radius: number,
+  live: readonly number[],
+  steps: number,
+): Ascent {
   const top = climbEllipsoid(hillOf(climb, live), from, radius, steps);
   return { prices: pricesFrom(climb.weight, top.at), value: top.value };
 }
@@ -126,6 +132,12 @@ export function ascendFeasibility(pool: Pool, maxTypes: number): Ascent {
   const start = climbFrom(climb, [1, 0, 0, 0], 0, [], 1);
   const live = liveRows(pool);
   if (live.length === 0 || start.value > 1e-9) return start;
-  const next = climbFrom(climb, [1, 0.2, 0.2, 0.2].map((p, i) => (i === 0 || live.includes(i) ? p : 0)), 2, live, 40 * live.length);
+  const next = climbFrom(
+    climb,
+    [1, 0.2, 0.2, 0.2].map((p, i) => (i === 0 || live.includes(i) ? p : 0)),
+    2,
+    live,
+    40 * live.length,
+  );
   return next.value > start.value ? next : start;
 }

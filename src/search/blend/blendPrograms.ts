@@ -66,7 +66,8 @@ function write(model: BlendModel, runs: readonly Run[]): BlendProgram {
     const at = columns.push({ cost, most, whole: true }) - 1;
     strings.push({ option, each });
     capacity.push([at, (from.capacity * each) / need]);
-    for (const { name, room, terms } of ceilings) if (from[name] > 0) terms.push([at, (from[name] * each) / (room || 1)]);
+    for (const { name, room, terms } of ceilings)
+      if (from[name] > 0) terms.push([at, (from[name] * each) / (room || 1)]);
     return at;
   };
   for (const run of runs) {
@@ -77,7 +78,14 @@ function write(model: BlendModel, runs: readonly Run[]): BlendProgram {
     if (run.last === run.base) continue;
     const span = run.last - run.base;
     const more = column(run.option, 1, run.step, span);
-    rows.push({ terms: [[more, 1], [chosen, -span]], least: Number.NEGATIVE_INFINITY, most: 0 });
+    rows.push({
+      terms: [
+        [more, 1],
+        [chosen, -span],
+      ],
+      least: Number.NEGATIVE_INFINITY,
+      most: 0,
+    });
   }
   rows.push({ terms: capacity, least: 1, most: Number.POSITIVE_INFINITY });
   for (const { terms, room } of ceilings) rows.push({ terms, least: Number.NEGATIVE_INFINITY, most: room > 0 ? 1 : 0 });
@@ -86,7 +94,10 @@ function write(model: BlendModel, runs: readonly Run[]): BlendProgram {
   return { program: { columns, rows }, read: (values) => readCounts(strings, values) };
 }
 
-function readCounts(strings: readonly { option: number; each: number }[], values: ArrayLike<number>): readonly BlendCount[] {
+function readCounts(
+  strings: readonly { option: number; each: number }[],
+  values: ArrayLike<number>,
+): readonly BlendCount[] {
   const sum = new Map<number, number>();
   strings.forEach(({ option, each }, at) => {
     const count = Math.round(values[at]!) * each;

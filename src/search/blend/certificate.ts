@@ -2,7 +2,7 @@
 import { type Ascent, ascendFrom } from "./ascent.ts";
 import { buildCore } from "./core.ts";
 import { dualPoint, evaluateDual, type Multipliers } from "./dual.ts";
-import { NO_PRICES, type BlendAnswer } from "./findBlend.ts";
+import { type BlendAnswer, NO_PRICES } from "./findBlend.ts";
 import type { BlendCount, BlendModel } from "./model.ts";
 import { buildPool } from "./pool.ts";
 

@@ -36,7 +36,8 @@ export function undominated(model: BlendModel): readonly number[] {
       for (const rival of usable) {
         // Largest reach first: nothing further down brings as much as this option does.
         if (rival.option.capacity * most[rival.at]! < option.capacity * most[at]!) break;
-        if (rival.at === at || (rival.option.partIndex !== option.partIndex && parts.has(rival.option.partIndex))) continue;
+        if (rival.at === at || (rival.option.partIndex !== option.partIndex && parts.has(rival.option.partIndex)))
+          continue;
         if (!replaces(rival.option, most[rival.at]!, option, most[at]!)) continue;
         if (rival.at > at && replaces(option, most[at]!, rival.option, most[rival.at]!)) continue;
         if (rival.option.partIndex === option.partIndex) return false;

@@ -55,7 +55,12 @@ export function climb(hill: Hill, from: ArrayLike<number>, radius: number, steps
 }
 
 /** Shrinks the ellipsoid to what lies beyond the cut; answers its half-width along the cut before, null when nothing lies there. */
-function cutThrough({ at, matrix }: Shape, live: readonly number[], cut: Float64Array, shortfall: number): number | null {
+function cutThrough(
+  { at, matrix }: Shape,
+  live: readonly number[],
+  cut: Float64Array,
+  shortfall: number,
+): number | null {
   const n = live.length;
   const pull = new Float64Array(n);
   let square = 0;

@@ -18,7 +18,8 @@ export function blendTotals(model: BlendModel, counts: readonly BlendCount[]): B
   const seen = new Set<number>();
   for (const { option: index, strings } of counts) {
     const option = model.options[index];
-    if (!option || seen.has(index) || !Number.isInteger(strings) || strings < 0 || strings > option.maxStrings) return null;
+    if (!option || seen.has(index) || !Number.isInteger(strings) || strings < 0 || strings > option.maxStrings)
+      return null;
     seen.add(index);
     if (strings === 0) continue;
     totals.cost += option.costs[strings]!;

@@ -1,23 +1,31 @@
 // The own search with a share of work, then HiGHS for what it left open; two engines that disagree are both heard.
 import { solveWithHighs } from "../highs.ts";
 import { runForm } from "./blendPrograms.ts";
-import { coreUnder } from "./searchUnder.ts";
 import { blendTotals, isFittingBlend, tidyCounts } from "./evaluate.ts";
-import { type BlendAnswer, type BlendLimits, findBlend, type FoundBlend } from "./findBlend.ts";
+import { type BlendAnswer, type BlendLimits, findBlend } from "./findBlend.ts";
 import type { BlendModel } from "./model.ts";
+import { coreUnder } from "./searchUnder.ts";
+import type { FoundBlend } from "./singles.ts";
 
 export interface SettledBlend extends BlendAnswer {
   /** Who proved it; null when nobody did. A proof by HiGHS is its word, checked only for the blend itself. */
   readonly provenBy: "own search" | "HiGHS" | null;
   /** Answers that contradict each other, in words a builder can act on; empty as a rule. */
-  readonly disagreements: readonly { readonly engine: "own search" | "HiGHS"; readonly blend: FoundBlend | null; readonly lowerBound: number }[];
+  readonly disagreements: readonly {
+    readonly engine: "own search" | "HiGHS";
+    readonly blend: FoundBlend | null;
+    readonly lowerBound: number;
+  }[];
 }
 
 /** Work of the own search before HiGHS is asked, about a second. */
 export const SHARE_OF_WORK = 3e6;
 
 /** The cheapest blend by whichever engine proves it, each in its share. `seconds` bounds HiGHS. */
-export async function settleBlend(model: BlendModel, limits: BlendLimits & { readonly seconds?: number } = {}): Promise<SettledBlend> {
+export async function settleBlend(
+  model: BlendModel,
+  limits: BlendLimits & { readonly seconds?: number } = {},
+): Promise<SettledBlend> {
   const own = findBlend(model, { ...limits, work: limits.work ?? SHARE_OF_WORK });
   if (own.status !== "stopped") return { ...own, provenBy: "own search", disagreements: [] };
   if (limits.stop?.()) return { ...own, provenBy: null, disagreements: [] };
@@ -26,9 +34,11 @@ export async function settleBlend(model: BlendModel, limits: BlendLimits & { rea
   const { program, read } = runForm(model, among);
   const answer = await solveWithHighs(program, { seconds: limits.seconds ?? 10 });
   const counts = answer.status !== "infeasible" && answer.values !== null ? tidyCounts(read(answer.values)) : null;
-  const blend = counts !== null && isFittingBlend(model, counts) ? { counts, cost: blendTotals(model, counts)!.cost } : null;
+  const blend =
+    counts !== null && isFittingBlend(model, counts) ? { counts, cost: blendTotals(model, counts)!.cost } : null;
   const best = blend !== null && (own.best === null || blend.cost < own.best.cost) ? blend : own.best;
-  const gap = (lower: number): number | null => (best === null ? null : best.cost === 0 ? 0 : Math.max(0, best.cost - lower) / best.cost);
+  const gap = (lower: number): number | null =>
+    best === null ? null : best.cost === 0 ? 0 : Math.max(0, best.cost - lower) / best.cost;
   if (blend !== null && blend.cost < own.lowerBound) {
     const disagreements = [
       { engine: "own search" as const, blend: own.best, lowerBound: own.lowerBound },
@@ -41,7 +51,15 @@ export async function settleBlend(model: BlendModel, limits: BlendLimits & { rea
     const bound = answer.status === "unknown" && answer.bound !== null ? Math.ceil(answer.bound - 1e-3) : 0;
     const lowerBound = Math.max(own.lowerBound, Math.min(bound, own.best?.cost ?? bound));
     const met = best !== null && lowerBound >= best.cost;
-    return { ...own, best, lowerBound, gap: gap(lowerBound), status: met ? "optimal" : "stopped", provenBy: met ? "HiGHS" : null, disagreements: [] };
+    return {
+      ...own,
+      best,
+      lowerBound,
+      gap: gap(lowerBound),
+      status: met ? "optimal" : "stopped",
+      provenBy: met ? "HiGHS" : null,
+      disagreements: [],
+    };
   }
   // Without anything cheaper among the options that could bring it, the blend in hand is the cheapest.
   const status = best === null ? "infeasible" : "optimal";

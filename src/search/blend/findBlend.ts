@@ -1,11 +1,14 @@
 // Finds the cheapest blend and proves it, or says how far the best one found may be from it when told to stop.
 import { type Ascent, ascendCost, ascendFeasibility, ascendFrom } from "./ascent.ts";
-import { buildCapacityBound, type CapacityBound, pricedCeilings, rootBound, stepsWithin, tightenCore } from "./capacityBound.ts";
+import { buildCapacityBound, type CapacityBound, rootBound, stepsWithin } from "./capacityBound.ts";
 import { buildCore, standing, survivingOptions } from "./core.ts";
 import { BOUND_SLACK, type Multipliers, wholeBound } from "./dual.ts";
 import { isFittingBlend, tidyCounts } from "./evaluate.ts";
-import type { BlendCount, BlendModel } from "./model.ts";
-import { buildPool, type Pool, stringsToReach } from "./pool.ts";
+import type { BlendModel } from "./model.ts";
+import { buildPool } from "./pool.ts";
+import { pricedCeilings } from "./pricedCeilings.ts";
+import { bestSingle, beyondAnyCost, type FoundBlend } from "./singles.ts";
+import { tightenCore } from "./tightenCore.ts";
 import { type Budget, walkCore } from "./walk.ts";
 
 export interface BlendLimits {
@@ -13,12 +16,6 @@ export interface BlendLimits {
   readonly work?: number;
   /** Asked every thousand steps or so; true ends the search. */
   readonly stop?: () => boolean;
-}
-
-export interface FoundBlend {
-  readonly counts: readonly BlendCount[];
-  /** Whole minor units of money. */
-  readonly cost: number;
 }
 
 export interface BlendAnswer {
@@ -58,32 +55,13 @@ const LOOK_AHEAD = 0.08;
 
 export const NO_PRICES: Multipliers = { cost: 1, capacity: 0, volume: 0, mass: 0, units: 0 };
 
-/** Cheapest bank of one string type, or null. */
-export function bestSingle(model: BlendModel, pool: Pool): FoundBlend | null {
-  let best: FoundBlend | null = null;
-  for (let k = 0; k < pool.size; k += 1) {
-    const strings = stringsToReach(1, pool.capacity[k]!);
-    if (strings > pool.most[k]!) continue;
-    const from = model.options[pool.option[k]!]!;
-    if (best !== null && from.floor && from.floor.fixed + from.floor.perString * strings >= best.cost) continue;
-    const cost = from.costs[strings]!;
-    if (best !== null && cost >= best.cost) continue;
-    const counts = [{ option: pool.option[k]!, strings }];
-    if (isFittingBlend(model, counts)) best = { counts, cost };
-  }
-  return best;
-}
-
-/** One more than any blend can cost. */
-function beyondAnyCost(model: BlendModel, pool: Pool): number {
-  const dearest = Array.from({ length: pool.size }, (_, k) => model.options[pool.option[k]!]!.costs[pool.most[k]!]!);
-  dearest.sort((a, b) => b - a);
-  return dearest.slice(0, model.maxTypes).reduce((sum, cost) => sum + cost, 0) + 1;
-}
-
 /** The cheapest blend of `model`, which must be sound (see `blendModelFaults`). */
 export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAnswer {
-  const budget: Budget = { spent: 0, most: limits.work ?? Number.POSITIVE_INFINITY, stop: limits.stop ?? (() => false) };
+  const budget: Budget = {
+    spent: 0,
+    most: limits.work ?? Number.POSITIVE_INFINITY,
+    stop: limits.stop ?? (() => false),
+  };
   const pool = buildPool(model, null, false);
   let best = bestSingle(model, pool);
   let core = { options: 0, pairs: 0 };
@@ -155,7 +133,8 @@ export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAns
       bound,
       most: stage < 0 ? PLAIN_WORK : STAGES[stage]!.work,
       found: (counts, cost) => {
-        if ((best !== null && cost >= best.cost) || !isFittingBlend(model, counts)) return Math.min(threshold, best?.cost ?? threshold);
+        if ((best !== null && cost >= best.cost) || !isFittingBlend(model, counts))
+          return Math.min(threshold, best?.cost ?? threshold);
         best = { counts: tidyCounts(counts), cost };
         met = true;
         return cost;

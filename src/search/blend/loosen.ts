@@ -25,7 +25,10 @@ export function leastAmount(model: BlendModel, row: CeilingName, limits: BlendLi
     const costs = Float64Array.from({ length: option.maxStrings + 1 }, (_, x) => Math.round((option[row] * x) / step));
     return { ...facts, costs };
   });
-  const answer = findBlend({ ...model, options, ceilings: { ...model.ceilings, [row]: Number.POSITIVE_INFINITY } }, limits);
+  const answer = findBlend(
+    { ...model, options, ceilings: { ...model.ceilings, [row]: Number.POSITIVE_INFINITY } },
+    limits,
+  );
   const counts = answer.best?.counts ?? null;
   return { status: answer.status, counts, amount: counts === null ? null : blendTotals(model, counts)![row] };
 }
@@ -54,7 +57,13 @@ export function findLoosenings(model: BlendModel, limits: BlendLimits = {}): rea
   return found.sort((a, b) => (a.change ?? Number.POSITIVE_INFINITY) - (b.change ?? Number.POSITIVE_INFINITY));
 }
 
-function outcome(limit: Loosening["limit"], from: number, to: number | null, priced: BlendAnswer | null, proven: boolean): Loosening {
+function outcome(
+  limit: Loosening["limit"],
+  from: number,
+  to: number | null,
+  priced: BlendAnswer | null,
+  proven: boolean,
+): Loosening {
   const change = to === null ? null : from === 0 ? Number.POSITIVE_INFINITY : Math.abs(to / from - 1);
   return { limit, from, to, change, cost: priced?.best?.cost ?? null, proven: proven && priced?.status !== "stopped" };
 }

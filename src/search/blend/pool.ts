@@ -86,7 +86,12 @@ export function buildPool(model: BlendModel, among: readonly number[] | null, ex
   const option = new Int32Array(wanted);
   const most = new Int32Array(wanted);
   const start = new Int32Array(wanted + 1);
-  const rows = { capacity: new Float64Array(wanted), volume: new Float64Array(wanted), mass: new Float64Array(wanted), units: new Float64Array(wanted) };
+  const rows = {
+    capacity: new Float64Array(wanted),
+    volume: new Float64Array(wanted),
+    mass: new Float64Array(wanted),
+    units: new Float64Array(wanted),
+  };
   const hullX: number[] = [];
   const hullCost: number[] = [];
   const need = capacityNeeded(model.requirement);

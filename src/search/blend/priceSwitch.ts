@@ -3,16 +3,17 @@ import { ascendCost } from "./ascent.ts";
 import { standing } from "./core.ts";
 import { wholeBound } from "./dual.ts";
 import { tidyCounts } from "./evaluate.ts";
-import { type BlendLimits, type FoundBlend, findBlend } from "./findBlend.ts";
+import { type BlendLimits, findBlend } from "./findBlend.ts";
 import { type BlendCount, type BlendModel, FIT_TOLERANCE } from "./model.ts";
 import { buildPool, usefulStrings } from "./pool.ts";
+import type { FoundBlend } from "./singles.ts";
 
 export interface PriceSwitch {
   readonly option: number;
   readonly move: "rise" | "fall";
   /** Minor units of money a unit, not whole: at this change the other blend costs the same, beyond it less. */
   readonly perUnit: number;
-  readonly then: FoundBlend;
+  readonly next: FoundBlend;
   /** False when some search was stopped: a smaller change might do. */
   readonly proven: boolean;
 }
@@ -26,7 +27,9 @@ export function withSettled(model: BlendModel, { option: at, strings }: BlendCou
   const ceilings = { volume: rest("volume"), mass: rest("mass"), units: rest("units") };
   if (Object.values(ceilings).some((room) => room < 0)) return null;
   const requirement = (model.requirement * (1 - slack) - settled.capacity * strings) / (1 - slack);
-  const options = model.options.map((option) => (option.partIndex === settled.partIndex ? { ...plain(option), maxStrings: 0 } : option));
+  const options = model.options.map((option) =>
+    option.partIndex === settled.partIndex ? { ...plain(option), maxStrings: 0 } : option,
+  );
   return { options, requirement, ceilings, maxTypes: model.maxTypes - (strings > 0 ? 1 : 0) };
 }
 
@@ -36,7 +39,11 @@ const plain = (option: BlendModel["options"][number]) => {
 };
 
 /** The cheapest blend with exactly so many strings of one option; null when there is none. */
-export function bestWith(model: BlendModel, count: BlendCount, limits: BlendLimits = {}): { readonly blend: FoundBlend | null; readonly proven: boolean } {
+export function bestWith(
+  model: BlendModel,
+  count: BlendCount,
+  limits: BlendLimits = {},
+): { readonly blend: FoundBlend | null; readonly proven: boolean } {
   const rest = withSettled(model, count);
   if (rest === null) return { blend: null, proven: true };
   const own = model.options[count.option]!.costs[count.strings]!;
@@ -44,11 +51,19 @@ export function bestWith(model: BlendModel, count: BlendCount, limits: BlendLimi
   if (rest.maxTypes < 1) return { blend: null, proven: true };
   const answer = findBlend(rest, limits);
   if (answer.best === null) return { blend: null, proven: answer.status === "infeasible" };
-  return { blend: { counts: tidyCounts([...answer.best.counts, count]), cost: answer.best.cost + own }, proven: answer.status === "optimal" };
+  return {
+    blend: { counts: tidyCounts([...answer.best.counts, count]), cost: answer.best.cost + own },
+    proven: answer.status === "optimal",
+  };
 }
 
 /** Moves of one option's price at which the cheapest blend changes: a rise that sheds some of it, a fall that takes more. */
-export function priceSwitches(model: BlendModel, cheapest: FoundBlend, option: number, limits: BlendLimits = {}): readonly PriceSwitch[] {
+export function priceSwitches(
+  model: BlendModel,
+  cheapest: FoundBlend,
+  option: number,
+  limits: BlendLimits = {},
+): readonly PriceSwitch[] {
   const from = model.options[option]!;
   const now = cheapest.counts.find((count) => count.option === option)?.strings ?? 0;
   const floor = costFloors(model, option);
@@ -64,14 +79,15 @@ export function priceSwitches(model: BlendModel, cheapest: FoundBlend, option: n
       proven &&= other.proven;
       if (other.blend === null) continue;
       const perUnit = Math.max(0, other.blend.cost - cheapest.cost) / units;
-      if (best === null || perUnit < best.perUnit) best = { option, move, perUnit, then: other.blend, proven: true };
+      if (best === null || perUnit < best.perUnit) best = { option, move, perUnit, next: other.blend, proven: true };
     }
     if (best !== null) moves.push({ ...best, proven });
   }
   return moves;
 }
 
-const range = (first: number, last: number): number[] => Array.from({ length: Math.max(0, last - first + 1) }, (_, at) => first + at);
+const range = (first: number, last: number): number[] =>
+  Array.from({ length: Math.max(0, last - first + 1) }, (_, at) => first + at);
 
 /** Lower bounds on the cost of a blend with so many strings of one option, by the Lagrangian bound. */
 function costFloors(model: BlendModel, option: number): (strings: number) => number {
@@ -81,8 +97,13 @@ function costFloors(model: BlendModel, option: number): (strings: number) => num
   const k = pool.option.subarray(0, pool.size).indexOf(option);
   if (k < 0) return () => 0;
   const gain =
-    prices.capacity * pool.capacity[k]! - prices.volume * pool.volume[k]! - prices.mass * pool.mass[k]! - prices.units * pool.units[k]!;
+    prices.capacity * pool.capacity[k]! -
+    prices.volume * pool.volume[k]! -
+    prices.mass * pool.mass[k]! -
+    prices.units * pool.units[k]!;
   const { costs } = model.options[option]!;
   return (strings) =>
-    strings === 0 ? wholeBound(at.value) : wholeBound(at.value - Math.min(at.reduced[k]!, at.bar) + costs[strings]! - gain * strings);
+    strings === 0
+      ? wholeBound(at.value)
+      : wholeBound(at.value - Math.min(at.reduced[k]!, at.bar) + costs[strings]! - gain * strings);
 }

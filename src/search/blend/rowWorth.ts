@@ -1,8 +1,8 @@
 // What one more unit of volume, mass or units is worth: shadow prices of the linear relaxation, by an outside engine.
-import { solveLinear, type SolveLimits } from "../solve.ts";
+import { type SolveLimits, solveLinear } from "../solve.ts";
 import { capacityNeeded, roomUnder } from "./evaluate.ts";
-import { lowerHull, usefulStrings } from "./pool.ts";
 import type { BlendModel } from "./model.ts";
+import { lowerHull, usefulStrings } from "./pool.ts";
 import type { Program, ProgramColumn } from "./program.ts";
 
 export interface RowWorth {
@@ -31,7 +31,8 @@ export function hullProgram(model: BlendModel, among: readonly number[]): Progra
     const own: [number, number][] = [];
     hull.x.forEach((x, corner) => {
       const column = columns.push({ cost: hull.cost[corner]!, most: Number.POSITIVE_INFINITY, whole: false }) - 1;
-      for (const name of ["capacity", "volume", "mass", "units"] as const) terms[name]!.push([column, option[name] * x]);
+      for (const name of ["capacity", "volume", "mass", "units"] as const)
+        terms[name]!.push([column, option[name] * x]);
       terms.types!.push([column, 1]);
       own.push([column, 1]);
     });
@@ -42,7 +43,11 @@ export function hullProgram(model: BlendModel, among: readonly number[]): Progra
     columns,
     rows: [
       { terms: terms.capacity!, least: capacityNeeded(model.requirement), most: open },
-      ...(["volume", "mass", "units"] as const).map((name) => ({ terms: terms[name]!, least: -open, most: roomUnder(model.ceilings[name]) })),
+      ...(["volume", "mass", "units"] as const).map((name) => ({
+        terms: terms[name]!,
+        least: -open,
+        most: roomUnder(model.ceilings[name]),
+      })),
       { terms: terms.types!, least: -open, most: model.maxTypes },
       ...once.map((own) => ({ terms: own, least: -open, most: 1 })),
     ],

@@ -30,7 +30,11 @@ export function searchUnder(
   found: (counts: readonly BlendCount[], cost: number) => number,
   limits: BlendLimits = {},
 ): boolean {
-  const budget: Budget = { spent: 0, most: limits.work ?? Number.POSITIVE_INFINITY, stop: limits.stop ?? (() => false) };
+  const budget: Budget = {
+    spent: 0,
+    most: limits.work ?? Number.POSITIVE_INFINITY,
+    stop: limits.stop ?? (() => false),
+  };
   const core = coreUnder(model, threshold);
   let current = threshold;
   const walk = (bound: CapacityBound | null, most: number) =>

@@ -21,13 +21,25 @@ export interface SweepPoint {
  * The front of cost and one row, from the cheapest blend to the least amount, at most `points` ceilings, evenly apart.
  * Blends that a cheaper or equal one with no larger amount beats are left out. Fewer points come back when the limits end it.
  */
-export function sweepFront(model: BlendModel, row: CeilingName, points: number, limits: BlendLimits = {}): readonly SweepPoint[] {
+export function sweepFront(
+  model: BlendModel,
+  row: CeilingName,
+  points: number,
+  limits: BlendLimits = {},
+): readonly SweepPoint[] {
   const found: SweepPoint[] = [];
   const look = (ceiling: number): SweepPoint | null => {
     const answer = findBlend({ ...model, ceilings: { ...model.ceilings, [row]: ceiling } }, limits);
     if (answer.best === null) return null;
     const { counts, cost } = answer.best;
-    const point = { ceiling, amount: blendTotals(model, counts)![row], cost, counts, proven: answer.status === "optimal", lowerBound: answer.lowerBound };
+    const point = {
+      ceiling,
+      amount: blendTotals(model, counts)![row],
+      cost,
+      counts,
+      proven: answer.status === "optimal",
+      lowerBound: answer.lowerBound,
+    };
     found.push(point);
     return point;
   };
@@ -47,7 +59,9 @@ export function sweepFront(model: BlendModel, row: CeilingName, points: number, 
     (point, at) =>
       !found.some(
         (other, place) =>
-          other.cost <= point.cost && other.amount <= point.amount && (other.cost < point.cost || other.amount < point.amount || place < at),
+          other.cost <= point.cost &&
+          other.amount <= point.amount &&
+          (other.cost < point.cost || other.amount < point.amount || place < at),
       ),
   );
 }

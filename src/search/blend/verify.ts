@@ -1,6 +1,7 @@
 // Checks a certificate from the model alone. It shares no code with the search but the model's shape and the tolerance.
 import type { BlendCertificate } from "./certificate.ts";
 import { type BlendModel, type BlendOption, FIT_TOLERANCE } from "./model.ts";
+import { trySurvivors, type VerifyColumn, WHOLE_SLACK } from "./verifySurvivors.ts";
 
 export type Verdict =
   | { readonly verdict: "valid" }
@@ -10,23 +11,15 @@ export type Verdict =
 
 const invalid = (why: string): Verdict => ({ verdict: "invalid", why });
 const ROWS = ["volume", "mass", "units"] as const;
-/** Costs are whole, so a bound this little above cost - 1 still proves the cost. */
-const WHOLE_SLACK = 1e-3;
-
-/** A string type with its amounts as fractions of the limits, and the counts worth having. */
-interface Column {
-  readonly option: BlendOption;
-  readonly amounts: readonly number[];
-  readonly last: number;
-  readonly gain: number;
-}
 
 /** Whether the certificate proves what it claims. `work` bounds the trying of survivors. */
 export function verifyCertificate(model: BlendModel, certificate: BlendCertificate, work = 5e6): Verdict {
   const { prices, cost, counts } = certificate;
   const weights = [prices.capacity, prices.volume, prices.mass, prices.units];
-  if (!weights.every((price) => Number.isFinite(price) && price >= 0)) return invalid("a price is not a number from 0 up");
-  if (prices.cost !== 1 && !(prices.cost === 0 && cost === null)) return invalid("the weight of the cost is neither 1 nor a plain 0");
+  if (!weights.every((price) => Number.isFinite(price) && price >= 0))
+    return invalid("a price is not a number from 0 up");
+  if (prices.cost !== 1 && !(prices.cost === 0 && cost === null))
+    return invalid("the weight of the cost is neither 1 nor a plain 0");
   const fault = cost === null ? (counts.length > 0 ? "counts without a cost" : null) : claimFault(model, certificate);
   if (fault !== null) return invalid(fault);
 
@@ -36,7 +29,8 @@ export function verifyCertificate(model: BlendModel, certificate: BlendCertifica
   const best = negative.slice(0, model.maxTypes);
   const bound = best.reduce((sum, value) => sum + value, weights[0]! - weights[1]! - weights[2]! - weights[3]!);
   const size = weights.reduce((sum, price) => sum + price, 1);
-  if (!(Math.abs(bound - certificate.bound) <= 1e-9 * size)) return invalid("the bound does not follow from the prices");
+  if (!(Math.abs(bound - certificate.bound) <= 1e-9 * size))
+    return invalid("the bound does not follow from the prices");
   if (prices.cost === 0) {
     if (certificate.survivors.length > 0) return invalid("survivors beside a proof that needs none");
     return bound > 1e-10 ? { verdict: "valid" } : invalid("the bound does not show that no blend exists");
@@ -57,14 +51,20 @@ export function verifyCertificate(model: BlendModel, certificate: BlendCertifica
     for (let x = 1; x <= column.last; x += 1) {
       const reduced = column.option.costs[x]! - column.gain * x;
       if (mine.has(x) ? slack < -blur || reduced > limit + blur : slack > blur && reduced < limit - blur) {
-        return invalid(mine.has(x) ? "a survivor is ruled out by the bound" : "a pair that the bound leaves open is missing");
+        return invalid(
+          mine.has(x) ? "a survivor is ruled out by the bound" : "a pair that the bound leaves open is missing",
+        );
       }
     }
-    for (const x of mine) if (!Number.isInteger(x) || x < 1 || x > column.last) return invalid("a survivor is no count of its option");
+    for (const x of mine)
+      if (!Number.isInteger(x) || x < 1 || x > column.last) return invalid("a survivor is no count of its option");
     listed.delete(at);
   }
   if (listed.size > 0) return invalid("a survivor is no option of the model");
-  return tryAll(model, certificate, columns, threshold, bound - best.reduce((sum, value) => sum + value, 0), work);
+  const offset = bound - best.reduce((sum, value) => sum + value, 0);
+  const tried = trySurvivors(model, certificate, columns, threshold, offset, work);
+  if (tried === "cheaper") return invalid("a cheaper blend exists among the survivors");
+  return { verdict: tried === "none" ? "valid" : "unsettled" };
 }
 
 function claimFault(model: BlendModel, { cost, counts }: BlendCertificate): string | null {
@@ -72,7 +72,8 @@ function claimFault(model: BlendModel, { cost, counts }: BlendCertificate): stri
   const parts = new Set<number>();
   for (const { option: at, strings } of counts) {
     const option = model.options[at];
-    if (!option || !Number.isInteger(strings) || strings < 1 || strings > option.maxStrings) return "a count cannot be had";
+    if (!option || !Number.isInteger(strings) || strings < 1 || strings > option.maxStrings)
+      return "a count cannot be had";
     if (parts.has(option.partIndex)) return "a part is used in two ways";
     parts.add(option.partIndex);
     sum.cost += option.costs[strings]!;
@@ -85,7 +86,7 @@ function claimFault(model: BlendModel, { cost, counts }: BlendCertificate): stri
   return sum.cost === cost ? null : "the cost is not that of the counts";
 }
 
-function columnOf(model: BlendModel, option: BlendOption, weights: readonly number[]): Column {
+function columnOf(model: BlendModel, option: BlendOption, weights: readonly number[]): VerifyColumn {
   const need = model.requirement * (1 - FIT_TOLERANCE);
   const amounts = [option.capacity / need, ...ROWS.map((row) => part(option[row], model.ceilings[row]))];
   let last = 0;
@@ -99,7 +100,7 @@ function columnOf(model: BlendModel, option: BlendOption, weights: readonly numb
 const part = (amount: number, ceiling: number): number =>
   amount === 0 || ceiling === Number.POSITIVE_INFINITY ? 0 : amount / (ceiling * (1 + FIT_TOLERANCE));
 
-function leastReduced(column: Column, weight: number): number {
+function leastReduced(column: VerifyColumn, weight: number): number {
   let low = Number.POSITIVE_INFINITY;
   for (let x = 1; x <= column.last; x += 1) low = Math.min(low, weight * column.option.costs[x]! - column.gain * x);
   return low;
@@ -108,54 +109,4 @@ function leastReduced(column: Column, weight: number): number {
 function beyond(model: BlendModel): number {
   const last = model.options.map((option) => option.costs[option.maxStrings]!).sort((a, b) => b - a);
   return 1 + last.slice(0, model.maxTypes).reduce((sum, cost) => sum + cost, 0);
-}
-
-/** Tries every blend of survivors that the bound does not rule out, the cheapest-looking options first. */
-function tryAll(
-  model: BlendModel,
-  certificate: BlendCertificate,
-  columns: readonly Column[],
-  threshold: number,
-  offset: number,
-  work: number,
-): Verdict {
-  const open = certificate.survivors
-    .filter(({ strings }) => strings.length > 0)
-    .map(({ option, strings }) => {
-      const column = columns[option]!;
-      const pairs = strings.map((x) => ({ x, reduced: column.option.costs[x]! - column.gain * x }));
-      pairs.sort((a, b) => a.reduced - b.reduced);
-      return { column, pairs, least: pairs[0]!.reduced };
-    })
-    .sort((a, b) => a.least - b.least);
-  const limit = threshold - 1 + WHOLE_SLACK;
-  let spent = 0;
-  let cheaper = false;
-  const parts: number[] = [];
-  const go = (from: number, types: number, cost: number, reduced: number, sums: readonly number[]): void => {
-    if (sums[0]! >= 1) {
-      if (cost <= limit && sums.every((sum, row) => row === 0 || sum <= 1)) cheaper = true;
-      return;
-    }
-    if (types === 0) return;
-    for (let at = from; at < open.length && !cheaper && spent <= work; at += 1) {
-      const { column, pairs, least } = open[at]!;
-      let rest = 0;
-      for (let i = at + 1; i < Math.min(open.length, at + types); i += 1) rest += Math.min(0, open[i]!.least);
-      if (offset + reduced + least + rest > limit) return;
-      if (parts.includes(column.option.partIndex)) continue;
-      parts.push(column.option.partIndex);
-      for (const pair of pairs) {
-        if (offset + reduced + pair.reduced + rest > limit) break;
-        spent += 1;
-        const next = sums.map((sum, row) => sum + column.amounts[row]! * pair.x);
-        if (next.some((sum, row) => row > 0 && sum > 1)) continue;
-        go(at + 1, types - 1, cost + column.option.costs[pair.x]!, reduced + pair.reduced, next);
-      }
-      parts.pop();
-    }
-  };
-  go(0, model.maxTypes, 0, 0, [0, 0, 0, 0]);
-  if (cheaper) return invalid("a cheaper blend exists among the survivors");
-  return spent > work ? { verdict: "unsettled" } : { verdict: "valid" };
 }

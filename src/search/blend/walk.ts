@@ -47,7 +47,8 @@ export function walkCore(walk: Walk): WalkEnd {
   let own = 0;
   let end: WalkEnd = "complete";
 
-  const best = (from: number, types: number): number => negative[Math.min(count, from + types)]! - negative[Math.min(count, from)]!;
+  const best = (from: number, types: number): number =>
+    negative[Math.min(count, from + types)]! - negative[Math.min(count, from)]!;
 
   const report = (option: number, strings: number, cost: number): void => {
     limit = walk.found([...path, { option, strings }], cost) - 1 + BOUND_SLACK;
@@ -60,7 +61,16 @@ export function walkCore(walk: Walk): WalkEnd {
     else if (own >= walk.most) end = "capped";
   };
 
-  const explore = (from: number, left: number, cost: number, got: number, volume: number, mass: number, units: number, reduced: number): void => {
+  const explore = (
+    from: number,
+    left: number,
+    cost: number,
+    got: number,
+    volume: number,
+    mass: number,
+    units: number,
+    reduced: number,
+  ): void => {
     const need = 1 - got;
     for (let i = from; i < count; i += 1) {
       const column = columns[i]!;
@@ -98,7 +108,11 @@ export function walkCore(walk: Walk): WalkEnd {
         const c = cost + column.costs[x]!;
         if (bound !== null) {
           const rest = bound.table[bound.row(i + 1, left - 1) + stepsFor(bound, 1 - g)]!;
-          if (c + rest - bound.prices.volume * (1 - v) - bound.prices.mass * (1 - w) - bound.prices.units * (1 - u) > limit) continue;
+          if (
+            c + rest - bound.prices.volume * (1 - v) - bound.prices.mass * (1 - w) - bound.prices.units * (1 - u) >
+            limit
+          )
+            continue;
         }
         path.push({ option: column.option, strings: x });
         parts.push(column.part);
