@@ -67,6 +67,7 @@ export class PaintStream extends EventEmitter {
   caret: Caret = null;
   /** What stands on the terminal; null: not known, so clear first. */
   #shown: string[] | null = null;
+  #given: readonly string[] = [];
   #shownCells: (readonly Cell[])[] = [];
   #shownCaret: Caret = null;
   #open = true;
@@ -93,7 +94,18 @@ export class PaintStream extends EventEmitter {
     this.columns = size.columns;
     this.rows = size.rows;
     this.forget();
-    this.emit("resize");
+  }
+
+  /** Draws the last frame again in full, and the caret where it should be. */
+  redraw(): void {
+    this.forget();
+    this.paint(this.#given);
+  }
+
+  /** Moves the caret when ink found nothing new to write. */
+  settle(): void {
+    const caret = this.#open && this.#shown !== null ? this.#caretChange(false) : "";
+    if (caret !== "") this.#out(caret);
   }
 
   write(frame: string): boolean {
@@ -103,6 +115,7 @@ export class PaintStream extends EventEmitter {
 
   paint(rows: readonly string[]): void {
     if (!this.#open) return;
+    this.#given = rows;
     const fresh = this.#shown === null;
     const shown = this.#shown ?? [];
     if (fresh) {

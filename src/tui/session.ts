@@ -24,6 +24,8 @@ export interface SessionOptions {
 export interface Session {
   readonly enter: () => void;
   readonly end: (status: number) => void;
+  /** Ends because of a fault of ours, which is handed on. */
+  readonly fail: (fault?: unknown) => void;
   /** Stops like any program on Ctrl-Z; does nothing where that does not exist. */
   readonly suspend: () => void;
 }
@@ -92,6 +94,7 @@ export function openSession(options: SessionOptions): Session {
       take();
     },
     end: (status) => end(status),
+    fail,
     suspend: () => {
       if (process.platform === "win32" || !entered) return;
       release();
