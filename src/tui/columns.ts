@@ -1,6 +1,7 @@
 // Lays out a table: which columns there is room for, and each row's spans.
 import { type Row, type Span, span } from "./row.ts";
 import { fitText, type Side, safeText } from "./text.ts";
+import { textWidth } from "./width.ts";
 
 export interface Column<T> {
   readonly title: string;
@@ -10,6 +11,14 @@ export interface Column<T> {
   readonly priority: number;
   readonly cell: (item: T) => Span;
 }
+
+/** Each column as narrow as its longest cell and its title let it be, never wider than it says. */
+export const snug = <T>(columns: readonly Column<T>[], items: readonly T[]): readonly Column<T>[] =>
+  columns.map((column) => {
+    let longest = textWidth(column.title);
+    for (const item of items) longest = Math.max(longest, textWidth(safeText(column.cell(item).text)));
+    return { ...column, width: Math.min(column.width, longest) };
+  });
 
 /** The columns that fit, in their own order, the least wanted left out. One blank between two. */
 export function columnsFor<T>(columns: readonly Column<T>[], width: number): readonly Column<T>[] {

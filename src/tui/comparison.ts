@@ -1,5 +1,5 @@
 // Sets layouts side by side: each row a respect, with the best and worst found, and whether all agree.
-import type { LayoutView } from "./ports.ts";
+import type { LayoutResult } from "../search/index.ts";
 import {
   NOT_ASSESSED,
   shareOfLimit,
@@ -28,9 +28,9 @@ export interface ComparedRow {
 
 interface Respect {
   readonly label: string;
-  readonly text: (layout: LayoutView) => string;
+  readonly text: (layout: LayoutResult) => string;
   /** What is ranked, and which end is better; absent where neither is. */
-  readonly value?: (layout: LayoutView) => number | null;
+  readonly value?: (layout: LayoutResult) => number | null;
   readonly better?: "low" | "high";
 }
 
@@ -110,7 +110,7 @@ const RESPECTS: readonly Respect[] = [
 const shownPart = (fraction: number | null): string => shownWorst(fraction, "fraction");
 
 /** An absent layout is one that the catalogue no longer has. */
-export function compareLayouts(layouts: readonly (LayoutView | null)[]): readonly ComparedRow[] {
+export function compareLayouts(layouts: readonly (LayoutResult | null)[]): readonly ComparedRow[] {
   return RESPECTS.map(({ label, text, value, better }) => {
     const texts = layouts.map((layout) => (layout === null ? "not in catalogue" : text(layout)));
     const agrees = texts.every((one) => one === texts[0]) && texts.length > 0;

@@ -1,5 +1,7 @@
 // Answers a state's question to the engine: reads the brief, plans, assesses what is pinned and chosen, and counts the order.
-import type { EnginePort, LayoutView } from "./ports.ts";
+
+import type { LayoutResult } from "../search/index.ts";
+import type { EnginePort } from "./ports.ts";
 import type { Answer, State } from "./state.ts";
 
 /** Blank fields are left to the brief's own defaults. */
@@ -13,7 +15,7 @@ export function answerFor(state: State, engine: EnginePort, quick: boolean): Ans
   const planned = engine.plan(brief, { rank: state.rank, frontOnly: state.frontOnly, quick });
   if (!planned.ok) return { kind: "refused", refusals: planned.refusals };
   const plan = planned.value;
-  const assessed = (arrangement: State["chosen"]): LayoutView | null =>
+  const assessed = (arrangement: State["chosen"]): LayoutResult | null =>
     arrangement === null ? null : engine.check(brief, arrangement);
   const chosen = assessed(state.chosen);
   return {

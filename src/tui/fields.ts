@@ -1,5 +1,6 @@
 // The table of the brief's fields: key, words, kind, and what a blank means.
 import { type Dimension, formatQuantity } from "../quantity/index.ts";
+import type { Brief } from "../search/index.ts";
 
 export interface Field {
   readonly key: string;
@@ -38,6 +39,9 @@ export const FIELDS: readonly Field[] = [
   { key: "risk", label: "Risk, statistical", dimension: "fraction", blank: "0.01 %" },
   { key: "title", label: "Title", dimension: null, blank: "none" },
 ];
+
+/** A value of a brief, by its field. */
+export const valueIn = (brief: Brief, field: Field): unknown => (brief as Readonly<Record<string, unknown>>)[field.key];
 
 /** A value of the brief as text for the screen. */
 export function shownValue(field: Field, value: unknown): string {

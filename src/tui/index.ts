@@ -1,13 +1,12 @@
 // The terminal screens: draws, takes keys, and reaches everything else through ports.
+
+export { catalogEngine, type Stock } from "./catalogEngine.ts";
 export type {
   Arrangement,
   BillLine,
   BillView,
-  BriefValues,
   EnginePort,
-  LayoutView,
   PlanRequest,
-  PlanView,
   SaveAnswer,
   ScreenPorts,
   StockFacts,

@@ -28,7 +28,7 @@ const ON_TOP: readonly Short[] = [
   [["escape"], "Esc", "do not save", { type: "cancel" }, live.asksName, 2],
   [["y"], "y", "replace the file", { type: "confirm" }, live.asksReplace, 1],
   [["n", "escape"], "n", "keep the file", { type: "cancel" }, live.asksReplace, 2],
-  [["escape", "enter", "f1", "?", "q"], "Esc", "close this help", { type: "help" }, live.inHelp, 1],
+  [["escape", "enter", "f1", "?", "q"], "Esc", "close help", { type: "help" }, live.inHelp, 1],
   [["up"], "Up/Down", "scroll", { type: "move", by: -1 }, live.inHelp, 2],
   [["down"], "", "scroll", { type: "move", by: 1 }, live.inHelp],
   [["pageup"], "", "scroll", { type: "move", by: "pageBack" }, live.inHelp],
@@ -86,15 +86,17 @@ const LISTS: readonly Short[] = [
 ];
 
 const go = (screen: ScreenName, index: number): readonly Short[] => [
-  [[`f${index + 2}`, `alt+${index + 1}`], `Alt-${index + 1}`, screen, { type: "go", screen }, live.noQuestion, null],
-  [[`${index + 1}`], `${index + 1}`, screen, { type: "go", screen }, live.isFree, null],
+  [[`alt+${index + 1}`, `f${index + 2}`], "", screen, { type: "go", screen }, live.noQuestion],
+  [[`${index + 1}`], "", screen, { type: "go", screen }, live.isFree],
 ];
 
 const EVERYWHERE: readonly Short[] = [
   ...SCREENS.flatMap(go),
-  [["f1"], "F1", "help", { type: "help" }, live.noQuestion, 8],
+  [[], "1 to 5", `${SCREENS.join(", ")} (also Alt-1 to 5, F2 to F6)`, { type: "redraw" }, live.isFree, null],
+  [[], "Alt-1 to 5", "screens", { type: "redraw" }, live.onBrief, 4],
+  [["f1"], "F1", "help", { type: "help" }, live.isOpen, 8],
   [["?"], "", "help", { type: "help" }, live.isFree],
-  [["ctrl+q", "ctrl+c"], "Ctrl-Q", "quit", { type: "quit" }, live.always, 9],
+  [["ctrl+q", "ctrl+c"], "Ctrl-Q", "save and quit", { type: "quit" }, live.always, 9],
   [["q"], "", "quit", { type: "quit" }, live.isFree],
   [["ctrl+z"], "Ctrl-Z", "suspend", { type: "suspend" }, live.always, null],
   [["ctrl+l"], "Ctrl-L", "draw again", { type: "redraw" }, live.always, null],

@@ -1,91 +1,12 @@
 // What the screens need from outside: the engine, the files, the clock and the terminal, handed in by main.
-import type { Finding, Read } from "../quantity/index.ts";
+import type { Layout } from "../bank/index.ts";
+import type { Read } from "../quantity/index.ts";
+import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import type { TerminalInput } from "./input.ts";
 import type { ProcessPort } from "./session.ts";
 
-export type Ties = "cross-tied" | "strings";
-
 /** One arrangement by name: what is pinned, chosen and saved. */
-export interface Arrangement {
-  readonly part: string;
-  readonly series: number;
-  readonly parallel: number;
-  readonly ties: Ties;
-}
-
-/** A value under low, nominal and high capacitance; null where it is unknown. */
-export interface Span {
-  readonly low: number | null;
-  readonly nominal: number;
-  readonly high: number | null;
-}
-
-/** The part of an assessed layout that the screens show. SI values, money in the major unit; null is unknown or not assessed. */
-export interface LayoutView extends Arrangement {
-  readonly id: string;
-  readonly units: number;
-  readonly capacitance: Span;
-  readonly energy: Span;
-  readonly share: {
-    readonly even: number;
-    readonly charging: number | null;
-    readonly holding: number | null;
-    readonly leftAfterDump: number | null;
-    readonly limit: number;
-  };
-  readonly balance: {
-    readonly resistance: number;
-    readonly tolerance: number;
-    readonly positions: number;
-    readonly elements: number;
-    readonly powerEach: number;
-    readonly powerTotal: number;
-    readonly family: string;
-    readonly assumed: boolean;
-  } | null;
-  readonly bleed: { readonly seconds: number | null; readonly toVoltage: number };
-  readonly cost: {
-    readonly capacitors: number | null;
-    readonly resistors: number | null;
-    readonly total: number;
-    readonly currency: string;
-    readonly unpriced: readonly string[];
-  } | null;
-  readonly volume: number | null;
-  readonly mass: number | null;
-  /** Worst unit voltage over rated voltage. */
-  readonly stress: number | null;
-  readonly findings: readonly Finding[];
-}
-
-export interface ChangeView {
-  readonly field: string;
-  readonly from: number | null;
-  readonly to: number;
-  readonly layout: string;
-  readonly note: string;
-}
-
-export interface PlanView {
-  readonly required: { readonly capacitance: number };
-  readonly searched: { readonly parts: number; readonly layouts: number; readonly proof: string };
-  readonly layouts: readonly LayoutView[];
-  readonly front: readonly string[];
-  readonly refused: readonly {
-    readonly part: string;
-    readonly reason: string;
-    readonly value: number | null;
-    readonly limit: number | null;
-  }[];
-  readonly changes: readonly ChangeView[];
-  readonly notes: readonly string[];
-}
-
-/** The brief as read: SI values by key; what is shown of it is chosen by the table of fields. */
-export type BriefValues = Readonly<Record<string, unknown>>;
-
-export const RANKINGS = ["cost", "units", "volume", "mass", "stress"] as const;
-export type Ranking = (typeof RANKINGS)[number];
+export type Arrangement = Layout;
 
 /** One counted line of an order. Money in the major unit; null is no price. */
 export interface BillLine {
@@ -123,12 +44,12 @@ export interface PlanRequest {
 
 export interface EnginePort {
   /** Reads a brief from text by key; each refusal's place.field is the key. */
-  readonly readBrief: (values: Readonly<Record<string, unknown>>) => Read<BriefValues>;
+  readonly readBrief: (values: Readonly<Record<string, unknown>>) => Read<Brief>;
   /** Refuses only what cannot be planned at all, such as two currencies without a rate. */
-  readonly plan: (brief: BriefValues, request: PlanRequest) => Read<PlanView>;
+  readonly plan: (brief: Brief, request: PlanRequest) => Read<PlanResult>;
   /** Assesses one arrangement under a brief; null when the catalogue has no such part. */
-  readonly check: (brief: BriefValues, arrangement: Arrangement) => LayoutView | null;
-  readonly bill: (brief: BriefValues, layout: LayoutView) => BillView;
+  readonly check: (brief: Brief, arrangement: Arrangement) => LayoutResult | null;
+  readonly bill: (brief: Brief, layout: LayoutResult) => BillView;
 }
 
 export interface StockFacts {
@@ -153,7 +74,7 @@ export interface ScreenPorts {
   /** Puts a saved text that could not be read aside, so that it is not overwritten; where it is now, or null. */
   readonly keepSession: () => string | null;
   /** Writes the order of a bank to a file whose ending names the format. */
-  readonly exportBill: (brief: BriefValues, layout: LayoutView, path: string, replace: boolean) => SaveAnswer;
+  readonly exportBill: (brief: Brief, layout: LayoutResult, path: string, replace: boolean) => SaveAnswer;
   readonly stdin: TerminalInput;
   readonly stdout: TerminalOutput;
   /** Writes to the terminal at once. */

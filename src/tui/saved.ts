@@ -1,8 +1,9 @@
 // The brief, the pins and where one was, as text to keep and back; text that cannot be trusted gives nothing.
+
+import { RANKINGS } from "../search/index.ts";
 import { FIELDS } from "./fields.ts";
 import { LONGEST_LINE } from "./line.ts";
 import type { Arrangement } from "./ports.ts";
-import { RANKINGS } from "./ports.ts";
 import { MOST_PINS, SCREENS, type State } from "./state.ts";
 
 const VERSION = 1;

@@ -1,16 +1,8 @@
 // The whole state of the screens, and the two closed unions that change it and that it asks for.
 import type { Refusal } from "../quantity/index.ts";
+import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import type { Line, LineEdit } from "./line.ts";
-import type {
-  Arrangement,
-  BillView,
-  BriefValues,
-  LayoutView,
-  PlanView,
-  Ranking,
-  SaveAnswer,
-  StockFacts,
-} from "./ports.ts";
+import type { Arrangement, BillView, SaveAnswer, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
 
 export const SCREENS = ["brief", "layouts", "compare", "bank", "order"] as const;
@@ -24,13 +16,13 @@ export type Answer =
   | { readonly kind: "refused"; readonly refusals: readonly Refusal[] }
   | {
       readonly kind: "planned";
-      readonly brief: BriefValues;
+      readonly brief: Brief;
       /** False while nothing fits and the least changes were not looked for yet. */
       readonly changesSought: boolean;
-      readonly plan: PlanView;
+      readonly plan: PlanResult;
       /** Pinned arrangements assessed under this brief; null where the catalogue has no such part. */
-      readonly pinned: readonly (LayoutView | null)[];
-      readonly chosen: LayoutView | null;
+      readonly pinned: readonly (LayoutResult | null)[];
+      readonly chosen: LayoutResult | null;
       readonly bill: BillView | null;
     };
 
@@ -104,7 +96,7 @@ export type Message =
 
 export type Effect =
   | { readonly type: "ask"; readonly asked: number }
-  | { readonly type: "export"; readonly layout: LayoutView; readonly path: string; readonly replace: boolean }
+  | { readonly type: "export"; readonly layout: LayoutResult; readonly path: string; readonly replace: boolean }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };

@@ -1,6 +1,6 @@
 // Values as the screens print them: few figures, limits rounded to the safe side, unknown said as such.
 import { type Dimension, formatQuantity, minorDigits, type Verdict } from "../quantity/index.ts";
-import type { LayoutView, Span } from "./ports.ts";
+import type { LayoutResult, Span } from "../search/index.ts";
 import type { StyleName } from "./theme.ts";
 
 export const UNKNOWN = "unknown";
@@ -23,9 +23,9 @@ export const shownLimit = (value: number | null, dimension: Dimension): string =
 export const shownMoney = (amount: number | null, currency: string): string =>
   amount === null ? "no price" : `${amount.toFixed(minorDigits(currency))} ${currency}`;
 
-/** Total cost; "from" when lines without a price are left out of it. */
-export const shownCost = ({ cost }: LayoutView): string =>
-  cost === null ? "no price" : `${cost.unpriced.length > 0 ? "from " : ""}${shownMoney(cost.total, cost.currency)}`;
+/** Total cost; "at least" when lines without a price are left out of it. */
+export const shownCost = ({ cost }: LayoutResult): string =>
+  cost === null ? "no price" : `${cost.unpriced.length > 0 ? "≥ " : ""}${shownMoney(cost.total, cost.currency)}`;
 
 /** "0.82 to 1.22 mF" about a nominal value. */
 export const shownSpan = (span: Span, dimension: Dimension): string =>
@@ -34,11 +34,11 @@ export const shownSpan = (span: Span, dimension: Dimension): string =>
     : `${shownLimit(span.low, dimension)} to ${shownWorst(span.high, dimension)}, ${shown(span.nominal, dimension)} nominal`;
 
 /** The highest voltage that any unit may see at rest, V; null when either share is not assessed. */
-export const worstVoltage = ({ share }: LayoutView): number | null =>
+export const worstVoltage = ({ share }: LayoutResult): number | null =>
   share.charging === null || share.holding === null ? null : Math.max(share.charging, share.holding);
 
 /** Worst unit voltage over its limit; null when not assessed. */
-export function shareOfLimit(layout: LayoutView): number | null {
+export function shareOfLimit(layout: LayoutResult): number | null {
   const worst = worstVoltage(layout);
   return worst === null || !(layout.share.limit > 0) ? null : worst / layout.share.limit;
 }
@@ -62,20 +62,20 @@ export interface Summary {
 }
 
 /** The worst verdict among a layout's findings, and how many have it; no findings at all is not a pass. */
-export function worstVerdict({ findings }: LayoutView): Summary {
+export function worstVerdict({ findings }: LayoutResult): Summary {
   const verdict = bySeverity(findings)[0]?.verdict ?? "not assessed";
   return { verdict, count: findings.filter((finding) => finding.verdict === verdict).length };
 }
 
 /** "pass", "2 warn", "1 fail", "3 unknown". */
-export function shownVerdict(layout: LayoutView): string {
+export function shownVerdict(layout: LayoutResult): string {
   const { verdict, count } = worstVerdict(layout);
   if (verdict === "pass") return "pass";
   return `${count} ${verdict === "not assessed" ? "unknown" : verdict}`;
 }
 
-export const shapeOf = ({ series, parallel }: Pick<LayoutView, "series" | "parallel">): string =>
+export const shapeOf = ({ series, parallel }: Pick<LayoutResult, "series" | "parallel">): string =>
   `${series}s${parallel}p`;
 
-export const nameOf = (layout: Pick<LayoutView, "part" | "series" | "parallel" | "ties">): string =>
+export const nameOf = (layout: Pick<LayoutResult, "part" | "series" | "parallel" | "ties">): string =>
   `${layout.part} ${shapeOf(layout)} ${layout.ties}`;

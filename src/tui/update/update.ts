@@ -1,6 +1,7 @@
 // State and message to state and effects: the one place where the screens change. Pure.
+
+import { RANKINGS } from "../../search/index.ts";
 import { arrangementOf, selectedLayout } from "../pick.ts";
-import { RANKINGS } from "../ports.ts";
 import { ask, type Change, type Message, type ScreenName, type State, still } from "../state.ts";
 import { mostScroll } from "../view/screen.ts";
 import { chooseField, editField, moveField } from "./form.ts";

@@ -1,8 +1,8 @@
 // One bank drawn stage by stage, each stage's worst voltage against its limit, with all that was found.
 import type { Finding } from "../../quantity/index.ts";
+import type { LayoutResult } from "../../search/index.ts";
 import { drawBar } from "../bar.ts";
 import { isPinned, shownBank } from "../pick.ts";
-import type { LayoutView } from "../ports.ts";
 import { EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { fitText } from "../text.ts";
@@ -27,7 +27,7 @@ import { emptyRows, paragraph } from "./words.ts";
 /** A row of units as drawn: at most so many, then how many there are. */
 const MOST_DRAWN = 6;
 
-function unitsDrawn({ parallel, ties }: LayoutView, ascii: boolean): string {
+function unitsDrawn({ parallel, ties }: LayoutResult, ascii: boolean): string {
   const unit = ascii ? "][" : "┤├";
   const gap = ties === "cross-tied" ? (ascii ? "-" : "─") : " ";
   const drawn = Array.from({ length: Math.min(parallel, MOST_DRAWN) }, () => unit).join(gap);
@@ -38,7 +38,7 @@ const drawnWidth = (parallel: number): number =>
   Math.min(parallel, MOST_DRAWN) * 3 - 1 + (parallel > MOST_DRAWN ? 3 : 0);
 
 /** One row a stage. Any stage may be the low one, so each is drawn at the worst that it may see. */
-function stageRows(layout: LayoutView, state: State, columns: number): readonly Row[] {
+function stageRows(layout: LayoutResult, state: State, columns: number): readonly Row[] {
   const { share, series, parallel } = layout;
   const worst = worstVoltage(layout);
   const limit = share.limit;
@@ -103,7 +103,7 @@ function findingRows(findings: readonly Finding[], columns: number): readonly Ro
   });
 }
 
-export function bankHead(state: State, layout: LayoutView): readonly Row[] {
+export function bankHead(state: State, layout: LayoutResult): readonly Row[] {
   const { verdict } = worstVerdict(layout);
   const pinned = isPinned(state, layout) ? ", pinned" : "";
   return [
@@ -145,7 +145,7 @@ export function bankPage(state: State, room: Room): Page {
           ? `one string of ${series}`
           : `${parallel} strings of ${series}, not tied`;
   const rows: readonly Row[] = [
-    rowOf(span(`${how}; any one may be the worst, and each is drawn so:`, "quiet")),
+    ...paragraph(`${how}; any one may be the worst, and each is drawn so:`, room.columns, "quiet"),
     ...stageRows(layout, state, room.columns),
     EMPTY_ROW,
     ...layoutSentences(layout)

@@ -1,13 +1,13 @@
 // The brief's form, each field with how it was read or what is wrong, and beneath or beside it what fits, as one types.
 import { columnsFor, headingRow, tableRow, widen } from "../columns.ts";
-import { FIELDS, type Field, fieldAt, shownValue } from "../fields.ts";
+import { FIELDS, type Field, fieldAt, shownValue, valueIn } from "../fields.ts";
 import { planOf } from "../pick.ts";
 import { type Row, rowOf, type Span, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { drawnText, fitText } from "../text.ts";
 import { shown } from "../values.ts";
 import { textWidth } from "../width.ts";
-import { layoutColumns } from "./layouts.ts";
+import { listColumns } from "./layouts.ts";
 import type { Page, Room } from "./page.ts";
 import { emptyRows, refusalOf, refusalWords } from "./words.ts";
 
@@ -35,7 +35,7 @@ function remark(state: State, field: Field): Span {
   if (field.choices !== undefined) return span("left and right change it", "quiet");
   if (text.trim() === "") return span(field.blank, "quiet");
   if (state.answer?.kind !== "planned") return span("");
-  const read = shownValue(field, state.answer.brief[field.key]);
+  const read = shownValue(field, valueIn(state.answer.brief, field));
   return read === "" || read === text ? span("") : span(`= ${read}`, "good");
 }
 
@@ -70,7 +70,7 @@ function resultRows(state: State, { columns, rows }: Room): readonly Row[] {
   const plan = planOf(state);
   const empty = emptyRows(state, columns);
   if (plan === null || empty.length > 0) return empty.slice(0, rows);
-  const table = widen(columnsFor(layoutColumns(state), columns), "part", columns, 40);
+  const table = widen(columnsFor(listColumns(state, plan.layouts), columns), "part", columns, 40);
   const listed = plan.layouts.slice(0, Math.max(1, rows - 2));
   const count = plan.searched.layouts.toLocaleString("en");
   const first = listed.length === 1 ? "the first" : `the first ${listed.length}`;

@@ -6,28 +6,33 @@ import type { State } from "../state.ts";
 import { fitText, safeText } from "../text.ts";
 import type { StyleName } from "../theme.ts";
 import { shapeOf } from "../values.ts";
+import { textWidth } from "../width.ts";
 import { type Page, pageOf, type Room, scrolled } from "./page.ts";
 import { emptyRows, paragraph } from "./words.ts";
 
-/** Narrower columns than this say best and worst by the mark alone, which the line above explains. */
-const ROOM_FOR_WORDS = 18;
-const ROOM_FOR_PERCENT = 27;
-
 const STANDING: Readonly<Record<"best" | "worst", { readonly mark: string; readonly style: StyleName }>> = {
-  best: { mark: "+", style: "good" },
-  worst: { mark: "-", style: "warn" },
+  best: { mark: "^", style: "good" },
+  worst: { mark: "v", style: "warn" },
 };
 
+/** Value, mark, and as much of word and distance as there is room for; line 1 explains the marks where words have none. */
 function cellSpan(cell: ComparedCell, width: number): Span {
   const { standing, beyondBest } = cell;
-  const mark = standing === null ? " " : STANDING[standing].mark;
-  const word = standing === null || width < ROOM_FOR_WORDS ? "" : ` ${standing}`;
-  const percent =
-    beyondBest === null || width < ROOM_FOR_PERCENT
-      ? ""
-      : ` (${beyondBest >= 0 ? "+" : "-"}${Math.abs(beyondBest * 100).toFixed(Math.abs(beyondBest) < 0.1 ? 1 : 0)} %)`;
-  const text = `${mark} ${safeText(cell.text)}${word}${percent}`;
-  return span(fitText(text, width), standing === null ? "plain" : STANDING[standing].style);
+  const value = `  ${safeText(cell.text)}`;
+  // The mark stands after the number: before it, it would read as a sign.
+  const mark = standing === null ? "" : ` ${STANDING[standing].mark}`;
+  const word = standing === null ? "" : ` ${standing}`;
+  const percent = beyondBest === null ? "" : ` ${shownDistance(beyondBest)}`;
+  const fits = [value + mark + word + percent, value + mark + word, value + mark].find(
+    (text) => textWidth(text) <= width,
+  );
+  return span(fitText(fits ?? value + mark, width), standing === null ? "plain" : STANDING[standing].style);
+}
+
+/** "+12 %" from the best. */
+function shownDistance(fraction: number): string {
+  const percent = Math.abs(fraction * 100);
+  return `(${fraction >= 0 ? "+" : "-"}${percent.toFixed(percent < 10 ? 1 : 0)} %)`;
 }
 
 const labelWidth = (columns: number, count: number): number => (columns - 20 >= count * 15 ? 20 : 16);
@@ -64,7 +69,7 @@ export function comparePage(state: State, room: Room): Page {
   });
   const shapes = state.pins.map((pin) => span(fitText(`  ${shapeOf(pin)} ${pin.ties}`, width), "quiet"));
   const head: readonly Row[] = [
-    rowOf(span(fitText("+ best  - worst", label), "quiet"), ...heads.flatMap((cell) => [span(" "), cell])),
+    rowOf(span(fitText("^ best  v worst", label), "quiet"), ...heads.flatMap((cell) => [span(" "), cell])),
     rowOf(span(" ".repeat(label)), ...shapes.flatMap((cell) => [span(" "), cell])),
   ];
   const all = compareLayouts(layouts);

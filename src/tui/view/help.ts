@@ -12,7 +12,7 @@ const ABOUT: Readonly<Record<State["screen"], string>> = {
   layouts:
     "Every layout that does the job, in order. * is pinned. Unbeaten: no other is as good in cost, volume, mass, units and stress and better in one.",
   compare:
-    "The pinned layouts side by side. + marks the best of a row, - the worst; rows that agree are folded into one sentence.",
+    "The pinned layouts side by side. ^ marks the best of a row, v the worst; rows that agree are folded into one sentence.",
   bank: "One bank, stage by stage. The bar is the worst voltage a unit may see, | its limit. A check that could not be made is not assessed, never a pass.",
   order: "What must be bought: needed, less what is on hand, in whole packs and at the price for the quantity.",
 };

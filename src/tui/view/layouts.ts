@@ -1,7 +1,8 @@
 // The ranked list of layouts, and beneath it the one under the cursor in sentences.
-import { type Column, columnsFor, headingRow, tableRow, widen } from "../columns.ts";
+
+import type { LayoutResult } from "../../search/index.ts";
+import { type Column, columnsFor, headingRow, snug, tableRow, widen } from "../columns.ts";
 import { isPinned, listed, planOf, selectedIndex } from "../pick.ts";
-import type { LayoutView } from "../ports.ts";
 import { EMPTY_ROW, type Row, span } from "../row.ts";
 import type { State } from "../state.ts";
 import {
@@ -22,15 +23,15 @@ import { type Page, pageOf, type Room } from "./page.ts";
 import { emptyRows, paragraph } from "./words.ts";
 
 /** Every column the list can have; those there is room for are shown. */
-export function layoutColumns(state: State): readonly Column<LayoutView>[] {
+export function layoutColumns(state: State): readonly Column<LayoutResult>[] {
   const unbeaten = new Set(planOf(state)?.front ?? []);
   const column = (
     title: string,
     width: number,
     priority: number,
-    text: (layout: LayoutView) => string,
+    text: (layout: LayoutResult) => string,
     side: "left" | "right" = "right",
-  ): Column<LayoutView> => ({ title, width, priority, side, cell: (layout) => span(text(layout)) });
+  ): Column<LayoutResult> => ({ title, width, priority, side, cell: (layout) => span(text(layout)) });
   return [
     column("", 1, 0, (l) => (isPinned(state, l) ? "*" : " "), "left"),
     column("part", 14, 0, (l) => l.part, "left"),
@@ -59,8 +60,17 @@ export function layoutColumns(state: State): readonly Column<LayoutView>[] {
   ];
 }
 
+const snugColumns = new WeakMap<readonly LayoutResult[], readonly Column<LayoutResult>[]>();
+
+/** The columns at the widths that the whole list needs, so that they stand still while it scrolls; worked out once a plan. */
+export function listColumns(state: State, layouts: readonly LayoutResult[]): readonly Column<LayoutResult>[] {
+  const widths = snugColumns.get(layouts) ?? snug(layoutColumns(state), layouts);
+  snugColumns.set(layouts, widths);
+  return layoutColumns(state).map((column, index) => ({ ...column, width: widths[index]?.width ?? column.width }));
+}
+
 /** The layout in a few sentences, the most wanted first. */
-export function layoutSentences(layout: LayoutView): readonly string[] {
+export function layoutSentences(layout: LayoutResult): readonly string[] {
   const { share, balance, bleed } = layout;
   const holding = layout.series === 1 ? "" : `, ${shownWorst(share.holding, "voltage")} holding`;
   return [
@@ -80,7 +90,7 @@ export function layoutsPage(state: State, room: Room): Page {
   if (empty.length > 0) return pageOf(empty);
   const layouts = listed(state);
   const plan = planOf(state);
-  const columns = widen(columnsFor(layoutColumns(state), room.columns - 2), "part", room.columns - 2, 40);
+  const columns = widen(columnsFor(listColumns(state, layouts), room.columns - 2), "part", room.columns - 2, 40);
   const count = (plan?.searched.layouts ?? 0).toLocaleString("en");
   const which = state.frontOnly
     ? `${layouts.length} unbeaten in every respect, of ${count}`

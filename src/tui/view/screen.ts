@@ -1,5 +1,5 @@
 // The whole screen as rows: names of the screens, the brief in a line, the body, the caution, what just happened, the live keys.
-import { FIELDS, shownValue } from "../fields.ts";
+import { FIELDS, fieldAt, shownValue, valueIn } from "../fields.ts";
 import { helpLineKeys } from "../keys.ts";
 import type { Caret } from "../paint.ts";
 import { drawRow, EMPTY_ROW, type Row, rowOf, type Span, span } from "../row.ts";
@@ -13,7 +13,7 @@ import { helpPage } from "./help.ts";
 import { layoutsPage } from "./layouts.ts";
 import { orderPage } from "./order.ts";
 import type { Page, Room } from "./page.ts";
-import { CAUTIONS } from "./words.ts";
+import { CAUTIONS, refusalOf, refusalWords } from "./words.ts";
 
 export const LEAST_COLUMNS = 60;
 export const LEAST_ROWS = 16;
@@ -61,10 +61,13 @@ function briefRow(state: State): Row {
   const { answer, stock } = state;
   const from = `${stock.parts.toLocaleString("en")} parts${stock.note === "" ? "" : `, ${stock.note}`}`;
   if (answer?.kind !== "planned")
-    return { left: [span("The brief is not whole yet.", "quiet")], right: [span(from, "quiet")] };
+    return {
+      left: [span(answer === null ? "" : "The brief is not whole yet.", "quiet")],
+      right: [span(from, "quiet")],
+    };
   const value = (key: string): string => {
     const field = FIELDS.find((candidate) => candidate.key === key);
-    return field === undefined ? "" : shownValue(field, answer.brief[key]);
+    return field === undefined ? "" : shownValue(field, valueIn(answer.brief, field));
   };
   const busy = state.asked === state.answered ? "" : " ...";
   return {
@@ -75,12 +78,18 @@ function briefRow(state: State): Row {
   };
 }
 
+/** What is wrong with the field under the caret, in full: beside the field there may be no room for it. */
+function focusedRefusal(state: State): Row {
+  const refusal = state.screen === "brief" && !state.help ? refusalOf(state, fieldAt(state.field).key) : null;
+  return refusal === null ? EMPTY_ROW : rowOf(span(`! ${refusalWords(refusal)}`, "warn"));
+}
+
 const QUESTION = "Save the order as: ";
 
 function noticeRow(state: State): { readonly row: Row; readonly caretColumn: number | null } {
   const { prompt, notice } = state;
   if (prompt?.replace) {
-    return { row: rowOf(span(`! ${prompt.line.text} is there already. Replace it?`, "warn")), caretColumn: null };
+    return { row: rowOf(span(`! Replace the file that is there? ${prompt.line.text}`, "warn")), caretColumn: null };
   }
   const bad = notice !== null && notice.tone === "bad";
   if (prompt !== null && !bad) {
@@ -88,7 +97,7 @@ function noticeRow(state: State): { readonly row: Row; readonly caretColumn: num
     const seen = seenPart(drawnText(prompt.line.text, state.look.ascii), prompt.line.caret, room);
     return { row: rowOf(span(QUESTION, "strong"), span(seen.text)), caretColumn: QUESTION.length + seen.at };
   }
-  if (notice === null) return { row: EMPTY_ROW, caretColumn: null };
+  if (notice === null) return { row: focusedRefusal(state), caretColumn: null };
   const mark = notice.tone === "bad" || notice.tone === "warn" ? "! " : "";
   return { row: rowOf(span(mark + notice.text, notice.tone)), caretColumn: null };
 }

@@ -1,7 +1,7 @@
 // The sentences that stand in for a screen's contents when there are none, and what each change or refusal says.
 import type { Refusal } from "../../quantity/index.ts";
+import type { Change } from "../../search/index.ts";
 import { FIELDS, fieldAt, shownValue } from "../fields.ts";
-import type { ChangeView } from "../ports.ts";
 import { type Row, rowOf, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { safeText, wrapText } from "../text.ts";
@@ -43,7 +43,7 @@ export function refusedSentence(refusals: readonly Refusal[]): string {
 }
 
 /** "Charge voltage 2.05 kV in place of 2.2 kV, which lets in <layout>." */
-export function changeSentence(change: ChangeView): string {
+export function changeSentence(change: Change): string {
   const known = FIELDS.findIndex((field) => field.key === change.field);
   const value = (number: number | null): string =>
     number === null ? "none" : known < 0 ? String(number) : shownValue(fieldAt(known), number);
