@@ -44,7 +44,7 @@ describe("catalogs/", () => {
       "film-foil pulse",
       "oil-paper",
       "double-layer",
-      "home-made plate",
+      "home-made plates",
     ])
       expect(kinds).toContain(kind);
     expect(new Set(parts.map((part) => part.part)).size).toBe(parts.length);

@@ -7,7 +7,7 @@
 // | V_1    | worst   | V    | worst holding voltage at the chosen R |
 //
 // Each element is the largest preferred value at most R_max/k; V_1/k <= working voltage, V_1^2/(R(1 - q))/k <= derated power.
-// Because V_1 >= V_1(R -> 0) and R <= R_max, no k below the start used here can pass. Source: [joulewright-design] section 3.
+// V_1 rises with R, so V_1 at the least R that can come out bounds the volts and watts of every k from below: the search starts there. Source: [joulewright-design] section 3.
 
 import type { ResistorFamily } from "../catalog/index.ts";
 import { lastAtMost } from "../quantity/index.ts";
@@ -40,9 +40,10 @@ export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorF
   const { values, voltage, lowest, highest } = family;
   if (!(most > 0) || most < lowest * (1 - 1e-9)) return false;
   const watts = family.power * family.derating;
-  const floor = bank.voltage / bank.series;
+  // Whatever k is, R lies at most one step of the series below the smaller of R_max and one largest element.
+  const floor = holdWorst(bank, Math.min(most, highest) / family.step);
   const reach = Math.min(most, highest * MOST_ELEMENTS);
-  const start = Math.max(floor / voltage, (floor * floor) / (reach * (1 + bank.spread)) / watts, 1);
+  const start = Math.max(floor / voltage, (floor * floor) / (reach * (1 - bank.spread)) / watts, 1);
   for (let k = Math.max(1, Math.ceil(start * (1 - 1e-9))); k <= MOST_ELEMENTS; k++) {
     const index = lastAtMost(values, Math.min(most / k, highest));
     if (index < 0) return false;

@@ -1,6 +1,5 @@
 // One capacitor as sold or owned: its ratings, each with its state, and the terms on which it is bought.
 
-import { z } from "zod";
 import type { Tolerance } from "../quantity/index.ts";
 import type { PriceBreak } from "./cell.ts";
 import { above, type Column, fromZero, PURCHASE_COLUMNS, text } from "./column.ts";
@@ -61,6 +60,12 @@ export interface Capacitor extends PurchaseTerms {
   readonly height?: number;
   readonly mass?: number;
   readonly note?: string;
+  /** A home-made plate capacitor: area of one plate, gap, relative permittivity, count of plates, breakdown field. */
+  readonly plateArea?: number;
+  readonly gap?: number;
+  readonly permittivity?: number;
+  readonly plates?: number;
+  readonly breakdownField?: number;
   /** States of the values that are not from a datasheet; a key absent here is a datasheet value. */
   readonly states: Readonly<Record<string, ValueState>>;
   readonly file: string;
@@ -120,24 +125,6 @@ export const CAPACITOR_COLUMNS: readonly Column[] = [
   { heading: "assumed", key: "assumed", type: text() },
   ...PLATE_COLUMNS,
 ];
-
-const ratio = z.number().positive().finite();
-
-/** The last gate of a row: what must hold between its values. Ranges of single values are in the columns. */
-export const capacitorSchema = z
-  .object({
-    part: z.string().min(1),
-    capacitance: ratio,
-    voltage: ratio,
-    surgeVoltage: ratio.optional(),
-    minimumOrder: z.number().int().positive().optional(),
-    pack: z.number().int().positive().optional(),
-  })
-  .loose()
-  .refine((row) => row.surgeVoltage === undefined || row.surgeVoltage >= row.voltage, {
-    path: ["surgeVoltage"],
-    error: "a surge voltage at least the rated voltage",
-  });
 
 /** Volume that a unit takes in square packing (its enclosing box), m^3; null when its size is unknown. */
 export function unitVolume(unit: Pick<Capacitor, "diameter" | "length" | "width" | "height">): number | null {

@@ -32,12 +32,15 @@ export interface ResistorFamily extends PurchaseTerms {
   readonly assumed: boolean;
   /** All values made, ohm, rising. */
   readonly values: readonly number[];
+  /** Largest ratio of a value to the one below it; 1 for a single value. */
+  readonly step: number;
 }
 
-const family = (row: Omit<ResistorFamily, "values">): ResistorFamily => ({
-  ...row,
-  values: seriesBetween(row.series, row.lowest, row.highest),
-});
+function family(row: Omit<ResistorFamily, "values" | "step">): ResistorFamily {
+  const values = seriesBetween(row.series, row.lowest, row.highest);
+  const step = values.reduce((most, value, i) => Math.max(most, value / (values[i - 1] ?? value)), 1);
+  return { ...row, values, step };
+}
 
 /** The family used when no resistor catalogue is given: unpriced and assumed. */
 export const DEFAULT_FAMILY: ResistorFamily = family({

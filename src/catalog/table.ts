@@ -32,7 +32,14 @@ interface BoundColumn {
   readonly column: Column;
   readonly index: number;
   readonly scale: Scale | null;
-  readonly needsUnit: boolean;
+  /** For the quick way through plain numbers: `e-6` behind them, and the range; null where there is no quick way. */
+  readonly quick: { readonly suffix: string; readonly least: number; readonly most: number } | null;
+}
+
+interface BoundTable {
+  readonly bound: readonly BoundColumn[];
+  readonly decimalComma: boolean;
+  readonly blank: Readonly<Record<string, unknown>>;
 }
 
 const HEADING = /^([^[\]]*?)\s*(?:\[([^[\]]*)\])?$/;
@@ -57,6 +64,7 @@ export function readTable(
   let fatal: readonly Refusal[] | null = null;
   let rowCount = 0;
   let decimalComma = false;
+  const blank = blankRow(columns);
   const fault = (refusal: Refusal, place: Place): void => {
     if (faults.length < MOST_FAULTS) faults.push({ ...refusal, place: { file, ...place } });
     else lost++;
@@ -75,7 +83,7 @@ export function readTable(
       return;
     }
     rowCount++;
-    const row = readRow(cells, line, { bound, decimalComma }, fault);
+    const row = readRow(cells, line, { bound, decimalComma, blank }, fault);
     if (row !== null) take(row);
   });
   if (!separated.ok) return refused(...separated.refusals.map((r) => ({ ...r, place: { file } })));
@@ -96,24 +104,35 @@ export function readTable(
   return accepted({ faults, notes, rowCount });
 }
 
+/** A record with every key of the columns, so that all rows of a table have one shape. */
+const blankRow = (columns: readonly Column[]): Record<string, unknown> =>
+  Object.fromEntries(columns.map((column) => [column.key, undefined]));
+
 function readRow(
   cells: readonly string[],
   line: number,
-  table: { readonly bound: readonly BoundColumn[]; readonly decimalComma: boolean },
+  table: BoundTable,
   fault: (refusal: Refusal, place: Place) => void,
 ): Row | null {
-  const values: Record<string, unknown> = {};
+  const values = { ...table.blank };
   let good = true;
   let currency = "EUR";
-  for (const { column, index, scale } of table.bound) {
+  for (const { column, index, scale, quick } of table.bound) {
     const cell = cells[index];
-    const place = { line, column: index + 1, field: column.heading };
     if (cell === undefined || cell === "") {
       if (column.required) {
+        const place = { line, column: index + 1, field: column.heading };
         fault({ code: "missing-value", place, read: "a blank cell", want: `a value for ${column.heading}` }, place);
         good = false;
       }
       continue;
+    }
+    if (quick !== null && isPlain(cell)) {
+      const value = Number(cell + quick.suffix);
+      if (value >= quick.least && value <= quick.most) {
+        values[column.key] = value;
+        continue;
+      }
     }
     const read = readCell(cell, column.type, { bare: scale, decimalComma: table.decimalComma, currency });
     if (read.ok) {
@@ -121,10 +140,21 @@ function readRow(
       if (column.key === "currency") currency = read.value as string;
     } else {
       good = false;
-      for (const refusal of read.refusals) fault(refusal, place);
+      for (const refusal of read.refusals) fault(refusal, { line, column: index + 1, field: column.heading });
     }
   }
   return good ? { line, values } : null;
+}
+
+/** Digits with at most one point among them: what most cells hold. */
+function isPlain(cell: string): boolean {
+  let points = 0;
+  for (let i = 0; i < cell.length; i++) {
+    const code = cell.charCodeAt(i);
+    if (code === 46) points++;
+    else if (code < 48 || code > 57) return false;
+  }
+  return points === 0 || (points === 1 && cell.length > 1 && cell.charCodeAt(0) !== 46 && !cell.endsWith("."));
 }
 
 /** Which column each heading means. Currency is read before prices, whatever the order in the file. */
@@ -174,7 +204,7 @@ function bindHeadings(
       });
       return;
     }
-    bound.push({ column, index, scale: scaled, needsUnit: scaled === null });
+    bound.push({ column, index, scale: scaled, quick: quickWay(column, scaled) });
   });
   for (const column of columns.filter((c) => c.required)) {
     if (bound.some((b) => b.column === column)) continue;
@@ -190,6 +220,11 @@ function bindHeadings(
   if (faults.length > 0) return refused(...faults);
   bound.sort((a, b) => columns.indexOf(a.column) - columns.indexOf(b.column));
   return accepted({ bound, notes });
+}
+
+function quickWay({ type }: Column, scale: Scale | null): BoundColumn["quick"] {
+  if (type.kind !== "quantity" || scale === null || scale.factor !== 1) return null;
+  return { suffix: scale.exponent === 0 ? "" : `e${scale.exponent}`, least: type.least, most: type.most };
 }
 
 /**

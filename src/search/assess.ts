@@ -14,7 +14,7 @@ import {
 } from "../bank/index.ts";
 import { type Capacitor, type Purchase, purchase, type ResistorFamily } from "../catalog/index.ts";
 import { toMajor } from "../quantity/index.ts";
-import { bestBalance, chainOf, newBalancing, positionsOf } from "./balancing.ts";
+import { bestBalance, chainOf, newBalancing, positionsOf, shapedChain, sharingOf } from "./balancing.ts";
 import type { Brief } from "./brief.ts";
 import { type Candidate, prepare } from "./candidate.ts";
 import { findingsOf } from "./findings.ts";
@@ -101,7 +101,7 @@ const worstOf = (charging: number | null, holding: number | null): number | null
 
 /** Worst holding voltage with the resistor as it is; null when the leakage is unknown. */
 function holdingOf(candidate: Candidate, brief: Brief, layout: Layout, chosen: Balance | null): number | null {
-  const chain = chainOf(candidate, brief, layout, chosen?.tolerance ?? 0);
+  const chain = shapedChain(candidate, brief, layout, chosen?.tolerance ?? 0);
   if (layout.series === 1) return brief.voltage * (1 + brief.overshoot);
   if (chain === null) return null;
   return holdWorst(chain, chosen?.resistance ?? Number.POSITIVE_INFINITY);
@@ -117,7 +117,11 @@ function balanceOf(
   if (wish.kind === "none") return null;
   if (wish.kind === "fixed") return fixedBalance(candidate, brief, layout, families[0] as ResistorFamily, wish);
   const best = newBalancing();
-  if (candidate.leak === null || !bestBalance(candidate, brief, layout, families, best)) return null;
+  const chain = chainOf(candidate, brief);
+  if (chain === null) return null;
+  chain.series = layout.series;
+  chain.sharing = sharingOf(layout);
+  if (!bestBalance(chain, candidate.limit, positionsOf(layout), families, best)) return null;
   const family = families[best.family] as ResistorFamily;
   return describe(layout, brief, family, {
     resistance: best.resistance,
@@ -135,7 +139,7 @@ function fixedBalance(
   family: ResistorFamily,
   { resistance, tolerance }: { readonly resistance: number; readonly tolerance: number },
 ): Balance {
-  const chain = chainOf(candidate, brief, layout, tolerance);
+  const chain = shapedChain(candidate, brief, layout, tolerance);
   const even = (brief.voltage * (1 + brief.overshoot)) / layout.series;
   const worst = chain === null ? even : holdWorst(chain, resistance);
   const byVolts = worst / family.voltage;

@@ -3,7 +3,7 @@
 import { chargingWorst, FIT, leastParallel } from "../bank/index.ts";
 import { type Capacitor, cheapest, type ResistorFamily } from "../catalog/index.ts";
 import { minorDigits } from "../quantity/index.ts";
-import { bestBalance, newBalancing } from "./balancing.ts";
+import { bestBalance, chainOf, newBalancing } from "./balancing.ts";
 import type { Brief } from "./brief.ts";
 import { prepare } from "./candidate.ts";
 import type { RefusedPart } from "./result.ts";
@@ -43,7 +43,7 @@ const bill = { quantity: 0, cost: 0 };
 
 /** Runs the whole search. `stopAtFirst` ends it at the first layout that fits, for asking whether anything does. */
 export function sweep(input: SweepInput, stopAtFirst = false): Sweep {
-  const table = newTable();
+  const table = newTable(Math.max(256, Math.min(input.parts.length * 32, 1 << 22)));
   const refused: RefusedPart[] = [];
   for (let i = 0; i < input.parts.length; i++) {
     const reason = sweepPart(input, i, table);
@@ -61,6 +61,7 @@ function sweepPart(input: SweepInput, index: number, table: LayoutTable): Reason
   const minor = 10 ** minorDigits(currency ?? "");
   const least = leastSeries(voltage, candidate.limit, candidate.tolerance);
   if (least > brief.maxSeries) return { reason: "series-limit", value: least, limit: brief.maxSeries };
+  const chain = chainOf(candidate, brief);
   const before = table.count;
   let why: Reason | null = null;
   const ceiling = (reason: string, value: number | null, limit: number | null): void => {
@@ -93,15 +94,17 @@ function sweepPart(input: SweepInput, index: number, table: LayoutTable): Reason
       ceiling(candidate.mass === null ? "mass-unknown" : "mass-limit", finiteOrNull(mass), brief.maxMass as number);
       break;
     }
-    const charging =
-      candidate.tolerance === null ? Number.POSITIVE_INFINITY : chargingWorst(voltage, n, candidate.tolerance);
+    let charging = Number.POSITIVE_INFINITY;
+    if (n === 1) charging = voltage;
+    else if (candidate.tolerance !== null) charging = chargingWorst(voltage, n, candidate.tolerance);
     for (let tied = n > 1 && p > 1 ? 1 : 0; tied >= 0; tied--) {
       let worst = charging;
       let resistors = 0;
       let family = -1;
-      if (n > 1 && candidate.leak !== null) {
-        const shape = { series: n, parallel: p, ties: tied === 1 ? "cross-tied" : "strings" } as const;
-        if (!bestBalance(candidate, brief, shape, families, balancing)) {
+      if (n > 1 && chain !== null) {
+        chain.series = n;
+        chain.sharing = tied === 1 ? p : 1;
+        if (!bestBalance(chain, candidate.limit, tied === 1 ? n : units, families, balancing)) {
           ceiling("balance", null, candidate.limit);
           continue;
         }
