@@ -85,7 +85,12 @@ function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> 
   for (const key of ["capacitance", "voltage"]) {
     if (unit[key] !== undefined) continue;
     const want = `a value for ${key}, or plate area, gap, plates and breakdown field`;
-    return refused({ code: "missing-value", place: { ...place, field: key }, read: "a blank cell or no such column", want });
+    return refused({
+      code: "missing-value",
+      place: { ...place, field: key },
+      read: "a blank cell or no such column",
+      want,
+    });
   }
   if (unit.polarised === undefined) {
     const polarised = polarityOf(unit.technology);
@@ -101,7 +106,12 @@ function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> 
   }
   if (surgeVoltage < voltage) {
     const want = "a surge voltage at least the rated voltage";
-    return refused({ code: "contradiction", place: { ...place, field: "surge voltage" }, read: `${surgeVoltage} V below ${voltage} V`, want });
+    return refused({
+      code: "contradiction",
+      place: { ...place, field: "surge voltage" },
+      read: `${surgeVoltage} V below ${voltage} V`,
+      want,
+    });
   }
   unit.states = states;
   unit.file = file;

@@ -70,4 +70,6 @@ export interface Bill {
   readonly layout: string;
   readonly lines: readonly BillLine[];
   readonly totals: Totals;
+  /** Said on every copy of the bill. */
+  readonly cautions: readonly string[];
 }

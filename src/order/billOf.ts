@@ -15,10 +15,11 @@ export interface BillInput {
   readonly families: readonly ResistorFamily[];
   readonly brief: Brief;
   readonly currency: string | null;
+  readonly cautions: readonly string[];
 }
 
 /** Counts and lays out; prices are those that the layout was assessed with. */
-export function billOf({ layout, unit, families, brief, currency }: BillInput): Bill {
+export function billOf({ layout, unit, families, brief, currency, cautions }: BillInput): Bill {
   const name = layout.balance?.family;
   const family = [...families, DEFAULT_FAMILY].find((f) => f.family === name) ?? null;
   const lines = [
@@ -27,5 +28,5 @@ export function billOf({ layout, unit, families, brief, currency }: BillInput): 
     ...clampLines({ layout, unit, brief }),
     ...otherLines({ layout, unit, brief }),
   ];
-  return { layout: layout.id, lines, totals: totalsOf({ lines, currency, exchange: brief.exchange }) };
+  return { layout: layout.id, lines, totals: totalsOf({ lines, currency, exchange: brief.exchange }), cautions };
 }

@@ -15,7 +15,7 @@ export function csvText(text: string): string {
   return /[",;\t\r\n]|^\s|\s$/.test(guarded) ? `"${guarded.replaceAll('"', '""')}"` : guarded;
 }
 
-/** One heading row, one row a line, then the sums. Lines end in CR LF. */
+/** One heading row, one row a line, then the sums and the cautions. Lines end in CR LF. */
 export function billToCsv(bill: Bill): string {
   const rows = [BILL_COLUMNS.map((column) => csvText(column.heading))];
   for (const line of bill.lines) {
@@ -35,5 +35,10 @@ export function billToCsv(bill: Bill): string {
     note: unpriced.length > 0 ? csvText(`Left out, no price: ${unpriced.join("; ")}`) : "",
   };
   rows.push(BILL_COLUMNS.map((column) => sums[column.key] ?? ""));
+  for (const caution of bill.cautions) {
+    rows.push(
+      BILL_COLUMNS.map((column) => (column.key === "item" ? "caution" : column.key === "note" ? csvText(caution) : "")),
+    );
+  }
   return `${rows.map((row) => row.join(",")).join("\r\n")}\r\n`;
 }

@@ -37,7 +37,8 @@ ${rows.join("\n")}
 </tbody>
 </table>
 <p>Purchase cost of the priced lines: ${htmlText(sum(purchase))}. Consumed cost: ${htmlText(sum(consumed))}.</p>
-${left}</body>
+${left}<ul>${bill.cautions.map((caution) => `<li>${htmlText(caution)}</li>`).join("")}</ul>
+</body>
 </html>
 `;
 }

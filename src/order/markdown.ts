@@ -31,5 +31,6 @@ export function billToMarkdown(bill: Bill): string {
     `Purchase cost of the priced lines: ${digits(purchase)}. Consumed cost: ${digits(consumed)}.`,
   ];
   if (unpriced.length > 0) text.push("", `Left out, no price: ${unpriced.map(markdownText).join("; ")}.`);
+  text.push("", ...bill.cautions.map((caution) => `- ${markdownText(caution)}`));
   return `${text.join("\n")}\n`;
 }
