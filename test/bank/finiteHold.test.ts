@@ -92,28 +92,26 @@ describe("holdWorst(bank, resistance)", () => {
     }
   });
 
-  test("every corner of C, R and leak of whole chains of 2 and 3, at every moment of the hold: no stage above the larger of start and end by more than 1 %", () => {
+  test("every corner of C, R and leak of whole chains of 2 to 4, at every moment of the hold: no stage above the larger of charging and holding share", () => {
     const worst = { over: 0 };
     const c = chance(22);
-    for (const n of [2, 3]) {
-      for (let i = 0; i < 6; i++) {
+    for (const n of [2, 3, 4]) {
+      for (let i = 0; i < (n === 4 ? 1 : 20); i++) {
         const one = bank({
           series: n,
           sharing: 1,
           spread: c.pick([0.01, 0.05]),
           leak: { kind: "current", amperes: c.between(0, 1e-4) },
           tolerance: { low: c.between(0, 0.2), high: c.between(0, 0.3) },
-          hold: c.between(10, 600),
+          hold: c.between(10, 6000),
         });
         const resistance = c.between(5e4, 5e5);
-        const bound = Math.max(
-          chargingWorst(one.voltage, n, one.tolerance),
-          ...[0.25, 0.5, 1].map((f) => holdWorst({ ...one, hold: one.hold * f }, resistance)),
-        );
+        const bound = Math.max(chargingWorst(one.voltage, n, one.tolerance), holdWorst(one, resistance));
         worst.over = Math.max(worst.over, worstInTime(one, resistance) / bound - 1);
       }
     }
-    expect(worst.over).toBeLessThan(0.01);
+    // Single stages may pass their own two ends; the worst of all corners may not. 1e-9 is the arithmetic of the eigenvectors.
+    expect(worst.over).toBeLessThan(1e-9);
   });
 });
 
