@@ -35,23 +35,24 @@ export const elementPower = (worst: number, resistance: number, spread: number, 
  * `bank.spread` is the family's tolerance. The result is written into `choice`, because the search calls this for every layout.
  */
 export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorFamily, choice: Choice): boolean {
-  const endless = largestBalance(bank, limit);
-  const most = bank.hold === Number.POSITIVE_INFINITY ? endless : largestBalanceForHold(bank, limit, endless);
-  const { values, voltage, lowest, highest } = family;
+  const endless = bank.hold === Number.POSITIVE_INFINITY;
+  const bound = largestBalance(bank, limit);
+  const most = endless ? bound : largestBalanceForHold(bank, limit, bound);
+  const { values, voltage, lowest, highest, tolerance } = family;
   if (!(most > 0) || most < lowest * (1 - 1e-9)) return false;
   const watts = family.power * family.derating;
   // Whatever k is, R lies at most one step of the series below the smaller of R_max and one largest element.
   const floor = holdWorst(bank, Math.min(most, highest) / family.step);
-  const reach = Math.min(most, highest * MOST_ELEMENTS);
-  const start = Math.max(floor / voltage, (floor * floor) / (reach * (1 - bank.spread)) / watts, 1);
-  for (let k = Math.max(1, Math.ceil(start * (1 - 1e-9))); k <= MOST_ELEMENTS; k++) {
+  const reach = Math.min(most, highest * MOST_ELEMENTS) * (1 - tolerance);
+  const start = Math.max(floor / voltage, (floor * floor) / (reach * watts), 1);
+  for (let k = Math.ceil(start * (1 - 1e-9)); k <= MOST_ELEMENTS; k++) {
     const index = lastAtMost(values, Math.min(most / k, highest));
     if (index < 0) return false;
     const element = values[index] as number;
     const resistance = element * k;
     const worst = holdWorst(bank, resistance);
-    if (worst / k > voltage * (1 + 1e-9)) continue;
-    if (elementPower(worst, resistance, bank.spread, k) > watts * (1 + 1e-9)) continue;
+    if (worst > voltage * k * (1 + 1e-9)) continue;
+    if (worst * worst > watts * resistance * (1 - tolerance) * k * (1 + 1e-9)) continue;
     choice.resistance = resistance;
     choice.element = element;
     choice.elements = k;

@@ -62,7 +62,12 @@ export function readRecords(text: string, take: Take): Read<CsvSummary> {
   let line = 1;
   for (let from = 0; from < body.length; ) {
     const end = pieceEnd(body, from);
-    line = readPiece(from === 0 && end === body.length ? body : body.slice(from, end), { separator, line, take, faults });
+    line = readPiece(from === 0 && end === body.length ? body : body.slice(from, end), {
+      separator,
+      line,
+      take,
+      faults,
+    });
     from = end;
   }
   return accepted({ separator, faults });

@@ -51,7 +51,14 @@ export interface Balancing extends Choice {
   cost: number;
 }
 
-export const newBalancing = (): Balancing => ({ family: -1, cost: 0, resistance: 0, element: 0, elements: 0, worst: 0 });
+export const newBalancing = (): Balancing => ({
+  family: -1,
+  cost: 0,
+  resistance: 0,
+  element: 0,
+  elements: 0,
+  worst: 0,
+});
 
 const trial: Choice = { resistance: 0, element: 0, elements: 0, worst: 0 };
 const bill = { quantity: 0, cost: 0 };
