@@ -45,20 +45,22 @@ export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorF
   const watts = family.power * family.derating * (1 - tolerance);
   // Whatever k is, R lies at most one step of the series below the smaller of R_max and one largest element.
   const least = Math.min(most, highest) / step;
-  const floor = straight ? base + slope * least : holdWorst(bank, least);
+  const floor = straight ? Math.min(base + slope * least, bank.voltage) : holdWorst(bank, least);
   const start = Math.max(floor / voltage, (floor * floor) / (Math.min(most, highest * MOST_ELEMENTS) * watts), 1);
   for (let k = Math.ceil(start * (1 - 1e-9)); k <= MOST_ELEMENTS; k++) {
     const index = lastAtMost(values, Math.min(most / k, highest));
     if (index < 0) return false;
     const element = values[index] as number;
     const resistance = element * k;
-    const worst = straight ? base + slope * resistance : holdWorst(bank, resistance);
+    const worst = straight ? Math.min(base + slope * resistance, bank.voltage) : holdWorst(bank, resistance);
+    // Within a finite hold a smaller R may divide worse than a larger one, when resistors are wider than units.
+    if (!straight && worst > limit * (1 + 1e-9)) continue;
     if (worst > voltage * k * (1 + 1e-9)) continue;
     if (worst * worst > watts * resistance * k * (1 + 1e-9)) continue;
     choice.resistance = resistance;
     choice.element = element;
     choice.elements = k;
-    choice.worst = Math.min(worst, bank.voltage);
+    choice.worst = worst;
     return true;
   }
   return false;
