@@ -72,7 +72,10 @@ describe("brute force", () => {
 describe("general solvers", () => {
   test("HiGHS, zero gap, tier variables: 30 catalogues of 20 to 200 parts cost the same to the cent", async () => {
     for (let seed = 1; seed <= 30; seed += 1) {
-      const instance = inventInstance({ parts: seed % 10 === 0 ? 200 : [20, 50, 20, 100][seed % 4]!, seed: 6000 + seed });
+      const instance = inventInstance({
+        parts: seed % 10 === 0 ? 200 : [20, 50, 20, 100][seed % 4]!,
+        seed: 6000 + seed,
+      });
       const own = findBlend(instance.model);
       const other = await solveWithHighs(tierProgram(instance, true), { seconds: 30 });
       expect(other.status).toBe(own.status);
