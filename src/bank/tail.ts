@@ -44,7 +44,8 @@ const ROUNDING = 1e-9;
 export function exceedRisk(given: TailCase): Tail {
   const strings = given.ties === "strings" ? given.p : 1;
   const one = chainRisk({ ...given, p: given.ties === "strings" ? 1 : given.p });
-  if (strings === 1 || one.exceed === 0 || one.exceed === 1) return one;
+  if (strings === 1 || one.exceed === 1) return one;
+  if (one.exceed === 0) return { ...one, error: strings * one.error };
   const all = (chance: number): number => -Math.expm1(strings * Math.log1p(-Math.min(chance, 1)));
   const exceed = all(one.exceed);
   const unionBound = strings * one.unionBound;
@@ -66,6 +67,8 @@ function chainRisk(given: TailCase): Tail {
   const span = tailWindows(given, kappa);
   if (span === null) return exactly(0);
   const { single, off, stages } = lotSingle(given, kappa) ?? smoothSingle(given, kappa, span);
+  // Far beyond any use, at about 1e-300 or in a corner of dozens of units, the sums vanish; the chance is then below this, not 0.
+  if (single === 0) return { exceed: 0, error: vanishing(stages, n), unionBound: 0, unionExcess: 0 };
   const sum = n * single;
   // So far out that the masses are below the smallest number.
   if (!(sum > 0)) return underflown(given);
@@ -110,6 +113,12 @@ function lotSingle(given: TailCase, kappa: number): Single | null {
     spread += mass * (stages.butOneBelow(value + blur) - stages.butOneBelow(value - blur));
   }
   return { single, off: spread / 2 + 1e-12 * single, stages };
+}
+
+/** Chance that every unit lies where an excess needs it, over all stages: an upper bound. */
+function vanishing({ victim, other }: Stages, n: number): number {
+  const all = (masses: Float64Array): number => masses.reduce((sum, mass) => sum + mass, 0);
+  return Math.max(Number.MIN_VALUE, n * all(victim.masses) * all(other.masses) ** (n - 1));
 }
 
 /** A chance spans decades, so it is its logarithm that goes as the square of the step. */
