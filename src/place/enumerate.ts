@@ -1,5 +1,5 @@
 // Every way to divide a few units into unnumbered groups of one size, each once.
-import { choose } from "./subset-sums.ts";
+import { choose } from "./subsetSums.ts";
 
 /** Units of an enumeration at most: group tables are indexed by bit mask. */
 export const MOST_ENUMERATED = 20;

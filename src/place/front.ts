@@ -1,19 +1,19 @@
 // Where charging and holding pull apart: the placings of which neither gap can be lowered without raising the other.
-import { type Read, accepted, refused } from "../quantity/index.ts";
+import { accepted, type Read, refused } from "../quantity/index.ts";
 import { finish } from "./charging.ts";
 import { conductancesOf } from "./conductance.ts";
 import { constraintsOf } from "./constraints.ts";
 import { effort } from "./effort.ts";
-import { MOST_ENUMERATED, arrangements } from "./enumerate.ts";
+import { arrangements, MOST_ENUMERATED } from "./enumerate.ts";
 import { gapFloor } from "./floor.ts";
-import { exactFront } from "./front-exact.ts";
+import { exactFront } from "./frontExact.ts";
 import { holdAgain } from "./holding.ts";
 import { toLattice } from "./lattice.ts";
 import { place } from "./place.ts";
 import { serialsOf, settled } from "./placing.ts";
 import { seeded } from "./random.ts";
 import { DEFAULTS, type PlaceRequest } from "./request.ts";
-import type { MeasuredUnit } from "./unit.ts";
+import { lotUncertainty, type MeasuredUnit } from "./unit.ts";
 
 export interface FrontPoint {
   readonly charging: number;
@@ -47,7 +47,9 @@ interface RawPoint {
 }
 
 /** Keeps the points that no other point beats in both gaps; charging rising. */
-export function undominated<T extends { readonly charging: number; readonly holding: number }>(points: readonly T[]): T[] {
+export function undominated<T extends { readonly charging: number; readonly holding: number }>(
+  points: readonly T[],
+): T[] {
   const sorted = [...points].sort((a, b) => a.charging - b.charging || a.holding - b.holding);
   let least = Number.POSITIVE_INFINITY;
   return sorted.filter((point) => {
@@ -72,7 +74,12 @@ export function placingFront(units: readonly MeasuredUnit[], request: PlaceReque
   const pool = units.filter((unit) => !out.has(unit.serial));
   const conductances = conductancesOf(pool, request);
   if (!conductances.known) {
-    return refused({ code: "place.no-front", place: { field: "leakage" }, read: conductances.why, want: "leakage of every unit" });
+    return refused({
+      code: "place.no-front",
+      place: { field: "leakage" },
+      read: conductances.why,
+      want: "leakage of every unit",
+    });
   }
   const rule = constraintsOf(pool, request);
   const { values } = toLattice(pool.map((unit) => unit.capacitance));
@@ -90,11 +97,13 @@ export function placingFront(units: readonly MeasuredUnit[], request: PlaceReque
   const small = pool.length <= MOST_ENUMERATED && !rule.any;
   if (small && arrangements(pool.length, rule.groups, rule.size) <= MOST_ARRANGEMENTS) {
     const work = effort(Number.POSITIVE_INFINITY, request.within);
-    const answer = finish(exactFront({ ties, series, values, conductances, groups: rule.groups, size: rule.size }, work));
+    const answer = finish(
+      exactFront({ ties, series, values, conductances, groups: rule.groups, size: rule.size }, work),
+    );
     if (answer.complete) return finishFront(answer.points, true);
   }
 
-  const floor = gapFloor({ series, parallel, ties, uncertainty: request.uncertainty || DEFAULTS.uncertainty });
+  const floor = gapFloor({ series, parallel, ties, uncertainty: request.uncertainty || lotUncertainty(units) || DEFAULTS.uncertainty });
   const random = seeded(request.seed ?? DEFAULTS.seed);
   const work = effort(Math.max(request.moves ?? DEFAULTS.moves, 1), request.within);
   const index = new Map(pool.map((unit, i) => [unit.serial, i]));

@@ -8,12 +8,12 @@
  * lowest and highest group or with the hole: exact for one and two moves, the best found beyond. With no spare the hole stays, and
  * exchanges make up for what they can.
  */
-import { gapOfGroups } from "./bank-gaps.ts";
+import { gapOfGroups } from "./bankGaps.ts";
 import { gapFloor } from "./floor.ts";
 import { stageGap, stringGap } from "./gap.ts";
 import type { Placing } from "./placing.ts";
 import { DEFAULTS, type PlaceRequest } from "./request.ts";
-import type { MeasuredUnit } from "./unit.ts";
+import { lotUncertainty, type MeasuredUnit } from "./unit.ts";
 
 export interface Mend {
   readonly moves: number;
@@ -21,7 +21,12 @@ export interface Mend {
   /** Group by group as it would stand. */
   readonly groups: readonly (readonly string[])[];
   /** What to do, in order: position (group, place in it, from 0), unit out and unit in (null: none). */
-  readonly steps: readonly { readonly group: number; readonly at: number; readonly out: string | null; readonly in: string | null }[];
+  readonly steps: readonly {
+    readonly group: number;
+    readonly at: number;
+    readonly out: string | null;
+    readonly in: string | null;
+  }[];
 }
 
 export interface Mending {
@@ -65,13 +70,17 @@ export function mend(units: readonly MeasuredUnit[], request: PlaceRequest, plac
   const capacitance = (serial: string | null): number => (serial === null ? 0 : bySerial.get(serial)!.capacitance);
   const valuesOf = (bank: Bank, g: number): number[] =>
     bank.slice(g * size, (g + 1) * size).flatMap((s) => (s === null ? [] : [capacitance(s)]));
-  const gapOf = (bank: Bank): number => gapOfGroups(request.ties, Array.from({ length: count }, (_, g) => valuesOf(bank, g)));
+  const gapOf = (bank: Bank): number =>
+    gapOfGroups(
+      request.ties,
+      Array.from({ length: count }, (_, g) => valuesOf(bank, g)),
+    );
   const mayShare = (a: string | null, b: string | null): boolean => {
     if (a === null || b === null) return true;
     const [x, y] = [bySerial.get(a)!, bySerial.get(b)!];
     return (x.group ?? "") === (y.group ?? "") && (request.lots === undefined || x.lot === y.lot);
   };
-  const uncertainty = request.uncertainty ?? DEFAULTS.uncertainty;
+  const uncertainty = request.uncertainty ?? lotUncertainty(units) ?? DEFAULTS.uncertainty;
   const floor = gapFloor({ series: request.series, parallel: request.parallel, ties: request.ties, uncertainty });
   const goal = Math.max(placing.charging.gap, FLOOR_PART * floor);
   const hole = before.indexOf(out);
@@ -86,7 +95,10 @@ export function mend(units: readonly MeasuredUnit[], request: PlaceRequest, plac
   };
 
   /** Calls `offer` with the positions and new serials of every placing one exchange or one spare away. */
-  const eachNeighbour = (bank: Bank, offer: (p: number, inP: string | null, q: number, inQ: string | null) => void): void => {
+  const eachNeighbour = (
+    bank: Bank,
+    offer: (p: number, inP: string | null, q: number, inQ: string | null) => void,
+  ): void => {
     const fitted = new Set(bank);
     const free = placing.spares.filter((serial) => !fitted.has(serial));
     const groups = telling(bank);

@@ -1,5 +1,5 @@
 // Which spare may stand in for which unit, and what the gap becomes.
-import { bankGaps } from "./bank-gaps.ts";
+import { bankGaps } from "./bankGaps.ts";
 import type { Placing } from "./placing.ts";
 import type { PlaceRequest } from "./request.ts";
 import type { MeasuredUnit } from "./unit.ts";

@@ -1,5 +1,5 @@
 // What the searches hand back: groups of unit indices, the charging gap, and what is proven about it.
-import type { BoundKind } from "./bound-matrix.ts";
+import type { BoundKind } from "./boundMatrix.ts";
 
 export interface Solution {
   /** Unit indices by stage (cross-tied) or string. */
@@ -21,4 +21,5 @@ export interface SearchStep {
 /** Two gaps count as equal within this. */
 const SAME = 1e-12;
 
-export const isOptimal = ({ gap, lowerBound }: Pick<Solution, "gap" | "lowerBound">): boolean => gap - lowerBound <= SAME;
+export const isOptimal = ({ gap, lowerBound }: Pick<Solution, "gap" | "lowerBound">): boolean =>
+  gap - lowerBound <= SAME;

@@ -40,7 +40,14 @@ export function stagesGap(values: readonly number[], groups: readonly (readonly 
 }
 
 export function stringsGap(values: readonly number[], groups: readonly (readonly number[])[]): number {
-  return Math.max(...groups.map((group) => stagesGap(values, group.map((i) => [i]))));
+  return Math.max(
+    ...groups.map((group) =>
+      stagesGap(
+        values,
+        group.map((i) => [i]),
+      ),
+    ),
+  );
 }
 
 /** The least gap over every division. */

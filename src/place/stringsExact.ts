@@ -6,7 +6,7 @@
  * Followers are tried from the smallest sufficient sums up where that is quick. Exact for any number of units as long as the effort
  * lasts. Source: [methods-derived]; compared with full enumeration in the tests.
  */
-import { prefixLeast } from "./bound-strings.ts";
+import { prefixLeast } from "./boundStrings.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 
 export interface StringsProblem {
@@ -98,7 +98,8 @@ export function* exactStrings(problem: StringsProblem, work: Effort): Generator<
     held.push([at]);
     follow(at, at + 1, series - 1, 0, worst, spares);
     held.pop();
-    if (spares > 0 && !stopped && worst > least * (1 + FINEST) && least < problem.target) lead(at + 1, worst, spares - 1);
+    if (spares > 0 && !stopped && worst > least * (1 + FINEST) && least < problem.target)
+      lead(at + 1, worst, spares - 1);
     used[at] = 0;
   };
 

@@ -1,6 +1,6 @@
 // What balancing resistors do to the holding gap of a placing, and to the best that re-placing could do beside them.
-import { type Read, accepted } from "../quantity/index.ts";
-import { bankGaps } from "./bank-gaps.ts";
+import { accepted, type Read } from "../quantity/index.ts";
+import { bankGaps } from "./bankGaps.ts";
 import { place } from "./place.ts";
 import type { Placing } from "./placing.ts";
 import type { PlaceRequest } from "./request.ts";

@@ -1,17 +1,17 @@
 // Finds and certifies the stages of a cross-tied bank: first placing, exchanges, and a proof where the lot is small.
 import { board, groupsOf, recount } from "./board.ts";
-import { type Bound, matrixBound } from "./bound-matrix.ts";
+import { type Bound, matrixBound } from "./boundMatrix.ts";
 import { type Constraints, lotRange, mayFormGroup } from "./constraints.ts";
 import { descend } from "./descent.ts";
 import { type Effort, mayGoOn, settle, share } from "./effort.ts";
-import { exactHalves, fitsHalves } from "./exact-halves.ts";
-import { exactMatrix, fitsExactSearch } from "./exact-matrix.ts";
-import { firstPlacing } from "./first-placings.ts";
+import { exactHalves, fitsHalves } from "./exactHalves.ts";
+import { exactMatrix, fitsExactSearch } from "./exactMatrix.ts";
+import { firstPlacing } from "./firstPlacings.ts";
 import { stageGap } from "./gap.ts";
 import type { Random } from "./random.ts";
 import { shake } from "./shake.ts";
 import type { SearchStep, Solution } from "./solution.ts";
-import { cutStrings } from "./strings-cut.ts";
+import { cutStrings } from "./stringsCut.ts";
 
 export interface StagesTask {
   /** Whole numbers in proportion to capacitance. */
@@ -35,8 +35,7 @@ const BEFORE_PROOF = 100_000;
 const SHAKE_ABOVE = 1e-4;
 const SHAKES_PER_UNIT = 60;
 
-const sumOf = (values: Float64Array, group: readonly number[]): number =>
-  group.reduce((sum, i) => sum + values[i]!, 0);
+const sumOf = (values: Float64Array, group: readonly number[]): number => group.reduce((sum, i) => sum + values[i]!, 0);
 
 const gapOf = (values: Float64Array, groups: readonly (readonly number[])[]): number =>
   stageGap(

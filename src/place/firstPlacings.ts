@@ -1,6 +1,6 @@
 // Quick first placings of a cross-tied bank; the searches start from the best of them, so that none of them is ever better.
 import { stageGap } from "./gap.ts";
-import { largestDifferencing } from "./largest-differencing.ts";
+import { largestDifferencing } from "./largestDifferencing.ts";
 
 const fallingOrder = (values: ArrayLike<number>): number[] =>
   Array.from({ length: values.length }, (_, i) => i).sort((a, b) => values[b]! - values[a]! || a - b);

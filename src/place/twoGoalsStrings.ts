@@ -11,7 +11,7 @@
 import type { BoardRules } from "./board.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 import type { Random } from "./random.ts";
-import type { Gaps } from "./two-goals.ts";
+import type { Gaps } from "./twoGoals.ts";
 
 export interface StringGoals {
   readonly series: number;
@@ -37,7 +37,12 @@ const least = (t: Float64Array): number => {
 };
 
 /** Works on `slots` in place (string by string, then the spares); ends at the best placing within the limit. */
-export function* holdStrings(slots: Int32Array, goals: StringGoals, random: Random, work: Effort): Generator<Gaps, Gaps> {
+export function* holdStrings(
+  slots: Int32Array,
+  goals: StringGoals,
+  random: Random,
+  work: Effort,
+): Generator<Gaps, Gaps> {
   const { series, strings, limit, moves, rules } = goals;
   const placed = series * strings;
   const reach = goals.spares ? slots.length : placed;
