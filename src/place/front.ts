@@ -103,7 +103,12 @@ export function placingFront(units: readonly MeasuredUnit[], request: PlaceReque
     if (answer.complete) return finishFront(answer.points, true);
   }
 
-  const floor = gapFloor({ series, parallel, ties, uncertainty: request.uncertainty || lotUncertainty(units) || DEFAULTS.uncertainty });
+  const floor = gapFloor({
+    series,
+    parallel,
+    ties,
+    uncertainty: request.uncertainty || lotUncertainty(units) || DEFAULTS.uncertainty,
+  });
   const random = seeded(request.seed ?? DEFAULTS.seed);
   const work = effort(Math.max(request.moves ?? DEFAULTS.moves, 1), request.within);
   const index = new Map(pool.map((unit, i) => [unit.serial, i]));

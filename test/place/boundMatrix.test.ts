@@ -30,7 +30,13 @@ describe("matrixBound(values, shape)", () => {
   });
 
   test("never above the optimum of full enumeration, 600 small lots with outliers and two-valued lots", () => {
-    const shapes = [[2, 3], [3, 2], [3, 3], [4, 2], [2, 4]] as const;
+    const shapes = [
+      [2, 3],
+      [3, 2],
+      [3, 3],
+      [4, 2],
+      [2, 4],
+    ] as const;
     let tight = 0;
     for (let seed = 1; seed <= 600; seed++) {
       const [stages, size] = shapes[seed % shapes.length]!;

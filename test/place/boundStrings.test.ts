@@ -9,7 +9,14 @@ describe("prefixLeast(falling, series, strings)", () => {
 
 describe("stringsBound(capacitances, series, strings)", () => {
   test("never above the optimum of full enumeration, with and without spares, 300 small lots", () => {
-    const shapes = [[2, 2, 0], [3, 2, 0], [2, 3, 1], [3, 2, 2], [4, 2, 1], [3, 3, 0]] as const;
+    const shapes = [
+      [2, 2, 0],
+      [3, 2, 0],
+      [2, 3, 1],
+      [3, 2, 2],
+      [4, 2, 1],
+      [3, 3, 0],
+    ] as const;
     for (let seed = 1; seed <= 300; seed++) {
       const [series, strings, spares] = shapes[seed % shapes.length]!;
       const values = wholes(series * strings + spares, seed);

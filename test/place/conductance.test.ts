@@ -1,7 +1,10 @@
 import { describe, expect, test } from "vitest";
 import { conductancesOf } from "../../src/place/conductance.ts";
 
-const lot = [{ serial: "a", capacitance: 1e-3, leakage: 4e-4 }, { serial: "b", capacitance: 1e-3, leakage: 2e-4 }];
+const lot = [
+  { serial: "a", capacitance: 1e-3, leakage: 4e-4 },
+  { serial: "b", capacitance: 1e-3, leakage: 2e-4 },
+];
 const asked = { series: 2, parallel: 1, ties: "cross-tied" } as const;
 
 describe("conductancesOf(units, request)", () => {
@@ -13,7 +16,9 @@ describe("conductancesOf(units, request)", () => {
   });
   test("what is not known is said, never taken for zero", () => {
     expect(conductancesOf([lot[0]!, { serial: "c", capacitance: 1e-3 }], asked)).toEqual({
-      known: false, why: "missing", serials: ["c"],
+      known: false,
+      why: "missing",
+      serials: ["c"],
     });
     expect(conductancesOf(lot, { ...asked, balanceConductance: 1e-5 })).toMatchObject({ why: "no test voltage" });
     expect(conductancesOf([lot[0]!, { ...lot[1]!, leakage: 0 }], asked)).toMatchObject({ why: "zero", serials: ["b"] });

@@ -7,7 +7,11 @@ import { units } from "./lots.ts";
 
 const start = (lot: ReturnType<typeof units>, request: PlaceRequest) => {
   const { values } = toLattice(lot.map((unit) => unit.capacitance));
-  return constrainedStart(constraintsOf(lot, request), lot.map((_, i) => i), values);
+  return constrainedStart(
+    constraintsOf(lot, request),
+    lot.map((_, i) => i),
+    values,
+  );
 };
 const asked: PlaceRequest = { series: 4, parallel: 4, ties: "cross-tied" };
 const lotOf = (count: number, ofA: number) =>
@@ -34,12 +38,18 @@ describe("constrainedStart(rule, order, values)", () => {
     expect(start(lotOf(16, 6), { ...asked, lots: "apart" }).ok).toBe(false);
   });
   test("pins are where they were put; pins that break a wish are refused", () => {
-    const pins = [{ serial: "U001", group: 2 }, { serial: "U016", group: 0 }];
+    const pins = [
+      { serial: "U001", group: 2 },
+      { serial: "U016", group: 0 },
+    ];
     const made = start(lotOf(16, 8), { ...asked, lots: "apart", pins });
     if (!made.ok) throw new Error(made.why);
     expect(made.groups[2]).toContain(0);
     expect(made.groups[0]).toContain(15);
-    const clash = [{ serial: "U001", group: 0 }, { serial: "U016", group: 0 }];
+    const clash = [
+      { serial: "U001", group: 0 },
+      { serial: "U016", group: 0 },
+    ];
     expect(start(lotOf(16, 8), { ...asked, lots: "apart", pins: clash }).ok).toBe(false);
   });
   test("a stage that takes one size group only gets that one", () => {

@@ -16,10 +16,17 @@ describe("constraintsOf(units, request)", () => {
   });
   test("lots make classes whether mixed or apart; a pin fixes a unit; a polarity group makes a label", () => {
     expect(constraintsOf(lot, { ...asked, lots: "mix" }).rules.classes).toBe(2);
-    expect(constraintsOf(lot, { ...asked, lots: "apart" }).label[0]).not.toBe(constraintsOf(lot, { ...asked, lots: "apart" }).label[7]);
+    expect(constraintsOf(lot, { ...asked, lots: "apart" }).label[0]).not.toBe(
+      constraintsOf(lot, { ...asked, lots: "apart" }).label[7],
+    );
     const pinned = constraintsOf(lot, { ...asked, pins: [{ serial: "U003", group: 1 }] });
     expect([pinned.any, pinned.rules.fixed[2], pinned.pinnedTo[2]]).toEqual([true, 1, 1]);
-    expect(constraintsOf(lot.map((u, i) => ({ ...u, group: i < 4 ? "axial" : "snap-in" })), asked).any).toBe(true);
+    expect(
+      constraintsOf(
+        lot.map((u, i) => ({ ...u, group: i < 4 ? "axial" : "snap-in" })),
+        asked,
+      ).any,
+    ).toBe(true);
   });
 });
 
@@ -36,7 +43,11 @@ describe("mayFormGroup(rule, ranges)(members)", () => {
     expect([apart([0, 1, 2, 3]), apart([0, 1, 2, 4])]).toEqual([true, false]);
     const mix = mayFormGroup(constraintsOf(lot, { ...asked, lots: "mix" }), new Map([["A", [2, 2] as const]]));
     expect([mix([0, 1, 4, 5]), mix([0, 1, 2, 4])]).toEqual([true, false]);
-    const pins = [{ serial: "U001", group: 0 }, { serial: "U002", group: 0 }, { serial: "U003", group: 1 }];
+    const pins = [
+      { serial: "U001", group: 0 },
+      { serial: "U002", group: 0 },
+      { serial: "U003", group: 1 },
+    ];
     const pinned = mayFormGroup(constraintsOf(lot, { ...asked, pins }), new Map());
     expect([pinned([0, 1, 4, 5]), pinned([0, 4, 5, 6]), pinned([0, 1, 2, 4])]).toEqual([true, false, false]);
   });

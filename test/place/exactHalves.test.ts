@@ -16,7 +16,10 @@ describe("exactHalves(values, work)", () => {
   });
   test("only two stages without spares fit, up to 32 units", () => {
     expect([fitsHalves(24, 2, 12), fitsHalves(25, 2, 12), fitsHalves(24, 3, 8), fitsHalves(34, 2, 17)]).toEqual([
-      true, false, false, false,
+      true,
+      false,
+      false,
+      false,
     ]);
   });
 });

@@ -15,7 +15,16 @@ const solve = (values: readonly number[], stages: number, size: number, more: ob
 
 describe("exactMatrix(problem, work)", () => {
   test("equals full enumeration on 400 small lots, with and without spares", () => {
-    const shapes = [[2, 3, 0], [3, 2, 0], [3, 3, 0], [4, 2, 0], [5, 2, 0], [2, 3, 2], [3, 2, 3], [2, 4, 1]] as const;
+    const shapes = [
+      [2, 3, 0],
+      [3, 2, 0],
+      [3, 3, 0],
+      [4, 2, 0],
+      [5, 2, 0],
+      [2, 3, 2],
+      [3, 2, 3],
+      [2, 4, 1],
+    ] as const;
     for (let seed = 1; seed <= 400; seed++) {
       const [stages, size, spares] = shapes[seed % shapes.length]!;
       const values = wholes(stages * size + spares, seed).map((v, i) => (seed % 5 === 0 && i < 2 ? 2 * v : v));
@@ -50,9 +59,7 @@ describe("exactMatrix(problem, work)", () => {
     const held = solve([1, 5, 6, 2, 4, 6, 3, 3, 6], 3, 3, { inHand: 1e-9, target: 1e-9 });
     expect(held).toMatchObject({ groups: null, proven: true });
     const values = Float64Array.from(wholes(24, 3, 9000, 11000));
-    const short = finish(
-      exactMatrix({ values, stages: 8, size: 3, inHand: 0.5, target: 0 }, effort(3000)),
-    );
+    const short = finish(exactMatrix({ values, stages: 8, size: 3, inHand: 0.5, target: 0 }, effort(3000)));
     expect(short.proven).toBe(false);
   });
 });

@@ -37,7 +37,17 @@ describe("exchangeLists(board).nearest(one, other, class, depth, wanted)", () =>
 
   test("no free units of a class: no exchange", () => {
     const rules = { classOf: Int32Array.from([0, 0, 1, 1]), classes: 2, fixed: Uint8Array.from([0, 0, 0, 0]) };
-    const lists = exchangeLists(board(Float64Array.from([1, 2, 3, 4]), [[0, 1], [2, 3]], rules), seeded(1));
+    const lists = exchangeLists(
+      board(
+        Float64Array.from([1, 2, 3, 4]),
+        [
+          [0, 1],
+          [2, 3],
+        ],
+        rules,
+      ),
+      seeded(1),
+    );
     expect(lists.nearest(0, 1, 0, 2, 1).size).toBe(0);
   });
 });

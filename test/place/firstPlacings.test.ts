@@ -6,7 +6,11 @@ import { differencingRival, largestFirstRival, snakeRival } from "./rivals.ts";
 
 describe("snake, largestFirst, firstPlacing (values, stages)", () => {
   test("by hand: 6,5,4,3,2,1 in 3 stages by snake is 7,7,7", () => {
-    expect(snake([6, 5, 4, 3, 2, 1], 3).map((g) => g.map((i) => 6 - i))).toEqual([[6, 1], [5, 2], [4, 3]]);
+    expect(snake([6, 5, 4, 3, 2, 1], 3).map((g) => g.map((i) => 6 - i))).toEqual([
+      [6, 1],
+      [5, 2],
+      [4, 3],
+    ]);
   });
   test("never worse than the rules written out again, 80 lots; every stage gets the same count", () => {
     for (const kind of KINDS) {

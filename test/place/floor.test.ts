@@ -37,7 +37,11 @@ describe("gapFloor(shape)", () => {
     const tries = 2000;
     for (let k = 0; k < tries; k++) {
       const groups = Array.from({ length: 4 }, () => draw(4));
-      if (ties === "cross-tied") sum += stageGap(groups.map((g) => g.reduce((s, v) => s + v, 0)), 4);
+      if (ties === "cross-tied")
+        sum += stageGap(
+          groups.map((g) => g.reduce((s, v) => s + v, 0)),
+          4,
+        );
       else sum += Math.max(...groups.map((g) => stageGap(g, 4)));
     }
     const floor = gapFloor({ ...shape, ties, uncertainty: 0.01 });
@@ -57,7 +61,10 @@ describe("honestDigits(relative) and voltageUncertainty(shape)", () => {
     [0, 9],
   ])("a doubt of %f leaves %i digits", (doubt, digits) => expect(honestDigits(doubt)).toBe(digits));
   test("a stage averages its units, a unit in a string does not", () => {
-    expect(voltageUncertainty({ series: 4, parallel: 4, ties: "cross-tied", uncertainty: 0.003 })).toBeCloseTo(0.003, 12);
+    expect(voltageUncertainty({ series: 4, parallel: 4, ties: "cross-tied", uncertainty: 0.003 })).toBeCloseTo(
+      0.003,
+      12,
+    );
     expect(voltageUncertainty({ series: 4, parallel: 4, ties: "strings", uncertainty: 0.003 })).toBeCloseTo(0.006, 12);
   });
 });

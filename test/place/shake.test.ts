@@ -20,7 +20,11 @@ describe("shake(board, moves, random, work)", () => {
     const work = effort(1e6);
     shake(at, 20_000, seeded(1), work);
     expect(stageGap(at.sums, 6)).toBeLessThan(before / 50);
-    expect(groupsOf(at).flat().sort((a, b) => a - b)).toEqual(Array.from({ length: 60 }, (_, i) => i));
+    expect(
+      groupsOf(at)
+        .flat()
+        .sort((a, b) => a - b),
+    ).toEqual(Array.from({ length: 60 }, (_, i) => i));
     expect(work.spent).toBe(20_000);
   });
   test("the same seed gives the same placing", () => {

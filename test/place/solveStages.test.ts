@@ -10,7 +10,11 @@ import { bestGap, everyDivision, stagesGap } from "./brute.ts";
 import { wholes } from "./lots.ts";
 
 const solve = (lot: readonly number[], request: Omit<PlaceRequest, "ties">, marks?: readonly string[], moves = 3e6) => {
-  const measured = lot.map((capacitance, i) => ({ serial: String(i), capacitance, ...(marks ? { lot: marks[i]! } : {}) }));
+  const measured = lot.map((capacitance, i) => ({
+    serial: String(i),
+    capacitance,
+    ...(marks ? { lot: marks[i]! } : {}),
+  }));
   const rule = constraintsOf(measured, { ...request, ties: "cross-tied" });
   const values = Float64Array.from(lot);
   const order = lot.map((_, i) => i);
@@ -31,7 +35,11 @@ describe("solveStages(task, random, work)", () => {
   test("pins: the optimum of full enumeration under them, and each unit where it is pinned, 40 lots", () => {
     for (let seed = 1; seed <= 40; seed++) {
       const lot = wholes(9, seed);
-      const pins = [{ serial: "0", group: 2 }, { serial: "1", group: 2 }, { serial: "5", group: 0 }];
+      const pins = [
+        { serial: "0", group: 2 },
+        { serial: "1", group: 2 },
+        { serial: "5", group: 0 },
+      ];
       const made = solve(lot, { series: 3, parallel: 3, pins });
       let best = Number.POSITIVE_INFINITY;
       everyDivision(9, { groups: 3, size: 3 }, (groups) => {

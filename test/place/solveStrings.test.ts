@@ -13,7 +13,13 @@ const solve = (lot: readonly number[], request: Omit<PlaceRequest, "ties">, move
   const measured = lot.map((capacitance, i) => ({ serial: String(i), capacitance }));
   const rule = constraintsOf(measured, { ...request, ties: "strings" });
   const values = Float64Array.from(lot);
-  const start = rule.any ? constrainedStart(rule, lot.map((_, i) => i), values) : { ok: true as const, groups: [] };
+  const start = rule.any
+    ? constrainedStart(
+        rule,
+        lot.map((_, i) => i),
+        values,
+      )
+    : { ok: true as const, groups: [] };
   if (!start.ok) throw new Error(start.why);
   return finish(solveStrings({ values, rule, start: start.groups, stopAt: 0, prove: true }, seeded(1), effort(moves)));
 };

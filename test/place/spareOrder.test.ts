@@ -21,7 +21,11 @@ describe("keepOrder(units, outliers)", () => {
       unit("good", 6, 1.2, 1.3),
     ];
     expect(keepOrder(lot, new Set(["wild"])).map((i) => lot[i]!.serial)).toEqual([
-      "good", "small", "resistive", "leaky", "wild",
+      "good",
+      "small",
+      "resistive",
+      "leaky",
+      "wild",
     ]);
   });
   test("a reading that was not taken does not count against a unit", () => {

@@ -20,7 +20,16 @@ describe("descendStrings(state, wanted, random, work)", () => {
   test("reaches the enumerated optimum of 3 strings of 3 in 40 of 40 lots", () => {
     for (let seed = 1; seed <= 40; seed++) {
       const values = wholes(9, seed);
-      const made = run(values, 3, [[0, 1, 2], [3, 4, 5], [6, 7, 8]], 100_000);
+      const made = run(
+        values,
+        3,
+        [
+          [0, 1, 2],
+          [3, 4, 5],
+          [6, 7, 8],
+        ],
+        100_000,
+      );
       expect(stringsGap(values, made)).toBeCloseTo(bestGap(values, { groups: 3, size: 3 }, stringsGap), 12);
     }
   });

@@ -7,13 +7,24 @@ import { capacitances, wholes } from "./lots.ts";
 
 describe("exactStrings(problem, work)", () => {
   test("equals full enumeration on 250 small lots, with and without spares and equal units", () => {
-    const shapes = [[3, 2, 0], [3, 3, 0], [4, 2, 0], [2, 4, 0], [3, 2, 2], [4, 2, 1], [2, 3, 2]] as const;
+    const shapes = [
+      [3, 2, 0],
+      [3, 3, 0],
+      [4, 2, 0],
+      [2, 4, 0],
+      [3, 2, 2],
+      [4, 2, 1],
+      [2, 3, 2],
+    ] as const;
     for (let seed = 1; seed <= 250; seed++) {
       const [series, strings, spares] = shapes[seed % shapes.length]!;
       const values = wholes(series * strings + spares, seed, seed % 4 === 0 ? 95 : 50, seed % 4 === 0 ? 105 : 150);
       const order = values.map((_, i) => i).sort((a, b) => values[a]! - values[b]!);
       const falling = Float64Array.from(order, (i) => 1 / values[i]!);
-      const search = exactStrings({ falling, series, strings, inHand: 0, target: Number.POSITIVE_INFINITY }, effort(1e8));
+      const search = exactStrings(
+        { falling, series, strings, inHand: 0, target: Number.POSITIVE_INFINITY },
+        effort(1e8),
+      );
       const answer = finish(search);
       expect(answer.proven).toBe(true);
       const groups = answer.groups!.map((string) => string.map((k) => order[k]!));
@@ -23,7 +34,9 @@ describe("exactStrings(problem, work)", () => {
     }
   });
   test("out of effort: not proven", () => {
-    const falling = Float64Array.from(capacitances("lots", 60, 2), (c) => 1 / c).sort().reverse();
+    const falling = Float64Array.from(capacitances("lots", 60, 2), (c) => 1 / c)
+      .sort()
+      .reverse();
     const search = exactStrings({ falling, series: 6, strings: 10, inHand: 5, target: 6 }, effort(5000));
     expect(finish(search).proven).toBe(false);
   });
