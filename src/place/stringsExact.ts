@@ -6,7 +6,7 @@
  * Followers are tried from the smallest sufficient sums up where that is quick. Exact for any number of units as long as the effort
  * lasts. Source: [methods-derived]; compared with full enumeration in the tests.
  */
-import { prefixLeast } from "./bound-strings.ts";
+import { prefixLeast } from "./boundStrings.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 
 export interface StringsProblem {

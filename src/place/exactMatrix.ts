@@ -7,10 +7,10 @@
  * Without spares the last stage is what is left over, and m falls from T/n until the convexity bound meets the gap in hand.
  * Holds for at most 31 units (bit masks). Source: [Korf2009] for the recursion over subsets; [methods-derived] window and bounds.
  */
-import { gapFromLeast, pigeonholeLeast } from "./bound-matrix.ts";
+import { gapFromLeast, pigeonholeLeast } from "./boundMatrix.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 import { stageGap } from "./gap.ts";
-import { choose, subsetBuilder } from "./subset-sums.ts";
+import { choose, subsetBuilder } from "./subsetSums.ts";
 
 /** Subsets of one stage that are worth listing. */
 export const MOST_SUBSETS = 750_000;

@@ -1,17 +1,17 @@
 // Finds and certifies the stages of a cross-tied bank: first placing, exchanges, and a proof where the lot is small.
-import { board, groupsOf } from "./board.ts";
-import { type Bound, matrixBound } from "./bound-matrix.ts";
+import { board, groupsOf, recount } from "./board.ts";
+import { type Bound, matrixBound } from "./boundMatrix.ts";
 import { type Constraints, lotRange, mayFormGroup } from "./constraints.ts";
 import { descend } from "./descent.ts";
 import { type Effort, mayGoOn, settle, share } from "./effort.ts";
-import { exactHalves, fitsHalves } from "./exact-halves.ts";
-import { exactMatrix, fitsExactSearch } from "./exact-matrix.ts";
+import { exactHalves, fitsHalves } from "./exactHalves.ts";
+import { exactMatrix, fitsExactSearch } from "./exactMatrix.ts";
+import { firstPlacing } from "./firstPlacings.ts";
 import { stageGap } from "./gap.ts";
-import { largestDifferencing } from "./largest-differencing.ts";
 import type { Random } from "./random.ts";
 import { shake } from "./shake.ts";
 import type { SearchStep, Solution } from "./solution.ts";
-import { cutStrings } from "./strings-cut.ts";
+import { cutStrings } from "./stringsCut.ts";
 
 export interface StagesTask {
   /** Whole numbers in proportion to capacitance. */
@@ -93,12 +93,13 @@ export function* solveStages(task: StagesTask, random: Random, work: Effort): Ge
   const used = task.order.slice(0, stages * size).sort((a, b) => a - b);
   const first = rule.any
     ? task.start
-    : largestDifferencing(
+    : firstPlacing(
         used.map((i) => values[i]!),
         stages,
       ).map((group) => group.map((k) => used[k]!));
   const at = board(values, first, rule.rules);
   let gap = stageGap(at.sums, stages);
+  const begun = { gap, slots: Int32Array.from(at.slots) };
   const done = (): Solution => ({ groups: groupsOf(at), gap, lowerBound: bound.gap, boundKind: bound.kind });
   yield { phase: "first", gap, moves: work.spent };
   const test = task.prove && fitsExactSearch(values.length, size) ? maskTest(rule) : null;
@@ -124,6 +125,12 @@ export function* solveStages(task: StagesTask, random: Random, work: Effort): Ge
       yield* refine(false, Math.min(quickly, BEFORE_SPARES));
       if (gap > target) yield* refine(true, quickly);
     } else yield* refine(false, quickly);
+  }
+  if (gap > begun.gap) {
+    // The effort ran out between the shaking and the refining.
+    at.slots.set(begun.slots);
+    recount(at);
+    gap = begun.gap;
   }
   if (test === null || gap <= bound.gap || !mayGoOn(work, 0)) return done();
   const must = rule.pinnedTo.reduce((mask, group, i) => (group >= 0 ? mask | (1 << i) : mask), 0);

@@ -1,12 +1,12 @@
 // Finds and certifies independent strings: cut from the sorted lot, swaps, then a search that can prove the best.
-import { stringsBound } from "./bound-strings.ts";
+import { stringsBound } from "./boundStrings.ts";
 import type { Constraints } from "./constraints.ts";
 import { type Effort, mayGoOn, settle, share } from "./effort.ts";
 import type { Random } from "./random.ts";
 import type { SearchStep, Solution } from "./solution.ts";
-import { cutStrings, evenness } from "./strings-cut.ts";
-import { descendStrings } from "./strings-descent.ts";
-import { exactStrings } from "./strings-exact.ts";
+import { cutStrings, evenness } from "./stringsCut.ts";
+import { descendStrings } from "./stringsDescent.ts";
+import { exactStrings } from "./stringsExact.ts";
 
 export interface StringsTask {
   /** In proportion to capacitance. */

@@ -11,7 +11,7 @@
  * With spares the same from the first leader p <= s + 1 on, and the best p counts.
  * Holds for any division into strings. Source: [methods-derived]; compared with full enumeration in the tests.
  */
-import type { Bound } from "./bound-matrix.ts";
+import type { Bound } from "./boundMatrix.ts";
 
 /** Upper bound on min t over `strings` strings of `series` units out of `falling` (elastances, sorted falling). */
 export function prefixLeast(falling: ArrayLike<number>, series: number, strings: number): number {

@@ -1,7 +1,7 @@
 // For each stage, the sums of small sets of its units, and the exchange of two sets nearest to a wanted transfer.
 import type { Board } from "./board.ts";
 import type { Random } from "./random.ts";
-import { type SubsetSums, subsetBuilder } from "./subset-sums.ts";
+import { type SubsetSums, subsetBuilder } from "./subsetSums.ts";
 
 /** Sets are drawn from so many units of a stage at most. */
 export const SAMPLE = 10;

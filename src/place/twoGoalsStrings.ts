@@ -11,7 +11,7 @@
 import type { BoardRules } from "./board.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 import type { Random } from "./random.ts";
-import type { Gaps } from "./two-goals.ts";
+import type { Gaps } from "./twoGoals.ts";
 
 export interface StringGoals {
   readonly series: number;

@@ -1,6 +1,6 @@
 // Two stages and no spares: the exact best division, from the sorted sums of the two halves of the lot.
 import type { Effort } from "./effort.ts";
-import { subsetBuilder } from "./subset-sums.ts";
+import { subsetBuilder } from "./subsetSums.ts";
 
 const MOST_UNITS = 32;
 
