@@ -21,7 +21,7 @@ export function askName(state: State): Change {
 
 export function editName(state: State, edit: LineEdit): Change {
   if (state.prompt === null) return still(state);
-  return still({ ...state, prompt: { ...state.prompt, line: editLine(state.prompt.line, edit) } });
+  return still({ ...state, prompt: { ...state.prompt, line: editLine(state.prompt.line, edit) }, notice: null });
 }
 
 export function confirm(state: State): Change {

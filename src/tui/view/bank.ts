@@ -26,6 +26,8 @@ import { emptyRows, paragraph } from "./words.ts";
 
 /** A row of units as drawn: at most so many, then how many there are. */
 const MOST_DRAWN = 6;
+/** From here on each stage also says between which potentials it stands. */
+const ROOM_FOR_POTENTIALS = 120;
 
 function unitsDrawn({ parallel, ties }: LayoutResult, ascii: boolean): string {
   const unit = ascii ? "][" : "┤├";
@@ -47,10 +49,14 @@ function stageRows(layout: LayoutResult, state: State, columns: number): readonl
   const words = `${shownWorst(worst, "voltage")} of ${shownLimit(limit, "voltage")}`;
   const percent = shareOfLimit(layout) === null ? "" : `, ${shownWorst(shareOfLimit(layout), "fraction")}`;
   const used = 2 + numberWidth + 1 + drawnWidth(parallel) + 1 + units.length + 2 + 1 + words.length + percent.length;
-  const bar = Math.max(6, Math.min(60, columns - used));
+  const bar = Math.max(6, Math.min(columns < ROOM_FOR_POTENTIALS ? 60 : 40, columns - used));
   const full = Math.max(limit, worst ?? 0, share.even) * 1.1;
   const over = worst !== null && worst > limit;
   const drawn = drawBar(worst ?? Number.NaN, { columns: bar, full, limit, ascii: state.look.ascii });
+  const between = (stage: number): string =>
+    columns < ROOM_FOR_POTENTIALS
+      ? ""
+      : `   between ${shown(share.even * (series - stage), "voltage")} and ${shown(share.even * (series - stage - 1), "voltage")} if even`;
   return Array.from({ length: series }, (_, stage) =>
     rowOf(
       span(`  ${String(stage + 1).padStart(numberWidth)} `),
@@ -59,6 +65,7 @@ function stageRows(layout: LayoutResult, state: State, columns: number): readonl
       span(drawn, over ? "bad" : "good"),
       span(` ${words}${percent}`, over ? "bad" : "plain"),
       ...(over ? [span(" over", "bad")] : []),
+      span(between(stage), "quiet"),
     ),
   );
 }
