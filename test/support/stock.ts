@@ -28,7 +28,14 @@ export const STOCK = { name: "test.csv", parts: 4, faults: 0, note: "invented" }
 export const BRIEF = { energy: "2.4 kJ", voltage: "2.2 kV", ripple: "100 %" };
 
 export const stateWith = (changes: Partial<State> = {}): State => ({
-  ...initialState({ columns: 80, rows: 24, look: { colour: false, ascii: false }, stock: STOCK, values: BRIEF }),
+  ...initialState({
+    columns: 80,
+    rows: 24,
+    look: { colour: false, ascii: false },
+    stock: STOCK,
+    values: BRIEF,
+    extra: {},
+  }),
   ...changes,
 });
 
@@ -77,6 +84,7 @@ export function fakePorts(columns = 80, rows = 24, changes: Partial<ScreenPorts>
     engine,
     stock: STOCK,
     brief: BRIEF,
+    extra: {},
     loadSession: () => kept.session,
     saveSession: (text) => {
       kept.session = text;
@@ -86,10 +94,10 @@ export function fakePorts(columns = 80, rows = 24, changes: Partial<ScreenPorts>
       kept.aside = kept.session;
       return "session.unread";
     },
-    exportBill: (_brief, layout, path, replace): SaveAnswer => {
+    exportBill: (bill, path, replace): SaveAnswer => {
       if (files.has(path) && !replace) return { kind: "exists", path };
       if (path.startsWith("/full/")) return { kind: "trouble", words: "the disk is full" };
-      files.set(path, layout.id);
+      files.set(path, bill.layout);
       return { kind: "saved", path };
     },
     complain: (line) => complaints.push(line),

@@ -32,7 +32,7 @@ describe("compareLayouts(layouts)", () => {
     });
     expect(standings([base, light], "mass")).toEqual(["worst", "best"]);
     expect(standings([base, light], "energy, least")).toEqual(["worst", "best"]);
-    expect(standings([base, light], "capacitance, least")).toEqual([null, null]);
+    expect(standings([base, light], "C, least")).toEqual([null, null]);
   });
   test("of four: one best, one worst, the middle ones neither; ties share", () => {
     const masses = [3, 1, 2, 1].map((mass) => made({ mass }));

@@ -16,8 +16,9 @@ test("the ports of the tests say what real ones say about a file that is there",
   const read = engine.readBrief(BRIEF);
   if (!read.ok) throw new Error("brief");
   const layout = engine.check(read.value, { part: "flash-a", series: 7, parallel: 4, ties: "strings" });
-  if (layout === null) throw new Error("layout");
-  expect(ports.exportBill(read.value, layout, "a.csv", false)).toEqual({ kind: "saved", path: "a.csv" });
-  expect(ports.exportBill(read.value, layout, "a.csv", false)).toEqual({ kind: "exists", path: "a.csv" });
-  expect(ports.exportBill(read.value, layout, "a.csv", true)).toEqual({ kind: "saved", path: "a.csv" });
+  const bill = layout === null ? null : engine.bill(read.value, layout);
+  if (bill === null) throw new Error("bill");
+  expect(ports.exportBill(bill, "a.csv", false)).toEqual({ kind: "saved", path: "a.csv" });
+  expect(ports.exportBill(bill, "a.csv", false)).toEqual({ kind: "exists", path: "a.csv" });
+  expect(ports.exportBill(bill, "a.csv", true)).toEqual({ kind: "saved", path: "a.csv" });
 });

@@ -14,8 +14,8 @@ test("readSaved(savedText(state)) gives back brief, pins, choice and place", () 
     screen: "compare",
     selected: "x",
   });
-  const { values, pins, chosen, rank, frontOnly, screen, selected } = state;
-  expect(readSaved(savedText(state))).toEqual({ values, pins, chosen, rank, frontOnly, screen, selected });
+  const { values, extra, pins, chosen, rank, frontOnly, screen, selected } = state;
+  expect(readSaved(savedText(state))).toEqual({ values, extra, pins, chosen, rank, frontOnly, screen, selected });
 });
 
 describe("readSaved(text) of what is not ours", () => {

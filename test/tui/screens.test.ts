@@ -132,7 +132,10 @@ describe("ending", () => {
     open(80, 24, {
       loadSession: () => savedText(stateWith({ values: { ...BRIEF, energy: "1 kJ" }, pins, screen: "compare" })),
     });
-    await until((t) => t.includes("[3 compare (1)]") && t.includes("1 kJ at 2.2 kV") && t.includes("7s4p cross-tied"));
+    await until(
+      (t) =>
+        t.includes("[3 compare (1)]") && t.includes("1 kJ at 2.2 kV") && t.includes("7s4p") && t.includes("cross-tied"),
+    );
   });
 
   test("a failing save is told after the screen is left", async () => {

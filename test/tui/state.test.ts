@@ -4,7 +4,7 @@ import { ask, initialState, still } from "../../src/tui/state.ts";
 import { STOCK, stateWith } from "../support/stock.ts";
 
 test("initialState puts the caret behind the first field's text", () => {
-  const start = { columns: 80, rows: 24, look: { colour: true, ascii: false }, stock: STOCK };
+  const start = { columns: 80, rows: 24, look: { colour: true, ascii: false }, stock: STOCK, extra: {} };
   expect(initialState({ ...start, values: {} }).caret).toBe(0);
   expect(initialState({ ...start, values: { energy: "2.4 kJ" } }).caret).toBe(6);
 });
