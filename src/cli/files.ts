@@ -56,7 +56,7 @@ function trouble(error: unknown, file: string): Read<never> {
   const known = TROUBLES[code];
   if (known === undefined && code === "") throw error;
   const [name, want] = known ?? ["unreadable", "a file that the system can read and write"];
-  return refused({ code: name, place: { file }, read: code, want });
+  return refused({ code: name, place: { file }, read: `the system's answer ${code}`, want });
 }
 
 const refuse = (code: string, file: string, read: string, want: string): Read<never> =>

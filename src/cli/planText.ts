@@ -11,7 +11,7 @@ import { VERDICTS } from "./findingWords.ts";
 import { costWords, layoutText, money } from "./layoutText.ts";
 import { reasonWords } from "./reasonWords.ts";
 import { textTable } from "./table.ts";
-import { wrap } from "./wrap.ts";
+import { bullet, wrap } from "./wrap.ts";
 
 export interface PlanText {
   readonly result: PlanResult;
@@ -51,10 +51,11 @@ function fitting({ result, parts, rank, width }: PlanText): readonly string[] {
   const all = result.searched.layouts;
   const more = shown < all ? ` (first ${shown} of ${all}; --limit 0 for all)` : "";
   const plus = result.layouts.some((one) => (one.cost?.unpriced.length ?? 0) > 0)
-    ? "\n  + lines without a price are not in this cost"
+    ? "\n  +: lines without a price are not in this cost"
     : "";
+  const legend = "\n  worst: highest voltage of a unit over its limit; open: something is not assessed";
   return [
-    `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}${plus}`,
+    `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}${legend}${plus}`,
     `Best: ${visible(best.id)}\n${wrap(whyBest(result, rank), width, "  ")}\n${layoutText(best, unit, width)}`,
     frontText(result, width),
   ];
@@ -85,7 +86,7 @@ function rankedTable(layouts: readonly LayoutResult[], width: number): string {
         side: "right",
         rank: 3,
       },
-      { heading: "worst/limit", cell: worst, side: "right", rank: 2 },
+      { heading: "worst", cell: worst, side: "right", rank: 2 },
       { heading: "checks", cell: checks, rank: 1 },
       { heading: "volume", cell: (one) => formatQuantity(one.volume, "volume", { digits: 3 }), side: "right", rank: 4 },
       { heading: "mass", cell: (one) => formatQuantity(one.mass, "mass", { digits: 3 }), side: "right", rank: 5 },
@@ -142,7 +143,7 @@ function nothing({ result, width }: PlanText): readonly string[] {
     result.changes.length > 0
       ? [
           "Any one of these changes would do:",
-          ...result.changes.map((one) => wrap(`- ${changeWords(one)}`, width, "  ")),
+          ...result.changes.map((one) => bullet(changeWords(one, result.currency), width)),
         ]
       : ["No single change of the brief or the stock that was tried would do."];
   return ["NOTHING FITS. No part gives a layout that does what was asked within its limits.", changes.join("\n")];
@@ -168,5 +169,5 @@ function cautionText({ result, parts, width }: PlanText): string {
   const layout = result.layouts[0];
   const unit = layout && parts.find((part) => part.part === layout.part);
   const lines = cautionsOf(result.brief, layout && unit ? { layout, unit } : undefined);
-  return ["Cautions", ...lines.map(({ text }) => wrap(`- ${text}`, width, "  "))].join("\n");
+  return ["Cautions", ...lines.map(({ text }) => bullet(text, width))].join("\n");
 }
