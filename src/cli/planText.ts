@@ -7,8 +7,8 @@ import type { LayoutResult, PlanResult, Ranking, RefusedPart } from "../search/i
 import { askedText } from "./askedText.ts";
 import { cautionsOf } from "./cautions.ts";
 import { changeWords } from "./changeWords.ts";
-import { VERDICTS } from "./findingWords.ts";
-import { costWords, layoutText, money } from "./layoutText.ts";
+import { layoutText, money } from "./layoutText.ts";
+import { rankedTable } from "./rankedTable.ts";
 import { reasonWords } from "./reasonWords.ts";
 import { textTable } from "./table.ts";
 import { bullet, wrap } from "./wrap.ts";
@@ -59,58 +59,6 @@ function fitting({ result, parts, rank, width }: PlanText): readonly string[] {
     `Best: ${visible(best.id)}\n${wrap(whyBest(result, rank), width, "  ")}\n${layoutText(best, unit, width)}`,
     frontText(result, width),
   ];
-}
-
-function rankedTable(layouts: readonly LayoutResult[], width: number): string {
-  const worst = (one: LayoutResult): string => {
-    const { charging, holding, limit } = one.share;
-    if (charging === null || holding === null) return "not assessed";
-    return formatQuantity(Math.max(charging, holding) / limit, "fraction", { digits: 3, rounding: "up" });
-  };
-  const checks = (one: LayoutResult): string => {
-    const worstFirst = ["fail", "warn", "not assessed"] as const;
-    const found = worstFirst.find((verdict) => one.findings.some((f) => f.verdict === verdict));
-    return found === undefined ? "pass" : found === "not assessed" ? "open" : VERDICTS[found];
-  };
-  return textTable<LayoutResult>(
-    [
-      { heading: "#", cell: (_, i) => String(i + 1), side: "right" },
-      { heading: "part", cell: (one) => one.part, least: 14 },
-      { heading: "shape", cell: (one) => `${one.series}s${one.parallel}p` },
-      { heading: "ties", cell: (one) => one.ties },
-      { heading: "units", cell: (one) => String(one.units), side: "right" },
-      { heading: "cost", cell: costWords, side: "right" },
-      {
-        heading: "energy",
-        cell: (one) => formatQuantity(one.energy.low, "energy", { digits: 4, rounding: "down" }),
-        side: "right",
-        rank: 3,
-      },
-      { heading: "worst", cell: worst, side: "right", rank: 2 },
-      { heading: "checks", cell: checks, rank: 1 },
-      { heading: "volume", cell: (one) => formatQuantity(one.volume, "volume", { digits: 3 }), side: "right", rank: 4 },
-      { heading: "mass", cell: (one) => formatQuantity(one.mass, "mass", { digits: 3 }), side: "right", rank: 5 },
-      {
-        heading: "bleed",
-        cell: (one) =>
-          one.bleed.seconds === null
-            ? "none"
-            : formatQuantity(one.bleed.seconds, "time", { digits: 3, rounding: "up" }),
-        side: "right",
-        rank: 6,
-      },
-      {
-        heading: "balancing",
-        cell: (one) =>
-          one.balance === null ? "none" : formatQuantity(one.balance.resistance, "resistance", { digits: 4 }),
-        side: "right",
-        rank: 7,
-      },
-    ],
-    layouts,
-    width,
-    "  ",
-  );
 }
 
 function whyBest(result: PlanResult, rank: Ranking): string {
