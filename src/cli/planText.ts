@@ -50,12 +50,10 @@ function fitting({ result, parts, rank, width }: PlanText): readonly string[] {
   const shown = result.layouts.length;
   const all = result.searched.layouts;
   const more = shown < all ? ` (first ${shown} of ${all}; --limit 0 for all)` : "";
-  const plus = result.layouts.some((one) => (one.cost?.unpriced.length ?? 0) > 0)
-    ? "\n  +: lines without a price are not in this cost"
-    : "";
-  const legend = "\n  worst: highest voltage of a unit over its limit; open: something is not assessed";
+  const unpriced = result.layouts.some((one) => (one.cost?.unpriced.length ?? 0) > 0);
+  const legend = `worst: highest voltage of a unit over its limit; open: something is not assessed${unpriced ? "; +: lines without a price are left out" : ""}`;
   return [
-    `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}${legend}${plus}`,
+    `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}\n${wrap(legend, width, "  ")}`,
     `Best: ${visible(best.id)}\n${wrap(whyBest(result, rank), width, "  ")}\n${layoutText(best, unit, width)}`,
     frontText(result, width),
   ];
