@@ -17,7 +17,8 @@ function table(source: string) {
   const rows: Record<string, unknown>[] = [];
   const lines: number[] = [];
   const made = readTable(source, COLUMNS, "t.csv", (row) => {
-    rows.push(Object.fromEntries(Object.entries(row.values).filter(([, v]) => v !== undefined)));
+    const named = COLUMNS.map((column, i) => [column.key, row.values[i]] as const);
+    rows.push(Object.fromEntries(named.filter(([, v]) => v !== undefined)));
     lines.push(row.line);
   });
   const say = (r: { code: string; place: { line?: number; column?: number } }) =>
