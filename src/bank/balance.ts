@@ -12,7 +12,7 @@
 import type { ResistorFamily } from "../catalog/index.ts";
 import { lastAtMost } from "../quantity/index.ts";
 import { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
-import { largestBalance } from "./share.ts";
+import { holdingLine, largestBalance } from "./share.ts";
 
 /** More elements than this in one position is no balancing resistor that anyone builds. */
 const MOST_ELEMENTS = 400;
@@ -35,24 +35,28 @@ export const elementPower = (worst: number, resistance: number, spread: number, 
  * `bank.spread` is the family's tolerance. The result is written into `choice`, because the search calls this for every layout.
  */
 export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorFamily, choice: Choice): boolean {
-  const endless = bank.hold === Number.POSITIVE_INFINITY;
-  const bound = largestBalance(bank, limit);
-  const most = endless ? bound : largestBalanceForHold(bank, limit, bound);
-  const { values, voltage, lowest, highest, tolerance } = family;
+  // After an endless hold with a leakage current the worst voltage is a straight line in R, V_1 = base + slope R: the common case, kept short.
+  const straight = bank.hold === Number.POSITIVE_INFINITY && bank.leak.kind === "current";
+  const { base, slope } = straight ? holdingLine(bank) : NO_LINE;
+  const most =
+    straight && slope > 0 ? (limit - base) / slope : largestBalanceForHold(bank, limit, largestBalance(bank, limit));
+  const { values, voltage, lowest, highest, tolerance, step } = family;
   if (!(most > 0) || most < lowest * (1 - 1e-9)) return false;
-  const watts = family.power * family.derating;
+  const watts = family.power * family.derating * (1 - tolerance);
   // Whatever k is, R lies at most one step of the series below the smaller of R_max and one largest element.
-  const floor = holdWorst(bank, Math.min(most, highest) / family.step);
-  const reach = Math.min(most, highest * MOST_ELEMENTS) * (1 - tolerance);
-  const start = Math.max(floor / voltage, (floor * floor) / (reach * watts), 1);
+  const least = Math.min(most, highest) / step;
+  const floor = straight ? Math.min(base + slope * least, bank.voltage) : holdWorst(bank, least);
+  const start = Math.max(floor / voltage, (floor * floor) / (Math.min(most, highest * MOST_ELEMENTS) * watts), 1);
   for (let k = Math.ceil(start * (1 - 1e-9)); k <= MOST_ELEMENTS; k++) {
     const index = lastAtMost(values, Math.min(most / k, highest));
     if (index < 0) return false;
     const element = values[index] as number;
     const resistance = element * k;
-    const worst = holdWorst(bank, resistance);
+    const worst = straight ? Math.min(base + slope * resistance, bank.voltage) : holdWorst(bank, resistance);
+    // Within a finite hold a smaller R may divide worse than a larger one, when resistors are wider than units.
+    if (!straight && worst > limit * (1 + 1e-9)) continue;
     if (worst > voltage * k * (1 + 1e-9)) continue;
-    if (worst * worst > watts * resistance * (1 - tolerance) * k * (1 + 1e-9)) continue;
+    if (worst * worst > watts * resistance * k * (1 + 1e-9)) continue;
     choice.resistance = resistance;
     choice.element = element;
     choice.elements = k;
@@ -61,3 +65,5 @@ export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorF
   }
   return false;
 }
+
+const NO_LINE = { base: 0, slope: 0 };

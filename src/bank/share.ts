@@ -73,6 +73,17 @@ export function holdingWorst(chain: HoldingChain, resistance: number): number {
   return Math.min(v, voltage);
 }
 
+/** The line V_1 = base + slope R of holdingWorst for a leakage current and at least two in series (V, V/ohm), before it is cut off at V. */
+export function holdingLine({ voltage, series, sharing, spread, leak }: HoldingChain): {
+  readonly base: number;
+  readonly slope: number;
+} {
+  const victim = (series - 1) * (1 - spread);
+  const part = (1 + spread) / (victim + 1 + spread);
+  const drawn = leak.kind === "current" ? sharing * leak.amperes : 0;
+  return { base: voltage * part, slope: victim * drawn * part };
+}
+
 /**
  * Largest balancing resistance for which an endless hold keeps every stage at most `limit`, ohm.
  * Infinity when any does; 0 or less when none does (the resistor's own spread is too wide, or the limit too low).

@@ -3,6 +3,7 @@
 import { FIT } from "../bank/index.ts";
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
 import { stateOf } from "../catalog/index.ts";
+import { hazardFindings } from "../hazard/index.ts";
 import { type Finding, formatQuantity, type Verdict } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
@@ -50,6 +51,7 @@ export function findingsOf(input: FindingsInput): readonly Finding[] {
     reverse(input),
     energy(input),
     bleed(input),
+    ...hazards(input),
   ];
 }
 
@@ -167,9 +169,6 @@ function energy({ result, brief }: FindingsInput): Finding {
   });
 }
 
-/** Five minutes: the longest time that rules for power capacitors give (NEC 460.28 and IEEE 18, from memory). */
-const LONGEST_BLEED = 300;
-
 function bleed({ result }: FindingsInput): Finding {
   const { seconds, toVoltage } = result.bleed;
   const safe = formatQuantity(toVoltage, "voltage");
@@ -177,21 +176,26 @@ function bleed({ result }: FindingsInput): Finding {
     id: "bleed",
     state: "stored",
     value: seconds,
-    limit: LONGEST_BLEED,
+    limit: null,
     unit: "s",
-    source: "NEC-460",
+    source: "joulewright-design",
   } as const;
   if (seconds === null) {
-    return {
-      ...draft,
-      verdict: "warn",
-      margin: null,
-      note: `No balancing chain drains this bank to ${safe}: it needs a bleed resistor of its own, a dump and a shorting link.`,
-    };
+    const note = `No balancing chain drains this bank to ${safe}: it needs a bleed resistor of its own, a dump and a shorting link.`;
+    return { ...draft, verdict: "warn", margin: null, note };
   }
-  return atMost({
-    ...draft,
-    exceeded: "warn",
-    note: `Time to ${safe} through the balancing chain alone, high capacitance and high resistance; never trust it: dump, measure, short.`,
+  const note = `Time to ${safe} through the balancing chain alone, high capacitance and high resistance. No limit was given to judge it by. Never trust it: dump, measure, short.`;
+  return { ...draft, verdict: "not assessed", margin: null, note };
+}
+
+/** What can hurt, by the rules of the hazard layer; its own bleed finding is the one above. */
+function hazards({ result, unit, brief }: FindingsInput): readonly Finding[] {
+  const findings = hazardFindings({
+    capacitance: result.capacitance.high ?? result.capacitance.nominal,
+    voltage: brief.voltage * (1 + brief.overshoot),
+    safeVoltage: brief.touchSafe,
+    polarised: unit.polarised !== false,
+    bleedSeconds: result.bleed.seconds ?? Number.POSITIVE_INFINITY,
   });
+  return findings.filter((finding) => finding.id !== "bleed-time");
 }
