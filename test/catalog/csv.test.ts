@@ -82,10 +82,10 @@ describe("readRecords(text, take)", () => {
   });
 
   test("a broken quote late in a long text: what stands before it is kept, and its line is right", () => {
-    const body = "p,q\n".repeat(800000);
+    const body = "p,q\n".repeat(550000);
     const made = records(`a,b\n${body}x"y,1\nlast,2\n`);
-    expect(made.rows?.length).toBe(800002);
-    expect(made.faults).toEqual(["broken-quotes 800002"]);
-    expect(made.rows?.at(-1)).toEqual([800003, "last", "2"]);
+    expect(made.rows?.length).toBe(550002);
+    expect(made.faults).toEqual(["broken-quotes 550002"]);
+    expect(made.rows?.at(-1)).toEqual([550003, "last", "2"]);
   });
 });

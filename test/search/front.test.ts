@@ -9,9 +9,8 @@ type Five = readonly [cost: number, volume: number, mass: number, series: number
 
 const tableOf = (rows: readonly Five[]): LayoutTable => {
   const table = newTable(Math.max(1, rows.length));
-  rows.forEach(([cost, volume, mass, series, stress], part) =>
-    pushRow(table, { part, series, parallel: 1, tied: false, family: -1, cost, volume, mass, stress }),
-  );
+  for (const [part, [cost, volume, mass, series, stress]] of rows.entries())
+    pushRow(table, { part, series, parallel: 1, tied: false, family: -1, cost, volume, mass, stress });
   return table;
 };
 const beats = (a: Five, b: Five): boolean => a.every((x, i) => x <= b[i]!) && a.some((x, i) => x < b[i]!);
