@@ -66,9 +66,25 @@ function chainRisk(given: TailCase): Tail {
   if (span === null) return exactly(0);
   const { single, off, stages } = lotSingle(given, kappa) ?? smoothSingle(given, kappa, span);
   const sum = n * single;
+  // So far out that the masses are below the smallest number.
+  if (!(sum > 0)) return underflown(given, kappa);
   const joint = sum > RARE ? highestShare(stages, kappa, n) : pairShare(stages, kappa, n);
   const exceed = Math.min(1, sum * joint.kept);
   return { exceed, error: n * off + sum * joint.error, unionBound: sum, unionExcess: sum - exceed };
+}
+
+/**
+ * A bound for chances that the lattices cannot hold. By the harmonic mean a stage is over only if k sum(C_j) > (n - 1)^2 C_1, a sum of
+ * independent bounded units. Source: [Hoeffding1963] theorem 2 (from memory)
+ */
+function underflown({ n, p, law }: TailCase, kappa: number): Tail {
+  const { low, high } = lawRange(law);
+  const others = n - 1;
+  const mean = p * low * others * (others - kappa);
+  const spread = (p * (high - low) ** 2 * (kappa * kappa * others + others ** 4)) / 4;
+  const bound = mean > 0 ? n * Math.exp(-(mean * mean) / (2 * spread)) : 1;
+  if (!(bound < 1e-12)) throw new RangeError("the lattices of a tail lost its mass");
+  return { exceed: 0, error: bound, unionBound: bound, unionExcess: 0 };
 }
 
 interface Single {

@@ -10,14 +10,19 @@ export type Conductances =
       /** Of each stage's resistor, S; 0 in strings. */
       readonly perStage: number;
     }
-  | { readonly known: false; readonly why: "missing" | "no test voltage" | "zero"; readonly serials: readonly string[] };
+  | {
+      readonly known: false;
+      readonly why: "missing" | "no test voltage" | "zero";
+      readonly serials: readonly string[];
+    };
 
 /** Leakage is taken in proportion to voltage: G = I_leak / V_meas. Without a resistor the share does not depend on V_meas. */
 export function conductancesOf(units: readonly MeasuredUnit[], request: PlaceRequest): Conductances {
   const missing = units.filter((unit) => unit.leakage === undefined).map((unit) => unit.serial);
   if (missing.length > 0) return { known: false, why: "missing", serials: missing };
   const resistor = request.balanceConductance ?? 0;
-  if (resistor > 0 && request.leakageVoltage === undefined) return { known: false, why: "no test voltage", serials: [] };
+  if (resistor > 0 && request.leakageVoltage === undefined)
+    return { known: false, why: "no test voltage", serials: [] };
   const volts = request.leakageVoltage ?? 1;
   const cross = request.ties === "cross-tied";
   const perUnit = Float64Array.from(units, (unit) => unit.leakage! / volts + (cross ? 0 : resistor));

@@ -50,7 +50,8 @@ function* outwards(middle: number, count: number): Generator<number> {
   }
 }
 
-const unitsOf = (mask: number): number[] => Array.from({ length: MOST_UNITS }, (_, i) => i).filter((i) => mask & (1 << i));
+const unitsOf = (mask: number): number[] =>
+  Array.from({ length: MOST_UNITS }, (_, i) => i).filter((i) => mask & (1 << i));
 
 /** Gives the gap in hand now and then; the answer at the end. */
 export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<number, ExactAnswer> {
@@ -129,7 +130,8 @@ export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<num
       chosen[depth] = sum;
       held[depth] = mask;
       if (remaining === 1) record();
-      else if (spares || remaining < 4 || reach(used | mask, remaining - 1) >= sum) place(depth + 1, i + 1, used | mask, shares + least / sum, left - sum);
+      else if (spares || remaining < 4 || reach(used | mask, remaining - 1) >= sum)
+        place(depth + 1, i + 1, used | mask, shares + least / sum, left - sum);
       if (gap <= problem.target) return;
     }
   };
@@ -138,9 +140,11 @@ export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<num
   if (!spares) {
     while (below > 0 && sums[below - 1]! * stages > total) below--;
   }
-  const starts = spares ? outwards(count >> 1, count) : (function* () {
-    for (let i = below - 1; i >= 0; i--) yield i;
-  })();
+  const starts = spares
+    ? outwards(count >> 1, count)
+    : (function* () {
+        for (let i = below - 1; i >= 0; i--) yield i;
+      })();
   for (const start of starts) {
     if (stopped || gap <= problem.target) break;
     const least = sums[start]!;

@@ -1,10 +1,10 @@
 // Places measured units into a bank: the whole way from readings to a certified placing.
-import { type Finding, type Read, accepted, refused } from "../quantity/index.ts";
+import { accepted, type Finding, type Read, refused } from "../quantity/index.ts";
 import { solveCharging } from "./charging.ts";
 import { conductancesOf } from "./conductance.ts";
-import { type Start, constrainedStart } from "./constrained-start.ts";
+import { constrainedStart, type Start } from "./constrained-start.ts";
 import { constraintsOf } from "./constraints.ts";
-import { effort, share, settle } from "./effort.ts";
+import { effort, settle, share } from "./effort.ts";
 import { gapFinding, holdingUnknown, mixedParts, outlierFinding, wildFinding } from "./flags.ts";
 import { gapFloor, honestDigits, voltageUncertainty } from "./floor.ts";
 import { worstShare } from "./gap.ts";
@@ -13,8 +13,8 @@ import { toLattice } from "./lattice.ts";
 import { type Outlier, outliersOf } from "./outliers.ts";
 import { type Placing, serialsOf, settled } from "./placing.ts";
 import { seeded } from "./random.ts";
-import { DEFAULTS, type PlaceRequest, checkRequest } from "./request.ts";
-import { type SearchStep, isOptimal } from "./solution.ts";
+import { checkRequest, DEFAULTS, type PlaceRequest } from "./request.ts";
+import { isOptimal, type SearchStep } from "./solution.ts";
 import { keepOrder } from "./spare-order.ts";
 import type { MeasuredUnit } from "./unit.ts";
 import { wildEffect } from "./wild.ts";
@@ -55,10 +55,7 @@ function candidatesOf(units: readonly MeasuredUnit[], request: PlaceRequest, out
  * @returns the placing with its gaps, lower bound and findings; refusals for duplicate serials, too few units, bad numbers,
  *   pins or lots that cannot be honoured
  */
-export function* placing(
-  units: readonly MeasuredUnit[],
-  request: PlaceRequest,
-): Generator<SearchStep, Read<Placing>> {
+export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest): Generator<SearchStep, Read<Placing>> {
   const checked = checkRequest(units, request);
   if (!checked.ok) return checked;
   const { series, parallel, ties } = request;
@@ -70,7 +67,12 @@ export function* placing(
   const order = keepOrder(pool, new Set(outliers.map((o) => o.serial)));
   const start: Start = rule.any ? constrainedStart(rule, order, values) : { ok: true, groups: [] };
   if (!start.ok) {
-    return refused({ code: "place.constraints", place: { field: "pins" }, read: start.why, want: "wishes that fit together" });
+    return refused({
+      code: "place.constraints",
+      place: { field: "pins" },
+      read: start.why,
+      want: "wishes that fit together",
+    });
   }
   const random = seeded(request.seed ?? DEFAULTS.seed);
   const work = effort(request.moves ?? DEFAULTS.moves, request.within);
@@ -130,7 +132,9 @@ export function* placing(
       attained: solution.gap,
       plusMinus: voltageUncertainty(shape),
     },
-    holding: held ? { worst: worstShare(held.gaps.holding, series), gap: held.gaps.holding, floor: holdingFloor } : null,
+    holding: held
+      ? { worst: worstShare(held.gaps.holding, series), gap: held.gaps.holding, floor: holdingFloor }
+      : null,
     floor,
     digits: honestDigits(voltageUncertainty(shape)),
     moves: work.spent,

@@ -1,5 +1,5 @@
 // What is asked of a placing, and what is wrong with the asking.
-import { type Read, type Refusal, accepted, refused } from "../quantity/index.ts";
+import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
 import type { MeasuredUnit, Ties } from "./unit.ts";
 
 /** A unit that must stand in a given stage (cross-tied) or string, counted from 0. */
@@ -83,7 +83,9 @@ function faultsOfUnits(units: readonly MeasuredUnit[]): Refusal[] {
     }
     for (const quantity of ["leakage", "esr"] as const) {
       if (!absentOr(unit[quantity], (v) => v >= 0)) {
-        faults.push(refusal(`place.${quantity}`, quantity, `${unit.serial}: ${unit[quantity]}`, "0 or more, or absent"));
+        faults.push(
+          refusal(`place.${quantity}`, quantity, `${unit.serial}: ${unit[quantity]}`, "0 or more, or absent"),
+        );
       }
     }
   }

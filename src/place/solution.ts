@@ -21,4 +21,5 @@ export interface SearchStep {
 /** Two gaps count as equal within this. */
 const SAME = 1e-12;
 
-export const isOptimal = ({ gap, lowerBound }: Pick<Solution, "gap" | "lowerBound">): boolean => gap - lowerBound <= SAME;
+export const isOptimal = ({ gap, lowerBound }: Pick<Solution, "gap" | "lowerBound">): boolean =>
+  gap - lowerBound <= SAME;

@@ -35,8 +35,7 @@ const BEFORE_PROOF = 100_000;
 const SHAKE_ABOVE = 1e-4;
 const SHAKES_PER_UNIT = 60;
 
-const sumOf = (values: Float64Array, group: readonly number[]): number =>
-  group.reduce((sum, i) => sum + values[i]!, 0);
+const sumOf = (values: Float64Array, group: readonly number[]): number => group.reduce((sum, i) => sum + values[i]!, 0);
 
 const gapOf = (values: Float64Array, groups: readonly (readonly number[])[]): number =>
   stageGap(

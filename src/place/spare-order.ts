@@ -32,9 +32,6 @@ export function keepOrder(units: readonly MeasuredUnit[], outliers: ReadonlySet<
     .map((_, i) => i)
     .sort(
       (a, b) =>
-        wild[a]! - wild[b]! ||
-        badness[a]! - badness[b]! ||
-        units[b]!.capacitance - units[a]!.capacitance ||
-        a - b,
+        wild[a]! - wild[b]! || badness[a]! - badness[b]! || units[b]!.capacitance - units[a]!.capacitance || a - b,
     );
 }

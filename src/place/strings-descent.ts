@@ -91,7 +91,8 @@ export function* descendStrings(
     const low = worst();
     for (let left = 1 + Math.floor(random() * 3); left > 0; left--) {
       for (let tries = 0; tries < 20; tries++) {
-        const one = random() < 0.5 ? low * series + Math.floor(random() * series) : Math.floor(random() * strings * series);
+        const one =
+          random() < 0.5 ? low * series + Math.floor(random() * series) : Math.floor(random() * strings * series);
         const other = Math.floor(random() * slots.length);
         if (Math.floor(one / series) === Math.floor(other / series) || !mayMove(one, other)) continue;
         swap(one, other);

@@ -98,7 +98,8 @@ export function* exactStrings(problem: StringsProblem, work: Effort): Generator<
     held.push([at]);
     follow(at, at + 1, series - 1, 0, worst, spares);
     held.pop();
-    if (spares > 0 && !stopped && worst > least * (1 + FINEST) && least < problem.target) lead(at + 1, worst, spares - 1);
+    if (spares > 0 && !stopped && worst > least * (1 + FINEST) && least < problem.target)
+      lead(at + 1, worst, spares - 1);
     used[at] = 0;
   };
 

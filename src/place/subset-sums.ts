@@ -19,7 +19,15 @@ export function choose(n: number, k: number): number {
 }
 
 /** Merges list A with list B shifted by `value` and marked with `bit`; both rising, so the result is rising. */
-function merge(a: SubsetList, countA: number, b: SubsetList, countB: number, value: number, bit: number, out: SubsetList): void {
+function merge(
+  a: SubsetList,
+  countA: number,
+  b: SubsetList,
+  countB: number,
+  value: number,
+  bit: number,
+  out: SubsetList,
+): void {
   let i = 0;
   let j = 0;
   for (let at = 0; at < countA + countB; at++) {

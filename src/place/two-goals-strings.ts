@@ -37,7 +37,12 @@ const least = (t: Float64Array): number => {
 };
 
 /** Works on `slots` in place (string by string, then the spares); ends at the best placing within the limit. */
-export function* holdStrings(slots: Int32Array, goals: StringGoals, random: Random, work: Effort): Generator<Gaps, Gaps> {
+export function* holdStrings(
+  slots: Int32Array,
+  goals: StringGoals,
+  random: Random,
+  work: Effort,
+): Generator<Gaps, Gaps> {
   const { series, strings, limit, moves, rules } = goals;
   const placed = series * strings;
   const reach = goals.spares ? slots.length : placed;

@@ -46,6 +46,7 @@ export function atLeast(draft: Draft): Finding {
 export function findingsOf(input: FindingsInput): readonly Finding[] {
   return [
     chargingShare(input),
+    ...chargingRisk(input),
     holdingShare(input),
     ...balanceLoad(input),
     reverse(input),
@@ -55,7 +56,17 @@ export function findingsOf(input: FindingsInput): readonly Finding[] {
   ];
 }
 
-function chargingShare({ result }: FindingsInput): Finding {
+/** With the statistical basis: the chance against the brief's risk, its error counted against it. */
+function chargingRisk({ result, brief }: FindingsInput): readonly Finding[] {
+  if (result.risk === undefined) return [];
+  const value = result.risk === null ? null : Math.min(1, result.risk.exceed + result.risk.error);
+  const spread = brief.distribution === "normal" ? "normal, cut at three sigma" : "uniform over its tolerance";
+  const note = `Chance that any unit of the bank exceeds its limit while charging: units independent, each ${spread}; what a whole lot has in common cancels.`;
+  const draft = { id: "charging-risk", state: "charging", value, limit: brief.risk, unit: "1" } as const;
+  return [atMost({ ...draft, source: "methods-derived", note })];
+}
+
+function chargingShare({ result, brief }: FindingsInput): Finding {
   const unknown = result.share.charging === null;
   return atMost({
     id: "charging-share",
@@ -64,6 +75,8 @@ function chargingShare({ result }: FindingsInput): Finding {
     limit: result.share.limit,
     unit: "V",
     source: "joulewright-design",
+    // The builder chose to bear a stated risk instead: the worst case is told, not refused.
+    exceeded: brief.basis === "statistical" ? "warn" : "fail",
     note: unknown
       ? "The tolerance is unknown, so how the voltage divides while charging is not known: measure the units or find the datasheet."
       : result.series === 1

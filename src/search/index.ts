@@ -4,3 +4,4 @@ export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBr
 export { type PlanInput, plan, planCurrency } from "./plan.ts";
 export { RANKINGS, type Ranking } from "./rank.ts";
 export type { Balance, Change, Cost, LayoutResult, PlanResult, RefusedPart, Shares, Span } from "./result.ts";
+export { type Risk, type RiskCase, riskOf } from "./risk.ts";
