@@ -3,7 +3,7 @@
 
 import { fileURLToPath } from "node:url";
 import { bugText } from "./cli/bug.ts";
-import { EXIT, filesOn, type Ports } from "./cli/index.ts";
+import { EXIT, filesOn, type Ports, textWidth } from "./cli/index.ts";
 import { outputTrouble } from "./cli/output.ts";
 import { VERSION } from "./cli/version.ts";
 
@@ -17,7 +17,7 @@ function portsOfProcess(): Ports {
   return {
     out: (text) => void process.stdout.write(text),
     err: (text) => void process.stderr.write(text),
-    columns: Math.max(40, process.stdout.columns ?? (Number(process.env.COLUMNS) || 80)),
+    columns: textWidth(process.stdout.columns, process.env.COLUMNS),
     files: filesOn(),
     catalogs: fileURLToPath(new URL("../catalogs/", import.meta.url)),
   };

@@ -38,4 +38,5 @@ export {
   leftAfterDump,
 } from "./share.ts";
 export { exceedRisk, type Tail } from "./tail.ts";
+export { riskBound } from "./tailBound.ts";
 export { LEAST_LOT, type TailCase, type UnitLaw } from "./tailLaw.ts";

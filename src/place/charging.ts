@@ -3,8 +3,8 @@ import type { Constraints } from "./constraints.ts";
 import type { Effort } from "./effort.ts";
 import type { Random } from "./random.ts";
 import type { SearchStep, Solution } from "./solution.ts";
-import { solveStages } from "./solve-stages.ts";
-import { solveStrings } from "./solve-strings.ts";
+import { solveStages } from "./solveStages.ts";
+import { solveStrings } from "./solveStrings.ts";
 import type { Ties } from "./unit.ts";
 
 export interface ChargingTask {

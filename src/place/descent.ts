@@ -1,7 +1,7 @@
 // The exchange descent: brings the stage sums together by exchanging sets of equal count between stages.
 import { type Board, exchange, mayExchange, recount, stageOf } from "./board.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
-import { DEEPEST, exchangeLists, SAMPLE } from "./exchange-lists.ts";
+import { DEEPEST, exchangeLists, SAMPLE } from "./exchangeLists.ts";
 import { stageGap } from "./gap.ts";
 import type { Random } from "./random.ts";
 

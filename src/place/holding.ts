@@ -4,8 +4,8 @@ import type { Conductances } from "./conductance.ts";
 import type { Constraints } from "./constraints.ts";
 import { type Effort, mayGoOn, settle, share } from "./effort.ts";
 import type { Random } from "./random.ts";
-import { type Gaps, holdLevel } from "./two-goals.ts";
-import { holdStrings } from "./two-goals-strings.ts";
+import { type Gaps, holdLevel } from "./twoGoals.ts";
+import { holdStrings } from "./twoGoalsStrings.ts";
 import type { Ties } from "./unit.ts";
 
 export interface HoldingTask {

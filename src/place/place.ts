@@ -2,7 +2,7 @@
 import { accepted, type Finding, type Read, refused } from "../quantity/index.ts";
 import { solveCharging } from "./charging.ts";
 import { conductancesOf } from "./conductance.ts";
-import { constrainedStart, type Start } from "./constrained-start.ts";
+import { constrainedStart, type Start } from "./constrainedStart.ts";
 import { constraintsOf } from "./constraints.ts";
 import { effort, settle, share } from "./effort.ts";
 import { gapFinding, holdingUnknown, mixedParts, outlierFinding, wildFinding } from "./flags.ts";
@@ -15,8 +15,8 @@ import { type Placing, serialsOf, settled } from "./placing.ts";
 import { seeded } from "./random.ts";
 import { checkRequest, DEFAULTS, type PlaceRequest } from "./request.ts";
 import { isOptimal, type SearchStep } from "./solution.ts";
-import { keepOrder } from "./spare-order.ts";
-import type { MeasuredUnit } from "./unit.ts";
+import { keepOrder } from "./spareOrder.ts";
+import { lotUncertainty, type MeasuredUnit } from "./unit.ts";
 import { wildEffect } from "./wild.ts";
 
 /** Below this part of the floor a smaller gap costs nothing that could be measured (it adds under 1 % in squares). */
@@ -59,7 +59,7 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
   const checked = checkRequest(units, request);
   if (!checked.ok) return checked;
   const { series, parallel, ties } = request;
-  const uncertainty = request.uncertainty ?? DEFAULTS.uncertainty;
+  const uncertainty = request.uncertainty ?? lotUncertainty(units) ?? DEFAULTS.uncertainty;
   const outliers = outliersOf(units, uncertainty);
   const { units: pool, rejected } = candidatesOf(units, request, outliers);
   const rule = constraintsOf(pool, request);

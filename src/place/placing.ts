@@ -1,6 +1,6 @@
 // What a placing says: groups of serials, spares, the two gaps with what is proven, the floor, and findings.
 import type { Finding } from "../quantity/index.ts";
-import type { BoundKind } from "./bound-matrix.ts";
+import type { BoundKind } from "./boundMatrix.ts";
 import type { Outlier } from "./outliers.ts";
 import type { MeasuredUnit, Ties } from "./unit.ts";
 

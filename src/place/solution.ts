@@ -1,5 +1,5 @@
 // What the searches hand back: groups of unit indices, the charging gap, and what is proven about it.
-import type { BoundKind } from "./bound-matrix.ts";
+import type { BoundKind } from "./boundMatrix.ts";
 
 export interface Solution {
   /** Unit indices by stage (cross-tied) or string. */

@@ -1,6 +1,6 @@
 // What one wild unit costs: the gap with it fitted and the gap without it.
 import { type ChargingTask, finish, solveCharging } from "./charging.ts";
-import { constrainedStart } from "./constrained-start.ts";
+import { constrainedStart } from "./constrainedStart.ts";
 import { constraintsOf } from "./constraints.ts";
 import { effort } from "./effort.ts";
 import { toLattice } from "./lattice.ts";

@@ -4,9 +4,11 @@ import { FIT } from "../bank/index.ts";
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
 import { stateOf } from "../catalog/index.ts";
 import { hazardFindings } from "../hazard/index.ts";
+import { unitShort } from "../pulse/index.ts";
 import { type Finding, formatQuantity, type Verdict } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
+import { faultBankOf } from "./faults.ts";
 import type { LayoutResult } from "./result.ts";
 
 export interface FindingsInput {
@@ -53,6 +55,7 @@ export function findingsOf(input: FindingsInput): readonly Finding[] {
     energy(input),
     bleed(input),
     ...hazards(input),
+    ...oneShorted(input),
   ];
 }
 
@@ -211,4 +214,25 @@ function hazards({ result, unit, brief }: FindingsInput): readonly Finding[] {
     bleedSeconds: result.bleed.seconds ?? Number.POSITIVE_INFINITY,
   });
   return findings.filter((finding) => finding.id !== "bleed-time");
+}
+
+/** One unit shorted with the charger still on: what the sound ones then see. A warning, because it takes a fault to get there. */
+function oneShorted({ result, unit, brief }: FindingsInput): readonly Finding[] {
+  if (result.series === 1) return [];
+  const fault = unitShort(faultBankOf({ result, unit, brief }));
+  const value = fault.worstVoltageSpread;
+  const note = `One unit shorted with the charger still on: the sound ones against their ${unit.surgeVoltage === undefined ? "rated" : "surge"} voltage. ${fault.stops}`;
+  const limit = unit.surgeVoltage ?? unit.voltage;
+  return [
+    atMost({
+      id: "unit-short",
+      state: "faulted",
+      value,
+      limit,
+      unit: "V",
+      source: "methods-8",
+      exceeded: "warn",
+      note,
+    }),
+  ];
 }

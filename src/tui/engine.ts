@@ -9,7 +9,7 @@ export const filledValues = (values: Readonly<Record<string, string>>): Readonly
   Object.fromEntries(Object.entries(values).filter(([, text]) => text.trim() !== ""));
 
 export function answerFor(state: State, engine: EnginePort, quick: boolean): Answer {
-  const read = engine.readBrief(filledValues(state.values));
+  const read = engine.readBrief({ ...state.extra, ...filledValues(state.values) });
   if (!read.ok) return { kind: "refused", refusals: read.refusals };
   const brief = read.value;
   const planned = engine.plan(brief, { rank: state.rank, frontOnly: state.frontOnly, quick });

@@ -3,8 +3,6 @@
 export { catalogEngine, type Stock } from "./catalogEngine.ts";
 export type {
   Arrangement,
-  BillLine,
-  BillView,
   EnginePort,
   PlanRequest,
   SaveAnswer,
@@ -12,4 +10,5 @@ export type {
   StockFacts,
 } from "./ports.ts";
 export { openScreens } from "./screens.ts";
+export { type StartOptions, startScreens } from "./start.ts";
 export { screenTrouble } from "./terminal.ts";

@@ -8,7 +8,7 @@ import { terminalLook } from "./terminal.ts";
 const USUAL = { columns: 80, rows: 24 };
 
 export function startState(ports: ScreenPorts): State {
-  const { stdin, stdout, env, ascii, stock, brief } = ports;
+  const { stdin, stdout, env, ascii, stock, brief, extra } = ports;
   const look = terminalLook({
     env,
     inputIsTerminal: stdin.isTTY === true,
@@ -21,6 +21,7 @@ export function startState(ports: ScreenPorts): State {
     look,
     stock,
     values: brief,
+    extra,
   });
   const text = ports.loadSession();
   if (text === null) return fresh;

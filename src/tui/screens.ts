@@ -56,12 +56,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else if (effect.type === "quit") session.end(0);
       else if (effect.type === "suspend") session.suspend();
       else if (effect.type === "redraw") paint.redraw();
-      else {
-        const answer = store.state().answer;
-        if (answer?.kind !== "planned") return;
-        const { layout, path, replace } = effect;
-        send({ type: "saved", answer: ports.exportBill(answer.brief, layout, path, replace) });
-      }
+      else send({ type: "saved", answer: ports.exportBill(effect.bill, effect.path, effect.replace) });
     };
     const store = createStore({
       initial: begun,

@@ -1,5 +1,5 @@
 // A small entry that joins the screens to the demo catalogues and real files, for trying them through a terminal.
-import { existsSync, readdirSync, readFileSync, renameSync, writeFileSync, writeSync } from "node:fs";
+import { existsSync, readdirSync, readFileSync, writeSync } from "node:fs";
 import { join } from "node:path";
 import {
   type Capacitor,
@@ -8,10 +8,10 @@ import {
   readCapacitors,
   readResistors,
 } from "../../src/catalog/index.ts";
-import { catalogEngine, openScreens } from "../../src/tui/index.ts";
+import { filesOn } from "../../src/cli/index.ts";
+import { startScreens } from "../../src/tui/index.ts";
 
-const FOLDER = process.env.SCREENS_CATALOGS ?? "catalogs";
-const SESSION = process.env.SCREENS_SESSION ?? "";
+const FOLDER = process.env["SCREENS_CATALOGS"] ?? "catalogs";
 
 const parts: Capacitor[] = [];
 const families: ResistorFamily[] = [];
@@ -26,46 +26,27 @@ for (const name of existsSync(FOLDER) ? readdirSync(FOLDER).sort() : []) {
     if (read.ok) parts.push(...read.value.parts);
   }
 }
-// One currency only: the demo price lists are asked for by themselves.
-const [first] = parts.flatMap(({ currency }) => (currency === undefined ? [] : [currency]));
-const oneCurrency = parts.filter(({ currency }) => currency === undefined || currency === first);
 
-const status = await openScreens({
-  engine: catalogEngine({ parts: oneCurrency, families: families.length > 0 ? families : [DEFAULT_FAMILY] }),
-  stock: { name: FOLDER, parts: oneCurrency.length, faults: 0, note: "invented" },
-  brief: { title: "Flash-lamp driver, bench 1", energy: "2.4 kJ", voltage: "2.2 kV", ripple: "100 %" },
-  loadSession: () => (SESSION !== "" && existsSync(SESSION) ? readFileSync(SESSION, "utf8") : null),
-  saveSession: (text) => {
-    try {
-      if (SESSION !== "") writeFileSync(SESSION, text);
-      return null;
-    } catch (error) {
-      return (error as Error).message;
-    }
-  },
-  keepSession: () => {
-    renameSync(SESSION, `${SESSION}.unread`);
-    return `${SESSION}.unread`;
-  },
-  exportBill: (_brief, layout, path, replace) => {
-    if (!replace && existsSync(path)) return { kind: "exists", path };
-    try {
-      writeFileSync(path, `${layout.id}\n`);
-      return { kind: "saved", path };
-    } catch (error) {
-      return { kind: "trouble", words: (error as Error).message };
-    }
-  },
-  complain: (line) => process.stderr.write(`${line}\n`),
-  stdin: process.stdin,
-  stdout: process.stdout,
-  writeSync: (text) => {
-    writeSync(1, text);
-  },
-  process,
-  env: process.env,
-}).catch((fault: unknown) => {
-  process.stderr.write(`${fault instanceof Error ? fault.stack : String(fault)}\n`);
-  return 70;
-});
-process.exit(status);
+process.exit(
+  await startScreens({
+    parts,
+    families: families.length > 0 ? families : [DEFAULT_FAMILY],
+    stock: { name: FOLDER, parts: parts.length, faults: 0, note: "invented" },
+    brief: { title: "Flash-lamp driver, bench 1", energy: "2.4 kJ", voltage: "2.2 kV", ripple: "100 %" },
+    files: filesOn(),
+    sessionFile: process.env["SCREENS_SESSION"] ?? null,
+    terminal: {
+      complain: (line) => process.stderr.write(`${line}\n`),
+      stdin: process.stdin,
+      stdout: process.stdout,
+      writeSync: (text) => {
+        writeSync(1, text);
+      },
+      process,
+      env: process.env,
+    },
+  }).catch((fault: unknown) => {
+    process.stderr.write(`${fault instanceof Error ? fault.stack : String(fault)}\n`);
+    return 70;
+  }),
+);

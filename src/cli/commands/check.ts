@@ -13,7 +13,7 @@ import { hanging, layoutText } from "../layoutText.ts";
 import type { Ports } from "../ports.ts";
 import { tell } from "../tell.ts";
 import { toJson } from "../toJson.ts";
-import { wrap } from "../wrap.ts";
+import { bullet, wrap } from "../wrap.ts";
 
 export function checkCommand(brief: string | undefined, flags: BankFlags, ports: Ports): number {
   const checked = checkedBank(brief, flags, ports);
@@ -69,7 +69,7 @@ function checkText(checked: Checked, width: number): string {
     hanging("left after a dump", kept, width),
     verdict,
     ...[...inputSentences(stock), ...notes].map((text) => wrap(text, width)),
-    ["Cautions", ...cautions.map(({ text }) => wrap(`- ${text}`, width, "  "))].join("\n"),
+    ["Cautions", ...cautions.map(({ text }) => bullet(text, width))].join("\n"),
   ];
   return `${blocks.join("\n\n")}\n`;
 }

@@ -18,8 +18,8 @@ export interface SettledBlend extends BlendAnswer {
   }[];
 }
 
-/** Work of the own search before HiGHS is asked, about a second. */
-export const SHARE_OF_WORK = 3e6;
+/** Work of the own search before HiGHS is asked, some tenths of a second. */
+export const SHARE_OF_WORK = 1e6;
 
 /** The cheapest blend by whichever engine proves it, each in its share. `seconds` bounds HiGHS. */
 export async function settleBlend(

@@ -12,7 +12,7 @@ import { tightenCore } from "./tightenCore.ts";
 import { type Budget, walkCore } from "./walk.ts";
 
 export interface BlendLimits {
-  /** Most steps of work; a step is one look at one option, well under a microsecond. Absent: no limit. */
+  /** Most steps of work; a step is one look at one option, some tenths of a microsecond. Absent: no limit. */
   readonly work?: number;
   /** Asked every thousand steps or so; true ends the search. */
   readonly stop?: () => boolean;
@@ -108,6 +108,8 @@ export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAns
     let bound: CapacityBound | null = null;
     if (stage >= 0) {
       const { effort, steps, fine } = STAGES[stage]!;
+      // Making the tables is work too; an addition there is a hundredth of a look.
+      budget.spent += effort / 50;
       const count = (): number => stepsWithin(left, effort, steps);
       if (looking) ceilingPrices = pricedCeilings(left, stepsWithin(left, effort / 30, steps));
       bound = buildCapacityBound(left, count(), fine ? ceilingPrices : left.prices);
