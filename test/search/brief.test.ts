@@ -24,6 +24,7 @@ describe("readBrief(input): good", () => {
       ripple: 1,
       basis: "worst case",
       risk: 1e-4,
+      distribution: "uniform",
       derating: 0.9,
       overshoot: 0,
       ageing: 0,
