@@ -44,13 +44,16 @@ function safeSide(value: number, down: boolean): number {
   return Number(`${down ? Math.floor(scaled) : Math.ceil(scaled)}e${power}`);
 }
 
-/** A voltage that fits nearest to the wanted one, looked for in steps of 5 % each way up to a factor of four. */
+/** Steps of the search for a voltage: 5 % up to a factor of four, then a quarter, up to a factor of about a thousand. */
+const ratioAt = (step: number): number => 1.05 ** Math.min(step, 28) * 1.25 ** Math.max(0, step - 28);
+
+/** A voltage that fits nearest to the wanted one, looked for each way. */
 function voltageChange(input: SweepInput): Change | null {
   const { voltage } = input.brief;
-  for (let step = 1; step <= 28; step++) {
-    for (const ratio of [1.05 ** -step, 1.05 ** step]) {
+  for (let step = 1; step <= 53; step++) {
+    for (const ratio of [1 / ratioAt(step), ratioAt(step)]) {
       if (fits(input, { voltage: voltage * ratio }) === null) continue;
-      const inner = ratio < 1 ? 1.05 ** -(step - 1) : 1.05 ** (step - 1);
+      const inner = ratio < 1 ? 1 / ratioAt(step - 1) : ratioAt(step - 1);
       return edge(input, "voltage", voltage * inner, voltage * ratio);
     }
   }

@@ -14,6 +14,7 @@ export interface FaultedBank {
 /** An assessed layout as the fault table wants it; what is unknown stays unknown. */
 export function faultBankOf({ result, unit, brief }: FaultedBank): FaultBank {
   const { share, balance } = result;
+  const voltage = brief.voltage * (1 + brief.overshoot);
   return {
     series: result.series,
     parallel: result.parallel,
@@ -27,8 +28,9 @@ export function faultBankOf({ result, unit, brief }: FaultedBank): FaultBank {
       esl: unit.esl ?? null,
       ruptureEnergy: unit.ruptureEnergy ?? null,
     },
-    voltage: brief.voltage * (1 + brief.overshoot),
-    worstCharging: share.charging ?? share.even,
+    voltage,
+    // Without the tolerance nothing less than the whole voltage bounds what one unit may see.
+    worstCharging: share.charging ?? voltage,
     worstHolding: share.holding,
     balance: balance && { resistance: balance.resistance, hold: Number.isFinite(brief.hold) ? brief.hold : null },
   };

@@ -53,6 +53,7 @@ export function findingsOf(input: FindingsInput): readonly Finding[] {
     ...balanceLoad(input),
     reverse(input),
     energy(input),
+    ...steadySupply(input),
     bleed(input),
     ...hazards(input),
     ...oneShorted(input),
@@ -185,6 +186,18 @@ function energy({ result, brief }: FindingsInput): Finding {
   });
 }
 
+/** With a steady current drawn between recharges: the capacitance that keeps the fall within the brief's. */
+function steadySupply({ result, brief }: FindingsInput): readonly Finding[] {
+  if (brief.steady === undefined) return [];
+  const { current, frequency } = brief.steady;
+  const limit = current / (frequency * brief.ripple * brief.voltage);
+  const value = brief.basis === "nominal" ? result.capacitance.nominal : result.capacitance.low;
+  const note = "Capacitance that feeds the steady current from one recharge to the next within the allowed fall.";
+  return [
+    atLeast({ id: "steady-current", state: "pulse", value, limit, unit: "F", source: "joulewright-design", note }),
+  ];
+}
+
 function bleed({ result }: FindingsInput): Finding {
   const { seconds, toVoltage } = result.bleed;
   const safe = formatQuantity(toVoltage, "voltage");
@@ -196,6 +209,10 @@ function bleed({ result }: FindingsInput): Finding {
     unit: "s",
     source: "joulewright-design",
   } as const;
+  if (seconds === null && result.balance !== null) {
+    const note = `The tolerance is unknown, so the longest time to ${safe} is not known.`;
+    return { ...draft, verdict: "not assessed", margin: null, note };
+  }
   if (seconds === null) {
     const note = `No balancing chain drains this bank to ${safe}: it needs a bleed resistor of its own, a dump and a shorting link.`;
     return { ...draft, verdict: "warn", margin: null, note };

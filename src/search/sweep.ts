@@ -1,7 +1,7 @@
 // Tries every part, every series count and both ties, and keeps what does the job: exhaustive, one pass, no layout object made.
 
 import { chargingWorst, FIT, leastParallel } from "../bank/index.ts";
-import { type Capacitor, cheapest, type ResistorFamily } from "../catalog/index.ts";
+import { type Capacitor, cheapest, type ResistorFamily, toBuy } from "../catalog/index.ts";
 import { minorDigits } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing } from "./balancing.ts";
 import type { Brief } from "./brief.ts";
@@ -36,7 +36,11 @@ export function leastSeries(voltage: number, limit: number, tolerance: { low: nu
   const bound = limit * (1 + FIT);
   if (voltage <= bound) return 1;
   const guess = Math.max(2, Math.floor(1 + ((voltage / bound - 1) * (1 + high)) / (1 - low)));
-  for (let n = guess; ; n++) if (chargingWorst(voltage, n, { low, high }) <= bound) return n;
+  // The guess is the closed form rounded down: one or two steps find the least. An absurd count is returned as it is, above any limit.
+  if (guess > 1e9) return guess;
+  let n = guess;
+  while (chargingWorst(voltage, n, { low, high }) > bound) n++;
+  return n;
 }
 
 const balancing = newBalancing();
@@ -61,7 +65,7 @@ type Judge = ((given: RiskCase) => boolean) | null;
 function sweepPart(input: SweepInput, index: number, table: LayoutTable, judge: Judge): Reason | null {
   const { brief, families, required, currency } = input;
   const unit = input.parts[index] as Capacitor;
-  const candidate = prepare(unit, brief, currency);
+  const candidate = prepare(unit, brief);
   const voltage = brief.voltage * (1 + brief.overshoot);
   const minor = 10 ** minorDigits(currency ?? "");
   const worstSeries = leastSeries(voltage, candidate.limit, candidate.tolerance);
@@ -82,10 +86,10 @@ function sweepPart(input: SweepInput, index: number, table: LayoutTable, judge: 
       break;
     }
     if (!cheapest(unit, units + brief.spares, bill)) {
-      ceiling("stock", units + brief.spares, unit.available === undefined ? null : unit.available + (unit.onHand ?? 0));
+      ceiling("stock", toBuy(unit, units + brief.spares), unit.available ?? null);
       break;
     }
-    const capacitors = bill.cost * candidate.exchange;
+    const capacitors = bill.cost;
     const volume = candidate.volume === null ? Number.POSITIVE_INFINITY : candidate.volume * units;
     const mass = candidate.mass === null ? Number.POSITIVE_INFINITY : candidate.mass * units;
     if (over(volume, brief.maxVolume)) {

@@ -116,7 +116,7 @@ describe("assess(input): the brief", () => {
     expect(bank.purchase.capacitors?.bought).toBe(23);
   });
   // A steady current that the bank cannot feed is no less a failure than joules it cannot give.
-  test.fails("a bank too small for the steady current has a finding that says so", () => {
+  test("a bank too small for the steady current has a finding that says so", () => {
     const brief = briefOf({
       energy: 1,
       voltage: 1600,
@@ -186,15 +186,15 @@ describe("assess(input): unknown is not zero", () => {
     expect(finding(at(5, 2), "reverse-after-dump")?.note).toMatch(/clamp diode/i);
   });
   // The start of a finite hold is the charging share, which nobody knows without a tolerance.
-  test.fails("no tolerance and a finite hold: holding is not assessed", () =>
+  test("no tolerance and a finite hold: holding is not assessed", () =>
     expect(
       at(5, 2, { unit: without("tolerance"), brief: briefOf({ energy: 1, voltage: 1600, hold: 30 }) }).share.holding,
     ).toBe(null));
   // The high capacitance decides the bleed; the nominal one makes it look shorter than it may be.
-  test.fails("no tolerance: the bleed time is unknown", () =>
+  test("no tolerance: the bleed time is unknown", () =>
     expect(at(5, 2, { unit: without("tolerance"), balance: fixed(24000, 0.05) }).bleed.seconds).toBe(null));
   // Resistors that will be needed and cannot be sized yet are not free.
-  test.fails("no leakage: the balancing resistors are among what the total leaves out", () =>
+  test("no leakage: the balancing resistors are among what the total leaves out", () =>
     expect(at(5, 2, { unit: without("leakage") }).cost?.unpriced).toContain("balancing resistors"));
 });
 
@@ -219,7 +219,7 @@ describe("assess(input): money", () => {
     });
   });
   // Twelve dollars at half a euro are six euros.
-  test.fails("resistors of another currency at the brief's rate", () => {
+  test("resistors of another currency at the brief's rate", () => {
     const brief = briefOf({ energy: 1, voltage: 1600, derating: 1, currency: "EUR", exchange: { USD: 0.5 } });
     expect(at(6, 1, { brief, families: priced("USD") }).cost).toMatchObject({
       capacitors: 60,

@@ -87,9 +87,10 @@ describe("readBrief(input): bad", () => {
     ["zero-voltage", ["bad-value voltage"]],
   ])("bad/%s.json: %j", (file, told) => expect([...codes(load(`bad/${file}.json`))].sort()).toEqual(told));
 
-  // A statistical basis is at a stated risk; one that nobody stated is taken silently.
-  test.fails("bad/statistical-without-risk.json asks for the risk", () =>
-    expect(codes(load("bad/statistical-without-risk.json"))).toEqual(["missing-value risk"]));
+  test("bad/statistical-without-risk.json takes the default risk of one in ten thousand, which every output states", () => {
+    const read = readBrief(load("bad/statistical-without-risk.json"));
+    expect(read.ok && read.value.risk).toBe(1e-4);
+  });
 
   test("every bad file of the folder is covered; those that are no JSON, or repeat a key, are for the reader of files", () => {
     const covered =

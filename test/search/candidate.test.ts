@@ -1,8 +1,8 @@
-// A part made ready: its limit, its capacitance by each basis, its leak, and exchange of money.
+// A part made ready: its limit, its capacitance by each basis, its leak.
 import { describe, expect, test } from "vitest";
 import type { Capacitor } from "../../src/catalog/index.ts";
 import { type Brief, readBrief } from "../../src/search/brief.ts";
-import { exchangeRate, leakOf, prepare, unitLimit } from "../../src/search/candidate.ts";
+import { leakOf, prepare, unitLimit } from "../../src/search/candidate.ts";
 
 const unit = (over: Partial<Capacitor> = {}): Capacitor => ({
   part: "a",
@@ -39,33 +39,18 @@ describe("leakOf(unit)", () => {
     expect(leakOf(unit({ insulation: 1e9 }))).toEqual({ kind: "insulation", ohms: 1e9 }));
 });
 
-describe("prepare(unit, brief, currency): capacitance by the basis", () => {
+describe("prepare(unit, brief): capacitance by the basis", () => {
   test.each([
     ["worst case", 0, 0.8e-3],
     ["worst case", 0.1, 0.72e-3],
     ["nominal", 0.1, 1e-3],
     ["statistical", 0, 0.8e-3],
   ])("%s, ageing %d: %d F", (basis, ageing, c) =>
-    expect(prepare(unit(), brief({ basis, ageing }), null).basis).toBeCloseTo(c, 12),
+    expect(prepare(unit(), brief({ basis, ageing })).basis).toBeCloseTo(c, 12),
   );
-  test("sizes unknown are null", () =>
-    expect(prepare(unit(), brief(), null)).toMatchObject({ volume: null, mass: null }));
+  test("sizes unknown are null", () => expect(prepare(unit(), brief())).toMatchObject({ volume: null, mass: null }));
   test("tolerance unknown is null, not zero", () => {
     const { tolerance: _known, ...bare } = unit();
-    expect(prepare(bare, brief(), null).tolerance).toBe(null);
-  });
-});
-
-describe("exchangeRate(from, to, brief): minor units to minor units", () => {
-  test("the same, or none named: one", () => {
-    expect(exchangeRate("EUR", "EUR", brief())).toBe(1);
-    expect(exchangeRate(undefined, "EUR", brief())).toBe(1);
-  });
-  test("no rate: null", () => expect(exchangeRate("USD", "EUR", brief())).toBe(null));
-  test("0.92 EUR a dollar; 0.006 EUR a yen is 0.6 cents; 3 EUR a dinar is 0.3 cents a fils", () => {
-    const rates = brief({ exchange: { USD: 0.92, JPY: 0.006, KWD: 3 } });
-    expect(exchangeRate("USD", "EUR", rates)).toBeCloseTo(0.92, 12);
-    expect(exchangeRate("JPY", "EUR", rates)).toBeCloseTo(0.6, 12);
-    expect(exchangeRate("KWD", "EUR", rates)).toBeCloseTo(0.3, 12);
+    expect(prepare(bare, brief()).tolerance).toBe(null);
   });
 });

@@ -38,7 +38,7 @@ describe("faultBankOf(bank)", () => {
     expect([unit.esr, unit.esl, unit.surgeVoltage, unit.ruptureEnergy]).toEqual([null, null, null, null]);
   });
   // Unknown is not even: the worst share before the fault is not known without a tolerance.
-  test.fails("a charging share that is not assessed is not handed on as the even one", () => {
+  test("a charging share that is not assessed is not handed on as the even one", () => {
     const { tolerance: _known, ...bare } = can;
     expect(faultBankOf(bank("cross-tied", bare)).worstCharging).not.toBe(400);
   });
