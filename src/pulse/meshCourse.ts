@@ -2,7 +2,7 @@
 import type { Piece } from "./dormandPrince.ts";
 import { type Course, integrate } from "./integrate.ts";
 import * as eq from "./meshSlopes.ts";
-import { awake, type Mode, watchesOf } from "./meshWatches.ts";
+import { awake, hasFaded, type Mode, watchesOf } from "./meshWatches.ts";
 
 /** One stage's dense pieces. */
 export interface Stage {
@@ -63,6 +63,8 @@ export function courseOf(m: eq.NormalMesh, oneWay: boolean, tolerance: number): 
     return { stages, end: y, peak, lowest, whole, clamped: mode === "clamped" || mode === "asleep", steps };
   };
   for (;;) {
+    // a stage can begin with the current already faded, which its watches, waiting for a change, would never tell
+    if (y[eq.ROOT] !== 0 && hasFaded(mode, m, side, peak.current, y)) return finish(true);
     const course: Course = integrate({
       slope: SLOPES[mode](m, side),
       from: 0,
@@ -114,6 +116,8 @@ export function courseOf(m: eq.NormalMesh, oneWay: boolean, tolerance: number): 
     side = voltage > 0 ? 1 : -1;
     // the drop turns about with the current, which can by itself push the terminals below the clamp
     if (m.clampDrop !== null && m.outerL > 0 && eq.terminalVoltage(m, side, y) + m.clampDrop <= 0) {
+      // a clamp lower than the switch's drop leaves the load nothing to conduct on; the bank empties through the diode alone
+      if (m.clampDrop <= m.drop) return finish(true);
       mode = "clamped";
       y[eq.BANK_CURRENT] = 0;
     }

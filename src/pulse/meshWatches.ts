@@ -69,3 +69,9 @@ const tailWatches = (_m: eq.NormalMesh, side: eq.Side, peak: number): Watch[] =>
 /** The watches of a stage, given the direction of the current and the peak so far. */
 export const watchesOf = (mode: Mode, m: eq.NormalMesh, side: eq.Side, peak: number): Watch[] =>
   ({ series: seriesWatches, clamped: clampedWatches, asleep: asleepWatches, tail: tailWatches })[mode](m, side, peak);
+
+const FADE_WATCH = { series: 2, clamped: 1, asleep: 0, tail: 0 } as const;
+
+/** Whether the current has faded as the stage's own watch would tell it; never before the first peak. */
+export const hasFaded = (mode: Mode, m: eq.NormalMesh, side: eq.Side, peak: number, y: Float64Array): boolean =>
+  peak > 0 && watchesOf(mode, m, side, peak)[FADE_WATCH[mode]]!.value(0, y) <= 0;

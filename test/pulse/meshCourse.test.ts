@@ -47,4 +47,17 @@ describe("courseOf(mesh, oneWay, tolerance)", () => {
     expect(course.steps).toBeLessThan(2000);
     near(course.peak.current, 1 / 900, 1e-3);
   });
+
+  // Found by a long run: both went round and round until the steps ran out.
+  test("a clamp that lets go when the current has already faded ends the course", () => {
+    const mesh = { ...plain, bankR: 0.2315, outerR: 0.674, lamp: 0.3186, clampDrop: 0 };
+    expect(courseOf(mesh, true, 1e-11).whole).toBe(true);
+  });
+
+  test("a clamp lower than the switch's drop never lets the drop drive the load", () => {
+    const mesh = { ...plain, bankR: 0.19, bankL: 0.9, outerR: 0.26, outerL: 0.1, drop: 0.1, clampDrop: 0 };
+    const course = courseOf(mesh, false, 1e-11);
+    expect(course.whole).toBe(true);
+    expect(course.end[TIME] ?? 0).toBeLessThan(100);
+  });
 });

@@ -1,7 +1,7 @@
 // meshWatches: what each stage watches, and when the bank's branch may sleep.
 import { describe, expect, test } from "vitest";
 import * as eq from "../../src/pulse/meshSlopes.ts";
-import { awake, watchesOf } from "../../src/pulse/meshWatches.ts";
+import { awake, hasFaded, watchesOf } from "../../src/pulse/meshWatches.ts";
 
 const mesh: eq.NormalMesh = {
   bankR: 5e-4,
@@ -51,5 +51,13 @@ describe("watchesOf(mode, mesh, side, peak)", () => {
   test("asleep and tail stop at nothing but fading", () => {
     expect(watchesOf("asleep", mesh, 1, 0.5)).toHaveLength(1);
     expect(watchesOf("tail", { ...mesh, lamp: 1 }, -1, 0.5)[0]?.value(0, state(-0.5, -0.1))).toBeGreaterThan(0);
+  });
+});
+
+describe("hasFaded(mode, mesh, side, peak, y)", () => {
+  test("never before the first peak, then as the stage's own watch", () => {
+    expect(hasFaded("clamped", mesh, 1, 0, state(1e-9, 0))).toBe(false);
+    expect(hasFaded("clamped", mesh, 1, 0.5, state(1e-9, 0))).toBe(true);
+    expect(hasFaded("series", mesh, 1, 0.5, state(0.4, 0.3))).toBe(false);
   });
 });
