@@ -1,0 +1,22 @@
+// Parts as sold and units as measured: their types, their readers, and what it costs to have q of them.
+export {
+  CAPACITOR_COLUMNS,
+  type Capacitor,
+  type PurchaseTerms,
+  unitVolume,
+  type ValueState,
+} from "./capacitor.ts";
+export type { PriceBreak } from "./cell.ts";
+export type { Column } from "./column.ts";
+export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
+export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
+export { cheapest, isPriced, leastBuyable, type Purchase, purchase, unitPriceAt } from "./purchase.ts";
+export { type Catalogue, readCapacitors } from "./readCapacitors.ts";
+export {
+  DEFAULT_FAMILY,
+  RESISTOR_COLUMNS,
+  type ResistorCatalogue,
+  type ResistorFamily,
+  readResistors,
+} from "./resistor.ts";
+export { assumedLeakage, RULES, stateOf } from "./states.ts";

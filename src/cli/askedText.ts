@@ -1,0 +1,72 @@
+// What was asked, as it was read: every value with its unit, and which of them are defaults.
+
+import { visible } from "../order/index.ts";
+import { type Dimension, formatQuantity } from "../quantity/index.ts";
+import type { Brief } from "../search/index.ts";
+import { pad, wrap } from "./wrap.ts";
+
+interface Asked {
+  readonly label: string;
+  /** Key of the brief. */
+  readonly key: string;
+  readonly value: (brief: Brief) => string | null;
+}
+
+const show = (x: number | undefined, dimension: Dimension): string | null =>
+  x === undefined ? null : formatQuantity(x, dimension, { digits: 6 });
+
+const ASKED: readonly Asked[] = [
+  { label: "energy of one pulse", key: "energy", value: (b) => show(b.energy, "energy") },
+  { label: "charge voltage", key: "voltage", value: (b) => show(b.voltage, "voltage") },
+  {
+    label: "allowed fall",
+    key: "ripple",
+    value: (b) => `${show(b.ripple, "fraction")}${b.ripple === 1 ? ", a full dump" : ""}`,
+  },
+  {
+    label: "steady draw",
+    key: "steady",
+    value: (b) =>
+      b.steady ? `${show(b.steady.current, "current")}, recharged at ${show(b.steady.frequency, "frequency")}` : null,
+  },
+  {
+    label: "basis",
+    key: "basis",
+    value: (b) => (b.basis === "statistical" ? `statistical, risk ${b.risk}` : b.basis),
+  },
+  { label: "derating", key: "derating", value: (b) => show(b.derating, "fraction") },
+  { label: "overshoot", key: "overshoot", value: (b) => show(b.overshoot, "fraction") },
+  { label: "ageing", key: "ageing", value: (b) => show(b.ageing, "fraction") },
+  { label: "hold", key: "hold", value: (b) => (Number.isFinite(b.hold) ? show(b.hold, "time") : "for ever") },
+  {
+    label: "touch-safe",
+    key: "touchSafe",
+    value: (b) => `${show(b.touchSafe, "voltage")}${b.touchSafeRule ? ` (${visible(b.touchSafeRule)})` : ""}`,
+  },
+  { label: "most in series", key: "maxSeries", value: (b) => String(b.maxSeries) },
+  { label: "most units", key: "maxUnits", value: (b) => String(b.maxUnits) },
+  {
+    label: "most cost",
+    key: "maxCost",
+    value: (b) => (b.maxCost === undefined ? null : `${b.maxCost} ${b.currency ?? ""}`.trim()),
+  },
+  { label: "most volume", key: "maxVolume", value: (b) => show(b.maxVolume, "volume") },
+  { label: "most mass", key: "maxMass", value: (b) => show(b.maxMass, "mass") },
+  { label: "spares", key: "spares", value: (b) => (b.spares === 0 ? null : String(b.spares)) },
+  { label: "ambient", key: "ambient", value: (b) => show(b.ambient, "temperature") },
+  { label: "shots", key: "rate", value: (b) => show(b.rate, "frequency") },
+];
+
+/** The brief in lines; the defaults together in the last. */
+export function askedText(brief: Brief, given: ReadonlySet<string>, width: number): string {
+  const lines: string[] = [];
+  const defaults: string[] = [];
+  for (const { label, key, value } of ASKED) {
+    const text = value(brief);
+    if (text === null) continue;
+    if (given.has(key)) lines.push(wrap(`${pad(label, 20)} ${text}`, width, "  "));
+    else defaults.push(`${label} ${text}`);
+  }
+  if (defaults.length > 0) lines.push(wrap(`by default: ${defaults.join(", ")}`, width, "  "));
+  return lines.join("\n");
+}

@@ -1,0 +1,59 @@
+// `order`: the bill of materials of one arrangement, to the output or to a file.
+
+import { BILL_FORMATS, type BillFormat, billOf, billText, visible } from "../../order/index.ts";
+import { nearestWord, type Refusal } from "../../quantity/index.ts";
+import { cautionsOf } from "../cautions.ts";
+import { type BankFlags, checkedBank } from "../checked.ts";
+import { EXIT } from "../exit.ts";
+import { titleOf } from "../findingWords.ts";
+import { faultLines } from "../inputNotes.ts";
+import type { Ports } from "../ports.ts";
+import { tell } from "../tell.ts";
+
+export type OrderFlags = BankFlags & {
+  readonly format?: string;
+  readonly output?: string;
+  readonly force?: boolean;
+};
+
+export function orderCommand(brief: string | undefined, flags: OrderFlags, ports: Ports): number {
+  const format = readFormat(flags);
+  const checked = checkedBank(brief, flags, ports);
+  if (!checked.ok || typeof format !== "string") {
+    const faults = [...(typeof format === "string" ? [] : [format]), ...(checked.ok ? [] : checked.refusals)];
+    return tell(ports, faults, flags.json);
+  }
+  const { result, unit, settings, stock, currency, notes } = checked.value;
+  const cautions = cautionsOf(settings.brief, { layout: result, unit }).map(({ text }) => text);
+  const { brief: asked } = settings;
+  const bill = billOf({ layout: result, unit, families: stock.families, brief: asked, currency, cautions });
+  const text = billText(bill, format);
+  const said = [...faultLines(stock), ...notes];
+  for (const finding of result.findings)
+    if (finding.verdict === "fail")
+      said.push(`FAIL, ${titleOf(finding.id)}: ${visible(finding.note)} Do not buy this bank.`);
+  if (said.length > 0) ports.err(`${said.join("\n")}\n`);
+  if (flags.output === undefined || flags.output === "-") ports.out(text);
+  else {
+    const written = ports.files.write(flags.output, text, flags.force === true);
+    if (!written.ok) return tell(ports, written.refusals, flags.json);
+    ports.err(`${visible(flags.output)}: ${bill.lines.length} lines written\n`);
+  }
+  return result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done;
+}
+
+/** The format named, else that of the file's ending, else CSV; --json is the format json. */
+function readFormat({ format, json, output }: OrderFlags): BillFormat | Refusal {
+  const ending = /\.([a-z]+)$/i
+    .exec(output ?? "")?.[1]
+    ?.toLowerCase()
+    .replace(/^htm$/, "html")
+    .replace(/^markdown$/, "md");
+  const named = format?.toLowerCase() ?? (json ? "json" : undefined);
+  const wanted = named ?? BILL_FORMATS.find((one) => one === ending) ?? "csv";
+  const found = BILL_FORMATS.find((one) => one === wanted);
+  if (found !== undefined) return found;
+  const near = nearestWord(wanted, BILL_FORMATS);
+  const want = `${near === null ? "" : `perhaps ${JSON.stringify(near)}; `}one of ${BILL_FORMATS.join(", ")}`;
+  return { code: "bad-choice", place: { field: "--format" }, read: JSON.stringify(wanted), want };
+}

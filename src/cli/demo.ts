@@ -1,0 +1,24 @@
+// The demo: the brief and the invented catalogues that come with the program, planned as text.
+
+import { join } from "node:path";
+import { planCommand } from "./commands/plan.ts";
+import type { Ports } from "./ports.ts";
+
+export const DEMO_CATALOGS: readonly string[] = [
+  "electrolytic.csv",
+  "film.csv",
+  "oil-and-paper.csv",
+  "double-layer.csv",
+  "home-made.csv",
+  "drawer.csv",
+];
+
+/** The bare command where there is no terminal: the plan of the demo brief. */
+export function demoCommand(ports: Ports): number {
+  const at = (name: string): string => join(ports.catalogs, name);
+  ports.out(
+    "The demo: a brief and catalogues that come with joulewright. Every part in them is invented.\nYour own: joulewright plan BRIEF --catalog FILE...   (joulewright --help)\n\n",
+  );
+  const flags = { catalog: DEMO_CATALOGS.map(at), resistors: at("resistors.csv"), limit: "10" };
+  return planCommand(at("demo-brief.json"), flags, ports);
+}

@@ -1,0 +1,107 @@
+// The commands, their flags and their help, on commander; each command's code is loaded when it is called.
+
+import { Command, CommanderError, Option } from "commander";
+import { visibleLines } from "../order/index.ts";
+import { BRIEF_FLAGS } from "./briefFlags.ts";
+import type { BankFlags } from "./checked.ts";
+import type { OrderFlags } from "./commands/order.ts";
+import type { PartsFlags } from "./commands/parts.ts";
+import type { PlanFlags } from "./commands/plan.ts";
+import { EXIT } from "./exit.ts";
+import { HELP } from "./helpText.ts";
+import type { Ports } from "./ports.ts";
+import { VERSION } from "./version.ts";
+
+type Done = (status: number) => void;
+
+function withBrief(command: Command): Command {
+  command.argument("[brief]", "brief file, JSON; - is standard input");
+  for (const { flag, argument, help } of BRIEF_FLAGS) command.addOption(new Option(`${flag} ${argument}`, help));
+  return command
+    .option("--catalog <file...>", "capacitor catalogues, CSV; may be repeated; - is standard input")
+    .option("--resistors <file>", "resistor catalogue, CSV; without it an assumed family is used")
+    .option("--json", "print JSON");
+}
+
+function withLayout(command: Command): Command {
+  return withBrief(command)
+    .option("--part <name>", "the unit capacitor, by its name in the catalogues")
+    .option("--series <count>", "units in series")
+    .option("--parallel <count>", "units or strings in parallel")
+    .option("--ties <ties>", "cross-tied or strings")
+    .option("--layout <file>", "one layout of plan --json; - is standard input")
+    .option("--balance <resistance>", 'fix the balancing resistor, "24 kohm", or none')
+    .option("--balance-tolerance <tolerance>", 'its tolerance, "5 %"');
+}
+
+function build(ports: Ports, done: Done): Command {
+  const program = new Command("joulewright");
+  const say = (write: (text: string) => void) => (text: string) => write(visibleLines(text));
+  program
+    .description("Plans, checks and buys a pulsed-power capacitor bank from the capacitors you own or can buy.")
+    .version(VERSION)
+    .exitOverride()
+    .configureOutput({
+      writeOut: say(ports.out),
+      writeErr: say(ports.err),
+      getOutHelpWidth: () => ports.columns,
+      getErrHelpWidth: () => ports.columns,
+    })
+    .showSuggestionAfterError(true)
+    .showHelpAfterError("(see --help)")
+    .addHelpText("after", HELP.program);
+  withBrief(program.command("plan"))
+    .description("Find every layout that does the job, ranked.")
+    .option("--limit <count>", "how many layouts are printed; 0 for all", "20")
+    .option("--rank <by>", "cost, units, volume, mass or stress", "cost")
+    .option("--brief-schema", "print the JSON Schema of the brief and stop")
+    .addHelpText("after", HELP.plan)
+    .action(async (brief: string | undefined, flags: PlanFlags) => {
+      const { planCommand } = await import("./commands/plan.ts");
+      done(planCommand(brief, flags, ports));
+    });
+  withLayout(program.command("check"))
+    .description("Check one layout in every state at rest.")
+    .addHelpText("after", HELP.check)
+    .action(async (brief: string | undefined, flags: BankFlags) => {
+      const { checkCommand } = await import("./commands/check.ts");
+      done(checkCommand(brief, flags, ports));
+    });
+  withLayout(program.command("order"))
+    .description("Write the bill of materials of one layout.")
+    .option("--format <format>", "csv, json, md or html; else by the ending of --output, else csv")
+    .option("--output <file>", "write to a file, whole or not at all")
+    .option("--force", "replace the file if it exists")
+    .addHelpText("after", HELP.order)
+    .action(async (brief: string | undefined, flags: OrderFlags) => {
+      const { orderCommand } = await import("./commands/order.ts");
+      done(orderCommand(brief, flags, ports));
+    });
+  program
+    .command("parts")
+    .description("Read catalogues and say what was understood, row by row.")
+    .argument("<files...>", "catalogues, CSV; - is standard input")
+    .option("--limit <count>", "how many rows of each file are told; 0 for all", "0")
+    .option("--json", "print JSON")
+    .addHelpText("after", HELP.parts)
+    .action(async (paths: readonly string[], flags: PartsFlags) => {
+      const { partsCommand } = await import("./commands/parts.ts");
+      done(partsCommand(paths, flags, ports));
+    });
+  return program;
+}
+
+/** Runs one command line without the program's name; the exit status. Throws only for a bug of ours. */
+export async function run(argv: readonly string[], ports: Ports): Promise<number> {
+  let status: number = EXIT.done;
+  const program = build(ports, (found) => {
+    status = found;
+  });
+  try {
+    await program.parseAsync([...argv], { from: "user" });
+    return status;
+  } catch (error) {
+    if (!(error instanceof CommanderError)) throw error;
+    return error.exitCode === 0 ? EXIT.done : EXIT.wrongUse;
+  }
+}

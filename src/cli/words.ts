@@ -1,0 +1,76 @@
+// Every refusal as a sentence: where, what is wrong, what stood there, what would be accepted.
+
+import { visible } from "../order/index.ts";
+import type { Place, Refusal } from "../quantity/index.ts";
+
+/** What each code means, in a clause. Every code used in src has one (a test). */
+export const WORDS: Readonly<Record<string, string>> = {
+  "ambiguous-comma": "the comma may group thousands or mark the decimals",
+  "bad-balance": "this is no balancing resistor",
+  "bad-breaks": "the price breaks cannot be read",
+  "bad-brief": "this is no brief",
+  "bad-choice": "this is not among the choices",
+  "bad-count": "this is no whole number in range",
+  "bad-currency": "this is no currency code",
+  "bad-json": "this is not JSON",
+  "bad-layout": "this is no layout",
+  "bad-path": "the system cannot use this path",
+  "bad-price": "this is no price",
+  "bad-tolerance": "this is no tolerance",
+  "bad-value": "the value cannot be used",
+  "bad-yes-no": "this is neither yes nor no",
+  "binary-file": "the file is not text",
+  "broken-quotes": "the quotes do not match",
+  contradiction: "values contradict each other",
+  "disk-full": "the disk is full; nothing was written",
+  "duplicate-heading": "a heading stands twice",
+  "duplicate-key": "a key stands twice",
+  "duplicate-part": "a part stands twice",
+  "duplicate-serial": "a serial stands twice",
+  empty: "the value is blank",
+  "empty-file": "there is nothing to read",
+  "file-exists": "the file exists already; it was left as it is",
+  "input-twice": "standard input can be read once",
+  "is-directory": "this is a folder",
+  "missing-heading": "a heading is missing",
+  "missing-option": "something needed was not given",
+  "missing-unit": "the unit is missing",
+  "missing-value": "a value is missing",
+  "more-faults": "there are more faults than are listed",
+  "no-input": "standard input is closed",
+  "no-parts": "no part could be read",
+  "no-permission": "the system does not allow it",
+  "no-rows": "there are no rows",
+  "no-such-file": "there is no such file",
+  "not-a-number": "this is no number",
+  "not-finite": "the number is not finite",
+  "not-utf8": "the text is not UTF-8",
+  "out-of-range": "the value is out of range",
+  "read-only": "the place is read-only; nothing was written",
+  "tolerance-range": "the tolerance is out of range",
+  "too-deep": "the nesting is too deep",
+  "too-large": "the file is too large",
+  "too-long": "the text is too long",
+  "two-currencies": "prices are in different currencies",
+  "unknown-column-name": "no column has this name",
+  "unknown-heading": "the heading is not known",
+  "unknown-key": "the key is not known",
+  "unknown-part": "no catalogue has this part",
+  "unknown-unit": "the unit is not known",
+  unreadable: "the system cannot use this file",
+  "wrong-kind": "this is another kind of file",
+  "wrong-unit": "the unit is one of another quantity",
+};
+
+/** `file:line:column heading`, as much of it as is known; empty when nothing is. */
+export function placeWords({ file, line, column, field }: Place): string {
+  const spot = [file, line, line === undefined ? undefined : column].filter((part) => part !== undefined).join(":");
+  return visible([spot, field ?? ""].filter((part) => part !== "").join(" "));
+}
+
+/** One sentence, safe to print. */
+export function refusalWords({ code, place, read, want }: Refusal): string {
+  const where = placeWords(place);
+  const what = `${WORDS[code] ?? code}: read ${visible(read)}; accepted: ${visible(want)}`;
+  return where === "" ? what : `${where}: ${what}`;
+}

@@ -1,0 +1,76 @@
+// Tolerances: "20 %", "+-20 %", "-10/+50 %" and the letters of IEC 60062, as fractions below and above nominal.
+//
+// Source: [IEC60062] letters (F, K, M, Z read second hand, the rest from memory; letters are not uniform between makers, so we print the figures).
+
+import type { Scale } from "./dimension.ts";
+import { parseQuantity } from "./parse.ts";
+import { accepted, type Read, refused } from "./refusal.ts";
+
+/** Fractions: a unit lies between nominal (1 - low) and nominal (1 + high). Range: 0 <= low < 1, 0 <= high <= 1. */
+export interface Tolerance {
+  readonly low: number;
+  readonly high: number;
+}
+
+const even = (t: number): Tolerance => ({ low: t, high: t });
+
+export const TOLERANCE_LETTERS: Readonly<Record<string, Tolerance>> = {
+  E: even(0.00005),
+  L: even(0.0001),
+  P: even(0.0002),
+  W: even(0.0005),
+  B: even(0.001),
+  C: even(0.0025),
+  D: even(0.005),
+  F: even(0.01),
+  G: even(0.02),
+  H: even(0.03),
+  J: even(0.05),
+  K: even(0.1),
+  M: even(0.2),
+  N: even(0.3),
+  Q: { low: 0.1, high: 0.3 },
+  T: { low: 0.1, high: 0.5 },
+  S: { low: 0.2, high: 0.5 },
+  Z: { low: 0.2, high: 0.8 },
+};
+
+const WANT =
+  'a tolerance such as "20 %", "+-20 %", "-10/+50 %" or a letter such as M, below 100 % downwards and at most 100 % upwards';
+const PAIR = /^([+\-−])\s*([\d.,]+)\s*%?\s*[/;\s]\s*([+\-−])\s*([\d.,]+)\s*(%?)$/u;
+const ZERO_PAIR = /^0\s*\/\s*\+\s*([\d.,]+)\s*(%?)$/u;
+
+/** Reads a tolerance; a bare number takes the scale of its heading (`bare`), null refuses it. */
+export function parseTolerance(text: string, bare: Scale | null, decimalComma = false): Read<Tolerance> {
+  const cell = text.trim();
+  const no = (code: string): Read<never> => refused({ code, place: {}, read: JSON.stringify(text), want: WANT });
+  const letter = TOLERANCE_LETTERS[cell];
+  if (letter) return accepted(letter);
+  const part = (digits: string, sign: string): number | null => {
+    const scale = sign === "%" ? { exponent: -2, factor: 1 } : bare;
+    const read = parseQuantity(digits, "fraction", { bare: scale, decimalComma });
+    return read.ok ? read.value : null;
+  };
+  const pair = PAIR.exec(cell);
+  const zero = ZERO_PAIR.exec(cell);
+  let low: number | null;
+  let high: number | null;
+  if (pair) {
+    const [, s1, a = "", s2, b = "", percent = ""] = pair;
+    if ((s1 === "+") === (s2 === "+")) return no("bad-tolerance");
+    low = part(s1 === "+" ? b : a, percent);
+    high = part(s1 === "+" ? a : b, percent);
+  } else if (zero) {
+    low = 0;
+    high = part(zero[1] ?? "", zero[2] ?? "");
+  } else {
+    const body = cell.replace(/^(\+\/?-|±|\+\/−)\s*/u, "");
+    const read = parseQuantity(body, "fraction", { bare, decimalComma });
+    if (!read.ok) return no(read.refusals[0]?.code === "missing-unit" ? "missing-unit" : "bad-tolerance");
+    low = read.value;
+    high = read.value;
+  }
+  if (low === null || high === null) return no("bad-tolerance");
+  if (low < 0 || high < 0 || low >= 1 || high > 1) return no("tolerance-range");
+  return accepted({ low, high });
+}

@@ -1,0 +1,144 @@
+// When nothing fits: the least change of each single demand that would make something fit, each found by trying.
+
+import { requiredCapacitance } from "../bank/index.ts";
+import { purchase } from "../catalog/index.ts";
+import { minorDigits } from "../quantity/index.ts";
+import type { Brief } from "./brief.ts";
+import { idOf } from "./rank.ts";
+import type { Change } from "./result.ts";
+import { type SweepInput, sweep } from "./sweep.ts";
+
+/** The first layout that fits under a changed brief, or null. */
+function fits(input: SweepInput, change: Partial<Brief>): string | null {
+  const brief = { ...input.brief, ...change };
+  const { table } = sweep({ ...input, brief, required: requiredCapacitance(brief) }, true);
+  return table.count > 0 ? idOf(table, input.parts, 0) : null;
+}
+
+/** Between a value that does not fit and one that does, the last that still fits, to 0.01 %. Both positive. */
+function edge(
+  input: SweepInput,
+  key: "energy" | "voltage" | "ripple" | "derating",
+  bad: number,
+  good: number,
+): Change | null {
+  let layout = fits(input, { [key]: good });
+  if (layout === null) return null;
+  let [no, yes] = [bad, good];
+  while (Math.abs(Math.log(yes / no)) > 1e-4) {
+    const middle = Math.sqrt(no * yes);
+    const found = fits(input, { [key]: middle });
+    if (found === null) no = middle;
+    else {
+      yes = middle;
+      layout = found;
+    }
+  }
+  return { field: key, from: input.brief[key], to: safeSide(yes, good < bad), layout, note: "" };
+}
+
+/** Four figures, rounded to the side that still fits. */
+function safeSide(value: number, down: boolean): number {
+  const power = Math.floor(Math.log10(value)) - 3;
+  const scaled = Number(`${value}e${-power}`);
+  return Number(`${down ? Math.floor(scaled) : Math.ceil(scaled)}e${power}`);
+}
+
+/** A voltage that fits nearest to the wanted one, looked for in steps of 5 % each way up to a factor of four. */
+function voltageChange(input: SweepInput): Change | null {
+  const { voltage } = input.brief;
+  for (let step = 1; step <= 28; step++) {
+    for (const ratio of [1.05 ** -step, 1.05 ** step]) {
+      if (fits(input, { voltage: voltage * ratio }) === null) continue;
+      const inner = ratio < 1 ? 1.05 ** -(step - 1) : 1.05 ** (step - 1);
+      return edge(input, "voltage", voltage * inner, voltage * ratio);
+    }
+  }
+  return null;
+}
+
+function energyChange(input: SweepInput): Change | null {
+  for (let power = 1; power <= 9; power++) {
+    const change = edge(input, "energy", input.brief.energy, input.brief.energy * 10 ** -power);
+    if (change !== null) return change;
+  }
+  return null;
+}
+
+/** The smallest of a doubling series of whole limits that fits, then the least between. */
+function wholeChange(input: SweepInput, key: "maxSeries" | "maxUnits", most: number): Change | null {
+  const from = input.brief[key];
+  if (fits(input, { [key]: most }) === null) return null;
+  let [no, yes] = [from, most];
+  while (yes - no > 1) {
+    const middle = Math.floor((no + yes) / 2);
+    if (fits(input, { [key]: middle }) === null) no = middle;
+    else yes = middle;
+  }
+  return { field: key, from, to: yes, layout: fits(input, { [key]: yes }) as string, note: "" };
+}
+
+/** The smallest addition to one part's stock that gives a layout. */
+function stockChange(input: SweepInput): Change | null {
+  let best: Change | null = null;
+  let least = Number.POSITIVE_INFINITY;
+  for (const unit of input.parts) {
+    if (unit.available === undefined) continue;
+    const { available, ...unlimited } = unit;
+    const { table } = sweep({ ...input, parts: [unlimited] }, true);
+    if (table.count === 0) continue;
+    // The cheapest purchase may hold more than is needed, for a price break: it surely does, and less may do too.
+    const bought = purchase(unlimited, (table.units[0] as number) + input.brief.spares)?.bought ?? 0;
+    const fitting = (stock: number): string | null => {
+      const parts = [{ ...unit, available: stock }];
+      const found = sweep({ ...input, parts }, true).table;
+      return found.count > 0 ? idOf(found, parts, 0) : null;
+    };
+    let [no, yes] = [available, bought];
+    while (yes - no > 1) {
+      const middle = Math.floor((no + yes) / 2);
+      if (fitting(middle) === null) no = middle;
+      else yes = middle;
+    }
+    if (yes - available >= least) continue;
+    least = yes - available;
+    best = { field: "available", from: available, to: yes, layout: fitting(yes) as string, note: unit.part };
+  }
+  return best;
+}
+
+/** Drops one ceiling; the value that would do is the least seen among all layouts without it. */
+function ceilingChange(input: SweepInput, key: "maxCost" | "maxVolume" | "maxMass"): Change | null {
+  const from = input.brief[key];
+  if (from === undefined) return null;
+  const { [key]: _dropped, ...rest } = input.brief;
+  const { table } = sweep({ ...input, brief: rest as Brief });
+  const column = key === "maxCost" ? table.cost : key === "maxVolume" ? table.volume : table.mass;
+  let best = -1;
+  for (let row = 0; row < table.count; row++) {
+    const value = column[row] as number;
+    if (Number.isFinite(value) && (best < 0 || value < (column[best] as number))) best = row;
+  }
+  if (best < 0) return null;
+  const raw = column[best] as number;
+  const to = key === "maxCost" ? raw / 10 ** minorDigits(input.currency ?? "") : raw;
+  return { field: key, from, to: safeSide(to, false), layout: idOf(table, input.parts, best), note: "" };
+}
+
+/** All single changes that would do, in the order a builder would think of them. */
+export function leastChanges(input: SweepInput): readonly Change[] {
+  const { brief } = input;
+  const found = [
+    brief.ripple < 1 ? edge(input, "ripple", brief.ripple, 1) : null,
+    voltageChange(input),
+    energyChange(input),
+    brief.derating < 1 ? edge(input, "derating", brief.derating, 1) : null,
+    wholeChange(input, "maxSeries", 1000),
+    wholeChange(input, "maxUnits", 100000),
+    stockChange(input),
+    ceilingChange(input, "maxCost"),
+    ceilingChange(input, "maxVolume"),
+    ceilingChange(input, "maxMass"),
+  ];
+  return found.filter((change): change is Change => change !== null);
+}

@@ -1,0 +1,102 @@
+// The front door: brief and parts to ranked layouts, their front, every refusal, and what would have to give way.
+
+import { requiredCapacitance } from "../bank/index.ts";
+import { type Capacitor, DEFAULT_FAMILY, isPriced, type ResistorFamily } from "../catalog/index.ts";
+import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
+import { assess } from "./assess.ts";
+import type { Brief } from "./brief.ts";
+import { leastChanges } from "./changes.ts";
+import { frontRows } from "./front.ts";
+import { comparison, firstRows, idOf, type Ranking, tiesOf } from "./rank.ts";
+import type { LayoutResult, PlanResult } from "./result.ts";
+import { type SweepInput, sweep } from "./sweep.ts";
+import type { LayoutTable } from "./table.ts";
+
+export interface PlanInput {
+  readonly brief: Brief;
+  readonly parts: readonly Capacitor[];
+  /** Default: the assumed family. */
+  readonly families?: readonly ResistorFamily[];
+  /** How many layouts are worked out in full; 0 for all. Default 20. */
+  readonly limit?: number;
+  readonly rank?: Ranking;
+  /** Leave out the search for least changes when nothing fits (a form that plans at every key). */
+  readonly quick?: boolean;
+}
+
+/** The currency of a plan: the brief's, else the only one in the catalogues. Two without a rate are refused. */
+export function planCurrency(
+  brief: Brief,
+  parts: readonly Capacitor[],
+  families: readonly ResistorFamily[],
+): Read<string | null> {
+  const priced = [...parts, ...families].filter((terms) => isPriced(terms));
+  const seen = new Set<string>();
+  for (const terms of priced) if (terms.currency !== undefined) seen.add(terms.currency);
+  const currency = brief.currency ?? [...seen][0] ?? (priced.length > 0 ? "EUR" : null);
+  const foreign = [...seen].filter((code) => code !== currency && brief.exchange?.[code] === undefined);
+  if (foreign.length === 0) return accepted(currency);
+  const fault: Refusal = {
+    code: "two-currencies",
+    place: { field: "currency" },
+    read: `prices in ${[...seen].sort().join(" and ")}`,
+    want: `one currency, or a rate in the brief such as "currency": "${currency}", "exchange": {"${foreign[0]}": 0.92}`,
+  };
+  return refused(fault);
+}
+
+/** Plans. Refuses only what cannot be understood (two currencies); nothing fitting is an answer, with its least changes. */
+export function plan(input: PlanInput): Read<PlanResult> {
+  const { brief, parts, families = [DEFAULT_FAMILY], limit = 20, rank = "cost", quick = false } = input;
+  const money = planCurrency(brief, parts, families);
+  if (!money.ok) return money;
+  const currency = money.value;
+  const required = requiredCapacitance(brief);
+  const work: SweepInput = { parts, families, brief, required, currency };
+  const { table, refused: refusals } = sweep(work);
+  const rows = firstRows(table.count, limit, comparison(table, parts, rank));
+  const layouts = rows.map((row) => layoutAt(work, table, row));
+  return accepted({
+    brief,
+    required: { capacitance: required },
+    searched: { parts: parts.length, layouts: table.count, proof: "exhaustive" },
+    currency,
+    layouts,
+    front: frontRows(table).map((row) => idOf(table, parts, row)),
+    refused: refusals,
+    changes: table.count === 0 && !quick ? leastChanges(work) : [],
+    ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
+    notes: notesOf(brief),
+  });
+}
+
+/** What the same brief takes when every unit may be at its worst: the price of certainty. */
+function bestOfWorstCase(input: PlanInput): LayoutResult | null {
+  const worst = plan({ ...input, brief: { ...input.brief, basis: "worst case" }, limit: 1, quick: true });
+  return worst.ok ? (worst.value.layouts[0] ?? null) : null;
+}
+
+/** One row of the table in full. */
+function layoutAt(work: SweepInput, table: LayoutTable, row: number): LayoutResult {
+  const unit = work.parts[table.part[row] as number] as Capacitor;
+  const layout = {
+    part: unit.part,
+    series: table.series[row] as number,
+    parallel: table.parallel[row] as number,
+    ties: tiesOf(table, row),
+  };
+  return assess({ unit, layout, brief: work.brief, families: work.families, currency: work.currency });
+}
+
+function notesOf(brief: Brief): readonly string[] {
+  const notes: string[] = [];
+  if (brief.ageing > 0) notes.push("Ageing is counted in energy and not in sharing: units of one bank age alike.");
+  if (brief.basis === "nominal")
+    notes.push("The nominal basis counts nominal capacitance for energy; sharing is still the worst case.");
+  if (brief.basis === "statistical") {
+    notes.push(
+      "The statistical basis bears a stated risk while charging; energy still counts every unit at its lowest, because a lot may lie low as a whole, and holding is still the worst case.",
+    );
+  }
+  return notes;
+}

@@ -1,0 +1,113 @@
+// What a plan and a check answer: plain data, SI values, money in the major unit of its currency.
+
+import type { Ties } from "../bank/index.ts";
+import type { Capacitor, Purchase } from "../catalog/index.ts";
+import type { Finding } from "../quantity/index.ts";
+import type { Brief } from "./brief.ts";
+import type { Risk } from "./risk.ts";
+
+/** A value under low, nominal and high capacitance; null where the tolerance is unknown. */
+export interface Span {
+  readonly low: number | null;
+  readonly nominal: number;
+  readonly high: number | null;
+}
+
+/** Voltages of one unit or stage, V, at the charge voltage with overshoot. null is not assessed. */
+export interface Shares {
+  readonly even: number;
+  readonly charging: number | null;
+  readonly holding: number | null;
+  /** Size of the reverse voltage that the low stage is left with after a dump from equal sharing. */
+  readonly leftAfterDump: number | null;
+  readonly limit: number;
+}
+
+/** The balancing resistor: one position a stage (cross-tied) or a unit (strings). ohm, fraction, W, V. */
+export interface Balance {
+  /** Resistance of one position. */
+  readonly resistance: number;
+  readonly tolerance: number;
+  readonly positions: number;
+  /** Equal elements in series in one position. */
+  readonly elements: number;
+  readonly elementResistance: number;
+  /** Worst power in one element. */
+  readonly powerEach: number;
+  /** Most that all the chains together take from the charger at full voltage. */
+  readonly powerTotal: number;
+  /** Worst voltage across one element. */
+  readonly voltageEach: number;
+  readonly family: string;
+  readonly assumed: boolean;
+}
+
+export interface Cost {
+  readonly capacitors: number | null;
+  readonly resistors: number | null;
+  /** Sum of the priced lines. */
+  readonly total: number;
+  readonly currency: string;
+  /** Lines without a price, which the total leaves out. */
+  readonly unpriced: readonly string[];
+}
+
+export interface LayoutResult {
+  readonly id: string;
+  readonly part: string;
+  readonly series: number;
+  readonly parallel: number;
+  readonly ties: Ties;
+  readonly units: number;
+  readonly capacitance: Span;
+  readonly energy: Span;
+  readonly share: Shares;
+  readonly balance: Balance | null;
+  readonly bleed: { readonly seconds: number | null; readonly toVoltage: number };
+  readonly cost: Cost | null;
+  /** m^3 in square packing without gaps; kg; null when sizes are unknown. Capacitors only. */
+  readonly volume: number | null;
+  readonly mass: number | null;
+  /** Worst unit voltage over rated voltage; null when not assessed. */
+  readonly stress: number | null;
+  /** With the statistical basis: chance that any unit of the bank exceeds its limit while charging; null when not assessed. */
+  readonly risk?: Risk | null;
+  readonly purchase: { readonly capacitors: Purchase | null; readonly resistors: Purchase | null };
+  readonly findings: readonly Finding[];
+}
+
+export interface RefusedPart {
+  readonly part: string;
+  readonly reason: string;
+  readonly value: number | null;
+  readonly limit: number | null;
+}
+
+/** One change of the brief or the stock that, alone, would make something fit. */
+export interface Change {
+  readonly field: string;
+  readonly from: number | null;
+  readonly to: number;
+  /** The first layout that then fits. */
+  readonly layout: string;
+  readonly note: string;
+}
+
+export interface PlanResult {
+  readonly brief: Brief;
+  readonly required: { readonly capacitance: number };
+  readonly searched: { readonly parts: number; readonly layouts: number; readonly proof: string };
+  readonly currency: string | null;
+  readonly layouts: readonly LayoutResult[];
+  readonly front: readonly string[];
+  readonly refused: readonly RefusedPart[];
+  readonly changes: readonly Change[];
+  /** With the statistical basis: the best layout of the worst case, to say what it would have cost; null when none fits. */
+  readonly worstCase?: LayoutResult | null;
+  readonly notes: readonly string[];
+}
+
+/** Everything a search works on. */
+export interface Stock {
+  readonly parts: readonly Capacitor[];
+}

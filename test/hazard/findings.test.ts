@@ -1,0 +1,64 @@
+// Hazards of whole banks as findings: the demo bank, a harmless one, and one that is safe by volts but not by joules.
+import { describe, expect, test } from "vitest";
+import { type HazardOf, hazardFindings } from "../../src/hazard/findings.ts";
+
+const demo: HazardOf = {
+  capacitance: (2 * 2400) / 2200 ** 2,
+  voltage: 2200,
+  safeVoltage: 60,
+  polarised: true,
+  bleedSeconds: 200,
+  bleedLimit: 300,
+};
+const verdicts = (bank: HazardOf) => Object.fromEntries(hazardFindings(bank).map((one) => [one.id, one.verdict]));
+const one = (bank: HazardOf, id: string) => hazardFindings(bank).find((finding) => finding.id === id)!;
+
+describe("hazardFindings(bank)", () => {
+  test("the demo bank, 2.4 kJ at 2.2 kV: hazardous, no blast, 330 V may come back", () => {
+    expect(verdicts(demo)).toEqual({
+      "energy-class": "warn",
+      "arc-blast": "pass",
+      "energy-at-safe": "pass",
+      recovery: "warn",
+      "bleed-time": "pass",
+    });
+    expect(one(demo, "energy-class").value).toBeCloseTo(2400, 9);
+    expect(one(demo, "energy-class").limit).toBe(0.25);
+    expect(one(demo, "recovery").value).toBeCloseTo(330, 9);
+    expect(one(demo, "bleed-time").margin).toBeCloseTo(1 / 3, 12);
+  });
+
+  test("0.1 uF at 12 V: nothing to warn of", () =>
+    expect(Object.values(verdicts({ ...demo, capacitance: 1e-7, voltage: 12 }))).toEqual(Array(5).fill("pass")));
+
+  test("0.667 F at 40 V: touch-safe all the time, yet 533 J burn", () => {
+    const welder = { ...demo, capacitance: 2 / 3, voltage: 40 };
+    expect(verdicts(welder)).toMatchObject({ "energy-class": "warn", "energy-at-safe": "warn" });
+    expect(one(welder, "energy-at-safe").value).toBeCloseTo(533.333, 2);
+  });
+
+  test("12 kJ at 2.2 kV is a blast hazard, from 10 kJ on", () =>
+    expect(verdicts({ ...demo, capacitance: 5 * demo.capacitance })).toMatchObject({ "arc-blast": "warn" }));
+
+  test("no limit given for the bleed: not assessed, never passed", () => {
+    const { bleedLimit: _, ...unlimited } = demo;
+    expect(one(unlimited, "bleed-time")).toMatchObject({ verdict: "not assessed", limit: null, margin: null });
+  });
+
+  test("no bleed at all: fails a limit, and says so even without one", () => {
+    const never = { ...demo, bleedSeconds: Number.POSITIVE_INFINITY };
+    expect(one(never, "bleed-time").verdict).toBe("fail");
+    expect(one({ ...never, bleedLimit: undefined }, "bleed-time").note).toMatch(/never empties/);
+  });
+
+  test("film is judged by the other recovery figure, with its own source", () =>
+    expect(one({ ...demo, polarised: false }, "recovery")).toMatchObject({
+      value: 220,
+      source: "Moore-electrostatics",
+    }));
+
+  test("margin is (limit - value)/limit", () => {
+    for (const { value, limit, margin } of hazardFindings(demo))
+      expect(margin).toBeCloseTo((limit! - value!) / limit!, 12);
+  });
+});
