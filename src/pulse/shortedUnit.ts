@@ -14,7 +14,7 @@
  * The short is ideal and instantaneous, at the unit's terminals; equal units; a ringing equalisation can swing survivors up to
  * twice the step. Source: [derived], energy balance checked.
  */
-import type { Ties } from "./unitDuty.ts";
+import type { Ties } from "../bank/index.ts";
 
 /** The bank at the moment of the fault. */
 export interface ShortCase {

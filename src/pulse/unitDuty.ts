@@ -11,11 +11,9 @@
  * one formula serves both. Holds while capacitance decides; when resistance or lead length does, sharing is as those are.
  * Source: [derived], corners checked by brute force.
  */
+import type { Ties } from "../bank/index.ts";
 import type { Finding } from "../quantity/index.ts";
 import { atMost, type Bound } from "./verdict.ts";
-
-/** How parallel units are joined. */
-export type Ties = "cross-tied" | "strings";
 
 /** What the maker allows one unit in one shot; null is not known. A, V/s, fraction of the charge voltage, A^2 s. */
 export interface UnitRatings {
