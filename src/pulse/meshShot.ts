@@ -4,7 +4,7 @@
  * The mesh is put into numbers of one (see meshSlopes.ts), followed to its end, and put back. Every energy is an integral of
  * its own (R times the action, K0 times the integral of |i|^1.5, the drop times the charge), so that their sum agreeing with
  * the stored energy is a check and not a definition. Needs some inductance; noInductanceShot takes the mesh without.
- * Source: [ME1966] lamp mesh; [derived] the clamp.
+ * Source: [ME1966] lamp mesh; [methods-derived] the clamp.
  */
 import { accepted, type Read, refused } from "../quantity/index.ts";
 import { within } from "./dormandPrince.ts";

@@ -10,7 +10,7 @@
  *   tail    late in a lamp's pulse the coil hardly matters: v = G(a) = d + k a + r a^2 - 2 a^3/(k + 2 r a), a = |u|,
  *           and the state runs in x = -ln a; the next term is of the order of (2 a^2/(k + 2 r a)^2)^2
  *
- * In t the lamp's sqrt|i| has no slope at i = 0; in s every slope is a polynomial. Source: [ME1966] the mesh; the rest [derived].
+ * In t the lamp's sqrt|i| has no slope at i = 0; in s every slope is a polynomial. Source: [ME1966] the mesh; the rest [methods-derived].
  */
 import type { Slope } from "./dormandPrince.ts";
 

@@ -12,7 +12,7 @@
  *           leg 1/(m(m - 1)), action through the faulted leg E_n (m - 1)/(m R_i)
  *
  * The short is ideal and instantaneous, at the unit's terminals; equal units; a ringing equalisation can swing survivors up to
- * twice the step. Source: [derived], energy balance checked.
+ * twice the step. Source: [methods-derived], energy balance checked.
  */
 import type { Ties } from "../bank/index.ts";
 

@@ -2,7 +2,7 @@
 import { describe, expect, test } from "vitest";
 import { atLeast, atMost, type Bound, remark } from "../../src/pulse/verdict.ts";
 
-const claim = { id: "x", unit: "A", source: "derived", note: "n" };
+const claim = { id: "x", unit: "A", source: "methods-derived", note: "n" };
 const verdict = (value: number | null, limit: number | null, bound: Bound = "value") =>
   atMost({ ...claim, value, limit, bound }).verdict;
 
@@ -45,7 +45,7 @@ describe("atLeast(claim)", () => {
 
 describe("remark(id, verdict, source, note)", () => {
   test("has no value and no limit", () => {
-    expect(remark("r", "warn", "derived", "n")).toMatchObject({
+    expect(remark("r", "warn", "methods-derived", "n")).toMatchObject({
       value: null,
       limit: null,
       margin: null,
