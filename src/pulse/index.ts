@@ -47,7 +47,6 @@ export { type TraceRow, traceOf } from "./trace.ts";
 export {
   type Arrangement,
   type PulseUnit,
-  type Ties,
   type UnitDuty,
   type UnitRatings,
   unitDutyOf,
