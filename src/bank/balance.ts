@@ -7,12 +7,12 @@
 // | V_1    | worst   | V    | worst holding voltage at the chosen R |
 //
 // Each element is the largest preferred value at most R_max/k; V_1/k <= working voltage, V_1^2/(R(1 - q))/k <= derated power.
-// V_1 rises with R, so V_1 at the least R that can come out bounds the volts and watts of every k from below: the search starts there. Source: [joulewright-design] section 3.
+// The search for k starts at the least that the volts and watts of any R that can come out allow. Source: [joulewright-design] section 3.
 
 import type { ResistorFamily } from "../catalog/index.ts";
 import { lastAtMost } from "../quantity/index.ts";
 import { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
-import { largestBalance } from "./share.ts";
+import { holdingLine, largestBalance } from "./share.ts";
 
 /** More elements than this in one position is no balancing resistor that anyone builds. */
 const MOST_ELEMENTS = 400;
@@ -35,23 +35,34 @@ export const elementPower = (worst: number, resistance: number, spread: number, 
  * `bank.spread` is the family's tolerance. The result is written into `choice`, because the search calls this for every layout.
  */
 export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorFamily, choice: Choice): boolean {
-  const endless = largestBalance(bank, limit);
-  const most = bank.hold === Number.POSITIVE_INFINITY ? endless : largestBalanceForHold(bank, limit, endless);
-  const { values, voltage, lowest, highest } = family;
+  // After an endless hold with a leakage current the worst voltage is a straight line in R, V_1 = base + slope R: the common case, kept short.
+  const straight = bank.hold === Number.POSITIVE_INFINITY && bank.leak.kind === "current";
+  const { base, slope } = straight ? holdingLine(bank) : NO_LINE;
+  const most =
+    straight && slope > 0 ? (limit - base) / slope : largestBalanceForHold(bank, limit, largestBalance(bank, limit));
+  const { values, voltage, lowest, highest, tolerance, step } = family;
   if (!(most > 0) || most < lowest * (1 - 1e-9)) return false;
-  const watts = family.power * family.derating;
-  // Whatever k is, R lies at most one step of the series below the smaller of R_max and one largest element.
-  const floor = holdWorst(bank, Math.min(most, highest) / family.step);
+  const watts = family.power * family.derating * (1 - tolerance);
+  // Whatever k is, R lies between these two: at most one step of the series below the smaller of R_max and one largest element.
+  const least = Math.min(most, highest) / step;
   const reach = Math.min(most, highest * MOST_ELEMENTS);
-  const start = Math.max(floor / voltage, (floor * floor) / (reach * (1 - bank.spread)) / watts, 1);
-  for (let k = Math.max(1, Math.ceil(start * (1 - 1e-9))); k <= MOST_ELEMENTS; k++) {
+  const even = bank.voltage / bank.series;
+  const floor = straight ? Math.min(base + slope * least, bank.voltage) : even;
+  const top = straight ? Math.min(base + slope * reach, bank.voltage) : even;
+  // V_1^2/R is least at an end of that range, or at R = base/slope, where it is 4 base slope.
+  let power = Math.min((floor * floor) / least, (top * top) / reach);
+  if (straight && slope * least < base && base < slope * reach) power = Math.min(power, 4 * base * slope);
+  const start = Math.max(floor / voltage, power / watts, 1);
+  for (let k = Math.ceil(start * (1 - 1e-9)); k <= MOST_ELEMENTS; k++) {
     const index = lastAtMost(values, Math.min(most / k, highest));
     if (index < 0) return false;
     const element = values[index] as number;
     const resistance = element * k;
-    const worst = holdWorst(bank, resistance);
-    if (worst / k > voltage * (1 + 1e-9)) continue;
-    if (elementPower(worst, resistance, bank.spread, k) > watts * (1 + 1e-9)) continue;
+    const worst = straight ? Math.min(base + slope * resistance, bank.voltage) : holdWorst(bank, resistance);
+    // Within a finite hold a smaller R may divide worse than a larger one, when resistors are wider than units.
+    if (!straight && worst > limit * (1 + 1e-9)) continue;
+    if (worst > voltage * k * (1 + 1e-9)) continue;
+    if (worst * worst > watts * resistance * k * (1 + 1e-9)) continue;
     choice.resistance = resistance;
     choice.element = element;
     choice.elements = k;
@@ -60,3 +71,5 @@ export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorF
   }
   return false;
 }
+
+const NO_LINE = { base: 0, slope: 0 };

@@ -1,6 +1,20 @@
 // An arrangement at rest: its name, energy, shares and balancing resistors.
 export { type Choice, chooseBalance, elementPower } from "./balance.ts";
 export {
+  type Chain,
+  type ChainUnit,
+  chainCapacitance,
+  chargingShares,
+  crossTiedChain,
+  endOfHold,
+  leftAfterDump as leftOnStages,
+  type Stage,
+} from "./chain.ts";
+export { type ClampCase, type ClampDiode, clampDiode } from "./clampDiode.ts";
+export { type Corner, chargingCorners, dumpedCorners, holdingCorners, type StageRange, stageRange } from "./corners.ts";
+export { type HoldCase, type HoldWorst, holdCornerWords, worstAtHold } from "./cornersHold.ts";
+export { type Course, courseOf, type Phase, type Program } from "./course.ts";
+export {
   bankCapacitance,
   FIT,
   leastParallel,
@@ -11,6 +25,9 @@ export {
 } from "./energy.ts";
 export { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
 export { type Layout, layoutId, plainTies, shapeOf, type Ties, unitCount } from "./layout.ts";
+export { type Cause, type CauseShare, type MarginCase, type Margins, marginCauses } from "./margins.ts";
+export { type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";
+export { type Residual, residualAfterDump } from "./residual.ts";
 export {
   chargingLeast,
   chargingWorst,
@@ -20,3 +37,6 @@ export {
   largestBalance,
   leftAfterDump,
 } from "./share.ts";
+export { exceedRisk, type Tail } from "./tail.ts";
+export { riskBound } from "./tailBound.ts";
+export { LEAST_LOT, type TailCase, type UnitLaw } from "./tailLaw.ts";

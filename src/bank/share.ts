@@ -60,15 +60,28 @@ export interface HoldingChain {
 export function holdingWorst(chain: HoldingChain, resistance: number): number {
   const { voltage, series, sharing, spread, leak } = chain;
   if (series === 1) return voltage;
-  const victim = 1 / (resistance * (1 + spread));
-  const rest = 1 / (resistance * (1 - spread));
-  if (leak.kind === "insulation") {
-    const g = rest + sharing / leak.ohms;
-    return victim === 0 && g === 0 ? voltage : voltage * (g / (g + (series - 1) * victim));
+  const insulated = leak.kind === "insulation";
+  if (resistance === Number.POSITIVE_INFINITY) return insulated || leak.amperes > 0 ? voltage : voltage / series;
+  // The formula times (n - 1)(1 - q)(1 + q), which leaves one division.
+  const victim = (series - 1) * (1 - spread);
+  const rest = 1 + spread;
+  if (insulated) {
+    const pull = rest * (1 + ((1 - spread) * sharing * resistance) / leak.ohms);
+    return (voltage * pull) / (victim + pull);
   }
-  if (resistance === Number.POSITIVE_INFINITY) return leak.amperes > 0 ? voltage : voltage / series;
-  const v = (voltage * rest + (series - 1) * sharing * leak.amperes) / ((series - 1) * victim + rest);
+  const v = (rest * (voltage + victim * sharing * leak.amperes * resistance)) / (victim + rest);
   return Math.min(v, voltage);
+}
+
+/** The line V_1 = base + slope R of holdingWorst for a leakage current and at least two in series (V, V/ohm), before it is cut off at V. */
+export function holdingLine({ voltage, series, sharing, spread, leak }: HoldingChain): {
+  readonly base: number;
+  readonly slope: number;
+} {
+  const victim = (series - 1) * (1 - spread);
+  const part = (1 + spread) / (victim + 1 + spread);
+  const drawn = leak.kind === "current" ? sharing * leak.amperes : 0;
+  return { base: voltage * part, slope: victim * drawn * part };
 }
 
 /**
@@ -77,11 +90,13 @@ export function holdingWorst(chain: HoldingChain, resistance: number): number {
  */
 export function largestBalance(chain: HoldingChain, limit: number): number {
   const { voltage, series, sharing, spread, leak } = chain;
-  const rest = 1 - spread;
-  const bracket = limit * ((series - 1) / (1 + spread) + 1 / rest) - voltage / rest;
-  if (bracket <= 0) return 0;
-  if (leak.kind === "current")
-    return leak.amperes > 0 ? bracket / ((series - 1) * sharing * leak.amperes) : Number.POSITIVE_INFINITY;
-  const pull = (voltage - limit) * (sharing / leak.ohms);
-  return pull > 0 ? bracket / pull : Number.POSITIVE_INFINITY;
+  const [below, above] = [1 - spread, 1 + spread];
+  const room = limit * ((series - 1) * below + above) - voltage * above;
+  if (room <= 0) return 0;
+  if (leak.kind === "current") {
+    const drawn = (series - 1) * sharing * leak.amperes;
+    return drawn > 0 ? room / (below * above * drawn) : Number.POSITIVE_INFINITY;
+  }
+  const pull = (voltage - limit) * sharing;
+  return pull > 0 ? (room * leak.ohms) / (below * above * pull) : Number.POSITIVE_INFINITY;
 }

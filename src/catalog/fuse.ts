@@ -3,7 +3,7 @@
 import { accepted, type Read, type Refusal } from "../quantity/index.ts";
 import type { PurchaseTerms } from "./capacitor.ts";
 import { above, type Column, PURCHASE_COLUMNS, text } from "./column.ts";
-import { readTable } from "./table.ts";
+import { readTable, record } from "./table.ts";
 
 /** A, V dc, A^2 s. `melting` and `clearing` are the action integrals to melt and to clear. */
 export interface Fuse extends PurchaseTerms {
@@ -35,8 +35,8 @@ export interface FuseCatalogue {
 /** Reads a fuse catalogue; blank ratings stay unknown. */
 export function readFuses(source: string, file: string): Read<FuseCatalogue> {
   const fuses: Fuse[] = [];
-  const table = readTable(source, FUSE_COLUMNS, file, ({ values }) => {
-    fuses.push(values as unknown as Fuse);
+  const table = readTable(source, FUSE_COLUMNS, file, (row) => {
+    fuses.push(record(FUSE_COLUMNS, row) as unknown as Fuse);
   });
   if (!table.ok) return table;
   return accepted({ fuses, faults: table.value.faults, notes: table.value.notes });

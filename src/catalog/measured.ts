@@ -2,7 +2,7 @@
 
 import { accepted, type Read, type Refusal } from "../quantity/index.ts";
 import { above, type Column, fromZero, text } from "./column.ts";
-import { readTable } from "./table.ts";
+import { readTable, record } from "./table.ts";
 
 /** A physical unit with its own readings. F, A, ohm; `uncertainty` is the meter's, relative, where the row has its own. */
 export interface MeasuredUnit {
@@ -38,8 +38,9 @@ export function readMeasured(source: string, file: string): Read<MeasuredLot> {
   const units: MeasuredUnit[] = [];
   const faults: Refusal[] = [];
   const seen = new Map<string, number>();
-  const table = readTable(source, MEASURED_COLUMNS, file, ({ values, line }) => {
-    const unit = values as unknown as MeasuredUnit;
+  const table = readTable(source, MEASURED_COLUMNS, file, (row) => {
+    const { line } = row;
+    const unit = record(MEASURED_COLUMNS, row) as unknown as MeasuredUnit;
     const first = seen.get(unit.serial);
     if (first !== undefined) {
       const want = `each serial once; line ${first} has it already`;

@@ -2,9 +2,9 @@
 
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { CAPACITOR_COLUMNS, type Capacitor, type ValueState } from "./capacitor.ts";
-import { plateCapacitor } from "./plateRow.ts";
+import { plateCapacitor } from "./plate.ts";
 import { assumedLeakage, namedStates, polarityOf, RULES } from "./states.ts";
-import { MOST_FAULTS, type Row, readTable } from "./table.ts";
+import { MOST_FAULTS, positions, type Row, readTable } from "./table.ts";
 
 export interface Catalogue {
   readonly parts: readonly Capacitor[];
@@ -51,22 +51,77 @@ export function readCapacitors(text: string, file: string): Read<Catalogue> {
   });
 }
 
+type Mutable = { -readonly [K in keyof Capacitor]: Capacitor[K] | undefined };
+
+const AT = positions<keyof Capacitor | "measured" | "assumed">(CAPACITOR_COLUMNS);
 const NONE: Readonly<Record<string, ValueState>> = Object.freeze({});
 const LEAKAGE: ValueState = { state: "assumed", rule: RULES.leakage };
 const POLARITY: ValueState = { state: "assumed", rule: RULES.polarity };
 const PLATES: ValueState = { state: "assumed", rule: RULES.plate };
 
-/** A row to a capacitor. The row's own record becomes the capacitor, so that all capacitors have one shape. */
-function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> {
-  const unit = row.values as Record<string, unknown> & { -readonly [K in keyof Capacitor]?: Capacitor[K] };
-  const place = { file, line: row.line };
-  let states = NONE as Record<string, ValueState>;
-  const mark = (key: string, state: ValueState): void => {
-    states = { ...states, [key]: state };
+/** All keys in one order for every row: a catalogue of 100,000 parts is read, and searched, several times faster so. */
+function draft({ values, line }: Row, file: string): Mutable {
+  return {
+    part: values[AT.part] as never,
+    maker: values[AT.maker] as never,
+    technology: values[AT.technology] as never,
+    polarised: values[AT.polarised] as never,
+    capacitance: values[AT.capacitance] as never,
+    voltage: values[AT.voltage] as never,
+    tolerance: values[AT.tolerance] as never,
+    surgeVoltage: values[AT.surgeVoltage] as never,
+    reverseVoltage: values[AT.reverseVoltage] as never,
+    derating: values[AT.derating] as never,
+    leakage: values[AT.leakage] as never,
+    insulation: values[AT.insulation] as never,
+    esr: values[AT.esr] as never,
+    esl: values[AT.esl] as never,
+    peakCurrent: values[AT.peakCurrent] as never,
+    rippleCurrent: values[AT.rippleCurrent] as never,
+    slew: values[AT.slew] as never,
+    reversal: values[AT.reversal] as never,
+    ratedShots: values[AT.ratedShots] as never,
+    lifeExponent: values[AT.lifeExponent] as never,
+    reversalExponent: values[AT.reversalExponent] as never,
+    thermalResistance: values[AT.thermalResistance] as never,
+    ruptureEnergy: values[AT.ruptureEnergy] as never,
+    diameter: values[AT.diameter] as never,
+    length: values[AT.length] as never,
+    width: values[AT.width] as never,
+    height: values[AT.height] as never,
+    mass: values[AT.mass] as never,
+    currency: values[AT.currency] as never,
+    price: values[AT.price] as never,
+    priceBreaks: values[AT.priceBreaks] as never,
+    pack: values[AT.pack] as never,
+    minimumOrder: values[AT.minimumOrder] as never,
+    onHand: values[AT.onHand] as never,
+    available: values[AT.available] as never,
+    supplier: values[AT.supplier] as never,
+    orderCode: values[AT.orderCode] as never,
+    note: values[AT.note] as never,
+    plateArea: values[AT.plateArea] as never,
+    gap: values[AT.gap] as never,
+    permittivity: values[AT.permittivity] as never,
+    plates: values[AT.plates] as never,
+    breakdownField: values[AT.breakdownField] as never,
+    states: NONE,
+    file,
+    line,
   };
-  if (unit.measured !== undefined || unit.assumed !== undefined) {
-    const named = namedStates(unit.measured as string | undefined, unit.assumed as string | undefined);
-    states = named.states;
+}
+
+/** A row to a capacitor, with what it leaves out assumed by a named rule or left unknown. */
+function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> {
+  const unit = draft(row, file);
+  const place = { file, line: row.line };
+  const mark = (key: string, state: ValueState): void => {
+    unit.states = { ...unit.states, [key]: state };
+  };
+  const [measured, assumed] = [row.values[AT.measured], row.values[AT.assumed]];
+  if (measured !== undefined || assumed !== undefined) {
+    const named = namedStates(measured as string | undefined, assumed as string | undefined);
+    unit.states = named.states;
     for (const name of named.strange) {
       const want = "a heading of this catalogue in `measured` or `assumed`";
       notes.push({ code: "unknown-column-name", place, read: JSON.stringify(name), want });
@@ -75,46 +130,32 @@ function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> 
   if (unit.plateArea !== undefined || unit.gap !== undefined || unit.plates !== undefined) {
     const plate = plateCapacitor(unit, place);
     if (!plate.ok) return plate;
-    for (const [key, value] of Object.entries(plate.value)) {
-      if (unit[key] !== undefined) continue;
+    for (const key of ["capacitance", "voltage"] as const) {
+      const value = plate.value[key];
+      if (unit[key] !== undefined || value === undefined) continue;
       unit[key] = value;
       mark(key, PLATES);
     }
     unit.technology ??= "home-made plates";
   }
-  for (const key of ["capacitance", "voltage"]) {
-    if (unit[key] !== undefined) continue;
-    const want = `a value for ${key}, or plate area, gap, plates and breakdown field`;
-    return refused({
-      code: "missing-value",
-      place: { ...place, field: key },
-      read: "a blank cell or no such column",
-      want,
-    });
+  const { capacitance, voltage } = unit;
+  if (capacitance === undefined || voltage === undefined) {
+    const field = capacitance === undefined ? "capacitance" : "voltage";
+    const want = `a value for ${field}, or plate area, gap, plates and breakdown field`;
+    return refused({ code: "missing-value", place: { ...place, field }, read: "a blank cell or no such column", want });
   }
   if (unit.polarised === undefined) {
-    const polarised = polarityOf(unit.technology);
-    if (polarised !== undefined) {
-      unit.polarised = polarised;
-      mark("polarised", POLARITY);
-    }
+    unit.polarised = polarityOf(unit.technology);
+    if (unit.polarised !== undefined) mark("polarised", POLARITY);
   }
-  const { capacitance = 0, voltage = 0, surgeVoltage = voltage } = unit;
   if (unit.polarised === true && unit.leakage === undefined && unit.insulation === undefined) {
     unit.leakage = assumedLeakage(capacitance, voltage);
     mark("leakage", LEAKAGE);
   }
-  if (surgeVoltage < voltage) {
+  if (unit.surgeVoltage !== undefined && unit.surgeVoltage < voltage) {
+    const at = { ...place, field: "surge voltage" };
     const want = "a surge voltage at least the rated voltage";
-    return refused({
-      code: "contradiction",
-      place: { ...place, field: "surge voltage" },
-      read: `${surgeVoltage} V below ${voltage} V`,
-      want,
-    });
+    return refused({ code: "contradiction", place: at, read: `${unit.surgeVoltage} V below ${voltage} V`, want });
   }
-  unit.states = states;
-  unit.file = file;
-  unit.line = row.line;
-  return accepted(unit as unknown as Capacitor);
+  return accepted(unit as Capacitor);
 }

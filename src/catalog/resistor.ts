@@ -11,7 +11,7 @@ import {
 } from "../quantity/index.ts";
 import type { PurchaseTerms } from "./capacitor.ts";
 import { above, type Column, fromZero, PURCHASE_COLUMNS, text } from "./column.ts";
-import { readTable } from "./table.ts";
+import { readTable, record } from "./table.ts";
 
 export interface ResistorFamily extends PurchaseTerms {
   readonly family: string;
@@ -86,8 +86,9 @@ export interface ResistorCatalogue {
 export function readResistors(source: string, file: string): Read<ResistorCatalogue> {
   const families: ResistorFamily[] = [];
   const faults: Refusal[] = [];
-  const table = readTable(source, RESISTOR_COLUMNS, file, ({ values, line }) => {
-    const row = values as Partial<ResistorFamily> & { readonly tolerance: never };
+  const table = readTable(source, RESISTOR_COLUMNS, file, (found) => {
+    const { line } = found;
+    const row = record(RESISTOR_COLUMNS, found) as Partial<ResistorFamily> & { readonly tolerance: never };
     const lowest = row.lowest ?? DEFAULT_FAMILY.lowest;
     const highest = row.highest ?? DEFAULT_FAMILY.highest;
     const tolerance = row.tolerance as Tolerance;

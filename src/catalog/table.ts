@@ -16,8 +16,19 @@ import { readRecords } from "./csv.ts";
 
 export interface Row {
   readonly line: number;
-  readonly values: Readonly<Record<string, unknown>>;
+  /** One value a column, in the order of the columns asked for; undefined where the cell is blank or the column missing. */
+  readonly values: readonly unknown[];
 }
+
+/** The values of a row by key, for tables short enough not to care. */
+export const record = (columns: readonly Column[], row: Row): Readonly<Record<string, unknown>> =>
+  Object.fromEntries(
+    columns.map((column, i) => [column.key, row.values[i]]).filter(([, value]) => value !== undefined),
+  );
+
+/** Position of each key among the columns. */
+export const positions = <K extends string>(columns: readonly Column[]): Readonly<Record<K, number>> =>
+  Object.fromEntries(columns.map((column, i) => [column.key, i])) as Record<K, number>;
 
 export interface TableReport {
   /** Rows that were lost, with every fault of each. */
@@ -30,7 +41,9 @@ export interface TableReport {
 
 interface BoundColumn {
   readonly column: Column;
+  /** Position in the file, and among the columns asked for. */
   readonly index: number;
+  readonly slot: number;
   readonly scale: Scale | null;
   /** For the quick way through plain numbers: `e-6` behind them, and the range; null where there is no quick way. */
   readonly quick: { readonly suffix: string; readonly least: number; readonly most: number } | null;
@@ -39,7 +52,8 @@ interface BoundColumn {
 interface BoundTable {
   readonly bound: readonly BoundColumn[];
   readonly decimalComma: boolean;
-  readonly blank: Readonly<Record<string, unknown>>;
+  /** How many columns were asked for. */
+  readonly width: number;
 }
 
 const HEADING = /^([^[\]]*?)\s*(?:\[([^[\]]*)\])?$/;
@@ -64,7 +78,6 @@ export function readTable(
   let fatal: readonly Refusal[] | null = null;
   let rowCount = 0;
   let decimalComma = false;
-  const blank = blankRow(columns);
   const fault = (refusal: Refusal, place: Place): void => {
     if (faults.length < MOST_FAULTS) faults.push({ ...refusal, place: { file, ...place } });
     else lost++;
@@ -83,7 +96,7 @@ export function readTable(
       return;
     }
     rowCount++;
-    const row = readRow(cells, line, { bound, decimalComma, blank }, fault);
+    const row = readRow(cells, line, { bound, decimalComma, width: columns.length }, fault);
     if (row !== null) take(row);
   });
   if (!separated.ok) return refused(...separated.refusals.map((r) => ({ ...r, place: { file } })));
@@ -104,20 +117,16 @@ export function readTable(
   return accepted({ faults, notes, rowCount });
 }
 
-/** A record with every key of the columns, so that all rows of a table have one shape. */
-const blankRow = (columns: readonly Column[]): Record<string, unknown> =>
-  Object.fromEntries(columns.map((column) => [column.key, undefined]));
-
 function readRow(
   cells: readonly string[],
   line: number,
   table: BoundTable,
   fault: (refusal: Refusal, place: Place) => void,
 ): Row | null {
-  const values = { ...table.blank };
+  const values: unknown[] = new Array(table.width).fill(undefined);
   let good = true;
   let currency = "EUR";
-  for (const { column, index, scale, quick } of table.bound) {
+  for (const { column, index, slot, scale, quick } of table.bound) {
     const cell = cells[index];
     if (cell === undefined || cell === "") {
       if (column.required) {
@@ -130,13 +139,13 @@ function readRow(
     if (quick !== null && isPlain(cell)) {
       const value = Number(cell + quick.suffix);
       if (value >= quick.least && value <= quick.most) {
-        values[column.key] = value;
+        values[slot] = value;
         continue;
       }
     }
     const read = readCell(cell, column.type, { bare: scale, decimalComma: table.decimalComma, currency });
     if (read.ok) {
-      values[column.key] = read.value;
+      values[slot] = read.value;
       if (column.key === "currency") currency = read.value as string;
     } else {
       good = false;
@@ -204,7 +213,7 @@ function bindHeadings(
       });
       return;
     }
-    bound.push({ column, index, scale: scaled, quick: quickWay(column, scaled) });
+    bound.push({ column, index, slot: columns.indexOf(column), scale: scaled, quick: quickWay(column, scaled) });
   });
   for (const column of columns.filter((c) => c.required)) {
     if (bound.some((b) => b.column === column)) continue;

@@ -1,7 +1,7 @@
 // What other layers add to a checked layout: the seam where the fault table and the statistical risk are joined in.
 
 import type { Capacitor } from "../catalog/index.ts";
-import type { Brief, LayoutResult } from "../search/index.ts";
+import { type Brief, faultsOf, type LayoutResult } from "../search/index.ts";
 
 export interface BankFacts {
   readonly layout: LayoutResult;
@@ -13,7 +13,10 @@ export interface BankFacts {
 export const JOINED: {
   readonly faults: ((bank: BankFacts) => readonly unknown[]) | null;
   readonly risk: ((bank: BankFacts) => unknown) | null;
-} = { faults: null, risk: null };
+} = {
+  faults: ({ layout, unit, brief }) => faultsOf({ result: layout, unit, brief }),
+  risk: ({ layout }) => layout.risk ?? null,
+};
 
 /** The joined keys of one bank; `risk` belongs to the statistical basis alone. */
 export function joinedFacts(bank: BankFacts, joined = JOINED): Readonly<Record<string, unknown>> {

@@ -19,6 +19,7 @@ import type { Brief } from "./brief.ts";
 import { type Candidate, prepare } from "./candidate.ts";
 import { findingsOf } from "./findings.ts";
 import type { Balance, Cost, LayoutResult, Shares, Span } from "./result.ts";
+import { type Risk, riskOf } from "./risk.ts";
 
 /** How the balancing resistor comes about: chosen by the rule, fixed by the builder, or left out. */
 export type BalanceWish =
@@ -91,9 +92,17 @@ export function assess(input: AssessInput): LayoutResult {
     volume: candidate.volume === null ? null : candidate.volume * units,
     mass: candidate.mass === null ? null : candidate.mass * units,
     stress: worst === null ? null : worst / unit.voltage,
+    ...(brief.basis === "statistical" ? { risk: riskFor(candidate, brief, layout) } : {}),
     purchase: { capacitors, resistors },
   };
   return { ...result, findings: findingsOf({ result, unit, brief, candidate, family: family ?? null }) };
+}
+
+/** Chance of an excess while charging, or null when the tolerance is unknown. */
+function riskFor({ tolerance, limit }: Candidate, brief: Brief, { series, parallel, ties }: Layout): Risk | null {
+  const voltage = brief.voltage * (1 + brief.overshoot);
+  if (series === 1) return { exceed: voltage <= limit * (1 + 1e-9) ? 0 : 1, error: 0 };
+  return tolerance === null ? null : riskOf({ tolerance, series, parallel, ties, share: limit / voltage }, brief);
 }
 
 const worstOf = (charging: number | null, holding: number | null): number | null =>

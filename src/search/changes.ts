@@ -87,10 +87,22 @@ function stockChange(input: SweepInput): Change | null {
     const { available, ...unlimited } = unit;
     const { table } = sweep({ ...input, parts: [unlimited] }, true);
     if (table.count === 0) continue;
+    // The cheapest purchase may hold more than is needed, for a price break: it surely does, and less may do too.
     const bought = purchase(unlimited, (table.units[0] as number) + input.brief.spares)?.bought ?? 0;
-    if (bought - available >= least) continue;
-    least = bought - available;
-    best = { field: "available", from: available, to: bought, layout: idOf(table, [unlimited], 0), note: unit.part };
+    const fitting = (stock: number): string | null => {
+      const parts = [{ ...unit, available: stock }];
+      const found = sweep({ ...input, parts }, true).table;
+      return found.count > 0 ? idOf(found, parts, 0) : null;
+    };
+    let [no, yes] = [available, bought];
+    while (yes - no > 1) {
+      const middle = Math.floor((no + yes) / 2);
+      if (fitting(middle) === null) no = middle;
+      else yes = middle;
+    }
+    if (yes - available >= least) continue;
+    least = yes - available;
+    best = { field: "available", from: available, to: yes, layout: fitting(yes) as string, note: unit.part };
   }
   return best;
 }

@@ -3,9 +3,12 @@
 import { FIT } from "../bank/index.ts";
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
 import { stateOf } from "../catalog/index.ts";
+import { hazardFindings } from "../hazard/index.ts";
+import { unitShort } from "../pulse/index.ts";
 import { type Finding, formatQuantity, type Verdict } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
+import { faultBankOf } from "./faults.ts";
 import type { LayoutResult } from "./result.ts";
 
 export interface FindingsInput {
@@ -45,15 +48,28 @@ export function atLeast(draft: Draft): Finding {
 export function findingsOf(input: FindingsInput): readonly Finding[] {
   return [
     chargingShare(input),
+    ...chargingRisk(input),
     holdingShare(input),
     ...balanceLoad(input),
     reverse(input),
     energy(input),
     bleed(input),
+    ...hazards(input),
+    ...oneShorted(input),
   ];
 }
 
-function chargingShare({ result }: FindingsInput): Finding {
+/** With the statistical basis: the chance against the brief's risk, its error counted against it. */
+function chargingRisk({ result, brief }: FindingsInput): readonly Finding[] {
+  if (result.risk === undefined) return [];
+  const value = result.risk === null ? null : Math.min(1, result.risk.exceed + result.risk.error);
+  const spread = brief.distribution === "normal" ? "normal, cut at three sigma" : "uniform over its tolerance";
+  const note = `Chance that any unit of the bank exceeds its limit while charging: units independent, each ${spread}; what a whole lot has in common cancels.`;
+  const draft = { id: "charging-risk", state: "charging", value, limit: brief.risk, unit: "1" } as const;
+  return [atMost({ ...draft, source: "methods-derived", note })];
+}
+
+function chargingShare({ result, brief }: FindingsInput): Finding {
   const unknown = result.share.charging === null;
   return atMost({
     id: "charging-share",
@@ -62,6 +78,8 @@ function chargingShare({ result }: FindingsInput): Finding {
     limit: result.share.limit,
     unit: "V",
     source: "joulewright-design",
+    // The builder chose to bear a stated risk instead: the worst case is told, not refused.
+    exceeded: brief.basis === "statistical" ? "warn" : "fail",
     note: unknown
       ? "The tolerance is unknown, so how the voltage divides while charging is not known: measure the units or find the datasheet."
       : result.series === 1
@@ -167,9 +185,6 @@ function energy({ result, brief }: FindingsInput): Finding {
   });
 }
 
-/** Five minutes: the longest time that rules for power capacitors give (NEC 460.28 and IEEE 18, from memory). */
-const LONGEST_BLEED = 300;
-
 function bleed({ result }: FindingsInput): Finding {
   const { seconds, toVoltage } = result.bleed;
   const safe = formatQuantity(toVoltage, "voltage");
@@ -177,21 +192,47 @@ function bleed({ result }: FindingsInput): Finding {
     id: "bleed",
     state: "stored",
     value: seconds,
-    limit: LONGEST_BLEED,
+    limit: null,
     unit: "s",
-    source: "NEC-460",
+    source: "joulewright-design",
   } as const;
   if (seconds === null) {
-    return {
-      ...draft,
-      verdict: "warn",
-      margin: null,
-      note: `No balancing chain drains this bank to ${safe}: it needs a bleed resistor of its own, a dump and a shorting link.`,
-    };
+    const note = `No balancing chain drains this bank to ${safe}: it needs a bleed resistor of its own, a dump and a shorting link.`;
+    return { ...draft, verdict: "warn", margin: null, note };
   }
-  return atMost({
-    ...draft,
-    exceeded: "warn",
-    note: `Time to ${safe} through the balancing chain alone, high capacitance and high resistance; never trust it: dump, measure, short.`,
+  const note = `Time to ${safe} through the balancing chain alone, high capacitance and high resistance. No limit was given to judge it by. Never trust it: dump, measure, short.`;
+  return { ...draft, verdict: "not assessed", margin: null, note };
+}
+
+/** What can hurt, by the rules of the hazard layer; its own bleed finding is the one above. */
+function hazards({ result, unit, brief }: FindingsInput): readonly Finding[] {
+  const findings = hazardFindings({
+    capacitance: result.capacitance.high ?? result.capacitance.nominal,
+    voltage: brief.voltage * (1 + brief.overshoot),
+    safeVoltage: brief.touchSafe,
+    polarised: unit.polarised !== false,
+    bleedSeconds: result.bleed.seconds ?? Number.POSITIVE_INFINITY,
   });
+  return findings.filter((finding) => finding.id !== "bleed-time");
+}
+
+/** One unit shorted with the charger still on: what the sound ones then see. A warning, because it takes a fault to get there. */
+function oneShorted({ result, unit, brief }: FindingsInput): readonly Finding[] {
+  if (result.series === 1) return [];
+  const fault = unitShort(faultBankOf({ result, unit, brief }));
+  const value = fault.worstVoltageSpread;
+  const note = `One unit shorted with the charger still on: the sound ones against their ${unit.surgeVoltage === undefined ? "rated" : "surge"} voltage. ${fault.stops}`;
+  const limit = unit.surgeVoltage ?? unit.voltage;
+  return [
+    atMost({
+      id: "unit-short",
+      state: "faulted",
+      value,
+      limit,
+      unit: "V",
+      source: "methods-8",
+      exceeded: "warn",
+      note,
+    }),
+  ];
 }

@@ -65,8 +65,15 @@ export function plan(input: PlanInput): Read<PlanResult> {
     front: frontRows(table).map((row) => idOf(table, parts, row)),
     refused: refusals,
     changes: table.count === 0 && !quick ? leastChanges(work) : [],
+    ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
     notes: notesOf(brief),
   });
+}
+
+/** What the same brief takes when every unit may be at its worst: the price of certainty. */
+function bestOfWorstCase(input: PlanInput): LayoutResult | null {
+  const worst = plan({ ...input, brief: { ...input.brief, basis: "worst case" }, limit: 1, quick: true });
+  return worst.ok ? (worst.value.layouts[0] ?? null) : null;
 }
 
 /** One row of the table in full. */
@@ -86,5 +93,10 @@ function notesOf(brief: Brief): readonly string[] {
   if (brief.ageing > 0) notes.push("Ageing is counted in energy and not in sharing: units of one bank age alike.");
   if (brief.basis === "nominal")
     notes.push("The nominal basis counts nominal capacitance for energy; sharing is still the worst case.");
+  if (brief.basis === "statistical") {
+    notes.push(
+      "The statistical basis bears a stated risk while charging; energy still counts every unit at its lowest, because a lot may lie low as a whole, and holding is still the worst case.",
+    );
+  }
   return notes;
 }

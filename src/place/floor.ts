@@ -1,0 +1,61 @@
+/*
+ * What the meter can still tell: below this gap a better placing is for show.
+ *
+ *   symbol  unit  range   meaning
+ *   u       1     >= 0    relative unit-to-unit uncertainty of one reading (a common scale error cancels)
+ *   e(n)    1     >= 0    mean of the largest of n standard normal numbers
+ *   n_s,n_p 1     >= 1    stages in series, units per stage
+ *
+ *   cross-tied   floor = e(n_s) u / sqrt(n_p)
+ *   strings      floor = e(n_s n_p) u sqrt(1 - 1/n_s), treating units of one string as independent (slightly high)
+ *
+ * Holds for independent errors of equal spread. A gap is printed to no more digits than +-2 u/sqrt(n_p) supports.
+ * Source: [Harter1961] e(n), expected values of normal order statistics; [methods-derived] the rest.
+ */
+import type { Ties } from "./unit.ts";
+
+const REACH = 9;
+const STEPS = 1800;
+
+/** e(n), to about 1e-6. e(1) = 0, e(2) = 1/sqrt(pi). */
+export function expectedLargest(count: number): number {
+  // e(n) = integral of x d(F^n): summed by parts over a fine grid, with F itself accumulated by Simpson's rule.
+  const step = (2 * REACH) / STEPS;
+  const density = (x: number): number => Math.exp((-x * x) / 2) / Math.sqrt(2 * Math.PI);
+  let below = 0;
+  let integral = 0;
+  let before = 0;
+  for (let i = 0; i < STEPS; i++) {
+    const x = -REACH + i * step;
+    below += (step / 6) * (density(x) + 4 * density(x + step / 2) + density(x + step));
+    const power = Math.min(1, below) ** count;
+    integral += (x + step / 2) * (power - before);
+    before = power;
+  }
+  return count === 1 ? 0 : integral;
+}
+
+export interface FloorShape {
+  readonly series: number;
+  readonly parallel: number;
+  readonly ties: Ties;
+  /** u, relative. */
+  readonly uncertainty: number;
+}
+
+/** The gap that the measurement alone would leave, relative. */
+export function gapFloor({ series, parallel, ties, uncertainty }: FloorShape): number {
+  if (series === 1) return 0;
+  if (ties === "cross-tied") return (expectedLargest(series) * uncertainty) / Math.sqrt(parallel);
+  return expectedLargest(series * parallel) * uncertainty * Math.sqrt(1 - 1 / series);
+}
+
+/** +- of one stage (cross-tied) or unit (strings) voltage, relative, two standard deviations. */
+export const voltageUncertainty = ({ parallel, ties, uncertainty }: FloorShape): number =>
+  (2 * uncertainty) / Math.sqrt(ties === "cross-tied" ? parallel : 1);
+
+/** Significant digits of a voltage that its relative uncertainty supports: the last one is about as large as the doubt. 1..9. */
+export function honestDigits(relative: number): number {
+  if (!(relative > 0)) return 9;
+  return Math.min(9, Math.max(1, Math.ceil(-Math.log10(relative))));
+}

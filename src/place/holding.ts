@@ -1,0 +1,77 @@
+// Spends the freedom that charging leaves on holding, whatever the ties.
+import { board, groupsOf } from "./board.ts";
+import type { Conductances } from "./conductance.ts";
+import type { Constraints } from "./constraints.ts";
+import { type Effort, mayGoOn, settle, share } from "./effort.ts";
+import type { Random } from "./random.ts";
+import { type Gaps, holdLevel } from "./twoGoals.ts";
+import { holdStrings } from "./twoGoalsStrings.ts";
+import type { Ties } from "./unit.ts";
+
+export interface HoldingTask {
+  readonly ties: Ties;
+  readonly values: Float64Array;
+  readonly rule: Constraints;
+  readonly conductances: Conductances & { readonly known: true };
+  readonly limit: number;
+  /** Stop at this holding gap. */
+  readonly target: number;
+  readonly spares: boolean;
+  readonly moves: number;
+}
+
+export interface Held {
+  readonly groups: readonly (readonly number[])[];
+  readonly gaps: Gaps;
+}
+
+/** From a placing within the charging limit (or near it), the one of least holding gap found within it. */
+export function* holdBetter(
+  from: readonly (readonly number[])[],
+  task: HoldingTask,
+  random: Random,
+  work: Effort,
+): Generator<Gaps, Held> {
+  const { values, rule, conductances, limit, target, spares } = task;
+  const part = share(work, task.moves);
+  const moves = Math.max(1, part.moves);
+  const { perUnit, perStage } = conductances;
+  const at = board(values, from, rule.rules);
+  let gaps: Gaps;
+  if (task.ties === "cross-tied") {
+    gaps = yield* holdLevel(at, { conductances: perUnit, perStage, limit, target, spares, moves }, random, part);
+  } else {
+    gaps = yield* holdStrings(
+      at.slots,
+      {
+        series: rule.size,
+        strings: rule.groups,
+        elastances: Float64Array.from(values, (c) => 1 / c),
+        resistances: Float64Array.from(perUnit, (g) => 1 / g),
+        rules: rule.rules,
+        limit,
+        target,
+        spares,
+        moves,
+      },
+      random,
+      part,
+    );
+  }
+  settle(work, part);
+  return { groups: groupsOf(at), gaps };
+}
+
+/** Up to `tries` runs of a share of the effort each, until the target is met; the best of them. */
+export function* holdAgain(
+  from: readonly (readonly number[])[],
+  task: HoldingTask,
+  { tries, random, work }: { readonly tries: number; readonly random: Random; readonly work: Effort },
+): Generator<Gaps, Held> {
+  let best = yield* holdBetter(from, task, random, work);
+  for (let left = tries - 1; left > 0 && best.gaps.holding > task.target && mayGoOn(work, 0); left--) {
+    const next = yield* holdBetter(best.groups, task, random, work);
+    if (next.gaps.holding < best.gaps.holding && next.gaps.charging <= task.limit) best = next;
+  }
+  return best;
+}

@@ -1,0 +1,69 @@
+// What the fault table must know of a bank, and the figures of it that several faults share.
+import type { Fuse } from "./fuse.ts";
+import type { BusPath } from "./load.ts";
+import type { ShortCase } from "./shortedUnit.ts";
+import type { Ties } from "./unitDuty.ts";
+
+/** One unit as the fault table sees it; SI, null or left out is unknown. */
+export interface FaultUnit {
+  readonly capacitance: number;
+  readonly ratedVoltage: number;
+  readonly surgeVoltage?: number | null;
+  readonly toleranceLow?: number;
+  readonly toleranceHigh?: number;
+  readonly esr?: number | null;
+  readonly esl?: number | null;
+  /** Energy from outside that the case is known to hold [J]. */
+  readonly ruptureEnergy?: number | null;
+}
+
+/** A bank and what guards it. `worstCharging`, `worstHolding`: highest voltage of any unit before a fault [V]. */
+export interface FaultBank {
+  readonly series: number;
+  readonly parallel: number;
+  readonly ties: Ties;
+  readonly unit: FaultUnit;
+  readonly voltage: number;
+  readonly worstCharging: number;
+  readonly worstHolding: number | null;
+  /** Resistor in series with each unit [ohm]; left out or null: none. */
+  readonly isolatingResistance?: number | null;
+  /** Fuse in series with each unit; left out or null: none. */
+  readonly fuse?: Fuse | null;
+  /** Bus up to the point of a load short; left out or null: unknown. */
+  readonly bus?: BusPath | null;
+  /** The normal shot: bank peak [A], action through the worst unit [A^2 s], heat in one unit [J]. */
+  readonly shot?: {
+    readonly peakCurrent: number | null;
+    readonly unitAction: number | null;
+    readonly unitHeat: number | null;
+  } | null;
+  /** Balancing resistor of one position [ohm] and the hold [s] (null: for ever); null: none fitted; left out: not told. */
+  readonly balance?: { readonly resistance: number; readonly hold: number | null } | null;
+  /** Highest voltage the charger can reach when it runs on [V]; left out or null: unknown. */
+  readonly chargerHighest?: number | null;
+}
+
+/** Highest voltage of any unit before the fault [V]. */
+export const worstBefore = ({ worstCharging, worstHolding }: FaultBank): number =>
+  Math.max(worstCharging, worstHolding ?? 0);
+
+/** The short case of a bank at its worst unit voltage. */
+export const shortCaseOf = (bank: FaultBank): ShortCase => ({
+  series: bank.series,
+  parallel: bank.parallel,
+  ties: bank.ties,
+  capacitance: bank.unit.capacitance,
+  voltage: bank.voltage,
+  worst: worstBefore(bank),
+});
+
+/** Highest share [V] when `units` of one stage face `stages` others of `others` units each, at the corner of the tolerance. */
+export function cornerShare(
+  bank: FaultBank,
+  counts: { readonly units: number; readonly others: number; readonly stages: number },
+): number {
+  const high = (1 + (bank.unit.toleranceHigh ?? 0)) * counts.others;
+  const low = (1 - (bank.unit.toleranceLow ?? 0)) * counts.units;
+  return (bank.voltage * high) / (high + counts.stages * low);
+}

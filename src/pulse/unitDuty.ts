@@ -1,0 +1,145 @@
+/*
+ * What one shot asks of the worst unit of a bank, against that unit's own ratings.
+ *
+ *   symbol  name        unit   meaning
+ *   a, b    toleranceLow, toleranceHigh   fractions below and above the nominal capacitance
+ *   m       parallel    1      units per stage (cross-tied) or strings
+ *   share   share       1      (1 + b)/((1 + b) + (m - 1)(1 - a)): one high among lows takes current by capacitance
+ *   dv/dt   slew        V/s    fastest unit: I/(m C_lo) cross-tied; strings: I/(C_lo + (m - 1) C_lo ((n - 1) C_lo/C_hi + 1)/n)
+ *
+ * Units of a cross-tied stage share by capacitance, strings by string capacitance (one string all high, the rest all low), so
+ * one formula serves both. Holds while capacitance decides; when resistance or lead length does, sharing is as those are.
+ * Source: [derived], corners checked by brute force.
+ */
+import type { Finding } from "../quantity/index.ts";
+import { atMost, type Bound } from "./verdict.ts";
+
+/** How parallel units are joined. */
+export type Ties = "cross-tied" | "strings";
+
+/** What the maker allows one unit in one shot; null is not known. A, V/s, fraction of the charge voltage, A^2 s. */
+export interface UnitRatings {
+  readonly peakCurrent: number | null;
+  readonly slew: number | null;
+  readonly reversal: number | null;
+  readonly action: number | null;
+}
+
+/** One unit as a shot sees it. ESR [ohm] and ESL [H] null when unknown. */
+export interface PulseUnit {
+  readonly capacitance: number;
+  readonly toleranceLow: number;
+  readonly toleranceHigh: number;
+  readonly esr: number | null;
+  readonly esl: number | null;
+  readonly polarised: boolean;
+  readonly ratings: UnitRatings;
+}
+
+/** How a bank is made up: series count n, parallel count m. */
+export interface Arrangement {
+  readonly unit: PulseUnit;
+  readonly series: number;
+  readonly parallel: number;
+  readonly ties: Ties;
+}
+
+/** Current of the worst unit over the bank's current [1]. Source: [derived] file head. */
+export function worstShare({ unit, parallel }: Pick<Arrangement, "unit" | "parallel">): number {
+  const high = 1 + unit.toleranceHigh;
+  return high / (high + (parallel - 1) * (1 - unit.toleranceLow));
+}
+
+/** dv/dt [V/s] of the fastest unit at a bank current [A]. Source: [derived] file head. */
+export function worstSlew({ unit, series, parallel, ties }: Arrangement, current: number): number {
+  const low = unit.capacitance * (1 - unit.toleranceLow);
+  if (ties === "cross-tied") return current / (parallel * low);
+  const high = unit.capacitance * (1 + unit.toleranceHigh);
+  return current / (low + ((parallel - 1) * low * (((series - 1) * low) / high + 1)) / series);
+}
+
+/** One shot as the bank sees it: peak bank current [A], action [A^2 s] (null: no bound), reversal [1]. */
+export interface BankDuty {
+  readonly peakCurrent: number;
+  readonly action: number | null;
+  readonly reversal: number;
+}
+
+/** What the worst unit carries. `evenCurrent` is what each would carry if all were alike; heat [J] null when ESR is unknown. */
+export interface UnitDuty {
+  readonly share: number;
+  readonly evenCurrent: number;
+  readonly peakCurrent: number;
+  readonly action: number | null;
+  readonly slew: number;
+  readonly reversal: number;
+  readonly heat: number | null;
+  readonly why: string;
+}
+
+export function unitDutyOf(arrangement: Arrangement, duty: BankDuty): UnitDuty {
+  const { unit, parallel, ties } = arrangement;
+  const share = worstShare(arrangement);
+  const action = duty.action === null ? null : duty.action * share * share;
+  const group = ties === "cross-tied" ? "unit of a stage" : "string";
+  return {
+    share,
+    evenCurrent: duty.peakCurrent / parallel,
+    peakCurrent: duty.peakCurrent * share,
+    action,
+    slew: worstSlew(arrangement, duty.peakCurrent),
+    reversal: duty.reversal,
+    heat: unit.esr === null || action === null ? null : unit.esr * action,
+    why: parallel === 1 ? "It carries all the current." : `Its ${group} has the highest capacitance among low ones.`,
+  };
+}
+
+/** Bounds of the bank figures, from what was unknown. */
+export interface DutyBounds {
+  readonly peakCurrent: Bound;
+  readonly action: Bound;
+  readonly reversal: Bound;
+}
+
+/** The worst unit against its ratings; a missing rating is not assessed. */
+export function unitFindings(duty: UnitDuty, ratings: UnitRatings, bounds: DutyBounds): readonly Finding[] {
+  const source = "derived";
+  return [
+    atMost({
+      id: "pulse.unit.current",
+      value: duty.peakCurrent,
+      limit: ratings.peakCurrent,
+      unit: "A",
+      source,
+      bound: bounds.peakCurrent,
+      note: `Peak current of the worst unit against its rating. ${duty.why}`,
+    }),
+    atMost({
+      id: "pulse.unit.slew",
+      value: duty.slew,
+      limit: ratings.slew,
+      unit: "V/s",
+      source,
+      bound: bounds.peakCurrent,
+      note: "Fastest fall of a unit's voltage against its rating.",
+    }),
+    atMost({
+      id: "pulse.unit.action",
+      value: duty.action,
+      limit: ratings.action,
+      unit: "A2s",
+      source,
+      bound: bounds.action,
+      note: "Action of one shot through the worst unit against its rating.",
+    }),
+    atMost({
+      id: "pulse.unit.reversal",
+      value: duty.reversal,
+      limit: ratings.reversal,
+      unit: "1",
+      source,
+      bound: bounds.reversal,
+      note: "First opposite voltage over the charge voltage, against the unit's rating.",
+    }),
+  ];
+}

@@ -1,0 +1,109 @@
+// What-if by price: how far the price of a unit may move before another blend becomes the cheapest.
+import { ascendCost } from "./ascent.ts";
+import { standing } from "./core.ts";
+import { wholeBound } from "./dual.ts";
+import { tidyCounts } from "./evaluate.ts";
+import { type BlendLimits, findBlend } from "./findBlend.ts";
+import { type BlendCount, type BlendModel, FIT_TOLERANCE } from "./model.ts";
+import { buildPool, usefulStrings } from "./pool.ts";
+import type { FoundBlend } from "./singles.ts";
+
+export interface PriceSwitch {
+  readonly option: number;
+  readonly move: "rise" | "fall";
+  /** Minor units of money a unit, not whole: at this change the other blend costs the same, beyond it less. */
+  readonly perUnit: number;
+  readonly next: FoundBlend;
+  /** False when some search was stopped: a smaller change might do. */
+  readonly proven: boolean;
+}
+
+/** The same choice with `strings` of one option settled; null when that alone breaks a ceiling. */
+export function withSettled(model: BlendModel, { option: at, strings }: BlendCount): BlendModel | null {
+  const settled = model.options[at]!;
+  const slack = FIT_TOLERANCE;
+  const rest = (name: "volume" | "mass" | "units"): number =>
+    (model.ceilings[name] * (1 + slack) - settled[name] * strings) / (1 + slack);
+  const ceilings = { volume: rest("volume"), mass: rest("mass"), units: rest("units") };
+  if (Object.values(ceilings).some((room) => room < 0)) return null;
+  const requirement = (model.requirement * (1 - slack) - settled.capacity * strings) / (1 - slack);
+  const options = model.options.map((option) =>
+    option.partIndex === settled.partIndex ? { ...plain(option), maxStrings: 0 } : option,
+  );
+  return { options, requirement, ceilings, maxTypes: model.maxTypes - (strings > 0 ? 1 : 0) };
+}
+
+const plain = (option: BlendModel["options"][number]) => {
+  const { capacity, volume, mass, units, partIndex } = option;
+  return { capacity, volume, mass, units, partIndex, costs: new Float64Array(1) };
+};
+
+/** The cheapest blend with exactly so many strings of one option; null when there is none. */
+export function bestWith(
+  model: BlendModel,
+  count: BlendCount,
+  limits: BlendLimits = {},
+): { readonly blend: FoundBlend | null; readonly proven: boolean } {
+  const rest = withSettled(model, count);
+  if (rest === null) return { blend: null, proven: true };
+  const own = model.options[count.option]!.costs[count.strings]!;
+  if (rest.requirement <= 0) return { blend: { counts: tidyCounts([count]), cost: own }, proven: true };
+  if (rest.maxTypes < 1) return { blend: null, proven: true };
+  const answer = findBlend(rest, limits);
+  if (answer.best === null) return { blend: null, proven: answer.status === "infeasible" };
+  return {
+    blend: { counts: tidyCounts([...answer.best.counts, count]), cost: answer.best.cost + own },
+    proven: answer.status === "optimal",
+  };
+}
+
+/** Moves of one option's price at which the cheapest blend changes: a rise that sheds some of it, a fall that takes more. */
+export function priceSwitches(
+  model: BlendModel,
+  cheapest: FoundBlend,
+  option: number,
+  limits: BlendLimits = {},
+): readonly PriceSwitch[] {
+  const from = model.options[option]!;
+  const now = cheapest.counts.find((count) => count.option === option)?.strings ?? 0;
+  const floor = costFloors(model, option);
+  const moves: PriceSwitch[] = [];
+  for (const move of ["rise", "fall"] as const) {
+    let best: PriceSwitch | null = null;
+    let proven = true;
+    const counts = move === "rise" ? range(0, now - 1).reverse() : range(now + 1, usefulStrings(model, from));
+    for (const strings of counts) {
+      const units = from.units * Math.abs(strings - now);
+      if (best !== null && (floor(strings) - cheapest.cost) / units >= best.perUnit) continue;
+      const other = bestWith(model, { option, strings }, limits);
+      proven &&= other.proven;
+      if (other.blend === null) continue;
+      const perUnit = Math.max(0, other.blend.cost - cheapest.cost) / units;
+      if (best === null || perUnit < best.perUnit) best = { option, move, perUnit, next: other.blend, proven: true };
+    }
+    if (best !== null) moves.push({ ...best, proven });
+  }
+  return moves;
+}
+
+const range = (first: number, last: number): number[] =>
+  Array.from({ length: Math.max(0, last - first + 1) }, (_, at) => first + at);
+
+/** Lower bounds on the cost of a blend with so many strings of one option, by the Lagrangian bound. */
+function costFloors(model: BlendModel, option: number): (strings: number) => number {
+  const pool = buildPool(model, null, false);
+  const { prices } = ascendCost(pool, model.maxTypes, Number.POSITIVE_INFINITY);
+  const at = standing(pool, prices, model.maxTypes);
+  const k = pool.option.subarray(0, pool.size).indexOf(option);
+  if (k < 0) return () => 0;
+  const gain =
+    prices.capacity * pool.capacity[k]! -
+    prices.volume * pool.volume[k]! -
+    prices.mass * pool.mass[k]! -
+    prices.units * pool.units[k]!;
+  const { costs } = model.options[option]!;
+  return (strings) =>
+    strings === 0
+      ? wholeBound(at.value)
+      : wholeBound(at.value - Math.min(at.reduced[k]!, at.bar) + costs[strings]! - gain * strings);
+}

@@ -1,0 +1,33 @@
+// The first blends to hold others against: the cheapest bank of one string type, and a cost that no blend reaches.
+import { isFittingBlend } from "./evaluate.ts";
+import type { BlendCount, BlendModel } from "./model.ts";
+import { type Pool, stringsToReach } from "./pool.ts";
+
+export interface FoundBlend {
+  readonly counts: readonly BlendCount[];
+  /** Whole minor units of money. */
+  readonly cost: number;
+}
+
+/** Cheapest bank of one string type, or null. */
+export function bestSingle(model: BlendModel, pool: Pool): FoundBlend | null {
+  let best: FoundBlend | null = null;
+  for (let k = 0; k < pool.size; k += 1) {
+    const strings = stringsToReach(1, pool.capacity[k]!);
+    if (strings > pool.most[k]!) continue;
+    const from = model.options[pool.option[k]!]!;
+    if (best !== null && from.floor && from.floor.fixed + from.floor.perString * strings >= best.cost) continue;
+    const cost = from.costs[strings]!;
+    if (best !== null && cost >= best.cost) continue;
+    const counts = [{ option: pool.option[k]!, strings }];
+    if (isFittingBlend(model, counts)) best = { counts, cost };
+  }
+  return best;
+}
+
+/** One more than any blend can cost. */
+export function beyondAnyCost(model: BlendModel, pool: Pool): number {
+  const dearest = Array.from({ length: pool.size }, (_, k) => model.options[pool.option[k]!]!.costs[pool.most[k]!]!);
+  dearest.sort((a, b) => b - a);
+  return dearest.slice(0, model.maxTypes).reduce((sum, cost) => sum + cost, 0) + 1;
+}

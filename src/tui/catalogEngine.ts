@@ -1,0 +1,65 @@
+// The engine behind the screens: the search on one set of parts and resistors, each answer pure.
+import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
+import { cautionsFor, DEFERENCE } from "../hazard/index.ts";
+import { billOf } from "../order/index.ts";
+import { accepted } from "../quantity/index.ts";
+import { assess, type Brief, type LayoutResult, plan, planCurrency, readBrief } from "../search/index.ts";
+import type { Arrangement, EnginePort } from "./ports.ts";
+
+/** Layouts worked out in full for the list. */
+const LISTED = 200;
+
+/** Said on every copy of an order: the standing cautions, and to whom this program defers. */
+const BILL_CAUTIONS: readonly string[] = [...cautionsFor({}), ...DEFERENCE].map(({ short }) => short);
+
+export interface Stock {
+  readonly parts: readonly Capacitor[];
+  readonly families: readonly ResistorFamily[];
+}
+
+/** A layout's own name taken apart; the part may hold any text. */
+const ID = /^(.*) (\d+)s(\d+)p (cross-tied|strings)$/su;
+
+export function arrangementNamed(id: string): Arrangement | null {
+  const match = ID.exec(id);
+  if (match === null) return null;
+  const [, part = "", series = "", parallel = "", ties] = match;
+  return {
+    part,
+    series: Number(series),
+    parallel: Number(parallel),
+    ties: ties === "strings" ? "strings" : "cross-tied",
+  };
+}
+
+export function catalogEngine({ parts, families }: Stock): EnginePort {
+  const byName = new Map(parts.map((unit) => [unit.part, unit]));
+  const currencyOf = (brief: Brief): string | null => {
+    const read = planCurrency(brief, parts, families);
+    return read.ok ? read.value : null;
+  };
+  const assessed = (brief: Brief, currency: string | null, layout: Arrangement): LayoutResult | null => {
+    const unit = byName.get(layout.part);
+    return unit === undefined ? null : assess({ unit, layout, brief, families, currency });
+  };
+  return {
+    readBrief: (values) => readBrief(values),
+    plan: (brief, { rank, frontOnly, quick }) => {
+      const planned = plan({ brief, parts, families, limit: LISTED, rank, quick });
+      if (!planned.ok || !frontOnly) return planned;
+      const given = new Map(planned.value.layouts.map((layout) => [layout.id, layout]));
+      const layouts = planned.value.front.map((id) => {
+        const named = arrangementNamed(id);
+        return given.get(id) ?? (named && assessed(brief, planned.value.currency, named));
+      });
+      return accepted({ ...planned.value, layouts: layouts.filter((layout) => layout !== null) });
+    },
+    check: (brief, arrangement) => assessed(brief, currencyOf(brief), arrangement),
+    bill: (brief, layout) => {
+      const unit = byName.get(layout.part);
+      if (unit === undefined) return null;
+      const currency = currencyOf(brief);
+      return billOf({ layout, unit, families, brief, currency, cautions: BILL_CAUTIONS });
+    },
+  };
+}

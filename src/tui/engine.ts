@@ -1,0 +1,30 @@
+// Answers a state's question to the engine: reads the brief, plans, assesses what is pinned and chosen, and counts the order.
+
+import type { LayoutResult } from "../search/index.ts";
+import type { EnginePort } from "./ports.ts";
+import type { Answer, State } from "./state.ts";
+
+/** Blank fields are left to the brief's own defaults. */
+export const filledValues = (values: Readonly<Record<string, string>>): Readonly<Record<string, string>> =>
+  Object.fromEntries(Object.entries(values).filter(([, text]) => text.trim() !== ""));
+
+export function answerFor(state: State, engine: EnginePort, quick: boolean): Answer {
+  const read = engine.readBrief({ ...state.extra, ...filledValues(state.values) });
+  if (!read.ok) return { kind: "refused", refusals: read.refusals };
+  const brief = read.value;
+  const planned = engine.plan(brief, { rank: state.rank, frontOnly: state.frontOnly, quick });
+  if (!planned.ok) return { kind: "refused", refusals: planned.refusals };
+  const plan = planned.value;
+  const assessed = (arrangement: State["chosen"]): LayoutResult | null =>
+    arrangement === null ? null : engine.check(brief, arrangement);
+  const chosen = assessed(state.chosen);
+  return {
+    kind: "planned",
+    brief,
+    changesSought: !quick || plan.layouts.length > 0,
+    plan,
+    pinned: state.pins.map(assessed),
+    chosen,
+    bill: chosen === null ? null : engine.bill(brief, chosen),
+  };
+}

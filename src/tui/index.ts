@@ -1,0 +1,14 @@
+// The terminal screens: draws, takes keys, and reaches everything else through ports.
+
+export { catalogEngine, type Stock } from "./catalogEngine.ts";
+export type {
+  Arrangement,
+  EnginePort,
+  PlanRequest,
+  SaveAnswer,
+  ScreenPorts,
+  StockFacts,
+} from "./ports.ts";
+export { openScreens } from "./screens.ts";
+export { type StartOptions, startScreens } from "./start.ts";
+export { screenTrouble } from "./terminal.ts";

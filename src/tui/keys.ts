@@ -1,0 +1,127 @@
+// The one table of keys: what each does, its words, and when it is live. The dispatcher and the help both read it.
+import * as live from "./live.ts";
+import { type Message, SCREENS, type ScreenName, type State } from "./state.ts";
+import type { InputEvent } from "./tokens.ts";
+
+export interface KeyRow {
+  readonly keys: readonly string[];
+  /** How the keys are called on screen; empty where another row's words cover them. */
+  readonly shown: string;
+  readonly words: string;
+  readonly message: Message;
+  readonly live: live.Live;
+  /** Place in the help line, the least first; null keeps the key to the help screen. */
+  readonly rank: number | null;
+}
+
+type Short = readonly [readonly string[], string, string, Message, live.Live, (number | null)?];
+
+const lists = live.all(live.on("layouts"), live.hasLayouts);
+const compares = live.all(live.on("compare"), live.hasPins);
+const scrolls = live.on("bank", "order");
+const shows = live.all(scrolls, live.hasBank);
+const moves: live.Live = (state) => lists(state) || compares(state) || shows(state);
+
+/** What lies on top comes first: the first live row wins. */
+const ON_TOP: readonly Short[] = [
+  [["enter"], "Enter", "save", { type: "confirm" }, live.asksName, 1],
+  [["escape"], "Esc", "do not save", { type: "cancel" }, live.asksName, 2],
+  [["y"], "y", "replace the file", { type: "confirm" }, live.asksReplace, 1],
+  [["n", "escape"], "n", "keep the file", { type: "cancel" }, live.asksReplace, 2],
+  [["escape", "enter", "f1", "?", "q"], "Esc", "close help", { type: "help" }, live.inHelp, 1],
+  [["up"], "Up/Down", "scroll", { type: "move", by: -1 }, live.inHelp, 2],
+  [["down"], "", "scroll", { type: "move", by: 1 }, live.inHelp],
+  [["pageup"], "", "scroll", { type: "move", by: "pageBack" }, live.inHelp],
+  [["pagedown", "space"], "", "scroll", { type: "move", by: "page" }, live.inHelp],
+];
+
+const FORM: readonly Short[] = [
+  [["down", "tab", "enter"], "Up/Down", "field", { type: "move", by: 1 }, live.onBrief, 1],
+  [["up", "shift+tab"], "", "field", { type: "move", by: -1 }, live.onBrief],
+  [["pagedown"], "PgDn", "last field", { type: "move", by: "last" }, live.onBrief, null],
+  [["pageup"], "PgUp", "first field", { type: "move", by: "first" }, live.onBrief, null],
+  [["right", "space"], "Left/Right", "choice", { type: "choice", by: 1 }, live.onChoice, 2],
+  [["left"], "", "choice", { type: "choice", by: -1 }, live.onChoice],
+  [["escape"], "Esc", "layouts", { type: "go", screen: "layouts" }, live.onBrief, 5],
+];
+
+const edit = (
+  what: "back" | "delete" | "left" | "right" | "home" | "end" | "clear" | "clearBefore" | "backWord",
+): Message => ({
+  type: "edit",
+  edit: { edit: what },
+});
+
+const TYPING: readonly Short[] = [
+  [["left", "ctrl+b"], "Left/Right", "caret", edit("left"), live.types, null],
+  [["right", "ctrl+f"], "", "caret", edit("right"), live.types],
+  [["home", "ctrl+a"], "Home/End", "caret to the ends", edit("home"), live.types, null],
+  [["end", "ctrl+e"], "", "caret to the ends", edit("end"), live.types],
+  [["backspace"], "Backspace", "delete before", edit("back"), live.types, null],
+  [["delete", "ctrl+d"], "Delete", "delete after", edit("delete"), live.types, null],
+  [["ctrl+w", "alt+backspace"], "Ctrl-W", "delete a word", edit("backWord"), live.types, null],
+  [["ctrl+u"], "Ctrl-U", "empty the field", edit("clear"), live.types, 3],
+];
+
+const LISTS: readonly Short[] = [
+  [["enter"], "Enter", "show bank", { type: "choose" }, lists, 2],
+  [["space", "p"], "Space", "pin", { type: "pin" }, lists, 1],
+  [["r"], "r", "order by", { type: "rank" }, lists, 3],
+  [["f"], "f", "only unbeaten", { type: "front" }, lists, 4],
+  [["left"], "Left/Right", "column", { type: "column", by: -1 }, compares, 1],
+  [["right"], "", "column", { type: "column", by: 1 }, compares],
+  [["enter"], "Enter", "show bank", { type: "choose" }, compares, 2],
+  [["space", "p", "x"], "Space", "unpin", { type: "pin" }, compares, 3],
+  [["a"], "a", "fold or unfold", { type: "fold" }, compares, 4],
+  [["space", "p"], "Space", "pin", { type: "pin" }, live.all(live.on("bank"), live.hasBank), 2],
+  [["e", "s"], "e", "save order", { type: "export" }, shows, 1],
+  [["up", "k"], "Up/Down", "move", { type: "move", by: -1 }, moves, 6],
+  [["down", "j"], "", "move", { type: "move", by: 1 }, moves],
+  [["pageup"], "PgUp/PgDn", "page", { type: "move", by: "pageBack" }, moves, null],
+  [["pagedown"], "", "page", { type: "move", by: "page" }, moves],
+  [["home", "g"], "Home/End", "first and last", { type: "move", by: "first" }, moves, null],
+  [["end", "G"], "", "first and last", { type: "move", by: "last" }, moves],
+  [["escape"], "Esc", "layouts", { type: "go", screen: "layouts" }, live.on("compare", "bank", "order"), 7],
+  [["escape"], "Esc", "brief", { type: "go", screen: "brief" }, live.on("layouts"), 7],
+];
+
+const go = (screen: ScreenName, index: number): readonly Short[] => [
+  [[`alt+${index + 1}`, `f${index + 2}`], "", screen, { type: "go", screen }, live.noQuestion],
+  [[`${index + 1}`], "", screen, { type: "go", screen }, live.isFree],
+];
+
+const EVERYWHERE: readonly Short[] = [
+  ...SCREENS.flatMap(go),
+  [[], "1 to 5", `${SCREENS.join(", ")} (also Alt-1 to 5, F2 to F6)`, { type: "redraw" }, live.isFree, null],
+  [[], "Alt-1 to 5", "screens", { type: "redraw" }, live.onBrief, 4],
+  [["f1"], "F1", "help", { type: "help" }, live.isOpen, 8],
+  [["?"], "", "help", { type: "help" }, live.isFree],
+  [["ctrl+q", "ctrl+c"], "Ctrl-Q", "save and quit", { type: "quit" }, live.always, 9],
+  [["q"], "", "quit", { type: "quit" }, live.isFree],
+  [["ctrl+z"], "Ctrl-Z", "suspend", { type: "suspend" }, live.always, null],
+  [["ctrl+l"], "Ctrl-L", "draw again", { type: "redraw" }, live.always, null],
+];
+
+export const KEYS: readonly KeyRow[] = [...ON_TOP, ...FORM, ...TYPING, ...LISTS, ...EVERYWHERE].map(
+  ([keys, shown, words, message, isLive, rank = null]) => ({ keys, shown, words, message, live: isLive, rank }),
+);
+
+/** What an event means now: a key of the table, text typed into a field, a paste; null for nothing. */
+export function messageFor(state: State, event: InputEvent): Message | null {
+  if (event.kind === "report") return null;
+  if (event.kind === "paste") {
+    return live.types(state) ? { type: "edit", edit: { edit: "insert", text: event.text } } : null;
+  }
+  const row = KEYS.find(({ keys, live: isLive }) => keys.includes(event.key) && isLive(state));
+  if (row) return row.message;
+  return event.text !== "" && live.types(state) ? { type: "edit", edit: { edit: "insert", text: event.text } } : null;
+}
+
+/** The rows of the table that are live and have a name on screen. */
+export const liveKeys = (state: State): readonly KeyRow[] => KEYS.filter((row) => row.shown !== "" && row.live(state));
+
+/** The keys for the help line, the most wanted first. */
+export const helpLineKeys = (state: State): readonly KeyRow[] =>
+  liveKeys(state)
+    .filter((row) => row.rank !== null)
+    .sort((a, b) => (a.rank ?? 0) - (b.rank ?? 0));

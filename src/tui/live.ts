@@ -1,0 +1,37 @@
+// When a key is live: questions about the state, for the table of keys.
+import { fieldAt } from "./fields.ts";
+import { planOf, shownBank } from "./pick.ts";
+import type { ScreenName, State } from "./state.ts";
+
+export type Live = (state: State) => boolean;
+
+/** All of several conditions. */
+export const all =
+  (...conditions: readonly Live[]): Live =>
+  (state) =>
+    conditions.every((live) => live(state));
+
+export const always: Live = () => true;
+export const inHelp: Live = (state) => state.help;
+/** No question and no help lies on top of the screen. */
+export const isOpen: Live = (state) => state.prompt === null && !state.help;
+export const noQuestion: Live = (state) => state.prompt === null;
+export const asksName: Live = (state) => state.prompt?.replace === false && !state.help;
+export const asksReplace: Live = (state) => state.prompt?.replace === true && !state.help;
+
+export const on =
+  (...screens: readonly ScreenName[]): Live =>
+  (state) =>
+    isOpen(state) && screens.includes(state.screen);
+
+export const onBrief = on("brief");
+const hasChoices: Live = (state) => fieldAt(state.field).choices !== undefined;
+export const onChoice: Live = all(onBrief, hasChoices);
+/** Keys type: a field of the form, or the name of a file. */
+export const types: Live = (state) => asksName(state) || (onBrief(state) && !hasChoices(state));
+/** Letters are keys, because nothing is typed here. */
+export const isFree: Live = (state) => isOpen(state) && state.screen !== "brief";
+
+export const hasLayouts: Live = (state) => (planOf(state)?.layouts.length ?? 0) > 0;
+export const hasPins: Live = (state) => state.pins.length > 0;
+export const hasBank: Live = (state) => shownBank(state) !== null;

@@ -1,0 +1,81 @@
+// What the screens need from outside: the engine, the files, the clock and the terminal, handed in by main.
+import type { Layout } from "../bank/index.ts";
+import type { Bill } from "../order/index.ts";
+import type { Read } from "../quantity/index.ts";
+import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
+import type { TerminalInput } from "./input.ts";
+import type { ProcessPort } from "./session.ts";
+
+/** One arrangement by name: what is pinned, chosen and saved. */
+export type Arrangement = Layout;
+
+/** How saving ended: done, the file is there already, or why not in plain words. */
+export type SaveAnswer =
+  | { readonly kind: "saved"; readonly path: string }
+  | { readonly kind: "exists"; readonly path: string }
+  | { readonly kind: "trouble"; readonly words: string };
+
+export interface PlanRequest {
+  readonly rank: Ranking;
+  /** List only the layouts that no other beats in everything. */
+  readonly frontOnly: boolean;
+  /** Leave out the search for least changes: asked at every key, with the whole answer asked for when the keys rest. */
+  readonly quick: boolean;
+}
+
+export interface EnginePort {
+  /** Reads a brief from text by key; each refusal's place.field is the key. */
+  readonly readBrief: (values: Readonly<Record<string, unknown>>) => Read<Brief>;
+  /** Refuses only what cannot be planned at all, such as two currencies without a rate. */
+  readonly plan: (brief: Brief, request: PlanRequest) => Read<PlanResult>;
+  /** Assesses one arrangement under a brief; null when the catalogue has no such part. */
+  readonly check: (brief: Brief, arrangement: Arrangement) => LayoutResult | null;
+  /** What must be bought for a layout; null when the catalogue has no such part. */
+  readonly bill: (brief: Brief, layout: LayoutResult) => Bill | null;
+}
+
+export interface StockFacts {
+  /** What the catalogue is called on screen: its file, or how many files. */
+  readonly name: string;
+  readonly parts: number;
+  /** Rows that could not be read. */
+  readonly faults: number;
+  /** Said on screen about the data, such as that they are invented; empty for none. */
+  readonly note: string;
+}
+
+export interface ScreenPorts {
+  readonly engine: EnginePort;
+  readonly stock: StockFacts;
+  /** The brief to start with when none was saved: text by key. */
+  readonly brief: Readonly<Record<string, string>>;
+  /** What else the brief says, which the form has no field for; kept and planned with. */
+  readonly extra: Readonly<Record<string, unknown>>;
+  /** The text last given to `saveSession`, or null. */
+  readonly loadSession: () => string | null;
+  /** Saves at once; null when done, else why not. */
+  readonly saveSession: (text: string) => string | null;
+  /** Puts a saved text that could not be read aside, so that it is not overwritten; where it is now, or null. */
+  readonly keepSession: () => string | null;
+  /** Writes the order of a bank to a file whose ending names the format. */
+  readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
+  readonly stdin: TerminalInput;
+  readonly stdout: TerminalOutput;
+  /** Writes to the terminal at once. */
+  readonly writeSync: (text: string) => void;
+  /** Says one line on standard error. */
+  readonly complain: (line: string) => void;
+  readonly process: ProcessPort;
+  readonly env: Record<string, string | undefined>;
+  readonly ascii?: boolean;
+}
+
+/** The part of a terminal's output stream that is used. */
+export interface TerminalOutput {
+  readonly isTTY?: boolean;
+  readonly columns?: number;
+  readonly rows?: number;
+  write: (text: string) => unknown;
+  on: (event: "resize" | "error", listener: (fact?: unknown) => void) => unknown;
+  off: (event: "resize" | "error", listener: (fact?: unknown) => void) => unknown;
+}

@@ -1,0 +1,33 @@
+// Builds the state to start with: what was saved last time, or the brief given, and a word when saved text could not be read.
+import type { ScreenPorts } from "./ports.ts";
+import { readSaved } from "./saved.ts";
+import { initialState, type State } from "./state.ts";
+import { terminalLook } from "./terminal.ts";
+
+/** Size taken when the terminal does not tell its own. */
+const USUAL = { columns: 80, rows: 24 };
+
+export function startState(ports: ScreenPorts): State {
+  const { stdin, stdout, env, ascii, stock, brief, extra } = ports;
+  const look = terminalLook({
+    env,
+    inputIsTerminal: stdin.isTTY === true,
+    outputIsTerminal: stdout.isTTY === true,
+    ...(ascii === undefined ? {} : { ascii }),
+  });
+  const fresh = initialState({
+    columns: stdout.columns || USUAL.columns,
+    rows: stdout.rows || USUAL.rows,
+    look,
+    stock,
+    values: brief,
+    extra,
+  });
+  const text = ports.loadSession();
+  if (text === null) return fresh;
+  const saved = readSaved(text);
+  if (saved !== null) return { ...fresh, ...saved, caret: (saved.values.energy ?? "").length };
+  const kept = ports.keepSession();
+  const where = kept === null ? "it will be replaced" : `it is kept in ${kept}`;
+  return { ...fresh, notice: { tone: "warn", text: `What was saved last time could not be read; ${where}.` } };
+}

@@ -1,0 +1,123 @@
+// Joins state, keys, engine, painter and terminal, and runs the screens until they end: the one owner of the end.
+import { makeAsker } from "./asker.ts";
+import { makeAutosave } from "./autosave.ts";
+import { openInput } from "./input.ts";
+import { messageFor } from "./keys.ts";
+import { PaintStream } from "./paint.ts";
+import type { ScreenPorts } from "./ports.ts";
+import { startState } from "./restore.ts";
+import { openSession } from "./session.ts";
+import { ask, type Effect, type Message } from "./state.ts";
+import { createStore } from "./store.ts";
+import { screenTrouble } from "./terminal.ts";
+import { update } from "./update/update.ts";
+import type { Mounted } from "./view/mount.ts";
+import { drawScreen } from "./view/screen.ts";
+
+const WRONG_USE = 2;
+const HANG_UP = 129;
+
+/** Runs the screens. Result: the exit status. Rejects with what went wrong when it is a bug of ours; the terminal is restored by then. */
+export function openScreens(ports: ScreenPorts): Promise<number> {
+  const { stdin, stdout, env, process, writeSync, engine, complain } = ports;
+  const trouble = screenTrouble({
+    env,
+    inputIsTerminal: stdin.isTTY === true,
+    outputIsTerminal: stdout.isTTY === true,
+  });
+  if (trouble !== null) {
+    complain(trouble);
+    return Promise.resolve(WRONG_USE);
+  }
+  // With DEV set, ink would load developer tools and print into the screen.
+  delete env.DEV;
+
+  return new Promise((resolve, reject) => {
+    const begun = ask(startState(ports)).state;
+    const paint = new PaintStream(begun, (text) => stdout.write(text));
+    let mounted: Mounted | null = null;
+    let frame: ReturnType<typeof setImmediate> | undefined;
+    let over = false;
+
+    const draw = (): void => {
+      frame = undefined;
+      asker.beforeFrame();
+      clearImmediate(frame);
+      frame = undefined;
+      const drawn = drawScreen(store.state());
+      paint.caret = drawn.caret;
+      // Until ink is loaded the rows, which need no layout, go to the painter by themselves: the first frame is not kept waiting.
+      if (mounted === null) paint.paint(drawn.rows);
+      else mounted.show(drawn.rows);
+      paint.settle();
+    };
+    const run = (effect: Effect, send: (message: Message) => void): void => {
+      if (effect.type === "ask") asker.ask();
+      else if (effect.type === "quit") session.end(0);
+      else if (effect.type === "suspend") session.suspend();
+      else if (effect.type === "redraw") paint.redraw();
+      else send({ type: "saved", answer: ports.exportBill(effect.bill, effect.path, effect.replace) });
+    };
+    const store = createStore({
+      initial: begun,
+      update,
+      run,
+      changed: () => {
+        if (!over) frame ??= setImmediate(draw);
+        autosave.changed();
+      },
+    });
+    const asker = makeAsker({ engine, state: store.state, send: store.send, now: () => performance.now() });
+    const autosave = makeAutosave({
+      state: store.state,
+      save: ports.saveSession,
+      onTrouble: (words) =>
+        store.send({ type: "say", notice: { tone: "bad", text: `The brief and pins cannot be saved: ${words}` } }),
+    });
+    const onResize = (): void => {
+      const size = { columns: stdout.columns || begun.columns, rows: stdout.rows || begun.rows };
+      paint.resize(size);
+      store.send({ type: "resized", ...size });
+    };
+    const onLost = (): void => session.end(HANG_UP);
+    const input = openInput({
+      stdin,
+      onEvent: (event) => {
+        const message = messageFor(store.state(), event);
+        if (message !== null) store.send(message);
+      },
+      onGone: onLost,
+    });
+    const session = openSession({
+      process,
+      writeSync,
+      startInput: input.start,
+      stopInput: input.stop,
+      redraw: () => {
+        onResize();
+        paint.redraw();
+      },
+      onEnd: (status, fault) => {
+        over = true;
+        clearImmediate(frame);
+        asker.stop();
+        paint.close();
+        stdout.off("resize", onResize);
+        const unsaved = autosave.finish();
+        mounted?.unmount();
+        if (unsaved !== null) complain(`The brief and pins were not saved: ${unsaved}`);
+        if (fault === null) resolve(status);
+        else reject(fault);
+      },
+    });
+
+    session.enter();
+    stdout.on("resize", onResize);
+    stdout.on("error", onLost);
+    asker.ask();
+    draw();
+    import("./view/mount.ts").then(({ mount }) => {
+      if (!over) mounted = mount(paint, stdin as NodeJS.ReadStream, drawScreen(store.state()).rows);
+    }, session.fail);
+  });
+}

@@ -1,0 +1,149 @@
+// The whole state of the screens, and the two closed unions that change it and that it asks for.
+import type { Bill } from "../order/index.ts";
+import type { Refusal } from "../quantity/index.ts";
+import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
+import type { Line, LineEdit } from "./line.ts";
+import type { Arrangement, SaveAnswer, StockFacts } from "./ports.ts";
+import type { Look } from "./terminal.ts";
+
+export const SCREENS = ["brief", "layouts", "compare", "bank", "order"] as const;
+export type ScreenName = (typeof SCREENS)[number];
+
+/** Most layouts side by side. */
+export const MOST_PINS = 4;
+
+/** What the engine last answered, all of it for one text of the brief. */
+export type Answer =
+  | { readonly kind: "refused"; readonly refusals: readonly Refusal[] }
+  | {
+      readonly kind: "planned";
+      readonly brief: Brief;
+      /** False while nothing fits and the least changes were not looked for yet. */
+      readonly changesSought: boolean;
+      readonly plan: PlanResult;
+      /** Pinned arrangements assessed under this brief; null where the catalogue has no such part. */
+      readonly pinned: readonly (LayoutResult | null)[];
+      readonly chosen: LayoutResult | null;
+      readonly bill: Bill | null;
+    };
+
+export interface Notice {
+  readonly tone: "plain" | "good" | "warn" | "bad";
+  readonly text: string;
+}
+
+/** The question for a file name; `replace` is set when the file named is there already. */
+export interface Prompt {
+  readonly line: Line;
+  readonly replace: boolean;
+}
+
+export interface State {
+  readonly columns: number;
+  readonly rows: number;
+  readonly look: Look;
+  readonly stock: StockFacts;
+  readonly screen: ScreenName;
+  readonly help: boolean;
+  /** Text of the brief's fields by key; a key that is absent is blank. */
+  readonly values: Readonly<Record<string, string>>;
+  /** What else the brief says, which the form has no field for. */
+  readonly extra: Readonly<Record<string, unknown>>;
+  readonly field: number;
+  readonly caret: number;
+  readonly rank: Ranking;
+  /** Only layouts that no other beats in everything. */
+  readonly frontOnly: boolean;
+  readonly answer: Answer | null;
+  /** Number of the last question put to the engine, and of the last one answered. */
+  readonly asked: number;
+  readonly answered: number;
+  /** Id of the layout under the cursor; the place in the list is derived from it. */
+  readonly selected: string | null;
+  readonly pins: readonly Arrangement[];
+  /** Column under the cursor on the comparison. */
+  readonly column: number;
+  /** Rows on which the pinned layouts agree are shown too. */
+  readonly unfolded: boolean;
+  readonly chosen: Arrangement | null;
+  /** First row shown of each screen that scrolls freely; cut to what there is when drawn. */
+  readonly scroll: Readonly<Record<string, number>>;
+  readonly prompt: Prompt | null;
+  readonly notice: Notice | null;
+  /** The catalogue is too large to look for least changes while one types. */
+  readonly slow: boolean;
+}
+
+export type Message =
+  | { readonly type: "resized"; readonly columns: number; readonly rows: number }
+  | { readonly type: "go"; readonly screen: ScreenName }
+  | { readonly type: "help" }
+  | { readonly type: "quit" }
+  | { readonly type: "suspend" }
+  | { readonly type: "redraw" }
+  | { readonly type: "edit"; readonly edit: LineEdit }
+  | { readonly type: "choice"; readonly by: number }
+  | { readonly type: "move"; readonly by: number | "first" | "last" | "page" | "pageBack" }
+  | { readonly type: "column"; readonly by: number }
+  | { readonly type: "pin" }
+  | { readonly type: "choose" }
+  | { readonly type: "rank" }
+  | { readonly type: "front" }
+  | { readonly type: "fold" }
+  | { readonly type: "export" }
+  | { readonly type: "confirm" }
+  | { readonly type: "cancel" }
+  | { readonly type: "answered"; readonly asked: number; readonly answer: Answer; readonly slow: boolean }
+  | { readonly type: "saved"; readonly answer: SaveAnswer }
+  | { readonly type: "say"; readonly notice: Notice };
+
+export type Effect =
+  | { readonly type: "ask"; readonly asked: number }
+  | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
+  | { readonly type: "quit" }
+  | { readonly type: "suspend" }
+  | { readonly type: "redraw" };
+
+export interface Change {
+  readonly state: State;
+  readonly effects: readonly Effect[];
+}
+
+export const still = (state: State): Change => ({ state, effects: [] });
+
+/** Asks the engine again: for a changed brief, order, pin or chosen bank. */
+export const ask = (state: State): Change => {
+  const asked = state.asked + 1;
+  return { state: { ...state, asked }, effects: [{ type: "ask", asked }] };
+};
+
+export interface Start {
+  readonly columns: number;
+  readonly rows: number;
+  readonly look: Look;
+  readonly stock: StockFacts;
+  readonly values: Readonly<Record<string, string>>;
+  readonly extra: Readonly<Record<string, unknown>>;
+}
+
+export const initialState = (start: Start): State => ({
+  ...start,
+  screen: "brief",
+  help: false,
+  field: 0,
+  caret: (start.values.energy ?? "").length,
+  rank: "cost",
+  frontOnly: false,
+  answer: null,
+  asked: 0,
+  answered: 0,
+  selected: null,
+  pins: [],
+  column: 0,
+  unfolded: false,
+  chosen: null,
+  scroll: {},
+  prompt: null,
+  notice: null,
+  slow: false,
+});

@@ -1,0 +1,41 @@
+// Pinning layouts to set them side by side, and choosing the bank to look at.
+import { arrangementOf, isSame, selectedLayout, shownBank } from "../pick.ts";
+import type { Arrangement } from "../ports.ts";
+import { ask, type Change, MOST_PINS, type State, still } from "../state.ts";
+
+/** The arrangement that the cursor is on, by screen. */
+function underCursor(state: State): Arrangement | null {
+  if (state.screen === "compare") return state.pins[state.column] ?? null;
+  return state.screen === "layouts" ? selectedLayout(state) : shownBank(state);
+}
+
+export function togglePin(state: State): Change {
+  const found = underCursor(state);
+  if (found === null) return still(state);
+  const arrangement = arrangementOf(found);
+  const name = `${arrangement.part} ${arrangement.series}s${arrangement.parallel}p`;
+  const without = state.pins.filter((pin) => !isSame(pin, arrangement));
+  if (without.length < state.pins.length) {
+    const column = Math.max(0, Math.min(state.column, without.length - 1));
+    return ask({ ...state, pins: without, column, notice: { tone: "plain", text: `${name} is no longer pinned.` } });
+  }
+  if (state.pins.length >= MOST_PINS) {
+    const text = `${MOST_PINS} layouts are pinned already, which is the most; unpin one first.`;
+    return still({ ...state, notice: { tone: "warn", text } });
+  }
+  const pins = [...state.pins, arrangement];
+  const more = pins.length === 1 ? "Pin another to compare them" : "3 compares them";
+  const text = `${name} is pinned, ${pins.length} of ${MOST_PINS}. ${more}.`;
+  return ask({ ...state, pins, notice: { tone: "good", text } });
+}
+
+export function chooseBank(state: State): Change {
+  const found = underCursor(state);
+  if (found === null) return still(state);
+  return ask({
+    ...state,
+    chosen: arrangementOf(found),
+    screen: "bank",
+    scroll: { ...state.scroll, bank: 0, order: 0 },
+  });
+}

@@ -1,0 +1,82 @@
+// State and message to state and effects: the one place where the screens change. Pure.
+
+import { RANKINGS } from "../../search/index.ts";
+import { arrangementOf, selectedLayout } from "../pick.ts";
+import { ask, type Change, type Message, type ScreenName, type State, still } from "../state.ts";
+import { mostScroll } from "../view/screen.ts";
+import { chooseField, editField, moveField } from "./form.ts";
+import { askName, cancel, confirm, editName, saved } from "./order.ts";
+import { chooseBank, togglePin } from "./pins.ts";
+import { moveSelection, type Step, scrollScreen } from "./scroll.ts";
+
+function move(state: State, by: Step): Change {
+  if (state.help) return scrollScreen(state, "help", by, mostScroll(state));
+  if (state.screen === "brief") return moveField(state, by);
+  if (state.screen === "layouts") return moveSelection(state, by);
+  return scrollScreen(state, state.screen, by, mostScroll(state));
+}
+
+/** Going to the bank before one was chosen chooses the one under the cursor. */
+function goTo(state: State, screen: ScreenName): Change {
+  const there: State = { ...state, screen, help: false, notice: null };
+  const layout = selectedLayout(state);
+  if ((screen !== "bank" && screen !== "order") || state.chosen !== null || layout === null) return still(there);
+  return ask({ ...there, chosen: arrangementOf(layout) });
+}
+
+/** The next way of ordering layouts. */
+const nextRank = (state: State): State => ({
+  ...state,
+  rank: RANKINGS[(RANKINGS.indexOf(state.rank) + 1) % RANKINGS.length] ?? "cost",
+  selected: null,
+  notice: null,
+});
+
+export function update(state: State, message: Message): Change {
+  switch (message.type) {
+    case "resized":
+      return still({ ...state, columns: message.columns, rows: message.rows });
+    case "go":
+      return goTo(state, message.screen);
+    case "help":
+      return still({ ...state, help: !state.help, scroll: { ...state.scroll, help: 0 } });
+    case "quit":
+    case "suspend":
+    case "redraw":
+      return { state, effects: [{ type: message.type }] };
+    case "edit":
+      return state.prompt === null ? editField(state, message.edit) : editName(state, message.edit);
+    case "choice":
+      return chooseField(state, message.by);
+    case "move":
+      return move(state, message.by);
+    case "column": {
+      const last = Math.max(0, state.pins.length - 1);
+      return still({ ...state, column: Math.max(0, Math.min(last, state.column + message.by)), notice: null });
+    }
+    case "pin":
+      return togglePin(state);
+    case "choose":
+      return chooseBank(state);
+    case "rank":
+      return ask(nextRank(state));
+    case "front":
+      return ask({ ...state, frontOnly: !state.frontOnly, selected: null, notice: null });
+    case "fold":
+      return still({ ...state, unfolded: !state.unfolded, scroll: { ...state.scroll, compare: 0 } });
+    case "export":
+      return askName(state);
+    case "confirm":
+      return confirm(state);
+    case "cancel":
+      return cancel(state);
+    case "answered":
+      // A late answer to an older question would show a bank that the brief no longer means.
+      if (message.asked !== state.asked) return still(state);
+      return still({ ...state, answer: message.answer, answered: message.asked, slow: message.slow });
+    case "saved":
+      return saved(state, message.answer);
+    case "say":
+      return still({ ...state, notice: message.notice });
+  }
+}

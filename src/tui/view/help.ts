@@ -1,0 +1,28 @@
+// The help: which keys are live on the screen behind it, and what its words and marks mean.
+import { liveKeys } from "../keys.ts";
+import { EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
+import type { State } from "../state.ts";
+import { fitText } from "../text.ts";
+import { type Page, type Room, scrolled } from "./page.ts";
+import { paragraph } from "./words.ts";
+
+const ABOUT: Readonly<Record<State["screen"], string>> = {
+  brief:
+    "The brief says what the bank must do. A value takes a unit (2.4 kJ, 2.2 kV, 20 %); what fits follows as you type.",
+  layouts:
+    "Every layout that does the job, in order. * is pinned. Unbeaten: no other is as good in cost, volume, mass, units and stress and better in one.",
+  compare:
+    "The pinned layouts side by side. ^ marks the best of a row, v the worst; rows that agree are folded into one sentence.",
+  bank: "One bank, stage by stage. The bar is the worst voltage a unit may see, | its limit. A check that could not be made is not assessed, never a pass.",
+  order: "What must be bought: needed, less what is on hand, in whole packs and at the price for the quantity.",
+};
+
+export function helpPage(state: State, room: Room): Page {
+  const keys = liveKeys({ ...state, help: false });
+  const rows: readonly Row[] = [
+    ...paragraph(ABOUT[state.screen], room.columns),
+    EMPTY_ROW,
+    ...keys.map((row) => rowOf(span(`  ${fitText(row.shown, 14)}`, "key"), span(row.words))),
+  ];
+  return scrolled(state, "help", [rowOf(span(`Keys on ${state.screen}`, "strong"))], rows, room);
+}
