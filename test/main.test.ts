@@ -19,7 +19,9 @@ beforeAll(() => {
   mkdirSync(join(folder, "dist"));
   symlinkSync(at("catalogs"), join(folder, "catalogs"));
   main = join(folder, "dist/main.js");
-  const script = String(PACKAGE.scripts.build).replace("--outdir=dist", `--outdir=${join(folder, "dist")}`);
+  const script = String(PACKAGE.scripts.build)
+    .replace(/^.*?&& (?=esbuild)/, "")
+    .replace("--outdir=dist", `--outdir=${join(folder, "dist")}`);
   expect(script).toContain(folder);
   execSync(script, { cwd: ROOT, env: { ...process.env, PATH: `${at("node_modules/.bin")}:${process.env.PATH}` } });
 }, 60_000);
@@ -138,4 +140,35 @@ describe("the output", () => {
     expect(run([...all, "--force"]).status).toBe(0);
     expect(execFileSync("head", ["-c", "5", join(folder, "bill.csv")], { encoding: "utf8" })).toBe("item,");
   });
+});
+
+describe("a terminal", () => {
+  test("the bare command opens the screens, and Ctrl-C leaves them with the terminal as it was", async () => {
+    const { spawn } = await import("@lydell/node-pty");
+    const env = { ...process.env, TERM: "xterm-256color", JOULEWRIGHT_SESSION: join(folder, "session.json") };
+    const terminal = spawn(process.execPath, [main], { cols: 80, rows: 24, env });
+    let seen = "";
+    const ended = new Promise<number>((resolve) => terminal.onExit(({ exitCode }) => resolve(exitCode)));
+    await new Promise<void>((resolve) => {
+      terminal.onData((data) => {
+        seen += data;
+        if (seen.includes("[?1049h") && seen.includes("2.4 kJ")) resolve();
+      });
+    });
+    terminal.write("\u0003");
+    expect(await ended).toBe(0);
+    expect(seen).toMatch(/\[\?1049l/);
+  }, 20_000);
+
+  test("TERM=dumb gets the plan of the demo as text", async () => {
+    const { spawn } = await import("@lydell/node-pty");
+    const terminal = spawn(process.execPath, [main], { cols: 80, rows: 24, env: { ...process.env, TERM: "dumb" } });
+    let seen = "";
+    terminal.onData((data) => {
+      seen += data;
+    });
+    expect(await new Promise<number>((resolve) => terminal.onExit(({ exitCode }) => resolve(exitCode)))).toBe(0);
+    expect(seen).toMatch(/Capacitance needed/);
+    expect(seen).not.toContain("\u001b");
+  }, 20_000);
 });
