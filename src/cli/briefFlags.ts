@@ -20,6 +20,12 @@ export const BRIEF_FLAGS: readonly BriefFlag[] = [
   },
   { flag: "--basis", argument: "<basis>", key: "basis", help: "worst case, nominal or statistical" },
   { flag: "--risk", argument: "<fraction>", key: "risk", help: "risk of the statistical basis" },
+  {
+    flag: "--distribution",
+    argument: "<law>",
+    key: "distribution",
+    help: "uniform or normal: how capacitance lies in its tolerance, for the statistical basis",
+  },
   { flag: "--derating", argument: "<fraction>", key: "derating", help: 'part of a rating that is used, "90 %" or 0.9' },
   {
     flag: "--overshoot",

@@ -186,3 +186,8 @@ export function filesOn(fs: FileSystem = nodeFs): Files {
     write: (path, text, force) => writeText(fs, path, text, force),
   };
 }
+
+/** Writes to the terminal at once, so that it is done even if the process ends next. Throws when the terminal is gone. */
+export const writeNow = (text: string): void => {
+  nodeFs.writeSync(1, text);
+};

@@ -3,14 +3,13 @@
 import type { Capacitor } from "../catalog/index.ts";
 import { visible } from "../order/index.ts";
 import { formatQuantity } from "../quantity/index.ts";
-import type { LayoutResult, PlanResult, Ranking, RefusedPart } from "../search/index.ts";
+import type { LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import { askedText } from "./askedText.ts";
 import { cautionsOf } from "./cautions.ts";
 import { changeWords } from "./changeWords.ts";
 import { layoutText, money } from "./layoutText.ts";
 import { rankedTable } from "./rankedTable.ts";
 import { reasonWords } from "./reasonWords.ts";
-import { textTable } from "./table.ts";
 import { bullet, wrap } from "./wrap.ts";
 
 export interface PlanText {
@@ -97,18 +96,11 @@ function nothing({ result, width }: PlanText): readonly string[] {
 
 function refusedText({ refused, currency }: PlanResult, width: number): string {
   if (refused.length === 0) return "";
-  const rows = refused.slice(0, LISTED);
-  const table = textTable<RefusedPart>(
-    [
-      { heading: "part", cell: (one) => one.part, least: 14 },
-      { heading: "reason", cell: (one) => reasonWords(one, currency) },
-    ],
-    rows,
-    width,
-    "  ",
-  );
+  const rows = refused
+    .slice(0, LISTED)
+    .map((one) => bullet(`${visible(one.part)}: ${reasonWords(one, currency)}`, width));
   const more = refused.length > LISTED ? `\n  and ${refused.length - LISTED} more (all with --json)` : "";
-  return `Refused parts: ${refused.length}\n${table}${more}`;
+  return `Refused parts: ${refused.length}\n${rows.join("\n")}${more}`;
 }
 
 function cautionText({ result, parts, width }: PlanText): string {

@@ -32,7 +32,7 @@ export function rankedTable(layouts: readonly LayoutResult[], width: number): st
         side: "right",
         rank: 3,
       },
-      { heading: "worst", cell: worst, side: "right", rank: 2 },
+      { heading: "worst", cell: worst, side: "right", rank: 1 },
       { heading: "checks", cell: checks, rank: 1 },
       { heading: "volume", cell: (one) => formatQuantity(one.volume, "volume", { digits: 3 }), side: "right", rank: 4 },
       { heading: "mass", cell: (one) => formatQuantity(one.mass, "mass", { digits: 3 }), side: "right", rank: 5 },

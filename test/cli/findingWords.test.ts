@@ -39,6 +39,13 @@ describe("findingFigures(finding)", () => {
     expect(findingFigures(least)).toMatchObject({ value: "2.468 kJ", limit: ">= 2.401 kJ" });
   });
 
+  test("a small chance is a power of ten, rounded up; a limit passed more than twice says how many times", () => {
+    const chance = { ...finding, id: "charging-risk", unit: "1", value: 5.5961e-8, limit: 1e-4, margin: 0.999 };
+    expect(findingFigures(chance)).toMatchObject({ value: "5.6e-8", limit: "<= 1e-4" });
+    expect(findingFigures({ ...finding, value: 1800, limit: 324, margin: (324 - 1800) / 324 }).margin).toBe("x 5.56");
+    expect(findingFigures({ ...finding, value: 396, limit: 360, margin: -0.1 }).margin).toBe("-10 %");
+  });
+
   test("unknown value or limit says so", () => {
     const open = { ...finding, value: null, limit: null, margin: null };
     expect(findingFigures(open)).toEqual({ value: "unknown", limit: "unknown", margin: "" });

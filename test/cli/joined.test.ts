@@ -1,13 +1,19 @@
 import { expect, test } from "vitest";
-import { JOINED, joinedFacts } from "../../src/cli/joined.ts";
+import { joinedFacts } from "../../src/cli/joined.ts";
 import { bankOf, briefOf, UNIT } from "../support/bank.ts";
 
-const bank = (basis: string) => ({ layout: bankOf(), unit: UNIT, brief: briefOf({ basis }) });
+test("joinedFacts(bank): the fault table, each with the keys that a check promises", () => {
+  const { faults } = joinedFacts({ layout: bankOf(), unit: UNIT, brief: briefOf() });
+  expect(faults.map(({ id }) => id)).toEqual(expect.arrayContaining(["unit-short", "unit-open"]));
+  for (const fault of faults) {
+    expect(fault).toHaveProperty("worstVoltage");
+    expect(fault).toHaveProperty("energyIntoUnit");
+    expect(fault).toHaveProperty("peakCurrent");
+    expect(["pass", "warn", "fail", "not assessed"]).toContain(fault.verdict);
+  }
+});
 
-test("joinedFacts(bank): only what is joined, and risk only with the statistical basis", () => {
-  const joined = { faults: () => [{ id: "unit-short" }], risk: () => ({ exceed: 1e-5, error: 1e-7 }) };
-  expect(joinedFacts(bank("worst case"), { faults: null, risk: null })).toEqual({});
-  expect(joinedFacts(bank("worst case"), joined)).toEqual({ faults: [{ id: "unit-short" }] });
-  expect(joinedFacts(bank("statistical"), joined)).toHaveProperty("risk.exceed", 1e-5);
-  for (const key of Object.keys(joinedFacts(bank("statistical")))) expect(Object.keys(JOINED)).toContain(key);
+test("joinedFacts(bank): one shorted cross-tied with the charger on leaves V/(n - 1) on each of the rest", () => {
+  const { faults } = joinedFacts({ layout: bankOf(), unit: UNIT, brief: briefOf() });
+  expect(faults.find(({ id }) => id === "unit-short")?.worstVoltage).toBeCloseTo(2000 / 7, 6);
 });

@@ -22,10 +22,11 @@ describe("textTable(columns, rows, width)", () => {
     );
   });
 
-  test("the highest rank leaves first; the soft column is cut when that is enough", () => {
+  test("rank 2 leaves first, then the soft column is cut, then rank 1 leaves", () => {
     expect(headings(80)).toBe("name n more extra");
-    expect(headings(25)).toBe("name n more extra");
+    expect(headings(31)).toBe("name n more");
     expect(headings(20)).toBe("name n more");
+    expect(textTable(columns, rows, 20)).toContain("a lon...");
     expect(headings(10)).toBe("name n");
     for (const width of [80, 30, 25, 20, 15, 10])
       for (const line of textTable(columns, rows, width).split("\n")) expect(widthOf(line)).toBeLessThanOrEqual(width);

@@ -1,7 +1,7 @@
 import { readdirSync, readFileSync } from "node:fs";
 import { join } from "node:path";
 import { describe, expect, test } from "vitest";
-import { placeWords, refusalWords, WORDS } from "../../src/cli/words.ts";
+import { placeWords, refusalWords, WORDS, wordsOf } from "../../src/cli/words.ts";
 import { at, UNSAFE } from "../support/fakePorts.ts";
 
 const sources = readdirSync(at("src"), { recursive: true, encoding: "utf8" })
@@ -14,7 +14,10 @@ const used = new Set(
   [
     /\bcode: "([a-z0-9-]+)"/g,
     /\bno\(\s*"([a-z]+(?:-[a-z0-9]+)+|empty)"/g,
-    /\bfault\(\s*"([a-z-]+)"/g,
+    /\bfault\(\s*"([a-z]+-[a-z-]+|contradiction)"/g,
+    /\brefusal\(\s*"([a-z-]+\.[a-z-]+)"/g,
+    /\brefusal\(\s*`([a-z]+)\.\$\{/g,
+    /\bcode: `([A-Za-z.]+)\.\$\{/g,
     /\brefuse(?:File)?\(\s*"([a-z0-9-]+)"/g,
     /\bE[A-Z]+: \["([a-z0-9-]+)"/g,
   ].flatMap((pattern) => [...sources.matchAll(pattern)].map((match) => match[1] as string)),
@@ -25,11 +28,13 @@ used.delete("custom");
 describe("WORDS", () => {
   test("every code used in the sources has words", () => {
     expect(used.size).toBeGreaterThan(40);
-    expect([...used].filter((code) => !(code in WORDS)).sort()).toEqual([]);
+    expect([...used].filter((code) => wordsOf(code) === code).sort()).toEqual([]);
   });
 
   test("no words without a use", () => {
-    expect(Object.keys(WORDS).filter((code) => !sources.includes(`"${code}"`))).toEqual([]);
+    expect(
+      Object.keys(WORDS).filter((code) => ![`"${code}"`, `\`${code}.`].some((use) => sources.includes(use))),
+    ).toEqual([]);
   });
 });
 

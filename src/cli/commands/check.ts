@@ -7,6 +7,7 @@ import { askedText } from "../askedText.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, type Checked, checkedBank } from "../checked.ts";
 import { EXIT } from "../exit.ts";
+import { faultsText } from "../faultsText.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { joinedFacts } from "../joined.ts";
 import { hanging, layoutText } from "../layoutText.ts";
@@ -67,6 +68,7 @@ function checkText(checked: Checked, width: number): string {
     `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width)}`,
     `Found\n${layoutText(result, unit, width)}`,
     hanging("left after a dump", kept, width),
+    `If one thing fails\n${faultsText(joinedFacts({ layout: result, unit, brief: settings.brief }).faults, width)}`,
     verdict,
     ...[...inputSentences(stock), ...notes].map((text) => wrap(text, width)),
     ["Cautions", ...cautions.map(({ text }) => bullet(text, width))].join("\n"),
