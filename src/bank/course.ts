@@ -8,6 +8,7 @@ import {
   segmentAt,
   segmentCurrent,
   segmentFrom,
+  segmentOver,
   voltageCurve,
 } from "./courseSegment.ts";
 
@@ -22,6 +23,11 @@ export interface Phase {
   readonly end: readonly number[];
   /** Stage voltages (V), `seconds` (0 to the phase's length) after the phase began. */
   voltagesAt(seconds: number): Float64Array;
+  /**
+   * Stage voltages (V) at `count` instants `from`, `from + step` ... (s after the phase began, finite), row by row: instant k, stage i at
+   * [k n + i]. For pictures: many times faster than asking one by one, the same to 1e-12 of the bank's voltage.
+   */
+  voltagesOver(grid: { readonly from: number; readonly step: number; readonly count: number }): Float64Array;
   /** Current through the chain (A), positive while charging; 0 for an instant phase. */
   currentAt(seconds: number): number;
   /** For each stage the highest voltage (V) anywhere in the phase and when (s after it began), certified to 1e-12 of the bank's. */
@@ -107,6 +113,7 @@ function instantPhase(name: PhaseName, start: readonly number[], end: readonly n
     start,
     end,
     voltagesAt: () => Float64Array.from(end),
+    voltagesOver: ({ count }) => Float64Array.from({ length: count * end.length }, (_, j) => end[j % end.length]!),
     currentAt: () => 0,
     peaks: () => start.map((v, i) => ({ voltage: Math.max(v, end[i]!), seconds: 0 })),
   };
@@ -133,7 +140,7 @@ export function phaseFrom(given: {
   let arrived = given.until === undefined;
   // Each leakage can stop and start again a few times; far more than this would mean that the stretches do not end.
   for (let turn = 0; turn < 50 * (given.chain.length + 1); turn++) {
-    const segment = segmentFrom(given.chain, given.drive, start);
+    const segment = segmentFrom(given.chain, given.drive, start, given.seconds - begin);
     let length = Math.min(segment.seconds, given.seconds - begin);
     if (given.until !== undefined) {
       const there = firstBelowZero(shortfall(segment, given.until), 0, length);
@@ -158,6 +165,22 @@ export function phaseFrom(given: {
     voltagesAt: (seconds) => {
       const stretch = find(seconds);
       return segmentAt(stretch.segment, Math.min(seconds - stretch.begin, stretch.length));
+    },
+    voltagesOver: (grid) => {
+      const stages = given.chain.length;
+      const out = new Float64Array(grid.count * stages);
+      for (let row = 0; row < grid.count; ) {
+        const at = grid.from + row * grid.step;
+        const stretch = find(at);
+        const last = stretch === stretches.at(-1);
+        const span = stretch.begin + stretch.length;
+        const fit = last && at >= span ? 0 : Math.floor((span - at) / grid.step) + 1;
+        const count = Math.min(grid.count - row, Math.max(1, fit));
+        const from = Math.min(at - stretch.begin, stretch.length);
+        segmentOver(stretch.segment, { from, step: grid.step, count }, out, row);
+        row += count;
+      }
+      return out;
     },
     currentAt: (seconds) => {
       const stretch = find(seconds);

@@ -92,10 +92,11 @@ function massBetween(law: Extract<UnitLaw, { readonly kind: "normal" }>, from: n
 /** Cells of the inverse of the cut normal's distribution. */
 const STEPS = 8192;
 
-/** The law for drawing: with u in [0, 1), cell i = floor(u k), the value is bases[i] + slopes[i] (u k - i). */
+/** The law for drawing, rising: with u in [0, 1), cell i = floor(u k), the value is bases[i] + slopes[i] (u k - i). */
 export function lawSteps(law: UnitLaw): { readonly bases: Float64Array; readonly slopes: Float64Array } {
   if (law.kind === "uniform") return { bases: Float64Array.of(law.low), slopes: Float64Array.of(law.high - law.low) };
-  if (law.kind === "lot") return { bases: Float64Array.from(law.values), slopes: new Float64Array(law.values.length) };
+  if (law.kind === "lot")
+    return { bases: Float64Array.from(law.values).sort(), slopes: new Float64Array(law.values.length) };
   const { low, high } = lawRange(law);
   const density = normalDensity(law);
   const edges = new Float64Array(STEPS + 1).fill(high);
