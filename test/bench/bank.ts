@@ -109,25 +109,32 @@ async function courseRows(): Promise<readonly BenchRow[]> {
     return phase.voltagesOver({ from: 5e-4, step: 5e-4, count: 1000 });
   };
   const simulator = await startSimulator();
-  let theirs = Number.POSITIVE_INFINITY;
-  let worst = 0;
-  for (let turn = 0; turn < 3; turn++) {
-    const begun = performance.now();
-    const found = await simulate(simulator, [simulated], { seconds: 0.5, step: 5e-4, stops: false });
-    theirs = Math.min(theirs, (performance.now() - begun) / 1e3);
-    const phase = phaseFrom({ name: "hold", chain, drive, start, seconds: 0.5 });
-    for (const [k, at] of found.seconds.entries())
-      for (const [i, v] of phase.voltagesAt(at).entries())
-        worst = Math.max(worst, Math.abs(v - found.voltages[0]![i]![k]!) / 4000);
-  }
-  const [mine] = bestOf(30, [ours]) as [number];
-  return [
-    {
-      what: `20 stages at 1,000 instants against the circuit simulator at its ${worst.toExponential(1)} (ours is exact to rounding), times faster`,
+  const [mine] = bestOf(60, [ours]) as [number];
+  const rows: BenchRow[] = [];
+  // The simulator's error falls with the square of its step, ours is rounding: at either step it is the less exact, so the comparison favours it.
+  for (const [name, step] of [
+    ["at 1,000 instants of its own", 5e-4],
+    ["at a step 20 times finer", 2.5e-5],
+  ] as const) {
+    let theirs = Number.POSITIVE_INFINITY;
+    let worst = 0;
+    for (let turn = 0; turn < 3; turn++) {
+      const begun = performance.now();
+      const found = await simulate(simulator, [simulated], { seconds: 0.5, step, stops: false });
+      theirs = Math.min(theirs, (performance.now() - begun) / 1e3);
+      const phase = phaseFrom({ name: "hold", chain, drive, start, seconds: 0.5 });
+      worst = 0;
+      for (let k = 0; k < found.seconds.length; k += 7)
+        for (const [i, v] of phase.voltagesAt(found.seconds[k]!).entries())
+          worst = Math.max(worst, Math.abs(v - found.voltages[0]![i]![k]!) / 4000);
+    }
+    rows.push({
+      what: `20 stages at 1,000 instants against the circuit simulator ${name}, off by ${worst.toExponential(1)}, times faster`,
       value: theirs / mine,
       promise: { limit: 200, good: "at least" },
-    },
-  ];
+    });
+  }
+  return rows;
 }
 
 /** All rows; takes some seconds. */
