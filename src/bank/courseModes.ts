@@ -13,7 +13,7 @@
  * R + sum(w_i / (d_i - lambda)) = 0, one root after each d_i (none after the last when R = 0). Then
  * v_i(t) = v_i(0) + sum_k s_ik (1 - exp(-lambda_k t))/lambda_k, where lambda = 0 means t: a steady drift.
  * Stages of equal d count as one in the equation; what moves between them moves at their own d.
- * Source: [Golub1973] section 5, roots; [GuEisenstat1994] weights recomputed from the roots, which keeps the modes at right angles.
+ * Source: [Golub1973] section 5, roots (place from memory); [GuEisenstat1994] weights recomputed from the roots, which keeps the modes at right angles.
  */
 
 export interface Modes {

@@ -29,7 +29,7 @@ export function lawRange(law: UnitLaw): { readonly low: number; readonly high: n
   return { low: Math.min(...law.values), high: Math.max(...law.values) };
 }
 
-/** End weights of Gregory's rule: with them a sum over even nodes is an integral to the fourth power of the step. Source: [Hildebrand1974] 5.9 */
+/** End weights of Gregory's rule: with them a sum over even nodes is an integral to the fourth power of the step. Source: [Hildebrand1974] 5.9 (from memory; a test integrates a cubic) */
 const ENDS = [3 / 8, 7 / 6, 23 / 24] as const;
 
 /**

@@ -1,7 +1,8 @@
 // Worst corners against every corner there is, for n up to 5, and against the worked examples.
 import { describe, expect, test } from "vitest";
 import { type Chain, chargingShares, endOfHold, type Stage } from "../../src/bank/chain.ts";
-import { chargingCorners, dumpedCorners, holdingCorners, type StageRange, stageRange } from "../../src/bank/corners.ts";
+import { chargingCorners, dumpedCorners, holdingCorners } from "../../src/bank/corners.ts";
+import { type StageRange, stageRange } from "../../src/bank/cornersRange.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
 
 const KEYS = ["capacitance", "leakageCurrent", "conductance", "resistance"] as const;

@@ -1,7 +1,8 @@
 // The whole course: charge, hold, dump, rest; known peaks, energy, leakage that stops at zero, and a small-step reference.
 import { describe, expect, test } from "vitest";
 import { type Chain, type Stage, total } from "../../src/bank/chain.ts";
-import { courseOf, type Program, phaseFrom } from "../../src/bank/course.ts";
+import { courseOf, type Program } from "../../src/bank/course.ts";
+import { phaseFrom } from "../../src/bank/coursePhase.ts";
 
 const NONE = Number.POSITIVE_INFINITY;
 const stage = (capacitance: number, leakageCurrent = 0, conductance = 0, resistance = NONE): Stage => ({

@@ -1,7 +1,7 @@
 // Speed of the bank's sharing, each figure a ratio measured within this run.
 
 import { chargingShares, type Stage } from "../../src/bank/chain.ts";
-import { phaseFrom } from "../../src/bank/course.ts";
+import { phaseFrom } from "../../src/bank/coursePhase.ts";
 import { monteCarloChunk } from "../../src/bank/monteCarlo.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
 import { exceedRisk } from "../../src/bank/tail.ts";
