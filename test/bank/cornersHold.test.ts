@@ -1,9 +1,12 @@
 // The worst of a finite hold against the exact time course at every corner of C, leakage, insulation and resistor.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { chargingShares, type Stage } from "../../src/bank/chain.ts";
 import { type HoldCase, worstAtHold } from "../../src/bank/cornersHold.ts";
 import { phaseFrom } from "../../src/bank/coursePhase.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const NONE = Number.POSITIVE_INFINITY;
 const BASE: HoldCase = {

@@ -1,8 +1,11 @@
 // The whole course: charge, hold, dump, rest; known peaks, energy, leakage that stops at zero, and a small-step reference.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { type Chain, type Stage, total } from "../../src/bank/chain.ts";
 import { courseOf, type Program } from "../../src/bank/course.ts";
 import { phaseFrom } from "../../src/bank/coursePhase.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const NONE = Number.POSITIVE_INFINITY;
 const stage = (capacitance: number, leakageCurrent = 0, conductance = 0, resistance = NONE): Stage => ({

@@ -1,5 +1,5 @@
 // The seeded witness: same bits in any split, cancellable, right on average.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import {
   BINS,
   binEdges,
@@ -12,6 +12,9 @@ import {
 } from "../../src/bank/monteCarlo.ts";
 import { nextWord, streamState } from "../../src/bank/random.ts";
 import type { TailCase } from "../../src/bank/tailLaw.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const GIVEN: TailCase = {
   law: { kind: "uniform", low: 0.8, high: 1.2 },
