@@ -5,11 +5,10 @@ import { homedir } from "node:os";
 import { join } from "node:path";
 import { fileURLToPath } from "node:url";
 import { bugText } from "./cli/bug.ts";
-import { EXIT } from "./cli/exit.ts";
-import { filesOn, writeNow } from "./cli/files.ts";
+import { EXIT, filesOn, type Ports, textWidth } from "./cli/index.ts";
 import { outputTrouble } from "./cli/output.ts";
-import { type Ports, textWidth } from "./cli/ports.ts";
 import { VERSION } from "./cli/version.ts";
+import { type ScreenFlags, screenFlags } from "./tui/screenFlags.ts";
 
 const isTerminal = (): boolean =>
   process.stdin.isTTY === true && process.stdout.isTTY === true && process.env.TERM !== "dumb";
@@ -24,37 +23,60 @@ function portsOfProcess(): Ports {
   };
 }
 
-/** The screens, on the demo's catalogues; brief and pins are kept in the home folder. */
-async function openScreens(ports: Ports): Promise<number> {
-  const { demoStock } = await import("./cli/demo.ts");
-  const { tell } = await import("./cli/tell.ts");
-  const demo = demoStock(ports);
-  if (!demo.ok) return tell(ports, demo.refusals);
-  const { parts, families, sources, brief } = demo.value;
+/** Where the screens keep brief and pins between runs. */
+const sessionFile = (): string => process.env.JOULEWRIGHT_SESSION || join(homedir(), ".joulewright-screens.json");
+
+/** The screens, on the catalogues asked for or those that come with the program. Loaded only here: no command waits for them. */
+async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
+  const demo = flags.catalog.length === 0;
+  const [{ readStock }, { DEMO_CATALOGS }, { tell }, { startScreens }] = await Promise.all([
+    import("./cli/stock.ts"),
+    import("./cli/demo.ts"),
+    import("./cli/tell.ts"),
+    import("./tui/index.ts"),
+  ]);
+  const shipped = (name: string): string => join(ports.catalogs, name);
+  const catalog = demo ? DEMO_CATALOGS.map(shipped) : flags.catalog;
+  const resistors = flags.resistors ?? (demo ? shipped("resistors.csv") : undefined);
+  const stock = readStock({ catalog, resistors }, ports.files);
+  const briefPath = flags.brief ?? shipped("demo-brief.json");
+  const brief = ports.files.read(briefPath);
+  if (!stock.ok || !brief.ok) {
+    return tell(
+      ports,
+      [stock, brief].flatMap((read) => (read.ok ? [] : read.refusals)),
+      false,
+    );
+  }
+  const json = (await import("./cli/jsonText.ts")).readJson(brief.value, briefPath);
+  if (!json.ok) return tell(ports, json.refusals, false);
+  const { parts, families, sources } = stock.value;
   const faults = sources.reduce((sum, source) => sum + source.faults.length, 0);
-  const { startScreens } = await import("./tui/index.ts");
   return startScreens({
     parts,
     families,
-    stock: { name: "demo catalogues", parts: parts.length, faults, note: "invented parts" },
-    brief,
+    stock: { name: catalog.join(", "), parts: parts.length, faults, note: demo ? "invented" : "" },
+    brief: json.value.value,
     files: ports.files,
-    sessionFile: process.env.JOULEWRIGHT_SESSION ?? join(homedir(), ".joulewright.json"),
+    sessionFile: sessionFile(),
     terminal: {
-      complain: (line) => ports.err(`${line}\n`),
       stdin: process.stdin,
       stdout: process.stdout,
-      writeSync: writeNow,
+      // A terminal is written to at once on POSIX; elsewhere the process ends by itself, after all is written.
+      writeSync: (text) => void process.stdout.write(text),
       process,
       env: process.env,
+      complain: (line) => ports.err(`${line}\n`),
+      ...(flags.ascii ? { ascii: true } : {}),
     },
   });
 }
 
 async function main(argv: readonly string[]): Promise<number> {
   const ports = portsOfProcess();
-  if (argv.length > 0) return (await import("./cli/program.ts")).run(argv, ports);
-  if (isTerminal()) return openScreens(ports);
+  const flags = screenFlags(argv);
+  if (flags === null) return (await import("./cli/program.ts")).run(argv, ports);
+  if (argv.length > 0 || isTerminal()) return openScreens(flags, ports);
   return (await import("./cli/demo.ts")).demoCommand(ports);
 }
 
