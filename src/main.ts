@@ -5,8 +5,10 @@ import { homedir } from "node:os";
 import { join } from "node:path";
 import { fileURLToPath } from "node:url";
 import { bugText } from "./cli/bug.ts";
-import { EXIT, filesOn, type Ports, textWidth } from "./cli/index.ts";
+import { EXIT } from "./cli/exit.ts";
+import { filesOn } from "./cli/files.ts";
 import { outputTrouble } from "./cli/output.ts";
+import { type Ports, textWidth } from "./cli/ports.ts";
 import { VERSION } from "./cli/version.ts";
 import { type ScreenFlags, screenFlags } from "./tui/screenFlags.ts";
 
