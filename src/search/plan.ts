@@ -25,6 +25,9 @@ export interface PlanInput {
   readonly quick?: boolean;
 }
 
+/** Up to so many layouts asked for, the search keeps only what may be among them or on the front. */
+const MOST_SIEVED = 1000;
+
 /** Plans. Refuses only what cannot be understood (two currencies); nothing fitting is an answer, with its least changes. */
 export function plan(input: PlanInput): Read<PlanResult> {
   const { brief, limit = 20, rank = "cost", quick = false } = input;
@@ -36,18 +39,19 @@ export function plan(input: PlanInput): Read<PlanResult> {
   const families = pricedIn(given, currency, brief);
   const required = requiredCapacitance(brief);
   const work: SweepInput = { parts, families, brief, required, currency };
-  const { table, refused: refusals } = sweep(work);
+  const wanted = limit > 0 && limit <= MOST_SIEVED ? { limit, rank } : null;
+  const { table, count, refused: refusals } = sweep(work, { wanted });
   const rows = firstRows(table.count, limit, comparison(table, parts, rank));
   const layouts = rows.map((row) => layoutAt(work, table, row));
   return accepted({
     brief,
     required: { capacitance: required },
-    searched: { parts: parts.length, layouts: table.count, proof: "exhaustive" },
+    searched: { parts: parts.length, layouts: count, proof: "exhaustive" },
     currency,
     layouts,
     front: frontRows(table).map((row) => idOf(table, parts, row)),
     refused: refusals,
-    changes: table.count === 0 && !quick ? leastChanges(work) : [],
+    changes: count === 0 && !quick ? leastChanges(work) : [],
     ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
     notes: notesOf(brief),
   });
