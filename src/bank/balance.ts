@@ -72,33 +72,36 @@ export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorF
   return false;
 }
 
-/** What is known of a choice without making it. */
-export interface Outlook {
-  /** Whether the family surely has a choice; false leaves the question open. */
-  sure: boolean;
-  /** The worst holding voltage of the choice, if there is one, is no less than this; Infinity when there is surely none. */
-  floor: number;
+/**
+ * True when the family surely has a choice, found without looking for it; false leaves the question open. After an endless hold V_1 <= limit
+ * for any R <= R_max, and R is at most one step below R_max: k elements do when k >= limit/voltage and k >= limit^2/(watts R_max/step).
+ */
+export function surelyChooses(bank: FiniteHold, limit: number, family: ResistorFamily): boolean {
+  if (bank.hold !== Number.POSITIVE_INFINITY) return false;
+  const most = largestBalance(bank, limit);
+  if (!(most > 0)) return false;
+  const watts = family.power * family.derating * (1 - family.tolerance);
+  const least = Math.min(most, family.highest) / family.step;
+  const elements = Math.ceil(Math.max(1, limit / family.voltage, (limit * limit) / (watts * least)));
+  return elements <= MOST_ELEMENTS && most >= elements * (family.values[0] as number);
 }
 
 /**
- * Looks ahead at a choice, after an endless hold. R lies between R_max/step and R_max (with R_max no more than one largest element), and V_1
- * rises with R. Any R <= R_max keeps V_1 <= limit, so k elements surely do when k >= limit/voltage and k >= limit^2/(watts R_max/step).
+ * A worst holding voltage below which no choice comes, whatever the ties, for any series count from that of `bank` (two or more) to
+ * `mostSeries`; 0 where nothing is known. V_1(R) starts above zero and bends down, so that at R >= R_max/step it is at least limit/step;
+ * and where the largest element caps R, V_1 lies, as a ratio of two straight lines in n, between its ends.
  */
-export function balanceOutlook(bank: FiniteHold, limit: number, family: ResistorFamily, outlook: Outlook): void {
-  outlook.sure = false;
-  outlook.floor = 0;
-  if (bank.hold !== Number.POSITIVE_INFINITY) return;
-  const { values, voltage, lowest, highest, step } = family;
-  const most = largestBalance(bank, limit);
-  if (!(most >= lowest * (1 - 1e-9))) {
-    outlook.floor = Number.POSITIVE_INFINITY;
-    return;
-  }
-  const least = Math.min(most, highest) / step;
-  const watts = family.power * family.derating * (1 - family.tolerance);
-  const elements = Math.ceil(Math.max(1, limit / voltage, (limit * limit) / (watts * least)));
-  outlook.sure = elements <= MOST_ELEMENTS && most >= elements * (values[0] as number);
-  outlook.floor = holdingWorst(bank, least * (1 - 1e-9));
+export function leastHolding(bank: FiniteHold, limit: number, family: ResistorFamily, mostSeries: number): number {
+  if (bank.hold !== Number.POSITIVE_INFINITY) return 0;
+  const capped = family.highest / family.step;
+  return (
+    Math.min(
+      Math.min(limit, bank.voltage) / family.step,
+      holdingWorst({ ...bank, sharing: 1 }, capped),
+      holdingWorst({ ...bank, sharing: 1, series: mostSeries }, capped),
+    ) *
+    (1 - 1e-9)
+  );
 }
 
 const NO_LINE = { base: 0, slope: 0 };

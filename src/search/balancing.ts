@@ -1,6 +1,6 @@
 // The resistor of one layout among all families: the cheapest that works, then the fewest elements; unpriced families last.
 
-import { balanceOutlook, type Choice, chooseBalance, type FiniteHold, type Outlook, type Ties } from "../bank/index.ts";
+import { type Choice, chooseBalance, type FiniteHold, leastHolding, surelyChooses, type Ties } from "../bank/index.ts";
 import { cheapest, isPriced, type ResistorFamily } from "../catalog/index.ts";
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
@@ -91,21 +91,27 @@ export function bestBalance(
   return best.family >= 0;
 }
 
-const ahead: Outlook = { sure: false, floor: 0 };
+/** True when some family surely works, told without choosing; false leaves the question open. */
+export function surelyBalances(chain: SearchChain, limit: number, families: readonly ResistorFamily[]): boolean {
+  for (let f = 0; f < families.length; f++) {
+    const family = families[f] as ResistorFamily;
+    chain.spread = family.tolerance;
+    if (surelyChooses(chain, limit, family)) return true;
+  }
+  return false;
+}
 
-/** What bestBalance will find at the least, without choosing; written into `outlook`. */
-export function outlookOf(
+/** A holding voltage below which no family comes, for any series count from that of the chain (two or more) to `mostSeries`. */
+export function holdingFloor(
   chain: SearchChain,
   limit: number,
   families: readonly ResistorFamily[],
-  outlook: Outlook,
-): void {
-  outlook.sure = false;
-  outlook.floor = Number.POSITIVE_INFINITY;
+  mostSeries: number,
+): number {
+  let floor = Number.POSITIVE_INFINITY;
   for (const family of families) {
     chain.spread = family.tolerance;
-    balanceOutlook(chain, limit, family, ahead);
-    outlook.sure ||= ahead.sure;
-    outlook.floor = Math.min(outlook.floor, ahead.floor);
+    floor = Math.min(floor, leastHolding(chain, limit, family, mostSeries));
   }
+  return floor;
 }

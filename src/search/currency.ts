@@ -15,10 +15,12 @@ export function planCurrency(
 ): Read<string | null> {
   const seen = new Set<string>();
   let priced = false;
-  for (const terms of [parts, families].flat()) {
-    if (!isPriced(terms)) continue;
-    priced = true;
-    if (terms.currency !== undefined) seen.add(terms.currency);
+  for (const list of [parts, families]) {
+    for (const terms of list) {
+      if (!isPriced(terms)) continue;
+      priced = true;
+      if (terms.currency !== undefined) seen.add(terms.currency);
+    }
   }
   const currency = brief.currency ?? [...seen][0] ?? (priced ? "EUR" : null);
   const foreign = [...seen].filter((code) => code !== currency && brief.exchange?.[code] === undefined);

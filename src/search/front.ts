@@ -4,18 +4,23 @@
 // Method: rows beaten by one of a few strong rows leave first; the rest is sorted by cost, and each is held against the front so far,
 // which a later row cannot beat. Checked against all pairs in the tests.
 
-import { beats, isBeaten, strongOf } from "./strong.ts";
+import { beats, isBeaten, type Strong, strongOf } from "./strong.ts";
 import { type Figures, figuresAt, type LayoutTable, noFigures } from "./table.ts";
 
 /** Bands of stress: a row need only be held against those of its own band and below. */
 const BANDS = 48;
+/** So few rows are held against each other at once. */
+const ENOUGH = 1000;
 
 /** Row numbers of the front, by cost. */
 export function frontRows(table: LayoutTable): readonly number[] {
-  const all = Array.from({ length: table.count }, (_, row) => row);
-  const strong = strongOf(table, all, all);
-  const figures = noFigures();
-  const alive = all.filter((row) => !isBeaten(strong, figuresAt(table, row, figures))).sort(byCost(table));
+  let alive: number[] = Array.from({ length: table.count }, (_, row) => row);
+  // Each round knows stronger rows than the one before, until it takes few rows away.
+  for (let before = Number.POSITIVE_INFINITY; alive.length > ENOUGH && alive.length < 0.8 * before; ) {
+    before = alive.length;
+    alive = unbeaten(table, alive, strongOf(table, { candidates: alive, tried: alive, ahead: before }));
+  }
+  alive.sort(byCost(table));
   const bounds = quantiles(alive.map((row) => table.stress[row] as number));
   const found: Figures[][] = Array.from({ length: BANDS }, () => []);
   const front: number[] = [];
@@ -28,6 +33,13 @@ export function frontRows(table: LayoutTable): readonly number[] {
     for (let b = band; b < BANDS; b++) (found[b] as Figures[]).push(own);
   }
   return front;
+}
+
+function unbeaten(table: LayoutTable, rows: readonly number[], strong: Strong): number[] {
+  const figures = noFigures();
+  const left: number[] = [];
+  for (const row of rows) if (!isBeaten(strong, figuresAt(table, row, figures))) left.push(row);
+  return left;
 }
 
 /** Upper ends of bands with about as many of the values each. */

@@ -59,6 +59,9 @@ export function plan(input: PlanInput): Read<PlanResult> {
 
 /** Parts by their first row: a name that stands twice would give two layouts one name. */
 function distinct(parts: readonly Capacitor[]): readonly Capacitor[] {
+  // The rows of one catalogue in order: its reader has refused every name that stands twice. A set of 100,000 names costs a quarter of the search.
+  if (parts.every(({ file, line }, i) => i === 0 || (file === parts[0]?.file && line > (parts[i - 1]?.line ?? 0))))
+    return parts;
   const seen = new Set<string>();
   for (const unit of parts) seen.add(unit.part);
   if (seen.size === parts.length) return parts;

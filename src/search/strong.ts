@@ -12,10 +12,10 @@ export function beats(a: Readonly<Figures>, b: Readonly<Figures>): boolean {
   return a.cost < b.cost || a.stress < b.stress || a.units < b.units || a.volume < b.volume || a.mass < b.mass;
 }
 
-/** Rows chosen, rows that they are chosen from, and rows that they are tried on. */
-const MOST = 48;
-const CANDIDATES = 128;
-const TRIED = 512;
+/** At most so many are chosen. */
+const MOST = 64;
+/** Rows that they are tried on at most, for a work large enough; they are chosen from half as many. */
+const TRIED = 1024;
 
 /** Figures of some rows one after another: stress, cost, units, volume, mass of each. */
 export type Strong = Float64Array;
@@ -35,44 +35,65 @@ function packed({ stress, cost, units, volume, mass }: LayoutTable, rows: readon
   return all;
 }
 
-/** The strong rows among `candidates`, by how they fare against the rows `tried`. */
-export function strongOf(table: LayoutTable, candidates: readonly number[], tried: readonly number[]): Strong {
-  const rows = evenly(candidates, CANDIDATES);
-  const sample = evenly(tried, TRIED).map((row) => figuresAt(table, row, noFigures()));
-  const each = rows.map((row) => packed(table, [row]));
-  // One mark for each candidate and each row of the sample that it beats, while none of the chosen does.
-  const marks = each.map((one) => Uint8Array.from(sample, (figures) => (isBeaten(one, figures) ? 1 : 0)));
-  const counts = marks.map((row) => row.reduce((sum, mark) => sum + mark, 0));
-  const chosen: number[] = [];
-  while (chosen.length < MOST) {
-    const best = counts.indexOf(Math.max(...counts));
-    if (best < 0 || counts[best] === 0) break;
-    chosen.push(rows[best] as number);
-    for (let t = 0; t < sample.length; t++) {
-      if (marks[best]?.[t] !== 1) continue;
-      for (let c = 0; c < marks.length; c++) {
-        const own = marks[c] as Uint8Array;
-        if (own[t] !== 1) continue;
-        own[t] = 0;
-        counts[c]! -= 1;
-      }
-    }
-  }
-  return packed(table, chosen);
+/** True when the layout at `k` is no worse in all five figures and better in one. Unknown counts as the worst, never as zero. */
+function beatsFrom(all: Strong, k: number, { stress, cost, units, volume, mass }: Readonly<Figures>): boolean {
+  const s = all[k] as number;
+  const c = all[k + 1] as number;
+  if (s > stress || c > cost) return false;
+  const u = all[k + 2] as number;
+  const v = all[k + 3] as number;
+  const m = all[k + 4] as number;
+  if (u > units || v > volume || m > mass) return false;
+  return c < cost || s < stress || u < units || v < volume || m < mass;
 }
 
 /** True when one of the strong layouts beats these figures, and so whatever is worse than them. */
-export function isBeaten(strong: Strong, { stress, cost, units, volume, mass }: Readonly<Figures>): boolean {
-  for (let k = 0; k < strong.length; k += WIDTH) {
-    const s = strong[k] as number;
-    if (s > stress) continue;
-    const c = strong[k + 1] as number;
-    if (c > cost) continue;
-    const u = strong[k + 2] as number;
-    const v = strong[k + 3] as number;
-    const m = strong[k + 4] as number;
-    if (u > units || v > volume || m > mass) continue;
-    if (c < cost || s < stress || u < units || v < volume || m < mass) return true;
-  }
+export function isBeaten(strong: Strong, figures: Readonly<Figures>): boolean {
+  // They stand by rising stress: from the first with more stress on none does.
+  for (let k = 0; k < strong.length && (strong[k] as number) <= figures.stress; k += WIDTH)
+    if (beatsFrom(strong, k, figures)) return true;
   return false;
+}
+
+export interface StrongSearch {
+  readonly candidates: readonly number[];
+  readonly tried: readonly number[];
+  /** How many rows the strong ones will be held against: a small work is not worth a long choice. */
+  readonly ahead: number;
+}
+
+/** The strong rows among `candidates`, by how they fare against the rows `tried`. */
+export function strongOf(table: LayoutTable, { candidates, tried, ahead }: StrongSearch): Strong {
+  const effort = Math.ceil(Math.min(TRIED, ahead / 100));
+  const rows = evenly(candidates, Math.ceil(effort / 2));
+  const sample = evenly(tried, effort);
+  const all = packed(table, rows);
+  const figures = noFigures();
+  // One mark for each candidate and each row of the sample that it beats, while none of the chosen does.
+  const marks = new Uint8Array(rows.length * sample.length);
+  const counts = new Int32Array(rows.length);
+  for (let t = 0; t < sample.length; t++) {
+    figuresAt(table, sample[t] as number, figures);
+    for (let c = 0; c < rows.length; c++) {
+      if (!beatsFrom(all, c * WIDTH, figures)) continue;
+      marks[t * rows.length + c] = 1;
+      counts[c]! += 1;
+    }
+  }
+  const chosen: number[] = [];
+  while (chosen.length < MOST) {
+    let best = 0;
+    for (let c = 1; c < rows.length; c++) if ((counts[c] as number) > (counts[best] as number)) best = c;
+    if (!((counts[best] as number) > 0)) break;
+    chosen.push(rows[best] as number);
+    for (let from = 0; from < marks.length; from += rows.length) {
+      if (marks[from + best] !== 1) continue;
+      for (let c = 0; c < rows.length; c++) counts[c]! -= marks[from + c] as number;
+      marks.fill(0, from, from + rows.length);
+    }
+  }
+  return packed(
+    table,
+    chosen.sort((a, b) => (table.stress[a] as number) - (table.stress[b] as number)),
+  );
 }

@@ -1,25 +1,17 @@
-// Tries every part, every series count and both ties, and keeps what does the job: exhaustive, no layout object made.
+// Tries every part, every series count and both ties, and keeps what does the job: exhaustive.
+//
+// With a wish of the first few, the parts are gone through in passes, an even sample first: what it finds makes the sieve for the rest.
 
-import { chargingWorst, FIT, leastParallel, type Outlook } from "../bank/index.ts";
-import { type Capacitor, cheapest, type ResistorFamily, toBuy } from "../catalog/index.ts";
-import { minorDigits } from "../quantity/index.ts";
-import { bestBalance, chainOf, newBalancing, outlookOf } from "./balancing.ts";
-import type { Brief } from "./brief.ts";
-import { prepare } from "./candidate.ts";
+import type { Capacitor } from "../catalog/index.ts";
 import { frontRows } from "./front.ts";
 import type { RefusedPart } from "./result.ts";
-import { type RiskCase, riskJudge } from "./risk.ts";
-import { mayMatter, remember, type Sieve, sieveOf, type Wanted } from "./sieve.ts";
+import { riskJudge } from "./risk.ts";
+import { sieveOf, type Wanted } from "./sieve.ts";
 import { strongOf } from "./strong.ts";
-import { type Figures, type LayoutRow, type LayoutTable, newTable, noFigures, pushRow } from "./table.ts";
+import { type Reason, type Run, type SweepInput, sweepPart } from "./sweepPart.ts";
+import { type LayoutTable, newTable } from "./table.ts";
 
-export interface SweepInput {
-  readonly parts: readonly Capacitor[];
-  readonly families: readonly ResistorFamily[];
-  readonly brief: Brief;
-  readonly required: number;
-  readonly currency: string | null;
-}
+export type { SweepInput } from "./sweepPart.ts";
 
 export interface Sweep {
   /** All layouts that fit, or with a `wanted` those that may matter to it: the first of the order and the whole front. */
@@ -36,43 +28,8 @@ export interface SweepOptions {
   readonly wanted?: Wanted | null;
 }
 
-/** Why a part gives no layout: the first limit met, or for ceilings the least value seen. */
-interface Reason {
-  reason: string;
-  value: number | null;
-  limit: number | null;
-}
-
-/** Least n whose worst charging share is within the limit (1e-9 relative). Unknown tolerance: by the even share. */
-export function leastSeries(voltage: number, limit: number, tolerance: { low: number; high: number } | null): number {
-  const { low, high } = tolerance ?? { low: 0, high: 0 };
-  const bound = limit * (1 + FIT);
-  if (voltage <= bound) return 1;
-  const guess = Math.max(2, Math.floor(1 + ((voltage / bound - 1) * (1 + high)) / (1 - low)));
-  // The guess is the closed form rounded down: one or two steps find the least. An absurd count is returned as it is, above any limit.
-  if (guess > 1e9) return guess;
-  let n = guess;
-  while (chargingWorst(voltage, n, { low, high }) > bound) n++;
-  return n;
-}
-
-const balancing = newBalancing();
-const bill = { quantity: 0, cost: 0 };
-const outlook: Outlook = { sure: false, floor: 0 };
-
-/** Whether a shape shares safely while charging although its worst case does not; null when only the worst case counts. */
-type Judge = ((given: RiskCase) => boolean) | null;
-
-interface Run {
-  readonly input: SweepInput;
-  readonly judge: Judge;
-  readonly table: LayoutTable;
-  sieve: Sieve | null;
-  count: number;
-}
-
 /** At least so many parts are tried before the sieve is made. */
-const FIRST_PARTS = 128;
+const FIRST_PARTS = 64;
 /** Each pass over the parts takes so many times those of the pass before, and its sieve knows what that found. */
 const PASS = 8;
 
@@ -89,7 +46,11 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
   for (let seen = 0; stride >= 1; seen = stride, stride /= PASS) {
     if (wanted !== null && table.count > 0) {
       if (seen > 0 && sample.length === 0) sample = Array.from({ length: table.count }, (_, i) => i);
-      run.sieve = sieveOf(table, strongOf(table, frontRows(table), sample), wanted);
+      run.sieve = sieveOf(
+        table,
+        strongOf(table, { candidates: frontRows(table), tried: sample, ahead: parts.length * 20 }),
+        wanted,
+      );
     }
     for (let i = 0; i < parts.length; i += stride) {
       if (seen > 0 && i % seen === 0) continue;
@@ -103,106 +64,3 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
   });
   return { table, count: run.count, refused };
 }
-
-const row: LayoutRow & Figures = { ...noFigures(), part: 0, series: 1, parallel: 1, tied: false, family: -1 };
-
-function sweepPart(run: Run, index: number): Reason | null {
-  const { judge, table, sieve } = run;
-  const { brief, families, required, currency, parts } = run.input;
-  const unit = parts[index] as Capacitor;
-  const candidate = prepare(unit, brief);
-  const voltage = brief.voltage * (1 + brief.overshoot);
-  const minor = 10 ** minorDigits(currency ?? "");
-  const worstSeries = leastSeries(voltage, candidate.limit, candidate.tolerance);
-  const least = judge === null ? worstSeries : leastSeries(voltage, candidate.limit, null);
-  if (least > brief.maxSeries) return { reason: "series-limit", value: least, limit: brief.maxSeries };
-  const chain = chainOf(candidate, brief);
-  const before = run.count;
-  let why: Reason | null = null;
-  const ceiling = (reason: string, value: number | null, limit: number | null): void => {
-    if (why === null || why.reason === "balance" || why.reason === "risk") why = { reason, value, limit };
-    else if (why.reason === reason && value !== null && why.value !== null && value < why.value) why.value = value;
-  };
-  row.part = index;
-  for (let n = least; n <= brief.maxSeries; n++) {
-    const p = leastParallel(required, n, candidate.basis);
-    const units = n * p;
-    if (units > brief.maxUnits) {
-      ceiling("unit-limit", units, brief.maxUnits);
-      break;
-    }
-    if (!cheapest(unit, units + brief.spares, bill)) {
-      ceiling("stock", toBuy(unit, units + brief.spares), unit.available ?? null);
-      break;
-    }
-    const capacitors = bill.cost;
-    row.series = n;
-    row.parallel = p;
-    row.units = units;
-    row.volume = candidate.volume === null ? Number.POSITIVE_INFINITY : candidate.volume * units;
-    row.mass = candidate.mass === null ? Number.POSITIVE_INFINITY : candidate.mass * units;
-    if (over(row.volume, brief.maxVolume)) {
-      const reason = candidate.volume === null ? "volume-unknown" : "volume-limit";
-      ceiling(reason, finiteOrNull(row.volume), brief.maxVolume as number);
-      break;
-    }
-    if (over(row.mass, brief.maxMass)) {
-      const reason = candidate.mass === null ? "mass-unknown" : "mass-limit";
-      ceiling(reason, finiteOrNull(row.mass), brief.maxMass as number);
-      break;
-    }
-    let charging = Number.POSITIVE_INFINITY;
-    if (n === 1) charging = voltage;
-    else if (candidate.tolerance !== null) charging = chargingWorst(voltage, n, candidate.tolerance);
-    for (let tied = n > 1 && p > 1 ? 1 : 0; tied >= 0; tied--) {
-      if (judge !== null && n < worstSeries) {
-        const ties = tied === 1 ? "cross-tied" : "strings";
-        const tolerance = candidate.tolerance ?? { low: 0, high: 0 };
-        if (!judge({ tolerance, series: n, parallel: p, ties, share: candidate.limit / voltage })) {
-          ceiling("risk", null, brief.risk);
-          continue;
-        }
-      }
-      let worst = charging;
-      let resistors = 0;
-      row.family = -1;
-      if (n > 1 && chain !== null) {
-        chain.series = n;
-        chain.sharing = tied === 1 ? p : 1;
-        if (sieve !== null && brief.maxCost === undefined) {
-          // What fits and cannot matter is counted and not worked out: resistors only add to the cost, and holding to the stress.
-          outlookOf(chain, candidate.limit, families, outlook);
-          row.cost = capacitors;
-          row.stress = Math.max(charging, outlook.floor) / unit.voltage;
-          if (outlook.sure && !mayMatter(sieve, row)) {
-            run.count++;
-            continue;
-          }
-        }
-        if (!bestBalance(chain, candidate.limit, tied === 1 ? n : units, families, balancing)) {
-          ceiling("balance", null, candidate.limit);
-          continue;
-        }
-        row.family = balancing.family;
-        worst = Math.max(worst, balancing.worst);
-        resistors = Number.isFinite(balancing.cost) ? balancing.cost : 0;
-      }
-      row.cost = capacitors + resistors;
-      if (brief.maxCost !== undefined && over(row.cost / minor, brief.maxCost)) {
-        const reason = Number.isFinite(row.cost) ? "cost-limit" : "price-unknown";
-        ceiling(reason, finiteOrNull(row.cost / minor), brief.maxCost);
-        continue;
-      }
-      run.count++;
-      row.stress = worst / unit.voltage;
-      row.tied = tied === 1;
-      if (sieve !== null && !mayMatter(sieve, row)) continue;
-      pushRow(table, row);
-      if (sieve !== null) remember(sieve, row);
-    }
-  }
-  return run.count > before ? null : (why ?? { reason: "series-limit", value: least, limit: brief.maxSeries });
-}
-
-const over = (value: number, limit: number | undefined): boolean => limit !== undefined && value > limit * (1 + FIT);
-const finiteOrNull = (value: number): number | null => (Number.isFinite(value) ? value : null);

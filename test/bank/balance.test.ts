@@ -1,6 +1,6 @@
 // The choice of a balancing resistor against a slow search of every element count and every preferred value.
 import { describe, expect, test } from "vitest";
-import { type Choice, chooseBalance, elementPower } from "../../src/bank/balance.ts";
+import { type Choice, chooseBalance, elementPower, leastHolding, surelyChooses } from "../../src/bank/balance.ts";
 import type { FiniteHold } from "../../src/bank/finiteHold.ts";
 import { holdWorst } from "../../src/bank/finiteHold.ts";
 import { DEFAULT_FAMILY, type ResistorFamily, readResistors } from "../../src/catalog/index.ts";
@@ -172,5 +172,63 @@ describe("chooseBalance(bank, limit, family, choice)", () => {
   test("as many elements as it takes: 400 kV on two stages, elements of 350 V", () => {
     const one = bank({ voltage: 400e3, series: 2, leak: { kind: "insulation", ohms: 1e15 }, spread: 0.01 });
     expect(choose(one, 220e3, family("a,E24,1,1e7,1,2,0.5,350"))?.elements).toBeGreaterThan(500);
+  });
+});
+
+describe("surelyChooses(bank, limit, family), leastHolding(bank, limit, family, mostSeries)", () => {
+  const c = chance(35);
+  const cases = Array.from({ length: 3000 }, () => {
+    const leak = c.maybe(0.6)
+      ? ({ kind: "current", amperes: c.pick([0, 1e-9, 1e-6, 1e-5, 3e-4, 5e-3]) } as const)
+      : ({ kind: "insulation", ohms: c.pick([1e4, 1e6, 3e7, 1e9, 1e11]) } as const);
+    const spread = c.pick([0, 0.01, 0.05, 0.1]);
+    const one = bank({ voltage: c.between(300, 6000), series: c.whole(2, 30), sharing: c.whole(1, 12), leak, spread });
+    const limit = (one.voltage / one.series) * c.between(0.95, c.pick([1.1, 1.7, 20]));
+    const [lowest, highest] = c.pick([
+      [1, 1e7],
+      [100, 1e4],
+      [105, 105e4],
+      [4640, 4700],
+      [1e6, 1e7],
+    ]) as [number, number];
+    const from = family(
+      `a,${c.pick(["E3", "E6", "E12", "E24", "E48"])},${lowest},${highest},${spread * 100},${c.pick([0.01, 0.25, 2, 10])},${c.pick([0.5, 1])},${c.pick([1, 200, 350, 3500])}`,
+    );
+    return { one, limit, from };
+  });
+  test("3000 random banks held for ever: what is sure is chosen, and most of what is chosen was sure", () => {
+    let [sure, chosen] = [0, 0];
+    for (const [i, { one, limit, from }] of cases.entries()) {
+      const found = choose(one, limit, from);
+      if (found !== null) chosen++;
+      if (!surelyChooses(one, limit, from)) continue;
+      sure++;
+      expect(found, `case ${i}`).not.toBeNull();
+    }
+    expect(chosen).toBeGreaterThan(1000);
+    expect(sure).toBeGreaterThan(0.8 * chosen);
+  });
+  test("the same: from a shorter chain to a longer one, no choice holds below the floor, and the floor is worth having", () => {
+    let [near, chosen] = [0, 0];
+    for (const [i, { one, limit, from }] of cases.entries()) {
+      const found = choose(one, limit, from);
+      if (found === null) continue;
+      chosen++;
+      for (const [first, last] of [
+        [2, 40],
+        [one.series, one.series],
+        [one.series, 200],
+        [2, one.series],
+      ] as const) {
+        const floor = leastHolding({ ...one, series: first }, limit, from, last);
+        expect(floor, `case ${i} ${first}..${last}`).toBeLessThanOrEqual(found.worst);
+        if (first === last && floor > found.worst / 3) near++;
+      }
+    }
+    expect(near).toBeGreaterThan(0.5 * chosen);
+  });
+  test("a hold of finite time: nothing is known beforehand", () => {
+    expect(surelyChooses(bank({ hold: 30 }), 450, DEFAULT_FAMILY)).toBe(false);
+    expect(leastHolding(bank({ hold: 30 }), 450, DEFAULT_FAMILY, 40)).toBe(0);
   });
 });

@@ -1,8 +1,14 @@
 // The sweep against a slow brute force written from the rules alone, on small random catalogues.
 import { describe, expect, test } from "vitest";
-import { type Capacitor, readCapacitors, readResistors } from "../../src/catalog/index.ts";
+import { requiredCapacitance } from "../../src/bank/index.ts";
+import { type Capacitor, DEFAULT_FAMILY, readCapacitors, readResistors } from "../../src/catalog/index.ts";
+import { frontRows } from "../../src/search/front.ts";
 import { type Brief, plan, readBrief } from "../../src/search/index.ts";
-import { leastSeries } from "../../src/search/sweep.ts";
+import { comparison, firstRows, idOf, RANKINGS } from "../../src/search/rank.ts";
+import { sweep } from "../../src/search/sweep.ts";
+import type { LayoutTable } from "../../src/search/table.ts";
+import { bigCatalogue } from "../support/bigCatalogue.ts";
+import { labResistors } from "../support/labParts.ts";
 import { chance } from "../support/random.ts";
 import { slowPlan } from "../support/slowPlan.ts";
 import { smallBrief, smallCatalogue, smallResistors } from "../support/smallCatalogue.ts";
@@ -11,43 +17,6 @@ function must<T>(read: { readonly ok: boolean; readonly value?: T }): T {
   if (!read.ok) throw new Error(JSON.stringify(read));
   return read.value as T;
 }
-
-describe("leastSeries(voltage, limit, tolerance)", () => {
-  test.each([
-    [400, 400, { low: 0.2, high: 0.2 }, 1],
-    [400 * (1 + 2e-9), 400, { low: 0, high: 0 }, 2],
-    [800, 400, { low: 0, high: 0 }, 2],
-    [800, 400, null, 2],
-    [800, 400, { low: 0.2, high: 0.2 }, 3],
-    [1350, 450, { low: 0.2, high: 0.2 }, 4],
-    [1600, 450, { low: 0.2, high: 0.2 }, 5],
-    [2200, 0.001, { low: 0, high: 0 }, 2200000],
-  ])("%d V on %d V, %o: %d", (voltage, limit, tolerance, n) => expect(leastSeries(voltage, limit, tolerance)).toBe(n));
-
-  test("worked number A1: 1350 V is the most that four of 450 V bear at 20 %, so 1351 V takes five", () => {
-    expect(leastSeries(1351, 450, { low: 0.2, high: 0.2 })).toBe(5);
-  });
-
-  // Skipped because it never ends: above 2^53 adding one changes nothing, and a brief may ask for such a derating.
-  test("a limit of a millionth of a millionth of the volts: some number, and soon", () => {
-    expect(leastSeries(1e7, 4.5e-10, { low: 0.2, high: 0.2 })).toBeGreaterThan(1000);
-  });
-
-  test("is the least: counting up from one gives the same on 2000 random cases", () => {
-    const c = chance(11);
-    for (let i = 0; i < 2000; i++) {
-      const [voltage, limit] = [c.between(1, 3000), c.between(50, 500)];
-      const tolerance = { low: c.between(0, 0.9), high: c.between(0, 1) };
-      let n = 1;
-      while (
-        (voltage * (1 + tolerance.high)) / (1 + tolerance.high + (n - 1) * (1 - tolerance.low)) >
-        limit * (1 + 1e-9)
-      )
-        n++;
-      expect(leastSeries(voltage, limit, tolerance), `case ${i}`).toBe(n);
-    }
-  });
-});
 
 interface Seen {
   layouts: number;
@@ -137,5 +106,41 @@ describe("plan on random small catalogues against the slow brute force", () => {
       u.tolerance !== undefined && Math.min(b.derating, u.derating ?? 1) * u.voltage < b.voltage * (1 + b.overshoot);
     for (let i = 0; i < 120; i++) compare({ seed: 9000 + i, holds: ["600 s"], spreads: ["10"], keep }, seen);
     expect(seen.balanced).toBeGreaterThan(50);
+  });
+});
+
+describe("sweep(input, { wanted }), which keeps only what may matter, against the sweep that keeps all", () => {
+  const { parts } = must(readCapacitors(bigCatalogue(800, 5), "big.csv"));
+  const unsaid = parts.map(({ leakage: _l, insulation: _i, tolerance: _t, ...unit }): Capacitor => unit);
+  const base = { energy: 2400, voltage: 2200, ripple: 1 };
+  const limit = 7;
+  test.each([
+    ["as it is", base, parts],
+    ["a ceiling of cost", { ...base, maxCost: 900 }, parts],
+    ["ceilings of size and series", { ...base, energy: 20000, maxVolume: "200 L", maxSeries: 20 }, parts],
+    ["a hold of 30 s", { ...base, voltage: 800, hold: "30 s", maxSeries: 10 }, parts],
+    ["statistical", { ...base, voltage: 1500, basis: "statistical", risk: 0.001, maxSeries: 7 }, parts.slice(0, 520)],
+    ["spares and small banks", { ...base, energy: 3, voltage: 600, spares: 2 }, parts],
+    ["nothing said of leakage and tolerance", base, unsaid],
+    ["the other way round", base, [...parts].reverse()],
+  ] as const)("%s: same first, front, count and refusals by every ranking", (_what, wish, stock) => {
+    const brief = must(readBrief(wish));
+    for (const families of brief.basis === "statistical" ? [labResistors] : [[DEFAULT_FAMILY], labResistors]) {
+      const work = { brief, parts: stock, families, required: requiredCapacitance(brief), currency: "EUR" };
+      const all = sweep(work);
+      const ids = (table: LayoutTable, rows: readonly number[]) => rows.map((row) => idOf(table, stock, row));
+      expect(all.count).toBe(all.table.count);
+      expect(all.count).toBeGreaterThan(100);
+      const front = ids(all.table, frontRows(all.table));
+      for (const rank of brief.basis === "statistical" ? (["cost"] as const) : RANKINGS) {
+        const few = sweep(work, { wanted: { limit, rank } });
+        expect(few.table.count).toBeLessThan(all.count);
+        expect(few.count).toBe(all.count);
+        expect(few.refused).toEqual(all.refused);
+        expect(ids(few.table, frontRows(few.table))).toEqual(front);
+        const first = (table: LayoutTable) => ids(table, firstRows(table.count, limit, comparison(table, stock, rank)));
+        expect(first(few.table)).toEqual(first(all.table));
+      }
+    }
   });
 });
