@@ -4,7 +4,10 @@ import type { Ties } from "../bank/index.ts";
 import type { Capacitor, Purchase } from "../catalog/index.ts";
 import type { Finding } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
+import type { Improve } from "./improve.ts";
 import type { Risk } from "./risk.ts";
+import type { BalanceMends } from "./sharing/mends.ts";
+import type { WithoutBalance } from "./sharing/withoutBalance.ts";
 
 /** A value under low, nominal and high capacitance; null where the tolerance is unknown. */
 export interface Span {
@@ -63,6 +66,8 @@ export interface LayoutResult {
   readonly energy: Span;
   readonly share: Shares;
   readonly balance: Balance | null;
+  /** The same with no balancing resistors, over the whole hold; null for one in series. */
+  readonly withoutBalance: WithoutBalance | null;
   readonly bleed: { readonly seconds: number | null; readonly toVoltage: number };
   readonly cost: Cost | null;
   /** m^3 in square packing without gaps; kg; null when sizes are unknown. Capacitors only. */
@@ -81,6 +86,8 @@ export interface RefusedPart {
   readonly reason: string;
   readonly value: number | null;
   readonly limit: number | null;
+  /** Where no balancing resistor does: what would mend it at the least number in series. */
+  readonly mends?: BalanceMends | null;
 }
 
 /** One change of the brief or the stock that, alone, would make something fit. */
@@ -104,6 +111,8 @@ export interface PlanResult {
   readonly changes: readonly Change[];
   /** With the statistical basis: the best layout of the worst case, to say what it would have cost; null when none fits. */
   readonly worstCase?: LayoutResult | null;
+  /** What eats the margin of the best layout and what tightening it saves; null when nothing fits or nothing can be told. */
+  readonly improve?: Improve | null;
   readonly notes: readonly string[];
 }
 
