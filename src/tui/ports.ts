@@ -17,6 +17,8 @@ export type SaveAnswer =
 
 export interface PlanRequest {
   readonly rank: Ranking;
+  /** Most layouts worked out in full for the list. */
+  readonly most: number;
   /** List only the layouts that no other beats in everything. */
   readonly frontOnly: boolean;
   /** Leave out the search for least changes: asked at every key, with the whole answer asked for when the keys rest. */
