@@ -5,8 +5,10 @@ import { homedir } from "node:os";
 import { join } from "node:path";
 import { fileURLToPath } from "node:url";
 import { bugText } from "./cli/bug.ts";
-import { EXIT, filesOn, type Ports, textWidth } from "./cli/index.ts";
+import { EXIT } from "./cli/exit.ts";
+import { filesOn, writeNow } from "./cli/files.ts";
 import { outputTrouble } from "./cli/output.ts";
+import { type Ports, textWidth } from "./cli/ports.ts";
 import { VERSION } from "./cli/version.ts";
 import { type ScreenFlags, screenFlags } from "./tui/screenFlags.ts";
 
@@ -23,50 +25,52 @@ function portsOfProcess(): Ports {
   };
 }
 
-/** Where the screens keep brief and pins between runs. */
-const sessionFile = (): string => process.env.JOULEWRIGHT_SESSION || join(homedir(), ".joulewright-screens.json");
+/** What the screens begin with: the catalogues and brief asked for, else the demo's. */
+async function screenInput(flags: ScreenFlags, ports: Ports) {
+  const { demoStock } = await import("./cli/demo.ts");
+  if (flags.catalog.length === 0) return demoStock(ports);
+  const { readStock } = await import("./cli/stock.ts");
+  const stock = readStock({ catalog: flags.catalog, resistors: flags.resistors ?? undefined }, ports.files);
+  return stock.ok ? { ok: true as const, value: { ...stock.value, brief: {} as unknown } } : stock;
+}
 
-/** The screens, on the catalogues asked for or those that come with the program. Loaded only here: no command waits for them. */
+/** The screens; brief and pins are kept in the home folder. */
 async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
-  const demo = flags.catalog.length === 0;
-  const [{ readStock }, { DEMO_CATALOGS }, { tell }, { startScreens }] = await Promise.all([
-    import("./cli/stock.ts"),
-    import("./cli/demo.ts"),
-    import("./cli/tell.ts"),
-    import("./tui/index.ts"),
-  ]);
-  const shipped = (name: string): string => join(ports.catalogs, name);
-  const catalog = demo ? DEMO_CATALOGS.map(shipped) : flags.catalog;
-  const resistors = flags.resistors ?? (demo ? shipped("resistors.csv") : undefined);
-  const stock = readStock({ catalog, resistors }, ports.files);
-  const briefPath = flags.brief ?? shipped("demo-brief.json");
-  const brief = ports.files.read(briefPath);
-  if (!stock.ok || !brief.ok) {
-    return tell(
-      ports,
-      [stock, brief].flatMap((read) => (read.ok ? [] : read.refusals)),
-      false,
-    );
+  const { tell } = await import("./cli/tell.ts");
+  const input = await screenInput(flags, ports);
+  if (!input.ok) return tell(ports, input.refusals);
+  const { parts, families, sources } = input.value;
+  let { brief } = input.value;
+  if (flags.brief !== null) {
+    const { readJson } = await import("./cli/jsonText.ts");
+    const text = ports.files.read(flags.brief);
+    const json = text.ok ? readJson(text.value, flags.brief) : text;
+    if (!json.ok) return tell(ports, json.refusals);
+    brief = json.value.value;
   }
-  const json = (await import("./cli/jsonText.ts")).readJson(brief.value, briefPath);
-  if (!json.ok) return tell(ports, json.refusals, false);
-  const { parts, families, sources } = stock.value;
+  const demo = flags.catalog.length === 0;
   const faults = sources.reduce((sum, source) => sum + source.faults.length, 0);
+  const { startScreens } = await import("./tui/index.ts");
   return startScreens({
     parts,
     families,
-    stock: { name: catalog.join(", "), parts: parts.length, faults, note: demo ? "invented" : "" },
-    brief: json.value.value,
+    stock: {
+      name: demo ? "demo catalogues" : flags.catalog.join(", "),
+      parts: parts.length,
+      faults,
+      note: demo ? "invented parts" : "",
+    },
+    brief,
+    briefFirst: flags.brief !== null,
     files: ports.files,
-    sessionFile: sessionFile(),
+    sessionFile: process.env.JOULEWRIGHT_SESSION ?? join(homedir(), ".joulewright.json"),
     terminal: {
+      complain: (line) => ports.err(`${line}\n`),
       stdin: process.stdin,
       stdout: process.stdout,
-      // A terminal is written to at once on POSIX; elsewhere the process ends by itself, after all is written.
-      writeSync: (text) => void process.stdout.write(text),
+      writeSync: writeNow,
       process,
       env: process.env,
-      complain: (line) => ports.err(`${line}\n`),
       ...(flags.ascii ? { ascii: true } : {}),
     },
   });

@@ -51,6 +51,8 @@ export interface ScreenPorts {
   readonly stock: StockFacts;
   /** The brief to start with when none was saved: text by key. */
   readonly brief: Readonly<Record<string, string>>;
+  /** The brief was asked for now, so that it holds and not the one saved last time. */
+  readonly briefFirst: boolean;
   /** What else the brief says, which the form has no field for; kept and planned with. */
   readonly extra: Readonly<Record<string, unknown>>;
   /** The text last given to `saveSession`, or null. */
