@@ -60,6 +60,12 @@ export const BRIEF_FLAGS: readonly BriefFlag[] = [
   { flag: "--load-resistance", argument: "<resistance>", key: "load.resistance", help: "resistance of the load" },
   { flag: "--load-inductance", argument: "<inductance>", key: "load.inductance", help: "inductance of the load" },
   { flag: "--rate", argument: "<rate>", key: "rate", help: 'shots, "0.1 Hz"' },
+  {
+    flag: "--dump-resistance",
+    argument: "<resistance>",
+    key: "dumpResistance",
+    help: "resistor that empties the bank; sets the clamp diodes' surge",
+  },
   { flag: "--ambient", argument: "<temperature>", key: "ambient", help: 'air around the bank, "30 degC"' },
 ];
 

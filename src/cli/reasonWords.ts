@@ -2,7 +2,7 @@
 
 import { visible } from "../order/index.ts";
 import { type Dimension, formatQuantity } from "../quantity/index.ts";
-import type { RefusedPart } from "../search/index.ts";
+import type { BalanceMends, RefusedPart } from "../search/index.ts";
 
 interface Reason {
   /** `{value}` and `{limit}` stand for the figures. */
@@ -76,4 +76,14 @@ export function reasonWords({ reason, value, limit }: Omit<RefusedPart, "part">,
   };
   const pattern = value === null || limit === null || known.words === "" ? known.plain : known.words;
   return pattern.replace("{value}", show(value, "up")).replace("{limit}", show(limit, "down"));
+}
+
+/** What would let a balancing resistor do, any one of them. */
+export function mendsWords({ series, tolerance, voltage }: BalanceMends): string {
+  const ways = [
+    series === null ? null : `${series} in series`,
+    tolerance === null ? null : `resistors of ${formatQuantity(tolerance, "fraction")} or tighter`,
+    voltage === null ? null : `at most ${formatQuantity(voltage, "voltage", { rounding: "down" })} of charge`,
+  ].filter((way) => way !== null);
+  return ways.length === 0 ? "Nothing that was tried mends it" : `Any one mends it: ${ways.join("; ")}`;
 }

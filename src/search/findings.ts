@@ -139,7 +139,7 @@ function holdingCourse({ result, brief, corners }: Cornered): readonly Finding[]
   const worst = corners.holding;
   if (brief.hold === Number.POSITIVE_INFINITY || worst === null || charging === null || holding === null) return [];
   if (worst.voltage <= Math.max(charging, holding) * (1 + FIT)) return [];
-  const at = formatQuantity(worst.seconds, "time", { digits: 3 });
+  const at = formatQuantity(worst.hold, "time", { digits: 3 });
   const note = `Worst unit at any moment of the hold, ${at} into it: ${worst.words}.`;
   const draft = { id: "holding-course", state: "holding", value: worst.voltage, limit, unit: "V" } as const;
   return [atMost({ ...draft, source: "methods-derived", note })];

@@ -24,8 +24,8 @@ export interface CornerFact {
 /** null: not assessed, because the tolerance or the leakage is unknown, or one in series. */
 export interface BankCorners {
   readonly charging: CornerFact | null;
-  /** Highest voltage at any moment from the end of the charge to the end of the hold; `seconds` into it, Infinity for the endless end. */
-  readonly holding: (CornerFact & { readonly seconds: number }) | null;
+  /** Highest voltage at any moment from the end of the charge to the end of the hold; `hold` is s into it, Infinity for its endless end. */
+  readonly holding: (CornerFact & { readonly hold: number }) | null;
   /** Most reverse (below zero) after a dump from equal sharing, and after the hold's own unequal sharing where that is worse. */
   readonly dumped: CornerFact | null;
   readonly dumpedFromHold: CornerFact | null;
@@ -85,7 +85,7 @@ function holdingCorner(bank: RestingBank): BankCorners["holding"] {
     endless && worst.seconds > 0
       ? holdingCorners(pairOf(bank, "leakage and resistors"), given.V).highest.words
       : holdCornerWords(given, worst);
-  return { voltage: worst.voltage, seconds: worst.seconds, words };
+  return { voltage: worst.voltage, hold: worst.seconds, words };
 }
 
 /** Only an endless hold with something that conducts has an end that is known whatever came before. */
