@@ -9,9 +9,9 @@ import { wrap } from "./wrap.ts";
 const DIMENSIONS: Readonly<Record<string, Dimension>> = { A: "current", ohm: "resistance", "1": "fraction" };
 
 function triedWords({ tightened }: Improvement): string {
-  if (tightened === null) return "nothing to tighten";
-  const { quantity, to, unit } = tightened;
-  return `${quantity}: ${formatQuantity(to, DIMENSIONS[unit] ?? "count")}`;
+  if (tightened === null) return "nothing";
+  const { to, unit } = tightened;
+  return `to ${formatQuantity(to, DIMENSIONS[unit] ?? "count", { digits: 3 })}`;
 }
 
 function savedWords({ tightened, found, saves }: Improvement, currency: string | null): string {
@@ -35,7 +35,7 @@ export function improveText(improve: Improve, currency: string | null, width: nu
         cell: ({ share }) => (share === null ? "" : formatQuantity(share, "fraction", { digits: 3 })),
         side: "right",
       },
-      { heading: "tried", cell: triedWords, rank: 1 },
+      { heading: "tried", cell: triedWords, side: "right" },
       { heading: "saves", cell: (one) => savedWords(one, currency) },
     ],
     improve.causes,

@@ -33,6 +33,11 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     plain: "no balancing resistor keeps the worst unit within {limit}",
     dimension: "voltage",
   },
+  risk: {
+    words: "",
+    plain: "no number in series that was tried keeps the chance of an excess within {limit}",
+    dimension: "fraction",
+  },
   "volume-limit": {
     words: "takes {value} at least, limit {limit}",
     plain: "takes more room than the limit",

@@ -6,6 +6,7 @@ import { formatQuantity } from "../../quantity/index.ts";
 import { askedText } from "../askedText.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, type Checked, checkedBank } from "../checked.ts";
+import { cornerLines } from "../cornerLines.ts";
 import { courseText } from "../courseText.ts";
 import { EXIT } from "../exit.ts";
 import { faultsText } from "../faultsText.ts";
@@ -80,7 +81,7 @@ function checkJson(checked: Checked, witness: Witness | null): string {
 }
 
 function checkText(checked: Checked, width: number, witness: Witness | null): string {
-  const { course, clamp, improve } = restFacts(checked);
+  const { course, clamp, corners, improve } = restFacts(checked);
   const { result, unit, settings, stock, notes } = checked;
   const left = leftOf(checked);
   const volts = (x: number | null): string => formatQuantity(x, "voltage");
@@ -101,6 +102,7 @@ function checkText(checked: Checked, width: number, witness: Witness | null): st
     `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width)}`,
     `Found\n${layoutText(result, unit, width)}`,
     [
+      ...cornerLines(corners, width),
       hanging("left after a dump", kept, width),
       ...(clamp === null ? [] : [hanging("clamp diodes", clampWords(clamp), width)]),
       ...(result.risk === undefined ? [] : [hanging("chance of excess", riskWords(result, witness), width)]),

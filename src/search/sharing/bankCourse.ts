@@ -38,7 +38,7 @@ export interface BankCourse {
 }
 
 /** Parts of a phase's length at which it is told: dense where it bends. */
-const HOLD = [0, 0.01, 0.03, 0.08, 0.15, 0.25, 0.4, 0.6, 0.8, 1];
+const HOLD = [0.01, 0.03, 0.08, 0.15, 0.25, 0.4, 0.6, 0.8, 1];
 const DUMP = [0.1, 0.2, 0.4, 0.7, 1];
 const REST = [0.05, 0.2, 0.5, 1];
 /** Time constants after which an exponential has settled for any eye: e^-8 = 0.03 %. */
@@ -77,7 +77,8 @@ export function bankCourse(bank: RestingBank): BankCourse | null {
     begun += phase.seconds;
   }
   return {
-    corner: holdCornerWords(given, worst),
+    // All of the corner is named, also when the charge alone is the worst of it.
+    corner: holdCornerWords(given, { ...worst, seconds: Number.POSITIVE_INFINITY }),
     stages: lumps.map(({ count }, i) => ({ words: kindWords(i, lumps, given, worst.lowOthers), count })),
     phases: course.phases.map(({ name, seconds }) => ({ name, seconds })),
     endlessHold,
