@@ -9,7 +9,7 @@ export function cornerLines(
   { charging, holding, dumped, dumpedFromHold }: BankCorners,
   width: number,
 ): readonly string[] {
-  const volts = (x: number): string => formatQuantity(x, "voltage", { rounding: "up" });
+  const volts = (x: number): string => formatQuantity(x, "voltage", { rounding: x < 0 ? "down" : "up" });
   const line = (label: string, fact: CornerFact | null, when = ""): readonly string[] =>
     fact === null ? [] : [hanging(label, `${volts(fact.voltage)}${when}: ${fact.words}`, width)];
   const when =

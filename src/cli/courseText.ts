@@ -43,7 +43,7 @@ export function courseText(course: BankCourse, width: number): string {
     `Corner: ${corner}.`,
     `Highest: ${up(peak.voltage)} on ${name(peak.kind)}, in ${peak.phase}, after ${show(peak.seconds, "time")}.`,
     lowest.voltage < 0
-      ? `Lowest: ${show(lowest.voltage, "voltage")}, reversed, on ${name(lowest.kind)}, in ${lowest.phase}, with no clamp fitted.`
+      ? `Lowest in this corner: ${show(lowest.voltage, "voltage")}, reversed, on ${name(lowest.kind)}, in ${lowest.phase}, with no clamp fitted.`
       : "",
     endlessHold ? "The hold is for ever: it is shown until it has settled." : "",
     dumpResistance === null
