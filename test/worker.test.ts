@@ -15,7 +15,7 @@ afterAll(() => rmSync(folder, { recursive: true, force: true }));
 const ARGV = [
   "check",
   ...["--energy", "2 kJ", "--voltage", "2.2 kV", "--ripple", "100 %", "--basis", "statistical"],
-  ...["--part", "lab-pf-330-360", "--series", "7", "--parallel", "6", "--ties", "cross-tied", "--derating", "1"],
+  ...["--part", "lab-pf-330-360", "--series", "7", "--parallel", "6", "--ties", "strings", "--derating", "0.95"],
   ...["--catalog", at("catalogs/electrolytic.csv"), "--seed", "7"],
 ];
 const main = (): string => join(folder, "dist/main.js");

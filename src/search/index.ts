@@ -3,10 +3,22 @@ export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";
 export { planCurrency, pricedIn } from "./currency.ts";
 export { faultBankOf, faultsOf } from "./faults.ts";
-export { type Found, type Improve, type ImproveInput, type Improvement, improve } from "./improve.ts";
+export { type ImproveInput, improve } from "./improve.ts";
 export { type PlanInput, plan } from "./plan.ts";
 export { RANKINGS, type Ranking } from "./rank.ts";
-export type { Balance, Change, Cost, LayoutResult, PlanResult, RefusedPart, Shares, Span } from "./result.ts";
+export type {
+  Balance,
+  Change,
+  Cost,
+  Found,
+  Improve,
+  Improvement,
+  LayoutResult,
+  PlanResult,
+  RefusedPart,
+  Shares,
+  Span,
+} from "./result.ts";
 export { type Risk, type RiskCase, riskOf, tailCaseOf } from "./risk.ts";
 export { type BankCourse, bankCourse, type CourseInstant, type CoursePeak } from "./sharing/bankCourse.ts";
 export { type BankClamp, clampOf } from "./sharing/clamp.ts";

@@ -7,7 +7,7 @@ const sweep = readFileSync(at("src/search/sweep.ts"), "utf8");
 
 describe("reasonWords(reason, currency)", () => {
   test("every reason of the search has words, and no other", () => {
-    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown))|stock|balance)"/g);
+    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown))|stock|balance|risk)"/g);
     const used = new Set([...found].map((match) => match[1] as string));
     expect(used.size).toBeGreaterThan(7);
     expect([...used].sort()).toEqual(Object.keys(REASONS).sort());
