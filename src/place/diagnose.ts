@@ -2,7 +2,7 @@
 import { accepted, type Finding, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { type MeterModel, observed, type PriorDoubt, type ReadingRow } from "./diagnoseEvidence.ts";
 import { type FaultKind, faultyCourse, type Hypothesis } from "./diagnoseFaults.ts";
-import { chargerOn, type Course, type StageModel } from "./diagnoseModel.ts";
+import { type Course, chargerOn, type StageModel } from "./diagnoseModel.ts";
 import { type Explanation, type NextMeasurement, nextMeasurement } from "./diagnoseNext.ts";
 import { limitFindings, STOP_ACTIONS, sumFindings } from "./diagnoseSafety.ts";
 import { type Weighed, weigh } from "./diagnoseWeigh.ts";
@@ -64,7 +64,12 @@ const LISTED = 0.01;
 const COUNTS = 0.02;
 const DEFAULT_DOUBT: PriorDoubt = { capacitance: 0.003, leakage: 0.3, resistance: 0.05, bank: 0.02 };
 
-const fault = (code: string, read: string, want: string): Refusal => ({ code, place: { field: "readings" }, read, want });
+const fault = (code: string, read: string, want: string): Refusal => ({
+  code,
+  place: { field: "readings" },
+  read,
+  want,
+});
 
 function check({ stages, rows, meter }: DiagnosisRequest): Refusal[] {
   const faults: Refusal[] = [];
@@ -72,10 +77,18 @@ function check({ stages, rows, meter }: DiagnosisRequest): Refusal[] {
   if (observed(rows).length === 0) faults.push(fault("commission.no-readings", "no readings", "1 or more"));
   for (const [k, row] of rows.entries()) {
     if (row.volts.length !== stages.length) {
-      faults.push(fault("commission.count", `row ${k + 1}: ${row.volts.length} readings`, `${stages.length}, blank where not read`));
+      faults.push(
+        fault(
+          "commission.count",
+          `row ${k + 1}: ${row.volts.length} readings`,
+          `${stages.length}, blank where not read`,
+        ),
+      );
     }
     if (!(row.seconds >= 0) || !(row.bank > 0) || observed([row]).some((v) => !Number.isFinite(v))) {
-      faults.push(fault("commission.number", `row ${k + 1}`, "finite readings, a time of 0 or more, a bank voltage above 0"));
+      faults.push(
+        fault("commission.number", `row ${k + 1}`, "finite readings, a time of 0 or more, a bank voltage above 0"),
+      );
     }
   }
   if (!(meter.relative > 0 || meter.absolute > 0)) {

@@ -97,7 +97,9 @@ export function nextMeasurement(likely: readonly Explanation[], question: NextQu
   const { hypothesis } = first.hypothesis === null && second !== undefined ? second : first;
   if (hypothesis === null) {
     const slow = slowestTime(question.stages);
-    return Number.isFinite(slow) && question.latest < 0.3 * slow ? { action: "read after a hold", seconds: slow } : null;
+    return Number.isFinite(slow) && question.latest < 0.3 * slow
+      ? { action: "read after a hold", seconds: slow }
+      : null;
   }
   const measure = DEAD[hypothesis.kind];
   if (measure === null) return { action: "change the leads and read again", position: hypothesis.position };

@@ -101,20 +101,27 @@ export function weigh(question: Question, course: Course, polarised: boolean): W
   const soundResiduals = residuals(predicted(course, stages, rows));
   const square = (lower: Lower, r: readonly number[]): number => whiten(lower, r).reduce((s, z) => s + z * z, 0);
 
+  // The grid of sizes is gone through up to three times for one fault: what would be read is kept.
+  const kept = new Map<Hypothesis, Map<number, readonly number[]>>(list.map((hypothesis) => [hypothesis, new Map()]));
+  const misfit = (hypothesis: Hypothesis, size: number): readonly number[] => {
+    const mine = kept.get(hypothesis)!;
+    const known = mine.get(size) ?? residuals(predicted(faultyCourse(course, hypothesis, size), stages, rows));
+    mine.set(size, known);
+    return known;
+  };
+
   const weighOne = (hypothesis: Hypothesis, lower: Lower, peakOf: typeof finePeak): Weighed => {
-    const log: LogLikelihood = (size) =>
-      logDensity(lower, residuals(predicted(faultyCourse(course, hypothesis, size), stages, rows)));
+    const log: LogLikelihood = (size) => logDensity(lower, misfit(hypothesis, size));
     const { sizes } = hypothesis;
     const single = sizes.kind === "one" ? sizes.at : 1;
     const { size, integral } =
       sizes.kind === "range" ? peakOf(log, sizes.from, sizes.to) : { size: single, integral: log(single) };
-    const best = residuals(predicted(faultyCourse(course, hypothesis, size), stages, rows));
     const freedom = Math.max(1, y.length - (sizes.kind === "range" ? 1 : 0));
     return {
       hypothesis,
       size,
       weight: Math.log(hypothesis.odds) + integral,
-      excess: excess(square(lower, best), freedom),
+      excess: excess(square(lower, misfit(hypothesis, size)), freedom),
     };
   };
 
