@@ -46,7 +46,7 @@ const code = (file: string): string => text(file).replace(/\/\*[\s\S]*?\*\/|(^|\
 const layerOf = (file: string): string => (file.includes("/") ? file.slice(0, file.indexOf("/")) : "main");
 
 function importsOf(file: string): readonly string[] {
-  const found = code(file).matchAll(/(?:from|import)\s*\(?\s*"([^"]+)"/g);
+  const found = code(file).matchAll(/(?<!["'.])\b(?:from|import)\s*\(?\s*"([^"]+)"/g);
   return [...found].map((m) => m[1] ?? "");
 }
 

@@ -7,7 +7,7 @@
 // | V_1    | worst   | V    | worst holding voltage at the chosen R |
 //
 // Each element is the largest preferred value at most R_max/k; V_1/k <= working voltage, V_1^2/(R(1 - q))/k <= derated power.
-// V_1 rises with R, so V_1 at the least R that can come out bounds the volts and watts of every k from below: the search starts there. Source: [joulewright-design] section 3.
+// The search for k starts at the least that the volts and watts of any R that can come out allow. Source: [joulewright-design] section 3.
 
 import type { ResistorFamily } from "../catalog/index.ts";
 import { lastAtMost } from "../quantity/index.ts";
@@ -15,7 +15,7 @@ import { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.
 import { holdingLine, largestBalance } from "./share.ts";
 
 /** More elements than this in one position is no balancing resistor that anyone builds. */
-const MOST_ELEMENTS = 400;
+const MOST_ELEMENTS = 100_000;
 
 /** A chosen resistor of one position. */
 export interface Choice {
@@ -43,22 +43,30 @@ export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorF
   const { values, voltage, lowest, highest, tolerance, step } = family;
   if (!(most > 0) || most < lowest * (1 - 1e-9)) return false;
   const watts = family.power * family.derating * (1 - tolerance);
-  // Whatever k is, R lies at most one step of the series below the smaller of R_max and one largest element.
+  // Whatever k is, R lies between these two: at most one step of the series below the smaller of R_max and one largest element.
   const least = Math.min(most, highest) / step;
-  const floor = straight ? base + slope * least : holdWorst(bank, least);
-  const start = Math.max(floor / voltage, (floor * floor) / (Math.min(most, highest * MOST_ELEMENTS) * watts), 1);
+  const reach = Math.min(most, highest * MOST_ELEMENTS);
+  const even = bank.voltage / bank.series;
+  const floor = straight ? Math.min(base + slope * least, bank.voltage) : even;
+  const top = straight ? Math.min(base + slope * reach, bank.voltage) : even;
+  // V_1^2/R is least at an end of that range, or at R = base/slope, where it is 4 base slope.
+  let power = Math.min((floor * floor) / least, (top * top) / reach);
+  if (straight && slope * least < base && base < slope * reach) power = Math.min(power, 4 * base * slope);
+  const start = Math.max(floor / voltage, power / watts, 1);
   for (let k = Math.ceil(start * (1 - 1e-9)); k <= MOST_ELEMENTS; k++) {
     const index = lastAtMost(values, Math.min(most / k, highest));
     if (index < 0) return false;
     const element = values[index] as number;
     const resistance = element * k;
-    const worst = straight ? base + slope * resistance : holdWorst(bank, resistance);
+    const worst = straight ? Math.min(base + slope * resistance, bank.voltage) : holdWorst(bank, resistance);
+    // Within a finite hold a smaller R may divide worse than a larger one, when resistors are wider than units.
+    if (!straight && worst > limit * (1 + 1e-9)) continue;
     if (worst > voltage * k * (1 + 1e-9)) continue;
     if (worst * worst > watts * resistance * k * (1 + 1e-9)) continue;
     choice.resistance = resistance;
     choice.element = element;
     choice.elements = k;
-    choice.worst = Math.min(worst, bank.voltage);
+    choice.worst = worst;
     return true;
   }
   return false;

@@ -57,7 +57,8 @@ function holdingEnd({ voltage, series, sharing, spread, leak }: HoldingChain, re
  * Infinity when none is needed, 0 when none does.
  */
 export function largestBalanceForHold(bank: FiniteHold, limit: number, endless: number): number {
-  if (bank.hold === Number.POSITIVE_INFINITY) return endless;
+  // With a limit above all the volts no share is in question; the endless rule still sets a resistor that bleeds.
+  if (bank.hold === Number.POSITIVE_INFINITY || limit >= bank.voltage) return endless;
   const safe = (resistance: number): boolean => holdWorst(bank, resistance) <= limit * (1 + 1e-12);
   if (safe(Number.POSITIVE_INFINITY)) return Number.POSITIVE_INFINITY;
   let low = endless > 0 ? Math.log(endless) : Math.log(1e-6);

@@ -1,6 +1,23 @@
 // An arrangement at rest: its name, energy, shares and balancing resistors.
 export { type Choice, chooseBalance, elementPower } from "./balance.ts";
 export {
+  type Chain,
+  type ChainUnit,
+  chainCapacitance,
+  chargingShares,
+  crossTiedChain,
+  endOfHold,
+  leftAfterDump as leftOnStages,
+  type Stage,
+} from "./chain.ts";
+export { type ClampCase, type ClampDiode, clampDiode } from "./clampDiode.ts";
+export { type Corner, chargingCorners, dumpedCorners, holdingCorners } from "./corners.ts";
+export { type HoldCase, type HoldWorst, worstAtHold } from "./cornersHold.ts";
+export { holdCornerWords } from "./cornersHoldWords.ts";
+export { type StageRange, stageRange } from "./cornersRange.ts";
+export { type Course, courseOf, type Program } from "./course.ts";
+export { type Phase, phaseFrom } from "./coursePhase.ts";
+export {
   bankCapacitance,
   FIT,
   leastParallel,
@@ -11,6 +28,9 @@ export {
 } from "./energy.ts";
 export { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
 export { type Layout, layoutId, plainTies, shapeOf, type Ties, unitCount } from "./layout.ts";
+export { type Cause, type CauseShare, type MarginCase, type Margins, marginCauses } from "./margins.ts";
+export { type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";
+export { type Residual, residualAfterDump } from "./residual.ts";
 export {
   chargingLeast,
   chargingWorst,
@@ -20,3 +40,6 @@ export {
   largestBalance,
   leftAfterDump,
 } from "./share.ts";
+export { exceedRisk, type Tail } from "./tail.ts";
+export { riskBound } from "./tailBound.ts";
+export { LEAST_LOT, type TailCase, type UnitLaw } from "./tailLaw.ts";

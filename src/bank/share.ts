@@ -17,6 +17,7 @@
 // Holds for equal units within their tolerances, ideal switches. Sources: [joulewright-design] section 3; [methods-derived] 1.2, 1.4, 2.2.
 
 import type { Tolerance } from "../quantity/index.ts";
+import { FIT } from "./energy.ts";
 
 /** How much a unit leaks at worst; null is unknown. */
 export type Leak =
@@ -91,12 +92,12 @@ export function holdingLine({ voltage, series, sharing, spread, leak }: HoldingC
 export function largestBalance(chain: HoldingChain, limit: number): number {
   const { voltage, series, sharing, spread, leak } = chain;
   const [below, above] = [1 - spread, 1 + spread];
-  const room = limit * ((series - 1) * below + above) - voltage * above;
+  const reach = limit * ((series - 1) * below + above);
+  const room = reach - voltage * above;
+  const drawn = leak.kind === "current" ? (series - 1) * sharing * leak.amperes : 0;
+  if (leak.kind === "current" && drawn === 0) return room >= -FIT * reach ? Number.POSITIVE_INFINITY : 0;
   if (room <= 0) return 0;
-  if (leak.kind === "current") {
-    const drawn = (series - 1) * sharing * leak.amperes;
-    return drawn > 0 ? room / (below * above * drawn) : Number.POSITIVE_INFINITY;
-  }
+  if (leak.kind === "current") return room / (below * above * drawn);
   const pull = (voltage - limit) * sharing;
   return pull > 0 ? (room * leak.ohms) / (below * above * pull) : Number.POSITIVE_INFINITY;
 }

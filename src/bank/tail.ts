@@ -14,8 +14,9 @@
  * n P(one, and it is the highest). Strings: 1 - (1 - P(string))^p.
  * Two lattices, one twice as fine, give the extrapolated value and the error that is stated with it.
  * Units are independent. What a whole lot has in common (all 5 % high) divides out of every share.
- * Source: [methods-derived] 1.3; [Galambos1996] I.1, I.3 for the bounds of a union
+ * Source: [methods-derived] 1.3; [Galambos1996] I.1, I.3 for the bounds of a union (place from memory)
  */
+import { riskBound } from "./tailBound.ts";
 import { LEAST_LOT, lawRange, type TailCase } from "./tailLaw.ts";
 import { lotStages } from "./tailLot.ts";
 import { type Stages, singleRisk, smoothStages, tailWindows, type Windows } from "./tailStages.ts";
@@ -43,7 +44,8 @@ const ROUNDING = 1e-9;
 export function exceedRisk(given: TailCase): Tail {
   const strings = given.ties === "strings" ? given.p : 1;
   const one = chainRisk({ ...given, p: given.ties === "strings" ? 1 : given.p });
-  if (strings === 1 || one.exceed === 0 || one.exceed === 1) return one;
+  if (strings === 1 || one.exceed === 1) return one;
+  if (one.exceed === 0) return { ...one, error: strings * one.error };
   const all = (chance: number): number => -Math.expm1(strings * Math.log1p(-Math.min(chance, 1)));
   const exceed = all(one.exceed);
   const unionBound = strings * one.unionBound;
@@ -65,10 +67,21 @@ function chainRisk(given: TailCase): Tail {
   const span = tailWindows(given, kappa);
   if (span === null) return exactly(0);
   const { single, off, stages } = lotSingle(given, kappa) ?? smoothSingle(given, kappa, span);
+  // Far beyond any use, at about 1e-300 or in a corner of dozens of units, the sums vanish; the chance is then below this, not 0.
+  if (single === 0) return { exceed: 0, error: vanishing(stages, n), unionBound: 0, unionExcess: 0 };
   const sum = n * single;
+  // So far out that the masses are below the smallest number.
+  if (!(sum > 0)) return underflown(given);
   const joint = sum > RARE ? highestShare(stages, kappa, n) : pairShare(stages, kappa, n);
   const exceed = Math.min(1, sum * joint.kept);
   return { exceed, error: n * off + sum * joint.error, unionBound: sum, unionExcess: sum - exceed };
+}
+
+/** What the lattices cannot hold is bounded instead. */
+function underflown(given: TailCase): Tail {
+  const bound = riskBound(given);
+  if (!(bound < 1e-20)) throw new RangeError("the lattices of a tail lost its mass");
+  return { exceed: 0, error: bound, unionBound: bound, unionExcess: 0 };
 }
 
 interface Single {
@@ -100,6 +113,12 @@ function lotSingle(given: TailCase, kappa: number): Single | null {
     spread += mass * (stages.butOneBelow(value + blur) - stages.butOneBelow(value - blur));
   }
   return { single, off: spread / 2 + 1e-12 * single, stages };
+}
+
+/** Chance that every unit lies where an excess needs it, over all stages: an upper bound. */
+function vanishing({ victim, other }: Stages, n: number): number {
+  const all = (masses: Float64Array): number => masses.reduce((sum, mass) => sum + mass, 0);
+  return Math.max(Number.MIN_VALUE, n * all(victim.masses) * all(other.masses) ** (n - 1));
 }
 
 /** A chance spans decades, so it is its logarithm that goes as the square of the step. */

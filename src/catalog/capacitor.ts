@@ -82,11 +82,11 @@ const PLATE_COLUMNS: readonly Column[] = [
 
 /** The columns of a capacitor catalogue, with the range of each. */
 export const CAPACITOR_COLUMNS: readonly Column[] = [
-  { heading: "part", key: "part", type: text(120), required: true },
+  { heading: "part", key: "part", type: text(500), required: true },
   { heading: "maker", key: "maker", type: text() },
   { heading: "technology", key: "technology", type: text() },
   { heading: "polarised", also: ["polarized"], key: "polarised", type: { kind: "yes-no" } },
-  { heading: "capacitance", key: "capacitance", type: above("capacitance", 1e-13, 1e5) },
+  { heading: "capacitance", key: "capacitance", type: above("capacitance", 1e-13, 5e3) },
   { heading: "voltage", also: ["rated voltage", "working voltage"], key: "voltage", type: above("voltage", 0.1, 1e7) },
   { heading: "tolerance", key: "tolerance", type: { kind: "tolerance" } },
   { heading: "surge voltage", key: "surgeVoltage", type: above("voltage", 0.1, 1e7) },

@@ -16,7 +16,7 @@ import type { ColumnKind } from "./column.ts";
 export interface CellContext {
   /** Scale of a bare number, from the heading's unit; null when the heading has none. */
   readonly bare: Scale | null;
-  readonly decimalComma: boolean;
+  readonly decimalComma: boolean | "never";
   /** Currency of the row, for its prices. */
   readonly currency: string;
 }

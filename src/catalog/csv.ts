@@ -4,7 +4,7 @@
 // a record keeps its cells in order, a quoted newline stays in its cell, and a record with a broken quote is told and skipped, not thrown.
 // Long text is handed over in pieces that end between records, so that a million rows never stand in memory at once.
 
-import { type CsvError, parse } from "csv-parse/sync";
+import { parse } from "csv-parse/sync";
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
 
 export type Separator = "," | ";" | "\t";
@@ -14,10 +14,9 @@ export interface CsvSummary {
   readonly faults: readonly Refusal[];
 }
 
-/** The separator: the one of comma, semicolon and tab that stands most often in the first line, outside quotes. */
+/** The separator: the one of comma, semicolon and tab that stands most often in the first line with text, outside quotes. */
 export function separatorOf(text: string): Separator {
-  const end = text.search(/[\r\n]/);
-  const line = (end < 0 ? text : text.slice(0, end)).replace(/"[^"]*"/g, "");
+  const line = (/^.*\S.*$/m.exec(text)?.[0] ?? "").replace(/"[^"]*"/g, "");
   const count = (mark: string): number => line.split(mark).length - 1;
   const [tabs, semicolons, commas] = [count("\t"), count(";"), count(",")];
   if (tabs > 0 && tabs >= semicolons && tabs >= commas) return "\t";
@@ -82,27 +81,18 @@ interface PieceContext {
 }
 
 /** One piece; returns the line after it. */
-function readPiece(piece: string, { separator, line, take, faults }: PieceContext): number {
-  const broken: Refusal[] = [];
+function readPiece(piece: string, context: PieceContext): number {
+  const { separator, line, take } = context;
+  let broken = false;
   const records = parse(piece, {
+    ...OPTIONS,
     delimiter: separator,
-    relax_column_count: true,
-    skip_records_with_error: true,
-    trim: true,
-    info: false,
-    on_skip: (error: CsvError | undefined) => {
-      const at = Number((error as { lines?: number } | undefined)?.lines ?? 1);
-      broken.push({
-        code: "broken-quotes",
-        place: { line: line + at - 1 },
-        read: error?.code === "CSV_QUOTE_NOT_CLOSED" ? "a quote that is never closed" : "a stray quote",
-        want: 'quotes around the whole cell, and two quotes ("") for one inside it',
-      });
+    on_skip: () => {
+      broken = true;
       return undefined;
     },
   });
-  faults.push(...broken);
-  if (broken.length > 0) return readCounted(piece, { separator, line, take, faults });
+  if (broken) return readByLine(piece, context);
   let at = line;
   for (const cells of records) {
     if (cells.length > 1 || cells[0] !== "") take(cells, at);
@@ -111,22 +101,41 @@ function readPiece(piece: string, { separator, line, take, faults }: PieceContex
   return at;
 }
 
-/** The slower way for a piece with broken records, whose lines only the library can count. */
-function readCounted(piece: string, { separator, line, take }: PieceContext): number {
-  let last = line;
-  parse(piece, {
-    delimiter: separator,
-    relax_column_count: true,
-    skip_empty_lines: true,
-    skip_records_with_error: true,
-    trim: true,
-    on_record: (cells: string[], info: { readonly lines: number }) => {
-      last = line + info.lines - 1;
-      take(cells, last - breaksIn(cells));
-      return null;
-    },
-  });
-  return Math.max(last, line + piece.split("\n").length - 1);
+const OPTIONS = { relax_column_count: true, skip_records_with_error: true, trim: true } as const;
+/** Lines that one cell may run over; a quote left open longer is taken for a slip. */
+const LONGEST_CELL = 50;
+
+/** The careful way for a piece with a broken quote: record by record, so that the fault costs its own line and no other. */
+function readByLine(piece: string, { separator, line, take, faults }: PieceContext): number {
+  const lines = piece.split(/\r\n|\n|\r/);
+  if (lines.at(-1) === "") lines.pop();
+  const open = (text: string): boolean => text.split('"').length % 2 === 0;
+  for (let i = 0; i < lines.length; i++) {
+    let record = lines[i] as string;
+    let last = i;
+    while (open(record) && last + 1 < lines.length && last - i < LONGEST_CELL) record += `\n${lines[++last]}`;
+    const closed = !open(record);
+    let stray = false;
+    const [cells] = closed
+      ? parse(record, {
+          ...OPTIONS,
+          delimiter: separator,
+          on_skip: () => {
+            stray = true;
+            return undefined;
+          },
+        })
+      : [];
+    if (!closed || stray) {
+      const read = closed ? "a stray quote" : "a quote that is never closed";
+      const want = 'quotes around the whole cell, and two quotes ("") for one inside it';
+      faults.push({ code: "broken-quotes", place: { line: line + i }, read, want });
+      continue;
+    }
+    if (cells !== undefined && (cells.length > 1 || cells[0] !== "")) take(cells, line + i);
+    i = last;
+  }
+  return line + lines.length;
 }
 
 function breaksIn(cells: readonly string[]): number {

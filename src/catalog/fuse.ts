@@ -35,9 +35,19 @@ export interface FuseCatalogue {
 /** Reads a fuse catalogue; blank ratings stay unknown. */
 export function readFuses(source: string, file: string): Read<FuseCatalogue> {
   const fuses: Fuse[] = [];
+  const faults: Refusal[] = [];
   const table = readTable(source, FUSE_COLUMNS, file, (row) => {
-    fuses.push(record(FUSE_COLUMNS, row) as unknown as Fuse);
+    const fuse = record(FUSE_COLUMNS, row) as unknown as Fuse;
+    if (fuses.some((known) => known.fuse === fuse.fuse)) {
+      const read = JSON.stringify(fuse.fuse);
+      faults.push({
+        code: "duplicate-part",
+        place: { file, line: row.line },
+        read,
+        want: "a name of its own for each row",
+      });
+    } else fuses.push(fuse);
   });
   if (!table.ok) return table;
-  return accepted({ fuses, faults: table.value.faults, notes: table.value.notes });
+  return accepted({ fuses, faults: [...table.value.faults, ...faults], notes: table.value.notes });
 }

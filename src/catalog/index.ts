@@ -10,7 +10,7 @@ export type { PriceBreak } from "./cell.ts";
 export type { Column } from "./column.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
-export { cheapest, isPriced, leastBuyable, type Purchase, purchase, unitPriceAt } from "./purchase.ts";
+export { cheapest, isPriced, leastBuyable, type Purchase, purchase, toBuy, unitPriceAt } from "./purchase.ts";
 export { type Catalogue, readCapacitors } from "./readCapacitors.ts";
 export {
   DEFAULT_FAMILY,

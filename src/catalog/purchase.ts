@@ -35,14 +35,18 @@ const inPacks = (quantity: number, pack: number): number => Math.ceil(quantity /
 export const isPriced = (terms: PurchaseTerms): boolean =>
   terms.price !== undefined || (terms.priceBreaks?.length ?? 0) > 0;
 
+/** What must be bought to have `needed`, packs and minimum order included, whether or not it can be had; zero when the hand suffices. */
+export function toBuy(terms: PurchaseTerms, needed: number): number {
+  const short = needed - (terms.onHand ?? 0);
+  return short <= 0 ? 0 : inPacks(Math.max(short, terms.minimumOrder ?? 1), terms.pack ?? 1);
+}
+
 /**
  * Least quantity that can be bought to have `needed`, zero when the hand suffices; null when not enough can be had.
  */
 export function leastBuyable(terms: PurchaseTerms, needed: number): number | null {
-  const short = needed - (terms.onHand ?? 0);
-  if (short <= 0) return 0;
-  const least = inPacks(Math.max(short, terms.minimumOrder ?? 1), terms.pack ?? 1);
-  return terms.available === undefined || least <= terms.available ? least : null;
+  const least = toBuy(terms, needed);
+  return least === 0 || terms.available === undefined || least <= terms.available ? least : null;
 }
 
 /**

@@ -3,6 +3,7 @@
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { CAPACITOR_COLUMNS, type Capacitor, type ValueState } from "./capacitor.ts";
 import { plateCapacitor } from "./plate.ts";
+import { isPriced } from "./purchase.ts";
 import { assumedLeakage, namedStates, polarityOf, RULES } from "./states.ts";
 import { MOST_FAULTS, positions, type Row, readTable } from "./table.ts";
 
@@ -21,6 +22,7 @@ export function readCapacitors(text: string, file: string): Read<Catalogue> {
   const faults: Refusal[] = [];
   const notes: Refusal[] = [];
   const seen = new Map<string, number>();
+  let unnamedPrice = null as number | null;
   const table = readTable(text, CAPACITOR_COLUMNS, file, (row) => {
     const read = toCapacitor(row, file, notes);
     if (!read.ok) {
@@ -40,8 +42,18 @@ export function readCapacitors(text: string, file: string): Read<Catalogue> {
     }
     seen.set(read.value.part, row.line);
     parts.push(read.value);
+    if (unnamedPrice === null && read.value.currency === undefined && isPriced(read.value)) unnamedPrice = row.line;
   });
   if (!table.ok) return table;
+  if (unnamedPrice !== null) {
+    const want = "a code of ISO 4217 such as EUR; a price without one is taken in the currency of the plan";
+    notes.push({
+      code: "missing-value",
+      place: { file, line: unnamedPrice, field: "currency" },
+      read: "a price without a currency",
+      want,
+    });
+  }
   const all = [...table.value.faults, ...faults].sort((a, b) => (a.place.line ?? 1e12) - (b.place.line ?? 1e12));
   return accepted({
     parts,
@@ -126,6 +138,11 @@ function toCapacitor(row: Row, file: string, notes: Refusal[]): Read<Capacitor> 
       const want = "a heading of this catalogue in `measured` or `assumed`";
       notes.push({ code: "unknown-column-name", place, read: JSON.stringify(name), want });
     }
+  }
+  if (unit.capacitance !== undefined && (unit.plateArea !== undefined || unit.gap !== undefined)) {
+    const want = "either a capacitance or plates with their gap; the other cells blank";
+    const at = { ...place, field: "capacitance" };
+    return refused({ code: "contradiction", place: at, read: "a capacitance and plates in one row", want });
   }
   if (unit.plateArea !== undefined || unit.gap !== undefined || unit.plates !== undefined) {
     const plate = plateCapacitor(unit, place);

@@ -12,7 +12,7 @@ import {
 } from "../quantity/index.ts";
 import { readCell } from "./cell.ts";
 import type { Column } from "./column.ts";
-import { readRecords } from "./csv.ts";
+import { readRecords, separatorOf } from "./csv.ts";
 
 export interface Row {
   readonly line: number;
@@ -51,7 +51,9 @@ interface BoundColumn {
 
 interface BoundTable {
   readonly bound: readonly BoundColumn[];
-  readonly decimalComma: boolean;
+  readonly decimalComma: boolean | "never";
+  /** How many headings the file has. */
+  readonly headings: number;
   /** How many columns were asked for. */
   readonly width: number;
 }
@@ -77,7 +79,8 @@ export function readTable(
   let bound: readonly BoundColumn[] | null = null;
   let fatal: readonly Refusal[] | null = null;
   let rowCount = 0;
-  let decimalComma = false;
+  let headings = 0;
+  const decimalComma = separatorOf(text) === "," ? "never" : DECIMAL_COMMA.test(text);
   const fault = (refusal: Refusal, place: Place): void => {
     if (faults.length < MOST_FAULTS) faults.push({ ...refusal, place: { file, ...place } });
     else lost++;
@@ -85,18 +88,18 @@ export function readTable(
   const separated = readRecords(text, (cells, line) => {
     if (fatal !== null) return;
     if (bound === null) {
-      const headings = bindHeadings(cells, columns, { file, line });
-      if (!headings.ok) {
-        fatal = headings.refusals;
+      const read = bindHeadings(cells, columns, { file, line });
+      if (!read.ok) {
+        fatal = read.refusals;
         return;
       }
-      bound = headings.value.bound;
-      notes.push(...headings.value.notes);
-      decimalComma = !/^[^\r\n]*,[^\r\n]*$/m.test(text.slice(0, text.search(/[\r\n]|$/))) && DECIMAL_COMMA.test(text);
+      bound = read.value.bound;
+      headings = cells.length;
+      notes.push(...read.value.notes);
       return;
     }
     rowCount++;
-    const row = readRow(cells, line, { bound, decimalComma, width: columns.length }, fault);
+    const row = readRow(cells, line, { bound, decimalComma, headings, width: columns.length }, fault);
     if (row !== null) take(row);
   });
   if (!separated.ok) return refused(...separated.refusals.map((r) => ({ ...r, place: { file } })));
@@ -125,7 +128,13 @@ function readRow(
 ): Row | null {
   const values: unknown[] = new Array(table.width).fill(undefined);
   let good = true;
-  let currency = "EUR";
+  if (cells.length > table.headings && cells.some((cell, i) => i >= table.headings && cell !== "")) {
+    const place = { line, column: table.headings + 1 };
+    const want = `at most ${table.headings}, one below each heading; a cell that holds a separator stands in quotes`;
+    fault({ code: "row-too-long", place, read: `${cells.length} cells`, want }, place);
+    return null;
+  }
+  let currency = "";
   for (const { column, index, slot, scale, quick } of table.bound) {
     const cell = cells[index];
     if (cell === undefined || cell === "") {
@@ -136,7 +145,7 @@ function readRow(
       }
       continue;
     }
-    if (quick !== null && isPlain(cell)) {
+    if (quick !== null && table.decimalComma !== true && isPlain(cell)) {
       const value = Number(cell + quick.suffix);
       if (value >= quick.least && value <= quick.most) {
         values[slot] = value;

@@ -32,7 +32,8 @@ const ASKED: readonly Asked[] = [
   {
     label: "basis",
     key: "basis",
-    value: (b) => (b.basis === "statistical" ? `statistical, risk ${b.risk}` : b.basis),
+    value: (b) =>
+      b.basis === "statistical" ? `statistical, risk ${b.risk}, ${b.distribution} within the tolerance` : b.basis,
   },
   { label: "derating", key: "derating", value: (b) => show(b.derating, "fraction") },
   { label: "overshoot", key: "overshoot", value: (b) => show(b.overshoot, "fraction") },

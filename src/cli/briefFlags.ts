@@ -20,6 +20,12 @@ export const BRIEF_FLAGS: readonly BriefFlag[] = [
   },
   { flag: "--basis", argument: "<basis>", key: "basis", help: "worst case, nominal or statistical" },
   { flag: "--risk", argument: "<fraction>", key: "risk", help: "risk of the statistical basis" },
+  {
+    flag: "--distribution",
+    argument: "<law>",
+    key: "distribution",
+    help: "uniform or normal: how capacitance lies in its tolerance, for the statistical basis",
+  },
   { flag: "--derating", argument: "<fraction>", key: "derating", help: 'part of a rating that is used, "90 %" or 0.9' },
   {
     flag: "--overshoot",
@@ -30,7 +36,7 @@ export const BRIEF_FLAGS: readonly BriefFlag[] = [
   { flag: "--ageing", argument: "<fraction>", key: "ageing", help: "loss of capacitance over life, counted in energy" },
   { flag: "--hold", argument: "<time>", key: "hold", help: 'how long the bank stays charged, "30 s" or "for ever"' },
   { flag: "--touch-safe", argument: "<voltage>", key: "touchSafe", help: "voltage that counts as safe to touch" },
-  { flag: "--touch-safe-rule", argument: "<text>", key: "touchSafeRule", help: "the rule which that voltage is from" },
+  { flag: "--touch-safe-rule", argument: "<text>", key: "touchSafeRule", help: "the rule that sets this voltage" },
   { flag: "--max-series", argument: "<count>", key: "maxSeries", help: "most units in series" },
   { flag: "--max-units", argument: "<count>", key: "maxUnits", help: "most units in the bank" },
   { flag: "--max-cost", argument: "<amount>", key: "maxCost", help: "most it may cost, in the currency of the plan" },

@@ -1,6 +1,6 @@
 // What is said when the fault is ours: the stack, and how to report it.
 
-import { visibleLines } from "../order/visible.ts";
+import { visibleLines } from "../order/index.ts";
 
 /** Text for the error stream; `argv` is repeated so that a report has it. */
 export function bugText(error: unknown, argv: readonly string[], version: string): string {

@@ -16,12 +16,15 @@ const NAMES: Readonly<Record<string, readonly [name: string, dimension: Dimensio
   maxMass: ["the most mass", "mass"],
 };
 
-export function changeWords({ field, from, to, layout, note }: Change): string {
+/** One sentence; `currency` is that of the plan. */
+export function changeWords({ field, from, to, layout, note }: Change, currency: string | null): string {
   const then = `then ${visible(layout)} fits`;
   if (field === "available")
     return `have ${to} of ${visible(note)} to buy${from === null ? "" : ` instead of ${from}`}: ${then}`;
   const [name, dimension] = NAMES[field] ?? [field, "count" as const];
-  const show = (x: number): string => formatQuantity(x, dimension, { digits: dimension === "count" ? 8 : 4 });
+  const unit = field === "maxCost" && currency !== null ? ` ${currency}` : "";
+  const show = (x: number): string =>
+    `${formatQuantity(x, dimension, { digits: dimension === "count" ? 8 : 4 })}${unit}`;
   const way = from === null || to > from ? "raise" : "lower";
   return `${way} ${name} ${from === null ? "" : `from ${show(from)} `}to ${show(to)}: ${then}`;
 }

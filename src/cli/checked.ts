@@ -35,16 +35,16 @@ export function checkedBank(brief: string | undefined, flags: BankFlags, ports: 
   if (!unit.ok) return unit;
   const currency = planCurrency(settings.value.brief, [unit.value], families);
   if (!currency.ok) return currency;
-  const of = (balance: BalanceWish): LayoutResult =>
+  const of: Assess = (balance, among = families) =>
     assess({
       unit: unit.value,
       layout: input.value.layout,
       brief: settings.value.brief,
-      families,
+      families: among,
       currency: currency.value,
       balance,
     });
-  const { result, notes } = balanced(input.value, flags, of);
+  const { result, notes } = balanced(input.value, families, flags.balanceTolerance !== undefined, of);
   return accepted({
     result,
     unit: unit.value,
@@ -55,30 +55,49 @@ export function checkedBank(brief: string | undefined, flags: BankFlags, ports: 
   });
 }
 
-/** The flags decide; else a file's own resistor, which is the chosen one when the rule still gives the same; else the rule. */
+type Assess = (balance: BalanceWish, among?: readonly ResistorFamily[]) => LayoutResult;
+type Fixed = BalanceWish & { readonly kind: "fixed" };
+
+/** A fixed resistor made of the family named, else of the one that takes the fewest elements. */
+function fixedAmong(wish: Fixed, families: readonly ResistorFamily[], named: string | null, of: Assess): LayoutResult {
+  const own = families.filter((family) => family.family === named);
+  const results = (own.length > 0 ? own : families).map((family) => of(wish, [family]));
+  const elements = (result: LayoutResult): number => result.balance?.elements ?? Number.POSITIVE_INFINITY;
+  return results.reduce((best, next) => (elements(next) < elements(best) ? next : best));
+}
+
+/**
+ * The flags decide; else a file's own resistor, which is the chosen one when the rule still gives the same; else the rule.
+ * A file's resistor of the assumed family was nobody's decision, so the rule chooses again.
+ */
 function balanced(
   { balance, filed }: LayoutInput,
-  flags: BankFlags,
-  of: (wish: BalanceWish) => LayoutResult,
+  families: readonly ResistorFamily[],
+  toleranceGiven: boolean,
+  of: Assess,
 ): { readonly result: LayoutResult; readonly notes: readonly string[] } {
   if (balance !== null) {
-    const assumed = balance.kind === "fixed" && flags.balanceTolerance === undefined;
-    const note = `The tolerance of the fixed resistor was not given: ${assumed ? `${balance.tolerance * 100} %` : ""} of the first family is assumed.`;
-    return { result: of(balance), notes: assumed ? [note] : [] };
+    if (balance.kind !== "fixed") return { result: of(balance), notes: [] };
+    const percent = Number((balance.tolerance * 100).toPrecision(6));
+    const note = `The tolerance of the fixed resistor was not given: ${percent} % is assumed, as of the first family.`;
+    return { result: fixedAmong(balance, families, null, of), notes: toleranceGiven ? [] : [note] };
   }
   const chosen = of({ kind: "choose" });
   if (filed === undefined) return { result: chosen, notes: [] };
-  const same = (a: number, b: number): boolean => Math.abs(a - b) <= 1e-9 * Math.abs(b);
   if (filed === null) {
     const note = "The layout's file has no balancing resistors, so none are counted.";
     return chosen.balance === null ? { result: chosen, notes: [] } : { result: of({ kind: "none" }), notes: [note] };
   }
-  const kept =
-    chosen.balance !== null &&
-    same(chosen.balance.resistance, filed.resistance) &&
-    same(chosen.balance.tolerance, filed.tolerance);
-  if (kept) return { result: chosen, notes: [] };
+  const { resistance, tolerance, family, assumed } = filed;
+  const same = (a: number, b: number): boolean => Math.abs(a - b) <= 1e-9 * Math.abs(b);
+  const now = chosen.balance;
+  if (now !== null && same(now.resistance, resistance) && same(now.tolerance, tolerance))
+    return { result: chosen, notes: [] };
+  if (assumed) {
+    const note = "The layout's file has an assumed resistor; it was chosen again from the families given.";
+    return { result: chosen, notes: [note] };
+  }
   const note =
     "The resistor is the one of the layout's file; by this brief and these families another would be chosen.";
-  return { result: of({ kind: "fixed", ...filed }), notes: [note] };
+  return { result: fixedAmong({ kind: "fixed", resistance, tolerance }, families, family, of), notes: [note] };
 }

@@ -2,7 +2,8 @@
 
 import * as nodeFs from "node:fs";
 import { basename, dirname, join } from "node:path";
-import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
+import { accepted, type Read } from "../quantity/index.ts";
+import { codeOf, refuseFile as refuse, trouble } from "./fileTroubles.ts";
 
 /** The part of node:fs that is used, so that a test can hand in a disk that fails. */
 export type FileSystem = Pick<
@@ -32,35 +33,6 @@ export interface Files {
 /** Largest text that is read, bytes: a catalogue of a million rows has about 200 MB. */
 export const LARGEST = 384 * 1024 * 1024;
 const CHUNK = 1 << 20;
-
-/** Codes of the operating system and the refusals they mean. */
-const TROUBLES: Readonly<Record<string, readonly [code: string, want: string]>> = {
-  ENOENT: ["no-such-file", "the path of a file that exists, in a folder that exists"],
-  ENOTDIR: ["no-such-file", "a path whose folders are folders"],
-  EISDIR: ["is-directory", "a file, not a folder"],
-  EACCES: ["no-permission", "a place that you may use"],
-  EPERM: ["no-permission", "a place that you may use"],
-  EROFS: ["read-only", "a place that can be written to"],
-  ENOSPC: ["disk-full", "room on the disk"],
-  EDQUOT: ["disk-full", "room within your quota"],
-  EEXIST: ["file-exists", "another name, or --force to replace it"],
-  ENAMETOOLONG: ["bad-path", "a shorter name"],
-  ELOOP: ["bad-path", "a link that does not point to itself"],
-  EBADF: ["no-input", "standard input that is open"],
-};
-
-const codeOf = (error: unknown): string => String((error as { code?: unknown } | null)?.code ?? "");
-
-function trouble(error: unknown, file: string): Read<never> {
-  const code = codeOf(error);
-  const known = TROUBLES[code];
-  if (known === undefined && code === "") throw error;
-  const [name, want] = known ?? ["unreadable", "a file that the system can read and write"];
-  return refused({ code: name, place: { file }, read: code, want });
-}
-
-const refuse = (code: string, file: string, read: string, want: string): Read<never> =>
-  refused({ code, place: { file }, read, want } satisfies Refusal);
 
 /** Reads to the end from an open file; null when it is larger than LARGEST. A pipe that has nothing yet is waited for. */
 function readAll(fs: FileSystem, handle: number): Buffer | null {
@@ -214,3 +186,8 @@ export function filesOn(fs: FileSystem = nodeFs): Files {
     write: (path, text, force) => writeText(fs, path, text, force),
   };
 }
+
+/** Writes to the terminal at once, so that it is done even if the process ends next. Throws when the terminal is gone. */
+export const writeNow = (text: string): void => {
+  nodeFs.writeSync(1, text);
+};

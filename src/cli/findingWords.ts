@@ -1,6 +1,6 @@
 // What each finding is about, and its figures as text rounded to the safe side.
 
-import { type Dimension, type Finding, formatQuantity, type Verdict } from "../quantity/index.ts";
+import { type Dimension, type Finding, formatQuantity, roundTo, type Verdict } from "../quantity/index.ts";
 
 interface Title {
   readonly title: string;
@@ -10,11 +10,18 @@ interface Title {
 
 export const FINDINGS: Readonly<Record<string, Title>> = {
   "charging-share": { title: "worst unit while charging" },
+  "charging-risk": { title: "chance of one over its limit" },
   "holding-share": { title: "worst unit while holding" },
   "balance-power": { title: "power in a balancing element" },
   "balance-voltage": { title: "voltage on a balancing element" },
   "reverse-after-dump": { title: "reverse voltage left by a dump" },
   "pulse-energy": { title: "energy of one pulse", least: true },
+  "steady-current": { title: "capacitance for the steady current", least: true },
+  "unit-short": { title: "sound units with one shorted" },
+  "energy-class": { title: "stored energy, class of hazard" },
+  "arc-blast": { title: "stored energy, arc blast" },
+  "energy-at-safe": { title: "energy left at touch-safe volts" },
+  recovery: { title: "voltage that comes back" },
   bleed: { title: "time to touch-safe by bleeding" },
 };
 
@@ -52,10 +59,19 @@ export function findingFigures({ id, value, limit, margin, unit }: Finding): {
 } {
   const least = FINDINGS[id]?.least === true;
   const dimension = DIMENSION_OF[unit] ?? "count";
-  const show = (x: number | null, rounding: "up" | "down"): string => formatQuantity(x, dimension, { rounding });
+  const tiny = (x: number | null): x is number => unit === "1" && x !== null && x !== 0 && Math.abs(x) < 1e-3;
+  const show = (x: number | null, rounding: "up" | "down"): string =>
+    tiny(x) ? roundTo(x, 3, rounding).toExponential() : formatQuantity(x, dimension, { rounding });
   return {
     value: show(value, least ? "down" : "up"),
     limit: limit === null ? "unknown" : `${least ? ">=" : "<="} ${show(limit, least ? "up" : "down")}`,
-    margin: margin === null ? "" : formatQuantity(margin, "fraction", { digits: 3, rounding: "down" }),
+    margin: marginText(margin),
   };
+}
+
+/** Free part of the limit in percent; where the limit is passed more than twice, how many times it is taken. */
+function marginText(margin: number | null): string {
+  if (margin === null) return "";
+  if (margin < -1) return `x ${formatQuantity(1 - margin, "count", { digits: 3, rounding: "up" })}`;
+  return formatQuantity(margin, "fraction", { digits: 3, rounding: "down" });
 }

@@ -1,4 +1,5 @@
-// The command line: the program, its ports, and the words that the screens share.
-export { EXIT } from "./exit.ts";
+// The command line: what the screens and the entry share with it.
+export { type CautionLine, cautionsOf } from "./cautions.ts";
 export { type Files, filesOn } from "./files.ts";
-export type { Ports } from "./ports.ts";
+export { type Ports, textWidth } from "./ports.ts";
+export { refusalWords } from "./words.ts";

@@ -40,7 +40,9 @@ export function faultLines({ sources }: Stock): readonly string[] {
 export function inputSentences({ sources, families }: Stock): readonly string[] {
   const lost = sources.reduce((sum, source) => sum + source.faults.length, 0);
   return [
-    ...(lost > 0 ? [`${lost} faults cost rows of the catalogues; their parts were not searched.`] : []),
+    ...(lost > 0
+      ? [`${lost} ${lost === 1 ? "fault costs its row" : "faults cost their rows"}: those parts were not searched.`]
+      : []),
     ...(families.some((family) => family.assumed)
       ? [
           "No resistor catalogue was given: balancing resistors are of an assumed family (E24, 5 %, 2 W, 350 V), unpriced.",

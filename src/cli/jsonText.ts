@@ -29,10 +29,11 @@ function placeAt(text: string, at: number, file: string): Place {
   return { file, line: before.split("\n").length, column: at - before.lastIndexOf("\n") };
 }
 
+/** The word that stands at a fault, at most 40 characters of it. */
 function readWhat(text: string, at: number): string {
   if (at >= text.length) return "the end of the text";
-  const rest = text.slice(at, at + 20).split(/[\r\n]/)[0] ?? "";
-  return rest === "" ? "the end of the line" : JSON.stringify(rest);
+  const word = /^(?:"[^"\r\n]{0,40}"?|[^\s,}\]]{1,40}|.)/u.exec(text.slice(at, at + 50))?.[0];
+  return word ?? "the end of the line";
 }
 
 /** Reads JSON text. Refuses its first fault with line and column, counted from 1. */

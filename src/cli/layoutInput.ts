@@ -21,7 +21,15 @@ export interface LayoutInput {
   /** What the flags say of the balancing resistor; null when they say nothing. */
   readonly balance: BalanceWish | null;
   /** Resistor that the file's layout has: null for none; undefined when there is no file. */
-  readonly filed: { readonly resistance: number; readonly tolerance: number } | null | undefined;
+  readonly filed: FiledBalance | null | undefined;
+}
+
+export interface FiledBalance {
+  readonly resistance: number;
+  readonly tolerance: number;
+  readonly family: string | null;
+  /** It came from the assumed family: nobody decided for it. */
+  readonly assumed: boolean;
 }
 
 const MOST = 1e6;
@@ -124,7 +132,7 @@ function fromFile(path: string, files: Files): Read<Omit<LayoutInput, "balance">
   const layout = plainTies({ part, series: value.series as number, parallel: value.parallel as number, ties });
   if (balance === undefined) return accepted({ layout, filed: undefined });
   if (balance === null) return accepted({ layout, filed: null });
-  const { resistance, tolerance } = balance as { readonly resistance?: unknown; readonly tolerance?: unknown };
+  const { resistance, tolerance, family, assumed } = balance as Readonly<Record<string, unknown>>;
   const good =
     typeof resistance === "number" &&
     resistance > 0 &&
@@ -132,5 +140,8 @@ function fromFile(path: string, files: Files): Read<Omit<LayoutInput, "balance">
     tolerance >= 0 &&
     tolerance < 1;
   if (!good) return no(JSON.stringify(balance), "a balance with resistance and tolerance, or null", "balance");
-  return accepted({ layout, filed: { resistance, tolerance } });
+  return accepted({
+    layout,
+    filed: { resistance, tolerance, family: typeof family === "string" ? family : null, assumed: assumed === true },
+  });
 }

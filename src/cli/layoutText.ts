@@ -51,11 +51,11 @@ export function findingsText(findings: readonly Finding[], width: number, indent
   const table = textTable<Finding>(
     [
       { heading: "verdict", cell: (f) => VERDICTS[f.verdict] },
-      { heading: "check", cell: (f) => titleOf(f.id) },
+      { heading: "check", cell: (f) => titleOf(f.id), least: 22 },
       { heading: "value", cell: (_, i) => figures[i]?.value ?? "", side: "right" },
       { heading: "limit", cell: (_, i) => figures[i]?.limit ?? "", side: "right" },
-      { heading: "margin", cell: (_, i) => figures[i]?.margin ?? "", side: "right" },
-      { heading: "source", cell: (f) => f.source, rank: 1 },
+      { heading: "margin", cell: (_, i) => figures[i]?.margin ?? "", side: "right", rank: 1 },
+      { heading: "source", cell: (f) => f.source, rank: 2 },
     ],
     findings,
     width,

@@ -3,15 +3,14 @@
 import type { Capacitor } from "../catalog/index.ts";
 import { visible } from "../order/index.ts";
 import { formatQuantity } from "../quantity/index.ts";
-import type { LayoutResult, PlanResult, Ranking, RefusedPart } from "../search/index.ts";
+import type { LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import { askedText } from "./askedText.ts";
 import { cautionsOf } from "./cautions.ts";
 import { changeWords } from "./changeWords.ts";
-import { VERDICTS } from "./findingWords.ts";
-import { costWords, layoutText, money } from "./layoutText.ts";
+import { layoutText, money } from "./layoutText.ts";
+import { rankedTable } from "./rankedTable.ts";
 import { reasonWords } from "./reasonWords.ts";
-import { textTable } from "./table.ts";
-import { wrap } from "./wrap.ts";
+import { bullet, wrap } from "./wrap.ts";
 
 export interface PlanText {
   readonly result: PlanResult;
@@ -50,66 +49,13 @@ function fitting({ result, parts, rank, width }: PlanText): readonly string[] {
   const shown = result.layouts.length;
   const all = result.searched.layouts;
   const more = shown < all ? ` (first ${shown} of ${all}; --limit 0 for all)` : "";
-  const plus = result.layouts.some((one) => (one.cost?.unpriced.length ?? 0) > 0)
-    ? "\n  + lines without a price are not in this cost"
-    : "";
+  const unpriced = result.layouts.some((one) => (one.cost?.unpriced.length ?? 0) > 0);
+  const legend = `worst: highest voltage of a unit over its limit; open: something is not assessed${unpriced ? "; +: lines without a price are left out" : ""}`;
   return [
-    `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}${plus}`,
+    `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}\n${wrap(legend, width, "  ")}`,
     `Best: ${visible(best.id)}\n${wrap(whyBest(result, rank), width, "  ")}\n${layoutText(best, unit, width)}`,
     frontText(result, width),
   ];
-}
-
-function rankedTable(layouts: readonly LayoutResult[], width: number): string {
-  const worst = (one: LayoutResult): string => {
-    const { charging, holding, limit } = one.share;
-    if (charging === null || holding === null) return "not assessed";
-    return formatQuantity(Math.max(charging, holding) / limit, "fraction", { digits: 3, rounding: "up" });
-  };
-  const checks = (one: LayoutResult): string => {
-    const worstFirst = ["fail", "warn", "not assessed"] as const;
-    const found = worstFirst.find((verdict) => one.findings.some((f) => f.verdict === verdict));
-    return found === undefined ? "pass" : found === "not assessed" ? "open" : VERDICTS[found];
-  };
-  return textTable<LayoutResult>(
-    [
-      { heading: "#", cell: (_, i) => String(i + 1), side: "right" },
-      { heading: "part", cell: (one) => one.part, least: 14 },
-      { heading: "shape", cell: (one) => `${one.series}s${one.parallel}p` },
-      { heading: "ties", cell: (one) => one.ties },
-      { heading: "units", cell: (one) => String(one.units), side: "right" },
-      { heading: "cost", cell: costWords, side: "right" },
-      {
-        heading: "energy",
-        cell: (one) => formatQuantity(one.energy.low, "energy", { digits: 4, rounding: "down" }),
-        side: "right",
-        rank: 3,
-      },
-      { heading: "worst/limit", cell: worst, side: "right", rank: 2 },
-      { heading: "checks", cell: checks, rank: 1 },
-      { heading: "volume", cell: (one) => formatQuantity(one.volume, "volume", { digits: 3 }), side: "right", rank: 4 },
-      { heading: "mass", cell: (one) => formatQuantity(one.mass, "mass", { digits: 3 }), side: "right", rank: 5 },
-      {
-        heading: "bleed",
-        cell: (one) =>
-          one.bleed.seconds === null
-            ? "none"
-            : formatQuantity(one.bleed.seconds, "time", { digits: 3, rounding: "up" }),
-        side: "right",
-        rank: 6,
-      },
-      {
-        heading: "balancing",
-        cell: (one) =>
-          one.balance === null ? "none" : formatQuantity(one.balance.resistance, "resistance", { digits: 4 }),
-        side: "right",
-        rank: 7,
-      },
-    ],
-    layouts,
-    width,
-    "  ",
-  );
 }
 
 function whyBest(result: PlanResult, rank: Ranking): string {
@@ -142,7 +88,7 @@ function nothing({ result, width }: PlanText): readonly string[] {
     result.changes.length > 0
       ? [
           "Any one of these changes would do:",
-          ...result.changes.map((one) => wrap(`- ${changeWords(one)}`, width, "  ")),
+          ...result.changes.map((one) => bullet(changeWords(one, result.currency), width)),
         ]
       : ["No single change of the brief or the stock that was tried would do."];
   return ["NOTHING FITS. No part gives a layout that does what was asked within its limits.", changes.join("\n")];
@@ -150,23 +96,16 @@ function nothing({ result, width }: PlanText): readonly string[] {
 
 function refusedText({ refused, currency }: PlanResult, width: number): string {
   if (refused.length === 0) return "";
-  const rows = refused.slice(0, LISTED);
-  const table = textTable<RefusedPart>(
-    [
-      { heading: "part", cell: (one) => one.part, least: 14 },
-      { heading: "reason", cell: (one) => reasonWords(one, currency) },
-    ],
-    rows,
-    width,
-    "  ",
-  );
+  const rows = refused
+    .slice(0, LISTED)
+    .map((one) => bullet(`${visible(one.part)}: ${reasonWords(one, currency)}`, width));
   const more = refused.length > LISTED ? `\n  and ${refused.length - LISTED} more (all with --json)` : "";
-  return `Refused parts: ${refused.length}\n${table}${more}`;
+  return `Refused parts: ${refused.length}\n${rows.join("\n")}${more}`;
 }
 
 function cautionText({ result, parts, width }: PlanText): string {
   const layout = result.layouts[0];
   const unit = layout && parts.find((part) => part.part === layout.part);
   const lines = cautionsOf(result.brief, layout && unit ? { layout, unit } : undefined);
-  return ["Cautions", ...lines.map(({ text }) => wrap(`- ${text}`, width, "  "))].join("\n");
+  return ["Cautions", ...lines.map(({ text }) => bullet(text, width))].join("\n");
 }

@@ -11,3 +11,14 @@ export interface Ports {
   /** Folder of the catalogues that come with the program. */
   readonly catalogs: string;
 }
+
+/** Narrowest and widest text that is laid out for; a terminal beyond them gets the nearer one. */
+const NARROWEST = 40;
+const WIDEST = 240;
+
+/** Width to lay text out for: the terminal's, else that of COLUMNS, else 80. */
+export function textWidth(terminal: number | undefined, environment: string | undefined): number {
+  const given = /^\d{1,5}$/.test(environment ?? "") ? Number(environment) : 0;
+  const wanted = terminal || given || 80;
+  return Math.min(WIDEST, Math.max(NARROWEST, wanted));
+}

@@ -1,7 +1,7 @@
 // The commands, their flags and their help, on commander; each command's code is loaded when it is called.
 
 import { Command, CommanderError, Option } from "commander";
-import { visibleLines } from "../order/visible.ts";
+import { visibleLines } from "../order/index.ts";
 import { BRIEF_FLAGS } from "./briefFlags.ts";
 import type { BankFlags } from "./checked.ts";
 import type { OrderFlags } from "./commands/order.ts";

@@ -9,7 +9,7 @@ export interface TextColumn<Row> {
   readonly side?: Side;
   /** May be cut, down to this many columns. */
   readonly least?: number;
-  /** Leaves when the table is too wide; the highest leaves first. 0 stays. */
+  /** Leaves when the table is too wide, the highest first: from 2 before anything is cut, 1 after, 0 never. */
   readonly rank?: number;
 }
 
@@ -34,9 +34,8 @@ export function textTable<Row>(
     const softest = shown.find((one) => one.column.least !== undefined && one.width > one.column.least);
     const room = softest ? softest.width - (softest.column.least as number) : 0;
     const leaving = shown.reduce((most, one) => Math.max(most, one.column.rank ?? 0), 0);
-    if (softest && (room >= over || leaving === 0)) {
+    if (softest && leaving < 2) {
       softest.width -= Math.min(room, over);
-      if (room < over) break;
       continue;
     }
     if (leaving === 0) break;

@@ -21,6 +21,7 @@ export const WORDS: Readonly<Record<string, string>> = {
   "bad-yes-no": "this is neither yes nor no",
   "binary-file": "the file is not text",
   "broken-quotes": "the quotes do not match",
+  "row-too-long": "the row has more cells than there are headings",
   contradiction: "values contradict each other",
   "disk-full": "the disk is full; nothing was written",
   "duplicate-heading": "a heading stands twice",
@@ -46,6 +47,20 @@ export const WORDS: Readonly<Record<string, string>> = {
   "not-finite": "the number is not finite",
   "not-utf8": "the text is not UTF-8",
   "out-of-range": "the value is out of range",
+  place: "the measured units or the shape cannot be placed",
+  "place.duplicate-serial": "a serial stands twice",
+  "place.pin-full": "more units are pinned than there is room for",
+  "place.pin-group": "there is no such place to pin to",
+  "place.pin-twice": "a unit is pinned twice",
+  "place.pin-unknown": "no unit with the pinned serial",
+  "place.too-few": "there are too few units",
+  "pulse.bus": "the bus cannot be reckoned with",
+  "pulse.charge": "the charger cannot be reckoned with",
+  "pulse.circuit": "the circuit cannot be reckoned with",
+  "pulse.lamp": "the lamp cannot be reckoned with",
+  "pulse.lampDrive": "the lamp circuit cannot be sized",
+  "pulse.loop": "the loop cannot be reckoned with",
+  "pulse.samples": "the waveform cannot be read",
   "read-only": "the place is read-only; nothing was written",
   "tolerance-range": "the tolerance is out of range",
   "too-deep": "the nesting is too deep",
@@ -62,6 +77,9 @@ export const WORDS: Readonly<Record<string, string>> = {
   "wrong-unit": "the unit is one of another quantity",
 };
 
+/** Words of a code; `pulse.lamp.bore` has those of its family `pulse.lamp`. */
+export const wordsOf = (code: string): string => WORDS[code] ?? WORDS[code.replace(/\.[^.]*$/, "")] ?? visible(code);
+
 /** `file:line:column heading`, as much of it as is known; empty when nothing is. */
 export function placeWords({ file, line, column, field }: Place): string {
   const spot = [file, line, line === undefined ? undefined : column].filter((part) => part !== undefined).join(":");
@@ -71,6 +89,6 @@ export function placeWords({ file, line, column, field }: Place): string {
 /** One sentence, safe to print. */
 export function refusalWords({ code, place, read, want }: Refusal): string {
   const where = placeWords(place);
-  const what = `${WORDS[code] ?? code}: read ${visible(read)}; accepted: ${visible(want)}`;
+  const what = `${wordsOf(code)}: read ${visible(read)}; accepted: ${visible(want)}`;
   return where === "" ? what : `${where}: ${what}`;
 }

@@ -62,3 +62,9 @@ export function wrap(text: string, width: number, indent = ""): string {
   }
   return [...lines, line].map((one) => (indent + one).trimEnd()).join("\n");
 }
+
+/** A list entry: a dash, and the text wrapped beside it. */
+export function bullet(text: string, width: number, indent = "  "): string {
+  const lines = wrap(text, width, `${indent}  `).split("\n");
+  return [`${indent}- ${(lines[0] ?? "").trimStart()}`, ...lines.slice(1)].join("\n");
+}

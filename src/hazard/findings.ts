@@ -42,17 +42,22 @@ export function hazardFindings(bank: HazardOf): readonly Finding[] {
       bad: "hazardous by stored energy (second hand, at or over counts): interlock, two ways to discharge, proof before touch",
       good: "below the threshold of stored energy at this voltage (second hand)",
     }),
-    finding({
-      id: "arc-blast",
-      state: "holding",
-      verdict: warn(full.arcBlast),
-      unit: "J",
-      source: "LBNL-hazard",
-      value: energy,
-      limit: ARC_BLAST,
-      bad: "an arc would also be a blast: remote control, exclusion area, hearing protection",
-      good: "not an arc-blast hazard by this rule; hearing protection for every hard discharge all the same",
-    }),
+    // The rule speaks of 100 V and more; below it there is nothing to judge.
+    ...(bank.voltage < ARC_BLAST_FROM
+      ? []
+      : [
+          finding({
+            id: "arc-blast",
+            state: "holding",
+            verdict: warn(full.arcBlast),
+            unit: "J",
+            source: "LBNL-hazard",
+            value: energy,
+            limit: ARC_BLAST,
+            bad: "an arc would also be a blast: remote control, exclusion area, hearing protection",
+            good: "not an arc-blast hazard by this rule; hearing protection for every hard discharge all the same",
+          }),
+        ]),
     finding({
       id: "energy-at-safe",
       state: "dumped",
@@ -89,6 +94,7 @@ export function hazardFindings(bank: HazardOf): readonly Finding[] {
   ];
 }
 
+const ARC_BLAST_FROM = 100;
 const ARC_BLAST = Math.max(...ruleOf("lbnl-arc-blast").limits.map((limit) => limit.value));
 const NEVER = "no permanent bleed: the bank never empties by itself";
 const RECOVERY_SOURCES = { "absorption-electrolytic": "absorption-notes", "absorption-other": "Moore-electrostatics" };

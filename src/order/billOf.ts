@@ -3,7 +3,8 @@
 import { type Capacitor, DEFAULT_FAMILY, type ResistorFamily } from "../catalog/index.ts";
 import type { Brief, LayoutResult } from "../search/index.ts";
 import type { Bill } from "./bill.ts";
-import { clampLines, otherLines } from "./otherLines.ts";
+import { clampLines } from "./clampLines.ts";
+import { otherLines } from "./otherLines.ts";
 import { resistorLines, unitLines } from "./partLines.ts";
 import { totalsOf } from "./totals.ts";
 

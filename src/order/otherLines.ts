@@ -6,63 +6,14 @@ import { storedEnergy } from "../bank/index.ts";
 import type { Capacitor } from "../catalog/index.ts";
 import { formatQuantity } from "../quantity/index.ts";
 import type { Brief, LayoutResult } from "../search/index.ts";
-import type { BillLine, LineKind } from "./bill.ts";
+import type { BillLine } from "./bill.ts";
+import { toBeChosen, type Wish } from "./chosenLine.ts";
 import { countsOf } from "./counts.ts";
 
 export interface OtherInput {
   readonly layout: LayoutResult;
   readonly unit: Capacitor;
   readonly brief: Brief;
-}
-
-interface Wish {
-  readonly item: string;
-  readonly line: LineKind;
-  readonly needed: number | null;
-  readonly value?: string;
-  readonly rating?: string;
-  readonly note: string;
-}
-
-const toBeChosen = ({ item, line, needed, value = "to be chosen", rating = "to be chosen", note }: Wish): BillLine => ({
-  item,
-  line,
-  value,
-  rating,
-  needed,
-  onHand: null,
-  toBuy: needed,
-  pack: null,
-  packs: null,
-  surplus: null,
-  unitPrice: null,
-  consumed: null,
-  purchase: null,
-  currency: null,
-  supplier: "",
-  orderCode: "",
-  note,
-  state: "to be chosen",
-});
-
-/** A clamp diode across each stage or unit, where a dump may leave a unit reversed beyond its rating or beyond what is known. */
-export function clampLines({ layout, unit }: OtherInput): readonly BillLine[] {
-  const finding = layout.findings.find((f) => f.id === "reverse-after-dump");
-  const fine = finding === undefined || finding.verdict === "pass";
-  if (fine || unit.polarised === false || layout.series === 1) return [];
-  const { charging, holding, limit } = layout.share;
-  const stands = Math.max(charging ?? limit, holding ?? limit);
-  const where = layout.ties === "cross-tied" ? "stage" : "unit";
-  const maybe = unit.polarised === undefined ? " Needed if the unit is polarised; the catalogue does not say." : "";
-  return [
-    toBeChosen({
-      item: "clamp diode",
-      line: "clamp diodes",
-      needed: countsOf(layout).groups,
-      rating: `at least ${formatQuantity(stands, "voltage", { digits: 3, rounding: "up" })} reverse, surge current of the dump`,
-      note: `One across each ${where}, cathode to the positive terminal.${maybe}`,
-    }),
-  ];
 }
 
 /** How long a bar is that joins the units of one stage standing side by side, m; null when their size is unknown. */

@@ -139,12 +139,14 @@ export function resistorLines(layout: LayoutResult, family: ResistorFamily | nul
   const each = balance.elements === 1 ? "one" : `${balance.elements} in series`;
   const where = layout.ties === "cross-tied" ? "stage" : "unit";
   const assumed = balance.assumed ? " The family is assumed: choose a real one and check again." : "";
+  const made = family?.values.some((ohms) => Math.abs(ohms - balance.elementResistance) <= 1e-9 * ohms) ?? true;
+  const odd = made ? "" : " No preferred value of this family: choose the nearest that is made and check again.";
   const wording: Wording = {
     item: `balancing resistor, ${balance.family}`,
     line: "balancing resistors",
     value,
     rating,
-    note: `${each} across each ${where}, ${balance.positions} positions.${assumed}`,
+    note: `${each} across each ${where}, ${balance.positions} positions.${assumed}${odd}`,
   };
   const bought = layout.purchase.resistors;
   const terms: PurchaseTerms = family ?? {};

@@ -9,7 +9,7 @@
  *
  * At frequency f the field inside a conductor adds the lesser of its low-frequency value and R/(2 pi f). Bars and wires far
  * from anything else; unequal current over the bar is left out, so take it as an estimate.
- * Source: [Palmer1937] edge term through L'C' = mu0 eps0; [Grover] (from memory) wires, coax and inner terms.
+ * Source: [Palmer-strip] edge term through L'C' = mu0 eps0; [Grover] (from memory) wires, coax and inner terms.
  */
 import { accepted, type Finding, type Read, type Refusal, refused } from "../quantity/index.ts";
 import type { BusPath } from "./load.ts";
@@ -48,7 +48,7 @@ export interface Bus extends BusPath {
   readonly findings: readonly Finding[];
 }
 
-/** Least width over gap for which the flat-bar formula is used. Source: [Palmer1937] as tested against a moment method. */
+/** Least width over gap for which the flat-bar formula is used. Source: [Palmer-strip] as tested against a moment method. */
 export const LEAST_WIDTH_OVER_GAP = 5;
 
 interface Field {
@@ -129,7 +129,7 @@ export function busOf(geometry: BusGeometry, use: BusUse): Read<Bus> {
             value: geometry.width / geometry.gap,
             limit: LEAST_WIDTH_OVER_GAP,
             unit: "1",
-            source: "Palmer1937",
+            source: "Palmer-strip",
             note: "Narrower bars than this make the edge term a guess; measure the loop instead.",
           }),
         ]

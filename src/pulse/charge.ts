@@ -48,7 +48,7 @@ function faultsOf(charger: Charger, task: ChargeTask): readonly Refusal[] {
     ([field, value]) => (Number.isFinite(value) && value > 0 ? [] : bad(field, value, "a number above zero")),
   );
   if (positive.length > 0) return positive;
-  if (!(task.from >= 0 && task.from < task.to)) return bad("from", task.from, "from zero up to below the end voltage");
+  if (!(task.from >= 0 && task.from < task.to)) return bad(`from`, task.from, "from zero up to below the end voltage");
   if (kind === "resistor" && !(charger.supply > task.to)) {
     return bad("supply", charger.supply, "a supply above the end voltage, which is reached only after for ever");
   }

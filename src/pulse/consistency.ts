@@ -8,7 +8,7 @@
  *
  * A ring so damped that g passes 1 loses nearly all its energy in a half-cycle, so a stated loss rules it out: the bound is
  * then omega C V max(1, g) at the damping whose half-cycle loses W. Without a stated loss the bound is omega C V. Without f
- * the bound only names the largest inductance. Source: [textbook-rlc] the bound; [derived] g.
+ * the bound only names the largest inductance. Source: [textbook-rlc] the bound; [methods-derived] g.
  */
 import type { Finding } from "../quantity/index.ts";
 import { peakFactor } from "./damping.ts";
@@ -40,7 +40,7 @@ export interface Consistency {
 /** Rounded publication figures may miss a bound by this much before they count as inconsistent. Assumed, no source. */
 export const ROUNDING = 0.02;
 
-/** Most that the peak can exceed omega C V when a half-cycle loses this part of the stored energy [1]. Source: [derived]. */
+/** Most that the peak can exceed omega C V when a half-cycle loses this part of the stored energy [1]. Source: [methods-derived]. */
 export function frequencyGain(lossFraction: number | null): number {
   if (lossFraction === null || lossFraction <= 0 || lossFraction >= 1) return 1;
   const decrement = -Math.log1p(-lossFraction) / (2 * Math.PI);
@@ -78,7 +78,9 @@ export function checkStated(stated: StatedDischarge): Consistency {
   const bad = claims.some(({ verdict }) => verdict === "fail");
   const nothing = peakCurrent === null && loss === null;
   if (nothing)
-    claims.push(remark("pulse.stated.none", "not assessed", "derived", "Neither a peak nor a loss was stated."));
+    claims.push(
+      remark("pulse.stated.none", "not assessed", "methods-derived", "Neither a peak nor a loss was stated."),
+    );
   return {
     verdict: bad ? "inconsistent" : nothing ? "not assessed" : "plausible",
     stored,

@@ -9,7 +9,7 @@
  *
  * Afterwards the current dies away with L/R of the outer loop and the bank carries nothing. Needs all L outside the bank and
  * no drop; a real diode takes its drop times the charge and fires a little earlier. From critical damping up the voltage
- * never crosses zero, so there is nothing to clamp: null. Source: [derived], checked against numerical integration.
+ * never crosses zero, so there is nothing to clamp: null. Source: [methods-derived], checked against numerical integration.
  */
 import { dampingOf, type SeriesLoop } from "./rlc.ts";
 
@@ -23,7 +23,7 @@ export interface Crowbar {
   readonly actionAfter: number | null;
 }
 
-/** `bankResistance` [ohm] is the part of the loop's resistance inside the bank. Source: [derived] file head. */
+/** `bankResistance` [ohm] is the part of the loop's resistance inside the bank. Source: [methods-derived] file head. */
 export function crowbarOf(loop: SeriesLoop, voltage: number, bankResistance: number): Crowbar | null {
   const damping = dampingOf(loop);
   if (damping === null || damping >= 1) return null;

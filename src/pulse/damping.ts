@@ -9,10 +9,10 @@
  *   VR      reversalFactor  0 <= VR <= 1  exp(-pi zeta / sqrt(1 - zeta^2)), 0 from critical up
  *
  * With z = (1 - zeta)/2, which rounds to nothing near critical, A = asin(sqrt z)/sqrt(z(1 - z)): no difference of near equals.
- * Holds for linear, constant R, L and C. Source: [Cona] the three damping cases; the continued form is [derived].
+ * Holds for linear, constant R, L and C. Source: [Cona] the three damping cases; the continued form is [methods-derived].
  */
 
-/** A(zeta): time of the current peak in units of sqrt(LC); 1 at critical damping. Source: [derived] file head. */
+/** A(zeta): time of the current peak in units of sqrt(LC); 1 at critical damping. Source: [methods-derived] file head. */
 export function angleRatio(damping: number): number {
   const z = (1 - damping) / 2;
   if (z === 0) return 1;
@@ -32,7 +32,7 @@ export function reversalFactor(damping: number): number {
 /**
  * The discharge at `time` (in sqrt(LC)): current in V/Z0, capacitor voltage in V.
  * Overdamped it is written with expm1 and the slow root 1/(zeta + beta), so nothing overflows or cancels.
- * Source: [Cona] three cases; arrangement [derived].
+ * Source: [Cona] three cases; arrangement [methods-derived].
  */
 export function normalDischarge(damping: number, time: number): { readonly current: number; readonly voltage: number } {
   const square = (1 - damping) * (1 + damping);

@@ -4,7 +4,7 @@
  * All corners of the ranges are computed. For a linear loop each figure moves one way with each part (peak current: up with C,
  * down with R and L; reversal: down with zeta; peak time: up with C and L, down with R; action: up with C, down with R), so
  * the corners are the extremes. With a lamp or a clamp the corners are corners, not a proof; `proven` says which.
- * Source: [derived], tested against random points inside the ranges.
+ * Source: [methods-derived], tested against random points inside the ranges.
  */
 import { accepted, type Read } from "../quantity/index.ts";
 

@@ -1,8 +1,8 @@
 // What the fault table must know of a bank, and the figures of it that several faults share.
+import type { Ties } from "../bank/index.ts";
 import type { Fuse } from "./fuse.ts";
 import type { BusPath } from "./load.ts";
 import type { ShortCase } from "./shortedUnit.ts";
-import type { Ties } from "./unitDuty.ts";
 
 /** One unit as the fault table sees it; SI, null or left out is unknown. */
 export interface FaultUnit {

@@ -9,7 +9,7 @@
  *   load short  m C/n                       n (r + R_i)/m + bus                      n l/m + bus
  *
  * r, l ESR and ESL of one unit; R_i isolating resistor. A shorted unit's own r and l are left out: the short may sit at its
- * terminals. Source: [derived].
+ * terminals. Source: [methods-derived].
  */
 import { type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
 import { peakCurrentOf } from "./peaks.ts";

@@ -4,7 +4,7 @@ import { bleederOpen, chargerRunning, dumpStuck, earlyFire, loadShort } from "./
 import type { FaultBank } from "./faultBank.ts";
 import type { Fault } from "./faultRow.ts";
 
-/** All eight faults of a bank, in the order a reviewer asks for them. Source: [derived] each row's own file head. */
+/** All eight faults of a bank, in the order a reviewer asks for them. Source: [methods-derived] each row's own file head. */
 export const faultTable = (bank: FaultBank): readonly Fault[] =>
   [unitShort, unitOpen, rowShort, loadShort, earlyFire, bleederOpen, dumpStuck, chargerRunning].map((fault) =>
     fault(bank),

@@ -7,7 +7,7 @@
  *   A_m A_c melting, clearing   A^2 s   of the fuse; both from its maker
  *
  * Lives when A_u <= part A_m (part 0.25 when the user gives none: common practice, no source); clears when A_f >= A_c and the
- * fuse is rated to break the direct voltage across it. A_f counts the loop's resistance without the arc's own. Source: [derived].
+ * fuse is rated to break the direct voltage across it. A_f counts the loop's resistance without the arc's own. Source: [methods-derived].
  */
 import type { Finding } from "../quantity/index.ts";
 import { atLeast, atMost } from "./verdict.ts";
@@ -48,7 +48,7 @@ export function fuseFindings(fuse: Fuse, duty: FuseDuty, part: number = SHOT_PAR
       value: duty.faultAction,
       limit: fuse.clearingAction,
       unit: "A2s",
-      source: "derived",
+      source: "methods-derived",
       note: "Action that the neighbours can drive into a shorted unit against what the fuse needs to clear.",
     }),
     atMost({
@@ -57,7 +57,7 @@ export function fuseFindings(fuse: Fuse, duty: FuseDuty, part: number = SHOT_PAR
       value: duty.voltage,
       limit: fuse.dcVoltage,
       unit: "V",
-      source: "derived",
+      source: "methods-derived",
       note: "Direct voltage that the fuse must break against its dc rating; an ac rating does not count.",
     }),
   ];

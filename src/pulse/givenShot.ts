@@ -4,7 +4,7 @@
  *   V(t) = V - Q(t)/C, the terminals stand at V(t) - ESR i; bank, bus and switch heat by R times the action, the switch drop
  *   by the charge that passes either way; what the terminals gave beyond that went into the load.
  *
- * Inductance has no say, since the current is given. Source: [derived].
+ * Inductance has no say, since the current is given. Source: [methods-derived].
  */
 import { accepted, type Read, refused } from "../quantity/index.ts";
 import { type CurrentSample, checkSamples, integralsOf, sampleAt } from "./samples.ts";

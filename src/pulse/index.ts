@@ -1,5 +1,6 @@
 // Contents page of pulse.
 export { type Bus, type BusGeometry, busOf } from "./bus.ts";
+export { unitShort } from "./chainFaults.ts";
 export { type Charge, type Charger, type ChargeTask, chargeOf } from "./charge.ts";
 export {
   actionDensity,
@@ -46,7 +47,6 @@ export { type TraceRow, traceOf } from "./trace.ts";
 export {
   type Arrangement,
   type PulseUnit,
-  type Ties,
   type UnitDuty,
   type UnitRatings,
   unitDutyOf,

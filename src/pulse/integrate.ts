@@ -74,7 +74,7 @@ const passes = ({ direction }: Watch, before: number, after: number): boolean =>
 export function integrate(problem: Problem): Course {
   const { slope, watches, to } = problem;
   const size = problem.start.length;
-  let y = problem.start.slice();
+  const y = problem.start.slice();
   let x = problem.from;
   let h = problem.firstStep;
   let steps = 0;
@@ -83,6 +83,7 @@ export function integrate(problem: Problem): Course {
   const pieces: Piece[] = [];
   const hits: Hit[] = [];
   let before = watches.map((watch) => watch.value(x, y));
+  let after = before.slice();
   slope(x, y, s.k[0]!);
   while (x < to) {
     if (steps++ >= problem.maxSteps) return { x, y, pieces, hits, ended: "steps", steps };
@@ -94,14 +95,16 @@ export function integrate(problem: Problem): Course {
       continue;
     }
     let piece = pieceOf({ x, h }, y, s);
-    const after = watches.map((watch) => watch.value(x + h, s.next));
-    const found: { watch: number; part: number }[] = [];
-    watches.forEach((watch, index) => {
+    let found: { watch: number; part: number }[] | null = null;
+    for (let index = 0; index < watches.length; index++) {
+      const watch = watches[index]!;
       const value = before[index]!;
-      if (passes(watch, value, after[index]!)) found.push({ watch: index, part: crossing(watch, piece, value, held) });
-    });
-    found.sort((a, b) => a.part - b.part);
-    for (const { watch, part } of found) {
+      after[index] = watch.value(x + h, s.next);
+      if (!passes(watch, value, after[index]!)) continue;
+      found ??= [];
+      found.push({ watch: index, part: crossing(watch, piece, value, held) });
+    }
+    for (const { watch, part } of found?.sort((a, b) => a.part - b.part) ?? []) {
       const reach = part * h;
       if (watches[watch]!.stops) {
         step(slope, { x, h: reach }, y, s);
@@ -115,8 +118,8 @@ export function integrate(problem: Problem): Course {
     }
     pieces.push(piece);
     x = to - x <= h ? to : x + h;
-    y = s.next.slice();
-    before = after;
+    y.set(s.next);
+    [before, after] = [after, before];
     s.k[0]!.set(s.k[6]!);
     h *= Math.min(5, 0.9 * Math.max(error, 1e-10) ** -0.2);
   }

@@ -7,7 +7,7 @@
  *   VR      reversal    1      of the loop without the drop
  *
  * Within a half-cycle v -+ d obeys the plain loop, so its action is that of `peaks` at A_k, its charge C A_k (1 + VR), and it
- * ends at v = d - A_k VR. From critical damping up there is one pulse, which leaves d on the bank. Source: [derived].
+ * ends at v = d - A_k VR. From critical damping up there is one pulse, which leaves d on the bank. Source: [methods-derived].
  */
 import { accepted, type Read, refused } from "../quantity/index.ts";
 import { type Peaks, peaksOf } from "./peaks.ts";

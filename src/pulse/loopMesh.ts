@@ -13,7 +13,7 @@ export interface PulseBank extends Arrangement {
   readonly esl: number | null;
 }
 
-/** The bank of an arrangement at nominal values: C = m C_u/n, ESR = n ESR_u/m, ESL = n ESL_u/m. Source: [derived]. */
+/** The bank of an arrangement at nominal values: C = m C_u/n, ESR = n ESR_u/m, ESL = n ESL_u/m. Source: [methods-derived]. */
 export function pulseBankOf(arrangement: Arrangement): PulseBank {
   const { unit, series, parallel } = arrangement;
   const ratio = series / parallel;
@@ -64,7 +64,7 @@ export interface Bounds {
 /**
  * Leaving out resistance raises current, action, reversal and the load's energy and lowers the damping; leaving out inductance
  * raises current and damping and lowers reversal, and raises the action of a switch that opens at the first zero.
- * `given` marks a load whose current is given, so that only energies can err. Source: [derived], tested by perturbation.
+ * `given` marks a load whose current is given, so that only energies can err. Source: [methods-derived], tested by perturbation.
  */
 export function boundsOf(unknown: Unknowns, given: boolean): Bounds {
   const resistance = unknown.esr || unknown.bus;

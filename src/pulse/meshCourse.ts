@@ -1,7 +1,8 @@
 // Follows a mesh through its stages (bank and load in one loop, clamp conducting, slow tail) until the current has died away.
 import type { Piece } from "./dormandPrince.ts";
-import { type Course, integrate, type Watch } from "./integrate.ts";
+import { type Course, integrate } from "./integrate.ts";
 import * as eq from "./meshSlopes.ts";
+import { awake, hasFaded, type Mode, watchesOf } from "./meshWatches.ts";
 
 /** One stage's dense pieces. */
 export interface Stage {
@@ -20,58 +21,17 @@ export interface MeshCourse {
   readonly steps: number;
 }
 
-type Mode = "series" | "clamped" | "tail";
-
-/** A lamp's law is not followed below this part of the peak current; other loads are followed far lower. */
-const LAMP_FADE = 1e-3;
-const FADE = 1e-6;
-/** Where the slow tail takes over: its own error is of the order of the square of this. */
-const TAIL_SHARE = 1e-5;
-const TAIL_MATCH = 1e-7;
 /** Less energy than this, as a part of that stored, is not worth another half-cycle. */
 const SPENT = 1e-10;
 const MOST_HALVES = 400;
-const MOST_STEPS = 400_000;
+const MOST_STEPS = 200_000;
 
-/** Watches of the series stage: peak, zero, faded away, then slow tail or clamp. The first peak stops, as the rest need it. */
-function seriesWatches(m: eq.NormalMesh, side: eq.Side, peak: number): Watch[] {
-  const cut = Math.sqrt((m.lamp > 0 ? LAMP_FADE : FADE) * peak);
-  const rise = (y: Float64Array): number => side * eq.seriesRise(m, side, y);
-  const toward = (y: Float64Array): number => side * y[eq.VOLTAGE]!;
-  const slow = (y: Float64Array): number => {
-    const a = Math.abs(y[eq.ROOT]!);
-    const off = Math.abs(toward(y) - eq.tailVoltage(m, a).value) - TAIL_MATCH * Math.abs(toward(y));
-    return Math.max(eq.coilShare(m, a) - TAIL_SHARE, off, rise(y));
-  };
-  return [
-    { value: (_s, y) => rise(y), direction: -1, stops: peak === 0 },
-    { value: (_s, y) => side * y[eq.ROOT]!, direction: -1, stops: true },
-    {
-      value: (_s, y) => Math.max(side * y[eq.ROOT]! - cut, rise(y), -toward(y)),
-      direction: -1,
-      stops: peak > 0,
-    },
-    m.clampDrop === null
-      ? { value: (_s, y) => (m.lamp > 0 ? slow(y) : 1), direction: -1, stops: true }
-      : {
-          value: (_s, y) => (m.outerL > 0 ? eq.terminalVoltage(m, side, y) + m.clampDrop! : 1),
-          direction: -1,
-          stops: true,
-        },
-  ];
-}
-
-const clampedWatches = (m: eq.NormalMesh, side: eq.Side, peak: number): Watch[] => [
-  { value: (_s, y) => y[eq.ROOT]! * Math.abs(y[eq.ROOT]!) - eq.bankCurrent(m, y), direction: -1, stops: true },
-  { value: (_s, y) => side * y[eq.ROOT]! - Math.sqrt(FADE * peak), direction: -1, stops: true },
-  { value: (_s, y) => side * eq.bankCurrent(m, y), direction: -1, stops: false },
-];
-
-const tailWatches = (_m: eq.NormalMesh, side: eq.Side, peak: number): Watch[] => [
-  { value: (_x, y) => side * y[eq.ROOT]! - Math.sqrt(LAMP_FADE * peak), direction: -1, stops: true },
-];
-
-const SLOPES = { series: eq.seriesSlope, clamped: eq.clampedSlope, tail: eq.tailSlope } as const;
+const SLOPES = {
+  series: eq.seriesSlope,
+  clamped: eq.clampedSlope,
+  asleep: eq.asleepSlope,
+  tail: eq.tailSlope,
+} as const;
 
 /** |u| on the slow curve at the voltage where the tail begins, so that no charge is lost in the change. */
 function tailRoot(m: eq.NormalMesh, from: number, voltage: number): number {
@@ -100,10 +60,11 @@ export function courseOf(m: eq.NormalMesh, oneWay: boolean, tolerance: number): 
     lowest = Math.min(lowest, state[eq.VOLTAGE]!);
   };
   const finish = (whole: boolean): MeshCourse => {
-    return { stages, end: y, peak, lowest, whole, clamped: mode === "clamped", steps };
+    return { stages, end: y, peak, lowest, whole, clamped: mode === "clamped" || mode === "asleep", steps };
   };
   for (;;) {
-    const watches = { series: seriesWatches, clamped: clampedWatches, tail: tailWatches }[mode];
+    // a stage can begin with the current already faded, which its watches, waiting for a change, would never tell
+    if (y[eq.ROOT] !== 0 && hasFaded(mode, m, side, peak.current, y)) return finish(true);
     const course: Course = integrate({
       slope: SLOPES[mode](m, side),
       from: 0,
@@ -112,7 +73,7 @@ export function courseOf(m: eq.NormalMesh, oneWay: boolean, tolerance: number): 
       firstStep: mode === "tail" ? 1e-3 : 1e-2 * Math.sqrt(typical),
       tolerance,
       floors,
-      watches: watches(m, side, peak.current),
+      watches: watchesOf(mode, m, side, peak.current),
       maxSteps: MOST_STEPS - steps,
     });
     steps += course.steps;
@@ -126,8 +87,12 @@ export function courseOf(m: eq.NormalMesh, oneWay: boolean, tolerance: number): 
     seen(y);
     if (course.ended !== "watch") return finish(false);
     const watch = course.hits.at(-1)!.watch;
-    if (mode === "tail") return finish(true);
+    if (mode === "tail" || mode === "asleep") return finish(true);
     if (mode === "clamped") {
+      if (watch === 2) {
+        mode = "asleep";
+        continue;
+      }
       if (watch !== 0) return finish(true);
       mode = "series";
       continue;
@@ -135,7 +100,7 @@ export function courseOf(m: eq.NormalMesh, oneWay: boolean, tolerance: number): 
     if (watch === 0) continue;
     if (watch === 2) return finish(true);
     if (watch === 3 && m.clampDrop !== null) {
-      mode = "clamped";
+      mode = awake(m, side, y) <= 0 ? "asleep" : "clamped";
       y[eq.BANK_CURRENT] = y[eq.ROOT]! * Math.abs(y[eq.ROOT]!);
       continue;
     }
@@ -151,6 +116,8 @@ export function courseOf(m: eq.NormalMesh, oneWay: boolean, tolerance: number): 
     side = voltage > 0 ? 1 : -1;
     // the drop turns about with the current, which can by itself push the terminals below the clamp
     if (m.clampDrop !== null && m.outerL > 0 && eq.terminalVoltage(m, side, y) + m.clampDrop <= 0) {
+      // a clamp lower than the switch's drop leaves the load nothing to conduct on; the bank empties through the diode alone
+      if (m.clampDrop <= m.drop) return finish(true);
       mode = "clamped";
       y[eq.BANK_CURRENT] = 0;
     }

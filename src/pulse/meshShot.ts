@@ -4,7 +4,7 @@
  * The mesh is put into numbers of one (see meshSlopes.ts), followed to its end, and put back. Every energy is an integral of
  * its own (R times the action, K0 times the integral of |i|^1.5, the drop times the charge), so that their sum agreeing with
  * the stored energy is a check and not a definition. Needs some inductance; noInductanceShot takes the mesh without.
- * Source: [ME1966] lamp mesh; [derived] the clamp.
+ * Source: [ME1966] lamp mesh; [methods-derived] the clamp.
  */
 import { accepted, type Read, refused } from "../quantity/index.ts";
 import { within } from "./dormandPrince.ts";
@@ -15,17 +15,21 @@ import { inductanceOf, type Mesh, resistanceOf, type Shot, storedIn } from "./sh
 /** Error allowed per step, relative: keeps the energies' sum within 1e-9 of the stored energy. */
 export const FINE = 1e-11;
 
+/** A bank with less of the mesh's inductance than this is taken to have it outside: figures err by no more than this part. */
+const LEAST_BANK_COIL = 1e-7;
+
 /** The mesh in numbers of one. */
 export function normalMesh(mesh: Mesh): eq.NormalMesh {
   const inductance = inductanceOf(mesh);
   const impedance = Math.sqrt(inductance / mesh.capacitance);
   const bankR = mesh.bank.resistance / impedance;
-  const bankL = mesh.bank.inductance / inductance;
+  const part = mesh.bank.inductance / inductance;
+  const bankL = part < LEAST_BANK_COIL ? 0 : part;
   return {
     bankR,
     bankL,
     outerR: (resistanceOf(mesh) - mesh.bank.resistance) / impedance,
-    outerL: (mesh.bus.inductance + mesh.load.inductance) / inductance,
+    outerL: bankL === 0 ? 1 : (mesh.bus.inductance + mesh.load.inductance) / inductance,
     lamp: mesh.lampConstant / Math.sqrt(mesh.voltage * impedance),
     drop: mesh.switch.drop / mesh.voltage,
     clampDrop: mesh.clamp === null ? null : mesh.clamp.drop / mesh.voltage,

@@ -6,10 +6,11 @@
  *   v       capacitor voltage                          k = K0/sqrt(V Z0), d = drop/V, f, r_d = clamp drop and slope
  *   series  du/ds = v - k u - (r_b + r_e) u|u| - side d            dv/ds = -2|u| u|u|
  *   clamped du/ds = (w - k u - r_e u|u| - side d)/l_e, w = -f - r_d (i - i_b); the bank's own loop sees the same w
+ *   asleep  once the bank's branch (l_b = 0, r_b + r_d small) has settled it only follows the clamp: i_b = r_d di/dt
  *   tail    late in a lamp's pulse the coil hardly matters: v = G(a) = d + k a + r a^2 - 2 a^3/(k + 2 r a), a = |u|,
  *           and the state runs in x = -ln a; the next term is of the order of (2 a^2/(k + 2 r a)^2)^2
  *
- * In t the lamp's sqrt|i| has no slope at i = 0; in s every slope is a polynomial. Source: [ME1966] the mesh; the rest [derived].
+ * In t the lamp's sqrt|i| has no slope at i = 0; in s every slope is a polynomial. Source: [ME1966] the mesh; the rest [methods-derived].
  */
 import type { Slope } from "./dormandPrince.ts";
 
@@ -75,25 +76,51 @@ export const seriesSlope =
     out[BANK_ACTION] = out[ACTION]!;
   };
 
+/** Slope of the load current in t while the clamp conducts and the bank's branch carries `own`. */
+const clampedRise = (m: NormalMesh, side: Side, u: number, terminal: number): number =>
+  (terminal - m.lamp * u - m.outerR * u * Math.abs(u) - side * m.drop) / m.outerL;
+
+/** The integrals that every clamped stage keeps, from the load's root and the bank's current. */
+function clampedSums(u: number, own: number, out: Float64Array): void {
+  const a = Math.abs(u);
+  const current = u * a;
+  const through = current - own;
+  out[VOLTAGE] = -2 * a * own;
+  out[TIME] = 2 * a;
+  out[ACTION] = 2 * a * current * current;
+  out[CHARGE] = 2 * a * a * a;
+  out[LAMP] = 2 * a * a * a * a;
+  out[BANK_ACTION] = 2 * a * own * own;
+  out[CLAMP_CHARGE] = 2 * a * through;
+  out[CLAMP_ACTION] = 2 * a * through * through;
+}
+
 export const clampedSlope =
   (m: NormalMesh, side: Side): Slope =>
   (_s, y, out) => {
     const u = y[ROOT]!;
-    const a = Math.abs(u);
-    const current = u * a;
     const own = bankCurrent(m, y);
-    const through = current - own;
-    const terminal = -m.clampDrop! - m.clampR * through;
-    out[ROOT] = (terminal - m.lamp * u - m.outerR * current - side * m.drop) / m.outerL;
-    out[VOLTAGE] = -2 * a * own;
-    out[TIME] = 2 * a;
-    out[ACTION] = 2 * a * current * current;
-    out[CHARGE] = 2 * a * a * a;
-    out[LAMP] = 2 * a * a * a * a;
-    out[BANK_CURRENT] = m.bankL > 0 ? (2 * a * (y[VOLTAGE]! - m.bankR * own - terminal)) / m.bankL : 0;
-    out[BANK_ACTION] = 2 * a * own * own;
-    out[CLAMP_CHARGE] = 2 * a * through;
-    out[CLAMP_ACTION] = 2 * a * through * through;
+    const terminal = -m.clampDrop! - m.clampR * (u * Math.abs(u) - own);
+    clampedSums(u, own, out);
+    out[ROOT] = clampedRise(m, side, u, terminal);
+    out[BANK_CURRENT] = m.bankL > 0 ? (2 * Math.abs(u) * (y[VOLTAGE]! - m.bankR * own - terminal)) / m.bankL : 0;
+  };
+
+/** Bank current of the settled branch, r_d di/dt, with di/dt from the load's loop: (l_e - r_d^2) di/dt = -f - r_d i - load. */
+export function sleepingCurrent(m: NormalMesh, side: Side, y: Float64Array): number {
+  const u = y[ROOT]!;
+  const plain = clampedRise(m, side, u, -m.clampDrop! - m.clampR * u * Math.abs(u));
+  return (m.clampR * plain) / (1 - (m.clampR * m.clampR) / m.outerL);
+}
+
+export const asleepSlope =
+  (m: NormalMesh, side: Side): Slope =>
+  (_s, y, out) => {
+    const own = sleepingCurrent(m, side, y);
+    const u = y[ROOT]!;
+    clampedSums(u, own, out);
+    out[ROOT] = clampedRise(m, side, u, -m.clampDrop! - m.clampR * (u * Math.abs(u) - own));
+    out[BANK_CURRENT] = 0;
   };
 
 /** How little the coil matters at |u| = a: the ratio of its voltage to the load's. */

@@ -6,7 +6,7 @@
  *   action     C (K0 u_0^3/3 + R u_0^4/2)        integral of |i|^1.5    C (K0 u_0^2/2 + 2 R u_0^3/3)
  *
  * The lamp's tail lasts for ever, so the integrals run to zero current, where C d^2/2 is left. A clamp has nothing to do here:
- * without inductance the bank never goes negative. Source: [derived] by dV = -u^2 dt/C.
+ * without inductance the bank never goes negative. Source: [methods-derived] by dV = -u^2 dt/C.
  */
 import { accepted, type Read, refused } from "../quantity/index.ts";
 import { type Mesh, resistanceOf, type Shot, storedIn } from "./shot.ts";

@@ -7,7 +7,7 @@
  *
  * Cubics through Chebyshev points on pieces of width 1/512 miss k by less than 1e-12 of itself, far inside the 1e-9 by which
  * layouts are compared; `peakCurrentOf` has the last digits. The table is made from the exact form when first imported.
- * Source: [derived]; the error is measured in the tests.
+ * Source: [methods-derived]; the error is measured in the tests.
  */
 import { peakFactor } from "./damping.ts";
 import type { BusPath } from "./load.ts";
@@ -37,7 +37,7 @@ function table(): Float64Array {
 
 const TABLE = table();
 
-/** k(zeta) to 1e-12 of itself, for zeta >= 0. Source: [derived] file head. */
+/** k(zeta) to 1e-12 of itself, for zeta >= 0. Source: [methods-derived] file head. */
 export function quickPeakFactor(damping: number): number {
   if (!(damping < END)) return peakFactor(damping);
   const scaled = damping * PIECES_PER_ONE;

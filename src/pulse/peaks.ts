@@ -11,7 +11,7 @@
  *   Q_z     chargeToZero      C       C V (1 + VR)
  *   E       stored            J       C V^2/2
  *
- * Energies split as the resistances do: E_x = E R_x/R. Holds for linear constant R, L, C. Source: [Cona]; A_z, Q_z [derived].
+ * Energies split as the resistances do: E_x = E R_x/R. Holds for linear constant R, L, C. Source: [Cona]; A_z, Q_z [methods-derived].
  */
 import { accepted, type Read } from "../quantity/index.ts";
 import { angleRatio, peakFactor, reversalFactor } from "./damping.ts";
@@ -49,7 +49,7 @@ export function peakCurrentOf(loop: SeriesLoop, voltage: number): number {
   return voltage * Math.sqrt(loop.capacitance / loop.inductance) * peakFactor(damping);
 }
 
-/** Action up to the first current zero [A^2 s], for a loop that has passed `checkLoop`. Source: [derived] file head. */
+/** Action up to the first current zero [A^2 s], for a loop that has passed `checkLoop`. Source: [methods-derived] file head. */
 export function actionToZeroOf(loop: SeriesLoop, voltage: number): number {
   const stored = (loop.capacitance * voltage * voltage) / 2;
   const damping = dampingOf(loop);

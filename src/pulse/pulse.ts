@@ -47,7 +47,7 @@ export interface Discharge {
 
 /**
  * Whether a clamp has nothing to do: from critical damping up (di/dt)/i never falls below minus the slow root, so the
- * terminals stay above zero when the outer R/L is at least that root. Source: [derived].
+ * terminals stay above zero when the outer R/L is at least that root. Source: [methods-derived].
  */
 function clampIdle(mesh: Mesh): boolean {
   const loop = { capacitance: mesh.capacitance, inductance: inductanceOf(mesh), resistance: resistanceOf(mesh) };

@@ -8,7 +8,7 @@
  *   dT      rise        K        P R_th, R_th the user's own thermal resistance of a unit [K/W]
  *
  * Needs charge + wait + pulse <= 1/f. ESR at the pulse's frequency and the unit's temperature. Steady state, so for long
- * bursts only. Source: [textbook-charging]; [derived] the sum of actions.
+ * bursts only. Source: [textbook-charging]; [methods-derived] the sum of actions.
  */
 import type { Finding } from "../quantity/index.ts";
 import { atMost } from "./verdict.ts";

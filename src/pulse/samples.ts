@@ -4,7 +4,7 @@
  *   i_k, t_k   current [A] and time [s] of sample k, times strictly rising
  *   charge     sum of h (a + b)/2           action  sum of h (a^2 + a b + b^2)/3
  *
- * Source: [derived] integrals of a straight line and of its square.
+ * Source: [methods-derived] integrals of a straight line and of its square.
  */
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
 
@@ -58,7 +58,7 @@ export interface SampleIntegrals {
   readonly greatestCharge: number;
 }
 
-/** Integrals of samples that have passed `checkSamples`. Source: [derived] file head. */
+/** Integrals of samples that have passed `checkSamples`. Source: [methods-derived] file head. */
 export function integralsOf(samples: readonly CurrentSample[]): SampleIntegrals {
   const start = samples[0]!.time;
   let [charge, absoluteCharge, action, greatestCharge] = [0, 0, 0, 0];

@@ -12,9 +12,9 @@
  *           leg 1/(m(m - 1)), action through the faulted leg E_n (m - 1)/(m R_i)
  *
  * The short is ideal and instantaneous, at the unit's terminals; equal units; a ringing equalisation can swing survivors up to
- * twice the step. Source: [derived], energy balance checked.
+ * twice the step. Source: [methods-derived], energy balance checked.
  */
-import type { Ties } from "./unitDuty.ts";
+import type { Ties } from "../bank/index.ts";
 
 /** The bank at the moment of the fault. */
 export interface ShortCase {

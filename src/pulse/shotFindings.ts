@@ -30,7 +30,7 @@ function polarityFindings({ bank, circuit, shot, bounds }: ShotFacts): readonly 
     value: shot.reversal,
     limit: 0,
     unit: "1",
-    source: "derived",
+    source: "methods-derived",
     bound: bounds.reversal,
     note: `Polarised units must not reverse. ${mend}`,
   });
@@ -49,18 +49,28 @@ export function shotFindings(facts: ShotFacts): readonly Finding[] {
   }
   if (!given && inductanceOf(mesh) === 0) {
     found.push(
-      remark("pulse.bound.inductance", "warn", "derived", "No inductance in the loop: the current is an upper bound."),
+      remark(
+        "pulse.bound.inductance",
+        "warn",
+        "methods-derived",
+        "No inductance in the loop: the current is an upper bound.",
+      ),
     );
   }
   if (!given && resistanceOf(mesh) === 0 && mesh.lampConstant === 0) {
     found.push(
-      remark("pulse.bound.lossless", "warn", "derived", "No resistance in the loop: this is the lossless bound."),
+      remark(
+        "pulse.bound.lossless",
+        "warn",
+        "methods-derived",
+        "No resistance in the loop: this is the lossless bound.",
+      ),
     );
   }
   if (bounds.peakCurrent !== "value") {
     const note =
       "Parts of the loop are unknown and left out; measure ESR, ESL and the bus, or ring the bank into a short.";
-    found.push(remark("pulse.bound.unknown", "not assessed", "derived", note));
+    found.push(remark("pulse.bound.unknown", "not assessed", "methods-derived", note));
   }
   return found;
 }

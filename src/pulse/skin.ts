@@ -5,11 +5,11 @@
  *   rho    resistivity ohm m  > 0
  *   f      frequency   Hz     > 0: the ring frequency; for a pulse that does not ring 1/(4 t_peak), a rule of thumb of this file
  *
- * Holds for a good, non-magnetic conductor. Source: [CODATA2022] mu0; [textbook-skin] the depth.
+ * Holds for a good, non-magnetic conductor. Source: [CODATA-2022] mu0; [textbook-skin] the depth.
  */
 import type { Peaks } from "./peaks.ts";
 
-/** Magnetic constant [N/A^2]. Source: [CODATA2022]. */
+/** Magnetic constant [N/A^2]. Source: [CODATA-2022]. */
 export const MU0 = 1.25663706127e-6;
 
 /** Resistivity at 20 degC [ohm m]: annealed copper standard; aluminium from memory. Source: [IACS]. */

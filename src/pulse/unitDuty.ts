@@ -9,13 +9,11 @@
  *
  * Units of a cross-tied stage share by capacitance, strings by string capacitance (one string all high, the rest all low), so
  * one formula serves both. Holds while capacitance decides; when resistance or lead length does, sharing is as those are.
- * Source: [derived], corners checked by brute force.
+ * Source: [methods-derived], corners checked by brute force.
  */
+import type { Ties } from "../bank/index.ts";
 import type { Finding } from "../quantity/index.ts";
 import { atMost, type Bound } from "./verdict.ts";
-
-/** How parallel units are joined. */
-export type Ties = "cross-tied" | "strings";
 
 /** What the maker allows one unit in one shot; null is not known. A, V/s, fraction of the charge voltage, A^2 s. */
 export interface UnitRatings {
@@ -44,13 +42,13 @@ export interface Arrangement {
   readonly ties: Ties;
 }
 
-/** Current of the worst unit over the bank's current [1]. Source: [derived] file head. */
+/** Current of the worst unit over the bank's current [1]. Source: [methods-derived] file head. */
 export function worstShare({ unit, parallel }: Pick<Arrangement, "unit" | "parallel">): number {
   const high = 1 + unit.toleranceHigh;
   return high / (high + (parallel - 1) * (1 - unit.toleranceLow));
 }
 
-/** dv/dt [V/s] of the fastest unit at a bank current [A]. Source: [derived] file head. */
+/** dv/dt [V/s] of the fastest unit at a bank current [A]. Source: [methods-derived] file head. */
 export function worstSlew({ unit, series, parallel, ties }: Arrangement, current: number): number {
   const low = unit.capacitance * (1 - unit.toleranceLow);
   if (ties === "cross-tied") return current / (parallel * low);
@@ -103,7 +101,7 @@ export interface DutyBounds {
 
 /** The worst unit against its ratings; a missing rating is not assessed. */
 export function unitFindings(duty: UnitDuty, ratings: UnitRatings, bounds: DutyBounds): readonly Finding[] {
-  const source = "derived";
+  const source = "methods-derived";
   return [
     atMost({
       id: "pulse.unit.current",

@@ -21,7 +21,7 @@ const SLACK = 1e-9;
 
 /**
  * value <= limit as a finding. Unknown value or limit: not assessed. An upper bound within the limit passes and one over it
- * proves nothing; a lower bound over the limit fails and one within it proves nothing. Source: [derived].
+ * proves nothing; a lower bound over the limit fails and one within it proves nothing. Source: [methods-derived].
  */
 export function atMost(claim: Claim): Finding {
   const { id, value, limit, unit, source, note, state = "pulse", bound = "value" } = claim;

@@ -105,9 +105,11 @@ export const PREFIXES: Readonly<Record<string, number>> = {
 const row = (dimension: Dimension): DimensionRow => DIMENSIONS[dimension];
 
 /** The scale of a unit spelling in a dimension, or null when it is no unit of that dimension. */
-export function unitScale(unit: string, dimension: Dimension): Scale | null {
+export function unitScale(written: string, dimension: Dimension): Scale | null {
   const { prefixed, fixed } = row(dimension);
-  const exact = fixed[unit];
+  // The Greek letter mu to the micro sign, so that the whole spellings need only one of the two.
+  const unit = written.replaceAll("\u03bc", "\u00b5");
+  const exact = Object.hasOwn(fixed, unit) ? fixed[unit] : undefined;
   if (exact) return exact;
   for (const { spelling, exponent } of prefixed) {
     if (!unit.toLowerCase().endsWith(spelling)) continue;

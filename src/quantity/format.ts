@@ -53,9 +53,10 @@ export function roundTo(value: number, digits: number, rounding: Rounding = "nea
   if (rounding === "nearest" || Math.abs(near - value) <= Math.abs(value) * 1e-12) return near;
   const wrong = rounding === "down" ? near > value : near < value;
   if (!wrong) return near;
-  const [mantissa = "0", power = "0"] = near.toExponential(digits - 1).split("e");
-  const last = Number(`${mantissa}e${digits - 1}`) + (rounding === "down" ? -1 : 1);
-  return Number(`${Math.round(last)}e${Number(power) - (digits - 1)}`);
+  // Counted in the last figure of the value itself: of what it was rounded to, 0.99999 down would lose a figure (0.999).
+  const power = Number(value.toExponential(15).split("e")[1] ?? 0) - (digits - 1);
+  const last = Math.round(Number(`${near}`.includes("e") ? near / 10 ** power : `${near}e${-power}`));
+  return Number(`${last + (rounding === "down" ? -1 : 1)}e${power}`);
 }
 
 /** A number with exactly `digits` significant figures and no exponent, where it has up to seven places before the point. */
@@ -89,19 +90,24 @@ export function formatQuantity(
   return `${trimZeros(figures(roundTo(mantissa, digits), digits))} ${PRINTED[power] ?? ""}${symbol}`;
 }
 
-/** Seconds with prefixes below one second, then s, min, h, d. */
+const TIME_STEPS: readonly (readonly [below: number, unit: string, seconds: number])[] = [
+  [1e-6, "ns", 1e-9],
+  [1e-3, "µs", 1e-6],
+  [1, "ms", 1e-3],
+  [600, "s", 1],
+  [7200, "min", 60],
+  [172800, "h", 3600],
+  [Number.POSITIVE_INFINITY, "d", 86400],
+];
+
+/** Seconds with prefixes below one second, then s, min, h, d; rounded before the unit is chosen. */
 function formatTime(value: number, digits: number, rounding: Rounding): string {
-  const size = Math.abs(value);
-  const step = (unit: string, factor: number) =>
-    `${trimZeros(figures(roundTo(value / factor, digits, rounding), digits))} ${unit}`;
-  if (size === 0) return "0 s";
-  if (size < 1e-6) return step("ns", 1e-9);
-  if (size < 1e-3) return step("µs", 1e-6);
-  if (size < 1) return step("ms", 1e-3);
-  if (size < 600) return step("s", 1);
-  if (size < 7200) return step("min", 60);
-  if (size < 172800) return step("h", 3600);
-  return step("d", 86400);
+  if (value === 0) return "0 s";
+  for (const [below, unit, seconds] of TIME_STEPS) {
+    const rounded = roundTo(value / seconds, digits, rounding);
+    if (Math.abs(rounded) * seconds < below * (1 - 1e-12)) return `${trimZeros(figures(rounded, digits))} ${unit}`;
+  }
+  return "unlimited";
 }
 
 function trimZeros(text: string): string {

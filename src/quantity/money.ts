@@ -35,13 +35,21 @@ export const isCurrency = (text: string): boolean => /^[A-Z]{3}$/.test(text);
 const WANT = 'a price such as "3.90", zero or more, at most 1e9';
 
 /** A unit price in minor units; it may be a fraction of one ("0.0034"). Refuses what is negative, absurd or no number. */
-export function parsePrice(text: string, currency: string, decimalComma = false): Read<number> {
+export function parsePrice(text: string, currency: string, decimalComma: boolean | "never" = false): Read<number> {
   const cell = text.trim();
   const match = /^(\d+)(?:([.,])(\d+))?$/.exec(cell);
   if (!match) return refused({ code: "bad-price", place: {}, read: JSON.stringify(text), want: WANT });
   const [, whole = "", mark, fraction = ""] = match;
-  if (mark === "," && fraction.length === 3 && !/^0+$/.test(whole) && !decimalComma) {
-    const want = `${whole}${fraction} or ${whole}.${fraction}, without the comma`;
+  if (mark === "," && decimalComma === "never") {
+    return refused({
+      code: "ambiguous-comma",
+      place: {},
+      read: JSON.stringify(text),
+      want: `${whole}.${fraction}, with a point`,
+    });
+  }
+  if (mark === (decimalComma === true ? "." : ",") && fraction.length === 3 && !/^0+$/.test(whole)) {
+    const want = `${whole}${fraction} or ${whole}.${fraction}, without the mark between`;
     return refused({ code: "ambiguous-comma", place: {}, read: JSON.stringify(text), want });
   }
   const major = Number(`${whole}.${fraction || "0"}`);

@@ -17,11 +17,11 @@ function distance(a: string, b: string): number {
   return rows[a.length]?.[b.length] ?? 0;
 }
 
-/** The nearest of `known`, or null when none is near (more than a third of the letters, and at least two, differ). */
+/** The nearest of `known`, or null when none is near (more than a third of the letters differ). */
 export function nearestWord(word: string, known: readonly string[]): string | null {
   const typed = word.toLowerCase().slice(0, 60);
   let best: string | null = null;
-  let least = Math.max(2, Math.floor(typed.length / 3)) + 1;
+  let least = Math.max(1, Math.floor(typed.length / 3)) + 1;
   for (const candidate of known) {
     const d = distance(typed, candidate.toLowerCase());
     if (d < least) {

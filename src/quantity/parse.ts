@@ -9,8 +9,11 @@ import { accepted, type Read, refused } from "./refusal.ts";
 export interface ParseOptions {
   /** Scale of a number without a unit (a table heading's unit); null refuses such a number. Default: SI. */
   readonly bare?: Scale | null;
-  /** A comma is known to be the decimal mark here, so "1,500" is 1.5 and not a question. */
-  readonly decimalComma?: boolean;
+  /**
+   * A comma is known to be the decimal mark here, so "1,500" is 1.5 and not a question; and then "1.500" is one.
+   * "never": a comma is never a decimal mark (a table separated by commas).
+   */
+  readonly decimalComma?: boolean | "never";
 }
 
 const SI: Scale = { exponent: 0, factor: 1 };
@@ -62,7 +65,8 @@ export const example = (dimension: Dimension): string =>
  */
 export function parseQuantity(text: string, dimension: Dimension, options: ParseOptions = {}): Read<number> {
   const bare = options.bare === undefined ? SI : options.bare;
-  if (bare !== null && PLAIN.test(text)) return finite(scaled(text, 0, bare), text, dimension);
+  if (bare !== null && options.decimalComma !== true && PLAIN.test(text))
+    return finite(scaled(text, 0, bare), text, dimension);
   const cell = text.trim();
   const no = (code: string, want: string): Read<never> =>
     refused({ code, place: {}, read: JSON.stringify(text), want });
@@ -74,16 +78,20 @@ export function parseQuantity(text: string, dimension: Dimension, options: Parse
   const [, sign = "", whole = "", fraction = "", power = "0", unitText = ""] = match;
   const integer = whole.replace(/[^\d]/g, "");
   if (
-    fraction.startsWith(",") &&
+    fraction.startsWith(options.decimalComma === true ? "." : ",") &&
     fraction.length === 4 &&
     !/^0*$/.test(integer) &&
-    integer.length <= 3 &&
-    !options.decimalComma
+    integer.length <= 3
   ) {
     const plain = `${integer}${fraction.slice(1)}`;
+    const mark = options.decimalComma === true ? "point" : "comma";
+    const want = `${plain} if the ${mark} groups thousands, ${integer}${options.decimalComma === true ? "," : "."}${fraction.slice(1)} if it is the decimal mark`;
+    return no("ambiguous-comma", want);
+  }
+  if (fraction.startsWith(",") && options.decimalComma === "never") {
     return no(
       "ambiguous-comma",
-      `${plain} if the comma groups thousands, ${integer}.${fraction.slice(1)} if it is the decimal mark`,
+      `${integer || "0"}.${fraction.slice(1)}, with a point: commas separate the cells of this table`,
     );
   }
   const digits = `${sign === "" || sign === "+" ? "" : "-"}${integer || "0"}.${fraction.slice(1) || "0"}`;
@@ -107,8 +115,20 @@ function finite(value: number, text: string, dimension: Dimension): Read<number>
   return refused({ code: "not-finite", place: {}, read: JSON.stringify(text), want: example(dimension) });
 }
 
-/** "470u": a prefix without its unit, as written on parts. Not for fractions and counts, which take no prefix. */
+/** Quantities that are written with a prefix alone, as on parts and their diagrams. A hold of "5 m" is minutes to one reader, not to another. */
+const MARKED: readonly Dimension[] = [
+  "capacitance",
+  "resistance",
+  "inductance",
+  "voltage",
+  "current",
+  "energy",
+  "power",
+];
+
+/** "470u": a prefix without its unit. */
 function barePrefix(unit: string, dimension: Dimension): Scale | null {
+  if (!MARKED.includes(dimension)) return null;
   const [first] = DIMENSIONS[dimension].prefixed;
   if (first === undefined || !Object.hasOwn(PREFIXES, unit)) return null;
   return { exponent: (PREFIXES[unit] ?? 0) + first.exponent, factor: 1 };

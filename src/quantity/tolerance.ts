@@ -41,7 +41,11 @@ const PAIR = /^([+\-−])\s*([\d.,]+)\s*%?\s*[/;\s]\s*([+\-−])\s*([\d.,]+)\s*(
 const ZERO_PAIR = /^0\s*\/\s*\+\s*([\d.,]+)\s*(%?)$/u;
 
 /** Reads a tolerance; a bare number takes the scale of its heading (`bare`), null refuses it. */
-export function parseTolerance(text: string, bare: Scale | null, decimalComma = false): Read<Tolerance> {
+export function parseTolerance(
+  text: string,
+  bare: Scale | null,
+  decimalComma: boolean | "never" = false,
+): Read<Tolerance> {
   const cell = text.trim();
   const no = (code: string): Read<never> => refused({ code, place: {}, read: JSON.stringify(text), want: WANT });
   const letter = TOLERANCE_LETTERS[cell];

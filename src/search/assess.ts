@@ -17,8 +17,10 @@ import { toMajor } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing, positionsOf, shapedChain, sharingOf } from "./balancing.ts";
 import type { Brief } from "./brief.ts";
 import { type Candidate, prepare } from "./candidate.ts";
+import { pricedIn } from "./currency.ts";
 import { findingsOf } from "./findings.ts";
 import type { Balance, Cost, LayoutResult, Shares, Span } from "./result.ts";
+import { type Risk, riskOf } from "./risk.ts";
 
 /** How the balancing resistor comes about: chosen by the rule, fixed by the builder, or left out. */
 export type BalanceWish =
@@ -37,10 +39,12 @@ export interface AssessInput {
 
 /** Assesses one arrangement, safe or not: nothing is refused here, everything is found. */
 export function assess(input: AssessInput): LayoutResult {
-  const { unit, brief, families, currency, balance: wish = { kind: "choose" } } = input;
+  const { brief, currency, balance: wish = { kind: "choose" } } = input;
+  const [unit = input.unit] = pricedIn([input.unit], currency, brief);
+  const families = pricedIn(input.families, currency, brief);
   const layout = plainTies({ ...input.layout, part: unit.part });
   const { series, parallel, ties } = layout;
-  const candidate = prepare(unit, brief, currency);
+  const candidate = prepare(unit, brief);
   const voltage = brief.voltage * (1 + brief.overshoot);
   const units = unitCount(layout);
   const { tolerance } = candidate;
@@ -84,16 +88,30 @@ export function assess(input: AssessInput): LayoutResult {
     share,
     balance: chosen,
     bleed: {
-      seconds: chosen === null ? null : bleedSeconds(chosen, layout, capacitance.high ?? capacitance.nominal, brief),
+      seconds:
+        chosen === null || capacitance.high === null ? null : bleedSeconds(chosen, layout, capacitance.high, brief),
       toVoltage: brief.touchSafe,
     },
-    cost: costOf({ capacitors, resistors, hasResistors: chosen !== null, candidate, currency, family }),
+    cost: costOf({
+      capacitors,
+      resistors,
+      needsResistors: chosen !== null || (series > 1 && candidate.leak === null),
+      currency,
+    }),
     volume: candidate.volume === null ? null : candidate.volume * units,
     mass: candidate.mass === null ? null : candidate.mass * units,
     stress: worst === null ? null : worst / unit.voltage,
+    ...(brief.basis === "statistical" ? { risk: riskFor(candidate, brief, layout) } : {}),
     purchase: { capacitors, resistors },
   };
   return { ...result, findings: findingsOf({ result, unit, brief, candidate, family: family ?? null }) };
+}
+
+/** Chance of an excess while charging, or null when the tolerance is unknown. */
+function riskFor({ tolerance, limit }: Candidate, brief: Brief, { series, parallel, ties }: Layout): Risk | null {
+  const voltage = brief.voltage * (1 + brief.overshoot);
+  if (series === 1) return { exceed: voltage <= limit * (1 + 1e-9) ? 0 : 1, error: 0 };
+  return tolerance === null ? null : riskOf({ tolerance, series, parallel, ties, share: limit / voltage }, brief);
 }
 
 const worstOf = (charging: number | null, holding: number | null): number | null =>
@@ -186,25 +204,23 @@ function bleedSeconds(balance: Balance, layout: Layout, capacitance: number, bri
   return resistance * capacitance * Math.log(voltage / brief.touchSafe);
 }
 
+/** What the priced lines come to; null when none has a price. Resistors that cannot be sized have none. */
 function costOf(of: {
   readonly capacitors: Purchase | null;
   readonly resistors: Purchase | null;
-  readonly hasResistors: boolean;
-  readonly candidate: Candidate;
+  readonly needsResistors: boolean;
   readonly currency: string | null;
-  readonly family: ResistorFamily | null | undefined;
 }): Cost | null {
-  const { capacitors, resistors, hasResistors, candidate, currency } = of;
+  const { currency, needsResistors } = of;
   if (currency === null) return null;
-  const units = capacitors?.cost ?? null;
-  const unitCost = units === null ? null : Math.round(units * candidate.exchange);
-  const resistorCost = hasResistors ? (resistors?.cost ?? null) : 0;
-  if (unitCost === null && (resistorCost === null || resistorCost === 0)) return null;
+  const capacitors = of.capacitors?.cost ?? null;
+  const resistors = needsResistors ? (of.resistors?.cost ?? null) : 0;
+  if (capacitors === null && (resistors === null || resistors === 0)) return null;
   return {
-    capacitors: unitCost === null ? null : toMajor(unitCost, currency),
-    resistors: resistorCost === null ? null : toMajor(resistorCost, currency),
-    total: toMajor((unitCost ?? 0) + (resistorCost ?? 0), currency),
+    capacitors: capacitors === null ? null : toMajor(capacitors, currency),
+    resistors: resistors === null ? null : toMajor(resistors, currency),
+    total: toMajor((capacitors ?? 0) + (resistors ?? 0), currency),
     currency,
-    unpriced: [...(unitCost === null ? ["capacitors"] : []), ...(resistorCost === null ? ["balancing resistors"] : [])],
+    unpriced: [...(capacitors === null ? ["capacitors"] : []), ...(resistors === null ? ["balancing resistors"] : [])],
   };
 }

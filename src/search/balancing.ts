@@ -23,7 +23,8 @@ export type SearchChain = { -readonly [K in keyof FiniteHold]: FiniteHold[K] };
 
 /** The chain of one part under one brief, worst case, its shape still to be set. Needs a known leakage. */
 export function chainOf(candidate: Candidate, brief: Brief): SearchChain | null {
-  if (candidate.leak === null) return null;
+  // Without the tolerance a finite hold has no start to reckon from; an endless one does not need it.
+  if (candidate.leak === null || (candidate.tolerance === null && brief.hold !== Number.POSITIVE_INFINITY)) return null;
   return {
     voltage: brief.voltage * (1 + brief.overshoot),
     series: 1,

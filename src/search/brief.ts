@@ -1,6 +1,6 @@
 // What is wanted: the brief, read from JSON or flags, every value a number in SI or text with a unit.
 
-import { z } from "zod";
+import * as z from "zod";
 import {
   accepted,
   type Dimension,
@@ -100,6 +100,8 @@ export const briefSchema = z.strictObject({
   ripple: quantity("fraction", { least: 0, most: 1, open: true }),
   basis: basis.default("worst case"),
   risk: quantity("fraction", { least: 0, most: 0.5, open: true }).default(1e-4),
+  /** How a unit's capacitance is spread over its tolerance, for the statistical basis. */
+  distribution: z.enum(["uniform", "normal"]).default("uniform"),
   derating: quantity("fraction", { least: 0, most: 1, open: true }).default(0.9),
   overshoot: quantity("fraction", { least: 0, most: 1 }).default(0),
   ageing: quantity("fraction", { least: 0, most: 0.9 }).default(0),

@@ -2,7 +2,7 @@
 
 import type { Leak } from "../bank/index.ts";
 import { type Capacitor, unitVolume } from "../catalog/index.ts";
-import { minorDigits, type Tolerance } from "../quantity/index.ts";
+import type { Tolerance } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 
 export interface Candidate {
@@ -17,8 +17,6 @@ export interface Candidate {
   /** m^3 and kg of one unit; null when unknown. */
   readonly volume: number | null;
   readonly mass: number | null;
-  /** Minor units of the plan's currency for one minor unit of the part's. */
-  readonly exchange: number;
 }
 
 /** The lower of the brief's derating and the part's own holds. */
@@ -36,14 +34,7 @@ function basisCapacitance(unit: Capacitor, { basis, ageing }: Brief): number {
   return unit.capacitance * (1 - (unit.tolerance?.low ?? 0)) * (1 - ageing);
 }
 
-/** Factor from minor units of one currency to another's; null when no rate is known. */
-export function exchangeRate(from: string | undefined, to: string | null, brief: Brief): number | null {
-  if (from === undefined || to === null || from === to) return 1;
-  const rate = brief.exchange?.[from];
-  return rate === undefined ? null : rate * 10 ** (minorDigits(to) - minorDigits(from));
-}
-
-export function prepare(unit: Capacitor, brief: Brief, currency: string | null): Candidate {
+export function prepare(unit: Capacitor, brief: Brief): Candidate {
   return {
     unit,
     limit: unitLimit(unit, brief),
@@ -52,6 +43,5 @@ export function prepare(unit: Capacitor, brief: Brief, currency: string | null):
     leak: leakOf(unit),
     volume: unitVolume(unit),
     mass: unit.mass ?? null,
-    exchange: exchangeRate(unit.currency, currency, brief) ?? 1,
   };
 }

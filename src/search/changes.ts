@@ -1,18 +1,52 @@
 // When nothing fits: the least change of each single demand that would make something fit, each found by trying.
 
 import { requiredCapacitance } from "../bank/index.ts";
-import { purchase } from "../catalog/index.ts";
+import { type Capacitor, purchase } from "../catalog/index.ts";
 import { minorDigits } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { idOf } from "./rank.ts";
 import type { Change } from "./result.ts";
 import { type SweepInput, sweep } from "./sweep.ts";
 
-/** The first layout that fits under a changed brief, or null. */
-function fits(input: SweepInput, change: Partial<Brief>): string | null {
+interface Fit {
+  /** The first layout that fits. */
+  readonly layout: string;
+  /** All parts that give one. */
+  readonly parts: readonly Capacitor[];
+}
+
+/** What fits under a changed brief, or null. */
+function fits(input: SweepInput, change: Partial<Brief>): Fit | null {
   const brief = { ...input.brief, ...change };
-  const { table } = sweep({ ...input, brief, required: requiredCapacitance(brief) }, true);
-  return table.count > 0 ? idOf(table, input.parts, 0) : null;
+  const changed = { ...input, brief, required: requiredCapacitance(brief) };
+  const parts: Capacitor[] = [];
+  let layout: string | null = null;
+  for (const unit of input.parts) {
+    const { table } = sweep({ ...changed, parts: [unit] }, true);
+    if (table.count === 0) continue;
+    parts.push(unit);
+    layout ??= idOf(table, [unit], 0);
+  }
+  return layout === null ? null : { layout, parts };
+}
+
+/** The last value between one that does not fit and one that does. Only parts that fit so far are tried again: nothing else comes nearer. */
+function narrow(
+  input: SweepInput,
+  key: keyof Brief,
+  span: { readonly no: number; readonly yes: number; readonly fit: Fit },
+  middleOf: (no: number, yes: number) => number | null,
+): { readonly to: number; readonly layout: string } {
+  let { no, yes, fit } = span;
+  for (let middle = middleOf(no, yes); middle !== null; middle = middleOf(no, yes)) {
+    const found = fits({ ...input, parts: fit.parts }, { [key]: middle });
+    if (found === null) no = middle;
+    else {
+      yes = middle;
+      fit = found;
+    }
+  }
+  return { to: yes, layout: fit.layout };
 }
 
 /** Between a value that does not fit and one that does, the last that still fits, to 0.01 %. Both positive. */
@@ -22,19 +56,12 @@ function edge(
   bad: number,
   good: number,
 ): Change | null {
-  let layout = fits(input, { [key]: good });
-  if (layout === null) return null;
-  let [no, yes] = [bad, good];
-  while (Math.abs(Math.log(yes / no)) > 1e-4) {
-    const middle = Math.sqrt(no * yes);
-    const found = fits(input, { [key]: middle });
-    if (found === null) no = middle;
-    else {
-      yes = middle;
-      layout = found;
-    }
-  }
-  return { field: key, from: input.brief[key], to: safeSide(yes, good < bad), layout, note: "" };
+  const fit = fits(input, { [key]: good });
+  if (fit === null) return null;
+  const found = narrow(input, key, { no: bad, yes: good, fit }, (no, yes) =>
+    Math.abs(Math.log(yes / no)) > 1e-4 ? Math.sqrt(no * yes) : null,
+  );
+  return { field: key, from: input.brief[key], to: safeSide(found.to, good < bad), layout: found.layout, note: "" };
 }
 
 /** Four figures, rounded to the side that still fits. */
@@ -44,13 +71,16 @@ function safeSide(value: number, down: boolean): number {
   return Number(`${down ? Math.floor(scaled) : Math.ceil(scaled)}e${power}`);
 }
 
-/** A voltage that fits nearest to the wanted one, looked for in steps of 5 % each way up to a factor of four. */
+/** Steps of the search for a voltage: 5 % up to a factor of four, then a quarter, up to a factor of about a thousand. */
+const ratioAt = (step: number): number => 1.05 ** Math.min(step, 28) * 1.25 ** Math.max(0, step - 28);
+
+/** A voltage that fits nearest to the wanted one, looked for each way. */
 function voltageChange(input: SweepInput): Change | null {
   const { voltage } = input.brief;
-  for (let step = 1; step <= 28; step++) {
-    for (const ratio of [1.05 ** -step, 1.05 ** step]) {
+  for (let step = 1; step <= 53; step++) {
+    for (const ratio of [1 / ratioAt(step), ratioAt(step)]) {
       if (fits(input, { voltage: voltage * ratio }) === null) continue;
-      const inner = ratio < 1 ? 1.05 ** -(step - 1) : 1.05 ** (step - 1);
+      const inner = ratio < 1 ? 1 / ratioAt(step - 1) : ratioAt(step - 1);
       return edge(input, "voltage", voltage * inner, voltage * ratio);
     }
   }
@@ -65,17 +95,15 @@ function energyChange(input: SweepInput): Change | null {
   return null;
 }
 
-/** The smallest of a doubling series of whole limits that fits, then the least between. */
+/** The least whole limit that fits, up to `most`. */
 function wholeChange(input: SweepInput, key: "maxSeries" | "maxUnits", most: number): Change | null {
   const from = input.brief[key];
-  if (fits(input, { [key]: most }) === null) return null;
-  let [no, yes] = [from, most];
-  while (yes - no > 1) {
-    const middle = Math.floor((no + yes) / 2);
-    if (fits(input, { [key]: middle }) === null) no = middle;
-    else yes = middle;
-  }
-  return { field: key, from, to: yes, layout: fits(input, { [key]: yes }) as string, note: "" };
+  const fit = fits(input, { [key]: most });
+  if (fit === null) return null;
+  const found = narrow(input, key, { no: from, yes: most, fit }, (no, yes) =>
+    yes - no > 1 ? Math.floor((no + yes) / 2) : null,
+  );
+  return { field: key, from, ...found, note: "" };
 }
 
 /** The smallest addition to one part's stock that gives a layout. */
@@ -87,10 +115,22 @@ function stockChange(input: SweepInput): Change | null {
     const { available, ...unlimited } = unit;
     const { table } = sweep({ ...input, parts: [unlimited] }, true);
     if (table.count === 0) continue;
+    // The cheapest purchase may hold more than is needed, for a price break: it surely does, and less may do too.
     const bought = purchase(unlimited, (table.units[0] as number) + input.brief.spares)?.bought ?? 0;
-    if (bought - available >= least) continue;
-    least = bought - available;
-    best = { field: "available", from: available, to: bought, layout: idOf(table, [unlimited], 0), note: unit.part };
+    const fitting = (stock: number): string | null => {
+      const parts = [{ ...unit, available: stock }];
+      const found = sweep({ ...input, parts }, true).table;
+      return found.count > 0 ? idOf(found, parts, 0) : null;
+    };
+    let [no, yes] = [available, bought];
+    while (yes - no > 1) {
+      const middle = Math.floor((no + yes) / 2);
+      if (fitting(middle) === null) no = middle;
+      else yes = middle;
+    }
+    if (yes - available >= least) continue;
+    least = yes - available;
+    best = { field: "available", from: available, to: yes, layout: fitting(yes) as string, note: unit.part };
   }
   return best;
 }

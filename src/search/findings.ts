@@ -4,9 +4,11 @@ import { FIT } from "../bank/index.ts";
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
 import { stateOf } from "../catalog/index.ts";
 import { hazardFindings } from "../hazard/index.ts";
+import { unitShort } from "../pulse/index.ts";
 import { type Finding, formatQuantity, type Verdict } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
+import { faultBankOf } from "./faults.ts";
 import type { LayoutResult } from "./result.ts";
 
 export interface FindingsInput {
@@ -46,16 +48,29 @@ export function atLeast(draft: Draft): Finding {
 export function findingsOf(input: FindingsInput): readonly Finding[] {
   return [
     chargingShare(input),
+    ...chargingRisk(input),
     holdingShare(input),
     ...balanceLoad(input),
     reverse(input),
     energy(input),
+    ...steadySupply(input),
     bleed(input),
     ...hazards(input),
+    ...oneShorted(input),
   ];
 }
 
-function chargingShare({ result }: FindingsInput): Finding {
+/** With the statistical basis: the chance against the brief's risk, its error counted against it. */
+function chargingRisk({ result, brief }: FindingsInput): readonly Finding[] {
+  if (result.risk === undefined) return [];
+  const value = result.risk === null ? null : Math.min(1, result.risk.exceed + result.risk.error);
+  const spread = brief.distribution === "normal" ? "normal, cut at three sigma" : "uniform over its tolerance";
+  const note = `Chance that any unit of the bank exceeds its limit while charging: units independent, each ${spread}; what a whole lot has in common cancels.`;
+  const draft = { id: "charging-risk", state: "charging", value, limit: brief.risk, unit: "1" } as const;
+  return [atMost({ ...draft, source: "methods-derived", note })];
+}
+
+function chargingShare({ result, brief }: FindingsInput): Finding {
   const unknown = result.share.charging === null;
   return atMost({
     id: "charging-share",
@@ -64,6 +79,8 @@ function chargingShare({ result }: FindingsInput): Finding {
     limit: result.share.limit,
     unit: "V",
     source: "joulewright-design",
+    // The builder chose to bear a stated risk instead: the worst case is told, not refused.
+    exceeded: brief.basis === "statistical" ? "warn" : "fail",
     note: unknown
       ? "The tolerance is unknown, so how the voltage divides while charging is not known: measure the units or find the datasheet."
       : result.series === 1
@@ -169,6 +186,18 @@ function energy({ result, brief }: FindingsInput): Finding {
   });
 }
 
+/** With a steady current drawn between recharges: the capacitance that keeps the fall within the brief's. */
+function steadySupply({ result, brief }: FindingsInput): readonly Finding[] {
+  if (brief.steady === undefined) return [];
+  const { current, frequency } = brief.steady;
+  const limit = current / (frequency * brief.ripple * brief.voltage);
+  const value = brief.basis === "nominal" ? result.capacitance.nominal : result.capacitance.low;
+  const note = "Capacitance that feeds the steady current from one recharge to the next within the allowed fall.";
+  return [
+    atLeast({ id: "steady-current", state: "pulse", value, limit, unit: "F", source: "joulewright-design", note }),
+  ];
+}
+
 function bleed({ result }: FindingsInput): Finding {
   const { seconds, toVoltage } = result.bleed;
   const safe = formatQuantity(toVoltage, "voltage");
@@ -180,6 +209,10 @@ function bleed({ result }: FindingsInput): Finding {
     unit: "s",
     source: "joulewright-design",
   } as const;
+  if (seconds === null && result.balance !== null) {
+    const note = `The tolerance is unknown, so the longest time to ${safe} is not known.`;
+    return { ...draft, verdict: "not assessed", margin: null, note };
+  }
   if (seconds === null) {
     const note = `No balancing chain drains this bank to ${safe}: it needs a bleed resistor of its own, a dump and a shorting link.`;
     return { ...draft, verdict: "warn", margin: null, note };
@@ -198,4 +231,25 @@ function hazards({ result, unit, brief }: FindingsInput): readonly Finding[] {
     bleedSeconds: result.bleed.seconds ?? Number.POSITIVE_INFINITY,
   });
   return findings.filter((finding) => finding.id !== "bleed-time");
+}
+
+/** One unit shorted with the charger still on: what the sound ones then see. A warning, because it takes a fault to get there. */
+function oneShorted({ result, unit, brief }: FindingsInput): readonly Finding[] {
+  if (result.series === 1) return [];
+  const fault = unitShort(faultBankOf({ result, unit, brief }));
+  const value = fault.worstVoltageSpread;
+  const note = `One unit shorted with the charger still on: the sound ones against their ${unit.surgeVoltage === undefined ? "rated" : "surge"} voltage. ${fault.stops}`;
+  const limit = unit.surgeVoltage ?? unit.voltage;
+  return [
+    atMost({
+      id: "unit-short",
+      state: "faulted",
+      value,
+      limit,
+      unit: "V",
+      source: "methods-8",
+      exceeded: "warn",
+      note,
+    }),
+  ];
 }

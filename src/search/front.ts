@@ -30,28 +30,46 @@ const WEIGHTS: readonly (readonly [number, number, number, number])[] = [
   [1, 0, 0, 2],
 ];
 
-/** Bands of stress, from 0 to 1; what lies above, or is unknown, goes to the last. */
+/** Bands of stress with about as many rows each. */
 const BANDS = 48;
-const bandOf = (stress: number): number => (stress < 1 ? Math.floor(stress * BANDS) : BANDS - 1);
+/** Steps of stress from 0 to 1 that bands are made of; what lies above, or is unknown, goes to the last. */
+const STEPS = 4096;
+const stepOf = (stress: number): number => (stress < 1 ? Math.floor(stress * STEPS) : STEPS - 1);
 
 /** Rows looked at to find the strong ones; every row is still judged. */
-const SAMPLE = 40_000;
+const SAMPLE = 20_000;
+
+interface Banding {
+  readonly bands: Uint8Array;
+  /** Every how manieth row is looked at. */
+  readonly stride: number;
+}
+
+/** The band of each step of stress, rising with it, from a sample of the rows. */
+function bandsOf(stress: Float64Array, count: number, stride: number): Uint8Array {
+  const seen = new Uint32Array(STEPS);
+  let total = 0;
+  for (let row = 0; row < count; row += stride, total++) seen[stepOf(stress[row] as number)]! += 1;
+  let below = 0;
+  return Uint8Array.from(seen, (here) => {
+    const band = Math.min(BANDS - 1, Math.floor((below * BANDS) / Math.max(1, total)));
+    below += here;
+    return band;
+  });
+}
 
 /** For each band, a few rows of no higher band that are strong in cost, volume, mass and units. */
-function strongRows(columns: Columns, count: number): readonly number[][] {
+function strongRows(columns: Columns, count: number, { bands, stride }: Banding): readonly number[][] {
   const log = (x: number): number => (x === Number.POSITIVE_INFINITY ? 60 : Math.log(x + 1e-12));
   const [cost, volume, mass, units, stress] = columns;
   const best = Array.from({ length: BANDS }, () => new Float64Array(WEIGHTS.length).fill(Number.POSITIVE_INFINITY));
   const rows = Array.from({ length: BANDS }, () => new Int32Array(WEIGHTS.length).fill(-1));
-  const step = Math.max(1, Math.floor(count / SAMPLE));
-  for (let row = 0; row < count; row += step) {
-    const band = bandOf(stress[row] as number);
-    const [c, v, m, u] = [cost, volume, mass, units].map((column) => log(column[row] as number)) as [
-      number,
-      number,
-      number,
-      number,
-    ];
+  for (let row = 0; row < count; row += stride) {
+    const band = bands[stepOf(stress[row] as number)] as number;
+    const c = log(cost[row] as number);
+    const v = log(volume[row] as number);
+    const m = log(mass[row] as number);
+    const u = log(units[row] as number);
     const scores = best[band] as Float64Array;
     for (let w = 0; w < WEIGHTS.length; w++) {
       const [a, b, d, e] = WEIGHTS[w] as readonly [number, number, number, number];
@@ -88,22 +106,32 @@ function beatenBy(columns: Columns, list: number[], row: number): boolean {
   return false;
 }
 
+/** How many rows that nothing has beaten yet a band remembers, besides its strong ones. */
+const ARCHIVE = 64;
+
 /** Row numbers of the front, by cost. */
 export function frontRows(table: LayoutTable): readonly number[] {
   const columns = columnsOf(table);
   const stress = columns[4];
-  const strong = strongRows(columns, table.count);
+  const stride = Math.max(1, Math.floor(table.count / SAMPLE));
+  const bands = bandsOf(stress, table.count, stride);
+  const strong = strongRows(columns, table.count, { bands, stride });
+  const most = strong.map((list) => list.length + ARCHIVE);
   const alive: number[] = [];
   for (let row = 0; row < table.count; row++) {
-    if (!beatenBy(columns, strong[bandOf(stress[row] as number)] as number[], row)) alive.push(row);
+    const band = bands[stepOf(stress[row] as number)] as number;
+    const list = strong[band] as number[];
+    if (beatenBy(columns, list, row)) continue;
+    alive.push(row);
+    if (list.length < (most[band] as number)) list.push(row);
   }
   const front: number[] = [];
-  const bands: number[][] = Array.from({ length: BANDS }, () => []);
+  const found: number[][] = Array.from({ length: BANDS }, () => []);
   for (const row of sortByCost(alive, columns)) {
-    const band = bandOf(stress[row] as number);
-    if (beatenBy(columns, bands[band] as number[], row)) continue;
+    const band = bands[stepOf(stress[row] as number)] as number;
+    if (beatenBy(columns, found[band] as number[], row)) continue;
     front.push(row);
-    for (let b = band; b < BANDS; b++) (bands[b] as number[]).push(row);
+    for (let b = band; b < BANDS; b++) (found[b] as number[]).push(row);
   }
   return front;
 }

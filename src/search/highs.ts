@@ -39,6 +39,9 @@ const load = (): Promise<Engine> => {
   return engine;
 };
 
+/** Bytes the engine holds, for the test that models are given back. */
+export const highsMemory = async (): Promise<number> => (await load()).memoryBytes;
+
 /** Minimises the programme. Never throws for what the programme holds. */
 export async function solveWithHighs(program: Program, limits: HighsLimits = {}): Promise<HighsAnswer> {
   if (program.columns.length === 0) {

@@ -1,11 +1,12 @@
 // The front door: brief and parts to ranked layouts, their front, every refusal, and what would have to give way.
 
 import { requiredCapacitance } from "../bank/index.ts";
-import { type Capacitor, DEFAULT_FAMILY, isPriced, type ResistorFamily } from "../catalog/index.ts";
-import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
+import { type Capacitor, DEFAULT_FAMILY, type ResistorFamily } from "../catalog/index.ts";
+import { accepted, type Read } from "../quantity/index.ts";
 import { assess } from "./assess.ts";
 import type { Brief } from "./brief.ts";
 import { leastChanges } from "./changes.ts";
+import { planCurrency, pricedIn } from "./currency.ts";
 import { frontRows } from "./front.ts";
 import { comparison, firstRows, idOf, type Ranking, tiesOf } from "./rank.ts";
 import type { LayoutResult, PlanResult } from "./result.ts";
@@ -24,33 +25,15 @@ export interface PlanInput {
   readonly quick?: boolean;
 }
 
-/** The currency of a plan: the brief's, else the only one in the catalogues. Two without a rate are refused. */
-export function planCurrency(
-  brief: Brief,
-  parts: readonly Capacitor[],
-  families: readonly ResistorFamily[],
-): Read<string | null> {
-  const priced = [...parts, ...families].filter((terms) => isPriced(terms));
-  const seen = new Set<string>();
-  for (const terms of priced) if (terms.currency !== undefined) seen.add(terms.currency);
-  const currency = brief.currency ?? [...seen][0] ?? (priced.length > 0 ? "EUR" : null);
-  const foreign = [...seen].filter((code) => code !== currency && brief.exchange?.[code] === undefined);
-  if (foreign.length === 0) return accepted(currency);
-  const fault: Refusal = {
-    code: "two-currencies",
-    place: { field: "currency" },
-    read: `prices in ${[...seen].sort().join(" and ")}`,
-    want: `one currency, or a rate in the brief such as "currency": "${currency}", "exchange": {"${foreign[0]}": 0.92}`,
-  };
-  return refused(fault);
-}
-
 /** Plans. Refuses only what cannot be understood (two currencies); nothing fitting is an answer, with its least changes. */
 export function plan(input: PlanInput): Read<PlanResult> {
-  const { brief, parts, families = [DEFAULT_FAMILY], limit = 20, rank = "cost", quick = false } = input;
-  const money = planCurrency(brief, parts, families);
+  const { brief, limit = 20, rank = "cost", quick = false } = input;
+  const given = input.families ?? [DEFAULT_FAMILY];
+  const money = planCurrency(brief, input.parts, given);
   if (!money.ok) return money;
   const currency = money.value;
+  const parts = pricedIn(distinct(input.parts), currency, brief);
+  const families = pricedIn(given, currency, brief);
   const required = requiredCapacitance(brief);
   const work: SweepInput = { parts, families, brief, required, currency };
   const { table, refused: refusals } = sweep(work);
@@ -65,8 +48,24 @@ export function plan(input: PlanInput): Read<PlanResult> {
     front: frontRows(table).map((row) => idOf(table, parts, row)),
     refused: refusals,
     changes: table.count === 0 && !quick ? leastChanges(work) : [],
+    ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
     notes: notesOf(brief),
   });
+}
+
+/** Parts by their first row: a name that stands twice would give two layouts one name. */
+function distinct(parts: readonly Capacitor[]): readonly Capacitor[] {
+  const seen = new Set<string>();
+  for (const unit of parts) seen.add(unit.part);
+  if (seen.size === parts.length) return parts;
+  seen.clear();
+  return parts.filter((unit) => !seen.has(unit.part) && seen.add(unit.part));
+}
+
+/** What the same brief takes when every unit may be at its worst: the price of certainty. */
+function bestOfWorstCase(input: PlanInput): LayoutResult | null {
+  const worst = plan({ ...input, brief: { ...input.brief, basis: "worst case" }, limit: 1, quick: true });
+  return worst.ok ? (worst.value.layouts[0] ?? null) : null;
 }
 
 /** One row of the table in full. */
@@ -86,5 +85,10 @@ function notesOf(brief: Brief): readonly string[] {
   if (brief.ageing > 0) notes.push("Ageing is counted in energy and not in sharing: units of one bank age alike.");
   if (brief.basis === "nominal")
     notes.push("The nominal basis counts nominal capacitance for energy; sharing is still the worst case.");
+  if (brief.basis === "statistical") {
+    notes.push(
+      "The statistical basis bears a stated risk while charging; energy still counts every unit at its lowest, because a lot may lie low as a whole, and holding is still the worst case.",
+    );
+  }
   return notes;
 }

@@ -4,6 +4,7 @@ import type { Ties } from "../bank/index.ts";
 import type { Capacitor, Purchase } from "../catalog/index.ts";
 import type { Finding } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
+import type { Risk } from "./risk.ts";
 
 /** A value under low, nominal and high capacitance; null where the tolerance is unknown. */
 export interface Span {
@@ -69,6 +70,8 @@ export interface LayoutResult {
   readonly mass: number | null;
   /** Worst unit voltage over rated voltage; null when not assessed. */
   readonly stress: number | null;
+  /** With the statistical basis: chance that any unit of the bank exceeds its limit while charging; null when not assessed. */
+  readonly risk?: Risk | null;
   readonly purchase: { readonly capacitors: Purchase | null; readonly resistors: Purchase | null };
   readonly findings: readonly Finding[];
 }
@@ -99,6 +102,8 @@ export interface PlanResult {
   readonly front: readonly string[];
   readonly refused: readonly RefusedPart[];
   readonly changes: readonly Change[];
+  /** With the statistical basis: the best layout of the worst case, to say what it would have cost; null when none fits. */
+  readonly worstCase?: LayoutResult | null;
   readonly notes: readonly string[];
 }
 

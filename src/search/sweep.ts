@@ -1,12 +1,13 @@
 // Tries every part, every series count and both ties, and keeps what does the job: exhaustive, one pass, no layout object made.
 
 import { chargingWorst, FIT, leastParallel } from "../bank/index.ts";
-import { type Capacitor, cheapest, type ResistorFamily } from "../catalog/index.ts";
+import { type Capacitor, cheapest, type ResistorFamily, toBuy } from "../catalog/index.ts";
 import { minorDigits } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing } from "./balancing.ts";
 import type { Brief } from "./brief.ts";
 import { prepare } from "./candidate.ts";
 import type { RefusedPart } from "./result.ts";
+import { type RiskCase, riskJudge } from "./risk.ts";
 import { type LayoutTable, newTable, pushRow } from "./table.ts";
 
 export interface SweepInput {
@@ -35,7 +36,11 @@ export function leastSeries(voltage: number, limit: number, tolerance: { low: nu
   const bound = limit * (1 + FIT);
   if (voltage <= bound) return 1;
   const guess = Math.max(2, Math.floor(1 + ((voltage / bound - 1) * (1 + high)) / (1 - low)));
-  for (let n = guess; ; n++) if (chargingWorst(voltage, n, { low, high }) <= bound) return n;
+  // The guess is the closed form rounded down: one or two steps find the least. An absurd count is returned as it is, above any limit.
+  if (guess > 1e9) return guess;
+  let n = guess;
+  while (chargingWorst(voltage, n, { low, high }) > bound) n++;
+  return n;
 }
 
 const balancing = newBalancing();
@@ -45,27 +50,32 @@ const bill = { quantity: 0, cost: 0 };
 export function sweep(input: SweepInput, stopAtFirst = false): Sweep {
   const table = newTable(Math.max(256, Math.min(input.parts.length * 32, 1 << 22)));
   const refused: RefusedPart[] = [];
+  const judge = input.brief.basis === "statistical" ? riskJudge(input.brief) : null;
   for (let i = 0; i < input.parts.length; i++) {
-    const reason = sweepPart(input, i, table);
+    const reason = sweepPart(input, i, table, judge);
     if (reason !== null) refused.push({ part: (input.parts[i] as Capacitor).part, ...reason });
     if (stopAtFirst && table.count > 0) break;
   }
   return { table, refused };
 }
 
-function sweepPart(input: SweepInput, index: number, table: LayoutTable): Reason | null {
+/** Whether a shape shares safely while charging although its worst case does not; null when only the worst case counts. */
+type Judge = ((given: RiskCase) => boolean) | null;
+
+function sweepPart(input: SweepInput, index: number, table: LayoutTable, judge: Judge): Reason | null {
   const { brief, families, required, currency } = input;
   const unit = input.parts[index] as Capacitor;
-  const candidate = prepare(unit, brief, currency);
+  const candidate = prepare(unit, brief);
   const voltage = brief.voltage * (1 + brief.overshoot);
   const minor = 10 ** minorDigits(currency ?? "");
-  const least = leastSeries(voltage, candidate.limit, candidate.tolerance);
+  const worstSeries = leastSeries(voltage, candidate.limit, candidate.tolerance);
+  const least = judge === null ? worstSeries : leastSeries(voltage, candidate.limit, null);
   if (least > brief.maxSeries) return { reason: "series-limit", value: least, limit: brief.maxSeries };
   const chain = chainOf(candidate, brief);
   const before = table.count;
   let why: Reason | null = null;
   const ceiling = (reason: string, value: number | null, limit: number | null): void => {
-    if (why === null || why.reason === "balance") why = { reason, value, limit };
+    if (why === null || why.reason === "balance" || why.reason === "risk") why = { reason, value, limit };
     else if (why.reason === reason && value !== null && why.value !== null && value < why.value) why.value = value;
   };
   for (let n = least; n <= brief.maxSeries; n++) {
@@ -76,10 +86,10 @@ function sweepPart(input: SweepInput, index: number, table: LayoutTable): Reason
       break;
     }
     if (!cheapest(unit, units + brief.spares, bill)) {
-      ceiling("stock", units + brief.spares, unit.available === undefined ? null : unit.available + (unit.onHand ?? 0));
+      ceiling("stock", toBuy(unit, units + brief.spares), unit.available ?? null);
       break;
     }
-    const capacitors = bill.cost * candidate.exchange;
+    const capacitors = bill.cost;
     const volume = candidate.volume === null ? Number.POSITIVE_INFINITY : candidate.volume * units;
     const mass = candidate.mass === null ? Number.POSITIVE_INFINITY : candidate.mass * units;
     if (over(volume, brief.maxVolume)) {
@@ -101,6 +111,14 @@ function sweepPart(input: SweepInput, index: number, table: LayoutTable): Reason
       let worst = charging;
       let resistors = 0;
       let family = -1;
+      if (judge !== null && n < worstSeries) {
+        const ties = tied === 1 ? "cross-tied" : "strings";
+        const tolerance = candidate.tolerance ?? { low: 0, high: 0 };
+        if (!judge({ tolerance, series: n, parallel: p, ties, share: candidate.limit / voltage })) {
+          ceiling("risk", null, brief.risk);
+          continue;
+        }
+      }
       if (n > 1 && chain !== null) {
         chain.series = n;
         chain.sharing = tied === 1 ? p : 1;

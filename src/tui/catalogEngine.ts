@@ -1,11 +1,13 @@
 // The engine behind the screens: the search on one set of parts and resistors, each answer pure.
-import type { Capacitor, Purchase, ResistorFamily } from "../catalog/index.ts";
-import { accepted, toMajor } from "../quantity/index.ts";
+import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
+import { cautionsFor, DEFERENCE } from "../hazard/index.ts";
+import { billOf } from "../order/index.ts";
+import { accepted } from "../quantity/index.ts";
 import { assess, type Brief, type LayoutResult, plan, planCurrency, readBrief } from "../search/index.ts";
-import type { Arrangement, BillLine, BillView, EnginePort } from "./ports.ts";
+import type { Arrangement, EnginePort } from "./ports.ts";
 
-/** Layouts worked out in full for the list. */
-const LISTED = 200;
+/** Said on every copy of an order: the standing cautions, and to whom this program defers. */
+const BILL_CAUTIONS: readonly string[] = [...cautionsFor({}), ...DEFERENCE].map(({ short }) => short);
 
 export interface Stock {
   readonly parts: readonly Capacitor[];
@@ -27,21 +29,6 @@ export function arrangementNamed(id: string): Arrangement | null {
   };
 }
 
-function lineOf(item: string, bought: Purchase, currency: string, orderCode: string): BillLine {
-  const money = (minor: number | null): number | null => (minor === null ? null : toMajor(Math.round(minor), currency));
-  return {
-    item,
-    needed: bought.needed,
-    onHand: bought.fromHand,
-    packs: bought.packs,
-    bought: bought.bought,
-    surplus: bought.surplus,
-    consumed: money(bought.consumed),
-    cost: money(bought.cost),
-    orderCode,
-  };
-}
-
 export function catalogEngine({ parts, families }: Stock): EnginePort {
   const byName = new Map(parts.map((unit) => [unit.part, unit]));
   const currencyOf = (brief: Brief): string | null => {
@@ -54,8 +41,8 @@ export function catalogEngine({ parts, families }: Stock): EnginePort {
   };
   return {
     readBrief: (values) => readBrief(values),
-    plan: (brief, { rank, frontOnly, quick }) => {
-      const planned = plan({ brief, parts, families, limit: LISTED, rank, quick });
+    plan: (brief, { rank, most, frontOnly, quick }) => {
+      const planned = plan({ brief, parts, families, limit: most, rank, quick });
       if (!planned.ok || !frontOnly) return planned;
       const given = new Map(planned.value.layouts.map((layout) => [layout.id, layout]));
       const layouts = planned.value.front.map((id) => {
@@ -65,19 +52,11 @@ export function catalogEngine({ parts, families }: Stock): EnginePort {
       return accepted({ ...planned.value, layouts: layouts.filter((layout) => layout !== null) });
     },
     check: (brief, arrangement) => assessed(brief, currencyOf(brief), arrangement),
-    bill: (brief, layout): BillView => {
-      const currency = layout.cost?.currency ?? currencyOf(brief) ?? "";
-      const { capacitors, resistors } = layout.purchase;
-      const family = families.find(({ family: name }) => name === layout.balance?.family);
-      const lines = [
-        ...(capacitors === null
-          ? []
-          : [lineOf(layout.part, capacitors, currency, byName.get(layout.part)?.orderCode ?? "")]),
-        ...(layout.balance === null || resistors === null
-          ? []
-          : [lineOf(`balancing resistor, ${layout.balance.family}`, resistors, currency, family?.orderCode ?? "")]),
-      ];
-      return { lines, total: layout.cost?.total ?? null, currency, unpriced: layout.cost?.unpriced ?? [] };
+    bill: (brief, layout) => {
+      const unit = byName.get(layout.part);
+      if (unit === undefined) return null;
+      const currency = currencyOf(brief);
+      return billOf({ layout, unit, families, brief, currency, cautions: BILL_CAUTIONS });
     },
   };
 }

@@ -42,6 +42,11 @@ function applyStyle(pen: Pen, parameters: string): void {
   }
 }
 
+const UNSEEN_ON_BLANKS = /^(?:(?:[123]|3[0-7]|9[0-7])(?:;|$))*$/;
+
+/** A style without inverse, underline, strike or ground looks the same as none on a blank. */
+export const isUnseenOnBlanks = (style: string): boolean => UNSEEN_ON_BLANKS.test(style);
+
 const STYLE_CODE = /\x1b\[([\d;]*)m/y;
 
 /**
@@ -67,7 +72,8 @@ export function rowCells(row: string, columns: number): readonly Cell[] {
     i += char.length;
     const width = cellsOf(char);
     if (cells.length + width > columns) break;
-    cells.push({ text: char < " " ? " " : char, style });
+    const text = char < " " ? " " : char;
+    cells.push({ text, style: text === " " && isUnseenOnBlanks(style) ? "" : style });
     if (width === 2) cells.push({ text: "", style });
   }
   return cells;

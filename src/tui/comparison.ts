@@ -71,7 +71,7 @@ const RESPECTS: readonly Respect[] = [
     value: (l) => l.energy.nominal,
     better: "high",
   },
-  { label: "capacitance, least", text: (l) => shownLimit(l.capacitance.low, "capacitance") },
+  { label: "C, least", text: (l) => shownLimit(l.capacitance.low, "capacitance") },
   { label: "even share", text: (l) => shown(l.share.even, "voltage") },
   { label: "worst, charging", text: (l) => shownWorst(l.share.charging, "voltage") },
   { label: "worst, holding", text: (l) => shownWorst(l.share.holding, "voltage") },

@@ -3,13 +3,13 @@
 export { catalogEngine, type Stock } from "./catalogEngine.ts";
 export type {
   Arrangement,
-  BillLine,
-  BillView,
   EnginePort,
   PlanRequest,
   SaveAnswer,
   ScreenPorts,
   StockFacts,
 } from "./ports.ts";
+export { type ScreenFlags, screenFlags } from "./screenFlags.ts";
 export { openScreens } from "./screens.ts";
+export { type StartOptions, startScreens } from "./start.ts";
 export { screenTrouble } from "./terminal.ts";

@@ -20,7 +20,7 @@ const lists = live.all(live.on("layouts"), live.hasLayouts);
 const compares = live.all(live.on("compare"), live.hasPins);
 const scrolls = live.on("bank", "order");
 const shows = live.all(scrolls, live.hasBank);
-const moves = live.on("layouts", "compare", "bank", "order");
+const moves: live.Live = (state) => lists(state) || compares(state) || shows(state);
 
 /** What lies on top comes first: the first live row wins. */
 const ON_TOP: readonly Short[] = [
@@ -66,8 +66,8 @@ const TYPING: readonly Short[] = [
 const LISTS: readonly Short[] = [
   [["enter"], "Enter", "show bank", { type: "choose" }, lists, 2],
   [["space", "p"], "Space", "pin", { type: "pin" }, lists, 1],
-  [["r"], "r", "order by", { type: "rank" }, live.on("layouts"), 3],
-  [["f"], "f", "only unbeaten", { type: "front" }, live.on("layouts"), 4],
+  [["r"], "r", "order by", { type: "rank" }, lists, 3],
+  [["f"], "f", "only unbeaten", { type: "front" }, lists, 4],
   [["left"], "Left/Right", "column", { type: "column", by: -1 }, compares, 1],
   [["right"], "", "column", { type: "column", by: 1 }, compares],
   [["enter"], "Enter", "show bank", { type: "choose" }, compares, 2],

@@ -42,7 +42,7 @@ export function editLine({ text, caret }: Line, edit: LineEdit): Line {
       return { text: head.slice(0, head.length - size) + tail, caret: caret - size };
     }
     case "backWord": {
-      const kept = head.replace(/\s*\S*$/, "");
+      const kept = head.replace(/\s*\S*\s*$/, "");
       return { text: kept + tail, caret: kept.length };
     }
     case "delete":

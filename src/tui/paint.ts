@@ -1,6 +1,6 @@
 // Paints frames on a terminal by writing only the cells that changed, each run at its own absolute place.
 import { EventEmitter } from "node:events";
-import { BLANK, type Cell, rowCells, sameCell } from "./cells.ts";
+import { BLANK, type Cell, isUnseenOnBlanks, rowCells, sameCell } from "./cells.ts";
 
 /** Cells equal to the old ones between two changed runs that are cheaper to write again than to jump over. */
 const CHEAPER_THAN_A_JUMP = 6;
@@ -16,7 +16,8 @@ function writeRun(cells: readonly Cell[], from: number, to: number): string {
   let style = "";
   for (let column = from; column < to; column += 1) {
     const cell = cellAt(cells, column);
-    if (cell.style !== style) {
+    const keeps = cell.text === " " && cell.style === "" && isUnseenOnBlanks(style);
+    if (cell.style !== style && !keeps) {
       out += style === "" ? `\x1b[${cell.style}m` : `\x1b[0${cell.style === "" ? "" : `;${cell.style}`}m`;
       style = cell.style;
     }

@@ -1,5 +1,6 @@
 // What the screens need from outside: the engine, the files, the clock and the terminal, handed in by main.
 import type { Layout } from "../bank/index.ts";
+import type { Bill } from "../order/index.ts";
 import type { Read } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import type { TerminalInput } from "./input.ts";
@@ -7,26 +8,6 @@ import type { ProcessPort } from "./session.ts";
 
 /** One arrangement by name: what is pinned, chosen and saved. */
 export type Arrangement = Layout;
-
-/** One counted line of an order. Money in the major unit; null is no price. */
-export interface BillLine {
-  readonly item: string;
-  readonly needed: number;
-  readonly onHand: number;
-  readonly packs: number;
-  readonly bought: number;
-  readonly surplus: number;
-  readonly consumed: number | null;
-  readonly cost: number | null;
-  readonly orderCode: string;
-}
-
-export interface BillView {
-  readonly lines: readonly BillLine[];
-  readonly total: number | null;
-  readonly currency: string;
-  readonly unpriced: readonly string[];
-}
 
 /** How saving ended: done, the file is there already, or why not in plain words. */
 export type SaveAnswer =
@@ -36,6 +17,8 @@ export type SaveAnswer =
 
 export interface PlanRequest {
   readonly rank: Ranking;
+  /** Most layouts worked out in full for the list. */
+  readonly most: number;
   /** List only the layouts that no other beats in everything. */
   readonly frontOnly: boolean;
   /** Leave out the search for least changes: asked at every key, with the whole answer asked for when the keys rest. */
@@ -49,7 +32,8 @@ export interface EnginePort {
   readonly plan: (brief: Brief, request: PlanRequest) => Read<PlanResult>;
   /** Assesses one arrangement under a brief; null when the catalogue has no such part. */
   readonly check: (brief: Brief, arrangement: Arrangement) => LayoutResult | null;
-  readonly bill: (brief: Brief, layout: LayoutResult) => BillView;
+  /** What must be bought for a layout; null when the catalogue has no such part. */
+  readonly bill: (brief: Brief, layout: LayoutResult) => Bill | null;
 }
 
 export interface StockFacts {
@@ -67,6 +51,10 @@ export interface ScreenPorts {
   readonly stock: StockFacts;
   /** The brief to start with when none was saved: text by key. */
   readonly brief: Readonly<Record<string, string>>;
+  /** The brief was asked for now, so that it holds and not the one saved last time. */
+  readonly briefFirst: boolean;
+  /** What else the brief says, which the form has no field for; kept and planned with. */
+  readonly extra: Readonly<Record<string, unknown>>;
   /** The text last given to `saveSession`, or null. */
   readonly loadSession: () => string | null;
   /** Saves at once; null when done, else why not. */
@@ -74,7 +62,7 @@ export interface ScreenPorts {
   /** Puts a saved text that could not be read aside, so that it is not overwritten; where it is now, or null. */
   readonly keepSession: () => string | null;
   /** Writes the order of a bank to a file whose ending names the format. */
-  readonly exportBill: (brief: Brief, layout: LayoutResult, path: string, replace: boolean) => SaveAnswer;
+  readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
   readonly stdin: TerminalInput;
   readonly stdout: TerminalOutput;
   /** Writes to the terminal at once. */

@@ -8,11 +8,14 @@ import { MOST_PINS, SCREENS, type State } from "./state.ts";
 
 const VERSION = 1;
 
-export type SavedPart = Pick<State, "values" | "pins" | "chosen" | "rank" | "frontOnly" | "screen" | "selected">;
+export type SavedPart = Pick<
+  State,
+  "values" | "extra" | "pins" | "chosen" | "rank" | "frontOnly" | "screen" | "selected"
+>;
 
 export const savedText = (state: State): string => {
-  const { values, pins, chosen, rank, frontOnly, screen, selected } = state;
-  return `${JSON.stringify({ version: VERSION, values, pins, chosen, rank, frontOnly, screen, selected }, null, 2)}\n`;
+  const { values, extra, pins, chosen, rank, frontOnly, screen, selected } = state;
+  return `${JSON.stringify({ version: VERSION, values, extra, pins, chosen, rank, frontOnly, screen, selected }, null, 2)}\n`;
 };
 
 const isCount = (value: unknown): value is number =>
@@ -47,8 +50,11 @@ export function readSaved(text: string): SavedPart | null {
     if (typeof value === "string") values[key] = value.slice(0, LONGEST_LINE);
   }
   const pins = Array.isArray(saved.pins) ? saved.pins.map(arrangement).filter((pin) => pin !== null) : [];
+  const extra = saved.extra;
   return {
     values,
+    // Read again by the brief's own schema at every plan, so that nothing here is believed.
+    extra: typeof extra === "object" && extra !== null && !Array.isArray(extra) ? { ...extra } : {},
     pins: pins.slice(0, MOST_PINS),
     chosen: arrangement(saved.chosen),
     rank: oneOf(RANKINGS, saved.rank, "cost"),

@@ -38,6 +38,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     let mounted: Mounted | null = null;
     let frame: ReturnType<typeof setImmediate> | undefined;
     let over = false;
+    let loading = false;
 
     const draw = (): void => {
       frame = undefined;
@@ -50,18 +51,22 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       if (mounted === null) paint.paint(drawn.rows);
       else mounted.show(drawn.rows);
       paint.settle();
+      if (store.state().answer !== null) loadInk();
+    };
+    /** Ink is loaded once what fits is on screen: the first list does not wait for it either. */
+    const loadInk = (): void => {
+      if (loading) return;
+      loading = true;
+      import("./view/mount.ts").then(({ mount }) => {
+        if (!over) mounted = mount(paint, stdin as NodeJS.ReadStream, drawScreen(store.state()).rows);
+      }, session.fail);
     };
     const run = (effect: Effect, send: (message: Message) => void): void => {
       if (effect.type === "ask") asker.ask();
       else if (effect.type === "quit") session.end(0);
       else if (effect.type === "suspend") session.suspend();
       else if (effect.type === "redraw") paint.redraw();
-      else {
-        const answer = store.state().answer;
-        if (answer?.kind !== "planned") return;
-        const { layout, path, replace } = effect;
-        send({ type: "saved", answer: ports.exportBill(answer.brief, layout, path, replace) });
-      }
+      else send({ type: "saved", answer: ports.exportBill(effect.bill, effect.path, effect.replace) });
     };
     const store = createStore({
       initial: begun,
@@ -121,8 +126,5 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     stdout.on("error", onLost);
     asker.ask();
     draw();
-    import("./view/mount.ts").then(({ mount }) => {
-      if (!over) mounted = mount(paint, stdin as NodeJS.ReadStream, drawScreen(store.state()).rows);
-    }, session.fail);
   });
 }

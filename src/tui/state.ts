@@ -1,8 +1,9 @@
 // The whole state of the screens, and the two closed unions that change it and that it asks for.
+import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import type { Line, LineEdit } from "./line.ts";
-import type { Arrangement, BillView, SaveAnswer, StockFacts } from "./ports.ts";
+import type { Arrangement, SaveAnswer, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
 
 export const SCREENS = ["brief", "layouts", "compare", "bank", "order"] as const;
@@ -23,7 +24,7 @@ export type Answer =
       /** Pinned arrangements assessed under this brief; null where the catalogue has no such part. */
       readonly pinned: readonly (LayoutResult | null)[];
       readonly chosen: LayoutResult | null;
-      readonly bill: BillView | null;
+      readonly bill: Bill | null;
     };
 
 export interface Notice {
@@ -46,6 +47,8 @@ export interface State {
   readonly help: boolean;
   /** Text of the brief's fields by key; a key that is absent is blank. */
   readonly values: Readonly<Record<string, string>>;
+  /** What else the brief says, which the form has no field for. */
+  readonly extra: Readonly<Record<string, unknown>>;
   readonly field: number;
   readonly caret: number;
   readonly rank: Ranking;
@@ -96,7 +99,7 @@ export type Message =
 
 export type Effect =
   | { readonly type: "ask"; readonly asked: number }
-  | { readonly type: "export"; readonly layout: LayoutResult; readonly path: string; readonly replace: boolean }
+  | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };
@@ -120,6 +123,7 @@ export interface Start {
   readonly look: Look;
   readonly stock: StockFacts;
   readonly values: Readonly<Record<string, string>>;
+  readonly extra: Readonly<Record<string, unknown>>;
 }
 
 export const initialState = (start: Start): State => ({

@@ -29,7 +29,7 @@ const choose = (one: FiniteHold, limit: number, from: ResistorFamily): Choice | 
   const choice: Choice = { resistance: 0, element: 0, elements: 0, worst: 0 };
   return chooseBalance(one, limit, from, choice) ? choice : null;
 };
-const slow = (one: FiniteHold, limit: number, from: ResistorFamily) =>
+const slow = (one: FiniteHold, limit: number, from: ResistorFamily, most: number) =>
   slowBalance(
     {
       ...one,
@@ -40,11 +40,14 @@ const slow = (one: FiniteHold, limit: number, from: ResistorFamily) =>
     },
     limit,
     from,
+    most,
   );
 
 /** Same choice; worst to 1e-9, both being closed forms in doubles. */
 function same(one: FiniteHold, limit: number, from: ResistorFamily, at: string): boolean {
-  const [quick, obvious] = [choose(one, limit, from), slow(one, limit, from)];
+  const quick = choose(one, limit, from);
+  // The slow search looks a little further than the quick one found, or far where the quick one found none.
+  const obvious = slow(one, limit, from, quick === null ? 3000 : quick.elements + 1);
   if (obvious === null || quick === null) {
     expect(quick, at).toBe(obvious);
     return false;
@@ -144,7 +147,7 @@ describe("chooseBalance(bank, limit, family, choice)", () => {
 
   // Alike units, a 10 % resistor, ten minutes: at 1 Mohm the resistors have had time to pull one unit to 370 V of 350 V allowed,
   // while a far larger resistor would not have moved it and a far smaller one does not exist.
-  test.fails("what is chosen holds its share: 7 in series on 2200 V, units of 5 %, resistors of 10 %, 600 s", () => {
+  test("what is chosen holds its share: 7 in series on 2200 V, units of 5 %, resistors of 10 %, 600 s", () => {
     const one = bank({
       voltage: 2200,
       series: 7,
@@ -159,14 +162,14 @@ describe("chooseBalance(bank, limit, family, choice)", () => {
   });
 
   // For ever, the resistor is chosen as if a stage could rise above all the volts; for an hour, as if it could not.
-  test.fails("a limit above all the volts asks the same resistor for an hour as for ever", () => {
+  test("a limit above all the volts asks the same resistor for an hour as for ever", () => {
     const one = bank({ voltage: 378, series: 3, sharing: 6, leak: { kind: "current", amperes: 381e-6 } });
     const from = family("a,E24,100,220000,5,10,0.5,500");
     expect(choose({ ...one, hold: 1e8 }, 405, from)?.resistance).toBe(choose(one, 405, from)?.resistance);
   });
 
   // The rule sets no most for k; a stage of 200 kV takes 572 elements of 350 V.
-  test.fails("as many elements as it takes: 400 kV on two stages, elements of 350 V", () => {
+  test("as many elements as it takes: 400 kV on two stages, elements of 350 V", () => {
     const one = bank({ voltage: 400e3, series: 2, leak: { kind: "insulation", ohms: 1e15 }, spread: 0.01 });
     expect(choose(one, 220e3, family("a,E24,1,1e7,1,2,0.5,350"))?.elements).toBeGreaterThan(500);
   });

@@ -1,4 +1,5 @@
 // The cheapest blend by trying every count of every option: slow, and plain enough to be believed.
+import { optionsUsed } from "../../src/search/blend/alternatives.ts";
 import { capacityNeeded, isFittingBlend, roomUnder } from "../../src/search/blend/evaluate.ts";
 import type { BlendCount, BlendModel } from "../../src/search/blend/model.ts";
 
@@ -41,5 +42,16 @@ export function bruteForce(
     }
   };
   go(0, 0, 0, 0, 0, 0);
+  return best;
+}
+
+/** Cheapest cost of each set of options, where every option is needed. */
+export function kinds(model: BlendModel, below: number): Map<string, number> {
+  const best = new Map<string, number>();
+  bruteForce(model, (counts, cost) => {
+    const capacity = counts.reduce((sum, c) => sum + c.strings * model.options[c.option]!.capacity, 0);
+    const needed = counts.every((c) => capacity - model.options[c.option]!.capacity < model.requirement * (1 - 1e-9));
+    if (needed && cost < below) best.set(optionsUsed(counts), Math.min(cost, best.get(optionsUsed(counts)) ?? cost));
+  });
   return best;
 }

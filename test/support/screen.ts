@@ -55,11 +55,12 @@ export class Screen {
     };
   }
 
-  /** Every cell as text, for comparing two screens whole. */
+  /** Every cell as it looks, for comparing two screens whole: bold and colour of a blank that is not inverse cannot be seen. */
   dump(): readonly string[] {
     return Array.from({ length: this.term.rows }, (_, y) =>
       Array.from({ length: this.term.cols }, (_, x) => {
         const c = this.cell(x, y);
+        if (c.text === " " && !c.inverse) return " ";
         return c.width === 0
           ? ""
           : `${c.text}${c.bold ? "!" : ""}${c.inverse ? "~" : ""}${c.colour < 0 ? "" : c.colour}`;

@@ -1,11 +1,25 @@
 // Rows of styled text as cells.
 import { expect, test } from "vitest";
-import { rowCells } from "../../src/tui/cells.ts";
+import { isUnseenOnBlanks, rowCells } from "../../src/tui/cells.ts";
 
 const short = (row: string, columns = 80): string =>
   rowCells(row, columns)
     .map((c) => `${c.text || "_"}${c.style === "" ? "" : `{${c.style}}`}`)
     .join("");
+
+test.each([
+  ["", true],
+  ["1;36", true],
+  ["90", true],
+  ["7", false],
+  ["4", false],
+  ["9", false],
+  ["41", false],
+  ["100", false],
+  ["38;5;7", false],
+])("isUnseenOnBlanks(%j) is %s", (style, want) => {
+  expect(isUnseenOnBlanks(style)).toBe(want);
+});
 
 test.each([
   ["", ""],
@@ -20,6 +34,7 @@ test.each([
   ["\x1b[ma", "a"],
   ["漢a", "漢_a"],
   ["\x1b[31m漢\x1b[39m", "漢{31}_{31}"],
+  ["\x1b[1m a\x1b[22m", " a{1}"],
   // anything but a style is dropped to its letters
   ["\x1b[2Ja", "[2Ja"],
   ["a\tb", "a b"],

@@ -7,13 +7,14 @@ import { askedText } from "../askedText.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, type Checked, checkedBank } from "../checked.ts";
 import { EXIT } from "../exit.ts";
+import { faultsText } from "../faultsText.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { joinedFacts } from "../joined.ts";
 import { hanging, layoutText } from "../layoutText.ts";
 import type { Ports } from "../ports.ts";
 import { tell } from "../tell.ts";
 import { toJson } from "../toJson.ts";
-import { wrap } from "../wrap.ts";
+import { bullet, wrap } from "../wrap.ts";
 
 export function checkCommand(brief: string | undefined, flags: BankFlags, ports: Ports): number {
   const checked = checkedBank(brief, flags, ports);
@@ -67,9 +68,10 @@ function checkText(checked: Checked, width: number): string {
     `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width)}`,
     `Found\n${layoutText(result, unit, width)}`,
     hanging("left after a dump", kept, width),
+    `If one thing fails\n${faultsText(joinedFacts({ layout: result, unit, brief: settings.brief }).faults, width)}`,
     verdict,
     ...[...inputSentences(stock), ...notes].map((text) => wrap(text, width)),
-    ["Cautions", ...cautions.map(({ text }) => wrap(`- ${text}`, width, "  "))].join("\n"),
+    ["Cautions", ...cautions.map(({ text }) => bullet(text, width))].join("\n"),
   ];
   return `${blocks.join("\n\n")}\n`;
 }

@@ -65,7 +65,7 @@ function tableJson(file: string, table: ToldTable, most: number, { out }: Ports)
 
 function tableText(file: string, table: ToldTable, most: number, { out, columns }: Ports): void {
   const { kind, count, faults, notes } = table;
-  const lost = faults.length > 0 ? `, ${faults.length} faults` : ", no faults";
+  const lost = faults.length > 0 ? `, ${faults.length} ${faults.length === 1 ? "fault" : "faults"}` : ", no faults";
   out(`${visible(file)}: ${kind}, ${count} rows understood${lost}\n`);
   for (const refusal of [...faults, ...notes]) out(`${wrap(refusalWords(refusal), columns, "  ")}\n`);
   inPieces(table, most, (rows) => out(rows.map((row) => `${rowText(row, columns)}\n`).join("")));

@@ -45,29 +45,37 @@ function climbCapacity(climb: Climb): { readonly at: number; readonly value: num
   };
   let low = probe(0);
   let high = probe(dearest(pool));
+  // A price at which each option is taken in full may still favour small cheap ones where types are few.
+  for (let step = 0; step < 10 && high.slope > 0; step += 1) high = probe(4 * high.at);
   let best = low.value >= high.value ? low : high;
   for (let step = 0; step < 60 && low.slope > 0 && high.slope < 0; step += 1) {
     const crossing = (high.value - low.value + low.slope * low.at - high.slope * high.at) / (low.slope - high.slope);
     const at = step % 6 === 5 ? (low.at + high.at) / 2 : crossing;
     if (!(at > low.at && at < high.at)) break;
     const next = probe(at);
+    const top = low.value + low.slope * (at - low.at);
     if (next.value > best.value) best = next;
     if (best.value >= climb.enough) return { at: best.at, value: best.value, broken: false };
     if (next.slope > 0) low = next;
     else high = next;
     const ceiling = low.value + low.slope * (high.at - low.at);
     if (ceiling - best.value <= 0.05 || high.at - low.at <= 1e-9 * high.at) break;
-    if (at === crossing && next.value >= low.value + low.slope * (at - low.at) - 0.01) break;
+    if (at === crossing && next.value >= top - 0.01) break;
   }
   return { at: best.at, value: best.value, broken: low.breaks || high.breaks };
 }
 
-/** A price of capacity at which even the dearest option is taken in full. */
+/** A price of capacity at which every option is taken in full. */
 function dearest(pool: Pool): number {
+  const { hullX, hullCost, capacity, start } = pool;
   let high = 1;
   for (let k = 0; k < pool.size; k += 1) {
-    const p = pool.start[k]!;
-    high = Math.max(high, (2 * Math.abs(pool.hullCost[p]!)) / (pool.capacity[k]! * pool.hullX[p]!));
+    const last = start[k + 1]! - 1;
+    const single = last === start[k]!;
+    const rise = hullCost[last]! - (single ? 0 : hullCost[last - 1]!);
+    const run = hullX[last]! - (single ? 0 : hullX[last - 1]!);
+    const whole = hullCost[last]! / hullX[last]!;
+    high = Math.max(high, (2 * Math.max(rise / run, whole)) / capacity[k]!);
   }
   return high;
 }
@@ -102,7 +110,7 @@ export function ascendCost(pool: Pool, maxTypes: number, enough: number): Ascent
   if (!first.broken) return alone;
   const live = [0, ...liveRows(pool)];
   let best = alone;
-  let radius = 2 * first.at + 1;
+  let radius = 3 * first.at + 1;
   for (let round = 0; round < 3; round += 1) {
     const p = best.prices;
     const next = climbFrom(climb, [p.capacity, p.volume, p.mass, p.units], radius, live, 45 * live.length);

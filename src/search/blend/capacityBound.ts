@@ -10,21 +10,25 @@ export interface CapacityBound {
   /** Prices of volume, mass and units in it; that of capacity plays no part. */
   readonly prices: Multipliers;
   readonly steps: number;
+  /** Part of a step by which the types that may join can be counted short. */
+  readonly slack: number;
   /** Place of the entry for steps = 0; entries for more steps follow. */
   readonly row: (from: number, types: number) => number;
   readonly table: Float64Array;
 }
 
-/** A count's capacity may be counted this far short of a whole step, and so may the need: exact fits stay exact. */
-const STEP_SLACK = 1e-9;
-const NEED_SLACK = 1e-6;
+/**
+ * A count may be counted this far short of a whole step, so that an exact fit, a hair above it for the tolerance of the need,
+ * stays exact. The need is then counted that much shorter for each type that may join.
+ */
+const STEP_SLACK = 1e-4;
 
 /** Above this many types the table does not tell how many are left, which only weakens it. */
 export const MOST_LAYERS = 8;
 
 /** Whole steps that `need` (a fraction of the requirement) asks for. */
 export const stepsFor = (bound: CapacityBound, need: number): number =>
-  Math.min(bound.steps, Math.max(0, Math.ceil(need * bound.steps - NEED_SLACK)));
+  Math.min(bound.steps, Math.max(0, Math.ceil(need * bound.steps - bound.slack)));
 
 /** What the priced ceilings make of one string. */
 export const penalty = (
@@ -47,7 +51,7 @@ const layersOf = (core: Core): number => {
 
 /** Least cost of any blend of the core by this bound, in which the ceilings count only through their prices. */
 export const rootBound = (core: Core, bound: CapacityBound): number =>
-  bound.table[bound.row(0, core.maxTypesHere) + bound.steps]! -
+  bound.table[bound.row(0, core.maxTypesHere) + stepsFor(bound, 1)]! -
   bound.prices.volume -
   bound.prices.mass -
   bound.prices.units;
@@ -82,7 +86,7 @@ export function buildCapacityBound(core: Core, steps: number, prices: Multiplier
   }
   const row = (from: number, types: number): number =>
     place(from, counted ? Math.min(types, layers) : Math.min(types, 1));
-  return { prices, steps, row, table };
+  return { prices, steps, slack: STEP_SLACK * core.maxTypesHere, row, table };
 }
 
 /** Steps that so many strings bring, rounded up. */

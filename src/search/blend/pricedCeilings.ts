@@ -1,6 +1,14 @@
 // Prices of volume, mass and units that serve the capacity bound best; those of the Lagrangian bound need not.
 import { pricesFrom } from "./ascent.ts";
-import { buildCapacityBound, type CapacityBound, MOST_LAYERS, penalty, rootBound, stepsOf } from "./capacityBound.ts";
+import {
+  buildCapacityBound,
+  type CapacityBound,
+  MOST_LAYERS,
+  penalty,
+  rootBound,
+  stepsFor,
+  stepsOf,
+} from "./capacityBound.ts";
 import type { Core } from "./core.ts";
 import type { Multipliers } from "./dual.ts";
 import { climb } from "./ellipsoid.ts";
@@ -14,7 +22,7 @@ export function rootBlend(
   const counted = core.maxTypesHere <= MOST_LAYERS;
   const sum = { volume: 0, mass: 0, units: 0 };
   let types = core.maxTypesHere;
-  let step = steps;
+  let step = stepsFor(bound, 1);
   core.columns.forEach((column, from) => {
     const here = table[bound.row(from, types) + step]!;
     if (step === 0 || here === table[bound.row(from + 1, types) + step]!) return;

@@ -56,7 +56,7 @@ export function roundedValues(program: Program, values: ArrayLike<number>): numb
     const value = values[at]!;
     const near = Math.round(value);
     if (column.whole && !(Math.abs(value - near) <= 1e-5)) return null;
-    out.push(column.whole ? near : Math.max(0, value));
+    out.push(column.whole ? near + 0 : Math.max(0, value));
   }
   return out;
 }

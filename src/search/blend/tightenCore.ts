@@ -1,6 +1,7 @@
 // Drops the pairs of a core that the capacity bound rules out, each tried between all that comes before and after it.
-import { addChoice, type CapacityBound, MOST_LAYERS, penalty, stepsOf } from "./capacityBound.ts";
+import { addChoice, type CapacityBound, MOST_LAYERS, penalty, stepsFor, stepsOf } from "./capacityBound.ts";
 import type { Core, CoreColumn } from "./core.ts";
+import { withOnly } from "./thinCore.ts";
 
 /** The core without the pairs that, at best, still end above `limit` (a cost): each tried with all before and all after it. */
 export function tightenCore(core: Core, bound: CapacityBound, limit: number): Core {
@@ -8,6 +9,7 @@ export function tightenCore(core: Core, bound: CapacityBound, limit: number): Co
   const types = core.maxTypesHere;
   const counted = types <= MOST_LAYERS;
   const layers = counted ? types : 1;
+  const goal = stepsFor(bound, 1);
   const wide = steps + 1;
   let before = new Float64Array((layers + 1) * wide).fill(Number.POSITIVE_INFINITY);
   for (let layer = 0; layer <= layers; layer += 1) before[layer * wide] = 0;
@@ -26,8 +28,8 @@ export function tightenCore(core: Core, bound: CapacityBound, limit: number): Co
       for (let layer = 0; layer < (counted ? layers : 1); layer += 1) {
         const first = counted ? layer * wide : wide;
         const after = bound.row(from + 1, counted ? types - 1 - layer : types);
-        for (let step = 0; step <= steps - brings; step += 1) {
-          low = Math.min(low, before[first + step]! + table[after + steps - brings - step]!);
+        for (let step = 0; step <= Math.max(0, goal - brings); step += 1) {
+          low = Math.min(low, before[first + step]! + table[after + Math.max(0, goal - brings - step)]!);
         }
         addChoice(next, { own: counted ? first + wide : wide, rest: first, price, brings, steps });
       }
@@ -36,8 +38,7 @@ export function tightenCore(core: Core, bound: CapacityBound, limit: number): Co
     before = next;
     if (keep.length === 0) return;
     pairs += keep.length;
-    const strings = Int32Array.from(keep, (at) => column.strings[at]!);
-    columns.push({ ...column, strings, reduced: Float64Array.from(keep, (at) => column.reduced[at]!) });
+    columns.push(withOnly(column, keep));
   });
   columns.sort((a, b) => a.reduced[0]! - b.reduced[0]! || a.option - b.option);
   return { ...core, columns, pairs, maxTypesHere: Math.min(core.maxTypes, columns.length) };

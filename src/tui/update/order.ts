@@ -21,16 +21,16 @@ export function askName(state: State): Change {
 
 export function editName(state: State, edit: LineEdit): Change {
   if (state.prompt === null) return still(state);
-  return still({ ...state, prompt: { ...state.prompt, line: editLine(state.prompt.line, edit) } });
+  return still({ ...state, prompt: { ...state.prompt, line: editLine(state.prompt.line, edit) }, notice: null });
 }
 
 export function confirm(state: State): Change {
-  const layout = shownBank(state);
-  if (state.prompt === null || layout === null) return still({ ...state, prompt: null });
+  const bill = state.answer?.kind === "planned" && shownBank(state) !== null ? state.answer.bill : null;
+  if (state.prompt === null || bill === null) return still({ ...state, prompt: null });
   const { line, replace } = state.prompt;
   const path = line.text.trim();
   if (path === "") return still({ ...state, notice: { tone: "warn", text: "A name is needed, such as order.csv." } });
-  return { state, effects: [{ type: "export", layout, path, replace }] };
+  return { state, effects: [{ type: "export", bill, path, replace }] };
 }
 
 /** "Keep the file" goes back to the name; "do not save" closes the question. */

@@ -1,5 +1,4 @@
 // One bank drawn stage by stage, each stage's worst voltage against its limit, with all that was found.
-import type { Finding } from "../../quantity/index.ts";
 import type { LayoutResult } from "../../search/index.ts";
 import { drawBar } from "../bar.ts";
 import { isPinned, shownBank } from "../pick.ts";
@@ -7,7 +6,6 @@ import { EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { fitText } from "../text.ts";
 import {
-  bySeverity,
   nameOf,
   shareOfLimit,
   shown,
@@ -20,12 +18,15 @@ import {
   worstVerdict,
   worstVoltage,
 } from "../values.ts";
+import { findingRows } from "./findings.ts";
 import { layoutSentences } from "./layouts.ts";
 import { type Page, pageOf, type Room, scrolled } from "./page.ts";
 import { emptyRows, paragraph } from "./words.ts";
 
 /** A row of units as drawn: at most so many, then how many there are. */
 const MOST_DRAWN = 6;
+/** From here on each stage also says between which potentials it stands. */
+const ROOM_FOR_POTENTIALS = 120;
 
 function unitsDrawn({ parallel, ties }: LayoutResult, ascii: boolean): string {
   const unit = ascii ? "][" : "┤├";
@@ -40,17 +41,35 @@ const drawnWidth = (parallel: number): number =>
 /** One row a stage. Any stage may be the low one, so each is drawn at the worst that it may see. */
 function stageRows(layout: LayoutResult, state: State, columns: number): readonly Row[] {
   const { share, series, parallel } = layout;
-  const worst = worstVoltage(layout);
+  const whole = worstVoltage(layout);
+  // What is known already counts: a stage over its limit while charging is over it whatever the leakage turns out to be.
+  const worst = whole ?? share.charging ?? share.holding;
+  const atLeast = whole === null && worst !== null ? "at least " : "";
   const limit = share.limit;
+  const over = worst !== null && worst > limit;
   const numberWidth = String(series).length;
   const units = `x${parallel}`;
-  const words = `${shownWorst(worst, "voltage")} of ${shownLimit(limit, "voltage")}`;
+  const words = `${atLeast}${shownWorst(worst, "voltage")} of ${shownLimit(limit, "voltage")}`;
   const percent = shareOfLimit(layout) === null ? "" : `, ${shownWorst(shareOfLimit(layout), "fraction")}`;
-  const used = 2 + numberWidth + 1 + drawnWidth(parallel) + 1 + units.length + 2 + 1 + words.length + percent.length;
-  const bar = Math.max(6, Math.min(60, columns - used));
+  const used =
+    2 +
+    numberWidth +
+    1 +
+    drawnWidth(parallel) +
+    1 +
+    units.length +
+    2 +
+    1 +
+    words.length +
+    percent.length +
+    (over ? 5 : 0);
+  const bar = Math.max(6, Math.min(columns < ROOM_FOR_POTENTIALS ? 60 : 40, columns - used));
   const full = Math.max(limit, worst ?? 0, share.even) * 1.1;
-  const over = worst !== null && worst > limit;
   const drawn = drawBar(worst ?? Number.NaN, { columns: bar, full, limit, ascii: state.look.ascii });
+  const between = (stage: number): string =>
+    columns < ROOM_FOR_POTENTIALS
+      ? ""
+      : `   between ${shown(share.even * (series - stage), "voltage")} and ${shown(share.even * (series - stage - 1), "voltage")} if even`;
   return Array.from({ length: series }, (_, stage) =>
     rowOf(
       span(`  ${String(stage + 1).padStart(numberWidth)} `),
@@ -59,48 +78,9 @@ function stageRows(layout: LayoutResult, state: State, columns: number): readonl
       span(drawn, over ? "bad" : "good"),
       span(` ${words}${percent}`, over ? "bad" : "plain"),
       ...(over ? [span(" over", "bad")] : []),
+      span(between(stage), "quiet"),
     ),
   );
-}
-
-const VERDICT_MARK: Readonly<Record<Finding["verdict"], string>> = {
-  fail: "x fail",
-  warn: "! warn",
-  "not assessed": "? not assessed",
-  pass: "  pass",
-};
-
-const DIMENSION_OF_UNIT: Readonly<Record<string, Parameters<typeof shown>[1]>> = {
-  V: "voltage",
-  J: "energy",
-  A: "current",
-  W: "power",
-  s: "time",
-  ohm: "resistance",
-  F: "capacitance",
-};
-
-/** A finding's number in its unit; a unit not in the table is printed as it stands. */
-function findingValue(value: number | null, unit: string): string {
-  if (value === null) return "unknown";
-  const dimension = DIMENSION_OF_UNIT[unit];
-  if (dimension !== undefined) return shown(value, dimension);
-  return `${Number(value.toPrecision(3))}${unit === "" ? "" : ` ${unit}`}`;
-}
-
-function findingRows(findings: readonly Finding[], columns: number): readonly Row[] {
-  return bySeverity(findings).flatMap((finding): readonly Row[] => {
-    const limit = finding.limit === null ? "" : ` of ${findingValue(finding.limit, finding.unit)}`;
-    const value =
-      finding.value === null && finding.limit === null ? "" : `: ${findingValue(finding.value, finding.unit)}${limit}`;
-    const line = rowOf(
-      span(fitText(VERDICT_MARK[finding.verdict], 15), VERDICT_STYLE[finding.verdict]),
-      span(`${finding.state}, ${finding.id}${value}`),
-    );
-    const notes =
-      finding.verdict === "pass" || finding.note === "" ? [] : paragraph(finding.note, columns - 15, "quiet");
-    return [line, ...notes.map((note) => ({ left: [span(" ".repeat(15)), ...note.left] }))];
-  });
 }
 
 export function bankHead(state: State, layout: LayoutResult): readonly Row[] {

@@ -1,0 +1,31 @@
+// The fault table of one bank as text: what one failure does to the sound units, and what stops it.
+
+import { visible } from "../order/index.ts";
+import { formatQuantity } from "../quantity/index.ts";
+import { VERDICTS } from "./findingWords.ts";
+import type { joinedFacts } from "./joined.ts";
+import { textTable } from "./table.ts";
+import { bullet } from "./wrap.ts";
+
+type Faults = ReturnType<typeof joinedFacts>["faults"];
+
+/** A table of figures, then what stops each fault that does not pass. Figures round up. */
+export function faultsText(faults: Faults, width: number): string {
+  const up = { digits: 4, rounding: "up" } as const;
+  const table = textTable<Faults[number]>(
+    [
+      { heading: "verdict", cell: (one) => VERDICTS[one.verdict] },
+      { heading: "fault", cell: (one) => one.id.replaceAll("-", " "), least: 12 },
+      { heading: "sound unit", cell: (one) => formatQuantity(one.worstVoltageSpread, "voltage", up), side: "right" },
+      { heading: "into the unit", cell: (one) => formatQuantity(one.energyIntoUnit, "energy", up), side: "right" },
+      { heading: "peak", cell: (one) => formatQuantity(one.peakCurrent, "current", up), side: "right", rank: 1 },
+    ],
+    faults,
+    width,
+    "  ",
+  );
+  const stops = faults
+    .filter((one) => one.verdict !== "pass")
+    .map((one) => bullet(`${one.id.replaceAll("-", " ")}: ${visible(one.stops)}`, width));
+  return [table, ...stops].join("\n");
+}

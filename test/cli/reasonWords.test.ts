@@ -1,0 +1,36 @@
+import { readFileSync } from "node:fs";
+import { describe, expect, test } from "vitest";
+import { REASONS, reasonWords } from "../../src/cli/reasonWords.ts";
+import { at } from "../support/fakePorts.ts";
+
+const sweep = readFileSync(at("src/search/sweep.ts"), "utf8");
+
+describe("reasonWords(reason, currency)", () => {
+  test("every reason of the search has words, and no other", () => {
+    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown))|stock|balance)"/g);
+    const used = new Set([...found].map((match) => match[1] as string));
+    expect(used.size).toBeGreaterThan(7);
+    expect([...used].sort()).toEqual(Object.keys(REASONS).sort());
+  });
+
+  test("with value and limit", () => {
+    expect(reasonWords({ reason: "series-limit", value: 41, limit: 40 }, null)).toBe(
+      "needs 41 in series to share safely, limit 40",
+    );
+    expect(reasonWords({ reason: "unit-limit", value: 123456, limit: 2000 }, null)).toMatch(/needs 123456 units/);
+    expect(reasonWords({ reason: "cost-limit", value: 12.5, limit: 5 }, "EUR")).toBe(
+      "costs 12.50 EUR at least, limit 5.00 EUR",
+    );
+    expect(reasonWords({ reason: "mass-limit", value: 5.63, limit: 0.5 }, null)).toBe(
+      "weighs 5.63 kg at least, limit 500 g",
+    );
+  });
+
+  test("what is unknown is said to be, never nought", () => {
+    for (const reason of Object.keys(REASONS)) {
+      const words = reasonWords({ reason, value: null, limit: null }, null);
+      expect(words, reason).not.toMatch(/\b0\b|NaN|null|\{/);
+      expect(words.length).toBeGreaterThan(10);
+    }
+  });
+});

@@ -1,0 +1,15 @@
+import { expect, test } from "vitest";
+import { billOf, LINE_KINDS } from "../../src/order/index.ts";
+import { bankOf, briefOf, FAMILIES, UNIT } from "../support/bank.ts";
+
+test("LINE_KINDS: every kind of line comes from some bank, and no bank gives another", () => {
+  const seen = new Set<string>();
+  for (const ties of ["cross-tied", "strings"] as const)
+    for (const kind of ["choose", "none"] as const) {
+      const brief = briefOf({ spares: 1 });
+      const layout = bankOf({ brief, layout: { part: "x", series: 8, parallel: 2, ties }, balance: { kind } });
+      const bill = billOf({ layout, unit: UNIT, families: FAMILIES, brief, currency: "EUR", cautions: [] });
+      for (const line of bill.lines) seen.add(line.line);
+    }
+  expect([...seen].sort()).toEqual([...LINE_KINDS].sort());
+});

@@ -1,0 +1,73 @@
+// chainFaults: a unit shorted, a unit open, a row shorted, on the worked bank.
+import { describe, expect, test } from "vitest";
+import { rowShort, unitOpen, unitShort } from "../../src/pulse/chainFaults.ts";
+import { strings, tied } from "./faultBanks.ts";
+import { near } from "./near.ts";
+
+describe("unitShort(bank)", () => {
+  test("worked, cross-tied: 533.333 V with the charger on, 1056 J from the neighbours, no amperes known", () => {
+    const fault = unitShort(tied);
+    near(fault.worstVoltage, 533.333333);
+    near(fault.energyIntoUnit, 1056, 1e-12);
+    expect(fault.peakCurrent).toBeNull();
+    expect(fault.verdict).toBe("fail");
+    expect(fault.stops).toContain("Nothing given stops it");
+  });
+
+  test("the neighbours' joules are at the worst stage voltage", () => {
+    near(unitShort({ ...tied, worstHolding: 440 }).energyIntoUnit, 4 * 0.5 * 3300e-6 * 440 ** 2, 1e-12);
+  });
+
+  test("worked, strings: 66 J and 533.333 V held; the note tells 500 V alone", () => {
+    const fault = unitShort(strings);
+    near(fault.energyIntoUnit, 66, 1e-12);
+    near(fault.worstVoltage, 533.333333);
+    expect(fault.note).toContain("500 V");
+  });
+
+  test("tolerance raises what is judged: three stages of +-20 %", () => {
+    const wide = { ...tied, unit: { ...tied.unit, toleranceLow: 0.2, toleranceHigh: 0.2 } };
+    near(unitShort(wide).worstVoltageSpread, (1600 * 1.2) / (1.2 + 2 * 0.8));
+  });
+
+  test("a fuse brings its own three findings, an isolating resistor its amperes", () => {
+    const fuse = { meltingAction: 10000, clearingAction: 15000, dcVoltage: 450 };
+    const unit = { ...tied.unit, esr: 0, esl: 0 };
+    const shot = { peakCurrent: 1e4, unitAction: 2250, unitHeat: null };
+    const fault = unitShort({ ...tied, unit, fuse, isolatingResistance: 0.05, shot });
+    near(fault.peakCurrent, 6400, 1e-12);
+    expect(fault.findings.map(({ verdict }) => verdict)).toEqual(["pass", "pass", "pass"]);
+    expect(fault.stops).toContain("fuse");
+  });
+
+  test("one stage: the whole bank empties into it and nothing stands; one chain: nothing feeds it", () => {
+    expect(unitShort({ ...tied, series: 1 })).toMatchObject({ worstVoltage: 0, worstVoltageSpread: 0 });
+    expect(unitShort({ ...tied, parallel: 1 })).toMatchObject({ energyIntoUnit: 0, peakCurrent: null });
+  });
+});
+
+describe("unitOpen(bank)", () => {
+  test("cross-tied: a stage of four among fives takes V 5/(5 + 3 x 4)", () =>
+    near(unitOpen(tied).worstVoltage, (1600 * 5) / 17, 1e-12));
+
+  test("a single chain broken: the gap stands off the whole voltage", () => {
+    expect(unitOpen({ ...tied, parallel: 1 }).worstVoltage).toBe(1600);
+  });
+
+  test("strings: the sound units keep what they had", () =>
+    expect(unitOpen(strings)).toMatchObject({ worstVoltage: 400, verdict: "pass" }));
+});
+
+describe("rowShort(bank)", () => {
+  test("cross-tied: the rest at V/3, each unit of the row spends its own 264 J", () => {
+    const fault = rowShort(tied);
+    near(fault.worstVoltage, 533.333333);
+    near(fault.energyIntoUnit, 264, 1e-12);
+  });
+
+  test("strings: one string end to end takes what the four others hold, a quarter of it in each unit", () => {
+    const fault = rowShort(strings);
+    expect(fault.worstVoltage).toBe(0);
+    near(fault.energyIntoUnit, (4 * 0.5 * (3300e-6 / 4) * 1600 ** 2) / 4, 1e-12);
+  });
+});

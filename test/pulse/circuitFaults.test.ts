@@ -1,0 +1,69 @@
+// circuitFaults: faults outside the chain, unknowns first.
+import { describe, expect, test } from "vitest";
+import { bleederOpen, chargerRunning, dumpStuck, earlyFire, loadShort } from "../../src/pulse/circuitFaults.ts";
+import { strings, tied } from "./faultBanks.ts";
+import { near } from "./near.ts";
+
+describe("loadShort(bank), earlyFire(bank)", () => {
+  test("amperes are null when nothing limits them", () => {
+    expect(loadShort(tied).peakCurrent).toBeNull();
+    expect(earlyFire(tied)).toMatchObject({ peakCurrent: null, energyIntoUnit: null });
+  });
+
+  test("with ESR and bus they are the closed form's, and early fire is the normal shot", () => {
+    const unit = { ...tied.unit, esr: 0.02, esl: 0 };
+    near(loadShort({ ...tied, unit, bus: { resistance: 0.004, inductance: 0 } }).peakCurrent, 1600 / 0.02, 1e-12);
+    const shot = { peakCurrent: 9000, unitAction: null, unitHeat: 12 };
+    expect(earlyFire({ ...tied, shot })).toMatchObject({
+      peakCurrent: 9000,
+      peakIs: "upper bound",
+      energyIntoUnit: 12,
+    });
+  });
+});
+
+describe("bleederOpen(bank)", () => {
+  test("not told is not assessed; none fitted changes nothing", () => {
+    expect(bleederOpen(tied)).toMatchObject({ worstVoltage: null, verdict: "not assessed" });
+    expect(bleederOpen({ ...tied, balance: null })).toMatchObject({ worstVoltage: 400, verdict: "pass" });
+  });
+
+  test("held for ever the position climbs to the whole voltage; for a moment not at all", () => {
+    expect(bleederOpen({ ...tied, balance: { resistance: 24e3, hold: null } })).toMatchObject({
+      worstVoltage: 1600,
+      verdict: "fail",
+    });
+    expect(bleederOpen({ ...tied, balance: { resistance: 24e3, hold: 0 } }).worstVoltage).toBe(400);
+  });
+
+  // Kirchhoff at the open position, stepped in time: no resistor there, the others drain the chain current.
+  test("for a time between, it follows the circuit: n stages, one without its resistor, held at V", () => {
+    for (const [bank, units] of [
+      [tied, 5],
+      [strings, 1],
+    ] as const) {
+      const [C, R, n, hold] = [units * 3300e-6, 24e3, 4, 200];
+      let first = 400;
+      const count = 200000;
+      for (let k = 0; k < count; k++) {
+        const other = (1600 - first) / (n - 1);
+        // same current through all: C dv1/dt = C dv2/dt + v2/R, and v1 + (n - 1) v2 = V
+        first += ((other / R / C) * ((n - 1) / n) * hold) / count;
+      }
+      near(bleederOpen({ ...bank, balance: { resistance: R, hold } }).worstVoltage, first, 1e-4);
+    }
+  });
+});
+
+describe("dumpStuck(bank), chargerRunning(bank)", () => {
+  test("a stuck dump leaves the volts, and says whether anything bleeds them", () => {
+    expect(dumpStuck(tied).stops).toContain("stays charged");
+    expect(dumpStuck({ ...tied, balance: { resistance: 24e3, hold: null } }).stops).toContain("balancing resistors");
+  });
+
+  test("a charger of unknown reach is not assessed; one of 2000 V puts 500 V on the worst unit", () => {
+    expect(chargerRunning(tied).verdict).toBe("not assessed");
+    expect(chargerRunning({ ...tied, chargerHighest: 2000 })).toMatchObject({ worstVoltage: 500, verdict: "fail" });
+    expect(chargerRunning({ ...tied, chargerHighest: 1000 }).worstVoltage).toBe(400);
+  });
+});

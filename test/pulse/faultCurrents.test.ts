@@ -1,0 +1,57 @@
+// faultCurrents: nothing known gives nothing, then the worked loop, then bounds.
+import { describe, expect, test } from "vitest";
+import { faultAction, faultPeak, loadShortLoop, rowShortLoop, unitShortLoop } from "../../src/pulse/faultCurrents.ts";
+import { strings, tied } from "./faultBanks.ts";
+import { near } from "./near.ts";
+
+const known = { ...tied.unit, esr: 0.02, esl: 25e-9 };
+
+describe("faultPeak(loop), faultAction(loop)", () => {
+  test("no loop, or a loop of which nothing is known, has no peak and no action", () => {
+    expect(faultPeak(null)).toBeNull();
+    expect(faultPeak(unitShortLoop(tied))).toBeNull();
+    expect(faultAction(unitShortLoop(tied))).toBeNull();
+    expect(unitShortLoop({ ...tied, parallel: 1 })).toBeNull();
+  });
+
+  test("worked: 50 mohm of isolation gives 6400 A, an upper bound while ESR is unknown", () => {
+    const peak = faultPeak(unitShortLoop({ ...tied, isolatingResistance: 0.05 }));
+    near(peak?.amperes, 6400, 1e-12);
+    expect(peak?.bound).toBe("upper bound");
+  });
+
+  test("worked: with no ESR at all the action through the faulted leg is 16 896 A^2 s", () => {
+    const bank = { ...tied, isolatingResistance: 0.05, unit: { ...tied.unit, esr: 0, esl: 0 } };
+    near(faultAction(unitShortLoop(bank)), 16896, 1e-12);
+    expect(faultPeak(unitShortLoop(bank))?.bound).toBe("value");
+  });
+
+  test("ESR alone bounds it by V/R; with ESL too it is a value, and lower", () => {
+    const half = faultPeak(unitShortLoop({ ...tied, unit: { ...known, esl: null } }));
+    const whole = faultPeak(unitShortLoop({ ...tied, unit: known }));
+    near(half?.amperes, 400 / (0.02 / 4), 1e-12);
+    expect(half?.bound).toBe("upper bound");
+    expect(whole?.bound).toBe("value");
+    expect(whole?.amperes ?? 0).toBeLessThan(half?.amperes ?? 0);
+  });
+
+  test("strings: the fault current passes other strings and its own survivors", () => {
+    near(unitShortLoop({ ...strings, unit: known })?.resistance, 0.02 * (4 / 4 + 3), 1e-12);
+  });
+});
+
+describe("rowShortLoop(bank), loadShortLoop(bank)", () => {
+  test("a tied row shorts through all its units at once; a string through the other strings", () => {
+    near(rowShortLoop({ ...tied, unit: known })?.resistance, 0.004, 1e-12);
+    near(rowShortLoop({ ...strings, unit: known })?.resistance, 0.02, 1e-12);
+    expect(rowShortLoop({ ...strings, parallel: 1, unit: known })).toBeNull();
+  });
+
+  test("a load short is the whole bank and the bus; an unknown bus leaves a bound", () => {
+    const loop = loadShortLoop({ ...tied, unit: known, bus: { resistance: 1e-3, inductance: 60e-9 } });
+    near(loop.resistance, 0.017, 1e-12);
+    near(loop.inductance, 80e-9, 1e-12);
+    expect(faultPeak(loop)?.bound).toBe("value");
+    expect(faultPeak(loadShortLoop({ ...tied, unit: known }))?.bound).toBe("upper bound");
+  });
+});
