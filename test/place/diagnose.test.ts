@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
-import { type Diagnosis, diagnose } from "../../src/place/diagnose.ts";
+import { diagnose } from "../../src/place/diagnose.ts";
 import { FAULT_KINDS } from "../../src/place/diagnoseFaults.ts";
+import type { Diagnosis } from "../../src/place/diagnoseRequest.ts";
 import { seeded } from "../../src/place/random.ts";
 import { trial } from "./faults.ts";
 

@@ -1,8 +1,8 @@
 // Simulated faulty banks for the tests and the campaign: voltages from the exact course of the bank layer, with meter noise.
 import { courseOf } from "../../src/bank/course.ts";
-import type { DiagnosisRequest } from "../../src/place/diagnose.ts";
 import type { FaultKind } from "../../src/place/diagnoseFaults.ts";
 import type { StageModel } from "../../src/place/diagnoseModel.ts";
+import type { DiagnosisRequest } from "../../src/place/diagnoseRequest.ts";
 import { normal } from "./lots.ts";
 
 export interface Trial {
