@@ -2,7 +2,7 @@
 import type { Finding } from "../quantity/index.ts";
 import type { MeterModel, ReadingRow } from "./diagnoseEvidence.ts";
 
-/** The order matters: nobody goes near before the voltage is gone from every stage, not only from the ends. Source: [practice]. */
+/** The order matters: nobody goes near before the voltage is gone from every stage, not only from the ends. Source: [common-practice]. */
 export const STOP_ACTIONS: readonly string[] = [
   "Stop charging. Stay away from the bank; take nothing off and connect nothing.",
   "Switch the charger off and lock its supply off.",
@@ -29,7 +29,7 @@ export function limitFindings(rows: readonly ReadingRow[], limit: number | null)
           limit,
           margin: (limit - Math.abs(v)) / limit,
           unit: "V",
-          source: "practice",
+          source: "common-practice",
           note: `Stage ${i + 1} reads ${Math.abs(v)} V ${row.seconds} s after charging, over its limit: stop.`,
         },
       ];
