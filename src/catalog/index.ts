@@ -19,4 +19,5 @@ export {
   type ResistorFamily,
   readResistors,
 } from "./resistor.ts";
+export { capacitorSchema, readCapacitorData } from "./schema.ts";
 export { assumedLeakage, RULES, stateOf } from "./states.ts";
