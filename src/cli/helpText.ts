@@ -32,6 +32,8 @@ Examples:
   $ joulewright check brief.json --part pf-330 --series 9 --parallel 31 --ties cross-tied --catalog mine.csv
   $ joulewright check brief.json --layout chosen.json --catalog mine.csv --json
   $ joulewright check brief.json --layout chosen.json --balance "24 kohm" --balance-tolerance "5 %" --catalog mine.csv
+  $ joulewright check brief.json --layout chosen.json --basis statistical --witness 1e6 --seed 7 --catalog mine.csv
+  $ joulewright check brief.json --layout chosen.json --basis statistical --measured lot.csv --catalog mine.csv
 ${LAYOUT}${BRIEF}${STATUS}`,
   order: `
 Examples:
