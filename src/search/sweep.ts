@@ -6,6 +6,8 @@ import { minorDigits } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing } from "./balancing.ts";
 import type { Brief } from "./brief.ts";
 import { prepare } from "./candidate.ts";
+import { hasLimits } from "./limits.ts";
+import { sweepLimited } from "./limitedSweep.ts";
 import type { RefusedPart } from "./result.ts";
 import { type RiskCase, riskJudge } from "./risk.ts";
 import { type LayoutTable, newTable, pushRow } from "./table.ts";
@@ -24,7 +26,7 @@ export interface Sweep {
 }
 
 /** Why a part gives no layout: the first limit met, or for ceilings the least value seen. */
-interface Reason {
+export interface Reason {
   reason: string;
   value: number | null;
   limit: number | null;
@@ -51,8 +53,9 @@ export function sweep(input: SweepInput, stopAtFirst = false): Sweep {
   const table = newTable(Math.max(256, Math.min(input.parts.length * 32, 1 << 22)));
   const refused: RefusedPart[] = [];
   const judge = input.brief.basis === "statistical" ? riskJudge(input.brief) : null;
+  const limited = hasLimits(input.brief) ? sweepLimited(input, table, judge) : null;
   for (let i = 0; i < input.parts.length; i++) {
-    const reason = sweepPart(input, i, table, judge);
+    const reason = limited === null ? sweepPart(input, i, table, judge) : limited(i);
     if (reason !== null) refused.push({ part: (input.parts[i] as Capacitor).part, ...reason });
     if (stopAtFirst && table.count > 0) break;
   }
@@ -60,7 +63,7 @@ export function sweep(input: SweepInput, stopAtFirst = false): Sweep {
 }
 
 /** Whether a shape shares safely while charging although its worst case does not; null when only the worst case counts. */
-type Judge = ((given: RiskCase) => boolean) | null;
+export type Judge = ((given: RiskCase) => boolean) | null;
 
 function sweepPart(input: SweepInput, index: number, table: LayoutTable, judge: Judge): Reason | null {
   const { brief, families, required, currency } = input;
