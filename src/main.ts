@@ -10,6 +10,7 @@ import { filesOn, writeNow } from "./cli/files.ts";
 import { outputTrouble } from "./cli/output.ts";
 import { type Ports, textWidth } from "./cli/ports.ts";
 import { VERSION } from "./cli/version.ts";
+import { type ScreenFlags, screenFlags } from "./tui/screenFlags.ts";
 
 const isTerminal = (): boolean =>
   process.stdin.isTTY === true && process.stdout.isTTY === true && process.env.TERM !== "dumb";
@@ -24,20 +25,43 @@ function portsOfProcess(): Ports {
   };
 }
 
-/** The screens, on the demo's catalogues; brief and pins are kept in the home folder. */
-async function openScreens(ports: Ports): Promise<number> {
+/** What the screens begin with: the catalogues and brief asked for, else the demo's. */
+async function screenInput(flags: ScreenFlags, ports: Ports) {
   const { demoStock } = await import("./cli/demo.ts");
+  if (flags.catalog.length === 0) return demoStock(ports);
+  const { readStock } = await import("./cli/stock.ts");
+  const stock = readStock({ catalog: flags.catalog, resistors: flags.resistors ?? undefined }, ports.files);
+  return stock.ok ? { ok: true as const, value: { ...stock.value, brief: {} as unknown } } : stock;
+}
+
+/** The screens; brief and pins are kept in the home folder. */
+async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
   const { tell } = await import("./cli/tell.ts");
-  const demo = demoStock(ports);
-  if (!demo.ok) return tell(ports, demo.refusals);
-  const { parts, families, sources, brief } = demo.value;
+  const input = await screenInput(flags, ports);
+  if (!input.ok) return tell(ports, input.refusals);
+  const { parts, families, sources } = input.value;
+  let { brief } = input.value;
+  if (flags.brief !== null) {
+    const { readJson } = await import("./cli/jsonText.ts");
+    const text = ports.files.read(flags.brief);
+    const json = text.ok ? readJson(text.value, flags.brief) : text;
+    if (!json.ok) return tell(ports, json.refusals);
+    brief = json.value.value;
+  }
+  const demo = flags.catalog.length === 0;
   const faults = sources.reduce((sum, source) => sum + source.faults.length, 0);
   const { startScreens } = await import("./tui/index.ts");
   return startScreens({
     parts,
     families,
-    stock: { name: "demo catalogues", parts: parts.length, faults, note: "invented parts" },
+    stock: {
+      name: demo ? "demo catalogues" : flags.catalog.join(", "),
+      parts: parts.length,
+      faults,
+      note: demo ? "invented parts" : "",
+    },
     brief,
+    briefFirst: flags.brief !== null,
     files: ports.files,
     sessionFile: process.env.JOULEWRIGHT_SESSION ?? join(homedir(), ".joulewright.json"),
     terminal: {
@@ -47,14 +71,16 @@ async function openScreens(ports: Ports): Promise<number> {
       writeSync: writeNow,
       process,
       env: process.env,
+      ...(flags.ascii ? { ascii: true } : {}),
     },
   });
 }
 
 async function main(argv: readonly string[]): Promise<number> {
   const ports = portsOfProcess();
-  if (argv.length > 0) return (await import("./cli/program.ts")).run(argv, ports);
-  if (isTerminal()) return openScreens(ports);
+  const flags = screenFlags(argv);
+  if (flags === null) return (await import("./cli/program.ts")).run(argv, ports);
+  if (argv.length > 0 || isTerminal()) return openScreens(flags, ports);
   return (await import("./cli/demo.ts")).demoCommand(ports);
 }
 

@@ -19,9 +19,12 @@ export interface Peak {
   readonly seconds: number;
 }
 
-/** E_k at time t. */
-export const riseOf = (rate: number, seconds: number): number =>
-  rate === 0 ? seconds : -Math.expm1(-rate * seconds) / rate;
+/** E_k at time t. Past half a decay the plain exponential is as exact as expm1, and faster. */
+export function riseOf(rate: number, seconds: number): number {
+  if (rate === 0) return seconds;
+  const decays = rate * seconds;
+  return (decays > 0.5 ? 1 - Math.exp(-decays) : -Math.expm1(-decays)) / rate;
+}
 
 export function curveAt(curve: Curve, seconds: number): number {
   let value = curve.start;

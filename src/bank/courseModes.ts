@@ -13,7 +13,7 @@
  * R + sum(w_i / (d_i - lambda)) = 0, one root after each d_i (none after the last when R = 0). Then
  * v_i(t) = v_i(0) + sum_k s_ik (1 - exp(-lambda_k t))/lambda_k, where lambda = 0 means t: a steady drift.
  * Stages of equal d count as one in the equation; what moves between them moves at their own d.
- * Source: [Golub1973] section 5, roots; [GuEisenstat1994] weights recomputed from the roots, which keeps the modes at right angles.
+ * Source: [Golub1973] section 5, roots (place from memory); [GuEisenstat1994] weights recomputed from the roots, which keeps the modes at right angles.
  */
 
 export interface Modes {
@@ -47,29 +47,36 @@ export function sourceModes(given: {
   readonly resistance: number;
 }): Modes {
   const clusters = clustersOf(given);
-  const roots: Root[] = [];
-  const count = given.resistance > 0 ? clusters.length : clusters.length - 1;
-  for (let k = 0; k < count; k++) roots.push(rootAfter(clusters, k, given.resistance));
-  const gap = (k: number, c: number): number => {
-    const root = roots[k]!;
-    return clusters[root.pole]!.rate - clusters[c]!.rate + root.offset;
+  const poles = Float64Array.from(clusters, (cluster) => cluster.rate);
+  const secular: Secular = {
+    poles,
+    weights: Float64Array.from(clusters, (cluster) => cluster.weight),
+    resistance: given.resistance,
   };
-  const weights = clusters.map((_, c) => matchedWeight(clusters, c, given.resistance, gap, count));
+  const count = given.resistance > 0 ? poles.length : poles.length - 1;
+  const gaps: Float64Array[] = [];
   const mixed = clusters.flatMap((cluster, c) => (cluster.members.length > 1 ? [c] : []));
   const width = count + mixed.length;
   const rates = new Float64Array(width);
   const slopes = new Float64Array(given.rates.length * width);
   for (let k = 0; k < count; k++) {
-    rates[k] = clusters[roots[k]!.pole]!.rate + roots[k]!.offset;
+    const { pole, offset } = rootAfter(secular, k);
+    rates[k] = poles[pole]! + offset;
+    gaps.push(poles.map((rate) => poles[pole]! - rate + offset));
+  }
+  const weights = poles.map((_, c) => matchedWeight(secular, c, gaps));
+  // Matched over given weight: the length of a cluster's own direction, corrected alike.
+  const trims = weights.map((weight, c) => Math.sqrt(weight / secular.weights[c]!));
+  for (const [k, gap] of gaps.entries()) {
     let norm = 0;
     let amount = 0;
-    for (const [c, cluster] of clusters.entries()) {
-      norm += weights[c]! / gap(k, c) ** 2;
-      amount += (cluster.slope * Math.sqrt(weights[c]! / cluster.weight)) / gap(k, c);
+    for (let c = 0; c < poles.length; c++) {
+      norm += weights[c]! / (gap[c]! * gap[c]!);
+      amount += (clusters[c]!.slope * trims[c]!) / gap[c]!;
     }
-    for (const [c, cluster] of clusters.entries()) {
-      const part = ((amount / norm) * Math.sqrt(weights[c]! / cluster.weight)) / gap(k, c);
-      for (const i of cluster.members) slopes[i * width + k] = part * given.weights[i]!;
+    for (let c = 0; c < poles.length; c++) {
+      const part = ((amount / norm) * trims[c]!) / gap[c]!;
+      for (const i of clusters[c]!.members) slopes[i * width + k] = part * given.weights[i]!;
     }
   }
   for (const [at, c] of mixed.entries()) {
@@ -106,39 +113,44 @@ function clustersOf(given: {
   }));
 }
 
+/** R + sum(w_c / (d_c - lambda)), poles ascending. */
+interface Secular {
+  readonly poles: Float64Array;
+  readonly weights: Float64Array;
+  readonly resistance: number;
+}
+
 /** The root between pole k and the next (or beyond the last), by Newton's steps kept inside a shrinking bracket. */
-function rootAfter(clusters: readonly Cluster[], k: number, resistance: number): Root {
-  const left = clusters[k]!;
-  const right = clusters[k + 1];
-  const secular = (pole: number, offset: number, skip: number): { readonly value: number; readonly slope: number } => {
-    let value = resistance;
-    let slope = 0;
-    for (const [c, cluster] of clusters.entries()) {
-      if (c === skip) continue;
-      const gap = cluster.rate - clusters[pole]!.rate - offset;
-      value += cluster.weight / gap;
-      slope += cluster.weight / gap ** 2;
-    }
-    return { value, slope };
-  };
+function rootAfter({ poles, weights, resistance }: Secular, k: number): Root {
   let pole = k;
   let sign = 1;
-  let high = clusters.reduce((sum, cluster) => sum + cluster.weight, 0) / resistance;
-  if (right) {
-    high = (right.rate - left.rate) / 2;
-    if (secular(k, high, -1).value < 0) {
+  let high = weights.reduce((sum, weight) => sum + weight, 0) / resistance;
+  if (k + 1 < poles.length) {
+    high = (poles[k + 1]! - poles[k]!) / 2;
+    let value = resistance;
+    for (let c = 0; c < poles.length; c++) value += weights[c]! / (poles[c]! - poles[k]! - high);
+    if (value < 0) {
       pole = k + 1;
       sign = -1;
     }
   }
   // Times the offset, the nearest pole is gone: h(x) = x (R + sum over the others) - w, below zero at x = 0.
-  const own = clusters[pole]!.weight;
+  const own = weights[pole]!;
+  const origin = poles[pole]!;
   let low = 0;
   let x = high;
   for (let step = 0; step < 200; step++) {
-    const rest = secular(pole, sign * x, pole);
-    const h = sign * x * rest.value - own;
-    const tilt = sign * rest.value + x * rest.slope;
+    let value = resistance;
+    let slope = 0;
+    for (let c = 0; c < poles.length; c++) {
+      if (c === pole) continue;
+      const gap = poles[c]! - origin - sign * x;
+      const part = weights[c]! / gap;
+      value += part;
+      slope += part / gap;
+    }
+    const h = sign * x * value - own;
+    const tilt = sign * value + x * slope;
     if (h < 0) low = x;
     else high = x;
     let next = x - h / tilt;
@@ -150,16 +162,12 @@ function rootAfter(clusters: readonly Cluster[], k: number, resistance: number):
 }
 
 /** The weight of pole c for which the roots found are exact. */
-function matchedWeight(
-  clusters: readonly Cluster[],
-  c: number,
-  resistance: number,
-  gap: (k: number, c: number) => number,
-  count: number,
-): number {
-  const here = clusters[c]!;
-  let product = resistance > 0 ? resistance : clusters.reduce((sum, cluster) => sum + cluster.weight, 0);
-  const others = clusters.flatMap((cluster, j) => (j === c ? [] : [cluster.rate - here.rate]));
-  for (let k = 0; k < count; k++) product *= gap(k, c) / (others[k] ?? 1);
+function matchedWeight({ poles, weights, resistance }: Secular, c: number, gaps: readonly Float64Array[]): number {
+  let product = resistance > 0 ? resistance : weights.reduce((sum, weight) => sum + weight, 0);
+  for (let k = 0, other = 0; k < gaps.length; k++, other++) {
+    if (other === c) other++;
+    // Taken in turns, so that nothing overflows on the way.
+    product *= gaps[k]![c]! / (other < poles.length ? poles[other]! - poles[c]! : 1);
+  }
   return Math.abs(product);
 }

@@ -1,6 +1,6 @@
 // One stretch of a chain's time course over which no leakage current starts or stops: linear, so solved by its modes.
 import { type Chain, stageConductance } from "./chain.ts";
-import { type Curve, curveAt, firstBelowZero, riseOf } from "./courseCurve.ts";
+import { type Curve, firstBelowZero } from "./courseCurve.ts";
 import { type Modes, sourceModes } from "./courseModes.ts";
 
 /** What the ends of the chain are joined to: a source (0 V and a resistor is a dump), or a steady current (0 A is rest). */
@@ -19,8 +19,13 @@ export interface Segment {
   readonly seconds: number;
 }
 
-/** Solves the stretch that begins at `start` (V); with a held source their sum must be its voltage. */
-export function segmentFrom(chain: Chain, drive: Drive, start: readonly number[]): Segment {
+/** Solves the stretch that begins at `start` (V); with a held source their sum must be its voltage. Looks no further than `horizon` (s). */
+export function segmentFrom(
+  chain: Chain,
+  drive: Drive,
+  start: readonly number[],
+  horizon = Number.POSITIVE_INFINITY,
+): Segment {
   const states = chain.map((stage, i): LeakState => {
     const v = start[i]!;
     return stage.leakageCurrent === 0 || v > 0 ? "leaks" : v < 0 ? "off" : "empty";
@@ -33,14 +38,18 @@ export function segmentFrom(chain: Chain, drive: Drive, start: readonly number[]
     states[i] = solved.current.start < 0 ? "off" : "leaks";
     solved = solve(chain, drive, start, states);
   }
-  let seconds = Number.POSITIVE_INFINITY;
+  let seconds = horizon;
+  let ended = false;
   for (const [i, stage] of chain.entries()) {
     if (stage.leakageCurrent === 0) continue;
     for (const watched of watchedCurves(stage.leakageCurrent, states[i]!, voltageCurve(solved, i), solved.current)) {
-      seconds = firstBelowZero(watched, 0, seconds) ?? seconds;
+      const at = firstBelowZero(watched, 0, seconds);
+      if (at === null) continue;
+      seconds = at;
+      ended = true;
     }
   }
-  return { ...solved, seconds };
+  return { ...solved, seconds: ended ? seconds : Number.POSITIVE_INFINITY };
 }
 
 function mostEager(chain: Chain, states: readonly LeakState[], current: number): number | null {
@@ -140,25 +149,3 @@ export function voltageCurve(segment: Pick<Segment, "start" | "modes">, i: numbe
     parts: segment.modes.slopes.subarray(i * width, (i + 1) * width),
   };
 }
-
-/** Sum of the stage voltages as a curve. */
-export function endsCurve(segment: Segment): Curve {
-  const width = segment.modes.rates.length;
-  const parts = new Float64Array(width);
-  for (let j = 0; j < segment.modes.slopes.length; j++) parts[j % width]! += segment.modes.slopes[j]!;
-  return { start: segment.start.reduce((sum, v) => sum + v, 0), rates: segment.modes.rates, parts };
-}
-
-/** Stage voltages (V) `seconds` after the stretch began. */
-export function segmentAt(segment: Segment, seconds: number): Float64Array {
-  const { rates, slopes } = segment.modes;
-  const rises = rates.map((rate) => riseOf(rate, seconds));
-  return Float64Array.from(segment.start, (start, i) => {
-    let v = start;
-    for (let k = 0, j = i * rates.length; k < rates.length; k++, j++) if (slopes[j] !== 0) v += slopes[j]! * rises[k]!;
-    return v;
-  });
-}
-
-/** Chain current (A) `seconds` after the stretch began. */
-export const segmentCurrent = (segment: Segment, seconds: number): number => curveAt(segment.current, seconds);

@@ -5,7 +5,7 @@
  * value: what switching it on adds, averaged over every order of switching on, so that they add up to w(all) - V/n and no
  * order is favoured. Derating stands apart: it takes (1 - d) of the rating whatever the others do.
  * `without` is w(all but this): what would be left if this cause alone were mended, which is not the same as its volts.
- * Source: [Shapley1953]; the states are those of worstAtHold
+ * Source: [Shapley1953] (from memory); the states are those of worstAtHold
  */
 import { type HoldCase, worstAtHold } from "./cornersHold.ts";
 

@@ -1,6 +1,6 @@
 // The seeded witness of the tail: banks drawn at random and counted, in chunks that add up the same in any order.
-import { streamState } from "./random.ts";
-import { lawRange, lawSteps, type TailCase } from "./tailLaw.ts";
+import { type Drawn, drawStrings, drawTied } from "./monteCarloDraw.ts";
+import { lawRange, type TailCase } from "./tailLaw.ts";
 
 export const BINS = 512;
 
@@ -26,48 +26,18 @@ export function binEdges(given: TailCase): { readonly first: number; readonly wi
 }
 
 /** Counts of chunk `chunk` of `seed`: depends on nothing else, so chunks may run anywhere. */
-export function monteCarloChunk(
-  given: TailCase,
-  at: { readonly seed: number; readonly chunk: number; readonly banks: number },
-): Counts {
-  const { n, share } = given;
-  const strings = given.ties === "strings" ? given.p : 1;
-  const units = given.ties === "strings" ? 1 : given.p;
+export function monteCarloChunk(given: TailCase, at: Drawn): Counts {
   const { first, width } = binEdges(given);
   const perBin = width > 0 ? 1 / width : 0;
-  const { bases, slopes } = lawSteps(given.law);
-  const scale = bases.length * 2 ** -32;
   const bins = new Float64Array(BINS);
-  const start = streamState(at.seed, at.chunk);
-  let { a, b, c, counter } = start;
   let exceed = 0;
-  for (let bank = 0; bank < at.banks; bank++) {
-    let highest = 0;
-    for (let string = 0; string < strings; string++) {
-      let sum = 0;
-      let most = 0;
-      for (let stage = 0; stage < n; stage++) {
-        let capacitance = 0;
-        for (let unit = 0; unit < units; unit++) {
-          const t = (((a + b) | 0) + counter) | 0;
-          counter = (counter + 1) | 0;
-          a = b ^ (b >>> 9);
-          b = (c + (c << 3)) | 0;
-          c = (((c << 21) | (c >>> 11)) + t) | 0;
-          const place = (t >>> 0) * scale;
-          const step = place | 0;
-          capacitance += bases[step]! + slopes[step]! * (place - step);
-        }
-        const inverse = 1 / capacitance;
-        sum += inverse;
-        if (inverse > most) most = inverse;
-      }
-      if (most > highest * sum) highest = most / sum;
-    }
-    if (highest > share) exceed++;
-    const bin = Math.min(Math.max(((highest - first) * perBin) | 0, 0), BINS - 1);
-    bins[bin]!++;
-  }
+  const count = (highest: number): void => {
+    if (highest > given.share) exceed++;
+    bins[Math.min(Math.max(((highest - first) * perBin) | 0, 0), BINS - 1)]!++;
+  };
+  // With one unit a stage the two ties are the same bank.
+  if (given.ties === "strings" || given.p === 1) drawStrings(given, at, count);
+  else drawTied(given, at, count);
   return { banks: at.banks, exceed, bins };
 }
 

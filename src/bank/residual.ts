@@ -1,5 +1,6 @@
 // Reverse voltage after a dump: the worst of the states that a hold can leave, the corner that causes it, and whether it may be.
-import { type Corner, dumpedCorners, type StageRange } from "./corners.ts";
+import { type Corner, dumpedCorners } from "./corners.ts";
+import type { StageRange } from "./cornersRange.ts";
 
 export interface Residual {
   /** Greatest reverse voltage on a stage, V, never below 0, and the corner behind it. */

@@ -14,7 +14,7 @@
  * n P(one, and it is the highest). Strings: 1 - (1 - P(string))^p.
  * Two lattices, one twice as fine, give the extrapolated value and the error that is stated with it.
  * Units are independent. What a whole lot has in common (all 5 % high) divides out of every share.
- * Source: [methods-derived] 1.3; [Galambos1996] I.1, I.3 for the bounds of a union
+ * Source: [methods-derived] 1.3; [Galambos1996] I.1, I.3 for the bounds of a union (place from memory)
  */
 import { riskBound } from "./tailBound.ts";
 import { LEAST_LOT, lawRange, type TailCase } from "./tailLaw.ts";

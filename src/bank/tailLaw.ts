@@ -29,7 +29,7 @@ export function lawRange(law: UnitLaw): { readonly low: number; readonly high: n
   return { low: Math.min(...law.values), high: Math.max(...law.values) };
 }
 
-/** End weights of Gregory's rule: with them a sum over even nodes is an integral to the fourth power of the step. Source: [Hildebrand1974] 5.9 */
+/** End weights of Gregory's rule: with them a sum over even nodes is an integral to the fourth power of the step. Source: [Hildebrand1974] 5.9 (from memory; a test integrates a cubic) */
 const ENDS = [3 / 8, 7 / 6, 23 / 24] as const;
 
 /**
@@ -92,10 +92,11 @@ function massBetween(law: Extract<UnitLaw, { readonly kind: "normal" }>, from: n
 /** Cells of the inverse of the cut normal's distribution. */
 const STEPS = 8192;
 
-/** The law for drawing: with u in [0, 1), cell i = floor(u k), the value is bases[i] + slopes[i] (u k - i). */
+/** The law for drawing, rising: with u in [0, 1), cell i = floor(u k), the value is bases[i] + slopes[i] (u k - i). */
 export function lawSteps(law: UnitLaw): { readonly bases: Float64Array; readonly slopes: Float64Array } {
   if (law.kind === "uniform") return { bases: Float64Array.of(law.low), slopes: Float64Array.of(law.high - law.low) };
-  if (law.kind === "lot") return { bases: Float64Array.from(law.values), slopes: new Float64Array(law.values.length) };
+  if (law.kind === "lot")
+    return { bases: Float64Array.from(law.values).sort(), slopes: new Float64Array(law.values.length) };
   const { low, high } = lawRange(law);
   const density = normalDensity(law);
   const edges = new Float64Array(STEPS + 1).fill(high);

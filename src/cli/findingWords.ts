@@ -16,6 +16,7 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "balance-voltage": { title: "voltage on a balancing element" },
   "reverse-after-dump": { title: "reverse voltage left by a dump" },
   "pulse-energy": { title: "energy of one pulse", least: true },
+  "steady-current": { title: "capacitance for the steady current", least: true },
   "unit-short": { title: "sound units with one shorted" },
   "energy-class": { title: "stored energy, class of hazard" },
   "arc-blast": { title: "stored energy, arc blast" },

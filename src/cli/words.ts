@@ -21,6 +21,7 @@ export const WORDS: Readonly<Record<string, string>> = {
   "bad-yes-no": "this is neither yes nor no",
   "binary-file": "the file is not text",
   "broken-quotes": "the quotes do not match",
+  "row-too-long": "the row has more cells than there are headings",
   contradiction: "values contradict each other",
   "disk-full": "the disk is full; nothing was written",
   "duplicate-heading": "a heading stands twice",

@@ -16,6 +16,8 @@ export interface DescentGoal {
 const LEAST_GAIN = 1e-5;
 /** Set sizes tried, the next one only when the one before is stuck. */
 const DEPTHS = [3, DEEPEST] as const;
+/** Other samples of the lowest and highest stage that are tried before all pairs are. */
+const REDRAWS = 3;
 const YIELD_AFTER = 50_000;
 
 interface Change {
@@ -81,11 +83,24 @@ export function* descend(at: Board, goal: DescentGoal, random: Random, work: Eff
     }
     const mean = total / stages;
     change.size = 0;
-    change.gap = gap * (1 - LEAST_GAIN);
+    // Of two stages equally low, one can be raised without changing the gap: bringing lowest and highest together always counts.
     const half = (sums[high]! - sums[low]!) / 2;
-    if (half > 0) consider(low, high, cls, depth, half);
-    const settled = change.size > 0 && Math.abs(change.gain - half) <= 0.3 * half;
+    let settled = false;
+    const tries = DEPTHS.length + (size > SAMPLE ? REDRAWS : 0);
+    for (let quick = 0; quick < tries && half > 0 && !settled; quick++) {
+      change.size = 0;
+      change.gap = gap * (1 + LEAST_GAIN);
+      if (quick >= DEPTHS.length) {
+        lists.forget(low);
+        lists.forget(high);
+      }
+      consider(low, high, cls, DEPTHS[quick] ?? DEEPEST, half);
+      settled = change.size > 0 && Math.abs(change.gain - half) <= 0.3 * half;
+    }
     if (!settled) {
+      change.size = 0;
+      change.gap = gap * (1 - LEAST_GAIN);
+      if (half > 0) consider(low, high, cls, depth, half);
       for (let j = 0; j < stages; j++) {
         if (j !== low) {
           consider(low, j, cls, depth, (sums[j]! - sums[low]!) / 2);

@@ -38,6 +38,7 @@ export interface ExchangeLists {
 export function exchangeLists(at: Board, random: Random): ExchangeLists {
   const { classes, classOf, fixed } = at.rules;
   const samples: (Sample | undefined)[] = new Array((at.stages + 1) * classes);
+  const reach = Math.min(SAMPLE, Math.max(at.size, at.slots.length - at.stages * at.size));
   const candidates = new Int32Array(at.slots.length);
   const result: Exchange = { gain: 0, size: 0, maskOne: 0, maskOther: 0, steps: 0 };
 
@@ -64,7 +65,7 @@ export function exchangeLists(at: Board, random: Random): ExchangeLists {
     let sample = samples[key];
     if (!sample) {
       sample = {
-        builder: subsetBuilder(SAMPLE, DEEPEST),
+        builder: subsetBuilder(reach, DEEPEST),
         slots: new Int32Array(SAMPLE),
         values: new Float64Array(SAMPLE),
         count: 0,

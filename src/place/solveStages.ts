@@ -27,6 +27,8 @@ export interface StagesTask {
   readonly prove: boolean;
 }
 
+/** So many trials are spent even on a first placing that is good enough: they cost a fraction of a millisecond. */
+const ALWAYS = 12_000;
 /** The choice of spares is left alone for so many trials, then they join the exchange. */
 const BEFORE_SPARES = 60_000;
 /** Before a proof, so many trials look for a good placing: it makes the proof shorter. */
@@ -109,9 +111,9 @@ export function* solveStages(task: StagesTask, random: Random, work: Effort): Ge
     shake(at, SHAKES_PER_UNIT * values.length, random, work);
     gap = stageGap(at.sums, stages);
   }
-  const refine = function* (withSpares: boolean, moves: number): Generator<SearchStep> {
+  const refine = function* (withSpares: boolean, moves: number, goal = target): Generator<SearchStep> {
     const part = share(work, moves);
-    const steps = descend(at, { target, spares: withSpares }, random, part);
+    const steps = descend(at, { target: goal, spares: withSpares }, random, part);
     for (let step = steps.next(); ; step = steps.next()) {
       gap = step.value;
       if (step.done) break;
@@ -119,6 +121,7 @@ export function* solveStages(task: StagesTask, random: Random, work: Effort): Ge
     }
     settle(work, part);
   };
+  if (gap > bound.gap && mayGoOn(work, 0)) yield* refine(false, ALWAYS, bound.gap);
   if (gap > target && mayGoOn(work, 0)) {
     const quickly = test === null ? Number.POSITIVE_INFINITY : BEFORE_PROOF;
     if (spares) {

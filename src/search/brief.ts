@@ -1,6 +1,6 @@
 // What is wanted: the brief, read from JSON or flags, every value a number in SI or text with a unit.
 
-import { z } from "zod";
+import * as z from "zod";
 import {
   accepted,
   type Dimension,

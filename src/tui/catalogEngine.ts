@@ -6,9 +6,6 @@ import { accepted } from "../quantity/index.ts";
 import { assess, type Brief, type LayoutResult, plan, planCurrency, readBrief } from "../search/index.ts";
 import type { Arrangement, EnginePort } from "./ports.ts";
 
-/** Layouts worked out in full for the list. */
-const LISTED = 200;
-
 /** Said on every copy of an order: the standing cautions, and to whom this program defers. */
 const BILL_CAUTIONS: readonly string[] = [...cautionsFor({}), ...DEFERENCE].map(({ short }) => short);
 
@@ -44,8 +41,8 @@ export function catalogEngine({ parts, families }: Stock): EnginePort {
   };
   return {
     readBrief: (values) => readBrief(values),
-    plan: (brief, { rank, frontOnly, quick }) => {
-      const planned = plan({ brief, parts, families, limit: LISTED, rank, quick });
+    plan: (brief, { rank, most, frontOnly, quick }) => {
+      const planned = plan({ brief, parts, families, limit: most, rank, quick });
       if (!planned.ok || !frontOnly) return planned;
       const given = new Map(planned.value.layouts.map((layout) => [layout.id, layout]));
       const layouts = planned.value.front.map((id) => {

@@ -8,11 +8,14 @@ import type { Answer, State } from "./state.ts";
 export const filledValues = (values: Readonly<Record<string, string>>): Readonly<Record<string, string>> =>
   Object.fromEntries(Object.entries(values).filter(([, text]) => text.trim() !== ""));
 
+/** Beside the form only the first few are seen, and every key waits for them; the list itself is longer. */
+export const mostListed = (state: State): number => (state.screen === "brief" ? 50 : 200);
+
 export function answerFor(state: State, engine: EnginePort, quick: boolean): Answer {
   const read = engine.readBrief({ ...state.extra, ...filledValues(state.values) });
   if (!read.ok) return { kind: "refused", refusals: read.refusals };
   const brief = read.value;
-  const planned = engine.plan(brief, { rank: state.rank, frontOnly: state.frontOnly, quick });
+  const planned = engine.plan(brief, { rank: state.rank, most: mostListed(state), frontOnly: state.frontOnly, quick });
   if (!planned.ok) return { kind: "refused", refusals: planned.refusals };
   const plan = planned.value;
   const assessed = (arrangement: State["chosen"]): LayoutResult | null =>

@@ -9,6 +9,7 @@ export type {
   ScreenPorts,
   StockFacts,
 } from "./ports.ts";
+export { type ScreenFlags, screenFlags } from "./screenFlags.ts";
 export { openScreens } from "./screens.ts";
 export { type StartOptions, startScreens } from "./start.ts";
 export { screenTrouble } from "./terminal.ts";

@@ -17,6 +17,8 @@ export type SaveAnswer =
 
 export interface PlanRequest {
   readonly rank: Ranking;
+  /** Most layouts worked out in full for the list. */
+  readonly most: number;
   /** List only the layouts that no other beats in everything. */
   readonly frontOnly: boolean;
   /** Leave out the search for least changes: asked at every key, with the whole answer asked for when the keys rest. */
@@ -49,6 +51,8 @@ export interface ScreenPorts {
   readonly stock: StockFacts;
   /** The brief to start with when none was saved: text by key. */
   readonly brief: Readonly<Record<string, string>>;
+  /** The brief was asked for now, so that it holds and not the one saved last time. */
+  readonly briefFirst: boolean;
   /** What else the brief says, which the form has no field for; kept and planned with. */
   readonly extra: Readonly<Record<string, unknown>>;
   /** The text last given to `saveSession`, or null. */

@@ -38,6 +38,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     let mounted: Mounted | null = null;
     let frame: ReturnType<typeof setImmediate> | undefined;
     let over = false;
+    let loading = false;
 
     const draw = (): void => {
       frame = undefined;
@@ -50,6 +51,15 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       if (mounted === null) paint.paint(drawn.rows);
       else mounted.show(drawn.rows);
       paint.settle();
+      if (store.state().answer !== null) loadInk();
+    };
+    /** Ink is loaded once what fits is on screen: the first list does not wait for it either. */
+    const loadInk = (): void => {
+      if (loading) return;
+      loading = true;
+      import("./view/mount.ts").then(({ mount }) => {
+        if (!over) mounted = mount(paint, stdin as NodeJS.ReadStream, drawScreen(store.state()).rows);
+      }, session.fail);
     };
     const run = (effect: Effect, send: (message: Message) => void): void => {
       if (effect.type === "ask") asker.ask();
@@ -116,8 +126,5 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     stdout.on("error", onLost);
     asker.ask();
     draw();
-    import("./view/mount.ts").then(({ mount }) => {
-      if (!over) mounted = mount(paint, stdin as NodeJS.ReadStream, drawScreen(store.state()).rows);
-    }, session.fail);
   });
 }

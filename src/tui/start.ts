@@ -13,6 +13,8 @@ export interface StartOptions {
   readonly stock: StockFacts;
   /** A brief as parsed from JSON; what is no object counts as none. */
   readonly brief: unknown;
+  /** The brief beats the one saved last time. */
+  readonly briefFirst?: boolean;
   readonly files: Files;
   /** Where brief and pins are kept between runs; null keeps nothing. */
   readonly sessionFile: string | null;
@@ -33,12 +35,14 @@ export function formValues(brief: unknown): Pick<ScreenPorts, "brief" | "extra">
 }
 
 /** The ports of the screens on real files. */
-export function portsOn({ parts, families, stock, brief, files, sessionFile, terminal }: StartOptions): ScreenPorts {
+export function portsOn(options: StartOptions): ScreenPorts {
+  const { parts, families, stock, brief, briefFirst = false, files, sessionFile, terminal } = options;
   const why = (refusals: readonly { readonly code: string; readonly want: string }[]): string =>
     refusals.map(({ code, want }) => `${code.replaceAll("-", " ")}; needed: ${want}`).join(". ");
   return {
     ...terminal,
     ...formValues(brief),
+    briefFirst,
     engine: catalogEngine({ parts, families }),
     stock,
     loadSession: () => {

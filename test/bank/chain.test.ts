@@ -1,6 +1,6 @@
 // Chains at rest: charging shares, the end of an endless hold, what a dump leaves.
 import { Matrix, solve } from "ml-matrix";
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import {
   type Chain,
   chainCapacitance,
@@ -13,6 +13,9 @@ import {
 } from "../../src/bank/chain.ts";
 import { courseOf } from "../../src/bank/course.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const NONE = Number.POSITIVE_INFINITY;
 const stage = (capacitance: number, leakageCurrent = 0, conductance = 0, resistance = NONE): Stage => ({

@@ -1,6 +1,9 @@
 // Clamp diode duty against the dump worked out step by step with the ideal diode in it.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { type ClampCase, clampDiode } from "../../src/bank/clampDiode.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const BASE: ClampCase = {
   ties: "cross-tied",

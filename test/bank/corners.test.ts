@@ -1,8 +1,12 @@
 // Worst corners against every corner there is, for n up to 5, and against the worked examples.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { type Chain, chargingShares, endOfHold, type Stage } from "../../src/bank/chain.ts";
-import { chargingCorners, dumpedCorners, holdingCorners, type StageRange, stageRange } from "../../src/bank/corners.ts";
+import { chargingCorners, dumpedCorners, holdingCorners } from "../../src/bank/corners.ts";
+import { type StageRange, stageRange } from "../../src/bank/cornersRange.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const KEYS = ["capacitance", "leakageCurrent", "conductance", "resistance"] as const;
 const draw = uniformFrom(streamState(99, 0));

@@ -1,7 +1,11 @@
 // The whole course: charge, hold, dump, rest; known peaks, energy, leakage that stops at zero, and a small-step reference.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { type Chain, type Stage, total } from "../../src/bank/chain.ts";
-import { courseOf, type Program, phaseFrom } from "../../src/bank/course.ts";
+import { courseOf, type Program } from "../../src/bank/course.ts";
+import { phaseFrom } from "../../src/bank/coursePhase.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const NONE = Number.POSITIVE_INFINITY;
 const stage = (capacitance: number, leakageCurrent = 0, conductance = 0, resistance = NONE): Stage => ({
@@ -160,5 +164,19 @@ describe("courseOf(chain, program)", () => {
     expect([...course.voltagesAt(charge!.seconds + 2)]).toEqual([...hold!.voltagesAt(2)]);
     expect([...course.voltagesAt(1e9)]).toEqual([...course.phases.at(-1)!.end]);
     expect(course.phases.map((phase) => phase.name)).toEqual(["charge", "hold", "dump", "rest"]);
+  });
+
+  test("voltagesOver(grid) is voltagesAt one by one, across stretches and beyond the end", () => {
+    const chain = [
+      stage(1e-3, 5e-3),
+      stage(1e-3, 1e-3, 1e-7),
+      stage(1e-3),
+      stage(2e-3, 0, 1e-6),
+      stage(1e-3, 0, 0, 1e6),
+    ];
+    const hold = courseOf(chain, program({ hold: 400 })).phases[1]!;
+    const rows = hold.voltagesOver({ from: 3, step: 7, count: 80 });
+    for (let k = 0; k < 80; k++)
+      for (const [i, v] of hold.voltagesAt(3 + 7 * k).entries()) expect(rows[k * 5 + i]).toBeCloseTo(v, 8);
   });
 });

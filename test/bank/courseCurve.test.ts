@@ -1,7 +1,10 @@
 // Sums of exponentials: zeros and highest points, against dense sampling and cases known by hand.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { type Curve, curveAt, firstBelowZero, highestOf, riseOf } from "../../src/bank/courseCurve.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const curve = (start: number, ...parts: readonly (readonly [number, number])[]): Curve => ({
   start,

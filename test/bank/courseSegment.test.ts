@@ -2,7 +2,8 @@
 import { describe, expect, test } from "vitest";
 import type { Stage } from "../../src/bank/chain.ts";
 import { curveAt } from "../../src/bank/courseCurve.ts";
-import { endsCurve, segmentAt, segmentCurrent, segmentFrom, voltageCurve } from "../../src/bank/courseSegment.ts";
+import { endsCurve, segmentAt, segmentCurrent } from "../../src/bank/courseRead.ts";
+import { segmentFrom, voltageCurve } from "../../src/bank/courseSegment.ts";
 
 const stage = (capacitance: number, leakageCurrent = 0, conductance = 0): Stage => ({
   capacitance,

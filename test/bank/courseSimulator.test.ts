@@ -2,7 +2,7 @@
 import { beforeAll, describe, expect, test } from "vitest";
 import { type Chain, type ChainUnit, chargingShares, crossTiedChain, leftAfterDump } from "../../src/bank/chain.ts";
 import { afterShortHeld, withOpen, withoutUnit, withShort } from "../../src/bank/chainFaults.ts";
-import { phaseFrom } from "../../src/bank/course.ts";
+import { phaseFrom } from "../../src/bank/coursePhase.ts";
 import type { Drive } from "../../src/bank/courseSegment.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
 import { type SimulatedChain, simulate, startSimulator } from "./simulate.ts";

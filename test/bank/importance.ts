@@ -31,7 +31,7 @@ export function importanceTail(given: ImportanceCase, banks: number, seed: numbe
   const steep = given.n * given.p <= 4;
   for (const victim of steep ? [-10, -100, -1000] : [-1, -2, -4, -7, -12])
     for (const others of steep ? [5, 50, 500] : [0.3, 0.8, 1.5, 3, 6]) {
-      const { exceed, error } = run(given, { victim, others }, 4000, seed + 1);
+      const { exceed, error } = run(given, { victim, others }, 2000, seed + 1);
       if (exceed > 0 && error / exceed < best.spread) best = { victim, others, spread: error / exceed };
     }
   return run(given, best, banks, seed);

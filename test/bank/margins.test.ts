@@ -1,8 +1,11 @@
 // The causes of a lost margin: they add up, each alone is the whole, unknown is said.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { worstAtHold } from "../../src/bank/cornersHold.ts";
 import { type MarginCase, marginCauses } from "../../src/bank/margins.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const NONE = Number.POSITIVE_INFINITY;
 const BASE: MarginCase = {

@@ -1,6 +1,6 @@
 // Reverse after a dump as a finding: volts, corner, verdict, clamp.
 import { describe, expect, test } from "vitest";
-import { stageRange } from "../../src/bank/corners.ts";
+import { stageRange } from "../../src/bank/cornersRange.ts";
 import { residualAfterDump } from "../../src/bank/residual.ts";
 
 const ranges = (tolerance: number, leakage = 0) =>

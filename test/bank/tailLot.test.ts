@@ -1,8 +1,11 @@
 // A small lot is exact: every combination counted by hand-written loops.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { exceedRisk } from "../../src/bank/tail.ts";
 import type { TailCase } from "../../src/bank/tailLaw.ts";
 import { lotStages } from "../../src/bank/tailLot.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const LOT = [0.91, 0.96, 1, 1.02, 1.05, 1.09];
 const asked = (n: number, p: number, share: number, values: readonly number[] = LOT): TailCase => ({

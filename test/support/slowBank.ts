@@ -57,7 +57,7 @@ export interface SlowChoice {
 }
 
 /** For k = 1, 2, 3, ...: tries every preferred value from the top until the share holds, then the volts and watts of one element. */
-export function slowBalance(chain: SlowChain, limit: number, family: ResistorFamily, most = 1000): SlowChoice | null {
+export function slowBalance(chain: SlowChain, limit: number, family: ResistorFamily, most = 3000): SlowChoice | null {
   const { spread: q } = chain;
   for (let k = 1; k <= most; k++) {
     let element = 0;

@@ -12,13 +12,13 @@ const brief = (() => {
 })();
 const all = plan({ brief, parts: parts(), families: [DEFAULT_FAMILY], limit: 0 });
 if (!all.ok) throw new Error("plan");
-const request = { rank: "cost", frontOnly: false, quick: true } as const;
+const request = { rank: "cost", most: 70, frontOnly: false, quick: true } as const;
 
 describe("plan(brief, request)", () => {
-  test("lists the search's own layouts in its order, at most 200", () => {
+  test("lists the search's own layouts in its order, at most as many as asked", () => {
     const planned = engine.plan(brief, request);
     expect(planned.ok && planned.value.layouts.map((l) => l.id)).toEqual(
-      all.value.layouts.slice(0, 200).map((l) => l.id),
+      all.value.layouts.slice(0, 70).map((l) => l.id),
     );
   });
   test("only the unbeaten: exactly the front, each as the search assesses it", () => {

@@ -1,6 +1,7 @@
 // One question to the engine: refused, nothing fits, planned.
 import { describe, expect, test } from "vitest";
-import { answerFor, filledValues } from "../../src/tui/engine.ts";
+import { answerFor, filledValues, mostListed } from "../../src/tui/engine.ts";
+import { update } from "../../src/tui/update/update.ts";
 import { engine, stateWith } from "../support/stock.ts";
 
 describe("answerFor(state, engine, quick)", () => {
@@ -34,6 +35,12 @@ describe("answerFor(state, engine, quick)", () => {
     const answer = answerFor(stateWith(), engine, true);
     expect(answer.kind === "planned" && [answer.chosen, answer.bill]).toEqual([null, null]);
   });
+});
+
+test("mostListed(state): short beside the form, long on the list, and going there asks for the rest", () => {
+  expect([mostListed(stateWith()), mostListed(stateWith({ screen: "layouts" }))]).toEqual([50, 200]);
+  expect(update(stateWith(), { type: "go", screen: "layouts" }).effects).toEqual([{ type: "ask", asked: 1 }]);
+  expect(update(stateWith({ screen: "layouts" }), { type: "go", screen: "brief" }).effects).toEqual([]);
 });
 
 test("filledValues(values) leaves blanks to the brief's defaults", () => {

@@ -7,7 +7,7 @@ test("an engine's answers are plain data", () => {
   const port: EnginePort = engine;
   const read = port.readBrief(BRIEF);
   if (!read.ok) throw new Error("brief");
-  const planned = port.plan(read.value, { rank: "cost", frontOnly: false, quick: true });
+  const planned = port.plan(read.value, { rank: "cost", most: 9, frontOnly: false, quick: true });
   expect(structuredClone(planned)).toEqual(planned);
 });
 

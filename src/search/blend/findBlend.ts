@@ -8,6 +8,7 @@ import type { BlendModel } from "./model.ts";
 import { buildPool } from "./pool.ts";
 import { pricedCeilings } from "./pricedCeilings.ts";
 import { bestSingle, beyondAnyCost, type FoundBlend } from "./singles.ts";
+import { thinCore } from "./thinCore.ts";
 import { tightenCore } from "./tightenCore.ts";
 import { type Budget, walkCore } from "./walk.ts";
 
@@ -42,6 +43,8 @@ const RISE = 4;
 const MOST_RISES = 6;
 /** With so few options left under the best blend known, no rising threshold is needed. */
 const FEW_OPTIONS = 24;
+/** Fewer pairs are walked sooner than thinned. */
+const FEW_PAIRS = 60;
 /** Work that a walk may take before the capacity bound is made; and then, as that is made finer and finer. */
 const PLAIN_WORK = 125_000;
 const STAGES = [
@@ -88,10 +91,13 @@ export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAns
   let stage = -1;
   let looking = false;
   let ceilingPrices = NO_PRICES;
+  let known: { readonly under: number; readonly options: readonly number[] } | null = null;
   for (let round = 0; lower < ceiling; round += 1) {
     if (ceiling === Number.POSITIVE_INFINITY && round >= MOST_RISES) ceiling = beyondAnyCost(model, pool);
     let threshold = round >= MOST_RISES && stage < 0 ? ceiling : Math.min(ceiling, lower + rise);
-    let options = survivingOptions(pool, at, threshold);
+    if (budget.stop()) return answer("stopped");
+    let options: readonly number[] =
+      known !== null && threshold <= known.under ? known.options : survivingOptions(pool, at, threshold);
     if (stage < 0 && threshold < ceiling && ceiling < Number.POSITIVE_INFINITY) {
       const all = survivingOptions(pool, at, ceiling);
       if (all.length <= FEW_OPTIONS) {
@@ -104,7 +110,12 @@ export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAns
     lower = Math.max(lower, Math.min(threshold, wholeBound(closer.value)));
     rise *= RISE;
     if (lower >= threshold) continue;
-    let left = buildCore(model, near, closer.value >= ascent.value ? closer.prices : ascent.prices, threshold);
+    const whole = buildCore(model, near, closer.value >= ascent.value ? closer.prices : ascent.prices, threshold);
+    let left = whole.pairs > FEW_PAIRS ? thinCore(whole) : whole;
+    // What was ruled out under a threshold stays ruled out under every lower one.
+    if (known === null || threshold > known.under || threshold >= ceiling) {
+      known = { under: threshold, options: left.columns.map(({ option }) => option) };
+    }
     let bound: CapacityBound | null = null;
     if (stage >= 0) {
       const { effort, steps, fine } = STAGES[stage]!;

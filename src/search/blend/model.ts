@@ -1,9 +1,13 @@
 // What a blend is chosen from: string types with tabulated purchase costs, the need, and the ceilings.
 
-/** A lower bound on a cost table that is known without building it: costs[x] >= fixed + perString x for every x >= 1. */
+/**
+ * A lower bound on a cost table that is known without building it: for every x >= 1, costs[x] is at least
+ * fixed + perString x, and at least `least`, which as a rule is what one string costs with its packs and minimum order.
+ */
 export interface CostFloor {
   readonly fixed: number;
   readonly perString: number;
+  readonly least?: number;
 }
 
 /** One kind of string (a part, its series count, its ties and resistors). */

@@ -1,6 +1,6 @@
 // The options as columns of numbers for the bound: normalised rows, and for each option the lower hull of its costs.
 import { capacityNeeded, roomUnder } from "./evaluate.ts";
-import type { BlendModel, BlendOption } from "./model.ts";
+import type { BlendModel, BlendOption, CostFloor } from "./model.ts";
 
 /** The rows that a multiplier can stand for; capacity is a need, the others are ceilings. */
 export const CEILING_NAMES = ["volume", "mass", "units"] as const;
@@ -50,11 +50,15 @@ function stringsUnder(room: number, each: number): number {
 
 /** Most strings of the option that could ever be of use. */
 export function usefulStrings(model: BlendModel, option: BlendOption): number {
-  return Math.min(
-    option.maxStrings,
-    stringsToReach(capacityNeeded(model.requirement), option.capacity),
-    ...CEILING_NAMES.map((name) => stringsUnder(roomUnder(model.ceilings[name]), option[name])),
-  );
+  const { volume, mass, units } = model.ceilings;
+  let most = option.maxStrings;
+  if (most * option.capacity > model.requirement) {
+    most = Math.min(most, stringsToReach(capacityNeeded(model.requirement), option.capacity));
+  }
+  if (most * option.volume > volume) most = Math.min(most, stringsUnder(roomUnder(volume), option.volume));
+  if (most * option.mass > mass) most = Math.min(most, stringsUnder(roomUnder(mass), option.mass));
+  if (most * option.units > units) most = Math.min(most, stringsUnder(roomUnder(units), option.units));
+  return most;
 }
 
 /** Corners of the lower convex hull of costs[1..most]. */
@@ -77,8 +81,8 @@ export function lowerHull(costs: Float64Array, most: number): { readonly x: numb
   return { x, cost };
 }
 
-const scaled = (amount: number, ceiling: number): number =>
-  ceiling === Number.POSITIVE_INFINITY || amount === 0 ? 0 : amount / roomUnder(ceiling);
+/** What divides an amount to make its ceiling 1; Infinity, and so amounts of 0, where there is none. */
+const unitOf = (ceiling: number): number => (ceiling === 0 ? 1 : roomUnder(ceiling));
 
 /** Columns of the named options; their hulls come from the tables when `exact`, else from the floors where given. */
 export function buildPool(model: BlendModel, among: readonly number[] | null, exact: boolean): Pool {
@@ -86,15 +90,17 @@ export function buildPool(model: BlendModel, among: readonly number[] | null, ex
   const option = new Int32Array(wanted);
   const most = new Int32Array(wanted);
   const start = new Int32Array(wanted + 1);
-  const rows = {
-    capacity: new Float64Array(wanted),
-    volume: new Float64Array(wanted),
-    mass: new Float64Array(wanted),
-    units: new Float64Array(wanted),
-  };
-  const hullX: number[] = [];
-  const hullCost: number[] = [];
+  const capacity = new Float64Array(wanted);
+  const volume = new Float64Array(wanted);
+  const mass = new Float64Array(wanted);
+  const units = new Float64Array(wanted);
+  const hull: Hull = { x: new Float64Array(3 * wanted + 16), cost: new Float64Array(3 * wanted + 16), length: 0 };
   const need = capacityNeeded(model.requirement);
+  const unit = {
+    volume: unitOf(model.ceilings.volume),
+    mass: unitOf(model.ceilings.mass),
+    units: unitOf(model.ceilings.units),
+  };
   let size = 0;
   for (let at = 0; at < wanted; at += 1) {
     const index = among === null ? at : among[at]!;
@@ -103,27 +109,56 @@ export function buildPool(model: BlendModel, among: readonly number[] | null, ex
     if (count < 1) continue;
     option[size] = index;
     most[size] = count;
-    rows.capacity[size] = from.capacity / need;
-    for (const name of CEILING_NAMES) rows[name][size] = scaled(from[name], model.ceilings[name]);
-    addHull(from, count, exact, hullX, hullCost);
+    capacity[size] = from.capacity / need;
+    volume[size] = from.volume / unit.volume;
+    mass[size] = from.mass / unit.mass;
+    units[size] = from.units / unit.units;
+    addHull(hull, from, count, exact);
     size += 1;
-    start[size] = hullX.length;
+    start[size] = hull.length;
   }
-  return { size, option, ...rows, most, start, hullX: Float64Array.from(hullX), hullCost: Float64Array.from(hullCost) };
+  return { size, option, capacity, volume, mass, units, most, start, hullX: hull.x, hullCost: hull.cost };
 }
 
-function addHull(from: BlendOption, most: number, exact: boolean, hullX: number[], hullCost: number[]): void {
+/** Corners of all columns on end; `length` of the arrays is in use. */
+interface Hull {
+  x: Float64Array;
+  cost: Float64Array;
+  length: number;
+}
+
+function addCorner(hull: Hull, x: number, cost: number): void {
+  if (hull.length === hull.x.length) {
+    const wider = (old: Float64Array): Float64Array => {
+      const next = new Float64Array(2 * old.length);
+      next.set(old);
+      return next;
+    };
+    hull.x = wider(hull.x);
+    hull.cost = wider(hull.cost);
+  }
+  hull.x[hull.length] = x;
+  hull.cost[hull.length] = cost;
+  hull.length += 1;
+}
+
+function addHull(hull: Hull, from: BlendOption, most: number, exact: boolean): void {
   const floor = exact ? undefined : from.floor;
   if (floor) {
-    hullX.push(1);
-    hullCost.push(floor.fixed + floor.perString);
-    if (most > 1) {
-      hullX.push(most);
-      hullCost.push(floor.fixed + floor.perString * most);
-    }
+    addFloor(hull, floor, most);
     return;
   }
-  const hull = lowerHull(from.costs, most);
-  hullX.push(...hull.x);
-  hullCost.push(...hull.cost);
+  const { x, cost } = lowerHull(from.costs, most);
+  for (let at = 0; at < x.length; at += 1) addCorner(hull, x[at]!, cost[at]!);
+}
+
+/** The greater of a level and a slope: its corners, the middle one where they cross, which need not be at a whole count. */
+function addFloor(hull: Hull, { fixed, perString, least = 0 }: CostFloor, most: number): void {
+  const first = Math.max(least, fixed + perString);
+  const last = fixed + perString * most;
+  addCorner(hull, 1, first);
+  if (most === 1) return;
+  const crossing = perString > 0 ? (first - fixed) / perString : 1;
+  if (crossing > 1 && crossing < most) addCorner(hull, crossing, first);
+  addCorner(hull, most, Math.max(first, last));
 }

@@ -1,6 +1,6 @@
 // The first blends to hold others against: the cheapest bank of one string type, and a cost that no blend reaches.
 import { isFittingBlend } from "./evaluate.ts";
-import type { BlendCount, BlendModel } from "./model.ts";
+import type { BlendCount, BlendModel, CostFloor } from "./model.ts";
 import { type Pool, stringsToReach } from "./pool.ts";
 
 export interface FoundBlend {
@@ -9,6 +9,9 @@ export interface FoundBlend {
   readonly cost: number;
 }
 
+const floorCost = ({ fixed, perString, least = 0 }: CostFloor, strings: number): number =>
+  Math.max(least, fixed + perString * strings);
+
 /** Cheapest bank of one string type, or null. */
 export function bestSingle(model: BlendModel, pool: Pool): FoundBlend | null {
   let best: FoundBlend | null = null;
@@ -16,7 +19,7 @@ export function bestSingle(model: BlendModel, pool: Pool): FoundBlend | null {
     const strings = stringsToReach(1, pool.capacity[k]!);
     if (strings > pool.most[k]!) continue;
     const from = model.options[pool.option[k]!]!;
-    if (best !== null && from.floor && from.floor.fixed + from.floor.perString * strings >= best.cost) continue;
+    if (best !== null && from.floor && floorCost(from.floor, strings) >= best.cost) continue;
     const cost = from.costs[strings]!;
     if (best !== null && cost >= best.cost) continue;
     const counts = [{ option: pool.option[k]!, strings }];

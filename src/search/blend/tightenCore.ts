@@ -1,6 +1,7 @@
 // Drops the pairs of a core that the capacity bound rules out, each tried between all that comes before and after it.
 import { addChoice, type CapacityBound, MOST_LAYERS, penalty, stepsFor, stepsOf } from "./capacityBound.ts";
 import type { Core, CoreColumn } from "./core.ts";
+import { withOnly } from "./thinCore.ts";
 
 /** The core without the pairs that, at best, still end above `limit` (a cost): each tried with all before and all after it. */
 export function tightenCore(core: Core, bound: CapacityBound, limit: number): Core {
@@ -37,8 +38,7 @@ export function tightenCore(core: Core, bound: CapacityBound, limit: number): Co
     before = next;
     if (keep.length === 0) return;
     pairs += keep.length;
-    const strings = Int32Array.from(keep, (at) => column.strings[at]!);
-    columns.push({ ...column, strings, reduced: Float64Array.from(keep, (at) => column.reduced[at]!) });
+    columns.push(withOnly(column, keep));
   });
   columns.sort((a, b) => a.reduced[0]! - b.reduced[0]! || a.option - b.option);
   return { ...core, columns, pairs, maxTypesHere: Math.min(core.maxTypes, columns.length) };

@@ -1,6 +1,7 @@
 // State and message to state and effects: the one place where the screens change. Pure.
 
 import { RANKINGS } from "../../search/index.ts";
+import { mostListed } from "../engine.ts";
 import { arrangementOf, selectedLayout } from "../pick.ts";
 import { ask, type Change, type Message, type ScreenName, type State, still } from "../state.ts";
 import { mostScroll } from "../view/screen.ts";
@@ -19,8 +20,9 @@ function move(state: State, by: Step): Change {
 /** Going to the bank before one was chosen chooses the one under the cursor. */
 function goTo(state: State, screen: ScreenName): Change {
   const there: State = { ...state, screen, help: false, notice: null };
+  const asks = mostListed(there) > mostListed(state) ? ask : still;
   const layout = selectedLayout(state);
-  if ((screen !== "bank" && screen !== "order") || state.chosen !== null || layout === null) return still(there);
+  if ((screen !== "bank" && screen !== "order") || state.chosen !== null || layout === null) return asks(there);
   return ask({ ...there, chosen: arrangementOf(layout) });
 }
 

@@ -1,5 +1,4 @@
 // One bank drawn stage by stage, each stage's worst voltage against its limit, with all that was found.
-import { type Finding, formatQuantity } from "../../quantity/index.ts";
 import type { LayoutResult } from "../../search/index.ts";
 import { drawBar } from "../bar.ts";
 import { isPinned, shownBank } from "../pick.ts";
@@ -7,7 +6,6 @@ import { EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { fitText } from "../text.ts";
 import {
-  bySeverity,
   nameOf,
   shareOfLimit,
   shown,
@@ -20,6 +18,7 @@ import {
   worstVerdict,
   worstVoltage,
 } from "../values.ts";
+import { findingRows } from "./findings.ts";
 import { layoutSentences } from "./layouts.ts";
 import { type Page, pageOf, type Room, scrolled } from "./page.ts";
 import { emptyRows, paragraph } from "./words.ts";
@@ -82,47 +81,6 @@ function stageRows(layout: LayoutResult, state: State, columns: number): readonl
       span(between(stage), "quiet"),
     ),
   );
-}
-
-const VERDICT_MARK: Readonly<Record<Finding["verdict"], string>> = {
-  fail: "x fail",
-  warn: "! warn",
-  "not assessed": "? not assessed",
-  pass: "  pass",
-};
-
-const DIMENSION_OF_UNIT: Readonly<Record<string, Parameters<typeof shown>[1]>> = {
-  V: "voltage",
-  J: "energy",
-  A: "current",
-  W: "power",
-  s: "time",
-  ohm: "resistance",
-  F: "capacitance",
-};
-
-/** A finding's number in its unit; a unit not in the table is printed as it stands. */
-function findingValue(value: number | null, unit: string): string {
-  if (value === null) return "unknown";
-  const dimension = DIMENSION_OF_UNIT[unit];
-  // One figure more than elsewhere: rounded to the nearest, it then never contradicts a worst case rounded up.
-  if (dimension !== undefined) return formatQuantity(value, dimension, { digits: 4 });
-  return `${Number(value.toPrecision(4))}${unit === "" ? "" : ` ${unit}`}`;
-}
-
-function findingRows(findings: readonly Finding[], columns: number): readonly Row[] {
-  return bySeverity(findings).flatMap((finding): readonly Row[] => {
-    const limit = finding.limit === null ? "" : ` of ${findingValue(finding.limit, finding.unit)}`;
-    const value =
-      finding.value === null && finding.limit === null ? "" : `: ${findingValue(finding.value, finding.unit)}${limit}`;
-    const line = rowOf(
-      span(fitText(VERDICT_MARK[finding.verdict], 15), VERDICT_STYLE[finding.verdict]),
-      span(`${finding.state}, ${finding.id}${value}`),
-    );
-    const notes =
-      finding.verdict === "pass" || finding.note === "" ? [] : paragraph(finding.note, columns - 15, "quiet");
-    return [line, ...notes.map((note) => ({ left: [span(" ".repeat(15)), ...note.left] }))];
-  });
 }
 
 export function bankHead(state: State, layout: LayoutResult): readonly Row[] {

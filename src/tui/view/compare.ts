@@ -4,7 +4,7 @@ import { pinnedLayouts } from "../pick.ts";
 import type { Arrangement } from "../ports.ts";
 import { type Row, rowOf, type Span, span } from "../row.ts";
 import type { State } from "../state.ts";
-import { fitText, safeText } from "../text.ts";
+import { cutText, fitText, safeText } from "../text.ts";
 import type { StyleName } from "../theme.ts";
 import { shapeOf } from "../values.ts";
 import { textWidth } from "../width.ts";
@@ -20,6 +20,13 @@ const STANDING: Readonly<Record<"best" | "worst", { readonly mark: string; reado
 const LEAST_COLUMN = 14;
 
 const indent = (width: number): string => (width < 18 ? " " : "  ");
+
+/** A name in at most two lines; what is longer still is cut. */
+function splitName(name: string, width: number): readonly string[] {
+  const first = cutText(name, width, "");
+  const rest = name.slice(first.length);
+  return rest === "" ? [name] : [first, cutText(rest, width)];
+}
 
 /** The columns in sight: as many as fit, the one under the cursor among them. */
 function columnsInSight(
@@ -88,15 +95,20 @@ export function comparePage(state: State, room: Room): Page {
   const inSight = <T>(list: readonly T[]): readonly T[] => list.slice(from, from + count);
   const width = Math.min(44, Math.floor((room.columns - label) / count) - 1);
   const hidden = layouts.length > count ? `${from + 1}-${from + count} of ${layouts.length}` : "";
-  const heads = inSight(state.pins).map((pin, index) => {
-    const here = from + index === state.column;
-    const name = `${here ? ">" : " "}${indent(width).slice(1)}${safeText(pin.part)}`;
-    return span(fitText(name, width), here ? "focus" : "strong");
-  });
+  // A name too long for its column goes on in the next row: its end often says more than its beginning.
+  const names = inSight(state.pins).map(({ part }) => splitName(safeText(part), width - indent(width).length));
+  const nameRows = Math.max(1, ...names.map((lines) => lines.length));
+  const heads = Array.from({ length: nameRows }, (_, line) =>
+    names.flatMap((lines, index) => {
+      const here = from + index === state.column;
+      const lead = `${here && line === 0 ? ">" : " "}${indent(width).slice(1)}`;
+      return [span(" "), span(fitText(lead + (lines[line] ?? ""), width), here ? "focus" : "strong")];
+    }),
+  );
   const under = (text: (pin: Arrangement) => string): readonly Span[] =>
     inSight(state.pins).flatMap((pin) => [span(" "), span(fitText(indent(width) + text(pin), width), "quiet")]);
   const head: readonly Row[] = [
-    rowOf(span(fitText("^ best  v worst", label), "quiet"), ...heads.flatMap((cell) => [span(" "), cell])),
+    ...heads.map((spans, line) => rowOf(span(fitText(line === 0 ? "^ best  v worst" : "", label), "quiet"), ...spans)),
     rowOf(span(fitText(hidden, label), "accent"), ...under(shapeOf)),
     rowOf(span(" ".repeat(label)), ...under(({ ties }) => ties)),
   ];

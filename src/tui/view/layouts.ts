@@ -34,7 +34,7 @@ export function layoutColumns(state: State): readonly Column<LayoutResult>[] {
   ): Column<LayoutResult> => ({ title, width, priority, side, cell: (layout) => span(text(layout)) });
   return [
     column("", 1, 0, (l) => (isPinned(state, l) ? "*" : " "), "left"),
-    column("part", 14, 0, (l) => l.part, "left"),
+    column("part", 24, 0, (l) => l.part, "left"),
     column("shape", 8, 0, shapeOf, "left"),
     column("ties", 10, 3, (l) => l.ties, "left"),
     column("units", 5, 4, (l) => String(l.units)),

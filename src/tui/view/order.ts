@@ -40,7 +40,7 @@ function sumRow({ totals }: Bill): Row {
   const { purchase, currency, pricedLines, unpriced } = totals;
   const sum = purchase === null ? "unknown" : shownMoney(purchase, currency ?? "");
   const lines = `for ${pricedLines} ${pricedLines === 1 ? "line" : "lines"}`;
-  const left = unpriced.length === 0 ? "" : `; ${unpriced.length} more have no price or are to be chosen`;
+  const left = unpriced.length === 0 ? "" : `; ${unpriced.length} without a price`;
   return rowOf(
     span(`Money to spend: ${sum}`, "strong"),
     span(` ${lines}${left}`, unpriced.length === 0 ? "plain" : "warn"),

@@ -50,7 +50,18 @@ test("buildPool leaves out what cannot be used, and takes floors only when not e
   const pool = buildPool(lazy, null, false);
   expect(pool.size).toBe(1);
   expect(pool.option[0]).toBe(1);
-  expect([...pool.hullX]).toEqual([1, 5]);
-  expect([...pool.hullCost]).toEqual([5, 25]);
-  expect([...buildPool(lazy, null, true).hullCost]).toEqual([9, 10, 32]);
+  expect([...pool.hullX.subarray(0, 2)]).toEqual([1, 5]);
+  expect([...pool.hullCost.subarray(0, 2)]).toEqual([5, 25]);
+  expect(pool.start[1]).toBe(2);
+  expect([...buildPool(lazy, null, true).hullCost.subarray(0, 3)]).toEqual([9, 10, 32]);
+});
+
+test("buildPool: a floor with a level is a hull of three corners, none above the table", () => {
+  // A minimum order of 40 for up to four strings, then 10 each.
+  const model = plainModel(1, [{ capacity: 0.1, most: 8, price: [40, 40, 40, 40, 50, 60, 70, 80] }]);
+  const floor = { fixed: 0, perString: 10, least: 40 };
+  const pool = buildPool({ ...model, options: [{ ...model.options[0]!, floor }] }, null, false);
+  const used = pool.start[1]!;
+  expect([...pool.hullX.subarray(0, used)]).toEqual([1, 4, 8]);
+  expect([...pool.hullCost.subarray(0, used)]).toEqual([40, 40, 80]);
 });

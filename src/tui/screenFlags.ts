@@ -1,0 +1,45 @@
+// Tells whether the arguments ask for the screens, and on which catalogues and brief.
+import { parseArgs } from "node:util";
+
+export interface ScreenFlags {
+  /** Capacitor catalogues; empty for those that come with the program. */
+  readonly catalog: readonly string[];
+  readonly resistors: string | null;
+  readonly brief: string | null;
+  readonly ascii: boolean;
+}
+
+/**
+ * No argument at all, or only the flags of the screens: `--catalog FILE...`, `--resistors FILE`, `--brief FILE`, `--ascii`.
+ * Null for anything else, which is the commands' to understand or to refuse.
+ */
+export function screenFlags(argv: readonly string[]): ScreenFlags | null {
+  // "--catalog a.csv b.csv" means two catalogues, as it does for the commands.
+  const spread: string[] = [];
+  let list = "";
+  for (const word of argv) {
+    if (word.startsWith("--") && word !== "--") {
+      list = word === "--catalog" ? word : "";
+      if (list !== "") continue;
+    } else if (list !== "") spread.push(list);
+    spread.push(word);
+  }
+  if (argv.at(-1) === "--catalog") return null;
+  try {
+    const { values } = parseArgs({
+      args: spread,
+      strict: true,
+      allowPositionals: false,
+      options: {
+        catalog: { type: "string", multiple: true },
+        resistors: { type: "string" },
+        brief: { type: "string" },
+        ascii: { type: "boolean" },
+      },
+    });
+    const { catalog = [], resistors = null, brief = null, ascii = false } = values;
+    return { catalog, resistors, brief, ascii };
+  } catch {
+    return null;
+  }
+}
