@@ -19,5 +19,5 @@ export {
   type ResistorFamily,
   readResistors,
 } from "./resistor.ts";
-export { readWaveform, type WaveformRow } from "./waveform.ts";
 export { assumedLeakage, RULES, stateOf } from "./states.ts";
+export { readWaveform, type WaveformRow } from "./waveform.ts";

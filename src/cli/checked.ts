@@ -5,7 +5,7 @@ import { accepted, type Read, refused } from "../quantity/index.ts";
 import { assess, type BalanceWish, type LayoutResult, planCurrency } from "../search/index.ts";
 import { type LayoutFlags, type LayoutInput, readLayout } from "./layoutInput.ts";
 import type { Ports } from "./ports.ts";
-import { type Flags, type Settings, settle } from "./settings.ts";
+import { type Flags, type Nest, type Settings, settle } from "./settings.ts";
 import { findPart, readStock, type Stock } from "./stock.ts";
 
 export type BankFlags = Flags &
@@ -22,8 +22,13 @@ export interface Checked {
 }
 
 /** Reads everything and assesses; every fault of every input is told at once. */
-export function checkedBank(brief: string | undefined, flags: BankFlags, ports: Ports): Read<Checked> {
-  const settings = settle(brief, flags, ports.files);
+export function checkedBank(
+  brief: string | undefined,
+  flags: BankFlags,
+  ports: Ports,
+  fill?: (input: Nest) => Nest,
+): Read<Checked> {
+  const settings = settle(brief, flags, ports.files, fill);
   const stock = readStock(flags, ports.files);
   const families: readonly ResistorFamily[] = stock.ok ? stock.value.families : [];
   const input = readLayout(flags, ports.files, families[0]?.tolerance ?? 0.05);

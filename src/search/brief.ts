@@ -11,8 +11,8 @@ import {
   type Refusal,
   refused,
 } from "../quantity/index.ts";
-import { above, quantity, whole, word } from "./fields.ts";
 import { crossFaults } from "./briefFaults.ts";
+import { above, quantity, whole, word } from "./fields.ts";
 import { withLampDrive } from "./lampDrive.ts";
 import { limitKeys } from "./limitKeys.ts";
 import {

@@ -48,7 +48,15 @@ export function whole(least: number, most: number) {
 }
 
 /** Greatest value of each kind of electrical quantity that the arithmetic was checked with. */
-const MOST = { resistance: 1e9, inductance: 1e3, length: 1e3, time: 1e9, current: 1e9, voltage: 1e7, power: 1e12 } as const;
+const MOST = {
+  resistance: 1e9,
+  inductance: 1e3,
+  length: 1e3,
+  time: 1e9,
+  current: 1e9,
+  voltage: 1e7,
+  power: 1e12,
+} as const;
 type Checked = keyof typeof MOST;
 
 /** A quantity from zero up. */
@@ -66,7 +74,10 @@ export const plain = (range: Range) => quantity("count", range);
 /** One word of a list, in any case, with hyphen or space; a near one is named. */
 export function word<Word extends string>(words: readonly Word[]) {
   return z.string().transform((raw, context): Word => {
-    const tidy = raw.trim().toLowerCase().replace(/[\s_-]+/g, " ");
+    const tidy = raw
+      .trim()
+      .toLowerCase()
+      .replace(/[\s_-]+/g, " ");
     const found = words.find((one) => one.replace(/-/g, " ") === tidy);
     if (found !== undefined) return found;
     const near = nearestWord(tidy, words);

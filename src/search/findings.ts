@@ -9,6 +9,7 @@ import { type Finding, formatQuantity, type Verdict } from "../quantity/index.ts
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
 import { faultBankOf } from "./faults.ts";
+import { limitFindings } from "./limits.ts";
 import type { LayoutResult } from "./result.ts";
 
 export interface FindingsInput {
@@ -57,7 +58,15 @@ export function findingsOf(input: FindingsInput): readonly Finding[] {
     bleed(input),
     ...hazards(input),
     ...oneShorted(input),
+    ...limits(input),
   ];
+}
+
+/** The brief's own limits on shot, fault and life. */
+function limits({ result, unit, brief, candidate }: FindingsInput): readonly Finding[] {
+  const known = result.stress !== null && (result.series === 1 || candidate.leak !== null);
+  const worst = known && result.stress !== null ? result.stress * unit.voltage : Number.POSITIVE_INFINITY;
+  return limitFindings(brief, { unit, worst, ...result });
 }
 
 /** With the statistical basis: the chance against the brief's risk, its error counted against it. */

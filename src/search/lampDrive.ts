@@ -1,10 +1,6 @@
 // A lamp's own circuit: voltage and coil from lamp, energy and width, and how far the bank that can be built lands from it.
 
 import {
-  accepted,
-  type Read,
-} from "../quantity/index.ts";
-import {
   type Explosion,
   explosionOf,
   type Lamp,
@@ -14,8 +10,9 @@ import {
   lampConstant,
   lampFit,
 } from "../pulse/index.ts";
-import { quantity } from "./fields.ts";
+import { accepted, type Read } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
+import { quantity } from "./fields.ts";
 import { type LampBriefKeys, loadSchema } from "./load.ts";
 
 /** alpha of the fullest pulse without reversal worth the name. Source: [ME1966]. */

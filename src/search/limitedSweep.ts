@@ -137,7 +137,8 @@ export function sweepLimited(input: SweepInput, table: LayoutTable, judge: Judge
         }
         // one in series or in parallel counts once, as strings; more in parallel then opens the other tie again
         const shapes = n > 1 && p > 1 ? [true, false] : [false];
-        for (const tied of shapes) if (open.has(tied) && tries(n, p, tied, weighed.bulk) === "settled") open.delete(tied);
+        for (const tied of shapes)
+          if (open.has(tied) && tries(n, p, tied, weighed.bulk) === "settled") open.delete(tied);
         if (n === 1) open.delete(true);
         if (p === 1 && !open.has(false)) open.delete(true);
       }

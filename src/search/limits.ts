@@ -54,7 +54,13 @@ const ratedLimit = (limit: RatedLimit, rating: number | undefined): number | nul
 function faultClaim(limit: number, { unit, worst, ...shape }: LimitCase, brief: Brief): LimitClaim {
   const voltage = brief.voltage * (1 + brief.overshoot);
   const known = Number.isFinite(worst);
-  const bank = { ...shape, unit: faultUnitOf(unit), voltage, worstCharging: known ? worst : voltage, worstHolding: null };
+  const bank = {
+    ...shape,
+    unit: faultUnitOf(unit),
+    voltage,
+    worstCharging: known ? worst : voltage,
+    worstHolding: null,
+  };
   const value = known ? unitShort(bank).energyIntoUnit : null;
   return { key: "maxFaultEnergy", value, limit, bound: "value", unit: "J", stuck: true };
 }
@@ -101,13 +107,19 @@ export function limitClaims(brief: Brief, given: LimitCase): readonly LimitClaim
   const reversal = spread ? Math.max(low.value.reversal, high.value.reversal) : null;
   if (maxReversal !== undefined)
     claim("maxReversal", { value: reversal, limit: maxReversal, bound: bounds.reversal, unit: "1" });
-  const heat = shared && (maxRms ?? maxTemperatureRise ?? minLife) !== undefined ? heatOf(brief, unit, high.value) : null;
+  const heat =
+    shared && (maxRms ?? maxTemperatureRise ?? minLife) !== undefined ? heatOf(brief, unit, high.value) : null;
   if (maxRms !== undefined) {
     const limit = ratedLimit(maxRms, unit.rippleCurrent);
     claim("maxRms", { value: heat?.unitRms ?? null, limit, bound: bounds.action, unit: "A" });
   }
   if (maxTemperatureRise !== undefined)
-    claim("maxTemperatureRise", { value: heat?.unitRise ?? null, limit: maxTemperatureRise, bound: bounds.action, unit: "K" });
+    claim("maxTemperatureRise", {
+      value: heat?.unitRise ?? null,
+      limit: maxTemperatureRise,
+      bound: bounds.action,
+      unit: "K",
+    });
   if (minLife !== undefined) {
     const rise = brief.rate === undefined ? 0 : (heat?.unitRise ?? null);
     const life = reversal === null ? null : lifeOf(brief, unit, { voltage: finite(worst), reversal, rise }).ratio;

@@ -8,6 +8,8 @@ import type { Brief } from "./brief.ts";
 import { leastChanges } from "./changes.ts";
 import { planCurrency, pricedIn } from "./currency.ts";
 import { frontRows } from "./front.ts";
+import { limitChanges } from "./limitChanges.ts";
+import { hasLimits } from "./limits.ts";
 import { comparison, firstRows, idOf, type Ranking, tiesOf } from "./rank.ts";
 import type { LayoutResult, PlanResult } from "./result.ts";
 import { type SweepInput, sweep } from "./sweep.ts";
@@ -47,7 +49,7 @@ export function plan(input: PlanInput): Read<PlanResult> {
     layouts,
     front: frontRows(table).map((row) => idOf(table, parts, row)),
     refused: refusals,
-    changes: table.count === 0 && !quick ? leastChanges(work) : [],
+    changes: table.count > 0 || quick ? [] : hasLimits(brief) ? limitChanges(work) : leastChanges(work),
     ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
     notes: notesOf(brief),
   });
