@@ -1,22 +1,8 @@
 // The flags of the brief: one row a key, read by the help, by the settings and by every refusal that names a flag.
 
-import { SHOT_FLAGS } from "./shotFlags.ts";
+import { type BriefFlag, SHOT_FLAGS } from "./shotFlags.ts";
 
-export interface BriefFlag {
-  readonly flag: string;
-  readonly argument: string;
-  /** Path in the brief. */
-  readonly key: string;
-  readonly help: string;
-  /** Part of the help page; left out: the bank itself. */
-  readonly group?: "circuit" | "limits";
-}
-
-/** Headings of the help page. */
-export const FLAG_GROUPS = {
-  circuit: "Load and circuit:",
-  limits: "Limits on the shot, each for the worst unit:",
-} as const;
+export { type BriefFlag, FLAG_GROUPS } from "./shotFlags.ts";
 
 const BANK_FLAGS: readonly BriefFlag[] = [
   { flag: "--title", argument: "<text>", key: "title", help: "name of the bank" },

@@ -1,6 +1,20 @@
 // The flags of the load, the circuit around the bank and the limits on the shot: one row a key of the brief.
 
-import type { BriefFlag } from "./briefFlags.ts";
+export interface BriefFlag {
+  readonly flag: string;
+  readonly argument: string;
+  /** Path in the brief. */
+  readonly key: string;
+  readonly help: string;
+  /** Part of the help page; left out: the bank itself. */
+  readonly group?: "circuit" | "limits";
+}
+
+/** Headings of the help page. */
+export const FLAG_GROUPS = {
+  circuit: "Load and circuit:",
+  limits: "Limits on the shot, each for the worst unit:",
+} as const;
 
 export const SHOT_FLAGS: readonly BriefFlag[] = [
   {

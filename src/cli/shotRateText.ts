@@ -126,7 +126,7 @@ export function fuseText(choice: FuseChoice | null, width: number): string {
     `breaks ${unless(sees.voltage, (x) => show(x, "voltage"), "unknown")}`,
   ];
   const lines = [hanging("sees", words.join(", "), width)];
-  if (count === 0) lines.push(hanging("fuse", "none: a single string has no neighbours to be cut off from", width));
+  if (count === 0) lines.push(hanging("fuse", "none: without neighbours there is nothing to cut off", width));
   else if (chosen !== null) lines.push(hanging("fuse", `${visible(chosen.row.fuse)}, ${count} of them`, width));
   else {
     lines.push(hanging("fuse", `none of ${tried.length} does`, width));

@@ -1,8 +1,22 @@
 // Faults that lie between the keys of a brief: one load at a time, whole shapes, chargers of one kind, limits that can be judged.
 
 import type { Refusal } from "../quantity/index.ts";
-import type { Brief } from "./brief.ts";
 import type { BusBrief, ChargerBrief, LoadBrief } from "./load.ts";
+
+/** What of a brief is looked at. */
+export interface CrossBrief {
+  readonly load?: LoadBrief | undefined;
+  readonly bus?: BusBrief | undefined;
+  readonly charger?: ChargerBrief | undefined;
+  readonly life?: { readonly halving?: number | undefined; readonly reference?: number | undefined } | undefined;
+  readonly rate?: number | undefined;
+  readonly maxPeakCurrent?: unknown;
+  readonly maxSlew?: unknown;
+  readonly maxReversal?: unknown;
+  readonly maxRms?: unknown;
+  readonly maxTemperatureRise?: unknown;
+  readonly minLife?: unknown;
+}
 
 type Say = (code: "contradiction" | "missing-value", field: string, read: string, want: string) => void;
 
@@ -71,8 +85,8 @@ function chargerFaults(charger: ChargerBrief, say: Say): void {
 }
 
 /** A limit that nothing in the brief lets us judge would pass unseen, so it is refused. */
-function limitFaults(brief: Brief, say: Say): void {
-  const needs = (key: keyof Brief, other: "load" | "rate" | "charger"): void => {
+function limitFaults(brief: CrossBrief, say: Say): void {
+  const needs = (key: keyof CrossBrief, other: "load" | "rate" | "charger"): void => {
     if (brief[key] !== undefined && brief[other] === undefined)
       say("missing-value", other, "nothing", `a ${other}, without which ${String(key)} cannot be judged`);
   };
@@ -85,7 +99,7 @@ function limitFaults(brief: Brief, say: Say): void {
 }
 
 /** Every fault between keys; empty when the brief holds together. */
-export function crossFaults(brief: Brief, file?: string): readonly Refusal[] {
+export function crossFaults(brief: CrossBrief, file?: string): readonly Refusal[] {
   const faults: Refusal[] = [];
   const say: Say = (code, field, read, want) => {
     if (faults.some((one) => one.place.field === field)) return;

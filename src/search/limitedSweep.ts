@@ -9,7 +9,7 @@ import { minorDigits } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing } from "./balancing.ts";
 import { type Candidate, prepare } from "./candidate.ts";
 import { type Broken, limitJudge } from "./limits.ts";
-import { type Judge, leastSeries, type Reason, type SweepInput } from "./sweep.ts";
+import { type Judge, leastSeries, type Reason, type SweepInput } from "./sweepKinds.ts";
 import { type LayoutTable, pushRow } from "./table.ts";
 
 const over = (value: number, limit: number | undefined): boolean => limit !== undefined && value > limit * (1 + FIT);
@@ -27,23 +27,23 @@ type Weighed = { readonly ok: true; readonly bulk: Bulk } | { readonly ok: false
 
 function weigh({ brief }: SweepInput, candidate: Candidate, units: number): Weighed {
   const { unit } = candidate;
-  const no = (reason: string, value: number | null, limit: number | null): Weighed => ({
+  const full = (reason: string, value: number | null, limit: number | null): Weighed => ({
     ok: false,
     reason: { reason, value, limit },
   });
-  if (units > brief.maxUnits) return no("unit-limit", units, brief.maxUnits);
+  if (units > brief.maxUnits) return full("unit-limit", units, brief.maxUnits);
   const bill = { quantity: 0, cost: 0 };
   if (!cheapest(unit, units + brief.spares, bill))
-    return no("stock", toBuy(unit, units + brief.spares), unit.available ?? null);
+    return full("stock", toBuy(unit, units + brief.spares), unit.available ?? null);
   const volume = candidate.volume === null ? Number.POSITIVE_INFINITY : candidate.volume * units;
   const mass = candidate.mass === null ? Number.POSITIVE_INFINITY : candidate.mass * units;
   if (over(volume, brief.maxVolume)) {
     const reason = candidate.volume === null ? "volume-unknown" : "volume-limit";
-    return no(reason, finiteOrNull(volume), brief.maxVolume as number);
+    return full(reason, finiteOrNull(volume), brief.maxVolume as number);
   }
   if (over(mass, brief.maxMass)) {
     const reason = candidate.mass === null ? "mass-unknown" : "mass-limit";
-    return no(reason, finiteOrNull(mass), brief.maxMass as number);
+    return full(reason, finiteOrNull(mass), brief.maxMass as number);
   }
   return { ok: true, bulk: { cost: bill.cost, volume, mass } };
 }

@@ -22,7 +22,7 @@ import { chargeFor, driftFor, firingOf, rippleFor } from "./charging.ts";
 import { type BusFound, circuitOf, pulseBankFor } from "./circuit.ts";
 import { shotEnvelope } from "./envelope.ts";
 import { faultBankOf } from "./faults.ts";
-import { type LampReport, lampReport } from "./lampDrive.ts";
+import { type LampReport, lampReport } from "./lampReport.ts";
 import { type LifeReport, lifeOf } from "./life.ts";
 import { limitFindings } from "./limits.ts";
 import type { LayoutResult } from "./result.ts";
