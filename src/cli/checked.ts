@@ -6,7 +6,7 @@ import { assess, type BalanceWish, type LayoutResult, planCurrency } from "../se
 import { type LayoutFlags, type LayoutInput, readLayout } from "./layoutInput.ts";
 import { readLot } from "./measuredLot.ts";
 import type { Ports } from "./ports.ts";
-import { type Flags, type Settings, settle } from "./settings.ts";
+import { type Flags, type Nest, type Settings, settle } from "./settings.ts";
 import { findPart, readStock, type Stock } from "./stock.ts";
 import { refusalWords } from "./words.ts";
 
@@ -31,8 +31,13 @@ export interface Checked {
 }
 
 /** Reads everything and assesses; every fault of every input is told at once. */
-export function checkedBank(brief: string | undefined, flags: BankFlags, ports: Ports): Read<Checked> {
-  const settings = settle(brief, flags, ports.files);
+export function checkedBank(
+  brief: string | undefined,
+  flags: BankFlags,
+  ports: Ports,
+  fill?: (input: Nest) => Nest,
+): Read<Checked> {
+  const settings = settle(brief, flags, ports.files, fill);
   const stock = readStock(flags, ports.files);
   const families: readonly ResistorFamily[] = stock.ok ? stock.value.families : [];
   const input = readLayout(flags, ports.files, families[0]?.tolerance ?? 0.05);

@@ -8,9 +8,11 @@ import { askedText } from "./askedText.ts";
 import { cautionsOf } from "./cautions.ts";
 import { changeWords } from "./changeWords.ts";
 import { improveText } from "./improveText.ts";
+import { lampFits } from "./lampFits.ts";
 import { layoutText, money } from "./layoutText.ts";
 import { rankedTable } from "./rankedTable.ts";
 import { mendsWords, reasonWords } from "./reasonWords.ts";
+import { lampText } from "./shotRateText.ts";
 import { worstCaseText } from "./worstCaseText.ts";
 import { bullet, wrap } from "./wrap.ts";
 
@@ -22,6 +24,17 @@ export interface PlanText {
   readonly width: number;
   /** Sentences about what was read. */
   readonly inputs: readonly string[];
+}
+
+/** The lamp's ideal circuit, and how far the best bank lands from it. */
+function lampPlanText({ result, parts, width }: PlanText): string {
+  const { lampDrive } = lampFits(result, parts);
+  if (lampDrive === undefined) return "";
+  const { ideal, fits } = lampDrive;
+  const show = (x: number, dimension: "capacitance" | "inductance" | "voltage"): string => formatQuantity(x, dimension);
+  const best = fits[0]?.report;
+  const wish = `Lamp's ideal circuit: ${show(ideal.capacitance, "capacitance")}, ${show(ideal.inductance, "inductance")}, ${show(ideal.voltage, "voltage")}.`;
+  return [wrap(wish, width), ...(best ? [`${lampText(best, width)}`] : [])].join("\n");
 }
 
 /** Refused parts and members of the front that are listed one by one. */
@@ -37,6 +50,7 @@ export function planText(of: PlanText): string {
     `${title}\n\nAsked\n${askedText(result.brief, of.given, width)}`,
     wrap(`Capacitance needed: ${need}. Searched ${parts} parts; ${layouts} layouts do it; ${proof}: ${how}.`, width),
     ...of.inputs.map((text) => wrap(text, width)),
+    lampPlanText(of),
     ...(result.layouts.length > 0 ? fitting(of) : nothing(of)),
     refusedText(result, width),
     ...result.notes.map((note) => wrap(`Note: ${note}`, width)),

@@ -2,11 +2,12 @@
 
 import { Command, CommanderError, Option } from "commander";
 import { visibleLines } from "../order/index.ts";
-import { BRIEF_FLAGS } from "./briefFlags.ts";
+import { BRIEF_FLAGS, FLAG_GROUPS } from "./briefFlags.ts";
 import type { CheckFlags } from "./commands/check.ts";
 import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
+import type { PulseFlags } from "./commands/pulse.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
 import type { Ports } from "./ports.ts";
@@ -16,7 +17,10 @@ type Done = (status: number) => void;
 
 function withBrief(command: Command): Command {
   command.argument("[brief]", "brief file, JSON; - is standard input");
-  for (const { flag, argument, help } of BRIEF_FLAGS) command.addOption(new Option(`${flag} ${argument}`, help));
+  for (const { flag, argument, help, group } of BRIEF_FLAGS) {
+    const option = new Option(`${flag} ${argument}`.trim(), help);
+    command.addOption(group === undefined ? option : option.helpGroup(FLAG_GROUPS[group]));
+  }
   return command
     .option("--catalog <file...>", "capacitor catalogues, CSV; may be repeated; - is standard input")
     .option("--resistors <file>", "resistor catalogue, CSV; without it an assumed family is used")
@@ -71,8 +75,19 @@ function build(ports: Ports, done: Done): Command {
       const { checkWitnessed } = await import("./commands/check.ts");
       done(await checkWitnessed(brief, flags, ports));
     });
+  withLayout(program.command("pulse"))
+    .description("Fire one layout: current, reversal, energies, heat, life, and what a fault does.")
+    .option("--fuses <file>", "fuse catalogue, CSV: the cheapest that lives through the shot and clears the fault")
+    .option("--waveform <file>", "write time, current and voltage as CSV")
+    .option("--force", "replace the file if it exists")
+    .addHelpText("after", HELP.pulse)
+    .action(async (brief: string | undefined, flags: PulseFlags) => {
+      const { pulseCommand } = await import("./commands/pulse.ts");
+      done(pulseCommand(brief, flags, ports));
+    });
   withLayout(program.command("order"))
     .description("Write the bill of materials of one layout.")
+    .option("--fuses <file>", "fuse catalogue, CSV: adds a fuse for each unit to the bill")
     .option("--format <format>", "csv, json, md or html; else by the ending of --output, else csv")
     .option("--output <file>", "write to a file, whole or not at all")
     .option("--force", "replace the file if it exists")

@@ -10,6 +10,8 @@ interface Reason {
   /** Used when the value or the limit is not known. */
   readonly plain: string;
   readonly dimension: Dimension | "money";
+  /** The limit is a least. */
+  readonly least?: boolean;
 }
 
 export const REASONS: Readonly<Record<string, Reason>> = {
@@ -68,6 +70,123 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     plain: "its price is unknown, so the limit of {limit} cannot be held",
     dimension: "money",
   },
+  "peak-current-limit": {
+    words: "peak current through a unit {value} at least, limit {limit}",
+    plain: "peak current through a unit is over its limit",
+    dimension: "current",
+  },
+  "peak-current-unproven": {
+    words:
+      "peak current through a unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
+    plain: "peak current through a unit cannot be proven",
+    dimension: "current",
+  },
+  "peak-current-unknown": {
+    words: "",
+    plain: "peak current through a unit: the figure or the rating is unknown, so the limit cannot be held",
+    dimension: "current",
+  },
+  "slew-limit": {
+    words: "slew of a unit {value} at least, limit {limit}",
+    plain: "slew of a unit is over its limit",
+    dimension: "slew",
+  },
+  "slew-unproven": {
+    words: "slew of a unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
+    plain: "slew of a unit cannot be proven",
+    dimension: "slew",
+  },
+  "slew-unknown": {
+    words: "",
+    plain: "slew of a unit: the figure or the rating is unknown, so the limit cannot be held",
+    dimension: "slew",
+  },
+  "reversal-limit": {
+    words: "reversal {value} at least, limit {limit}",
+    plain: "reversal is over its limit",
+    dimension: "fraction",
+  },
+  "reversal-unproven": {
+    words: "reversal {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
+    plain: "reversal cannot be proven",
+    dimension: "fraction",
+  },
+  "reversal-unknown": {
+    words: "",
+    plain: "reversal: the figure or the rating is unknown, so the limit cannot be held",
+    dimension: "fraction",
+  },
+  "rms-limit": {
+    words: "rms current through a unit {value} at least, limit {limit}",
+    plain: "rms current through a unit is over its limit",
+    dimension: "current",
+  },
+  "rms-unproven": {
+    words:
+      "rms current through a unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
+    plain: "rms current through a unit cannot be proven",
+    dimension: "current",
+  },
+  "rms-unknown": {
+    words: "",
+    plain: "rms current through a unit: the figure or the rating is unknown, so the limit cannot be held",
+    dimension: "current",
+  },
+  "temperature-rise-limit": {
+    words: "rise in K of a unit {value} at least, limit {limit}",
+    plain: "rise in K of a unit is over its limit",
+    dimension: "count",
+  },
+  "temperature-rise-unproven": {
+    words:
+      "rise in K of a unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
+    plain: "rise in K of a unit cannot be proven",
+    dimension: "count",
+  },
+  "temperature-rise-unknown": {
+    words: "",
+    plain: "rise in K of a unit: the figure or the rating is unknown, so the limit cannot be held",
+    dimension: "count",
+  },
+  "fault-energy-limit": {
+    words: "energy into a shorted unit {value} at least, limit {limit}",
+    plain: "energy into a shorted unit is over its limit",
+    dimension: "energy",
+  },
+  "fault-energy-unproven": {
+    words:
+      "energy into a shorted unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
+    plain: "energy into a shorted unit cannot be proven",
+    dimension: "energy",
+  },
+  "fault-energy-unknown": {
+    words: "",
+    plain: "energy into a shorted unit: the figure or the rating is unknown, so the limit cannot be held",
+    dimension: "energy",
+  },
+  "life-limit": {
+    words: "life {value} of that at its ratings, wanted {limit} at least",
+    plain: "life is below its limit",
+    dimension: "count",
+    least: true,
+  },
+  "life-unproven": {
+    words:
+      "life {value} of that at its ratings as far as is known, wanted {limit}: not proven, for parts of the loop are unknown",
+    plain: "life cannot be proven",
+    dimension: "count",
+    least: true,
+  },
+  "life-unknown": {
+    words: "",
+    plain: "life: an exponent or a reference is unknown, so the limit cannot be held",
+    dimension: "count",
+  },
+  "no-shot": {
+    words: "",
+    plain: "its shot cannot be reckoned with this load, so no limit on it can be held",
+    dimension: "count",
+  },
 };
 
 /** Words of one refused part's reason; the figures rounded away from the limit's good side. */
@@ -80,7 +199,8 @@ export function reasonWords({ reason, value, limit }: Omit<RefusedPart, "part">,
     return formatQuantity(x, known.dimension, { digits: known.dimension === "count" ? 10 : 4, rounding });
   };
   const pattern = value === null || limit === null || known.words === "" ? known.plain : known.words;
-  return pattern.replace("{value}", show(value, "up")).replace("{limit}", show(limit, "down"));
+  const [figure, bound] = known.least ? (["down", "up"] as const) : (["up", "down"] as const);
+  return pattern.replace("{value}", show(value, figure)).replace("{limit}", show(limit, bound));
 }
 
 /** What would let a balancing resistor do, any one of them. */

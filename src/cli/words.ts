@@ -57,6 +57,8 @@ export const WORDS: Readonly<Record<string, string>> = {
   "pulse.bus": "the bus cannot be reckoned with",
   "pulse.charge": "the charger cannot be reckoned with",
   "pulse.circuit": "the circuit cannot be reckoned with",
+  "pulse.drop": "the switch drop leaves nothing for the load",
+  "pulse.steady": "the bank cannot hold this current for so long",
   "pulse.lamp": "the lamp cannot be reckoned with",
   "pulse.lampDrive": "the lamp circuit cannot be sized",
   "pulse.loop": "the loop cannot be reckoned with",

@@ -26,7 +26,8 @@ interface Wording {
   readonly note: string;
 }
 
-function pricedLine(wording: Wording, terms: PurchaseTerms, take: Take, unitPrice: number | null): BillLine {
+/** A line bought on the terms of a catalogue row. */
+export function pricedLine(wording: Wording, terms: PurchaseTerms, take: Take, unitPrice: number | null): BillLine {
   const { needed, fromHand, surplus, packs, cost } = take;
   const currency = terms.currency ?? "EUR";
   const bought = needed - fromHand + surplus;

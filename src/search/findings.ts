@@ -9,6 +9,7 @@ import { type Finding, formatQuantity, type Verdict } from "../quantity/index.ts
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
 import { faultBankOf } from "./faults.ts";
+import { limitFindings } from "./limits.ts";
 import type { LayoutResult } from "./result.ts";
 import { type BankCorners, cornersOf } from "./sharing/corners.ts";
 import type { BalanceMends } from "./sharing/mends.ts";
@@ -69,7 +70,15 @@ export function findingsOf(given: FindingsInput): readonly Finding[] {
     bleed(input),
     ...hazards(input),
     ...oneShorted(input),
+    ...limits(input),
   ];
+}
+
+/** The brief's own limits on shot, fault and life. */
+function limits({ result, unit, brief, candidate }: FindingsInput): readonly Finding[] {
+  const known = result.stress !== null && (result.series === 1 || candidate.leak !== null);
+  const worst = known && result.stress !== null ? result.stress * unit.voltage : Number.POSITIVE_INFINITY;
+  return limitFindings(brief, { unit, worst, ...result });
 }
 
 /** With the statistical basis: the chance against the brief's risk, its error counted against it. */

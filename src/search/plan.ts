@@ -10,6 +10,8 @@ import { leastChanges } from "./changes.ts";
 import { planCurrency, pricedIn } from "./currency.ts";
 import { frontRows } from "./front.ts";
 import { improve } from "./improve.ts";
+import { limitChanges } from "./limitChanges.ts";
+import { hasLimits } from "./limits.ts";
 import { comparison, firstRows, idOf, type Ranking, tiesOf } from "./rank.ts";
 import type { LayoutResult, PlanResult, RefusedPart } from "./result.ts";
 import { balanceMends } from "./sharing/mends.ts";
@@ -50,7 +52,7 @@ export function plan(input: PlanInput): Read<PlanResult> {
     layouts,
     front: frontRows(table).map((row) => idOf(table, parts, row)),
     refused: quick ? refusals : withMends(work, refusals),
-    changes: table.count === 0 && !quick ? leastChanges(work) : [],
+    changes: table.count > 0 || quick ? [] : hasLimits(brief) ? limitChanges(work) : leastChanges(work),
     ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
     ...(quick ? {} : { improve: improveBest(work, layouts[0]) }),
     notes: notesOf(brief),
