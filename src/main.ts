@@ -22,6 +22,14 @@ function portsOfProcess(): Ports {
     columns: textWidth(process.stdout.columns, process.env.COLUMNS),
     files: filesOn(),
     catalogs: fileURLToPath(new URL("../catalogs/", import.meta.url)),
+    background: {
+      entry: new URL("./worker.js", import.meta.url),
+      terminal: process.stderr.isTTY === true,
+      onInterrupt: (stop) => {
+        process.once("SIGINT", stop);
+        return () => void process.removeListener("SIGINT", stop);
+      },
+    },
   };
 }
 

@@ -29,7 +29,7 @@ export {
 export { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
 export { type Layout, layoutId, plainTies, shapeOf, type Ties, unitCount } from "./layout.ts";
 export { type Cause, type CauseShare, type MarginCase, type Margins, marginCauses } from "./margins.ts";
-export { type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";
+export { CHUNK, type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";
 export { type Residual, residualAfterDump } from "./residual.ts";
 export {
   chargingLeast,

@@ -55,6 +55,7 @@ const ASKED: readonly Asked[] = [
   { label: "most volume", key: "maxVolume", value: (b) => show(b.maxVolume, "volume") },
   { label: "most mass", key: "maxMass", value: (b) => show(b.maxMass, "mass") },
   { label: "spares", key: "spares", value: (b) => (b.spares === 0 ? null : String(b.spares)) },
+  { label: "dump resistance", key: "dumpResistance", value: (b) => show(b.dumpResistance, "resistance") },
   { label: "ambient", key: "ambient", value: (b) => show(b.ambient, "temperature") },
   { label: "shots", key: "rate", value: (b) => show(b.rate, "frequency") },
   { label: "load", key: "load", value: loadWords },

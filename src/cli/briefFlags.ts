@@ -54,6 +54,12 @@ const BANK_FLAGS: readonly BriefFlag[] = [
     help: "how often the charger tops up",
   },
   { flag: "--rate", argument: "<rate>", key: "rate", help: 'shots, "0.1 Hz"' },
+  {
+    flag: "--dump-resistance",
+    argument: "<resistance>",
+    key: "dumpResistance",
+    help: "resistor that empties the bank; sets the clamp diodes' surge",
+  },
   { flag: "--ambient", argument: "<temperature>", key: "ambient", help: 'air around the bank, "30 degC"' },
 ];
 

@@ -7,11 +7,13 @@ import type { LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import { askedText } from "./askedText.ts";
 import { cautionsOf } from "./cautions.ts";
 import { changeWords } from "./changeWords.ts";
+import { improveText } from "./improveText.ts";
 import { lampFits } from "./lampFits.ts";
 import { layoutText, money } from "./layoutText.ts";
 import { rankedTable } from "./rankedTable.ts";
-import { reasonWords } from "./reasonWords.ts";
+import { mendsWords, reasonWords } from "./reasonWords.ts";
 import { lampText } from "./shotRateText.ts";
+import { worstCaseText } from "./worstCaseText.ts";
 import { bullet, wrap } from "./wrap.ts";
 
 export interface PlanText {
@@ -68,6 +70,8 @@ function fitting({ result, parts, rank, width }: PlanText): readonly string[] {
   return [
     `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}\n${wrap(legend, width, "  ")}`,
     `Best: ${visible(best.id)}\n${wrap(whyBest(result, rank), width, "  ")}\n${layoutText(best, unit, width)}`,
+    ...(result.worstCase === undefined ? [] : [wrap(worstCaseText(result), width)]),
+    ...(result.improve ? [`What eats its margin\n${improveText(result.improve, result.currency, width)}`] : []),
     frontText(result, width),
   ];
 }
@@ -112,7 +116,12 @@ function refusedText({ refused, currency }: PlanResult, width: number): string {
   if (refused.length === 0) return "";
   const rows = refused
     .slice(0, LISTED)
-    .map((one) => bullet(`${visible(one.part)}: ${reasonWords(one, currency)}`, width));
+    .map((one) =>
+      bullet(
+        `${visible(one.part)}: ${reasonWords(one, currency)}${one.mends ? `. ${mendsWords(one.mends)}` : ""}`,
+        width,
+      ),
+    );
   const more = refused.length > LISTED ? `\n  and ${refused.length - LISTED} more (all with --json)` : "";
   return `Refused parts: ${refused.length}\n${rows.join("\n")}${more}`;
 }

@@ -3,7 +3,7 @@
 import { Command, CommanderError, Option } from "commander";
 import { visibleLines } from "../order/index.ts";
 import { BRIEF_FLAGS, FLAG_GROUPS } from "./briefFlags.ts";
-import type { BankFlags } from "./checked.ts";
+import type { CheckFlags } from "./commands/check.ts";
 import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
@@ -66,10 +66,14 @@ function build(ports: Ports, done: Done): Command {
     });
   withLayout(program.command("check"))
     .description("Check one layout in every state at rest.")
+    .option("--measured <file>", "measured units, CSV: the statistical basis draws from them")
+    .option("--witness <banks>", "draw so many banks beside the statistical chance, 1e6")
+    .option("--seed <number>", "seed of the drawing (default: 1)")
+    .option("--workers <count>", "threads that draw; the result is the same at any number")
     .addHelpText("after", HELP.check)
-    .action(async (brief: string | undefined, flags: BankFlags) => {
-      const { checkCommand } = await import("./commands/check.ts");
-      done(checkCommand(brief, flags, ports));
+    .action(async (brief: string | undefined, flags: CheckFlags) => {
+      const { checkWitnessed } = await import("./commands/check.ts");
+      done(await checkWitnessed(brief, flags, ports));
     });
   withLayout(program.command("pulse"))
     .description("Fire one layout: current, reversal, energies, heat, life, and what a fault does.")

@@ -2,7 +2,7 @@
 
 import { visible } from "../order/index.ts";
 import { type Dimension, formatQuantity } from "../quantity/index.ts";
-import type { RefusedPart } from "../search/index.ts";
+import type { BalanceMends, RefusedPart } from "../search/index.ts";
 
 interface Reason {
   /** `{value}` and `{limit}` stand for the figures. */
@@ -83,6 +83,11 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     plain: "no balancing resistor keeps the worst unit within {limit}",
     dimension: "voltage",
   },
+  risk: {
+    words: "",
+    plain: "no number in series that was tried keeps the chance of an excess within {limit}",
+    dimension: "fraction",
+  },
   "volume-limit": {
     words: "takes {value} at least, limit {limit}",
     plain: "takes more room than the limit",
@@ -119,11 +124,6 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     plain: "its shot cannot be reckoned with this load, so no limit on it can be held",
     dimension: "count",
   },
-  risk: {
-    words: "",
-    plain: "no shape bears the stated risk",
-    dimension: "count",
-  },
 };
 
 /** Words of one refused part's reason; the figures rounded away from the limit's good side. */
@@ -138,4 +138,14 @@ export function reasonWords({ reason, value, limit }: Omit<RefusedPart, "part">,
   const pattern = value === null || limit === null || known.words === "" ? known.plain : known.words;
   const [figure, bound] = known.least ? (["down", "up"] as const) : (["up", "down"] as const);
   return pattern.replace("{value}", show(value, figure)).replace("{limit}", show(limit, bound));
+}
+
+/** What would let a balancing resistor do, any one of them. */
+export function mendsWords({ series, tolerance, voltage }: BalanceMends): string {
+  const ways = [
+    series === null ? null : `${series} in series`,
+    tolerance === null ? null : `resistors of ${formatQuantity(tolerance, "fraction")} or tighter`,
+    voltage === null ? null : `at most ${formatQuantity(voltage, "voltage", { rounding: "down" })} of charge`,
+  ].filter((way) => way !== null);
+  return ways.length === 0 ? "Nothing that was tried mends it" : `Any one mends it: ${ways.join("; ")}`;
 }

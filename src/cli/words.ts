@@ -65,6 +65,7 @@ export const WORDS: Readonly<Record<string, string>> = {
   "pulse.samples": "the waveform cannot be read",
   "read-only": "the place is read-only; nothing was written",
   "tolerance-range": "the tolerance is out of range",
+  "small-lot": "there are too few measured units",
   "too-deep": "the nesting is too deep",
   "too-large": "the file is too large",
   "too-long": "the text is too long",

@@ -41,6 +41,22 @@ const hold = z.union([z.number(), z.string()]).transform((raw, context): number 
   return z.NEVER;
 });
 
+/** None and certainty are no risks to plan with: each is told what it would mean. */
+const risk = z.union([z.number(), z.string()]).transform((raw, context): number => {
+  const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, "fraction");
+  const value = read.ok ? read.value : Number.NaN;
+  if (value > 0 && value <= 0.5) return value;
+  const none = 'a chance above 0 such as 1e-4; for none at all take the basis "worst case"';
+  const message =
+    value === 0
+      ? none
+      : value === 1
+        ? "a chance of at most 0.5 such as 1e-4; at 1 every bank would do"
+        : "a chance above 0 and at most 0.5, such as 1e-4";
+  context.addIssue({ code: "custom", message, params: { read: JSON.stringify(raw) } });
+  return z.NEVER;
+});
+
 const currency = z.string().refine(isCurrency, { error: "a code of ISO 4217 such as EUR" });
 
 const ceiling = (dimension: Dimension, most: number) => quantity(dimension, { least: 0, most, open: true }).optional();
@@ -52,7 +68,7 @@ export const briefSchema = z.strictObject({
   voltage: quantity("voltage", { least: 0, most: 1e7, open: true }),
   ripple: quantity("fraction", { least: 0, most: 1, open: true }),
   basis: word(BASES).default("worst case"),
-  risk: quantity("fraction", { least: 0, most: 0.5, open: true }).default(1e-4),
+  risk: risk.default(1e-4),
   /** How a unit's capacitance is spread over its tolerance, for the statistical basis. */
   distribution: z.enum(["uniform", "normal"]).default("uniform"),
   derating: quantity("fraction", { least: 0, most: 1, open: true }).default(0.9),
@@ -89,6 +105,8 @@ export const briefSchema = z.strictObject({
   ...limitKeys,
   rate: quantity("frequency", { least: 0, most: 1e6, open: true }).optional(),
   ambient: quantity("temperature", { least: -60, most: 150 }).optional(),
+  /** ohm, of the resistor that empties the bank; absent: not stated, and a dump is taken as instant. */
+  dumpResistance: quantity("resistance", { least: 0, most: 1e9, open: true }).optional(),
 });
 
 export type Brief = z.output<typeof briefSchema>;

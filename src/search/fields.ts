@@ -15,22 +15,30 @@ const rangeWords = (dimension: Dimension, { least, most, open }: Range): string 
 
 /** A number in SI or text with a unit, within a range. */
 export function quantity(dimension: Dimension, range: Range) {
-  return z.union([z.number(), z.string()]).transform((raw, context): number => {
-    const reject = (read: string, want: string): never => {
-      context.addIssue({ code: "custom", message: want, params: { read } });
-      return z.NEVER;
-    };
-    const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, dimension);
-    if (!read.ok) return reject(JSON.stringify(raw), read.refusals[0]?.want ?? example(dimension));
-    const value = read.value;
-    const bareFraction = dimension === "fraction" && (typeof raw === "number" || /^[\d.,\s]+$/.test(raw));
-    const shown = bareFraction ? `${raw}, that is ${formatQuantity(value, "fraction")}` : JSON.stringify(raw);
-    if (!Number.isFinite(value) || value < range.least || value > range.most || (range.open && value === range.least)) {
-      const hint = bareFraction && value > range.most ? `; for ${raw} percent write "${raw} %"` : "";
-      return reject(shown, `${rangeWords(dimension, range)}${hint}`);
-    }
-    return value;
-  });
+  return z
+    .union([z.number(), z.string()])
+    .transform((raw, context): number => {
+      const reject = (read: string, want: string): never => {
+        context.addIssue({ code: "custom", message: want, params: { read } });
+        return z.NEVER;
+      };
+      const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, dimension);
+      if (!read.ok) return reject(JSON.stringify(raw), read.refusals[0]?.want ?? example(dimension));
+      const value = read.value;
+      const bareFraction = dimension === "fraction" && (typeof raw === "number" || /^[\d.,\s]+$/.test(raw));
+      const shown = bareFraction ? `${raw}, that is ${formatQuantity(value, "fraction")}` : JSON.stringify(raw);
+      if (
+        !Number.isFinite(value) ||
+        value < range.least ||
+        value > range.most ||
+        (range.open && value === range.least)
+      ) {
+        const hint = bareFraction && value > range.most ? `; for ${raw} percent write "${raw} %"` : "";
+        return reject(shown, `${rangeWords(dimension, range)}${hint}`);
+      }
+      return value;
+    })
+    .describe(`${example(dimension)} or a number in SI; ${rangeWords(dimension, range)}`);
 }
 
 /** A whole number, also as text (flags are text). */
