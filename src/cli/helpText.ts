@@ -13,7 +13,12 @@ The layout is given by --part, --series, --parallel and --ties, or by --layout F
 
 export const HELP = {
   program: `
+Without a command the screens open, on the invented demo catalogues or on your own:
+  joulewright [--catalog FILE...] [--resistors FILE] [--brief FILE] [--ascii]
+Where there is no terminal, joulewright alone prints the plan of the demo brief.
+
 Examples:
+  $ joulewright --catalog mine.csv --brief brief.json
   $ joulewright plan brief.json --catalog mine.csv --resistors resistors.csv
   $ joulewright check brief.json --part pf-330 --series 9 --parallel 31 --ties cross-tied --catalog mine.csv
   $ joulewright pulse brief.json --layout chosen.json --catalog mine.csv --load-resistance "0.9 ohm"

@@ -110,6 +110,13 @@ function build(ports: Ports, done: Done): Command {
   return program;
 }
 
+/** Help asked of a command that there is none of is the slip to tell; commander would show the general help instead. */
+function slipOf(program: Command, argv: readonly string[]): readonly string[] {
+  const name = argv[0] === "help" ? argv[1] : argv[0];
+  const known = name === undefined || name.startsWith("-") || name === "help";
+  return known || program.commands.some((command) => command.name() === name) ? argv : [name];
+}
+
 /** Runs one command line without the program's name; the exit status. Throws only for a bug of ours. */
 export async function run(argv: readonly string[], ports: Ports): Promise<number> {
   let status: number = EXIT.done;
@@ -117,7 +124,7 @@ export async function run(argv: readonly string[], ports: Ports): Promise<number
     status = found;
   });
   try {
-    await program.parseAsync([...argv], { from: "user" });
+    await program.parseAsync([...slipOf(program, argv)], { from: "user" });
     return status;
   } catch (error) {
     if (!(error instanceof CommanderError)) throw error;

@@ -89,9 +89,15 @@ export function placeWords({ file, line, column, field }: Place): string {
   return visible([spot, field ?? ""].filter((part) => part !== "").join(" "));
 }
 
+/** Longest piece of input that is repeated, characters: enough to find it again. */
+const LONGEST_READ = 200;
+
+const clipped = (text: string): string =>
+  text.length <= LONGEST_READ ? text : `${text.slice(0, LONGEST_READ)}... (${text.length} characters)`;
+
 /** One sentence, safe to print. */
 export function refusalWords({ code, place, read, want }: Refusal): string {
   const where = placeWords(place);
-  const what = `${wordsOf(code)}: read ${visible(read)}; accepted: ${visible(want)}`;
+  const what = `${wordsOf(code)}: read ${visible(clipped(read))}; accepted: ${visible(want)}`;
   return where === "" ? what : `${where}: ${what}`;
 }
