@@ -38,6 +38,14 @@ Examples:
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --output order.csv
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --format md
 ${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
+  place: `
+Examples:
+  $ joulewright place --series 6 --parallel 10 --ties cross-tied --measured lot.csv
+  $ joulewright place --series 6 --parallel 10 --ties strings --measured lot.csv --voltage "2 kV" --output list.csv
+  $ joulewright place brief.json --layout chosen.json --catalog mine.csv --measured lot.csv --json > bank.json
+  $ joulewright place --series 6 --parallel 10 --ties cross-tied --measured lot.csv --positions list.csv --without pf-014
+A plain shape is enough: --part, --catalog, BRIEF and --voltage add limits, resistors and voltages.
+Same file, seed and moves: same list, byte for byte.${STATUS}`,
   parts: `
 Examples:
   $ joulewright parts mine.csv resistors.csv

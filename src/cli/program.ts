@@ -9,6 +9,7 @@ import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
+import type { PlaceFlags } from "./placeFlags.ts";
 import type { Ports } from "./ports.ts";
 import { VERSION } from "./version.ts";
 
@@ -76,6 +77,31 @@ function build(ports: Ports, done: Done): Command {
     .action(async (brief: string | undefined, flags: OrderFlags) => {
       const { orderCommand } = await import("./commands/order.ts");
       done(orderCommand(brief, flags, ports));
+    });
+  withLayout(program.command("place"))
+    .description("Place measured units, each where the voltages come out most equal.")
+    .option("--measured <file>", "measured units, CSV: serial, capacitance, and where known leakage, esr, lot")
+    .option("--uncertainty <fraction>", 'of one capacitance against another, "0.3 %"')
+    .option("--leakage-uncertainty <fraction>", 'of one leakage reading, "10 %"')
+    .option("--leakage-at <voltage>", "voltage on a unit at which leakage was read")
+    .option("--unit-limit <voltage>", "highest voltage of a unit; else the part's, derated")
+    .option("--pins <pins...>", "units that must stand in a stage or string: SERIAL=3, or a list in CSV")
+    .option("--lots <wish>", "mix: every lot spread evenly; apart: one lot to a stage or string")
+    .option("--outliers <wish>", "reject or keep units that do not belong to the lot")
+    .option("--goal <goal>", "charging, or both: charging within its floor, then holding")
+    .option("--stop-at-floor", "stop where the meter cannot tell better placings apart")
+    .option("--seed <number>", "seed of the search")
+    .option("--moves <count>", "how many elementary trials the search may make")
+    .option("--front", "show what holding costs in charging")
+    .option("--positions <file>", "take this list of positions as built, and judge it")
+    .option("--without <serial>", "show the fewest changes when this unit comes out")
+    .option("--format <format>", "text, csv or json; else by the ending of --output")
+    .option("--output <file>", "write the list to a file, whole or not at all")
+    .option("--force", "replace the file if it exists")
+    .addHelpText("after", HELP.place)
+    .action(async (brief: string | undefined, flags: PlaceFlags) => {
+      const { placeCommand } = await import("./commands/place.ts");
+      done(placeCommand(brief, flags, ports));
     });
   program
     .command("parts")

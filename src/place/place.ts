@@ -56,13 +56,13 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
   const random = seeded(request.seed ?? DEFAULTS.seed);
   const work = effort(request.moves ?? DEFAULTS.moves, request.within);
   const conductances = conductancesOf(pool, request);
-  const wantsHolding = conductances.known && request.goal !== "charging" && series > 1;
+  const judged = conductances.known && series > 1;
   const shape = { series, parallel, ties, uncertainty };
   const floor = gapFloor(shape);
   const stopAt = request.stopAt ?? (request.stopAtFloor === false ? 0 : FLOOR_STOP * floor);
   const prove = request.stopAtFloor !== true && request.stopAt === undefined;
 
-  const reserve = wantsHolding ? Math.min(HOLDING_TRIES * HOLDING_MOVES, work.moves / 2) : 0;
+  const reserve = judged ? Math.min(HOLDING_TRIES * HOLDING_MOVES, work.moves / 2) : 0;
   const charging = share(work, work.moves - reserve);
   const task = { ties, values, rule, order, start: start.groups, stopAt, prove };
   const solution = yield* solveCharging(task, random, charging);
@@ -71,9 +71,11 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
   const holdingFloor = gapFloor({ ...shape, uncertainty: request.leakageUncertainty ?? DEFAULTS.leakageUncertainty });
   let held: Held | null = null;
   if (conductances.known) {
-    const limit = Math.max(solution.gap, request.chargingLimit ?? FLOOR_GIVEN * floor);
+    // For charging alone, holding only decides between placings of the same charging gap.
+    const given = request.goal === "charging" ? 0 : (request.chargingLimit ?? FLOOR_GIVEN * floor);
+    const limit = Math.max(solution.gap, given);
     const goals = { ties, values, rule, conductances, limit, target: FLOOR_STOP * holdingFloor, spares: false };
-    const moves = wantsHolding ? Math.min(HOLDING_MOVES, reserve) : 0;
+    const moves = judged ? Math.min(HOLDING_MOVES, reserve) : 0;
     const steps = holdAgain(solution.groups, { ...goals, moves }, { tries: HOLDING_TRIES, random, work });
     let step = steps.next();
     for (; !step.done; step = steps.next()) {

@@ -1,6 +1,7 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";
+export { unitLimit } from "./candidate.ts";
 export { planCurrency, pricedIn } from "./currency.ts";
 export { faultBankOf, faultsOf } from "./faults.ts";
 export { type PlanInput, plan } from "./plan.ts";
