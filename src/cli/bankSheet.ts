@@ -48,14 +48,14 @@ export function readSheet(path: string, wishes: SheetWishes, files: Files): Read
   if (!text.ok) return text;
   const json = readJson(text.value, file);
   if (!json.ok) return json;
-  const no = (read: string, want: string): Read<never> =>
-    refused({ code: "bad-sheet", place: { file }, read, want });
+  const no = (read: string, want: string): Read<never> => refused({ code: "bad-sheet", place: { file }, read, want });
   const facts = json.value.value;
   if (!isFacts(facts)) return no("no object", "the JSON of place, or one layout of plan or check");
   const { series, parallel, ties } = facts;
   const whole = (n: unknown): n is number => Number.isInteger(n) && (n as number) >= 1 && (n as number) <= 1e6;
   if (!whole(series) || !whole(parallel)) return no("no series and parallel", "whole numbers from 1");
-  if (ties !== "cross-tied" && ties !== "strings") return no(JSON.stringify(ties) ?? "nothing", "cross-tied or strings");
+  if (ties !== "cross-tied" && ties !== "strings")
+    return no(JSON.stringify(ties) ?? "nothing", "cross-tied or strings");
   const shape: Shape = { series, parallel, ties };
   return Array.isArray(facts.groups) ? fromPlacing(facts, shape, wishes, no) : fromLayout(facts, shape, wishes, no);
 }
@@ -75,7 +75,8 @@ function fromPlacing(facts: Facts, shape: Shape, wishes: SheetWishes, no: No): R
   if (!fits) return no(`${lists.length} groups`, `${count} groups of ${size} serials`);
   if (!Array.isArray(units) || !isFacts(bank)) return no("a placing without units and bank", "the whole JSON of place");
   const bySerial = new Map<unknown, MeasuredUnit>();
-  for (const unit of units) if (isFacts(unit) && numberOr(unit.capacitance) !== null) bySerial.set(unit.serial, unit as never);
+  for (const unit of units)
+    if (isFacts(unit) && numberOr(unit.capacitance) !== null) bySerial.set(unit.serial, unit as never);
   const stray = lists.flat().find((serial) => !bySerial.has(serial));
   if (stray !== undefined) return no(JSON.stringify(stray), "a serial among the sheet's units");
   const voltage = numberOr(bank.voltage);
@@ -109,7 +110,8 @@ function fromPlacing(facts: Facts, shape: Shape, wishes: SheetWishes, no: No): R
 function fromLayout(facts: Facts, shape: Shape, wishes: SheetWishes, no: No): Read<BankSheet> {
   const { capacitance, share, balance } = facts;
   const bank = isFacts(capacitance) ? numberOr(capacitance.nominal) : null;
-  if (bank === null || !isFacts(capacitance)) return no("no capacitance", "the JSON of place, or one layout of plan or check");
+  if (bank === null || !isFacts(capacitance))
+    return no("no capacitance", "the JSON of place, or one layout of plan or check");
   const { series, parallel, ties } = shape;
   const low = numberOr(capacitance.low) ?? bank;
   const high = numberOr(capacitance.high) ?? bank;

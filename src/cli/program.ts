@@ -7,6 +7,7 @@ import type { BankFlags } from "./checked.ts";
 import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
+import type { CommissionFlags } from "./commissionFlags.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
 import type { PlaceFlags } from "./placeFlags.ts";
@@ -102,6 +103,24 @@ function build(ports: Ports, done: Done): Command {
     .action(async (brief: string | undefined, flags: PlaceFlags) => {
       const { placeCommand } = await import("./commands/place.ts");
       done(placeCommand(brief, flags, ports));
+    });
+  program
+    .command("commission")
+    .description("Compare the voltages of a built bank with what its units should show.")
+    .argument("<sheet>", "the JSON of place, or one layout of plan or check; - is standard input")
+    .option("--readings <file>", "readings, CSV: time [s], charge voltage [V], stage, voltage [V], total, current")
+    .option("--meter <fraction>", 'uncertainty of a voltage reading, "0.5 %"')
+    .option("--resolution <voltage>", 'its last digit and zero error, "0.1 V"')
+    .option("--unit-limit <voltage>", "highest voltage of a unit; else the sheet's")
+    .option("--balance <resistance>", "balancing resistor as fitted, or none; else the sheet's")
+    .option("--charger <state>", "on: it held the voltage; off: taken off after the charge")
+    .option("--next-voltage <voltage>", "charge voltage of the next step of the hot test")
+    .option("--next-hold <time>", "how long it would be held")
+    .option("--json", "print JSON")
+    .addHelpText("after", HELP.commission)
+    .action(async (sheet: string, flags: CommissionFlags) => {
+      const { commissionCommand } = await import("./commands/commission.ts");
+      done(commissionCommand(sheet, flags, ports));
     });
   program
     .command("parts")

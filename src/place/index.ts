@@ -10,6 +10,7 @@ export { type Course, type CourseRow, chargerOff, chargerOn, type StageModel } f
 export type { NextMeasurement } from "./diagnoseNext.ts";
 export type { Diagnosis, DiagnosisRequest, GoOn, Suspect } from "./diagnoseRequest.ts";
 export { STOP_ACTIONS } from "./diagnoseSafety.ts";
+export { exactCourse } from "./exactCourse.ts";
 export { expectedLargest, gapFloor, honestDigits, voltageUncertainty } from "./floor.ts";
 export { type Front, type FrontPoint, placingFront } from "./front.ts";
 export { chainsOf, type HeldBank, type HoldCourse, holdCourse, type Stand } from "./holdCourse.ts";

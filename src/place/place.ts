@@ -67,7 +67,9 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
 
   const large = pool.length > SMALL;
   const level = large && request.goal === "charging";
-  const reserve = judged ? Math.min(level ? Number.POSITIVE_INFINITY : HOLDING_TRIES * HOLDING_MOVES, work.moves / 2) : 0;
+  const reserve = judged
+    ? Math.min(level ? Number.POSITIVE_INFINITY : HOLDING_TRIES * HOLDING_MOVES, work.moves / 2)
+    : 0;
   const charging = share(work, work.moves - reserve);
   const task = { ties, values, rule, order, start: start.groups, stopAt, prove };
   const solution = yield* solveCharging(task, random, charging);
