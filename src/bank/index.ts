@@ -14,7 +14,7 @@ export { type ClampCase, type ClampDiode, clampDiode } from "./clampDiode.ts";
 export { type Corner, chargingCorners, dumpedCorners, holdingCorners } from "./corners.ts";
 export { type HoldCase, type HoldWorst, worstAtHold } from "./cornersHold.ts";
 export { holdCornerWords } from "./cornersHoldWords.ts";
-export { type StageRange, stageRange } from "./cornersRange.ts";
+export { cornerWords, type Sides, type StageRange, stageRange } from "./cornersRange.ts";
 export { type Course, courseOf, type Program } from "./course.ts";
 export { type Phase, phaseFrom } from "./coursePhase.ts";
 export {

@@ -53,6 +53,21 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "limit-temperature-rise": { title: "your limit on rise, K" },
   "limit-fault-energy": { title: "your limit into a shorted unit" },
   "limit-life": { title: "your limit on life", least: true },
+  "place.charging-gap": { title: "charging gap against the floor" },
+  "place.holding-gap": { title: "holding gap against the floor" },
+  "place.charging-stress": { title: "worst unit while charging" },
+  "place.holding-stress": { title: "worst unit at the end of a hold" },
+  "place.peak-stress": { title: "highest between the two" },
+  "place.leakage-missing": { title: "leakage not measured" },
+  "place.leakage-no-test-voltage": { title: "leakage without its voltage" },
+  "place.leakage-zero": { title: "leakage read as nought" },
+  "place.wild-unit": { title: "gap with a wild unit, without" },
+  "place.outlier-capacitance": { title: "capacitance out of the lot" },
+  "place.outlier-leakage": { title: "leakage out of the lot" },
+  "place.outlier-esr": { title: "ESR out of the lot" },
+  "place.mixed-parts": { title: "groups of mixed parts" },
+  "commission.over-limit": { title: "a reading over its limit" },
+  "commission.sum": { title: "sum of the readings" },
 };
 
 const DIMENSION_OF: Readonly<Record<string, Dimension>> = {

@@ -74,8 +74,8 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     dimension: "count",
   },
   stock: {
-    words: "needs {value} units, {limit} can be had with packs and minimum order counted",
-    plain: "more units are needed than can be had",
+    words: "{value} units must be bought, {limit} can be had, packs and minimum order counted",
+    plain: "more units must be bought than can be had",
     dimension: "count",
   },
   balance: {

@@ -32,6 +32,12 @@ describe("reasonWords(reason, currency)", () => {
     );
   });
 
+  test("stock: what must be bought, which is less than the bank needs when some is on hand", () => {
+    expect(reasonWords({ reason: "stock", value: 79, limit: 0 }, null)).toBe(
+      "79 units must be bought, 0 can be had, packs and minimum order counted",
+    );
+  });
+
   test("what is unknown is said to be, never nought", () => {
     for (const reason of Object.keys(REASONS)) {
       const words = reasonWords({ reason, value: null, limit: null }, null);
