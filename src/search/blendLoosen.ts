@@ -6,6 +6,7 @@ import type { BlendLimits } from "./blend/findBlend.ts";
 import { findLoosenings, type Loosening } from "./blend/loosen.ts";
 import { type BlendDemand, blendWork } from "./blendOptions.ts";
 import type { Loosen } from "./blendResult.ts";
+import type { Brief } from "./brief.ts";
 
 const FIELDS: Readonly<Record<Loosening["limit"], Loosen["field"]>> = {
   volume: "maxVolume",
@@ -69,3 +70,13 @@ export function loosenBlend(demand: BlendDemand, currency: string | null, limits
       .filter(({ field }) => field !== "energy" || brief.steady === undefined)
   );
 }
+
+/** The one change where only the cost stands in the way; `to` is what the cheapest costs, major money. */
+export const costLoosened = (brief: Brief, to: number, proven: boolean): Loosen => ({
+  field: "maxCost",
+  from: brief.maxCost ?? 0,
+  to,
+  change: brief.maxCost ? to / brief.maxCost - 1 : null,
+  cost: to,
+  proven,
+});

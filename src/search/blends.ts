@@ -1,22 +1,19 @@
 // The front door of blends: brief and parts to the cheapest mix of strings, its proof, its rivals, and what would change it.
 
 import { FIT, requiredCapacitance } from "../bank/index.ts";
-import { type Capacitor, DEFAULT_FAMILY, type ResistorFamily } from "../catalog/index.ts";
+import { type Capacitor, DEFAULT_FAMILY, isPriced, type ResistorFamily } from "../catalog/index.ts";
 import { accepted, minorDigits, type Read, toMajor } from "../quantity/index.ts";
 import { findAlternatives } from "./blend/alternatives.ts";
-import { isFittingBlend } from "./blend/evaluate.ts";
-import { settleBlend } from "./blend/fallback.ts";
-import type { BlendLimits } from "./blend/findBlend.ts";
-import type { BlendCount } from "./blend/model.ts";
-import { rowWorth } from "./blend/rowWorth.ts";
+import type { settleBlend } from "./blend/fallback.ts";
 import type { FoundBlend } from "./blend/singles.ts";
-import { assessBlend, type Group, kindOf } from "./blendAssess.ts";
-import { loosenBlend } from "./blendLoosen.ts";
+import { assessBlend, kindOf } from "./blendAssess.ts";
+import { groupsOf } from "./blendGroups.ts";
+import { costLoosened, loosenBlend } from "./blendLoosen.ts";
 import { type BlendWork, blendWork } from "./blendOptions.ts";
 import { priceMoves, winningPrices } from "./blendPrices.ts";
-import { type Proof, proofOf, secondOpinion } from "./blendProof.ts";
-import type { BlendPlan, BlendResult, CeilingWorth, EngineAnswer, Loosen } from "./blendResult.ts";
-import { stringsCost } from "./blendString.ts";
+import type { BlendPlan, BlendResult } from "./blendResult.ts";
+import { settleWork } from "./blendSettle.ts";
+import { nearOptions, worthOf } from "./blendWorth.ts";
 import type { Brief } from "./brief.ts";
 import { planCurrency, pricedIn } from "./currency.ts";
 import { distinct } from "./plan.ts";
@@ -45,172 +42,99 @@ export interface BlendInput {
 
 const MOST_TYPES = 4;
 const MOST_ALTERNATIVES = 9;
+const SECONDS = 10;
 /** Steps of work for each question beside the main one. */
-const SIDE_WORK = 2e6;
-/** Parts beside those of the blend whose prices are asked about. */
-const OTHERS_ASKED = 8;
+const SIDE_WORK = 1e6;
 
 /** Refuses only what cannot be understood (two currencies); that nothing fits is an answer, with what to loosen. */
 export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
-  const { brief, maxTypes = MOST_TYPES, explain = false } = input;
+  const { brief, maxTypes = MOST_TYPES, explain = false, stop } = input;
   const given = input.families ?? [DEFAULT_FAMILY];
   const money = planCurrency(brief, input.parts, given);
   if (!money.ok) return money;
   const currency = money.value;
   const minor = 10 ** minorDigits(currency ?? "");
-  const terms = {
-    brief,
-    families: pricedIn(given, currency, brief),
-    lineCost: Math.round((input.lineCost ?? 0) * minor),
-  };
+  const lineCost = Math.round((input.lineCost ?? 0) * minor);
+  const terms = { brief, families: pricedIn(given, currency, brief), lineCost };
   const parts = pricedIn(distinct(input.parts), currency, brief);
   const demand = { parts, terms, required: requiredCapacitance(brief), maxTypes };
   const work = blendWork(demand);
-  const { model, types } = work;
-  const stop = input.stop === undefined ? {} : { stop: input.stop };
-  const side: BlendLimits = { work: SIDE_WORK, ...stop };
+  const side = { work: SIDE_WORK, ...(stop === undefined ? {} : { stop }) };
+  const settled = await settleWork(work, { ...input, currency, side, seconds: input.seconds ?? SECONDS });
 
-  const answer = await (input.settle ?? settleBlend)(model, { ...stop, seconds: input.seconds ?? 10 });
-  const proof = answer.status === "stopped" ? null : proofOf(model, types, answer, currency);
-  const opinion = proof === null ? null : secondOpinion(model, proof, input.clock);
-  const nameOf = ({ counts }: FoundBlend): string =>
-    assessBlend({ groups: groupsOf(work, counts), terms, currency }).id;
-  const contradicted = opinion?.blend ?? null;
-  const disagreements: EngineAnswer[] = [
-    ...answer.disagreements.map(({ engine, blend }) => ({
-      engine,
-      cost: blend?.cost ?? null,
-      id: blend === null ? null : nameOf(blend),
-    })),
-    ...(contradicted === null
-      ? []
-      : [
+  const { proof, lowerBound: lower, proven } = settled;
+  const [cheapest = null] = settled.found;
+  const most = brief.maxCost === undefined ? Number.POSITIVE_INFINITY : brief.maxCost * minor * (1 + FIT);
+  const dear = cheapest !== null && cheapest.cost > most;
+  const made = (one: FoundBlend): Omit<BlendResult, "certificate"> =>
+    assessBlend({ groups: groupsOf(work, one.counts), terms, currency });
+  const blends = settled.found
+    .filter(({ cost }) => cost <= most)
+    .map((one): BlendResult => {
+      const whole = made(one);
+      // What the assessment adds up must be what the proof is about.
+      const same = Math.round((whole.cost?.total ?? 0) * minor) === one.cost;
+      return { ...whole, certificate: proven && same ? (proof?.named ?? null) : null };
+    });
+  const none = blends.length === 0;
+  const ruledOut = none && (proven || (dear && lower !== null && lower > most));
+  const status = ruledOut ? "infeasible" : !none && blends[0]!.certificate !== null ? "optimal" : "stopped";
+  const others =
+    input.within === undefined || none
+      ? null
+      : findAlternatives(
+          work.model,
           {
-            engine: answer.provenBy ?? "own search",
-            cost: answer.best?.cost ?? null,
-            id: answer.best === null ? null : nameOf(answer.best),
+            cheapest: cheapest!.cost,
+            within: input.within,
+            most: MOST_ALTERNATIVES,
+            kindOf: (counts) => kindOf(groupsOf(work, counts)),
           },
-          { engine: "javascript-lp-solver", cost: contradicted.cost, id: nameOf(contradicted) },
-        ]),
-  ];
-  const both = [contradicted, ...answer.disagreements.map(({ blend }) => blend), answer.best];
-  const found = both
-    .filter((one): one is FoundBlend => one !== null)
-    .sort((a, b) => a.cost - b.cost)
-    .filter((one, at, all) => at === 0 || (disagreements.length > 0 && one.cost !== all[at - 1]!.cost));
-  const cheapest = found[0] ?? null;
-  const dear = cheapest !== null && brief.maxCost !== undefined && cheapest.cost > brief.maxCost * minor * (1 + FIT);
-  // Contradicted or dearer than the ceiling while cheaper ones are not ruled out: nothing is proven.
-  const proven = disagreements.length === 0 && answer.status !== "stopped";
-  const beyond = dear && (proven || answer.lowerBound > brief.maxCost! * minor * (1 + FIT));
-  const sure = proven && proof?.named.verdict !== "invalid";
-  const certified = (made: Omit<BlendResult, "certificate">, cost: number): NamedOrNull =>
-    sure && Math.round((made.cost?.total ?? 0) * minor) === cost ? (proof?.named ?? null) : null;
-  const made = dear ? [] : found.map((one) => assessed(one));
-  function assessed(one: FoundBlend): BlendResult {
-    const whole = assessBlend({ groups: groupsOf(work, one.counts), terms, currency });
-    return { ...whole, certificate: one === cheapest ? certified(whole, one.cost) : null };
-  }
-  const asked = input.within !== undefined && cheapest !== null && !dear;
-  const others = asked
-    ? findAlternatives(
-        model,
-        {
-          cheapest: cheapest.cost,
-          within: input.within ?? 0,
-          most: MOST_ALTERNATIVES,
-          kindOf: (counts) => kindOf(groupsOf(work, counts)),
-        },
-        side,
-      )
-    : null;
-  const kinds = new Set(made.map(({ kind }) => kind));
+          side,
+        );
+  const kinds = new Set(blends.map(({ kind }) => kind));
   const rivals = (others?.blends ?? [])
-    .filter(({ cost }) => brief.maxCost === undefined || cost <= brief.maxCost * minor * (1 + FIT))
-    .map((one) => assessed(one))
+    .filter(({ cost }) => cost <= most)
+    .map((one): BlendResult => ({ ...made(one), certificate: null }))
     .filter(({ kind }) => !kinds.has(kind));
-  const question = { model, types, cheapest, currency: currency ?? "", limits: side };
-  const nothing = made.length === 0;
-  const loosen = !nothing
-    ? []
-    : dear
-      ? [costLoosened(brief, cheapest!.cost / minor, proven)]
-      : loosenBlend(demand, currency, side);
-  const status =
-    nothing && (beyond || (proven && cheapest === null))
-      ? "infeasible"
-      : sure && !nothing && made[0]!.certificate !== null
-        ? "optimal"
-        : "stopped";
-  const lower = Number.isFinite(answer.lowerBound) && disagreements.length === 0 ? answer.lowerBound : null;
+  const asked = { model: work.model, types: work.types, cheapest, currency: currency ?? "", limits: side };
+  const detailed = explain && currency !== null && !none;
   return accepted({
     currency,
     maxTypes,
-    compared: types.length,
+    compared: work.types.length,
     status,
-    provenBy: status === "stopped" ? null : answer.provenBy,
+    provenBy: status === "stopped" ? null : settled.provenBy,
     lowerBound: lower === null || currency === null ? null : toMajor(lower, currency),
-    gap: cheapest === null ? null : status === "optimal" ? 0 : lower === null ? null : gapOf(cheapest.cost, lower),
-    blends: [...made, ...rivals],
-    certificate: nothing && sure ? (proof?.named ?? null) : null,
-    secondOpinion: opinion?.said ?? "not asked",
-    disagreements,
+    gap: none ? null : status === "optimal" ? 0 : gapOf(cheapest!.cost, lower),
+    blends: [...blends, ...rivals],
+    certificate: none && proven ? (proof?.named ?? null) : null,
+    secondOpinion: settled.opinion,
+    disagreements: settled.disagreements.map(({ engine, blend }) => ({
+      engine,
+      cost: blend?.cost ?? null,
+      id: blend === null ? null : made(blend).id,
+    })),
     alternativesComplete: others?.complete ?? null,
     leftOut: work.leftOut,
-    loosen,
-    winningPrices: currency === null ? [] : winningPrices(question, work.unpriced),
-    priceMoves:
-      explain && currency !== null && !nothing ? priceMoves(question, nearOptions(proof, cheapest!), nameOf) : [],
-    worth: explain && currency !== null && !nothing ? worthOf(work, proof, cheapest!, minor) : null,
+    loosen: !none
+      ? []
+      : dear
+        ? [costLoosened(brief, cheapest.cost / minor, proven)]
+        : loosenBlend(demand, currency, side),
+    winningPrices: currency === null ? [] : winningPrices(asked, work.unpriced),
+    priceMoves: detailed ? priceMoves(asked, nearOptions(proof, cheapest!), (blend) => made(blend).id) : [],
+    worth: detailed ? worthOf(work.model, proof, cheapest!, minor) : null,
     notes: notesOf(input, work),
   });
 }
 
-type NamedOrNull = Proof["named"] | null;
-
-const gapOf = (cost: number, lower: number): number => (cost === 0 ? 0 : Math.max(0, cost - lower) / cost);
-
-const costLoosened = (brief: Brief, to: number, proven: boolean): Loosen => ({
-  field: "maxCost",
-  from: brief.maxCost!,
-  to,
-  change: brief.maxCost === 0 ? null : to / brief.maxCost! - 1,
-  cost: to,
-  proven,
-});
-
-/**
- * Counts as groups. Where a table was levelled, the count that really has the cost is built, if it fits: a resistor of few
- * elements for more strings may be cheaper than one for fewer.
- */
-function groupsOf({ model, types }: BlendWork, counts: readonly BlendCount[]): readonly Group[] {
-  const raised = counts.map(({ option, strings }) => {
-    const { costs, maxStrings } = model.options[option]!;
-    let x = strings;
-    while (x < maxStrings && (stringsCost(types[option]!, x) ?? 0) > costs[strings]!) x += 1;
-    return { option, strings: x };
-  });
-  const chosen = isFittingBlend(model, raised) ? raised : counts;
-  return chosen.map(({ option, strings }) => ({ type: types[option]!, strings }));
+function gapOf(cost: number, lower: number | null): number | null {
+  if (cost === 0) return 0;
+  return lower === null ? null : Math.max(0, cost - lower) / cost;
 }
 
-/** Options that the proof could not rule out by arithmetic alone, the blend's own left out. */
-function nearOptions(proof: Proof | null, cheapest: FoundBlend): readonly number[] {
-  const used = new Set(cheapest.counts.map(({ option }) => option));
-  const open = proof?.plain.survivors.map(({ option }) => option) ?? [];
-  return open.filter((option) => !used.has(option)).slice(0, OTHERS_ASKED);
-}
-
-function worthOf({ model }: BlendWork, proof: Proof | null, cheapest: FoundBlend, minor: number): CeilingWorth | null {
-  const open = proof?.plain.survivors.map(({ option }) => option) ?? [];
-  const among = [...new Set([...open, ...cheapest.counts.map(({ option }) => option)])].sort((a, b) => a - b);
-  const worth = rowWorth(model, among);
-  if (worth === null) return null;
-  const { volume, mass, units, types } = worth;
-  return { volume: volume / minor, mass: mass / minor, units: units / minor, types: types / minor };
-}
-
-function notesOf({ brief, lineCost }: BlendInput, { types }: BlendWork): readonly string[] {
+function notesOf({ brief, lineCost = 0 }: BlendInput, { types }: BlendWork): readonly string[] {
   const notes = [
     "A blend is made of whole strings, each part in its least safe series count; resistors are bought for each group on its own.",
   ];
@@ -218,8 +142,8 @@ function notesOf({ brief, lineCost }: BlendInput, { types }: BlendWork): readonl
     notes.push("Spares are bought for every part of a blend: one part cannot stand in for another.");
   if (brief.basis === "statistical")
     notes.push("Strings of a blend share safely in the worst case, also under the statistical basis.");
-  if ((lineCost ?? 0) > 0) notes.push("The cost of a line is counted once for every part of which any must be bought.");
-  if (types.some(({ terms }) => terms.families.every((family) => family.price === undefined && !family.priceBreaks)))
+  if (lineCost > 0) notes.push("The cost of a line is counted once for every part of which any must be bought.");
+  if (types.some(({ series, terms }) => series > 1 && !terms.families.some(isPriced)))
     notes.push("Balancing resistors have no price and count nothing in the comparison.");
   return notes;
 }
