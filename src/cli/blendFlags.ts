@@ -70,7 +70,7 @@ export function readBlendFlags(flags: BlendFlags): Read<BlendWish | null> {
   if (solverTime !== undefined) {
     const read = parseQuantity(solverTime, "time");
     if (read.ok && read.value >= 0.1 && read.value <= 86_400) wish.seconds = read.value;
-    else faults.push(refusal("--solver-time", solverTime, 'a time from "0.1 s" to "24 h"'));
+    else faults.push(refusal("--solver-time", solverTime, 'a time such as "10 s", from 100 ms to 24 h'));
   }
   return faults.length > 0 ? refused(...faults) : accepted(wish);
 }

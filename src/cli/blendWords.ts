@@ -19,6 +19,8 @@ export function proofSentence(plan: BlendPlan): string {
   }
   if (status === "infeasible")
     return `${among} ${plan.loosen.some(({ field }) => field === "maxCost") ? "The cheapest costs more than the limit" : "It is proven that none meets the need within the limits"} (${provenBy ?? "own search"}).`;
+  if (plan.certificate?.verdict === "invalid")
+    return `${among} NOT PROVEN: the separate verifier rejects the proof (${plan.certificate.why}). Please report this with the catalogue and the brief.`;
   if (blends.length === 0 || gap === null) return `${among} Not settled in the time allowed (--solver-time).`;
   const least = lowerBound === null ? "" : ` No blend costs less than ${money(lowerBound, currency ?? undefined)}:`;
   return `${among} NOT PROVEN: the best found in the time allowed (--solver-time).${least} it is at most ${formatQuantity(gap, "fraction", { digits: 3, rounding: "up" })} too dear.`;
@@ -129,6 +131,8 @@ function worthText({ worth, currency }: BlendPlan, width: number): readonly stri
       : [],
   );
   if (lines.length === 0)
-    return ["No ceiling holds the cost up: more room would save nothing, as far as fractions of strings tell."];
+    return [
+      wrap("No limit holds the cost up: more room would save nothing, as far as fractions of strings tell.", width),
+    ];
   return [`What the limits cost (a guide, from fractions of strings)\n${lines.join("\n")}`];
 }

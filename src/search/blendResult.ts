@@ -135,7 +135,7 @@ export interface BlendPlan {
   readonly lowerBound: number | null;
   readonly gap: number | null;
   readonly blends: readonly BlendResult[];
-  /** The proof that no blend exists, where that is the answer. */
+  /** The proof where no blend carries it: that none exists or all cost too much, or one that the verifier rejected. */
   readonly certificate: NamedCertificate | null;
   /** What the second engine said on the core, or why it was not asked. */
   readonly secondOpinion: "agrees" | "disagrees" | "no answer" | "not asked";

@@ -108,7 +108,7 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
     lowerBound: lower === null || currency === null ? null : toMajor(lower, currency),
     gap: none ? null : status === "optimal" ? 0 : gapOf(cheapest!.cost, lower),
     blends: [...blends, ...rivals],
-    certificate: none && proven ? (proof?.named ?? null) : null,
+    certificate: (none && proven) || proof?.named.verdict === "invalid" ? (proof?.named ?? null) : null,
     secondOpinion: settled.opinion,
     disagreements: settled.disagreements.map(({ engine, blend }) => ({
       engine,

@@ -3,11 +3,13 @@ import { describe, expect, test } from "vitest";
 import { REASONS, reasonWords } from "../../src/cli/reasonWords.ts";
 import { at } from "../support/fakePorts.ts";
 
-const sweep = readFileSync(at("src/search/sweep.ts"), "utf8");
+const sweep = ["sweep", "blendString", "blendOptions"]
+  .map((name) => readFileSync(at(`src/search/${name}.ts`), "utf8"))
+  .join("\n");
 
 describe("reasonWords(reason, currency)", () => {
   test("every reason of the search has words, and no other", () => {
-    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown))|stock|balance)"/g);
+    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown|missing))|stock|balance)"/g);
     const used = new Set([...found].map((match) => match[1] as string));
     expect(used.size).toBeGreaterThan(7);
     expect([...used].sort()).toEqual(Object.keys(REASONS).sort());
