@@ -19,4 +19,6 @@ export {
   type ResistorFamily,
   readResistors,
 } from "./resistor.ts";
+export { capacitorSchema, readCapacitorData } from "./schema.ts";
 export { assumedLeakage, RULES, stateOf } from "./states.ts";
+export { readWaveform, type WaveformRow } from "./waveform.ts";

@@ -2,6 +2,13 @@
 export { attainableGap, relativeSpread, type ShapeOfLot } from "./attainable.ts";
 export { type BankGaps, bankGaps, gapOfGroups, shares } from "./bankGaps.ts";
 export type { BoundKind } from "./boundMatrix.ts";
+export { diagnose } from "./diagnose.ts";
+export type { MeterModel, PriorDoubt, ReadingRow } from "./diagnoseEvidence.ts";
+export { FAULT_KINDS, type FaultKind } from "./diagnoseFaults.ts";
+export { type Course, type CourseRow, chargerOff, chargerOn, type StageModel } from "./diagnoseModel.ts";
+export type { NextMeasurement } from "./diagnoseNext.ts";
+export type { Diagnosis, DiagnosisRequest, GoOn, Suspect } from "./diagnoseRequest.ts";
+export { STOP_ACTIONS } from "./diagnoseSafety.ts";
 export { expectedLargest, gapFloor, honestDigits, voltageUncertainty } from "./floor.ts";
 export { type Front, type FrontPoint, placingFront } from "./front.ts";
 export { type Mend, type Mending, mend } from "./mend.ts";

@@ -5,6 +5,7 @@ import { briefJsonSchema, type PlanResult, plan, RANKINGS, type Ranking } from "
 import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
+import { lampFits } from "../lampFits.ts";
 import { planText } from "../planText.ts";
 import type { Ports } from "../ports.ts";
 import { type Flags, type Settings, settle } from "../settings.ts";
@@ -71,7 +72,7 @@ export function planJson({ settings, stock, result }: Planned): object {
   const best = result.layouts[0];
   const unit = best && stock.parts.find((part) => part.part === best.part);
   const cautions = cautionsOf(result.brief, best && unit ? { layout: best, unit } : undefined);
-  return { ...result, cautions, inputs: inputsJson(settings, stock) };
+  return { ...result, ...lampFits(result, stock.parts), cautions, inputs: inputsJson(settings, stock) };
 }
 
 export function planWords({ settings, stock, rank, result }: Planned, width: number): string {
