@@ -1,10 +1,9 @@
 // What is found about a blend as a whole: energy, steady supply, bleed and the hazards of all its capacitance together.
 
 import { hazardFindings } from "../hazard/index.ts";
-import { type Finding, formatQuantity } from "../quantity/index.ts";
+import { type Finding, formatQuantity, withinLeast } from "../quantity/index.ts";
 import type { BlendResult } from "./blendResult.ts";
 import type { Brief } from "./brief.ts";
-import { atLeast } from "./findings.ts";
 
 export interface WholeBlend extends Pick<BlendResult, "capacitance" | "energy" | "bleed"> {
   readonly brief: Brief;
@@ -25,7 +24,7 @@ export function blendFindings(whole: WholeBlend): readonly Finding[] {
 }
 
 function energy({ energy, brief }: WholeBlend): Finding {
-  return atLeast({
+  return withinLeast({
     id: "pulse-energy",
     state: "pulse",
     value: brief.basis === "nominal" ? energy.nominal : energy.low,
@@ -40,7 +39,7 @@ function steady({ capacitance, brief }: WholeBlend): readonly Finding[] {
   if (brief.steady === undefined) return [];
   const { current, frequency } = brief.steady;
   return [
-    atLeast({
+    withinLeast({
       id: "steady-current",
       state: "pulse",
       value: brief.basis === "nominal" ? capacitance.nominal : capacitance.low,
