@@ -2,4 +2,6 @@
 export { type CautionLine, cautionsOf } from "./cautions.ts";
 export { type Files, filesOn } from "./files.ts";
 export { type Ports, textWidth } from "./ports.ts";
+export { clampWords, withoutBalanceWords } from "./restText.ts";
+export { rateBlocks } from "./shotRateText.ts";
 export { refusalWords } from "./words.ts";

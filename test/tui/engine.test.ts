@@ -1,6 +1,6 @@
 // One question to the engine: refused, nothing fits, planned.
 import { describe, expect, test } from "vitest";
-import { answerFor, filledValues, mostListed } from "../../src/tui/engine.ts";
+import { answerFor, mostListed } from "../../src/tui/engine.ts";
 import { update } from "../../src/tui/update/update.ts";
 import { engine, stateWith } from "../support/stock.ts";
 

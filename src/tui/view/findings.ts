@@ -5,7 +5,7 @@ import { fitText } from "../text.ts";
 import { bySeverity, type shown, VERDICT_STYLE } from "../values.ts";
 import { paragraph } from "./words.ts";
 
-const VERDICT_MARK: Readonly<Record<Finding["verdict"], string>> = {
+export const VERDICT_MARK: Readonly<Record<Finding["verdict"], string>> = {
   fail: "x fail",
   warn: "! warn",
   "not assessed": "? not assessed",
