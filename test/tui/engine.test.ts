@@ -42,7 +42,3 @@ test("mostListed(state): short beside the form, long on the list, and going ther
   expect(update(stateWith(), { type: "go", screen: "layouts" }).effects).toEqual([{ type: "ask", asked: 1 }]);
   expect(update(stateWith({ screen: "layouts" }), { type: "go", screen: "brief" }).effects).toEqual([]);
 });
-
-test("filledValues(values) leaves blanks to the brief's defaults", () => {
-  expect(filledValues({ a: "", b: "  ", c: "1" })).toEqual({ c: "1" });
-});

@@ -47,12 +47,12 @@ export function dotted(points: readonly Point[], count: number): readonly Point[
   });
 }
 
-function factWords(course: BankCourse): readonly string[] {
+function factWords(course: BankCourse, ascii: boolean): readonly string[] {
   const { stages, peak, lowest, corner, dumpResistance, endlessHold } = course;
   const name = (kind: number): string => stages[kind]?.words ?? "";
   const others = stages.slice(1).map(({ words, count }) => (count === 1 ? words : `${words} (${count})`));
   return [
-    `Line: ${name(0)}. Dots: ${others.join("; ")}. Corner: ${corner}.`,
+    `${ascii ? "*" : "Line"}: ${name(0)}. ${ascii ? "o" : "Dots"}: ${others.join("; ")}. Corner: ${corner}.`,
     `P highest: ${shownWorst(peak.voltage, "voltage")} on ${name(peak.kind)}, in ${peak.phase}, after ${shown(peak.seconds, "time")}.`,
     ...(lowest.voltage < 0
       ? [
@@ -114,6 +114,6 @@ export function courseRows(layout: LayoutResult, rest: RestDetail, { brief, stat
       ],
       ascii: state.look.ascii,
     }),
-    ...factWords(course).flatMap((text) => paragraph(text, columns)),
+    ...factWords(course, state.look.ascii).flatMap((text) => paragraph(text, columns)),
   ];
 }

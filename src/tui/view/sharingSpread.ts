@@ -20,6 +20,9 @@ export function chanceWords(chance: number): string {
     : chance.toExponential(2);
 }
 
+/** Cells that the upright axis takes, so that each dot column gets one line: "banks" and its rule. */
+const AXIS = "banks".length + 2;
+
 /** Bins gathered to about one a dot, each drawn as an upright line. */
 function area(spread: ShareSpread, high: number, count: number): { readonly points: Point[]; readonly most: number } {
   const { from, to, bins } = spread;
@@ -63,7 +66,7 @@ export function spreadRows(
   const { limit, median, exceed, error, banks, seed, law } = spread;
   const high = spread.from + (Math.max(limit, topOf(spread)) - spread.from) * 1.04;
   const seen = limit >= spread.from;
-  const { points, most } = area(spread, high, Math.max(8, Math.min(spread.bins.length, columns)));
+  const { points, most } = area(spread, high, Math.max(8, Math.min(spread.bins.length, 2 * (columns - AXIS))));
   const statistical = brief.basis === "statistical";
   const over = statistical && exceed + error > brief.risk;
   const asked = statistical ? `; the brief allows ${chanceWords(brief.risk)}${over ? ": over" : ": within"}` : "";
@@ -101,6 +104,7 @@ export function spreadRows(
     rowOf(
       span(`L limit ${shownLimit(limit, "voltage")}${seen ? "" : ", below the even share"}: chance of a bank over it `),
       span(chanceWords(exceed), over ? "bad" : "strong"),
+      span(error > 0 ? "" : exceed === 0 ? ": even the worst corner is below" : ""),
       span(error === 0 ? "" : ` +- ${chanceWords(error)}`),
     ),
     ...paragraph(

@@ -1,13 +1,14 @@
 // One shot of the chosen bank into the brief's load: its course, figures, energies, faults, and what is not assessed.
 
 import { rateBlocks, refusalWords } from "../../cli/index.ts";
+import type { Bound } from "../../pulse/index.ts";
 import type { ShotReport } from "../../search/index.ts";
 import { detailsOf } from "../detail.ts";
 import { shownBank } from "../pick.ts";
 import type { ShotDetail } from "../ports.ts";
 import { EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
 import type { State } from "../state.ts";
-import { shown } from "../values.ts";
+import { shown, shownVerdict, VERDICT_STYLE, worstVerdict } from "../values.ts";
 import { bankHead, noBank } from "./bank.ts";
 import { RULE, sideBySide } from "./beside.ts";
 import { findingRows } from "./findings.ts";
@@ -46,15 +47,23 @@ function refusedRows(read: Extract<ShotDetail["report"], { readonly ok: false }>
   ];
 }
 
-/** Peak, reversal and action at a glance, each with its bound said. */
-function glance({ discharge }: ShotReport): Row {
+const BOUND_WORDS: Readonly<Record<Bound, string>> = {
+  value: "",
+  "upper bound": "at most ",
+  "lower bound": "at least ",
+  "side unknown": "about ",
+};
+
+/** Peak and reversal at a glance, each with its bound said, and how the checks of the shot went. */
+function glance({ discharge, findings }: ShotReport): Row {
   const { peakCurrent, peakTime, reversal, bounds } = discharge;
-  const bound = bounds.peakCurrent === "value" ? "" : ` (${bounds.peakCurrent})`;
-  const time = shown(peakTime, "time");
-  return rowOf(
-    span(`Peak ${shown(peakCurrent, "current")}${bound} after ${time}`, "strong"),
-    span(`, reversal ${shown(reversal, "fraction")}${bounds.reversal === "value" ? "" : ` (${bounds.reversal})`}`),
-  );
+  const peak = `Peak ${BOUND_WORDS[bounds.peakCurrent]}${shown(peakCurrent, "current")} after ${shown(peakTime, "time")}`;
+  const back = `reversal ${BOUND_WORDS[bounds.reversal]}${shown(reversal, "fraction")}`;
+  const { verdict } = worstVerdict({ findings });
+  return {
+    left: [span(peak, "strong"), span(`, ${back}`)],
+    right: [span(`shot: ${shownVerdict({ findings })}`, VERDICT_STYLE[verdict])],
+  };
 }
 
 /** Charging, heat, life and lamp, in the words of the pulse command. */

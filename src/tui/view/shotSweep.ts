@@ -18,6 +18,7 @@ export function sweepRows(
     return paragraph(why, columns);
   }
   const { points, here, bound } = sweep;
+  const { ascii } = state.look;
   const [first, last] = [points[0], points.at(-1)];
   if (first === undefined || last === undefined) return [];
   const x = (inductance: number): number => Math.log(inductance);
@@ -43,10 +44,10 @@ export function sweepRows(
       top: shown(high, "current"),
       bottom: "0",
       under: [shown(first.inductance, "inductance"), "loop inductance, log", shown(last.inductance, "inductance")],
-      ascii: state.look.ascii,
+      ascii,
     }),
     ...paragraph(
-      `Line: peak current${bound ? " (upper bound: something in the loop is unknown)" : ""}. Dots: the lossless bound V sqrt(C/L), which no loop passes. ${own}`,
+      `${ascii ? "*" : "Line"}: peak current${bound ? " (upper bound: something in the loop is unknown)" : ""}. ${ascii ? "o" : "Dots"}: the lossless bound V sqrt(C/L), which no loop passes. ${own}`,
       columns,
     ),
   ];

@@ -19,6 +19,7 @@ const QUIET = 0.02;
 /** A ringing shot is drawn to so many times its first peak: about four periods. */
 const RINGS = 16;
 const LOOKED_AT = 400;
+const SOUGHT_AT = 1000;
 
 /** s that are drawn: until the current has died down, and of a long ringing its first periods. */
 export function drawnSeconds({ at, duration, peakCurrent, peakTime, reversal }: Discharge): number {
@@ -30,6 +31,16 @@ export function drawnSeconds({ at, duration, peakCurrent, peakTime, reversal }: 
   return most;
 }
 
+/** Where the voltage is lowest: its depth is the shot's own reversal, its time is looked for finely, whatever the width. */
+function lowestOf({ at, reversal }: Discharge, { voltage, until }: { readonly voltage: number; readonly until: number }) {
+  let time = 0;
+  for (let step = 1; step <= SOUGHT_AT; step += 1) {
+    const next = (until * step) / SOUGHT_AT;
+    if (at(next).voltage < at(time).voltage) time = next;
+  }
+  return { time, voltage: -reversal * voltage };
+}
+
 export function traceRows({ discharge, voltage }: ShotReport, { state, size }: ShotDrawn): readonly Row[] {
   const { peakTime, at, duration } = discharge;
   const until = drawnSeconds(discharge);
@@ -37,13 +48,13 @@ export function traceRows({ discharge, voltage }: ShotReport, { state, size }: S
   const times = Array.from({ length: count }, (_, index) => (until * index) / (count - 1));
   const samples = times.map((time) => ({ time, ...at(time) }));
   const peak = { x: peakTime, y: at(peakTime).current };
-  const lowest = samples.reduce((a, b) => (b.voltage < a.voltage ? b : a));
+  const lowest = lowestOf(discharge, { voltage, until });
   const range = (values: readonly number[]) => {
     const [low, high] = [Math.min(0, ...values), Math.max(0, ...values)];
     return { low: low * 1.05, high: high > low ? high * 1.05 : low + 1 };
   };
   const amperes = range([...samples.map(({ current }) => current), peak.y]);
-  const volts = range([...samples.map((one) => one.voltage), voltage]);
+  const volts = range([...samples.map((one) => one.voltage), voltage, lowest.voltage]);
   const under = ["0", "time", shown(until, "time")] as const;
   const zero = (low: number) => (low < 0 ? [{ y: 0, words: "0" }] : []);
   const common = { ...size, x: { low: 0, high: until > 0 ? until : 1 }, ascii: state.look.ascii };
