@@ -48,7 +48,10 @@ export function planText(of: PlanText): string {
   const how = proof === "exhaustive" ? "every part, series count and tie was tried" : `proof: ${proof}`;
   const blocks = [
     `${title}\n\nAsked\n${askedText(result.brief, of.given, width)}`,
-    wrap(`Capacitance needed: ${need}. Searched ${parts} parts; ${layouts} layouts do it; ${proof}: ${how}.`, width),
+    wrap(
+      `Capacitance needed: ${need}. Searched ${parts} ${parts === 1 ? "part" : "parts"}; ${layouts} ${layouts === 1 ? "layout does" : "layouts do"} it; ${proof}: ${how}.`,
+      width,
+    ),
     ...of.inputs.map((text) => wrap(text, width)),
     lampPlanText(of),
     ...(result.layouts.length > 0 ? fitting(of) : nothing(of)),

@@ -8,8 +8,10 @@ import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
 import type { PulseFlags } from "./commands/pulse.ts";
+import type { CommissionFlags } from "./commissionFlags.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
+import type { PlaceFlags } from "./placeFlags.ts";
 import type { Ports } from "./ports.ts";
 import { VERSION } from "./version.ts";
 
@@ -96,6 +98,49 @@ function build(ports: Ports, done: Done): Command {
       const { orderCommand } = await import("./commands/order.ts");
       done(orderCommand(brief, flags, ports));
     });
+  withLayout(program.command("place"))
+    .description("Place measured units, each where the voltages come out most equal.")
+    .option("--measured <file>", "measured units, CSV: serial, capacitance, and where known leakage, esr, lot")
+    .option("--uncertainty <fraction>", 'of one capacitance against another, "0.3 %"')
+    .option("--leakage-uncertainty <fraction>", 'of one leakage reading, "10 %"')
+    .option("--leakage-at <voltage>", "voltage on a unit at which leakage was read")
+    .option("--unit-limit <voltage>", "highest voltage of a unit; else the part's, derated")
+    .option("--pins <pins...>", "units that must stand in a stage or string: SERIAL=3, or a list in CSV")
+    .option("--lots <wish>", "mix: every lot spread evenly; apart: one lot to a stage or string")
+    .option("--outliers <wish>", "reject or keep units that do not belong to the lot")
+    .option("--goal <goal>", "charging, or both: charging within its floor, then holding")
+    .option("--stop-at-floor", "stop where the meter cannot tell better placings apart")
+    .option("--seed <number>", "seed of the search")
+    .option("--moves <count>", "how many elementary trials the search may make")
+    .option("--front", "show what holding costs in charging")
+    .option("--positions <file>", "take this list of positions as built, and judge it")
+    .option("--without <serial>", "show the fewest changes when this unit comes out")
+    .option("--format <format>", "text, csv or json; else by the ending of --output")
+    .option("--output <file>", "write the list to a file, whole or not at all")
+    .option("--force", "replace the file if it exists")
+    .addHelpText("after", HELP.place)
+    .action(async (brief: string | undefined, flags: PlaceFlags) => {
+      const { placeCommand } = await import("./commands/place.ts");
+      done(placeCommand(brief, flags, ports));
+    });
+  program
+    .command("commission")
+    .description("Compare the voltages of a built bank with what its units should show.")
+    .argument("<sheet>", "the JSON of place, or one layout of plan or check; - is standard input")
+    .option("--readings <file>", "readings, CSV: time [s], charge voltage [V], stage, voltage [V], total, current")
+    .option("--meter <fraction>", 'uncertainty of a voltage reading, "0.5 %"')
+    .option("--resolution <voltage>", 'its last digit and zero error, "0.1 V"')
+    .option("--unit-limit <voltage>", "highest voltage of a unit; else the sheet's")
+    .option("--balance <resistance>", "balancing resistor as fitted, or none; else the sheet's")
+    .option("--charger <state>", "on: it held the voltage; off: taken off after the charge")
+    .option("--next-voltage <voltage>", "charge voltage of the next step of the hot test")
+    .option("--next-hold <time>", "how long it would be held")
+    .option("--json", "print JSON")
+    .addHelpText("after", HELP.commission)
+    .action(async (sheet: string, flags: CommissionFlags) => {
+      const { commissionCommand } = await import("./commands/commission.ts");
+      done(commissionCommand(sheet, flags, ports));
+    });
   program
     .command("parts")
     .description("Read catalogues and say what was understood, row by row.")
@@ -110,6 +155,13 @@ function build(ports: Ports, done: Done): Command {
   return program;
 }
 
+/** Help asked of a command that there is none of is the slip to tell; commander would show the general help instead. */
+function slipOf(program: Command, argv: readonly string[]): readonly string[] {
+  const name = argv[0] === "help" ? argv[1] : argv[0];
+  const known = name === undefined || name.startsWith("-") || name === "help";
+  return known || program.commands.some((command) => command.name() === name) ? argv : [name];
+}
+
 /** Runs one command line without the program's name; the exit status. Throws only for a bug of ours. */
 export async function run(argv: readonly string[], ports: Ports): Promise<number> {
   let status: number = EXIT.done;
@@ -117,7 +169,7 @@ export async function run(argv: readonly string[], ports: Ports): Promise<number
     status = found;
   });
   try {
-    await program.parseAsync([...argv], { from: "user" });
+    await program.parseAsync([...slipOf(program, argv)], { from: "user" });
     return status;
   } catch (error) {
     if (!(error instanceof CommanderError)) throw error;

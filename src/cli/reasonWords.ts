@@ -14,6 +14,54 @@ interface Reason {
   readonly least?: boolean;
 }
 
+/** The limits on the shot: name, what it is about, its dimension. */
+const LIMITS: readonly (readonly [string, string, Dimension])[] = [
+  ["peak-current", "peak current through a unit", "current"],
+  ["slew", "slew of a unit", "slew"],
+  ["reversal", "reversal", "fraction"],
+  ["rms", "rms current through a unit", "current"],
+  ["temperature-rise", "rise of a unit in K", "count"],
+  ["fault-energy", "energy into a shorted unit", "energy"],
+  ["life", "life over that at the ratings", "count"],
+];
+
+/** Each limit may be passed, unproven because parts of the loop are unknown, or unknown. */
+function limitReasons(): Readonly<Record<string, Reason>> {
+  const rows = LIMITS.flatMap(([name, about, dimension]): [string, Reason][] => {
+    const least = name === "life";
+    const wanted = least ? "wanted {limit} at least" : "limit {limit}";
+    return [
+      [
+        `${name}-limit`,
+        {
+          words: `${about} {value} at ${least ? "most" : "least"}, ${wanted}`,
+          plain: `${about} breaks its limit`,
+          dimension,
+          least,
+        },
+      ],
+      [
+        `${name}-unproven`,
+        {
+          words: `${about} {value} as far as is known, ${wanted}: not proven, for parts of the loop are unknown`,
+          plain: `${about} cannot be proven`,
+          dimension,
+          least,
+        },
+      ],
+      [
+        `${name}-unknown`,
+        {
+          words: "",
+          plain: `${about}: the figure or the rating is unknown, so the limit cannot be held`,
+          dimension,
+        },
+      ],
+    ];
+  });
+  return Object.fromEntries(rows);
+}
+
 export const REASONS: Readonly<Record<string, Reason>> = {
   "series-limit": {
     words: "needs {value} in series to share safely, limit {limit}",
@@ -26,8 +74,8 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     dimension: "count",
   },
   stock: {
-    words: "needs {value} units, {limit} can be had with packs and minimum order counted",
-    plain: "more units are needed than can be had",
+    words: "{value} units must be bought, {limit} can be had, packs and minimum order counted",
+    plain: "more units must be bought than can be had",
     dimension: "count",
   },
   balance: {
@@ -70,118 +118,7 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     plain: "its price is unknown, so the limit of {limit} cannot be held",
     dimension: "money",
   },
-  "peak-current-limit": {
-    words: "peak current through a unit {value} at least, limit {limit}",
-    plain: "peak current through a unit is over its limit",
-    dimension: "current",
-  },
-  "peak-current-unproven": {
-    words:
-      "peak current through a unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
-    plain: "peak current through a unit cannot be proven",
-    dimension: "current",
-  },
-  "peak-current-unknown": {
-    words: "",
-    plain: "peak current through a unit: the figure or the rating is unknown, so the limit cannot be held",
-    dimension: "current",
-  },
-  "slew-limit": {
-    words: "slew of a unit {value} at least, limit {limit}",
-    plain: "slew of a unit is over its limit",
-    dimension: "slew",
-  },
-  "slew-unproven": {
-    words: "slew of a unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
-    plain: "slew of a unit cannot be proven",
-    dimension: "slew",
-  },
-  "slew-unknown": {
-    words: "",
-    plain: "slew of a unit: the figure or the rating is unknown, so the limit cannot be held",
-    dimension: "slew",
-  },
-  "reversal-limit": {
-    words: "reversal {value} at least, limit {limit}",
-    plain: "reversal is over its limit",
-    dimension: "fraction",
-  },
-  "reversal-unproven": {
-    words: "reversal {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
-    plain: "reversal cannot be proven",
-    dimension: "fraction",
-  },
-  "reversal-unknown": {
-    words: "",
-    plain: "reversal: the figure or the rating is unknown, so the limit cannot be held",
-    dimension: "fraction",
-  },
-  "rms-limit": {
-    words: "rms current through a unit {value} at least, limit {limit}",
-    plain: "rms current through a unit is over its limit",
-    dimension: "current",
-  },
-  "rms-unproven": {
-    words:
-      "rms current through a unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
-    plain: "rms current through a unit cannot be proven",
-    dimension: "current",
-  },
-  "rms-unknown": {
-    words: "",
-    plain: "rms current through a unit: the figure or the rating is unknown, so the limit cannot be held",
-    dimension: "current",
-  },
-  "temperature-rise-limit": {
-    words: "rise in K of a unit {value} at least, limit {limit}",
-    plain: "rise in K of a unit is over its limit",
-    dimension: "count",
-  },
-  "temperature-rise-unproven": {
-    words:
-      "rise in K of a unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
-    plain: "rise in K of a unit cannot be proven",
-    dimension: "count",
-  },
-  "temperature-rise-unknown": {
-    words: "",
-    plain: "rise in K of a unit: the figure or the rating is unknown, so the limit cannot be held",
-    dimension: "count",
-  },
-  "fault-energy-limit": {
-    words: "energy into a shorted unit {value} at least, limit {limit}",
-    plain: "energy into a shorted unit is over its limit",
-    dimension: "energy",
-  },
-  "fault-energy-unproven": {
-    words:
-      "energy into a shorted unit {value} as far as is known, limit {limit}: not proven, for parts of the loop are unknown",
-    plain: "energy into a shorted unit cannot be proven",
-    dimension: "energy",
-  },
-  "fault-energy-unknown": {
-    words: "",
-    plain: "energy into a shorted unit: the figure or the rating is unknown, so the limit cannot be held",
-    dimension: "energy",
-  },
-  "life-limit": {
-    words: "life {value} of that at its ratings, wanted {limit} at least",
-    plain: "life is below its limit",
-    dimension: "count",
-    least: true,
-  },
-  "life-unproven": {
-    words:
-      "life {value} of that at its ratings as far as is known, wanted {limit}: not proven, for parts of the loop are unknown",
-    plain: "life cannot be proven",
-    dimension: "count",
-    least: true,
-  },
-  "life-unknown": {
-    words: "",
-    plain: "life: an exponent or a reference is unknown, so the limit cannot be held",
-    dimension: "count",
-  },
+  ...limitReasons(),
   "no-shot": {
     words: "",
     plain: "its shot cannot be reckoned with this load, so no limit on it can be held",

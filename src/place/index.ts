@@ -1,4 +1,5 @@
 // Measured units into positions, and what a built bank then reads: what the layers above may use.
+export { asBuilt } from "./asBuilt.ts";
 export { attainableGap, relativeSpread, type ShapeOfLot } from "./attainable.ts";
 export { type BankGaps, bankGaps, gapOfGroups, shares } from "./bankGaps.ts";
 export type { BoundKind } from "./boundMatrix.ts";
@@ -9,15 +10,19 @@ export { type Course, type CourseRow, chargerOff, chargerOn, type StageModel } f
 export type { NextMeasurement } from "./diagnoseNext.ts";
 export type { Diagnosis, DiagnosisRequest, GoOn, Suspect } from "./diagnoseRequest.ts";
 export { STOP_ACTIONS } from "./diagnoseSafety.ts";
+export { exactCourse } from "./exactCourse.ts";
 export { expectedLargest, gapFloor, honestDigits, voltageUncertainty } from "./floor.ts";
 export { type Front, type FrontPoint, placingFront } from "./front.ts";
+export { chainsOf, type HeldBank, type HoldCourse, holdCourse, type Stand } from "./holdCourse.ts";
 export { type Mend, type Mending, mend } from "./mend.ts";
 export { OUTLIER_RULE, type Outlier, outliersOf } from "./outliers.ts";
 export { place, placing } from "./place.ts";
 export type { ChargingShare, HoldingShare, Placing } from "./placing.ts";
+export { type Position, positionList } from "./positions.ts";
 export { type Replacement, replacements } from "./replacements.ts";
 export { DEFAULTS, type Pin, type PlaceRequest, type Room } from "./request.ts";
 export { type ResistorEffect, resistorEffect } from "./resistorEffect.ts";
 export type { SearchStep } from "./solution.ts";
 export { keepOrder, SPARE_RULE } from "./spareOrder.ts";
+export { stressFindings } from "./stress.ts";
 export type { MeasuredUnit, Ties } from "./unit.ts";

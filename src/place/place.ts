@@ -9,7 +9,7 @@ import { effort, settle, share } from "./effort.ts";
 import { gapFinding, holdingUnknown, mixedParts } from "./flags.ts";
 import { gapFloor, honestDigits, voltageUncertainty } from "./floor.ts";
 import { worstShare } from "./gap.ts";
-import { type Held, holdAgain } from "./holding.ts";
+import { type Held, holdAgain, holdFreely } from "./holding.ts";
 import { toLattice } from "./lattice.ts";
 import { outliersOf } from "./outliers.ts";
 import { type Placing, serialsOf, settled } from "./placing.ts";
@@ -24,6 +24,9 @@ const FLOOR_STOP = 0.1;
 /** Of the floor, what charging may give up for holding (adds under 5 % in squares). */
 const FLOOR_GIVEN = 0.3;
 const HOLDING_MOVES = 400_000;
+/** Above this count the best possible is not reached to the last digit, and so much of a gap is no loss for holding. */
+const SMALL = 40;
+const FREE = 8e-7;
 const HOLDING_TRIES = 2;
 
 /**
@@ -56,13 +59,17 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
   const random = seeded(request.seed ?? DEFAULTS.seed);
   const work = effort(request.moves ?? DEFAULTS.moves, request.within);
   const conductances = conductancesOf(pool, request);
-  const wantsHolding = conductances.known && request.goal !== "charging" && series > 1;
+  const judged = conductances.known && series > 1;
   const shape = { series, parallel, ties, uncertainty };
   const floor = gapFloor(shape);
   const stopAt = request.stopAt ?? (request.stopAtFloor === false ? 0 : FLOOR_STOP * floor);
   const prove = request.stopAtFloor !== true && request.stopAt === undefined;
 
-  const reserve = wantsHolding ? Math.min(HOLDING_TRIES * HOLDING_MOVES, work.moves / 2) : 0;
+  const large = pool.length > SMALL;
+  const level = large && request.goal === "charging";
+  const reserve = judged
+    ? Math.min(level ? Number.POSITIVE_INFINITY : HOLDING_TRIES * HOLDING_MOVES, work.moves / 2)
+    : 0;
   const charging = share(work, work.moves - reserve);
   const task = { ties, values, rule, order, start: start.groups, stopAt, prove };
   const solution = yield* solveCharging(task, random, charging);
@@ -71,10 +78,13 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
   const holdingFloor = gapFloor({ ...shape, uncertainty: request.leakageUncertainty ?? DEFAULTS.leakageUncertainty });
   let held: Held | null = null;
   if (conductances.known) {
-    const limit = Math.max(solution.gap, request.chargingLimit ?? FLOOR_GIVEN * floor);
-    const goals = { ties, values, rule, conductances, limit, target: FLOOR_STOP * holdingFloor, spares: false };
-    const moves = wantsHolding ? Math.min(HOLDING_MOVES, reserve) : 0;
-    const steps = holdAgain(solution.groups, { ...goals, moves }, { tries: HOLDING_TRIES, random, work });
+    const goals = { ties, values, rule, conductances, target: FLOOR_STOP * holdingFloor, spares: false };
+    const both = { ...goals, limit: Math.max(solution.gap, request.chargingLimit ?? FLOOR_GIVEN * floor) };
+    const moves = judged ? Math.min(HOLDING_MOVES, reserve) : 0;
+    const steps =
+      request.goal === "charging"
+        ? holdFreely(solution, { ...both, moves, slack: large ? FREE : 0 }, { random, work })
+        : holdAgain(solution.groups, { ...both, moves }, { tries: HOLDING_TRIES, random, work });
     let step = steps.next();
     for (; !step.done; step = steps.next()) {
       yield { phase: "holding", gap: step.value.charging, moves: work.spent };

@@ -2,6 +2,7 @@
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";
 export { BUS_LENGTHS } from "./briefFaults.ts";
+export { unitLimit } from "./candidate.ts";
 export { planCurrency, pricedIn } from "./currency.ts";
 export { faultBankOf, faultsOf } from "./faults.ts";
 export { type FuseChoice, fittedFuse, fuseCount } from "./fuses.ts";

@@ -22,7 +22,7 @@ export interface LifeReport extends LifeRatio {
   readonly notes: readonly string[];
 }
 
-/** Exponents of the brief beat those of the catalogue. A gain from less than the rated reversal needs an exponent; without one none is claimed. */
+/** Exponents of the brief beat those of the catalogue. Less reversal than the rated one is never a gain. */
 export function lifeOf(brief: Brief, unit: Capacitor, at: LifeStress): LifeReport {
   const own = brief.life ?? {};
   const notes = ["A ratio by exponents that the builder gave; published ones disagree widely, and none is a promise."];
@@ -35,9 +35,11 @@ export function lifeOf(brief: Brief, unit: Capacitor, at: LifeStress): LifeRepor
   }
   const reference = unit.reversal ?? null;
   const exponent = own.reversalExponent ?? unit.reversalExponent ?? null;
-  const gains = reference !== null && at.reversal <= reference && (exponent === null || at.reversal === 0);
-  if (gains && at.reversal < reference) notes.push("Less reversal than rated is counted as the rated one.");
-  else if (!gains && at.reversal > 0) {
+  // the power law runs to infinity as reversal goes to nothing, so no gain is taken from it
+  const within = reference !== null && at.reversal <= reference;
+  if (within && at.reversal < reference)
+    notes.push("Less reversal than rated is counted as the rated one: no gain is claimed.");
+  else if (!within && at.reversal > 0) {
     if (reference === null || reference === 0) missing.push("reversal");
     else stresses.reversal = { value: at.reversal, reference, exponent };
   }

@@ -21,6 +21,14 @@ export type OrderFlags = BankFlags & {
 
 export function orderCommand(brief: string | undefined, flags: OrderFlags, ports: Ports): number {
   const format = readFormat(flags);
+  if (flags.output?.trim() === "") {
+    const want = "the name of a file; - for the output";
+    return tell(
+      ports,
+      [{ code: "empty", place: { field: "--output" }, read: JSON.stringify(flags.output), want }],
+      flags.json,
+    );
+  }
   const checked = checkedBank(brief, flags, ports);
   if (!checked.ok || typeof format !== "string") {
     const faults = [...(typeof format === "string" ? [] : [format]), ...(checked.ok ? [] : checked.refusals)];

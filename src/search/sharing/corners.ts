@@ -1,12 +1,13 @@
 // The corner behind each worst case of one arrangement, in words and volts: charging, holding, and what a dump leaves.
 
 import {
-  chargingCorners,
   chargingShares,
-  dumpedCorners,
+  chargingWorst,
+  cornerWords,
   endOfHold,
   holdCornerWords,
-  holdingCorners,
+  type Sides,
+  type Stage,
   stageRange,
   worstAtHold,
 } from "../../bank/index.ts";
@@ -33,10 +34,17 @@ export interface BankCorners {
 
 export const NO_CORNERS: BankCorners = { charging: null, holding: null, dumped: null, dumpedFromHold: null };
 
-/** Two stages stand for all in the words, because all have the same ranges; volts are those of the whole chain. */
-function pairOf({ result, unit }: RestingBank, spread: "all" | "leakage and resistors") {
+/** The stage named and its company, for the highest while charging and holding, and for the most reverse after a hold. */
+const TIGHT: Sides = { capacitance: "low", leakageCurrent: "low", conductance: "low", resistance: "high" };
+const LOOSE: Sides = { capacitance: "high", leakageCurrent: "high", conductance: "high", resistance: "low" };
+const REVERSED: Sides = { capacitance: "low", leakageCurrent: "high", conductance: "high", resistance: "low" };
+const FORWARD: Sides = { capacitance: "high", leakageCurrent: "low", conductance: "low", resistance: "high" };
+const CONDUCTING: readonly (keyof Stage)[] = ["leakageCurrent", "conductance", "resistance"];
+
+/** The words alone; two stages stand for all, because all have the same ranges. */
+function wordsOf({ result, unit }: RestingBank, named: readonly (keyof Stage)[], victim: Sides, rest: Sides): string {
   const leak = leakOf(unit);
-  const { low, high } = (spread === "all" ? unit.tolerance : undefined) ?? { low: 0, high: 0 };
+  const { low, high } = unit.tolerance ?? { low: 0, high: 0 };
   const range = stageRange({
     units: 1,
     capacitance: unit.capacitance,
@@ -47,31 +55,29 @@ function pairOf({ result, unit }: RestingBank, spread: "all" | "leakage and resi
     resistance: result.balance?.resistance ?? null,
     q: result.balance?.tolerance ?? 0,
   });
-  return [range, range];
+  return cornerWords([range, range], 0, named, victim, rest);
 }
 
 /** The corners of one arrangement. */
 export function cornersOf(bank: RestingBank): BankCorners {
-  const { result, unit, brief } = bank;
-  const { series: n } = result;
-  if (n === 1) return NO_CORNERS;
+  if (bank.result.series === 1) return NO_CORNERS;
   return {
     ...fromCharge(bank),
     holding: holdingCorner(bank),
-    ...fromHold(bank, unit.tolerance !== undefined, brief.hold),
+    ...fromHold(bank),
   };
 }
 
 function fromCharge(bank: RestingBank): Pick<BankCorners, "charging" | "dumped"> {
   const { result, unit, brief } = bank;
   if (unit.tolerance === undefined) return { charging: null, dumped: null };
-  const { low, high } = unit.tolerance;
   const volts = fullVoltage(brief);
-  const worst = (volts * (1 + high)) / (1 + high + (result.series - 1) * (1 - low));
-  const pair = pairOf(bank, "all");
+  const worst = chargingWorst(volts, result.series, unit.tolerance);
+  // From equal sharing the same corner that stands highest while charging is reversed most by a dump.
+  const words = wordsOf(bank, ["capacitance"], TIGHT, LOOSE);
   return {
-    charging: { voltage: worst, words: chargingCorners(pair, volts).highest.words },
-    dumped: { voltage: volts / result.series - worst, words: dumpedCorners(pair, volts, "equalised").lowest.words },
+    charging: { voltage: worst, words },
+    dumped: { voltage: volts / result.series - worst, words },
   };
 }
 
@@ -81,22 +87,18 @@ function holdingCorner(bank: RestingBank): BankCorners["holding"] {
   if (given === null) return null;
   const worst = worstAtHold(given);
   // At the endless end capacitance has no part in the division: it is not named.
-  const words =
-    endless && worst.seconds > 0
-      ? holdingCorners(pairOf(bank, "leakage and resistors"), given.V).highest.words
-      : holdCornerWords(given, worst);
+  const words = endless && worst.seconds > 0 ? wordsOf(bank, CONDUCTING, TIGHT, LOOSE) : holdCornerWords(given, worst);
   return { voltage: worst.voltage, hold: worst.seconds, words };
 }
 
 /** Only an endless hold with something that conducts has an end that is known whatever came before. */
-function fromHold(bank: RestingBank, known: boolean, hold: number): Pick<BankCorners, "dumpedFromHold"> {
+function fromHold(bank: RestingBank): Pick<BankCorners, "dumpedFromHold"> {
   const given = holdCaseOf(bank);
-  if (given === null || !known || hold !== Number.POSITIVE_INFINITY || given.R === null)
-    return { dumpedFromHold: null };
+  if (given === null || given.hold !== Number.POSITIVE_INFINITY || given.R === null) return { dumpedFromHold: null };
   const lumps = reversedLumps(given);
   const chain = lumps.map(({ stage }) => stage);
   const end = endOfHold(chain, given.V);
   if (end === null) return { dumpedFromHold: null };
   const voltage = (end[0] as number) - given.V * (chargingShares(chain)[0] as number);
-  return { dumpedFromHold: { voltage, words: dumpedCorners(pairOf(bank, "all"), given.V, "held").lowest.words } };
+  return { dumpedFromHold: { voltage, words: wordsOf(bank, ["capacitance", ...CONDUCTING], REVERSED, FORWARD) } };
 }
