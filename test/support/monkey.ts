@@ -147,7 +147,8 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
     if (piece === null || key === null) return;
     const name = `${piece}\n${key}`;
     const known = pieces.get(name);
-    const details = known === undefined ? withPiece(state, piece, engine) : { ...detailsOf(state), key, [piece]: known };
+    const details =
+      known === undefined ? withPiece(state, piece, engine) : { ...detailsOf(state), key, [piece]: known };
     if (details === null) return;
     pieces.set(name, details[piece]);
     send({ type: "detailed", details });

@@ -14,7 +14,11 @@ describe("briefInput({ values, extra })", () => {
     });
     expect(extra).toEqual({ load: { lamp: { bore: 1 } }, bus: 2 });
   });
-  test.each([["load", "x"], ["load", [1]], ["load", null]])("%s of %j stays as it is, for the reader to refuse", (key, odd) => {
+  test.each([
+    ["load", "x"],
+    ["load", [1]],
+    ["load", null],
+  ])("%s of %j stays as it is, for the reader to refuse", (key, odd) => {
     expect(briefInput({ values: { "load.resistance": "1 ohm" }, extra: { [key]: odd } })).toEqual({ load: odd });
   });
 });

@@ -95,11 +95,7 @@ describe("the words", () => {
     ["brief, choices", { field: 3 }, ["Up/Down", "Left/Right", "Alt-1 to 7", "Esc", "F1", "Ctrl-Q"]],
     ["layouts", { screen: "layouts" }, ["Space", "Enter", "r", "f", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
     ["compare without pins", { screen: "compare" }, ["Esc", "F1", "Ctrl-Q"]],
-    [
-      "sharing",
-      { screen: "sharing", chosen: BANK },
-      ["c", "Space", "Up/Down", "Esc", "F1", "Ctrl-Q"],
-    ],
+    ["sharing", { screen: "sharing", chosen: BANK }, ["c", "Space", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
     ["shot", { screen: "shot", chosen: BANK }, ["l", "Space", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
     ["shot without a bank", { screen: "shot" }, ["l", "Esc", "F1", "Ctrl-Q"]],
     ["help", { help: true }, ["Esc", "Up/Down", "Ctrl-Q"]],

@@ -1,8 +1,8 @@
 // The screens whole, in process: real input bytes in, a real grid of cells out.
 import { afterEach, describe, expect, test } from "vitest";
 import { savedText } from "../../src/tui/saved.ts";
-import { SCREENS } from "../../src/tui/state.ts";
 import { openScreens } from "../../src/tui/screens.ts";
+import { SCREENS } from "../../src/tui/state.ts";
 import { BRIEF, type FakePorts, fakePorts, stateWith } from "../support/stock.ts";
 
 let ports: FakePorts;

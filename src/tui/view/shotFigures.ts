@@ -81,7 +81,11 @@ export function figureRows(report: ShotReport, columns: number): readonly Row[] 
     ...hangingRows("bank's own", `ESR ${known(bank.esr, "resistance")}, ESL ${known(bank.esl, "inductance")}`, columns),
     ...hangingRows(
       "bus",
-      path === null ? UNKNOWN : bus.note !== null ? "counted in the load" : `${shown(path.resistance, "resistance")}, ${shown(path.inductance, "inductance")}`,
+      path === null
+        ? UNKNOWN
+        : bus.note !== null
+          ? "counted in the load"
+          : `${shown(path.resistance, "resistance")}, ${shown(path.inductance, "inductance")}`,
       columns,
     ),
     ...hangingRows("damping", dampingWords(report), columns),

@@ -32,7 +32,10 @@ export function drawnSeconds({ at, duration, peakCurrent, peakTime, reversal }: 
 }
 
 /** Where the voltage is lowest: its depth is the shot's own reversal, its time is looked for finely, whatever the width. */
-function lowestOf({ at, reversal }: Discharge, { voltage, until }: { readonly voltage: number; readonly until: number }) {
+function lowestOf(
+  { at, reversal }: Discharge,
+  { voltage, until }: { readonly voltage: number; readonly until: number },
+) {
   let time = 0;
   for (let step = 1; step <= SOUGHT_AT; step += 1) {
     const next = (until * step) / SOUGHT_AT;

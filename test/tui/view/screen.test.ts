@@ -59,8 +59,22 @@ describe("drawScreen(state): never outside the terminal", () => {
     planned({ pins, chosen: pins[1] ?? null }),
     detailed({ chosen: pins[1] ?? null, spread: true }, ["sharing", "shot"]),
     detailed({ chosen: pins[1] ?? null, values: { ...BRIEF, ...LOAD } }, ["sharing", "shot"]),
-    detailed({ chosen: { part: "film-d", series: 3, parallel: 10, ties: "strings" }, spread: true, values: { ...BRIEF, ...LOAD } }, ["sharing", "shot"]),
-    detailed({ chosen: { part: "film-d", series: 1, parallel: 9, ties: "strings" }, spread: true, values: { ...BRIEF, ...LOAD } }, ["sharing", "shot"]),
+    detailed(
+      {
+        chosen: { part: "film-d", series: 3, parallel: 10, ties: "strings" },
+        spread: true,
+        values: { ...BRIEF, ...LOAD },
+      },
+      ["sharing", "shot"],
+    ),
+    detailed(
+      {
+        chosen: { part: "film-d", series: 1, parallel: 9, ties: "strings" },
+        spread: true,
+        values: { ...BRIEF, ...LOAD },
+      },
+      ["sharing", "shot"],
+    ),
     planned({ pins: oddPins, chosen: oddPins[0] ?? null, unfolded: true }, false, oddEngine),
     planned({ help: true }),
     planned({ chosen: pins[0] ?? null, prompt: { line: lineOf("x".repeat(200)), replace: false } }),
