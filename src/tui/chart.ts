@@ -44,10 +44,10 @@ const BLANK = "\u2800";
 /** Dots of a level, one in so many: a dotted line all across. */
 const LEVEL_STEP = 2;
 
-/** Place of a value among `cells`, the first at the low end; null outside. */
-function cellOf(value: number, { low, high }: PlotRange, cells: number): number | null {
+/** Cell of a value among `cells` of so many dots each, the first at the low end, where its dot falls too; null outside. */
+function cellOf(value: number, { low, high }: PlotRange, cells: number, dots: number): number | null {
   const share = high > low ? (value - low) / (high - low) : 0.5;
-  return share >= 0 && share <= 1 ? Math.min(cells - 1, Math.floor(share * cells)) : null;
+  return share >= 0 && share <= 1 ? Math.floor(Math.round(share * (cells * dots - 1)) / dots) : null;
 }
 
 /** Braille laid over braille; in ASCII the curve above hides what is beneath. */
@@ -59,8 +59,8 @@ function laidOver(under: string, over: string, glyph: string, ascii: boolean): s
 
 /** The row of a height: 0 is the top. */
 const rowAt = (y: number, { y: range, rows }: ChartOptions): number | null => {
-  const up = cellOf(y, range, rows);
-  return up === null ? null : rows - 1 - up;
+  const turned = { low: -range.high, high: -range.low };
+  return cellOf(-y, turned, rows, 4);
 };
 
 /** Cells of the plot without its axes, row by row. */
@@ -82,7 +82,7 @@ function plotCells(options: ChartOptions, columns: number): readonly (readonly s
   }
   for (const { points, joined, glyph } of [...curves].reverse()) lay(points, joined, glyph);
   for (const { at, letter } of marks) {
-    const column = cellOf(at.x, x, columns);
+    const column = cellOf(at.x, x, columns, 2);
     const row = rowAt(at.y, options);
     if (column !== null && row !== null) (cells[row] as string[])[column] = letter;
   }

@@ -41,7 +41,7 @@ export function sharingPage(state: State, room: Room): Page {
   const right = wide ? room.columns - left - RULE : room.columns;
   const size = { columns: right, rows: chartHeight(room) };
   const bars = barRows(layout, { rest, spread, state, columns: left });
-  const corners = rest ? cornerRows(layout, rest, left) : working(left);
+  const corners = rest ? cornerRows(layout, rest, left, brief.hold === Number.POSITIVE_INFINITY) : working(left);
   const mends = rest ? mendRows(layout, rest, left) : [];
   const course = [
     heading("Time course at the worst corner"),

@@ -52,7 +52,8 @@ export function causeRows(margin: Improve | null, { layout, currency, columns }:
       width: 9,
       side: "right",
       priority: 2,
-      cell: ({ share }) => span(share === null ? UNKNOWN : shown(share, "fraction")),
+      cell: ({ share, volts }) =>
+        span(share !== null ? shown(share, "fraction") : volts === null ? UNKNOWN : "no margin"),
     },
     { title: "", width: BAR, side: "left", priority: 4, cell: (one) => span(bar(one), "accent") },
     { title: "tried", width: 14, side: "left", priority: 3, cell: (one) => span(triedWords(one)) },

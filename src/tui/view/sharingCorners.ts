@@ -14,8 +14,10 @@ export function hangingRows(label: string, words: string, columns: number): read
   );
 }
 
-function whenWords(hold: number): string {
-  if (hold === 0) return "at its start";
+/** `held` is the worst end of an endless hold: where it starts highest it falls to that. */
+function whenWords(hold: number, held: number | null): string {
+  if (hold === 0)
+    return held === null ? "at its start" : `at its start, and at most ${shownWorst(held, "voltage")} later`;
   return hold === Number.POSITIVE_INFINITY ? "in the end" : `after ${shown(hold, "time")}`;
 }
 
@@ -25,7 +27,12 @@ export const unknownWords = ({ tolerance }: Pick<RestDetail, "tolerance">): stri
     ? "not assessed: the tolerance of the unit is unknown"
     : "not assessed: the leakage of the unit is unknown";
 
-export function cornerRows({ series }: LayoutResult, rest: RestDetail, columns: number): readonly Row[] {
+export function cornerRows(
+  { series, share }: LayoutResult,
+  rest: RestDetail,
+  columns: number,
+  endless: boolean,
+): readonly Row[] {
   if (series === 1)
     return hangingRows("corners", "one in series: its voltage is the bank's, nothing is shared", columns);
   const { charging, holding, dumped, dumpedFromHold } = rest.corners;
@@ -37,7 +44,7 @@ export function cornerRows({ series }: LayoutResult, rest: RestDetail, columns: 
   const worse = dumpedFromHold !== null && dumped !== null && dumpedFromHold.voltage < dumped.voltage;
   return [
     ...row("charging", charging, ""),
-    ...row("holding", holding, holding === null ? "" : whenWords(holding.hold)),
+    ...row("holding", holding, holding === null ? "" : whenWords(holding.hold, endless ? share.holding : null)),
     ...row("after a dump", dumped, "from equal sharing"),
     ...(worse ? row("", dumpedFromHold, "from an endless hold") : []),
   ];

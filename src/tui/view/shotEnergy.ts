@@ -41,8 +41,7 @@ export function energyRows({ discharge: { energy, bounds } }: ShotReport, column
     rowOf(span("["), span(bar, "accent"), span("]")),
     ...takers.map(({ key, letter, words, value }) => {
       const name = span(`  ${letter} ${fitText(words, 20)}`);
-      if (value === null)
-        return rowOf(name, span("unknown: its resistance is not known, and counted as none", "accent"));
+      if (value === null) return rowOf(name, span("unknown, and counted as none", "accent"));
       const bound = key === "load" && bounds.loadEnergy !== "value" ? ` (${bounds.loadEnergy})` : "";
       const part = portion(stored > 0 ? value / stored : 0);
       return rowOf(name, span(`${fitText(shown(value, "energy"), 9, "right")} ${fitText(part, 8, "right")}${bound}`));
