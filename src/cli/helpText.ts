@@ -31,6 +31,7 @@ Examples:
   $ joulewright plan --energy "2.4 kJ" --voltage "2.2 kV" --ripple "100 %" --catalog mine.csv theirs.csv
   $ joulewright plan brief.json --catalog mine.csv --rank volume --limit 5
   $ joulewright plan - --catalog mine.csv --json < brief.json
+  $ joulewright plan brief.json --catalog mine.csv --resistors resistors.csv --blend --explain --within "2 %"
   $ joulewright plan --brief-schema
 
 With a load, --max-peak-current, --max-reversal and the other limits on the shot are kept in the search: for each shape
