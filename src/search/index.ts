@@ -21,6 +21,7 @@ export { planCurrency, pricedIn } from "./currency.ts";
 export { faultBankOf, faultsOf } from "./faults.ts";
 export { type FuseChoice, fittedFuse, fuseCount } from "./fuses.ts";
 export { type ImproveInput, improve } from "./improve.ts";
+export { type InductanceSweep, inductanceSweep, type SweepPoint } from "./inductanceSweep.ts";
 export { idealLampCircuit } from "./lampDrive.ts";
 export { type LampReport, lampReport } from "./lampReport.ts";
 export type { LifeReport } from "./life.ts";
@@ -45,5 +46,6 @@ export { type BankCourse, bankCourse, type CourseInstant, type CoursePeak } from
 export { type BankClamp, clampOf } from "./sharing/clamp.ts";
 export { type BankCorners, type CornerFact, cornersOf } from "./sharing/corners.ts";
 export type { BalanceMends } from "./sharing/mends.ts";
+export { type ShareSpread, shareSpread } from "./sharing/shareSpread.ts";
 export type { WithoutBalance } from "./sharing/withoutBalance.ts";
 export { type ShotInput, type ShotReport, shotOf } from "./shot.ts";
