@@ -145,6 +145,23 @@ const REQUIRED: Readonly<Record<string, string>> = {
   ripple: 'the allowed fall such as "20 %", or "100 %" for a full dump',
 };
 
+interface SchemaNode {
+  readonly description?: string;
+  readonly type?: string | readonly string[];
+  readonly enum?: readonly string[];
+  readonly properties?: Readonly<Record<string, SchemaNode>>;
+}
+
+/** What the schema says of a key, for faults whose own words are the schema library's. */
+function wantedAt(path: readonly PropertyKey[]): string | null {
+  let node = briefJsonSchema() as SchemaNode | undefined;
+  for (const key of path) node = node?.properties?.[String(key)];
+  if (node?.description) return node.description;
+  if (node?.enum) return `one of ${node.enum.join(", ")}`;
+  if (node?.properties) return `an object with ${Object.keys(node.properties).join(", ")}`;
+  return typeof node?.type === "string" ? `a ${node.type === "string" ? "text" : node.type}` : null;
+}
+
 /** Reads a brief from parsed JSON or from flags. Every fault is told, with the key and what would be accepted. */
 export function readBrief(input: unknown, file?: string): Read<Brief> {
   if (typeof input !== "object" || input === null || Array.isArray(input)) {
@@ -190,7 +207,7 @@ export function readBrief(input: unknown, file?: string): Read<Brief> {
       });
     } else {
       const read = raw === undefined ? "nothing" : JSON.stringify(raw);
-      const want = REQUIRED[field] ?? issue.message;
+      const want = REQUIRED[field] ?? wantedAt(issue.path) ?? issue.message;
       faults.push({ code: raw === undefined ? "missing-value" : "bad-value", place, read, want });
     }
   }
