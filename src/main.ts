@@ -22,13 +22,22 @@ function portsOfProcess(): Ports {
     columns: textWidth(process.stdout.columns, process.env.COLUMNS),
     files: filesOn(),
     catalogs: fileURLToPath(new URL("../catalogs/", import.meta.url)),
+    background: {
+      entry: new URL("./worker.js", import.meta.url),
+      terminal: process.stderr.isTTY === true,
+      onInterrupt: (stop) => {
+        process.once("SIGINT", stop);
+        return () => void process.removeListener("SIGINT", stop);
+      },
+    },
   };
 }
 
 /** What the screens begin with: the catalogues and brief asked for, else the demo's. */
 async function screenInput(flags: ScreenFlags, ports: Ports) {
   const { demoStock } = await import("./cli/demo.ts");
-  if (flags.catalog.length === 0) return demoStock(ports);
+  // Resistors without capacitors are refused, not passed over.
+  if (flags.catalog.length === 0 && flags.resistors === null) return demoStock(ports);
   const { readStock } = await import("./cli/stock.ts");
   const stock = readStock({ catalog: flags.catalog, resistors: flags.resistors ?? undefined }, ports.files);
   return stock.ok ? { ok: true as const, value: { ...stock.value, brief: {} as unknown } } : stock;
@@ -92,9 +101,14 @@ process.stdout.on("error", (error: NodeJS.ErrnoException) => {
 // With the error stream gone too there is nobody left to tell.
 process.stderr.on("error", () => {});
 
+/** What the screens end with when the terminal is gone. */
+const HANG_UP = 129;
+
 const argv = process.argv.slice(2);
 try {
   process.exitCode = await main(argv);
+  // The terminal is gone: node would stumble over it on its way out, so the signal's own end is taken.
+  if (process.exitCode === HANG_UP) process.kill(process.pid, "SIGHUP");
 } catch (error) {
   process.stderr.write(bugText(error, argv, VERSION));
   process.exitCode = EXIT.bug;

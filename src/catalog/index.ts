@@ -23,3 +23,4 @@ export {
 } from "./resistor.ts";
 export { capacitorSchema, readCapacitorData } from "./schema.ts";
 export { assumedLeakage, RULES, stateOf } from "./states.ts";
+export { readWaveform, type WaveformRow } from "./waveform.ts";

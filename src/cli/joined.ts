@@ -1,7 +1,8 @@
-// What other layers say of a checked layout beside its findings: the fault table.
+// What other layers say of a checked layout beside its findings: faults, corners, time course, clamp diodes, what to improve.
 
 import type { Capacitor } from "../catalog/index.ts";
-import { type Brief, faultsOf, type LayoutResult } from "../search/index.ts";
+import { type Brief, bankCourse, clampOf, cornersOf, faultsOf, improve, type LayoutResult } from "../search/index.ts";
+import type { Checked } from "./checked.ts";
 
 export interface BankFacts {
   readonly layout: LayoutResult;
@@ -13,3 +14,15 @@ export interface BankFacts {
 export const joinedFacts = ({ layout, unit, brief }: BankFacts): { readonly faults: ReturnType<typeof faultsOf> } => ({
   faults: faultsOf({ result: layout, unit, brief }),
 });
+
+/** What `check` adds about the states at rest; null is not assessed, or not needed (clamp). */
+export function restFacts({ result, unit, settings, stock, currency }: Checked) {
+  const { brief } = settings;
+  const bank = { result, unit, brief };
+  return {
+    corners: cornersOf(bank),
+    course: bankCourse(bank),
+    clamp: clampOf({ ...bank, share: result.share }),
+    improve: improve({ ...bank, families: stock.families, currency }),
+  };
+}

@@ -2,11 +2,12 @@
 
 import { Command, CommanderError, Option } from "commander";
 import { visibleLines } from "../order/index.ts";
-import { BRIEF_FLAGS } from "./briefFlags.ts";
-import type { BankFlags } from "./checked.ts";
+import { BRIEF_FLAGS, FLAG_GROUPS } from "./briefFlags.ts";
+import type { CheckFlags } from "./commands/check.ts";
 import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
+import type { PulseFlags } from "./commands/pulse.ts";
 import type { CommissionFlags } from "./commissionFlags.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
@@ -18,7 +19,10 @@ type Done = (status: number) => void;
 
 function withBrief(command: Command): Command {
   command.argument("[brief]", "brief file, JSON; - is standard input");
-  for (const { flag, argument, help } of BRIEF_FLAGS) command.addOption(new Option(`${flag} ${argument}`, help));
+  for (const { flag, argument, help, group } of BRIEF_FLAGS) {
+    const option = new Option(`${flag} ${argument}`.trim(), help);
+    command.addOption(group === undefined ? option : option.helpGroup(FLAG_GROUPS[group]));
+  }
   return command
     .option("--catalog <file...>", "capacitor catalogues, CSV; may be repeated; - is standard input")
     .option("--resistors <file>", "resistor catalogue, CSV; without it an assumed family is used")
@@ -64,13 +68,28 @@ function build(ports: Ports, done: Done): Command {
     });
   withLayout(program.command("check"))
     .description("Check one layout in every state at rest.")
+    .option("--measured <file>", "measured units, CSV: the statistical basis draws from them")
+    .option("--witness <banks>", "draw so many banks beside the statistical chance, 1e6")
+    .option("--seed <number>", "seed of the drawing (default: 1)")
+    .option("--workers <count>", "threads that draw; the result is the same at any number")
     .addHelpText("after", HELP.check)
-    .action(async (brief: string | undefined, flags: BankFlags) => {
-      const { checkCommand } = await import("./commands/check.ts");
-      done(checkCommand(brief, flags, ports));
+    .action(async (brief: string | undefined, flags: CheckFlags) => {
+      const { checkWitnessed } = await import("./commands/check.ts");
+      done(await checkWitnessed(brief, flags, ports));
+    });
+  withLayout(program.command("pulse"))
+    .description("Fire one layout: current, reversal, energies, heat, life, and what a fault does.")
+    .option("--fuses <file>", "fuse catalogue, CSV: the cheapest that lives through the shot and clears the fault")
+    .option("--waveform <file>", "write time, current and voltage as CSV")
+    .option("--force", "replace the file if it exists")
+    .addHelpText("after", HELP.pulse)
+    .action(async (brief: string | undefined, flags: PulseFlags) => {
+      const { pulseCommand } = await import("./commands/pulse.ts");
+      done(pulseCommand(brief, flags, ports));
     });
   withLayout(program.command("order"))
     .description("Write the bill of materials of one layout.")
+    .option("--fuses <file>", "fuse catalogue, CSV: adds a fuse for each unit to the bill")
     .option("--format <format>", "csv, json, md or html; else by the ending of --output, else csv")
     .option("--output <file>", "write to a file, whole or not at all")
     .option("--force", "replace the file if it exists")
@@ -136,6 +155,13 @@ function build(ports: Ports, done: Done): Command {
   return program;
 }
 
+/** Help asked of a command that there is none of is the slip to tell; commander would show the general help instead. */
+function slipOf(program: Command, argv: readonly string[]): readonly string[] {
+  const name = argv[0] === "help" ? argv[1] : argv[0];
+  const known = name === undefined || name.startsWith("-") || name === "help";
+  return known || program.commands.some((command) => command.name() === name) ? argv : [name];
+}
+
 /** Runs one command line without the program's name; the exit status. Throws only for a bug of ours. */
 export async function run(argv: readonly string[], ports: Ports): Promise<number> {
   let status: number = EXIT.done;
@@ -143,7 +169,7 @@ export async function run(argv: readonly string[], ports: Ports): Promise<number
     status = found;
   });
   try {
-    await program.parseAsync([...argv], { from: "user" });
+    await program.parseAsync([...slipOf(program, argv)], { from: "user" });
     return status;
   } catch (error) {
     if (!(error instanceof CommanderError)) throw error;

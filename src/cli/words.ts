@@ -63,12 +63,15 @@ export const WORDS: Readonly<Record<string, string>> = {
   "pulse.bus": "the bus cannot be reckoned with",
   "pulse.charge": "the charger cannot be reckoned with",
   "pulse.circuit": "the circuit cannot be reckoned with",
+  "pulse.drop": "the switch drop leaves nothing for the load",
+  "pulse.steady": "the bank cannot hold this current for so long",
   "pulse.lamp": "the lamp cannot be reckoned with",
   "pulse.lampDrive": "the lamp circuit cannot be sized",
   "pulse.loop": "the loop cannot be reckoned with",
   "pulse.samples": "the waveform cannot be read",
   "read-only": "the place is read-only; nothing was written",
   "tolerance-range": "the tolerance is out of range",
+  "small-lot": "there are too few measured units",
   "too-deep": "the nesting is too deep",
   "too-large": "the file is too large",
   "too-long": "the text is too long",
@@ -92,9 +95,15 @@ export function placeWords({ file, line, column, field }: Place): string {
   return visible([spot, field ?? ""].filter((part) => part !== "").join(" "));
 }
 
+/** Longest piece of input that is repeated, characters: enough to find it again. */
+const LONGEST_READ = 200;
+
+const clipped = (text: string): string =>
+  text.length <= LONGEST_READ ? text : `${text.slice(0, LONGEST_READ)}... (${text.length} characters)`;
+
 /** One sentence, safe to print. */
 export function refusalWords({ code, place, read, want }: Refusal): string {
   const where = placeWords(place);
-  const what = `${wordsOf(code)}: read ${visible(read)}; accepted: ${visible(want)}`;
+  const what = `${wordsOf(code)}: read ${visible(clipped(read))}; accepted: ${visible(want)}`;
   return where === "" ? what : `${where}: ${what}`;
 }

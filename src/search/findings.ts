@@ -9,7 +9,11 @@ import { type Finding, formatQuantity, type Verdict } from "../quantity/index.ts
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
 import { faultBankOf } from "./faults.ts";
+import { limitFindings } from "./limits.ts";
 import type { LayoutResult } from "./result.ts";
+import { type BankCorners, cornersOf } from "./sharing/corners.ts";
+import type { BalanceMends } from "./sharing/mends.ts";
+import { mendWords, widestTolerance } from "./sharing/mendWords.ts";
 
 export interface FindingsInput {
   readonly result: Omit<LayoutResult, "findings">;
@@ -17,6 +21,13 @@ export interface FindingsInput {
   readonly brief: Brief;
   readonly candidate: Candidate;
   readonly family: ResistorFamily | null;
+  /** What would mend a resistor that the rule could not choose; null when there is nothing to mend. */
+  readonly mends?: BalanceMends | null;
+}
+
+/** The input with the corner behind each worst case, worked out once. */
+interface Cornered extends FindingsInput {
+  readonly corners: BankCorners;
 }
 
 type Draft = Omit<Finding, "verdict" | "margin"> & { readonly exceeded?: Verdict };
@@ -45,11 +56,13 @@ export function atLeast(draft: Draft): Finding {
   };
 }
 
-export function findingsOf(input: FindingsInput): readonly Finding[] {
+export function findingsOf(given: FindingsInput): readonly Finding[] {
+  const input: Cornered = { ...given, corners: cornersOf(given) };
   return [
     chargingShare(input),
     ...chargingRisk(input),
     holdingShare(input),
+    ...holdingCourse(input),
     ...balanceLoad(input),
     reverse(input),
     energy(input),
@@ -57,21 +70,32 @@ export function findingsOf(input: FindingsInput): readonly Finding[] {
     bleed(input),
     ...hazards(input),
     ...oneShorted(input),
+    ...limits(input),
   ];
+}
+
+/** The brief's own limits on shot, fault and life. */
+function limits({ result, unit, brief, candidate }: FindingsInput): readonly Finding[] {
+  const known = result.stress !== null && (result.series === 1 || candidate.leak !== null);
+  const worst = known && result.stress !== null ? result.stress * unit.voltage : Number.POSITIVE_INFINITY;
+  return limitFindings(brief, { unit, worst, ...result });
 }
 
 /** With the statistical basis: the chance against the brief's risk, its error counted against it. */
 function chargingRisk({ result, brief }: FindingsInput): readonly Finding[] {
   if (result.risk === undefined) return [];
   const value = result.risk === null ? null : Math.min(1, result.risk.exceed + result.risk.error);
-  const spread = brief.distribution === "normal" ? "normal, cut at three sigma" : "uniform over its tolerance";
+  const spread = result.risk?.law ?? "of unknown spread";
   const note = `Chance that any unit of the bank exceeds its limit while charging: units independent, each ${spread}; what a whole lot has in common cancels.`;
   const draft = { id: "charging-risk", state: "charging", value, limit: brief.risk, unit: "1" } as const;
   return [atMost({ ...draft, source: "methods-derived", note })];
 }
 
-function chargingShare({ result, brief }: FindingsInput): Finding {
+function chargingShare({ result, brief, corners }: Cornered): Finding {
   const unknown = result.share.charging === null;
+  const widest = unknown
+    ? widestTolerance(brief.voltage * (1 + brief.overshoot), result.series, result.share.limit)
+    : null;
   return atMost({
     id: "charging-share",
     state: "charging",
@@ -82,25 +106,25 @@ function chargingShare({ result, brief }: FindingsInput): Finding {
     // The builder chose to bear a stated risk instead: the worst case is told, not refused.
     exceeded: brief.basis === "statistical" ? "warn" : "fail",
     note: unknown
-      ? "The tolerance is unknown, so how the voltage divides while charging is not known: measure the units or find the datasheet."
+      ? `The tolerance is unknown, so how the voltage divides while charging is not known: measure the units or find the datasheet.${widest === null ? "" : ` Up to +-${formatQuantity(widest, "fraction", { digits: 3, rounding: "down" })} this number in series would pass.`}`
       : result.series === 1
         ? "One unit carries the whole voltage."
-        : "Worst unit while charging: one at its lowest capacitance, the rest at their highest.",
+        : `Worst unit while charging: ${corners.charging?.words ?? "one at its lowest capacitance, the rest at their highest"}.`,
   });
 }
 
-function holdingShare({ result, candidate, unit, brief }: FindingsInput): Finding {
+function holdingShare({ result, candidate, unit, brief, corners, mends }: Cornered): Finding {
   const leak = stateOf(unit, "leakage");
-  let note =
-    "Worst unit at the end of the hold: one that does not leak with its resistor high, the rest leaking with theirs low.";
+  let note = `Worst unit at the end of the hold: ${corners.holding?.words ?? "one that does not leak with its resistor high, the rest leaking with theirs low"}.`;
   if (candidate.leak === null && result.series > 1) {
     note =
-      "Leakage and insulation are unknown, so no balancing resistor can be sized: measure the leakage at the working voltage.";
+      "Leakage and insulation are unknown, so no balancing resistor can be sized: measure the leakage of each unit at the working voltage.";
   } else if (result.balance === null && result.series > 1) {
     note =
       brief.hold === Number.POSITIVE_INFINITY
         ? "Without a balancing resistor leakage decides how the voltage divides."
         : "No balancing resistor is fitted.";
+    if (mends) note += ` ${mendWords(mends, result.series)}`;
   } else if (leak.state === "assumed") {
     note += ` Leakage assumed: ${leak.rule}.`;
   }
@@ -113,6 +137,21 @@ function holdingShare({ result, candidate, unit, brief }: FindingsInput): Findin
     source: "joulewright-design",
     note,
   });
+}
+
+/**
+ * With a finite hold: the highest voltage of any unit at any moment of it. A company of unlike stages may stand a little
+ * higher on the way than the ends of the closed form tell; told apart only when it does.
+ */
+function holdingCourse({ result, brief, corners }: Cornered): readonly Finding[] {
+  const { charging, holding, limit } = result.share;
+  const worst = corners.holding;
+  if (brief.hold === Number.POSITIVE_INFINITY || worst === null || charging === null || holding === null) return [];
+  if (worst.voltage <= Math.max(charging, holding) * (1 + FIT)) return [];
+  const at = formatQuantity(worst.hold, "time", { digits: 3 });
+  const note = `Worst unit at any moment of the hold, ${at} into it: ${worst.words}.`;
+  const draft = { id: "holding-course", state: "holding", value: worst.voltage, limit, unit: "V" } as const;
+  return [atMost({ ...draft, source: "methods-derived", note })];
 }
 
 function balanceLoad({ result, family }: FindingsInput): readonly Finding[] {
@@ -141,7 +180,7 @@ function balanceLoad({ result, family }: FindingsInput): readonly Finding[] {
   ];
 }
 
-function reverse({ result, unit }: FindingsInput): Finding {
+function reverse({ result, unit, corners }: Cornered): Finding {
   const { leftAfterDump } = result.share;
   const polarity = unit.polarised;
   const base = {
@@ -160,13 +199,18 @@ function reverse({ result, unit }: FindingsInput): Finding {
     });
   }
   const limit = unit.reverseVoltage ?? null;
+  const held = corners.dumpedFromHold;
+  const fromHold =
+    held !== null && leftAfterDump !== null && -held.voltage > leftAfterDump
+      ? ` After an endless hold with unequal leakage it may be ${formatQuantity(-held.voltage, "voltage", { rounding: "up" })}: ${held.words}.`
+      : "";
   const clamp =
     "Fit a clamp diode across each stage, and measure each stage after a dump: the ends read zero while units are charged.";
   return atMost({
     ...base,
     limit: polarity === undefined ? null : limit,
     exceeded: "warn",
-    note: `${limit === null ? "The reverse rating is unknown. " : ""}After a hold and a dump the low stage is left reversed by this much. ${clamp}`,
+    note: `${limit === null ? "The reverse rating is unknown. " : ""}After a hold and a dump the low stage is left reversed by this much: ${corners.dumped?.words ?? "corner unknown"}.${fromHold} ${clamp}`,
   });
 }
 

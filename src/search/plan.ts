@@ -1,16 +1,21 @@
 // The front door: brief and parts to ranked layouts, their front, every refusal, and what would have to give way.
 
-import { requiredCapacitance } from "../bank/index.ts";
+import { leastParallel, requiredCapacitance } from "../bank/index.ts";
 import { type Capacitor, DEFAULT_FAMILY, type ResistorFamily } from "../catalog/index.ts";
 import { accepted, type Read } from "../quantity/index.ts";
 import { assess } from "./assess.ts";
 import type { Brief } from "./brief.ts";
+import { prepare } from "./candidate.ts";
 import { leastChanges } from "./changes.ts";
 import { planCurrency, pricedIn } from "./currency.ts";
 import { frontRows } from "./front.ts";
+import { improve } from "./improve.ts";
+import { limitChanges } from "./limitChanges.ts";
+import { hasLimits } from "./limits.ts";
 import { comparison, firstRows, idOf, type Ranking, tiesOf } from "./rank.ts";
-import type { LayoutResult, PlanResult } from "./result.ts";
-import { type SweepInput, sweep } from "./sweep.ts";
+import type { LayoutResult, PlanResult, RefusedPart } from "./result.ts";
+import { balanceMends } from "./sharing/mends.ts";
+import { leastSeries, type SweepInput, sweep } from "./sweep.ts";
 import type { LayoutTable } from "./table.ts";
 
 export interface PlanInput {
@@ -46,9 +51,10 @@ export function plan(input: PlanInput): Read<PlanResult> {
     currency,
     layouts,
     front: frontRows(table).map((row) => idOf(table, parts, row)),
-    refused: refusals,
-    changes: table.count === 0 && !quick ? leastChanges(work) : [],
+    refused: quick ? refusals : withMends(work, refusals),
+    changes: table.count > 0 || quick ? [] : hasLimits(brief) ? limitChanges(work) : leastChanges(work),
     ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
+    ...(quick ? {} : { improve: improveBest(work, layouts[0]) }),
     notes: notesOf(brief),
   });
 }
@@ -60,6 +66,29 @@ function distinct(parts: readonly Capacitor[]): readonly Capacitor[] {
   if (seen.size === parts.length) return parts;
   seen.clear();
   return parts.filter((unit) => !seen.has(unit.part) && seen.add(unit.part));
+}
+
+/** Refused parts for which mends are worked out; each takes some hundred tries. */
+const MENDED = 40;
+
+/** For the first parts that no balancing resistor keeps safe: what would. */
+function withMends(work: SweepInput, refusals: readonly RefusedPart[]): readonly RefusedPart[] {
+  const { brief, families, required } = work;
+  const voltage = brief.voltage * (1 + brief.overshoot);
+  let left = MENDED;
+  return refusals.map((one) => {
+    const unit = one.reason === "balance" && left-- > 0 ? work.parts.find(({ part }) => part === one.part) : undefined;
+    if (unit === undefined) return one;
+    const { limit, tolerance, basis } = prepare(unit, brief);
+    const series = Math.max(2, leastSeries(voltage, limit, tolerance));
+    const shape = { series, parallel: leastParallel(required, series, basis), ties: "strings" } as const;
+    return { ...one, mends: balanceMends({ unit, brief, families, shape }) };
+  });
+}
+
+function improveBest({ parts, brief, families, currency }: SweepInput, best: LayoutResult | undefined) {
+  const unit = best && parts.find(({ part }) => part === best.part);
+  return best && unit ? improve({ result: best, unit, brief, families, currency }) : null;
 }
 
 /** What the same brief takes when every unit may be at its worst: the price of certainty. */

@@ -1,46 +1,22 @@
 // Tries every part, every series count and both ties, and keeps what does the job: exhaustive, one pass, no layout object made.
 
 import { chargingWorst, FIT, leastParallel } from "../bank/index.ts";
-import { type Capacitor, cheapest, type ResistorFamily, toBuy } from "../catalog/index.ts";
+import { type Capacitor, cheapest, toBuy } from "../catalog/index.ts";
 import { minorDigits } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing } from "./balancing.ts";
-import type { Brief } from "./brief.ts";
 import { prepare } from "./candidate.ts";
+import { sweepLimited } from "./limitedSweep.ts";
+import { hasLimits } from "./limits.ts";
 import type { RefusedPart } from "./result.ts";
-import { type RiskCase, riskJudge } from "./risk.ts";
+import { riskJudge } from "./risk.ts";
+import { type Judge, leastSeries, type Reason, type SweepInput } from "./sweepKinds.ts";
 import { type LayoutTable, newTable, pushRow } from "./table.ts";
 
-export interface SweepInput {
-  readonly parts: readonly Capacitor[];
-  readonly families: readonly ResistorFamily[];
-  readonly brief: Brief;
-  readonly required: number;
-  readonly currency: string | null;
-}
+export { leastSeries, type SweepInput } from "./sweepKinds.ts";
 
 export interface Sweep {
   readonly table: LayoutTable;
   readonly refused: readonly RefusedPart[];
-}
-
-/** Why a part gives no layout: the first limit met, or for ceilings the least value seen. */
-interface Reason {
-  reason: string;
-  value: number | null;
-  limit: number | null;
-}
-
-/** Least n whose worst charging share is within the limit (1e-9 relative). Unknown tolerance: by the even share. */
-export function leastSeries(voltage: number, limit: number, tolerance: { low: number; high: number } | null): number {
-  const { low, high } = tolerance ?? { low: 0, high: 0 };
-  const bound = limit * (1 + FIT);
-  if (voltage <= bound) return 1;
-  const guess = Math.max(2, Math.floor(1 + ((voltage / bound - 1) * (1 + high)) / (1 - low)));
-  // The guess is the closed form rounded down: one or two steps find the least. An absurd count is returned as it is, above any limit.
-  if (guess > 1e9) return guess;
-  let n = guess;
-  while (chargingWorst(voltage, n, { low, high }) > bound) n++;
-  return n;
 }
 
 const balancing = newBalancing();
@@ -51,16 +27,14 @@ export function sweep(input: SweepInput, stopAtFirst = false): Sweep {
   const table = newTable(Math.max(256, Math.min(input.parts.length * 32, 1 << 22)));
   const refused: RefusedPart[] = [];
   const judge = input.brief.basis === "statistical" ? riskJudge(input.brief) : null;
+  const limited = hasLimits(input.brief) ? sweepLimited(input, table, judge) : null;
   for (let i = 0; i < input.parts.length; i++) {
-    const reason = sweepPart(input, i, table, judge);
+    const reason = limited === null ? sweepPart(input, i, table, judge) : limited(i);
     if (reason !== null) refused.push({ part: (input.parts[i] as Capacitor).part, ...reason });
     if (stopAtFirst && table.count > 0) break;
   }
   return { table, refused };
 }
-
-/** Whether a shape shares safely while charging although its worst case does not; null when only the worst case counts. */
-type Judge = ((given: RiskCase) => boolean) | null;
 
 function sweepPart(input: SweepInput, index: number, table: LayoutTable, judge: Judge): Reason | null {
   const { brief, families, required, currency } = input;

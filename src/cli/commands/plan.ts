@@ -5,6 +5,7 @@ import { briefJsonSchema, plan, RANKINGS, type Ranking } from "../../search/inde
 import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
+import { lampFits } from "../lampFits.ts";
 import { planText } from "../planText.ts";
 import type { Ports } from "../ports.ts";
 import { type Flags, settle } from "../settings.ts";
@@ -49,7 +50,8 @@ export function planCommand(brief: string | undefined, flags: PlanFlags, ports: 
   if (flags.json) {
     const bank = best && unit ? { layout: best, unit } : undefined;
     const cautions = cautionsOf(result.brief, bank);
-    ports.out(toJson({ ...result, cautions, inputs: inputsJson(settings.value, stock.value) }));
+    const lamps = lampFits(result, parts);
+    ports.out(toJson({ ...result, ...lamps, cautions, inputs: inputsJson(settings.value, stock.value) }));
   } else {
     const inputs = inputSentences(stock.value);
     ports.out(planText({ result, parts, given: settings.value.given, rank, width: ports.columns, inputs }));
