@@ -60,6 +60,9 @@ function build(ports: Ports, done: Done): Command {
     .description("Find every layout that does the job, ranked.")
     .option("--limit <count>", "how many layouts are printed; 0 for all", "20")
     .option("--rank <by>", "cost, units, volume, mass or stress", "cost")
+    .option("--measured <file>", "measured units, CSV, for the basis measured: they decide how many in series")
+    .option("--part <name>", "the part that was measured")
+    .option("--uncertainty <fraction>", "of one measured capacitance against another")
     .option("--brief-schema", "print the JSON Schema of the brief and stop")
     .addHelpText("after", HELP.plan)
     .action(async (brief: string | undefined, flags: PlanFlags) => {

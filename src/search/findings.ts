@@ -104,7 +104,7 @@ function chargingShare({ result, brief, corners }: Cornered): Finding {
     unit: "V",
     source: "joulewright-design",
     // The builder chose to bear a stated risk instead: the worst case is told, not refused.
-    exceeded: brief.basis === "statistical" ? "warn" : "fail",
+    exceeded: brief.basis === "statistical" || brief.basis === "measured" ? "warn" : "fail",
     note: unknown
       ? `The tolerance is unknown, so how the voltage divides while charging is not known: measure the units or find the datasheet.${widest === null ? "" : ` Up to +-${formatQuantity(widest, "fraction", { digits: 3, rounding: "down" })} this number in series would pass.`}`
       : result.series === 1
@@ -215,7 +215,9 @@ function reverse({ result, unit, corners }: Cornered): Finding {
 }
 
 function energy({ result, brief }: FindingsInput): Finding {
-  const value = brief.basis === "nominal" ? result.energy.nominal : result.energy.low;
+  // The part of the measured basis is the lot itself, whose mean a placing meets; the placing's own energy is told beside.
+  const middle = brief.basis === "nominal" || brief.basis === "measured";
+  const value = middle ? result.energy.nominal : result.energy.low;
   return atLeast({
     id: "pulse-energy",
     state: "pulse",

@@ -33,3 +33,4 @@ export { type BankCorners, type CornerFact, cornersOf } from "./sharing/corners.
 export type { BalanceMends } from "./sharing/mends.ts";
 export type { WithoutBalance } from "./sharing/withoutBalance.ts";
 export { type ShotInput, type ShotReport, shotOf } from "./shot.ts";
+export type { Judge } from "./sweepKinds.ts";

@@ -1,17 +1,19 @@
 // `plan`: brief and catalogues to ranked layouts.
 
-import { nearestWord, type Refusal } from "../../quantity/index.ts";
+import { accepted, nearestWord, type Refusal } from "../../quantity/index.ts";
 import { briefJsonSchema, plan, RANKINGS, type Ranking } from "../../search/index.ts";
 import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { lampFits } from "../lampFits.ts";
+import { measuredJson, planMeasured, savedText } from "../measuredPlan.ts";
 import { planText } from "../planText.ts";
 import type { Ports } from "../ports.ts";
 import { type Flags, settle } from "../settings.ts";
 import { readStock } from "../stock.ts";
 import { tell } from "../tell.ts";
 import { toJson } from "../toJson.ts";
+import { refusalWords } from "../words.ts";
 
 export interface PlanFlags extends Flags {
   readonly catalog?: readonly string[];
@@ -20,6 +22,9 @@ export interface PlanFlags extends Flags {
   readonly rank?: string;
   readonly json?: boolean;
   readonly briefSchema?: boolean;
+  readonly measured?: string;
+  readonly uncertainty?: string;
+  readonly part?: string;
 }
 
 export function planCommand(brief: string | undefined, flags: PlanFlags, ports: Ports): number {
@@ -40,20 +45,28 @@ export function planCommand(brief: string | undefined, flags: PlanFlags, ports: 
   if (!settings.ok || !stock.ok || typeof limit !== "number" || typeof rank !== "string")
     return tell(ports, faults, flags.json);
   const { parts, families } = stock.value;
-  const planned = plan({ brief: settings.value.brief, parts, families, limit, rank });
+  const lot =
+    settings.value.brief.basis === "measured" || flags.measured !== undefined
+      ? planMeasured(flags, { settings: settings.value, stock: stock.value, limit, rank }, ports)
+      : null;
+  if (lot !== null && !lot.ok) return tell(ports, lot.refusals, flags.json);
+  const planned =
+    lot === null ? plan({ brief: settings.value.brief, parts, families, limit, rank }) : accepted(lot.value.result);
   if (!planned.ok) return tell(ports, planned.refusals, flags.json);
   const result = planned.value;
   const best = result.layouts[0];
   const unit = best && parts.find((part) => part.part === best.part);
-  const lines = faultLines(stock.value);
+  const lines = [...faultLines(stock.value), ...(lot === null ? [] : lot.value.faults.map(refusalWords))];
   if (lines.length > 0) ports.err(`${lines.join("\n")}\n`);
   if (flags.json) {
     const bank = best && unit ? { layout: best, unit } : undefined;
     const cautions = cautionsOf(result.brief, bank);
     const lamps = lampFits(result, parts);
-    ports.out(toJson({ ...result, ...lamps, cautions, inputs: inputsJson(settings.value, stock.value) }));
+    const measured = lot === null ? {} : { measured: measuredJson(lot.value) };
+    ports.out(toJson({ ...result, ...measured, ...lamps, cautions, inputs: inputsJson(settings.value, stock.value) }));
   } else {
-    const inputs = inputSentences(stock.value);
+    const saved = lot === null ? [] : [savedText(lot.value)];
+    const inputs = [...inputSentences(stock.value), ...saved];
     ports.out(planText({ result, parts, given: settings.value.given, rank, width: ports.columns, inputs }));
   }
   return result.layouts.length > 0 ? EXIT.done : EXIT.unsafe;
