@@ -27,7 +27,8 @@ async function printed(line: string): Promise<string> {
     files: filesOn(),
     catalogs: resolve(import.meta.dirname, "../catalogs"),
   });
-  return text;
+  // CSV has its own line ends; the page has one kind.
+  return text.replaceAll("\r\n", "\n");
 }
 
 const page = readFileSync(PAGE, "utf8");

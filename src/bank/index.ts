@@ -26,7 +26,7 @@ export {
   requiredCapacitance,
   storedEnergy,
 } from "./energy.ts";
-export { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
+export { type FiniteHold, holdHighest, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
 export { type Layout, layoutId, plainTies, shapeOf, type Ties, unitCount } from "./layout.ts";
 export { type Cause, type CauseShare, type MarginCase, type Margins, marginCauses } from "./margins.ts";
 export { CHUNK, type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";

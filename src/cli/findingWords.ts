@@ -12,7 +12,6 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "charging-share": { title: "worst unit while charging" },
   "charging-risk": { title: "chance of one over its limit" },
   "holding-share": { title: "worst unit while holding" },
-  "holding-course": { title: "worst unit during the hold" },
   "balance-power": { title: "power in a balancing element" },
   "balance-voltage": { title: "voltage on a balancing element" },
   "reverse-after-dump": { title: "reverse voltage left by a dump" },

@@ -31,6 +31,7 @@ Examples:
   $ joulewright plan --energy "2.4 kJ" --voltage "2.2 kV" --ripple "100 %" --catalog mine.csv theirs.csv
   $ joulewright plan brief.json --catalog mine.csv --rank volume --limit 5
   $ joulewright plan - --catalog mine.csv --json < brief.json
+  $ joulewright plan brief.json --catalog mine.csv --resistors resistors.csv --blend --explain --within "2 %"
   $ joulewright plan --brief-schema
 
 With a load, --max-peak-current, --max-reversal and the other limits on the shot are kept in the search: for each shape
@@ -55,7 +56,7 @@ Examples:
 The load is one of: a resistance, with or without an inductance; a lamp; a short; a steady current for a time; a
 recorded current. The loop is load, bus, switch and the bank's own ESR and ESL (n/p of a unit's). What is unknown is
 left out and every figure it bears on is called a bound. Without a bus, a load with both resistance and inductance
-(0 counts) stands for everything outside the bank. Voltage and, unless asked, no energy is needed here.
+(0 counts) stands for everything outside the bank. No energy and no fall need be asked here.
 A lamp with --lamp-width and --energy sets voltage and coil where they are not given; pulse then says how far the bank
 that can be built lands from that circuit. The lamp's datasheet comes first.
 ${LAYOUT}${BRIEF}${STATUS}`,

@@ -2,6 +2,7 @@
 
 import { Command, CommanderError, Option } from "commander";
 import { visibleLines } from "../order/index.ts";
+import { type BlendFlags, wantsBlend } from "./blendFlags.ts";
 import { BRIEF_FLAGS, FLAG_GROUPS } from "./briefFlags.ts";
 import type { CheckFlags } from "./commands/check.ts";
 import type { OrderFlags } from "./commands/order.ts";
@@ -65,7 +66,17 @@ function build(ports: Ports, done: Done): Command {
     .option("--uncertainty <fraction>", "of one measured capacitance against another")
     .option("--brief-schema", "print the JSON Schema of the brief and stop")
     .addHelpText("after", HELP.plan)
-    .action(async (brief: string | undefined, flags: PlanFlags) => {
+    .option("--blend", "also find the cheapest mix of whole strings of different parts, with its proof")
+    .option("--explain", "with --blend: the proof in words, and what prices and limits are worth")
+    .option("--max-types <count>", "with --blend: most parts in one bank; 4 unless told")
+    .option("--within <fraction>", 'with --blend: other kinds of blend up to so much dearer, "2 %"')
+    .option("--line-cost <amount>", "with --blend: what ordering each part costs as such")
+    .option("--solver-time <time>", 'with --blend: time for the outside solver in hard cases; "10 s" unless told')
+    .action(async (brief: string | undefined, flags: PlanFlags & BlendFlags) => {
+      if (wantsBlend(flags)) {
+        const { planBlendCommand } = await import("./commands/planBlend.ts");
+        return done(await planBlendCommand(brief, flags, ports));
+      }
       const { planCommand } = await import("./commands/plan.ts");
       done(planCommand(brief, flags, ports));
     });

@@ -113,6 +113,21 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     plain: "costs more than the limit",
     dimension: "money",
   },
+  "price-missing": {
+    words: "",
+    plain: "it has no price, and what is on hand does not make a string",
+    dimension: "count",
+  },
+  "tolerance-unknown": {
+    words: "",
+    plain: "its tolerance is unknown, so neither its sharing nor its least capacitance is known",
+    dimension: "count",
+  },
+  "leakage-unknown": {
+    words: "",
+    plain: "its leakage is unknown, so its balancing resistors cannot be sized",
+    dimension: "count",
+  },
   "price-unknown": {
     words: "",
     plain: "its price is unknown, so the limit of {limit} cannot be held",

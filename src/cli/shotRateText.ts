@@ -70,7 +70,7 @@ export function lampText({ ideal, built, coil, voltageForEnergy, fit, explosion 
   const land = (got: number, wanted: number, dimension: Dimension): string =>
     `${show(got, dimension)} for ${show(wanted, dimension)} (${ratio(got / wanted)})`;
   return [
-    "Lamp's circuit, as built for the ideal",
+    "Lamp's circuit: what this bank gives for the ideal",
     hanging("capacitance", land(built.capacitance, ideal.capacitance, "capacitance"), width),
     hanging("inductance", land(built.inductance, ideal.inductance, "inductance"), width),
     hanging("voltage", land(built.voltage, ideal.voltage, "voltage"), width),

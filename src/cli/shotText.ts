@@ -92,7 +92,10 @@ function energyText({ discharge: { energy, bounds } }: ShotReport): string {
     if (value === null) return [`  ${pad(name, 10)} unknown: its resistance is not known`];
     const part = energy.stored === 0 ? 0 : value / energy.stored;
     const bar = "#".repeat(Math.max(0, Math.min(BAR, Math.round(part * BAR))));
-    const bound = key === "load" && bounds.loadEnergy !== "value" ? ` (${bounds.loadEnergy})` : "";
+    // heat that an unknown bus would take is counted in the bank's, so its figure errs high
+    const known =
+      key === "load" && value > 0 ? bounds.loadEnergy : key === "bank" && energy.bus === null ? "upper bound" : "value";
+    const bound = known === "value" ? "" : ` (${known})`;
     const joules = pad(show(value, "energy"), 10, "right");
     return [`  ${pad(name, 10)} ${joules} ${pad(portion(part), 8, "right")}  ${bar}${bound}`.trimEnd()];
   });

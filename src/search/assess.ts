@@ -4,7 +4,7 @@ import {
   bankCapacitance,
   chargingWorst,
   elementPower,
-  holdWorst,
+  holdHighest,
   type Layout,
   layoutId,
   leftAfterDump,
@@ -135,7 +135,7 @@ function holdingOf(candidate: Candidate, brief: Brief, layout: Layout, chosen: B
   const chain = shapedChain(candidate, brief, layout, chosen?.tolerance ?? 0);
   if (layout.series === 1) return brief.voltage * (1 + brief.overshoot);
   if (chain === null) return null;
-  return holdWorst(chain, chosen?.resistance ?? Number.POSITIVE_INFINITY);
+  return holdHighest(chain, chosen?.resistance ?? Number.POSITIVE_INFINITY);
 }
 
 function balanceOf(
@@ -172,7 +172,7 @@ function fixedBalance(
 ): Balance {
   const chain = shapedChain(candidate, brief, layout, tolerance);
   const even = (brief.voltage * (1 + brief.overshoot)) / layout.series;
-  const worst = chain === null ? even : holdWorst(chain, resistance);
+  const worst = chain === null ? even : holdHighest(chain, resistance);
   const byVolts = worst / family.voltage;
   const byWatts = elementPower(worst, resistance, tolerance, 1) / (family.power * family.derating);
   const elements = Math.max(1, Math.ceil(Math.max(byVolts, byWatts) * (1 - 1e-9)));

@@ -62,7 +62,6 @@ export function findingsOf(given: FindingsInput): readonly Finding[] {
     chargingShare(input),
     ...chargingRisk(input),
     holdingShare(input),
-    ...holdingCourse(input),
     ...balanceLoad(input),
     reverse(input),
     energy(input),
@@ -137,21 +136,6 @@ function holdingShare({ result, candidate, unit, brief, corners, mends }: Corner
     source: "joulewright-design",
     note,
   });
-}
-
-/**
- * With a finite hold: the highest voltage of any unit at any moment of it. A company of unlike stages may stand a little
- * higher on the way than the ends of the closed form tell; told apart only when it does.
- */
-function holdingCourse({ result, brief, corners }: Cornered): readonly Finding[] {
-  const { charging, holding, limit } = result.share;
-  const worst = corners.holding;
-  if (brief.hold === Number.POSITIVE_INFINITY || worst === null || charging === null || holding === null) return [];
-  if (worst.voltage <= Math.max(charging, holding) * (1 + FIT)) return [];
-  const at = formatQuantity(worst.hold, "time", { digits: 3 });
-  const note = `Worst unit at any moment of the hold, ${at} into it: ${worst.words}.`;
-  const draft = { id: "holding-course", state: "holding", value: worst.voltage, limit, unit: "V" } as const;
-  return [atMost({ ...draft, source: "methods-derived", note })];
 }
 
 function balanceLoad({ result, family }: FindingsInput): readonly Finding[] {

@@ -1,5 +1,19 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
+export type {
+  BlendPlan,
+  BlendResult,
+  BlendString,
+  CeilingWorth,
+  EngineAnswer,
+  Loosen,
+  NamedCertificate,
+  PriceMove,
+  WinningPrice,
+  WorstShare,
+} from "./blendResult.ts";
+export type { BlendInput } from "./blends.ts";
+export { planBlends } from "./blendsLoader.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";
 export { BUS_LENGTHS } from "./briefFaults.ts";
 export { unitLimit } from "./candidate.ts";

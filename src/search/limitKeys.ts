@@ -1,7 +1,7 @@
 // The limits that a brief may set on the shot and on a fault, each for the worst unit of the bank.
 
 import { z } from "zod";
-import { type Dimension, parseQuantity } from "../quantity/index.ts";
+import { type Dimension, example, parseQuantity } from "../quantity/index.ts";
 import { part, plain, quantity } from "./fields.ts";
 
 /** A limit in its own unit, or as a part of the unit's own rating. */
@@ -15,15 +15,18 @@ function rated(dimension: Dimension, most: number) {
   const share = quantity("fraction", { least: 0, most: 1, open: true });
   const isShare = (raw: unknown): boolean =>
     typeof raw === "string" && raw.includes("%") && parseQuantity(raw, "fraction").ok;
-  return z.union([z.number(), z.string()]).transform((raw, context): RatedLimit => {
-    const read = (isShare(raw) ? share : absolute).safeParse(raw);
-    if (read.success) return { kind: isShare(raw) ? "part" : "absolute", value: read.data };
-    for (const { message, ...issue } of read.error.issues) {
-      const params = "params" in issue ? { params: issue.params as Record<string, unknown> } : {};
-      context.addIssue({ code: "custom", message: `${message}; or a part of the unit's rating, "80 %"`, ...params });
-    }
-    return z.NEVER;
-  });
+  return z
+    .union([z.number(), z.string()])
+    .transform((raw, context): RatedLimit => {
+      const read = (isShare(raw) ? share : absolute).safeParse(raw);
+      if (read.success) return { kind: isShare(raw) ? "part" : "absolute", value: read.data };
+      for (const { message, ...issue } of read.error.issues) {
+        const params = "params" in issue ? { params: issue.params as Record<string, unknown> } : {};
+        context.addIssue({ code: "custom", message: `${message}; or a part of the unit's rating, "80 %"`, ...params });
+      }
+      return z.NEVER;
+    })
+    .describe(`${example(dimension)}, or a part of the unit's own rating such as "80 %"`);
 }
 
 export const limitKeys = {

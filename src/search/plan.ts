@@ -63,7 +63,7 @@ export function plan(input: PlanInput): Read<PlanResult> {
 }
 
 /** Parts by their first row: a name that stands twice would give two layouts one name. */
-function distinct(parts: readonly Capacitor[]): readonly Capacitor[] {
+export function distinct(parts: readonly Capacitor[]): readonly Capacitor[] {
   const seen = new Set<string>();
   for (const unit of parts) seen.add(unit.part);
   if (seen.size === parts.length) return parts;

@@ -135,7 +135,13 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
     stated,
     faults,
     findings: [
-      ...unitRatingFindings(discharge, { unit, envelope: envelope.value, parallel: layout.parallel }),
+      ...unitRatingFindings(discharge, {
+        unit,
+        envelope: envelope.value,
+        series: layout.series,
+        parallel: layout.parallel,
+        clampDrop: circuit.clamp?.drop ?? null,
+      }),
       ...bus.findings,
       ...rated,
       ...(stated?.findings ?? []),

@@ -2,7 +2,7 @@
 
 import type { Capacitor } from "../catalog/index.ts";
 import { atMost, type Discharge, type Envelope } from "../pulse/index.ts";
-import type { Finding } from "../quantity/index.ts";
+import { type Finding, formatQuantity } from "../quantity/index.ts";
 
 /** By which figure of the envelope a finding grows. */
 const GROWS: Readonly<Record<string, "peakCurrent" | "reversal" | "action">> = {
@@ -15,17 +15,37 @@ const GROWS: Readonly<Record<string, "peakCurrent" | "reversal" | "action">> = {
 /** Figures that rest on how the units share. */
 const SHARED = ["pulse.unit.current", "pulse.unit.slew", "pulse.unit.action"];
 
+/** What the findings are judged with. `clampDrop` is null without a clamp, V. */
+export interface Rated {
+  readonly unit: Capacitor;
+  readonly envelope: Envelope;
+  readonly series: number;
+  readonly parallel: number;
+  readonly clampDrop: number | null;
+}
+
+/**
+ * A polarised unit rated for no reversal at all still sees its part of the clamp's own drop, which no clamp can spare it:
+ * told as a warning, with the volts, so long as the reversal is no more than that drop.
+ */
+function spared(finding: Finding, { unit, series, clampDrop }: Rated, voltage: number): Finding {
+  const { id, verdict, value, limit } = finding;
+  if (id !== "pulse.unit.reversal" || verdict !== "fail" || limit !== 0 || unit.polarised === false) return finding;
+  if (clampDrop === null || value === null || value * voltage > clampDrop * 1.05) return finding;
+  const volts = formatQuantity(clampDrop / series, "voltage", { digits: 3, rounding: "up" });
+  const note = `What remains is the clamp's own drop, ${volts} on a unit by its even share; ask the maker whether it bears that.`;
+  return { ...finding, verdict: "warn", note };
+}
+
 /** The discharge's findings, each value at the high end of its figure; no finding on a rating that no catalogue has. */
-export function unitRatingFindings(
-  discharge: Discharge,
-  of: { readonly unit: Capacitor; readonly envelope: Envelope; readonly parallel: number },
-): readonly Finding[] {
+export function unitRatingFindings(discharge: Discharge, of: Rated): readonly Finding[] {
   const { unit, envelope, parallel } = of;
+  const voltage = Math.sqrt((2 * discharge.energy.stored) / (of.unit.capacitance * (of.parallel / of.series)));
   const alike = unit.tolerance === undefined && parallel > 1;
   return discharge.findings
     .filter(({ id }) => id !== "pulse.unit.action")
     .map((finding) => {
-      const raised = atEnd(finding, discharge, envelope);
+      const raised = spared(atEnd(finding, discharge, envelope), of, voltage);
       if (!alike || !SHARED.includes(finding.id) || raised.verdict !== "pass") return raised;
       const note = `${raised.note} The tolerance is unknown, so the worst unit may carry more.`;
       return { ...raised, verdict: "not assessed", note };

@@ -4,7 +4,7 @@ import { REASONS, reasonWords } from "../../src/cli/reasonWords.ts";
 import { LIMIT_NAMES } from "../../src/search/limits.ts";
 import { at } from "../support/fakePorts.ts";
 
-const sweep = ["sweep", "limitedSweep", "limits"]
+const sweep = ["sweep", "limitedSweep", "limits", "blendString", "blendOptions"]
   .map((name) => readFileSync(at(`src/search/${name}.ts`), "utf8"))
   .join("");
 const limits = Object.values(LIMIT_NAMES).flatMap((name) =>
@@ -13,7 +13,7 @@ const limits = Object.values(LIMIT_NAMES).flatMap((name) =>
 
 describe("reasonWords(reason, currency)", () => {
   test("every reason of the search has words, and no other", () => {
-    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown))|stock|balance|risk|no-shot)"/g);
+    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown|missing))|stock|balance|risk|no-shot)"/g);
     const used = new Set([...[...found].map((match) => match[1] as string), ...limits]);
     expect(used.size).toBeGreaterThan(7);
     expect([...used].sort()).toEqual(Object.keys(REASONS).sort());

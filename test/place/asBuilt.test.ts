@@ -28,7 +28,7 @@ describe("asBuilt(units, request, groups)", () => {
   test("the best placing read back is still proven", () => {
     const best = place(units, request);
     const back = best.ok && asBuilt(units, request, best.value.groups);
-    expect(back && back.ok && back.value.charging.proof).toBe("optimal");
+    expect(back).toMatchObject({ value: { charging: { proof: "optimal" } } });
   });
 
   test("refuses: a serial unknown or twice, a group too small, groups too few", () => {

@@ -84,7 +84,9 @@ function restNotes({ result, settings }: Fired): readonly string[] {
   const fails = result.findings.filter(({ id, verdict }) => verdict === "fail" && id !== "pulse-energy").length;
   const asked = settings.given.has("energy") || settings.brief.energy !== NO_ENERGY;
   return [
-    ...(fails > 0 ? [`${fails} checks of this bank at rest FAIL: see them with the check command.`] : []),
+    ...(fails > 0
+      ? [`This bank FAILS ${fails} ${fails === 1 ? "check" : "checks"} at rest: see them with the check command.`]
+      : []),
     ...(asked ? [] : ["No energy was asked, so none is checked."]),
   ];
 }
