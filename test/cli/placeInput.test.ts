@@ -3,7 +3,7 @@ import { MOVES, readPlaceInput } from "../../src/cli/placeInput.ts";
 import { at, fakePorts } from "../support/fakePorts.ts";
 import { lotCsv } from "../support/placeCli.ts";
 
-const lot = lotCsv([330, 331, 332, 333]);
+const lot = lotCsv([330, 331, 332, 333], "uF", { "leakage [uA]": [90, 91, 92, 93] });
 const FLAGS = { series: "2", parallel: "2", ties: "cross-tied", measured: "m.csv" };
 const read = (flags = {}, brief?: string) => {
   const found = readPlaceInput(brief, { ...FLAGS, ...flags }, fakePorts({ "m.csv": lot }));
