@@ -14,7 +14,7 @@ const BANK_FLAGS: readonly BriefFlag[] = [
     key: "ripple",
     help: 'allowed fall in voltage, "20 %"; "100 %" is a full dump',
   },
-  { flag: "--basis", argument: "<basis>", key: "basis", help: "worst case, nominal or statistical" },
+  { flag: "--basis", argument: "<basis>", key: "basis", help: "worst case, nominal, statistical or measured" },
   { flag: "--risk", argument: "<fraction>", key: "risk", help: "risk of the statistical basis" },
   {
     flag: "--distribution",

@@ -44,6 +44,11 @@ export function checkedBank(
   if (!settings.ok || !stock.ok || !input.ok) {
     return refused(...[settings, stock, input].flatMap((read) => (read.ok ? [] : read.refusals)));
   }
+  if (settings.value.brief.basis === "measured") {
+    // Without the units it would be a promise that nobody checked.
+    const want = "plan or place with --measured, where the units judge; here another --basis, which beats the brief's";
+    return refused({ code: "contradiction", place: { field: "basis" }, read: "measured", want });
+  }
   const place = { field: flags.layout === undefined ? "--part" : `${flags.layout} part` };
   const unit = findPart(input.value.layout.part, stock.value.parts, place);
   if (!unit.ok) return unit;

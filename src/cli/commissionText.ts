@@ -41,8 +41,11 @@ const MEASURES = {
 } as const;
 
 /** The next measurement in a sentence. */
-export function nextWords({ next }: Pick<Commissioned, "next">): string {
-  if (next === null) return "nothing more needs to be read at this step";
+export function nextWords({ next, verdict }: Pick<Commissioned, "next" | "verdict">): string {
+  if (next === null)
+    return verdict === "stop"
+      ? "nothing is read on the charged bank; when every stage is proven dead, measure what is suspect"
+      : "nothing more needs to be read at this step";
   const where = next.position === undefined ? "" : spotWords(next as Spot);
   switch (next.action) {
     case "read stage": {
@@ -99,7 +102,7 @@ function comparedText({ compared }: Commissioned, width: number): string {
       { heading: "predicted", cell: (row) => volts(row.predicted), side: "right" },
       {
         heading: "off by",
-        cell: (row) => formatQuantity(row.read / row.predicted - 1, "fraction", { digits: 2 }),
+        cell: (row) => `${((row.read / row.predicted - 1) * 100).toFixed(2)} %`,
         side: "right",
       },
     ],

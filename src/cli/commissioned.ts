@@ -114,13 +114,13 @@ export function commissioned(
       one.suspects.map(({ position, ...suspect }) => ({ ...spotOf(chain, position), ...suspect })),
     )
     .sort((a, b) => b.likelihood - a.likelihood);
-  const { next, goOn } = diagnosis;
+  const { goOn } = diagnosis;
   return accepted({
     verdict: diagnosis.verdict,
     sound: Math.min(...answers.map((one) => one.diagnosis.sound)),
     suspects,
     unexplained: answers.some((one) => one.diagnosis.unexplained),
-    next: next === null ? null : "position" in next ? { ...next, ...spotOf(worst.chain, next.position) } : next,
+    next: nextOf(diagnosis, (position) => spotOf(worst.chain, position)),
     goOn: goOn === null ? null : { ...goOn, ...spotOf(worst.chain, goOn.position) },
     actions: diagnosis.actions,
     findings: answers.flatMap((one) => one.diagnosis.findings),
@@ -129,6 +129,12 @@ export function commissioned(
     choices,
     notes: notesOf(sheet, chains, choices),
   });
+}
+
+/** Nobody is sent to a charged bank that has to be stopped. */
+function nextOf({ next, verdict }: Diagnosis, spotOf: (position: number) => Spot): Commissioned["next"] {
+  if (next === null || (verdict === "stop" && next.action !== "with the bank dead")) return null;
+  return "position" in next ? { ...next, ...spotOf(next.position) } : next;
 }
 
 const severity = ({ verdict, sound }: Diagnosis): number => RANK[verdict] + (1 - sound) / 2;

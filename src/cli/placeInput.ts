@@ -72,7 +72,16 @@ export function readPlaceInput(brief: string | undefined, flags: PlaceFlags, por
     if (!found.ok) return found;
     unit = found.value;
   }
-  const known = knownOf(layout.value, { choices, settings: settings.value, unit, stock: stock.value, flags, brief });
+  const leaks = measured.value.units.some((unit) => unit.leakage !== undefined);
+  const known = knownOf(layout.value, {
+    choices,
+    settings: settings.value,
+    unit,
+    stock: stock.value,
+    flags,
+    brief,
+    leaks,
+  });
   const { series, parallel, ties } = layout.value.layout;
   const large = measured.value.units.length > SMALL;
   const { unitLimit: _, leakageAt: __, ...asked } = choices;
@@ -115,11 +124,13 @@ interface Given {
   readonly stock: Stock | null;
   readonly flags: PlaceFlags;
   readonly brief: string | undefined;
+  /** Some unit has its leakage measured. */
+  readonly leaks: boolean;
 }
 
 function knownOf(
   { layout, balance, filed }: LayoutInput,
-  { choices, settings, unit, stock, flags, brief }: Given,
+  { choices, settings, unit, stock, flags, brief, leaks }: Given,
 ): Pick<PlaceInput, "bank" | "assessed" | "notes"> {
   const asked = settings.brief;
   const voltage = brief === undefined && flags.voltage === undefined ? null : asked.voltage * (1 + asked.overshoot);
@@ -137,7 +148,7 @@ function knownOf(
   if (leakageVoltage === null && (unit !== null || voltage !== null)) {
     leakageVoltage = unit?.voltage ?? (voltage as number) / layout.series;
     const where = unit === null ? "the even share of a unit" : "the rated voltage";
-    notes.push(`Leakage is taken as read at ${where}, assumed; --leakage-at says where it was read.`);
+    if (leaks) notes.push(`Leakage is taken as read at ${where}, assumed; --leakage-at says where it was read.`);
   }
   return {
     assessed,

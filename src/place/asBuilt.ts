@@ -1,8 +1,9 @@
 // A bank as its builder lists it: positions kept as they are, gaps worked out anew, against the same bound as a free placing.
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
-import { bankGaps } from "./bankGaps.ts";
+import { bankGaps, gapOfGroups } from "./bankGaps.ts";
 import { gapFinding, mixedParts } from "./flags.ts";
 import { worstShare } from "./gap.ts";
+import { toLattice } from "./lattice.ts";
 import { place } from "./place.ts";
 import type { Placing } from "./placing.ts";
 import type { PlaceRequest } from "./request.ts";
@@ -50,11 +51,18 @@ export function asBuilt(
   const bySerial = new Map(units.map((unit) => [unit.serial, unit]));
   const fitted = new Set(groups.flat());
   const standing = groups.map((group) => group.map((serial) => bySerial.get(serial)!));
-  const { charging: gap, holding } = bankGaps(standing, request);
+  const { holding } = bankGaps(standing, request);
+  // On the same whole numbers as the search, so that the best list read back is the best to the last digit.
+  const { values } = toLattice(units.map((unit) => unit.capacitance));
+  const value = new Map(units.map((unit, i) => [unit.serial, values[i]!]));
+  const gap = gapOfGroups(
+    request.ties,
+    groups.map((group) => group.map((serial) => value.get(serial)!)),
+  );
   const { charging, floor } = best.value;
   const lowerBound = Math.min(charging.lowerBound, gap);
   const holdingFloor = best.value.holding?.floor ?? 0;
-  const wild = best.value.findings.filter((f) => f.id.startsWith("place.leakage-"));
+  const unknown = best.value.findings.filter((f) => f.id.startsWith("place.leakage-"));
   return accepted({
     ...best.value,
     groups,
@@ -73,7 +81,7 @@ export function asBuilt(
       holding === null ? null : { worst: worstShare(holding, request.series), gap: holding, floor: holdingFloor },
     findings: [
       gapFinding("charging", gap, floor),
-      ...(holding === null ? wild : [gapFinding("holding", holding, holdingFloor)]),
+      ...(holding === null ? unknown : [gapFinding("holding", holding, holdingFloor)]),
       ...mixedParts(
         standing.flat(),
         groups.map((group, g) => group.map((_, k) => g * group.length + k)),

@@ -26,7 +26,7 @@ import {
   switchSchema,
 } from "./load.ts";
 
-export const BASES = ["worst case", "nominal", "statistical"] as const;
+export const BASES = ["worst case", "nominal", "statistical", "measured"] as const;
 export type Basis = (typeof BASES)[number];
 
 const hold = z

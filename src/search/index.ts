@@ -49,3 +49,4 @@ export type { BalanceMends } from "./sharing/mends.ts";
 export { type ShareSpread, shareSpread } from "./sharing/shareSpread.ts";
 export type { WithoutBalance } from "./sharing/withoutBalance.ts";
 export { type ShotInput, type ShotReport, shotOf } from "./shot.ts";
+export type { Judge } from "./sweepKinds.ts";

@@ -16,6 +16,7 @@ import { comparison, firstRows, idOf, type Ranking, tiesOf } from "./rank.ts";
 import type { LayoutResult, PlanResult, RefusedPart } from "./result.ts";
 import { balanceMends } from "./sharing/mends.ts";
 import { leastSeries, type SweepInput, sweep } from "./sweep.ts";
+import type { Judge } from "./sweepKinds.ts";
 import type { LayoutTable } from "./table.ts";
 
 export interface PlanInput {
@@ -28,6 +29,8 @@ export interface PlanInput {
   readonly rank?: Ranking;
   /** Leave out the search for least changes when nothing fits (a form that plans at every key). */
   readonly quick?: boolean;
+  /** With the measured basis: whether the measured units, placed, share safely in a shape. */
+  readonly judge?: Judge;
 }
 
 /** Plans. Refuses only what cannot be understood (two currencies); nothing fitting is an answer, with its least changes. */
@@ -40,7 +43,7 @@ export function plan(input: PlanInput): Read<PlanResult> {
   const parts = pricedIn(distinct(input.parts), currency, brief);
   const families = pricedIn(given, currency, brief);
   const required = requiredCapacitance(brief);
-  const work: SweepInput = { parts, families, brief, required, currency };
+  const work: SweepInput = { parts, families, brief, required, currency, judge: input.judge ?? null };
   const { table, refused: refusals } = sweep(work);
   const rows = firstRows(table.count, limit, comparison(table, parts, rank));
   const layouts = rows.map((row) => layoutAt(work, table, row));

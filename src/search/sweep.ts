@@ -26,7 +26,7 @@ const bill = { quantity: 0, cost: 0 };
 export function sweep(input: SweepInput, stopAtFirst = false): Sweep {
   const table = newTable(Math.max(256, Math.min(input.parts.length * 32, 1 << 22)));
   const refused: RefusedPart[] = [];
-  const judge = input.brief.basis === "statistical" ? riskJudge(input.brief) : null;
+  const judge = input.judge ?? (input.brief.basis === "statistical" ? riskJudge(input.brief) : null);
   const limited = hasLimits(input.brief) ? sweepLimited(input, table, judge) : null;
   for (let i = 0; i < input.parts.length; i++) {
     const reason = limited === null ? sweepPart(input, i, table, judge) : limited(i);

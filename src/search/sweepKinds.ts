@@ -11,6 +11,8 @@ export interface SweepInput {
   readonly brief: Brief;
   readonly required: number;
   readonly currency: string | null;
+  /** Judges sharing while charging in place of the brief's risk. */
+  readonly judge?: Judge;
 }
 
 /** Why a part gives no layout: the first limit met, or for ceilings the least value seen. */

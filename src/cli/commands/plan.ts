@@ -6,12 +6,14 @@ import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { lampFits } from "../lampFits.ts";
+import { type MeasuredPlanned, measuredJson, planMeasured, savedText } from "../measuredPlan.ts";
 import { planText } from "../planText.ts";
 import type { Ports } from "../ports.ts";
 import { type Flags, type Settings, settle } from "../settings.ts";
 import { readStock, type Stock } from "../stock.ts";
 import { tell } from "../tell.ts";
 import { toJson } from "../toJson.ts";
+import { refusalWords } from "../words.ts";
 
 export interface PlanFlags extends Flags {
   readonly catalog?: readonly string[];
@@ -20,6 +22,9 @@ export interface PlanFlags extends Flags {
   readonly rank?: string;
   readonly json?: boolean;
   readonly briefSchema?: boolean;
+  readonly measured?: string;
+  readonly uncertainty?: string;
+  readonly part?: string;
 }
 
 /** A plan and what it was made from. */
@@ -28,6 +33,8 @@ export interface Planned {
   readonly stock: Stock;
   readonly rank: Ranking;
   readonly result: PlanResult;
+  /** With the measured basis: the lot, and what its units do. */
+  readonly lot: MeasuredPlanned | null;
 }
 
 export function planCommand(brief: string | undefined, flags: PlanFlags, ports: Ports): number {
@@ -57,9 +64,16 @@ export function planFrom(brief: string | undefined, flags: PlanFlags, ports: Por
   ];
   if (!settings.ok || !stock.ok || typeof limit !== "number" || typeof rank !== "string") return refused(...faults);
   const { parts, families } = stock.value;
+  const given = { settings: settings.value, stock: stock.value, rank };
+  if (settings.value.brief.basis === "measured" || flags.measured !== undefined) {
+    const lot = planMeasured(flags, { ...given, limit }, ports);
+    if (!lot.ok) return lot;
+    if (lot.value.faults.length > 0) ports.err(`${lot.value.faults.map(refusalWords).join("\n")}\n`);
+    return accepted({ ...given, result: lot.value.result, lot: lot.value });
+  }
   const planned = plan({ brief: settings.value.brief, parts, families, limit, rank });
   if (!planned.ok) return planned;
-  return accepted({ settings: settings.value, stock: stock.value, rank, result: planned.value });
+  return accepted({ ...given, result: planned.value, lot: null });
 }
 
 /** Rows that were lost, on the error stream. */
@@ -68,16 +82,18 @@ export function tellFaults(stock: Stock, ports: Ports): void {
   if (lines.length > 0) ports.err(`${lines.join("\n")}\n`);
 }
 
-export function planJson({ settings, stock, result }: Planned): object {
+export function planJson({ settings, stock, result, lot }: Planned): object {
   const best = result.layouts[0];
   const unit = best && stock.parts.find((part) => part.part === best.part);
   const cautions = cautionsOf(result.brief, best && unit ? { layout: best, unit } : undefined);
-  return { ...result, ...lampFits(result, stock.parts), cautions, inputs: inputsJson(settings, stock) };
+  const measured = lot === null ? {} : { measured: measuredJson(lot) };
+  return { ...result, ...measured, ...lampFits(result, stock.parts), cautions, inputs: inputsJson(settings, stock) };
 }
 
-export function planWords({ settings, stock, rank, result }: Planned, width: number): string {
+export function planWords({ settings, stock, rank, result, lot }: Planned, width: number): string {
   const { given } = settings;
-  return planText({ result, parts: stock.parts, given, rank, width, inputs: inputSentences(stock) });
+  const inputs = [...inputSentences(stock), ...(lot === null ? [] : [savedText(lot)])];
+  return planText({ result, parts: stock.parts, given, rank, width, inputs });
 }
 
 function readLimit(text = "20"): number | Refusal {
