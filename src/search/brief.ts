@@ -29,17 +29,20 @@ import {
 export const BASES = ["worst case", "nominal", "statistical"] as const;
 export type Basis = (typeof BASES)[number];
 
-const hold = z.union([z.number(), z.string()]).transform((raw, context): number => {
-  if (typeof raw === "string" && /^\s*for ?ever\s*$/i.test(raw)) return Number.POSITIVE_INFINITY;
-  const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, "time");
-  if (read.ok && read.value >= 0 && read.value <= 1e9) return read.value;
-  context.addIssue({
-    code: "custom",
-    message: '"for ever", or a time such as "30 s" from 0 s up',
-    params: { read: JSON.stringify(raw) },
-  });
-  return z.NEVER;
-});
+const hold = z
+  .union([z.number(), z.string()])
+  .transform((raw, context): number => {
+    if (typeof raw === "string" && /^\s*for ?ever\s*$/i.test(raw)) return Number.POSITIVE_INFINITY;
+    const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, "time");
+    if (read.ok && read.value >= 0 && read.value <= 1e9) return read.value;
+    context.addIssue({
+      code: "custom",
+      message: '"for ever", or a time such as "30 s" from 0 s up',
+      params: { read: JSON.stringify(raw) },
+    });
+    return z.NEVER;
+  })
+  .describe('"for ever", or a time such as "30 s" from 0 s up');
 
 /** None and certainty are no risks to plan with: each is told what it would mean. */
 const risk = z.union([z.number(), z.string()]).transform((raw, context): number => {
@@ -159,7 +162,7 @@ function wantedAt(path: readonly PropertyKey[]): string | null {
   if (node?.description) return node.description;
   if (node?.enum) return `one of ${node.enum.join(", ")}`;
   if (node?.properties) return `an object with ${Object.keys(node.properties).join(", ")}`;
-  return typeof node?.type === "string" ? `a ${node.type === "string" ? "text" : node.type}` : null;
+  return node?.type === "object" ? "an object" : node?.type === "string" ? "text" : null;
 }
 
 /** Reads a brief from parsed JSON or from flags. Every fault is told, with the key and what would be accepted. */

@@ -43,16 +43,19 @@ export function quantity(dimension: Dimension, range: Range) {
 
 /** A whole number, also as text (flags are text). */
 export function whole(least: number, most: number) {
-  return z.union([z.number(), z.string()]).transform((raw, context): number => {
-    const value = typeof raw === "number" ? raw : /^\s*\d+\s*$/.test(raw) ? Number(raw) : Number.NaN;
-    if (Number.isInteger(value) && value >= least && value <= most) return value;
-    context.addIssue({
-      code: "custom",
-      message: `a whole number from ${least} to ${most}`,
-      params: { read: JSON.stringify(raw) },
-    });
-    return z.NEVER;
-  });
+  return z
+    .union([z.number(), z.string()])
+    .transform((raw, context): number => {
+      const value = typeof raw === "number" ? raw : /^\s*\d+\s*$/.test(raw) ? Number(raw) : Number.NaN;
+      if (Number.isInteger(value) && value >= least && value <= most) return value;
+      context.addIssue({
+        code: "custom",
+        message: `a whole number from ${least} to ${most}`,
+        params: { read: JSON.stringify(raw) },
+      });
+      return z.NEVER;
+    })
+    .describe(`a whole number from ${least} to ${most}`);
 }
 
 /** Greatest value of each kind of electrical quantity that the arithmetic was checked with. */
@@ -81,19 +84,22 @@ export const plain = (range: Range) => quantity("count", range);
 
 /** One word of a list, in any case, with hyphen or space; a near one is named. */
 export function word<Word extends string>(words: readonly Word[]) {
-  return z.string().transform((raw, context): Word => {
-    const tidy = raw
-      .trim()
-      .toLowerCase()
-      .replace(/[\s_-]+/g, " ");
-    const found = words.find((one) => one.replace(/-/g, " ") === tidy);
-    if (found !== undefined) return found;
-    const near = nearestWord(tidy, words);
-    const list = words.map((one) => `"${one}"`).join(", ");
-    const message = near === null ? list : `perhaps "${near}"; one of ${list}`;
-    context.addIssue({ code: "custom", message, params: { read: JSON.stringify(raw) } });
-    return z.NEVER;
-  });
+  return z
+    .string()
+    .transform((raw, context): Word => {
+      const tidy = raw
+        .trim()
+        .toLowerCase()
+        .replace(/[\s_-]+/g, " ");
+      const found = words.find((one) => one.replace(/-/g, " ") === tidy);
+      if (found !== undefined) return found;
+      const near = nearestWord(tidy, words);
+      const list = words.map((one) => `"${one}"`).join(", ");
+      const message = near === null ? list : `perhaps "${near}"; one of ${list}`;
+      context.addIssue({ code: "custom", message, params: { read: JSON.stringify(raw) } });
+      return z.NEVER;
+    })
+    .describe(words.map((one) => `"${one}"`).join(", "));
 }
 
 /** yes or no, also as JSON's true and false. */
