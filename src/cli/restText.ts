@@ -1,7 +1,7 @@
 // What clamp diodes carry, what leaving the resistors out would mean, and the chance with its witness, each in a sentence.
 
 import { formatQuantity, roundTo } from "../quantity/index.ts";
-import type { BankClamp, LayoutResult } from "../search/index.ts";
+import type { BankClamp, LayoutResult, ShareSpread } from "../search/index.ts";
 import type { Witness } from "./witness.ts";
 
 /** Duty of the clamp diodes; what is unknown says so. Also the rating of the order's line. */
@@ -39,6 +39,10 @@ export function withoutBalanceWords({
     ? `safe over the whole hold: at most ${volts} of ${limit}; but then nothing bleeds the bank: it needs a bleed resistor of its own`
     : `not safe: up to ${volts} of ${limit}`;
 }
+
+/** The middle of the spread, and how it was come by. */
+export const spreadWords = ({ median, banks, seed }: ShareSpread): string =>
+  `${formatQuantity(median, "voltage", { digits: 4 })}: the worst unit of half of ${banks} banks, drawn with seed ${seed}, stays below it while charging`;
 
 const chance = (x: number): string => (x === 0 ? "0" : roundTo(x, 3, "up").toExponential());
 

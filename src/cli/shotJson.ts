@@ -1,9 +1,13 @@
 // One shot as the plain data of `pulse --json`: the figures asked for at the top, the rest by its own name.
 
-import type { LayoutResult, ShotReport } from "../search/index.ts";
+import type { InductanceSweep, LayoutResult, ShotReport } from "../search/index.ts";
 
 /** SI values; null is unknown or without bound, and `bounds` says what a figure is when parts of the loop are unknown. */
-export function shotJson(layout: LayoutResult, report: ShotReport): Readonly<Record<string, unknown>> {
+export function shotJson(
+  layout: LayoutResult,
+  report: ShotReport,
+  sweep: InductanceSweep | null,
+): Readonly<Record<string, unknown>> {
   const { bank, discharge, bus, charge, highestRate, heating } = report;
   const { damping, lampAlpha, peakCurrent, peakTime, reversal, action, unitPeakCurrent, energy } = discharge;
   const { id, part, series, parallel, ties, units } = layout;
@@ -37,6 +41,7 @@ export function shotJson(layout: LayoutResult, report: ShotReport): Readonly<Rec
     life: report.life,
     lamp: report.lamp,
     stated: report.stated,
+    sweep,
     faults: report.faults,
     findings: report.findings,
   };

@@ -30,7 +30,7 @@ export const FIELDS: readonly Field[] = [
   { key: "ageing", label: "Ageing loss", dimension: "fraction", blank: "none" },
   { key: "hold", label: "Hold", dimension: "time", blank: "for ever" },
   { key: "touchSafe", label: "Safe to touch below", dimension: "voltage", blank: "60 V" },
-  { key: "load.resistance", label: "Load resistance", dimension: "resistance", blank: "no load; such as 50 mohm" },
+  { key: "load.resistance", label: "Load resistance", dimension: "resistance", blank: "such as 50 mohm" },
   { key: "load.inductance", label: "Load inductance", dimension: "inductance", blank: "such as 20 uH" },
   { key: "maxSeries", label: "Most in series", dimension: "count", blank: "40" },
   { key: "maxUnits", label: "Most units", dimension: "count", blank: "2000" },

@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
-import { clampWords, riskWords, withoutBalanceWords } from "../../src/cli/restText.ts";
-import { type BankClamp, clampOf } from "../../src/search/index.ts";
+import { clampWords, riskWords, spreadWords, withoutBalanceWords } from "../../src/cli/restText.ts";
+import { type BankClamp, clampOf, shareSpread } from "../../src/search/index.ts";
 import { bankOf, briefOf, UNIT } from "../support/bank.ts";
 
 describe("clampWords(clamp)", () => {
@@ -45,4 +45,12 @@ describe("riskWords(layout, witness)", () => {
     expect(riskWords({ risk: null }, null)).toMatch(/not assessed/);
     expect(riskWords({}, null)).toBe("");
   });
+});
+
+test("spreadWords(spread): the middle, how many banks, and the seed that draws them again", () => {
+  const brief = briefOf({ basis: "statistical" });
+  const spread = shareSpread({ result: bankOf({ brief }), unit: UNIT, brief }, { banks: 1000, seed: 7 });
+  expect(spread === null ? "" : spreadWords(spread)).toMatch(
+    /^2\d\d(\.\d)? V: the worst unit of half of 1000 banks, drawn with seed 7,/,
+  );
 });

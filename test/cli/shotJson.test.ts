@@ -1,6 +1,6 @@
 import { expect, test } from "vitest";
 import { shotJson } from "../../src/cli/shotJson.ts";
-import { shotOf } from "../../src/search/index.ts";
+import { inductanceSweep, shotOf } from "../../src/search/index.ts";
 import { FILM, shotBrief, shotLayout } from "../support/shotBank.ts";
 
 test("shotJson(layout, report): the figures stand at the top, and the energies beside them", () => {
@@ -10,7 +10,10 @@ test("shotJson(layout, report): the figures stand at the top, and the energies b
   if (!shot.ok) throw new Error("the shot must be");
   const { discharge } = shot.value;
   const { damping, peakCurrent, peakTime, reversal, action, unitPeakCurrent, energy } = discharge;
-  expect(shotJson(layout, shot.value)).toMatchObject({
+  const sweep = inductanceSweep({ layout, unit: FILM, brief }, 5);
+  expect(shotJson(layout, shot.value, null).sweep).toBeNull();
+  expect(shotJson(layout, shot.value, sweep).sweep).toBe(sweep);
+  expect(shotJson(layout, shot.value, sweep)).toMatchObject({
     ...{ id: layout.id, part: "film", series: 1, parallel: 1, damping, peakCurrent, peakTime },
     ...{ reversal, action, unitPeakCurrent, energy, bus: { known: true } },
   });

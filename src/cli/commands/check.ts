@@ -15,7 +15,7 @@ import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { joinedFacts, restFacts } from "../joined.ts";
 import { hanging, layoutText } from "../layoutText.ts";
 import type { Ports } from "../ports.ts";
-import { clampWords, riskWords } from "../restText.ts";
+import { clampWords, riskWords, spreadWords } from "../restText.ts";
 import { tell } from "../tell.ts";
 import { toJson } from "../toJson.ts";
 import { readWitness, unwitnessed, type Witness, type WitnessFlags, witnessOf } from "../witness.ts";
@@ -81,7 +81,7 @@ function checkJson(checked: Checked, witness: Witness | null): string {
 }
 
 function checkText(checked: Checked, width: number, witness: Witness | null): string {
-  const { course, clamp, corners, improve } = restFacts(checked);
+  const { course, clamp, corners, improve, spread } = restFacts(checked);
   const { result, unit, settings, stock, notes } = checked;
   const left = leftOf(checked);
   const volts = (x: number | null): string => formatQuantity(x, "voltage");
@@ -105,6 +105,7 @@ function checkText(checked: Checked, width: number, witness: Witness | null): st
       ...cornerLines(corners, width),
       hanging("left after a dump", kept, width),
       ...(clamp === null ? [] : [hanging("clamp diodes", clampWords(clamp), width)]),
+      ...(spread === null ? [] : [hanging("likely worst", spreadWords(spread), width)]),
       ...(result.risk === undefined ? [] : [hanging("chance of excess", riskWords(result, witness), width)]),
     ].join("\n"),
     ...(course === null ? [] : [`Time course at the worst corner\n${courseText(course, width)}`]),

@@ -2,7 +2,7 @@
 
 import { visible } from "../../order/index.ts";
 import { accepted, type Finding, type Read } from "../../quantity/index.ts";
-import { type FuseChoice, fittedFuse, type ShotReport, shotOf } from "../../search/index.ts";
+import { type FuseChoice, fittedFuse, inductanceSweep, type ShotReport, shotOf } from "../../search/index.ts";
 import { askedText } from "../askedText.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, type Checked, checkedBank } from "../checked.ts";
@@ -16,6 +16,7 @@ import type { Nest } from "../settings.ts";
 import { shotJson } from "../shotJson.ts";
 import { fuseText, rateBlocks } from "../shotRateText.ts";
 import { shotBlocks } from "../shotText.ts";
+import { sweepText } from "../sweepText.ts";
 import { tell } from "../tell.ts";
 import { toJson } from "../toJson.ts";
 import { waveformCsv } from "../waveform.ts";
@@ -91,11 +92,17 @@ function restNotes({ result, settings }: Fired): readonly string[] {
   ];
 }
 
+/** Points of the sweep over the loop's inductance. */
+const SWEPT = 21;
+
+const sweepOf = ({ result: layout, unit, settings: { brief } }: Fired) =>
+  inductanceSweep({ layout, unit, brief }, SWEPT);
+
 function pulseJson(fired: Fired): string {
   const { result, unit, settings, stock, report, fuse } = fired;
   const { brief } = settings;
   return toJson({
-    ...shotJson(result, report),
+    ...shotJson(result, report, sweepOf(fired)),
     fuse,
     notes: [...report.notes, ...restNotes(fired), ...fired.notes],
     brief: brief.energy === NO_ENERGY ? { ...brief, energy: null } : brief,
@@ -122,6 +129,7 @@ function pulseText(fired: Fired, width: number): string {
     `${visible(result.id)}\n\nAsked\n${askedLines.join("\n")}`,
     ...shotBlocks(report, width),
     `Checks of the shot\n${findingsText(report.findings, width)}`,
+    sweepText(sweepOf(fired), width),
     ...rateBlocks(report, width),
     `If one thing fails\n${faultsText(report.faults, width)}`,
     fuseText(fuse, width),

@@ -11,6 +11,8 @@ export interface SpreadBank {
   readonly result: Pick<LayoutResult, "series" | "parallel" | "ties" | "share">;
   readonly unit: Capacitor;
   readonly brief: Brief;
+  /** Measured capacitances, F, that stand in for the tolerance. */
+  readonly lot?: readonly number[];
 }
 
 export interface ShareSpread {
@@ -46,21 +48,30 @@ function quantile(bins: readonly number[], part: number, { from, width }: { from
  * tolerance, or none at all: nothing is spread then. Source: [methods-derived] 1.3.
  */
 export function shareSpread(
-  { result, unit, brief }: SpreadBank,
+  { result, unit, brief, lot }: SpreadBank,
   draw: { readonly banks: number; readonly seed: number },
 ): ShareSpread | null {
   const { series, parallel, ties, share } = result;
-  const { tolerance } = unit;
-  if (series === 1 || tolerance === undefined || tolerance.low + tolerance.high === 0) return null;
+  const { tolerance = lot && { low: 0, high: 0 } } = unit;
+  if (series === 1 || tolerance === undefined) return null;
+  const low = lot === undefined ? 1 - tolerance.low : Math.min(...lot);
+  const high = lot === undefined ? 1 + tolerance.high : Math.max(...lot);
+  if (!(high > low)) return null;
   const volts = fullVoltage(brief);
-  const given = { tolerance, series, parallel, ties, share: share.limit / volts };
+  const given = {
+    tolerance,
+    series,
+    parallel,
+    ties,
+    share: share.limit / volts,
+    ...(lot === undefined ? {} : { lot }),
+  };
   const drawn = monteCarlo(tailCaseOf(given, brief), draw);
   let step = drawn.next();
   while (!step.done) step = drawn.next();
   const bins = [...step.value.bins];
-  const high = 1 + tolerance.high;
   const from = volts / series;
-  const to = (volts * high) / (high + (series - 1) * (1 - tolerance.low));
+  const to = (volts * high) / (high + (series - 1) * low);
   const { exceed, error, law = "" } = riskOf(given, brief);
   const width = (to - from) / bins.length;
   const median = quantile(bins, 0.5, { from, width });

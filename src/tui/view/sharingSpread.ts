@@ -27,10 +27,14 @@ const AXIS = "banks".length + 2;
 function area(spread: ShareSpread, high: number, count: number): { readonly points: Point[]; readonly most: number } {
   const { from, to, bins } = spread;
   const heights = Array.from({ length: count }, () => 0);
+  const step = (high - from) / count;
+  const width = (to - from) / bins.length / step;
   for (const [bin, banks] of bins.entries()) {
-    const volts = from + ((to - from) * (bin + 0.5)) / bins.length;
-    const place = Math.floor(((volts - from) / (high - from)) * count);
-    if (place >= 0 && place < count) heights[place] = (heights[place] ?? 0) + banks;
+    // A bin is shared out to the dots that it lies over: whole bins would make some dots taller than their neighbours.
+    for (let place = Math.floor(bin * width); place < (bin + 1) * width && place < count; place += 1) {
+      const part = Math.min((bin + 1) * width, place + 1) - Math.max(bin * width, place);
+      heights[place] = (heights[place] ?? 0) + (banks * part) / width;
+    }
   }
   const points = heights.flatMap((y, place) => {
     const x = from + ((high - from) * (place + 0.5)) / count;

@@ -60,6 +60,15 @@ describe("shareSpread(bank, draw)", () => {
     expect(Math.abs(over + within / 2 - exceed * banks)).toBeLessThan(noise + within / 2);
   });
 
+  test("a measured lot stands in for the tolerance, known or not", () => {
+    const lot = [0.9e-3, 0.95e-3, 1e-3, 1.05e-3, 1.1e-3];
+    const { tolerance: _, ...unknown } = UNIT;
+    const spread = must({ ...bank(), unit: unknown, lot });
+    expect(spread.to).toBeCloseTo((2000 * 1.1) / (1.1 + 7 * 0.9), 9);
+    expect(spread.law).toContain("5 measured units");
+    expect(shareSpread({ ...bank(), lot: [1e-3, 1e-3, 1e-3, 1e-3, 1e-3] }, DRAW)).toBeNull();
+  });
+
   test("the same seed draws the same banks", () => {
     expect(must(bank()).bins).toEqual(must(bank()).bins);
     expect(shareSpread(bank(), { ...DRAW, seed: 2 })?.bins).not.toEqual(must(bank()).bins);

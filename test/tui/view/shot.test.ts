@@ -52,7 +52,7 @@ describe.each(SIZES)("%i by %i", (...size) => {
         ". left in the bank",
         "Nothing given stops it",
         "loop inductance, log",
-        "the lossless bound V sqrt(C/L), which no loop passes",
+        "the lossless bound",
         "H here: 20 µH",
         "Worst unit",
         "Not assessed",
