@@ -4,7 +4,9 @@ import { type Finding, formatQuantity, withinLeast, withinMost } from "../quanti
 import type { FindingsInput } from "./findingsInput.ts";
 
 export function energy({ result, brief }: FindingsInput): Finding {
-  const value = brief.basis === "nominal" ? result.energy.nominal : result.energy.low;
+  // The part of the measured basis is the lot itself, whose mean a placing meets; the placing's own energy is told beside.
+  const middle = brief.basis === "nominal" || brief.basis === "measured";
+  const value = middle ? result.energy.nominal : result.energy.low;
   return withinLeast({
     id: "pulse-energy",
     state: "pulse",

@@ -28,7 +28,7 @@ export function chargingShare({ result, brief, corners }: Cornered): Finding {
     unit: "V",
     source: "joulewright-design",
     // The builder chose to bear a stated risk instead: the worst case is told, not refused.
-    exceeded: brief.basis === "statistical" ? "warn" : "fail",
+    exceeded: brief.basis === "statistical" || brief.basis === "measured" ? "warn" : "fail",
     note: unknown
       ? `The tolerance is unknown, so how the voltage divides while charging is not known: measure the units or find the datasheet.${widest === null ? "" : ` Up to +-${formatQuantity(widest, "fraction", { digits: 3, rounding: "down" })} this number in series would pass.`}`
       : result.series === 1
