@@ -12,7 +12,7 @@
 import type { ResistorFamily } from "../catalog/index.ts";
 import { lastAtMost } from "../quantity/index.ts";
 import { type FiniteHold, holdHighest, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
-import { holdingLine, largestBalance } from "./share.ts";
+import { holdingLine, holdingWorst, largestBalance } from "./share.ts";
 
 /** More elements than this in one position is no balancing resistor that anyone builds. */
 const MOST_ELEMENTS = 100_000;
@@ -98,6 +98,35 @@ function chooseBelow({ bank, limit, family, line, straight }: Task, most: number
     return true;
   }
   return false;
+}
+
+/** What is known of a choice without making it. */
+export interface Outlook {
+  /** Whether the family surely has a choice; false leaves the question open. */
+  sure: boolean;
+  /** The worst holding voltage of the choice, if there is one, is no less than this; Infinity when there is surely none. */
+  floor: number;
+}
+
+/**
+ * Looks ahead at a choice, after an endless hold. R lies between R_max/step and R_max (with R_max no more than one largest element), and V_1
+ * rises with R. Any R <= R_max keeps V_1 <= limit, so k elements surely do when k >= limit/voltage and k >= limit^2/(watts R_max/step).
+ */
+export function balanceOutlook(bank: FiniteHold, limit: number, family: ResistorFamily, outlook: Outlook): void {
+  outlook.sure = false;
+  outlook.floor = 0;
+  if (bank.hold !== Number.POSITIVE_INFINITY) return;
+  const { values, voltage, lowest, highest, step } = family;
+  const most = largestBalance(bank, limit);
+  if (!(most >= lowest * (1 - 1e-9))) {
+    outlook.floor = Number.POSITIVE_INFINITY;
+    return;
+  }
+  const least = Math.min(most, highest) / step;
+  const watts = family.power * family.derating * (1 - family.tolerance);
+  const elements = Math.ceil(Math.max(1, limit / voltage, (limit * limit) / (watts * least)));
+  outlook.sure = elements <= MOST_ELEMENTS && most >= elements * (values[0] as number);
+  outlook.floor = holdingWorst(bank, least * (1 - 1e-9));
 }
 
 const NO_LINE = { base: 0, slope: 0 };

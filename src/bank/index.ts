@@ -1,5 +1,5 @@
 // An arrangement at rest: its name, energy, shares and balancing resistors.
-export { type Choice, chooseBalance, elementPower } from "./balance.ts";
+export { balanceOutlook, type Choice, chooseBalance, elementPower, type Outlook } from "./balance.ts";
 export {
   type Chain,
   type ChainUnit,

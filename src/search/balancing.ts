@@ -1,6 +1,6 @@
 // The resistor of one layout among all families: the cheapest that works, then the fewest elements; unpriced families last.
 
-import { type Choice, chooseBalance, type FiniteHold, type Ties } from "../bank/index.ts";
+import { balanceOutlook, type Choice, chooseBalance, type FiniteHold, type Outlook, type Ties } from "../bank/index.ts";
 import { cheapest, isPriced, type ResistorFamily } from "../catalog/index.ts";
 import type { Brief } from "./brief.ts";
 import type { Candidate } from "./candidate.ts";
@@ -89,4 +89,23 @@ export function bestBalance(
     best.worst = trial.worst;
   }
   return best.family >= 0;
+}
+
+const ahead: Outlook = { sure: false, floor: 0 };
+
+/** What bestBalance will find at the least, without choosing; written into `outlook`. */
+export function outlookOf(
+  chain: SearchChain,
+  limit: number,
+  families: readonly ResistorFamily[],
+  outlook: Outlook,
+): void {
+  outlook.sure = false;
+  outlook.floor = Number.POSITIVE_INFINITY;
+  for (const family of families) {
+    chain.spread = family.tolerance;
+    balanceOutlook(chain, limit, family, ahead);
+    outlook.sure ||= ahead.sure;
+    outlook.floor = Math.min(outlook.floor, ahead.floor);
+  }
 }

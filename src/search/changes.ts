@@ -22,7 +22,7 @@ function fits(input: SweepInput, change: Partial<Brief>): Fit | null {
   const parts: Capacitor[] = [];
   let layout: string | null = null;
   for (const unit of input.parts) {
-    const { table } = sweep({ ...changed, parts: [unit] }, true);
+    const { table } = sweep({ ...changed, parts: [unit] }, { stopAtFirst: true });
     if (table.count === 0) continue;
     parts.push(unit);
     layout ??= idOf(table, [unit], 0);
@@ -113,13 +113,13 @@ function stockChange(input: SweepInput): Change | null {
   for (const unit of input.parts) {
     if (unit.available === undefined) continue;
     const { available, ...unlimited } = unit;
-    const { table } = sweep({ ...input, parts: [unlimited] }, true);
+    const { table } = sweep({ ...input, parts: [unlimited] }, { stopAtFirst: true });
     if (table.count === 0) continue;
     // The cheapest purchase may hold more than is needed, for a price break: it surely does, and less may do too.
     const bought = purchase(unlimited, (table.units[0] as number) + input.brief.spares)?.bought ?? 0;
     const fitting = (stock: number): string | null => {
       const parts = [{ ...unit, available: stock }];
-      const found = sweep({ ...input, parts }, true).table;
+      const found = sweep({ ...input, parts }, { stopAtFirst: true }).table;
       return found.count > 0 ? idOf(found, parts, 0) : null;
     };
     let [no, yes] = [available, bought];

@@ -33,6 +33,10 @@ export interface PlanInput {
   readonly judge?: Judge;
 }
 
+/** Up to so many layouts asked for, from so many parts on, the search keeps only what may be among them or on the front: less is done faster whole. */
+const MOST_SIEVED = 1000;
+const SIEVED_FROM = 4000;
+
 /** Plans. Refuses only what cannot be understood (two currencies); nothing fitting is an answer, with its least changes. */
 export function plan(input: PlanInput): Read<PlanResult> {
   const { brief, limit = 20, rank = "cost", quick = false } = input;
@@ -44,18 +48,19 @@ export function plan(input: PlanInput): Read<PlanResult> {
   const families = pricedIn(given, currency, brief);
   const required = requiredCapacitance(brief);
   const work: SweepInput = { parts, families, brief, required, currency, judge: input.judge ?? null };
-  const { table, refused: refusals } = sweep(work);
+  const wanted = parts.length >= SIEVED_FROM && limit > 0 && limit <= MOST_SIEVED ? { limit, rank } : null;
+  const { table, count, refused: refusals } = sweep(work, { wanted });
   const rows = firstRows(table.count, limit, comparison(table, parts, rank));
   const layouts = rows.map((row) => layoutAt(work, table, row));
   return accepted({
     brief,
     required: { capacitance: required },
-    searched: { parts: parts.length, layouts: table.count, proof: "exhaustive" },
+    searched: { parts: parts.length, layouts: count, proof: "exhaustive" },
     currency,
     layouts,
     front: frontRows(table).map((row) => idOf(table, parts, row)),
     refused: quick ? refusals : withMends(work, refusals),
-    changes: table.count > 0 || quick ? [] : hasLimits(brief) ? limitChanges(work) : leastChanges(work),
+    changes: count > 0 || quick ? [] : hasLimits(brief) ? limitChanges(work) : leastChanges(work),
     ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
     ...(quick ? {} : { improve: improveBest(work, layouts[0]) }),
     notes: notesOf(brief),

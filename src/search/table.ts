@@ -19,16 +19,21 @@ export interface LayoutTable {
   stress: Float64Array;
 }
 
-export interface LayoutRow {
-  readonly part: number;
-  readonly series: number;
-  readonly parallel: number;
-  readonly tied: boolean;
-  readonly family: number;
-  readonly cost: number;
-  readonly volume: number;
-  readonly mass: number;
-  readonly stress: number;
+/** What layouts are compared by, least first; units and units of the columns above. */
+export interface Figures {
+  cost: number;
+  volume: number;
+  mass: number;
+  units: number;
+  stress: number;
+}
+
+export interface LayoutRow extends Omit<Figures, "units"> {
+  part: number;
+  series: number;
+  parallel: number;
+  tied: boolean;
+  family: number;
 }
 
 export const newTable = (capacity = 4096): LayoutTable => ({
@@ -65,7 +70,7 @@ function widen(table: LayoutTable): void {
   table.stress = grow(table.stress, capacity);
 }
 
-export function pushRow(table: LayoutTable, row: LayoutRow): void {
+export function pushRow(table: LayoutTable, row: Readonly<LayoutRow>): void {
   if (table.count === table.part.length) widen(table);
   const i = table.count++;
   table.part[i] = row.part;
@@ -78,4 +83,16 @@ export function pushRow(table: LayoutTable, row: LayoutRow): void {
   table.mass[i] = row.mass;
   table.units[i] = row.series * row.parallel;
   table.stress[i] = row.stress;
+}
+
+export const noFigures = (): Figures => ({ cost: 0, volume: 0, mass: 0, units: 0, stress: 0 });
+
+/** The figures of one row, written into `figures`. */
+export function figuresAt(table: LayoutTable, row: number, figures: Figures): Figures {
+  figures.cost = table.cost[row] as number;
+  figures.volume = table.volume[row] as number;
+  figures.mass = table.mass[row] as number;
+  figures.units = table.units[row] as number;
+  figures.stress = table.stress[row] as number;
+  return figures;
 }
