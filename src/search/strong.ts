@@ -12,10 +12,10 @@ export function beats(a: Readonly<Figures>, b: Readonly<Figures>): boolean {
   return a.cost < b.cost || a.stress < b.stress || a.units < b.units || a.volume < b.volume || a.mass < b.mass;
 }
 
-/** Rows chosen, rows that they are chosen from, and rows that they are tried on. */
+/** Rows chosen at most. */
 const MOST = 48;
-const CANDIDATES = 128;
-const TRIED = 512;
+/** Rows that they are chosen from: as many as pay for themselves in a table of that size. Four times as many are tried on. */
+const candidatesOf = (count: number): number => Math.min(128, Math.max(24, Math.ceil(count / 800)));
 
 /** Figures of some rows one after another: stress, cost, units, volume, mass of each. */
 export type Strong = Float64Array;
@@ -37,8 +37,9 @@ function packed({ stress, cost, units, volume, mass }: LayoutTable, rows: readon
 
 /** The strong rows among `candidates`, by how they fare against the rows `tried`. */
 export function strongOf(table: LayoutTable, candidates: readonly number[], tried: readonly number[]): Strong {
-  const rows = evenly(candidates, CANDIDATES);
-  const sample = evenly(tried, TRIED).map((row) => figuresAt(table, row, noFigures()));
+  const most = candidatesOf(table.count);
+  const rows = evenly(candidates, most);
+  const sample = evenly(tried, 4 * most).map((row) => figuresAt(table, row, noFigures()));
   const each = rows.map((row) => packed(table, [row]));
   // One mark for each candidate and each row of the sample that it beats, while none of the chosen does.
   const marks = each.map((one) => Uint8Array.from(sample, (figures) => (isBeaten(one, figures) ? 1 : 0)));
