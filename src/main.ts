@@ -6,7 +6,7 @@ import { join } from "node:path";
 import { fileURLToPath } from "node:url";
 import { bugText } from "./cli/bug.ts";
 import { EXIT } from "./cli/exit.ts";
-import { filesOn } from "./cli/files.ts";
+import { filesOn, writeNow } from "./cli/files.ts";
 import { outputTrouble } from "./cli/output.ts";
 import { type Ports, textWidth } from "./cli/ports.ts";
 import { VERSION } from "./cli/version.ts";
@@ -22,53 +22,64 @@ function portsOfProcess(): Ports {
     columns: textWidth(process.stdout.columns, process.env.COLUMNS),
     files: filesOn(),
     catalogs: fileURLToPath(new URL("../catalogs/", import.meta.url)),
+    background: {
+      entry: new URL("./worker.js", import.meta.url),
+      terminal: process.stderr.isTTY === true,
+      onInterrupt: (stop) => {
+        process.once("SIGINT", stop);
+        return () => void process.removeListener("SIGINT", stop);
+      },
+    },
   };
 }
 
-/** Where the screens keep brief and pins between runs. */
-const sessionFile = (): string => process.env.JOULEWRIGHT_SESSION || join(homedir(), ".joulewright-screens.json");
+/** What the screens begin with: the catalogues and brief asked for, else the demo's. */
+async function screenInput(flags: ScreenFlags, ports: Ports) {
+  const { demoStock } = await import("./cli/demo.ts");
+  // Resistors without capacitors are refused, not passed over.
+  if (flags.catalog.length === 0 && flags.resistors === null) return demoStock(ports);
+  const { readStock } = await import("./cli/stock.ts");
+  const stock = readStock({ catalog: flags.catalog, resistors: flags.resistors ?? undefined }, ports.files);
+  return stock.ok ? { ok: true as const, value: { ...stock.value, brief: {} as unknown } } : stock;
+}
 
-/** The screens, on the catalogues asked for or those that come with the program. Loaded only here: no command waits for them. */
+/** The screens; brief and pins are kept in the home folder. */
 async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
-  const demo = flags.catalog.length === 0;
-  const [{ readStock }, { DEMO_CATALOGS }, { tell }, { startScreens }] = await Promise.all([
-    import("./cli/stock.ts"),
-    import("./cli/demo.ts"),
-    import("./cli/tell.ts"),
-    import("./tui/index.ts"),
-  ]);
-  const shipped = (name: string): string => join(ports.catalogs, name);
-  const catalog = demo ? DEMO_CATALOGS.map(shipped) : flags.catalog;
-  const resistors = flags.resistors ?? (demo ? shipped("resistors.csv") : undefined);
-  const stock = readStock({ catalog, resistors }, ports.files);
-  const briefPath = flags.brief ?? shipped("demo-brief.json");
-  const brief = ports.files.read(briefPath);
-  if (!stock.ok || !brief.ok) {
-    return tell(
-      ports,
-      [stock, brief].flatMap((read) => (read.ok ? [] : read.refusals)),
-      false,
-    );
+  const { tell } = await import("./cli/tell.ts");
+  const input = await screenInput(flags, ports);
+  if (!input.ok) return tell(ports, input.refusals);
+  const { parts, families, sources } = input.value;
+  let { brief } = input.value;
+  if (flags.brief !== null) {
+    const { readJson } = await import("./cli/jsonText.ts");
+    const text = ports.files.read(flags.brief);
+    const json = text.ok ? readJson(text.value, flags.brief) : text;
+    if (!json.ok) return tell(ports, json.refusals);
+    brief = json.value.value;
   }
-  const json = (await import("./cli/jsonText.ts")).readJson(brief.value, briefPath);
-  if (!json.ok) return tell(ports, json.refusals, false);
-  const { parts, families, sources } = stock.value;
+  const demo = flags.catalog.length === 0;
   const faults = sources.reduce((sum, source) => sum + source.faults.length, 0);
+  const { startScreens } = await import("./tui/index.ts");
   return startScreens({
     parts,
     families,
-    stock: { name: catalog.join(", "), parts: parts.length, faults, note: demo ? "invented" : "" },
-    brief: json.value.value,
+    stock: {
+      name: demo ? "demo catalogues" : flags.catalog.join(", "),
+      parts: parts.length,
+      faults,
+      note: demo ? "invented parts" : "",
+    },
+    brief,
+    briefFirst: flags.brief !== null,
     files: ports.files,
-    sessionFile: sessionFile(),
+    sessionFile: process.env.JOULEWRIGHT_SESSION ?? join(homedir(), ".joulewright.json"),
     terminal: {
+      complain: (line) => ports.err(`${line}\n`),
       stdin: process.stdin,
       stdout: process.stdout,
-      // A terminal is written to at once on POSIX; elsewhere the process ends by itself, after all is written.
-      writeSync: (text) => void process.stdout.write(text),
+      writeSync: writeNow,
       process,
       env: process.env,
-      complain: (line) => ports.err(`${line}\n`),
       ...(flags.ascii ? { ascii: true } : {}),
     },
   });
@@ -90,9 +101,14 @@ process.stdout.on("error", (error: NodeJS.ErrnoException) => {
 // With the error stream gone too there is nobody left to tell.
 process.stderr.on("error", () => {});
 
+/** What the screens end with when the terminal is gone. */
+const HANG_UP = 129;
+
 const argv = process.argv.slice(2);
 try {
   process.exitCode = await main(argv);
+  // The terminal is gone: node would stumble over it on its way out, so the signal's own end is taken.
+  if (process.exitCode === HANG_UP) process.kill(process.pid, "SIGHUP");
 } catch (error) {
   process.stderr.write(bugText(error, argv, VERSION));
   process.exitCode = EXIT.bug;

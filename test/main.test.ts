@@ -1,7 +1,7 @@
 // The real bundle, built by the package's own script into a temporary folder and run as a user runs it.
 import { execFileSync, execSync, spawnSync } from "node:child_process";
 import { mkdirSync, mkdtempSync, readdirSync, readFileSync, rmSync, symlinkSync } from "node:fs";
-import { tmpdir } from "node:os";
+import { constants, tmpdir } from "node:os";
 import { join } from "node:path";
 import { fileURLToPath } from "node:url";
 import { afterAll, beforeAll, describe, expect, test } from "vitest";
@@ -159,6 +159,29 @@ describe("a terminal", () => {
     expect(await ended).toBe(0);
     expect(seen).toMatch(/\[\?1049l/);
   }, 20_000);
+
+  test("a terminal that goes away ends the screens as a hang-up does, not with node's abort", async () => {
+    const { spawn } = await import("@lydell/node-pty");
+    const env = { ...process.env, TERM: "xterm-256color", JOULEWRIGHT_SESSION: join(folder, "gone.json") };
+    const terminal = spawn(process.execPath, [main], { cols: 80, rows: 24, env });
+    const ended = new Promise<number | undefined>((resolve) => terminal.onExit(({ signal }) => resolve(signal)));
+    let seen = "";
+    await new Promise<void>((resolve) => {
+      terminal.onData((data) => {
+        seen += data;
+        if (seen.includes("2.4 kJ")) resolve();
+      });
+    });
+    // The window closes: its side of the terminal is gone.
+    (terminal as unknown as { destroy: () => void }).destroy();
+    expect(await ended).toBe(constants.signals.SIGHUP);
+  }, 20_000);
+
+  test("--resistors without --catalog is refused, not passed over", () => {
+    const { status, err } = run(["--resistors", at("catalogs/resistors.csv")]);
+    expect(status).toBe(2);
+    expect(err).toMatch(/^--catalog: something needed was not given/);
+  });
 
   test("TERM=dumb gets the plan of the demo as text", async () => {
     const { spawn } = await import("@lydell/node-pty");

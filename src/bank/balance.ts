@@ -11,7 +11,7 @@
 
 import type { ResistorFamily } from "../catalog/index.ts";
 import { lastAtMost } from "../quantity/index.ts";
-import { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
+import { type FiniteHold, holdHighest, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
 import { holdingLine, holdingWorst, largestBalance } from "./share.ts";
 
 /** More elements than this in one position is no balancing resistor that anyone builds. */
@@ -37,9 +37,37 @@ export const elementPower = (worst: number, resistance: number, spread: number, 
 export function chooseBalance(bank: FiniteHold, limit: number, family: ResistorFamily, choice: Choice): boolean {
   // After an endless hold with a leakage current the worst voltage is a straight line in R, V_1 = base + slope R: the common case, kept short.
   const straight = bank.hold === Number.POSITIVE_INFINITY && bank.leak.kind === "current";
-  const { base, slope } = straight ? holdingLine(bank) : NO_LINE;
-  const most =
-    straight && slope > 0 ? (limit - base) / slope : largestBalanceForHold(bank, limit, largestBalance(bank, limit));
+  const line = straight ? holdingLine(bank) : NO_LINE;
+  const bound =
+    straight && line.slope > 0
+      ? (limit - line.base) / line.slope
+      : largestBalanceForHold(bank, limit, largestBalance(bank, limit));
+  if (straight || bank.hold === Number.POSITIVE_INFINITY)
+    return chooseBelow({ bank, limit, family, line, straight }, bound, choice);
+  // In a finite hold the way may stand higher than its ends: then the next value below is tried, and after a few the family is given up.
+  let most = bound;
+  for (let step = 0; step < MOST_STEPS; step++) {
+    if (!chooseBelow({ bank, limit, family, line, straight }, most, choice)) return false;
+    choice.worst = holdHighest(bank, choice.resistance);
+    if (choice.worst <= limit * (1 + 1e-9)) return true;
+    most = choice.resistance * (1 - 1e-6);
+  }
+  return false;
+}
+
+const MOST_STEPS = 6;
+
+interface Task {
+  readonly bank: FiniteHold;
+  readonly limit: number;
+  readonly family: ResistorFamily;
+  readonly line: { readonly base: number; readonly slope: number };
+  readonly straight: boolean;
+}
+
+/** The choice with R at most `most`, by the voltages at the end of the hold. */
+function chooseBelow({ bank, limit, family, line, straight }: Task, most: number, choice: Choice): boolean {
+  const { base, slope } = line;
   const { values, voltage, lowest, highest, tolerance, step } = family;
   if (!(most > 0) || most < lowest * (1 - 1e-9)) return false;
   const watts = family.power * family.derating * (1 - tolerance);

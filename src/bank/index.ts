@@ -14,7 +14,7 @@ export { type ClampCase, type ClampDiode, clampDiode } from "./clampDiode.ts";
 export { type Corner, chargingCorners, dumpedCorners, holdingCorners } from "./corners.ts";
 export { type HoldCase, type HoldWorst, worstAtHold } from "./cornersHold.ts";
 export { holdCornerWords } from "./cornersHoldWords.ts";
-export { type StageRange, stageRange } from "./cornersRange.ts";
+export { cornerWords, type Sides, type StageRange, stageRange } from "./cornersRange.ts";
 export { type Course, courseOf, type Program } from "./course.ts";
 export { type Phase, phaseFrom } from "./coursePhase.ts";
 export {
@@ -26,10 +26,10 @@ export {
   requiredCapacitance,
   storedEnergy,
 } from "./energy.ts";
-export { type FiniteHold, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
+export { type FiniteHold, holdHighest, holdWorst, largestBalanceForHold } from "./finiteHold.ts";
 export { type Layout, layoutId, plainTies, shapeOf, type Ties, unitCount } from "./layout.ts";
 export { type Cause, type CauseShare, type MarginCase, type Margins, marginCauses } from "./margins.ts";
-export { type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";
+export { CHUNK, type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";
 export { type Residual, residualAfterDump } from "./residual.ts";
 export {
   chargingLeast,

@@ -68,7 +68,10 @@ function chainRisk(given: TailCase): Tail {
   if (span === null) return exactly(0);
   const { single, off, stages } = lotSingle(given, kappa) ?? smoothSingle(given, kappa, span);
   // Far beyond any use, at about 1e-300 or in a corner of dozens of units, the sums vanish; the chance is then below this, not 0.
-  if (single === 0) return { exceed: 0, error: vanishing(stages, n), unionBound: 0, unionExcess: 0 };
+  if (single === 0) {
+    const error = Math.max(Number.MIN_VALUE, Math.min(vanishing(stages, n), riskBound(given)));
+    return { exceed: 0, error, unionBound: 0, unionExcess: 0 };
+  }
   const sum = n * single;
   // So far out that the masses are below the smallest number.
   if (!(sum > 0)) return underflown(given);

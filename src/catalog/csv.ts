@@ -101,7 +101,13 @@ function readPiece(piece: string, context: PieceContext): number {
   return at;
 }
 
-const OPTIONS = { relax_column_count: true, skip_records_with_error: true, trim: true } as const;
+/** Line ends of every kind, also mixed in one file. */
+const OPTIONS = {
+  record_delimiter: ["\r\n", "\n", "\r"],
+  relax_column_count: true,
+  skip_records_with_error: true,
+  trim: true,
+};
 /** Lines that one cell may run over; a quote left open longer is taken for a slip. */
 const LONGEST_CELL = 50;
 

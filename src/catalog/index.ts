@@ -10,8 +10,10 @@ export type { PriceBreak } from "./cell.ts";
 export type { Column } from "./column.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
+export { type ListedUnit, readPositions, type UnitList } from "./positions.ts";
 export { cheapest, isPriced, leastBuyable, type Purchase, purchase, toBuy, unitPriceAt } from "./purchase.ts";
 export { type Catalogue, readCapacitors } from "./readCapacitors.ts";
+export { READING_COLUMNS, type Reading, type Readings, readReadings } from "./readings.ts";
 export {
   DEFAULT_FAMILY,
   RESISTOR_COLUMNS,
@@ -19,4 +21,6 @@ export {
   type ResistorFamily,
   readResistors,
 } from "./resistor.ts";
+export { capacitorSchema, readCapacitorData } from "./schema.ts";
 export { assumedLeakage, RULES, stateOf } from "./states.ts";
+export { readWaveform, type WaveformRow } from "./waveform.ts";

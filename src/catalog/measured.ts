@@ -12,6 +12,8 @@ export interface MeasuredUnit {
   readonly esr?: number;
   readonly lot?: string;
   readonly part?: string;
+  /** Polarity or size group: units of two groups never share a stage or string. */
+  readonly group?: string;
   readonly note?: string;
   readonly uncertainty?: number;
 }
@@ -23,6 +25,7 @@ export const MEASURED_COLUMNS: readonly Column[] = [
   { heading: "esr", key: "esr", type: above("resistance", 1e-7, 1e6) },
   { heading: "lot", key: "lot", type: text(120) },
   { heading: "part", key: "part", type: text(120) },
+  { heading: "group", also: ["polarity", "size"], key: "group", type: text(120) },
   { heading: "note", also: ["notes"], key: "note", type: text(1000) },
   { heading: "uncertainty", key: "uncertainty", type: above("fraction", 1e-9, 0.5) },
 ];

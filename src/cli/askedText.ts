@@ -2,13 +2,14 @@
 
 import { visible } from "../order/index.ts";
 import { type Dimension, formatQuantity } from "../quantity/index.ts";
-import type { Brief } from "../search/index.ts";
+import { type Brief, LIMIT_KEYS } from "../search/index.ts";
+import { busWords, chargerWords, clampWords, limitWords, loadWords, switchWords } from "./circuitWords.ts";
 import { pad, wrap } from "./wrap.ts";
 
 interface Asked {
   readonly label: string;
-  /** Key of the brief. */
-  readonly key: string;
+  /** Key of the brief, or several that one line tells. */
+  readonly key: string | readonly string[];
   readonly value: (brief: Brief) => string | null;
 }
 
@@ -54,8 +55,16 @@ const ASKED: readonly Asked[] = [
   { label: "most volume", key: "maxVolume", value: (b) => show(b.maxVolume, "volume") },
   { label: "most mass", key: "maxMass", value: (b) => show(b.maxMass, "mass") },
   { label: "spares", key: "spares", value: (b) => (b.spares === 0 ? null : String(b.spares)) },
+  { label: "dump resistance", key: "dumpResistance", value: (b) => show(b.dumpResistance, "resistance") },
   { label: "ambient", key: "ambient", value: (b) => show(b.ambient, "temperature") },
   { label: "shots", key: "rate", value: (b) => show(b.rate, "frequency") },
+  { label: "load", key: "load", value: loadWords },
+  { label: "switch", key: "switch", value: switchWords },
+  { label: "bus", key: "bus", value: busWords },
+  { label: "clamp diode", key: "clamp", value: clampWords },
+  { label: "isolating resistor", key: "isolating", value: (b) => show(b.isolating, "resistance") },
+  { label: "charger", key: "charger", value: chargerWords },
+  { label: "limits of a unit", key: LIMIT_KEYS, value: limitWords },
 ];
 
 /** The brief in lines; the defaults together in the last. */
@@ -65,7 +74,8 @@ export function askedText(brief: Brief, given: ReadonlySet<string>, width: numbe
   for (const { label, key, value } of ASKED) {
     const text = value(brief);
     if (text === null) continue;
-    if (given.has(key)) lines.push(wrap(`${pad(label, 20)} ${text}`, width, "  "));
+    if (typeof key === "string" ? given.has(key) : key.some((one) => given.has(one)))
+      lines.push(wrap(`${pad(label, 20)} ${text}`, width, "  "));
     else defaults.push(`${label} ${text}`);
   }
   if (defaults.length > 0) lines.push(wrap(`by default: ${defaults.join(", ")}`, width, "  "));

@@ -1,14 +1,10 @@
 // The flags of the brief: one row a key, read by the help, by the settings and by every refusal that names a flag.
 
-export interface BriefFlag {
-  readonly flag: string;
-  readonly argument: string;
-  /** Path in the brief. */
-  readonly key: string;
-  readonly help: string;
-}
+import { type BriefFlag, SHOT_FLAGS } from "./shotFlags.ts";
 
-export const BRIEF_FLAGS: readonly BriefFlag[] = [
+export { type BriefFlag, FLAG_GROUPS } from "./shotFlags.ts";
+
+const BANK_FLAGS: readonly BriefFlag[] = [
   { flag: "--title", argument: "<text>", key: "title", help: "name of the bank" },
   { flag: "--energy", argument: "<energy>", key: "energy", help: 'energy of one pulse, such as "2.4 kJ"' },
   { flag: "--voltage", argument: "<voltage>", key: "voltage", help: 'charge voltage, such as "2.2 kV"' },
@@ -18,7 +14,7 @@ export const BRIEF_FLAGS: readonly BriefFlag[] = [
     key: "ripple",
     help: 'allowed fall in voltage, "20 %"; "100 %" is a full dump',
   },
-  { flag: "--basis", argument: "<basis>", key: "basis", help: "worst case, nominal or statistical" },
+  { flag: "--basis", argument: "<basis>", key: "basis", help: "worst case, nominal, statistical or measured" },
   { flag: "--risk", argument: "<fraction>", key: "risk", help: "risk of the statistical basis" },
   {
     flag: "--distribution",
@@ -57,11 +53,17 @@ export const BRIEF_FLAGS: readonly BriefFlag[] = [
     key: "steady.frequency",
     help: "how often the charger tops up",
   },
-  { flag: "--load-resistance", argument: "<resistance>", key: "load.resistance", help: "resistance of the load" },
-  { flag: "--load-inductance", argument: "<inductance>", key: "load.inductance", help: "inductance of the load" },
   { flag: "--rate", argument: "<rate>", key: "rate", help: 'shots, "0.1 Hz"' },
+  {
+    flag: "--dump-resistance",
+    argument: "<resistance>",
+    key: "dumpResistance",
+    help: "resistor that empties the bank; sets the clamp diodes' surge",
+  },
   { flag: "--ambient", argument: "<temperature>", key: "ambient", help: 'air around the bank, "30 degC"' },
 ];
+
+export const BRIEF_FLAGS: readonly BriefFlag[] = [...BANK_FLAGS, ...SHOT_FLAGS];
 
 /** The name under which commander hands over a flag's value. */
 export const attributeOf = (flag: string): string =>

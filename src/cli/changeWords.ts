@@ -14,6 +14,13 @@ const NAMES: Readonly<Record<string, readonly [name: string, dimension: Dimensio
   maxCost: ["the most it may cost", "count"],
   maxVolume: ["the most room", "volume"],
   maxMass: ["the most mass", "mass"],
+  maxPeakCurrent: ["the most peak current of a unit", "current"],
+  maxSlew: ["the most slew of a unit", "slew"],
+  maxReversal: ["the most reversal", "fraction"],
+  maxRms: ["the most rms current of a unit", "current"],
+  maxTemperatureRise: ["the most rise in K of a unit", "count"],
+  maxFaultEnergy: ["the most energy into a shorted unit", "energy"],
+  minLife: ["the least life", "count"],
 };
 
 /** One sentence; `currency` is that of the plan. */
@@ -21,7 +28,9 @@ export function changeWords({ field, from, to, layout, note }: Change, currency:
   const then = `then ${visible(layout)} fits`;
   if (field === "available")
     return `have ${to} of ${visible(note)} to buy${from === null ? "" : ` instead of ${from}`}: ${then}`;
-  const [name, dimension] = NAMES[field] ?? [field, "count" as const];
+  const [name, own] = NAMES[field] ?? [field, "count" as const];
+  // a limit that was asked as a part of the unit's rating stays one
+  const dimension = note === "rating" ? "fraction" : own;
   const unit = field === "maxCost" && currency !== null ? ` ${currency}` : "";
   const show = (x: number): string =>
     `${formatQuantity(x, dimension, { digits: dimension === "count" ? 8 : 4 })}${unit}`;

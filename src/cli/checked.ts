@@ -4,12 +4,19 @@ import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
 import { accepted, type Read, refused } from "../quantity/index.ts";
 import { assess, type BalanceWish, type LayoutResult, planCurrency } from "../search/index.ts";
 import { type LayoutFlags, type LayoutInput, readLayout } from "./layoutInput.ts";
+import { readLot } from "./measuredLot.ts";
 import type { Ports } from "./ports.ts";
-import { type Flags, type Settings, settle } from "./settings.ts";
+import { type Flags, type Nest, type Settings, settle } from "./settings.ts";
 import { findPart, readStock, type Stock } from "./stock.ts";
+import { refusalWords } from "./words.ts";
 
 export type BankFlags = Flags &
-  LayoutFlags & { readonly catalog?: readonly string[]; readonly resistors?: string; readonly json?: boolean };
+  LayoutFlags & {
+    readonly catalog?: readonly string[];
+    readonly resistors?: string;
+    readonly json?: boolean;
+    readonly measured?: string;
+  };
 
 export interface Checked {
   readonly result: LayoutResult;
@@ -17,24 +24,39 @@ export interface Checked {
   readonly settings: Settings;
   readonly stock: Stock;
   readonly currency: string | null;
+  /** Measured capacitances, F, that the chance is reckoned from. */
+  readonly lot?: readonly number[];
   /** Said beside the result: how the resistor came about where that is not plain. */
   readonly notes: readonly string[];
 }
 
 /** Reads everything and assesses; every fault of every input is told at once. */
-export function checkedBank(brief: string | undefined, flags: BankFlags, ports: Ports): Read<Checked> {
-  const settings = settle(brief, flags, ports.files);
+export function checkedBank(
+  brief: string | undefined,
+  flags: BankFlags,
+  ports: Ports,
+  fill?: (input: Nest) => Nest,
+): Read<Checked> {
+  const settings = settle(brief, flags, ports.files, fill);
   const stock = readStock(flags, ports.files);
   const families: readonly ResistorFamily[] = stock.ok ? stock.value.families : [];
   const input = readLayout(flags, ports.files, families[0]?.tolerance ?? 0.05);
   if (!settings.ok || !stock.ok || !input.ok) {
     return refused(...[settings, stock, input].flatMap((read) => (read.ok ? [] : read.refusals)));
   }
+  if (settings.value.brief.basis === "measured") {
+    // Without the units it would be a promise that nobody checked.
+    const want = "plan or place with --measured, where the units judge; here another --basis, which beats the brief's";
+    return refused({ code: "contradiction", place: { field: "basis" }, read: "measured", want });
+  }
   const place = { field: flags.layout === undefined ? "--part" : `${flags.layout} part` };
   const unit = findPart(input.value.layout.part, stock.value.parts, place);
   if (!unit.ok) return unit;
   const currency = planCurrency(settings.value.brief, [unit.value], families);
   if (!currency.ok) return currency;
+  const lot = flags.measured === undefined ? undefined : lotFor(flags.measured, unit.value.part, settings.value, ports);
+  if (lot?.ok === false) return lot;
+  const values = lot === undefined ? {} : { lot: lot.value };
   const of: Assess = (balance, among = families) =>
     assess({
       unit: unit.value,
@@ -43,6 +65,7 @@ export function checkedBank(brief: string | undefined, flags: BankFlags, ports: 
       families: among,
       currency: currency.value,
       balance,
+      ...values,
     });
   const { result, notes } = balanced(input.value, families, flags.balanceTolerance !== undefined, of);
   return accepted({
@@ -51,8 +74,21 @@ export function checkedBank(brief: string | undefined, flags: BankFlags, ports: 
     settings: settings.value,
     stock: stock.value,
     currency: currency.value,
+    ...values,
     notes,
   });
+}
+
+/** Only the statistical basis draws from a lot; rows that were lost are told at once. */
+function lotFor(path: string, part: string, { brief }: Settings, ports: Ports): Read<readonly number[]> {
+  if (brief.basis !== "statistical") {
+    const want = "--basis statistical beside it: a lot says how likely an excess is";
+    return refused({ code: "contradiction", place: { field: "--measured" }, read: `basis ${brief.basis}`, want });
+  }
+  const lot = readLot(path, part, ports.files);
+  if (!lot.ok) return lot;
+  if (lot.value.faults.length > 0) ports.err(`${lot.value.faults.map(refusalWords).join("\n")}\n`);
+  return accepted(lot.value.values);
 }
 
 type Assess = (balance: BalanceWish, among?: readonly ResistorFamily[]) => LayoutResult;

@@ -1,7 +1,7 @@
 // All reading and writing of files: whole texts in, whole texts out, nothing half-written, every trouble a refusal.
 
 import * as nodeFs from "node:fs";
-import { basename, dirname, join } from "node:path";
+import { dirname, join } from "node:path";
 import { accepted, type Read } from "../quantity/index.ts";
 import { codeOf, refuseFile as refuse, trouble } from "./fileTroubles.ts";
 
@@ -103,10 +103,24 @@ function standing(fs: FileSystem, path: string): nodeFs.Stats | null {
   }
 }
 
+/** Leftovers of earlier runs that are stepped over: a process that was killed may have had our number. */
+const LEFTOVERS = 100;
+
+/** Opens a new file beside the target. Its name is short, however long the target's is. */
+function openBeside(fs: FileSystem, target: string): { readonly temporary: string; readonly handle: number } {
+  for (let attempt = 0; ; attempt++) {
+    const temporary = join(dirname(target), `.joulewright.${process.pid}.${attempt}.partial`);
+    try {
+      return { temporary, handle: fs.openSync(temporary, "wx", 0o666) };
+    } catch (error) {
+      if (codeOf(error) !== "EEXIST" || attempt === LEFTOVERS) throw error;
+    }
+  }
+}
+
 /** A new file beside the target, filled and flushed; removed again when that fails. */
 function fillBeside(fs: FileSystem, target: string, text: string, mode: number | null): string {
-  const temporary = join(dirname(target), `.${basename(target).slice(0, 100)}.${process.pid}.partial`);
-  const handle = fs.openSync(temporary, "wx", 0o666);
+  const { temporary, handle } = openBeside(fs, target);
   try {
     try {
       writeAll(fs, handle, text);

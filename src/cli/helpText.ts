@@ -13,9 +13,15 @@ The layout is given by --part, --series, --parallel and --ties, or by --layout F
 
 export const HELP = {
   program: `
+Without a command the screens open, on the invented demo catalogues or on your own:
+  joulewright [--catalog FILE...] [--resistors FILE] [--brief FILE] [--ascii]
+Where there is no terminal, joulewright alone prints the plan of the demo brief.
+
 Examples:
+  $ joulewright --catalog mine.csv --brief brief.json
   $ joulewright plan brief.json --catalog mine.csv --resistors resistors.csv
   $ joulewright check brief.json --part pf-330 --series 9 --parallel 31 --ties cross-tied --catalog mine.csv
+  $ joulewright pulse brief.json --layout chosen.json --catalog mine.csv --load-resistance "0.9 ohm"
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --output order.csv
   $ joulewright parts mine.csv
 ${STATUS}
@@ -25,19 +31,55 @@ Examples:
   $ joulewright plan --energy "2.4 kJ" --voltage "2.2 kV" --ripple "100 %" --catalog mine.csv theirs.csv
   $ joulewright plan brief.json --catalog mine.csv --rank volume --limit 5
   $ joulewright plan - --catalog mine.csv --json < brief.json
+  $ joulewright plan brief.json --catalog mine.csv --resistors resistors.csv --blend --explain --within "2 %"
   $ joulewright plan --brief-schema
+
+With a load, --max-peak-current, --max-reversal and the other limits on the shot are kept in the search: for each shape
+the least parallel count that keeps them all. A limit that cannot be judged, for want of a rating, refuses the part.
 ${BRIEF}${STATUS}`,
   check: `
 Examples:
   $ joulewright check brief.json --part pf-330 --series 9 --parallel 31 --ties cross-tied --catalog mine.csv
   $ joulewright check brief.json --layout chosen.json --catalog mine.csv --json
   $ joulewright check brief.json --layout chosen.json --balance "24 kohm" --balance-tolerance "5 %" --catalog mine.csv
+  $ joulewright check brief.json --layout chosen.json --basis statistical --witness 1e6 --seed 7 --catalog mine.csv
+  $ joulewright check brief.json --layout chosen.json --basis statistical --measured lot.csv --catalog mine.csv
+${LAYOUT}${BRIEF}${STATUS}`,
+  pulse: `
+Examples:
+  $ joulewright pulse --voltage "2 kV" --load-resistance "0.9 ohm" --load-inductance "25 uH" \\
+      --part op-100 --series 1 --parallel 1 --catalog mine.csv
+  $ joulewright pulse brief.json --layout chosen.json --catalog mine.csv --waveform shot.csv --fuses fuses.csv
+  $ joulewright plan --energy "200 J" --lamp-bore "8 mm" --lamp-arc "100 mm" --lamp-gas xenon \\
+      --lamp-pressure "450 torr" --lamp-width "500 us" --catalog mine.csv
+
+The load is one of: a resistance, with or without an inductance; a lamp; a short; a steady current for a time; a
+recorded current. The loop is load, bus, switch and the bank's own ESR and ESL (n/p of a unit's). What is unknown is
+left out and every figure it bears on is called a bound. Without a bus, a load with both resistance and inductance
+(0 counts) stands for everything outside the bank. No energy and no fall need be asked here.
+A lamp with --lamp-width and --energy sets voltage and coil where they are not given; pulse then says how far the bank
+that can be built lands from that circuit. The lamp's datasheet comes first.
 ${LAYOUT}${BRIEF}${STATUS}`,
   order: `
 Examples:
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --output order.csv
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --format md
 ${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
+  place: `
+Examples:
+  $ joulewright place --series 6 --parallel 10 --ties cross-tied --measured lot.csv
+  $ joulewright place --series 6 --parallel 10 --ties strings --measured lot.csv --voltage "2 kV" --output list.csv
+  $ joulewright place brief.json --layout chosen.json --catalog mine.csv --measured lot.csv --json > bank.json
+  $ joulewright place --series 6 --parallel 10 --ties cross-tied --measured lot.csv --positions list.csv --without pf-014
+A plain shape is enough: --part, --catalog, BRIEF and --voltage add limits, resistors and voltages.
+Same file, seed and moves: same list, byte for byte.${STATUS}`,
+  commission: `
+Examples:
+  $ joulewright commission bank.json --readings readings.csv --unit-limit "324 V"
+  $ joulewright commission bank.json --readings readings.csv --meter "0.2 %" --resolution "0.1 V" --json
+  $ joulewright commission bank.json --readings readings.csv --next-voltage "1.6 kV" --next-hold "10 min"
+SHEET is what place --json wrote. A row of readings is one reading: stage (cross-tied), or string and place, or serial.
+Exit status: 0 agrees; 1 differs, or stop; 2 wrong use or unreadable input; 70 a bug of ours.`,
   parts: `
 Examples:
   $ joulewright parts mine.csv resistors.csv

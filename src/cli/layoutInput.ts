@@ -84,6 +84,15 @@ function readBalance({ balance, balanceTolerance }: LayoutFlags, defaultToleranc
 const isTies = (text: unknown): text is Ties => text === "cross-tied" || text === "strings";
 
 function fromFlags(flags: LayoutFlags): Read<Layout> {
+  const part = flags.part ?? "";
+  const missing = refuse("missing-option", "--part", "nothing", "the name of a part of the catalogues");
+  const shape = readShape(flags);
+  if (part === "") return refused(missing, ...(shape.ok ? [] : shape.refusals));
+  return shape.ok ? accepted(plainTies({ part, ...shape.value })) : shape;
+}
+
+/** Series, parallel and ties from the flags, as they were asked for. */
+export function readShape(flags: LayoutFlags): Read<Omit<Layout, "part">> {
   const faults: Refusal[] = [];
   const count = (name: "series" | "parallel"): number => {
     const text = flags[name];
@@ -93,8 +102,6 @@ function fromFlags(flags: LayoutFlags): Read<Layout> {
     else if (!(value >= 1 && value <= MOST)) faults.push(refuse("bad-count", `--${name}`, JSON.stringify(text), want));
     return value;
   };
-  const part = flags.part ?? "";
-  if (part === "") faults.push(refuse("missing-option", "--part", "nothing", "the name of a part of the catalogues"));
   const series = count("series");
   const parallel = count("parallel");
   const alone = series === 1 || parallel === 1;
@@ -102,8 +109,7 @@ function fromFlags(flags: LayoutFlags): Read<Layout> {
   const words = "cross-tied or strings";
   if (ties === undefined) faults.push(refuse("missing-option", "--ties", "nothing", words));
   else if (!isTies(ties)) faults.push(refuse("bad-choice", "--ties", JSON.stringify(ties), words));
-  if (faults.length > 0 || !isTies(ties)) return refused(...faults);
-  return accepted(plainTies({ part, series, parallel, ties }));
+  return faults.length > 0 || !isTies(ties) ? refused(...faults) : accepted({ series, parallel, ties });
 }
 
 function fromFile(path: string, files: Files): Read<Omit<LayoutInput, "balance">> {

@@ -5,6 +5,7 @@ import { visible } from "../order/index.ts";
 import { type Finding, formatQuantity } from "../quantity/index.ts";
 import type { LayoutResult } from "../search/index.ts";
 import { findingFigures, titleOf, VERDICTS } from "./findingWords.ts";
+import { withoutBalanceWords } from "./restText.ts";
 import { textTable } from "./table.ts";
 import { pad, wrap } from "./wrap.ts";
 
@@ -81,6 +82,7 @@ export function assumptionsOf(unit: Capacitor, layout: LayoutResult): readonly s
 /** The layout in full, as `check` and the best of a plan print it. */
 export function layoutText(layout: LayoutResult, unit: Capacitor, width: number): string {
   const { cost } = layout;
+  const without = withoutBalanceWords(layout);
   const left = cost !== null && cost.unpriced.length > 0 ? `; without a price: ${cost.unpriced.join(", ")}` : "";
   const facts: readonly (readonly [string, string])[] = [
     ["shape", `${layout.series} in series, ${layout.parallel} in parallel, ${layout.ties}, ${layout.units} units`],
@@ -88,6 +90,7 @@ export function layoutText(layout: LayoutResult, unit: Capacitor, width: number)
     ["energy of a pulse", span(layout, "energy")],
     ["even share", `${formatQuantity(layout.share.even, "voltage")} on each`],
     ["balancing", balanceWords(layout)],
+    ...(without === "" ? [] : [["without resistors", without] as const]),
     ["bleed", bleedWords(layout)],
     ["cost", cost === null ? "no price" : `${money(cost.total, cost.currency)}${left}`],
     [

@@ -7,9 +7,13 @@ import type { LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import { askedText } from "./askedText.ts";
 import { cautionsOf } from "./cautions.ts";
 import { changeWords } from "./changeWords.ts";
+import { improveText } from "./improveText.ts";
+import { lampFits } from "./lampFits.ts";
 import { layoutText, money } from "./layoutText.ts";
 import { rankedTable } from "./rankedTable.ts";
-import { reasonWords } from "./reasonWords.ts";
+import { mendsWords, reasonWords } from "./reasonWords.ts";
+import { lampText } from "./shotRateText.ts";
+import { worstCaseText } from "./worstCaseText.ts";
 import { bullet, wrap } from "./wrap.ts";
 
 export interface PlanText {
@@ -20,6 +24,17 @@ export interface PlanText {
   readonly width: number;
   /** Sentences about what was read. */
   readonly inputs: readonly string[];
+}
+
+/** The lamp's ideal circuit, and how far the best bank lands from it. */
+function lampPlanText({ result, parts, width }: PlanText): string {
+  const { lampDrive } = lampFits(result, parts);
+  if (lampDrive === undefined) return "";
+  const { ideal, fits } = lampDrive;
+  const show = (x: number, dimension: "capacitance" | "inductance" | "voltage"): string => formatQuantity(x, dimension);
+  const best = fits[0]?.report;
+  const wish = `Lamp's ideal circuit: ${show(ideal.capacitance, "capacitance")}, ${show(ideal.inductance, "inductance")}, ${show(ideal.voltage, "voltage")}.`;
+  return [wrap(wish, width), ...(best ? [`${lampText(best, width)}`] : [])].join("\n");
 }
 
 /** Refused parts and members of the front that are listed one by one. */
@@ -33,8 +48,12 @@ export function planText(of: PlanText): string {
   const how = proof === "exhaustive" ? "every part, series count and tie was tried" : `proof: ${proof}`;
   const blocks = [
     `${title}\n\nAsked\n${askedText(result.brief, of.given, width)}`,
-    wrap(`Capacitance needed: ${need}. Searched ${parts} parts; ${layouts} layouts do it; ${proof}: ${how}.`, width),
+    wrap(
+      `Capacitance needed: ${need}. Searched ${parts} ${parts === 1 ? "part" : "parts"}; ${layouts} ${layouts === 1 ? "layout does" : "layouts do"} it; ${proof}: ${how}.`,
+      width,
+    ),
     ...of.inputs.map((text) => wrap(text, width)),
+    lampPlanText(of),
     ...(result.layouts.length > 0 ? fitting(of) : nothing(of)),
     refusedText(result, width),
     ...result.notes.map((note) => wrap(`Note: ${note}`, width)),
@@ -54,6 +73,8 @@ function fitting({ result, parts, rank, width }: PlanText): readonly string[] {
   return [
     `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}\n${wrap(legend, width, "  ")}`,
     `Best: ${visible(best.id)}\n${wrap(whyBest(result, rank), width, "  ")}\n${layoutText(best, unit, width)}`,
+    ...(result.worstCase === undefined ? [] : [wrap(worstCaseText(result), width)]),
+    ...(result.improve ? [`What eats its margin\n${improveText(result.improve, result.currency, width)}`] : []),
     frontText(result, width),
   ];
 }
@@ -98,7 +119,12 @@ function refusedText({ refused, currency }: PlanResult, width: number): string {
   if (refused.length === 0) return "";
   const rows = refused
     .slice(0, LISTED)
-    .map((one) => bullet(`${visible(one.part)}: ${reasonWords(one, currency)}`, width));
+    .map((one) =>
+      bullet(
+        `${visible(one.part)}: ${reasonWords(one, currency)}${one.mends ? `. ${mendsWords(one.mends)}` : ""}`,
+        width,
+      ),
+    );
   const more = refused.length > LISTED ? `\n  and ${refused.length - LISTED} more (all with --json)` : "";
   return `Refused parts: ${refused.length}\n${rows.join("\n")}${more}`;
 }

@@ -10,6 +10,15 @@ export interface Ports {
   readonly files: Files;
   /** Folder of the catalogues that come with the program. */
   readonly catalogs: string;
+  /** Long counting beside the main thread; absent: in it, silent, not to be interrupted. */
+  readonly background?: {
+    /** File of the worker thread. */
+    readonly entry: URL;
+    /** The error stream is a terminal: progress is shown. */
+    readonly terminal: boolean;
+    /** Calls back at the user's interrupt, until the function that it gives is called. */
+    readonly onInterrupt: (stop: () => void) => () => void;
+  };
 }
 
 /** Narrowest and widest text that is laid out for; a terminal beyond them gets the nearer one. */

@@ -1,5 +1,6 @@
 // What holds: a flag beats the brief file, which beats the defaults. Decided here and nowhere else.
 
+import { readWaveform } from "../catalog/index.ts";
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { type Brief, readBrief } from "../search/index.ts";
 import { attributeOf, BRIEF_FLAGS } from "./briefFlags.ts";
@@ -17,7 +18,7 @@ export interface Settings {
   readonly flags: readonly string[];
 }
 
-type Nest = Record<string, unknown>;
+export type Nest = Record<string, unknown>;
 
 /** Puts a value at a path, copying what it changes. */
 function withValue(target: Nest, path: readonly string[], value: unknown): Nest {
@@ -41,8 +42,25 @@ function readExchange(entries: readonly string[]): Read<Readonly<Record<string, 
   return accepted(rates);
 }
 
-/** Joins the brief file (if any) and the flags, and reads the brief. Every refusal names its file, line and column, or its flag. */
-export function settle(file: string | undefined, flags: Flags, files: Files): Read<Settings> {
+/** The input with the file of a recorded current read in its place. */
+function withRecord(input: Nest, files: Files): Read<Nest> {
+  const load = input.load as Nest | undefined;
+  const path = typeof load === "object" && load !== null ? load.recorded : undefined;
+  if (typeof path !== "string") return accepted(input);
+  const text = files.read(path);
+  if (!text.ok) return text;
+  const rows = readWaveform(text.value, path === "-" ? "standard input" : path);
+  if (!rows.ok) return rows;
+  return accepted({ ...input, load: { ...load, recorded: rows.value.map(({ time, current }) => [time, current]) } });
+}
+
+/** Joins the brief file (if any) and the flags, and reads the brief. Every refusal names its file, line and column, or its flag. `fill` puts in what the command needs and the user left out. */
+export function settle(
+  file: string | undefined,
+  flags: Flags,
+  files: Files,
+  fill: (input: Nest) => Nest = (input) => input,
+): Read<Settings> {
   let input: unknown = {};
   let placeOf: JsonText["placeOf"] = () => undefined;
   const name = file === "-" ? "standard input" : file;
@@ -70,7 +88,9 @@ export function settle(file: string | undefined, flags: Flags, files: Files): Re
     used.push(flag);
     byKey.set(key, flag);
   }
-  const brief = readBrief(input);
+  const record = withRecord(input as Nest, files);
+  if (!record.ok) return record;
+  const brief = readBrief(fill(record.value));
   if (!brief.ok) return refused(...brief.refusals.map((refusal) => placed(refusal, { name, placeOf, byKey })));
   return accepted({ brief: brief.value, given: keysOf(input as Nest), file: name ?? null, flags: used });
 }

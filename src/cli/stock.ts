@@ -86,7 +86,8 @@ export function readStock(
   if (resistors !== null && !resistors.ok) refusals.push(...resistors.refusals);
   if (refusals.length > 0) return refused(...refusals);
   if (parts.length === 0) {
-    const faults = sources.flatMap((source) => source.faults);
+    // The notes too: a heading that was passed over may be why.
+    const faults = sources.flatMap((source) => [...source.faults, ...source.notes]);
     const place = { file: given.catalog.map(nameOf).join(", ") };
     return refused(...faults, { code: "no-parts", place, read: "no good row", want: "at least one good row" });
   }
@@ -110,7 +111,7 @@ function readFamilies(
   if (!read.ok) return read;
   const { families, faults, notes } = read.value;
   if (families.length === 0)
-    return refused(...faults, {
+    return refused(...faults, ...notes, {
       code: "no-parts",
       place: { file },
       read: "no good row",

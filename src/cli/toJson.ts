@@ -1,4 +1,6 @@
-// Results as JSON: no number that JSON lacks ever gets in; an endless hold is said in the brief's own words.
+// Results as JSON: no number that JSON lacks ever gets in, and no hidden character; an endless hold is said in the brief's own words.
+
+import { visibleJson } from "../order/index.ts";
 
 /** Pretty JSON ending in a line break. Infinity under `hold` is "for ever"; any other number that is not finite is null, unknown. */
 export function toJson(value: unknown): string {
@@ -10,5 +12,5 @@ export function toJson(value: unknown): string {
     },
     2,
   );
-  return `${text}\n`;
+  return `${visibleJson(text)}\n`;
 }

@@ -15,13 +15,16 @@ export const WORDS: Readonly<Record<string, string>> = {
   "bad-json": "this is not JSON",
   "bad-layout": "this is no layout",
   "bad-path": "the system cannot use this path",
+  "bad-position": "the bank has no such place",
   "bad-price": "this is no price",
+  "bad-sheet": "this is no sheet of a placed bank",
   "bad-tolerance": "this is no tolerance",
   "bad-value": "the value cannot be used",
   "bad-yes-no": "this is neither yes nor no",
   "binary-file": "the file is not text",
   "broken-quotes": "the quotes do not match",
   "row-too-long": "the row has more cells than there are headings",
+  commission: "the readings cannot be judged",
   contradiction: "values contradict each other",
   "disk-full": "the disk is full; nothing was written",
   "duplicate-heading": "a heading stands twice",
@@ -49,6 +52,9 @@ export const WORDS: Readonly<Record<string, string>> = {
   "out-of-range": "the value is out of range",
   place: "the measured units or the shape cannot be placed",
   "place.duplicate-serial": "a serial stands twice",
+  "place.list-shape": "the list does not fit the shape of the bank",
+  "place.list-unknown": "no measured unit has this serial",
+  "place.not-fitted": "this unit is not in the bank",
   "place.pin-full": "more units are pinned than there is room for",
   "place.pin-group": "there is no such place to pin to",
   "place.pin-twice": "a unit is pinned twice",
@@ -57,12 +63,15 @@ export const WORDS: Readonly<Record<string, string>> = {
   "pulse.bus": "the bus cannot be reckoned with",
   "pulse.charge": "the charger cannot be reckoned with",
   "pulse.circuit": "the circuit cannot be reckoned with",
+  "pulse.drop": "the switch drop leaves nothing for the load",
+  "pulse.steady": "the bank cannot hold this current for so long",
   "pulse.lamp": "the lamp cannot be reckoned with",
   "pulse.lampDrive": "the lamp circuit cannot be sized",
   "pulse.loop": "the loop cannot be reckoned with",
   "pulse.samples": "the waveform cannot be read",
   "read-only": "the place is read-only; nothing was written",
   "tolerance-range": "the tolerance is out of range",
+  "small-lot": "there are too few measured units",
   "too-deep": "the nesting is too deep",
   "too-large": "the file is too large",
   "too-long": "the text is too long",
@@ -86,9 +95,15 @@ export function placeWords({ file, line, column, field }: Place): string {
   return visible([spot, field ?? ""].filter((part) => part !== "").join(" "));
 }
 
+/** Longest piece of input that is repeated, characters: enough to find it again. */
+const LONGEST_READ = 200;
+
+const clipped = (text: string): string =>
+  text.length <= LONGEST_READ ? text : `${text.slice(0, LONGEST_READ)}... (${text.length} characters)`;
+
 /** One sentence, safe to print. */
 export function refusalWords({ code, place, read, want }: Refusal): string {
   const where = placeWords(place);
-  const what = `${wordsOf(code)}: read ${visible(read)}; accepted: ${visible(want)}`;
+  const what = `${wordsOf(code)}: read ${visible(clipped(read))}; accepted: ${visible(want)}`;
   return where === "" ? what : `${where}: ${what}`;
 }

@@ -9,6 +9,7 @@ export const LINE_KINDS = [
   "bleed resistor",
   "fuses",
   "fuse holders",
+  "isolating resistors",
   "dump resistor",
   "dump relay",
   "earthing stick",

@@ -4,6 +4,7 @@ import type { Bill } from "./bill.ts";
 import { billToCsv } from "./csv.ts";
 import { billToHtml } from "./html.ts";
 import { billToMarkdown } from "./markdown.ts";
+import { visibleJson } from "./visible.ts";
 
 export const BILL_FORMATS = ["csv", "json", "md", "html"] as const;
 export type BillFormat = (typeof BILL_FORMATS)[number];
@@ -14,7 +15,7 @@ export function billText(bill: Bill, format: BillFormat): string {
     case "csv":
       return billToCsv(bill);
     case "json":
-      return `${JSON.stringify(bill, null, 2)}\n`;
+      return `${visibleJson(JSON.stringify(bill, null, 2))}\n`;
     case "md":
       return billToMarkdown(bill);
     case "html":

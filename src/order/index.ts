@@ -3,5 +3,6 @@ export { type Bill, type BillLine, LINE_KINDS, type LineKind, type LineState, ty
 export { type BillInput, billOf } from "./billOf.ts";
 export { BILL_COLUMNS, type BillColumn } from "./columns.ts";
 export { type Counts, countsOf } from "./counts.ts";
+export { csvText } from "./csv.ts";
 export { BILL_FORMATS, type BillFormat, billText } from "./formats.ts";
-export { visible, visibleLines } from "./visible.ts";
+export { visible, visibleJson, visibleLines } from "./visible.ts";

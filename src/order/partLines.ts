@@ -7,6 +7,8 @@ import type { BillLine, LineKind } from "./bill.ts";
 
 const NOT_TO_BE_HAD = "Not enough can be had: ask the supplier, or choose another layout.";
 
+const WITH_SPARES = "Packs and surplus are those of units and spares together.";
+
 /** How much of one purchase a line takes: the rest of it belongs to another line. */
 interface Take {
   readonly needed: number;
@@ -26,7 +28,8 @@ interface Wording {
   readonly note: string;
 }
 
-function pricedLine(wording: Wording, terms: PurchaseTerms, take: Take, unitPrice: number | null): BillLine {
+/** A line bought on the terms of a catalogue row. */
+export function pricedLine(wording: Wording, terms: PurchaseTerms, take: Take, unitPrice: number | null): BillLine {
   const { needed, fromHand, surplus, packs, cost } = take;
   const currency = terms.currency ?? "EUR";
   const bought = needed - fromHand + surplus;
@@ -92,7 +95,7 @@ export function unitLines(layout: LayoutResult, unit: Capacitor, spares: number)
     line: "units",
     value: formatQuantity(unit.capacitance, "capacitance"),
     rating: unitRating(unit),
-    note: unit.note ?? "",
+    note: [unit.note ?? "", spares > 0 ? WITH_SPARES : ""].filter((part) => part !== "").join(" "),
   };
   const spareWording: Wording = {
     ...wording,

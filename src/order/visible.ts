@@ -15,5 +15,13 @@ export function visible(text: string): string {
   return text.replace(/\r\n|[\n\t]/g, " ").replace(HIDDEN, escaped);
 }
 
-/** The same, line by line, for text of our own that carries pieces of unknown origin. */
+const unicodeEscape = (char: string): string =>
+  Array.from({ length: char.length }, (_, i) => `\\u${char.charCodeAt(i).toString(16).padStart(4, "0")}`).join("");
+
+/** JSON text in which no character is hidden: each stands as the \u escape that reads back to it. Line breaks between values stay. */
+export const visibleJson = (json: string): string =>
+  // JSON.stringify leaves direction marks and the controls from U+007F up as they are.
+  json.replace(/[^\x20-\x7e\n]+/g, (run) => run.replace(HIDDEN, unicodeEscape));
+
+/** `visible`, line by line, for text of our own that carries pieces of unknown origin. */
 export const visibleLines = (text: string): string => text.split("\n").map(visible).join("\n");

@@ -33,7 +33,7 @@ export interface CourseRow {
 export type Course = (stages: readonly StageModel[], bank: number, times: readonly number[]) => readonly CourseRow[];
 
 const GAMMA = 1 - Math.SQRT1_2;
-const FIRST_STEP = 0.02;
+const FIRST_STEP = 0.05;
 const GROWTH = 1.15;
 
 export const conductanceOf = ({ conductance, resistance }: StageModel): number => conductance + 1 / resistance;
@@ -56,27 +56,31 @@ export function heldVolts(stages: readonly StageModel[], bank: number): number[]
   return conductances.map((g) => bank / g / sum);
 }
 
-/** One implicit part-step of length h gamma from `from`: the common current makes the voltages add up to `bank`. */
-function implicit(stages: readonly StageModel[], from: readonly number[], bank: number, step: number): number[] {
-  let free = 0;
-  let perAmpere = 0;
-  const denominators = stages.map((stage) => stage.capacitance + step * conductanceOf(stage));
-  for (const [i, stage] of stages.entries()) {
-    free += (stage.capacitance * from[i]!) / denominators[i]!;
-    perAmpere += step / denominators[i]!;
-  }
-  const current = (bank - free) / perAmpere;
-  return stages.map((stage, i) => (stage.capacitance * from[i]! + step * current) / denominators[i]!);
-}
-
-function advance(stages: readonly StageModel[], volts: readonly number[], bank: number, step: number): number[] {
+/** Advances `volts` in place by `step` s: two implicit part-steps, in each of which the common current makes the sum `bank`. */
+function advance(stages: readonly StageModel[], volts: Float64Array, bank: number, step: number): void {
   const part = GAMMA * step;
-  const middle = implicit(stages, volts, bank, part);
-  const second = volts.map((v, i) => v + ((1 - GAMMA) / GAMMA) * (middle[i]! - v));
-  return implicit(stages, second, bank, part);
+  const from = Float64Array.from(volts);
+  for (let half = 0; half < 2; half++) {
+    let free = 0;
+    let perAmpere = 0;
+    for (let i = 0; i < volts.length; i++) {
+      const { capacitance, conductance, resistance } = stages[i]!;
+      const denominator = capacitance + part * (conductance + 1 / resistance);
+      free += (capacitance * from[i]!) / denominator;
+      perAmpere += part / denominator;
+    }
+    const current = (bank - free) / perAmpere;
+    for (let i = 0; i < volts.length; i++) {
+      const { capacitance, conductance, resistance } = stages[i]!;
+      const reached = (capacitance * from[i]! + part * current) / (capacitance + part * (conductance + 1 / resistance));
+      // The second part-step starts from the line through the start and the end of the first.
+      from[i] = half === 0 ? volts[i]! + ((1 - GAMMA) / GAMMA) * (reached - volts[i]!) : reached;
+    }
+  }
+  volts.set(from);
 }
 
-function holdCurrent(stages: readonly StageModel[], volts: readonly number[]): number {
+function holdCurrent(stages: readonly StageModel[], volts: ArrayLike<number>): number {
   let flow = 0;
   let inverse = 0;
   for (const [i, stage] of stages.entries()) {
@@ -89,18 +93,19 @@ function holdCurrent(stages: readonly StageModel[], volts: readonly number[]): n
 /** The course with the charger on, holding `bank`. */
 export const chargerOn: Course = (stages, bank, times) => {
   const fastest = Math.max(...stages.map((stage) => conductanceOf(stage) / stage.capacitance));
-  let volts = chargedVolts(stages, bank);
+  const volts = Float64Array.from(chargedVolts(stages, bank));
   let now = 0;
   let step = fastest > 0 ? FIRST_STEP / fastest : Number.POSITIVE_INFINITY;
   return times.map((time) => {
     while (time > now) {
       const length = Math.min(step, time - now);
       // Nothing conducts, or the hold is endless: the voltages it ends in are known.
-      volts = Number.isFinite(length) ? advance(stages, volts, bank, length) : heldVolts(stages, bank);
+      if (Number.isFinite(length)) advance(stages, volts, bank, length);
+      else volts.set(heldVolts(stages, bank));
       now = length === step ? now + length : time;
       step *= GROWTH;
     }
-    return { volts, current: holdCurrent(stages, volts) };
+    return { volts: Array.from(volts), current: holdCurrent(stages, volts) };
   });
 };
 

@@ -91,7 +91,7 @@ export function mixedParts(units: readonly MeasuredUnit[], groups: readonly (rea
       value: mixed.length,
       limit: 0,
       note,
-      source: "practice",
+      source: "common-practice",
     }),
   ];
 }

@@ -3,8 +3,10 @@ import { board, groupsOf } from "./board.ts";
 import type { Conductances } from "./conductance.ts";
 import type { Constraints } from "./constraints.ts";
 import { type Effort, mayGoOn, settle, share } from "./effort.ts";
+import { levelBoth } from "./levelBoth.ts";
 import type { Random } from "./random.ts";
-import { type Gaps, holdLevel } from "./twoGoals.ts";
+import type { Solution } from "./solution.ts";
+import { bothGaps, type Gaps, holdLevel } from "./twoGoals.ts";
 import { holdStrings } from "./twoGoalsStrings.ts";
 import type { Ties } from "./unit.ts";
 
@@ -74,4 +76,31 @@ export function* holdAgain(
     if (next.gaps.holding < best.gaps.holding && next.gaps.charging <= task.limit) best = next;
   }
   return best;
+}
+
+/** What holding may lose again while charging is levelled to the end: a third, or up to what no leakage meter can tell. */
+const CAP_OVER = 1.3;
+const CAP_LEAST = 0.0045;
+
+/**
+ * Holding as even as it gets without loss of charging: among placings of the same charging gap, and for large cross-tied banks without
+ * wishes among those within `slack` of it, by giving up some charging first and levelling it again.
+ */
+export function* holdFreely(
+  from: Solution,
+  { slack, ...task }: HoldingTask & { readonly slack: number },
+  { random, work }: { readonly random: Random; readonly work: Effort },
+): Generator<Gaps, Held> {
+  const { values, rule, conductances } = task;
+  const same = yield* holdBetter(from.groups, { ...task, limit: from.gap }, random, work);
+  if (slack === 0 || task.ties === "strings" || rule.any || !mayGoOn(work, 0)) return same;
+  const both = yield* holdAgain(from.groups, task, { tries: 2, random, work });
+  const cap = Math.max(CAP_OVER * both.gaps.holding, CAP_LEAST);
+  const at = board(values, both.groups, rule.rules);
+  const { perUnit, perStage } = conductances;
+  const steps = levelBoth(at, { conductances: perUnit, perStage, cap, target: from.gap + slack }, random, work);
+  for (let step = steps.next(); !step.done; step = steps.next()) yield bothGaps(at, perUnit, perStage);
+  const gaps = bothGaps(at, perUnit, perStage);
+  const better = gaps.charging <= from.gap + slack && gaps.holding < same.gaps.holding;
+  return better ? { groups: groupsOf(at), gaps } : same;
 }

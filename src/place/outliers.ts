@@ -7,6 +7,7 @@
  *
  * A value is an outlier when it lies beyond the outer fence, and further from the median than three times what the meter may err.
  * Leakage and ESR are judged on their logarithm, and only when high. Fewer than 5 values: nothing is called an outlier.
+ * Where more than one unit in ten (and more than two) is out, they are a second lot and not strays: none is called an outlier.
  * Source: [NIST-handbook] 7.1.6, outer fences; [Tukey1977].
  */
 import type { MeasuredUnit } from "./unit.ts";
@@ -49,6 +50,11 @@ export interface Outlier {
 /** What leakage and ESR meters may err, as a factor; three of these are never an outlier. */
 const COARSE = 0.1;
 
+const QUANTITIES = ["capacitance", "leakage", "esr"] as const;
+/** Part of the lot, and count, beyond which values that stand out are a lot of their own. */
+const SECOND_LOT = 0.1;
+const MOST_STRAYS = 2;
+
 /** Every outlier of the lot, in the order of the units; a unit may be named for more than one quantity. */
 export function outliersOf(units: readonly MeasuredUnit[], uncertainty: number): Outlier[] {
   const median = quantile(
@@ -64,7 +70,7 @@ export function outliersOf(units: readonly MeasuredUnit[], uncertainty: number):
     return Math.exp(outerFences(known, 3 * COARSE).high);
   };
   const limits = { leakage: highOf("leakage"), esr: highOf("esr") };
-  return units.flatMap((unit) => {
+  const all = units.flatMap((unit) => {
     const found: Outlier[] = [];
     const { serial } = unit;
     if (unit.capacitance < capacitance.low || unit.capacitance > capacitance.high) {
@@ -78,4 +84,9 @@ export function outliersOf(units: readonly MeasuredUnit[], uncertainty: number):
     }
     return found;
   });
+  const common = QUANTITIES.filter((quantity) => {
+    const count = all.filter((o) => o.quantity === quantity).length;
+    return count > MOST_STRAYS && count > SECOND_LOT * units.length;
+  });
+  return all.filter((o) => !common.includes(o.quantity));
 }

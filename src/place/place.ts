@@ -1,51 +1,33 @@
 // Places measured units into a bank: the whole way from readings to a certified placing.
 import { accepted, type Finding, type Read, refused } from "../quantity/index.ts";
+import { candidatesOf, outlierFindings, wildFindings } from "./candidates.ts";
 import { solveCharging } from "./charging.ts";
 import { conductancesOf } from "./conductance.ts";
 import { constrainedStart, type Start } from "./constrainedStart.ts";
 import { constraintsOf } from "./constraints.ts";
 import { effort, settle, share } from "./effort.ts";
-import { gapFinding, holdingUnknown, mixedParts, outlierFinding, wildFinding } from "./flags.ts";
+import { gapFinding, holdingUnknown, mixedParts } from "./flags.ts";
 import { gapFloor, honestDigits, voltageUncertainty } from "./floor.ts";
 import { worstShare } from "./gap.ts";
-import { type Held, holdAgain } from "./holding.ts";
+import { type Held, holdAgain, holdFreely } from "./holding.ts";
 import { toLattice } from "./lattice.ts";
-import { type Outlier, outliersOf } from "./outliers.ts";
+import { outliersOf } from "./outliers.ts";
 import { type Placing, serialsOf, settled } from "./placing.ts";
 import { seeded } from "./random.ts";
 import { checkRequest, DEFAULTS, type PlaceRequest } from "./request.ts";
 import { isOptimal, type SearchStep } from "./solution.ts";
 import { keepOrder } from "./spareOrder.ts";
 import { lotUncertainty, type MeasuredUnit } from "./unit.ts";
-import { wildEffect } from "./wild.ts";
 
 /** Below this part of the floor a smaller gap costs nothing that could be measured (it adds under 1 % in squares). */
 const FLOOR_STOP = 0.1;
 /** Of the floor, what charging may give up for holding (adds under 5 % in squares). */
 const FLOOR_GIVEN = 0.3;
 const HOLDING_MOVES = 400_000;
+/** Above this count the best possible is not reached to the last digit, and so much of a gap is no loss for holding. */
+const SMALL = 40;
+const FREE = 8e-7;
 const HOLDING_TRIES = 2;
-const MOST_WILD = 3;
-
-interface Candidates {
-  readonly units: readonly MeasuredUnit[];
-  readonly rejected: readonly Outlier[];
-}
-
-/** Sets outliers aside, the furthest out first, as far as spares and pins allow. */
-function candidatesOf(units: readonly MeasuredUnit[], request: PlaceRequest, outliers: readonly Outlier[]): Candidates {
-  if (request.outliers === "keep") return { units, rejected: [] };
-  const pinned = new Set((request.pins ?? []).map((pin) => pin.serial));
-  const excess = ({ value, low, high }: Outlier): number => Math.max(value / high, low > 0 ? low / value : 0);
-  const room = units.length - request.series * request.parallel;
-  const ranked = [...outliers].sort((a, b) => excess(b) - excess(a));
-  const serials = [...new Set(ranked.map((o) => o.serial))].filter((s) => !pinned.has(s)).slice(0, room);
-  const out = new Set(serials);
-  return {
-    units: units.filter((unit) => !out.has(unit.serial)),
-    rejected: outliers.filter((o) => out.has(o.serial)),
-  };
-}
 
 /**
  * Places `units` as asked. Yields where the search stands; returns the placing, or why there can be none.
@@ -77,13 +59,17 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
   const random = seeded(request.seed ?? DEFAULTS.seed);
   const work = effort(request.moves ?? DEFAULTS.moves, request.within);
   const conductances = conductancesOf(pool, request);
-  const wantsHolding = conductances.known && request.goal !== "charging" && series > 1;
+  const judged = conductances.known && series > 1;
   const shape = { series, parallel, ties, uncertainty };
   const floor = gapFloor(shape);
   const stopAt = request.stopAt ?? (request.stopAtFloor === false ? 0 : FLOOR_STOP * floor);
   const prove = request.stopAtFloor !== true && request.stopAt === undefined;
 
-  const reserve = wantsHolding ? Math.min(HOLDING_TRIES * HOLDING_MOVES, work.moves / 2) : 0;
+  const large = pool.length > SMALL;
+  const level = large && request.goal === "charging";
+  const reserve = judged
+    ? Math.min(level ? Number.POSITIVE_INFINITY : HOLDING_TRIES * HOLDING_MOVES, work.moves / 2)
+    : 0;
   const charging = share(work, work.moves - reserve);
   const task = { ties, values, rule, order, start: start.groups, stopAt, prove };
   const solution = yield* solveCharging(task, random, charging);
@@ -92,10 +78,13 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
   const holdingFloor = gapFloor({ ...shape, uncertainty: request.leakageUncertainty ?? DEFAULTS.leakageUncertainty });
   let held: Held | null = null;
   if (conductances.known) {
-    const limit = Math.max(solution.gap, request.chargingLimit ?? FLOOR_GIVEN * floor);
-    const goals = { ties, values, rule, conductances, limit, target: FLOOR_STOP * holdingFloor, spares: false };
-    const moves = wantsHolding ? Math.min(HOLDING_MOVES, reserve) : 0;
-    const steps = holdAgain(solution.groups, { ...goals, moves }, { tries: HOLDING_TRIES, random, work });
+    const goals = { ties, values, rule, conductances, target: FLOOR_STOP * holdingFloor, spares: false };
+    const both = { ...goals, limit: Math.max(solution.gap, request.chargingLimit ?? FLOOR_GIVEN * floor) };
+    const moves = judged ? Math.min(HOLDING_MOVES, reserve) : 0;
+    const steps =
+      request.goal === "charging"
+        ? holdFreely(solution, { ...both, moves, slack: large ? FREE : 0 }, { random, work })
+        : holdAgain(solution.groups, { ...both, moves }, { tries: HOLDING_TRIES, random, work });
     let step = steps.next();
     for (; !step.done; step = steps.next()) {
       yield { phase: "holding", gap: step.value.charging, moves: work.spent };
@@ -139,22 +128,6 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
     digits: honestDigits(voltageUncertainty(shape)),
     moves: work.spent,
     findings,
-  });
-}
-
-const outlierFindings = (outliers: readonly Outlier[], fitted: ReadonlySet<string>): Finding[] =>
-  outliers.filter((o) => o.quantity !== "capacitance").map((o) => outlierFinding(o, fitted.has(o.serial)));
-
-function wildFindings(
-  units: readonly MeasuredUnit[],
-  request: PlaceRequest,
-  { outliers, fitted, gap }: { outliers: readonly Outlier[]; fitted: ReadonlySet<string>; gap: number },
-): Finding[] {
-  const wild = outliers.filter((o) => o.quantity === "capacitance").slice(0, MOST_WILD);
-  const order = keepOrder(units, new Set(outliers.map((o) => o.serial)));
-  return wild.flatMap((o) => {
-    const effect = wildEffect(units, request, { serial: o.serial, gap, fitted: fitted.has(o.serial), order });
-    return effect ? [wildFinding(effect)] : [outlierFinding(o, fitted.has(o.serial))];
   });
 }
 

@@ -46,7 +46,7 @@ export interface PlaceRequest {
   readonly leakageVoltage?: number;
   /** The charging gap that holding may use up, relative; default the greater of the best found and 0.3 of the floor. */
   readonly chargingLimit?: number;
-  /** `charging`: leave holding out of it. */
+  /** `charging`: holding only decides between placings of the same charging gap. Default `both`. */
   readonly goal?: "charging" | "both";
 }
 

@@ -1,13 +1,10 @@
-// One measured unit capacitor as placing sees it: its readings, and the polarity or size group that it belongs to.
+// One measured unit capacitor as placing sees it, and how well a lot of them was measured.
 import type { MeasuredUnit as Reading } from "../catalog/index.ts";
 
 export type { Ties } from "../bank/index.ts";
 
 /** A unit as measured, before it is fitted. What was not measured is absent, never zero; a `leakage` is read at the voltage that the request names. */
-export interface MeasuredUnit extends Reading {
-  /** Polarity or size group: units of two groups never share a stage (cross-tied) or string. */
-  readonly group?: string;
-}
+export type MeasuredUnit = Reading;
 
 /** The relative uncertainty of the lot from the rows' own, as a root mean square; undefined when no row has one. */
 export function lotUncertainty(units: readonly MeasuredUnit[]): number | undefined {

@@ -33,7 +33,7 @@ export { type BuiltLampCircuit, type LampFit, lampFit } from "./lampFit.ts";
 export { EXPLOSION_PART, type Explosion, explosionOf, lampFindings } from "./lampLimits.ts";
 export { type LifeCase, type LifeRatio, lifeRatio, type Stress } from "./life.ts";
 export { type BusPath, type Circuit, type Clamp, checkCircuit, IDEAL_SWITCH, type Load, type Switch } from "./load.ts";
-export { type Bounds, type PulseBank, pulseBankOf } from "./loopMesh.ts";
+export { type Bounds, boundsOf, type PulseBank, pulseBankOf, unknownsOf } from "./loopMesh.ts";
 export { actionToZeroOf, type Peaks, peakCurrentOf, peaksOf } from "./peaks.ts";
 export { type QuickLayout, quickBankPeak, quickPeakFactor } from "./peakTable.ts";
 export { type Discharge, type DischargeEnergy, dischargeOf } from "./pulse.ts";
@@ -54,5 +54,5 @@ export {
   worstShare,
   worstSlew,
 } from "./unitDuty.ts";
-export type { Bound } from "./verdict.ts";
+export { atLeast, atMost, type Bound, type Claim, remark } from "./verdict.ts";
 export { widthOf } from "./width.ts";

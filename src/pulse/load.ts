@@ -8,7 +8,13 @@ import { type CurrentSample, checkSamples } from "./samples.ts";
 export type Load =
   | { readonly kind: "resistor"; readonly resistance: number }
   | { readonly kind: "coil"; readonly inductance: number; readonly resistance: number }
-  | { readonly kind: "lamp"; readonly lamp: Lamp }
+  | {
+      readonly kind: "lamp";
+      readonly lamp: Lamp;
+      /** Of the coil that shapes the pulse, in series with the lamp; left out: none. */
+      readonly inductance?: number;
+      readonly resistance?: number;
+    }
   | { readonly kind: "short" }
   | { readonly kind: "steady current"; readonly current: number; readonly seconds: number }
   | { readonly kind: "recorded"; readonly samples: readonly CurrentSample[] };
@@ -39,6 +45,8 @@ export interface Circuit {
   readonly bus: BusPath | null;
   readonly switch: Switch;
   readonly clamp: Clamp | null;
+  /** Resistors in series with the units, as the loop sees them [ohm]: n/m of one. Left out: none. */
+  readonly isolating?: number;
 }
 
 /** A switch without drop or resistance that carries both ways. */
@@ -47,6 +55,7 @@ export const IDEAL_SWITCH: Switch = { drop: 0, resistance: 0, oneWay: false };
 /** Resistance [ohm] and inductance [H] of the load as the loop sees it; a lamp's law is not a resistance and counts as none. */
 export function linearPartOf(load: Load): BusPath {
   if (load.kind === "resistor") return { resistance: load.resistance, inductance: 0 };
+  if (load.kind === "lamp") return { resistance: load.resistance ?? 0, inductance: load.inductance ?? 0 };
   if (load.kind === "coil") return { resistance: load.resistance, inductance: load.inductance };
   return { resistance: 0, inductance: 0 };
 }
@@ -70,6 +79,7 @@ export function checkCircuit(circuit: Circuit): Read<Circuit> {
     need("clampDrop", clamp.drop);
     need("clampResistance", clamp.resistance);
   }
+  need("isolatingResistance", circuit.isolating ?? 0);
   const part = linearPartOf(load);
   need("loadResistance", part.resistance);
   need("loadInductance", part.inductance);

@@ -43,7 +43,8 @@ export function meshOf(bank: PulseBank, circuit: Circuit, voltage: number): Mesh
   return {
     capacitance: bank.capacitance,
     voltage,
-    bank: { resistance: bank.esr ?? 0, inductance: bank.esl ?? 0 },
+    // inside the bank's terminals, and so behind a clamp across them
+    bank: { resistance: (bank.esr ?? 0) + (circuit.isolating ?? 0), inductance: bank.esl ?? 0 },
     bus: circuit.bus ?? { resistance: 0, inductance: 0 },
     load: linearPartOf(circuit.load),
     switch: circuit.switch,

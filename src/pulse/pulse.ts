@@ -18,6 +18,8 @@ export interface DischargeEnergy {
   readonly load: number;
   readonly bank: number | null;
   readonly bus: number | null;
+  /** In the resistors in series with the units. */
+  readonly isolating: number;
   readonly switch: number;
   readonly clamp: number;
   readonly left: number;
@@ -68,6 +70,11 @@ function shotOf(mesh: Mesh, { load }: Circuit): Read<Shot> {
   return linearShot(mesh);
 }
 
+/** Heat of the isolating resistors: the part of the bank branch's heat that is theirs, since one current passes both [J]. */
+function inIsolating(mesh: Mesh, { isolating = 0 }: Circuit, heat: number): number {
+  return isolating === 0 ? 0 : (heat * isolating) / mesh.bank.resistance;
+}
+
 /** Plain sentences on the limits that the mesh stands at. */
 function limitNotes(mesh: Mesh, given: boolean): readonly string[] {
   if (given) return ["the current is given, so inductance has no say"];
@@ -106,6 +113,7 @@ export function dischargeOf(bank: PulseBank, circuit: Circuit, voltage: number):
   const shot = read.value;
   const bounds = boundsOf(unknown, given);
   const unit = unitDutyOf(bank, { peakCurrent: shot.peakCurrent, action: shot.bankAction, reversal: shot.reversal });
+  const isolating = inIsolating(mesh, circuit, shot.energy.bank);
   const hasAlpha = mesh.lampConstant > 0 && loop.inductance > 0;
   return accepted({
     damping: nonlinear ? null : dampingOf(loop),
@@ -116,7 +124,12 @@ export function dischargeOf(bank: PulseBank, circuit: Circuit, voltage: number):
     action: shot.action,
     unitPeakCurrent: unit.peakCurrent,
     unit,
-    energy: { ...shot.energy, bank: unknown.esr ? null : shot.energy.bank, bus: unknown.bus ? null : shot.energy.bus },
+    energy: {
+      ...shot.energy,
+      bank: unknown.esr ? null : shot.energy.bank - isolating,
+      bus: unknown.bus ? null : shot.energy.bus,
+      isolating,
+    },
     bounds,
     findings: shotFindings({ bank, circuit, mesh, shot, unit, bounds }),
     notes: [...unknownNotes(unknown), ...limitNotes(mesh, given)],

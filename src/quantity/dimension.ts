@@ -64,6 +64,18 @@ export const DIMENSIONS = {
   mass: { symbol: "kg", prefixed: [{ spelling: "g", exponent: -3 }], fixed: { t: ten(3) } },
   fraction: { symbol: "%", prefixed: [], fixed: { "%": ten(-2), percent: ten(-2), ppm: ten(-6) } },
   temperature: { symbol: "degC", prefixed: [], fixed: { degC: ten(0), C: ten(0), "°C": ten(0) } },
+  pressure: {
+    symbol: "Pa",
+    prefixed: [
+      { spelling: "pa", exponent: 0 },
+      { spelling: "bar", exponent: 5 },
+    ],
+    fixed: {
+      torr: { exponent: 0, factor: 101325 / 760 },
+      Torr: { exponent: 0, factor: 101325 / 760 },
+      mmHg: { exponent: 0, factor: 101325 / 760 },
+    },
+  },
   field: {
     symbol: "V/m",
     prefixed: si("v/m"),

@@ -2,6 +2,7 @@
 export { DIMENSIONS, type Dimension, dimensionOf, type Scale, unitScale } from "./dimension.ts";
 export type { BankState, Finding, Verdict } from "./finding.ts";
 export { type FormatOptions, formatQuantity, type Rounding, roundTo, toAscii } from "./format.ts";
+export { type Claim, withinLeast, withinMost } from "./judge.ts";
 export { formatMoney, isCurrency, lineCost, minorDigits, parsePrice, toMajor } from "./money.ts";
 export { nearestWord } from "./nearest.ts";
 export { example, type ParseOptions, parseQuantity } from "./parse.ts";

@@ -49,6 +49,7 @@ const EXAMPLES: Readonly<Record<Dimension, string>> = {
   mass: "2 kg",
   fraction: "20 %",
   temperature: "25 degC",
+  pressure: "450 torr",
   field: "30 kV/mm",
   slew: "50 V/us",
   action: "400 A2s",

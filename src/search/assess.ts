@@ -4,7 +4,7 @@ import {
   bankCapacitance,
   chargingWorst,
   elementPower,
-  holdWorst,
+  holdHighest,
   type Layout,
   layoutId,
   leftAfterDump,
@@ -21,6 +21,8 @@ import { pricedIn } from "./currency.ts";
 import { findingsOf } from "./findings.ts";
 import type { Balance, Cost, LayoutResult, Shares, Span } from "./result.ts";
 import { type Risk, riskOf } from "./risk.ts";
+import { balanceMends } from "./sharing/mends.ts";
+import { withoutBalance } from "./sharing/withoutBalance.ts";
 
 /** How the balancing resistor comes about: chosen by the rule, fixed by the builder, or left out. */
 export type BalanceWish =
@@ -35,6 +37,8 @@ export interface AssessInput {
   readonly families: readonly ResistorFamily[];
   readonly currency: string | null;
   readonly balance?: BalanceWish;
+  /** Measured capacitances, F, that the statistical basis draws from instead of the tolerance; at least LEAST_LOT. */
+  readonly lot?: readonly number[];
 }
 
 /** Assesses one arrangement, safe or not: nothing is refused here, everything is found. */
@@ -87,6 +91,7 @@ export function assess(input: AssessInput): LayoutResult {
     },
     share,
     balance: chosen,
+    withoutBalance: withoutBalance({ result: { series, parallel, ties, balance: null }, unit, brief }, candidate.limit),
     bleed: {
       seconds:
         chosen === null || capacitance.high === null ? null : bleedSeconds(chosen, layout, capacitance.high, brief),
@@ -101,17 +106,25 @@ export function assess(input: AssessInput): LayoutResult {
     volume: candidate.volume === null ? null : candidate.volume * units,
     mass: candidate.mass === null ? null : candidate.mass * units,
     stress: worst === null ? null : worst / unit.voltage,
-    ...(brief.basis === "statistical" ? { risk: riskFor(candidate, brief, layout) } : {}),
+    ...(brief.basis === "statistical" ? { risk: riskFor(candidate, input, layout) } : {}),
     purchase: { capacitors, resistors },
   };
-  return { ...result, findings: findingsOf({ result, unit, brief, candidate, family: family ?? null }) };
+  const lacking = series > 1 && chosen === null && wish.kind === "choose" && candidate.leak !== null;
+  const mends = lacking ? balanceMends({ unit, brief, families, shape: layout }) : null;
+  return { ...result, findings: findingsOf({ result, unit, brief, candidate, family: family ?? null, mends }) };
 }
 
 /** Chance of an excess while charging, or null when the tolerance is unknown. */
-function riskFor({ tolerance, limit }: Candidate, brief: Brief, { series, parallel, ties }: Layout): Risk | null {
+function riskFor(
+  { tolerance, limit }: Candidate,
+  { brief, lot }: AssessInput,
+  { series, parallel, ties }: Layout,
+): Risk | null {
   const voltage = brief.voltage * (1 + brief.overshoot);
   if (series === 1) return { exceed: voltage <= limit * (1 + 1e-9) ? 0 : 1, error: 0 };
-  return tolerance === null ? null : riskOf({ tolerance, series, parallel, ties, share: limit / voltage }, brief);
+  const shape = { series, parallel, ties, share: limit / voltage };
+  if (lot !== undefined) return riskOf({ tolerance: tolerance ?? { low: 0, high: 0 }, ...shape, lot }, brief);
+  return tolerance === null ? null : riskOf({ tolerance, ...shape }, brief);
 }
 
 const worstOf = (charging: number | null, holding: number | null): number | null =>
@@ -122,7 +135,7 @@ function holdingOf(candidate: Candidate, brief: Brief, layout: Layout, chosen: B
   const chain = shapedChain(candidate, brief, layout, chosen?.tolerance ?? 0);
   if (layout.series === 1) return brief.voltage * (1 + brief.overshoot);
   if (chain === null) return null;
-  return holdWorst(chain, chosen?.resistance ?? Number.POSITIVE_INFINITY);
+  return holdHighest(chain, chosen?.resistance ?? Number.POSITIVE_INFINITY);
 }
 
 function balanceOf(
@@ -159,7 +172,7 @@ function fixedBalance(
 ): Balance {
   const chain = shapedChain(candidate, brief, layout, tolerance);
   const even = (brief.voltage * (1 + brief.overshoot)) / layout.series;
-  const worst = chain === null ? even : holdWorst(chain, resistance);
+  const worst = chain === null ? even : holdHighest(chain, resistance);
   const byVolts = worst / family.voltage;
   const byWatts = elementPower(worst, resistance, tolerance, 1) / (family.power * family.derating);
   const elements = Math.max(1, Math.ceil(Math.max(byVolts, byWatts) * (1 - 1e-9)));

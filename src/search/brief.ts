@@ -1,11 +1,9 @@
 // What is wanted: the brief, read from JSON or flags, every value a number in SI or text with a unit.
 
-import { z } from "zod";
+import * as z from "zod";
 import {
   accepted,
   type Dimension,
-  example,
-  formatQuantity,
   isCurrency,
   nearestWord,
   parseQuantity,
@@ -13,78 +11,52 @@ import {
   type Refusal,
   refused,
 } from "../quantity/index.ts";
+import { crossFaults } from "./briefFaults.ts";
+import { above, quantity, whole, word } from "./fields.ts";
+import { withLampDrive } from "./lampDrive.ts";
+import { limitKeys } from "./limitKeys.ts";
+import {
+  busSchema,
+  chargerSchema,
+  clampSchema,
+  lifeSchema,
+  loadSchema,
+  spreadSchema,
+  statedSchema,
+  switchSchema,
+} from "./load.ts";
 
-export const BASES = ["worst case", "nominal", "statistical"] as const;
+export const BASES = ["worst case", "nominal", "statistical", "measured"] as const;
 export type Basis = (typeof BASES)[number];
 
-interface Range {
-  readonly least: number;
-  readonly most: number;
-  /** The least value itself is not allowed. */
-  readonly open?: boolean;
-}
-
-const rangeWords = (dimension: Dimension, { least, most, open }: Range): string =>
-  `${open ? "above" : "from"} ${formatQuantity(least, dimension)} to ${formatQuantity(most, dimension)}`;
-
-/** A number in SI or text with a unit, within a range. */
-function quantity(dimension: Dimension, range: Range) {
-  return z.union([z.number(), z.string()]).transform((raw, context): number => {
-    const reject = (read: string, want: string): never => {
-      context.addIssue({ code: "custom", message: want, params: { read } });
-      return z.NEVER;
-    };
-    const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, dimension);
-    if (!read.ok) return reject(JSON.stringify(raw), read.refusals[0]?.want ?? example(dimension));
-    const value = read.value;
-    const bareFraction = dimension === "fraction" && (typeof raw === "number" || /^[\d.,\s]+$/.test(raw));
-    const shown = bareFraction ? `${raw}, that is ${formatQuantity(value, "fraction")}` : JSON.stringify(raw);
-    if (!Number.isFinite(value) || value < range.least || value > range.most || (range.open && value === range.least)) {
-      const hint = bareFraction && value > range.most ? `; for ${raw} percent write "${raw} %"` : "";
-      return reject(shown, `${rangeWords(dimension, range)}${hint}`);
-    }
-    return value;
-  });
-}
-
-/** A whole number, also as text (flags are text). */
-function whole(least: number, most: number) {
-  return z.union([z.number(), z.string()]).transform((raw, context): number => {
-    const value = typeof raw === "number" ? raw : /^\s*\d+\s*$/.test(raw) ? Number(raw) : Number.NaN;
-    if (Number.isInteger(value) && value >= least && value <= most) return value;
+const hold = z
+  .union([z.number(), z.string()])
+  .transform((raw, context): number => {
+    if (typeof raw === "string" && /^\s*for ?ever\s*$/i.test(raw)) return Number.POSITIVE_INFINITY;
+    const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, "time");
+    if (read.ok && read.value >= 0 && read.value <= 1e9) return read.value;
     context.addIssue({
       code: "custom",
-      message: `a whole number from ${least} to ${most}`,
+      message: '"for ever", or a time such as "30 s" from 0 s up',
       params: { read: JSON.stringify(raw) },
     });
     return z.NEVER;
-  });
-}
+  })
+  .describe('"for ever", or a time such as "30 s" from 0 s up');
 
-const hold = z.union([z.number(), z.string()]).transform((raw, context): number => {
-  if (typeof raw === "string" && /^\s*for ?ever\s*$/i.test(raw)) return Number.POSITIVE_INFINITY;
-  const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, "time");
-  if (read.ok && read.value >= 0 && read.value <= 1e9) return read.value;
-  context.addIssue({
-    code: "custom",
-    message: '"for ever", or a time such as "30 s" from 0 s up',
-    params: { read: JSON.stringify(raw) },
-  });
-  return z.NEVER;
-});
-
-const basis = z.string().transform((raw, context): Basis => {
-  const plain = raw
-    .trim()
-    .toLowerCase()
-    .replace(/[\s_-]+/g, " ");
-  const found = BASES.find((b) => b === plain);
-  if (found) return found;
-  context.addIssue({
-    code: "custom",
-    message: BASES.map((b) => `"${b}"`).join(", "),
-    params: { read: JSON.stringify(raw) },
-  });
+/** None and certainty are no risks to plan with: each is told what it would mean. */
+const risk = z.union([z.number(), z.string()]).transform((raw, context): number => {
+  const read = typeof raw === "number" ? accepted(raw) : parseQuantity(raw, "fraction");
+  const value = read.ok ? read.value : Number.NaN;
+  if (value > 0 && value <= 0.5) return value;
+  const none = 'a chance above 0 such as 1e-4; for none at all take the basis "worst case"';
+  const message =
+    value === 0
+      ? none
+      : value === 1
+        ? "a chance of at most 0.5 such as 1e-4; at 1 every bank would do"
+        : "a chance above 0 and at most 0.5, such as 1e-4";
+  context.addIssue({ code: "custom", message, params: { read: JSON.stringify(raw) } });
   return z.NEVER;
 });
 
@@ -98,8 +70,8 @@ export const briefSchema = z.strictObject({
   energy: quantity("energy", { least: 0, most: 1e12, open: true }),
   voltage: quantity("voltage", { least: 0, most: 1e7, open: true }),
   ripple: quantity("fraction", { least: 0, most: 1, open: true }),
-  basis: basis.default("worst case"),
-  risk: quantity("fraction", { least: 0, most: 0.5, open: true }).default(1e-4),
+  basis: word(BASES).default("worst case"),
+  risk: risk.default(1e-4),
   /** How a unit's capacitance is spread over its tolerance, for the statistical basis. */
   distribution: z.enum(["uniform", "normal"]).default("uniform"),
   derating: quantity("fraction", { least: 0, most: 1, open: true }).default(0.9),
@@ -123,9 +95,21 @@ export const briefSchema = z.strictObject({
       frequency: quantity("frequency", { least: 0, most: 1e9, open: true }),
     })
     .optional(),
-  load: z.looseObject({}).optional(),
+  load: loadSchema.optional(),
+  switch: switchSchema.optional(),
+  bus: busSchema.optional(),
+  clamp: clampSchema.optional(),
+  charger: chargerSchema.optional(),
+  /** A resistor in series with each unit. */
+  isolating: above("resistance").optional(),
+  life: lifeSchema.optional(),
+  spread: spreadSchema.optional(),
+  stated: statedSchema.optional(),
+  ...limitKeys,
   rate: quantity("frequency", { least: 0, most: 1e6, open: true }).optional(),
   ambient: quantity("temperature", { least: -60, most: 150 }).optional(),
+  /** ohm, of the resistor that empties the bank; absent: not stated, and a dump is taken as instant. */
+  dumpResistance: quantity("resistance", { least: 0, most: 1e9, open: true }).optional(),
 });
 
 export type Brief = z.output<typeof briefSchema>;
@@ -133,6 +117,27 @@ export type Brief = z.output<typeof briefSchema>;
 export type BriefInput = z.input<typeof briefSchema>;
 
 export const BRIEF_KEYS: readonly string[] = Object.keys(briefSchema.shape);
+
+const LAMP_KEYS = Object.keys(loadSchema.shape.lamp.unwrap().shape);
+
+/** Keys of each object within the brief, by its path; the brief's own are under "". */
+const KEYS_AT: Readonly<Record<string, readonly string[]>> = {
+  "": BRIEF_KEYS,
+  "load.lamp": LAMP_KEYS,
+  steady: ["current", "frequency"],
+  ...Object.fromEntries(
+    Object.entries({
+      load: loadSchema,
+      switch: switchSchema,
+      bus: busSchema,
+      clamp: clampSchema,
+      charger: chargerSchema,
+      life: lifeSchema,
+      spread: spreadSchema,
+      stated: statedSchema,
+    }).map(([path, schema]) => [path, Object.keys(schema.shape)]),
+  ),
+};
 
 /** JSON Schema of the brief file. */
 export const briefJsonSchema = (): unknown => z.toJSONSchema(briefSchema, { io: "input", unrepresentable: "any" });
@@ -142,6 +147,23 @@ const REQUIRED: Readonly<Record<string, string>> = {
   voltage: 'the charge voltage such as "2.2 kV"',
   ripple: 'the allowed fall such as "20 %", or "100 %" for a full dump',
 };
+
+interface SchemaNode {
+  readonly description?: string;
+  readonly type?: string | readonly string[];
+  readonly enum?: readonly string[];
+  readonly properties?: Readonly<Record<string, SchemaNode>>;
+}
+
+/** What the schema says of a key, for faults whose own words are the schema library's. */
+function wantedAt(path: readonly PropertyKey[]): string | null {
+  let node = briefJsonSchema() as SchemaNode | undefined;
+  for (const key of path) node = node?.properties?.[String(key)];
+  if (node?.description) return node.description;
+  if (node?.enum) return `one of ${node.enum.join(", ")}`;
+  if (node?.properties) return `an object with ${Object.keys(node.properties).join(", ")}`;
+  return node?.type === "object" ? "an object" : node?.type === "string" ? "text" : null;
+}
 
 /** Reads a brief from parsed JSON or from flags. Every fault is told, with the key and what would be accepted. */
 export function readBrief(input: unknown, file?: string): Read<Brief> {
@@ -154,8 +176,11 @@ export function readBrief(input: unknown, file?: string): Read<Brief> {
       want: "an object with energy, voltage and ripple",
     });
   }
-  const result = briefSchema.safeParse(input);
-  if (result.success) return accepted(result.data);
+  const result = briefSchema.safeParse(withLampDrive(input as Readonly<Record<string, unknown>>));
+  if (result.success) {
+    const crossed = crossFaults(result.data, file);
+    return crossed.length > 0 ? refused(...crossed) : accepted(result.data);
+  }
   const faults: Refusal[] = [];
   for (const issue of result.error.issues) {
     const field = issue.path.map(String).join(".");
@@ -166,8 +191,9 @@ export function readBrief(input: unknown, file?: string): Read<Brief> {
     );
     if (issue.code === "unrecognized_keys") {
       for (const key of issue.keys) {
-        const near = nearestWord(key, BRIEF_KEYS);
-        const want = near === null ? `one of ${BRIEF_KEYS.join(", ")}` : `perhaps "${near}"`;
+        const keys = KEYS_AT[field] ?? BRIEF_KEYS;
+        const near = nearestWord(key, keys);
+        const want = near === null ? `one of ${keys.join(", ")}` : `perhaps "${near}"`;
         faults.push({
           code: "unknown-key",
           place: { ...place, field: field ? `${field}.${key}` : key },
@@ -184,7 +210,7 @@ export function readBrief(input: unknown, file?: string): Read<Brief> {
       });
     } else {
       const read = raw === undefined ? "nothing" : JSON.stringify(raw);
-      const want = REQUIRED[field] ?? issue.message;
+      const want = REQUIRED[field] ?? wantedAt(issue.path) ?? issue.message;
       faults.push({ code: raw === undefined ? "missing-value" : "bad-value", place, read, want });
     }
   }

@@ -31,6 +31,8 @@ export function leakOf(unit: Capacitor): Leak | null {
 /** Capacitance of one unit by the brief's basis; statistical counts the low end too, because a lot may lie low as a whole. */
 function basisCapacitance(unit: Capacitor, { basis, ageing }: Brief): number {
   if (basis === "nominal") return unit.capacitance;
+  // The part is then the measured lot: its mean, which a placing meets.
+  if (basis === "measured") return unit.capacitance * (1 - ageing);
   return unit.capacitance * (1 - (unit.tolerance?.low ?? 0)) * (1 - ageing);
 }
 

@@ -1,18 +1,52 @@
 // When nothing fits: the least change of each single demand that would make something fit, each found by trying.
 
 import { requiredCapacitance } from "../bank/index.ts";
-import { purchase } from "../catalog/index.ts";
+import { type Capacitor, purchase } from "../catalog/index.ts";
 import { minorDigits } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { idOf } from "./rank.ts";
 import type { Change } from "./result.ts";
 import { type SweepInput, sweep } from "./sweep.ts";
 
-/** The first layout that fits under a changed brief, or null. */
-function fits(input: SweepInput, change: Partial<Brief>): string | null {
+interface Fit {
+  /** The first layout that fits. */
+  readonly layout: string;
+  /** All parts that give one. */
+  readonly parts: readonly Capacitor[];
+}
+
+/** What fits under a changed brief, or null. */
+function fits(input: SweepInput, change: Partial<Brief>): Fit | null {
   const brief = { ...input.brief, ...change };
-  const { table } = sweep({ ...input, brief, required: requiredCapacitance(brief) }, { stopAtFirst: true });
-  return table.count > 0 ? idOf(table, input.parts, 0) : null;
+  const changed = { ...input, brief, required: requiredCapacitance(brief) };
+  const parts: Capacitor[] = [];
+  let layout: string | null = null;
+  for (const unit of input.parts) {
+    const { table } = sweep({ ...changed, parts: [unit] }, { stopAtFirst: true });
+    if (table.count === 0) continue;
+    parts.push(unit);
+    layout ??= idOf(table, [unit], 0);
+  }
+  return layout === null ? null : { layout, parts };
+}
+
+/** The last value between one that does not fit and one that does. Only parts that fit so far are tried again: nothing else comes nearer. */
+function narrow(
+  input: SweepInput,
+  key: keyof Brief,
+  span: { readonly no: number; readonly yes: number; readonly fit: Fit },
+  middleOf: (no: number, yes: number) => number | null,
+): { readonly to: number; readonly layout: string } {
+  let { no, yes, fit } = span;
+  for (let middle = middleOf(no, yes); middle !== null; middle = middleOf(no, yes)) {
+    const found = fits({ ...input, parts: fit.parts }, { [key]: middle });
+    if (found === null) no = middle;
+    else {
+      yes = middle;
+      fit = found;
+    }
+  }
+  return { to: yes, layout: fit.layout };
 }
 
 /** Between a value that does not fit and one that does, the last that still fits, to 0.01 %. Both positive. */
@@ -22,19 +56,12 @@ function edge(
   bad: number,
   good: number,
 ): Change | null {
-  let layout = fits(input, { [key]: good });
-  if (layout === null) return null;
-  let [no, yes] = [bad, good];
-  while (Math.abs(Math.log(yes / no)) > 1e-4) {
-    const middle = Math.sqrt(no * yes);
-    const found = fits(input, { [key]: middle });
-    if (found === null) no = middle;
-    else {
-      yes = middle;
-      layout = found;
-    }
-  }
-  return { field: key, from: input.brief[key], to: safeSide(yes, good < bad), layout, note: "" };
+  const fit = fits(input, { [key]: good });
+  if (fit === null) return null;
+  const found = narrow(input, key, { no: bad, yes: good, fit }, (no, yes) =>
+    Math.abs(Math.log(yes / no)) > 1e-4 ? Math.sqrt(no * yes) : null,
+  );
+  return { field: key, from: input.brief[key], to: safeSide(found.to, good < bad), layout: found.layout, note: "" };
 }
 
 /** Four figures, rounded to the side that still fits. */
@@ -68,17 +95,15 @@ function energyChange(input: SweepInput): Change | null {
   return null;
 }
 
-/** The smallest of a doubling series of whole limits that fits, then the least between. */
+/** The least whole limit that fits, up to `most`. */
 function wholeChange(input: SweepInput, key: "maxSeries" | "maxUnits", most: number): Change | null {
   const from = input.brief[key];
-  if (fits(input, { [key]: most }) === null) return null;
-  let [no, yes] = [from, most];
-  while (yes - no > 1) {
-    const middle = Math.floor((no + yes) / 2);
-    if (fits(input, { [key]: middle }) === null) no = middle;
-    else yes = middle;
-  }
-  return { field: key, from, to: yes, layout: fits(input, { [key]: yes }) as string, note: "" };
+  const fit = fits(input, { [key]: most });
+  if (fit === null) return null;
+  const found = narrow(input, key, { no: from, yes: most, fit }, (no, yes) =>
+    yes - no > 1 ? Math.floor((no + yes) / 2) : null,
+  );
+  return { field: key, from, ...found, note: "" };
 }
 
 /** The smallest addition to one part's stock that gives a layout. */

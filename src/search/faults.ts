@@ -1,7 +1,7 @@
 // What happens to one arrangement when something fails: the fault table of the pulse layer, fed from an assessed layout.
 
 import type { Capacitor } from "../catalog/index.ts";
-import { type Fault, type FaultBank, faultTable } from "../pulse/index.ts";
+import { type Fault, type FaultBank, type FaultUnit, faultTable } from "../pulse/index.ts";
 import type { Brief } from "./brief.ts";
 import type { LayoutResult } from "./result.ts";
 
@@ -11,6 +11,17 @@ export interface FaultedBank {
   readonly brief: Brief;
 }
 
+/** One unit as the fault table wants it. */
+export const faultUnitOf = (unit: Capacitor): FaultUnit => ({
+  capacitance: unit.capacitance,
+  ratedVoltage: unit.voltage,
+  surgeVoltage: unit.surgeVoltage ?? null,
+  ...(unit.tolerance ? { toleranceLow: unit.tolerance.low, toleranceHigh: unit.tolerance.high } : {}),
+  esr: unit.esr ?? null,
+  esl: unit.esl ?? null,
+  ruptureEnergy: unit.ruptureEnergy ?? null,
+});
+
 /** An assessed layout as the fault table wants it; what is unknown stays unknown. */
 export function faultBankOf({ result, unit, brief }: FaultedBank): FaultBank {
   const { share, balance } = result;
@@ -19,15 +30,7 @@ export function faultBankOf({ result, unit, brief }: FaultedBank): FaultBank {
     series: result.series,
     parallel: result.parallel,
     ties: result.ties,
-    unit: {
-      capacitance: unit.capacitance,
-      ratedVoltage: unit.voltage,
-      surgeVoltage: unit.surgeVoltage ?? null,
-      ...(unit.tolerance ? { toleranceLow: unit.tolerance.low, toleranceHigh: unit.tolerance.high } : {}),
-      esr: unit.esr ?? null,
-      esl: unit.esl ?? null,
-      ruptureEnergy: unit.ruptureEnergy ?? null,
-    },
+    unit: faultUnitOf(unit),
     voltage,
     // Without the tolerance nothing less than the whole voltage bounds what one unit may see.
     worstCharging: share.charging ?? voltage,

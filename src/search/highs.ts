@@ -49,7 +49,9 @@ export async function solveWithHighs(program: Program, limits: HighsLimits = {})
       ? { status: "optimal", values: [], cost: 0, bound: 0 }
       : { status: "infeasible" };
   }
-  const highs = await load();
+  // Where the package or its wasm is not installed, there is no second opinion to be had.
+  const highs = await load().catch(() => null);
+  if (highs === null) return { status: "unknown", why: "engine", values: null, bound: null };
   const model = highs.createModel();
   try {
     model.options.set({

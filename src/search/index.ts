@@ -1,9 +1,52 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
+export type {
+  BlendPlan,
+  BlendResult,
+  BlendString,
+  CeilingWorth,
+  EngineAnswer,
+  Loosen,
+  NamedCertificate,
+  PriceMove,
+  WinningPrice,
+  WorstShare,
+} from "./blendResult.ts";
+export type { BlendInput } from "./blends.ts";
+export { planBlends } from "./blendsLoader.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";
+export { BUS_LENGTHS } from "./briefFaults.ts";
+export { unitLimit } from "./candidate.ts";
 export { planCurrency, pricedIn } from "./currency.ts";
 export { faultBankOf, faultsOf } from "./faults.ts";
+export { type FuseChoice, fittedFuse, fuseCount } from "./fuses.ts";
+export { type ImproveInput, improve } from "./improve.ts";
+export { type InductanceSweep, inductanceSweep, type SweepPoint } from "./inductanceSweep.ts";
+export { idealLampCircuit } from "./lampDrive.ts";
+export { type LampReport, lampReport } from "./lampReport.ts";
+export type { LifeReport } from "./life.ts";
+export { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 export { type PlanInput, plan } from "./plan.ts";
 export { RANKINGS, type Ranking } from "./rank.ts";
-export type { Balance, Change, Cost, LayoutResult, PlanResult, RefusedPart, Shares, Span } from "./result.ts";
-export { type Risk, type RiskCase, riskOf } from "./risk.ts";
+export type {
+  Balance,
+  Change,
+  Cost,
+  Found,
+  Improve,
+  Improvement,
+  LayoutResult,
+  PlanResult,
+  RefusedPart,
+  Shares,
+  Span,
+} from "./result.ts";
+export { type Risk, type RiskCase, riskOf, tailCaseOf } from "./risk.ts";
+export { type BankCourse, bankCourse, type CourseInstant, type CoursePeak } from "./sharing/bankCourse.ts";
+export { type BankClamp, clampOf } from "./sharing/clamp.ts";
+export { type BankCorners, type CornerFact, cornersOf } from "./sharing/corners.ts";
+export type { BalanceMends } from "./sharing/mends.ts";
+export { type ShareSpread, shareSpread } from "./sharing/shareSpread.ts";
+export type { WithoutBalance } from "./sharing/withoutBalance.ts";
+export { type ShotInput, type ShotReport, shotOf } from "./shot.ts";
+export type { Judge } from "./sweepKinds.ts";

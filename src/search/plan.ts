@@ -1,16 +1,22 @@
 // The front door: brief and parts to ranked layouts, their front, every refusal, and what would have to give way.
 
-import { requiredCapacitance } from "../bank/index.ts";
+import { leastParallel, requiredCapacitance } from "../bank/index.ts";
 import { type Capacitor, DEFAULT_FAMILY, type ResistorFamily } from "../catalog/index.ts";
 import { accepted, type Read } from "../quantity/index.ts";
 import { assess } from "./assess.ts";
 import type { Brief } from "./brief.ts";
+import { prepare } from "./candidate.ts";
 import { leastChanges } from "./changes.ts";
 import { planCurrency, pricedIn } from "./currency.ts";
 import { frontRows } from "./front.ts";
+import { improve } from "./improve.ts";
+import { limitChanges } from "./limitChanges.ts";
+import { hasLimits } from "./limits.ts";
 import { comparison, firstRows, idOf, type Ranking, tiesOf } from "./rank.ts";
-import type { LayoutResult, PlanResult } from "./result.ts";
-import { type SweepInput, sweep } from "./sweep.ts";
+import type { LayoutResult, PlanResult, RefusedPart } from "./result.ts";
+import { balanceMends } from "./sharing/mends.ts";
+import { leastSeries, type SweepInput, sweep } from "./sweep.ts";
+import type { Judge } from "./sweepKinds.ts";
 import type { LayoutTable } from "./table.ts";
 
 export interface PlanInput {
@@ -23,10 +29,13 @@ export interface PlanInput {
   readonly rank?: Ranking;
   /** Leave out the search for least changes when nothing fits (a form that plans at every key). */
   readonly quick?: boolean;
+  /** With the measured basis: whether the measured units, placed, share safely in a shape. */
+  readonly judge?: Judge;
 }
 
-/** Up to so many layouts asked for, the search keeps only what may be among them or on the front. */
+/** Up to so many layouts asked for, from so many parts on, the search keeps only what may be among them or on the front: less is done faster whole. */
 const MOST_SIEVED = 1000;
+const SIEVED_FROM = 4000;
 
 /** Plans. Refuses only what cannot be understood (two currencies); nothing fitting is an answer, with its least changes. */
 export function plan(input: PlanInput): Read<PlanResult> {
@@ -38,8 +47,8 @@ export function plan(input: PlanInput): Read<PlanResult> {
   const parts = pricedIn(distinct(input.parts), currency, brief);
   const families = pricedIn(given, currency, brief);
   const required = requiredCapacitance(brief);
-  const work: SweepInput = { parts, families, brief, required, currency };
-  const wanted = limit > 0 && limit <= MOST_SIEVED ? { limit, rank } : null;
+  const work: SweepInput = { parts, families, brief, required, currency, judge: input.judge ?? null };
+  const wanted = parts.length >= SIEVED_FROM && limit > 0 && limit <= MOST_SIEVED ? { limit, rank } : null;
   const { table, count, refused: refusals } = sweep(work, { wanted });
   const rows = firstRows(table.count, limit, comparison(table, parts, rank));
   const layouts = rows.map((row) => layoutAt(work, table, row));
@@ -50,15 +59,16 @@ export function plan(input: PlanInput): Read<PlanResult> {
     currency,
     layouts,
     front: frontRows(table).map((row) => idOf(table, parts, row)),
-    refused: refusals,
-    changes: count === 0 && !quick ? leastChanges(work) : [],
+    refused: quick ? refusals : withMends(work, refusals),
+    changes: count > 0 || quick ? [] : hasLimits(brief) ? limitChanges(work) : leastChanges(work),
     ...(brief.basis === "statistical" && !quick ? { worstCase: bestOfWorstCase(input) } : {}),
+    ...(quick ? {} : { improve: improveBest(work, layouts[0]) }),
     notes: notesOf(brief),
   });
 }
 
 /** Parts by their first row: a name that stands twice would give two layouts one name. */
-function distinct(parts: readonly Capacitor[]): readonly Capacitor[] {
+export function distinct(parts: readonly Capacitor[]): readonly Capacitor[] {
   // The rows of one catalogue in order: its reader has refused every name that stands twice. A set of 100,000 names costs a quarter of the search.
   if (parts.every(({ file, line }, i) => i === 0 || (file === parts[0]?.file && line > (parts[i - 1]?.line ?? 0))))
     return parts;
@@ -67,6 +77,29 @@ function distinct(parts: readonly Capacitor[]): readonly Capacitor[] {
   if (seen.size === parts.length) return parts;
   seen.clear();
   return parts.filter((unit) => !seen.has(unit.part) && seen.add(unit.part));
+}
+
+/** Refused parts for which mends are worked out; each takes some hundred tries. */
+const MENDED = 40;
+
+/** For the first parts that no balancing resistor keeps safe: what would. */
+function withMends(work: SweepInput, refusals: readonly RefusedPart[]): readonly RefusedPart[] {
+  const { brief, families, required } = work;
+  const voltage = brief.voltage * (1 + brief.overshoot);
+  let left = MENDED;
+  return refusals.map((one) => {
+    const unit = one.reason === "balance" && left-- > 0 ? work.parts.find(({ part }) => part === one.part) : undefined;
+    if (unit === undefined) return one;
+    const { limit, tolerance, basis } = prepare(unit, brief);
+    const series = Math.max(2, leastSeries(voltage, limit, tolerance));
+    const shape = { series, parallel: leastParallel(required, series, basis), ties: "strings" } as const;
+    return { ...one, mends: balanceMends({ unit, brief, families, shape }) };
+  });
+}
+
+function improveBest({ parts, brief, families, currency }: SweepInput, best: LayoutResult | undefined) {
+  const unit = best && parts.find(({ part }) => part === best.part);
+  return best && unit ? improve({ result: best, unit, brief, families, currency }) : null;
 }
 
 /** What the same brief takes when every unit may be at its worst: the price of certainty. */

@@ -1,10 +1,12 @@
 // What a plan and a check answer: plain data, SI values, money in the major unit of its currency.
 
-import type { Ties } from "../bank/index.ts";
+import type { Cause, Ties } from "../bank/index.ts";
 import type { Capacitor, Purchase } from "../catalog/index.ts";
 import type { Finding } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import type { Risk } from "./risk.ts";
+import type { BalanceMends } from "./sharing/mends.ts";
+import type { WithoutBalance } from "./sharing/withoutBalance.ts";
 
 /** A value under low, nominal and high capacitance; null where the tolerance is unknown. */
 export interface Span {
@@ -63,6 +65,8 @@ export interface LayoutResult {
   readonly energy: Span;
   readonly share: Shares;
   readonly balance: Balance | null;
+  /** The same with no balancing resistors, over the whole hold; null for one in series. */
+  readonly withoutBalance: WithoutBalance | null;
   readonly bleed: { readonly seconds: number | null; readonly toVoltage: number };
   readonly cost: Cost | null;
   /** m^3 in square packing without gaps; kg; null when sizes are unknown. Capacitors only. */
@@ -81,6 +85,8 @@ export interface RefusedPart {
   readonly reason: string;
   readonly value: number | null;
   readonly limit: number | null;
+  /** Where no balancing resistor does: what would mend it at the least number in series. */
+  readonly mends?: BalanceMends | null;
 }
 
 /** One change of the brief or the stock that, alone, would make something fit. */
@@ -91,6 +97,47 @@ export interface Change {
   /** The first layout that then fits. */
   readonly layout: string;
   readonly note: string;
+}
+
+/** The best layout of this part and these ties that a search finds; cost in the major unit, null when not priced. */
+export interface Found {
+  readonly id: string;
+  readonly series: number;
+  readonly parallel: number;
+  readonly units: number;
+  readonly cost: number | null;
+}
+
+export interface Improvement {
+  readonly cause: Cause;
+  /** V of margin that the cause eats, and as a share of the whole margin between even share and full rating; null: unknown. */
+  readonly volts: number | null;
+  readonly share: number | null;
+  /** Worst stage voltage were the cause gone, V. */
+  readonly without: number | null;
+  /** What the search was run again with, fraction, A or ohm; null when there is nothing to tighten. */
+  readonly tightened: {
+    readonly quantity: string;
+    readonly from: number;
+    readonly to: number;
+    readonly unit: string;
+  } | null;
+  /** What the search then finds; null when nothing was tightened or nothing fits. */
+  readonly found: Found | null;
+  /** Units and money less than the baseline, below zero when more; null when either side is unknown. */
+  readonly saves: { readonly units: number; readonly cost: number | null } | null;
+}
+
+export interface Improve {
+  /** Even share, worst stage and full rating, V. */
+  readonly even: number;
+  readonly worst: number | null;
+  readonly rating: number;
+  /** V still free of the full rating; null when something is unknown. */
+  readonly free: number | null;
+  /** Best of the same part and ties as things are: what `saves` is reckoned from. Null when nothing fits. */
+  readonly baseline: Found | null;
+  readonly causes: readonly Improvement[];
 }
 
 export interface PlanResult {
@@ -104,6 +151,8 @@ export interface PlanResult {
   readonly changes: readonly Change[];
   /** With the statistical basis: the best layout of the worst case, to say what it would have cost; null when none fits. */
   readonly worstCase?: LayoutResult | null;
+  /** What eats the margin of the best layout and what tightening it saves; null when nothing fits or nothing can be told. */
+  readonly improve?: Improve | null;
   readonly notes: readonly string[];
 }
 

@@ -3,7 +3,7 @@
 // Quick yes: a rigorous bound within the brief's risk. Quick no: the normal approximation, used only for four or more in parallel and a
 // chance of a stage above one in five, where it is good. Otherwise the exact tail of the bank layer. Source: [methods-derived] 1.3.
 
-import { exceedRisk, riskBound, type Ties, type UnitLaw } from "../bank/index.ts";
+import { exceedRisk, riskBound, type TailCase, type Ties, type UnitLaw } from "../bank/index.ts";
 import type { Tolerance } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 
@@ -12,6 +12,8 @@ export interface Risk {
   readonly exceed: number;
   /** What `exceed` may be off by, either way. */
   readonly error: number;
+  /** How one unit is taken to be spread. */
+  readonly law?: string;
 }
 
 export interface RiskCase {
@@ -21,6 +23,8 @@ export interface RiskCase {
   readonly ties: Ties;
   /** Unit limit over charge voltage, overshoot included. */
   readonly share: number;
+  /** Measured capacitances, F: they stand in for the tolerance. */
+  readonly lot?: readonly number[];
 }
 
 /** The law of one unit by the brief, over its nominal. */
@@ -29,10 +33,20 @@ const lawOf = ({ low, high }: Tolerance, distribution: Brief["distribution"]): U
     ? { kind: "normal", nominal: 1, tLow: low, tHigh: high }
     : { kind: "uniform", low: 1 - low, high: 1 + high };
 
+/** The bank as its tail and its counted witness want it. */
+export function tailCaseOf({ series: n, parallel: p, ties, share, tolerance, lot }: RiskCase, brief: Brief): TailCase {
+  const law: UnitLaw = lot === undefined ? lawOf(tolerance, brief.distribution) : { kind: "lot", values: lot };
+  return { n, p, ties, share, law };
+}
+
+function lawWords({ lot }: RiskCase, { distribution }: Brief): string {
+  if (lot !== undefined) return `as the ${lot.length} measured units, each value equally likely`;
+  return distribution === "normal" ? "normal over its tolerance, cut at three sigma" : "uniform over its tolerance";
+}
+
 export function riskOf(given: RiskCase, brief: Brief): Risk {
-  const { series: n, parallel: p, ties, share, tolerance } = given;
-  const { exceed, error } = exceedRisk({ n, p, ties, share, law: lawOf(tolerance, brief.distribution) });
-  return { exceed, error };
+  const { exceed, error } = exceedRisk(tailCaseOf(given, brief));
+  return { exceed, error, law: lawWords(given, brief) };
 }
 
 /** Standard deviations between a stage's capacitance and the least that it may have beside average others. */

@@ -4,14 +4,17 @@
 
 import type { Capacitor } from "../catalog/index.ts";
 import { frontRows } from "./front.ts";
+import { sweepLimited } from "./limitedSweep.ts";
+import { hasLimits } from "./limits.ts";
 import type { RefusedPart } from "./result.ts";
 import { riskJudge } from "./risk.ts";
 import { sieveOf, type Wanted } from "./sieve.ts";
 import { strongOf } from "./strong.ts";
-import { type Reason, type Run, type SweepInput, sweepPart } from "./sweepPart.ts";
+import type { Judge, Reason, SweepInput } from "./sweepKinds.ts";
+import { type Run, sweepPart } from "./sweepPart.ts";
 import { type LayoutTable, newTable } from "./table.ts";
 
-export type { SweepInput } from "./sweepPart.ts";
+export { leastSeries, type SweepInput } from "./sweepKinds.ts";
 
 export interface Sweep {
   /** All layouts that fit, or with a `wanted` those that may matter to it: the first of the order and the whole front. */
@@ -37,7 +40,8 @@ const PASS = 8;
 export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }: SweepOptions = {}): Sweep {
   const { parts, brief } = input;
   const table = newTable(Math.max(256, Math.min(parts.length, wanted === null ? 1 << 17 : FIRST_PARTS) * 32));
-  const judge = brief.basis === "statistical" ? riskJudge(brief) : null;
+  const judge = input.judge ?? (brief.basis === "statistical" ? riskJudge(brief) : null);
+  if (hasLimits(brief)) return sweepByLimits(input, table, judge);
   const run: Run = { input, judge, table, sieve: null, count: 0 };
   const reasons: (Reason | null)[] = new Array(parts.length).fill(null);
   let stride = 1;
@@ -63,4 +67,15 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
     if (reason !== null) refused.push({ part: (parts[i] as Capacitor).part, ...reason });
   });
   return { table, count: run.count, refused };
+}
+
+/** The search under limits on shot, fault and life: each layout is worked out in full. */
+function sweepByLimits(input: SweepInput, table: LayoutTable, judge: Judge): Sweep {
+  const limited = sweepLimited(input, table, judge);
+  const refused: RefusedPart[] = [];
+  for (const [i, unit] of input.parts.entries()) {
+    const reason = limited(i);
+    if (reason !== null) refused.push({ part: unit.part, ...reason });
+  }
+  return { table, count: table.count, refused };
 }

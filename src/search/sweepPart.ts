@@ -1,48 +1,16 @@
 // Tries one part at every series count and both ties, and pushes what may matter to a table; no layout object is made.
 
 import { chargingWorst, FIT, leastParallel } from "../bank/index.ts";
-import { type Capacitor, cheapest, leastBuyable, type ResistorFamily, toBuy } from "../catalog/index.ts";
+import { type Capacitor, cheapest, leastBuyable, toBuy } from "../catalog/index.ts";
 import { minorDigits } from "../quantity/index.ts";
 import { bestBalance, chainOf, holdingFloor, newBalancing, type SearchChain, surelyBalances } from "./balancing.ts";
-import type { Brief } from "./brief.ts";
 import { type Candidate, prepare } from "./candidate.ts";
-import type { RiskCase } from "./risk.ts";
 import { mayMatter, remember, type Sieve } from "./sieve.ts";
+import { type Judge, leastSeries, type Reason, type SweepInput } from "./sweepKinds.ts";
 import { type Figures, type LayoutRow, type LayoutTable, noFigures, pushRow } from "./table.ts";
-
-export interface SweepInput {
-  readonly parts: readonly Capacitor[];
-  readonly families: readonly ResistorFamily[];
-  readonly brief: Brief;
-  readonly required: number;
-  readonly currency: string | null;
-}
-
-/** Why a part gives no layout: the first limit met, or for ceilings the least value seen. */
-export interface Reason {
-  reason: string;
-  value: number | null;
-  limit: number | null;
-}
-
-/** Least n whose worst charging share is within the limit (1e-9 relative). Unknown tolerance: by the even share. */
-export function leastSeries(voltage: number, limit: number, tolerance: { low: number; high: number } | null): number {
-  const { low, high } = tolerance ?? { low: 0, high: 0 };
-  const bound = limit * (1 + FIT);
-  if (voltage <= bound) return 1;
-  const guess = Math.max(2, Math.floor(1 + ((voltage / bound - 1) * (1 + high)) / (1 - low)));
-  // The guess is the closed form rounded down: one or two steps find the least. An absurd count is returned as it is, above any limit.
-  if (guess > 1e9) return guess;
-  let n = guess;
-  while (chargingWorst(voltage, n, { low, high }) > bound) n++;
-  return n;
-}
 
 const balancing = newBalancing();
 const bill = { quantity: 0, cost: 0 };
-
-/** Whether a shape shares safely while charging although its worst case does not; null when only the worst case counts. */
-type Judge = ((given: RiskCase) => boolean) | null;
 
 export interface Run {
   readonly input: SweepInput;

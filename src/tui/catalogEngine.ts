@@ -1,13 +1,33 @@
 // The engine behind the screens: the search on one set of parts and resistors, each answer pure.
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
+import { cautionsOf } from "../cli/index.ts";
 import { cautionsFor, DEFERENCE } from "../hazard/index.ts";
 import { billOf } from "../order/index.ts";
 import { accepted } from "../quantity/index.ts";
-import { assess, type Brief, type LayoutResult, plan, planCurrency, readBrief } from "../search/index.ts";
+import {
+  assess,
+  type Brief,
+  bankCourse,
+  clampOf,
+  cornersOf,
+  improve,
+  inductanceSweep,
+  type LayoutResult,
+  plan,
+  planCurrency,
+  readBrief,
+  shareSpread,
+  shotOf,
+} from "../search/index.ts";
 import type { Arrangement, EnginePort } from "./ports.ts";
 
 /** Said on every copy of an order: the standing cautions, and to whom this program defers. */
 const BILL_CAUTIONS: readonly string[] = [...cautionsFor({}), ...DEFERENCE].map(({ short }) => short);
+
+/** Banks drawn for the spread of the worst unit, always from the same seed: the picture of one bank never changes. */
+const DRAWN = { banks: 65_536, seed: 1 };
+/** Points of the sweep over the loop's inductance. */
+const SWEPT = 41;
 
 export interface Stock {
   readonly parts: readonly Capacitor[];
@@ -39,6 +59,10 @@ export function catalogEngine({ parts, families }: Stock): EnginePort {
     const unit = byName.get(layout.part);
     return unit === undefined ? null : assess({ unit, layout, brief, families, currency });
   };
+  const ofUnit = <T>({ part }: LayoutResult, of: (unit: Capacitor) => T): T | null => {
+    const unit = byName.get(part);
+    return unit === undefined ? null : of(unit);
+  };
   return {
     readBrief: (values) => readBrief(values),
     plan: (brief, { rank, most, frontOnly, quick }) => {
@@ -58,5 +82,26 @@ export function catalogEngine({ parts, families }: Stock): EnginePort {
       const currency = currencyOf(brief);
       return billOf({ layout, unit, families, brief, currency, cautions: BILL_CAUTIONS });
     },
+    rest: (brief, layout) =>
+      ofUnit(layout, (unit) => {
+        const bank = { result: layout, unit, brief };
+        return {
+          rating: unit.voltage,
+          tolerance: unit.tolerance ?? null,
+          corners: cornersOf(bank),
+          course: bankCourse(bank),
+          clamp: clampOf({ ...bank, share: layout.share }),
+          cautions: cautionsOf(brief, { layout, unit }).map(({ text }) => text),
+        };
+      }),
+    margin: (brief, layout) =>
+      ofUnit(layout, (unit) => improve({ result: layout, unit, brief, families, currency: currencyOf(brief) })),
+    spread: (brief, layout) => ofUnit(layout, (unit) => shareSpread({ result: layout, unit, brief }, DRAWN)),
+    shot: (brief, layout) =>
+      ofUnit(layout, (unit) => ({
+        report: shotOf({ layout, unit, brief }),
+        sweep: inductanceSweep({ layout, unit, brief }, SWEPT),
+        cautions: cautionsOf(brief, { layout, unit }).map(({ text }) => text),
+      })),
   };
 }

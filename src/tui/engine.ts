@@ -1,18 +1,15 @@
 // Answers a state's question to the engine: reads the brief, plans, assesses what is pinned and chosen, and counts the order.
 
 import type { LayoutResult } from "../search/index.ts";
+import { briefInput } from "./briefInput.ts";
 import type { EnginePort } from "./ports.ts";
 import type { Answer, State } from "./state.ts";
-
-/** Blank fields are left to the brief's own defaults. */
-export const filledValues = (values: Readonly<Record<string, string>>): Readonly<Record<string, string>> =>
-  Object.fromEntries(Object.entries(values).filter(([, text]) => text.trim() !== ""));
 
 /** Beside the form only the first few are seen, and every key waits for them; the list itself is longer. */
 export const mostListed = (state: State): number => (state.screen === "brief" ? 50 : 200);
 
 export function answerFor(state: State, engine: EnginePort, quick: boolean): Answer {
-  const read = engine.readBrief({ ...state.extra, ...filledValues(state.values) });
+  const read = engine.readBrief(briefInput(state));
   if (!read.ok) return { kind: "refused", refusals: read.refusals };
   const brief = read.value;
   const planned = engine.plan(brief, { rank: state.rank, most: mostListed(state), frontOnly: state.frontOnly, quick });

@@ -3,6 +3,7 @@ import { type Dimension, formatQuantity } from "../quantity/index.ts";
 import type { Brief } from "../search/index.ts";
 
 export interface Field {
+  /** Place in the brief; a point goes one level down. */
   readonly key: string;
   readonly label: string;
   /** How the value read is shown again; null for text and choices. */
@@ -29,6 +30,8 @@ export const FIELDS: readonly Field[] = [
   { key: "ageing", label: "Ageing loss", dimension: "fraction", blank: "none" },
   { key: "hold", label: "Hold", dimension: "time", blank: "for ever" },
   { key: "touchSafe", label: "Safe to touch below", dimension: "voltage", blank: "60 V" },
+  { key: "load.resistance", label: "Load resistance", dimension: "resistance", blank: "such as 50 mohm" },
+  { key: "load.inductance", label: "Load inductance", dimension: "inductance", blank: "such as 20 uH" },
   { key: "maxSeries", label: "Most in series", dimension: "count", blank: "40" },
   { key: "maxUnits", label: "Most units", dimension: "count", blank: "2000" },
   { key: "spares", label: "Spares", dimension: "count", blank: "none" },
@@ -41,7 +44,10 @@ export const FIELDS: readonly Field[] = [
 ];
 
 /** A value of a brief, by its field. */
-export const valueIn = (brief: Brief, field: Field): unknown => (brief as Readonly<Record<string, unknown>>)[field.key];
+export const valueIn = (brief: Brief, field: Field): unknown =>
+  field.key
+    .split(".")
+    .reduce<unknown>((node, key) => (node as Readonly<Record<string, unknown>> | undefined)?.[key], brief);
 
 /** A value of the brief as text for the screen. */
 export function shownValue(field: Field, value: unknown): string {

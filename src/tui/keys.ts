@@ -18,8 +18,9 @@ type Short = readonly [readonly string[], string, string, Message, live.Live, (n
 
 const lists = live.all(live.on("layouts"), live.hasLayouts);
 const compares = live.all(live.on("compare"), live.hasPins);
-const scrolls = live.on("bank", "order");
-const shows = live.all(scrolls, live.hasBank);
+const shows = live.all(live.on("bank", "sharing", "shot", "order"), live.hasBank);
+const looks = live.all(live.on("bank", "sharing", "shot"), live.hasBank);
+const saves = live.all(live.on("bank", "order"), live.hasBank);
 const moves: live.Live = (state) => lists(state) || compares(state) || shows(state);
 
 /** What lies on top comes first: the first live row wins. */
@@ -73,17 +74,28 @@ const LISTS: readonly Short[] = [
   [["enter"], "Enter", "show bank", { type: "choose" }, compares, 2],
   [["space", "p", "x"], "Space", "unpin", { type: "pin" }, compares, 3],
   [["a"], "a", "fold or unfold", { type: "fold" }, compares, 4],
-  [["space", "p"], "Space", "pin", { type: "pin" }, live.all(live.on("bank"), live.hasBank), 2],
-  [["e", "s"], "e", "save order", { type: "export" }, shows, 1],
+  [["space", "p"], "Space", "pin", { type: "pin" }, looks, 4],
+  [["e", "s"], "e", "save order", { type: "export" }, saves, 1],
+  [["c"], "c", "chance", { type: "spread" }, live.mayAskSpread, 2],
+  [["l"], "l", "load", { type: "load" }, live.on("shot"), 2],
   [["up", "k"], "Up/Down", "move", { type: "move", by: -1 }, moves, 6],
   [["down", "j"], "", "move", { type: "move", by: 1 }, moves],
   [["pageup"], "PgUp/PgDn", "page", { type: "move", by: "pageBack" }, moves, null],
   [["pagedown"], "", "page", { type: "move", by: "page" }, moves],
   [["home", "g"], "Home/End", "first and last", { type: "move", by: "first" }, moves, null],
   [["end", "G"], "", "first and last", { type: "move", by: "last" }, moves],
-  [["escape"], "Esc", "layouts", { type: "go", screen: "layouts" }, live.on("compare", "bank", "order"), 7],
+  [
+    ["escape"],
+    "Esc",
+    "layouts",
+    { type: "go", screen: "layouts" },
+    live.on("compare", "bank", "sharing", "shot", "order"),
+    7,
+  ],
   [["escape"], "Esc", "brief", { type: "go", screen: "brief" }, live.on("layouts"), 7],
 ];
+
+const LAST = SCREENS.length;
 
 const go = (screen: ScreenName, index: number): readonly Short[] => [
   [[`alt+${index + 1}`, `f${index + 2}`], "", screen, { type: "go", screen }, live.noQuestion],
@@ -92,8 +104,15 @@ const go = (screen: ScreenName, index: number): readonly Short[] => [
 
 const EVERYWHERE: readonly Short[] = [
   ...SCREENS.flatMap(go),
-  [[], "1 to 5", `${SCREENS.join(", ")} (also Alt-1 to 5, F2 to F6)`, { type: "redraw" }, live.isFree, null],
-  [[], "Alt-1 to 5", "screens", { type: "redraw" }, live.onBrief, 4],
+  [
+    [],
+    `1 to ${LAST}`,
+    `${SCREENS.join(", ")} (also Alt-1 to ${LAST}, F2 to F${LAST + 1})`,
+    { type: "redraw" },
+    live.isFree,
+    null,
+  ],
+  [[], `Alt-1 to ${LAST}`, "screens", { type: "redraw" }, live.onBrief, 4],
   [["f1"], "F1", "help", { type: "help" }, live.isOpen, 8],
   [["?"], "", "help", { type: "help" }, live.isFree],
   [["ctrl+q", "ctrl+c"], "Ctrl-Q", "save and quit", { type: "quit" }, live.always, 9],

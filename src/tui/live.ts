@@ -34,4 +34,10 @@ export const isFree: Live = (state) => isOpen(state) && state.screen !== "brief"
 
 export const hasLayouts: Live = (state) => (planOf(state)?.layouts.length ?? 0) > 0;
 export const hasPins: Live = (state) => state.pins.length > 0;
+/** The spread is shown unasked on the statistical basis, and one in series has none. */
+export const mayAskSpread: Live = (state) => {
+  const bank = shownBank(state);
+  const statistical = state.answer?.kind === "planned" && state.answer.brief.basis === "statistical";
+  return on("sharing")(state) && bank !== null && bank.series > 1 && !statistical;
+};
 export const hasBank: Live = (state) => shownBank(state) !== null;

@@ -2,7 +2,19 @@
 import type { Layout } from "../bank/index.ts";
 import type { Bill } from "../order/index.ts";
 import type { Read } from "../quantity/index.ts";
-import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
+import type {
+  BankClamp,
+  BankCorners,
+  BankCourse,
+  Brief,
+  Improve,
+  InductanceSweep,
+  LayoutResult,
+  PlanResult,
+  Ranking,
+  ShareSpread,
+  ShotReport,
+} from "../search/index.ts";
 import type { TerminalInput } from "./input.ts";
 import type { ProcessPort } from "./session.ts";
 
@@ -25,6 +37,34 @@ export interface PlanRequest {
   readonly quick: boolean;
 }
 
+/** The states at rest. Ratings and tolerance are those of the unit; null is unknown. */
+export interface RestDetail {
+  readonly rating: number;
+  readonly tolerance: { readonly low: number; readonly high: number } | null;
+  readonly corners: BankCorners;
+  readonly course: BankCourse | null;
+  readonly clamp: BankClamp | null;
+  readonly cautions: readonly string[];
+}
+
+export interface ShotDetail {
+  readonly report: Read<ShotReport>;
+  readonly sweep: InductanceSweep | null;
+  readonly cautions: readonly string[];
+}
+
+/** The pieces; one that is absent is not worked out yet. */
+export interface Details {
+  /** The brief and the bank that they hold for. */
+  readonly key: string;
+  readonly rest?: RestDetail | null;
+  readonly margin?: Improve | null;
+  readonly spread?: ShareSpread | null;
+  readonly shot?: ShotDetail | null;
+}
+
+export type Piece = Exclude<keyof Details, "key">;
+
 export interface EnginePort {
   /** Reads a brief from text by key; each refusal's place.field is the key. */
   readonly readBrief: (values: Readonly<Record<string, unknown>>) => Read<Brief>;
@@ -34,6 +74,14 @@ export interface EnginePort {
   readonly check: (brief: Brief, arrangement: Arrangement) => LayoutResult | null;
   /** What must be bought for a layout; null when the catalogue has no such part. */
   readonly bill: (brief: Brief, layout: LayoutResult) => Bill | null;
+  /** The states at rest of one layout; null as for `bill`, here and below. */
+  readonly rest: (brief: Brief, layout: LayoutResult) => RestDetail | null;
+  /** What eats the margin; null also when there is none to divide. Searches again, so it takes its time. */
+  readonly margin: (brief: Brief, layout: LayoutResult) => Improve | null;
+  /** How the worst unit's voltage is spread; null also when nothing is spread or known. Draws banks, so it takes its time. */
+  readonly spread: (brief: Brief, layout: LayoutResult) => ShareSpread | null;
+  /** One shot into the brief's load. */
+  readonly shot: (brief: Brief, layout: LayoutResult) => ShotDetail | null;
 }
 
 export interface StockFacts {
@@ -51,6 +99,8 @@ export interface ScreenPorts {
   readonly stock: StockFacts;
   /** The brief to start with when none was saved: text by key. */
   readonly brief: Readonly<Record<string, string>>;
+  /** The brief was asked for now, so that it holds and not the one saved last time. */
+  readonly briefFirst: boolean;
   /** What else the brief says, which the form has no field for; kept and planned with. */
   readonly extra: Readonly<Record<string, unknown>>;
   /** The text last given to `saveSession`, or null. */

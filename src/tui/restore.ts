@@ -8,7 +8,7 @@ import { terminalLook } from "./terminal.ts";
 const USUAL = { columns: 80, rows: 24 };
 
 export function startState(ports: ScreenPorts): State {
-  const { stdin, stdout, env, ascii, stock, brief, extra } = ports;
+  const { stdin, stdout, env, ascii, stock, brief, briefFirst, extra } = ports;
   const look = terminalLook({
     env,
     inputIsTerminal: stdin.isTTY === true,
@@ -26,7 +26,10 @@ export function startState(ports: ScreenPorts): State {
   const text = ports.loadSession();
   if (text === null) return fresh;
   const saved = readSaved(text);
-  if (saved !== null) return { ...fresh, ...saved, caret: (saved.values.energy ?? "").length };
+  if (saved !== null) {
+    const restored: State = { ...fresh, ...saved, ...(briefFirst ? { values: brief, extra } : {}) };
+    return { ...restored, caret: (restored.values.energy ?? "").length };
+  }
   const kept = ports.keepSession();
   const where = kept === null ? "it will be replaced" : `it is kept in ${kept}`;
   return { ...fresh, notice: { tone: "warn", text: `What was saved last time could not be read; ${where}.` } };

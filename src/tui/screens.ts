@@ -1,6 +1,7 @@
 // Joins state, keys, engine, painter and terminal, and runs the screens until they end: the one owner of the end.
 import { makeAsker } from "./asker.ts";
 import { makeAutosave } from "./autosave.ts";
+import { makeDetailer } from "./detailer.ts";
 import { openInput } from "./input.ts";
 import { messageFor } from "./keys.ts";
 import { PaintStream } from "./paint.ts";
@@ -43,6 +44,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     const draw = (): void => {
       frame = undefined;
       asker.beforeFrame();
+      detailer.beforeFrame();
       clearImmediate(frame);
       frame = undefined;
       const drawn = drawScreen(store.state());
@@ -51,6 +53,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       if (mounted === null) paint.paint(drawn.rows);
       else mounted.show(drawn.rows);
       paint.settle();
+      detailer.afterFrame();
       if (store.state().answer !== null) loadInk();
     };
     /** Ink is loaded once what fits is on screen: the first list does not wait for it either. */
@@ -78,6 +81,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       },
     });
     const asker = makeAsker({ engine, state: store.state, send: store.send, now: () => performance.now() });
+    const detailer = makeDetailer({ engine, state: store.state, send: store.send });
     const autosave = makeAutosave({
       state: store.state,
       save: ports.saveSession,
@@ -111,6 +115,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         over = true;
         clearImmediate(frame);
         asker.stop();
+        detailer.stop();
         paint.close();
         stdout.off("resize", onResize);
         const unsaved = autosave.finish();

@@ -36,14 +36,18 @@ export const ENTER = "\x1b[?1049h\x1b[2J\x1b[H\x1b[?25l\x1b[?7l\x1b[?2004h";
 export const LEAVE = "\x1b[0m\x1b[?7h\x1b[?2004l\x1b[?25h\x1b[?1049l";
 
 /** Status a shell reports for a death by this signal: 128 and its number. */
-const SIGNAL_STATUS: Readonly<Record<string, number>> = { SIGINT: 130, SIGTERM: 143, SIGHUP: 129 };
+const SIGNAL_STATUS: Readonly<Record<string, number>> = { SIGINT: 130, SIGQUIT: 131, SIGTERM: 143, SIGHUP: 129 };
 const BUG_STATUS = 70;
+/** Signals that win32 does not have. */
+const JOB_SIGNALS: readonly string[] = ["SIGCONT", "SIGTSTP"];
+/** A stop takes hold within this, and nothing runs while it holds. */
+const GO_ON_MS = 250;
 
 export function openSession(options: SessionOptions): Session {
   const { process, writeSync, startInput, stopInput, redraw, onEnd } = options;
   let entered = false;
   let ended = false;
-  /** With input paused nothing keeps the process alive, and it would end on its way back from being stopped. */
+  /** With input paused nothing else keeps the process alive, and it would end on its way back from being stopped. */
   let keepAlive: ReturnType<typeof setInterval> | undefined;
 
   const write = (text: string): void => {
@@ -72,16 +76,33 @@ export function openSession(options: SessionOptions): Session {
     for (const [event, listener] of listeners) process.off(event, listener);
     onEnd(status, trouble);
   };
+  /** Also after a stop that we did not make ourselves: the shell has changed the terminal's mode meanwhile. */
   const resume = (): void => {
     clearInterval(keepAlive);
-    if (ended || entered) return;
+    if (ended) return;
+    if (entered) stopInput();
+    else if (process.platform !== "win32") process.on("SIGTSTP", suspend);
     take();
     redraw();
+  };
+  const suspend = (): void => {
+    if (process.platform === "win32" || !entered) return;
+    release();
+    // With our own listener on it the signal would not stop us.
+    process.off("SIGTSTP", suspend);
+    clearInterval(keepAlive);
+    keepAlive = setInterval(goOn, GO_ON_MS);
+    process.kill(process.pid, "SIGTSTP");
+  };
+  /** Where no shell could wake us the system ignores the stop; then the screens come back by themselves. */
+  const goOn = (): void => {
+    if (!entered) resume();
   };
   const fail = (error?: unknown): void => end(BUG_STATUS, error ?? new Error("unknown"));
   const listeners: readonly (readonly [string, (fact?: unknown) => void])[] = [
     ...Object.entries(SIGNAL_STATUS).map(([signal, status]) => [signal, () => end(status)] as const),
     ["SIGCONT", resume],
+    ["SIGTSTP", suspend],
     ["uncaughtException", fail],
     ["unhandledRejection", fail],
   ];
@@ -89,18 +110,12 @@ export function openSession(options: SessionOptions): Session {
   return {
     enter: () => {
       for (const [event, listener] of listeners) {
-        if (event !== "SIGCONT" || process.platform !== "win32") process.on(event, listener);
+        if (!JOB_SIGNALS.includes(event) || process.platform !== "win32") process.on(event, listener);
       }
       take();
     },
     end: (status) => end(status),
     fail,
-    suspend: () => {
-      if (process.platform === "win32" || !entered) return;
-      release();
-      clearInterval(keepAlive);
-      keepAlive = setInterval(() => {}, 60_000);
-      process.kill(process.pid, "SIGTSTP");
-    },
+    suspend,
   };
 }

@@ -2,8 +2,8 @@
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
 import type { Files } from "../cli/index.ts";
 import { saveBill } from "./billFile.ts";
+import { formValues } from "./briefInput.ts";
 import { catalogEngine } from "./catalogEngine.ts";
-import { FIELDS } from "./fields.ts";
 import type { ScreenPorts, StockFacts } from "./ports.ts";
 import { openScreens } from "./screens.ts";
 
@@ -13,32 +13,23 @@ export interface StartOptions {
   readonly stock: StockFacts;
   /** A brief as parsed from JSON; what is no object counts as none. */
   readonly brief: unknown;
+  /** The brief beats the one saved last time. */
+  readonly briefFirst?: boolean;
   readonly files: Files;
   /** Where brief and pins are kept between runs; null keeps nothing. */
   readonly sessionFile: string | null;
   readonly terminal: Pick<ScreenPorts, "stdin" | "stdout" | "writeSync" | "process" | "env" | "complain" | "ascii">;
 }
 
-/** A brief's values as the form holds them, and apart what the form has no field for. */
-export function formValues(brief: unknown): Pick<ScreenPorts, "brief" | "extra"> {
-  const values: Record<string, string> = {};
-  const extra: Record<string, unknown> = {};
-  if (typeof brief !== "object" || brief === null || Array.isArray(brief)) return { brief: values, extra };
-  for (const [key, value] of Object.entries(brief)) {
-    const inForm = FIELDS.some((field) => field.key === key);
-    if (inForm && (typeof value === "string" || typeof value === "number")) values[key] = String(value);
-    else extra[key] = value;
-  }
-  return { brief: values, extra };
-}
-
 /** The ports of the screens on real files. */
-export function portsOn({ parts, families, stock, brief, files, sessionFile, terminal }: StartOptions): ScreenPorts {
+export function portsOn(options: StartOptions): ScreenPorts {
+  const { parts, families, stock, brief, briefFirst = false, files, sessionFile, terminal } = options;
   const why = (refusals: readonly { readonly code: string; readonly want: string }[]): string =>
     refusals.map(({ code, want }) => `${code.replaceAll("-", " ")}; needed: ${want}`).join(". ");
   return {
     ...terminal,
     ...formValues(brief),
+    briefFirst,
     engine: catalogEngine({ parts, families }),
     stock,
     loadSession: () => {

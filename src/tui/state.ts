@@ -3,10 +3,10 @@ import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import type { Line, LineEdit } from "./line.ts";
-import type { Arrangement, SaveAnswer, StockFacts } from "./ports.ts";
+import type { Arrangement, Details, SaveAnswer, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
 
-export const SCREENS = ["brief", "layouts", "compare", "bank", "order"] as const;
+export const SCREENS = ["brief", "layouts", "compare", "bank", "sharing", "shot", "order"] as const;
 export type ScreenName = (typeof SCREENS)[number];
 
 /** Most layouts side by side. */
@@ -66,6 +66,10 @@ export interface State {
   /** Rows on which the pinned layouts agree are shown too. */
   readonly unfolded: boolean;
   readonly chosen: Arrangement | null;
+  /** What was worked out of the chosen bank for the screens that look closer; null before. */
+  readonly details: Details | null;
+  /** The spread of the worst unit is wanted on any basis. */
+  readonly spread: boolean;
   /** First row shown of each screen that scrolls freely; cut to what there is when drawn. */
   readonly scroll: Readonly<Record<string, number>>;
   readonly prompt: Prompt | null;
@@ -90,6 +94,9 @@ export type Message =
   | { readonly type: "rank" }
   | { readonly type: "front" }
   | { readonly type: "fold" }
+  | { readonly type: "spread" }
+  | { readonly type: "load" }
+  | { readonly type: "detailed"; readonly details: Details }
   | { readonly type: "export" }
   | { readonly type: "confirm" }
   | { readonly type: "cancel" }
@@ -142,6 +149,8 @@ export const initialState = (start: Start): State => ({
   column: 0,
   unfolded: false,
   chosen: null,
+  details: null,
+  spread: false,
   scroll: {},
   prompt: null,
   notice: null,

@@ -62,13 +62,13 @@ export interface Summary {
 }
 
 /** The worst verdict among a layout's findings, and how many have it; no findings at all is not a pass. */
-export function worstVerdict({ findings }: LayoutResult): Summary {
+export function worstVerdict({ findings }: Pick<LayoutResult, "findings">): Summary {
   const verdict = bySeverity(findings)[0]?.verdict ?? "not assessed";
   return { verdict, count: findings.filter((finding) => finding.verdict === verdict).length };
 }
 
 /** "pass", "2 warn", "1 fail", "3 unknown". */
-export function shownVerdict(layout: LayoutResult): string {
+export function shownVerdict(layout: Pick<LayoutResult, "findings">): string {
   const { verdict, count } = worstVerdict(layout);
   if (verdict === "pass") return "pass";
   return `${count} ${verdict === "not assessed" ? "unknown" : verdict}`;

@@ -3,6 +3,7 @@ import { describe, expect, test, vi } from "vitest";
 import { countedRisk, monteCarloChunk } from "../../src/bank/monteCarlo.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
 import { exceedRisk, tailFaults } from "../../src/bank/tail.ts";
+import { riskBound } from "../../src/bank/tailBound.ts";
 import type { TailCase, UnitLaw } from "../../src/bank/tailLaw.ts";
 import { type ImportanceCase, importanceTail } from "./importance.ts";
 
@@ -218,4 +219,18 @@ describe("tailFaults(case)", () => {
     expect(tailFaults(asked({ share: 0 }))).toEqual(["share not above zero"]);
     expect(tailFaults(asked({ n: 1.5 }))).toEqual(["counts not whole numbers from 1"]);
   });
+});
+
+test("a chance too small for the lattices is bounded rigorously: 8s13p at +-10 %, 1 % under the worst share, is no 2.5 %", () => {
+  const given: TailCase = {
+    law: { kind: "uniform", low: 0.9, high: 1.1 },
+    ties: "cross-tied",
+    n: 8,
+    p: 13,
+    share: 324 / 2200,
+  };
+  const { exceed, error } = exceedRisk(given);
+  expect(exceed + error).toBeLessThanOrEqual(riskBound(given));
+  expect(exceed + error).toBeLessThan(1e-90);
+  expect(exceed + error).toBeGreaterThan(0);
 });

@@ -1,4 +1,4 @@
-// Long campaign for placing: 1,000 seeded lots against the published rules, 400 against full enumeration of up to 1e5 placings.
+// Long campaign for placing: 1,000 seeded lots against the published rules, some 400 against full enumeration of up to 1e5 placings.
 // Build with esbuild and run with node; it prints one line a claim and ends with exit status 1 when one fails.
 import { arrangements } from "../../src/place/enumerate.ts";
 import { place } from "../../src/place/place.ts";
@@ -60,6 +60,7 @@ claim("sort-and-cut never does better", 1000, cutBetter);
 
 let wrong = 0;
 let unproven = 0;
+let compared = 0;
 const tiny = [
   [2, 6, 1],
   [3, 4, 1],
@@ -78,12 +79,13 @@ for (let seed = 1; seed <= 400; seed++) {
   const [groups, size] = ties === "cross-tied" ? [series, parallel] : [parallel, series];
   const count = series * parallel + spares;
   if (arrangements(count, groups, size) > 1e5) continue;
+  compared++;
   const lot = wholes(count, seed, 900, 1100);
   const made = gapOf(lot, { series, parallel, ties, outliers: "keep" });
   const best = bestGap(lot, { groups, size }, ties === "cross-tied" ? stagesGap : stringsGap);
   if (Math.abs(made.gap - best) > 1e-11) wrong++;
   if (made.proof !== "optimal") unproven++;
 }
-claim("equal to full enumeration of at most 1e5 placings", 400, wrong);
-claim("and proven so", 400, unproven);
+claim("equal to full enumeration of at most 1e5 placings", compared, wrong);
+claim("and proven so", compared, unproven);
 process.exitCode = failed ? 1 : 0;

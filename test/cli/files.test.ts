@@ -129,6 +129,14 @@ describe("write(path, text, force)", () => {
     expect(left()).toEqual(["a"]);
   });
 
+  test("a name as long as the system allows, in bytes, and a leftover with our number in the way", () => {
+    const path = join(folder, `${"電".repeat(83)}.csv`);
+    fs.writeFileSync(join(folder, `.joulewright.${process.pid}.0.partial`), "theirs");
+    expect(files.write(path, "new", false).ok).toBe(true);
+    expect(fs.readFileSync(path, "utf8")).toBe("new");
+    expect(left()).toHaveLength(2);
+  });
+
   test("a file that appears while the text is written is not replaced", () => {
     const path = join(folder, "a");
     const racing: FileSystem = {

@@ -17,7 +17,7 @@ describe("planText(of)", () => {
     for (const part of [
       /allowed fall +100 %, a full dump/,
       /Capacitance needed: 250 µF/,
-      /Searched 1 parts; \d+ layouts do it; exhaustive/,
+      /Searched 1 part; \d+ layouts do it; exhaustive/,
       /Layouts by cost \(first 5 of/,
       /Best: test-1000-400 \d+s\d+p/,
       /Why this one: lowest cost/,

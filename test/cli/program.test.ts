@@ -31,6 +31,11 @@ describe("run(argv, ports)", () => {
     const command = await cli(["plna"]);
     expect([command.status, command.out]).toEqual([2, ""]);
     expect(command.err).toMatch(/unknown command 'plna'[\s\S]*Did you mean plan\?/);
+    for (const argv of [
+      ["help", "plna"],
+      ["plna", "--help"],
+    ])
+      expect(await cli(argv), argv.join(" ")).toMatchObject({ status: 2, out: "", err: command.err });
     const option = await cli(["plan", "--energi", "3"]);
     expect(option.status).toBe(2);
     expect(option.err).toMatch(/Did you mean --energy\?/);

@@ -1,14 +1,20 @@
 import { readFileSync } from "node:fs";
 import { describe, expect, test } from "vitest";
 import { REASONS, reasonWords } from "../../src/cli/reasonWords.ts";
+import { LIMIT_NAMES } from "../../src/search/limits.ts";
 import { at } from "../support/fakePorts.ts";
 
-const sweep = readFileSync(at("src/search/sweep.ts"), "utf8");
+const sweep = ["sweep", "limitedSweep", "limits", "blendString", "blendOptions"]
+  .map((name) => readFileSync(at(`src/search/${name}.ts`), "utf8"))
+  .join("");
+const limits = Object.values(LIMIT_NAMES).flatMap((name) =>
+  ["limit", "unproven", "unknown"].map((end) => `${name}-${end}`),
+);
 
 describe("reasonWords(reason, currency)", () => {
   test("every reason of the search has words, and no other", () => {
-    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown))|stock|balance)"/g);
-    const used = new Set([...found].map((match) => match[1] as string));
+    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown|missing))|stock|balance|risk|no-shot)"/g);
+    const used = new Set([...[...found].map((match) => match[1] as string), ...limits]);
     expect(used.size).toBeGreaterThan(7);
     expect([...used].sort()).toEqual(Object.keys(REASONS).sort());
   });
@@ -23,6 +29,12 @@ describe("reasonWords(reason, currency)", () => {
     );
     expect(reasonWords({ reason: "mass-limit", value: 5.63, limit: 0.5 }, null)).toBe(
       "weighs 5.63 kg at least, limit 500 g",
+    );
+  });
+
+  test("stock: what must be bought, which is less than the bank needs when some is on hand", () => {
+    expect(reasonWords({ reason: "stock", value: 79, limit: 0 }, null)).toBe(
+      "79 units must be bought, 0 can be had, packs and minimum order counted",
     );
   });
 

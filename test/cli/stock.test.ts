@@ -6,6 +6,7 @@ const HEAD = "part,capacitance [uF],voltage [V]\n";
 const texts = {
   "a.csv": `${HEAD}one,100,400\ntwo,200,400\n`,
   "b.csv": `${HEAD}two,300,400\nthree,x,400\n`,
+  "near.csv": "part,capacitence [uF],voltage [V]\none,100,400\n",
   "bad.csv": `${HEAD}one,x,400\n`,
   "r.csv": "family,tolerance [%],power [W],voltage [V]\nr1,5,2,350\n",
   "rbad.csv": "family,tolerance [%],power [W],voltage [V]\nr1,x,2,350\n",
@@ -46,6 +47,9 @@ describe("readStock(given, files)", () => {
 
   test("no good row at all is refused with the faults; every unreadable file is told", () => {
     expect(codes(stock(["bad.csv"]))).toEqual(["not-a-number", "no-parts"]);
+    const near = stock(["near.csv"]);
+    expect(codes(near)).toEqual(["missing-value", "unknown-heading", "no-parts"]);
+    expect(near.ok ? "" : near.refusals[1]?.want).toMatch(/perhaps "capacitance"/);
     expect(codes(stock(["a.csv"], "rbad.csv")).at(-1)).toBe("no-parts");
     expect(codes(stock(["/none/1", "/none/2"]))).toEqual(["no-such-file", "no-such-file"]);
   });

@@ -55,6 +55,12 @@ describe("refusalWords(refusal)", () => {
     expect(words).toBe('a:2: this is no number: read "x"; accepted: a number');
   });
 
+  test("a very long piece of input is cut, and its length told", () => {
+    const words = refusalWords({ code: "not-finite", place: {}, read: "9".repeat(5000), want: "a number" });
+    expect(words.length).toBeLessThan(400);
+    expect(words).toContain("999... (5000 characters)");
+  });
+
   test("nothing of a file reaches the terminal raw", () => {
     const evil = "\u001b[2J\u202e\u0000\n";
     const words = refusalWords({ code: "not-a-number", place: { file: evil, field: evil }, read: evil, want: evil });

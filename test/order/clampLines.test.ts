@@ -13,6 +13,22 @@ describe("clampLines({ layout, unit, brief })", () => {
     expect(volts).toBeGreaterThanOrEqual(Math.max(layout.share.charging ?? 0, layout.share.holding ?? 0));
   });
 
+  test("a dump resistor gives surge and action, rounded up; without one and without ESR they are said to be unknown", () => {
+    const asked = briefOf({ dumpResistance: "100 ohm", hold: "10 s" });
+    const [line] = clampLines({ layout: bankOf({ brief: asked }), unit: UNIT, brief: asked });
+    const rest = (7 * 250 * (1 - 0.8 / 1.2)) / 100;
+    const [, amperes = ""] = /([\d.]+) A surge/.exec(line?.rating ?? "") ?? [];
+    expect(Number(amperes)).toBeGreaterThanOrEqual(rest);
+    expect(Number(amperes)).toBeLessThan(rest * 1.01);
+    expect(line?.rating).toMatch(/A2s/);
+    expect(line?.note).toMatch(/dump resistor of 100 ohm/);
+    const [open] = clampLines({ layout: bankOf(), unit: UNIT, brief });
+    expect(open?.rating).toMatch(/surge current of the dump not known/);
+    expect(open?.note).toMatch(/State the dump resistance/);
+    const [own] = clampLines({ layout: bankOf(), unit: { ...UNIT, esr: 0.1 }, brief });
+    expect(own?.note).toMatch(/the units' own ESR/);
+  });
+
   test("in strings one diode a unit", () => {
     const layout = bankOf({ layout: { part: "x", series: 8, parallel: 2, ties: "strings" } });
     expect(clampLines({ layout, unit: UNIT, brief })[0]?.needed).toBe(16);

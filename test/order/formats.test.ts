@@ -15,6 +15,11 @@ test("billText(bill, format): each format ends in a line break, opens as it shou
   }
 });
 
+test("billText(bill, json) has nothing hidden in it", () => {
+  const odd = { ...bill, layout: "\u202ea\u009b" };
+  expect(billText(odd, "json")).toContain('"\\u202ea\\u009b"');
+});
+
 test("billText(bill, json) reads back to the bill", () => {
   expect(JSON.parse(billText(bill, "json"))).toEqual(bill);
 });

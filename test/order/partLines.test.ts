@@ -14,6 +14,7 @@ describe("unitLines(layout, unit, spares)", () => {
     const layout = bankOf({ brief: briefOf({ spares: 5 }) });
     const [units, spares] = unitLines(layout, UNIT, 5);
     expect(spares).toMatchObject({ line: "spares", needed: 5, onHand: 0, toBuy: 5, packs: null, purchase: 12.5 });
+    expect(units?.note).toMatch(/of units and spares together/);
     expect((units?.purchase ?? 0) + (spares?.purchase ?? 0)).toBe((layout.purchase.capacitors?.cost ?? 0) / 100);
     expect((units?.toBuy ?? 0) + (spares?.toBuy ?? 0)).toBe(20);
   });

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { visible, visibleLines } from "../../src/order/index.ts";
+import { visible, visibleJson, visibleLines } from "../../src/order/index.ts";
 import { UNSAFE } from "../support/fakePorts.ts";
 
 describe("visible(text)", () => {
@@ -24,6 +24,16 @@ describe("visible(text)", () => {
       const once = visible(`x${String.fromCodePoint(code)}y`);
       expect(UNSAFE.test(once), code.toString(16)).toBe(false);
       expect(visible(once)).toBe(once);
+    }
+  });
+
+  test("visibleJson(json) hides nothing and reads back to the same value", () => {
+    const value = { "\u202ek": "a\u009b31m\u200b\ufeff\u{e0041}\ud800 µ 電\u0007\n", list: ["\u2066", 1] };
+    for (const indent of [0, 2]) {
+      const json = visibleJson(JSON.stringify(value, null, indent));
+      expect(UNSAFE.test(json.replaceAll("\n", ""))).toBe(false);
+      expect(json).toContain("µ 電");
+      expect(JSON.parse(json)).toEqual(value);
     }
   });
 

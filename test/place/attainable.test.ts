@@ -6,7 +6,7 @@ import { capacitances } from "./lots.ts";
 const UNIFORM = 0.1 / Math.sqrt(3);
 
 describe("attainableGap(shape)", () => {
-  // Bovier-Kurkova asymptotics against exact optima found independently (placing notes, section 5).
+  // Bovier-Kurkova asymptotics against exact optima that were found by enumeration.
   test.each([
     [4, 4, 16, 173],
     [4, 4, 24, 1.91],

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { mend } from "../../src/place/mend.ts";
+import { type Mending, mend } from "../../src/place/mend.ts";
 import { place } from "../../src/place/place.ts";
 import type { Placing } from "../../src/place/placing.ts";
 import { stagesGap } from "./brute.ts";
@@ -9,6 +9,12 @@ const request = { series: 3, parallel: 3, ties: "cross-tied" } as const;
 const placedOf = (lot: ReturnType<typeof units>): Placing => {
   const read = place(lot, request);
   if (!read.ok) throw new Error("refused");
+  return read.value;
+};
+
+const mended = (...args: Parameters<typeof mend>): Mending => {
+  const read = mend(...args);
+  if (!read.ok) throw new Error(read.refusals[0]!.code);
   return read.value;
 };
 
@@ -40,10 +46,10 @@ describe("mend(units, request, placing, out)", () => {
           }
         }
       }
-      const { rows } = mend(lot, request, placing, out);
+      const { rows } = mended(lot, request, placing, out);
       expect(rows[0]!.moves).toBe(1);
       expect(rows[0]!.charging).toBeCloseTo(best[1]!, 12);
-      const goal = mend(lot, request, placing, out).goal;
+      const goal = mended(lot, request, placing, out).goal;
       if (rows[0]!.charging > goal && best[2]! < best[1]!) expect(rows[1]!.charging).toBeCloseTo(best[2]!, 12);
     }
   });
@@ -52,7 +58,7 @@ describe("mend(units, request, placing, out)", () => {
     const lot = units("uniform", 12, 3);
     const placing = placedOf(lot);
     const out = placing.groups[0]![0]!;
-    const { rows, enough, goal } = mend(lot, request, placing, out);
+    const { rows, enough, goal } = mended(lot, request, placing, out);
     for (const [k, row] of rows.entries()) {
       if (k > 0) expect(row.charging).toBeLessThan(rows[k - 1]!.charging);
       expect(row.groups.flat()).not.toContain(out);
@@ -65,10 +71,16 @@ describe("mend(units, request, placing, out)", () => {
   test("no spare: the hole stays, exchanges make up for part of it", () => {
     const lot = units("uniform", 9, 5);
     const placing = placedOf(lot);
-    const { rows } = mend(lot, request, placing, placing.groups[2]![1]!);
+    const { rows } = mended(lot, request, placing, placing.groups[2]![1]!);
     expect(rows[0]!.moves).toBe(0);
     expect(rows.at(-1)!.charging).toBeLessThan(rows[0]!.charging);
     expect(rows.at(-1)!.groups.flat().length).toBe(8);
+  });
+
+  test("a serial that is not fitted is refused", () => {
+    const lot = units("uniform", 12, 7);
+    const placing = placedOf(lot);
+    expect(mend(lot, request, placing, placing.spares[0]!).ok).toBe(false);
   });
 
   test("a pinned unit is not moved", () => {
@@ -76,7 +88,7 @@ describe("mend(units, request, placing, out)", () => {
     const placing = placedOf(lot);
     const pinned = placing.groups[0]![1]!;
     const pins = [{ serial: pinned, group: 0 }];
-    const { rows } = mend(lot, { ...request, pins }, placing, placing.groups[1]![0]!);
+    const { rows } = mended(lot, { ...request, pins }, placing, placing.groups[1]![0]!);
     for (const row of rows) expect(row.groups[0]).toContain(pinned);
   });
 });

@@ -87,6 +87,18 @@ describe("readBrief(input): bad", () => {
     ["zero-voltage", ["bad-value voltage"]],
   ])("bad/%s.json: %j", (file, told) => expect([...codes(load(`bad/${file}.json`))].sort()).toEqual(told));
 
+  test("a risk of 0, of 1, beyond a half or below nought is refused, and told what it would mean", () => {
+    const want = (risk: unknown): string => {
+      const read = readBrief({ energy: 1, voltage: 1, ripple: 1, risk });
+      return read.ok ? "" : (read.refusals[0]?.want ?? "");
+    };
+    expect(want(0)).toMatch(/worst case/);
+    expect(want("0 %")).toMatch(/worst case/);
+    expect(want(1)).toMatch(/every bank would do/);
+    for (const risk of [0.6, -1, "often"]) expect(want(risk)).toMatch(/above 0 and at most 0\.5/);
+    expect(brief({ risk: "0.1 %" }).risk).toBe(1e-3);
+    expect(brief({ risk: 0.5 }).risk).toBe(0.5);
+  });
   test("bad/statistical-without-risk.json takes the default risk of one in ten thousand, which every output states", () => {
     const read = readBrief(load("bad/statistical-without-risk.json"));
     expect(read.ok && read.value.risk).toBe(1e-4);

@@ -181,3 +181,48 @@ describe("plan(input): names", () => {
     expect(new Set(ids).size).toBe(ids.length);
   });
 });
+
+describe("plan(input): what the states at rest add", () => {
+  const planned = must(plan({ ...demo, brief: { ...demo.brief, hold: 30 }, limit: 5 }));
+
+  test("improve is that of the best: its baseline is the best itself; quick leaves it out", () => {
+    const [best] = planned.layouts;
+    expect(planned.improve?.baseline).toMatchObject({ id: best?.id, units: best?.units, cost: best?.cost?.total });
+    expect(planned.improve?.causes.map(({ cause }) => cause).sort()).toEqual(
+      ["capacitance tolerance", "derating", "leakage", "overshoot", "resistor tolerance"].sort(),
+    );
+    expect(must(plan({ ...demo, limit: 1, quick: true })).improve).toBeUndefined();
+  });
+
+  test("every layout says what it would be without resistors; they do not change which layouts there are", () => {
+    for (const one of planned.layouts) {
+      if (one.series === 1) expect(one.withoutBalance).toBeNull();
+      else
+        expect(one.withoutBalance?.safe).toBe(
+          (one.withoutBalance?.holding ?? Number.NaN) <= one.share.limit * (1 + 1e-9),
+        );
+    }
+  });
+
+  test("a part that no resistor keeps safe is refused with what would mend it", () => {
+    const text = "part,capacitance [uF],voltage [V],tolerance [%],leakage [uA],polarised\nu,1000,450,0.5,100,yes\n";
+    const family = labResistors.slice(0, 1).map((one) => ({ ...one, tolerance: 0.2 }));
+    const brief = briefOf({ voltage: 1600, energy: 100, maxSeries: 4 });
+    const [refusal] = must(plan({ brief, parts: parts(text), families: family })).refused;
+    expect(refusal?.reason).toBe("balance");
+    expect(refusal?.mends?.series).toBeGreaterThan(4);
+    // (n V_lim - V)/(V + (n - 2) V_lim) = 20/2410, by methods 2.2.
+    expect(refusal?.mends?.tolerance).toBeLessThanOrEqual(20 / 2410);
+    expect(refusal?.mends?.tolerance).toBeGreaterThan(0.005);
+    expect(refusal?.mends?.voltage).toBeLessThan(1600);
+  });
+
+  test("the statistical best keeps its own stated risk, error counted against it", () => {
+    const brief = { ...demo.brief, basis: "statistical" as const };
+    const some = labParts.filter(({ file }) => file === "electrolytic.csv");
+    for (const one of must(plan({ ...demo, parts: some, brief, limit: 10 })).layouts) {
+      const finding = one.findings.find(({ id }) => id === "charging-risk");
+      if (one.share.charging !== null) expect(finding?.verdict, one.id).toBe("pass");
+    }
+  }, 20_000);
+});

@@ -1,10 +1,14 @@
 // The sieve: nothing that belongs to the first of the order or to the front is ever said not to matter.
 import { describe, expect, test } from "vitest";
+import { readCapacitors } from "../../src/catalog/index.ts";
 import { frontRows } from "../../src/search/front.ts";
+import { plan, readBrief } from "../../src/search/index.ts";
 import { comparison, firstRows, RANKINGS } from "../../src/search/rank.ts";
 import { mayMatter, remember, sieveOf } from "../../src/search/sieve.ts";
 import { strongOf } from "../../src/search/strong.ts";
 import { figuresAt, type LayoutTable, newTable, noFigures, pushRow } from "../../src/search/table.ts";
+import { bigCatalogue } from "../support/bigCatalogue.ts";
+import { must } from "../support/labParts.ts";
 import { chance } from "../support/random.ts";
 
 const INF = Number.POSITIVE_INFINITY;
@@ -61,4 +65,27 @@ describe("sieveOf(table, strong, wanted), mayMatter(sieve, figures), remember(si
     const worst = { cost: INF, volume: INF, mass: INF, units: 9, stress: INF };
     expect(mayMatter(sieveOf(table, strong, { limit: 2, rank: "cost" }), worst)).toBe(true);
   });
+});
+
+const parts = must(readCapacitors(bigCatalogue(4000, 11), "big.csv")).parts;
+const briefOf = (over: object) => must(readBrief({ energy: "2.4 kJ", voltage: "2.2 kV", ripple: "100 %", ...over }));
+
+describe("plan with a limit against plan that keeps all, 4,000 parts", () => {
+  const asks = [{ maxSeries: 9 }];
+  test.each(asks)(
+    "%j: the same count, front, refusals and first layouts, and by two rankings for one",
+    (ask) => {
+      const brief = briefOf(ask);
+      for (const rank of ask === asks[0] ? (["cost", "stress"] as const) : (["cost"] as const)) {
+        const all = must(plan({ brief, parts, limit: 0, rank, quick: true }));
+        const some = must(plan({ brief, parts, limit: 20, rank, quick: true }));
+        expect(all.searched.layouts).toBeGreaterThan(1000);
+        expect(some.searched).toEqual(all.searched);
+        expect([...some.front].sort()).toEqual([...all.front].sort());
+        expect(some.refused).toEqual(all.refused);
+        expect(some.layouts.map((l) => l.id)).toEqual(all.layouts.slice(0, 20).map((l) => l.id));
+      }
+    },
+    60_000,
+  );
 });

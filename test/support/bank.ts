@@ -1,7 +1,16 @@
 // One small bank to test bills and texts on: eight in series, two in parallel, with every price by hand.
 import type { Capacitor, ResistorFamily } from "../../src/catalog/index.ts";
 import { DEFAULT_FAMILY, readResistors } from "../../src/catalog/index.ts";
-import { type AssessInput, assess, type Brief, type LayoutResult, readBrief } from "../../src/search/index.ts";
+import { prepare } from "../../src/search/candidate.ts";
+import type { Cornered } from "../../src/search/findingsInput.ts";
+import {
+  type AssessInput,
+  assess,
+  type Brief,
+  cornersOf,
+  type LayoutResult,
+  readBrief,
+} from "../../src/search/index.ts";
 
 /** 1000 uF +-20 %, 400 V, polarised, 100 uA, 2.50 EUR, packs of 10, 3 on hand. */
 export const UNIT: Capacitor = {
@@ -53,3 +62,12 @@ export function bankOf(more: Partial<AssessInput> = {}): LayoutResult {
 }
 
 export { DEFAULT_FAMILY };
+
+/** The input of the findings of the small bank; parts of it may be laid over. */
+export function findingsInput(more: Partial<Cornered> = {}): Cornered {
+  const unit = more.unit ?? UNIT;
+  const brief = more.brief ?? briefOf();
+  const result = more.result ?? bankOf({ unit, brief });
+  const given = { result, unit, brief, candidate: prepare(unit, brief), family: FAMILIES[0] ?? null, ...more };
+  return { ...given, corners: more.corners ?? cornersOf(given) };
+}

@@ -1,7 +1,9 @@
 // Random keys at random sizes against the screens without their process: what must hold after every key is checked.
 
 import { rowCells } from "../../src/tui/cells.ts";
+import { detailKey, detailsOf, wantedPiece, withPiece } from "../../src/tui/detail.ts";
 import { answerFor } from "../../src/tui/engine.ts";
+import { FIELDS } from "../../src/tui/fields.ts";
 import { messageFor } from "../../src/tui/keys.ts";
 import { PaintStream } from "../../src/tui/paint.ts";
 import { readSaved, savedText } from "../../src/tui/saved.ts";
@@ -25,7 +27,7 @@ export function randomFrom(seed: number): () => number {
 }
 
 const KEYS = [
-  ..."0123456789.kJVm%q?xrfapeengjGky   -µΩ漢😀",
+  ..."0123456789.kJVm%q?xrfapeengjGkycl   -µΩ漢😀",
   "\r",
   "\t",
   "\x7f",
@@ -52,7 +54,9 @@ const KEYS = [
   "\x1b3",
   "\x1b4",
   "\x1b5",
-  "\x1b5",
+  "\x1b6",
+  "\x1b7",
+  "\x1b7",
   "\x1bOP",
   "\x1b[12~",
   "\x1b[13~",
@@ -73,10 +77,14 @@ const SIZES = [
 ] as const;
 
 /** Types a brief that can be planned into an emptied form: random letters alone would soon leave nothing but refusals. */
-const MEND = `\x1b1\x1b[5~\x152.4 kJ\t\x152.2 kV\t\x15100 %${"\t\x15".repeat(15)}`;
+const MEND = `\x1b1\x1b[5~\x152.4 kJ\t\x152.2 kV\t\x15100 %${"\t\x15".repeat(FIELDS.length - 3)}`;
 
 /** Pins two layouts and goes to compare them. */
 const PIN = "\x1b2 \x1b[B \x1b3";
+
+/** Gives a load and goes to see the shot, or asks for the spread. */
+const LOAD = "\x1b6l\x1550 mohm\t\x1520 uH\x1b6";
+const SPREAD = "\x1b5c";
 
 export interface MonkeyReport {
   readonly keys: number;
@@ -130,10 +138,25 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
       `${what} on ${state.screen} at ${state.columns} by ${state.rows} after ${JSON.stringify(trail.slice(-12))}`,
     );
   };
+  /** The next missing piece, as after a frame; the same piece of the same bank is worked out once. */
+  const pieces = new Map<string, unknown>();
+  const detail = (): void => {
+    const state = store.state();
+    const piece = wantedPiece(state);
+    const key = detailKey(state);
+    if (piece === null || key === null) return;
+    const name = `${piece}\n${key}`;
+    const known = pieces.get(name);
+    const details =
+      known === undefined ? withPiece(state, piece, engine) : { ...detailsOf(state), key, [piece]: known };
+    if (details === null) return;
+    pieces.set(name, details[piece]);
+    send({ type: "detailed", details });
+  };
   const tokens = makeTokeniser();
   answer();
   for (let key = 0; key < count && faults.length < 5; key += 1) {
-    const typed = random() < 0.02 ? MEND : random() < 0.01 ? PIN : pick(KEYS);
+    const typed = random() < 0.02 ? MEND : random() < 0.01 ? PIN : random() < 0.02 ? pick([LOAD, SPREAD]) : pick(KEYS);
     trail.push(typed);
     if (random() < 0.01) {
       const [columns, rows] = pick(SIZES);
@@ -146,11 +169,13 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
       if (message !== null && message.type !== "quit") send(message);
     }
     if (random() < 0.7) answer();
+    if (random() < 0.7) detail();
     const state = store.state();
     const { columns, rows } = state;
     const listed = state.answer?.kind === "planned" && state.answer.plan.layouts.length > 0;
     seen.add(state.screen + (state.help ? "+help" : "") + (state.prompt ? "+prompt" : ""));
     seen.add(`${state.screen} ${listed ? "listed" : "empty"} ${state.pins.length}`);
+    seen.add(`${state.screen} with ${Object.keys(detailsOf(state) ?? {}).join(" ")}`);
     const drawn = drawScreen(state);
     if (drawn.rows.length > rows || drawn.rows.some((row) => rowCells(row, 9999).length > columns))
       fault("outside the screen", state);

@@ -1,4 +1,5 @@
-// A bank at rest worked out the slow and obvious way, straight from the rules on paper: plain loops, no code of src/bank.
+// A bank at rest worked out the slow and obvious way, straight from the rules on paper: plain loops, nothing of src/bank but the time course.
+import { worstAtHold } from "../../src/bank/index.ts";
 import type { PurchaseTerms, ResistorFamily } from "../../src/catalog/index.ts";
 
 /** One comparison of the rules: an exact fit is a fit. */
@@ -24,8 +25,21 @@ export const slowCharging = (voltage: number, n: number, low: number, high: numb
   (voltage * (1 + high)) / (1 + high + (n - 1) * (1 - low));
 
 /** Worst end of the hold, V, at most V: more than all the volts no stage can have. */
-export const slowHolding = (chain: SlowChain, resistance: number): number =>
+const slowEnd = (chain: SlowChain, resistance: number): number =>
   Math.min(slowFormula(chain, resistance), chain.voltage);
+
+/**
+ * The same, or the highest on the way of a finite hold where that is higher than both ends. The time course is the bank layer's own, which its
+ * tests hold to a circuit simulator and to every corner; all else here is written anew.
+ */
+export function slowHolding(chain: SlowChain, resistance: number): number {
+  const end = slowEnd(chain, resistance);
+  if (chain.hold === Number.POSITIVE_INFINITY || chain.series === 1) return end;
+  const { voltage: V, series: n, sharing: m, capacitance: C, low, high, spread: q, hold } = chain;
+  const { leakage = 0, insulation = Number.POSITIVE_INFINITY } = chain;
+  const way = worstAtHold({ n, m, C, tLow: low, tHigh: high, leakage, insulation, R: resistance, q, V, hold }).voltage;
+  return way > Math.max(end, slowCharging(V, n, low, high)) * (1 + 1e-9) ? way : end;
+}
 
 /** The rule's own equation for V_1, then, for a finite hold, the exponential from each corner of C; may exceed V, and is what R is chosen by. */
 export function slowFormula(chain: SlowChain, resistance: number): number {
@@ -56,17 +70,35 @@ export interface SlowChoice {
   readonly worst: number;
 }
 
-/** For k = 1, 2, 3, ...: tries every preferred value from the top until the share holds, then the volts and watts of one element. */
+/** As slowBelow; where the way of the hold stands too high, the same with a smaller R, a few times. */
 export function slowBalance(chain: SlowChain, limit: number, family: ResistorFamily, most = 3000): SlowChoice | null {
+  let below = Number.POSITIVE_INFINITY;
+  for (let step = 0; step < 6; step++) {
+    const choice = slowBelow(chain, limit, family, { most, below });
+    if (choice === null) return null;
+    const worst = slowHolding(chain, choice.resistance);
+    if (within(worst, limit) || chain.hold === Number.POSITIVE_INFINITY) return { ...choice, worst };
+    below = choice.resistance * (1 - 1e-6);
+  }
+  return null;
+}
+
+/** For k = 1, 2, 3, ...: tries every preferred value from the top until the share holds, then the volts and watts of one element. */
+function slowBelow(
+  chain: SlowChain,
+  limit: number,
+  family: ResistorFamily,
+  { most, below }: { readonly most: number; readonly below: number },
+): SlowChoice | null {
   const { spread: q } = chain;
   for (let k = 1; k <= most; k++) {
     let element = 0;
     for (const value of family.values) {
-      if (value > element && within(slowFormula(chain, value * k), limit)) element = value;
+      if (value > element && value * k <= below && within(slowFormula(chain, value * k), limit)) element = value;
     }
     if (element === 0) continue;
     const resistance = element * k;
-    const worst = slowHolding(chain, resistance);
+    const worst = slowEnd(chain, resistance);
     const watts = (worst * worst) / (resistance * (1 - q)) / k;
     if (within(worst / k, family.voltage) && within(watts, family.power * family.derating))
       return { resistance, element, elements: k, worst };

@@ -84,6 +84,7 @@ export function fakePorts(columns = 80, rows = 24, changes: Partial<ScreenPorts>
     engine,
     stock: STOCK,
     brief: BRIEF,
+    briefFirst: false,
     extra: {},
     loadSession: () => kept.session,
     saveSession: (text) => {

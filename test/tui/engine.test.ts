@@ -1,6 +1,6 @@
 // One question to the engine: refused, nothing fits, planned.
 import { describe, expect, test } from "vitest";
-import { answerFor, filledValues, mostListed } from "../../src/tui/engine.ts";
+import { answerFor, mostListed } from "../../src/tui/engine.ts";
 import { update } from "../../src/tui/update/update.ts";
 import { engine, stateWith } from "../support/stock.ts";
 
@@ -41,8 +41,4 @@ test("mostListed(state): short beside the form, long on the list, and going ther
   expect([mostListed(stateWith()), mostListed(stateWith({ screen: "layouts" }))]).toEqual([50, 200]);
   expect(update(stateWith(), { type: "go", screen: "layouts" }).effects).toEqual([{ type: "ask", asked: 1 }]);
   expect(update(stateWith({ screen: "layouts" }), { type: "go", screen: "brief" }).effects).toEqual([]);
-});
-
-test("filledValues(values) leaves blanks to the brief's defaults", () => {
-  expect(filledValues({ a: "", b: "  ", c: "1" })).toEqual({ c: "1" });
 });

@@ -5,7 +5,7 @@ import { FIELDS, fieldAt, shownValue, valueIn } from "../../src/tui/fields.ts";
 
 test("every field is a key of the brief, once, and the three that must be given come first", () => {
   const keys = FIELDS.map(({ key }) => key);
-  expect(keys.filter((key) => !BRIEF_KEYS.includes(key))).toEqual([]);
+  expect(keys.filter((key) => !BRIEF_KEYS.includes(key.split(".")[0] ?? ""))).toEqual([]);
   expect(new Set(keys).size).toBe(keys.length);
   expect(keys.slice(0, 3)).toEqual(["energy", "voltage", "ripple"]);
 });
@@ -29,4 +29,14 @@ test("fieldAt(index) of an index that is not there is the first", () => {
   expect(fieldAt(-1).key).toBe("energy");
   expect(fieldAt(999).key).toBe("energy");
   expect(fieldAt(1).key).toBe("voltage");
+});
+
+test("valueIn(brief, field): a point in the key goes one level down; without a load there is no value", () => {
+  const load = { resistance: "50 mohm", inductance: "20 uH" };
+  const read = readBrief({ energy: 1, voltage: 1, ripple: 1, load });
+  const without = readBrief({ energy: 1, voltage: 1, ripple: 1 });
+  if (!read.ok || !without.ok) throw new Error("a brief with a load is refused");
+  const fields = FIELDS.filter(({ key }) => key.startsWith("load."));
+  expect(fields.map((field) => shownValue(field, valueIn(read.value, field)))).toEqual(["50 mohm", "20 \u00b5H"]);
+  expect(fields.map((field) => shownValue(field, valueIn(without.value, field)))).toEqual(["", ""]);
 });

@@ -4,13 +4,15 @@ import { answerFor } from "../../src/tui/engine.ts";
 import { helpLineKeys, KEYS, liveKeys, messageFor } from "../../src/tui/keys.ts";
 import { lineOf } from "../../src/tui/line.ts";
 import { SCREENS, type State } from "../../src/tui/state.ts";
-import { engine, stateWith } from "../support/stock.ts";
+import { BRIEF, engine, stateWith } from "../support/stock.ts";
 
 const planned = (changes: Partial<State> = {}): State => {
   const state = stateWith(changes);
   return { ...state, answer: answerFor(state, engine, true) };
 };
 const press = (state: State, key: string, text = "") => messageFor(state, { kind: "key", key, text });
+
+const BANK = { part: "flash-a", series: 7, parallel: 4, ties: "cross-tied" } as const;
 
 describe("messageFor(state, event)", () => {
   test("a letter is typed on the form and is a key elsewhere", () => {
@@ -58,11 +60,12 @@ describe("messageFor(state, event)", () => {
   });
   test("every screen is one key away from every other, also while typing", () => {
     for (const screen of SCREENS) {
+      const state = planned({ screen });
       SCREENS.forEach((goal, index) => {
-        expect(press(planned({ screen }), `alt+${index + 1}`)).toEqual({ type: "go", screen: goal });
-        expect(press(planned({ screen }), `f${index + 2}`)).toEqual({ type: "go", screen: goal });
+        expect(press(state, `alt+${index + 1}`)).toEqual({ type: "go", screen: goal });
+        expect(press(state, `f${index + 2}`)).toEqual({ type: "go", screen: goal });
         if (screen !== "brief")
-          expect(press(planned({ screen }), `${index + 1}`, `${index + 1}`)).toEqual({ type: "go", screen: goal });
+          expect(press(state, `${index + 1}`, `${index + 1}`)).toEqual({ type: "go", screen: goal });
       });
     }
   });
@@ -85,16 +88,27 @@ describe("the words", () => {
   test("every named key can be pressed, and every row has words", () => {
     expect(KEYS.filter((row) => row.words === "")).toEqual([]);
     const covers = KEYS.filter((row) => row.keys.length === 0).map((row) => row.shown);
-    expect(covers).toEqual(["1 to 5", "Alt-1 to 5"]);
+    expect(covers).toEqual(["1 to 7", "Alt-1 to 7"]);
   });
   test.each([
-    ["brief", {}, ["Up/Down", "Ctrl-U", "Alt-1 to 5", "Esc", "F1", "Ctrl-Q"]],
-    ["brief, choices", { field: 3 }, ["Up/Down", "Left/Right", "Alt-1 to 5", "Esc", "F1", "Ctrl-Q"]],
+    ["brief", {}, ["Up/Down", "Ctrl-U", "Alt-1 to 7", "Esc", "F1", "Ctrl-Q"]],
+    ["brief, choices", { field: 3 }, ["Up/Down", "Left/Right", "Alt-1 to 7", "Esc", "F1", "Ctrl-Q"]],
     ["layouts", { screen: "layouts" }, ["Space", "Enter", "r", "f", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
     ["compare without pins", { screen: "compare" }, ["Esc", "F1", "Ctrl-Q"]],
+    ["sharing", { screen: "sharing", chosen: BANK }, ["c", "Space", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
+    ["shot", { screen: "shot", chosen: BANK }, ["l", "Space", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
+    ["shot without a bank", { screen: "shot" }, ["l", "Esc", "F1", "Ctrl-Q"]],
     ["help", { help: true }, ["Esc", "Up/Down", "Ctrl-Q"]],
   ] as const)("the help line on %s names what is live now, in order", (_name, changes, want) => {
     expect(helpLineKeys(planned(changes as Partial<State>)).map((row) => row.shown)).toEqual(want);
+  });
+  test("the spread is asked for only where it is not shown unasked: not on the statistical basis, not of one stage", () => {
+    const on = (changes: Partial<State>) => press(planned({ screen: "sharing", chosen: BANK, ...changes }), "c", "c");
+    expect(on({})).toEqual({ type: "spread" });
+    expect(on({ values: { ...BRIEF, basis: "statistical" } })).toBeNull();
+    expect(on({ chosen: { ...BANK, series: 1 } })).toBeNull();
+    expect(on({ chosen: null })).toBeNull();
+    expect(on({ screen: "bank" })).toBeNull();
   });
   test("no key is named twice on one screen", () => {
     for (const screen of SCREENS) {

@@ -6,7 +6,24 @@ test("1,500 random keys at random sizes: nothing thrown, nothing outside, no sta
   const { faults, screens } = await runMonkey(5, 1500, 40);
   expect(faults).toEqual([]);
   // The run is worth something only if it got about.
-  const wanted = ["bank", "brief", "compare", "layouts", "order", "brief+help", "bank+help", "order+prompt"];
-  const stages = ["compare listed 2", "bank listed 0", "layouts empty 0"];
+  const wanted = [
+    "bank",
+    "brief",
+    "compare",
+    "layouts",
+    "order",
+    "brief+help",
+    "bank+help",
+    "order+prompt",
+    "sharing",
+    "shot",
+  ];
+  const stages = [
+    "compare listed 2",
+    "bank listed 0",
+    "layouts empty 0",
+    "sharing with key rest margin spread",
+    "shot with key shot",
+  ];
   expect([...wanted, ...stages].filter((name) => !screens.has(name))).toEqual([]);
 }, 30_000);

@@ -53,9 +53,9 @@ describe("on a pseudo-terminal", () => {
     await screen.until((text) => text.includes("layouts fit"), 20_000);
     terminal.write("\x15500 J\x1b[B");
     await screen.until((text) => text.includes("500 J at 2.2 kV") && text.includes("> Charge voltage"), 20_000);
-    screen.term.resize(100, 30);
-    terminal.resize(100, 30);
-    await screen.until((text) => text.includes("Title") && text.split("\n").length === 30, 20_000);
+    screen.term.resize(100, 34);
+    terminal.resize(100, 34);
+    await screen.until((text) => text.includes("Title") && text.split("\n").length === 34, 20_000);
     terminal.write("\x11");
     expect((await ended).exitCode).toBe(0);
     await isRestored(screen);

@@ -17,6 +17,14 @@ test("what was saved comes back", () => {
   expect([state.values, state.screen, state.caret]).toEqual([{ energy: "5 kJ" }, "layouts", 4]);
 });
 
+test("a brief asked for now holds over the saved one; pins and place stay", () => {
+  const ports = fakePorts(80, 24, { briefFirst: true });
+  const pins = [{ part: "flash-a", series: 7, parallel: 4, ties: "strings" } as const];
+  ports.kept.session = savedText(stateWith({ values: { energy: "5 kJ" }, screen: "compare", pins }));
+  const state = startState(ports);
+  expect([state.values, state.screen, state.pins]).toEqual([BRIEF, "compare", pins]);
+});
+
 test("a saved text that cannot be read is put aside and told, not overwritten", () => {
   const ports = fakePorts();
   ports.kept.session = "rubbish";

@@ -2,6 +2,7 @@
 import { afterEach, describe, expect, test } from "vitest";
 import { savedText } from "../../src/tui/saved.ts";
 import { openScreens } from "../../src/tui/screens.ts";
+import { SCREENS } from "../../src/tui/state.ts";
 import { BRIEF, type FakePorts, fakePorts, stateWith } from "../support/stock.ts";
 
 let ports: FakePorts;
@@ -81,7 +82,7 @@ describe("from the list to the order", () => {
     await until((t) => t.includes("Same in all"));
     type("\x1b[C\r");
     await until((t) => t.includes("[4 bank]") && /1 ┤├.* x\d+ +[█│·]+ \d+ V of \d+ V/.test(t));
-    type("5e");
+    type("7e");
     await until((t) => t.includes("Save the order as: order-"));
     type("\x15bank.csv\r");
     await until((t) => t.includes("The order is saved in bank.csv."));
@@ -101,9 +102,9 @@ describe("from the list to the order", () => {
   test("the caution stands on every screen", async () => {
     open(60, 20);
     await until((t) => t.includes("layouts fit"));
-    for (const key of ["\x1b1", "\x1b2", "\x1b3", "\x1b4", "\x1b5"]) {
+    for (const key of ["\x1b1", "\x1b2", "\x1b3", "\x1b4", "\x1b5", "\x1b6", "\x1b7"]) {
       type(key);
-      await until((t) => t.includes(`[${key.at(-1)} `) && t.includes("energy can kill"));
+      await until((t) => t.includes(`[${SCREENS[Number(key.at(-1)) - 1]}]`) && t.includes("energy can kill"));
     }
   });
 });

@@ -1,5 +1,5 @@
 // The terminal taken and given back: every way of ending restores it, once, and says the right status.
-import { describe, expect, test } from "vitest";
+import { describe, expect, test, vi } from "vitest";
 import { ENTER, LEAVE, openSession } from "../../src/tui/session.ts";
 import { Screen } from "../support/screen.ts";
 import { FakeProcess } from "../support/tty.ts";
@@ -38,6 +38,7 @@ describe("ending", () => {
 
   test.each([
     ["SIGINT", 130],
+    ["SIGQUIT", 131],
     ["SIGTERM", 143],
     ["SIGHUP", 129],
   ])("%s ends with %i", (signal, status) => {
@@ -89,12 +90,39 @@ describe("suspend()", () => {
     session.end(0);
   });
 
-  test("a second SIGCONT, or one without a suspend, does nothing", () => {
+  test("SIGCONT after a stop from outside takes the terminal again: the shell had it meanwhile", () => {
     const { session, process, log } = open();
     session.enter();
     process.send("SIGCONT");
-    expect(log).toEqual(["enter", "start"]);
+    expect(log).toEqual(["enter", "start", "stop", "enter", "start", "redraw"]);
     session.end(0);
+  });
+
+  test("SIGTSTP from outside gives the terminal back first, and stops with no listener in the way, each time", () => {
+    const { session, process, log } = open();
+    session.enter();
+    for (const times of [1, 2]) {
+      process.send("SIGTSTP");
+      expect(process.sent).toHaveLength(times);
+      expect(process.listenerCount("SIGTSTP")).toBe(0);
+      expect(log.at(-1)).toBe("leave");
+      process.send("SIGCONT");
+      expect(process.listenerCount("SIGTSTP")).toBe(1);
+      expect(log.at(-1)).toBe("redraw");
+    }
+    session.end(0);
+  });
+
+  test("a stop that the system ignores, as with no shell to wake us: the screens come back by themselves", () => {
+    vi.useFakeTimers();
+    const { session, log } = open();
+    session.enter();
+    session.suspend();
+    vi.advanceTimersByTime(1000);
+    expect(log).toEqual(["enter", "start", "stop", "leave", "enter", "start", "redraw"]);
+    session.end(0);
+    expect(vi.getTimerCount()).toBe(0);
+    vi.useRealTimers();
   });
 
   test("killed while stopped: the screen is not left twice", () => {

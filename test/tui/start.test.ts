@@ -5,7 +5,7 @@ import { join } from "node:path";
 import { afterAll, describe, expect, test } from "vitest";
 import { DEFAULT_FAMILY } from "../../src/catalog/index.ts";
 import { filesOn } from "../../src/cli/index.ts";
-import { formValues, portsOn, startScreens } from "../../src/tui/start.ts";
+import { portsOn, startScreens } from "../../src/tui/start.ts";
 import { BRIEF, fakePorts, parts, STOCK } from "../support/stock.ts";
 
 const folder = mkdtempSync(join(tmpdir(), "start-"));
@@ -19,18 +19,6 @@ const options = (sessionFile: string | null) => ({
   files: filesOn(),
   sessionFile,
   terminal: fakePorts(),
-});
-
-describe("formValues(brief)", () => {
-  test.each([null, undefined, 7, "x", [1]])("%j is an empty form", (brief) => {
-    expect(formValues(brief)).toEqual({ brief: {}, extra: {} });
-  });
-  test("numbers become text, what has no field is kept apart", () => {
-    expect(formValues({ energy: 2400, voltage: "2 kV", load: { resistance: 1 }, hold: null })).toEqual({
-      brief: { energy: "2400", voltage: "2 kV" },
-      extra: { load: { resistance: 1 }, hold: null },
-    });
-  });
 });
 
 describe("portsOn(options)", () => {

@@ -6,23 +6,54 @@ import { formatQuantity } from "../../quantity/index.ts";
 import { askedText } from "../askedText.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, type Checked, checkedBank } from "../checked.ts";
+import { cornerLines } from "../cornerLines.ts";
+import { courseText } from "../courseText.ts";
 import { EXIT } from "../exit.ts";
 import { faultsText } from "../faultsText.ts";
+import { improveText } from "../improveText.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
-import { joinedFacts } from "../joined.ts";
+import { joinedFacts, restFacts } from "../joined.ts";
 import { hanging, layoutText } from "../layoutText.ts";
 import type { Ports } from "../ports.ts";
+import { clampWords, riskWords, spreadWords } from "../restText.ts";
 import { tell } from "../tell.ts";
 import { toJson } from "../toJson.ts";
+import { readWitness, unwitnessed, type Witness, type WitnessFlags, witnessOf } from "../witness.ts";
 import { bullet, wrap } from "../wrap.ts";
+
+export type CheckFlags = BankFlags & WitnessFlags;
 
 export function checkCommand(brief: string | undefined, flags: BankFlags, ports: Ports): number {
   const checked = checkedBank(brief, flags, ports);
   if (!checked.ok) return tell(ports, checked.refusals, flags.json);
-  const lines = faultLines(checked.value.stock);
+  return printed(checked.value, flags, ports, null);
+}
+
+/** `check` with a counted witness when one is asked for. */
+export async function checkWitnessed(brief: string | undefined, flags: CheckFlags, ports: Ports): Promise<number> {
+  const ask = readWitness(flags);
+  if (!ask.ok) return tell(ports, ask.refusals, flags.json);
+  if (ask.value === null) return checkCommand(brief, flags, ports);
+  const checked = checkedBank(brief, flags, ports);
+  if (!checked.ok) return tell(ports, checked.refusals, flags.json);
+  const why = unwitnessed(checked.value);
+  if (why !== null) {
+    const want = "a bank whose chance can be drawn";
+    return tell(ports, [{ code: "contradiction", place: { field: "--witness" }, read: why, want }], flags.json);
+  }
+  const witness = await witnessOf(checked.value, ask.value, ports);
+  if (witness === null) {
+    ports.err("Interrupted: the witness is not complete, and nothing of it is used.\n");
+    return EXIT.unsafe;
+  }
+  return printed(checked.value, flags, ports, witness);
+}
+
+function printed(checked: Checked, flags: BankFlags, ports: Ports, witness: Witness | null): number {
+  const lines = faultLines(checked.stock);
   if (lines.length > 0) ports.err(`${lines.join("\n")}\n`);
-  ports.out(flags.json ? checkJson(checked.value) : checkText(checked.value, ports.columns));
-  return checked.value.result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done;
+  ports.out(flags.json ? checkJson(checked, witness) : checkText(checked, ports.columns, witness));
+  return checked.result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done;
 }
 
 /** What the lowest and the highest stage keep after a dump, V, signed; null when the tolerance is unknown. */
@@ -33,13 +64,15 @@ function leftOf({ result, unit, settings }: Checked): { readonly low: number | n
   return leftAfterDump(brief.voltage * (1 + brief.overshoot), result.series, unit.tolerance);
 }
 
-function checkJson(checked: Checked): string {
+function checkJson(checked: Checked, witness: Witness | null): string {
   const { result, unit, settings, stock, notes } = checked;
   const { brief } = settings;
   return toJson({
     ...result,
     left: leftOf(checked),
     ...joinedFacts({ layout: result, unit, brief }),
+    ...restFacts(checked),
+    ...(witness === null ? {} : { witness }),
     brief,
     notes,
     cautions: cautionsOf(brief, { layout: result, unit }),
@@ -47,7 +80,8 @@ function checkJson(checked: Checked): string {
   });
 }
 
-function checkText(checked: Checked, width: number): string {
+function checkText(checked: Checked, width: number, witness: Witness | null): string {
+  const { course, clamp, corners, improve, spread } = restFacts(checked);
   const { result, unit, settings, stock, notes } = checked;
   const left = leftOf(checked);
   const volts = (x: number | null): string => formatQuantity(x, "voltage");
@@ -67,7 +101,15 @@ function checkText(checked: Checked, width: number): string {
   const blocks = [
     `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width)}`,
     `Found\n${layoutText(result, unit, width)}`,
-    hanging("left after a dump", kept, width),
+    [
+      ...cornerLines(corners, width),
+      hanging("left after a dump", kept, width),
+      ...(clamp === null ? [] : [hanging("clamp diodes", clampWords(clamp), width)]),
+      ...(spread === null ? [] : [hanging("likely worst", spreadWords(spread), width)]),
+      ...(result.risk === undefined ? [] : [hanging("chance of excess", riskWords(result, witness), width)]),
+    ].join("\n"),
+    ...(course === null ? [] : [`Time course at the worst corner\n${courseText(course, width)}`]),
+    ...(improve === null ? [] : [`What eats the margin\n${improveText(improve, checked.currency, width)}`]),
     `If one thing fails\n${faultsText(joinedFacts({ layout: result, unit, brief: settings.brief }).faults, width)}`,
     verdict,
     ...[...inputSentences(stock), ...notes].map((text) => wrap(text, width)),

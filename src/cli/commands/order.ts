@@ -2,22 +2,33 @@
 
 import { BILL_FORMATS, type BillFormat, billOf, billText, visible } from "../../order/index.ts";
 import { nearestWord, type Refusal } from "../../quantity/index.ts";
+import { type FuseChoice, fittedFuse } from "../../search/index.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, checkedBank } from "../checked.ts";
 import { EXIT } from "../exit.ts";
 import { titleOf } from "../findingWords.ts";
+import { readFuseStock } from "../fuses.ts";
 import { faultLines } from "../inputNotes.ts";
 import type { Ports } from "../ports.ts";
 import { tell } from "../tell.ts";
 
 export type OrderFlags = BankFlags & {
   readonly format?: string;
+  readonly fuses?: string;
   readonly output?: string;
   readonly force?: boolean;
 };
 
 export function orderCommand(brief: string | undefined, flags: OrderFlags, ports: Ports): number {
   const format = readFormat(flags);
+  if (flags.output?.trim() === "") {
+    const want = "the name of a file; - for the output";
+    return tell(
+      ports,
+      [{ code: "empty", place: { field: "--output" }, read: JSON.stringify(flags.output), want }],
+      flags.json,
+    );
+  }
   const checked = checkedBank(brief, flags, ports);
   if (!checked.ok || typeof format !== "string") {
     const faults = [...(typeof format === "string" ? [] : [format]), ...(checked.ok ? [] : checked.refusals)];
@@ -26,9 +37,12 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
   const { result, unit, settings, stock, currency, notes } = checked.value;
   const cautions = cautionsOf(settings.brief, { layout: result, unit }).map(({ text }) => text);
   const { brief: asked } = settings;
-  const bill = billOf({ layout: result, unit, families: stock.families, brief: asked, currency, cautions });
+  const fuses = flags.fuses === undefined ? null : readFuseStock(flags.fuses, ports.files, asked, currency);
+  if (fuses !== null && !fuses.ok) return tell(ports, fuses.refusals, flags.json);
+  const fuse = fuses === null ? null : fittedFuse({ layout: result, unit, brief: asked }, fuses.value.fuses);
+  const bill = billOf({ layout: result, unit, families: stock.families, brief: asked, currency, cautions, fuse });
   const text = billText(bill, format);
-  const said = [...faultLines(stock), ...notes];
+  const said = [...faultLines(stock), ...(fuses?.value.lost ?? []), ...notes, ...fuseSaid(fuse)];
   for (const finding of result.findings)
     if (finding.verdict === "fail")
       said.push(`FAIL, ${titleOf(finding.id)}: ${visible(finding.note)} Do not buy this bank.`);
@@ -40,6 +54,17 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
     ports.err(`${visible(flags.output)}: ${bill.lines.length} lines written\n`);
   }
   return result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done;
+}
+
+/** Why no fuse of the catalogue is on the bill. */
+function fuseSaid(fuse: FuseChoice | null): readonly string[] {
+  if (fuse === null || fuse.chosen !== null) return [];
+  if (fuse.count === 0) return ["No fuses: without neighbours there is nothing to cut a failed unit off from."];
+  const open = fuse.sees.normalAction === null || fuse.sees.faultAction === null;
+  const why = open ? "; without a load in the brief or the units' ESR none can be judged" : "";
+  return [
+    `No fuse of the catalogue is proven to do${why}: the line stays to be chosen. See: joulewright pulse --fuses.`,
+  ];
 }
 
 /** The format named, else that of the file's ending, else CSV; --json is the format json. */

@@ -1,6 +1,6 @@
 // `parts`: reads catalogues and says row by row what was understood.
 
-import { visible } from "../../order/index.ts";
+import { visible, visibleJson } from "../../order/index.ts";
 import type { Refusal } from "../../quantity/index.ts";
 import { EXIT } from "../exit.ts";
 import { withWords } from "../inputNotes.ts";
@@ -17,6 +17,8 @@ export interface PartsFlags {
 
 /** Rows told in one piece of output, so that a long table is never one text. */
 const PIECE = 500;
+
+const compactJson = (value: unknown): string => visibleJson(JSON.stringify(value));
 
 export function partsCommand(paths: readonly string[], flags: PartsFlags, ports: Ports): number {
   const limit = flags.limit ?? "0";
@@ -48,7 +50,7 @@ export function partsCommand(paths: readonly string[], flags: PartsFlags, ports:
     } else tableText(file, read.value, most, ports);
     first = false;
   }
-  if (flags.json) ports.out(`\n],"refusals":${JSON.stringify(lost.map(withWords))}}\n`);
+  if (flags.json) ports.out(`\n],"refusals":${compactJson(lost.map(withWords))}}\n`);
   if (lost.length > 0) ports.err(`${lost.map(refusalWords).join("\n")}\n`);
   return understood > 0 && lost.length === 0 ? EXIT.done : EXIT.wrongUse;
 }
@@ -56,9 +58,9 @@ export function partsCommand(paths: readonly string[], flags: PartsFlags, ports:
 function tableJson(file: string, table: ToldTable, most: number, { out }: Ports): void {
   const { kind, count, faults, notes } = table;
   const head = { file, kind, understood: count, faults: faults.map(withWords), notes: notes.map(withWords) };
-  out(`${JSON.stringify(head).slice(0, -1)},"rows":[`);
+  out(`${compactJson(head).slice(0, -1)},"rows":[`);
   inPieces(table, most, (rows, begin) => {
-    out(`${begin === 0 ? "\n" : ",\n"}${rows.map((row) => JSON.stringify(row)).join(",\n")}`);
+    out(`${begin === 0 ? "\n" : ",\n"}${rows.map(compactJson).join(",\n")}`);
   });
   out("\n]}");
 }
@@ -66,7 +68,7 @@ function tableJson(file: string, table: ToldTable, most: number, { out }: Ports)
 function tableText(file: string, table: ToldTable, most: number, { out, columns }: Ports): void {
   const { kind, count, faults, notes } = table;
   const lost = faults.length > 0 ? `, ${faults.length} ${faults.length === 1 ? "fault" : "faults"}` : ", no faults";
-  out(`${visible(file)}: ${kind}, ${count} rows understood${lost}\n`);
+  out(`${visible(file)}: ${kind}, ${count} ${count === 1 ? "row" : "rows"} understood${lost}\n`);
   for (const refusal of [...faults, ...notes]) out(`${wrap(refusalWords(refusal), columns, "  ")}\n`);
   inPieces(table, most, (rows) => out(rows.map((row) => `${rowText(row, columns)}\n`).join("")));
   if (count > most) out(`  and ${count - most} more rows; --limit 0 for all\n`);

@@ -1,16 +1,19 @@
 // `plan`: brief and catalogues to ranked layouts.
 
-import { nearestWord, type Refusal } from "../../quantity/index.ts";
-import { briefJsonSchema, plan, RANKINGS, type Ranking } from "../../search/index.ts";
+import { accepted, nearestWord, type Read, type Refusal, refused } from "../../quantity/index.ts";
+import { briefJsonSchema, type PlanResult, plan, RANKINGS, type Ranking } from "../../search/index.ts";
 import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
+import { lampFits } from "../lampFits.ts";
+import { type MeasuredPlanned, measuredJson, planMeasured, savedText } from "../measuredPlan.ts";
 import { planText } from "../planText.ts";
 import type { Ports } from "../ports.ts";
-import { type Flags, settle } from "../settings.ts";
-import { readStock } from "../stock.ts";
+import { type Flags, type Settings, settle } from "../settings.ts";
+import { readStock, type Stock } from "../stock.ts";
 import { tell } from "../tell.ts";
 import { toJson } from "../toJson.ts";
+import { refusalWords } from "../words.ts";
 
 export interface PlanFlags extends Flags {
   readonly catalog?: readonly string[];
@@ -19,6 +22,19 @@ export interface PlanFlags extends Flags {
   readonly rank?: string;
   readonly json?: boolean;
   readonly briefSchema?: boolean;
+  readonly measured?: string;
+  readonly uncertainty?: string;
+  readonly part?: string;
+}
+
+/** A plan and what it was made from. */
+export interface Planned {
+  readonly settings: Settings;
+  readonly stock: Stock;
+  readonly rank: Ranking;
+  readonly result: PlanResult;
+  /** With the measured basis: the lot, and what its units do. */
+  readonly lot: MeasuredPlanned | null;
 }
 
 export function planCommand(brief: string | undefined, flags: PlanFlags, ports: Ports): number {
@@ -26,6 +42,16 @@ export function planCommand(brief: string | undefined, flags: PlanFlags, ports: 
     ports.out(toJson(briefJsonSchema()));
     return EXIT.done;
   }
+  const planned = planFrom(brief, flags, ports);
+  if (!planned.ok) return tell(ports, planned.refusals, flags.json);
+  const { result, stock } = planned.value;
+  tellFaults(stock, ports);
+  ports.out(flags.json ? toJson(planJson(planned.value)) : planWords(planned.value, ports.columns));
+  return result.layouts.length > 0 ? EXIT.done : EXIT.unsafe;
+}
+
+/** Reads what was given and plans. */
+export function planFrom(brief: string | undefined, flags: PlanFlags, ports: Ports): Read<Planned> {
   const settings = settle(brief, flags, ports.files);
   const stock = readStock(flags, ports.files);
   const limit = readLimit(flags.limit);
@@ -36,25 +62,38 @@ export function planCommand(brief: string | undefined, flags: PlanFlags, ports: 
     ...(typeof limit === "number" ? [] : [limit]),
     ...(typeof rank === "string" ? [] : [rank]),
   ];
-  if (!settings.ok || !stock.ok || typeof limit !== "number" || typeof rank !== "string")
-    return tell(ports, faults, flags.json);
+  if (!settings.ok || !stock.ok || typeof limit !== "number" || typeof rank !== "string") return refused(...faults);
   const { parts, families } = stock.value;
-  const planned = plan({ brief: settings.value.brief, parts, families, limit, rank });
-  if (!planned.ok) return tell(ports, planned.refusals, flags.json);
-  const result = planned.value;
-  const best = result.layouts[0];
-  const unit = best && parts.find((part) => part.part === best.part);
-  const lines = faultLines(stock.value);
-  if (lines.length > 0) ports.err(`${lines.join("\n")}\n`);
-  if (flags.json) {
-    const bank = best && unit ? { layout: best, unit } : undefined;
-    const cautions = cautionsOf(result.brief, bank);
-    ports.out(toJson({ ...result, cautions, inputs: inputsJson(settings.value, stock.value) }));
-  } else {
-    const inputs = inputSentences(stock.value);
-    ports.out(planText({ result, parts, given: settings.value.given, rank, width: ports.columns, inputs }));
+  const given = { settings: settings.value, stock: stock.value, rank };
+  if (settings.value.brief.basis === "measured" || flags.measured !== undefined) {
+    const lot = planMeasured(flags, { ...given, limit }, ports);
+    if (!lot.ok) return lot;
+    if (lot.value.faults.length > 0) ports.err(`${lot.value.faults.map(refusalWords).join("\n")}\n`);
+    return accepted({ ...given, result: lot.value.result, lot: lot.value });
   }
-  return result.layouts.length > 0 ? EXIT.done : EXIT.unsafe;
+  const planned = plan({ brief: settings.value.brief, parts, families, limit, rank });
+  if (!planned.ok) return planned;
+  return accepted({ ...given, result: planned.value, lot: null });
+}
+
+/** Rows that were lost, on the error stream. */
+export function tellFaults(stock: Stock, ports: Ports): void {
+  const lines = faultLines(stock);
+  if (lines.length > 0) ports.err(`${lines.join("\n")}\n`);
+}
+
+export function planJson({ settings, stock, result, lot }: Planned): object {
+  const best = result.layouts[0];
+  const unit = best && stock.parts.find((part) => part.part === best.part);
+  const cautions = cautionsOf(result.brief, best && unit ? { layout: best, unit } : undefined);
+  const measured = lot === null ? {} : { measured: measuredJson(lot) };
+  return { ...result, ...measured, ...lampFits(result, stock.parts), cautions, inputs: inputsJson(settings, stock) };
+}
+
+export function planWords({ settings, stock, rank, result, lot }: Planned, width: number): string {
+  const { given } = settings;
+  const inputs = [...inputSentences(stock), ...(lot === null ? [] : [savedText(lot)])];
+  return planText({ result, parts: stock.parts, given, rank, width, inputs });
 }
 
 function readLimit(text = "20"): number | Refusal {

@@ -1,7 +1,7 @@
 // The proof of a blend as plain data: prices, what they bound, the blend, and every option that the bound leaves open.
 import { type Ascent, ascendFrom } from "./ascent.ts";
 import { buildCore } from "./core.ts";
-import { dualPoint, evaluateDual, type Multipliers } from "./dual.ts";
+import { BOUND_SLACK, dualPoint, evaluateDual, type Multipliers } from "./dual.ts";
 import { type BlendAnswer, NO_PRICES } from "./findBlend.ts";
 import type { BlendCount, BlendModel } from "./model.ts";
 import { buildPool } from "./pool.ts";
@@ -40,7 +40,8 @@ export function certify(model: BlendModel, answer: BlendAnswer): BlendCertificat
   const more = ascendFrom(pool, model.maxTypes, answer.prices, threshold, 20);
   const { prices } = more.value > known.value ? more : known;
   evaluateDual(pool, prices, model.maxTypes, point);
-  const settled = point.value > threshold - 0.5;
+  // Costs are whole: a bound above cost - 1 leaves nothing to try, and the verifier wants no survivors then.
+  const settled = point.value >= threshold - 1 + BOUND_SLACK;
   const survivors = settled
     ? []
     : buildCore(model, pool, prices, threshold).columns.map(({ option, strings }) => ({

@@ -37,6 +37,7 @@ export const worth = (pool: Pool, k: number, prices: Multipliers): number =>
 /**
  * Value of the bound: prices times limits plus the `maxTypes` most negative reduced costs, each taken over the hull. For a
  * fixed set of prices each option stands alone, so the limit on types is met exactly by picking the best few.
+ * Source: [Geoffrion] Lagrangean relaxation for integer programming, Mathematical Programming Study 2 (1974) (from memory)
  */
 export function evaluateDual(pool: Pool, prices: Multipliers, maxTypes: number, out: DualPoint): void {
   const { size, capacity, volume, mass, units, start, hullX, hullCost } = pool;

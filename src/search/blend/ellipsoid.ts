@@ -22,7 +22,11 @@ interface Shape {
   readonly matrix: Float64Array;
 }
 
-/** Best point met in `steps` looks, from a ball of `radius` about `from`. */
+/**
+ * Best point met in `steps` looks, from a ball of `radius` about `from`. Any point met is as good as its value says; how near
+ * the top it lies is not promised.
+ * Source: [Bland-Goldfarb-Todd] The ellipsoid method: a survey, Operations Research 29 (1981), deep cuts (from memory)
+ */
 export function climb(hill: Hill, from: ArrayLike<number>, radius: number, steps: number): Summit {
   const { live } = hill;
   const n = live.length;

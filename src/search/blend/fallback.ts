@@ -6,6 +6,7 @@ import { type BlendAnswer, type BlendLimits, findBlend } from "./findBlend.ts";
 import type { BlendModel } from "./model.ts";
 import { coreUnder } from "./searchUnder.ts";
 import type { FoundBlend } from "./singles.ts";
+import { thinCore } from "./thinCore.ts";
 
 export interface SettledBlend extends BlendAnswer {
   /** Who proved it; null when nobody did. A proof by HiGHS is its word, checked only for the blend itself. */
@@ -30,7 +31,8 @@ export async function settleBlend(
   if (own.status !== "stopped") return { ...own, provenBy: "own search", disagreements: [] };
   if (limits.stop?.()) return { ...own, provenBy: null, disagreements: [] };
   // Only options that could beat the best blend known are passed on; without one, all are.
-  const among = own.best === null ? null : coreUnder(model, own.best.cost).columns.map(({ option }) => option);
+  const among =
+    own.best === null ? null : thinCore(coreUnder(model, own.best.cost)).columns.map(({ option }) => option);
   const { program, read } = runForm(model, among);
   const answer = await solveWithHighs(program, { seconds: limits.seconds ?? 10 });
   const counts = answer.status !== "infeasible" && answer.values !== null ? tidyCounts(read(answer.values)) : null;

@@ -57,12 +57,16 @@ export function bestWith(
   };
 }
 
-/** Moves of one option's price at which the cheapest blend changes: a rise that sheds some of it, a fall that takes more. */
+/**
+ * Moves of one option's price at which the cheapest blend changes: a rise that sheds some of it, a fall that takes more.
+ * `bought` says how many units are paid for so many strings; unless told, all that are in them.
+ */
 export function priceSwitches(
   model: BlendModel,
   cheapest: FoundBlend,
   option: number,
   limits: BlendLimits = {},
+  bought: (strings: number) => number = (strings) => model.options[option]!.units * strings,
 ): readonly PriceSwitch[] {
   const from = model.options[option]!;
   const now = cheapest.counts.find((count) => count.option === option)?.strings ?? 0;
@@ -73,7 +77,9 @@ export function priceSwitches(
     let proven = true;
     const counts = move === "rise" ? range(0, now - 1).reverse() : range(now + 1, usefulStrings(model, from));
     for (const strings of counts) {
-      const units = from.units * Math.abs(strings - now);
+      const units = Math.abs(bought(strings) - bought(now));
+      // Where the same units are paid for, no price of theirs can tell the two apart.
+      if (units === 0) continue;
       if (best !== null && (floor(strings) - cheapest.cost) / units >= best.perUnit) continue;
       const other = bestWith(model, { option, strings }, limits);
       proven &&= other.proven;

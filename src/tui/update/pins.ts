@@ -36,6 +36,6 @@ export function chooseBank(state: State): Change {
     ...state,
     chosen: arrangementOf(found),
     screen: "bank",
-    scroll: { ...state.scroll, bank: 0, order: 0 },
+    scroll: { ...state.scroll, bank: 0, sharing: 0, shot: 0, order: 0 },
   });
 }

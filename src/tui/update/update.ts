@@ -2,6 +2,7 @@
 
 import { RANKINGS } from "../../search/index.ts";
 import { mostListed } from "../engine.ts";
+import { FIELDS } from "../fields.ts";
 import { arrangementOf, selectedLayout } from "../pick.ts";
 import { ask, type Change, type Message, type ScreenName, type State, still } from "../state.ts";
 import { mostScroll } from "../view/screen.ts";
@@ -17,13 +18,22 @@ function move(state: State, by: Step): Change {
   return scrollScreen(state, state.screen, by, mostScroll(state));
 }
 
+const OF_ONE_BANK: readonly ScreenName[] = ["bank", "sharing", "shot", "order"];
+
 /** Going to the bank before one was chosen chooses the one under the cursor. */
 function goTo(state: State, screen: ScreenName): Change {
   const there: State = { ...state, screen, help: false, notice: null };
   const asks = mostListed(there) > mostListed(state) ? ask : still;
   const layout = selectedLayout(state);
-  if ((screen !== "bank" && screen !== "order") || state.chosen !== null || layout === null) return asks(there);
+  if (!OF_ONE_BANK.includes(screen) || state.chosen !== null || layout === null) return asks(there);
   return ask({ ...there, chosen: arrangementOf(layout) });
+}
+
+/** To the field where a load is given. */
+function goToLoad(state: State): Change {
+  const field = FIELDS.findIndex(({ key }) => key === "load.resistance");
+  const there = goTo(state, "brief");
+  return { ...there, state: { ...there.state, field, caret: (state.values["load.resistance"] ?? "").length } };
 }
 
 /** The next way of ordering layouts. */
@@ -66,6 +76,12 @@ export function update(state: State, message: Message): Change {
       return ask({ ...state, frontOnly: !state.frontOnly, selected: null, notice: null });
     case "fold":
       return still({ ...state, unfolded: !state.unfolded, scroll: { ...state.scroll, compare: 0 } });
+    case "spread":
+      return still({ ...state, spread: !state.spread, notice: null });
+    case "load":
+      return goToLoad(state);
+    case "detailed":
+      return still({ ...state, details: message.details });
     case "export":
       return askName(state);
     case "confirm":

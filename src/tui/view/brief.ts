@@ -7,6 +7,7 @@ import type { State } from "../state.ts";
 import { drawnText, fitText } from "../text.ts";
 import { shown } from "../values.ts";
 import { textWidth } from "../width.ts";
+import { sideBySide } from "./beside.ts";
 import { listColumns } from "./layouts.ts";
 import type { Page, Room } from "./page.ts";
 import { emptyRows, refusalOf, refusalWords } from "./words.ts";
@@ -98,22 +99,5 @@ export function briefPage(state: State, room: Room): Page {
     return { rows, caret, mostScroll: 0 };
   }
   const right = resultRows(state, { columns: room.columns - FORM_WIDTH - 3, rows: room.rows });
-  const rows = Array.from({ length: Math.max(form.rows.length, right.length) }, (_, i) =>
-    besideRow(form.rows[i] ?? { left: [] }, right[i] ?? { left: [] }, state),
-  );
-  return { rows, caret, mostScroll: 0 };
-}
-
-/** Two rows side by side, the left one cut or filled to its width. */
-function besideRow(left: Row, right: Row, state: State): Row {
-  const spans: Span[] = [];
-  let used = 0;
-  for (const piece of left.left) {
-    const text = drawnText(piece.text, state.look.ascii);
-    const cut = fitText(text, Math.min(textWidth(text), FORM_WIDTH - used), "left", state.look.ascii ? "~" : "…");
-    spans.push({ text: cut, style: piece.style });
-    used += textWidth(cut);
-  }
-  spans.push(span(" ".repeat(Math.max(0, FORM_WIDTH - used))), span(" │ ", "quiet"));
-  return { left: [...spans, ...right.left] };
+  return { rows: sideBySide(form.rows, right, FORM_WIDTH, state), caret, mostScroll: 0 };
 }

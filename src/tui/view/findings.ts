@@ -1,11 +1,12 @@
 // Findings as rows: the verdict by mark and word, what it is about, its figure against its limit, and what would mend it.
+import { titleOf } from "../../cli/index.ts";
 import { type Finding, formatQuantity } from "../../quantity/index.ts";
 import { type Row, rowOf, span } from "../row.ts";
 import { fitText } from "../text.ts";
 import { bySeverity, type shown, VERDICT_STYLE } from "../values.ts";
 import { paragraph } from "./words.ts";
 
-const VERDICT_MARK: Readonly<Record<Finding["verdict"], string>> = {
+export const VERDICT_MARK: Readonly<Record<Finding["verdict"], string>> = {
   fail: "x fail",
   warn: "! warn",
   "not assessed": "? not assessed",
@@ -20,6 +21,10 @@ const DIMENSION_OF_UNIT: Readonly<Record<string, Parameters<typeof shown>[1]>> =
   s: "time",
   ohm: "resistance",
   F: "capacitance",
+  "V/s": "slew",
+  A2s: "action",
+  Hz: "frequency",
+  "1": "count",
 };
 
 /** A finding's number in its unit; a unit not in the table is printed as it stands. */
@@ -39,7 +44,7 @@ export function findingRows(findings: readonly Finding[], columns: number): read
       finding.value === null && finding.limit === null ? "" : `: ${findingValue(finding.value, finding.unit)}${limit}`;
     const line = rowOf(
       span(fitText(VERDICT_MARK[finding.verdict], 15), VERDICT_STYLE[finding.verdict]),
-      span(`${finding.state}, ${finding.id}${value}`),
+      span(`${finding.state}, ${titleOf(finding.id)}${value}`),
     );
     const notes =
       finding.verdict === "pass" || finding.note === "" ? [] : paragraph(finding.note, columns - 15, "quiet");

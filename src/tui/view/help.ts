@@ -14,6 +14,9 @@ const ABOUT: Readonly<Record<State["screen"], string>> = {
   compare:
     "The pinned layouts side by side. ^ marks the best of a row, v the worst; rows that agree are folded into one sentence.",
   bank: "One bank, stage by stage. The bar is the worst voltage a unit may see, | its limit. A check that could not be made is not assessed, never a pass.",
+  sharing:
+    "How one bank divides its voltage. L on a bar is the unit limit, R its full rating. P on the course is the highest moment, N the lowest below zero. Causes say what eats the margin and what a new search with one value tightened would save.",
+  shot: "One shot of the bank into the brief's load. P is the peak current, R the most reversed voltage. Low and high are over capacitance and whatever else the brief says may spread. A bound is no value: something in the loop is unknown.",
   order: "What must be bought: needed, less what is on hand, in whole packs and at the price for the quantity.",
 };
 

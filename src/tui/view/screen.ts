@@ -13,6 +13,8 @@ import { helpPage } from "./help.ts";
 import { layoutsPage } from "./layouts.ts";
 import { orderPage } from "./order.ts";
 import type { Page, Room } from "./page.ts";
+import { sharingPage } from "./sharing.ts";
+import { shotPage } from "./shot.ts";
 import { CAUTIONS, refusalOf, refusalWords } from "./words.ts";
 
 export const LEAST_COLUMNS = 60;
@@ -28,6 +30,8 @@ const PAGES: Readonly<Record<State["screen"], (state: State, room: Room) => Page
   layouts: layoutsPage,
   compare: comparePage,
   bank: bankPage,
+  sharing: sharingPage,
+  shot: shotPage,
   order: orderPage,
 };
 
@@ -45,13 +49,17 @@ const bodyOf = (state: State): Page =>
 /** How far the screen under the eye can be scrolled. */
 export const mostScroll = (state: State): number => bodyOf(state).mostScroll;
 
+/** Where there is little room the screen in sight goes without its number, and the pins without their count. */
+const NARROW = 76;
+
 function tabsRow(state: State): Row {
+  const narrow = state.columns < NARROW;
   const tabs = SCREENS.flatMap((screen, index): readonly Span[] => {
-    const pins = screen === "compare" && state.pins.length > 0 ? ` (${state.pins.length})` : "";
+    const pins = screen === "compare" && state.pins.length > 0 && !narrow ? ` (${state.pins.length})` : "";
+    const name = `${index + 1} ${screen}${pins}`;
     const here = screen === state.screen;
-    return [
-      span(here ? `[${index + 1} ${screen}${pins}]` : ` ${index + 1} ${screen}${pins} `, here ? "focus" : "plain"),
-    ];
+    if (narrow) return [span(here ? `[${screen}]` : name, here ? "focus" : "plain"), span(" ")];
+    return [span(here ? `[${name}]` : ` ${name} `, here ? "focus" : "plain")];
   });
   return { left: tabs, right: [span("joulewright", "title")] };
 }

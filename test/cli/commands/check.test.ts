@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import type { BankFlags } from "../../../src/cli/checked.ts";
-import { checkCommand } from "../../../src/cli/commands/check.ts";
+import { type CheckFlags, checkCommand, checkWitnessed } from "../../../src/cli/commands/check.ts";
 import { planCommand } from "../../../src/cli/commands/plan.ts";
 import { at, fakePorts } from "../../support/fakePorts.ts";
 
@@ -87,5 +87,101 @@ describe("check as text", () => {
     const { status, out } = check({ ...FLAGS, balance: "none" });
     expect(status).toBe(1);
     expect(out).toMatch(/FAIL {2,}worst unit while holding +1\.6 kV/);
+  });
+});
+
+describe("check: the states at rest", () => {
+  test("--json has corners, course, clamp and improve, which agree with the shares; text has the same figures", () => {
+    const flags = { ...FLAGS, hold: "60 s", dumpResistance: "50 ohm" };
+    const json = JSON.parse(check({ ...flags, json: true }).out);
+    expect(json.corners.charging).toEqual({
+      voltage: json.share.charging,
+      words: "stage 1 at -20 %, the rest at +20 %",
+    });
+    expect(json.course.peak.voltage).toBeCloseTo(json.corners.holding.voltage, 6);
+    expect(json.corners.dumped.voltage).toBeCloseTo(json.left.low, 9);
+    expect(json.clamp).toMatchObject({ count: 4, through: { kind: "dump resistor", ohms: 50 } });
+    // Source: methods A3: V/n less the low share, which the others' charge makes up: U = 3 x 400 x (1 - 0.8/1.2).
+    expect(json.clamp.surgeCurrent).toBeCloseTo((3 * 400 * (1 - 0.8 / 1.2)) / 50, 9);
+    expect(json.improve.causes).toHaveLength(5);
+    expect(json.withoutBalance.safe).toBe(json.withoutBalance.holding <= json.share.limit);
+    const { out } = check(flags);
+    expect(out).toMatch(/worst, charging +533\.4 V: stage 1 at -20 %, the rest at \+20 %/);
+    expect(out).toMatch(/clamp diodes +4 clamp diodes: at least 537 V reverse, surge 8 A/);
+    expect(out).toMatch(/^ {2}rest /m);
+    expect(out).toMatch(/capacitance tolerance/);
+  });
+
+  test("unknown tolerance: null, not nought, and what it would take is told", () => {
+    const { out } = check({ ...FLAGS, json: true }, { "c.csv": CATALOG.replace(",20,", ",,") });
+    const json = JSON.parse(out);
+    expect([json.course, json.improve, json.corners.charging, json.clamp.surgeCurrent]).toEqual([
+      null,
+      null,
+      null,
+      null,
+    ]);
+    const note = json.findings.find((f: { id: string }) => f.id === "charging-share").note;
+    // (4 x 540 - 1600)/(1600 + 2 x 540) = 20.9 %, by methods 1.2.
+    expect(note).toMatch(/Up to \+-20\.8 % this number in series would pass/);
+  });
+
+  test("with --balance none a finite hold that is safe passes holding, and its bleed is a warning", () => {
+    const { out } = check({ ...FLAGS, hold: "60 s", balance: "none", json: true });
+    const { findings, withoutBalance } = JSON.parse(out);
+    const verdict = (id: string) => findings.find((f: { id: string }) => f.id === id).verdict;
+    expect(withoutBalance.safe).toBe(true);
+    expect(verdict("holding-share")).toBe("pass");
+    expect(verdict("bleed")).toBe("warn");
+  });
+
+  test("no resistor of the family will do: what mends it is told, each by how much", () => {
+    const tight = CATALOG.replace(",600,20,", ",450,0.5,");
+    const { out } = check({ ...FLAGS, json: true, derating: "0.9" }, { "c.csv": tight });
+    const note = JSON.parse(out).findings.find((f: { id: string }) => f.id === "holding-share").note;
+    expect(note).toMatch(/5 in series instead of 4; resistors of [\d.]+ % or tighter; a charge voltage of at most/);
+  });
+});
+
+describe("check --basis statistical", () => {
+  const STAT: CheckFlags = { ...FLAGS, basis: "statistical", voltage: "2 kV", series: "4" };
+  async function witnessed(flags: CheckFlags, texts: Record<string, string> = {}) {
+    const ports = fakePorts({ "c.csv": CATALOG, ...texts });
+    const status = await checkWitnessed(undefined, flags, ports);
+    return { status, out: ports.printed(), err: ports.told() };
+  }
+
+  test("a witness stands beside the chance in JSON and text; without --witness there is none", async () => {
+    const json = JSON.parse((await witnessed({ ...STAT, witness: "1e5", seed: "4", json: true })).out);
+    expect(json.witness).toMatchObject({ banks: 1e5, seed: 4, agrees: true });
+    expect(json.risk.law).toBe("uniform over its tolerance");
+    expect((await witnessed({ ...STAT, witness: "1e5" })).out.replace(/\s+/g, " ")).toMatch(
+      /witness: of 100000 banks drawn with seed 1/,
+    );
+    expect(JSON.parse((await witnessed({ ...STAT, json: true })).out).witness).toBeUndefined();
+  });
+
+  test("a witness of what has no chance is refused with 2", async () => {
+    for (const flags of [
+      { ...STAT, basis: "nominal" },
+      { ...STAT, witness: "x" },
+    ]) {
+      const { status, err } = await witnessed({ witness: "1e5", ...flags });
+      expect(status).toBe(2);
+      expect(err).toMatch(/--witness/);
+    }
+  });
+
+  test("a measured lot stands in for the tolerance; four units are refused, and a lot without the basis too", async () => {
+    const rows = ["a,3300", "b,3310", "c,3290", "d,3305", "e,3295"];
+    const lot = (count: number) => ({ "m.csv": ["serial,capacitance [uF]", ...rows.slice(0, count)].join("\n") });
+    const five = JSON.parse((await witnessed({ ...STAT, measured: "m.csv", json: true }, lot(5))).out);
+    expect(five.risk).toMatchObject({ exceed: 0, law: "as the 5 measured units, each value equally likely" });
+    const four = await witnessed({ ...STAT, measured: "m.csv" }, lot(4));
+    expect([four.status, four.err]).toEqual([
+      2,
+      expect.stringMatching(/too few measured units: read 4 units; accepted: at least 5/),
+    ]);
+    expect((await witnessed({ ...FLAGS, measured: "m.csv" }, lot(5))).err).toMatch(/--basis statistical/);
   });
 });

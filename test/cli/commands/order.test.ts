@@ -28,6 +28,14 @@ function order(flags: OrderFlags) {
 }
 
 describe("order", () => {
+  test("a blank name of a file is refused by its flag", () => {
+    expect(order({ output: " " })).toMatchObject({
+      status: 2,
+      out: "",
+      err: expect.stringMatching(/^--output: .*blank/),
+    });
+  });
+
   test("CSV to the output by default; another reader gets the units and the sum", () => {
     const { status, out } = order({});
     expect(status).toBe(0);

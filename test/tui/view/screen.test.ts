@@ -4,10 +4,12 @@ import { DEFAULT_FAMILY } from "../../../src/catalog/index.ts";
 import { catalogEngine } from "../../../src/tui/catalogEngine.ts";
 import { rowCells } from "../../../src/tui/cells.ts";
 import { answerFor } from "../../../src/tui/engine.ts";
+import { FIELDS } from "../../../src/tui/fields.ts";
 import { lineOf } from "../../../src/tui/line.ts";
 import { arrangementOf, listed } from "../../../src/tui/pick.ts";
 import { SCREENS, type State } from "../../../src/tui/state.ts";
 import { drawScreen, LEAST_COLUMNS, LEAST_ROWS, mostScroll } from "../../../src/tui/view/screen.ts";
+import { detailed, LOAD } from "../../support/detailed.ts";
 import { BRIEF, CATALOGUE, engine, parts, stateWith } from "../../support/stock.ts";
 
 const planned = (changes: Partial<State> = {}, whole = false, by = engine): State => {
@@ -55,10 +57,28 @@ describe("drawScreen(state): never outside the terminal", () => {
   const variants: readonly State[] = [
     stateWith(),
     planned({ pins, chosen: pins[1] ?? null }),
+    detailed({ chosen: pins[1] ?? null, spread: true }, ["sharing", "shot"]),
+    detailed({ chosen: pins[1] ?? null, values: { ...BRIEF, ...LOAD } }, ["sharing", "shot"]),
+    detailed(
+      {
+        chosen: { part: "film-d", series: 3, parallel: 10, ties: "strings" },
+        spread: true,
+        values: { ...BRIEF, ...LOAD },
+      },
+      ["sharing", "shot"],
+    ),
+    detailed(
+      {
+        chosen: { part: "film-d", series: 1, parallel: 9, ties: "strings" },
+        spread: true,
+        values: { ...BRIEF, ...LOAD },
+      },
+      ["sharing", "shot"],
+    ),
     planned({ pins: oddPins, chosen: oddPins[0] ?? null, unfolded: true }, false, oddEngine),
     planned({ help: true }),
     planned({ chosen: pins[0] ?? null, prompt: { line: lineOf("x".repeat(200)), replace: false } }),
-    planned({ field: 17, values: { ...BRIEF, title: "漢".repeat(90) }, caret: 90 }),
+    planned({ field: FIELDS.length - 1, values: { ...BRIEF, title: "漢".repeat(90) }, caret: 90 }),
     planned({ values: { energy: "1 GJ", voltage: "9 MV", ripple: "1 %" } }, true),
   ];
   test.each(sizes)(
@@ -108,7 +128,7 @@ describe("empty states", () => {
       "No plan yet; to be mended: Energy of one pulse, Allowed fall; still needed: Charge voltage.",
     );
   });
-  test.each(["layouts", "compare", "bank", "order"] as const)(
+  test.each(["layouts", "compare", "bank", "sharing", "shot", "order"] as const)(
     "nothing fits, on %s: the least changes, each with what it lets in",
     (screen) => {
       has(
@@ -150,7 +170,7 @@ describe("the form", () => {
     has(planned({ field: 2, values: { ...BRIEF, ripple: "20" }, columns: 120 }), 'write "20 %"');
   });
   test("the focused field is always in sight, and its mark is text", () => {
-    for (let field = 0; field < 18; field += 1) {
+    for (let field = 0; field < FIELDS.length; field += 1) {
       const rows = drawScreen(planned({ field, rows: 16, columns: 60 })).rows;
       expect(rows.filter((row) => row.includes("> "))).toHaveLength(1);
     }

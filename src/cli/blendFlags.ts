@@ -1,0 +1,76 @@
+// The flags of a blend: read, held within their ranges, and refused when there is no blend to speak of.
+
+import { accepted, parseQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
+
+export interface BlendFlags {
+  readonly blend?: boolean;
+  readonly explain?: boolean;
+  readonly maxTypes?: string;
+  readonly within?: string;
+  readonly lineCost?: string;
+  readonly solverTime?: string;
+}
+
+export interface BlendWish {
+  readonly explain: boolean;
+  readonly maxTypes?: number;
+  readonly within?: number;
+  readonly lineCost?: number;
+  readonly seconds?: number;
+}
+
+const NAMES = [
+  ["explain", "--explain"],
+  ["maxTypes", "--max-types"],
+  ["within", "--within"],
+  ["lineCost", "--line-cost"],
+  ["solverTime", "--solver-time"],
+] as const;
+
+/** True when any of these flags stands on the line. */
+export const wantsBlend = (flags: BlendFlags): boolean =>
+  flags.blend === true || NAMES.some(([key]) => flags[key] !== undefined);
+
+const refusal = (field: string, read: string, want: string): Refusal => ({
+  code: "bad-value",
+  place: { field },
+  read: JSON.stringify(read),
+  want,
+});
+
+/** What is wished of blends, or null when none is. */
+export function readBlendFlags(flags: BlendFlags): Read<BlendWish | null> {
+  if (flags.blend !== true) {
+    const lonely = NAMES.find(([key]) => flags[key] !== undefined);
+    if (lonely === undefined) return accepted(null);
+    return refused({
+      code: "missing-option",
+      place: { field: lonely[1] },
+      read: "no --blend",
+      want: "--blend beside it",
+    });
+  }
+  const faults: Refusal[] = [];
+  const { maxTypes, within, lineCost, solverTime } = flags;
+  const wish: { -readonly [K in keyof BlendWish]: BlendWish[K] } = { explain: flags.explain === true };
+  if (maxTypes !== undefined) {
+    if (/^\d{1,3}$/.test(maxTypes) && Number(maxTypes) >= 1 && Number(maxTypes) <= 100)
+      wish.maxTypes = Number(maxTypes);
+    else faults.push(refusal("--max-types", maxTypes, "a whole number from 1 to 100"));
+  }
+  if (within !== undefined) {
+    const read = parseQuantity(within, "fraction");
+    if (read.ok && read.value >= 0 && read.value <= 1) wish.within = read.value;
+    else faults.push(refusal("--within", within, 'a fraction such as "2 %", up to 100 %'));
+  }
+  if (lineCost !== undefined) {
+    if (/^\d{1,9}(\.\d{1,4})?$/.test(lineCost)) wish.lineCost = Number(lineCost);
+    else faults.push(refusal("--line-cost", lineCost, 'an amount in the currency of the plan, such as "2.50"'));
+  }
+  if (solverTime !== undefined) {
+    const read = parseQuantity(solverTime, "time");
+    if (read.ok && read.value >= 0.1 && read.value <= 86_400) wish.seconds = read.value;
+    else faults.push(refusal("--solver-time", solverTime, 'a time such as "10 s", from 100 ms to 24 h'));
+  }
+  return faults.length > 0 ? refused(...faults) : accepted(wish);
+}

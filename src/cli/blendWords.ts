@@ -1,0 +1,138 @@
+// What a blend's proof says, in words: one sentence for everybody, step by step for those who ask, and what to loosen.
+
+import { visible } from "../order/index.ts";
+import { type Dimension, formatMoney, formatQuantity } from "../quantity/index.ts";
+import type { BlendPlan, CeilingWorth, Loosen, NamedCertificate } from "../search/index.ts";
+import { money } from "./layoutText.ts";
+import { bullet, wrap } from "./wrap.ts";
+
+/** How sure it is. */
+export function proofSentence(plan: BlendPlan): string {
+  const { status, compared, provenBy, lowerBound, gap, currency, blends } = plan;
+  const among = `${compared} kinds of string compared.`;
+  if (status === "optimal") {
+    const check =
+      blends[0]?.certificate?.verdict === "valid"
+        ? "its proof was checked by a separate verifier"
+        : "its proof was too long to be checked again here";
+    return `${among} The cheapest is proven (${provenBy ?? "own search"}): ${check}.`;
+  }
+  if (status === "infeasible")
+    return `${among} ${plan.loosen.some(({ field }) => field === "maxCost") ? "The cheapest costs more than the limit" : "It is proven that none meets the need within the limits"} (${provenBy ?? "own search"}).`;
+  if (plan.certificate?.verdict === "invalid")
+    return `${among} NOT PROVEN: the separate verifier rejects the proof (${plan.certificate.why}). Please report this with the catalogue and the brief.`;
+  if (blends.length === 0 || gap === null) return `${among} Not settled in the time allowed (--solver-time).`;
+  const least = lowerBound === null ? "" : ` No blend costs less than ${money(lowerBound, currency ?? undefined)}:`;
+  return `${among} NOT PROVEN: the best found in the time allowed (--solver-time).${least} it is at most ${formatQuantity(gap, "fraction", { digits: 3, rounding: "up" })} too dear.`;
+}
+
+const LIMITS: Readonly<Record<Loosen["field"], readonly [name: string, dimension: Dimension | "money"]>> = {
+  maxCost: ["the most it may cost", "money"],
+  maxVolume: ["the most room", "volume"],
+  maxMass: ["the most mass", "mass"],
+  maxUnits: ["the most units", "count"],
+  maxTypes: ["the most parts in one bank", "count"],
+  energy: ["the energy of a pulse", "energy"],
+};
+
+/** `raise the most room from 3 L to 3.4 L (12 %): then the cheapest costs 210.00 EUR`. */
+export function loosenWords({ field, from, to, change, cost, proven }: Loosen, currency: string | null): string {
+  const [name, dimension] = LIMITS[field];
+  const show = (x: number, rounding: "up" | "down" | "nearest"): string =>
+    dimension === "money"
+      ? money(x, currency ?? undefined)
+      : formatQuantity(x, dimension, { digits: dimension === "count" ? 8 : 4, rounding });
+  const lower = field === "energy";
+  const percent =
+    change === null || !Number.isFinite(change)
+      ? ""
+      : ` (${formatQuantity(change, "fraction", { digits: 3, rounding: "up" })})`;
+  const then =
+    cost === null || field === "maxCost" ? "" : `: then the cheapest costs ${money(cost, currency ?? undefined)}`;
+  const least = proven ? "" : "; less may do";
+  return `${lower ? "lower" : "raise"} ${name} from ${show(from, "nearest")} to ${show(to ?? from, lower ? "down" : "up")}${percent}${then}${least}`;
+}
+
+/** The proof step by step, what prices would change it, and what more room is worth. */
+export function explainText(plan: BlendPlan, width: number): string {
+  const certificate = plan.blends[0]?.certificate ?? plan.certificate;
+  const steps =
+    certificate === null
+      ? ["There is no proof to explain: the search was stopped before one."]
+      : proofSteps(certificate, plan);
+  const numbered = steps.map((step, at) => wrap(`${at + 1}. ${step}`, width, "  "));
+  return `${[`How this is known\n${numbered.join("\n")}`, ...movesText(plan, width), ...worthText(plan, width)].join("\n\n")}\n`;
+}
+
+function proofSteps(proof: NamedCertificate, plan: BlendPlan): readonly string[] {
+  const show = (minor: number): string => formatMoney(minor, proof.currency ?? "XXX");
+  const { prices, bound, survivors, cost } = proof;
+  const compared = `${proof.compared} kinds of string were compared, each part in its least safe series count. For every count of strings the cheapest purchase was worked out whole: stock, packs, minimum order, price breaks, resistors. At most ${proof.maxTypes} parts may be mixed.`;
+  const ceilings = (["volume", "mass", "units"] as const)
+    .filter((name) => Math.round(prices[name]) > 0)
+    .map((name) => `${show(prices[name])} on using up the whole limit on ${name}`);
+  const second =
+    plan.secondOpinion === "agrees"
+      ? " A second engine (javascript-lp-solver), given the same ones, found nothing better."
+      : plan.secondOpinion === "no answer"
+        ? " A second engine (javascript-lp-solver) was asked and gave no answer that counts."
+        : "";
+  const verdict =
+    proof.verdict === "valid"
+      ? "A separate verifier worked all of this out again from the catalogue alone and found it true."
+      : proof.verdict === "unsettled"
+        ? "The separate verifier ran out of work before it had tried all that is left; what it checked holds."
+        : `THE VERIFIER REJECTS THIS PROOF: ${proof.why}.`;
+  if (prices.cost === 0)
+    return [
+      compared,
+      `Weigh what the limits on volume, mass and units leave of the capacitance needed: even the best parts together fall short, whatever they cost. That is arithmetic, and no blend escapes it.`,
+      verdict + second,
+    ];
+  const bar = `Put a price of ${show(prices.capacity)} on the whole capacitance needed${ceilings.length > 0 ? ` and ${ceilings.join(", ")}` : ""}. Then any mix that meets the need within the limits costs at least ${show(bound)}: each part's gain over its cost counts at its best, for the best ${proof.maxTypes} parts.`;
+  const open = survivors.reduce((sum, { strings }) => sum + strings.length, 0);
+  const target = cost === null ? "than any blend could cost" : `than ${show(cost)}`;
+  const rest =
+    open === 0
+      ? `Costs are whole, so nothing cheaper ${target} is left to try.`
+      : `By the same arithmetic only ${open} ${open === 1 ? "count" : "counts"} of ${survivors.length} ${survivors.length === 1 ? "part" : "parts"} could be in a mix cheaper ${target}: ${named(survivors)}. Every mix of these was tried, and none is.`;
+  return [compared, bar, rest, verdict + second];
+}
+
+function named(survivors: NamedCertificate["survivors"]): string {
+  const first = survivors.slice(0, 6).map(({ part }) => visible(part));
+  return survivors.length > 6 ? `${first.join(", ")} and ${survivors.length - 6} more` : first.join(", ");
+}
+
+function movesText({ priceMoves, currency }: BlendPlan, width: number): readonly string[] {
+  if (priceMoves.length === 0) return [];
+  const lines = priceMoves.map(({ part, move, perUnit, next, proven }) => {
+    const way = move === "rise" ? "rises" : "falls";
+    return bullet(
+      `if ${visible(part)} ${way} by more than ${money(perUnit, currency ?? undefined)} a unit, at the quantities now best, ${visible(next)} is cheaper${proven ? "" : "; a smaller change may do"}`,
+      width,
+    );
+  });
+  return [`What prices would change the choice\n${lines.join("\n")}`];
+}
+
+const ROOM: readonly (readonly [keyof CeilingWorth, number, string])[] = [
+  ["volume", 1e-3, "one more litre of room"],
+  ["mass", 1, "one more kilogram"],
+  ["units", 1, "one more unit allowed"],
+  ["types", 1, "one more part allowed"],
+];
+
+function worthText({ worth, currency }: BlendPlan, width: number): readonly string[] {
+  if (worth === null) return [];
+  const lines = ROOM.flatMap(([key, each, words]) =>
+    worth[key] * each >= 0.005
+      ? [bullet(`${words} is worth about ${money(worth[key] * each, currency ?? undefined)}`, width)]
+      : [],
+  );
+  if (lines.length === 0)
+    return [
+      wrap("No limit holds the cost up: more room would save nothing, as far as fractions of strings tell.", width),
+    ];
+  return [`What the limits cost (a guide, from fractions of strings)\n${lines.join("\n")}`];
+}

@@ -1,0 +1,44 @@
+// `plan --blend`: the ranked layouts, and the cheapest mix of strings with its proof.
+
+import { planBlends } from "../../search/index.ts";
+import { type BlendFlags, readBlendFlags } from "../blendFlags.ts";
+import { blendText } from "../blendText.ts";
+import { explainText } from "../blendWords.ts";
+import { EXIT } from "../exit.ts";
+import type { Ports } from "../ports.ts";
+import { tell } from "../tell.ts";
+import { toJson } from "../toJson.ts";
+import { type PlanFlags, planFrom, planJson, planWords, tellFaults } from "./plan.ts";
+
+/** Engines that may be put in the place of the real ones, as a test does. */
+export type Engines = Pick<Parameters<typeof planBlends>[0], "settle" | "clock">;
+
+export async function planBlendCommand(
+  brief: string | undefined,
+  flags: PlanFlags & BlendFlags,
+  ports: Ports,
+  engines: Engines = {},
+): Promise<number> {
+  const wish = readBlendFlags(flags);
+  const planned = planFrom(brief, flags, ports);
+  if (!wish.ok || !planned.ok) {
+    const faults = [...(wish.ok ? [] : wish.refusals), ...(planned.ok ? [] : planned.refusals)];
+    return tell(ports, faults, flags.json);
+  }
+  const { settings, stock, result } = planned.value;
+  const { parts, families } = stock;
+  const clock = (): number => performance.now();
+  const blends = await planBlends({ brief: settings.brief, parts, families, ...wish.value, clock, ...engines });
+  if (!blends.ok) return tell(ports, blends.refusals, flags.json);
+  tellFaults(stock, ports);
+  const { blends: found, ...search } = blends.value;
+  if (flags.json) ports.out(toJson({ ...planJson(planned.value), blends: found, blendSearch: search }));
+  else {
+    // The layout to compare with is the cheapest, whatever the ranking asked for.
+    const single = [...result.layouts].sort((a, b) => (a.cost?.total ?? Infinity) - (b.cost?.total ?? Infinity))[0];
+    const text = blendText({ plan: blends.value, single, width: ports.columns });
+    const why = flags.explain ? `\n${explainText(blends.value, ports.columns)}` : "";
+    ports.out(`${planWords(planned.value, ports.columns)}\n${text}${why}`);
+  }
+  return found.length > 0 || result.layouts.length > 0 ? EXIT.done : EXIT.unsafe;
+}

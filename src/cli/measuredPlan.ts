@@ -1,0 +1,93 @@
+// `plan` by the measured basis: which part was measured, the plan, and what measuring saved in words.
+
+import { visible } from "../order/index.ts";
+import { type MeasuredPlan, measuredPlan } from "../place/index.ts";
+import { accepted, formatQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
+import type { LayoutResult, Ranking } from "../search/index.ts";
+import { readMeasuredInput } from "./measuredInput.ts";
+import type { PlaceFlags } from "./placeFlags.ts";
+import { flagQuantity } from "./placeFlags.ts";
+import type { Ports } from "./ports.ts";
+import type { Settings } from "./settings.ts";
+import { findPart, type Stock } from "./stock.ts";
+
+export type MeasuredPlanFlags = Pick<PlaceFlags, "measured" | "uncertainty" | "part">;
+
+export interface MeasuredPlanned extends MeasuredPlan {
+  readonly part: string;
+  readonly units: number;
+  /** Rows of the measured file that were lost. */
+  readonly faults: readonly Refusal[];
+}
+
+/** Refuses a basis without units and units without the basis, a lot of several parts, a part that no catalogue has. */
+export function planMeasured(
+  flags: MeasuredPlanFlags,
+  {
+    settings,
+    stock,
+    limit,
+    rank,
+  }: { readonly settings: Settings; readonly stock: Stock; readonly limit: number; readonly rank: Ranking },
+  ports: Ports,
+): Read<MeasuredPlanned> {
+  if (settings.brief.basis !== "measured") {
+    const want = "--basis measured beside it: then the units themselves decide";
+    return refused({
+      code: "contradiction",
+      place: { field: "--measured" },
+      read: `basis ${settings.brief.basis}`,
+      want,
+    });
+  }
+  const measured = readMeasuredInput(flags.measured, flags.part, ports.files);
+  if (!measured.ok) return measured;
+  const { units, file, faults } = measured.value;
+  const named = [...new Set(units.flatMap((unit) => (unit.part === undefined ? [] : [unit.part])))];
+  const [only, ...more] = stock.parts;
+  const name = flags.part ?? (named.length === 1 ? named[0] : more.length === 0 ? only?.part : undefined);
+  if (name === undefined || units.length < 2) {
+    const want = "two measured units or more of one part: name it with --part";
+    const read = units.length < 2 ? `${units.length} units` : `${named.length} parts named`;
+    return refused({ code: "bad-value", place: { file, field: "part" }, read, want });
+  }
+  const part = findPart(name, stock.parts, { field: flags.part === undefined ? `${file} part` : "--part" });
+  if (!part.ok) return part;
+  const given =
+    flags.uncertainty === undefined ? undefined : flagQuantity(flags.uncertainty, "--uncertainty", "fraction");
+  if (typeof given === "object") return refused(given);
+  const planned = measuredPlan({
+    brief: settings.brief,
+    part: part.value,
+    units,
+    families: stock.families,
+    limit,
+    rank,
+    ...(given === undefined ? {} : { uncertainty: given }),
+  });
+  return planned.ok ? accepted({ ...planned.value, part: name, units: units.length, faults }) : planned;
+}
+
+/** What `plan --json` adds: the lot, what the placed units do in each listed layout, and the least in series either way. */
+export const measuredJson = ({ part, units, placed, least, worstCase }: MeasuredPlanned) => {
+  const shown = (layout: LayoutResult | null) =>
+    layout && { id: layout.id, series: layout.series, units: layout.units, worst: layout.share.charging };
+  return { part, units, placed, leastSeries: { measured: shown(least), worstCase: shown(worstCase) } };
+};
+
+/** What measuring saved against the worst case of the datasheet. */
+export function savedText({ result, least, worstCase, placed, units, part }: MeasuredPlanned): string {
+  const best = result.layouts[0];
+  if (best === undefined || least === null)
+    return `The ${units} measured units of ${visible(part)} do not do it in any shape.`;
+  const share = placed.find(({ id }) => id === best.id);
+  const volts = share && formatQuantity(share.charging, "voltage", { rounding: "up" });
+  const energy = share && formatQuantity(share.energy, "energy", { rounding: "down" });
+  const now = share
+    ? `Placed, ${visible(best.id)} has its worst unit at ${volts} while charging, the meter's doubt counted, and gives ${energy} a pulse. `
+    : "";
+  const fewest = `Fewest in series that the measured units support: ${least.series}, with ${least.units} units; `;
+  if (worstCase === null) return `${now}${fewest}by the worst case of the datasheet no shape does it.`;
+  const saved = worstCase.series - least.series;
+  return `${now}${fewest}by the worst case of the datasheet ${worstCase.series}, with ${worstCase.units} units. Measuring saves ${saved} in series.`;
+}

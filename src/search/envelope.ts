@@ -1,0 +1,86 @@
+// How far the shot's figures may lie apart: capacitance over its tolerance, and what else the brief says may spread.
+
+import type { Capacitor } from "../catalog/index.ts";
+import {
+  type Circuit,
+  type Corner,
+  dischargeOf,
+  type Envelope,
+  envelopeOf,
+  type Figures,
+  type Load,
+  type PulseBank,
+  type Spread,
+} from "../pulse/index.ts";
+import { accepted, type Read } from "../quantity/index.ts";
+import type { Brief } from "./brief.ts";
+import { bankAt, type Shape } from "./shotCorner.ts";
+
+export interface EnvelopeInput {
+  readonly brief: Brief;
+  readonly unit: Capacitor;
+  readonly shape: Shape;
+  readonly circuit: Circuit;
+  /** At nominal capacitance. */
+  readonly bank: PulseBank;
+}
+
+const about = (nominal: number, part: number): Spread => ({
+  low: nominal * (1 - part),
+  nominal,
+  high: nominal * (1 + part),
+});
+
+/** The same load with its own resistance and inductance scaled; one whose current is given stays as it is. */
+function scaled(load: Load, resistance: number, inductance: number): Load {
+  if (load.kind === "resistor") return { ...load, resistance: load.resistance * resistance };
+  if (load.kind !== "coil" && load.kind !== "lamp") return load;
+  return {
+    ...load,
+    resistance: (load.resistance ?? 0) * resistance,
+    inductance: (load.inductance ?? 0) * inductance,
+  };
+}
+
+/**
+ * The envelope. Spreads of resistance and inductance are those of the outer circuit; the bank's ESL spreads with the
+ * inductance. A tolerance that is unknown spreads nothing, and the caller says so.
+ */
+export function shotEnvelope({ brief, unit, shape, circuit, bank }: EnvelopeInput): Read<Envelope> {
+  const { esr = 0, resistance = 0, inductance = 0 } = brief.spread ?? {};
+  const spread = {
+    capacitance: {
+      low: bankAt(unit, shape, "low").capacitance,
+      nominal: bank.capacitance,
+      high: bankAt(unit, shape, "high").capacitance,
+    },
+    esr: about(1, bank.esr === null ? 0 : esr),
+    inductance: about(1, inductance),
+    resistance: about(1, resistance),
+  };
+  const plain = circuit.load.kind !== "lamp" && circuit.clamp === null && circuit.switch.drop === 0;
+  const figures = (corner: Corner): Read<Figures> => {
+    const { bus } = circuit;
+    const shot = dischargeOf(
+      {
+        ...bank,
+        capacitance: corner.capacitance,
+        esr: bank.esr === null ? null : bank.esr * corner.esr,
+        esl: bank.esl === null ? null : bank.esl * corner.inductance,
+      },
+      {
+        ...circuit,
+        load: scaled(circuit.load, corner.resistance, corner.inductance),
+        bus: bus && {
+          resistance: bus.resistance * corner.resistance,
+          inductance: bus.inductance * corner.inductance,
+        },
+      },
+      brief.voltage,
+    );
+    if (!shot.ok) return shot;
+    const { peakCurrent, peakTime, reversal, action } = shot.value;
+    return accepted({ peakCurrent, peakTime, reversal, action });
+  };
+  return envelopeOf(spread, plain, figures);
+}

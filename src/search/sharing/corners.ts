@@ -1,0 +1,104 @@
+// The corner behind each worst case of one arrangement, in words and volts: charging, holding, and what a dump leaves.
+
+import {
+  chargingShares,
+  chargingWorst,
+  cornerWords,
+  endOfHold,
+  holdCornerWords,
+  type Sides,
+  type Stage,
+  stageRange,
+  worstAtHold,
+} from "../../bank/index.ts";
+import { leakOf } from "../candidate.ts";
+import { fullVoltage, holdCaseOf, type RestingBank } from "./holdCase.ts";
+import { reversedLumps } from "./lumps.ts";
+
+export interface CornerFact {
+  /** V on the stage named. */
+  readonly voltage: number;
+  /** "stage 1 at -20 %, the rest at +20 %"; every stage may be the first. */
+  readonly words: string;
+}
+
+/** null: not assessed, because the tolerance or the leakage is unknown, or one in series. */
+export interface BankCorners {
+  readonly charging: CornerFact | null;
+  /** Highest voltage at any moment from the end of the charge to the end of the hold; `hold` is s into it, Infinity for its endless end. */
+  readonly holding: (CornerFact & { readonly hold: number }) | null;
+  /** Most reverse (below zero) after a dump from equal sharing, and after the hold's own unequal sharing where that is worse. */
+  readonly dumped: CornerFact | null;
+  readonly dumpedFromHold: CornerFact | null;
+}
+
+export const NO_CORNERS: BankCorners = { charging: null, holding: null, dumped: null, dumpedFromHold: null };
+
+/** The stage named and its company, for the highest while charging and holding, and for the most reverse after a hold. */
+const TIGHT: Sides = { capacitance: "low", leakageCurrent: "low", conductance: "low", resistance: "high" };
+const LOOSE: Sides = { capacitance: "high", leakageCurrent: "high", conductance: "high", resistance: "low" };
+const REVERSED: Sides = { capacitance: "low", leakageCurrent: "high", conductance: "high", resistance: "low" };
+const FORWARD: Sides = { capacitance: "high", leakageCurrent: "low", conductance: "low", resistance: "high" };
+const CONDUCTING: readonly (keyof Stage)[] = ["leakageCurrent", "conductance", "resistance"];
+
+/** The words alone; two stages stand for all, because all have the same ranges. */
+function wordsOf({ result, unit }: RestingBank, named: readonly (keyof Stage)[], victim: Sides, rest: Sides): string {
+  const leak = leakOf(unit);
+  const { low, high } = unit.tolerance ?? { low: 0, high: 0 };
+  const range = stageRange({
+    units: 1,
+    capacitance: unit.capacitance,
+    tLow: low,
+    tHigh: high,
+    leakage: leak?.kind === "current" ? leak.amperes : 0,
+    insulation: leak?.kind === "insulation" ? leak.ohms : Number.POSITIVE_INFINITY,
+    resistance: result.balance?.resistance ?? null,
+    q: result.balance?.tolerance ?? 0,
+  });
+  return cornerWords([range, range], 0, named, victim, rest);
+}
+
+/** The corners of one arrangement. */
+export function cornersOf(bank: RestingBank): BankCorners {
+  if (bank.result.series === 1) return NO_CORNERS;
+  return {
+    ...fromCharge(bank),
+    holding: holdingCorner(bank),
+    ...fromHold(bank),
+  };
+}
+
+function fromCharge(bank: RestingBank): Pick<BankCorners, "charging" | "dumped"> {
+  const { result, unit, brief } = bank;
+  if (unit.tolerance === undefined) return { charging: null, dumped: null };
+  const volts = fullVoltage(brief);
+  const worst = chargingWorst(volts, result.series, unit.tolerance);
+  // From equal sharing the same corner that stands highest while charging is reversed most by a dump.
+  const words = wordsOf(bank, ["capacitance"], TIGHT, LOOSE);
+  return {
+    charging: { voltage: worst, words },
+    dumped: { voltage: volts / result.series - worst, words },
+  };
+}
+
+function holdingCorner(bank: RestingBank): BankCorners["holding"] {
+  const given = holdCaseOf(bank);
+  const endless = bank.brief.hold === Number.POSITIVE_INFINITY;
+  if (given === null) return null;
+  const worst = worstAtHold(given);
+  // At the endless end capacitance has no part in the division: it is not named.
+  const words = endless && worst.seconds > 0 ? wordsOf(bank, CONDUCTING, TIGHT, LOOSE) : holdCornerWords(given, worst);
+  return { voltage: worst.voltage, hold: worst.seconds, words };
+}
+
+/** Only an endless hold with something that conducts has an end that is known whatever came before. */
+function fromHold(bank: RestingBank): Pick<BankCorners, "dumpedFromHold"> {
+  const given = holdCaseOf(bank);
+  if (given === null || given.hold !== Number.POSITIVE_INFINITY || given.R === null) return { dumpedFromHold: null };
+  const lumps = reversedLumps(given);
+  const chain = lumps.map(({ stage }) => stage);
+  const end = endOfHold(chain, given.V);
+  if (end === null) return { dumpedFromHold: null };
+  const voltage = (end[0] as number) - given.V * (chargingShares(chain)[0] as number);
+  return { dumpedFromHold: { voltage, words: wordsOf(bank, ["capacitance", ...CONDUCTING], REVERSED, FORWARD) } };
+}

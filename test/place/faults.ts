@@ -1,0 +1,69 @@
+// Simulated faulty banks for the tests and the campaign: voltages from the exact course of the bank layer, with meter noise.
+import { courseOf } from "../../src/bank/course.ts";
+import type { FaultKind } from "../../src/place/diagnoseFaults.ts";
+import type { StageModel } from "../../src/place/diagnoseModel.ts";
+import type { DiagnosisRequest } from "../../src/place/diagnoseRequest.ts";
+import { normal } from "./lots.ts";
+
+export interface Trial {
+  readonly request: DiagnosisRequest;
+  readonly position: number;
+  /** Highest true voltage of any stage, over the limit. */
+  readonly overLimit: number;
+}
+
+const logEven = (random: () => number, from: number, to: number): number => from * (to / from) ** random();
+
+/** The true stage after the fault; `null` for one that is held down by a reversed unit. */
+function broken(stage: StageModel, kind: FaultKind | null, random: () => number): StageModel | null {
+  const { capacitance, conductance, resistance } = stage;
+  if (kind === "low capacitance") return { ...stage, capacitance: capacitance * (1 - logEven(random, 0.03, 0.5)) };
+  if (kind === "high capacitance") return { ...stage, capacitance: capacitance * (1 + logEven(random, 0.03, 1)) };
+  if (kind === "leaky") return { ...stage, conductance: conductance + logEven(random, 0.5, 50) / resistance };
+  if (kind === "resistor open") return { ...stage, resistance: Number.POSITIVE_INFINITY };
+  if (kind === "resistor wrong value") {
+    const factor = [0.1, 10, 2.2, 0.47][Math.floor(random() * 4)]!;
+    return { ...stage, resistance: resistance * factor };
+  }
+  return kind === "reversed unit" ? null : stage;
+}
+
+/** One bank of 3 to 10 stages about 10 mF with 47 kohm, held at 85 % of 400 V a stage, read at 0, 5 and 25 minutes with a 0.1 % meter. */
+export function trial(kind: FaultKind | null, random: () => number): Trial {
+  const g = () => normal(random);
+  const count = 3 + Math.floor(random() * 8);
+  const bank = 340 * count;
+  const stages = Array.from({ length: count }, () => ({
+    capacitance: 10e-3 * (1 + 0.02 * g()),
+    conductance: 2e-6 * Math.exp(0.3 * g()),
+    resistance: 47e3,
+  }));
+  const position = Math.floor(random() * count);
+  const truth = stages.map((s, i) => {
+    const made = {
+      capacitance: s.capacitance * (1 + 0.003 * g()),
+      conductance: s.conductance * Math.exp(0.2 * g()),
+      resistance: s.resistance * (1 + 0.02 * g()),
+    };
+    return i === position ? broken(made, kind, random) : made;
+  });
+  const diode = 0.6 + 1.5 * random();
+  const chain = truth.flatMap((s) => (s ? [{ ...s, leakageCurrent: 0 }] : []));
+  const voltage = bank * (1 + 0.005 * g()) - (chain.length < count ? diode : 0);
+  const times = [0, 300, 1500];
+  const course = courseOf(chain, { charge: { kind: "instant" }, voltage, hold: 2000, dump: null, rest: 0 });
+  const gain = 1 + 0.003 * g();
+  let highest = 0;
+  const rows = times.map((seconds) => {
+    const exact = [...course.voltagesAt(seconds)];
+    highest = Math.max(highest, ...exact);
+    const volts = chain.length < count ? exact.toSpliced(position, 0, diode) : exact;
+    const total = volts.reduce((s, v) => s + v, 0);
+    const read = (v: number) => v * gain * (1 + 0.001 * g()) + 0.1 * g();
+    const sign = (i: number) => (kind === "meter lead swapped" && i === position ? -1 : 1);
+    return { seconds, bank, volts: volts.map((v, i) => sign(i) * read(v)), total: read(total) };
+  });
+  const limit = 405;
+  const request = { stages, rows, meter: { relative: 0.001, absolute: 0.1, common: 0.003 }, limit };
+  return { request, position, overLimit: highest / limit };
+}

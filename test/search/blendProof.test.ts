@@ -1,0 +1,79 @@
+// The proof by names, and the second engine's word, also when it contradicts.
+import { describe, expect, test } from "vitest";
+import { findBlend } from "../../src/search/blend/findBlend.ts";
+import { type Proof, proofOf, secondOpinion } from "../../src/search/blendProof.ts";
+import { partsOf, workOf } from "../support/blendLab.ts";
+import { briefOf } from "../support/labParts.ts";
+
+const brief = briefOf({ energy: (1e-3 * 400 ** 2) / 2, voltage: 400, basis: "nominal" });
+const { model, types } = workOf(
+  partsOf({ price: 3, available: 6 }, { capacitance: 150, price: 4, available: 5 }, { capacitance: 220, price: 9 }),
+  brief,
+);
+const answer = findBlend(model);
+const proof = proofOf(model, types, answer, "EUR") as Proof;
+const clock = () => performance.now();
+
+describe("proofOf(model, types, answer, currency)", () => {
+  test("names what the search knows by number, and the verifier agrees", () => {
+    expect(proof.named).toMatchObject({
+      claim: "cheapest",
+      cost: answer.best!.cost,
+      compared: 3,
+      verdict: "valid",
+      why: null,
+    });
+    expect(proof.named.survivors.map(({ part }) => part)).toEqual(
+      proof.plain.survivors.map(({ option }) => types[option]!.unit.part),
+    );
+  });
+  test("a false claim is called invalid, with the reason", () => {
+    const dearer = { ...answer, best: { counts: [{ option: 2, strings: 5 }], cost: 4500 } };
+    const named = proofOf(model, types, dearer, "EUR")!.named;
+    expect(named.verdict).toBe("invalid");
+    expect(named.why).toMatch(/cheaper|missing/);
+  });
+  test("a bound less than a cent below the cost settles it: no survivor is listed, none is wanted", () => {
+    const asked = { ...brief, maxVolume: 0.0009 };
+    const tight = workOf(
+      partsOf({ price: 3, available: 6 }, { capacitance: 150, price: 4, pack: 4 }, { capacitance: 220, price: 7.5 }),
+      asked,
+    );
+    const { named } = proofOf(tight.model, tight.types, findBlend(tight.model), "EUR")!;
+    expect(named.bound).toBeGreaterThan(named.cost! - 1);
+    expect(named.bound).toBeLessThan(named.cost! - 0.5);
+    expect([named.verdict, named.survivors]).toEqual(["valid", []]);
+  });
+  test("a search that was stopped has none", () =>
+    expect(proofOf(model, types, { ...answer, status: "stopped" }, "EUR")).toBeNull());
+});
+
+describe("secondOpinion(model, proof, clock)", () => {
+  /** All pairs left open, as if arithmetic had ruled out nothing. */
+  const survivors = model.options.map(({ maxStrings }, option) => ({
+    option,
+    strings: Array.from({ length: maxStrings }, (_, x) => x + 1),
+  }));
+  test("agrees on a true proof", () =>
+    expect(secondOpinion(model, { ...proof, plain: { ...proof.plain, survivors } }, clock)).toEqual({
+      said: "agrees",
+      blend: null,
+    }));
+  test("disagrees where the claim is too dear, with a blend that fits and costs what the optimum does", () => {
+    const plain = { ...proof.plain, survivors, cost: answer.best!.cost + 1 };
+    const { said, blend } = secondOpinion(model, { ...proof, plain }, clock);
+    expect(said).toBe("disagrees");
+    expect(blend!.cost).toBe(answer.best!.cost);
+  });
+  test("disagrees where nothing is claimed to fit", () => {
+    const plain = { ...proof.plain, cost: null, counts: [], survivors: [] };
+    expect(secondOpinion(model, { ...proof, plain }, clock).said).toBe("disagrees");
+  });
+  test("is not asked without a clock, without survivors, or of too many", () => {
+    expect(secondOpinion(model, proof, undefined).said).toBe("not asked");
+    expect(secondOpinion(model, { ...proof, plain: { ...proof.plain, survivors: [] } }, clock).said).toBe("not asked");
+    const many = Array.from({ length: 121 }, (_, x) => x + 1);
+    const plain = { ...proof.plain, survivors: [{ option: 0, strings: many }] };
+    expect(secondOpinion(model, { ...proof, plain }, clock).said).toBe("not asked");
+  });
+});
