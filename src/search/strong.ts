@@ -18,8 +18,15 @@ const MOST = 64;
 const TRIED = 1024;
 
 /** Figures of some rows one after another: stress, cost, units, volume, mass of each. */
-export type Strong = Float64Array;
+type Packed = Float64Array;
 const WIDTH = 5;
+
+export interface Strong {
+  /** By rising stress. */
+  readonly rows: Packed;
+  /** Where the one stands that beat last: it tends to beat the next figures too. */
+  last: number;
+}
 
 /** At most so many of the rows, evenly. */
 function evenly(rows: readonly number[], most: number): readonly number[] {
@@ -27,7 +34,7 @@ function evenly(rows: readonly number[], most: number): readonly number[] {
   return stride <= 1 ? rows : rows.filter((_, i) => i % stride === 0);
 }
 
-function packed({ stress, cost, units, volume, mass }: LayoutTable, rows: readonly number[]): Strong {
+function packed({ stress, cost, units, volume, mass }: LayoutTable, rows: readonly number[]): Packed {
   const all = new Float64Array(rows.length * WIDTH);
   rows.forEach((row, i) => {
     for (const [k, column] of [stress, cost, units, volume, mass].entries()) all[i * WIDTH + k] = column[row] as number;
@@ -36,7 +43,7 @@ function packed({ stress, cost, units, volume, mass }: LayoutTable, rows: readon
 }
 
 /** True when the layout at `k` is no worse in all five figures and better in one. Unknown counts as the worst, never as zero. */
-function beatsFrom(all: Strong, k: number, { stress, cost, units, volume, mass }: Readonly<Figures>): boolean {
+function beatsFrom(all: Packed, k: number, { stress, cost, units, volume, mass }: Readonly<Figures>): boolean {
   const s = all[k] as number;
   const c = all[k + 1] as number;
   if (s > stress || c > cost) return false;
@@ -49,9 +56,14 @@ function beatsFrom(all: Strong, k: number, { stress, cost, units, volume, mass }
 
 /** True when one of the strong layouts beats these figures, and so whatever is worse than them. */
 export function isBeaten(strong: Strong, figures: Readonly<Figures>): boolean {
-  // They stand by rising stress: from the first with more stress on none does.
-  for (let k = 0; k < strong.length && (strong[k] as number) <= figures.stress; k += WIDTH)
-    if (beatsFrom(strong, k, figures)) return true;
+  const { rows, last } = strong;
+  if (last < rows.length && beatsFrom(rows, last, figures)) return true;
+  const { stress } = figures;
+  for (let k = 0; k < rows.length && (rows[k] as number) <= stress; k += WIDTH) {
+    if (!beatsFrom(rows, k, figures)) continue;
+    strong.last = k;
+    return true;
+  }
   return false;
 }
 
@@ -92,8 +104,6 @@ export function strongOf(table: LayoutTable, { candidates, tried, ahead }: Stron
       marks.fill(0, from, from + rows.length);
     }
   }
-  return packed(
-    table,
-    chosen.sort((a, b) => (table.stress[a] as number) - (table.stress[b] as number)),
-  );
+  chosen.sort((a, b) => (table.stress[a] as number) - (table.stress[b] as number));
+  return { rows: packed(table, chosen), last: 0 };
 }

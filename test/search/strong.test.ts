@@ -42,7 +42,7 @@ describe("beats(a, b)", () => {
 describe("strongOf(table, search), isBeaten(strong, figures)", () => {
   test("none of none: nothing is beaten", () => {
     const strong = strongOf(newTable(1), { candidates: [], tried: [], ahead: 1e6 });
-    expect(strong.length).toBe(0);
+    expect(strong.rows.length).toBe(0);
     expect(isBeaten(strong, figures(INF, INF, INF, INF, INF))).toBe(false);
   });
   test("60 random tables: what is called beaten is beaten by a row of the table, and so is whatever is worse", () => {

@@ -59,7 +59,7 @@ describe("sweepPart(run, index)", () => {
     const best = newTable();
     const figures = { cost: 1, volume: 1e-9, mass: 1e-9, stress: 0.01 };
     pushRow(best, { part: 1, series: 1, parallel: 1, tied: false, family: -1, ...figures });
-    const strong = Float64Array.of(0.01, 1, 1, 1e-9, 1e-9);
+    const strong = { rows: Float64Array.of(0.01, 1, 1, 1e-9, 1e-9), last: 0 };
     const run = { ...runOf(), sieve: sieveOf(best, strong, { limit: 1, rank: "cost" }) };
     expect(sweepPart(run, 0)).toBeNull();
     expect([run.count, run.table.count]).toEqual([14, 0]);
