@@ -35,7 +35,7 @@ export interface PlanInput {
 
 /** Up to so many layouts asked for, from so many parts on, the search keeps only what may be among them or on the front: less is done faster whole. */
 const MOST_SIEVED = 1000;
-const SIEVED_FROM = 4000;
+const SIEVED_FROM = 500;
 
 /** Plans. Refuses only what cannot be understood (two currencies); nothing fitting is an answer, with its least changes. */
 export function plan(input: PlanInput): Read<PlanResult> {
