@@ -2,7 +2,6 @@
 //
 // Why a library: quoting, byte-order marks, mixed line ends and quoted newlines are a solved problem. What we rely on and check in our tests:
 // a record keeps its cells in order, a quoted newline stays in its cell, and a record with a broken quote is told and skipped, not thrown.
-// A line without any quote, outside of one, is a record that needs no library: it is split at its separators, ten times as fast.
 // Long text is handed over in pieces that end between records, so that a million rows never stand in memory at once.
 
 import { parse } from "csv-parse/sync";
@@ -81,53 +80,25 @@ interface PieceContext {
   readonly faults: Refusal[];
 }
 
-/** Lines of a piece, without the empty one behind the last line end. */
-function linesOf(piece: string): string[] {
-  const lines = piece.split(piece.includes("\r") ? /\r\n|\n|\r/ : "\n");
-  if (lines.at(-1) === "") lines.pop();
-  return lines;
-}
-
-const isOpen = (text: string): boolean => text.split('"').length % 2 === 0;
-
-/** One piece; returns the line after it. Records with quotes go to the library, all in one call. */
+/** One piece; returns the line after it. */
 function readPiece(piece: string, context: PieceContext): number {
   const { separator, line, take } = context;
-  const lines = linesOf(piece);
-  const quoted: string[] = [];
-  /** For each line that starts a record with quotes, how many lines it takes. */
-  const spans = new Map<number, number>();
-  if (piece.includes('"')) {
-    for (let i = 0; i < lines.length; i++) {
-      const start = i;
-      let record = lines[i] as string;
-      if (!record.includes('"')) continue;
-      while (isOpen(record) && i + 1 < lines.length) record += `\n${lines[++i]}`;
-      quoted.push(record);
-      spans.set(start, i - start + 1);
-    }
-  }
   let broken = false;
-  const on_skip = (): undefined => {
-    broken = true;
-  };
-  const parsed = quoted.length === 0 ? [] : parse(quoted.join("\n"), { ...OPTIONS, delimiter: separator, on_skip });
-  if (broken || parsed.length !== quoted.length) return readByLine(lines, context);
-  let next = 0;
-  for (let i = 0; i < lines.length; ) {
-    const span = spans.get(i);
-    const cells = span === undefined ? plainCells(lines[i] as string, separator) : (parsed[next++] as string[]);
-    if (cells.length > 1 || cells[0] !== "") take(cells, line + i);
-    i += span ?? 1;
+  const records = parse(piece, {
+    ...OPTIONS,
+    delimiter: separator,
+    on_skip: () => {
+      broken = true;
+      return undefined;
+    },
+  });
+  if (broken) return readByLine(piece, context);
+  let at = line;
+  for (const cells of records) {
+    if (cells.length > 1 || cells[0] !== "") take(cells, at);
+    at += 1 + breaksIn(cells);
   }
-  return line + lines.length;
-}
-
-/** Cells of a record without quotes, trimmed. */
-function plainCells(record: string, separator: Separator): string[] {
-  const cells = record.split(separator);
-  for (let k = 0; k < cells.length; k++) cells[k] = (cells[k] as string).trim();
-  return cells;
+  return at;
 }
 
 /** Line ends of every kind, also mixed in one file. */
@@ -141,12 +112,15 @@ const OPTIONS = {
 const LONGEST_CELL = 50;
 
 /** The careful way for a piece with a broken quote: record by record, so that the fault costs its own line and no other. */
-function readByLine(lines: readonly string[], { separator, line, take, faults }: PieceContext): number {
+function readByLine(piece: string, { separator, line, take, faults }: PieceContext): number {
+  const lines = piece.split(/\r\n|\n|\r/);
+  if (lines.at(-1) === "") lines.pop();
+  const open = (text: string): boolean => text.split('"').length % 2 === 0;
   for (let i = 0; i < lines.length; i++) {
     let record = lines[i] as string;
     let last = i;
-    while (isOpen(record) && last + 1 < lines.length && last - i < LONGEST_CELL) record += `\n${lines[++last]}`;
-    const closed = !isOpen(record);
+    while (open(record) && last + 1 < lines.length && last - i < LONGEST_CELL) record += `\n${lines[++last]}`;
+    const closed = !open(record);
     let stray = false;
     const [cells] = closed
       ? parse(record, {
@@ -168,4 +142,12 @@ function readByLine(lines: readonly string[], { separator, line, take, faults }:
     i = last;
   }
   return line + lines.length;
+}
+
+function breaksIn(cells: readonly string[]): number {
+  let breaks = 0;
+  for (const cell of cells) {
+    for (let at = cell.indexOf("\n"); at >= 0; at = cell.indexOf("\n", at + 1)) breaks++;
+  }
+  return breaks;
 }
