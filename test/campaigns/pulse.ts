@@ -1,10 +1,11 @@
 // A long run of random meshes: worst energy imbalance and refusals of each kind. Not part of the quick tests.
-import fc from "fast-check";
+
 import { linearShot } from "../../src/pulse/linearShot.ts";
 import { meshShot } from "../../src/pulse/meshShot.ts";
 import type { Mesh, Shot } from "../../src/pulse/shot.ts";
 import type { Read } from "../../src/quantity/index.ts";
 import { anyMesh, imbalance } from "../pulse/meshes.ts";
+import fc from "../support/property.ts";
 
 export interface CampaignRow {
   readonly kind: string;

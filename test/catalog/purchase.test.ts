@@ -1,8 +1,9 @@
 // The cheapest purchase against every quantity there is, on random terms.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import type { PurchaseTerms } from "../../src/catalog/capacitor.ts";
 import { cheapest, isPriced, leastBuyable, purchase, unitPriceAt } from "../../src/catalog/purchase.ts";
+import fc from "../support/property.ts";
 import { slowPurchase } from "../support/slowBank.ts";
 
 describe("unitPriceAt(terms, quantity)", () => {

@@ -1,6 +1,6 @@
-import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { readJson } from "../../src/cli/jsonText.ts";
+import fc from "../support/property.ts";
 
 const fault = (text: string) => {
   const read = readJson(text, "b.json");

@@ -1,6 +1,6 @@
-import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { bullet, cut, pad, widthOf, wrap } from "../../src/cli/wrap.ts";
+import fc from "../support/property.ts";
 
 describe("widthOf(text)", () => {
   test("plain 1, East Asian wide 2, combining 0", () => {

@@ -1,8 +1,9 @@
 // consistency: the published pair, one plausible and one not, and numbers made by the closed form itself.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { checkStated, frequencyGain } from "../../src/pulse/consistency.ts";
 import { peaksOf } from "../../src/pulse/peaks.ts";
+import fc from "../support/property.ts";
 import { got, near } from "./near.ts";
 
 const stated = { capacitance: 66e-6, voltage: 2200, peakCurrent: null, ringFrequency: null, loss: null };

@@ -1,7 +1,8 @@
 // damping: the functions of zeta at their edges, through critical, and against the textbook's separate cases.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { angleRatio, normalDischarge, peakFactor, reversalFactor } from "../../src/pulse/damping.ts";
+import fc from "../support/property.ts";
 import { near } from "./near.ts";
 
 describe("angleRatio(damping)", () => {

@@ -1,8 +1,9 @@
 // envelope: refusals, nulls, and that no point inside the ranges lies outside the envelope of a linear loop.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { type Corner, envelopeOf, type LoopSpread } from "../../src/pulse/envelope.ts";
 import { peaksOf } from "../../src/pulse/peaks.ts";
+import fc from "../support/property.ts";
 import { codesOf, got, near } from "./near.ts";
 
 const figuresOf = ({ capacitance, esr, inductance, resistance }: Corner) =>

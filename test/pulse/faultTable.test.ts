@@ -1,7 +1,8 @@
 // faultTable: all eight, in order, with no infinite or missing number, for any bank.
-import fc from "fast-check";
+
 import { expect, test } from "vitest";
 import { faultTable } from "../../src/pulse/faultTable.ts";
+import fc from "../support/property.ts";
 import { tied } from "./faultBanks.ts";
 
 test("faultTable(bank) has the eight faults in a reviewer's order, each with what stops it", () => {

@@ -1,8 +1,9 @@
 // linearShot: refusals and limits, energies, and the closed form with a switch drop against the integrator.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { linearShot } from "../../src/pulse/linearShot.ts";
 import { meshShot } from "../../src/pulse/meshShot.ts";
+import fc from "../support/property.ts";
 import { anyMesh, imbalance, ringing } from "./meshes.ts";
 import { codesOf, got, near } from "./near.ts";
 
@@ -65,8 +66,8 @@ describe("linearShot(mesh)", () => {
         near(stepped.peakCurrent, closed.peakCurrent, 1e-8);
         near(stepped.peakTime, closed.peakTime, 1e-6);
         near(stepped.action, closed.action ?? 0, 2e-8);
-        expect(Math.abs(stepped.reversal - closed.reversal)).toBeLessThan(1e-8);
-        // the integrator lets go at a millionth of the peak current, with as much of the voltage above the drop still to spend
+        // the integrator lets go at a millionth of the peak current: a reversal or an energy smaller than that it never sees
+        expect(Math.abs(stepped.reversal - closed.reversal)).toBeLessThan(closed.reversal > 1e-6 ? 1e-8 : 1e-6);
         for (const name of ["load", "bank", "bus", "switch"] as const) {
           expect(Math.abs(stepped.energy[name] - closed.energy[name]) / closed.energy.stored).toBeLessThan(1e-6);
         }

@@ -1,8 +1,9 @@
 // loopMesh: totals of a bank, and that each named bound errs the way it says.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { boundsOf, meshOf, pulseBankOf, unknownNotes, unknownsOf } from "../../src/pulse/loopMesh.ts";
 import { dischargeOf } from "../../src/pulse/pulse.ts";
+import fc from "../support/property.ts";
 import { bank, can, coil } from "./banks.ts";
 import { got, near } from "./near.ts";
 

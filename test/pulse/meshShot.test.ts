@@ -1,7 +1,8 @@
 // meshShot: refusals, energy balance of lamp and clamp meshes as a property, and cases with known answers.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { FINE, meshShot, normalMesh } from "../../src/pulse/meshShot.ts";
+import fc from "../support/property.ts";
 import { anyMesh, imbalance, ringing } from "./meshes.ts";
 import { codesOf, got, near } from "./near.ts";
 

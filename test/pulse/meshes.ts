@@ -1,6 +1,7 @@
 // Meshes for the tests: one plain mesh to change, and a generator of random ones.
-import fc from "fast-check";
+
 import type { Mesh } from "../../src/pulse/shot.ts";
+import fc from "../support/property.ts";
 
 const none = { resistance: 0, inductance: 0 };
 

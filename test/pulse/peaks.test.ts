@@ -1,8 +1,9 @@
 // peaks: limits first, then the three worked discharges (one for each damping), then laws that hold for all.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { actionToZeroOf, peaksOf } from "../../src/pulse/peaks.ts";
 import { dischargeAt } from "../../src/pulse/rlc.ts";
+import fc from "../support/property.ts";
 import { codesOf, got, near } from "./near.ts";
 
 describe("peaksOf(loop, voltage)", () => {

@@ -1,7 +1,8 @@
 // shortedUnit: no neighbours first, then the worked bank both ways, and the energy balance of the equalisation.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { drivingCapacitance, isolationOf, type ShortCase, shortedUnit } from "../../src/pulse/shortedUnit.ts";
+import fc from "../support/property.ts";
 import { near } from "./near.ts";
 
 const strings: ShortCase = { series: 4, parallel: 5, ties: "strings", capacitance: 3300e-6, voltage: 1600, worst: 400 };

@@ -1,7 +1,8 @@
 // Printing by the rules of the SI brochure and of engineering notation, and rounding to the safe side.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { formatQuantity, roundTo, toAscii } from "../../src/quantity/format.ts";
+import fc from "../support/property.ts";
 
 describe("formatQuantity(value, dimension, options)", () => {
   test.each([

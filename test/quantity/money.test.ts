@@ -1,7 +1,8 @@
 // Money: minor units against the runtime's own currency data, prices, and line costs in whole minor units.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { formatMoney, isCurrency, lineCost, minorDigits, parsePrice, toMajor } from "../../src/quantity/money.ts";
+import fc from "../support/property.ts";
 
 const price = (text: string, currency = "EUR", decimalComma = false): number | string => {
   const read = parsePrice(text, currency, decimalComma);

@@ -1,9 +1,10 @@
 // Text to numbers: codes of IEC 60062, prefixes, micro in three spellings, decimal commas, and every bad number with its refusal.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { DIMENSIONS, type Dimension } from "../../src/quantity/dimension.ts";
 import { formatQuantity } from "../../src/quantity/format.ts";
 import { example, parseQuantity } from "../../src/quantity/parse.ts";
+import fc from "../support/property.ts";
 
 const value = (text: string, dimension: Dimension, options = {}): number | string => {
   const read = parseQuantity(text, dimension, options);

@@ -1,8 +1,8 @@
-import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { dischargeOf } from "../../src/pulse/index.ts";
 import { circuitOf, pulseBankFor } from "../../src/search/circuit.ts";
 import { shotEnvelope } from "../../src/search/envelope.ts";
+import fc from "../support/property.ts";
 import { FILM, shotBrief } from "../support/shotBank.ts";
 
 const shape = { series: 2, parallel: 3, ties: "cross-tied" } as const;

@@ -1,7 +1,8 @@
 // Bars against a limit: over and under must never look alike, however few cells there are.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { drawBar } from "../../src/tui/bar.ts";
+import fc from "../support/property.ts";
 
 const bar = (value: number, limit: number | null, columns = 10, ascii = true) =>
   drawBar(value, { columns, full: 100, limit, ascii });

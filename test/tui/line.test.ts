@@ -1,7 +1,8 @@
 // One line of text under the keys: the ends first, then the middle, then what a paste may bring.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { editLine, type LineEdit, LONGEST_LINE, lineOf, pasteable } from "../../src/tui/line.ts";
+import fc from "../support/property.ts";
 
 /** "ab|c": the caret is the bar. */
 const at = (shown: string) => ({ text: shown.replace("|", ""), caret: shown.indexOf("|") });

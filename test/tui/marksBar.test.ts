@@ -1,7 +1,8 @@
 // A bar against marks: exact width, and never a bar that looks on the wrong side of a mark.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { marksBar } from "../../src/tui/marksBar.ts";
+import fc from "../support/property.ts";
 
 const options = {
   columns: 10,

@@ -1,8 +1,9 @@
 // The painter: after any run of frames the terminal shows what a full repaint would.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { PaintStream } from "../../src/tui/paint.ts";
 import { ENTER } from "../../src/tui/session.ts";
+import fc from "../support/property.ts";
 import { Screen } from "../support/screen.ts";
 
 function open(columns: number, rows: number) {

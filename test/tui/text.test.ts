@@ -1,8 +1,9 @@
 // Text made safe to draw, and fitted by cells.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { cutText, drawnText, fitText, safeText, wrapText } from "../../src/tui/text.ts";
 import { textWidth } from "../../src/tui/width.ts";
+import fc from "../support/property.ts";
 import { Screen } from "../support/screen.ts";
 
 describe("safeText(text)", () => {

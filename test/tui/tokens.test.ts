@@ -1,7 +1,8 @@
 // Keys, pastes and reports: one example a key, then the promise that cutting the stream changes nothing.
-import fc from "fast-check";
+
 import { describe, expect, test } from "vitest";
 import { type InputEvent, makeTokeniser } from "../../src/tui/tokens.ts";
+import fc from "../support/property.ts";
 
 const all = (text: string): readonly InputEvent[] => {
   const tokens = makeTokeniser();
