@@ -34,6 +34,8 @@ const OWNERS: Readonly<Record<string, readonly string[]>> = {
   highs: ["search/highs.ts"],
   "d3-scale": ["sheet/"],
   "d3-shape": ["sheet/"],
+  preact: ["sheet/"],
+  "preact-render-to-string": ["sheet/"],
 };
 
 const files = readdirSync(SRC, { recursive: true, encoding: "utf8" })

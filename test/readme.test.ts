@@ -51,7 +51,7 @@ test("the page has examples, opens with the job, and shows the two commands", ()
   expect(page).toContain("npm ci && npm test");
 });
 
-if (process.env["README"] === "write") {
+if (process.env.README === "write") {
   test("written anew", async () => {
     let text = page;
     for (const { whole, line, lines } of blocks) {
