@@ -1,5 +1,6 @@
 // What the screens need from outside: the engine, the files, the clock and the terminal, handed in by main.
 import type { Layout } from "../bank/index.ts";
+import type { clampWords, rateBlocks, refusalWords, titleOf, withoutBalanceWords } from "../cli/index.ts";
 import type { Bill } from "../order/index.ts";
 import type { Read } from "../quantity/index.ts";
 import type {
@@ -94,8 +95,28 @@ export interface StockFacts {
   readonly note: string;
 }
 
-export interface ScreenPorts {
+/** Words that the screens share with the commands. They come with the engine, so that the first frame does not wait for them. */
+export interface SharedWords {
+  readonly titleOf: typeof titleOf;
+  readonly clampWords: typeof clampWords;
+  readonly withoutBalanceWords: typeof withoutBalanceWords;
+  readonly rateBlocks: typeof rateBlocks;
+  readonly refusalWords: typeof refusalWords;
+}
+
+/** What is read and loaded once the first frame stands. */
+export interface Workshop {
   readonly engine: EnginePort;
+  readonly stock: StockFacts;
+  readonly words: SharedWords;
+  /** Writes the order of a bank to a file whose ending names the format. */
+  readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
+}
+
+export interface ScreenPorts {
+  /** Reads the catalogues and loads the engine; refused, the screens end and the refusals are for the caller to tell. */
+  readonly open: () => Promise<Read<Workshop>>;
+  /** What is known of the catalogues before they are read. */
   readonly stock: StockFacts;
   /** The brief to start with when none was saved: text by key. */
   readonly brief: Readonly<Record<string, string>>;
@@ -109,8 +130,6 @@ export interface ScreenPorts {
   readonly saveSession: (text: string) => string | null;
   /** Puts a saved text that could not be read aside, so that it is not overwritten; where it is now, or null. */
   readonly keepSession: () => string | null;
-  /** Writes the order of a bank to a file whose ending names the format. */
-  readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
   readonly stdin: TerminalInput;
   readonly stdout: TerminalOutput;
   /** Writes to the terminal at once. */

@@ -3,7 +3,7 @@ import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
 import type { Line, LineEdit } from "./line.ts";
-import type { Arrangement, Details, SaveAnswer, StockFacts } from "./ports.ts";
+import type { Arrangement, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
 
 export const SCREENS = ["brief", "layouts", "compare", "bank", "sharing", "shot", "order"] as const;
@@ -43,6 +43,8 @@ export interface State {
   readonly rows: number;
   readonly look: Look;
   readonly stock: StockFacts;
+  /** Null until the catalogues are read. */
+  readonly words: SharedWords | null;
   readonly screen: ScreenName;
   readonly help: boolean;
   /** Text of the brief's fields by key; a key that is absent is blank. */
@@ -101,6 +103,7 @@ export type Message =
   | { readonly type: "confirm" }
   | { readonly type: "cancel" }
   | { readonly type: "answered"; readonly asked: number; readonly answer: Answer; readonly slow: boolean }
+  | { readonly type: "opened"; readonly stock: StockFacts; readonly words: SharedWords }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
   | { readonly type: "say"; readonly notice: Notice };
 
@@ -135,6 +138,7 @@ export interface Start {
 
 export const initialState = (start: Start): State => ({
   ...start,
+  words: null,
   screen: "brief",
   help: false,
   field: 0,

@@ -1,9 +1,9 @@
 // State and message to state and effects: the one place where the screens change. Pure.
 
-import { RANKINGS } from "../../search/index.ts";
 import { mostListed } from "../engine.ts";
 import { FIELDS } from "../fields.ts";
 import { arrangementOf, selectedLayout } from "../pick.ts";
+import { RANKS } from "../ranks.ts";
 import { ask, type Change, type Message, type ScreenName, type State, still } from "../state.ts";
 import { mostScroll } from "../view/screen.ts";
 import { chooseField, editField, moveField } from "./form.ts";
@@ -39,7 +39,7 @@ function goToLoad(state: State): Change {
 /** The next way of ordering layouts. */
 const nextRank = (state: State): State => ({
   ...state,
-  rank: RANKINGS[(RANKINGS.indexOf(state.rank) + 1) % RANKINGS.length] ?? "cost",
+  rank: RANKS[(RANKS.indexOf(state.rank) + 1) % RANKS.length] ?? "cost",
   selected: null,
   notice: null,
 });
@@ -92,6 +92,8 @@ export function update(state: State, message: Message): Change {
       // A late answer to an older question would show a bank that the brief no longer means.
       if (message.asked !== state.asked) return still(state);
       return still({ ...state, answer: message.answer, answered: message.asked, slow: message.slow });
+    case "opened":
+      return ask({ ...state, stock: message.stock, words: message.words });
     case "saved":
       return saved(state, message.answer);
     case "say":

@@ -5,6 +5,7 @@ import type { Caret } from "../paint.ts";
 import { drawRow, EMPTY_ROW, type Row, rowOf, type Span, span } from "../row.ts";
 import { SCREENS, type State } from "../state.ts";
 import { drawnText, wrapText } from "../text.ts";
+import { grouped } from "../values.ts";
 import { textWidth } from "../width.ts";
 import { bankPage } from "./bank.ts";
 import { briefPage, seenPart } from "./brief.ts";
@@ -67,7 +68,7 @@ function tabsRow(state: State): Row {
 /** The brief in one line, and what it is planned from. */
 function briefRow(state: State): Row {
   const { answer, stock } = state;
-  const from = `${stock.parts.toLocaleString("en")} parts${stock.note === "" ? "" : `, ${stock.note}`}`;
+  const from = `${grouped(stock.parts)} parts${stock.note === "" ? "" : `, ${stock.note}`}`;
   if (answer?.kind !== "planned")
     return {
       left: [span(answer === null ? "" : "The brief is not whole yet.", "quiet")],
