@@ -3,7 +3,7 @@ import { describe, expect, test } from "vitest";
 import { TARGETS, tried } from "./support/fuzz.ts";
 import { chance } from "./support/random.ts";
 
-const RUNS = 1500;
+const RUNS = 700;
 
 describe("a reader of files, given mutated ones", () => {
   test.each(TARGETS.map((target) => [target.name, target] as const))(
