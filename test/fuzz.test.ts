@@ -17,7 +17,7 @@ describe("a reader of files, given mutated ones", () => {
         if (verdict.broken !== null) expect.fail(`${verdict.broken}\n${JSON.stringify(verdict.text)}`);
       }
       // A fuzz whose every input is refused whole would prove nothing about what is accepted.
-      expect(accepted).toBeGreaterThan(20);
+      expect(accepted).toBeGreaterThan(5);
       expect(accepted).toBeLessThan(RUNS);
     },
   );
