@@ -1,13 +1,25 @@
 // The whole state of the screens, and the two closed unions that change it and that it asks for.
 import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
-import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
+import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
 import type { Line, LineEdit } from "./line.ts";
-import type { Arrangement, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
+import type { Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
+import { type History, NO_HISTORY, type Tried, type Work } from "./work.ts";
 
-export const SCREENS = ["brief", "layouts", "compare", "bank", "sharing", "shot", "order"] as const;
-export type ScreenName = (typeof SCREENS)[number];
+/** The screens in their order, each with the key that goes there from anywhere. */
+export const SCREEN_KEYS = {
+  brief: "1",
+  layouts: "2",
+  compare: "3",
+  bank: "4",
+  sharing: "5",
+  shot: "6",
+  order: "7",
+  trail: "t",
+} as const;
+export type ScreenName = keyof typeof SCREEN_KEYS;
+export const SCREENS = Object.keys(SCREEN_KEYS) as readonly ScreenName[];
 
 /** Most layouts side by side. */
 export const MOST_PINS = 4;
@@ -38,7 +50,7 @@ export interface Prompt {
   readonly replace: boolean;
 }
 
-export interface State {
+export interface State extends Work {
   readonly columns: number;
   readonly rows: number;
   readonly look: Look;
@@ -47,27 +59,26 @@ export interface State {
   readonly words: SharedWords | null;
   readonly screen: ScreenName;
   readonly help: boolean;
-  /** Text of the brief's fields by key; a key that is absent is blank. */
-  readonly values: Readonly<Record<string, string>>;
-  /** What else the brief says, which the form has no field for. */
-  readonly extra: Readonly<Record<string, unknown>>;
+  readonly history: History;
+  /** Every brief that was tried, the oldest first. */
+  readonly trail: readonly Tried[];
+  /** The field whose typing gave the last of the trail. */
+  readonly trailTyping: string | null;
+  /** Place on the trail under the cursor, counted from its end; 0 is now. */
+  readonly trailBack: number;
+  /** The field under the caret, which is also the value in hand on the other screens. */
   readonly field: number;
   readonly caret: number;
-  readonly rank: Ranking;
-  /** Only layouts that no other beats in everything. */
-  readonly frontOnly: boolean;
   readonly answer: Answer | null;
   /** Number of the last question put to the engine, and of the last one answered. */
   readonly asked: number;
   readonly answered: number;
   /** Id of the layout under the cursor; the place in the list is derived from it. */
   readonly selected: string | null;
-  readonly pins: readonly Arrangement[];
   /** Column under the cursor on the comparison. */
   readonly column: number;
   /** Rows on which the pinned layouts agree are shown too. */
   readonly unfolded: boolean;
-  readonly chosen: Arrangement | null;
   /** What was worked out of the chosen bank for the screens that look closer; null before. */
   readonly details: Details | null;
   /** The spread of the worst unit is wanted on any basis. */
@@ -91,11 +102,17 @@ export type Message =
   | { readonly type: "choice"; readonly by: number }
   | { readonly type: "move"; readonly by: number | "first" | "last" | "page" | "pageBack" }
   | { readonly type: "column"; readonly by: number }
+  | { readonly type: "nudge"; readonly up: boolean; readonly coarse: boolean }
+  | { readonly type: "hand"; readonly by: 1 | -1 }
+  | { readonly type: "undo" }
+  | { readonly type: "redo" }
+  | { readonly type: "retry" }
   | { readonly type: "pin" }
   | { readonly type: "choose" }
   | { readonly type: "rank" }
   | { readonly type: "front" }
   | { readonly type: "fold" }
+  | { readonly type: "orderPins" }
   | { readonly type: "spread" }
   | { readonly type: "load" }
   | { readonly type: "detailed"; readonly details: Details }
@@ -139,6 +156,10 @@ export interface Start {
 export const initialState = (start: Start): State => ({
   ...start,
   words: null,
+  history: NO_HISTORY,
+  trail: [],
+  trailTyping: null,
+  trailBack: 0,
   screen: "brief",
   help: false,
   field: 0,

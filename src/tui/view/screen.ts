@@ -2,8 +2,8 @@
 import { FIELDS, fieldAt, shownValue, valueIn } from "../fields.ts";
 import { helpLineKeys } from "../keys.ts";
 import type { Caret } from "../paint.ts";
-import { drawRow, EMPTY_ROW, type Row, rowOf, type Span, span } from "../row.ts";
-import { SCREENS, type State } from "../state.ts";
+import { drawRow, EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
+import type { State } from "../state.ts";
 import { drawnText, wrapText } from "../text.ts";
 import { grouped } from "../values.ts";
 import { textWidth } from "../width.ts";
@@ -16,6 +16,8 @@ import { orderPage } from "./order.ts";
 import type { Page, Room } from "./page.ts";
 import { sharingPage } from "./sharing.ts";
 import { shotPage } from "./shot.ts";
+import { ruleRow, tabsRow } from "./top.ts";
+import { trailPage } from "./trail.ts";
 import { CAUTIONS, refusalOf, refusalWords } from "./words.ts";
 
 export const LEAST_COLUMNS = 60;
@@ -34,6 +36,7 @@ const PAGES: Readonly<Record<State["screen"], (state: State, room: Room) => Page
   sharing: sharingPage,
   shot: shotPage,
   order: orderPage,
+  trail: trailPage,
 };
 
 const HEAD_ROWS = 3;
@@ -49,21 +52,6 @@ const bodyOf = (state: State): Page =>
 
 /** How far the screen under the eye can be scrolled. */
 export const mostScroll = (state: State): number => bodyOf(state).mostScroll;
-
-/** Where there is little room the screen in sight goes without its number, and the pins without their count. */
-const NARROW = 76;
-
-function tabsRow(state: State): Row {
-  const narrow = state.columns < NARROW;
-  const tabs = SCREENS.flatMap((screen, index): readonly Span[] => {
-    const pins = screen === "compare" && state.pins.length > 0 && !narrow ? ` (${state.pins.length})` : "";
-    const name = `${index + 1} ${screen}${pins}`;
-    const here = screen === state.screen;
-    if (narrow) return [span(here ? `[${screen}]` : name, here ? "focus" : "plain"), span(" ")];
-    return [span(here ? `[${name}]` : ` ${name} `, here ? "focus" : "plain")];
-  });
-  return { left: tabs, right: [span("joulewright", "title")] };
-}
 
 /** The brief in one line, and what it is planned from. */
 function briefRow(state: State): Row {
@@ -143,7 +131,7 @@ export function drawScreen(state: State): Drawn {
   const all: readonly Row[] = [
     tabsRow(state),
     briefRow(state),
-    rowOf(span("─".repeat(columns), "quiet")),
+    ruleRow(state),
     ...body,
     rowOf(span(caution, "caution")),
     notice.row,
