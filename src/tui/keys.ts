@@ -17,12 +17,14 @@ export interface KeyRow {
 type Short = readonly [readonly string[], string, string, Message, live.Live, (number | null)?];
 
 const lists = live.all(live.on("layouts"), live.hasLayouts);
+const maps = live.all(live.on("map"), live.hasLayouts);
+const picks: live.Live = (state) => lists(state) || maps(state);
 const compares = live.all(live.on("compare"), live.hasPins);
 const shows = live.all(live.on("bank", "sharing", "shot", "order"), live.hasBank);
 const looks = live.all(live.on("bank", "sharing", "shot"), live.hasBank);
 const saves = live.all(live.on("bank", "order"), live.hasBank);
 const tracks = live.all(live.on("trail"), live.hasTrail);
-const moves: live.Live = (state) => lists(state) || compares(state) || shows(state) || tracks(state);
+const moves: live.Live = (state) => picks(state) || compares(state) || shows(state) || tracks(state);
 
 /** What lies on top comes first: the first live row wins. */
 const ON_TOP: readonly Short[] = [
@@ -66,11 +68,16 @@ const TYPING: readonly Short[] = [
 ];
 
 const LISTS: readonly Short[] = [
-  [["enter"], "Enter", "show bank", { type: "choose" }, lists, 2],
-  [["space", "p"], "Space", "pin", { type: "pin" }, lists, 1],
+  [["enter"], "Enter", "show bank", { type: "choose" }, picks, 2],
+  [["space", "p"], "Space", "pin", { type: "pin" }, picks, 1],
   [["r"], "r", "order by", { type: "rank" }, lists, 3],
   [["f"], "f", "only unbeaten", { type: "front" }, lists, 4],
   [["enter"], "Enter", "this brief again", { type: "retry" }, tracks, 1],
+  [["x"], "x y", "other axes", { type: "axis", which: "x" }, maps, 3],
+  [["y"], "", "other axes", { type: "axis", which: "y" }, maps],
+  [["v"], "v", "counts or scatter", { type: "table" }, maps, 4],
+  [["left", "h"], "Left/Right", "walk across", { type: "column", by: -1 }, maps, 5],
+  [["right", "l"], "", "walk across", { type: "column", by: 1 }, maps],
   [["left"], "Left/Right", "column", { type: "column", by: -1 }, compares, 1],
   [["right"], "", "column", { type: "column", by: 1 }, compares],
   [["enter"], "Enter", "show bank", { type: "choose" }, compares, 2],
@@ -92,7 +99,7 @@ const LISTS: readonly Short[] = [
     "Esc",
     "layouts",
     { type: "go", screen: "layouts" },
-    live.on("compare", "bank", "sharing", "shot", "order", "trail"),
+    live.on("compare", "bank", "sharing", "shot", "order", "trail", "map"),
     7,
   ],
   [["escape"], "Esc", "brief", { type: "go", screen: "brief" }, live.on("layouts"), 7],

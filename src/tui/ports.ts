@@ -66,11 +66,18 @@ export interface Details {
 
 export type Piece = Exclude<keyof Details, "key">;
 
+/** Most layouts of a front that are worked out for the map. */
+export const MOST_FRONT = 1000;
+
 export interface EnginePort {
   /** Reads a brief from text by key; each refusal's place.field is the key. */
   readonly readBrief: (values: Readonly<Record<string, unknown>>) => Read<Brief>;
   /** Refuses only what cannot be planned at all, such as two currencies without a rate. */
   readonly plan: (brief: Brief, request: PlanRequest) => Read<PlanResult>;
+  /** The layouts of a plan's front worked out in full, the cheapest first, at most MOST_FRONT. */
+  readonly front: (brief: Brief, plan: PlanResult) => readonly LayoutResult[];
+  /** Life of the worst unit over that at its ratings, for the brief's load; null is unknown. */
+  readonly life: (brief: Brief, layout: LayoutResult) => number | null;
   /** Assesses one arrangement under a brief; null when the catalogue has no such part. */
   readonly check: (brief: Brief, arrangement: Arrangement) => LayoutResult | null;
   /** What must be bought for a layout; null when the catalogue has no such part. */

@@ -1,7 +1,9 @@
 // The whole state of the screens, and the two closed unions that change it and that it asks for.
+
 import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
+import { FIRST_MAP, type FrontPoint, type MapView } from "./axes.ts";
 import type { Line, LineEdit } from "./line.ts";
 import type { Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
@@ -16,6 +18,7 @@ export const SCREEN_KEYS = {
   sharing: "5",
   shot: "6",
   order: "7",
+  map: "8",
   trail: "t",
 } as const;
 export type ScreenName = keyof typeof SCREEN_KEYS;
@@ -36,6 +39,8 @@ export type Answer =
       /** Pinned arrangements assessed under this brief; null where the catalogue has no such part. */
       readonly pinned: readonly (LayoutResult | null)[];
       readonly chosen: LayoutResult | null;
+      /** The front in full; null where it was not asked for. */
+      readonly front: readonly FrontPoint[] | null;
       readonly bill: Bill | null;
     };
 
@@ -66,6 +71,7 @@ export interface State extends Work {
   readonly trailTyping: string | null;
   /** Place on the trail under the cursor, counted from its end; 0 is now. */
   readonly trailBack: number;
+  readonly map: MapView;
   /** The field under the caret, which is also the value in hand on the other screens. */
   readonly field: number;
   readonly caret: number;
@@ -107,6 +113,8 @@ export type Message =
   | { readonly type: "undo" }
   | { readonly type: "redo" }
   | { readonly type: "retry" }
+  | { readonly type: "axis"; readonly which: "x" | "y" }
+  | { readonly type: "table" }
   | { readonly type: "pin" }
   | { readonly type: "choose" }
   | { readonly type: "rank" }
@@ -160,6 +168,7 @@ export const initialState = (start: Start): State => ({
   trail: [],
   trailTyping: null,
   trailBack: 0,
+  map: FIRST_MAP,
   screen: "brief",
   help: false,
   field: 0,

@@ -1,5 +1,6 @@
 // Pinning layouts to set them side by side, and choosing the bank to look at.
 import { foldedRows } from "../comparison.ts";
+import { pointUnder } from "../mapPoints.ts";
 import { arrangementOf, isSame, pinnedLayouts, selectedLayout, shownBank } from "../pick.ts";
 import type { Arrangement } from "../ports.ts";
 import { ask, type Change, MOST_PINS, type State, still } from "../state.ts";
@@ -7,6 +8,7 @@ import { ask, type Change, MOST_PINS, type State, still } from "../state.ts";
 /** The arrangement that the cursor is on, by screen. */
 function underCursor(state: State): Arrangement | null {
   if (state.screen === "compare") return state.pins[state.column] ?? null;
+  if (state.screen === "map") return pointUnder(state)?.point.layout ?? null;
   return state.screen === "layouts" ? selectedLayout(state) : shownBank(state);
 }
 

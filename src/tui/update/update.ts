@@ -9,6 +9,7 @@ import { ask, type Change, type Message, type ScreenName, type State, still } fr
 import { withTried } from "../trail.ts";
 import { mostScroll } from "../view/screen.ts";
 import { chooseField, editField, moveField } from "./form.ts";
+import { nextAxis, toggleTable, walkMap } from "./map.ts";
 import { askName, cancel, confirm, editName, saved } from "./order.ts";
 import { chooseBank, orderPins, togglePin } from "./pins.ts";
 import { moveSelection, type Step, scrollScreen } from "./scroll.ts";
@@ -19,6 +20,7 @@ function move(state: State, by: Step): Change {
   if (state.help) return scrollScreen(state, "help", by, mostScroll(state));
   if (state.screen === "brief") return moveField(state, by);
   if (state.screen === "layouts") return moveSelection(state, by);
+  if (state.screen === "map") return walkMap(state, "y", by);
   if (state.screen === "trail") return moveTrail(state, by);
   return scrollScreen(state, state.screen, by, mostScroll(state));
 }
@@ -28,7 +30,8 @@ const OF_ONE_BANK: readonly ScreenName[] = ["bank", "sharing", "shot", "order"];
 /** Going to the bank before one was chosen chooses the one under the cursor. */
 function goTo(state: State, screen: ScreenName): Change {
   const there: State = { ...state, screen, help: false, notice: null };
-  const asks = mostListed(there) > mostListed(state) ? ask : still;
+  const front = state.answer?.kind === "planned" ? state.answer.front : null;
+  const asks = mostListed(there) > mostListed(state) || (screen === "map" && front === null) ? ask : still;
   const layout = selectedLayout(state);
   if (!OF_ONE_BANK.includes(screen) || state.chosen !== null || layout === null) return asks(there);
   return ask({ ...there, chosen: arrangementOf(layout) });
@@ -67,7 +70,12 @@ function changed(state: State, message: Message): Change {
       return chooseField(state, message.by);
     case "move":
       return move(state, message.by);
+    case "axis":
+      return nextAxis(state, message.which);
+    case "table":
+      return toggleTable(state);
     case "column": {
+      if (state.screen === "map") return walkMap(state, "x", message.by);
       const last = Math.max(0, state.pins.length - 1);
       return still({ ...state, column: Math.max(0, Math.min(last, state.column + message.by)), notice: null });
     }

@@ -134,12 +134,16 @@ export function comparePage(state: State, room: Room): Page {
   const at = Math.min(state.scroll.compare ?? 0, Math.max(0, shown.length - 1));
   const seen = (row: ComparedRow): ComparedRow => ({ ...row, cells: inSight(row.cells) });
   const body = shown.map((row, index) => comparedRow(seen(row), label, width, index === at));
+  const pairs = pairRows(layouts, room.columns);
+  // The one sentence about two is what decides: it stays in sight where there is room.
+  const inFoot = layouts.length === 2 && room.rows - head.length - pairs.length >= 8;
   const words = [
     ...(layouts.length > 1 ? [] : paragraph("Pin another layout to set beside this one.", room.columns, "accent")),
-    ...pairRows(layouts, room.columns),
+    ...(inFoot ? [] : pairs),
     ...foldedRow(folded, room.columns),
   ];
-  return followed({ head, body, at, foot: rowDetail(shown[at], room.columns), words, room });
+  const foot = [...(inFoot ? pairs : []), ...rowDetail(shown[at], room.columns)];
+  return followed({ head, body, at, foot, words, room });
 }
 
 /** One row of the table in full, for screens too narrow to say it in the cells. */

@@ -19,6 +19,7 @@ const ABOUT: Readonly<Record<State["screen"], string>> = {
   shot: "One shot of the bank into the brief's load. P is the peak current, R the most reversed voltage. Low and high are over capacitance and whatever else the brief says may spread. A bound is no value: something in the loop is unknown.",
   trail:
     "Every brief that was planned, with its best layout and what that cost. Enter makes the one under the cursor hold again. As text: joulewright plan BRIEF for each.",
+  map: "Every unbeaten layout as a point: no other is as good in cost, volume, mass, units and stress and better in one. X is the cursor, A to D are pinned. As text: joulewright plan BRIEF --json, its front.",
   order: "What must be bought: needed, less what is on hand, in whole packs and at the price for the quantity.",
 };
 

@@ -12,6 +12,7 @@ import { briefPage, seenPart } from "./brief.ts";
 import { comparePage } from "./compare.ts";
 import { helpPage } from "./help.ts";
 import { layoutsPage } from "./layouts.ts";
+import { mapPage } from "./map.ts";
 import { orderPage } from "./order.ts";
 import type { Page, Room } from "./page.ts";
 import { sharingPage } from "./sharing.ts";
@@ -36,6 +37,7 @@ const PAGES: Readonly<Record<State["screen"], (state: State, room: Room) => Page
   sharing: sharingPage,
   shot: shotPage,
   order: orderPage,
+  map: mapPage,
   trail: trailPage,
 };
 
