@@ -104,6 +104,7 @@ function build(ports: Ports, done: Done): Command {
   withLayout(program.command("order"))
     .description("Write the bill of materials of one layout.")
     .option("--fuses <file>", "fuse catalogue, CSV: adds a fuse for each unit to the bill")
+    .option("--edited <file>", "an edited bill, CSV: its own lines, prices and choices are kept; - is standard input")
     .option("--format <format>", "csv, json, md or html; else by the ending of --output, else csv")
     .option("--output <file>", "write to a file, whole or not at all")
     .option("--force", "replace the file if it exists")
