@@ -94,4 +94,19 @@ Examples:
   $ joulewright parts - < mine.csv
 
 Capacitors, resistors, fuses and measured units are told apart by their headings.${STATUS}`,
+  completion: `
+Examples:
+  $ joulewright completion bash > ~/.local/share/bash-completion/completions/joulewright
+  $ joulewright completion zsh > ~/.zfunc/_joulewright
+  $ joulewright completion fish > ~/.config/fish/completions/joulewright.fish
+
+For one session of bash: source <(joulewright completion bash). For zsh the folder must be in fpath before compinit runs.
+${STATUS}`,
+  manual: `
+Examples:
+  $ joulewright manual | man -l -
+  $ joulewright manual > joulewright.1
+
+An installed package brings the page along: man joulewright.
+${STATUS}`,
 } as const;
