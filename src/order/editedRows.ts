@@ -1,7 +1,15 @@
 // An edited bill, CSV, to rows of known cells: every fault with its line and column, nothing guessed.
 
 import { readRecords } from "../catalog/index.ts";
-import { accepted, nearestWord, type Place, type Read, type Refusal, refused } from "../quantity/index.ts";
+import {
+  accepted,
+  nearestWord,
+  type Place,
+  type Read,
+  type Refusal,
+  refused,
+  versionFault,
+} from "../quantity/index.ts";
 import { LINE_KINDS, type LineKind } from "./bill.ts";
 import { BILL_COLUMNS, type BillColumn } from "./columns.ts";
 import { csvPlain, FOOTER_KINDS, MARK_HEADING, SUM_ITEM } from "./csv.ts";
@@ -167,9 +175,10 @@ function readRow(given: readonly string[], { bound, place, comma, faults }: RowC
   }
   const mark = texts[bound.mark] ?? "";
   const version = markVersion(mark);
-  if (version !== null && version > BILL_VERSION) {
-    const want = `a bill of version ${BILL_VERSION} or earlier; this program is too old for the file`;
-    faults.push({ code: "newer-version", place: spot(bound.mark, MARK_HEADING), read: `version ${version}`, want });
+  const at = spot(bound.mark, MARK_HEADING);
+  const old = version === null ? null : versionFault({ found: version, newest: BILL_VERSION, place: at });
+  if (old !== null) {
+    faults.push(old);
     return null;
   }
   const cells = new Map<BillColumn["key"], EditedCell>();

@@ -50,7 +50,8 @@ export function packed(): Packed {
 export function typeFaults({ folder }: Packed, files: readonly string[]): string {
   const compilerOptions = {
     target: "ES2023",
-    lib: ["ES2023"],
+    // Of what a browser has, zod's own declarations name URL; nothing of Node is here.
+    lib: ["ES2023", "DOM"],
     module: "NodeNext",
     moduleResolution: "NodeNext",
     strict: true,

@@ -6,6 +6,7 @@ import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { lampFits } from "../lampFits.ts";
+import { LAYOUT_VERSION } from "../layoutInput.ts";
 import { type MeasuredPlanned, measuredJson, planMeasured, savedText } from "../measuredPlan.ts";
 import { planText } from "../planText.ts";
 import type { Ports } from "../ports.ts";
@@ -87,7 +88,15 @@ export function planJson({ settings, stock, result, lot }: Planned): object {
   const unit = best && stock.parts.find((part) => part.part === best.part);
   const cautions = cautionsOf(result.brief, best && unit ? { layout: best, unit } : undefined);
   const measured = lot === null ? {} : { measured: measuredJson(lot) };
-  return { ...result, ...measured, ...lampFits(result, stock.parts), cautions, inputs: inputsJson(settings, stock) };
+  const layouts = result.layouts.map((layout) => ({ version: LAYOUT_VERSION, ...layout }));
+  return {
+    ...result,
+    layouts,
+    ...measured,
+    ...lampFits(result, stock.parts),
+    cautions,
+    inputs: inputsJson(settings, stock),
+  };
 }
 
 export function planWords({ settings, stock, rank, result, lot }: Planned, width: number): string {
