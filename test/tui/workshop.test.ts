@@ -2,7 +2,7 @@
 import { expect, test } from "vitest";
 import { DEFAULT_FAMILY } from "../../src/catalog/index.ts";
 import { SHARED_WORDS, workshopOn } from "../../src/tui/workshop.ts";
-import { BRIEF, parts, STOCK } from "../support/stock.ts";
+import { BRIEF, CATALOGUE_FACTS, parts, STOCK } from "../support/stock.ts";
 
 test("workshopOn(read, files): an engine that plans, the words of the commands, an order saved where it was said", () => {
   const written = new Map<string, string>();
@@ -13,7 +13,7 @@ test("workshopOn(read, files): an engine that plans, the words of the commands, 
     },
   };
   const { engine, stock, words, exportBill } = workshopOn(
-    { parts: parts(), families: [DEFAULT_FAMILY], stock: STOCK },
+    { parts: parts(), families: [DEFAULT_FAMILY], stock: STOCK, sources: CATALOGUE_FACTS.sources },
     files,
   );
   expect([stock, words]).toEqual([STOCK, SHARED_WORDS]);
