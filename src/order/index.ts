@@ -5,4 +5,5 @@ export { BILL_COLUMNS, type BillColumn } from "./columns.ts";
 export { type Counts, countsOf } from "./counts.ts";
 export { csvText } from "./csv.ts";
 export { BILL_FORMATS, type BillFormat, billText } from "./formats.ts";
+export { markdownText } from "./markdown.ts";
 export { visible, visibleJson, visibleLines } from "./visible.ts";

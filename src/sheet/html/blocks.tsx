@@ -1,0 +1,78 @@
+/** @jsxImportSource preact */
+// The blocks of a section as elements: paragraphs, lists, tables with blanks to write in, drawings with their words.
+
+import type { Block, Cell, Column, Drawing, Table } from "../model.ts";
+import { Drawn } from "./drawn.tsx";
+import { each } from "./each.ts";
+
+const classOf = ({ side, written }: Column): string | undefined => side ?? (written ? "written" : undefined);
+
+/** The first cell names the row, where it says anything. */
+function TableCell({
+  value,
+  column,
+  first,
+}: {
+  readonly value: Cell;
+  readonly column: Column;
+  readonly first: boolean;
+}) {
+  if (value === null) return <td class="blank" />;
+  if (first && value !== "") return <th scope="row">{value}</th>;
+  return <td class={column.side}>{value}</td>;
+}
+
+function TableBlock({ table }: { readonly table: Table }) {
+  const { id, caption, columns, rows } = table;
+  return (
+    <table id={`t-${id}`}>
+      <caption>{caption}</caption>
+      <thead>
+        <tr>
+          {each(columns, (column) => (
+            <th scope="col" class={classOf(column)}>
+              {column.heading}
+            </th>
+          ))}
+        </tr>
+      </thead>
+      <tbody>
+        {each(rows, (cells) => (
+          <tr>
+            {each(cells, (value, i) => (
+              <TableCell value={value} column={columns[i] as Column} first={i === 0} />
+            ))}
+          </tr>
+        ))}
+      </tbody>
+    </table>
+  );
+}
+
+function DrawingBlock({ drawing }: { readonly drawing: Drawing }) {
+  return (
+    <div class="drawing">
+      <Drawn drawn={drawing.drawn} />
+      <p class="words">{drawing.words}</p>
+    </div>
+  );
+}
+
+export function BlockView({ block }: { readonly block: Block }) {
+  switch (block.kind) {
+    case "text":
+      return <p>{block.text}</p>;
+    case "list":
+      return (
+        <ul>
+          {each(block.items, (item) => (
+            <li>{item}</li>
+          ))}
+        </ul>
+      );
+    case "table":
+      return <TableBlock table={block} />;
+    case "drawing":
+      return <DrawingBlock drawing={block} />;
+  }
+}

@@ -1,0 +1,93 @@
+// The wiring list: every joint with its conductor, and room for length, lug, torque and the initials of who made it.
+
+import { up } from "../cells.ts";
+import type { SheetInput } from "../input.ts";
+import { list, type Section, type Table, text } from "../model.ts";
+import { barsOf } from "../names.ts";
+import { barConductor, type Wire, wiresOf } from "../wires.ts";
+
+/** The joints of this bank. */
+export function wiringOf({ layout, brief, shot, fuse, earth }: SheetInput): readonly Wire[] {
+  const fitted = fuse !== null && fuse.chosen !== null && fuse.count > 0;
+  const each = fitted && fuse.count === layout.units;
+  return wiresOf({
+    shape: layout,
+    balanceElements: layout.balance?.elements ?? 0,
+    shot,
+    unitFuse: each,
+    stringFuse: fitted && !each,
+    isolating: brief.isolating !== undefined,
+    earth,
+  });
+}
+
+/** The bars, each with the joints that it takes. */
+function barTable(input: SheetInput, wires: readonly Wire[]): Table {
+  const { layout, unit, shot } = input;
+  const bars = barsOf(layout);
+  const pitch = unit.diameter ?? unit.width;
+  const joints = new Map<string, number>();
+  for (const end of wires.flatMap(({ from, to }) => [from, to])) joints.set(end, (joints.get(end) ?? 0) + 1);
+  const ends = (i: number): string =>
+    i === 0 ? "negative end" : i === bars.length - 1 ? "positive end" : "between stages";
+  return {
+    kind: "table",
+    id: "bars",
+    caption: "Bars to be made",
+    columns: [
+      { heading: "bar" },
+      { heading: "where" },
+      { heading: "joints", side: "right" },
+      { heading: "conductor" },
+      { heading: "length" },
+      { heading: "section chosen", written: true },
+    ],
+    rows: bars.map((bar, i) => [
+      bar,
+      ends(i),
+      String(joints.get(bar) ?? 0),
+      barConductor(shot),
+      pitch === undefined ? null : `at least ${up(pitch * layout.parallel, "length")}`,
+      null,
+    ]),
+  };
+}
+
+export function wiringSection(input: SheetInput): Section {
+  const wires = wiringOf(input);
+  const { layout, shot } = input;
+  const inside = layout.ties === "strings" ? ", N2.3 the node of string 2 above its unit 3" : "";
+  const table: Table = {
+    kind: "table",
+    id: "wiring",
+    caption: `Wiring list: ${wires.length} joints`,
+    columns: [
+      { heading: "from" },
+      { heading: "to" },
+      { heading: "conductor" },
+      { heading: "length", written: true },
+      { heading: "lug", written: true },
+      { heading: "torque", written: true },
+      { heading: "initials", written: true },
+    ],
+    rows: wires.map(({ from, to, conductor }) => [from, to, conductor, null, null, null, null]),
+  };
+  return {
+    id: "wiring",
+    title: "Wiring list",
+    ownPage: true,
+    blocks: [
+      text(
+        `B0 is the bar of the negative end, the last bar that of the positive end; C3.7 is unit 7 of ${layout.ties === "strings" ? "string" : "stage"} 3${inside}. Terminals are + and - of a unit, a and b of a part without polarity.`,
+      ),
+      list([
+        shot === null
+          ? "Conductor of bars and unit leads: blank, because no action integral is known without a load in the brief. It blocks the choice of section."
+          : "Conductor: the least copper that one normal shot heats from 20 degC to 90 degC. A fault may carry more; repeated shots need more. Blank: chosen by strength, insulated for the full voltage.",
+        "A bar's length is for units side by side in one row; other lengths and the lugs are blank until the bank is laid out. Torque: the unit maker's figure for its terminal; without it no joint is signed off.",
+      ]),
+      barTable(input, wires),
+      table,
+    ],
+  };
+}
