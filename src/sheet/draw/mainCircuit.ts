@@ -14,7 +14,7 @@ import { type NodeWords, tiedBlock } from "./tiedBlock.ts";
 /** Points: the upper rail, the charger's own line, its box, and the rooms of what stands beside the bank. */
 const RAIL = 34;
 const CHARGER = { axis: 30, halfWidth: 22, height: 36 } as const;
-const ROOM = { charger: 62, dump: 50, bleed: 36, clamp: 28, switch: 34, load: 42 } as const;
+const ROOM = { charger: 62, dump: 50, bleed: 36, clamp: 28, switch: 34, load: 34 } as const;
 /** Height that the stages may take before they are folded, and the air between a rail and the bank. */
 const MOST_HEIGHT = 300;
 const AIR = 14;
@@ -88,7 +88,7 @@ function dumpInk(props: SchematicProps, x: number, { top, bottom }: Rails): read
       ],
       dashes: [across(x + 16, axis + 1, link)],
       joints: [top, bottom].map((y) => ({ x: axis, y })),
-      marks: [{ role: "dump relay", name: "break", x: axis, y: contact, way: "down" }],
+      marks: [{ role: "dump-relay", name: "break", x: axis, y: contact, way: "down" }],
       words: [name(axis + 8, link + 2.5, dumpRelay), name(axis + 6, half + 2.5, dump)],
     },
     between({ role: "dump", name: "resistor", x: axis, top: contact + SPAN, bottom }),
@@ -128,7 +128,7 @@ function fireInk(props: SchematicProps, x: number, { top, bottom }: Rails): read
     },
     ...(props.load.coil
       ? [
-          between({ role: "load coil", name: "coil", x: axis, top, bottom: middle }),
+          between({ role: "load-coil", name: "coil", x: axis, top, bottom: middle }),
           { words: [name(axis + 6, (top + middle) / 2 + 2.5, "L1")] },
         ]
       : []),
@@ -205,7 +205,7 @@ export function mainCircuit(props: SchematicProps, width: number, nodeWords: Nod
       }),
       ...bankInk(plan, nodeWords),
       ...(props.clamps.bank
-        ? branchInk({ role: "bank clamp", symbol: "diode", x: plan.right + 16, text: partNames(props).clamp }, rails)
+        ? branchInk({ role: "bank-clamp", symbol: "diode", x: plan.right + 16, text: partNames(props).clamp }, rails)
         : []),
       ...fireInk(props, fireAt, rails),
       earthInk(props, riser + 24, rails),

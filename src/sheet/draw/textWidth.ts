@@ -4,10 +4,10 @@
 // common sans-serif, rounded up; assumed, common practice, no source.
 
 const WIDTHS: readonly (readonly [RegExp, number])[] = [
+  [/[mwMW@%&+=<>~#^]/, 1],
   [/[ijl.,:;'|!]/, 0.36],
   [/[ft()[\]{}/\\ "r*-]/, 0.45],
   [/[a-z0-9_?$]/, 0.65],
-  [/[mwMW@%&+=<>~#^]/, 1],
   [/[ -~]/, 0.76],
   [/[\u00a0-\u024f\u0370-\u03ff]/, 0.85],
 ];
