@@ -1,0 +1,66 @@
+// A drawing as plain data before it is markup: wires, joints, points, symbols in their roles, words, and words on a white plate.
+
+import type { Stand, SymbolName } from "./symbols.ts";
+
+export interface Spot {
+  readonly x: number;
+  readonly y: number;
+}
+
+export interface Line extends Spot {
+  readonly toX: number;
+  readonly toY: number;
+}
+
+/** A symbol in its role; the role is what it is counted by. */
+export interface Mark extends Stand {
+  readonly role: string;
+  readonly name: SymbolName;
+}
+
+export interface Said extends Spot {
+  readonly text: string;
+  readonly anchor?: "start" | "middle" | "end";
+  readonly size?: number;
+  readonly bold?: boolean;
+  readonly room?: number;
+  readonly lines?: number;
+}
+
+/** Words over lines, centred, within a width. */
+export interface Plate extends Spot {
+  readonly text: string;
+  readonly room: number;
+}
+
+export interface Ink {
+  readonly wires?: readonly Line[];
+  readonly dashes?: readonly Line[];
+  readonly rails?: readonly Line[];
+  readonly joints?: readonly Spot[];
+  readonly points?: readonly Spot[];
+  readonly marks?: readonly Mark[];
+  readonly words?: readonly Said[];
+  readonly plates?: readonly Plate[];
+}
+
+export const across = (x: number, toX: number, y: number): Line => ({ x, y, toX, toY: y });
+export const down = (x: number, y: number, toY: number): Line => ({ x, y, toX: x, toY });
+
+/** Several inks as one, in their order. */
+export function together(inks: readonly Ink[]): Required<Ink> {
+  const of = <Key extends keyof Ink>(key: Key) => inks.flatMap((ink) => ink[key] ?? []) as Required<Ink>[Key][number][];
+  return {
+    wires: of("wires"),
+    dashes: of("dashes"),
+    rails: of("rails"),
+    joints: of("joints"),
+    points: of("points"),
+    marks: of("marks"),
+    words: of("words"),
+    plates: of("plates"),
+  };
+}
+
+/** How often a role is drawn. */
+export const countOf = ({ marks = [] }: Ink, role: string): number => marks.filter((mark) => mark.role === role).length;

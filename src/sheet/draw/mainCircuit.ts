@@ -1,0 +1,222 @@
+// The circuit round the bank, from charger to load, as ink: what stands where between the two rails.
+
+import { type BlockPlan, blockPlan, type CellShape, cellHeight, cellShape, columnsIn } from "./blockPlan.ts";
+import { axisOf, between } from "./cell.ts";
+import { SIZES } from "./drawing.tsx";
+import { across, down, type Ink, type Said } from "./ink.ts";
+import { partNames } from "./partNames.ts";
+import type { SchematicProps } from "./schematicProps.ts";
+import { hidden, type Slot, slotsOf } from "./slots.ts";
+import { stringBlock } from "./stringBlock.ts";
+import { SPAN, type SymbolName } from "./symbols.ts";
+import { type NodeWords, tiedBlock } from "./tiedBlock.ts";
+
+/** Points: the upper rail, the charger's own line, its box, and the rooms of what stands beside the bank. */
+const RAIL = 34;
+const CHARGER = { axis: 30, halfWidth: 22, height: 36 } as const;
+const ROOM = { charger: 62, dump: 50, bleed: 36, clamp: 28, switch: 34, load: 34 } as const;
+/** Height that the stages may take before they are folded, and the air between a rail and the bank. */
+const MOST_HEIGHT = 300;
+const AIR = 14;
+const STEP = 22;
+const MOST_BLEEDS = 2;
+
+const name = (x: number, y: number, text: string, anchor: Said["anchor"] = "start"): Said => ({
+  x,
+  y,
+  text,
+  anchor,
+  size: SIZES.small,
+});
+
+interface Rails {
+  readonly top: number;
+  readonly bottom: number;
+}
+
+function chargerInk(props: SchematicProps, { top, bottom }: Rails): readonly Ink[] {
+  const { axis, halfWidth, height } = CHARGER;
+  const symbols = { resistor: "resistor", relay: "make", diode: "diode" } as const;
+  const box = bottom - 22 - height;
+  const names = partNames(props).isolation;
+  const chain = props.isolation.flatMap(({ kind }, index): Ink[] => {
+    const from = top + 6 + STEP * index;
+    // Current goes up, from the charger to the rail: so does the diode.
+    return [
+      { marks: [{ role: "isolation", name: symbols[kind], x: axis, y: from + SPAN, way: "up" }] },
+      { wires: [down(axis, from + SPAN, from + STEP)], words: [name(axis + 8, from + SPAN / 2 + 2.5, names[index]!)] },
+    ];
+  });
+  const end = top + 6 + STEP * props.isolation.length;
+  const [left, right] = [axis - halfWidth, axis + halfWidth];
+  return [
+    { wires: [down(axis, top, top + 6), down(axis, end, box), down(axis, box + height, bottom)] },
+    ...chain,
+    {
+      wires: [
+        across(left, right, box),
+        across(left, right, box + height),
+        down(left, box, box + height),
+        down(right, box, box + height),
+      ],
+      words: [
+        name(axis, box + 16, "G1", "middle"),
+        name(axis, box + 26, "charger", "middle"),
+        name(axis + 4, box - 3, "+"),
+        name(axis + 4, box + height + 8, "−"),
+      ],
+    },
+  ];
+}
+
+function dumpInk(props: SchematicProps, x: number, { top, bottom }: Rails): readonly Ink[] {
+  const { dumpRelay, dump } = partNames(props);
+  const axis = x + 30;
+  const contact = top + 26;
+  const half = (contact + SPAN + bottom) / 2;
+  const link = contact + SPAN / 2;
+  return [
+    {
+      wires: [
+        down(axis, top, contact),
+        across(x + 2, x + 16, link - 5),
+        across(x + 2, x + 16, link + 5),
+        down(x + 2, link - 5, link + 5),
+        down(x + 16, link - 5, link + 5),
+        down(x + 9, link - 10, link - 5),
+        down(x + 9, link + 5, link + 10),
+      ],
+      dashes: [across(x + 16, axis + 1, link)],
+      joints: [top, bottom].map((y) => ({ x: axis, y })),
+      marks: [{ role: "dump-relay", name: "break", x: axis, y: contact, way: "down" }],
+      words: [name(axis + 8, link + 2.5, dumpRelay), name(axis + 6, half + 2.5, dump)],
+    },
+    between({ role: "dump", name: "resistor", x: axis, top: contact + SPAN, bottom }),
+  ];
+}
+
+function branchInk(
+  given: { readonly role: string; readonly symbol: SymbolName; readonly x: number; readonly text: string },
+  { top, bottom }: Rails,
+): readonly Ink[] {
+  const { role, symbol, x, text } = given;
+  return [
+    between({ role, name: symbol, x, top, bottom }),
+    { joints: [top, bottom].map((y) => ({ x, y })), words: [name(x + 6, (top + bottom) / 2 + 2.5, text)] },
+  ];
+}
+
+/** The bleeders that are drawn: all of them, or the first and one for the rest. */
+function bleedNames(props: SchematicProps): readonly string[] {
+  const { bleeds } = partNames(props);
+  if (bleeds.length <= MOST_BLEEDS) return bleeds;
+  return [bleeds[0]!, `${bleeds[1]}${bleeds.length === 3 ? "," : " to"} ${bleeds.at(-1)}`];
+}
+
+const SWITCH_SYMBOLS = { thyristor: "thyristor", gap: "gap", contact: "make", unknown: "make" } as const;
+const LOAD_SYMBOLS = { resistor: "resistor", coil: "coil", lamp: "lamp", short: "wire", unknown: "resistor" } as const;
+
+function fireInk(props: SchematicProps, x: number, { top, bottom }: Rails): readonly Ink[] {
+  const axis = x + ROOM.switch + 10;
+  const middle = (top + bottom) / 2;
+  const split = props.load.coil ? middle : top;
+  return [
+    {
+      rails: [across(x + 8 + SPAN, axis, top)],
+      marks: [{ role: "switch", name: SWITCH_SYMBOLS[props.switch.kind], x: x + 8, y: top, way: "right" }],
+      words: [name(x + 16, top - 9, "S1", "middle")],
+    },
+    ...(props.load.coil
+      ? [
+          between({ role: "load-coil", name: "coil", x: axis, top, bottom: middle }),
+          { words: [name(axis + 6, (top + middle) / 2 + 2.5, "L1")] },
+        ]
+      : []),
+    between({ role: "load", name: LOAD_SYMBOLS[props.load.kind], x: axis, top: split, bottom }),
+    { words: [name(axis + 7, (split + bottom) / 2 + 2.5, "X1")] },
+  ];
+}
+
+function earthInk({ earth }: SchematicProps, x: number, { top, bottom }: Rails): Ink {
+  if (earth !== "negative" && earth !== "positive") return {};
+  const low = earth === "negative";
+  const y = low ? bottom : top;
+  return {
+    marks: [{ role: "earth", name: "earth", x, y, way: low ? "down" : "up" }],
+    joints: [{ x, y }],
+    words: [name(x + 9, low ? y + 8 : y - 5, "E1")],
+  };
+}
+
+export interface MainCircuit {
+  readonly inks: readonly Ink[];
+  readonly width: number;
+  readonly height: number;
+  readonly columns: readonly Slot[];
+  readonly rows: readonly Slot[];
+}
+
+/** How wide everything but the bank is. */
+const besideBank = (props: SchematicProps): number =>
+  ROOM.charger +
+  (props.dump === null ? 0 : ROOM.dump) +
+  ROOM.bleed * bleedNames(props).length +
+  6 +
+  (props.clamps.bank ? ROOM.clamp : 0) +
+  ROOM.switch +
+  ROOM.load;
+
+function bankInk(plan: BlockPlan, nodeWords: NodeWords): readonly Ink[] {
+  const given = { plan, nodeWords, goesOn: false };
+  return plan.shape.tied ? tiedBlock(given) : stringBlock(given, { top: true, bottom: true });
+}
+
+function planOf(props: SchematicProps, shape: CellShape, x: number, width: number): BlockPlan {
+  const columns = slotsOf(props.parallel, columnsIn(shape, width - besideBank(props)));
+  const rows = slotsOf(props.series, Math.floor(MOST_HEIGHT / cellHeight(shape)));
+  return blockPlan({ shape, columns, rows, head: true, x, y: RAIL + AIR });
+}
+
+/** The whole circuit in a width, the bank folded where it must be. */
+export function mainCircuit(props: SchematicProps, width: number, nodeWords: NodeWords): MainCircuit {
+  const bleeds = bleedNames(props);
+  const bankAt = ROOM.charger + (props.dump === null ? 0 : ROOM.dump) + ROOM.bleed * bleeds.length;
+  const shape = cellShape(props);
+  const plan = planOf(props, shape, bankAt, width);
+  const least = RAIL + 6 + STEP * props.isolation.length + 12 + CHARGER.height + 22;
+  const rails = { top: RAIL, bottom: Math.max(plan.bottom + AIR, least, RAIL + 110) };
+  const fireAt = plan.right + 6 + (props.clamps.bank ? ROOM.clamp : 0);
+  const riser = axisOf(shape, plan.columns[0]!.from);
+  return {
+    inks: [
+      {
+        rails: [
+          across(CHARGER.axis, fireAt + 8, rails.top),
+          across(CHARGER.axis, fireAt + ROOM.switch + 10, rails.bottom),
+        ],
+        wires: [down(riser, rails.top, plan.top), down(riser, plan.bottom, rails.bottom)],
+        joints: [rails.top, rails.bottom].map((y) => ({ x: riser, y })),
+      },
+      ...chargerInk(props, rails),
+      ...(props.dump === null ? [] : dumpInk(props, ROOM.charger, rails)),
+      ...bleeds.flatMap((text, index) => {
+        const x = bankAt - ROOM.bleed * (bleeds.length - index) + 8;
+        return branchInk({ role: "bleed", symbol: "resistor", x, text }, rails);
+      }),
+      ...bankInk(plan, nodeWords),
+      ...(props.clamps.bank
+        ? branchInk({ role: "bank-clamp", symbol: "diode", x: plan.right + 16, text: partNames(props).clamp }, rails)
+        : []),
+      ...fireInk(props, fireAt, rails),
+      earthInk(props, riser + 24, rails),
+    ],
+    width: fireAt + ROOM.switch + ROOM.load,
+    height: rails.bottom + 18,
+    columns: plan.columns.map(({ slot }) => slot),
+    rows: plan.rows.map(({ slot }) => slot).reverse(),
+  };
+}
+
+/** Whether every unit of the bank is in the drawing. */
+export const isWhole = ({ columns, rows }: Pick<MainCircuit, "columns" | "rows">): boolean =>
+  hidden(columns) === 0 && hidden(rows) === 0;
