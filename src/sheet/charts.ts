@@ -9,7 +9,7 @@ import type { BleedCurve, CostStep } from "./draw/chartProps.ts";
 import { factsOf, waysDown } from "./facts.ts";
 import type { SheetInput } from "./input.ts";
 import type { Drawing } from "./model.ts";
-import { groupWord } from "./names.ts";
+import { positionWord } from "./names.ts";
 
 /** Worst voltages in each state, with the limit and the rating across. */
 export function voltageChart(input: SheetInput): Drawing {
@@ -41,7 +41,7 @@ export function voltageChart(input: SheetInput): Drawing {
       kind: "voltages",
       props: {
         id: "chart-voltages",
-        title: `Voltage of a ${groupWord(layout) === "stage" ? "stage" : "unit"} against its limits`,
+        title: `Voltage of a ${positionWord(layout)} against its limits`,
         bars,
         limits,
       },

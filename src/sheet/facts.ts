@@ -29,13 +29,18 @@ export interface Facts {
   readonly stored: number | null;
 }
 
-const named = (id: RuleId): string => {
+/** The rule's name with where it stands: "NFPA 70E Article 360 (2021, 2024)". */
+export const ruleName = (id: RuleId): string => {
   const { body, clause, edition } = ruleOf(id);
   return [body, clause, edition === "" ? "" : `(${edition})`].filter((part) => part !== "").join(" ");
 };
 
-/** The rule's name with where it stands: "NFPA 70E Article 360 (2021, 2024)". */
-export const ruleName = named;
+/** The name, and how far its text was read where that is not the whole way. */
+export function toldRule(id: RuleId): string {
+  const { tag } = ruleOf(id);
+  const read = { read: "", "second hand": ", second hand", memory: ", from memory: confirm against the text" }[tag];
+  return `${ruleName(id)}${read}`;
+}
 
 export function factsOf({ layout, brief, rule }: SheetInput): Facts {
   const voltage = brief.voltage * (1 + brief.overshoot);
@@ -53,7 +58,7 @@ export function factsOf({ layout, brief, rule }: SheetInput): Facts {
     dump: brief.dumpResistance ?? null,
     clear: clearing?.voltage ?? brief.touchSafe,
     allowed: clearing?.seconds ?? null,
-    rule: rule === null ? own : named(rule),
+    rule: rule === null ? own : toldRule(rule),
     stored: capacitance === null ? null : (capacitance * voltage ** 2) / 2,
   };
 }

@@ -1,7 +1,8 @@
-// Names of the places of a bank, the same in every list and drawing: units, resistors, bars and the nodes inside strings.
+// Names of the places of a bank, the same in every list and drawing: units, resistors, bars and the points between units.
 //
-// A unit is named by its stage (cross-tied) or string and its place in it, from 1: C3.7. A bar is named by the count of stages
-// below it, from the negative end: B0 to Bn; independent strings share B0 and B1 alone, and N2.3 lies in string 2 above unit 3.
+// A unit is named by its stage (cross-tied) or string and its place in it, from 1: C3.7, 1 at the negative end. TP0 is the bar of
+// the negative end and TPn that of the positive end; between them a cross-tied bank has a bar TP3 above its stage 3, and a string
+// a point TP2.3 above unit 3 of string 2.
 
 import type { Ties } from "../bank/index.ts";
 
@@ -17,6 +18,12 @@ export interface Spot {
   readonly place: number;
 }
 
+/** Something between two points of the bank. */
+export interface Between {
+  readonly low: string;
+  readonly high: string;
+}
+
 export const unitName = ({ group, place }: Spot): string => `C${group}.${place}`;
 
 /** Every unit's spot, group by group. */
@@ -25,28 +32,31 @@ export const spotsOf = ({ series, parallel, ties }: Shape): readonly Spot[] => {
   return Array.from({ length: groups * size }, (_, i) => ({ group: Math.floor(i / size) + 1, place: (i % size) + 1 }));
 };
 
-/** The nodes below and above a unit, from the negative end. */
-export function nodesOf(
-  { series, ties }: Shape,
-  { group, place }: Spot,
-): { readonly low: string; readonly high: string } {
-  if (ties === "cross-tied") return { low: `B${group - 1}`, high: `B${group}` };
-  const node = (above: number): string => (above === 0 ? "B0" : above === series ? "B1" : `N${group}.${above}`);
-  return { low: node(place - 1), high: node(place) };
+/** The points below and above a unit, from the negative end. */
+export function pointsOf({ series, ties }: Shape, { group, place }: Spot): Between {
+  if (ties === "cross-tied") return { low: `TP${group - 1}`, high: `TP${group}` };
+  const point = (above: number): string => (above === 0 || above === series ? `TP${above}` : `TP${group}.${above}`);
+  return { low: point(place - 1), high: point(place) };
 }
 
 /** The bars, from the negative end; the last is the positive end of the bank. */
 export const barsOf = ({ series, ties }: Shape): readonly string[] =>
-  Array.from({ length: ties === "cross-tied" ? series + 1 : 2 }, (_, i) => `B${i}`);
+  ties === "cross-tied" ? Array.from({ length: series + 1 }, (_, i) => `TP${i}`) : ["TP0", `TP${series}`];
 
-/** Balancing positions: across each stage (cross-tied) or each unit (strings). */
-export const balanceSpots = (
-  shape: Shape,
-): readonly { readonly name: string; readonly low: string; readonly high: string }[] =>
+/** Where one stands across each stage (cross-tied) or each unit (strings): balancing resistors, clamp diodes. */
+export const positionsOf = (shape: Shape, letters: string): readonly (Between & { readonly name: string })[] =>
   shape.ties === "cross-tied"
-    ? Array.from({ length: shape.series }, (_, i) => ({ name: `RB${i + 1}`, low: `B${i}`, high: `B${i + 1}` }))
-    : spotsOf(shape).map((spot) => ({ name: `RB${spot.group}.${spot.place}`, ...nodesOf(shape, spot) }));
+    ? Array.from({ length: shape.series }, (_, i) => ({
+        name: `${letters}${i + 1}`,
+        low: `TP${i}`,
+        high: `TP${i + 1}`,
+      }))
+    : spotsOf(shape).map((spot) => ({ name: `${letters}${spot.group}.${spot.place}`, ...pointsOf(shape, spot) }));
 
-/** What one stands in: a stage of the bank, or a string. */
+/** What a unit is counted in: a stage of the bank, or a string. */
 export const groupWord = ({ ties }: Pick<Shape, "ties">): "stage" | "string" =>
   ties === "cross-tied" ? "stage" : "string";
+
+/** What one balancing resistor stands across. */
+export const positionWord = ({ ties }: Pick<Shape, "ties">): "stage" | "unit" =>
+  ties === "cross-tied" ? "stage" : "unit";

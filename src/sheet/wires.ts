@@ -1,5 +1,5 @@
 /*
- * The joints of a bank, one row each: what is joined to what, and the conductor where it follows from the shot.
+ * The joints of a bank as its schematic has it, one row each: what is joined to what, and the conductor where it follows.
  *
  *   symbol  unit   meaning
  *   A       A^2 s  action integral of one shot through the conductor
@@ -13,27 +13,16 @@
 import { leastArea } from "../pulse/index.ts";
 import type { ShotReport } from "../search/index.ts";
 import { squareMillimetres } from "./cells.ts";
+import { partNames } from "./draw/partNames.ts";
+import type { SchematicProps } from "./draw/schematicProps.ts";
 import type { Cell } from "./model.ts";
-import { balanceSpots, barsOf, nodesOf, type Shape, spotsOf, unitName } from "./names.ts";
+import { barsOf, pointsOf, positionsOf, spotsOf, unitName } from "./names.ts";
 
-/** One joint. Terminals are written "C3.7 +"; a bar or node is one point. */
+/** One joint. A terminal is written "C3.7 +"; a bar or point is one place. */
 export interface Wire {
   readonly from: string;
   readonly to: string;
   readonly conductor: Cell;
-}
-
-export interface WiringInput {
-  readonly shape: Shape;
-  /** Elements of a balancing position; 0: none fitted. */
-  readonly balanceElements: number;
-  readonly shot: ShotReport | null;
-  /** In series with each unit: a fuse, a resistor. */
-  readonly unitFuse: boolean;
-  readonly isolating: boolean;
-  /** In series with each string, at its positive end. */
-  readonly stringFuse: boolean;
-  readonly earth: "negative" | "positive" | "none" | "unknown";
 }
 
 const RISE = { from: 293.15, to: 363.15 } as const;
@@ -43,78 +32,75 @@ const copper = (action: number | null | undefined): Cell =>
     ? null
     : `copper, at least ${squareMillimetres(leastArea("copper", action, RISE))}`;
 
-/** Every joint of the bank and of what hangs on it, in the order that it is wired. */
-export const wiresOf = (input: WiringInput): readonly Wire[] => [
-  ...unitRows(input),
-  ...balanceRows(input),
-  ...outsideRows(input),
-];
-
 /** What the bars are made of at least; null where no action integral is known. */
 export const barConductor = (shot: ShotReport | null): Cell => copper(shot?.discharge.action);
 
-/** From the negative node through unit, fuse and resistor to the positive one. */
-function unitRows({ shape, shot, unitFuse, isolating, stringFuse }: WiringInput): readonly Wire[] {
-  const conductor = copper(shot?.discharge.unit.action);
-  const plain = { conductor };
-  return spotsOf(shape).flatMap((spot) => {
-    const { low, high } = nodesOf(shape, spot);
+/** Every joint of the bank and of what hangs on it, in the order that it is wired. */
+export const wiresOf = (props: SchematicProps, shot: ShotReport | null): readonly Wire[] => [
+  ...unitWires(props, copper(shot?.discharge.unit.action)),
+  ...balanceWires(props),
+  ...clampWires(props),
+  ...outsideWires(props, barConductor(shot)),
+];
+
+const joint = (from: string, to: string, conductor: Cell = null): Wire => ({ from, to, conductor });
+
+/** Parts with terminals a and b, in a row between two places. */
+function chain(from: string, parts: readonly string[], to: string, conductor: Cell = null): readonly Wire[] {
+  const starts = [from, ...parts.map((part) => `${part} b`)];
+  const ends = [...parts.map((part) => `${part} a`), to];
+  return starts.map((start, i) => joint(start, ends[i] as string, conductor));
+}
+
+/** From the negative point through unit, fuse and isolating resistor to the positive one. */
+function unitWires(props: SchematicProps, conductor: Cell): readonly Wire[] {
+  const { series, fuse, isolating } = props;
+  return spotsOf(props).flatMap((spot) => {
+    const { low, high } = pointsOf(props, spot);
     const name = unitName(spot);
     const at = `${spot.group}.${spot.place}`;
-    const top = stringFuse && spot.place === shape.series;
-    const between = [
-      ...(unitFuse ? [`F${at}`] : []),
-      ...(top ? [`F${spot.group}`] : []),
-      ...(isolating ? [`RI${at}`] : []),
+    const parts = [
+      ...(fuse?.at === "unit" ? [`F${at}`] : []),
+      ...(isolating === null ? [] : [`RI${at}`]),
+      ...(fuse?.at === "string" && spot.place === series ? [`F${spot.group}`] : []),
     ];
-    const wires: Wire[] = [{ from: low, to: `${name} -`, ...plain }];
-    let from = `${name} +`;
-    for (const part of between) {
-      wires.push({ from, to: `${part} a`, ...plain });
-      from = `${part} b`;
-    }
-    return [...wires, { from, to: high, ...plain }];
+    return [joint(low, `${name} -`, conductor), ...chain(`${name} +`, parts, high, conductor)];
   });
 }
 
-/** k equal elements in series in each position: RB3:1, RB3:2 ... joined end to end. */
-function balanceRows({ shape, balanceElements }: WiringInput): readonly Wire[] {
-  if (balanceElements === 0) return [];
-  const plain = { conductor: null };
-  return balanceSpots(shape).flatMap(({ name, low, high }) => {
-    const wires: Wire[] = [];
-    let from = low;
-    for (let k = 1; k <= balanceElements; k++) {
-      const element = balanceElements === 1 ? name : `${name}:${k}`;
-      wires.push({ from, to: `${element} a`, ...plain });
-      from = `${element} b`;
-    }
-    return [...wires, { from, to: high, ...plain }];
+/** k equal elements in series in each position, RB3:1, RB3:2 and so on, joined end to end. */
+function balanceWires(props: SchematicProps): readonly Wire[] {
+  const elements = props.balance?.elements ?? 0;
+  if (elements === 0) return [];
+  return positionsOf(props, "RB").flatMap(({ name, low, high }) => {
+    const parts = elements === 1 ? [name] : Array.from({ length: elements }, (_, k) => `${name}:${k + 1}`);
+    return chain(low, parts, high);
   });
 }
 
-/** Charger, dump, meter, switch and load; the earth point. Bleeders of their own where no chain empties the bank. */
-function outsideRows({ shape, shot, balanceElements, earth }: WiringInput): readonly Wire[] {
-  const bars = barsOf(shape);
+/** Cathodes to the positive side. */
+function clampWires(props: SchematicProps): readonly Wire[] {
+  if (!props.clamps.positions) return [];
+  return positionsOf(props, "DC").flatMap(({ name, low, high }) => [
+    joint(low, `${name} anode`),
+    joint(`${name} cathode`, high),
+  ]);
+}
+
+/** Charger, dump, bleed, meter, switch and load; the earth point. */
+function outsideWires(props: SchematicProps, thick: Cell): readonly Wire[] {
+  const bars = barsOf(props);
   const [minus, plus] = [bars[0] as string, bars[bars.length - 1] as string];
-  const thin = { conductor: null };
-  const thick = { conductor: barConductor(shot) };
-  const wire = (from: string, to: string, by: typeof thin | typeof thick = thin): Wire => ({ from, to, ...by });
+  const { isolation, dump, dumpRelay, bleeds, clamp } = partNames(props);
+  const earthed = { negative: minus, positive: plus, unknown: "the end to be decided", none: null }[props.earth];
   return [
-    wire("charger +", "isolation a"),
-    wire("isolation b", plus),
-    wire("charger -", minus),
-    ...(balanceElements === 0 ? [wire(minus, "bleed resistor a"), wire("bleed resistor b", plus)] : []),
-    wire(plus, "dump resistor a"),
-    wire("dump resistor b", "dump relay a"),
-    wire("dump relay b", minus),
-    wire(plus, "meter divider a"),
-    wire("meter divider b", minus),
-    wire(plus, "switch a", thick),
-    wire("switch b", "load a", thick),
-    wire("load b", minus, thick),
-    ...(earth === "none"
-      ? []
-      : [wire(earth === "positive" ? plus : earth === "negative" ? minus : "the end to be decided", "earth point")]),
+    ...chain("G1 +", isolation, plus),
+    joint("G1 -", minus),
+    ...(props.dump === null ? [] : chain(plus, [dumpRelay, dump], minus)),
+    ...bleeds.flatMap((name) => chain(plus, [name], minus)),
+    ...(props.clamps.bank ? [joint(minus, `${clamp} anode`), joint(`${clamp} cathode`, plus)] : []),
+    ...chain(plus, ["meter divider"], minus),
+    ...chain(plus, ["S1", ...(props.load.coil ? ["L1"] : []), "X1"], minus, thick),
+    ...(earthed === null ? [] : [joint(earthed, "E1")]),
   ];
 }

@@ -7,6 +7,20 @@ import { each } from "./each.ts";
 
 const classOf = ({ side, written }: Column): string | undefined => side ?? (written ? "written" : undefined);
 
+/** Longest word that a column is kept wide enough for; longer ones may be broken anywhere. */
+const LONGEST_WORD = 16;
+/** Longest figure that is kept on one line with its unit. */
+const LONGEST_FIGURE = 16;
+
+function looksOf(value: string, { side }: Column): string | undefined {
+  const names = [
+    ...(side === undefined ? [] : [side]),
+    ...(value.split(/[\s-]/).some((word) => word.length > LONGEST_WORD) ? ["long"] : []),
+    ...(side === "right" && value.length <= LONGEST_FIGURE ? ["figure"] : []),
+  ];
+  return names.length > 0 ? names.join(" ") : undefined;
+}
+
 /** The first cell names the row, where it says anything. */
 function TableCell({
   value,
@@ -18,8 +32,14 @@ function TableCell({
   readonly first: boolean;
 }) {
   if (value === null) return <td class="blank" />;
-  if (first && value !== "") return <th scope="row">{value}</th>;
-  return <td class={column.side}>{value}</td>;
+  const looks = looksOf(value, column);
+  if (first && value !== "")
+    return (
+      <th scope="row" class={looks}>
+        {value}
+      </th>
+    );
+  return <td class={looks}>{value}</td>;
 }
 
 function TableBlock({ table }: { readonly table: Table }) {

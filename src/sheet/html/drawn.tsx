@@ -1,8 +1,28 @@
 /** @jsxImportSource preact */
-// A drawing of the sheet as its picture.
+// A drawing of the sheet as its figures: one picture, or the pieces that fit a page each.
 
+import { type Figure, schematicFigures } from "../draw/index.ts";
 import type { Drawn as DrawnData } from "../model.ts";
+import { each } from "./each.ts";
+
+function figuresOf(drawn: DrawnData): readonly Figure[] {
+  switch (drawn.kind) {
+    case "schematic":
+      return schematicFigures(drawn.props);
+    default:
+      return [];
+  }
+}
 
 export function Drawn({ drawn }: { readonly drawn: DrawnData }) {
-  return <p>{drawn.props.title}</p>;
+  return (
+    <>
+      {each(figuresOf(drawn), ({ drawing, caption }) => (
+        <figure>
+          {drawing}
+          <figcaption>{caption}</figcaption>
+        </figure>
+      ))}
+    </>
+  );
 }

@@ -19,9 +19,12 @@ nav ol { columns: 3; font-size: 8.5pt; }
 a { color: inherit; }
 table { width: 100%; border-collapse: collapse; margin: 0 0 4mm; font-size: 8pt; line-height: 1.25; }
 caption { caption-side: top; text-align: left; font-weight: bold; padding: 1mm 0; break-after: avoid; break-inside: avoid; }
-thead { display: table-header-group; }
+thead { display: table-header-group; break-after: avoid; }
+tbody tr:first-child { break-before: avoid; }
 tr { break-inside: avoid; }
-th, td { border: 0.5pt solid #000; padding: 0.7mm 1.2mm; text-align: left; vertical-align: top; overflow-wrap: anywhere; }
+th, td { border: 0.5pt solid #000; padding: 0.7mm 1.2mm; text-align: left; vertical-align: top; }
+.long { overflow-wrap: anywhere; }
+.figure { white-space: nowrap; }
 thead th { border-bottom-width: 1.2pt; font-weight: bold; }
 tbody th { font-weight: normal; }
 .right { text-align: right; }

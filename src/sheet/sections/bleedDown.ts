@@ -12,7 +12,7 @@ import { cell, said, up, wait } from "../cells.ts";
 import { type Facts, type Fall, factsOf, type Ways, waysDown } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
 import { type Block, type Cell, list, type Section, type Table, text } from "../model.ts";
-import { groupWord } from "../names.ts";
+import { positionWord } from "../names.ts";
 
 interface Start {
   readonly state: string;
@@ -43,7 +43,6 @@ function starts(input: SheetInput, facts: Facts): readonly Start[] {
   const highest = brief.charger?.highest ?? brief.charger?.supply ?? null;
   const at = (from: number | null): Ways => (from === null ? NONE : waysDown(facts, { from, to: clear }));
   const left = shot === null ? null : Math.sqrt((2 * shot.discharge.energy.left) / shot.bank.capacitance);
-  const word = groupWord(layout);
   const full = at(voltage);
   const rows: Start[] = [
     { state: "full", from: voltage, ways: full, note: "" },
@@ -91,7 +90,7 @@ function starts(input: SheetInput, facts: Facts): readonly Start[] {
     : [
         ...rows,
         {
-          state: `balancing resistor of one ${word === "stage" ? "stage" : "unit"} open`,
+          state: `balancing resistor of one ${positionWord(layout)} open`,
           from: voltage,
           ways: { ...full, chains: full.oneOpen },
           note: "that position keeps its charge while the ends read zero: short it by hand",
@@ -115,9 +114,7 @@ function recoveryBlocks({ unit }: SheetInput, { voltage, capacitance }: Facts): 
 
 /** What is said of a bank that never breaks the rule. */
 export const clearWords = ({ clear, rule }: Facts): string =>
-  Number.isFinite(clear)
-    ? `${cell(clear, "voltage")} by ${rule}`
-    : `any voltage by ${rule}, which this bank never passes`;
+  Number.isFinite(clear) ? `${cell(clear, "voltage")} (${rule})` : `any voltage (${rule}: this bank never passes it)`;
 
 export function bleedDownSection(input: SheetInput): Section {
   const facts = factsOf(input);

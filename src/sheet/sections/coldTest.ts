@@ -3,7 +3,7 @@
 import { cell, down, said, up } from "../cells.ts";
 import type { SheetInput } from "../input.ts";
 import { type Cell, type Section, type Table, text } from "../model.ts";
-import { balanceSpots, groupWord } from "../names.ts";
+import { groupWord, positionsOf } from "../names.ts";
 
 type Row = readonly [test: string, predicted: Cell, band: Cell];
 
@@ -37,7 +37,9 @@ function resistors({ layout }: SheetInput): readonly Row[] {
   if (balance === null) return [];
   const { resistance, tolerance } = balance;
   const limits = `${down(resistance * (1 - tolerance), "resistance")} to ${up(resistance * (1 + tolerance), "resistance")}`;
-  return balanceSpots(layout).map(({ name }): Row => [`resistance of ${name}`, cell(resistance, "resistance"), limits]);
+  return positionsOf(layout, "RB").map(
+    ({ name }): Row => [`resistance of ${name}`, cell(resistance, "resistance"), limits],
+  );
 }
 
 export function coldTestSection(input: SheetInput): Section {

@@ -6,7 +6,8 @@ import type { DrawnLoad, Isolation, SchematicProps } from "../draw/schematicProp
 import { factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
 import { type Section, text } from "../model.ts";
-import { barsOf, groupWord } from "../names.ts";
+import { barsOf, groupWord, positionWord } from "../names.ts";
+import { sparesShown } from "./placed.ts";
 
 /** The load's symbol; the coil of a lamp stands beside it. */
 function loadOf({ brief, words }: SheetInput): DrawnLoad {
@@ -77,13 +78,11 @@ export function schematicSection(input: SheetInput): Section {
     `Charger${props.isolation.map((one) => `, isolation ${one.kind} ${said(cell(one.resistance, "resistance"), "to be chosen")}`).join("")}, bank of ${layout.series} in series by ${layout.parallel} in parallel, ${layout.ties}, between ${bars[0]} (negative end) and ${bars[bars.length - 1]} (positive end)`,
     balance === null
       ? "no balancing resistors, a bleed resistor to be chosen"
-      : `a balancing resistor of ${cell(balance.resistance, "resistance")} across each ${groupWord(layout) === "stage" ? "stage" : "unit"}`,
+      : `a balancing resistor of ${cell(balance.resistance, "resistance")} across each ${positionWord(layout)}`,
     `dump resistor ${said(cell(props.dump?.resistance, "resistance"), "to be chosen")} with its relay`,
     `switch ${props.switch.words ?? "to be chosen"}`,
     `load ${props.load.words ?? "to be chosen"}`,
-    props.clamps.positions
-      ? `a clamp diode across each ${groupWord(layout) === "stage" ? "stage" : "unit"}`
-      : "no clamp diodes across positions",
+    props.clamps.positions ? `a clamp diode across each ${positionWord(layout)}` : "no clamp diodes across positions",
     earth === "none"
       ? "no end is earthed"
       : earth === "unknown"
@@ -107,7 +106,8 @@ const PIECE = { columns: 10, rows: 12 } as const;
 export function faceSection(input: SheetInput): Section {
   const { layout, unit, brief, placed, earth } = input;
   const { voltage } = factsOf(input);
-  const spares = placed === null ? Array.from({ length: brief.spares }, () => null) : placed.spares;
+  const spares =
+    placed === null ? Array.from({ length: brief.spares }, () => null) : placed.spares.slice(0, sparesShown(input));
   const word = groupWord(layout);
   return {
     id: "face",

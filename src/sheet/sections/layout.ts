@@ -1,5 +1,6 @@
 // The layout: its figures, its margins check by check, and why it won over the others that would do.
 
+import { minorDigits } from "../../quantity/index.ts";
 import type { LayoutResult } from "../../search/index.ts";
 import { cell, down, said, up, wait } from "../cells.ts";
 import { factsOf } from "../facts.ts";
@@ -12,7 +13,7 @@ const LISTED = 6;
 const cost = ({ cost: of }: LayoutResult): Cell =>
   of === null
     ? null
-    : `${of.total} ${of.currency}${of.unpriced.length > 0 ? ` without ${of.unpriced.join(", ")}` : ""}`;
+    : `${of.total.toFixed(minorDigits(of.currency))} ${of.currency}${of.unpriced.length > 0 ? ` without ${of.unpriced.join(", ")}` : ""}`;
 
 /** Worst unit voltage over its limit; not assessed is said. */
 function worst({ share }: LayoutResult): string {

@@ -1,15 +1,21 @@
 // Which unit stands where: serial, place, what it was measured at, and the share that it bears; lines to fill in where none was measured.
 
+import type { Position } from "../../place/index.ts";
+import { formatQuantity } from "../../quantity/index.ts";
 import { cell, up } from "../cells.ts";
 import type { SheetInput } from "../input.ts";
-import { type Section, type Table, text } from "../model.ts";
+import { type Cell, type Section, type Table, text } from "../model.ts";
 import { groupWord, spotsOf, unitName } from "../names.ts";
 
 /** Enough figures that what is printed gives the same voltages again. */
-const exact = (value: number | null): string | null =>
-  value === null ? null : `${Number((value * 1e6).toPrecision(7))} uF`;
+const exact = (value: number): string => formatQuantity(value, "capacitance", { digits: 7 });
 
-export function placedSection({ layout, placed, unit }: SheetInput): Section {
+/** Spares that are listed and drawn: as many as were asked for, and never more than a page takes beside the bank. */
+const MOST_SPARES = 12;
+export const sparesShown = ({ brief }: Pick<SheetInput, "brief">): number => Math.max(brief.spares, MOST_SPARES);
+
+export function placedSection(input: SheetInput): Section {
+  const { layout, placed, unit } = input;
   const columns = [
     { heading: "unit" },
     { heading: "serial", ...(placed === null ? { written: true as const } : {}) },
@@ -46,16 +52,35 @@ export function placedSection({ layout, placed, unit }: SheetInput): Section {
     id: "places",
     caption: "As measured, in place",
     columns,
-    rows: placed.positions.map((p) => [
-      p.group === null || p.place === null ? p.use : unitName({ group: p.group, place: p.place }),
-      p.serial,
-      exact(p.capacitance),
-      cell(p.leakage, "current"),
-      cell(p.esr, "resistance"),
-      p.lot,
-      p.share === null ? "" : up(p.share, "fraction"),
-      null,
-    ]),
+    rows: placed.positions.filter(({ use }) => use === "fitted").map(rowOf),
   };
-  return { id: "places", title: "Units in their places", ownPage: true, blocks: [table] };
+  const beside = placed.positions.filter(({ use }) => use !== "fitted");
+  const spares: Table = {
+    ...table,
+    id: "spares",
+    caption: "Spares, and units set aside",
+    rows: beside.slice(0, sparesShown(input)).map(rowOf),
+  };
+  const more = beside.length - spares.rows.length;
+  return {
+    id: "places",
+    title: "Units in their places",
+    ownPage: true,
+    blocks: [
+      table,
+      ...(spares.rows.length > 0 ? [spares] : []),
+      ...(more > 0 ? [text(`${more} more measured units are in none of these places; the placing lists them.`)] : []),
+    ],
+  };
 }
+
+const rowOf = (p: Position): readonly Cell[] => [
+  p.group === null || p.place === null ? p.use : unitName({ group: p.group, place: p.place }),
+  p.serial,
+  exact(p.capacitance),
+  cell(p.leakage, "current"),
+  cell(p.esr, "resistance"),
+  p.lot,
+  p.share === null ? "" : up(p.share, "fraction"),
+  null,
+];

@@ -3,23 +3,9 @@
 import { up } from "../cells.ts";
 import type { SheetInput } from "../input.ts";
 import { list, type Section, type Table, text } from "../model.ts";
-import { barsOf } from "../names.ts";
+import { barsOf, groupWord } from "../names.ts";
 import { barConductor, type Wire, wiresOf } from "../wires.ts";
-
-/** The joints of this bank. */
-export function wiringOf({ layout, brief, shot, fuse, earth }: SheetInput): readonly Wire[] {
-  const fitted = fuse !== null && fuse.chosen !== null && fuse.count > 0;
-  const each = fitted && fuse.count === layout.units;
-  return wiresOf({
-    shape: layout,
-    balanceElements: layout.balance?.elements ?? 0,
-    shot,
-    unitFuse: each,
-    stringFuse: fitted && !each,
-    isolating: brief.isolating !== undefined,
-    earth,
-  });
-}
+import { schematicOf } from "./drawings.ts";
 
 /** The bars, each with the joints that it takes. */
 function barTable(input: SheetInput, wires: readonly Wire[]): Table {
@@ -54,9 +40,10 @@ function barTable(input: SheetInput, wires: readonly Wire[]): Table {
 }
 
 export function wiringSection(input: SheetInput): Section {
-  const wires = wiringOf(input);
+  const wires = wiresOf(schematicOf(input), input.shot);
   const { layout, shot } = input;
-  const inside = layout.ties === "strings" ? ", N2.3 the node of string 2 above its unit 3" : "";
+  const bars = barsOf(layout);
+  const inside = layout.ties === "strings" ? ", TP2.3 the point of string 2 above its unit 3" : "";
   const table: Table = {
     kind: "table",
     id: "wiring",
@@ -78,7 +65,7 @@ export function wiringSection(input: SheetInput): Section {
     ownPage: true,
     blocks: [
       text(
-        `B0 is the bar of the negative end, the last bar that of the positive end; C3.7 is unit 7 of ${layout.ties === "strings" ? "string" : "stage"} 3${inside}. Terminals are + and - of a unit, a and b of a part without polarity.`,
+        `TP0 is the bar of the negative end, ${bars[bars.length - 1]} that of the positive end; C3.7 is unit 7 of ${groupWord(layout)} 3${inside}. Terminals are + and - of a unit, a and b of a part without polarity. Names are those of the schematic.`,
       ),
       list([
         shot === null
