@@ -11,7 +11,8 @@ export type {
   VoltageChartProps,
 } from "./chartProps.ts";
 export { type Figure, PAGE } from "./drawing.tsx";
-export type { FaceProps, PieceSize } from "./faceProps.ts";
+export { faceFigures } from "./face.tsx";
+export { FACE_PIECE, type FaceProps, type PieceSize } from "./facePlan.ts";
 export type { Label, LabelsProps } from "./label.ts";
 export { MOST_UNITS, schematicFigures } from "./schematic.tsx";
 export type { DrawnBalance, DrawnLoad, DrawnResistor, Earth, Isolation, SchematicProps } from "./schematicProps.ts";

@@ -18,6 +18,13 @@ export interface Mark extends Stand {
   readonly name: SymbolName;
 }
 
+/** An upright rectangle in its role, by its upper left corner. */
+export interface Box extends Spot {
+  readonly role: string;
+  readonly width: number;
+  readonly height: number;
+}
+
 export interface Said extends Spot {
   readonly text: string;
   readonly anchor?: "start" | "middle" | "end";
@@ -39,6 +46,9 @@ export interface Ink {
   readonly rails?: readonly Line[];
   readonly joints?: readonly Spot[];
   readonly points?: readonly Spot[];
+  /** Where the earthing stick is applied. */
+  readonly sticks?: readonly Spot[];
+  readonly boxes?: readonly Box[];
   readonly marks?: readonly Mark[];
   readonly words?: readonly Said[];
   readonly plates?: readonly Plate[];
@@ -56,6 +66,8 @@ export function together(inks: readonly Ink[]): Required<Ink> {
     rails: of("rails"),
     joints: of("joints"),
     points: of("points"),
+    sticks: of("sticks"),
+    boxes: of("boxes"),
     marks: of("marks"),
     words: of("words"),
     plates: of("plates"),
@@ -63,4 +75,5 @@ export function together(inks: readonly Ink[]): Required<Ink> {
 }
 
 /** How often a role is drawn. */
-export const countOf = ({ marks = [] }: Ink, role: string): number => marks.filter((mark) => mark.role === role).length;
+export const countOf = ({ marks = [], boxes = [] }: Ink, role: string): number =>
+  [...marks, ...boxes].filter((drawn) => drawn.role === role).length;
