@@ -73,14 +73,7 @@ export function Inked({ inks }: { readonly inks: readonly Ink[] }) {
         <circle key={`${x} ${y}`} class="stick" cx={at(x)} cy={at(y)} r="3.2" fill="#fff" />
       ))}
       <Joints spots={sticks} />
-      {marks.length > 0 && (
-        <path
-          d={marks
-            .filter((mark) => !isCounted(mark))
-            .map(pathOf)
-            .join("")}
-        />
-      )}
+      {signs.length > 0 && <path d={signs.map(pathOf).join("")} />}
       <Rings spots={points} />
       {plated.length > 0 && <path d={plated.map(({ ground }) => ground).join("")} fill="#fff" stroke="none" />}
       <AllWords words={[...words, ...plated.map(({ said }) => said)]} />

@@ -59,14 +59,14 @@ export function schematicFigures(props: SchematicProps): readonly Figure[] {
       ),
     },
     ...pieces.map(({ inks, height, words }, index): Figure => {
-      const place = `${index + 1} of ${pieces.length}`;
+      const place = pieces.length === 1 ? "" : `, ${index + 1} of ${pieces.length}`;
       return {
         id: `${id}-bank-${index + 1}`,
-        caption: `Bank unit by unit, ${place}: ${words}`,
+        caption: `Bank unit by unit${place}: ${words}`,
         drawing: (
           <Drawing
             id={`${id}-bank-${index + 1}`}
-            title={`Bank of ${title} unit by unit, piece ${place}`}
+            title={`Bank of ${title} unit by unit${place}`}
             description={`Every unit and balancing resistor of ${words}. The positive end is at the top.`}
             height={height}
           >
