@@ -54,7 +54,7 @@ function plateParts({ x, y, text, room }: Plate): { readonly ground: string; rea
 }
 
 export function Inked({ inks }: { readonly inks: readonly Ink[] }) {
-  const { wires, dashes, rails, joints, points, sticks, boxes, marks, words, plates } = together(inks);
+  const { wires, dashes, rails, joints, points, sticks, boxes, curves, marks, words, plates } = together(inks);
   const signs = marks.filter((mark) => !isCounted(mark));
   const plated = plates.map(plateParts);
   return (
@@ -63,6 +63,11 @@ export function Inked({ inks }: { readonly inks: readonly Ink[] }) {
       <Strokes lines={dashes} dash="2 2" />
       <Strokes lines={rails} width={1.6} />
       <Joints spots={joints} />
+      {curves
+        .filter(({ d }) => d !== "")
+        .map(({ role, d, dash, width }) => (
+          <path key={d} class={role} d={d} stroke-dasharray={dash} stroke-width={width} />
+        ))}
       {marks.filter(isCounted).map(({ role, name, ...stand }) => (
         <path key={`${role} ${stand.x} ${stand.y}`} class={role} d={symbolPath(name, stand)} />
       ))}

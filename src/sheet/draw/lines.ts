@@ -15,11 +15,11 @@ export interface LinesInk {
   readonly bottom: number;
 }
 
-/** The sentences from a height on, each on lines of its own. */
-export function linesInk(sentences: readonly string[], top: number): LinesInk {
+/** The sentences from a height on, each on lines of its own, `indent` to the right of the margin. */
+export function linesInk(sentences: readonly string[], top: number, indent = 0): LinesInk {
   const rows = sentences.flatMap((text) =>
-    fitted(text, { size: SIZES.plain, room: PAGE.width - 2 * MARGIN, lines: MOST_LINES }),
+    fitted(text, { size: SIZES.plain, room: PAGE.width - 2 * MARGIN - indent, lines: MOST_LINES }),
   );
-  const words = rows.map((text, index) => ({ x: MARGIN, y: top + SIZES.plain + index * STEP, text }));
+  const words = rows.map((text, index) => ({ x: MARGIN + indent, y: top + SIZES.plain + index * STEP, text }));
   return { ink: { words }, bottom: top + SIZES.plain + rows.length * STEP };
 }
