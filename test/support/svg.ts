@@ -31,26 +31,27 @@ const PARSER = new XMLParser({ preserveOrder: true, ignoreAttributes: false, tri
 /** Every text element with its own or inherited size. */
 export function textsOf(svg: string): readonly ShownText[] {
   const out: ShownText[] = [];
-  const walk = (nodes: readonly Node[], size: number): void => {
+  const walk = (nodes: readonly Node[], size: number, anchor: string): void => {
     for (const node of nodes) {
       const given = (node[":@"] ?? {}) as Record<string, string>;
       const own = given["@_font-size"] === undefined ? size : Number(given["@_font-size"]);
+      const turned = given["@_text-anchor"] ?? anchor;
       for (const [tag, inner] of Object.entries(node)) {
         if (tag === ":@" || !Array.isArray(inner)) continue;
-        if (tag !== "text") walk(inner as Node[], own);
+        if (tag !== "text") walk(inner as Node[], own, turned);
         else {
           out.push({
             text: (inner as Node[]).map((part) => String(part["#text"] ?? "")).join(""),
             x: Number(given["@_x"]),
             y: Number(given["@_y"]),
             size: own,
-            anchor: given["@_text-anchor"] ?? "start",
+            anchor: turned,
           });
         }
       }
     }
   };
-  walk(PARSER.parse(svg) as Node[], 0);
+  walk(PARSER.parse(svg) as Node[], 0, "start");
   return out;
 }
 

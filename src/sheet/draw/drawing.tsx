@@ -6,7 +6,6 @@
 
 import type { ComponentChildren } from "preact";
 import { visible } from "../../order/index.ts";
-import { fitted } from "./textWidth.ts";
 
 /** Width of every full drawing, and the most height that leaves room for a heading and a caption on Letter; points. */
 export const PAGE = { width: 510, height: 640 } as const;
@@ -52,43 +51,5 @@ export function Drawing({ id, title, description, width = PAGE.width, height, ch
       <desc id={`${id}-desc`}>{visible(description)}</desc>
       {children}
     </svg>
-  );
-}
-
-export interface WordsProps {
-  readonly x: number;
-  /** Base line of the first line. */
-  readonly y: number;
-  readonly text: string;
-  readonly anchor?: "start" | "middle" | "end";
-  readonly size?: number;
-  readonly bold?: boolean;
-  /** Width that the text may take; left out: its own. */
-  readonly room?: number;
-  readonly lines?: number;
-}
-
-/** Text in a drawing. What does not fit its room is broken, then cut where the cut is seen. */
-export function Words({ x, y, text, anchor, size = SIZES.plain, bold, room, lines = 1 }: WordsProps) {
-  const shown = visible(text);
-  const rows = room === undefined ? [shown] : fitted(shown, { size, room, lines });
-  const lined = rows.map((row, index) => ({ row, top: at(y + index * size * LINE_HEIGHT) }));
-  return (
-    <>
-      {lined.map(({ row, top }) => (
-        <text
-          key={top}
-          x={at(x)}
-          y={top}
-          text-anchor={anchor === "start" ? undefined : anchor}
-          font-size={size === SIZES.plain ? undefined : size}
-          font-weight={bold ? "bold" : undefined}
-          fill="#000"
-          stroke="none"
-        >
-          {row}
-        </text>
-      ))}
-    </>
   );
 }

@@ -18,6 +18,13 @@ export interface Mark extends Stand {
   readonly name: SymbolName;
 }
 
+/** An upright rectangle in its role, by its upper left corner. */
+export interface Box extends Spot {
+  readonly role: string;
+  readonly width: number;
+  readonly height: number;
+}
+
 export interface Said extends Spot {
   readonly text: string;
   readonly anchor?: "start" | "middle" | "end";
@@ -33,12 +40,24 @@ export interface Plate extends Spot {
   readonly room: number;
 }
 
+/** A line of a chart, as path text. */
+export interface Curve {
+  readonly role: string;
+  readonly d: string;
+  readonly dash?: string | undefined;
+  readonly width?: number | undefined;
+}
+
 export interface Ink {
   readonly wires?: readonly Line[];
   readonly dashes?: readonly Line[];
   readonly rails?: readonly Line[];
   readonly joints?: readonly Spot[];
   readonly points?: readonly Spot[];
+  /** Where the earthing stick is applied. */
+  readonly sticks?: readonly Spot[];
+  readonly boxes?: readonly Box[];
+  readonly curves?: readonly Curve[];
   readonly marks?: readonly Mark[];
   readonly words?: readonly Said[];
   readonly plates?: readonly Plate[];
@@ -49,18 +68,23 @@ export const down = (x: number, y: number, toY: number): Line => ({ x, y, toX: x
 
 /** Several inks as one, in their order. */
 export function together(inks: readonly Ink[]): Required<Ink> {
-  const of = <Key extends keyof Ink>(key: Key) => inks.flatMap((ink) => ink[key] ?? []) as Required<Ink>[Key][number][];
+  const of = <Part>(pick: (ink: Ink) => readonly Part[] | undefined): readonly Part[] =>
+    inks.flatMap((ink) => pick(ink) ?? []);
   return {
-    wires: of("wires"),
-    dashes: of("dashes"),
-    rails: of("rails"),
-    joints: of("joints"),
-    points: of("points"),
-    marks: of("marks"),
-    words: of("words"),
-    plates: of("plates"),
+    wires: of((ink) => ink.wires),
+    dashes: of((ink) => ink.dashes),
+    rails: of((ink) => ink.rails),
+    joints: of((ink) => ink.joints),
+    points: of((ink) => ink.points),
+    sticks: of((ink) => ink.sticks),
+    boxes: of((ink) => ink.boxes),
+    curves: of((ink) => ink.curves),
+    marks: of((ink) => ink.marks),
+    words: of((ink) => ink.words),
+    plates: of((ink) => ink.plates),
   };
 }
 
 /** How often a role is drawn. */
-export const countOf = ({ marks = [] }: Ink, role: string): number => marks.filter((mark) => mark.role === role).length;
+export const countOf = ({ marks = [], boxes = [], curves = [] }: Ink, role: string): number =>
+  [...marks, ...boxes, ...curves].filter((drawn) => drawn.role === role).length;

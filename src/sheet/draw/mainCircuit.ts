@@ -48,17 +48,11 @@ function chargerInk(props: SchematicProps, { top, bottom }: Rails): readonly Ink
     ];
   });
   const end = top + 6 + STEP * props.isolation.length;
-  const [left, right] = [axis - halfWidth, axis + halfWidth];
   return [
     { wires: [down(axis, top, top + 6), down(axis, end, box), down(axis, box + height, bottom)] },
     ...chain,
     {
-      wires: [
-        across(left, right, box),
-        across(left, right, box + height),
-        down(left, box, box + height),
-        down(right, box, box + height),
-      ],
+      boxes: [{ role: "charger", x: axis - halfWidth, y: box, width: 2 * halfWidth, height }],
       words: [
         name(axis, box + 16, "G1", "middle"),
         name(axis, box + 26, "charger", "middle"),
@@ -77,15 +71,8 @@ function dumpInk(props: SchematicProps, x: number, { top, bottom }: Rails): read
   const link = contact + SPAN / 2;
   return [
     {
-      wires: [
-        down(axis, top, contact),
-        across(x + 2, x + 16, link - 5),
-        across(x + 2, x + 16, link + 5),
-        down(x + 2, link - 5, link + 5),
-        down(x + 16, link - 5, link + 5),
-        down(x + 9, link - 10, link - 5),
-        down(x + 9, link + 5, link + 10),
-      ],
+      wires: [down(axis, top, contact), down(x + 9, link - 10, link - 5), down(x + 9, link + 5, link + 10)],
+      boxes: [{ role: "relay-coil", x: x + 2, y: link - 5, width: 14, height: 10 }],
       dashes: [across(x + 16, axis + 1, link)],
       joints: [top, bottom].map((y) => ({ x: axis, y })),
       marks: [{ role: "dump-relay", name: "break", x: axis, y: contact, way: "down" }],

@@ -3,21 +3,19 @@
 
 import { shapeOf } from "../../bank/index.ts";
 import { bankPieces } from "./bankPieces.ts";
-import { Drawing, type Figure, LINE_HEIGHT, PAGE, SIZES } from "./drawing.tsx";
-import type { Ink } from "./ink.ts";
+import { Drawing, type Figure, PAGE } from "./drawing.tsx";
 import { Inked } from "./inked.tsx";
 import { legendLines } from "./legend.ts";
+import { linesInk } from "./lines.ts";
 import { isWhole, type MainCircuit, mainCircuit } from "./mainCircuit.ts";
 import { potentialOf } from "./potential.ts";
 import type { SchematicProps } from "./schematicProps.ts";
 import { foldWords } from "./slots.ts";
-import { fitted } from "./textWidth.ts";
 import type { NodeWords } from "./tiedBlock.ts";
 import { shownOrBlank } from "./valueWords.ts";
 
 /** Above so many units a bank is drawn folded only. */
 export const MOST_UNITS = 800;
-const MARGIN = 8;
 
 const nodeWordsOf =
   (props: SchematicProps): NodeWords =>
@@ -36,16 +34,6 @@ function foldLines({ columns, rows }: MainCircuit, tied: boolean, pieces: number
   return [`Folded: ${folds.join("; ")}. ${rest}`];
 }
 
-const brokenLines = (lines: readonly string[]): readonly string[] =>
-  lines.flatMap((line) => fitted(line, { size: SIZES.plain, room: PAGE.width - 2 * MARGIN, lines: 4 }));
-
-/** Lines under a drawing, each broken to the width. */
-const linesInk = (lines: readonly string[], y: number): Ink => ({
-  words: brokenLines(lines).map((text, index) => ({ x: MARGIN, y: y + index * SIZES.plain * LINE_HEIGHT, text })),
-});
-
-const heightOf = (lines: readonly string[]): number => brokenLines(lines).length * SIZES.plain * LINE_HEIGHT;
-
 /** The drawings, the whole circuit first. */
 export function schematicFigures(props: SchematicProps): readonly Figure[] {
   const { id, title, series, parallel, ties } = props;
@@ -53,6 +41,7 @@ export function schematicFigures(props: SchematicProps): readonly Figure[] {
   const main = mainCircuit(props, PAGE.width, nodeWords);
   const pieces = isWhole(main) || series * parallel > MOST_UNITS ? [] : bankPieces(props, nodeWords);
   const lines = [...foldLines(main, ties === "cross-tied", pieces.length), ...legendLines(props)];
+  const { ink, bottom } = linesInk(lines, main.height);
   const bank = `${shapeOf(props)} ${ties}`;
   return [
     {
@@ -63,21 +52,21 @@ export function schematicFigures(props: SchematicProps): readonly Figure[] {
           id={id}
           title={`Schematic of ${title}`}
           description={`Circuit from charger to load with a bank of ${bank}. ${lines.join(" ")}`}
-          height={main.height + heightOf(lines) + MARGIN}
+          height={bottom}
         >
-          <Inked inks={[...main.inks, linesInk(lines, main.height + 8)]} />
+          <Inked inks={[...main.inks, ink]} />
         </Drawing>
       ),
     },
     ...pieces.map(({ inks, height, words }, index): Figure => {
-      const place = `${index + 1} of ${pieces.length}`;
+      const place = pieces.length === 1 ? "" : `, ${index + 1} of ${pieces.length}`;
       return {
         id: `${id}-bank-${index + 1}`,
-        caption: `Bank unit by unit, ${place}: ${words}`,
+        caption: `Bank unit by unit${place}: ${words}`,
         drawing: (
           <Drawing
             id={`${id}-bank-${index + 1}`}
-            title={`Bank of ${title} unit by unit, piece ${place}`}
+            title={`Bank of ${title} unit by unit${place}`}
             description={`Every unit and balancing resistor of ${words}. The positive end is at the top.`}
             height={height}
           >

@@ -85,23 +85,36 @@ export interface Stand {
 }
 
 const TURNS = {
-  right: (u: number, v: number) => [u, v],
-  down: (u: number, v: number) => [-v, u],
-  left: (u: number, v: number) => [-u, -v],
-  up: (u: number, v: number) => [v, -u],
-} as const satisfies Record<Stand["way"], (u: number, v: number) => readonly [number, number] | number[]>;
+  right: (u, v) => [u, v],
+  down: (u, v) => [-v, u],
+  left: (u, v) => [-u, -v],
+  up: (u, v) => [v, -u],
+} as const satisfies Record<Stand["way"], (u: number, v: number) => readonly number[]>;
+
+/** Steps as short as path text allows: from point to point, `h` and `v` where they do. */
+function stepText(command: "m" | "l", dx: number, dy: number): string {
+  if (command === "l" && dy === 0) return `h${dx}`;
+  if (command === "l" && dx === 0) return `v${dy}`;
+  return `${command}${dx}${dy < 0 ? "" : " "}${dy}`;
+}
 
 /** Path text of a symbol that starts at (x, y) and goes its way. */
 export function symbolPath(name: SymbolName, { x, y, way }: Stand): string {
-  const place = (u: number, v: number): string => {
-    const [dx = 0, dy = 0] = TURNS[way](u, v);
-    return `${at(x + dx)} ${at(y + dy)}`;
-  };
-  return (SHAPES[name] as Shape)
-    .map((step) => {
-      if (step[0] === "Z") return "Z";
-      if (step[0] === "A") return `A${step[3]} ${step[3]} 0 0 ${step[4]} ${place(step[1], step[2])}`;
-      return `${step[0]}${place(step[1], step[2])}`;
-    })
-    .join("");
+  const turn = TURNS[way];
+  let here: readonly number[] = [0, 0];
+  let open = here;
+  const steps = (SHAPES[name] as Shape).map((step) => {
+    if (step[0] === "Z") {
+      here = open;
+      return "z";
+    }
+    const to = turn(step[1], step[2]);
+    const [dx, dy] = [at(to[0]! - here[0]!), at(to[1]! - here[1]!)];
+    here = to;
+    if (step[0] === "A") return `a${step[3]} ${step[3]} 0 0 ${step[4]} ${dx} ${dy}`;
+    if (step[0] === "M") open = to;
+    if (step[0] === "M" && dx === 0 && dy === 0) return "";
+    return stepText(step[0] === "M" ? "m" : "l", dx, dy);
+  });
+  return `M${at(x)} ${at(y)}${steps.join("")}`;
 }

@@ -1,9 +1,9 @@
 /** @jsxImportSource preact */
 // Tests of the sheet of every drawing.
 import { describe, expect, test } from "vitest";
-import { at, Drawing, PAGE, SIZES, Words } from "../../../src/sheet/draw/drawing.tsx";
+import { at, Drawing, PAGE, SIZES } from "../../../src/sheet/draw/drawing.tsx";
 import { rendered } from "../../../src/sheet/render.ts";
-import { ATTACKS, textsOf, wellFormed } from "../../support/svg.ts";
+import { wellFormed } from "../../support/svg.ts";
 
 describe("Drawing({ id, title, description, width, height })", () => {
   const svg = rendered(<Drawing id="a" title="A <b>" description="What is seen" height={20} />);
@@ -23,27 +23,6 @@ describe("Drawing({ id, title, description, width, height })", () => {
     expect(PAGE.width).toBeLessThanOrEqual(Math.min(points(210 - 30), points(215.9 - 30)));
     expect(PAGE.height).toBeLessThanOrEqual(Math.min(points(297 - 30), points(279.4 - 30)));
     expect(Math.min(...Object.values(SIZES))).toBeGreaterThanOrEqual(7);
-  });
-});
-
-describe("Words({ x, y, text })", () => {
-  test.each(ATTACKS)("%j is shown as text", (attack) => {
-    const svg = rendered(
-      <Drawing id="a" title={attack} description={attack} height={20}>
-        <Words x={1} y={9} text={attack} />
-        <Words x={1} y={9} text={attack} room={30} lines={4} />
-      </Drawing>,
-    );
-    expect(wellFormed(svg)).toBe(true);
-    expect(new Set([...svg.matchAll(/<([a-z!?]+)/gi)].map(([, tag]) => tag))).toEqual(
-      new Set(["svg", "title", "desc", "text"]),
-    );
-  });
-
-  test("breaks into lines that follow each other, and marks a cut", () => {
-    const texts = textsOf(rendered(<Words x={1} y={9} text="one two three four" room={36} lines={2} />));
-    expect(texts.map(({ text }) => text)).toEqual(["one two", "three…"]);
-    expect(texts[1]!.y).toBeGreaterThan(texts[0]!.y);
   });
 });
 

@@ -31,7 +31,7 @@ test("Inked({ inks }): wires of one kind are one path; symbols are one each, in 
   expect(svg).toContain('<path d="M0 1H5M2 0V9M0 0L3 4"');
   expect(svg).toContain('d="M1 2h0M3 4h0"');
   expect(countRole(svg, "unit")).toBe(2);
-  expect(countRole(svg, "point")).toBe(1);
+  expect(countRole(svg, "points")).toBe(1);
   expect(wellFormed(svg)).toBe(true);
 });
 

@@ -79,7 +79,7 @@ describe("schematicFigures(props)", () => {
     })) {
       expect(wellFormed(svg)).toBe(true);
       expect(new Set([...svg.matchAll(/<([a-z!?]+)/gi)].map(([, tag]) => tag))).toEqual(
-        new Set(["svg", "title", "desc", "path", "circle", "text"]),
+        new Set(["svg", "title", "desc", "path", "g", "text"]),
       );
     }
   });
