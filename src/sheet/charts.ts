@@ -1,11 +1,11 @@
 // The charts of the sheet as plain data: stage voltages against limits, bleed-down, the shot, and what more or fewer units cost.
 
-import { purchase } from "../catalog/index.ts";
+import { isPriced } from "../catalog/index.ts";
 import { voltageAfter } from "../hazard/index.ts";
 import { traceOf } from "../pulse/index.ts";
-import { formatMoney, formatQuantity } from "../quantity/index.ts";
+import { formatMoney } from "../quantity/index.ts";
 import { cell, said, up } from "./cells.ts";
-import type { BleedCurve, CostStep } from "./draw/chartProps.ts";
+import { type BleedCurve, costSteps } from "./draw/index.ts";
 import { factsOf, waysDown } from "./facts.ts";
 import type { SheetInput } from "./input.ts";
 import type { Drawing } from "./model.ts";
@@ -123,43 +123,21 @@ export function shotChart({ shot }: SheetInput): Drawing | null {
   };
 }
 
-/** Units on either side of the need that are priced: what a bigger bank or more spares would cost. */
-const AROUND = 0.5;
-const MOST_STEPS = 40;
-
+/** What more or fewer units would cost, by the unit's own terms. */
 export function costChart({ layout, unit, brief }: SheetInput): Drawing | null {
-  const currency = unit.currency;
-  if (currency === undefined || (unit.price === undefined && unit.priceBreaks === undefined)) return null;
+  const { currency } = unit;
+  if (currency === undefined || !isPriced(unit)) return null;
   const needed = layout.units + brief.spares;
-  const from = Math.max(1, Math.floor(needed * (1 - AROUND)));
-  const to = Math.ceil(needed * (1 + AROUND)) + 1;
-  const steps: CostStep[] = [];
-  for (let pieces = from; pieces <= to; pieces++) {
-    const found = purchase(unit, pieces);
-    const bought = found?.bought ?? 0;
-    const cost = found?.cost ?? null;
-    const last = steps.at(-1);
-    if (last !== undefined && last.bought === bought && last.cost === cost)
-      steps[steps.length - 1] = { ...last, to: pieces };
-    else steps.push({ from: pieces, to: pieces, bought, cost });
-  }
-  const shown = thinned(steps, needed);
-  const here = shown.find((step) => needed >= step.from && needed <= step.to);
-  const price = here?.cost == null ? "no price" : formatMoney(here.cost, currency);
+  const steps = costSteps(unit, needed);
+  const here = steps.find((step) => needed >= step.from && needed <= step.to);
+  if (here === undefined) return null;
+  const price = here.cost === null ? "no price" : formatMoney(here.cost, currency);
   return {
     kind: "drawing",
     drawn: {
       kind: "cost",
-      props: { id: "chart-cost", title: "Cost of the units by how many are needed", steps: shown, needed, currency },
+      props: { id: "chart-cost", title: "Cost of the units by how many are needed", steps, needed, currency },
     },
-    words: `${needed} units are needed, ${here?.bought ?? "unknown"} bought, for ${price}. ${formatQuantity(from, "count")} to ${formatQuantity(to, "count")} are drawn.`,
+    words: `${needed} units are needed, spares in them; ${here.bought} are bought, for ${price}.`,
   };
-}
-
-/** Where every piece has a price of its own the steps are too fine to draw: the ones around the need are kept. */
-function thinned(steps: readonly CostStep[], needed: number): readonly CostStep[] {
-  if (steps.length <= MOST_STEPS) return steps;
-  const at = steps.findIndex((step) => needed >= step.from && needed <= step.to);
-  const begin = Math.max(0, Math.min(at - MOST_STEPS / 2, steps.length - MOST_STEPS));
-  return steps.slice(begin, begin + MOST_STEPS);
 }

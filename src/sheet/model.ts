@@ -1,8 +1,13 @@
 // The build sheet as plain data: sections of paragraphs, lists, tables and drawings, from which every format is written.
 
-import type { BleedChartProps, CostChartProps, ShotChartProps, VoltageChartProps } from "./draw/chartProps.ts";
-import type { FaceProps } from "./draw/faceProps.ts";
-import type { SchematicProps } from "./draw/schematicProps.ts";
+import type {
+  BleedChartProps,
+  CostChartProps,
+  FaceProps,
+  SchematicProps,
+  ShotChartProps,
+  VoltageChartProps,
+} from "./draw/index.ts";
 
 /** Text, or null: a blank to fill in by hand. */
 export type Cell = string | null;

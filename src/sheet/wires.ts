@@ -68,15 +68,9 @@ function unitWires(props: SchematicProps, conductor: Cell): readonly Wire[] {
   });
 }
 
-/** k equal elements in series in each position, RB3:1, RB3:2 and so on, joined end to end. */
-function balanceWires(props: SchematicProps): readonly Wire[] {
-  const elements = props.balance?.elements ?? 0;
-  if (elements === 0) return [];
-  return positionsOf(props, "RB").flatMap(({ name, low, high }) => {
-    const parts = elements === 1 ? [name] : Array.from({ length: elements }, (_, k) => `${name}:${k + 1}`);
-    return chain(low, parts, high);
-  });
-}
+/** A position as a whole: its elements are joined end to end on their mount beforehand. */
+const balanceWires = (props: SchematicProps): readonly Wire[] =>
+  props.balance === null ? [] : positionsOf(props, "RB").flatMap(({ name, low, high }) => chain(low, [name], high));
 
 /** Cathodes to the positive side. */
 function clampWires(props: SchematicProps): readonly Wire[] {

@@ -90,34 +90,20 @@ describe("shotChart(input)", () => {
 });
 
 describe("costChart(input)", () => {
-  test("every step is what the purchase of that many costs, without gaps, the need among them", () => {
-    const { steps, needed } = props(costChart(sheetInput()), "cost") as unknown as {
-      readonly steps: readonly {
-        readonly from: number;
-        readonly to: number;
-        readonly bought: number;
-        readonly cost: number | null;
-      }[];
+  test("the ladder of the unit's own terms, the need with its spares among its steps", () => {
+    const chart = costChart(sheetInput({ brief: { spares: 2 } }));
+    const { steps, needed } = props(chart, "cost") as unknown as {
+      readonly steps: readonly { readonly from: number; readonly to: number; readonly cost: number | null }[];
       readonly needed: number;
     };
-    expect(needed).toBe(16);
-    for (const [i, step] of steps.entries()) {
-      if (i > 0) expect(step.from).toBe(steps[i - 1]!.to + 1);
-      for (const pieces of [step.from, step.to])
-        expect(purchase(RATED, pieces)).toMatchObject({ bought: step.bought, cost: step.cost });
-    }
-    expect(steps.some(({ from, to }) => needed >= from && needed <= to)).toBe(true);
+    expect(needed).toBe(18);
+    const found = purchase(RATED, 18);
+    expect(steps.find(({ from, to }) => from <= 18 && to >= 18)?.cost).toBe(found?.cost);
+    expect(chart?.words).toMatch(/^18 units are needed, spares in them; 20 are bought, for 50\.00 EUR\.$/);
   });
 
-  test("no price, no chart; a price for every piece is cut to the steps around the need", () => {
+  test("no price, or not enough to be had: no chart", () => {
     expect(costChart(sheetInput({ unit: BARE }))).toBeNull();
-    const { pack: _, ...single } = RATED;
-    const many = costChart(sheetInput({ unit: single, shape: { parallel: 40 } }));
-    const { steps, needed } = props(many, "cost") as unknown as {
-      readonly steps: readonly { readonly from: number; readonly to: number }[];
-      readonly needed: number;
-    };
-    expect(steps).toHaveLength(40);
-    expect(steps.some(({ from, to }) => needed >= from && needed <= to)).toBe(true);
+    expect(costChart(sheetInput({ unit: { ...RATED, onHand: 0, available: 10 } }))).toBeNull();
   });
 });

@@ -13,12 +13,10 @@ const LONGEST_WORD = 16;
 const LONGEST_FIGURE = 16;
 
 function looksOf(value: string, { side }: Column): string | undefined {
-  const names = [
-    ...(side === undefined ? [] : [side]),
-    ...(value.split(/[\s-]/).some((word) => word.length > LONGEST_WORD) ? ["long"] : []),
-    ...(side === "right" && value.length <= LONGEST_FIGURE ? ["figure"] : []),
-  ];
-  return names.length > 0 ? names.join(" ") : undefined;
+  if (value.split(/[\s-]/).some((word) => word.length > LONGEST_WORD))
+    return side === undefined ? "long" : "long right";
+  if (side === undefined) return undefined;
+  return value.length <= LONGEST_FIGURE ? "figure" : "right";
 }
 
 /** The first cell names the row, where it says anything. */
@@ -31,7 +29,7 @@ function TableCell({
   readonly column: Column;
   readonly first: boolean;
 }) {
-  if (value === null) return <td class="blank" />;
+  if (value === null) return <td />;
   const looks = looksOf(value, column);
   if (first && value !== "")
     return (

@@ -23,7 +23,7 @@ function SectionView({ section }: { readonly section: Section }) {
 const Fact = ({ name, value }: { readonly name: string; readonly value: Cell }) => (
   <tr>
     <th scope="row">{name}</th>
-    {value === null ? <td class="blank" /> : <td>{value}</td>}
+    {value === null ? <td /> : <td>{value}</td>}
   </tr>
 );
 

@@ -27,9 +27,9 @@ th, td { border: 0.5pt solid #000; padding: 0.7mm 1.2mm; text-align: left; verti
 .figure { white-space: nowrap; }
 thead th { border-bottom-width: 1.2pt; font-weight: bold; }
 tbody th { font-weight: normal; }
-.right { text-align: right; }
+.right, .figure { text-align: right; }
 .written { min-width: 13mm; }
-td.blank { border-style: dotted; height: 4.5mm; }
+td:empty { border-style: dotted; height: 4.5mm; }
 figure { margin: 0 0 4mm; break-inside: avoid; }
 figure svg { display: block; width: 100%; height: auto; }
 figcaption { font-size: 8pt; }

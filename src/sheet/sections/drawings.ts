@@ -2,7 +2,7 @@
 
 import { clampOf } from "../../search/index.ts";
 import { cell, said } from "../cells.ts";
-import type { DrawnLoad, Isolation, SchematicProps } from "../draw/schematicProps.ts";
+import { type DrawnLoad, FACE_PIECE, type Isolation, type SchematicProps } from "../draw/index.ts";
 import { factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
 import { type Section, text } from "../model.ts";
@@ -42,7 +42,7 @@ export function schematicOf(input: SheetInput): SchematicProps {
   const { series, parallel, ties, balance } = layout;
   const { voltage, dump } = factsOf(input);
   return {
-    id: "schematic",
+    id: "drawing-schematic",
     title: brief.title ?? layout.id,
     series,
     parallel,
@@ -100,9 +100,6 @@ export function schematicSection(input: SheetInput): Section {
   };
 }
 
-/** Cells of a bank face that stay legible on either paper. */
-const PIECE = { columns: 10, rows: 12 } as const;
-
 export function faceSection(input: SheetInput): Section {
   const { layout, unit, brief, placed, earth } = input;
   const { voltage } = factsOf(input);
@@ -122,7 +119,7 @@ export function faceSection(input: SheetInput): Section {
         drawn: {
           kind: "face",
           props: {
-            id: "face",
+            id: "drawing-face",
             title: "Bank face",
             series: layout.series,
             parallel: layout.parallel,
@@ -132,7 +129,7 @@ export function faceSection(input: SheetInput): Section {
             polarised: unit.polarised ?? null,
             chargeVoltage: voltage,
             earth,
-            piece: PIECE,
+            piece: FACE_PIECE,
           },
         },
         words: `${layout.units} units in ${layout.ties === "cross-tied" ? `${layout.series} stages of ${layout.parallel}` : `${layout.parallel} strings of ${layout.series}`}, numbered C1.1 to C${word === "stage" ? layout.series : layout.parallel}.${word === "stage" ? layout.parallel : layout.series}; the serial of each stands in the list of units in their places.`,

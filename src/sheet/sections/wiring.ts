@@ -43,6 +43,7 @@ export function wiringSection(input: SheetInput): Section {
   const wires = wiresOf(schematicOf(input), input.shot);
   const { layout, shot } = input;
   const bars = barsOf(layout);
+  const elements = layout.balance?.elements ?? 0;
   const inside = layout.ties === "strings" ? ", TP2.3 the point of string 2 above its unit 3" : "";
   const table: Table = {
     kind: "table",
@@ -71,6 +72,11 @@ export function wiringSection(input: SheetInput): Section {
         shot === null
           ? "Conductor of bars and unit leads: blank, because no action integral is known without a load in the brief. It blocks the choice of section."
           : "Conductor: the least copper that one normal shot heats from 20 degC to 90 degC. A fault may carry more; repeated shots need more. Blank: chosen by strength, insulated for the full voltage.",
+        ...(elements > 1
+          ? [
+              `Each RB is made beforehand of ${elements} equal elements, joined end to end on its mount: ${elements - 1} joints in each.`,
+            ]
+          : []),
         "A bar's length is for units side by side in one row; other lengths and the lugs are blank until the bank is laid out. Torque: the unit maker's figure for its terminal; without it no joint is signed off.",
       ]),
       barTable(input, wires),

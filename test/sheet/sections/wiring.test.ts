@@ -163,16 +163,17 @@ describe("wiringSection(input), the printed list read back as a graph", () => {
       const value = printedRows(html, "resistors")
         .find(([name]) => name?.startsWith("balancing"))?.[2]
         ?.split(" +-")[0] as string;
-      const parts = partsOf(html, /^RB/, () => 1 / quantity(value, "resistance"));
-      expect(parts).toHaveLength(balance.positions * balance.elements);
+      const elements = Number(/(\d+) in series in each/.exec(html)?.[1]);
+      const parts = partsOf(html, /^RB/, () => 1 / (elements * quantity(value, "resistance")));
+      expect(parts).toHaveLength(balance.positions);
       const units = partsOf(html, /^C\d/, () => 1);
       const { through, across } = solved(parts, endsOf(units, input));
       const chains = balance.positions / shape.series;
       expect(1 / through / ((shape.series * balance.resistance) / chains)).toBeCloseTo(1, 3);
-      for (const part of parts) expect(across(part) * shape.series * balance.elements).toBeCloseTo(1, 9);
+      for (const part of parts) expect(across(part) * shape.series).toBeCloseTo(1, 9);
       // The resistors stand across the same places as the units whose voltage they even out.
       const pairs = new Set(units.map(({ a, b }) => `${a} ${b}`));
-      if (balance.elements === 1) for (const { a, b } of parts) expect(pairs.has(`${a} ${b}`)).toBe(true);
+      for (const { a, b } of parts) expect(pairs.has(`${a} ${b}`)).toBe(true);
     },
   );
 });
