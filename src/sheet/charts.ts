@@ -21,7 +21,7 @@ export function voltageChart(input: SheetInput): Drawing {
   const bars = [
     { words: "charging", nominal: share.even, worst: share.charging },
     { words: "holding", nominal: share.even, worst: share.holding },
-    ...(measured === null ? [] : [{ words: "charging, as measured and placed", nominal: measured, worst: null }]),
+    ...(measured === null ? [] : [{ words: "charging, as measured and placed", nominal: share.even, worst: measured }]),
     ...(short === null
       ? []
       : [{ words: "one unit shorted", nominal: short.worstVoltage, worst: short.worstVoltageSpread }]),

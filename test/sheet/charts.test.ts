@@ -31,7 +31,7 @@ describe("voltageChart(input)", () => {
     const placed = placedIn(bare);
     const worst = Math.max(...placed.positions.map((p) => p.share ?? 0)) * 2000;
     expect(props(voltageChart({ ...bare, placed }), "voltages")).toMatchObject({
-      bars: [{}, {}, { words: "charging, as measured and placed", nominal: worst, worst: null }, {}],
+      bars: [{}, {}, { words: "charging, as measured and placed", nominal: 250, worst }, {}],
     });
   });
 });

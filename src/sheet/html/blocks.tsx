@@ -1,7 +1,7 @@
 /** @jsxImportSource preact */
-// The blocks of a section as elements: paragraphs, lists, tables with blanks to write in, drawings with their words.
+// The blocks of a section as elements: paragraphs, lists, tables with blanks to write in, drawings.
 
-import type { Block, Cell, Column, Drawing, Table } from "../model.ts";
+import type { Block, Cell, Column, Table } from "../model.ts";
 import { Drawn } from "./drawn.tsx";
 import { each } from "./each.ts";
 
@@ -30,8 +30,9 @@ function TableCell({
   readonly first: boolean;
 }) {
   if (value === null) return <td />;
+  if (value === "") return <td class="none" />;
   const looks = looksOf(value, column);
-  if (first && value !== "")
+  if (first)
     return (
       <th scope="row" class={looks}>
         {value}
@@ -67,15 +68,6 @@ function TableBlock({ table }: { readonly table: Table }) {
   );
 }
 
-function DrawingBlock({ drawing }: { readonly drawing: Drawing }) {
-  return (
-    <div class="drawing">
-      <Drawn drawn={drawing.drawn} />
-      <p class="words">{drawing.words}</p>
-    </div>
-  );
-}
-
 export function BlockView({ block }: { readonly block: Block }) {
   switch (block.kind) {
     case "text":
@@ -91,6 +83,6 @@ export function BlockView({ block }: { readonly block: Block }) {
     case "table":
       return <TableBlock table={block} />;
     case "drawing":
-      return <DrawingBlock drawing={block} />;
+      return <Drawn drawn={block.drawn} />;
   }
 }

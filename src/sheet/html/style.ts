@@ -29,7 +29,7 @@ thead th { border-bottom-width: 1.2pt; font-weight: bold; }
 tbody th { font-weight: normal; }
 .right, .figure { text-align: right; }
 .written { min-width: 13mm; }
-td:empty { border-style: dotted; height: 4.5mm; }
+td:empty:not(.none) { border-style: dotted; height: 4.5mm; }
 figure { margin: 0 0 4mm; break-inside: avoid; }
 figure svg { display: block; width: 100%; height: auto; }
 figcaption { font-size: 8pt; }
