@@ -10,6 +10,7 @@ import { Inked } from "./inked.tsx";
 import { linesInk } from "./lines.ts";
 import { linePath } from "./paths.ts";
 import { linearScale, type Scale } from "./scales.ts";
+import { counted } from "./valueWords.ts";
 
 export interface CostChartProps {
   /** Starts every id inside the drawing: letters, digits, hyphens. */
@@ -54,23 +55,24 @@ export function neededWords({
   return `${needed} needed: ${step.bought} bought, ${formatMoney(step.cost, currency)}`;
 }
 
-/** The chart as one figure; none when nothing has a price. */
+/** The chart as one figure; none when nothing has a price or all is on hand. */
 export function costFigures(props: CostChartProps): readonly Figure[] {
   const { id, title, steps, needed, currency } = props;
   const priced = steps.filter(isPriced);
-  if (priced.length === 0) return [];
+  const dearest = Math.max(...priced.map(({ cost }) => cost));
+  if (!(dearest > 0)) return [];
   const last = Math.max(needed, ...steps.map(({ to }) => to)) + 0.5;
   const pieces = linearScale({ low: 0, high: last, from: FRAME.left, to: FRAME.right });
   const money = linearScale({
     low: 0,
-    high: Math.max(...priced.map(({ cost }) => cost)),
+    high: dearest,
     from: FRAME.bottom,
     to: FRAME.top,
   });
   const words = neededWords(props);
   const own = priced.find(({ from, to }) => from <= needed && needed <= to);
   const spot = { x: pieces.place(needed), y: own === undefined ? FRAME.bottom : money.place(own.cost) };
-  const left = steps.length > priced.length ? " Quantities without a price are left out." : "";
+  const left = steps.length > priced.length ? " Without a price: left out." : "";
   const { ink, bottom } = linesInk(
     [`${words}. What is on hand is used first and costs nothing.${left}`],
     FRAME.bottom + 26,
@@ -83,7 +85,7 @@ export function costFigures(props: CostChartProps): readonly Figure[] {
         <Drawing
           id={id}
           title={`Cost against quantity needed: ${title}`}
-          description={`${words}. ${priced.length} steps from ${formatMoney(priced[0]!.cost, currency)} to ${formatMoney(priced.at(-1)!.cost, currency)}.`}
+          description={`${words}. ${counted(priced.length, "step")} from ${formatMoney(priced[0]!.cost, currency)} to ${formatMoney(priced.at(-1)!.cost, currency)}.`}
           height={bottom}
         >
           <Inked
@@ -98,7 +100,7 @@ export function costFigures(props: CostChartProps): readonly Figure[] {
                 },
                 vertical: {
                   scale: money,
-                  ticks: money.ticks(5),
+                  ticks: money.ticks(5).filter((tick) => Number.isInteger(tick)),
                   words: (value) => formatMoney(value, currency),
                   title: "Cost of the cheapest purchase",
                 },

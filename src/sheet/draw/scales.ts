@@ -49,7 +49,8 @@ export interface TimeScale extends Scale {
 }
 
 const TIME_UNITS = [
-  { below: 600, unit: null, seconds: 1 },
+  { below: 1, unit: null, seconds: 1 },
+  { below: 600, unit: "s", seconds: 1 },
   { below: 7200, unit: "min", seconds: 60 },
   { below: 172800, unit: "h", seconds: 3600 },
   { below: Number.POSITIVE_INFINITY, unit: "d", seconds: 86400 },

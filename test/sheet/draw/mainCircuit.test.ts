@@ -28,12 +28,6 @@ describe("mainCircuit(props, width, nodeWords)", () => {
       expect(countOf(bare, role), role).toBe(0);
   });
 
-  test("many bleeders are drawn as the first and one for the rest", () => {
-    const { ink } = circuit({ bleeds: [resistor, resistor, resistor, resistor] });
-    expect(countOf(ink, "bleed")).toBe(2);
-    expect(ink.words.map(({ text }) => text)).toContain("R4 to R6");
-  });
-
   test("the fullest circuit fits the page's width, whatever the ties", () => {
     for (const ties of ["cross-tied", "strings"] as const) {
       const { main } = circuit({
