@@ -97,6 +97,13 @@ One HTML file that needs nothing else: no script, nothing fetched; print it from
 blank to fill in, with what it blocks. Rules for --rule, each told in the hazard file whichever governs:
 ${governing()}
 ${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
+  labels: `
+Examples:
+  $ joulewright labels brief.json --layout chosen.json --catalog mine.csv --measured lot.csv --output labels.html
+  $ joulewright labels brief.json --layout chosen.json --catalog mine.csv --paper letter --output labels.html
+One label for every unit, stage or string, and spare, with serial, position, polarity and rating; without --measured the
+serials are lines to fill in. Print at full size and cut along the frames.
+${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
   commission: `
 Examples:
   $ joulewright commission bank.json --readings readings.csv --unit-limit "324 V"

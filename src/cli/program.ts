@@ -48,12 +48,8 @@ function withPaper(command: Command): Command {
     .option("--measured <file>", "measured units, CSV: serials, places and bands come from them")
     .option("--positions <file>", "with --measured: take this list of positions as built")
     .option("--uncertainty <fraction>", 'of one measured capacitance against another, "0.3 %"')
-    .option("--fuses <file>", "fuse catalogue, CSV: the fuse that does is drawn and wired")
-    .option("--rule <id>", "the rule that governs bleed times; else the brief's touch-safe voltage")
     .option("--earth <end>", "negative, positive, none or unknown: the end at the earth point")
     .option("--paper <paper>", "A4 or Letter", "A4")
-    .option("--date <text>", "printed as given; no clock is read")
-    .option("--revision <text>", "printed as given")
     .option("--output <file>", "write to a file, whole or not at all")
     .option("--force", "replace the file if it exists");
 }
@@ -156,11 +152,23 @@ function build(ports: Ports, done: Done): Command {
     });
   withPaper(withLayout(program.command("sheet")))
     .description("Write the build sheet of one layout: drawings, wiring, tests, limits, hazard file.")
+    .option("--fuses <file>", "fuse catalogue, CSV: the fuse that does is drawn and wired")
+    .option("--rule <id>", "the rule that governs bleed times; else the brief's touch-safe voltage")
+    .option("--date <text>", "printed as given; no clock is read")
+    .option("--revision <text>", "printed as given")
     .option("--format <format>", "html, md or json; else by the ending of --output, else html")
     .addHelpText("after", HELP.sheet)
     .action(async (brief: string | undefined, flags: SheetFlags) => {
       const { sheetCommand } = await import("./commands/sheet.ts");
       done(sheetCommand(brief, flags, ports));
+    });
+  withPaper(withLayout(program.command("labels")))
+    .description("Write labels to print and cut: units, stages or strings, spares.")
+    .option("--format <format>", "html or json; else by the ending of --output, else html")
+    .addHelpText("after", HELP.labels)
+    .action(async (brief: string | undefined, flags: SheetFlags) => {
+      const { labelsCommand } = await import("./commands/labels.ts");
+      done(labelsCommand(brief, flags, ports));
     });
   program
     .command("commission")

@@ -36,8 +36,8 @@ const findingLine = (finding: Finding): FindingLine => ({
   note: finding.note,
 });
 
-/** Reads and reckons; every fault of every input is told at once where they can be told apart. */
-export function sheetInput(brief: string | undefined, flags: SheetFlags, ports: Ports): Read<ReadSheet> {
+/** `beside`: also what the same brief and catalogues give beside this layout. Reads and reckons; every fault of every input is told at once where they can be told apart. */
+export function sheetInput(brief: string | undefined, flags: SheetFlags, ports: Ports, beside = true): Read<ReadSheet> {
   const once: Ports = { ...ports, files: readOnce(ports.files) };
   const choices = readSheetFlags(flags);
   const { measured, ...rest } = flags;
@@ -53,7 +53,7 @@ export function sheetInput(brief: string | undefined, flags: SheetFlags, ports: 
   const found = fuse?.ok ? fuse.value : null;
   const units = placed?.ok ? placed.value : null;
   const { paper: _, ...chosen } = choices.value;
-  const { input, findings } = joined(bank, found?.choice ?? null);
+  const { input, findings } = joined(bank, found?.choice ?? null, beside);
   return accepted({
     choices: choices.value,
     lost: [...faultLines(bank.stock), ...(found?.lost ?? []), ...(units?.lost ?? [])],
@@ -79,6 +79,7 @@ type Joined = Omit<SheetInput, "placed" | "rule" | "earth" | "date" | "revision"
 function joined(
   bank: Checked,
   fuse: FuseChoice | null,
+  beside: boolean,
 ): { readonly input: Joined; readonly findings: readonly Finding[] } {
   const { result: layout, unit, settings, stock, currency, notes } = bank;
   const { brief, given } = settings;
@@ -89,7 +90,9 @@ function joined(
       : { meltingAction: row.melting ?? null, clearingAction: row.clearing ?? null, dcVoltage: row.voltage ?? null };
   const shot = brief.load === undefined ? null : shotOf({ layout, unit, brief, fuse: rated });
   const report = shot?.ok ? shot.value : null;
-  const others = plan({ brief, parts: stock.parts, families: stock.families, limit: BESIDE, quick: true });
+  const others = beside
+    ? plan({ brief, parts: stock.parts, families: stock.families, limit: BESIDE, quick: true })
+    : null;
   const findings = [...layout.findings, ...(report?.findings ?? [])];
   return {
     findings,
@@ -103,7 +106,7 @@ function joined(
       shot: report,
       shotOpen: shot === null ? "no load is in the brief" : shot.ok ? null : shot.refusals.map(refusalWords).join("; "),
       faults: report?.faults ?? faultsOf({ result: layout, unit, brief }),
-      alternatives: others.ok
+      alternatives: others?.ok
         ? {
             layouts: others.value.layouts,
             count: others.value.searched.layouts,
@@ -111,7 +114,8 @@ function joined(
             front: others.value.front,
           }
         : null,
-      alternativesOpen: others.ok ? null : others.refusals.map(refusalWords).join("; "),
+      alternativesOpen:
+        others === null ? "they were not asked for" : others.ok ? null : others.refusals.map(refusalWords).join("; "),
       words: {
         asked: askedLines(brief, given),
         findings: findings.map(findingLine),

@@ -2,6 +2,7 @@
 
 import { bleedChart, costChart, voltageChart } from "./charts.ts";
 import { factsOf } from "./facts.ts";
+import { footerOf, titleOf } from "./heading.ts";
 import type { SheetInput } from "./input.ts";
 import type { Section, Sheet } from "./model.ts";
 import { askedSection } from "./sections/asked.ts";
@@ -23,25 +24,21 @@ import { shotSection } from "./sections/shot.ts";
 import { unitSection } from "./sections/unit.ts";
 import { wiringSection } from "./sections/wiring.ts";
 
-/** Cautions that stand on every page, by their ids; the others stand at the head. */
-const EVERY_PAGE = ["kills-when-off", "measure-then-short", "not-approval", "local-codes"];
-
 const withDrawing = (section: Section, drawing: Section["blocks"][number] | null): Section =>
   drawing === null ? section : { ...section, blocks: [...section.blocks, drawing] };
 
 /** The sheet. Same input, same sheet; nothing is read, nothing is guessed. */
 export function sheetOf(input: SheetInput): Sheet {
-  const { layout, brief, words, date, revision, program } = input;
-  const every = EVERY_PAGE.flatMap((id) => words.cautions.filter((caution) => caution.id === id));
+  const { layout, words, date, revision, program } = input;
   return {
-    title: brief.title ?? "Capacitor bank",
+    title: titleOf(input),
     layout: layout.id,
     rule: factsOf(input).rule,
     date,
     revision,
     program,
     cautions: words.cautions.map(({ text }) => text),
-    footer: every.map(({ text }) => text),
+    footer: footerOf(input),
     sections: [
       figuresSection(input),
       openSection(input),

@@ -5,7 +5,8 @@ import type { Cell, Section, Sheet } from "../model.ts";
 import { rendered } from "../render.ts";
 import { BlockView } from "./blocks.tsx";
 import { each } from "./each.ts";
-import { type Paper, styleOf } from "./style.ts";
+import { Foot, PageHead } from "./frame.tsx";
+import type { Paper } from "./style.ts";
 
 function SectionView({ section }: { readonly section: Section }) {
   const { id, title, ownPage, blocks } = section;
@@ -64,12 +65,7 @@ function Head({ sheet }: { readonly sheet: Sheet }) {
 function SheetPage({ sheet, paper }: { readonly sheet: Sheet; readonly paper: Paper }) {
   return (
     <html lang="en">
-      <head>
-        <meta charSet="utf-8" />
-        <meta name="viewport" content="width=device-width, initial-scale=1" />
-        <title>{`Build sheet: ${sheet.layout}`}</title>
-        <style>{styleOf(paper)}</style>
-      </head>
+      <PageHead title={`Build sheet: ${sheet.layout}`} paper={paper} />
       <body>
         <div class="pages">
           <main>
@@ -78,11 +74,7 @@ function SheetPage({ sheet, paper }: { readonly sheet: Sheet; readonly paper: Pa
               <SectionView section={section} />
             ))}
           </main>
-          <footer class="foot">
-            <p>
-              {sheet.layout}. {sheet.footer.join(" ")}
-            </p>
-          </footer>
+          <Foot layout={sheet.layout} words={sheet.footer} />
         </div>
       </body>
     </html>

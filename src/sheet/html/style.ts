@@ -1,11 +1,13 @@
 // How the sheet looks on paper and screen: black on white, one column, rows and headings kept whole, cautions on every page.
 
-export const PAPERS = ["A4", "Letter"] as const;
-export type Paper = (typeof PAPERS)[number];
+import { LABEL_PAPERS, type LabelPaper } from "../draw/index.ts";
+
+export const PAPERS = LABEL_PAPERS;
+export type Paper = LabelPaper;
 
 /** Constant text of our own. It has no quote, ampersand or less-than, which escaping would change. */
-export const styleOf = (paper: Paper): string => `
-@page { size: ${paper} portrait; margin: 14mm 15mm 10mm; }
+export const styleOf = (paper: Paper, narrow = false): string => `
+@page { size: ${paper} portrait; margin: ${narrow ? "9mm 15mm 7mm" : "14mm 15mm 10mm"}; }
 :root { color-scheme: light; }
 html { background: #fff; color: #000; font: 9.5pt/1.35 Liberation Sans, Arial, Helvetica, sans-serif; }
 body { margin: 0 auto; max-width: 180mm; padding: 8mm; }
@@ -42,6 +44,9 @@ figcaption { font-size: 8pt; }
 #door h2 { font-size: 24pt; border: 3pt solid #000; padding: 3mm; text-align: center; }
 @media print {
   body { max-width: none; padding: 0; }
+  .screen { display: none; }
+  .sheetful { margin: 0; }
+  .sheetful + .sheetful { break-before: page; }
   .own { break-before: page; }
   .own > h2 { margin-top: 0; }
   .pages { display: table; width: 100%; border-collapse: collapse; }

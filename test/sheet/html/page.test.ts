@@ -1,10 +1,10 @@
-// @vitest-environment node
 import axe from "axe-core";
 import { HtmlValidate } from "html-validate";
 import { JSDOM } from "jsdom";
 import { describe, expect, test } from "vitest";
 import { sheetOf, sheetText } from "../../../src/sheet/index.ts";
 import { ATTACKS } from "../../support/attack.ts";
+import { RECOMMENDED, UNLAID } from "../../support/pageRules.ts";
 import { LOAD, largeInput, placedIn, RATED, sheetInput, WORDS } from "../../support/sheet.ts";
 
 const html = (input: ReturnType<typeof sheetInput>): string => sheetText(sheetOf(input), "html");
@@ -15,19 +15,7 @@ const FULL = (() => {
 })();
 const STRINGS = sheetInput({ shape: { ties: "strings" } });
 
-/** The recommended rules; each exception has its reason. */
-const VALIDATOR = new HtmlValidate({
-  extends: ["html-validate:recommended"],
-  rules: {
-    // The serialiser closes void elements as XML does; HTML allows it.
-    "void-style": ["error", { style: "selfclose" }],
-    // The length of a title is a matter of search engines; this one carries the layout's name.
-    "long-title": "off",
-  },
-});
-
-/** Contrast needs a layout, which this page has not; the sheet is black on white by its style. */
-const UNLAID: axe.RunOptions = { resultTypes: ["violations"], rules: { "color-contrast": { enabled: false } } };
+const VALIDATOR = new HtmlValidate(RECOMMENDED);
 
 async function faultsOf(page: string) {
   const { window } = new JSDOM(page, { runScripts: "outside-only" });

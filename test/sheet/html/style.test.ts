@@ -6,7 +6,7 @@ test("styleOf(paper): the paper's own page, and nothing that escaping would chan
     expect(styleOf(paper)).toContain(`size: ${paper} portrait`);
     expect(styleOf(paper)).not.toMatch(/["'&<]|url\(|@import|expression/);
   }
-  const [css] = PAPERS.map(styleOf) as [string];
+  const [css] = PAPERS.map((paper) => styleOf(paper)) as [string];
   for (const rule of [
     "table-footer-group",
     "table-header-group",
