@@ -46,8 +46,8 @@ function dischargeLines(props: SchematicProps): readonly string[] {
 function balanceLine({ balance, ties, series, parallel }: SchematicProps): string {
   if (balance === null) return "Balancing resistors: none fitted.";
   const tied = ties === "cross-tied";
-  const names = tied ? spanOf("RB", "1", `${series}`) : `RB, ${counted(series * parallel, "resistor")}`;
-  const where = tied ? `one across each of ${counted(series, "stage")}` : "one across each unit";
+  const names = tied ? spanOf("RB", "1", `${series}`) : spanOf("RB", "1.1", `${parallel}.${series}`);
+  const where = tied ? `one across each of ${counted(series, "stage")}` : "one across each unit, with its number";
   const value = shownOrBlank(balance.resistance, "resistance");
   const spread = balance.tolerance === null ? "" : ` ±${shownOrBlank(balance.tolerance, "fraction")}`;
   const made = balance.elements === 1 ? "" : `, each made of ${balance.elements} equal elements in series`;

@@ -62,7 +62,7 @@ describe("legendLines(props)", () => {
       fuse: { at: "string", words: null },
       clamps: { bank: false, positions: true },
     });
-    expect(strings).toContain("RB, 12 resistors: balancing resistors, one across each unit");
+    expect(strings).toContain("RB1.1 to RB3.4: balancing resistors, one across each unit, with its number");
     expect(strings).toContain("Fuse in series with each string, 3 in all: ________");
     expect(strings).toContain("Clamp diode across each unit, 12 in all");
     expect(strings).toContain("C1.1 to C3.4");
