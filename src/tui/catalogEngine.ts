@@ -76,8 +76,8 @@ export function catalogEngine({ parts, families }: Stock): EnginePort {
   };
   return {
     readBrief: (values) => readBrief(values),
-    plan: (brief, { rank, most, frontOnly, quick }) => {
-      const planned = plan({ brief, parts, families, limit: most, rank, quick });
+    plan: (brief, { rank, most, frontOnly, quick, progress }) => {
+      const planned = plan({ brief, parts, families, limit: most, rank, quick, progress });
       if (!planned.ok || !frontOnly) return planned;
       return accepted({ ...planned.value, layouts: inFull(brief, planned.value, planned.value.front) });
     },

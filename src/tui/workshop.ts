@@ -91,6 +91,7 @@ function saveAll({ parts, sources }: ReadStock, files: Pick<Files, "write">, ove
 
 export const workshopOn = (read: ReadStock, files: Pick<Files, "write">): Workshop => ({
   engine: catalogEngine(read),
+  families: read.families,
   stock: read.stock,
   catalogue: { parts: read.parts, sources: read.sources },
   overrides: Object.assign({}, ...read.sources.map(({ overrides }) => overrides ?? {})),
