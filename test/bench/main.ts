@@ -1,10 +1,11 @@
-// All benches in one table: what, measured, promised, kept or not. `npm run bench -- search bank` runs some of the groups.
+// All benches in one table: what, measured, promised, kept or not. `npm run bench -- search bank` runs some of the groups; `tui` wants --expose-gc.
 import { cpus } from "node:os";
 import { benchBank } from "./bank.ts";
 import { benchBlend } from "./blend.ts";
 import { benchPlace } from "./place.ts";
 import { benchPulse } from "./pulse.ts";
 import { benchSearch } from "./search.ts";
+import { benchTui } from "./tui.ts";
 
 interface Row {
   readonly what: string;
@@ -17,6 +18,7 @@ const GROUPS: Readonly<Record<string, () => readonly Row[] | Promise<readonly Ro
   bank: benchBank,
   pulse: benchPulse,
   place: () => benchPlace(),
+  tui: () => benchTui(120, Number(process.env.FRAMES ?? 20_000)),
   blend: () => benchBlend() as Promise<readonly Row[]>,
 };
 

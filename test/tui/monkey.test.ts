@@ -17,6 +17,10 @@ test("1,500 random keys at random sizes: nothing thrown, nothing outside, no sta
     "order+prompt",
     "sharing",
     "shot",
+    "map",
+    "parts",
+    "trail",
+    "parts+prompt",
   ];
   const stages = [
     "compare listed 2",
@@ -26,4 +30,4 @@ test("1,500 random keys at random sizes: nothing thrown, nothing outside, no sta
     "shot with key shot",
   ];
   expect([...wanted, ...stages].filter((name) => !screens.has(name))).toEqual([]);
-}, 30_000);
+}, 120_000);

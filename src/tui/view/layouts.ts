@@ -3,7 +3,7 @@
 import type { LayoutResult } from "../../search/index.ts";
 import { type Column, columnsFor, headingRow, snug, tableRow, widen } from "../columns.ts";
 import { isPinned, listed, planOf, selectedIndex } from "../pick.ts";
-import { EMPTY_ROW, type Row, span } from "../row.ts";
+import { EMPTY_ROW, type Row, type Span, span } from "../row.ts";
 import type { State } from "../state.ts";
 import {
   grouped,
@@ -23,6 +23,17 @@ import {
 import { type Page, pageOf, type Room } from "./page.ts";
 import { emptyRows, paragraph } from "./words.ts";
 
+const cells = new WeakMap<LayoutResult, Map<string, Span>>();
+
+/** A cell that follows from its layout alone is worked out once: rows are drawn again at every key. */
+function cellOnce(layout: LayoutResult, title: string, text: (layout: LayoutResult) => string): Span {
+  const known = cells.get(layout) ?? new Map<string, Span>();
+  cells.set(layout, known);
+  const found = known.get(title) ?? span(text(layout));
+  known.set(title, found);
+  return found;
+}
+
 /** Every column the list can have; those there is room for are shown. */
 export function layoutColumns(state: State): readonly Column<LayoutResult>[] {
   const unbeaten = new Set(planOf(state)?.front ?? []);
@@ -32,7 +43,13 @@ export function layoutColumns(state: State): readonly Column<LayoutResult>[] {
     priority: number,
     text: (layout: LayoutResult) => string,
     side: "left" | "right" = "right",
-  ): Column<LayoutResult> => ({ title, width, priority, side, cell: (layout) => span(text(layout)) });
+  ): Column<LayoutResult> => ({
+    title,
+    width,
+    priority,
+    side,
+    cell: (layout) => (title === "" || title === "unbeaten" ? span(text(layout)) : cellOnce(layout, title, text)),
+  });
   return [
     column("", 1, 0, (l) => (isPinned(state, l) ? "*" : " "), "left"),
     column("part", 24, 0, (l) => l.part, "left"),
