@@ -21,12 +21,12 @@ export function leastAmount(model: BlendModel, row: CeilingName, limits: BlendLi
   const total = largest.slice(0, model.maxTypes).reduce((sum, amount) => sum + amount, 0);
   const step = row === "units" ? 1 : total / FINENESS || 1;
   const options = model.options.map((option): BlendOption => {
-    const { floor: _, ...facts } = option;
+    const { floor: _floor, suppliers: _suppliers, ...facts } = option;
     const costs = Float64Array.from({ length: option.maxStrings + 1 }, (_, x) => Math.round((option[row] * x) / step));
     return { ...facts, costs };
   });
   const answer = findBlend(
-    { ...model, options, ceilings: { ...model.ceilings, [row]: Number.POSITIVE_INFINITY } },
+    { ...model, shipments: [], options, ceilings: { ...model.ceilings, [row]: Number.POSITIVE_INFINITY } },
     limits,
   );
   const counts = answer.best?.counts ?? null;

@@ -6,6 +6,7 @@ import { tidyCounts } from "./evaluate.ts";
 import { type BlendLimits, findBlend } from "./findBlend.ts";
 import { type BlendCount, type BlendModel, FIT_TOLERANCE } from "./model.ts";
 import { buildPool, usefulStrings } from "./pool.ts";
+import { facts, shipmentCost, withShares } from "./shipments.ts";
 import type { FoundBlend } from "./singles.ts";
 
 export interface PriceSwitch {
@@ -28,15 +29,14 @@ export function withSettled(model: BlendModel, { option: at, strings }: BlendCou
   if (Object.values(ceilings).some((room) => room < 0)) return null;
   const requirement = (model.requirement * (1 - slack) - settled.capacity * strings) / (1 - slack);
   const options = model.options.map((option) =>
-    option.partIndex === settled.partIndex ? { ...plain(option), maxStrings: 0 } : option,
+    option.partIndex === settled.partIndex ? { ...facts(option), costs: new Float64Array(1), maxStrings: 0 } : option,
   );
-  return { options, requirement, ceilings, maxTypes: model.maxTypes - (strings > 0 ? 1 : 0) };
+  const sent = strings > 0 ? (settled.suppliers ?? []) : [];
+  // What the settled strings have sent is paid for, whoever else is in it.
+  const shipments = (model.shipments ?? []).map((cost, supplier) => (sent.includes(supplier) ? 0 : cost));
+  return { options, requirement, ceilings, shipments, maxTypes: model.maxTypes - (strings > 0 ? 1 : 0) };
 }
 
-const plain = (option: BlendModel["options"][number]) => {
-  const { capacity, volume, mass, units, partIndex } = option;
-  return { capacity, volume, mass, units, partIndex, costs: new Float64Array(1) };
-};
 
 /** The cheapest blend with exactly so many strings of one option; null when there is none. */
 export function bestWith(
@@ -46,7 +46,8 @@ export function bestWith(
 ): { readonly blend: FoundBlend | null; readonly proven: boolean } {
   const rest = withSettled(model, count);
   if (rest === null) return { blend: null, proven: true };
-  const own = model.options[count.option]!.costs[count.strings]!;
+  const sent = count.strings > 0 ? shipmentCost(model, [count.option]) : 0;
+  const own = model.options[count.option]!.costs[count.strings]! + sent;
   if (rest.requirement <= 0) return { blend: { counts: tidyCounts([count]), cost: own }, proven: true };
   if (rest.maxTypes < 1) return { blend: null, proven: true };
   const answer = findBlend(rest, limits);
@@ -96,7 +97,8 @@ const range = (first: number, last: number): number[] =>
   Array.from({ length: Math.max(0, last - first + 1) }, (_, at) => first + at);
 
 /** Lower bounds on the cost of a blend with so many strings of one option, by the Lagrangian bound. */
-function costFloors(model: BlendModel, option: number): (strings: number) => number {
+function costFloors(given: BlendModel, option: number): (strings: number) => number {
+  const model = withShares(given);
   const pool = buildPool(model, null, false);
   const { prices } = ascendCost(pool, model.maxTypes, Number.POSITIVE_INFINITY);
   const at = standing(pool, prices, model.maxTypes);
