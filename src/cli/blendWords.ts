@@ -67,7 +67,15 @@ export function explainText(plan: BlendPlan, width: number): string {
 function proofSteps(proof: NamedCertificate, plan: BlendPlan): readonly string[] {
   const show = (minor: number): string => formatMoney(minor, proof.currency ?? "XXX");
   const { prices, bound, survivors, cost } = proof;
-  const compared = `${proof.compared} kinds of string were compared, each part in its least safe series count. For every count of strings the cheapest purchase was worked out whole: stock, packs, minimum order, price breaks, resistors. At most ${proof.maxTypes} parts may be mixed.`;
+  const sent =
+    proof.shipments === undefined
+      ? ""
+      : ` A shipment is paid once for each supplier (${Object.entries(proof.shipments)
+          .map(([name, minor]) => `${visible(name === "" ? "not named" : name)} ${show(minor)}`)
+          .join(
+            ", ",
+          )}); in the bound each kind of string bears only the share that is left if as many as may be mixed come in it.`;
+  const compared = `${proof.compared} kinds of string were compared, each part in its least safe series count. For every count of strings the cheapest purchase was worked out whole: stock, packs, minimum order, price breaks, resistors.${sent} At most ${proof.maxTypes} parts may be mixed.`;
   const ceilings = (["volume", "mass", "units"] as const)
     .filter((name) => Math.round(prices[name]) > 0)
     .map((name) => `${show(prices[name])} on using up the whole limit on ${name}`);
@@ -91,17 +99,19 @@ function proofSteps(proof: NamedCertificate, plan: BlendPlan): readonly string[]
     ];
   const bar = `Put a price of ${show(prices.capacity)} on the whole capacitance needed${ceilings.length > 0 ? ` and ${ceilings.join(", ")}` : ""}. Then any mix that meets the need within the limits costs at least ${show(bound)}: each part's gain over its cost counts at its best, for the best ${proof.maxTypes} parts.`;
   const open = survivors.reduce((sum, { strings }) => sum + strings.length, 0);
+  const parts = new Set(survivors.map(({ part }) => part)).size;
   const target = cost === null ? "than any blend could cost" : `than ${show(cost)}`;
   const rest =
     open === 0
       ? `Costs are whole, so nothing cheaper ${target} is left to try.`
-      : `By the same arithmetic only ${open} ${open === 1 ? "count" : "counts"} of ${survivors.length} ${survivors.length === 1 ? "part" : "parts"} could be in a mix cheaper ${target}: ${named(survivors)}. Every mix of these was tried, and none is.`;
+      : `By the same arithmetic only ${open} ${open === 1 ? "count" : "counts"} of ${parts} ${parts === 1 ? "part" : "parts"} could be in a mix cheaper ${target}: ${named(survivors)}. Every mix of these was tried, and none is.`;
   return [compared, bar, rest, verdict + second];
 }
 
 function named(survivors: NamedCertificate["survivors"]): string {
-  const first = survivors.slice(0, 6).map(({ part }) => visible(part));
-  return survivors.length > 6 ? `${first.join(", ")} and ${survivors.length - 6} more` : first.join(", ");
+  const names = [...new Set(survivors.map(({ part }) => visible(part)))];
+  const first = names.slice(0, 6);
+  return names.length > 6 ? `${first.join(", ")} and ${names.length - 6} more` : first.join(", ");
 }
 
 function movesText({ priceMoves, currency }: BlendPlan, width: number): readonly string[] {

@@ -33,6 +33,8 @@ export interface FiledBalance {
 }
 
 const MOST = 1e6;
+/** Most in series or in parallel. */
+export const MOST_COUNT = MOST;
 const refuse = (code: string, field: string, read: string, want: string): Refusal => ({
   code,
   place: { field },

@@ -36,7 +36,7 @@ function withLayout(command: Command): Command {
     .option("--series <count>", "units in series")
     .option("--parallel <count>", "units or strings in parallel")
     .option("--ties <ties>", "cross-tied or strings")
-    .option("--layout <file>", "one layout of plan --json; - is standard input")
+    .option("--layout <file>", "one layout (check and order: or blend) of plan --json; - is standard input")
     .option("--balance <resistance>", 'fix the balancing resistor, "24 kohm", or none')
     .option("--balance-tolerance <tolerance>", 'its tolerance, "5 %"');
 }
@@ -74,6 +74,7 @@ function build(ports: Ports, done: Done): Command {
     .option("--max-types <count>", "with --blend: most parts in one bank; 4 unless told")
     .option("--within <fraction>", 'with --blend: other kinds of blend up to so much dearer, "2 %"')
     .option("--line-cost <amount>", "with --blend: what ordering each part costs as such")
+    .option("--shipment-cost <amounts>", 'with --blend: what a shipment costs, "6.50" or "North: 4.90; South: 12"')
     .option("--solver-time <time>", 'with --blend: time for the outside solver in hard cases; "10 s" unless told')
     .action(async (brief: string | undefined, flags: PlanFlags & BlendFlags) => {
       if (wantsBlend(flags)) {
@@ -85,6 +86,8 @@ function build(ports: Ports, done: Done): Command {
     });
   withLayout(program.command("check"))
     .description("Check one layout in every state at rest.")
+    .option("--blend <text>", 'a blend instead of one layout, "PART 6s10p cross-tied + PART 2s3p strings"')
+    .option("--shipment-cost <amounts>", 'with a blend: what a shipment costs, "6.50" or "North: 4.90; South: 12"')
     .option("--measured <file>", "measured units, CSV: the statistical basis draws from them")
     .option("--witness <banks>", "draw so many banks beside the statistical chance, 1e6")
     .option("--seed <number>", "seed of the drawing (default: 1)")
@@ -106,6 +109,8 @@ function build(ports: Ports, done: Done): Command {
     });
   withLayout(program.command("order"))
     .description("Write the bill of materials of one layout.")
+    .option("--blend <text>", 'a blend instead of one layout, "PART 6s10p cross-tied + PART 2s3p strings"')
+    .option("--shipment-cost <amounts>", 'with a blend: what a shipment costs, "6.50" or "North: 4.90; South: 12"')
     .option("--fuses <file>", "fuse catalogue, CSV: adds a fuse for each unit to the bill")
     .option("--format <format>", "csv, json, md or html; else by the ending of --output, else csv")
     .option("--output <file>", "write to a file, whole or not at all")

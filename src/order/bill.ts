@@ -24,6 +24,7 @@ export const LINE_KINDS = [
   "meter with divider",
   "screen",
   "test resistor",
+  "shipment",
 ] as const;
 export type LineKind = (typeof LINE_KINDS)[number];
 

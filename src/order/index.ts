@@ -1,6 +1,8 @@
 // Bill of materials: counted lines, packs, prices, and the text of each format.
+
 export { type Bill, type BillLine, LINE_KINDS, type LineKind, type LineState, type Totals } from "./bill.ts";
 export { type BillInput, billOf } from "./billOf.ts";
+export { type BlendBillInput, blendBillOf } from "./blendBill.ts";
 export { BILL_COLUMNS, type BillColumn } from "./columns.ts";
 export { type Counts, countsOf } from "./counts.ts";
 export { csvText } from "./csv.ts";

@@ -6,13 +6,16 @@ import { capacityNeeded } from "./blend/evaluate.ts";
 import { type BlendModel, type BlendOption, type CostFloor, LARGEST_COST } from "./blend/model.ts";
 import { stringsToReach } from "./blend/pool.ts";
 import { lazyOption } from "./blend/tabulate.ts";
-import { type BuyingTerms, type StringType, stringsCost, stringType } from "./blendString.ts";
+import { familyGroups, handMatters, paidSenders, sendersOf, shipmentOf } from "./blendShipments.ts";
+import { type BuyingTerms, type NoString, type StringType, stringsCost, stringType } from "./blendString.ts";
 import type { Brief } from "./brief.ts";
 import type { RefusedPart } from "./result.ts";
 
 export interface BlendWork {
   /** What each option of the model is made of. */
   readonly types: readonly StringType[];
+  /** Suppliers of the model's shipments, by name; "" for those who are not named. */
+  readonly senders: readonly string[];
   readonly model: BlendModel;
   readonly leftOut: readonly RefusedPart[];
   /** Strings that are sound but have no price; they are named in `leftOut` too. */
@@ -67,24 +70,49 @@ function floorOf({ unit, series, terms }: StringType): CostFloor {
   return { fixed: least * (terms.brief.spares - hand) - 1, perString: series * least, least: first };
 }
 
-/** Costs of 0 to `most` strings, levelled from above: whoever wants few may build more. */
-export function costTable(type: StringType, most: number): Float64Array {
-  const costs = Float64Array.from({ length: most + 1 }, (_, x) => stringsCost(type, x) ?? LARGEST_COST);
+/** Costs of 0 to `most` strings, levelled from above: whoever wants few may build more. Counts that `may` shuts out are passed over. */
+export function costTable(
+  type: StringType,
+  most: number,
+  may: (strings: number) => boolean = () => true,
+): Float64Array {
+  const costs = Float64Array.from({ length: most + 1 }, (_, x) =>
+    x === 0 ? 0 : may(x) ? (stringsCost(type, x) ?? LARGEST_COST) : LARGEST_COST,
+  );
   for (let x = most - 1; x >= 1; x -= 1) costs[x] = Math.min(costs[x]!, costs[x + 1]!);
   return costs;
 }
 
-function optionOf(type: StringType, partIndex: number, maxStrings: number, brief: Brief): BlendOption {
+interface Place {
+  readonly partIndex: number;
+  readonly senders: readonly string[];
+}
+
+/** The ways to buy so many strings of a type: one for each set of suppliers that must send something for some count. */
+function waysOf(type: StringType, most: number, place: Place, brief: Brief): readonly BlendOption[] {
   const { series, candidate } = type;
+  const { senders, partIndex } = place;
   const facts = {
     capacity: candidate.basis / series,
     volume: brief.maxVolume === undefined ? 0 : series * (candidate.volume as number),
     mass: brief.maxMass === undefined ? 0 : series * (candidate.mass as number),
     units: series,
-    maxStrings,
     partIndex,
   };
-  return lazyOption(facts, floorOf(type), () => costTable(type, maxStrings));
+  const suppliersOf = (names: readonly string[]) =>
+    names.length === 0 ? {} : { suppliers: names.map((name) => senders.indexOf(name)) };
+  const floor = floorOf(type);
+  if (!handMatters(type, senders)) {
+    const own = { ...facts, maxStrings: most, ...suppliersOf(sendersOf(type, 1, senders)) };
+    return [lazyOption(own, floor, () => costTable(type, most))];
+  }
+  const needed = Array.from({ length: most + 1 }, (_, x) => sendersOf(type, x, senders));
+  const sets = new Map(needed.slice(1).map((names) => [names.join("\n"), names]));
+  return [...sets.values()].map((names) => {
+    const may = (x: number): boolean => needed[x]!.every((name) => names.includes(name));
+    const last = needed.findLastIndex((_, x) => x > 0 && may(x));
+    return lazyOption({ ...facts, maxStrings: last, ...suppliersOf(names) }, floor, () => costTable(type, last, may));
+  });
 }
 
 /** Why a sound string cannot be used even once; null when it can. */
@@ -109,34 +137,51 @@ function shut(type: StringType, had: number, demand: BlendDemand): Omit<RefusedP
     : { reason: "price-missing", value, limit: unit.onHand ?? 0 };
 }
 
-/** The whole model. Its cost tables are made when first read. */
+/** The string types of one part: one for each group of families that one supplier sends; or why there is none. */
+function typesOf(unit: Capacitor, terms: BuyingTerms, senders: readonly string[]): readonly StringType[] | NoString {
+  const made = familyGroups(terms, senders).map((families) => stringType(unit, { ...terms, families }));
+  const sound = made.filter((type): type is StringType => !("reason" in type));
+  const [first] = sound;
+  // Single units take no resistors: one way is all.
+  if (first !== undefined) return first.series === 1 ? [first] : sound;
+  return made[0] as NoString;
+}
+
+/** The whole model. Its cost tables are made when first read, but for parts whose hand may spare a shipment. */
 export function blendWork(demand: BlendDemand): BlendWork {
   const { brief } = demand.terms;
+  const senders = paidSenders(demand.parts, demand.terms);
   const types: StringType[] = [];
   const options: BlendOption[] = [];
   const leftOut: RefusedPart[] = [];
   const unpriced: StringType[] = [];
-  for (const unit of demand.parts) {
-    const type = stringType(unit, demand.terms);
-    if ("reason" in type) {
-      leftOut.push({ part: unit.part, ...type });
+  for (const [partIndex, unit] of demand.parts.entries()) {
+    const made = typesOf(unit, demand.terms, senders);
+    if ("reason" in made) {
+      leftOut.push({ part: unit.part, ...made });
       continue;
     }
     const had = mostUnits(unit);
-    const why = shut(type, had, demand);
+    const why = shut(made[0]!, had, demand);
     // More of it could be had without a price, so a price could let it win.
     if (!isPriced(unit) && (why === null || why.reason === "price-missing") && unit.available !== 0)
-      unpriced.push(type);
-    const most = why === null ? mostStrings(type, had, demand) : 0;
-    if (why !== null || most === 0) {
-      leftOut.push({ part: unit.part, ...(why ?? { reason: "stock", value: type.series, limit: had }) });
-      continue;
+      unpriced.push(made[0]!);
+    const before = options.length;
+    for (const type of made) {
+      const most = why === null ? mostStrings(type, had, demand) : 0;
+      if (most === 0) continue;
+      for (const way of waysOf(type, most, { partIndex, senders }, brief)) {
+        options.push(way);
+        types.push(type);
+      }
     }
-    options.push(optionOf(type, options.length, most, brief));
-    types.push(type);
+    if (options.length === before)
+      leftOut.push({ part: unit.part, ...(why ?? { reason: "stock", value: made[0]!.series, limit: had }) });
   }
   const open = Number.POSITIVE_INFINITY;
   const ceilings = { volume: brief.maxVolume ?? open, mass: brief.maxMass ?? open, units: brief.maxUnits };
-  const model = { options, requirement: demand.required, ceilings, maxTypes: demand.maxTypes };
-  return { types, model, leftOut, unpriced };
+  const plain = { options, requirement: demand.required, ceilings, maxTypes: demand.maxTypes };
+  const shipments = senders.map((name) => shipmentOf(demand.terms, name));
+  const model = senders.length === 0 ? plain : { ...plain, shipments };
+  return { types, senders, model, leftOut, unpriced };
 }

@@ -8,8 +8,8 @@ import type { BlendModel } from "./blend/model.ts";
 import { usefulStrings } from "./blend/pool.ts";
 import type { FoundBlend } from "./blend/singles.ts";
 import { verifyCertificate } from "./blend/verify.ts";
+import type { BlendWork } from "./blendOptions.ts";
 import type { NamedCertificate } from "./blendResult.ts";
-import type { StringType } from "./blendString.ts";
 import { solveWhole } from "./solve.ts";
 
 export interface Proof {
@@ -19,8 +19,7 @@ export interface Proof {
 
 /** The certificate of a settled answer, or null when the search was stopped. */
 export function proofOf(
-  model: BlendModel,
-  types: readonly StringType[],
+  { model, types, senders }: Pick<BlendWork, "model" | "types" | "senders">,
   answer: BlendAnswer,
   currency: string | null,
 ): Proof | null {
@@ -37,8 +36,12 @@ export function proofOf(
     bound: plain.bound,
     survivors: plain.survivors.map(({ option, strings }) => {
       const { unit, series } = types[option]!;
-      return { part: unit.part, series, strings };
+      const suppliers = (model.options[option]!.suppliers ?? []).map((at) => senders[at]!);
+      return { part: unit.part, series, strings, ...(senders.length === 0 ? {} : { suppliers }) };
     }),
+    ...(senders.length === 0
+      ? {}
+      : { shipments: Object.fromEntries(senders.map((name, at) => [name, model.shipments![at]!])) }),
     verdict: verdict.verdict,
     why: verdict.verdict === "invalid" ? verdict.why : null,
   };

@@ -22,6 +22,14 @@ export interface WorstShare {
 export interface BlendCost extends Cost {
   /** What ordering each part costs as such. */
   readonly lines: number;
+  /** What the shipments cost. */
+  readonly shipments: number;
+}
+
+/** One supplier who sends something; null is one who is not named. Major money. */
+export interface Shipment {
+  readonly supplier: string | null;
+  readonly cost: number;
 }
 
 export interface BlendResult {
@@ -42,6 +50,8 @@ export interface BlendResult {
   readonly mass: number | null;
   readonly stress: number | null;
   readonly suppliers: number;
+  /** Shipments that cost something. */
+  readonly shipments: readonly Shipment[];
   /** Of the bank as a whole. */
   readonly findings: readonly Finding[];
   /** Parts and ties: two blends of one kind differ only in counts. */
@@ -73,7 +83,11 @@ export interface NamedCertificate {
     readonly part: string;
     readonly series: number;
     readonly strings: readonly number[];
+    /** Who must send something for it, where shipments cost anything. */
+    readonly suppliers?: readonly string[];
   }[];
+  /** Minor units, each charged once, where shipments cost anything. */
+  readonly shipments?: Readonly<Record<string, number>>;
   /** What the separate verifier said of it. */
   readonly verdict: "valid" | "invalid" | "unsettled";
   readonly why: string | null;

@@ -35,11 +35,12 @@ export interface Settled {
   readonly disagreements: readonly { readonly engine: string; readonly blend: FoundBlend | null }[];
 }
 
-export async function settleWork({ model, types }: BlendWork, wish: SettleWish): Promise<Settled> {
+export async function settleWork(work: BlendWork, wish: SettleWish): Promise<Settled> {
+  const { model } = work;
   const { currency, seconds, clock, stop, side, settle = settleBlend } = wish;
   const answer = await settle(model, { ...(stop === undefined ? {} : { stop }), seconds });
   const stopped = answer.status === "stopped";
-  const proof = stopped ? null : proofOf(model, types, answer, currency);
+  const proof = stopped ? null : proofOf(work, answer, currency);
   const second = proof === null ? null : secondOpinion(model, proof, clock);
   const best = answer.best ?? (stopped ? anyBlend(model, side) : null);
   const rival = second?.blend ?? null;

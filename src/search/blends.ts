@@ -13,10 +13,12 @@ import { type BlendWork, blendWork } from "./blendOptions.ts";
 import { priceMoves, winningPrices } from "./blendPrices.ts";
 import type { BlendPlan, BlendResult } from "./blendResult.ts";
 import { settleWork } from "./blendSettle.ts";
+import { UNNAMED } from "./blendShipments.ts";
 import { nearOptions, worthOf } from "./blendWorth.ts";
 import type { Brief } from "./brief.ts";
 import { planCurrency, pricedIn } from "./currency.ts";
 import { distinct } from "./plan.ts";
+import { type ShipmentWish, shipmentTerms } from "./shipmentTerms.ts";
 
 export interface BlendInput {
   readonly brief: Brief;
@@ -27,6 +29,8 @@ export interface BlendInput {
   readonly maxTypes?: number;
   /** What ordering each part costs as such, major money; default 0. */
   readonly lineCost?: number;
+  /** What a shipment costs, major money: by supplier where named, else `each`; default 0. */
+  readonly shipments?: ShipmentWish;
   /** List other kinds of blend up to so much dearer; 0.02 is 2 %. */
   readonly within?: number;
   /** Also work out what prices and ceilings are worth. */
@@ -55,7 +59,8 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
   const currency = money.value;
   const minor = 10 ** minorDigits(currency ?? "");
   const lineCost = Math.round((input.lineCost ?? 0) * minor);
-  const terms = { brief, families: pricedIn(given, currency, brief), lineCost };
+  const shipments = shipmentTerms(input.shipments, minor);
+  const terms = { brief, families: pricedIn(given, currency, brief), lineCost, shipments };
   const parts = pricedIn(distinct(input.parts), currency, brief);
   const demand = { parts, terms, required: requiredCapacitance(brief), maxTypes };
   const work = blendWork(demand);
@@ -97,7 +102,7 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
     .filter(({ cost }) => cost <= most)
     .map((one): BlendResult => ({ ...made(one), certificate: null }))
     .filter(({ kind }) => !kinds.has(kind));
-  const asked = { model: work.model, types: work.types, cheapest, currency: currency ?? "", limits: side };
+  const asked = { ...work, cheapest, currency: currency ?? "", limits: side };
   const detailed = explain && currency !== null && !none;
   return accepted({
     currency,
@@ -134,7 +139,7 @@ function gapOf(cost: number, lower: number | null): number | null {
   return lower === null ? null : Math.max(0, cost - lower) / cost;
 }
 
-function notesOf({ brief, lineCost = 0 }: BlendInput, { types }: BlendWork): readonly string[] {
+function notesOf({ brief, lineCost = 0 }: BlendInput, { types, senders }: BlendWork): readonly string[] {
   const notes = [
     "A blend is made of whole strings, each part in its least safe series count; resistors are bought for each group on its own.",
   ];
@@ -143,6 +148,12 @@ function notesOf({ brief, lineCost = 0 }: BlendInput, { types }: BlendWork): rea
   if (brief.basis === "statistical")
     notes.push("Strings of a blend share safely in the worst case, also under the statistical basis.");
   if (lineCost > 0) notes.push("The cost of a line is counted once for every part of which any must be bought.");
+  if (senders.length > 0)
+    notes.push(
+      "A shipment is charged once for every supplier of whom capacitors, or resistors with a price, must be bought.",
+    );
+  if (senders.includes(UNNAMED))
+    notes.push("What has no supplier in the catalogue is taken to come in one shipment of its own.");
   if (types.some(({ series, terms }) => series > 1 && !terms.families.some(isPriced)))
     notes.push("Balancing resistors have no price and count nothing in the comparison.");
   return notes;

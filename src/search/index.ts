@@ -1,5 +1,7 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
+export { assessBuiltBlend, type BuiltBlend, type BuiltGroup } from "./blendAssess.ts";
+export { type BlendFault, blendFaults } from "./blendFaults.ts";
 export type {
   BlendPlan,
   BlendResult,
@@ -9,6 +11,7 @@ export type {
   Loosen,
   NamedCertificate,
   PriceMove,
+  Shipment,
   WinningPrice,
   WorstShare,
 } from "./blendResult.ts";
@@ -48,5 +51,6 @@ export { type BankCorners, type CornerFact, cornersOf } from "./sharing/corners.
 export type { BalanceMends } from "./sharing/mends.ts";
 export { type ShareSpread, shareSpread } from "./sharing/shareSpread.ts";
 export type { WithoutBalance } from "./sharing/withoutBalance.ts";
+export type { ShipmentWish } from "./shipmentTerms.ts";
 export { type ShotInput, type ShotReport, shotOf } from "./shot.ts";
 export type { Judge } from "./sweepKinds.ts";

@@ -6,15 +6,16 @@ import { partsOf, workOf } from "../support/blendLab.ts";
 import { briefOf } from "../support/labParts.ts";
 
 const brief = briefOf({ energy: (1e-3 * 400 ** 2) / 2, voltage: 400, basis: "nominal" });
-const { model, types } = workOf(
+const work = workOf(
   partsOf({ price: 3, available: 6 }, { capacitance: 150, price: 4, available: 5 }, { capacitance: 220, price: 9 }),
   brief,
 );
+const { model, types } = work;
 const answer = findBlend(model);
-const proof = proofOf(model, types, answer, "EUR") as Proof;
+const proof = proofOf(work, answer, "EUR") as Proof;
 const clock = () => performance.now();
 
-describe("proofOf(model, types, answer, currency)", () => {
+describe("proofOf(work, answer, currency)", () => {
   test("names what the search knows by number, and the verifier agrees", () => {
     expect(proof.named).toMatchObject({
       claim: "cheapest",
@@ -29,7 +30,7 @@ describe("proofOf(model, types, answer, currency)", () => {
   });
   test("a false claim is called invalid, with the reason", () => {
     const dearer = { ...answer, best: { counts: [{ option: 2, strings: 5 }], cost: 4500 } };
-    const named = proofOf(model, types, dearer, "EUR")!.named;
+    const named = proofOf(work, dearer, "EUR")!.named;
     expect(named.verdict).toBe("invalid");
     expect(named.why).toMatch(/cheaper|missing/);
   });
@@ -39,13 +40,13 @@ describe("proofOf(model, types, answer, currency)", () => {
       partsOf({ price: 3, available: 6 }, { capacitance: 150, price: 4, pack: 4 }, { capacitance: 220, price: 7.5 }),
       asked,
     );
-    const { named } = proofOf(tight.model, tight.types, findBlend(tight.model), "EUR")!;
+    const { named } = proofOf(tight, findBlend(tight.model), "EUR")!;
     expect(named.bound).toBeGreaterThan(named.cost! - 1);
     expect(named.bound).toBeLessThan(named.cost! - 0.5);
     expect([named.verdict, named.survivors]).toEqual(["valid", []]);
   });
   test("a search that was stopped has none", () =>
-    expect(proofOf(model, types, { ...answer, status: "stopped" }, "EUR")).toBeNull());
+    expect(proofOf(work, { ...answer, status: "stopped" }, "EUR")).toBeNull());
 });
 
 describe("secondOpinion(model, proof, clock)", () => {

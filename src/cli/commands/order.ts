@@ -1,10 +1,11 @@
 // `order`: the bill of materials of one arrangement, to the output or to a file.
 
-import { BILL_FORMATS, type BillFormat, billOf, billText, visible } from "../../order/index.ts";
+import { BILL_FORMATS, type BillFormat, billOf, billText, blendBillOf, visible } from "../../order/index.ts";
 import { nearestWord, type Refusal } from "../../quantity/index.ts";
 import { type FuseChoice, fittedFuse } from "../../search/index.ts";
 import { cautionsOf } from "../cautions.ts";
-import { type BankFlags, checkedBank } from "../checked.ts";
+import { checkedBank } from "../checked.ts";
+import { type BlendBankFlags, type CheckedBlend, checkedBlend } from "../checkedBlend.ts";
 import { EXIT } from "../exit.ts";
 import { titleOf } from "../findingWords.ts";
 import { readFuseStock } from "../fuses.ts";
@@ -12,7 +13,7 @@ import { faultLines } from "../inputNotes.ts";
 import type { Ports } from "../ports.ts";
 import { tell } from "../tell.ts";
 
-export type OrderFlags = BankFlags & {
+export type OrderFlags = BlendBankFlags & {
   readonly format?: string;
   readonly fuses?: string;
   readonly output?: string;
@@ -29,6 +30,9 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
       flags.json,
     );
   }
+  const mixed = checkedBlend(brief, flags, ports);
+  if (!mixed.ok) return tell(ports, [...(typeof format === "string" ? [] : [format]), ...mixed.refusals], flags.json);
+  if (mixed.value !== null && typeof format === "string") return orderBlend(mixed.value, format, flags, ports);
   const checked = checkedBank(brief, flags, ports);
   if (!checked.ok || typeof format !== "string") {
     const faults = [...(typeof format === "string" ? [] : [format]), ...(checked.ok ? [] : checked.refusals)];
@@ -46,14 +50,52 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
   for (const finding of result.findings)
     if (finding.verdict === "fail")
       said.push(`FAIL, ${titleOf(finding.id)}: ${visible(finding.note)} Do not buy this bank.`);
+  const lost = handOut({ text, lines: bill.lines.length, said }, flags, ports);
+  return lost ?? (result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done);
+}
+
+/** Writes the bill where it was asked for; the exit status when it could not be. */
+function handOut(
+  { text, lines, said }: { readonly text: string; readonly lines: number; readonly said: readonly string[] },
+  flags: OrderFlags,
+  ports: Ports,
+): number | null {
   if (said.length > 0) ports.err(`${said.join("\n")}\n`);
   if (flags.output === undefined || flags.output === "-") ports.out(text);
   else {
     const written = ports.files.write(flags.output, text, flags.force === true);
     if (!written.ok) return tell(ports, written.refusals, flags.json);
-    ports.err(`${visible(flags.output)}: ${bill.lines.length} lines written\n`);
+    ports.err(`${visible(flags.output)}: ${lines} lines written\n`);
   }
-  return result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done;
+  return null;
+}
+
+/** The bill of a blend. Fuses are chosen for one layout at a time. */
+function orderBlend(checked: CheckedBlend, format: BillFormat, flags: OrderFlags, ports: Ports): number {
+  if (flags.fuses !== undefined) {
+    const want =
+      "one layout: a fuse of a blend must clear on what all the other groups bring, which is not reckoned yet";
+    return tell(ports, [{ code: "contradiction", place: { field: "--fuses" }, read: "a blend", want }], flags.json);
+  }
+  const { blend, units, settings, stock, currency, cautions, notes } = checked;
+  const { brief } = settings;
+  const bill = blendBillOf({
+    blend,
+    units,
+    families: stock.families,
+    brief,
+    currency,
+    cautions: cautions.map(({ text }) => text),
+  });
+  const findings = [...blend.findings, ...blend.strings.flatMap((one) => one.findings)];
+  const fails = findings.filter((f) => f.verdict === "fail");
+  const said = [
+    ...faultLines(stock),
+    ...notes,
+    ...fails.map(({ id, note }) => `FAIL, ${titleOf(id)}: ${visible(note)} Do not buy this bank.`),
+  ];
+  const lost = handOut({ text: billText(bill, format), lines: bill.lines.length, said }, flags, ports);
+  return lost ?? (fails.length > 0 ? EXIT.unsafe : EXIT.done);
 }
 
 /** Why no fuse of the catalogue is on the bill. */

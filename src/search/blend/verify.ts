@@ -122,8 +122,7 @@ const part = (amount: number, ceiling: number): number =>
 function leastReduced(column: VerifyColumn, weight: number): number {
   let low = Number.POSITIVE_INFINITY;
   const { costs } = column.option;
-  for (let x = 1; x <= column.last; x += 1)
-    low = Math.min(low, weight * (costs[x]! + column.share) - column.gain * x);
+  for (let x = 1; x <= column.last; x += 1) low = Math.min(low, weight * (costs[x]! + column.share) - column.gain * x);
   return low;
 }
 

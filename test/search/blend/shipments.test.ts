@@ -1,6 +1,6 @@
 // A shipment is paid once a supplier: in the count, in the search, in its proof, and in the programme for an outside engine.
 import { expect, test } from "vitest";
-import { optionsUsed, findAlternatives } from "../../../src/search/blend/alternatives.ts";
+import { findAlternatives, optionsUsed } from "../../../src/search/blend/alternatives.ts";
 import { allPairs, optionForm, runForm } from "../../../src/search/blend/blendPrograms.ts";
 import { certify } from "../../../src/search/blend/certificate.ts";
 import { blendTotals } from "../../../src/search/blend/evaluate.ts";
@@ -32,8 +32,18 @@ test("shipmentCost(model, options): each supplier once, nothing without options"
   expect(shipmentCost(two(), [0])).toBe(5);
   expect(shipmentCost(two(), [1, 2])).toBe(30);
   expect(shipmentCost(two(), [0, 1, 2])).toBe(35);
-  expect(blendTotals(two(), [{ option: 1, strings: 2 }, { option: 2, strings: 1 }])?.cost).toBe(63);
-  expect(blendTotals(two(), [{ option: 1, strings: 0 }, { option: 0, strings: 1 }])?.cost).toBe(15);
+  expect(
+    blendTotals(two(), [
+      { option: 1, strings: 2 },
+      { option: 2, strings: 1 },
+    ])?.cost,
+  ).toBe(63);
+  expect(
+    blendTotals(two(), [
+      { option: 1, strings: 0 },
+      { option: 0, strings: 1 },
+    ])?.cost,
+  ).toBe(15);
 });
 
 test("shipmentShares(model): a shipment is split over the string types that can come in it, never above it", () => {
