@@ -10,6 +10,8 @@ import { bullet, wrap } from "./wrap.ts";
 export function proofSentence(plan: BlendPlan): string {
   const { status, compared, provenBy, lowerBound, gap, currency, blends } = plan;
   const among = `${compared} kinds of string compared.`;
+  if (status === "optimal" && plan.limited !== null)
+    return `${among} The cheapest that keeps the limits on shot and faults is proven by trying: ${triedWords(plan)}`;
   if (status === "optimal") {
     const check =
       blends[0]?.certificate?.verdict === "valid"
@@ -17,6 +19,10 @@ export function proofSentence(plan: BlendPlan): string {
         : "its proof was too long to be checked again here";
     return `${among} The cheapest is proven (${provenBy ?? "own search"}): ${check}.`;
   }
+  if (status === "infeasible" && plan.limited !== null)
+    return `${among} It is proven by trying that no blend keeps the limits on shot and faults: ${triedWords(plan)}`;
+  if (plan.limited !== null)
+    return `${among} Not settled: no blend was found that keeps the limits on shot and faults, and not all could be tried. ${triedWords(plan)}`;
   if (status === "infeasible")
     return `${among} ${plan.loosen.some(({ field }) => field === "maxCost") ? "The cheapest costs more than the limit" : "It is proven that none meets the need within the limits"} (${provenBy ?? "own search"}).`;
   if (plan.certificate?.verdict === "invalid")
@@ -24,6 +30,20 @@ export function proofSentence(plan: BlendPlan): string {
   if (blends.length === 0 || gap === null) return `${among} Not settled in the time allowed (--solver-time).`;
   const least = lowerBound === null ? "" : ` No blend costs less than ${money(lowerBound, currency ?? undefined)}:`;
   return `${among} NOT PROVEN: the best found in the time allowed (--solver-time).${least} it is at most ${formatQuantity(gap, "fraction", { digits: 3, rounding: "up" })} too dear.`;
+}
+
+/** How many were turned down, and what the cheapest of all broke. */
+function triedWords({ limited, currency }: BlendPlan): string {
+  if (limited === null) return "";
+  const { rejected, cheapest } = limited;
+  const count = `${rejected} cheaper ${rejected === 1 ? "one breaks one of them, or is" : "ones each break one of them, or are"} not proven to keep it.`;
+  const { broken, id, cost } = cheapest;
+  if (broken === null) return count;
+  const show = (x: number | null): string =>
+    x === null ? "unknown" : `${Number(x.toPrecision(4))} ${broken.unit === "1" ? "" : broken.unit}`.trim();
+  const price = cost === null ? "" : ` at ${money(cost, currency ?? undefined)}`;
+  const how = broken.open ? "is not proven to keep" : "breaks";
+  return `${count} The cheapest of all, ${visible(id)}${price}, ${how} the limit on ${broken.limit.replaceAll("-", " ")}: ${show(broken.value)} on a unit of ${visible(broken.part)}, allowed ${show(broken.allowed)}.`;
 }
 
 const LIMITS: Readonly<Record<Loosen["field"], readonly [name: string, dimension: Dimension | "money"]>> = {

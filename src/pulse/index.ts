@@ -1,4 +1,5 @@
 // Contents page of pulse.
+export { type Branch, branchShot } from "./branchShot.ts";
 export { type Bus, type BusGeometry, busOf } from "./bus.ts";
 export { unitShort } from "./chainFaults.ts";
 export { type Charge, type Charger, type ChargeTask, chargeOf } from "./charge.ts";

@@ -7,6 +7,7 @@ import { minorDigits, toMajor } from "../quantity/index.ts";
 import { assess } from "./assess.ts";
 import { bleedOf } from "./blendBleed.ts";
 import { blendFindings } from "./blendFindings.ts";
+import { groupLimits, isLimitFinding } from "./blendLimits.ts";
 import type { BlendCost, BlendResult, BlendString, WorstShare } from "./blendResult.ts";
 import { senderOf, shipmentOf, UNNAMED } from "./blendShipments.ts";
 import { type BuyingTerms, resistorsOf, type StringType } from "./blendString.ts";
@@ -65,11 +66,20 @@ export function assessGroups({ groups, terms, currency }: BlendBuilt): Omit<Blen
   const energyOf = (c: number | null): number | null =>
     c === null ? null : pulseEnergy(c, brief.voltage, brief.ripple);
   const bleed = bleedOf(layouts, brief);
+  const limited = groupLimits(
+    layouts,
+    groups.map(({ unit }) => unit),
+    brief,
+  );
   const strings = layouts.map((layout, at): BlendString => {
     const { unit } = groups[at]!;
     return {
       ...layout,
-      findings: layout.findings.filter(({ id }) => !OF_THE_WHOLE.has(id)),
+      // A group's shot is that of the whole bank, and so are its limits on the shot.
+      findings: [
+        ...layout.findings.filter((finding) => !OF_THE_WHOLE.has(finding.id) && !isLimitFinding(finding)),
+        ...limited[at]!,
+      ],
       bought: layout.purchase.capacitors?.bought ?? 0,
       fromHand: layout.purchase.capacitors?.fromHand ?? 0,
       supplier: unit.supplier ?? null,

@@ -1,20 +1,12 @@
 // What one failure does in a blend: the faults of each group, with what the other groups pour into it.
 //
-// | symbol | in code  | unit | meaning |
-// | ------ | -------- | ---- | ------- |
-// | C_o    | others   | F    | nominal capacitance of the other groups |
-// | C_s    | standing | F    | what is left of the group or string when one of its n units in series is shorted |
-// | V      | voltage  | V    | charge voltage, overshoot included |
-//
-// The other groups hold the ends as a charger would, so volts are those of the group's own table. A short makes the group's ends
-// fall to V(n - 1)/n; the loss as the others fill it up again is (V/n)^2 C_s C_o/(2(C_s + C_o)), at most all of it in the
-// shorted unit; with n = 1 they empty into it: V^2 C_o/2. That loss is concave in C_o, so adding it to what the group's own
-// neighbours bring never says too little. A string shorted end to end takes V^2 C_o/2 over its n units.
-// Source: [methods-derived] charge and energy of two capacitors joined, as for the group's own neighbours.
+// The other groups hold the ends as a charger would, so volts are those of the group's own table. A string shorted end to end takes
+// V^2 C_o/2 of the other groups (C_o) over its n units. Source: [methods-derived] as in the file on what is poured in.
 
 import type { Capacitor } from "../catalog/index.ts";
 import type { Fault } from "../pulse/index.ts";
 import type { Verdict } from "../quantity/index.ts";
+import { pouredIntoShort } from "./blendPoured.ts";
 import type { BlendResult } from "./blendResult.ts";
 import type { Brief } from "./brief.ts";
 import { faultsOf } from "./faults.ts";
@@ -38,18 +30,15 @@ export function blendFaults(
     if (unit === undefined) return [];
     const others = strings.length === 1 ? 0 : all - group.capacitance.nominal;
     return faultsOf({ result: group, unit, brief }).map((fault): BlendFault => {
-      const { series: n, parallel, ties } = group;
-      const standing = ((ties === "cross-tied" ? parallel : 1) * unit.capacitance) / (n - 1);
+      const { series, parallel, ties } = group;
+      const { capacitance } = unit;
+      const string = fault.id === "row-short" && series > 1 && ties === "strings";
       const poured =
-        others === 0
-          ? 0
-          : fault.id === "unit-short"
-            ? n === 1
-              ? (voltage * voltage * others) / 2
-              : ((voltage / n) ** 2 * standing * others) / (2 * (standing + others))
-            : fault.id === "row-short" && n > 1 && ties === "strings"
-              ? (voltage * voltage * others) / (2 * n)
-              : 0;
+        fault.id === "unit-short"
+          ? pouredIntoShort({ series, parallel, ties, capacitance, others, voltage })
+          : string
+            ? (voltage * voltage * others) / (2 * series)
+            : 0;
       if (poured === 0) return { ...fault, part: group.part, fromOthers: 0 };
       const joules = fault.energyIntoUnit === null ? null : fault.energyIntoUnit + poured;
       return {

@@ -9,6 +9,7 @@ import { lazyOption } from "./blend/tabulate.ts";
 import { familyGroups, handMatters, paidSenders, sendersOf, shipmentOf } from "./blendShipments.ts";
 import { type BuyingTerms, type NoString, type StringType, stringsCost, stringType } from "./blendString.ts";
 import type { Brief } from "./brief.ts";
+import { hasLimits, unratedFor } from "./limits.ts";
 import type { RefusedPart } from "./result.ts";
 
 export interface BlendWork {
@@ -29,6 +30,9 @@ export interface BlendDemand {
   readonly maxTypes: number;
 }
 
+/** With limits on the shot, so many times the strings that would meet the need alone are looked at. */
+const SURPLUS = 2;
+
 /** Units that can be had, on hand or bought at a known price. */
 function mostUnits(unit: Capacitor): number {
   const hand = unit.onHand ?? 0;
@@ -46,7 +50,9 @@ function mostStrings(type: StringType, had: number, demand: BlendDemand): number
   const byUnits = Math.floor(brief.maxUnits / type.series);
   const capped = Math.max(0, Math.min(byStock, byUnits));
   const each = type.candidate.basis / type.series;
-  const most = Math.min(capped, stringsToReach(capacityNeeded(demand.required), each));
+  // More strings than the need asks for lower what each unit bears: where the brief limits that, they are of use.
+  const enough = (hasLimits(brief) ? SURPLUS : 1) * stringsToReach(capacityNeeded(demand.required), each);
+  const most = Math.min(capped, enough);
   // Sums of costs stay exact whole numbers only below the largest cost of the model.
   let [good, bad] = [0, most + 1];
   while (bad - good > 1) {
@@ -162,6 +168,11 @@ export function blendWork(demand: BlendDemand): BlendWork {
       continue;
     }
     const had = mostUnits(unit);
+    const unrated = unratedFor(brief, unit);
+    if (unrated !== null) {
+      leftOut.push({ part: unit.part, ...unrated });
+      continue;
+    }
     const why = shut(made[0]!, had, demand);
     // More of it could be had without a price, so a price could let it win.
     if (!isPriced(unit) && (why === null || why.reason === "price-missing") && unit.available !== 0)

@@ -139,6 +139,24 @@ export interface EngineAnswer {
   readonly id: string | null;
 }
 
+/** The first limit of the brief that a group is not proven to keep. */
+export interface BrokenLimit {
+  readonly part: string;
+  readonly limit: string;
+  readonly value: number | null;
+  readonly allowed: number | null;
+  readonly unit: string;
+  /** False: known to be over; true: it cannot be told, or only a bound is known. */
+  readonly open: boolean;
+}
+
+/** The brief's limits on shot and faults, where the cheapest blend of all does not keep them. */
+export interface LimitedBlend {
+  /** Blends that cost no more, each judged and each breaking a limit. */
+  readonly rejected: number;
+  readonly cheapest: { readonly id: string; readonly cost: number | null; readonly broken: BrokenLimit | null };
+}
+
 export interface BlendPlan {
   readonly currency: string | null;
   readonly maxTypes: number;
@@ -151,6 +169,8 @@ export interface BlendPlan {
   readonly blends: readonly BlendResult[];
   /** The proof where no blend carries it: that none exists or all cost too much, or one that the verifier rejected. */
   readonly certificate: NamedCertificate | null;
+  /** Null when the brief sets no limits on shot and faults, or the cheapest of all keeps them. */
+  readonly limited: LimitedBlend | null;
   /** What the second engine said on the core, or why it was not asked. */
   readonly secondOpinion: "agrees" | "disagrees" | "no answer" | "not asked";
   /** Answers that contradict each other, all of them; empty as a rule. */

@@ -8,6 +8,8 @@ import type { settleBlend } from "./blend/fallback.ts";
 import type { FoundBlend } from "./blend/singles.ts";
 import { assessBlend, kindOf } from "./blendAssess.ts";
 import { groupsOf } from "./blendGroups.ts";
+import { keepingLimits } from "./blendKept.ts";
+import { brokenLimit } from "./blendLimits.ts";
 import { costLoosened, loosenBlend } from "./blendLoosen.ts";
 import { type BlendWork, blendWork } from "./blendOptions.ts";
 import { priceMoves, winningPrices } from "./blendPrices.ts";
@@ -17,6 +19,7 @@ import { UNNAMED } from "./blendShipments.ts";
 import { nearOptions, worthOf } from "./blendWorth.ts";
 import type { Brief } from "./brief.ts";
 import { planCurrency, pricedIn } from "./currency.ts";
+import { hasLimits } from "./limits.ts";
 import { distinct } from "./plan.ts";
 import { type ShipmentWish, shipmentTerms } from "./shipmentTerms.ts";
 
@@ -67,13 +70,14 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
   const side = { work: SIDE_WORK, ...(stop === undefined ? {} : { stop }) };
   const settled = await settleWork(work, { ...input, currency, side, seconds: input.seconds ?? SECONDS });
 
-  const { proof, lowerBound: lower, proven } = settled;
-  const [cheapest = null] = settled.found;
-  const most = brief.maxCost === undefined ? Number.POSITIVE_INFINITY : brief.maxCost * minor * (1 + FIT);
-  const dear = cheapest !== null && cheapest.cost > most;
   const made = (one: FoundBlend): Omit<BlendResult, "certificate"> =>
     assessBlend({ groups: groupsOf(work, one.counts), terms, currency });
-  const blends = settled.found
+  const kept = keepingLimits(work, settled, { brief, made, stop });
+  const { proof, lowerBound: lower, proven, limited } = kept;
+  const [cheapest = null] = kept.found;
+  const most = brief.maxCost === undefined ? Number.POSITIVE_INFINITY : brief.maxCost * minor * (1 + FIT);
+  const dear = cheapest !== null && cheapest.cost > most;
+  const blends = kept.found
     .filter(({ cost }) => cost <= most)
     .map((one): BlendResult => {
       const whole = made(one);
@@ -83,7 +87,8 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
     });
   const none = blends.length === 0;
   const ruledOut = none && (proven || (dear && lower !== null && lower > most));
-  const status = ruledOut ? "infeasible" : !none && blends[0]!.certificate !== null ? "optimal" : "stopped";
+  const certain = limited === null ? blends[0]?.certificate !== null : proven;
+  const status = ruledOut ? "infeasible" : !none && certain ? "optimal" : "stopped";
   const others =
     input.within === undefined || none
       ? null
@@ -101,9 +106,10 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
   const rivals = (others?.blends ?? [])
     .filter(({ cost }) => cost <= most)
     .map((one): BlendResult => ({ ...made(one), certificate: null }))
-    .filter(({ kind }) => !kinds.has(kind));
+    .filter((one) => !kinds.has(one.kind) && (!hasLimits(brief) || brokenLimit(one, brief) === null));
   const asked = { ...work, cheapest, currency: currency ?? "", limits: side };
-  const detailed = explain && currency !== null && !none;
+  // What a price or a limit is worth is reckoned without the limits on the shot, so not where those decide.
+  const detailed = explain && currency !== null && !none && limited === null;
   return accepted({
     currency,
     maxTypes,
@@ -113,7 +119,9 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
     lowerBound: lower === null || currency === null ? null : toMajor(lower, currency),
     gap: none ? null : status === "optimal" ? 0 : gapOf(cheapest!.cost, lower),
     blends: [...blends, ...rivals],
-    certificate: (none && proven) || proof?.named.verdict === "invalid" ? (proof?.named ?? null) : null,
+    certificate:
+      (none && proven && limited === null) || proof?.named.verdict === "invalid" ? (proof?.named ?? null) : null,
+    limited,
     secondOpinion: settled.opinion,
     disagreements: settled.disagreements.map(({ engine, blend }) => ({
       engine,
@@ -126,7 +134,9 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
       ? []
       : dear
         ? [costLoosened(brief, cheapest.cost / minor, proven)]
-        : loosenBlend(demand, currency, side),
+        : limited !== null
+          ? []
+          : loosenBlend(demand, currency, side),
     winningPrices: currency === null ? [] : winningPrices(asked, work.unpriced),
     priceMoves: detailed ? priceMoves(asked, nearOptions(proof, cheapest!), (blend) => made(blend).id) : [],
     worth: detailed ? worthOf(work.model, proof, cheapest!, minor) : null,
@@ -148,6 +158,10 @@ function notesOf({ brief, lineCost = 0 }: BlendInput, { types, senders }: BlendW
   if (brief.basis === "statistical")
     notes.push("Strings of a blend share safely in the worst case, also under the statistical basis.");
   if (lineCost > 0) notes.push("The cost of a line is counted once for every part of which any must be bought.");
+  if (hasLimits(brief))
+    notes.push(
+      "A mix is kept only where its shot can be reckoned: a resistor, a coil or a short as the load, and the ESR and ESL of every part. At most twice the strings of a part that would meet the need alone are looked at.",
+    );
   if (senders.length > 0)
     notes.push(
       "A shipment is charged once for every supplier of whom capacitors, or resistors with a price, must be bought.",

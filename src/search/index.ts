@@ -8,6 +8,7 @@ export type {
   BlendString,
   CeilingWorth,
   EngineAnswer,
+  LimitedBlend,
   Loosen,
   NamedCertificate,
   PriceMove,

@@ -40,7 +40,7 @@ export function bankAt(unit: Capacitor, shape: Shape, corner: CornerName): Pulse
 }
 
 /** Plain R, L and C, which the closed form has in one go. */
-const isPlain = ({ load, clamp, switch: sw }: Circuit): boolean =>
+export const isPlain = ({ load, clamp, switch: sw }: Circuit): boolean =>
   (load.kind === "resistor" || load.kind === "coil" || load.kind === "short") && clamp === null && sw.drop === 0;
 
 /** The shot at a corner. Refused as by `circuitOf` and `dischargeOf`. */
