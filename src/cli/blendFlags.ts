@@ -1,7 +1,7 @@
 // The flags of a blend: read, held within their ranges, and refused when there is no blend to speak of.
 
 import { accepted, parseQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
-import type { ShipmentWish } from "../search/index.ts";
+import { FRONT_NAMES, type FrontName, type ShipmentWish } from "../search/index.ts";
 
 export interface BlendFlags {
   readonly blend?: boolean;
@@ -10,6 +10,8 @@ export interface BlendFlags {
   readonly within?: string;
   readonly lineCost?: string;
   readonly shipmentCost?: string;
+  readonly front?: string;
+  readonly ladder?: string;
   readonly solverTime?: string;
 }
 
@@ -19,6 +21,8 @@ export interface BlendWish {
   readonly within?: number;
   readonly lineCost?: number;
   readonly shipments?: ShipmentWish;
+  readonly fronts?: readonly FrontName[];
+  readonly ladder?: number;
   readonly seconds?: number;
 }
 
@@ -28,6 +32,8 @@ const NAMES = [
   ["within", "--within"],
   ["lineCost", "--line-cost"],
   ["shipmentCost", "--shipment-cost"],
+  ["front", "--front"],
+  ["ladder", "--ladder"],
   ["solverTime", "--solver-time"],
 ] as const;
 
@@ -85,7 +91,7 @@ export function readBlendFlags(flags: BlendFlags): Read<BlendWish | null> {
     });
   }
   const faults: Refusal[] = [];
-  const { maxTypes, within, lineCost, shipmentCost, solverTime } = flags;
+  const { maxTypes, within, lineCost, shipmentCost, front, ladder, solverTime } = flags;
   const wish: { -readonly [K in keyof BlendWish]: BlendWish[K] } = { explain: flags.explain === true };
   if (maxTypes !== undefined) {
     if (/^\d{1,3}$/.test(maxTypes) && Number(maxTypes) >= 1 && Number(maxTypes) <= 100)
@@ -105,6 +111,18 @@ export function readBlendFlags(flags: BlendFlags): Read<BlendWish | null> {
     const read = readShipments(shipmentCost);
     if (read !== null) wish.shipments = read;
     else faults.push(refusal("--shipment-cost", shipmentCost, SHIPMENTS));
+  }
+  if (front !== undefined) {
+    const names = front.split(",").map((name) => name.trim());
+    const known = names.flatMap((name) => FRONT_NAMES.filter((one) => one === name));
+    if (known.length === names.length && new Set(known).size === known.length) wish.fronts = known;
+    else faults.push(refusal("--front", front, `one or more of ${FRONT_NAMES.join(", ")}, with commas between`));
+  }
+  if (ladder !== undefined) {
+    const read = parseQuantity(ladder, "fraction");
+    if (read.ok && read.value > 0 && read.value <= 0.95) wish.ladder = read.value;
+    else
+      faults.push(refusal("--ladder", ladder, 'how far below and above the energy asked, such as "50 %", up to 95 %'));
   }
   if (solverTime !== undefined) {
     const read = parseQuantity(solverTime, "time");

@@ -3,6 +3,7 @@
 import { visible } from "../order/index.ts";
 import { formatQuantity } from "../quantity/index.ts";
 import type { BlendPlan, BlendResult, BlendString, LayoutResult, WorstShare } from "../search/index.ts";
+import { frontText, ladderText } from "./blendFrontText.ts";
 import { loosenWords, proofSentence } from "./blendWords.ts";
 import { titleOf, VERDICTS } from "./findingWords.ts";
 import { findingsText, hanging, money } from "./layoutText.ts";
@@ -31,6 +32,8 @@ export function blendText({ plan, single, width }: BlendText): string {
       : [wholeText("Cheapest blend", best, width), ...besideSingle(best, single, width)]),
     ...kept.map((one) => wholeText("The other engine's blend", one, width)),
     ...rivalText(plan, rivals, width),
+    ...plan.fronts.map((front) => frontText(front, plan.currency, width)),
+    ...(plan.ladder === null ? [] : [ladderText(plan.ladder, plan.currency, width)]),
     ...priceText(plan, width),
     leftOutText(plan, width),
     ...plan.notes.map((note) => wrap(`Note: ${note}`, width)),

@@ -81,7 +81,7 @@ export function explainText(plan: BlendPlan, width: number): string {
       ? ["There is no proof to explain: the search was stopped before one."]
       : proofSteps(certificate, plan);
   const numbered = steps.map((step, at) => wrap(`${at + 1}. ${step}`, width, "  "));
-  return `${[`How this is known\n${numbered.join("\n")}`, ...movesText(plan, width), ...worthText(plan, width)].join("\n\n")}\n`;
+  return `${[`How this is known\n${numbered.join("\n")}`, ...movesText(plan, width), ...stockText(plan, width), ...worthText(plan, width)].join("\n\n")}\n`;
 }
 
 function proofSteps(proof: NamedCertificate, plan: BlendPlan): readonly string[] {
@@ -144,6 +144,25 @@ function movesText({ priceMoves, currency }: BlendPlan, width: number): readonly
     );
   });
   return [`What prices would change the choice\n${lines.join("\n")}`];
+}
+
+function stockText({ stockMoves, currency }: BlendPlan, width: number): readonly string[] {
+  if (stockMoves.length === 0) return [];
+  const lines = stockMoves.map(({ part, move, units, change, next, proven }) => {
+    const amount = money(Math.abs(change ?? 0), currency ?? undefined);
+    const then =
+      next === null
+        ? proven
+          ? "no blend fits"
+          : "it is not known whether a blend fits"
+        : `${visible(next)} is the cheapest, ${change === 0 ? "at the same cost" : `${amount} ${(change ?? 0) > 0 ? "dearer" : "cheaper"}`}`;
+    const how =
+      move === "fewer"
+        ? `with fewer than ${units} of ${visible(part)}, on hand and bought,`
+        : `with ${units} of ${visible(part)} on sale,`;
+    return bullet(`${how} ${then}${proven ? "" : " (not proven)"}`, width);
+  });
+  return [`What stock would change the choice\n${lines.join("\n")}`];
 }
 
 const ROOM: readonly (readonly [keyof CeilingWorth, number, string])[] = [

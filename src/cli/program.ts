@@ -75,6 +75,8 @@ function build(ports: Ports, done: Done): Command {
     .option("--within <fraction>", 'with --blend: other kinds of blend up to so much dearer, "2 %"')
     .option("--line-cost <amount>", "with --blend: what ordering each part costs as such")
     .option("--shipment-cost <amounts>", 'with --blend: what a shipment costs, "6.50" or "North: 4.90; South: 12"')
+    .option("--front <names>", 'with --blend: least cost against "volume, mass, units, stress"')
+    .option("--ladder <fraction>", 'with --blend: cost steps from so much less energy to so much more, "50 %"')
     .option("--solver-time <time>", 'with --blend: time for the outside solver in hard cases; "10 s" unless told')
     .action(async (brief: string | undefined, flags: PlanFlags & BlendFlags) => {
       if (wantsBlend(flags)) {

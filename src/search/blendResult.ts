@@ -132,6 +132,54 @@ export interface CeilingWorth {
   readonly types: number;
 }
 
+/** How far the stock of a part may move before another blend is the cheapest. */
+export interface StockMove {
+  readonly part: string;
+  readonly move: "fewer" | "more";
+  /** `fewer`: with less than so many of them, on hand and bought, the blend cannot be built. `more`: so many must be on sale. */
+  readonly units: number;
+  /** Major money: what the cheapest costs more (or less) then; null when nothing fits. */
+  readonly change: number | null;
+  readonly next: string | null;
+  readonly proven: boolean;
+}
+
+export const FRONT_NAMES = ["volume", "mass", "units", "stress"] as const;
+export type FrontName = (typeof FRONT_NAMES)[number];
+
+/** SI (m3, kg, number, fraction of the rating), major money. */
+export interface BlendFrontPoint {
+  readonly amount: number;
+  readonly cost: number;
+  readonly lowerBound: number;
+  readonly id: string;
+  readonly proven: boolean;
+}
+
+export interface BlendFront {
+  readonly against: FrontName;
+  readonly points: readonly BlendFrontPoint[];
+}
+
+/** One step of the cost ladder: the cheapest blend for every need above `from` up to `to`. */
+export interface BlendLadderStep {
+  /** F of the basis; and J of a pulse. */
+  readonly from: number;
+  readonly to: number;
+  readonly energy: { readonly from: number; readonly to: number };
+  readonly cost: number;
+  readonly id: string;
+  readonly units: number;
+  readonly proven: boolean;
+  /** The brief's own need stands on this step. */
+  readonly asked: boolean;
+}
+
+export interface BlendLadder {
+  readonly end: "complete" | "out of reach" | "cut";
+  readonly steps: readonly BlendLadderStep[];
+}
+
 export interface EngineAnswer {
   readonly engine: string;
   /** Minor units; null where it says that nothing fits, or nothing cheaper. */
@@ -181,6 +229,10 @@ export interface BlendPlan {
   readonly loosen: readonly Loosen[];
   readonly winningPrices: readonly WinningPrice[];
   readonly priceMoves: readonly PriceMove[];
+  readonly stockMoves: readonly StockMove[];
+  /** Those that were asked for. */
+  readonly fronts: readonly BlendFront[];
+  readonly ladder: BlendLadder | null;
   readonly worth: CeilingWorth | null;
   readonly notes: readonly string[];
 }

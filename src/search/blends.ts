@@ -7,15 +7,17 @@ import { findAlternatives } from "./blend/alternatives.ts";
 import type { settleBlend } from "./blend/fallback.ts";
 import type { FoundBlend } from "./blend/singles.ts";
 import { assessBlend, kindOf } from "./blendAssess.ts";
+import { blendFronts, blendLadder } from "./blendFronts.ts";
 import { groupsOf } from "./blendGroups.ts";
 import { keepingLimits } from "./blendKept.ts";
 import { brokenLimit } from "./blendLimits.ts";
 import { costLoosened, loosenBlend } from "./blendLoosen.ts";
-import { type BlendWork, blendWork } from "./blendOptions.ts";
+import { type BlendDemand, type BlendWork, blendWork } from "./blendOptions.ts";
 import { priceMoves, winningPrices } from "./blendPrices.ts";
-import type { BlendPlan, BlendResult } from "./blendResult.ts";
+import type { BlendPlan, BlendResult, FrontName } from "./blendResult.ts";
 import { settleWork } from "./blendSettle.ts";
 import { UNNAMED } from "./blendShipments.ts";
+import { stockMoves } from "./blendStock.ts";
 import { nearOptions, worthOf } from "./blendWorth.ts";
 import type { Brief } from "./brief.ts";
 import { planCurrency, pricedIn } from "./currency.ts";
@@ -36,6 +38,10 @@ export interface BlendInput {
   readonly shipments?: ShipmentWish;
   /** List other kinds of blend up to so much dearer; 0.02 is 2 %. */
   readonly within?: number;
+  /** Fronts of cost against these. */
+  readonly fronts?: readonly FrontName[];
+  /** The cost ladder from so much less energy to so much more: 0.5 is from half to half more. */
+  readonly ladder?: number;
   /** Also work out what prices and ceilings are worth. */
   readonly explain?: boolean;
   /** Time for the outside solver, s; default 10. */
@@ -107,6 +113,15 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
     .filter(({ cost }) => cost <= most)
     .map((one): BlendResult => ({ ...made(one), certificate: null }))
     .filter((one) => !kinds.has(one.kind) && (!hasLimits(brief) || brokenLimit(one, brief) === null));
+  const nameOf = (one: FoundBlend, of: BlendWork): string =>
+    assessBlend({ groups: groupsOf(of, one.counts), terms, currency }).id;
+  const sweeps = {
+    demand,
+    currency: currency ?? "",
+    limits: side,
+    made: (one: FoundBlend, of: BlendWork, its: BlendDemand) =>
+      assessBlend({ groups: groupsOf(of, one.counts), terms: its.terms, currency }),
+  };
   const asked = { ...work, cheapest, currency: currency ?? "", limits: side };
   // What a price or a limit is worth is reckoned without the limits on the shot, so not where those decide.
   const detailed = explain && currency !== null && !none && limited === null;
@@ -139,6 +154,9 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
           : loosenBlend(demand, currency, side),
     winningPrices: currency === null ? [] : winningPrices(asked, work.unpriced),
     priceMoves: detailed ? priceMoves(asked, nearOptions(proof, cheapest!), (blend) => made(blend).id) : [],
+    stockMoves: detailed ? stockMoves({ work, demand, cheapest: cheapest!, currency, limits: side, nameOf }) : [],
+    fronts: currency === null ? [] : blendFronts(input.fronts ?? [], sweeps),
+    ladder: currency === null || input.ladder === undefined ? null : blendLadder(input.ladder, sweeps),
     worth: detailed ? worthOf(work.model, proof, cheapest!, minor) : null,
     notes: notesOf(input, work),
   });
@@ -149,7 +167,10 @@ function gapOf(cost: number, lower: number | null): number | null {
   return lower === null ? null : Math.max(0, cost - lower) / cost;
 }
 
-function notesOf({ brief, lineCost = 0 }: BlendInput, { types, senders }: BlendWork): readonly string[] {
+function notesOf(
+  { brief, lineCost = 0, fronts, ladder }: BlendInput,
+  { types, senders }: BlendWork,
+): readonly string[] {
   const notes = [
     "A blend is made of whole strings, each part in its least safe series count; resistors are bought for each group on its own.",
   ];
@@ -162,6 +183,8 @@ function notesOf({ brief, lineCost = 0 }: BlendInput, { types, senders }: BlendW
     notes.push(
       "A mix is kept only where its shot can be reckoned: a resistor, a coil or a short as the load, and the ESR and ESL of every part. At most twice the strings of a part that would meet the need alone are looked at.",
     );
+  if (hasLimits(brief) && ((fronts?.length ?? 0) > 0 || ladder !== undefined))
+    notes.push("Fronts and ladder leave the limits on the shot out of account.");
   if (senders.length > 0)
     notes.push(
       "A shipment is charged once for every supplier of whom capacitors, or resistors with a price, must be bought.",

@@ -3,11 +3,14 @@ export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
 export { assessBuiltBlend, type BuiltBlend, type BuiltGroup } from "./blendAssess.ts";
 export { type BlendFault, blendFaults } from "./blendFaults.ts";
 export type {
+  BlendFront,
+  BlendLadder,
   BlendPlan,
   BlendResult,
   BlendString,
   CeilingWorth,
   EngineAnswer,
+  FrontName,
   LimitedBlend,
   Loosen,
   NamedCertificate,
@@ -16,6 +19,7 @@ export type {
   WinningPrice,
   WorstShare,
 } from "./blendResult.ts";
+export { FRONT_NAMES } from "./blendResult.ts";
 export type { BlendInput } from "./blends.ts";
 export { planBlends } from "./blendsLoader.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";

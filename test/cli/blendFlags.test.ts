@@ -41,3 +41,12 @@ test("--shipment-cost: one amount for all, by supplier, or both; nothing twice",
   for (const bad of ["", "-1", "North", "North: ", ": 4", "1; 2", "North: 1; North: 2", "North: 1;"])
     expect(shipments(bad), bad).toEqual(["--shipment-cost"]);
 });
+
+test("--front and --ladder: names once each, a fraction below one", () => {
+  expect(wish({ front: "volume, stress", ladder: "50 %" })).toMatchObject({
+    fronts: ["volume", "stress"],
+    ladder: 0.5,
+  });
+  for (const front of ["", "life", "volume,volume", "volume;mass"]) expect(wish({ front })).toEqual(["--front"]);
+  for (const ladder of ["0 %", "100 %", "much"]) expect(wish({ ladder })).toEqual(["--ladder"]);
+});
