@@ -11,7 +11,16 @@ export type { Column } from "./column.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
 export { type ListedUnit, readPositions, type UnitList } from "./positions.ts";
-export { cheapest, isPriced, leastBuyable, type Purchase, purchase, toBuy, unitPriceAt } from "./purchase.ts";
+export {
+  breaksRise,
+  cheapest,
+  isPriced,
+  leastBuyable,
+  type Purchase,
+  purchase,
+  toBuy,
+  unitPriceAt,
+} from "./purchase.ts";
 export { type Catalogue, readCapacitors } from "./readCapacitors.ts";
 export { READING_COLUMNS, type Reading, type Readings, readReadings } from "./readings.ts";
 export {

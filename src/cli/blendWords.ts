@@ -9,7 +9,7 @@ import { bullet, wrap } from "./wrap.ts";
 /** How sure it is. */
 export function proofSentence(plan: BlendPlan): string {
   const { status, compared, provenBy, lowerBound, gap, currency, blends } = plan;
-  const among = `${compared} kinds of string compared.`;
+  const among = `${compared} ${compared === 1 ? "kind" : "kinds"} of string compared.`;
   if (status === "optimal" && plan.limited !== null)
     return `${among} The cheapest that keeps the limits on shot and faults is proven by trying: ${triedWords(plan)}`;
   if (status === "optimal") {
@@ -51,6 +51,7 @@ const LIMITS: Readonly<Record<Loosen["field"], readonly [name: string, dimension
   maxVolume: ["the most room", "volume"],
   maxMass: ["the most mass", "mass"],
   maxUnits: ["the most units", "count"],
+  "all ceilings": ["all limits on room, mass and units together", "count"],
   maxTypes: ["the most parts in one bank", "count"],
   energy: ["the energy of a pulse", "energy"],
 };
@@ -70,6 +71,8 @@ export function loosenWords({ field, from, to, change, cost, proven }: Loosen, c
   const then =
     cost === null || field === "maxCost" ? "" : `: then the cheapest costs ${money(cost, currency ?? undefined)}`;
   const least = proven ? "" : "; less may do";
+  if (field === "all ceilings")
+    return `raise ${name} by ${formatQuantity(change ?? 0, "fraction", { digits: 3, rounding: "up" })}${then}${least}`;
   return `${lower ? "lower" : "raise"} ${name} from ${show(from, "nearest")} to ${show(to ?? from, lower ? "down" : "up")}${percent}${then}${least}`;
 }
 

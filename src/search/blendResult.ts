@@ -95,7 +95,8 @@ export interface NamedCertificate {
 
 /** One limit loosened alone; the least change first. */
 export interface Loosen {
-  readonly field: "maxCost" | "maxVolume" | "maxMass" | "maxUnits" | "maxTypes" | "energy";
+  /** `all ceilings` is a factor on volume, mass and units together, from 1. */
+  readonly field: "maxCost" | "maxVolume" | "maxMass" | "maxUnits" | "all ceilings" | "maxTypes" | "energy";
   readonly from: number;
   readonly to: number | null;
   /** Relative change; null where this limit alone cannot. */

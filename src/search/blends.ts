@@ -1,7 +1,7 @@
 // The front door of blends: brief and parts to the cheapest mix of strings, its proof, its rivals, and what would change it.
 
 import { FIT, requiredCapacitance } from "../bank/index.ts";
-import { type Capacitor, DEFAULT_FAMILY, isPriced, type ResistorFamily } from "../catalog/index.ts";
+import { breaksRise, type Capacitor, DEFAULT_FAMILY, isPriced, type ResistorFamily } from "../catalog/index.ts";
 import { accepted, minorDigits, type Read, toMajor } from "../quantity/index.ts";
 import { findAlternatives } from "./blend/alternatives.ts";
 import type { settleBlend } from "./blend/fallback.ts";
@@ -14,6 +14,7 @@ import { brokenLimit } from "./blendLimits.ts";
 import { costLoosened, loosenBlend } from "./blendLoosen.ts";
 import { type BlendDemand, type BlendWork, blendWork } from "./blendOptions.ts";
 import { priceMoves, winningPrices } from "./blendPrices.ts";
+import type { SolveApart } from "./blendProof.ts";
 import type { BlendPlan, BlendResult, FrontName } from "./blendResult.ts";
 import { settleWork } from "./blendSettle.ts";
 import { UNNAMED } from "./blendShipments.ts";
@@ -48,6 +49,8 @@ export interface BlendInput {
   readonly seconds?: number;
   /** A steady clock, ms. Without it no engine that cannot tell its own time-out is asked. */
   readonly clock?: () => number;
+  /** Where the second engine runs so that it can be ended; without it, in this thread, on smaller cores. */
+  readonly apart?: SolveApart;
   readonly stop?: () => boolean;
   /** Settles the model; another may be put in its place, as a test does. */
   readonly settle?: typeof settleBlend;
@@ -185,6 +188,14 @@ function notesOf(
     );
   if (hasLimits(brief) && ((fronts?.length ?? 0) > 0 || ladder !== undefined))
     notes.push("Fronts and ladder leave the limits on the shot out of account.");
+  const rising = types
+    .map(({ unit }) => unit)
+    .filter(breaksRise)
+    .map(({ part }) => part);
+  if (rising.length > 0)
+    notes.push(
+      `A larger quantity has a higher unit price in the list of ${[...new Set(rising)].slice(0, 5).join(", ")}${rising.length > 5 ? " and others" : ""}: legal, and taken as it stands.`,
+    );
   if (senders.length > 0)
     notes.push(
       "A shipment is charged once for every supplier of whom capacitors, or resistors with a price, must be bought.",

@@ -2,6 +2,7 @@
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
 export { assessBuiltBlend, type BuiltBlend, type BuiltGroup } from "./blendAssess.ts";
 export { type BlendFault, blendFaults } from "./blendFaults.ts";
+export type { SolveApart } from "./blendProof.ts";
 export type {
   BlendFront,
   BlendLadder,
@@ -21,7 +22,7 @@ export type {
 } from "./blendResult.ts";
 export { FRONT_NAMES } from "./blendResult.ts";
 export type { BlendInput } from "./blends.ts";
-export { planBlends } from "./blendsLoader.ts";
+export { planBlends, solveWholeHere } from "./blendsLoader.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";
 export { BUS_LENGTHS } from "./briefFaults.ts";
 export { unitLimit } from "./candidate.ts";

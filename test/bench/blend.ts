@@ -127,7 +127,7 @@ async function hardRegime(size: BlendBenchSize): Promise<BenchRow[]> {
       stock: 0.3,
       mostStrings: 400,
     });
-    const own = await timed(() => settleBlend(instance.model));
+    const own = await timed(() => settleBlend(instance.model, { seconds: 60 }));
     const natural = await timed(() => solveWithHighs(tierProgram(instance, false), { seconds: 60 }));
     const tight = await timed(() => solveWithHighs(tierProgram(instance, true), { seconds: 60 }));
     ratios.push(Math.min(natural.ms, tight.ms) / own.ms);

@@ -5,6 +5,7 @@ import { planBlends } from "../../search/index.ts";
 import { type BlendFlags, readBlendFlags } from "../blendFlags.ts";
 import { blendText } from "../blendText.ts";
 import { explainText } from "../blendWords.ts";
+import { engineApart } from "../engineThread.ts";
 import { EXIT } from "../exit.ts";
 import type { Ports } from "../ports.ts";
 import { tell } from "../tell.ts";
@@ -31,7 +32,17 @@ export async function planBlendCommand(
   const strange = unknownSuppliers(wish.value?.shipments?.named ?? {}, [...parts, ...families]);
   if (strange.length > 0) return tell(ports, strange, flags.json);
   const clock = (): number => performance.now();
-  const blends = await planBlends({ brief: settings.brief, parts, families, ...wish.value, clock, ...engines });
+  const entry = ports.background?.entry ?? null;
+  const apart = entry === null ? {} : { apart: engineApart(entry) };
+  const blends = await planBlends({
+    brief: settings.brief,
+    parts,
+    families,
+    ...wish.value,
+    clock,
+    ...apart,
+    ...engines,
+  });
   if (!blends.ok) return tell(ports, blends.refusals, flags.json);
   tellFaults(stock, ports);
   const { blends: found, ...search } = blends.value;
