@@ -1,7 +1,7 @@
 // Runs the second engine of a blend in a thread of its own and ends it when its time is up.
 
-import { Worker } from "node:worker_threads";
 import type { SolveApart } from "../search/index.ts";
+import { startThread } from "./jobs.ts";
 
 type Program = Parameters<SolveApart>[0];
 type Answer = Awaited<ReturnType<SolveApart>>;
@@ -17,7 +17,7 @@ const UNKNOWN: Answer = { status: "unknown", why: "time" };
 export const engineApart =
   (entry: URL): SolveApart =>
   async (program, milliseconds) => {
-    const worker = new Worker(entry);
+    const worker = startThread(entry);
     try {
       return await new Promise<Answer>((resolve) => {
         const timer = setTimeout(() => resolve(UNKNOWN), milliseconds);

@@ -1,15 +1,14 @@
 // A blend in full: every group of strings assessed, and the bank that they make together.
 
-import { type Layout, pulseEnergy } from "../bank/index.ts";
-import { type Capacitor, isPriced, type ResistorFamily } from "../catalog/index.ts";
+import { pulseEnergy } from "../bank/index.ts";
 import { hazardFindings } from "../hazard/index.ts";
-import { minorDigits, toMajor } from "../quantity/index.ts";
+import { toMajor } from "../quantity/index.ts";
 import { assess } from "./assess.ts";
 import { bleedOf } from "./blendBleed.ts";
+import { type BuiltGroup, costOf, shipmentsOf } from "./blendCost.ts";
 import { blendFindings } from "./blendFindings.ts";
 import { groupLimits, isLimitFinding } from "./blendLimits.ts";
-import type { BlendCost, BlendResult, BlendString, WorstShare } from "./blendResult.ts";
-import { senderOf, shipmentOf, UNNAMED } from "./blendShipments.ts";
+import type { BlendResult, BlendString, WorstShare } from "./blendResult.ts";
 import { type BuyingTerms, resistorsOf, type StringType } from "./blendString.ts";
 import type { Brief } from "./brief.ts";
 import { pricedIn } from "./currency.ts";
@@ -26,14 +25,6 @@ export interface BlendMade {
   readonly groups: readonly Group[];
   readonly terms: BuyingTerms;
   readonly currency: string | null;
-}
-
-/** A group as somebody built or means to build it, safe or not. */
-export interface BuiltGroup {
-  readonly unit: Capacitor;
-  readonly layout: Layout;
-  /** Families that its resistors are chosen from. */
-  readonly families: readonly ResistorFamily[];
 }
 
 export interface BlendBuilt {
@@ -185,55 +176,4 @@ function worstOf(layouts: readonly LayoutResult[], value: (layout: LayoutResult)
     if (worst === null || here / limit > worst.value / worst.limit) worst = { part: layout.part, value: here, limit };
   }
   return worst;
-}
-
-interface Sent {
-  readonly supplier: string | null;
-  /** Minor units. */
-  readonly cost: number;
-}
-
-/** Suppliers of whom anything must be bought at a known price, each once, where a shipment costs something. */
-function shipmentsOf(
-  groups: readonly BuiltGroup[],
-  layouts: readonly LayoutResult[],
-  terms: BuyingTerms,
-): readonly Sent[] {
-  const senders = new Set<string>();
-  layouts.forEach(({ purchase, balance }, at) => {
-    const { unit, families } = groups[at]!;
-    if ((purchase.capacitors?.bought ?? 0) > 0) senders.add(senderOf(unit));
-    const family = families.find((one) => one.family === balance?.family);
-    if (family !== undefined && isPriced(family) && (purchase.resistors?.bought ?? 0) > 0)
-      senders.add(senderOf(family));
-  });
-  return [...senders]
-    .map((name): Sent => ({ supplier: name === UNNAMED ? null : name, cost: shipmentOf(terms, name) }))
-    .filter(({ cost }) => cost > 0);
-}
-
-function costOf(
-  strings: readonly BlendString[],
-  lineCost: number,
-  shipments: readonly Sent[],
-  currency: string | null,
-): BlendCost | null {
-  if (currency === null) return null;
-  const scale = 10 ** minorDigits(currency);
-  const minor = (amount: number | null | undefined): number => Math.round((amount ?? 0) * scale);
-  const capacitors = strings.reduce((sum, { cost }) => sum + minor(cost?.capacitors), 0);
-  const resistors = strings.reduce((sum, { cost }) => sum + minor(cost?.resistors), 0);
-  const lines = lineCost * strings.filter((one) => one.bought > 0).length;
-  const sent = shipments.reduce((sum, { cost }) => sum + cost, 0);
-  const unpriced = new Set(strings.flatMap(({ cost }) => cost?.unpriced ?? []));
-  const known = !unpriced.has("balancing resistors");
-  return {
-    capacitors: capacitors / scale,
-    resistors: known || resistors > 0 ? resistors / scale : null,
-    lines: lines / scale,
-    shipments: sent / scale,
-    total: (capacitors + resistors + lines + sent) / scale,
-    currency,
-    unpriced: [...unpriced],
-  };
 }

@@ -1,6 +1,7 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
-export { assessBuiltBlend, type BuiltBlend, type BuiltGroup } from "./blendAssess.ts";
+export { assessBuiltBlend, type BuiltBlend } from "./blendAssess.ts";
+export type { BuiltGroup } from "./blendCost.ts";
 export { type BlendFault, blendFaults } from "./blendFaults.ts";
 export type { SolveApart } from "./blendProof.ts";
 export type {
