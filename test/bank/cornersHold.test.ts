@@ -145,7 +145,7 @@ describe("worstAtHold(case)", () => {
         R,
         q: 0.1 * draw(),
         V: 1,
-        hold: (10 ** (2 * draw() - 2) / n) * Math.min(1, (R ?? 1) * n),
+        hold: 10 ** (2.5 * draw() - 2) * Math.min(1, (R ?? 1) * n),
       };
       const { phase, seconds } = asNamed(given);
       if (seconds === 0) seen.start++;
