@@ -51,6 +51,7 @@ describe("parseQuantity(text, dimension): bad numbers", () => {
     ["470 kkF", "capacitance", "unknown-unit"],
     ["5 V\n6 V", "voltage", "not-a-number"],
     ["4K7/2", "resistance", "unknown-unit"],
+    ["-4k7", "voltage", "unknown-unit"],
     ["4m7V", "capacitance", "unknown-unit"],
     ["4m7 uF", "capacitance", "unknown-unit"],
     ["2k2A", "voltage", "unknown-unit"],
@@ -236,6 +237,7 @@ describe("parseQuantity(text, dimension): units", () => {
   });
   test("with decimal commas known, 1,500 is 1.5", () =>
     expect(value("1,500 V", "voltage", { decimalComma: true })).toBe(1.5));
+  test("a count has no unit to give", () => expect(example("count")).not.toContain("unit"));
   test("every example that we give is accepted", () => {
     for (const dimension of Object.keys(DIMENSIONS) as Dimension[]) {
       const shown = /such as "?([^"]+)"?$/.exec(example(dimension))?.[1] ?? "none";
