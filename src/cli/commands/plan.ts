@@ -6,6 +6,7 @@ import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { lampFits } from "../lampFits.ts";
+import { LAYOUT_VERSION } from "../layoutInput.ts";
 import { type LotPlanned, lotSentence, planLot } from "../lotPlan.ts";
 import { type MeasuredPlanned, measuredJson, planMeasured, savedText } from "../measuredPlan.ts";
 import { planText } from "../planText.ts";
@@ -107,7 +108,15 @@ export function planJson({ settings, stock, result, lot, drawn }: Planned): obje
       : drawn !== null
         ? { measured: { part: drawn.part, units: drawn.units } }
         : {};
-  return { ...result, ...measured, ...lampFits(result, stock.parts), cautions, inputs: inputsJson(settings, stock) };
+  const layouts = result.layouts.map((layout) => ({ version: LAYOUT_VERSION, ...layout }));
+  return {
+    ...result,
+    layouts,
+    ...measured,
+    ...lampFits(result, stock.parts),
+    cautions,
+    inputs: inputsJson(settings, stock),
+  };
 }
 
 export function planWords({ settings, stock, rank, result, lot, drawn }: Planned, width: number): string {
