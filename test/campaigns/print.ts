@@ -1,4 +1,4 @@
-// Prints sheets and labels on A4 and Letter with a headless browser and looks at every page: `node print.mjs [FOLDER]`, bundled with
+// Prints sheets and labels on A4 and Letter with a headless browser and looks at every page: `node print.mjs [FOLDER [BANK...]]`, bundled with
 // esbuild --packages=external. Wants chromium (CHROMIUM, else /usr/bin/chromium) and pdftotext. PDFs stay in FOLDER when it is named.
 //
 // Looked for: a table, drawing or line that passes the right edge; a cell whose text is cut; a page without the cautions; a heading,
@@ -124,7 +124,8 @@ const folder = asked ?? mkdtempSync(join(tmpdir(), "print-"));
 mkdirSync(folder, { recursive: true });
 const browser = await chromium.launch({ executablePath: process.env.CHROMIUM ?? "/usr/bin/chromium", args: FLAGS });
 let bad = 0;
-for (const [name, input] of Object.entries(BANKS))
+const names = process.argv.slice(3);
+for (const [name, input] of Object.entries(BANKS).filter(([bank]) => names.length === 0 || names.includes(bank)))
   for (const paper of PAPERS) {
     const sheet = sheetOf(input);
     const labels = labelsOf(input);
