@@ -4,8 +4,9 @@ import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts
 import { CAPACITOR_COLUMNS, type Capacitor, type ValueState } from "./capacitor.ts";
 import { plateCapacitor } from "./plate.ts";
 import { isPriced } from "./purchase.ts";
+import type { Row } from "./row.ts";
 import { assumedLeakage, namedStates, polarityOf, RULES } from "./states.ts";
-import { MOST_FAULTS, positions, type Row, readTable } from "./table.ts";
+import { MOST_FAULTS, positions, readTable } from "./table.ts";
 
 export interface Catalogue {
   readonly parts: readonly Capacitor[];

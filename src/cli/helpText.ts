@@ -77,6 +77,13 @@ ${LAYOUT}${BRIEF}${STATUS}`,
 Examples:
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --output order.csv
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --format md
+  $ joulewright order brief.json --layout chosen.json --catalog mine.csv --edited order.csv --output order.csv --force
+
+--edited takes a bill as CSV back from a spreadsheet. Kept are rows of your own (a blank or "own line" under line), columns
+of your own, and what you wrote under item, value, rating, quantity needed, on hand, pack, unit price, currency, supplier,
+order code, alternates, status and note; all else is reckoned anew. A row with your quantity or price is reckoned from its
+own cells, without price breaks. A blank cell of yours stays blank; delete a row to have it made anew. The column "mark"
+tells what is yours: leave it as it is. What was taken over is told.
 ${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
   place: `
 Examples:
@@ -118,4 +125,19 @@ Examples:
   $ joulewright parts - < mine.csv
 
 Capacitors, resistors, fuses and measured units are told apart by their headings.${STATUS}`,
+  completion: `
+Examples:
+  $ joulewright completion bash > ~/.local/share/bash-completion/completions/joulewright
+  $ joulewright completion zsh > ~/.zfunc/_joulewright
+  $ joulewright completion fish > ~/.config/fish/completions/joulewright.fish
+
+For one session of bash: source <(joulewright completion bash). For zsh the folder must be in fpath before compinit runs.
+${STATUS}`,
+  manual: `
+Examples:
+  $ joulewright manual | man -l -
+  $ joulewright manual > joulewright.1
+
+An installed package brings the page along: man joulewright.
+${STATUS}`,
 } as const;

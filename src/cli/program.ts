@@ -9,6 +9,7 @@ import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
 import type { PulseFlags } from "./commands/pulse.ts";
+import { treeOf } from "./commandTree.ts";
 import type { CommissionFlags } from "./commissionFlags.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
@@ -54,7 +55,8 @@ function withPaper(command: Command): Command {
     .option("--force", "replace the file if it exists");
 }
 
-function build(ports: Ports, done: Done): Command {
+/** The whole command tree. */
+export function build(ports: Ports, done: Done): Command {
   const program = new Command("joulewright");
   const say = (write: (text: string) => void) => (text: string) => write(visibleLines(text));
   program
@@ -74,7 +76,10 @@ function build(ports: Ports, done: Done): Command {
     .description("Find every layout that does the job, ranked.")
     .option("--limit <count>", "how many layouts are printed; 0 for all", "20")
     .option("--rank <by>", "cost, units, volume, mass or stress", "cost")
-    .option("--measured <file>", "measured units, CSV, for the basis measured: they decide how many in series")
+    .option(
+      "--measured <file>",
+      "measured units, CSV: for the basis measured, where they decide how many in series, or statistical, drawn from them",
+    )
     .option("--part <name>", "the part that was measured")
     .option("--uncertainty <fraction>", "of one measured capacitance against another")
     .option("--brief-schema", "print the JSON Schema of the brief and stop")
@@ -117,6 +122,7 @@ function build(ports: Ports, done: Done): Command {
   withLayout(program.command("order"))
     .description("Write the bill of materials of one layout.")
     .option("--fuses <file>", "fuse catalogue, CSV: adds a fuse for each unit to the bill")
+    .option("--edited <file>", "an edited bill, CSV: its own lines, prices and choices are kept; - is standard input")
     .option("--format <format>", "csv, json, md or html; else by the ending of --output, else csv")
     .option("--output <file>", "write to a file, whole or not at all")
     .option("--force", "replace the file if it exists")
@@ -198,6 +204,23 @@ function build(ports: Ports, done: Done): Command {
     .action(async (paths: readonly string[], flags: PartsFlags) => {
       const { partsCommand } = await import("./commands/parts.ts");
       done(partsCommand(paths, flags, ports));
+    });
+  program
+    .command("completion")
+    .description("Print a script that completes commands and options in a shell.")
+    .argument("<shell>", "bash, zsh or fish")
+    .addHelpText("after", HELP.completion)
+    .action(async (shell: string) => {
+      const { completionCommand } = await import("./commands/completion.ts");
+      done(completionCommand(shell, treeOf(program), ports));
+    });
+  program
+    .command("manual")
+    .description("Print the manual page, for man.")
+    .addHelpText("after", HELP.manual)
+    .action(async () => {
+      const { manualCommand } = await import("./commands/manual.ts");
+      done(manualCommand(treeOf(program), ports));
     });
   return program;
 }

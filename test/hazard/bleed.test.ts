@@ -49,6 +49,19 @@ describe("timeToEnergy, voltageAfter, energyAtSafe, largestBleed", () => {
     expect(timeToEnergy(A5, 2000)).toBe(0);
   });
 
+  test("the plus tolerance of C counts in the joules too: A5 at +20 % holds 1267.2 J full and 1.782 J at 60 V", () => {
+    near(energyAtSafe(WORST), 1.782);
+    near(timeToEnergy(WORST, 0.25), ((82000 * 1.05 * 825e-6 * 1.2) / 2) * Math.log(1267.2 / 0.25));
+    expect(timeToEnergy(WORST, 1267.3)).toBe(0);
+    expect(timeToEnergy({ ...WORST, resistance: Number.POSITIVE_INFINITY }, 2000)).toBe(0);
+  });
+
+  test("at the very limit it is there: 0 s, also through an open path", () => {
+    const open = { ...A5, resistance: Number.POSITIVE_INFINITY };
+    expect(bleedTime({ ...open, voltage: 60 })).toBe(0);
+    expect(timeToEnergy(open, (825e-6 * 1600 ** 2) / 2)).toBe(0);
+  });
+
   test("A5: at most 110749.459 ohm for 300 s, 87896.3963 ohm with tolerances", () => {
     near(largestBleed(A5, 300), 110749.459);
     near(largestBleed(WORST, 300), 87896.3963);

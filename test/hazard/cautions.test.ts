@@ -35,6 +35,13 @@ test("every caution and deference has its own id, a short line of at most 78 pla
   }
 });
 
+test("the standing cautions and the deference are these, by their ids", () => {
+  expect(standing).toEqual(expect.arrayContaining(["eyes-and-ears", "not-alone"]));
+  expect(DEFERENCE.map((one) => one.id)).toEqual(
+    expect.arrayContaining(["not-approval", "rules-second-hand", "clearance-advice"]),
+  );
+});
+
 test("deference names the standard, the data sheet and the person responsible", () => {
   const text = DEFERENCE.map((one) => one.long).join(" ");
   for (const word of ["standard", "data sheet", "responsible", "second hand", "memory"]) expect(text).toContain(word);

@@ -38,6 +38,9 @@ describe("chargeChecks({ capacitance, voltage })", () => {
   test("at 15 kV itself both the charge and the energy are asked: the stricter holds", () =>
     expect(found(3.05e-9, 15000)).toMatchObject({ "iec-61010-charge 0.000045": true, "iec-61010-energy 0.35": false }));
 
+  test("no more than is allowed is allowed: 1 uF at 45 V holds just 45 uC", () =>
+    expect(found(1e-6, 45)["iec-61010-charge 0.000045"]).toBe(false));
+
   test("what was from memory says so", () =>
     expect(
       chargeChecks({ capacitance: 1e-9, voltage: 2e4 }).find((one) => one.ruleId === "iec-61010-energy")!.tag,

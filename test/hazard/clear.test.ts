@@ -1,7 +1,7 @@
 // Time until a rule is cleared for good: the worked number, each breakpoint, and a slow walk down the decay as brute force.
 import { describe, expect, test } from "vitest";
 import { clearingVoltage, timeUntilClear } from "../../src/hazard/clear.ts";
-import { energyClass } from "../../src/hazard/energyClass.ts";
+import { ARTICLE_360, energyClass } from "../../src/hazard/energyClass.ts";
 
 /** The last moment at which the bank is hazardous, by looking at 400 000 moments of the decay. */
 function lastHazard({
@@ -29,6 +29,20 @@ describe("timeUntilClear({ capacitance, resistance, voltage })", () => {
     expect(timeUntilClear({ capacitance: 825e-6, resistance: Number.POSITIVE_INFINITY, voltage: 1600 })).toBe(Infinity);
     expect(timeUntilClear({ capacitance: 825e-6, resistance: 1e3, voltage: 100 })).toBe(0);
     expect(timeUntilClear({ capacitance: 825e-6, resistance: 1e3, voltage: 0 })).toBe(0);
+  });
+
+  test("through an open path at the clearing voltage itself: 0, not a product of nothing and for ever", () =>
+    expect(timeUntilClear({ capacitance: 825e-6, resistance: Number.POSITIVE_INFINITY, voltage: 100 })).toBe(0));
+
+  test("tiers in any order; a laxer tier above a stricter one never loosens it; two at one voltage count as the stricter", () => {
+    expect(clearingVoltage(12.5e-6, [...ARTICLE_360].reverse())).toBeCloseTo(400, 9);
+    // 8 uF: 1 J at 500 V; the laxer 50 J from 400 V on must not count, nor the 4 J that begin where the next tier does
+    const odd = [
+      { fromVoltage: 400, energy: 50 },
+      { fromVoltage: 0, energy: 1 },
+    ];
+    expect(clearingVoltage(8e-6, odd)).toBeCloseTo(500, 9);
+    expect(clearingVoltage(8e-6, [{ fromVoltage: 500, energy: 4 }, { fromVoltage: 500, energy: 1 }, ...odd])).toBe(500);
   });
 
   test("A5 of the methods page: 825 uF, 82 kohm, 1600 V: 187.565627 s, when it passes 100 V", () =>

@@ -39,6 +39,26 @@ describe("clearanceAdvice({ voltage, altitude, pollution })", () => {
     expect((found as { advised: number }).advised).toBeCloseTo(6.6e-3, 12);
   });
 
+  test("thin air widens the bench rule as well, and alone is outside the standard's scope", () => {
+    const found = advice({ voltage: 1000, altitude: 5000 }) as { byBench: number; factor: number };
+    expect(found.factor).toBeCloseTo(1.48, 12);
+    expect(found.byBench).toBeCloseTo(3e-3 * 1.48, 12);
+    expect(found).toMatchObject({ extrapolated: true });
+  });
+
+  test("10 000 m itself is read; a refusal says what would be", () => {
+    expect(advice({ voltage: 1000, altitude: 10e3 })).toMatchObject({ factor: 3.02 });
+    const said = [{ voltage: 1000, altitude: 10001 }, { voltage: 0 }, { voltage: 1e6 }].map((want) => {
+      const read = clearanceAdvice(want);
+      return read.ok ? null : [read.refusals[0]!.code, read.refusals[0]!.want];
+    });
+    expect(said).toEqual([
+      ["out-of-range", "at most 10 000 m"],
+      ["out-of-range", "a voltage above zero"],
+      ["out-of-range", "at most 100 kV"],
+    ]);
+  });
+
   test("inside the standard's scope it is not called extrapolated", () =>
     expect(advice({ voltage: 1500, altitude: 2000 })).toMatchObject({ extrapolated: false }));
 });

@@ -63,6 +63,12 @@ describe("dumpWindow(want)", () => {
     expect(window.least).toBe(100);
     expect(window.most).toBeCloseTo(5 / (1e-3 * Math.log(2000 / 60)), 9);
   });
+  test("one single value does both: the window is that value", () => {
+    const seconds = 0.1 * Math.log(2000 / 60);
+    expect(dumpWindow({ ...want, seconds, peakCurrent: 20 })).toEqual({ least: 100, most: 100 });
+  });
+  test("touch-safe already, and no time to do it in: any value that is gentle enough", () =>
+    expect(dumpWindow({ ...want, voltage: 60, seconds: 0 })?.most).toBe(Number.POSITIVE_INFINITY));
   test("null when no value is both gentle and quick", () => expect(dumpWindow({ ...want, peakCurrent: 1 })).toBeNull());
   test("already safe: any value that is gentle enough", () =>
     expect(dumpWindow({ ...want, voltage: 50 })).toEqual({ least: 2.5, most: Number.POSITIVE_INFINITY }));

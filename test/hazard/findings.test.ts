@@ -57,6 +57,41 @@ describe("hazardFindings(bank)", () => {
       source: "Moore-electrostatics",
     }));
 
+  test("each says of which state of the bank it speaks, in which unit and by which source", () =>
+    expect(hazardFindings(demo).map(({ id, state, unit, source }) => [id, state, unit, source])).toEqual([
+      ["energy-class", "holding", "J", "NFPA-70E"],
+      ["arc-blast", "holding", "J", "LBNL-hazard"],
+      ["energy-at-safe", "dumped", "J", "NFPA-70E"],
+      ["recovery", "stored", "V", "absorption-notes"],
+      ["bleed-time", "dumped", "s", "methods-derived"],
+    ]));
+
+  test("a warning says what to do about it, a pass what it is a pass of", () => {
+    const small = { ...demo, capacitance: 1e-9, voltage: 150 };
+    const notes = (bank: HazardOf) => hazardFindings(bank).map((found) => [found.id, found.verdict, found.note]);
+    expect(notes({ ...demo, capacitance: 1, bleedSeconds: 301 })).toEqual([
+      ["energy-class", "warn", expect.stringMatching(/interlock.*two ways to discharge/)],
+      ["arc-blast", "warn", expect.stringMatching(/remote control/)],
+      ["energy-at-safe", "warn", expect.stringMatching(/discharge to zero/)],
+      ["recovery", "warn", expect.stringMatching(/over the touch-safe voltage: leave the strap on/)],
+      ["bleed-time", "fail", expect.stringMatching(/slower than allowed/)],
+    ]);
+    expect(notes(small)).toEqual([
+      ["energy-class", "pass", expect.stringMatching(/below the threshold of stored energy at this voltage/)],
+      ["arc-blast", "pass", expect.stringMatching(/not an arc-blast hazard/)],
+      ["energy-at-safe", "pass", expect.stringMatching(/below the threshold/)],
+      ["recovery", "pass", expect.stringMatching(/^(?!.*Here that is over).*Leave the strap on\.$/)],
+      ["bleed-time", "pass", "within the time allowed"],
+    ]);
+  });
+
+  test("at the limit itself: the bleed is in time, the recovery just safe, the arc rule speaks from 100 V on", () => {
+    expect(one({ ...demo, bleedSeconds: 300 }, "bleed-time").verdict).toBe("pass");
+    expect(one({ ...demo, safeVoltage: one(demo, "recovery").value! }, "recovery").verdict).toBe("pass");
+    expect(verdicts({ ...demo, voltage: 100 })).toHaveProperty("arc-blast");
+    expect(verdicts({ ...demo, voltage: 99.99 })).not.toHaveProperty("arc-blast");
+  });
+
   test("margin is (limit - value)/limit", () => {
     for (const { value, limit, margin } of hazardFindings(demo))
       expect(margin).toBeCloseTo((limit! - value!) / limit!, 12);
