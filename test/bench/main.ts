@@ -5,6 +5,7 @@ import { benchBlend } from "./blend.ts";
 import { benchPlace } from "./place.ts";
 import { benchPulse } from "./pulse.ts";
 import { benchSearch } from "./search.ts";
+import { benchSheet } from "./sheet.ts";
 
 interface Row {
   readonly what: string;
@@ -17,6 +18,7 @@ const GROUPS: Readonly<Record<string, () => readonly Row[] | Promise<readonly Ro
   bank: benchBank,
   pulse: benchPulse,
   place: () => benchPlace(),
+  sheet: benchSheet,
   blend: () => benchBlend() as Promise<readonly Row[]>,
 };
 
