@@ -40,7 +40,7 @@ export function shotSection({ layout, unit, brief }: OtherInput): number | null 
 /** mm^2, rounded up to two figures. */
 const sectionWords = (section: number): string => {
   const square = section * 1e6;
-  const step = 10 ** (Math.floor(Math.log10(square)) - 1);
+  const step = Number(`1e${Math.floor(Math.log10(square)) - 1}`);
   return `at least ${Number((Math.ceil(square / step - 1e-9) * step).toPrecision(2))} mm2 of copper`;
 };
 
