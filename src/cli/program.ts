@@ -63,7 +63,10 @@ export function build(ports: Ports, done: Done): Command {
     .description("Find every layout that does the job, ranked.")
     .option("--limit <count>", "how many layouts are printed; 0 for all", "20")
     .option("--rank <by>", "cost, units, volume, mass or stress", "cost")
-    .option("--measured <file>", "measured units, CSV, for the basis measured: they decide how many in series")
+    .option(
+      "--measured <file>",
+      "measured units, CSV: for the basis measured, where they decide how many in series, or statistical, drawn from them",
+    )
     .option("--part <name>", "the part that was measured")
     .option("--uncertainty <fraction>", "of one measured capacitance against another")
     .option("--brief-schema", "print the JSON Schema of the brief and stop")
