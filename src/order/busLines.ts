@@ -51,7 +51,10 @@ function barWish(input: OtherInput, section: number | null): Wish {
     ...(section === null ? [] : [sectionWords(section)]),
   ];
   const long = bar === null ? "length unknown, because the unit's size is" : "length for units side by side in one row";
-  const wide = section === null ? "Section by the shot's current." : `Section for ${WARMING} K in one whole shot.`;
+  const wide =
+    section === null
+      ? "Section by the shot's current."
+      : `Section for ${WARMING} K in one whole shot through one bar; a dead short may pass more.`;
   return {
     item: "bus bar",
     line: "bus bars",

@@ -111,6 +111,54 @@ describe("withEdits(bill, edited, money)", () => {
     });
   });
 
+  test("what was chosen for another demand is kept, and to be checked again; what was left alone is made anew in silence", () => {
+    const copy = edit(made(), (rows) =>
+      at(rows, "dump relay", { value: "2.5 kV, normally closed", "unit price": "80" }),
+    );
+    const now = made();
+    const lines = now.lines.map((line) => ({ ...line, rating: line.rating.replaceAll("2 kV", "3 kV") }));
+    const bill = joined({ ...now, lines }, copy);
+    expect(lineOf(bill, "dump relay")).toMatchObject({
+      value: "2.5 kV, normally closed",
+      rating: "at least 3 kV dc",
+      purchase: 80,
+    });
+    expect(bill.changes?.filter(({ kind }) => kind === "check again")).toEqual([
+      expect.objectContaining({
+        line: "dump relay",
+        heading: "rating",
+        made: "at least 3 kV dc",
+        read: "at least 2 kV dc",
+      }),
+    ]);
+  });
+
+  test("a price that was written beside another part is not taken over, and that is told; a note is kept", () => {
+    const copy = edit(made(), (rows) =>
+      at(rows, "units", { "unit price": "2.10", "order code": "Z-9", note: "ask Ada" }),
+    );
+    const now = made({ price: 300 });
+    const lines = now.lines.map((line) => (line.line === "units" ? { ...line, item: "another-1000-400" } : line));
+    const bill = joined({ ...now, lines }, copy);
+    expect(lineOf(bill, "units")).toMatchObject({
+      item: "another-1000-400",
+      unitPrice: 3,
+      orderCode: "X-1",
+      note: "ask Ada",
+    });
+    expect(told(bill)).toEqual([
+      ["not taken over", "units", "unit price"],
+      ["not taken over", "units", "order code"],
+      ["kept", "units", "note"],
+    ]);
+    // With the part named by the builder the row is the builder's.
+    const named = edit(made(), (rows) => at(rows, "units", { item: "surplus-1000-400", "unit price": "2.10" }));
+    expect(lineOf(joined({ ...now, lines }, named), "units")).toMatchObject({
+      item: "surplus-1000-400",
+      unitPrice: 2.1,
+    });
+  });
+
   test("own lines and own columns come through, with their cost in the sum", () => {
     const copy = edit(made(), (rows) => [
       ...rows.slice(0, 3).map((row) => ({ ...row, shelf: "A3" })),
