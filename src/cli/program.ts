@@ -15,6 +15,7 @@ import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
 import type { PlaceFlags } from "./placeFlags.ts";
 import type { Ports } from "./ports.ts";
+import type { SheetFlags } from "./sheetFlags.ts";
 import { VERSION } from "./version.ts";
 
 type Done = (status: number) => void;
@@ -40,6 +41,18 @@ function withLayout(command: Command): Command {
     .option("--layout <file>", "one layout of plan --json; - is standard input")
     .option("--balance <resistance>", 'fix the balancing resistor, "24 kohm", or none')
     .option("--balance-tolerance <tolerance>", 'its tolerance, "5 %"');
+}
+
+/** What the paper is made with beside the layout. */
+function withPaper(command: Command): Command {
+  return command
+    .option("--measured <file>", "measured units, CSV: serials, places and bands come from them")
+    .option("--positions <file>", "with --measured: take this list of positions as built")
+    .option("--uncertainty <fraction>", 'of one measured capacitance against another, "0.3 %"')
+    .option("--earth <end>", "negative, positive, none or unknown: the end at the earth point")
+    .option("--paper <paper>", "A4 or Letter", "A4")
+    .option("--output <file>", "write to a file, whole or not at all")
+    .option("--force", "replace the file if it exists");
 }
 
 /** The whole command tree. */
@@ -142,6 +155,26 @@ export function build(ports: Ports, done: Done): Command {
     .action(async (brief: string | undefined, flags: PlaceFlags) => {
       const { placeCommand } = await import("./commands/place.ts");
       done(placeCommand(brief, flags, ports));
+    });
+  withPaper(withLayout(program.command("sheet")))
+    .description("Write the build sheet of one layout: drawings, wiring, tests, limits, hazard file.")
+    .option("--fuses <file>", "fuse catalogue, CSV: the fuse that does is drawn and wired")
+    .option("--rule <id>", "the rule that governs bleed times; else the brief's touch-safe voltage")
+    .option("--date <text>", "printed as given; no clock is read")
+    .option("--revision <text>", "printed as given")
+    .option("--format <format>", "html, md or json; else by the ending of --output, else html")
+    .addHelpText("after", HELP.sheet)
+    .action(async (brief: string | undefined, flags: SheetFlags) => {
+      const { sheetCommand } = await import("./commands/sheet.ts");
+      done(sheetCommand(brief, flags, ports));
+    });
+  withPaper(withLayout(program.command("labels")))
+    .description("Write labels to print and cut: units, stages or strings, spares.")
+    .option("--format <format>", "html or json; else by the ending of --output, else html")
+    .addHelpText("after", HELP.labels)
+    .action(async (brief: string | undefined, flags: SheetFlags) => {
+      const { labelsCommand } = await import("./commands/labels.ts");
+      done(labelsCommand(brief, flags, ports));
     });
   program
     .command("commission")

@@ -16,4 +16,5 @@ export { csvText } from "./csv.ts";
 export { type Money, withEdits } from "./editedBill.ts";
 export { type EditedFile, readEditedBill } from "./editedRows.ts";
 export { BILL_FORMATS, type BillFormat, billText } from "./formats.ts";
+export { markdownText } from "./markdown.ts";
 export { visible, visibleJson, visibleLines } from "./visible.ts";
