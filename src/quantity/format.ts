@@ -4,6 +4,7 @@
 // Source: [SI-brochure] 5.3.3 and 5.4 (read); [ISO80000-1] Annex B rule B (from memory).
 
 import { DIMENSIONS, type Dimension } from "./dimension.ts";
+import { tenTo } from "./power.ts";
 
 export type Rounding = "nearest" | "down" | "up";
 
@@ -55,7 +56,7 @@ export function roundTo(value: number, digits: number, rounding: Rounding = "nea
   if (!wrong) return near;
   // Counted in the last figure of the value itself: of what it was rounded to, 0.99999 down would lose a figure (0.999).
   const power = Number(value.toExponential(15).split("e")[1] ?? 0) - (digits - 1);
-  const last = Math.round(Number(`${near}`.includes("e") ? near / 10 ** power : `${near}e${-power}`));
+  const last = Math.round(Number(`${near}`.includes("e") ? near / tenTo(power) : `${near}e${-power}`));
   return Number(`${last + (rounding === "down" ? -1 : 1)}e${power}`);
 }
 
@@ -86,7 +87,7 @@ export function formatQuantity(
   const { symbol } = DIMENSIONS[dimension];
   if (rounded === 0) return `0 ${symbol}`;
   const power = Math.min(Math.max(Math.floor(Math.floor(Math.log10(Math.abs(rounded)) + 1e-12) / 3) * 3, -15), 12);
-  const mantissa = Number(`${rounded}`.includes("e") ? rounded / 10 ** power : `${rounded}e${-power}`);
+  const mantissa = Number(`${rounded}`.includes("e") ? rounded / tenTo(power) : `${rounded}e${-power}`);
   return `${trimZeros(figures(roundTo(mantissa, digits), digits))} ${PRINTED[power] ?? ""}${symbol}`;
 }
 
