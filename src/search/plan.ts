@@ -31,6 +31,8 @@ export interface PlanInput {
   readonly quick?: boolean;
   /** With the measured basis: whether the measured units, placed, share safely in a shape. */
   readonly judge?: Judge;
+  /** Called after each part: how many are done, of how many. */
+  readonly progress?: ((done: number, total: number) => void) | undefined;
   /** With the statistical basis: measured capacitances of the only part, F, at least LEAST_LOT; units are drawn from them. */
   readonly lot?: readonly number[];
 }
@@ -49,7 +51,16 @@ export function plan(input: PlanInput): Read<PlanResult> {
   const parts = pricedIn(distinct(input.parts), currency, brief);
   const families = pricedIn(given, currency, brief);
   const required = requiredCapacitance(brief);
-  const work: SweepInput = { parts, families, brief, required, currency, judge: input.judge ?? null, lot: input.lot };
+  const work: SweepInput = {
+    parts,
+    families,
+    brief,
+    required,
+    currency,
+    judge: input.judge ?? null,
+    progress: input.progress,
+    lot: input.lot,
+  };
   const wanted = parts.length >= SIEVED_FROM && limit > 0 && limit <= MOST_SIEVED ? { limit, rank } : null;
   const { table, count, refused: refusals } = sweep(work, { wanted });
   const rows = firstRows(table.count, limit, comparison(table, parts, rank));
