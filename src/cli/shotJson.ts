@@ -30,7 +30,7 @@ export function shotJson(
     method: discharge.method,
     voltage: report.voltage,
     bank: { capacitance: bank.capacitance, resistance: bank.esr, inductance: bank.esl },
-    bus: { ...bus.path, known: bus.path !== null, frequency: bus.frequency },
+    bus: { ...bus.path, known: bus.path !== null, frequency: bus.frequency, place: bus.place },
     unit: discharge.unit,
     envelope: report.envelope,
     charging: charge,

@@ -1,5 +1,6 @@
 // Contents page of pulse.
 export { type Bus, type BusGeometry, busOf } from "./bus.ts";
+export { type BusPlace, type Feed, type PlaceShares, taperOf } from "./busPlace.ts";
 export { unitShort } from "./chainFaults.ts";
 export { type Charge, type Charger, type ChargeTask, chargeOf } from "./charge.ts";
 export {

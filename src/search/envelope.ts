@@ -70,6 +70,7 @@ export function shotEnvelope({ brief, unit, shape, circuit, bank }: EnvelopeInpu
       },
       {
         ...circuit,
+        place: null,
         load: scaled(circuit.load, corner.resistance, corner.inductance),
         bus: bus && {
           resistance: bus.resistance * corner.resistance,

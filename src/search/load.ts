@@ -41,7 +41,10 @@ export const switchSchema = z.strictObject({
   oneWay: yesNo.default(false),
 });
 
-/** The bus, as measured (resistance, inductance) or by its shape, go and return together. */
+/**
+ * The bus, as measured (resistance, inductance) or by its shape, go and return together: the run from the load to the first
+ * unit. What lies along the row of units is told by `feed` with `pitch` or the two steps.
+ */
 export const busSchema = z.strictObject({
   resistance: fromZero("resistance").optional(),
   inductance: fromZero("inductance").optional(),
@@ -56,6 +59,13 @@ export const busSchema = z.strictObject({
   outer: above("length").optional(),
   wall: above("length").optional(),
   metal: word(["copper", "aluminium"]).default("copper"),
+  /** Where the load's leads join the row of units; without it their place on the bus is not counted. */
+  feed: word(["end", "centre"]).optional(),
+  /** From one unit (or string) to the next along a bus of this shape. */
+  pitch: above("length").optional(),
+  /** The same stretch of a bus of measured values, go and return together. */
+  stepResistance: fromZero("resistance").optional(),
+  stepInductance: fromZero("inductance").optional(),
 });
 
 /** A diode across the bank that blocks while the bank is the right way round. */

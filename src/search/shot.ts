@@ -90,7 +90,7 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   const slowest = chargeFor(brief, { capacitance: layout.capacitance.high ?? bank.capacitance, left });
   if (!charge.ok) return charge;
   if (!slowest.ok) return slowest;
-  const fired = { action: discharge.action, seconds: discharge.duration, share: discharge.unit.share };
+  const fired = { action: discharge.action, seconds: discharge.duration, share: discharge.unit.actionShare };
   const { heating } = firingOf(brief, bank, unit, { charge: charge.value, shot: fired });
   const { highest } = firingOf(brief, bank, unit, { charge: slowest.value, shot: fired });
   const own = bank.esl === null || circuit.bus === null ? null : bank.esl + circuit.bus.inductance;
