@@ -12,52 +12,19 @@
  * nothing while columns are alike in all their stages, and the worst column is taken so: high from end to end, the rest low.
  * Branches without mutual inductance. Source: [methods-derived], held against a circuit simulator.
  */
+
+import { type BusPath, type BusPlace, NO_PATH, type PlaceShares, pathTimes } from "./busPath.ts";
 import type { Ladder, LadderPlace } from "./ladder.ts";
 import { type LadderDrive, type LadderFigures, ladderCourse } from "./ladderCourse.ts";
-import type { BusPath } from "./load.ts";
-import type { PulseUnit } from "./unitDuty.ts";
-
-export type Feed = "end" | "centre";
-
-/** The piece of bus from one branch to the next, go and return together, and where the load's leads join. */
-export interface BusPlace {
-  readonly feed: Feed;
-  readonly segment: BusPath;
-}
 
 /** What of a bank its branches are made of. ESR and ESL must be known. */
 export interface Branches {
-  readonly unit: Pick<PulseUnit, "capacitance" | "toleranceLow" | "toleranceHigh">;
+  readonly unit: { readonly capacitance: number; readonly toleranceLow: number; readonly toleranceHigh: number };
   readonly esr: number;
   readonly esl: number;
   readonly series: number;
   readonly parallel: number;
 }
-
-/** How the current divides. Positions count from 1 along the bus, for an end feed from the feed on. */
-export interface PlaceShares {
-  readonly feed: Feed;
-  readonly segment: BusPath;
-  /** Of each position, all units alike. */
-  readonly alike: readonly number[];
-  /** The position that carries most, and its part of the peak and of the action (not its root) with the tolerance at its worst. */
-  readonly position: number;
-  readonly share: number;
-  readonly action: number;
-  /** Times an even part: by its place alone, by its capacitance alone. */
-  readonly byPlace: number;
-  readonly byCapacitance: number;
-  /** Most that any position carries when all are alike and the feed is the other one. */
-  readonly otherFeed: number;
-  /** s followed. */
-  readonly seconds: number;
-}
-
-const NONE: BusPath = { resistance: 0, inductance: 0 };
-const times = ({ resistance, inductance }: BusPath, factor: number): BusPath => ({
-  resistance: resistance * factor,
-  inductance: inductance * factor,
-});
 
 /** Branches by position, put on arms that leave the feed; `order` tells the position of each in the ladder's own order. */
 function laid(branches: readonly Omit<LadderPlace, "segment">[], { feed, segment }: BusPlace) {
@@ -71,14 +38,14 @@ function laid(branches: readonly Omit<LadderPlace, "segment">[], { feed, segment
   const middle = Math.floor(count / 2);
   const arms: readonly { readonly positions: readonly number[]; readonly first: BusPath }[] =
     feed === "end"
-      ? [{ positions: along(0, count), first: NONE }]
+      ? [{ positions: along(0, count), first: NO_PATH }]
       : count % 2 === 0
         ? [
-            { positions: [...along(0, middle)].reverse(), first: times(segment, 0.5) },
-            { positions: along(middle, count), first: times(segment, 0.5) },
+            { positions: [...along(0, middle)].reverse(), first: pathTimes(segment, 0.5) },
+            { positions: along(middle, count), first: pathTimes(segment, 0.5) },
           ]
         : [
-            { positions: [middle], first: NONE },
+            { positions: [middle], first: NO_PATH },
             { positions: [...along(0, middle)].reverse(), first: segment },
             { positions: along(middle + 1, count), first: segment },
           ];

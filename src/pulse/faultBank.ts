@@ -1,7 +1,7 @@
 // What the fault table must know of a bank, and the figures of it that several faults share.
 import type { Ties } from "../bank/index.ts";
+import type { BusPath } from "./busPath.ts";
 import type { Fuse } from "./fuse.ts";
-import type { BusPath } from "./load.ts";
 import type { ShortCase } from "./shortedUnit.ts";
 
 /** One unit as the fault table sees it; SI, null or left out is unknown. */

@@ -10,9 +10,10 @@
  * At one s the ladder folds from its far ends to the feed as sources in parallel and in series, and unfolds again: as many
  * sums as there are branches. A step is x(h) = -(1/h) sum of K_i X(z_i/h) over the poles z_i of the rational
  * (60 + 24 z + 3 z^2)/(60 - 36 z + 9 z^2 - z^3) that stands for e^z: order 5, damps what is too fast to follow, takes any R,
- * L or segment of zero. Source: [Vlach-Singhal] stepping by the inverse transform; [methods-derived] the fold.
+ * L or segment of zero. Source: [methods-derived] the fold; stepping by the
+ * inverse transform is Vlach's and Singhal's way, from memory.
  */
-import type { BusPath } from "./load.ts";
+import type { BusPath } from "./busPath.ts";
 
 /** One branch and the piece of bus between it and the next thing nearer the feed. */
 export interface LadderPlace {

@@ -1,6 +1,7 @@
 // A whole shot of a ladder: each branch's peak current and action, by steps that keep to an error.
+
+import type { BusPath } from "./busPath.ts";
 import { type Ladder, type LadderEnd, type LadderState, ladderStep } from "./ladder.ts";
-import type { BusPath } from "./load.ts";
 
 /** What drives the ladder: its own load, or the bank's current as already known [A] at a time [s]. */
 export type LadderDrive =

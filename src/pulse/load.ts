@@ -1,6 +1,6 @@
 // What hangs on the bank: the load, the bus, the switch and the clamp, as data; and the faults such data can have.
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
-import type { BusPlace } from "./busPlace.ts";
+import type { BusPath, BusPlace } from "./busPath.ts";
 import type { Lamp } from "./lamp.ts";
 import { checkLamp } from "./lamp.ts";
 import { type CurrentSample, checkSamples } from "./samples.ts";
@@ -32,12 +32,6 @@ export interface Switch {
 export interface Clamp {
   readonly drop: number;
   readonly resistance: number;
-}
-
-/** What the bus adds to the loop. */
-export interface BusPath {
-  readonly resistance: number;
-  readonly inductance: number;
 }
 
 /** Everything outside the bank. `bus: null` is an unknown bus, which is not a bus of nothing. */

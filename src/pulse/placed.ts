@@ -1,5 +1,6 @@
 // The shares by place of one computed shot: what of the circuit drives the ladder, and for how long.
-import { type PlaceShares, placeShares, taperOf } from "./busPlace.ts";
+import type { PlaceShares } from "./busPath.ts";
+import { placeShares, taperOf } from "./busPlace.ts";
 import type { LadderDrive } from "./ladderCourse.ts";
 import { type Circuit, linearPartOf } from "./load.ts";
 import type { PulseBank } from "./loopMesh.ts";

@@ -13,7 +13,7 @@
  */
 import type { Ties } from "../bank/index.ts";
 import type { Finding } from "../quantity/index.ts";
-import type { PlaceShares } from "./busPlace.ts";
+import type { PlaceShares } from "./busPath.ts";
 import { atMost, type Bound } from "./verdict.ts";
 
 /** What the maker allows one unit in one shot; null is not known. A, V/s, fraction of the charge voltage, A^2 s. */

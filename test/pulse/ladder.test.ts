@@ -1,4 +1,4 @@
-// Source: [Vlach-Singhal] stepping by the inverse transform; the single branch against the closed form of [Cona].
+// Source: [methods-derived] stepping by the inverse transform; the single branch against the closed form of [Cona].
 import { describe, expect, test } from "vitest";
 import { type Ladder, type LadderState, ladderStep } from "../../src/pulse/ladder.ts";
 import { dischargeAt } from "../../src/pulse/rlc.ts";
