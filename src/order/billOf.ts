@@ -31,7 +31,7 @@ export function billOf({ layout, unit, families, brief, currency, cautions, fuse
     ...resistorLines(layout, family),
     ...clampLines({ layout, unit, brief }),
     ...fuseLines(layout, fuse),
-    ...isolatingLines(layout, brief),
+    ...isolatingLines(layout, brief, currency),
     ...otherLines({ layout, unit, brief }).filter(({ line }) => line !== "fuses" || !fuse?.chosen),
   ];
   return { layout: layout.id, lines, totals: totalsOf({ lines, currency, exchange: brief.exchange }), cautions };

@@ -19,6 +19,7 @@ export { type Crowbar, crowbarOf } from "./crowbar.ts";
 export { chargerRipple, constantPowerSeconds, type Drift, driftOf, steadyDroop, voltageAfter } from "./droop.ts";
 export { type Corner, type Envelope, envelopeOf, type Figures, type LoopSpread, type Spread } from "./envelope.ts";
 export { type FaultBank, type FaultUnit, worstBefore } from "./faultBank.ts";
+export { faultAction, unitShortLoop } from "./faultCurrents.ts";
 export type { Fault, FaultId } from "./faultRow.ts";
 export { faultTable } from "./faultTable.ts";
 export { type Fuse, type FuseDuty, fuseFindings } from "./fuse.ts";

@@ -9,6 +9,8 @@ export interface CrossBrief {
   readonly bus?: BusBrief | undefined;
   readonly charger?: ChargerBrief | undefined;
   readonly life?: { readonly halving?: number | undefined; readonly reference?: number | undefined } | undefined;
+  readonly isolating?: number | undefined;
+  readonly isolatingPrice?: number | undefined;
   readonly rate?: number | undefined;
   readonly maxPeakCurrent?: unknown;
   readonly maxSlew?: unknown;
@@ -138,6 +140,8 @@ export function crossFaults(brief: CrossBrief, file?: string): readonly Refusal[
     const field = halving === undefined ? "life.halving" : "life.reference";
     say("missing-value", field, "nothing", "halving and reference together");
   }
+  if (brief.isolatingPrice !== undefined && brief.isolating === undefined)
+    say("missing-value", "isolating", "nothing", "the resistor that the price is of");
   limitFaults(brief, say);
   return faults;
 }

@@ -162,6 +162,12 @@ function busFor(brief: Brief, bank: PulseBank, load: Load): Read<BusFound> {
   return accepted({ ...run.value, path: whole, place: place.value });
 }
 
+/** The section inductance as the loop sees it: one to each unit that shares both ends with others, else one to each string. */
+function sectionOf({ section }: Brief, { series, parallel, ties }: PulseBank): number {
+  if (section === undefined) return 0;
+  return (section.inductance * (ties === "cross-tied" ? series : 1)) / parallel;
+}
+
 /** A circuit, and what was found about its bus. */
 export interface CircuitFound {
   readonly circuit: Circuit;
@@ -185,6 +191,7 @@ export function circuitOf(brief: Brief, bank: PulseBank): Read<CircuitFound> {
     switch: brief.switch ?? IDEAL_SWITCH,
     clamp: brief.clamp ?? null,
     isolating: ((brief.isolating ?? 0) * bank.series) / bank.parallel,
+    section: sectionOf(brief, bank),
     place: bus.value.place,
   };
   return accepted({ circuit, bus: bus.value });

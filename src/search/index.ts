@@ -27,6 +27,7 @@ export { type LampReport, lampReport } from "./lampReport.ts";
 export type { LifeReport } from "./life.ts";
 export { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 export { type PlanInput, plan } from "./plan.ts";
+export { isProtected, sectionCount } from "./protection.ts";
 export { RANKINGS, type Ranking } from "./rank.ts";
 export type {
   Balance,
@@ -37,6 +38,7 @@ export type {
   Improvement,
   LayoutResult,
   PlanResult,
+  Protection,
   RefusedPart,
   Shares,
   Span,

@@ -6,7 +6,7 @@ import { atLeast, atMost, type Bound, unitShort } from "../pulse/index.ts";
 import type { Finding } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { chargeFor, firingOf } from "./charging.ts";
-import { faultUnitOf } from "./faults.ts";
+import { faultUnitOf, guardsOf } from "./faults.ts";
 import { lifeOf } from "./life.ts";
 import { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 import { type Shape, type ShotCorner, shotCorner } from "./shotCorner.ts";
@@ -58,6 +58,7 @@ function faultClaim(limit: number, { unit, worst, ...shape }: LimitCase, brief: 
     ...shape,
     unit: faultUnitOf(unit),
     voltage,
+    ...guardsOf(brief),
     worstCharging: known ? worst : voltage,
     worstHolding: null,
   };

@@ -92,6 +92,12 @@ export const lifeSchema = z.strictObject({
   reference: quantity("temperature", { least: -60, most: 250 }).optional(),
 });
 
+/** An inductance in series with each unit of a stage, or with each string; price of one, in the plan's currency. */
+export const sectionSchema = z.strictObject({
+  inductance: above("inductance"),
+  price: quantity("count", { least: 0, most: 1e9 }).optional(),
+});
+
 /** How far ESR, and the loop's outer resistance and inductance, may lie from what is given; capacitance has its tolerance. */
 export const spreadSchema = z.strictObject({
   esr: part(0.99).default(0),

@@ -22,6 +22,7 @@ import { chargeFor, driftFor, firingOf, rippleFor } from "./charging.ts";
 import { type BusFound, circuitOf, pulseBankFor } from "./circuit.ts";
 import { shotEnvelope } from "./envelope.ts";
 import { faultBankOf } from "./faults.ts";
+import { fuseSeesAt } from "./fuses.ts";
 import { type LampReport, lampReport } from "./lampReport.ts";
 import { type LifeReport, lifeOf } from "./life.ts";
 import { limitFindings } from "./limits.ts";
@@ -102,11 +103,13 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   const faults = faultTable({
     ...faultBankOf({ result: layout, unit, brief }),
     fuse,
-    isolatingResistance: brief.isolating ?? null,
     bus: circuit.bus,
     shot: {
       peakCurrent: discharge.peakCurrent,
-      unitAction: discharge.unit.action,
+      unitAction:
+        fuse === null
+          ? discharge.unit.action
+          : fuseSeesAt(brief, unit, layout, worst ?? Number.POSITIVE_INFINITY).normalAction,
       unitHeat: discharge.unit.heat,
     },
     chargerHighest: brief.charger?.highest ?? brief.charger?.supply ?? null,

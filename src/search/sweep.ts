@@ -6,6 +6,7 @@ import type { Capacitor } from "../catalog/index.ts";
 import { frontRows } from "./front.ts";
 import { sweepLimited } from "./limitedSweep.ts";
 import { hasLimits } from "./limits.ts";
+import { isProtected } from "./protection.ts";
 import type { RefusedPart } from "./result.ts";
 import { riskJudge } from "./risk.ts";
 import { sieveOf, type Wanted } from "./sieve.ts";
@@ -41,7 +42,7 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
   const { parts, brief } = input;
   const table = newTable(Math.max(256, Math.min(parts.length, wanted === null ? 1 << 17 : FIRST_PARTS) * 32));
   const judge = input.judge ?? (brief.basis === "statistical" ? riskJudge(brief) : null);
-  if (hasLimits(brief)) return sweepByLimits(input, table, judge);
+  if (hasLimits(brief) || isProtected(brief)) return sweepByLimits(input, table, judge);
   const run: Run = { input, judge, table, sieve: null, count: 0 };
   const reasons: (Reason | null)[] = new Array(parts.length).fill(null);
   let stride = 1;

@@ -4,6 +4,7 @@ import { accepted, nearestWord, type Read, type Refusal, refused } from "../../q
 import { briefJsonSchema, type PlanResult, plan, RANKINGS, type Ranking } from "../../search/index.ts";
 import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
+import { readFuseStock } from "../fuses.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { lampFits } from "../lampFits.ts";
 import { type MeasuredPlanned, measuredJson, planMeasured, savedText } from "../measuredPlan.ts";
@@ -18,6 +19,7 @@ import { refusalWords } from "../words.ts";
 export interface PlanFlags extends Flags {
   readonly catalog?: readonly string[];
   readonly resistors?: string;
+  readonly fuses?: string;
   readonly limit?: string;
   readonly rank?: string;
   readonly json?: boolean;
@@ -71,9 +73,14 @@ export function planFrom(brief: string | undefined, flags: PlanFlags, ports: Por
     if (lot.value.faults.length > 0) ports.err(`${lot.value.faults.map(refusalWords).join("\n")}\n`);
     return accepted({ ...given, result: lot.value.result, lot: lot.value });
   }
-  const planned = plan({ brief: settings.value.brief, parts, families, limit, rank });
+  const fuses = flags.fuses === undefined ? null : readFuseStock(flags.fuses, ports.files, settings.value.brief, null);
+  if (fuses !== null && !fuses.ok) return fuses;
+  if (fuses !== null && fuses.value.lost.length > 0) ports.err(`${fuses.value.lost.join("\n")}\n`);
+  // a fuse catalogue that is named is meant to be used
+  const asked = fuses === null ? settings.value.brief : { ...settings.value.brief, fused: true };
+  const planned = plan({ brief: asked, parts, families, fuses: fuses?.value.fuses ?? null, limit, rank });
   if (!planned.ok) return planned;
-  return accepted({ ...given, result: planned.value, lot: null });
+  return accepted({ ...given, settings: { ...settings.value, brief: asked }, result: planned.value, lot: null });
 }
 
 /** Rows that were lost, on the error stream. */
