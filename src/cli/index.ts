@@ -4,5 +4,6 @@ export { type Files, filesOn } from "./files.ts";
 export { titleOf } from "./findingWords.ts";
 export { type Ports, textWidth } from "./ports.ts";
 export { clampWords, withoutBalanceWords } from "./restText.ts";
+export { withRecord } from "./settings.ts";
 export { rateBlocks } from "./shotRateText.ts";
 export { refusalWords } from "./words.ts";

@@ -41,8 +41,8 @@ const PASS = 8;
 export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }: SweepOptions = {}): Sweep {
   const { parts, brief } = input;
   const table = newTable(Math.max(256, Math.min(parts.length, wanted === null ? 1 << 17 : FIRST_PARTS) * 32));
-  const judge = input.judge ?? (brief.basis === "statistical" ? riskJudge(brief) : null);
-  if (hasLimits(brief) || isProtected(brief)) return sweepByLimits(input, table, judge);
+  const judge = input.judge ?? (brief.basis === "statistical" ? riskJudge(brief, input.lot) : null);
+  if (hasLimits(brief) || isProtected(brief)) return sweepByLimits(input, { table, judge, stopAtFirst });
   const run: Run = { input, judge, table, sieve: null, count: 0 };
   const reasons: (Reason | null)[] = new Array(parts.length).fill(null);
   let stride = 1;
@@ -71,12 +71,16 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
 }
 
 /** The search under limits on shot, fault and life: each layout is worked out in full. */
-function sweepByLimits(input: SweepInput, table: LayoutTable, judge: Judge): Sweep {
+function sweepByLimits(
+  input: SweepInput,
+  { table, judge, stopAtFirst }: { readonly table: LayoutTable; readonly judge: Judge; readonly stopAtFirst: boolean },
+): Sweep {
   const limited = sweepLimited(input, table, judge);
   const refused: RefusedPart[] = [];
   for (const [i, unit] of input.parts.entries()) {
     const reason = limited(i);
     if (reason !== null) refused.push({ part: unit.part, ...reason });
+    if (stopAtFirst && table.count > 0) break;
   }
   return { table, count: table.count, refused };
 }

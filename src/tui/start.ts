@@ -30,7 +30,7 @@ export function portsOn(options: StartOptions): ScreenPorts {
     ...terminal,
     ...formValues(brief),
     briefFirst,
-    engine: catalogEngine({ parts, families }),
+    engine: catalogEngine({ parts, families, files }),
     stock,
     loadSession: () => {
       const read = sessionFile === null ? null : files.read(sessionFile);
