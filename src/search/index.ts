@@ -1,5 +1,6 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
+export type { Band, BandRow } from "./band.ts";
 export type {
   BlendPlan,
   BlendResult,

@@ -17,6 +17,7 @@ import {
   rateFindings,
 } from "../pulse/index.ts";
 import { accepted, type Finding, type Read } from "../quantity/index.ts";
+import { type Band, shotBand } from "./band.ts";
 import type { Brief } from "./brief.ts";
 import { chargeFor, driftFor, firingOf, rippleFor } from "./charging.ts";
 import { type BusFound, circuitOf, pulseBankFor } from "./circuit.ts";
@@ -44,6 +45,8 @@ export interface ShotReport {
   readonly discharge: Discharge;
   readonly bus: BusFound;
   readonly envelope: Envelope;
+  /** Current and voltage over time with everything that spreads; null when nothing does. */
+  readonly band: Band | null;
   readonly charge: Charge | null;
   /** Highest rate that the charger keeps up with, all units at their high capacitance, Hz. */
   readonly highestRate: number | null;
@@ -86,6 +89,8 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   const discharge = shot.value;
   const envelope = shotEnvelope({ brief, unit, shape: layout, circuit, bank });
   if (!envelope.ok) return envelope;
+  const band = shotBand({ brief, unit, shape: layout, circuit, bank });
+  if (!band.ok) return band;
   const left = Math.sqrt((2 * discharge.energy.left) / bank.capacitance);
   const charge = chargeFor(brief, { capacitance: bank.capacitance, left });
   const slowest = chargeFor(brief, { capacitance: layout.capacitance.high ?? bank.capacitance, left });
@@ -128,6 +133,7 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
     discharge,
     bus,
     envelope: envelope.value,
+    band: band.value,
     charge: charge.value,
     highestRate: highest,
     heating,
