@@ -89,8 +89,8 @@ function saveAll({ parts, sources }: ReadStock, files: Pick<Files, "write">, ove
   return { kind: "saved", path };
 }
 
-export const workshopOn = (read: ReadStock, files: Pick<Files, "write">): Workshop => ({
-  engine: catalogEngine(read),
+export const workshopOn = (read: ReadStock, files: Pick<Files, "read" | "write">): Workshop => ({
+  engine: catalogEngine({ ...read, files }),
   families: read.families,
   stock: read.stock,
   catalogue: { parts: read.parts, sources: read.sources },
