@@ -8,8 +8,10 @@ export {
 } from "./capacitor.ts";
 export type { PriceBreak } from "./cell.ts";
 export type { Column } from "./column.ts";
+export { readRecords, separatorOf } from "./csv.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
+export { OVERRIDABLE, type Overrides, overridden, readOverrides, withOverrides } from "./overrides.ts";
 export { type ListedUnit, readPositions, type UnitList } from "./positions.ts";
 export {
   breaksRise,

@@ -1,7 +1,7 @@
 // The blend that `check` and `order` are about: inputs read, parts found, every group and the whole assessed.
 
 import type { Capacitor } from "../catalog/index.ts";
-import { accepted, minorDigits, type Read, refused } from "../quantity/index.ts";
+import { accepted, minorDigits, type Read, refused, tenTo } from "../quantity/index.ts";
 import { assessBuiltBlend, type BlendFault, type BlendResult, blendFaults, planCurrency } from "../search/index.ts";
 import { readShipmentFlag } from "./blendFlags.ts";
 import { type GroupInput, readBlendGroups } from "./blendInput.ts";
@@ -67,7 +67,7 @@ function assessed(groups: readonly GroupInput[], { settings, stock, shipments }:
     brief,
     shipments,
     currency: currency.value,
-    minor: 10 ** minorDigits(currency.value ?? ""),
+    minor: tenTo(minorDigits(currency.value ?? "")),
   });
   const lines = blend.strings.flatMap((group, at) =>
     // The whole bank's charge decides how much of a blast an arc would be.

@@ -2,7 +2,8 @@
 
 import { type Capacitor, DEFAULT_FAMILY, type ResistorFamily } from "../catalog/index.ts";
 import type { BlendResult, Brief, LayoutResult } from "../search/index.ts";
-import type { Bill, BillLine, LineKind } from "./bill.ts";
+import { type Bill, type BillLine, LINE_KINDS, type LineKind } from "./bill.ts";
+import { busLines } from "./busLines.ts";
 import { clampLines } from "./clampLines.ts";
 import { isolatingLines } from "./fuseLines.ts";
 import { otherLines } from "./otherLines.ts";
@@ -23,6 +24,7 @@ export interface BlendBillInput {
 const ONCE: ReadonlySet<LineKind> = new Set([
   "dump resistor",
   "dump relay",
+  "load bus",
   "earthing stick",
   "insulator",
   "meter with divider",
@@ -37,18 +39,21 @@ export function blendBillOf({ blend, units, families, brief, currency, cautions 
     const family = [...families, DEFAULT_FAMILY].find((one) => one.family === group.balance?.family) ?? null;
     lines.push(...unitLines(group, unit, brief.spares), ...resistorLines(group, family));
     lines.push(...clampLines({ layout: group, unit, brief }).map((line) => forGroup(line, group)));
-    lines.push(...isolatingLines(group, brief).map((line) => forGroup(line, group)));
+    lines.push(...isolatingLines(group, brief, currency).map((line) => forGroup(line, group)));
   });
   const once: BillLine[] = [];
+  // A group's bars are sized by the shot of the whole bank, which one group's shot does not tell.
+  const { load: _load, ...still } = brief;
   blend.strings.forEach((group, at) => {
     // What the bank has once must stand the whole of it.
-    const other = otherLines({ layout: { ...group, capacitance: blend.capacitance }, unit: units[at]!, brief });
-    for (const line of other) {
+    const whole = { layout: { ...group, capacitance: blend.capacitance }, unit: units[at]!, brief };
+    for (const line of [...otherLines(whole), ...busLines({ ...whole, brief: still })]) {
       if (!ONCE.has(line.line)) lines.push(forGroup(line, group));
       else if (at === 0) once.push(line.line === "earthing stick" ? { ...line, note: STICK } : line);
     }
   });
   lines.push(...once, ...blend.shipments.map((one) => shipmentLine(one, currency)));
+  lines.sort((a, b) => LINE_KINDS.indexOf(a.line) - LINE_KINDS.indexOf(b.line));
   return { layout: blend.id, lines, totals: totalsOf({ lines, currency, exchange: brief.exchange }), cautions };
 }
 
@@ -77,6 +82,9 @@ function shipmentLine({ supplier, cost }: BlendResult["shipments"][number], curr
     currency,
     supplier: supplier ?? "",
     orderCode: "",
+    alternates: "",
+    status: "",
+    mark: "",
     note: "Charged once for everything that comes from this supplier.",
     state: "priced",
   };

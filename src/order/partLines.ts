@@ -9,6 +9,12 @@ const NOT_TO_BE_HAD = "Not enough can be had: ask the supplier, or choose anothe
 
 const WITH_SPARES = "Packs and surplus are those of units and spares together.";
 
+/** Pieces of text one after the other, each ended before the next begins. */
+const sentences = (...parts: readonly string[]): string =>
+  parts
+    .filter((part) => part !== "")
+    .reduce((text, part) => (text === "" ? part : `${text}${/[.!?]$/.test(text) ? "" : "."} ${part}`), "");
+
 /** How much of one purchase a line takes: the rest of it belongs to another line. */
 interface Take {
   readonly needed: number;
@@ -49,7 +55,10 @@ export function pricedLine(wording: Wording, terms: PurchaseTerms, take: Take, u
     currency: spent === null ? null : currency,
     supplier: terms.supplier ?? "",
     orderCode: terms.orderCode ?? "",
+    alternates: "",
+    status: "",
     state: spent === null ? "no price" : "priced",
+    mark: "",
   };
 }
 
@@ -68,7 +77,10 @@ const shortLine = (wording: Wording, terms: PurchaseTerms, needed: number): Bill
   currency: null,
   supplier: terms.supplier ?? "",
   orderCode: terms.orderCode ?? "",
-  note: [NOT_TO_BE_HAD, wording.note].filter((part) => part !== "").join(" "),
+  alternates: "",
+  status: "",
+  mark: "",
+  note: sentences(NOT_TO_BE_HAD, wording.note),
   state: "no price",
 });
 
@@ -95,7 +107,7 @@ export function unitLines(layout: LayoutResult, unit: Capacitor, spares: number)
     line: "units",
     value: formatQuantity(unit.capacitance, "capacitance"),
     rating: unitRating(unit),
-    note: [unit.note ?? "", spares > 0 ? WITH_SPARES : ""].filter((part) => part !== "").join(" "),
+    note: sentences(unit.note ?? "", spares > 0 ? WITH_SPARES : ""),
   };
   const spareWording: Wording = {
     ...wording,

@@ -37,7 +37,7 @@ export interface Outer {
 }
 
 const STEPS = 48;
-/** A highest point is looked at again in steps so much finer, twice over. */
+/** A highest point is looked at again in steps halved so many times. */
 const FINER = 3;
 
 /** What each branch bears. `outer` may be without resistance, without inductance, or without both (a dead short). */
@@ -47,7 +47,7 @@ export function branchShot(branches: readonly Branch[], outer: Outer, voltage: n
   const matrix = stateMatrix(branches, outer);
   const { fastest, slowest } = timesOf(branches, outer);
   const levels = Math.max(1, Math.ceil(Math.log2((8 * slowest) / fastest)));
-  const powers: Float64Array[] = [exponential(matrix, size, fastest / 32 / 2 ** FINER)];
+  const powers: Float64Array[] = [exponential(matrix, size, fastest / 256)];
   while (powers.length < levels + FINER + 6)
     powers.push(multiply(powers[powers.length - 1]!, powers[powers.length - 1]!, size));
   const start = new Float64Array(size).fill(voltage, 0, m);

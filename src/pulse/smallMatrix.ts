@@ -38,8 +38,13 @@ export function exponential(a: Float64Array, size: number, time: number): Float6
     for (let j = 0; j < size; j += 1) row += Math.abs(a[i * size + j]! * time);
     norm = Math.max(norm, row);
   }
-  const halvings = Math.max(0, Math.ceil(Math.log2(norm)) + 2);
-  const small = a.map((value) => (value * time) / 2 ** halvings);
+  let halvings = 0;
+  let scale = time;
+  for (; norm > 0.25; norm /= 2) {
+    scale /= 2;
+    halvings += 1;
+  }
+  const small = a.map((value) => value * scale);
   let term: Float64Array = identity(size);
   let sum: Float64Array = identity(size);
   for (let k = 1; k <= 14; k += 1) {

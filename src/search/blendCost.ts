@@ -2,7 +2,7 @@
 
 import type { Layout } from "../bank/index.ts";
 import { type Capacitor, isPriced, type ResistorFamily } from "../catalog/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import type { BlendCost, BlendString } from "./blendResult.ts";
 import { senderOf, shipmentOf, UNNAMED } from "./blendShipments.ts";
 import type { BuyingTerms } from "./blendString.ts";
@@ -49,7 +49,7 @@ export function costOf(
   currency: string | null,
 ): BlendCost | null {
   if (currency === null) return null;
-  const scale = 10 ** minorDigits(currency);
+  const scale = tenTo(minorDigits(currency));
   const minor = (amount: number | null | undefined): number => Math.round((amount ?? 0) * scale);
   const capacitors = strings.reduce((sum, { cost }) => sum + minor(cost?.capacitors), 0);
   const resistors = strings.reduce((sum, { cost }) => sum + minor(cost?.resistors), 0);

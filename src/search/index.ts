@@ -1,5 +1,6 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
+export type { Band, BandRow } from "./band.ts";
 export { assessBuiltBlend, type BuiltBlend } from "./blendAssess.ts";
 export type { BuiltGroup } from "./blendCost.ts";
 export { type BlendFault, blendFaults } from "./blendFaults.ts";
@@ -37,6 +38,7 @@ export { type LampReport, lampReport } from "./lampReport.ts";
 export type { LifeReport } from "./life.ts";
 export { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 export { type PlanInput, plan } from "./plan.ts";
+export { isProtected, sectionCount } from "./protection.ts";
 export { RANKINGS, type Ranking } from "./rank.ts";
 export type {
   Balance,
@@ -47,6 +49,7 @@ export type {
   Improvement,
   LayoutResult,
   PlanResult,
+  Protection,
   RefusedPart,
   Shares,
   Span,

@@ -2,13 +2,13 @@
 
 import { FIT } from "../bank/index.ts";
 import type { Capacitor } from "../catalog/index.ts";
-import { atLeast, atMost, type Bound, unitShort, worstShare } from "../pulse/index.ts";
+import { atLeast, atMost, type Bound, unitShort } from "../pulse/index.ts";
 import type { Finding, Read } from "../quantity/index.ts";
 import { pouredIntoShort } from "./blendPoured.ts";
 import { type Beside, besideShot, othersNominal } from "./blendShot.ts";
 import type { Brief } from "./brief.ts";
 import { chargeFor, firingOf } from "./charging.ts";
-import { faultUnitOf } from "./faults.ts";
+import { faultUnitOf, guardsOf } from "./faults.ts";
 import { lifeOf } from "./life.ts";
 import { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 import { type CornerName, type Shape, type ShotCorner, shotCorner } from "./shotCorner.ts";
@@ -62,6 +62,7 @@ function faultClaim(limit: number, { unit, worst, beside, ...shape }: LimitCase,
     ...shape,
     unit: faultUnitOf(unit),
     voltage,
+    ...guardsOf(brief),
     worstCharging: known ? worst : voltage,
     worstHolding: null,
   };
@@ -76,7 +77,7 @@ function faultClaim(limit: number, { unit, worst, beside, ...shape }: LimitCase,
 function heatOf(brief: Brief, unit: Capacitor, high: ShotCorner) {
   const charge = chargeFor(brief, { capacitance: high.bank.capacitance, left: high.left });
   if (!charge.ok || charge.value === null) return null;
-  const shot = { action: high.action, seconds: 0, share: worstShare(high.bank) };
+  const shot = { action: high.action, seconds: 0, share: high.unit.actionShare };
   return firingOf(brief, high.bank, unit, { charge: charge.value, shot }).heating;
 }
 

@@ -1,9 +1,9 @@
 // The brief, the pins and where one was, as text to keep and back; text that cannot be trusted gives nothing.
 
-import { RANKINGS } from "../search/index.ts";
 import { FIELDS } from "./fields.ts";
 import { LONGEST_LINE } from "./line.ts";
 import type { Arrangement } from "./ports.ts";
+import { RANKS } from "./ranks.ts";
 import { MOST_PINS, SCREENS, type State } from "./state.ts";
 
 const VERSION = 1;
@@ -32,6 +32,12 @@ function arrangement(value: unknown): Arrangement | null {
 const oneOf = <T extends string>(list: readonly T[], value: unknown, otherwise: T): T =>
   list.find((item) => item === value) ?? otherwise;
 
+/** Whether a later version of this program wrote it: then it is no ruin. */
+export const isNewer = (text: string): boolean => {
+  const version = /^\s*\{\s*"version"\s*:\s*(\d{1,9})\b/.exec(text)?.[1];
+  return version !== undefined && Number(version) > VERSION;
+};
+
 /** Null when the text is not what `savedText` writes; single parts that are odd fall back to their beginnings. */
 export function readSaved(text: string): SavedPart | null {
   let raw: unknown;
@@ -57,7 +63,7 @@ export function readSaved(text: string): SavedPart | null {
     extra: typeof extra === "object" && extra !== null && !Array.isArray(extra) ? { ...extra } : {},
     pins: pins.slice(0, MOST_PINS),
     chosen: arrangement(saved.chosen),
-    rank: oneOf(RANKINGS, saved.rank, "cost"),
+    rank: oneOf(RANKS, saved.rank, "cost"),
     frontOnly: saved.frontOnly === true,
     screen: oneOf(SCREENS, saved.screen, "brief"),
     selected: typeof saved.selected === "string" ? saved.selected : null,

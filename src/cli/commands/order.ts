@@ -1,42 +1,58 @@
 // `order`: the bill of materials of one arrangement, to the output or to a file.
 
-import { BILL_FORMATS, type BillFormat, billOf, billText, blendBillOf, visible } from "../../order/index.ts";
-import { nearestWord, type Refusal } from "../../quantity/index.ts";
+import {
+  alternatesFor,
+  BILL_FORMATS,
+  type Bill,
+  type BillFormat,
+  billOf,
+  billText,
+  blendBillOf,
+  type Money,
+  readEditedBill,
+  visible,
+  withEdits,
+} from "../../order/index.ts";
+import { accepted, type Read } from "../../quantity/index.ts";
 import { type FuseChoice, fittedFuse } from "../../search/index.ts";
+import { changeLines } from "../billChanges.ts";
 import { cautionsOf } from "../cautions.ts";
 import { checkedBank } from "../checked.ts";
 import { type BlendBankFlags, type CheckedBlend, checkedBlend } from "../checkedBlend.ts";
+import { chosenFormat } from "../chosenFormat.ts";
 import { EXIT } from "../exit.ts";
 import { titleOf } from "../findingWords.ts";
 import { readFuseStock } from "../fuses.ts";
 import { faultLines } from "../inputNotes.ts";
+import { outputOf } from "../paperOutput.ts";
 import type { Ports } from "../ports.ts";
 import { tell } from "../tell.ts";
 
 export type OrderFlags = BlendBankFlags & {
   readonly format?: string;
   readonly fuses?: string;
+  readonly edited?: string;
   readonly output?: string;
   readonly force?: boolean;
 };
 
 export function orderCommand(brief: string | undefined, flags: OrderFlags, ports: Ports): number {
-  const format = readFormat(flags);
-  if (flags.output?.trim() === "") {
-    const want = "the name of a file; - for the output";
+  const format = chosenFormat(flags, BILL_FORMATS, "csv");
+  const output = outputOf(flags.output);
+  const mixed = checkedBlend(brief, flags, ports);
+  if (!mixed.ok || mixed.value !== null) {
+    if (format.ok && output.ok && mixed.ok && mixed.value !== null)
+      return orderBlend(mixed.value, { format: format.value, path: output.value }, flags, ports);
     return tell(
       ports,
-      [{ code: "empty", place: { field: "--output" }, read: JSON.stringify(flags.output), want }],
+      [format, output, mixed].flatMap((one) => (one.ok ? [] : one.refusals)),
       flags.json,
     );
   }
-  const mixed = checkedBlend(brief, flags, ports);
-  if (!mixed.ok) return tell(ports, [...(typeof format === "string" ? [] : [format]), ...mixed.refusals], flags.json);
-  if (mixed.value !== null && typeof format === "string") return orderBlend(mixed.value, format, flags, ports);
   const checked = checkedBank(brief, flags, ports);
-  if (!checked.ok || typeof format !== "string") {
-    const faults = [...(typeof format === "string" ? [] : [format]), ...(checked.ok ? [] : checked.refusals)];
-    return tell(ports, faults, flags.json);
+  if (!format.ok || !output.ok || !checked.ok) {
+    const refusals = [format, output, checked].flatMap((one) => (one.ok ? [] : one.refusals));
+    return tell(ports, refusals, flags.json);
   }
   const { result, unit, settings, stock, currency, notes } = checked.value;
   const cautions = cautionsOf(settings.brief, { layout: result, unit }).map(({ text }) => text);
@@ -44,34 +60,58 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
   const fuses = flags.fuses === undefined ? null : readFuseStock(flags.fuses, ports.files, asked, currency);
   if (fuses !== null && !fuses.ok) return tell(ports, fuses.refusals, flags.json);
   const fuse = fuses === null ? null : fittedFuse({ layout: result, unit, brief: asked }, fuses.value.fuses);
-  const bill = billOf({ layout: result, unit, families: stock.families, brief: asked, currency, cautions, fuse });
-  const text = billText(bill, format);
-  const said = [...faultLines(stock), ...(fuses?.value.lost ?? []), ...notes, ...fuseSaid(fuse)];
+  const { families, parts } = stock;
+  const alternates = alternatesFor({ layout: result, unit, brief: asked, parts, families, currency, fuse });
+  const fresh = billOf({ layout: result, unit, families, brief: asked, currency, cautions, fuse, alternates });
+  const edited = editedOf(fresh, flags.edited, { currency, exchange: asked.exchange }, ports);
+  if (!edited.ok) return tell(ports, edited.refusals, flags.json);
+  const bill = edited.value;
+  const text = billText(bill, format.value);
+  const said = [
+    ...faultLines(stock),
+    ...(fuses?.value.lost ?? []),
+    ...notes,
+    ...fuseSaid(fuse),
+    ...changeLines(bill, flags.edited),
+  ];
   for (const finding of result.findings)
     if (finding.verdict === "fail")
       said.push(`FAIL, ${titleOf(finding.id)}: ${visible(finding.note)} Do not buy this bank.`);
-  const lost = handOut({ text, lines: bill.lines.length, said }, flags, ports);
+  const lost = handOut({ text, lines: bill.lines.length, said, path: output.value }, flags, ports);
   return lost ?? (result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done);
 }
 
+interface Written {
+  readonly text: string;
+  readonly lines: number;
+  readonly said: readonly string[];
+  /** Null for the output. */
+  readonly path: string | null;
+}
+
 /** Writes the bill where it was asked for; the exit status when it could not be. */
-function handOut(
-  { text, lines, said }: { readonly text: string; readonly lines: number; readonly said: readonly string[] },
-  flags: OrderFlags,
-  ports: Ports,
-): number | null {
+function handOut({ text, lines, said, path }: Written, flags: OrderFlags, ports: Ports): number | null {
   if (said.length > 0) ports.err(`${said.join("\n")}\n`);
-  if (flags.output === undefined || flags.output === "-") ports.out(text);
+  if (path === null) ports.out(text);
   else {
-    const written = ports.files.write(flags.output, text, flags.force === true);
+    const written = ports.files.write(path, text, flags.force === true);
     if (!written.ok) return tell(ports, written.refusals, flags.json);
-    ports.err(`${visible(flags.output)}: ${lines} lines written\n`);
+    ports.err(`${visible(path)}: ${lines} lines written\n`);
   }
   return null;
 }
 
 /** The bill of a blend. Fuses are chosen for one layout at a time. */
-function orderBlend(checked: CheckedBlend, format: BillFormat, flags: OrderFlags, ports: Ports): number {
+function orderBlend(
+  checked: CheckedBlend,
+  { format, path }: { readonly format: BillFormat; readonly path: string | null },
+  flags: OrderFlags,
+  ports: Ports,
+): number {
+  if (flags.edited !== undefined) {
+    const want = "one layout: what its builder wrote is kept by line, and a blend has the same line for every group";
+    return tell(ports, [{ code: "contradiction", place: { field: "--edited" }, read: "a blend", want }], flags.json);
+  }
   if (flags.fuses !== undefined) {
     const want =
       "one layout: a fuse of a blend must clear on what all the other groups bring, which is not reckoned yet";
@@ -94,8 +134,17 @@ function orderBlend(checked: CheckedBlend, format: BillFormat, flags: OrderFlags
     ...notes,
     ...fails.map(({ id, note }) => `FAIL, ${titleOf(id)}: ${visible(note)} Do not buy this bank.`),
   ];
-  const lost = handOut({ text: billText(bill, format), lines: bill.lines.length, said }, flags, ports);
+  const lost = handOut({ text: billText(bill, format), lines: bill.lines.length, said, path }, flags, ports);
   return lost ?? (fails.length > 0 ? EXIT.unsafe : EXIT.done);
+}
+
+/** The bill with what its builder wrote in an earlier copy. */
+function editedOf(bill: Bill, path: string | undefined, money: Money, ports: Ports): Read<Bill> {
+  if (path === undefined) return accepted(bill);
+  const text = ports.files.read(path);
+  if (!text.ok) return text;
+  const edited = readEditedBill(text.value, path === "-" ? "standard input" : path);
+  return edited.ok ? withEdits(bill, edited.value, money) : edited;
 }
 
 /** Why no fuse of the catalogue is on the bill. */
@@ -107,20 +156,4 @@ function fuseSaid(fuse: FuseChoice | null): readonly string[] {
   return [
     `No fuse of the catalogue is proven to do${why}: the line stays to be chosen. See: joulewright pulse --fuses.`,
   ];
-}
-
-/** The format named, else that of the file's ending, else CSV; --json is the format json. */
-function readFormat({ format, json, output }: OrderFlags): BillFormat | Refusal {
-  const ending = /\.([a-z]+)$/i
-    .exec(output ?? "")?.[1]
-    ?.toLowerCase()
-    .replace(/^htm$/, "html")
-    .replace(/^markdown$/, "md");
-  const named = format?.toLowerCase() ?? (json ? "json" : undefined);
-  const wanted = named ?? BILL_FORMATS.find((one) => one === ending) ?? "csv";
-  const found = BILL_FORMATS.find((one) => one === wanted);
-  if (found !== undefined) return found;
-  const near = nearestWord(wanted, BILL_FORMATS);
-  const want = `${near === null ? "" : `perhaps ${JSON.stringify(near)}; `}one of ${BILL_FORMATS.join(", ")}`;
-  return { code: "bad-choice", place: { field: "--format" }, read: JSON.stringify(wanted), want };
 }
