@@ -45,7 +45,11 @@ Examples:
   $ joulewright plan brief.json --catalog mine.csv --rank volume --limit 5
   $ joulewright plan - --catalog mine.csv --json < brief.json
   $ joulewright plan brief.json --catalog mine.csv --resistors resistors.csv --blend --explain --within "2 %"
+  $ joulewright plan brief.json --catalog mine.csv --blend --shipment-cost "North: 4.90; 6.50" --front volume --ladder "50 %"
   $ joulewright plan --brief-schema
+
+A blend is a mix of whole strings of different parts. With limits on the shot it is the cheapest that is proven to keep
+them: for that the ESR and ESL of every part of a mix must be known, and the load be a resistance, a coil or a short.
 
 With a load, --max-peak-current, --max-reversal and the other limits on the shot are kept in the search: for each shape
 the least parallel count that keeps them all. A limit that cannot be judged, for want of a rating, refuses the part.
@@ -57,6 +61,7 @@ Examples:
   $ joulewright check brief.json --layout chosen.json --balance "24 kohm" --balance-tolerance "5 %" --catalog mine.csv
   $ joulewright check brief.json --layout chosen.json --basis statistical --witness 1e6 --seed 7 --catalog mine.csv
   $ joulewright check brief.json --layout chosen.json --basis statistical --measured lot.csv --catalog mine.csv
+  $ joulewright check brief.json --blend "el-470 4s7p cross-tied + pf-330 2s3p strings" --catalog mine.csv
 ${LAYOUT}${BRIEF}${STATUS}`,
   pulse: `
 Examples:
