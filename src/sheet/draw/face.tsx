@@ -18,14 +18,14 @@ const EARTHS = {
   unknown: "Earthed end: ________. Potentials are to be filled in when it is decided.",
 } as const;
 
-function faceLines({ ties, polarised, earth, chargeVoltage }: FaceProps): readonly string[] {
+function faceLines({ ties, series, polarised, earth, chargeVoltage }: FaceProps): readonly string[] {
   const numbers = ties === "cross-tied" ? "stage, then place in it" : "string, then place in it";
   const polarity = polarised === null ? " Polarity not known: mark it by hand." : "";
   const volts = chargeVoltage === null && earth !== "none" ? " Charge voltage not known: fill in." : "";
   return [
     `Numbers: ${numbers}; the positive end is at the top, 1 is at the negative end. Electrical order.${polarity}`,
     `${EARTHS[earth]}${volts}`,
-    "Dot in a ring: apply the earthing stick, each in turn, then measure. A serial with … is whole in the unit table.",
+    `Dot in a ring: apply the earthing stick, each in turn, then measure.${ties === "strings" && series > 1 ? " TP1.1 is above unit 1.1." : ""} A serial with … is whole in the unit table.`,
   ];
 }
 

@@ -1,8 +1,9 @@
 // What stands under a schematic: each short name with what it is and its value, a blank where the value is not known.
 
-import { partNames, spanOf } from "./partNames.ts";
-import type { DrawnResistor, SchematicProps } from "./schematicProps.ts";
-import { BLANK, counted, shownOrBlank, wordsOrBlank } from "./valueWords.ts";
+import { bankLines, resistor } from "./legendBank.ts";
+import { partNames } from "./partNames.ts";
+import type { SchematicProps } from "./schematicProps.ts";
+import { BLANK, shownOrBlank, wordsOrBlank } from "./valueWords.ts";
 
 const SWITCHES = {
   thyristor: "switch, thyristor",
@@ -17,9 +18,6 @@ const LOADS = {
   short: "load, none: the output is shorted",
   unknown: "load, kind to be stated",
 } as const;
-
-const resistor = ({ resistance, words }: DrawnResistor): string =>
-  `${shownOrBlank(resistance, "resistance")}${words === null ? "" : `, ${words}`}`;
 
 function chargerLines(props: SchematicProps): readonly string[] {
   const names = partNames(props);
@@ -43,47 +41,6 @@ function dischargeLines(props: SchematicProps): readonly string[] {
   ];
 }
 
-function balanceLine({ balance, ties, series, parallel }: SchematicProps): string {
-  if (balance === null) return "Balancing resistors: none fitted.";
-  const tied = ties === "cross-tied";
-  const names = tied ? spanOf("RB", "1", `${series}`) : `RB, ${counted(series * parallel, "resistor")}`;
-  const where = tied ? `one across each of ${counted(series, "stage")}` : "one across each unit";
-  const value = shownOrBlank(balance.resistance, "resistance");
-  const spread = balance.tolerance === null ? "" : ` ±${shownOrBlank(balance.tolerance, "fraction")}`;
-  const made = balance.elements === 1 ? "" : `, each made of ${balance.elements} equal elements in series`;
-  return `${names}: balancing resistors, ${where}, ${value}${spread}${made}`;
-}
-
-function unitLines(props: SchematicProps): readonly string[] {
-  const { series, parallel, ties, unit, fuse, isolating, clamps } = props;
-  const tied = ties === "cross-tied";
-  const units = series * parallel;
-  const last = tied ? `${series}.${parallel}` : `${parallel}.${series}`;
-  const numbering = tied ? "stage, then place in it" : "string, then place in it";
-  const polarity =
-    unit.polarised === null ? ", polarity not known: drawn as polarised" : unit.polarised ? ", polarised" : "";
-  const values = `${shownOrBlank(unit.capacitance, "capacitance")}, ${shownOrBlank(unit.voltage, "voltage")}`;
-  return [
-    `${spanOf("C", "1.1", last)}: ${counted(units, "unit")}, ${unit.part}, ${values}${polarity}. Numbered ${numbering}; 1 is at the negative end.`,
-    ...(fuse === null
-      ? []
-      : [
-          `Fuse in series with each ${fuse.at}, ${fuse.at === "unit" ? units : parallel} in all: ${wordsOrBlank(fuse.words)}`,
-        ]),
-    ...(fuse?.at === "unit" && tied
-      ? ["A unit cut off by its own fuse is no longer drained by its stage's resistor: measure and short it by itself."]
-      : []),
-    ...(isolating === null
-      ? []
-      : [`Isolating resistor in series with each unit, ${units} in all: ${resistor(isolating)}`]),
-    ...(clamps.positions
-      ? [
-          `Clamp diode across each ${tied ? "stage" : "unit"}, ${tied ? series : units} in all, cathode to the positive end`,
-        ]
-      : []),
-  ];
-}
-
 function fireLines(props: SchematicProps): readonly string[] {
   const { load, clamps } = props;
   return [
@@ -94,12 +51,12 @@ function fireLines(props: SchematicProps): readonly string[] {
   ];
 }
 
-function earthLines({ earth, ties, chargeVoltage }: SchematicProps): readonly string[] {
+function earthLines({ earth, ties, series, chargeVoltage }: SchematicProps): readonly string[] {
   const tied = ties === "cross-tied";
   const full = `Full charge: ${shownOrBlank(chargeVoltage, "voltage")}.`;
   const points = tied
     ? "TP: measuring and stick points, one at each tie"
-    : "Open circles and both ends: measuring and stick points";
+    : `Open circles: measuring and stick points, TP0 and TP${series} at the ends${series > 1 ? "; TP1.1 is above C1.1" : ""}`;
   const where = {
     negative: "E1: the one earth point, at the negative end",
     positive: "E1: the one earth point, at the positive end",
@@ -119,8 +76,7 @@ export const SYMBOLS_NOTE = "Symbols after IEC 60617, drawn from memory and not 
 export const legendLines = (props: SchematicProps): readonly string[] => [
   ...chargerLines(props),
   ...dischargeLines(props),
-  balanceLine(props),
-  ...unitLines(props),
+  ...bankLines(props),
   ...fireLines(props),
   ...earthLines(props),
   SYMBOLS_NOTE,

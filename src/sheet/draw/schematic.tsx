@@ -62,7 +62,7 @@ export function schematicFigures(props: SchematicProps): readonly Figure[] {
       const place = pieces.length === 1 ? "" : `, ${index + 1} of ${pieces.length}`;
       return {
         id: `${id}-bank-${index + 1}`,
-        caption: `Bank unit by unit${place}: ${words}`,
+        caption: `Bank unit by unit${place}: ${words}; the positive end is at the top`,
         drawing: (
           <Drawing
             id={`${id}-bank-${index + 1}`}

@@ -54,6 +54,7 @@ function endInk({ plan, goesOn }: BlockGiven, ends: { readonly top: boolean; rea
       ...cut.flatMap((y) => axes.map((x) => down(x, y - (y === body ? STUB : 0), y + (y === body ? 0 : STUB)))),
     ],
     joints: rails.flatMap((y) => axes.map((x) => ({ x, y }))),
+    points: rails.map((y) => ({ x: left, y })),
     marks:
       ends.top && shape.stringFuse
         ? axes.map((x) => ({ role: "fuse", name: "fuse", x, y: top + 3, way: "down" }) as const)

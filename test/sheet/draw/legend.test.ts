@@ -45,26 +45,4 @@ describe("legendLines(props)", () => {
     ])
       expect(bare).toContain(words);
   });
-
-  test("counts by unit, string or stage as the part is fitted", () => {
-    const resistor = { resistance: 0.1, words: "wire" };
-    const tied = text({
-      fuse: { at: "unit", words: "50 A" },
-      isolating: resistor,
-      clamps: { bank: false, positions: true },
-    });
-    expect(tied).toContain("Fuse in series with each unit, 12 in all: 50 A");
-    expect(tied).toContain("no longer drained by its stage's resistor");
-    expect(tied).toContain("Isolating resistor in series with each unit, 12 in all: 100 mohm, wire");
-    expect(tied).toContain("Clamp diode across each stage, 4 in all");
-    const strings = text({
-      ties: "strings",
-      fuse: { at: "string", words: null },
-      clamps: { bank: false, positions: true },
-    });
-    expect(strings).toContain("RB, 12 resistors: balancing resistors, one across each unit");
-    expect(strings).toContain("Fuse in series with each string, 3 in all: ________");
-    expect(strings).toContain("Clamp diode across each unit, 12 in all");
-    expect(strings).toContain("C1.1 to C3.4");
-  });
 });

@@ -1,4 +1,5 @@
 import { expect, test } from "vitest";
+import { countsOf } from "../../../src/order/index.ts";
 import { blockPlan, cellShape } from "../../../src/sheet/draw/blockPlan.ts";
 import { countOf, together } from "../../../src/sheet/draw/ink.ts";
 import { slotsOf } from "../../../src/sheet/draw/slots.ts";
@@ -23,13 +24,13 @@ const inkOf = (series: number, parallel: number, ends = { top: true, bottom: tru
   return { plan, ink: together(stringBlock({ plan, nodeWords: words, goesOn: false }, ends)) };
 };
 
-test("stringBlock(given, ends): each unit has its resistor and diode, each string its fuse, each inner node its point", () => {
+test("stringBlock(given, ends): each unit has its resistor and diode, each string its fuse, each node its point", () => {
   const { ink } = inkOf(4, 3);
   expect(countOf(ink, "unit")).toBe(12);
   expect(countOf(ink, "balance")).toBe(12);
   expect(countOf(ink, "clamp")).toBe(12);
   expect(countOf(ink, "fuse")).toBe(3);
-  expect(ink.points).toHaveLength(9);
+  expect(ink.points).toHaveLength(countsOf({ series: 4, parallel: 3, ties: "strings" }).stickPoints);
   expect(ink.words.map(({ text }) => text)).toEqual(expect.arrayContaining(["C1.1", "C3.4"]));
 });
 
