@@ -24,7 +24,7 @@ const LAYERS = [
 /** Outside packages and the only files or layers that may import them. */
 const OWNERS: Readonly<Record<string, readonly string[]>> = {
   "node:fs": ["cli/files.ts"],
-  "node:worker_threads": ["cli/jobs.ts", "worker.ts"],
+  "node:worker_threads": ["cli/jobs.ts", "cli/thread.ts", "worker.ts"],
   "csv-parse": ["catalog/csv.ts"],
   commander: ["cli/"],
   ink: ["tui/"],

@@ -84,6 +84,7 @@ export function build(ports: Ports, done: Done): Command {
     .option("--brief-schema", "print the JSON Schema of the brief and stop")
     .addHelpText("after", HELP.plan)
     .option("--blend", "also find the cheapest mix of whole strings of different parts, with its proof")
+    .option("--fuses <file>", "fuse catalogue, CSV: a fuse for each unit, the cheapest that does, counted in the cost")
     .option("--explain", "with --blend: the proof in words, and what prices and limits are worth")
     .option("--max-types <count>", "with --blend: most parts in one bank; 4 unless told")
     .option("--within <fraction>", 'with --blend: other kinds of blend up to so much dearer, "2 %"')

@@ -10,6 +10,7 @@ export const LINE_KINDS = [
   "fuses",
   "fuse holders",
   "isolating resistors",
+  "section inductances",
   "dump resistor",
   "dump relay",
   "earthing stick",

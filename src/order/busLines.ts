@@ -12,7 +12,7 @@ import { countsOf } from "./counts.ts";
 import type { OtherInput } from "./otherLines.ts";
 
 /** K in one shot. Common practice, no source. */
-const WARMING = 20;
+export const WARMING = 20;
 const CELSIUS_ZERO = 273.15;
 const ROOM = 25;
 
@@ -38,7 +38,7 @@ export function shotSection({ layout, unit, brief }: OtherInput): number | null 
 }
 
 /** mm^2, rounded up to two figures. */
-const sectionWords = (section: number): string => {
+export const sectionWords = (section: number): string => {
   const square = section * 1e6;
   const step = Number(`1e${Math.floor(Math.log10(square)) - 1}`);
   return `at least ${Number((Math.ceil(square / step - 1e-9) * step).toPrecision(2))} mm2 of copper`;

@@ -56,7 +56,7 @@ export function inductanceSweep(
   const bank = pulseBankFor(unit, layout);
   const found = circuitOf(brief, bank);
   if (!found.ok) return null;
-  const { circuit } = found.value;
+  const circuit = { ...found.value.circuit, place: null };
   const { load, bus } = circuit;
   if (load.kind === "steady current" || load.kind === "recorded") return null;
   const known = (bank.esl ?? 0) + (bus?.inductance ?? 0) + ("inductance" in load ? (load.inductance ?? 0) : 0);

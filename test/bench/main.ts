@@ -6,6 +6,7 @@ import { benchPlace } from "./place.ts";
 import { benchPulse } from "./pulse.ts";
 import { type BenchRow, keptOf, TABLE_HEAD, tableLine } from "./row.ts";
 import { benchSearch } from "./search.ts";
+import { benchSheet } from "./sheet.ts";
 import { benchTui } from "./tui.ts";
 
 const GROUPS: Readonly<Record<string, () => readonly BenchRow[] | Promise<readonly BenchRow[]>>> = {
@@ -13,6 +14,7 @@ const GROUPS: Readonly<Record<string, () => readonly BenchRow[] | Promise<readon
   bank: benchBank,
   pulse: benchPulse,
   place: () => benchPlace(),
+  sheet: benchSheet,
   blend: () => benchBlend(),
   tui: () => benchTui(),
 };
