@@ -33,7 +33,7 @@ export function classTable({ voltage, stored, capacitance, highest, ranOn }: Fac
     kind: "table",
     id: "classes",
     caption: "Classes at the highest voltage",
-    columns: [{ heading: "what" }, { heading: "value" }, { heading: "limit" }, { heading: "class" }],
+    columns: [{ heading: "what" }, { heading: "value", side: "right" }, { heading: "limit" }, { heading: "class" }],
     rows: [
       ["stored energy, highest voltage", up(stored, "energy"), tier, found === null ? none : classWords(found)],
       [

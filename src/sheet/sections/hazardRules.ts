@@ -22,7 +22,7 @@ export function ruleTable({ rule }: Pick<SheetInput, "rule">, facts: Facts): Tab
       { heading: "bleed chains", side: "right" },
       { heading: "one open", side: "right" },
       { heading: "dump", side: "right" },
-      { heading: "gives" },
+      { heading: "gives", side: "right" },
     ],
     rows: RULES.map((one): readonly Cell[] => {
       const clearing = capacitance === null ? null : clearingOf(one, capacitance);
