@@ -2,7 +2,7 @@
 
 import { type Sheet, sheetOf, sheetText, type Table } from "../../src/sheet/index.ts";
 import { largeInput, placedIn } from "../support/sheet.ts";
-import type { BenchRow } from "./bank.ts";
+import type { BenchRow } from "./row.ts";
 
 function seconds(work: () => unknown): number {
   const start = performance.now();
