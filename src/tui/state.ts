@@ -5,6 +5,7 @@ import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
 import { FIRST_MAP, type FrontPoint, type MapView } from "./axes.ts";
+import type { Ground } from "./ground.ts";
 import type { Line, LineEdit } from "./line.ts";
 import type { CatalogueFacts, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
@@ -86,6 +87,8 @@ export interface State extends Work {
   readonly words: SharedWords | null;
   readonly screen: ScreenName;
   readonly help: boolean;
+  /** Clicks and the wheel are taken; the terminal's own selecting then needs its own key, mostly Shift. */
+  readonly mouse: boolean;
   readonly history: History;
   /** Every brief that was tried, the oldest first. */
   readonly trail: readonly Tried[];
@@ -170,7 +173,10 @@ export type Message =
     }
   | { readonly type: "work"; readonly work: LongJob | null }
   | { readonly type: "stop" }
+  | { readonly type: "ground"; readonly ground: Ground }
   | { readonly type: "again" }
+  | { readonly type: "mouse" }
+  | { readonly type: "click"; readonly column: number; readonly row: number }
   | { readonly type: "value" }
   | { readonly type: "faults" }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
@@ -181,6 +187,7 @@ export type Effect =
   | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
   | { readonly type: "overrides"; readonly overrides: Overrides }
   | { readonly type: "stop" }
+  | { readonly type: "mouse"; readonly on: boolean }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };
@@ -223,6 +230,7 @@ export const initialState = (start: Start): State => ({
   showFaults: false,
   screen: "brief",
   help: false,
+  mouse: false,
   field: 0,
   caret: (start.values.energy ?? "").length,
   rank: "cost",
