@@ -9,6 +9,7 @@ export {
 export type { PriceBreak } from "./cell.ts";
 export type { Column } from "./column.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
+export { type History, type HistoryRow, readHistory } from "./history.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
 export { type ListedUnit, readPositions, type UnitList } from "./positions.ts";
 export { cheapest, isPriced, leastBuyable, type Purchase, purchase, toBuy, unitPriceAt } from "./purchase.ts";

@@ -149,6 +149,10 @@ function build(ports: Ports, done: Done): Command {
     .option("--charger <state>", "on: it held the voltage; off: taken off after the charge")
     .option("--next-voltage <voltage>", "charge voltage of the next step of the hot test")
     .option("--next-hold <time>", "how long it would be held")
+    .option("--history <file>", "shot log and units measured anew, CSV: date, shots, serial, capacitance, esr, leakage")
+    .option("--capacitance-lost <fraction>", 'end of life of a unit: this part of its capacitance lost, "20 %"')
+    .option("--esr-grown <fraction>", 'end of life of a unit: its ESR grown by this part, "100 %"')
+    .option("--leakage-most <current>", "end of life of a unit: leakage at its test voltage")
     .option("--json", "print JSON")
     .addHelpText("after", HELP.commission)
     .action(async (sheet: string, flags: CommissionFlags) => {
