@@ -12,6 +12,7 @@ export type PlaceFlags = BankFlags & {
   readonly seed?: string;
   readonly moves?: string;
   readonly pins?: readonly string[];
+  readonly rooms?: readonly string[];
   readonly lots?: string;
   readonly outliers?: string;
   readonly goal?: string;

@@ -120,6 +120,7 @@ function build(ports: Ports, done: Done): Command {
     .option("--leakage-at <voltage>", "voltage on a unit at which leakage was read")
     .option("--unit-limit <voltage>", "highest voltage of a unit; else the part's, derated")
     .option("--pins <pins...>", "units that must stand in a stage or string: SERIAL=3, or a list in CSV")
+    .option("--rooms <rooms...>", "stages or strings that take only one polarity or size group: 3=snap-in")
     .option("--lots <wish>", "mix: every lot spread evenly; apart: one lot to a stage or string")
     .option("--outliers <wish>", "reject or keep units that do not belong to the lot")
     .option("--goal <goal>", "charging, or both: charging within its floor, then holding")
