@@ -27,8 +27,8 @@ export interface StagesTask {
   readonly prove: boolean;
 }
 
-/** So many trials are spent even on a first placing that is good enough: they cost a fraction of a millisecond. */
-const ALWAYS = 12_000;
+/** So many trials are spent without looking at the goal: they cost a fraction of a millisecond. */
+const ALWAYS = 5_000;
 /** The choice of spares is left alone for so many trials, then they join the exchange. */
 const BEFORE_SPARES = 60_000;
 /** Before a proof, so many trials look for a good placing: it makes the proof shorter. */
@@ -121,7 +121,7 @@ export function* solveStages(task: StagesTask, random: Random, work: Effort): Ge
     }
     settle(work, part);
   };
-  if (gap > bound.gap && mayGoOn(work, 0)) yield* refine(false, ALWAYS, bound.gap);
+  if (gap > (task.prove ? bound.gap : target) && mayGoOn(work, 0)) yield* refine(false, ALWAYS, bound.gap);
   if (gap > target && mayGoOn(work, 0)) {
     const quickly = test === null ? Number.POSITIVE_INFINITY : BEFORE_PROOF;
     if (spares) {
