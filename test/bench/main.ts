@@ -3,6 +3,7 @@ import { cpus } from "node:os";
 import { benchBank } from "./bank.ts";
 import { benchBlend } from "./blend.ts";
 import { benchPlace } from "./place.ts";
+import { benchPlaceRival } from "./placeRival.ts";
 import { benchPulse } from "./pulse.ts";
 import { benchSearch } from "./search.ts";
 
@@ -16,7 +17,7 @@ const GROUPS: Readonly<Record<string, () => readonly Row[] | Promise<readonly Ro
   search: benchSearch,
   bank: benchBank,
   pulse: benchPulse,
-  place: () => benchPlace(),
+  place: async () => [...benchPlace(), ...(await benchPlaceRival())],
   blend: () => benchBlend() as Promise<readonly Row[]>,
 };
 

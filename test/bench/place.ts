@@ -30,6 +30,8 @@ const SMALL: readonly Shape[] = [
 
 interface Timed {
   readonly milliseconds: number;
+  /** Of the processor: what the call took itself, whatever else the machine did meanwhile. */
+  readonly busy: number;
   readonly certified: number;
   readonly optimal: boolean;
   readonly charging: number;
@@ -38,12 +40,15 @@ interface Timed {
 
 function timed(lot: readonly MeasuredUnit[], request: PlaceRequest): Timed {
   const start = performance.now();
+  const before = process.cpuUsage();
   const read = place(lot, request);
   const milliseconds = performance.now() - start;
+  const { user, system } = process.cpuUsage(before);
   if (!read.ok) throw new Error(read.refusals[0]!.code);
   const { charging, holding } = read.value;
   return {
     milliseconds,
+    busy: (user + system) / 1000,
     certified: charging.certified,
     optimal: charging.proof === "optimal",
     charging: charging.gap,
@@ -55,7 +60,9 @@ const sorted = (list: readonly number[]): number[] => [...list].sort((a, b) => a
 const part = (list: readonly number[], q: number): number => sorted(list)[Math.floor(q * (list.length - 1))]!;
 const times = (runs: readonly Timed[]): string => {
   const all = runs.map((run) => run.milliseconds);
-  return `median ${part(all, 0.5).toFixed(2)}, p95 ${part(all, 0.95).toFixed(1)}, most ${part(all, 1).toFixed(1)} ms`;
+  const busy = runs.map((run) => run.busy);
+  const most = `${part(all, 1).toFixed(1)} ms (of the processor ${part(busy, 1).toFixed(1)})`;
+  return `median ${part(all, 0.5).toFixed(2)}, p95 ${part(all, 0.95).toFixed(1)}, most ${most}`;
 };
 
 /** `lots` seeded lots for each shape and kind of spread, from `firstSeed` on. */
@@ -71,7 +78,7 @@ export function benchPlace({ lots = 34, firstSeed = 101 } = {}): BenchRow[] {
   runs(LARGE.slice(0, 1), { stopAt: 1e-6 });
   const rows: BenchRow[] = [];
   const late = (list: readonly Timed[], most: number): string =>
-    `${list.filter((run) => run.milliseconds > most).length} of ${list.length} above ${most} ms`;
+    `${list.filter((run) => run.milliseconds > most).length} of ${list.length} above ${most} ms, ${list.filter((run) => run.busy > most).length} by the processor's time`;
 
   const ppm = runs(LARGE, { stopAt: 1e-6, moves: 50e6 });
   rows.push({
@@ -84,7 +91,7 @@ export function benchPlace({ lots = 34, firstSeed = 101 } = {}): BenchRow[] {
   const small = runs(SMALL, { moves: 30e6 });
   rows.push({
     what: "16-24 units, proven optimal",
-    value: `${small.filter((run) => run.optimal).length} of ${small.length}; ${times(small)}; ${late(small, 100)}`,
+    value: `${small.filter((run) => run.optimal).length} of ${small.length}, ${small.filter((run) => run.optimal && run.busy <= 100).length} of them within 100 ms of the processor; ${times(small)}; ${late(small, 100)}`,
     promise: ">= 99 % within 100 ms",
   });
   const held = runs(LARGE, { chargingLimit: 5e-4 }, 0.5);
