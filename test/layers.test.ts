@@ -32,10 +32,10 @@ const OWNERS: Readonly<Record<string, readonly string[]>> = {
   zod: ["catalog/", "search/", "place/", "pulse/", "cli/", "tui/"],
   "javascript-lp-solver": ["search/solve.ts"],
   highs: ["search/highs.ts"],
-  "d3-scale": ["sheet/"],
-  "d3-shape": ["sheet/"],
+  "d3-scale": ["sheet/draw/scales.ts"],
+  "d3-shape": ["sheet/draw/paths.ts"],
   preact: ["sheet/"],
-  "preact-render-to-string": ["sheet/"],
+  "preact-render-to-string": ["sheet/render.ts"],
 };
 
 const files = readdirSync(SRC, { recursive: true, encoding: "utf8" })

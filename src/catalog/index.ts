@@ -8,6 +8,7 @@ export {
 } from "./capacitor.ts";
 export type { PriceBreak } from "./cell.ts";
 export type { Column } from "./column.ts";
+export { readRecords, separatorOf } from "./csv.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
 export { type History, type HistoryRow, readHistory } from "./history.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";

@@ -67,17 +67,28 @@ const ASKED: readonly Asked[] = [
   { label: "limits of a unit", key: LIMIT_KEYS, value: limitWords },
 ];
 
+export interface AskedLine {
+  readonly label: string;
+  readonly value: string;
+  /** False for a default. */
+  readonly given: boolean;
+}
+
+/** The brief as lines of words; what it does not have is left out. */
+export const askedLines = (brief: Brief, given: ReadonlySet<string>): readonly AskedLine[] =>
+  ASKED.flatMap(({ label, key, value }) => {
+    const text = value(brief);
+    const keys = typeof key === "string" ? [key] : key;
+    return text === null ? [] : [{ label, value: text, given: keys.some((one) => given.has(one)) }];
+  });
+
 /** The brief in lines; the defaults together in the last. */
 export function askedText(brief: Brief, given: ReadonlySet<string>, width: number): string {
-  const lines: string[] = [];
-  const defaults: string[] = [];
-  for (const { label, key, value } of ASKED) {
-    const text = value(brief);
-    if (text === null) continue;
-    if (typeof key === "string" ? given.has(key) : key.some((one) => given.has(one)))
-      lines.push(wrap(`${pad(label, 20)} ${text}`, width, "  "));
-    else defaults.push(`${label} ${text}`);
-  }
+  const asked = askedLines(brief, given);
+  const lines = asked
+    .filter((line) => line.given)
+    .map(({ label, value }) => wrap(`${pad(label, 20)} ${value}`, width, "  "));
+  const defaults = asked.filter((line) => !line.given).map(({ label, value }) => `${label} ${value}`);
   if (defaults.length > 0) lines.push(wrap(`by default: ${defaults.join(", ")}`, width, "  "));
   return lines.join("\n");
 }

@@ -3,9 +3,10 @@
 import type { Chain } from "../bank/index.ts";
 import { assumedLeakage, type MeasuredUnit } from "../catalog/index.ts";
 import { chainsOf, type PriorDoubt, type Ties } from "../place/index.ts";
-import { accepted, type Read, refused } from "../quantity/index.ts";
+import { accepted, type Read, refused, versionFault } from "../quantity/index.ts";
 import type { Files } from "./files.ts";
 import { readJson } from "./jsonText.ts";
+import { LAYOUT_VERSION } from "./layoutInput.ts";
 
 export interface BankSheet {
   readonly ties: Ties;
@@ -35,6 +36,9 @@ export interface SheetWishes {
   readonly latest?: ReadonlyMap<string, Partial<MeasuredUnit>>;
 }
 
+/** Version of a placing in JSON, as place writes it. */
+export const PLACING_VERSION = 1;
+
 type Facts = Readonly<Record<string, unknown>>;
 
 const isFacts = (value: unknown): value is Facts =>
@@ -57,6 +61,10 @@ export function readSheet(path: string, wishes: SheetWishes, files: Files): Read
   const no = (read: string, want: string): Read<never> => refused({ code: "bad-sheet", place: { file }, read, want });
   const facts = json.value.value;
   if (!isFacts(facts)) return no("no object", "the JSON of place, or one layout of plan or check");
+  const newest = Array.isArray(facts.groups) ? PLACING_VERSION : LAYOUT_VERSION;
+  const place = { ...(json.value.placeOf("version") ?? { file }), field: "version" };
+  const old = versionFault({ found: facts.version, newest, place });
+  if (old !== null) return refused(old);
   const { series, parallel, ties } = facts;
   const whole = (n: unknown): n is number => Number.isInteger(n) && (n as number) >= 1 && (n as number) <= 1e6;
   if (!whole(series) || !whole(parallel)) return no("no series and parallel", "whole numbers from 1");

@@ -1,5 +1,7 @@
 // The examples and explanations that close each help page.
 
+import { GOVERNING } from "./governing.ts";
+
 const STATUS = `
 Exit status: 0 done; 1 no layout possible, or a check failed; 2 wrong use or unreadable input; 70 a bug of ours.`;
 
@@ -10,6 +12,17 @@ Put BRIEF before --catalog, which takes every name after it.`;
 const LAYOUT = `
 The layout is given by --part, --series, --parallel and --ties, or by --layout FILE with one element of the
 "layouts" of plan --json.`;
+
+/** Ids, as many on a line as fit. */
+function governing(): string {
+  const lines = [" "];
+  for (const id of GOVERNING) {
+    const last = lines[lines.length - 1] as string;
+    if (last.length + id.length + 1 > 76) lines.push(`  ${id}`);
+    else lines[lines.length - 1] = `${last} ${id}`;
+  }
+  return lines.join("\n");
+}
 
 export const HELP = {
   program: `
@@ -64,6 +77,13 @@ ${LAYOUT}${BRIEF}${STATUS}`,
 Examples:
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --output order.csv
   $ joulewright order brief.json --layout chosen.json --catalog mine.csv --format md
+  $ joulewright order brief.json --layout chosen.json --catalog mine.csv --edited order.csv --output order.csv --force
+
+--edited takes a bill as CSV back from a spreadsheet. Kept are rows of your own (a blank or "own line" under line), columns
+of your own, and what you wrote under item, value, rating, quantity needed, on hand, pack, unit price, currency, supplier,
+order code, alternates, status and note; all else is reckoned anew. A row with your quantity or price is reckoned from its
+own cells, without price breaks. A blank cell of yours stays blank; delete a row to have it made anew. The column "mark"
+tells what is yours: leave it as it is. What was taken over is told.
 ${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
   place: `
 Examples:
@@ -73,6 +93,24 @@ Examples:
   $ joulewright place --series 6 --parallel 10 --ties cross-tied --measured lot.csv --positions list.csv --without pf-014
 A plain shape is enough: --part, --catalog, BRIEF and --voltage add limits, resistors and voltages.
 Same file, seed and moves: same list, byte for byte.${STATUS}`,
+  sheet: `
+Examples:
+  $ joulewright sheet brief.json --layout chosen.json --catalog mine.csv --output sheet.html
+  $ joulewright sheet brief.json --layout chosen.json --catalog mine.csv --measured lot.csv --paper letter \\
+      --revision B --date "2 March" --rule nec-460-6 --output sheet.html
+  $ joulewright sheet brief.json --layout chosen.json --catalog mine.csv --format md
+
+One HTML file that needs nothing else: no script, nothing fetched; print it from any browser. What is not known is left
+blank to fill in, with what it blocks. Rules for --rule, each told in the hazard file whichever governs:
+${governing()}
+${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
+  labels: `
+Examples:
+  $ joulewright labels brief.json --layout chosen.json --catalog mine.csv --measured lot.csv --output labels.html
+  $ joulewright labels brief.json --layout chosen.json --catalog mine.csv --paper letter --output labels.html
+One label for every unit, stage or string, and spare, with serial, position, polarity and rating; without --measured the
+serials are lines to fill in. Print at full size and cut along the frames.
+${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
   commission: `
 Examples:
   $ joulewright commission bank.json --readings readings.csv --unit-limit "324 V"
@@ -89,4 +127,19 @@ Examples:
   $ joulewright parts - < mine.csv
 
 Capacitors, resistors, fuses and measured units are told apart by their headings.${STATUS}`,
+  completion: `
+Examples:
+  $ joulewright completion bash > ~/.local/share/bash-completion/completions/joulewright
+  $ joulewright completion zsh > ~/.zfunc/_joulewright
+  $ joulewright completion fish > ~/.config/fish/completions/joulewright.fish
+
+For one session of bash: source <(joulewright completion bash). For zsh the folder must be in fpath before compinit runs.
+${STATUS}`,
+  manual: `
+Examples:
+  $ joulewright manual | man -l -
+  $ joulewright manual > joulewright.1
+
+An installed package brings the page along: man joulewright.
+${STATUS}`,
 } as const;

@@ -1,7 +1,15 @@
 // The one layout that a command is about: from flags, or from a file that holds one element of a plan's layouts.
 
 import { type Layout, plainTies, type Ties } from "../bank/index.ts";
-import { accepted, parseQuantity, parseTolerance, type Read, type Refusal, refused } from "../quantity/index.ts";
+import {
+  accepted,
+  parseQuantity,
+  parseTolerance,
+  type Read,
+  type Refusal,
+  refused,
+  versionFault,
+} from "../quantity/index.ts";
 import type { BalanceWish } from "../search/index.ts";
 import type { Files } from "./files.ts";
 import { readJson } from "./jsonText.ts";
@@ -33,6 +41,8 @@ export interface FiledBalance {
 }
 
 const MOST = 1e6;
+/** Version of a layout in JSON, as plan and check write it. */
+export const LAYOUT_VERSION = 1;
 const refuse = (code: string, field: string, read: string, want: string): Refusal => ({
   code,
   place: { field },
@@ -126,6 +136,12 @@ function fromFile(path: string, files: Files): Read<Omit<LayoutInput, "balance">
   if (typeof value !== "object" || value === null || Array.isArray(value))
     return no("no object", "one element of a plan's layouts");
   if (Array.isArray(value.layouts)) return no("a whole plan", "one element of its layouts");
+  const old = versionFault({
+    found: value.version,
+    newest: LAYOUT_VERSION,
+    place: { ...(json.value.placeOf("version") ?? { file }), field: "version" },
+  });
+  if (old !== null) return refused(old);
   const { part, ties, balance } = value;
   for (const key of ["series", "parallel"]) {
     const n = value[key];

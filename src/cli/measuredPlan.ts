@@ -4,12 +4,13 @@ import { visible } from "../order/index.ts";
 import { type MeasuredPlan, measuredPlan } from "../place/index.ts";
 import { accepted, formatQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
 import type { LayoutResult, Ranking } from "../search/index.ts";
+import { lotPart } from "./lotPart.ts";
 import { readMeasuredInput } from "./measuredInput.ts";
 import type { PlaceFlags } from "./placeFlags.ts";
 import { flagQuantity } from "./placeFlags.ts";
 import type { Ports } from "./ports.ts";
 import type { Settings } from "./settings.ts";
-import { findPart, type Stock } from "./stock.ts";
+import type { Stock } from "./stock.ts";
 
 export type MeasuredPlanFlags = Pick<PlaceFlags, "measured" | "uncertainty" | "part">;
 
@@ -20,7 +21,7 @@ export interface MeasuredPlanned extends MeasuredPlan {
   readonly faults: readonly Refusal[];
 }
 
-/** Refuses a basis without units and units without the basis, a lot of several parts, a part that no catalogue has. */
+/** For the measured basis. Refuses a basis without units, a lot of several parts, a part that no catalogue has. */
 export function planMeasured(
   flags: MeasuredPlanFlags,
   {
@@ -31,27 +32,10 @@ export function planMeasured(
   }: { readonly settings: Settings; readonly stock: Stock; readonly limit: number; readonly rank: Ranking },
   ports: Ports,
 ): Read<MeasuredPlanned> {
-  if (settings.brief.basis !== "measured") {
-    const want = "--basis measured beside it: then the units themselves decide";
-    return refused({
-      code: "contradiction",
-      place: { field: "--measured" },
-      read: `basis ${settings.brief.basis}`,
-      want,
-    });
-  }
   const measured = readMeasuredInput(flags.measured, flags.part, ports.files);
   if (!measured.ok) return measured;
-  const { units, file, faults } = measured.value;
-  const named = [...new Set(units.flatMap((unit) => (unit.part === undefined ? [] : [unit.part])))];
-  const [only, ...more] = stock.parts;
-  const name = flags.part ?? (named.length === 1 ? named[0] : more.length === 0 ? only?.part : undefined);
-  if (name === undefined || units.length < 2) {
-    const want = "two measured units or more of one part: name it with --part";
-    const read = units.length < 2 ? `${units.length} units` : `${named.length} parts named`;
-    return refused({ code: "bad-value", place: { file, field: "part" }, read, want });
-  }
-  const part = findPart(name, stock.parts, { field: flags.part === undefined ? `${file} part` : "--part" });
+  const { units, faults } = measured.value;
+  const part = lotPart(measured.value, flags.part, stock);
   if (!part.ok) return part;
   const given =
     flags.uncertainty === undefined ? undefined : flagQuantity(flags.uncertainty, "--uncertainty", "fraction");
@@ -65,7 +49,7 @@ export function planMeasured(
     rank,
     ...(given === undefined ? {} : { uncertainty: given }),
   });
-  return planned.ok ? accepted({ ...planned.value, part: name, units: units.length, faults }) : planned;
+  return planned.ok ? accepted({ ...planned.value, part: part.value.part, units: units.length, faults }) : planned;
 }
 
 /** What `plan --json` adds: the lot, what the placed units do in each listed layout, and the least in series either way. */

@@ -1,5 +1,6 @@
 // A placing as data: the groups, what is proven, the positions, and all that a later reading of the bank needs.
 
+import { PLACING_VERSION } from "./bankSheet.ts";
 import { withWords } from "./inputNotes.ts";
 import type { Placed } from "./placed.ts";
 import { toJson } from "./toJson.ts";
@@ -13,6 +14,7 @@ export function placeJson(placed: Placed): string {
   const { ties, series, parallel, groups, charging, holding, floor, digits, moves, rejected } = placing;
   const voltage = bank.voltage;
   return toJson({
+    version: PLACING_VERSION,
     ties,
     series,
     parallel,

@@ -9,11 +9,13 @@ import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
 import type { PulseFlags } from "./commands/pulse.ts";
+import { treeOf } from "./commandTree.ts";
 import type { CommissionFlags } from "./commissionFlags.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
 import type { PlaceFlags } from "./placeFlags.ts";
 import type { Ports } from "./ports.ts";
+import type { SheetFlags } from "./sheetFlags.ts";
 import { VERSION } from "./version.ts";
 
 type Done = (status: number) => void;
@@ -41,7 +43,20 @@ function withLayout(command: Command): Command {
     .option("--balance-tolerance <tolerance>", 'its tolerance, "5 %"');
 }
 
-function build(ports: Ports, done: Done): Command {
+/** What the paper is made with beside the layout. */
+function withPaper(command: Command): Command {
+  return command
+    .option("--measured <file>", "measured units, CSV: serials, places and bands come from them")
+    .option("--positions <file>", "with --measured: take this list of positions as built")
+    .option("--uncertainty <fraction>", 'of one measured capacitance against another, "0.3 %"')
+    .option("--earth <end>", "negative, positive, none or unknown: the end at the earth point")
+    .option("--paper <paper>", "A4 or Letter", "A4")
+    .option("--output <file>", "write to a file, whole or not at all")
+    .option("--force", "replace the file if it exists");
+}
+
+/** The whole command tree. */
+export function build(ports: Ports, done: Done): Command {
   const program = new Command("joulewright");
   const say = (write: (text: string) => void) => (text: string) => write(visibleLines(text));
   program
@@ -61,7 +76,10 @@ function build(ports: Ports, done: Done): Command {
     .description("Find every layout that does the job, ranked.")
     .option("--limit <count>", "how many layouts are printed; 0 for all", "20")
     .option("--rank <by>", "cost, units, volume, mass or stress", "cost")
-    .option("--measured <file>", "measured units, CSV, for the basis measured: they decide how many in series")
+    .option(
+      "--measured <file>",
+      "measured units, CSV: for the basis measured, where they decide how many in series, or statistical, drawn from them",
+    )
     .option("--part <name>", "the part that was measured")
     .option("--uncertainty <fraction>", "of one measured capacitance against another")
     .option("--brief-schema", "print the JSON Schema of the brief and stop")
@@ -104,6 +122,7 @@ function build(ports: Ports, done: Done): Command {
   withLayout(program.command("order"))
     .description("Write the bill of materials of one layout.")
     .option("--fuses <file>", "fuse catalogue, CSV: adds a fuse for each unit to the bill")
+    .option("--edited <file>", "an edited bill, CSV: its own lines, prices and choices are kept; - is standard input")
     .option("--format <format>", "csv, json, md or html; else by the ending of --output, else csv")
     .option("--output <file>", "write to a file, whole or not at all")
     .option("--force", "replace the file if it exists")
@@ -138,6 +157,26 @@ function build(ports: Ports, done: Done): Command {
       const { placeCommand } = await import("./commands/place.ts");
       done(placeCommand(brief, flags, ports));
     });
+  withPaper(withLayout(program.command("sheet")))
+    .description("Write the build sheet of one layout: drawings, wiring, tests, limits, hazard file.")
+    .option("--fuses <file>", "fuse catalogue, CSV: the fuse that does is drawn and wired")
+    .option("--rule <id>", "the rule that governs bleed times; else the brief's touch-safe voltage")
+    .option("--date <text>", "printed as given; no clock is read")
+    .option("--revision <text>", "printed as given")
+    .option("--format <format>", "html, md or json; else by the ending of --output, else html")
+    .addHelpText("after", HELP.sheet)
+    .action(async (brief: string | undefined, flags: SheetFlags) => {
+      const { sheetCommand } = await import("./commands/sheet.ts");
+      done(sheetCommand(brief, flags, ports));
+    });
+  withPaper(withLayout(program.command("labels")))
+    .description("Write labels to print and cut: units, stages or strings, spares.")
+    .option("--format <format>", "html or json; else by the ending of --output, else html")
+    .addHelpText("after", HELP.labels)
+    .action(async (brief: string | undefined, flags: SheetFlags) => {
+      const { labelsCommand } = await import("./commands/labels.ts");
+      done(labelsCommand(brief, flags, ports));
+    });
   program
     .command("commission")
     .description("Compare the voltages of a built bank with what its units should show.")
@@ -170,6 +209,23 @@ function build(ports: Ports, done: Done): Command {
     .action(async (paths: readonly string[], flags: PartsFlags) => {
       const { partsCommand } = await import("./commands/parts.ts");
       done(partsCommand(paths, flags, ports));
+    });
+  program
+    .command("completion")
+    .description("Print a script that completes commands and options in a shell.")
+    .argument("<shell>", "bash, zsh or fish")
+    .addHelpText("after", HELP.completion)
+    .action(async (shell: string) => {
+      const { completionCommand } = await import("./commands/completion.ts");
+      done(completionCommand(shell, treeOf(program), ports));
+    });
+  program
+    .command("manual")
+    .description("Print the manual page, for man.")
+    .addHelpText("after", HELP.manual)
+    .action(async () => {
+      const { manualCommand } = await import("./commands/manual.ts");
+      done(manualCommand(treeOf(program), ports));
     });
   return program;
 }

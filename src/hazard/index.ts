@@ -24,6 +24,7 @@ export {
 export { type DumpDuty, type DumpUse, dumpDuty, dumpUse, dumpWindow, SPECIFIC_HEATS } from "./dump.ts";
 export { ARTICLE_360, type EnergyClass, energyClass, type Tier, tierAt } from "./energyClass.ts";
 export { type HazardOf, hazardFindings } from "./findings.ts";
+export { type Clearing, clearingOf } from "./governing.ts";
 export { type Recovery, recovery } from "./recovery.ts";
 export type { HowRead, Limit, Rule, VoltageRange } from "./rule.ts";
 export { RULES, type RuleId, ruleOf } from "./rules.ts";

@@ -1,6 +1,6 @@
 // The shape of a bill of materials: counted lines and their totals, plain data, money in the major unit of its currency.
 
-/** What a line is; one name for each kind of thing a bank needs. */
+/** What a line is; one name for each kind of thing a bank needs, and `own line` for what its builder adds. */
 export const LINE_KINDS = [
   "units",
   "spares",
@@ -16,6 +16,7 @@ export const LINE_KINDS = [
   "shorting links",
   "bus bars",
   "unit links",
+  "load bus",
   "insulator",
   "resistor mounts",
   "lugs",
@@ -24,6 +25,7 @@ export const LINE_KINDS = [
   "meter with divider",
   "screen",
   "test resistor",
+  "own line",
 ] as const;
 export type LineKind = (typeof LINE_KINDS)[number];
 
@@ -53,8 +55,16 @@ export interface BillLine {
   readonly currency: string | null;
   readonly supplier: string;
   readonly orderCode: string;
+  /** Other parts that would do in its place, as far as the catalogues show. */
+  readonly alternates: string;
+  /** How far its buying has come; empty until the builder says. */
+  readonly status: string;
   readonly note: string;
   readonly state: LineState;
+  /** What its cells were when the program made it, so that a later reading knows which the builder changed; empty in an own line. */
+  readonly mark: string;
+  /** Cells under headings that the builder added, in their order. */
+  readonly extra?: readonly string[];
 }
 
 export interface Totals {
@@ -67,10 +77,30 @@ export interface Totals {
   readonly unpriced: readonly string[];
 }
 
+/**
+ * `kept`: the builder's cell stands in place of the program's. `own line`: a line of the builder's own. `put back`: the edited copy
+ * lacks a line that the bank takes. `not counted`: the bank no longer takes it; what the builder wrote is kept at a quantity of 0.
+ */
+export interface BillChange {
+  readonly kind: "kept" | "own line" | "put back" | "not counted";
+  readonly item: string;
+  readonly line: LineKind;
+  /** Line of the edited file; null where it has none. */
+  readonly at: number | null;
+  /** Heading, what the program would write, and what the builder wrote; empty for whole lines. */
+  readonly heading: string;
+  readonly made: string;
+  readonly read: string;
+}
+
 export interface Bill {
   readonly layout: string;
   readonly lines: readonly BillLine[];
   readonly totals: Totals;
   /** Said on every copy of the bill. */
   readonly cautions: readonly string[];
+  /** Headings that the builder added. */
+  readonly extraHeadings?: readonly string[];
+  /** What was taken over from an edited copy, and what was not; absent in a bill made anew. */
+  readonly changes?: readonly BillChange[];
 }

@@ -36,6 +36,9 @@ export const toBeChosen = ({
   currency: null,
   supplier: "",
   orderCode: "",
+  alternates: "",
+  status: "",
   note,
   state: "to be chosen",
+  mark: "",
 });

@@ -1,7 +1,7 @@
 // A bill as one plain HTML table, everything escaped; no script, no style from outside.
 
 import type { Bill } from "./bill.ts";
-import { BILL_COLUMNS, cellText } from "./columns.ts";
+import { columnsOf } from "./columns.ts";
 import { visible } from "./visible.ts";
 
 const ENTITIES: Readonly<Record<string, string>> = {
@@ -18,11 +18,12 @@ export const htmlText = (text: string): string => visible(text).replace(/[&<>"'`
 
 export function billToHtml(bill: Bill): string {
   const { purchase, consumed, currency, unpriced } = bill.totals;
+  const columns = columnsOf(bill);
   const sum = (value: number | null): string => (value === null ? "no price" : `${value} ${currency}`);
   const title = `Bill of materials: ${htmlText(bill.layout)}`;
-  const head = BILL_COLUMNS.map((column) => `<th scope="col">${htmlText(column.heading)}</th>`).join("");
+  const head = columns.map((column) => `<th scope="col">${htmlText(column.heading)}</th>`).join("");
   const rows = bill.lines.map(
-    (line) => `<tr>${BILL_COLUMNS.map((column) => `<td>${htmlText(cellText(line, column))}</td>`).join("")}</tr>`,
+    (line) => `<tr>${columns.map((column) => `<td>${htmlText(column.cell(line))}</td>`).join("")}</tr>`,
   );
   const left = unpriced.length > 0 ? `<p>Left out, no price: ${unpriced.map(htmlText).join("; ")}.</p>\n` : "";
   return `<!DOCTYPE html>

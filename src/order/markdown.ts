@@ -1,7 +1,7 @@
 // A bill as a Markdown table: text of unknown origin can end no cell, start no HTML and form no link.
 
 import type { Bill } from "./bill.ts";
-import { BILL_COLUMNS, cellText } from "./columns.ts";
+import { columnsOf } from "./columns.ts";
 import { visible } from "./visible.ts";
 
 /** Text that Markdown shows as it is. */
@@ -18,14 +18,15 @@ export function markdownText(text: string): string {
 /** Title, table, sums. */
 export function billToMarkdown(bill: Bill): string {
   const { purchase, consumed, currency, unpriced } = bill.totals;
+  const columns = columnsOf(bill);
   const digits = (value: number | null): string => (value === null ? "no price" : `${value} ${currency}`);
   const row = (cells: readonly string[]): string => `| ${cells.join(" | ")} |`;
-  const rows = bill.lines.map((line) => row(BILL_COLUMNS.map((column) => markdownText(cellText(line, column)))));
+  const rows = bill.lines.map((line) => row(columns.map((column) => markdownText(column.cell(line)))));
   const text = [
     `# Bill of materials: ${markdownText(bill.layout)}`,
     "",
-    row(BILL_COLUMNS.map((column) => column.heading)),
-    row(BILL_COLUMNS.map((column) => (column.kind === "text" ? "---" : "---:"))),
+    row(columns.map((column) => markdownText(column.heading))),
+    row(columns.map((column) => (column.kind === "text" ? "---" : "---:"))),
     ...rows,
     "",
     `Purchase cost of the priced lines: ${digits(purchase)}. Consumed cost: ${digits(consumed)}.`,

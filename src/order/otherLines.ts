@@ -4,6 +4,7 @@
 
 import { storedEnergy } from "../bank/index.ts";
 import type { Capacitor } from "../catalog/index.ts";
+import { dumpDuty } from "../hazard/index.ts";
 import { formatQuantity } from "../quantity/index.ts";
 import type { Brief, LayoutResult } from "../search/index.ts";
 import type { BillLine } from "./bill.ts";
@@ -16,22 +17,30 @@ export interface OtherInput {
   readonly brief: Brief;
 }
 
-/** How long a bar is that joins the units of one stage standing side by side, m; null when their size is unknown. */
-function barLength({ layout, unit }: OtherInput): number | null {
-  const pitch = unit.diameter ?? unit.width;
-  return pitch === undefined ? null : pitch * layout.parallel;
+/** The resistor that empties the bank: its value and amperes where the brief states it. */
+function dumpWish({ layout, brief }: OtherInput, stored: string, full: string): Wish {
+  const { dumpResistance: resistance } = brief;
+  const wish = { item: "dump resistor", line: "dump resistor", needed: 1 } as const;
+  const note = "Choose by joules, not watts.";
+  if (resistance === undefined) return { ...wish, rating: `${stored}, ${full}`, note };
+  const { peakCurrent } = dumpDuty({
+    capacitance: layout.capacitance.high ?? layout.capacitance.nominal,
+    voltage: brief.voltage * (1 + brief.overshoot),
+    resistance,
+  });
+  const amperes = `${formatQuantity(peakCurrent, "current", { digits: 3, rounding: "up" })} peak`;
+  return { ...wish, value: formatQuantity(resistance, "resistance"), rating: `${stored}, ${full}, ${amperes}`, note };
 }
 
-/** Everything but what is bought from the catalogues. */
+/** Everything but what is bought from the catalogues, and the conductors. */
 export function otherLines(input: OtherInput): readonly BillLine[] {
   const { layout, brief } = input;
   const counts = countsOf(layout);
   const volts = brief.voltage * (1 + brief.overshoot);
-  const up = (value: number, dimension: "voltage" | "energy" | "length"): string =>
+  const up = (value: number, dimension: "voltage" | "energy"): string =>
     formatQuantity(value, dimension, { digits: 3, rounding: "up" });
   const full = `at least ${up(volts, "voltage")} dc`;
   const stored = `at least ${up(storedEnergy(layout.capacitance.high ?? layout.capacitance.nominal, volts), "energy")} in one dump`;
-  const bar = barLength(input);
   const wishes: (Wish | null)[] = [
     layout.balance === null && layout.series >= 1
       ? {
@@ -54,13 +63,7 @@ export function otherLines(input: OtherInput): readonly BillLine[] {
     counts.fuses > 0
       ? { item: "fuse holder", line: "fuse holders", needed: counts.fuses, rating: full, note: "One to each fuse." }
       : null,
-    {
-      item: "dump resistor",
-      line: "dump resistor",
-      needed: 1,
-      rating: `${stored}, ${full}`,
-      note: "Choose by joules, not watts.",
-    },
+    dumpWish(input, stored, full),
     { item: "dump relay", line: "dump relay", needed: 1, rating: full, note: "Closes when its power fails." },
     {
       item: "earthing stick with resistor and hook",
@@ -76,16 +79,6 @@ export function otherLines(input: OtherInput): readonly BillLine[] {
       value: "bare braid or wire",
       note: `One across each ${layout.ties === "cross-tied" ? "stage" : "unit"} while the bank is not in use; loose and spare units need theirs too.`,
     },
-    {
-      item: "bus bar",
-      line: "bus bars",
-      needed: counts.bars,
-      value: bar === null ? "to be chosen" : `at least ${up(bar, "length")} long`,
-      note:
-        bar === null
-          ? "One to each potential that units share; length unknown, because the unit's size is."
-          : "One to each potential that units share; length for units side by side in one row. Section by the shot's current.",
-    },
     counts.links > 0
       ? {
           item: "link between units",
@@ -94,13 +87,6 @@ export function otherLines(input: OtherInput): readonly BillLine[] {
           note: "Between neighbours of a string.",
         }
       : null,
-    {
-      item: "insulator sheet",
-      line: "insulator",
-      needed: null,
-      rating: full,
-      note: "Between the bars and to the case; size follows from how the bank is laid out.",
-    },
     layout.balance === null
       ? null
       : {

@@ -49,7 +49,10 @@ export function pricedLine(wording: Wording, terms: PurchaseTerms, take: Take, u
     currency: spent === null ? null : currency,
     supplier: terms.supplier ?? "",
     orderCode: terms.orderCode ?? "",
+    alternates: "",
+    status: "",
     state: spent === null ? "no price" : "priced",
+    mark: "",
   };
 }
 
@@ -68,6 +71,9 @@ const shortLine = (wording: Wording, terms: PurchaseTerms, needed: number): Bill
   currency: null,
   supplier: terms.supplier ?? "",
   orderCode: terms.orderCode ?? "",
+  alternates: "",
+  status: "",
+  mark: "",
   note: [NOT_TO_BE_HAD, wording.note].filter((part) => part !== "").join(" "),
   state: "no price",
 });

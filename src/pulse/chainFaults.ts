@@ -1,4 +1,5 @@
 // Faults inside the chain: a unit shorted, a unit open, a whole row shorted.
+import { formatQuantity } from "../quantity/index.ts";
 import { cornerShare, type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
 import { faultAction, faultPeak, rowShortLoop, unitShortLoop } from "./faultCurrents.ts";
 import { type Fault, row } from "./faultRow.ts";
@@ -26,7 +27,7 @@ export function unitShort(bank: FaultBank): Fault {
   };
   const note =
     bank.ties === "strings"
-      ? `With the charger on, the rest of its string stands at V/${n - 1}; alone, at ${result.survivorAlone} V.`
+      ? `With the charger on, the rest of its string stands at V/${n - 1}; alone, at ${formatQuantity(result.survivorAlone, "voltage", { rounding: "up" })}.`
       : `With the charger on, the other stages stand at V/${n - 1}; alone, they keep what they had.`;
   return row(bank, {
     id: "unit-short",

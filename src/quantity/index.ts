@@ -1,5 +1,6 @@
 // Numbers with units, preferred values, component codes, money, and the shapes of refusals and findings.
 export { DIMENSIONS, type Dimension, dimensionOf, type Scale, unitScale } from "./dimension.ts";
+export { type FileVersion, versionFault } from "./fileVersion.ts";
 export type { BankState, Finding, Verdict } from "./finding.ts";
 export { type FormatOptions, formatQuantity, type Rounding, roundTo, toAscii } from "./format.ts";
 export { type Claim, withinLeast, withinMost } from "./judge.ts";

@@ -48,7 +48,7 @@ export function parseTolerance(
 ): Read<Tolerance> {
   const cell = text.trim();
   const no = (code: string): Read<never> => refused({ code, place: {}, read: JSON.stringify(text), want: WANT });
-  const letter = TOLERANCE_LETTERS[cell];
+  const letter = Object.hasOwn(TOLERANCE_LETTERS, cell) ? TOLERANCE_LETTERS[cell] : undefined;
   if (letter) return accepted(letter);
   const part = (digits: string, sign: string): number | null => {
     const scale = sign === "%" ? { exponent: -2, factor: 1 } : bare;

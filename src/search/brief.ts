@@ -6,10 +6,12 @@ import {
   type Dimension,
   isCurrency,
   nearestWord,
+  type Place,
   parseQuantity,
   type Read,
   type Refusal,
   refused,
+  versionFault,
 } from "../quantity/index.ts";
 import { crossFaults } from "./briefFaults.ts";
 import { above, quantity, whole, word } from "./fields.ts";
@@ -139,8 +141,15 @@ const KEYS_AT: Readonly<Record<string, readonly string[]>> = {
   ),
 };
 
+/** Version of the brief file's format. A brief without one is of the first. */
+export const BRIEF_VERSION = 1;
+
 /** JSON Schema of the brief file. */
-export const briefJsonSchema = (): unknown => z.toJSONSchema(briefSchema, { io: "input", unrepresentable: "any" });
+export function briefJsonSchema(): unknown {
+  const schema = z.toJSONSchema(briefSchema, { io: "input", unrepresentable: "any" });
+  const version = { type: "integer", minimum: 1, maximum: BRIEF_VERSION } as const;
+  return { ...schema, properties: { version, ...schema.properties } };
+}
 
 const REQUIRED: Readonly<Record<string, string>> = {
   energy: 'the energy of one pulse such as "2.4 kJ"',
@@ -176,7 +185,12 @@ export function readBrief(input: unknown, file?: string): Read<Brief> {
       want: "an object with energy, voltage and ripple",
     });
   }
-  const result = briefSchema.safeParse(withLampDrive(input as Readonly<Record<string, unknown>>));
+  const { version, ...keys } = input as Readonly<Record<string, unknown>>;
+  const place: Place = { ...(file ? { file } : {}), field: "version" };
+  const old = versionFault({ found: version, newest: BRIEF_VERSION, place });
+  // What a later version means by its keys is not known: nothing else is said of them.
+  if (old !== null) return refused(old);
+  const result = briefSchema.safeParse(withLampDrive(keys));
   if (result.success) {
     const crossed = crossFaults(result.data, file);
     return crossed.length > 0 ? refused(...crossed) : accepted(result.data);

@@ -31,6 +31,8 @@ export interface PlanInput {
   readonly quick?: boolean;
   /** With the measured basis: whether the measured units, placed, share safely in a shape. */
   readonly judge?: Judge;
+  /** With the statistical basis: measured capacitances of the only part, F, at least LEAST_LOT; units are drawn from them. */
+  readonly lot?: readonly number[];
 }
 
 /** Up to so many layouts asked for, from so many parts on, the search keeps only what may be among them or on the front: less is done faster whole. */
@@ -47,7 +49,7 @@ export function plan(input: PlanInput): Read<PlanResult> {
   const parts = pricedIn(distinct(input.parts), currency, brief);
   const families = pricedIn(given, currency, brief);
   const required = requiredCapacitance(brief);
-  const work: SweepInput = { parts, families, brief, required, currency, judge: input.judge ?? null };
+  const work: SweepInput = { parts, families, brief, required, currency, judge: input.judge ?? null, lot: input.lot };
   const wanted = parts.length >= SIEVED_FROM && limit > 0 && limit <= MOST_SIEVED ? { limit, rank } : null;
   const { table, count, refused: refusals } = sweep(work, { wanted });
   const rows = firstRows(table.count, limit, comparison(table, parts, rank));
@@ -117,7 +119,8 @@ function layoutAt(work: SweepInput, table: LayoutTable, row: number): LayoutResu
     parallel: table.parallel[row] as number,
     ties: tiesOf(table, row),
   };
-  return assess({ unit, layout, brief: work.brief, families: work.families, currency: work.currency });
+  const { brief, families, currency, lot } = work;
+  return assess({ unit, layout, brief, families, currency, ...(lot === undefined ? {} : { lot }) });
 }
 
 function notesOf(brief: Brief): readonly string[] {

@@ -57,16 +57,21 @@ function sigmasOff({ series: n, parallel: p, share, tolerance }: RiskCase): numb
   return (Math.sqrt(p) * (1 - kappa / (n - 1))) / sigma;
 }
 
-/** Asks, for many layouts of one plan, whether the chance is within the brief's; equal cases are worked out once. */
-export function riskJudge(brief: Brief): (given: RiskCase) => boolean {
+/**
+ * Asks, for many layouts of one plan, whether the chance is within the brief's; equal cases are worked out once.
+ * With a lot every unit is drawn from it, whatever the tolerance: the plan is then of the measured part alone.
+ */
+export function riskJudge(brief: Brief, lot?: readonly number[]): (given: RiskCase) => boolean {
   const known = new Map<string, boolean>();
-  return (given) => {
+  return (shape) => {
+    const given = lot === undefined ? shape : { ...shape, lot };
     const { series: n, parallel: p, ties, share, tolerance } = given;
-    if (ties === "cross-tied" && p >= 4 && brief.risk <= 0.01 && sigmasOff(given) < 0.84) return false;
+    if (lot === undefined && ties === "cross-tied" && p >= 4 && brief.risk <= 0.01 && sigmasOff(given) < 0.84)
+      return false;
     const key = `${tolerance.low} ${tolerance.high} ${n} ${p} ${ties} ${share}`;
     let within = known.get(key);
     if (within === undefined) {
-      within = riskBound({ n, p, ties, share, law: lawOf(tolerance, brief.distribution) }) <= brief.risk;
+      within = riskBound(tailCaseOf(given, brief)) <= brief.risk;
       if (!within) {
         const { exceed, error } = riskOf(given, brief);
         within = exceed + error <= brief.risk;

@@ -40,7 +40,7 @@ const PASS = 8;
 export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }: SweepOptions = {}): Sweep {
   const { parts, brief } = input;
   const table = newTable(Math.max(256, Math.min(parts.length, wanted === null ? 1 << 17 : FIRST_PARTS) * 32));
-  const judge = input.judge ?? (brief.basis === "statistical" ? riskJudge(brief) : null);
+  const judge = input.judge ?? (brief.basis === "statistical" ? riskJudge(brief, input.lot) : null);
   if (hasLimits(brief)) return sweepByLimits(input, table, judge);
   const run: Run = { input, judge, table, sieve: null, count: 0 };
   const reasons: (Reason | null)[] = new Array(parts.length).fill(null);

@@ -13,6 +13,8 @@ export interface SweepInput {
   readonly currency: string | null;
   /** Judges sharing while charging in place of the brief's risk. */
   readonly judge?: Judge;
+  /** F: the measured lot of the only part, which the statistical basis draws its units from. */
+  readonly lot?: readonly number[] | undefined;
 }
 
 /** Why a part gives no layout: the first limit met, or for ceilings the least value seen. */

@@ -1,6 +1,6 @@
 // Builds the state to start with: what was saved last time, or the brief given, and a word when saved text could not be read.
 import type { ScreenPorts } from "./ports.ts";
-import { readSaved } from "./saved.ts";
+import { isNewer, readSaved } from "./saved.ts";
 import { initialState, type State } from "./state.ts";
 import { terminalLook } from "./terminal.ts";
 
@@ -32,5 +32,6 @@ export function startState(ports: ScreenPorts): State {
   }
   const kept = ports.keepSession();
   const where = kept === null ? "it will be replaced" : `it is kept in ${kept}`;
-  return { ...fresh, notice: { tone: "warn", text: `What was saved last time could not be read; ${where}.` } };
+  const why = isNewer(text) ? "is of a newer version of this program" : "could not be read";
+  return { ...fresh, notice: { tone: "warn", text: `What was saved last time ${why}; ${where}.` } };
 }

@@ -32,6 +32,12 @@ function arrangement(value: unknown): Arrangement | null {
 const oneOf = <T extends string>(list: readonly T[], value: unknown, otherwise: T): T =>
   list.find((item) => item === value) ?? otherwise;
 
+/** Whether a later version of this program wrote it: then it is no ruin. */
+export const isNewer = (text: string): boolean => {
+  const version = /^\s*\{\s*"version"\s*:\s*(\d{1,9})\b/.exec(text)?.[1];
+  return version !== undefined && Number(version) > VERSION;
+};
+
 /** Null when the text is not what `savedText` writes; single parts that are odd fall back to their beginnings. */
 export function readSaved(text: string): SavedPart | null {
   let raw: unknown;

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { askedText } from "../../src/cli/askedText.ts";
+import { askedLines, askedText } from "../../src/cli/askedText.ts";
 import { briefOf } from "../support/bank.ts";
 
 describe("askedText(brief, given, width)", () => {
@@ -22,5 +22,14 @@ describe("askedText(brief, given, width)", () => {
     expect(text).toMatch(/spares +2/);
     expect(text).toMatch(/steady draw +1 A, recharged at 2 Hz/);
     expect(text).toMatch(/60 V \(x\\u\{7\}\)/);
+  });
+});
+
+describe("askedLines(brief, given)", () => {
+  test("one line a value, those of the defaults marked; what the brief has not is not there", () => {
+    const lines = askedLines(briefOf({ spares: 2 }), new Set(["spares"]));
+    expect(lines).toContainEqual({ label: "spares", value: "2", given: true });
+    expect(lines).toContainEqual({ label: "derating", value: "90 %", given: false });
+    expect(lines.map(({ label }) => label)).not.toContain("load");
   });
 });

@@ -10,6 +10,10 @@ test("LINE_KINDS: every kind of line comes from some bank, and no bank gives ano
       const layout = bankOf({ brief, layout: { part: "x", series: 8, parallel: 2, ties }, balance: { kind } });
       const bill = billOf({ layout, unit: UNIT, families: FAMILIES, brief, currency: "EUR", cautions: [] });
       for (const line of bill.lines) seen.add(line.line);
+      expect(bill.lines.map((line) => LINE_KINDS.indexOf(line.line))).toEqual(
+        bill.lines.map((line) => LINE_KINDS.indexOf(line.line)).sort((a, b) => a - b),
+      );
     }
-  expect([...seen].sort()).toEqual([...LINE_KINDS].sort());
+  // The last kind is what a builder adds.
+  expect([...seen, "own line"].sort()).toEqual([...LINE_KINDS].sort());
 });

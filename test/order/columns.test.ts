@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { toBeChosen } from "../../src/order/chosenLine.ts";
-import { cellText, plainNumber } from "../../src/order/columns.ts";
+import { cellText, columnsOf, isOpen, plainNumber } from "../../src/order/columns.ts";
 import { BILL_COLUMNS } from "../../src/order/index.ts";
 
 const line = toBeChosen({ item: "lug", line: "lugs", needed: null, note: "" });
@@ -9,7 +9,7 @@ const column = (heading: string) => BILL_COLUMNS.find((one) => one.heading === h
 describe("columns of a bill", () => {
   test("are those that were asked for, in order", () => {
     expect(BILL_COLUMNS.map((one) => one.heading).join(",")).toBe(
-      "item,line,value,rating,quantity needed,on hand,to buy,pack,packs,surplus,unit price,consumed cost,purchase cost,currency,supplier,order code,note,state",
+      "item,line,value,rating,quantity needed,on hand,to buy,pack,packs,surplus,unit price,consumed cost,purchase cost,currency,supplier,order code,alternates,status,note,state",
     );
   });
 
@@ -23,5 +23,19 @@ describe("columns of a bill", () => {
 
   test("plainNumber(value): never an exponent", () => {
     expect([1e-7, 1.5, 0, 123456789].map(plainNumber)).toEqual(["0.0000001", "1.5", "0", "123456789"]);
+  });
+
+  test("columnsOf(bill): the builder's own headings follow, a line without them is blank there", () => {
+    const [owner] = columnsOf({ extraHeadings: ["who buys"] }).slice(BILL_COLUMNS.length);
+    expect([owner?.heading, owner?.cell({ ...line, extra: ["me"] }), owner?.cell(line)]).toEqual([
+      "who buys",
+      "me",
+      "",
+    ]);
+    expect(columnsOf({})).toHaveLength(BILL_COLUMNS.length);
+  });
+
+  test("isOpen(text): blank and the two words, nothing else", () => {
+    expect(["", "to be chosen", "no price", "0", " "].map(isOpen)).toEqual([true, true, true, false, false]);
   });
 });

@@ -29,7 +29,7 @@ describe("billToMarkdown(bill)", () => {
     const text = billToMarkdown(bill);
     const rows = text.split("\n").filter((line) => line.startsWith("|"));
     expect(rows).toHaveLength(bill.lines.length + 2);
-    for (const row of rows) expect(row.replace(/\\\|/g, "").split("|").length).toBe(18 + 2);
+    for (const row of rows) expect(row.replace(/\\\|/g, "").split("|").length).toBe(20 + 2);
     expect(text).not.toContain("<img");
     expect(text).toContain("- Beware.");
     expect(text).toMatch(/Purchase cost of the priced lines: [\d.]+ EUR/);

@@ -12,7 +12,6 @@ describe("otherLines({ layout, unit, brief })", () => {
       fuses: 16,
       "fuse holders": 16,
       "shorting links": 8,
-      "bus bars": 9,
       lugs: 32,
       labels: 16 + 8 + 1,
       "resistor mounts": 8,
@@ -20,7 +19,6 @@ describe("otherLines({ layout, unit, brief })", () => {
       "dump relay": 1,
       "earthing stick": 1,
       "meter with divider": 1,
-      insulator: null,
       screen: null,
     });
     expect(needed).not.toHaveProperty("bleed resistor");
@@ -33,7 +31,7 @@ describe("otherLines({ layout, unit, brief })", () => {
       balance: { kind: "none" },
     });
     const needed = Object.fromEntries(of(layout).map((line) => [line.line, line.needed]));
-    expect(needed).toMatchObject({ "unit links": 14, fuses: 2, "bleed resistor": 1, "bus bars": 2 });
+    expect(needed).toMatchObject({ "unit links": 14, fuses: 2, "bleed resistor": 1 });
     expect(needed).not.toHaveProperty("resistor mounts");
   });
 
@@ -44,10 +42,13 @@ describe("otherLines({ layout, unit, brief })", () => {
     expect(rating).toBe("at least 600 J in one dump, at least 2 kV dc");
   });
 
-  test("bars are as long as the units of a stage side by side; unknown size leaves the length open", () => {
-    expect(of().find((line) => line.line === "bus bars")?.value).toBe("at least 70 mm long");
-    const { diameter: _diameter, ...unit } = UNIT;
-    expect(of(bankOf({ unit }), unit).find((line) => line.line === "bus bars")?.value).toBe("to be chosen");
+  test("a dump resistor that the brief states has its value and its peak: V / R = 2 kV / 200 ohm = 10 A", () => {
+    const stated = otherLines({ layout: bankOf(), unit: UNIT, brief: briefOf({ dumpResistance: "200 ohm" }) });
+    expect(stated.find((line) => line.line === "dump resistor")).toMatchObject({
+      value: "200 ohm",
+      rating: "at least 600 J in one dump, at least 2 kV dc, 10 A peak",
+      purchase: null,
+    });
   });
 
   test("nothing has a price, and nothing is nought", () => {

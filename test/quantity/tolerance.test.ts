@@ -76,5 +76,8 @@ describe("TOLERANCE_LETTERS", () => {
     ["S", "-20/+50"],
     ["Z", "-20/+80"],
   ])("%s is %s %%", (letter, read) => expect(tolerance(letter)).toBe(read));
+  test.each(["constructor", "toString", "__proto__", "hasOwnProperty"])("%s is a word and no letter", (word) =>
+    expect(parseTolerance(word, null).ok).toBe(false),
+  );
   test("eighteen letters, no more", () => expect(Object.keys(TOLERANCE_LETTERS).length).toBe(18));
 });

@@ -180,10 +180,31 @@ describe("readBrief(input): bad", () => {
     ).toEqual([]));
 });
 
+describe("readBrief(input): version", () => {
+  const whole = { energy: "500 J", voltage: "1 kV", ripple: "20 %" };
+
+  test("of a later version nothing else is said; what is no version is a bad value", () => {
+    const read = readBrief({ ...whole, version: 2, watts: 3 }, "a.json");
+    expect(read.ok ? [] : read.refusals).toEqual([
+      {
+        code: "newer-version",
+        place: { file: "a.json", field: "version" },
+        read: "version 2",
+        want: "version 1; a later program reads this file",
+      },
+    ]);
+    expect(readBrief({ ...whole, version: "1" })).toMatchObject({ ok: false, refusals: [{ code: "bad-value" }] });
+  });
+
+  test("the first version is the brief without one, and is no part of it", () => {
+    expect(readBrief({ version: 1, ...whole })).toEqual(readBrief(whole));
+  });
+});
+
 describe("briefJsonSchema()", () => {
   test("names every key and needs the three", () => {
     const schema = briefJsonSchema() as { properties: object; required: readonly string[] };
-    expect(Object.keys(schema.properties)).toEqual(BRIEF_KEYS);
+    expect(Object.keys(schema.properties)).toEqual(["version", ...BRIEF_KEYS]);
     expect(schema.required).toEqual(["energy", "voltage", "ripple"]);
   });
 });

@@ -13,6 +13,7 @@ import { faultsText } from "../faultsText.ts";
 import { improveText } from "../improveText.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { joinedFacts, restFacts } from "../joined.ts";
+import { LAYOUT_VERSION } from "../layoutInput.ts";
 import { hanging, layoutText } from "../layoutText.ts";
 import type { Ports } from "../ports.ts";
 import { clampWords, riskWords, spreadWords } from "../restText.ts";
@@ -68,6 +69,7 @@ function checkJson(checked: Checked, witness: Witness | null): string {
   const { result, unit, settings, stock, notes } = checked;
   const { brief } = settings;
   return toJson({
+    version: LAYOUT_VERSION,
     ...result,
     left: leftOf(checked),
     ...joinedFacts({ layout: result, unit, brief }),

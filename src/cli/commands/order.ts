@@ -1,8 +1,20 @@
 // `order`: the bill of materials of one arrangement, to the output or to a file.
 
-import { BILL_FORMATS, type BillFormat, billOf, billText, visible } from "../../order/index.ts";
-import { nearestWord, type Refusal } from "../../quantity/index.ts";
+import {
+  alternatesFor,
+  BILL_FORMATS,
+  type Bill,
+  type BillFormat,
+  billOf,
+  billText,
+  type Money,
+  readEditedBill,
+  visible,
+  withEdits,
+} from "../../order/index.ts";
+import { accepted, nearestWord, type Read, type Refusal } from "../../quantity/index.ts";
 import { type FuseChoice, fittedFuse } from "../../search/index.ts";
+import { changeLines } from "../billChanges.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, checkedBank } from "../checked.ts";
 import { EXIT } from "../exit.ts";
@@ -15,6 +27,7 @@ import { tell } from "../tell.ts";
 export type OrderFlags = BankFlags & {
   readonly format?: string;
   readonly fuses?: string;
+  readonly edited?: string;
   readonly output?: string;
   readonly force?: boolean;
 };
@@ -40,9 +53,20 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
   const fuses = flags.fuses === undefined ? null : readFuseStock(flags.fuses, ports.files, asked, currency);
   if (fuses !== null && !fuses.ok) return tell(ports, fuses.refusals, flags.json);
   const fuse = fuses === null ? null : fittedFuse({ layout: result, unit, brief: asked }, fuses.value.fuses);
-  const bill = billOf({ layout: result, unit, families: stock.families, brief: asked, currency, cautions, fuse });
+  const { families, parts } = stock;
+  const alternates = alternatesFor({ layout: result, unit, brief: asked, parts, families, currency, fuse });
+  const fresh = billOf({ layout: result, unit, families, brief: asked, currency, cautions, fuse, alternates });
+  const edited = editedOf(fresh, flags.edited, { currency, exchange: asked.exchange }, ports);
+  if (!edited.ok) return tell(ports, edited.refusals, flags.json);
+  const bill = edited.value;
   const text = billText(bill, format);
-  const said = [...faultLines(stock), ...(fuses?.value.lost ?? []), ...notes, ...fuseSaid(fuse)];
+  const said = [
+    ...faultLines(stock),
+    ...(fuses?.value.lost ?? []),
+    ...notes,
+    ...fuseSaid(fuse),
+    ...changeLines(bill, flags.edited),
+  ];
   for (const finding of result.findings)
     if (finding.verdict === "fail")
       said.push(`FAIL, ${titleOf(finding.id)}: ${visible(finding.note)} Do not buy this bank.`);
@@ -54,6 +78,15 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
     ports.err(`${visible(flags.output)}: ${bill.lines.length} lines written\n`);
   }
   return result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done;
+}
+
+/** The bill with what its builder wrote in an earlier copy. */
+function editedOf(bill: Bill, path: string | undefined, money: Money, ports: Ports): Read<Bill> {
+  if (path === undefined) return accepted(bill);
+  const text = ports.files.read(path);
+  if (!text.ok) return text;
+  const edited = readEditedBill(text.value, path === "-" ? "standard input" : path);
+  return edited.ok ? withEdits(bill, edited.value, money) : edited;
 }
 
 /** Why no fuse of the catalogue is on the bill. */

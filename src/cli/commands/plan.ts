@@ -6,6 +6,8 @@ import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { lampFits } from "../lampFits.ts";
+import { LAYOUT_VERSION } from "../layoutInput.ts";
+import { type LotPlanned, lotSentence, planLot } from "../lotPlan.ts";
 import { type MeasuredPlanned, measuredJson, planMeasured, savedText } from "../measuredPlan.ts";
 import { planText } from "../planText.ts";
 import type { Ports } from "../ports.ts";
@@ -35,6 +37,8 @@ export interface Planned {
   readonly result: PlanResult;
   /** With the measured basis: the lot, and what its units do. */
   readonly lot: MeasuredPlanned | null;
+  /** With the statistical basis and a measured file: the lot that the units are drawn from. */
+  readonly drawn: LotPlanned | null;
 }
 
 export function planCommand(brief: string | undefined, flags: PlanFlags, ports: Ports): number {
@@ -65,15 +69,27 @@ export function planFrom(brief: string | undefined, flags: PlanFlags, ports: Por
   if (!settings.ok || !stock.ok || typeof limit !== "number" || typeof rank !== "string") return refused(...faults);
   const { parts, families } = stock.value;
   const given = { settings: settings.value, stock: stock.value, rank };
-  if (settings.value.brief.basis === "measured" || flags.measured !== undefined) {
+  const { basis } = settings.value.brief;
+  if (basis === "statistical" && flags.measured !== undefined) {
+    const lot = planLot(flags, { ...given, limit }, ports);
+    if (!lot.ok) return lot;
+    if (lot.value.faults.length > 0) ports.err(`${lot.value.faults.map(refusalWords).join("\n")}\n`);
+    return accepted({ ...given, result: lot.value.result, lot: null, drawn: lot.value });
+  }
+  if (basis !== "measured" && flags.measured !== undefined) {
+    const want =
+      "--basis measured beside it, where the units themselves decide, or --basis statistical, drawn from them";
+    return refused({ code: "contradiction", place: { field: "--measured" }, read: `basis ${basis}`, want });
+  }
+  if (basis === "measured") {
     const lot = planMeasured(flags, { ...given, limit }, ports);
     if (!lot.ok) return lot;
     if (lot.value.faults.length > 0) ports.err(`${lot.value.faults.map(refusalWords).join("\n")}\n`);
-    return accepted({ ...given, result: lot.value.result, lot: lot.value });
+    return accepted({ ...given, result: lot.value.result, lot: lot.value, drawn: null });
   }
   const planned = plan({ brief: settings.value.brief, parts, families, limit, rank });
   if (!planned.ok) return planned;
-  return accepted({ ...given, result: planned.value, lot: null });
+  return accepted({ ...given, result: planned.value, lot: null, drawn: null });
 }
 
 /** Rows that were lost, on the error stream. */
@@ -82,17 +98,34 @@ export function tellFaults(stock: Stock, ports: Ports): void {
   if (lines.length > 0) ports.err(`${lines.join("\n")}\n`);
 }
 
-export function planJson({ settings, stock, result, lot }: Planned): object {
+export function planJson({ settings, stock, result, lot, drawn }: Planned): object {
   const best = result.layouts[0];
   const unit = best && stock.parts.find((part) => part.part === best.part);
   const cautions = cautionsOf(result.brief, best && unit ? { layout: best, unit } : undefined);
-  const measured = lot === null ? {} : { measured: measuredJson(lot) };
-  return { ...result, ...measured, ...lampFits(result, stock.parts), cautions, inputs: inputsJson(settings, stock) };
+  const measured =
+    lot !== null
+      ? { measured: measuredJson(lot) }
+      : drawn !== null
+        ? { measured: { part: drawn.part, units: drawn.units } }
+        : {};
+  const layouts = result.layouts.map((layout) => ({ version: LAYOUT_VERSION, ...layout }));
+  return {
+    ...result,
+    layouts,
+    ...measured,
+    ...lampFits(result, stock.parts),
+    cautions,
+    inputs: inputsJson(settings, stock),
+  };
 }
 
-export function planWords({ settings, stock, rank, result, lot }: Planned, width: number): string {
+export function planWords({ settings, stock, rank, result, lot, drawn }: Planned, width: number): string {
   const { given } = settings;
-  const inputs = [...inputSentences(stock), ...(lot === null ? [] : [savedText(lot)])];
+  const inputs = [
+    ...inputSentences(stock),
+    ...(lot === null ? [] : [savedText(lot)]),
+    ...(drawn === null ? [] : [lotSentence(drawn)]),
+  ];
   return planText({ result, parts: stock.parts, given, rank, width, inputs });
 }
 

@@ -26,15 +26,18 @@ export interface MendInput {
 /** How far each is tried. */
 const MORE_STAGES = 200;
 const LEAST_VOLTAGE = 0.05;
+const EVEN = { low: 0, high: 0 };
 
-/** Whether some resistor of these families keeps the arrangement within its limit, charging and holding; null: leakage unknown. */
+/** Whether some resistor of these families keeps the arrangement within its limit while holding, and its charging share too; null: leakage unknown. */
 export function balances({ unit, brief, families, shape }: MendInput): boolean | null {
   const candidate = prepare(unit, brief);
   const chain = chainOf(candidate, brief);
   if (chain === null) return null;
   if (shape.series === 1) return chain.voltage <= candidate.limit * (1 + FIT);
-  if (unit.tolerance && chargingWorst(chain.voltage, shape.series, unit.tolerance) > candidate.limit * (1 + FIT))
-    return false;
+  // Where a risk or the measured units judge the charging, only the even share is asked for here: the rest is a finding of its own.
+  const judged = brief.basis === "statistical" || brief.basis === "measured";
+  const spread = judged ? EVEN : (unit.tolerance ?? EVEN);
+  if (chargingWorst(chain.voltage, shape.series, spread) > candidate.limit * (1 + FIT)) return false;
   chain.series = shape.series;
   chain.sharing = sharingOf(shape);
   return bestBalance(chain, candidate.limit, positionsOf(shape), families, newBalancing());

@@ -1,4 +1,4 @@
-import { existsSync, mkdtempSync, readdirSync, readFileSync, rmSync } from "node:fs";
+import { existsSync, mkdtempSync, readdirSync, readFileSync, rmSync, writeFileSync } from "node:fs";
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { parse } from "csv-parse/sync";
@@ -83,5 +83,28 @@ describe("order", () => {
     expect(status).toBe(1);
     expect(err).toMatch(/FAIL, worst unit while charging.*Do not buy this bank/);
     expect(existsSync(output)).toBe(true);
+  });
+
+  test("--edited: an own line and a price come back and are told; the file's faults are refused, nothing is written", () => {
+    const edited = join(folder, "edited.csv");
+    const rows = order({}).out.split("\r\n");
+    writeFileSync(edited, [rows[0], "glue,,,,2,,,,,,1.50", ...rows.slice(1)].join("\n"));
+    const { status, out, err } = order({ edited, json: true });
+    expect(status).toBe(0);
+    expect(JSON.parse(out).lines.at(-1)).toMatchObject({
+      item: "glue",
+      line: "own line",
+      purchase: 3,
+      currency: "EUR",
+    });
+    expect(JSON.parse(out).changes).toHaveLength(1);
+    expect(err).toContain(`${edited}:2: glue: your own line is kept`);
+    writeFileSync(edited, [rows[0], "glue,glues,,,many"].join("\n"));
+    const output = join(folder, "new.csv");
+    const wrong = order({ edited, output });
+    expect(wrong).toMatchObject({ status: 2, out: "" });
+    expect(wrong.err).toContain(`${edited}:2:2 line`);
+    expect(existsSync(output)).toBe(false);
+    expect(order({ edited: join(folder, "none.csv") }).err).toMatch(/no such file/);
   });
 });

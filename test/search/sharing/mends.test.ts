@@ -32,6 +32,13 @@ describe("balanceMends(input)", () => {
     expect(balances({ ...input, brief: { ...input.brief, voltage: voltage * 1.002 } })).toBe(false);
   });
 
+  test("where a risk judges the charging, a wide capacitance does not stand in the way of the resistor's mend", () => {
+    const unit = { ...input.unit, tolerance: { low: 0.2, high: 0.2 } };
+    expect(balanceMends({ ...input, unit })).toMatchObject({ tolerance: null });
+    const mends = balanceMends({ ...input, unit, brief: briefOf({ basis: "statistical" }) });
+    expect(mends?.tolerance).toBe(balanceMends(input)?.tolerance);
+  });
+
   test("Source: methods 2.2: the widest q is under (n V_lim - V)/(V + (n - 2) V_lim), where no R at all is left", () => {
     const edge = (8 * 252 - 2000) / (2000 + 6 * 252);
     const tolerance = balanceMends(input)?.tolerance as number;

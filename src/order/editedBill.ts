@@ -1,0 +1,130 @@
+// A bill made anew with what its builder wrote in an earlier copy: own lines, prices and choices are kept, all else is reckoned again.
+//
+// Which cells are the builder's shows in the mark of the row. A file without marks was made before there were any: there the
+// builder's are the cells that are filled where the program leaves them open.
+
+import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
+import type { Bill, BillChange, BillLine } from "./bill.ts";
+import { toBeChosen } from "./chosenLine.ts";
+import { type BillColumn, cellText, isOpen } from "./columns.ts";
+import type { CellValue } from "./editedCell.ts";
+import type { EditedFile, EditedRow } from "./editedRows.ts";
+import { BUILDERS_COLUMNS, isChanged, plainCell } from "./marks.ts";
+import { reckoned } from "./reckon.ts";
+import { totalsOf } from "./totals.ts";
+
+export interface Money {
+  /** Currency of the sums, and of a price without one; null when nothing of the plan has a price. */
+  readonly currency: string | null;
+  readonly exchange?: Readonly<Record<string, number>> | undefined;
+}
+
+/** Cells from which quantities and costs follow. */
+const RECKONED: readonly BillColumn["key"][] = [
+  "value",
+  "needed",
+  "onHand",
+  "pack",
+  "unitPrice",
+  "currency",
+  "orderCode",
+];
+
+interface Merged {
+  readonly line: BillLine;
+  readonly changes: readonly BillChange[];
+}
+
+const emptied = (column: BillColumn): CellValue => (column.kind === "text" && column.key !== "currency" ? "" : null);
+
+/** The builder's cells over the line as the program makes it. */
+function merged(made: BillLine, row: EditedRow, currency: string | null): Merged {
+  const changes: BillChange[] = [];
+  const cells: Partial<Record<BillColumn["key"], CellValue>> = {};
+  for (const column of BUILDERS_COLUMNS) {
+    const cell = row.cells.get(column.key);
+    const fresh = cellText(made, column);
+    if (cell === undefined || plainCell(cell.text) === plainCell(fresh) || !isBuilders(row, column, cell.text, fresh))
+      continue;
+    // A line has a name.
+    if (column.key === "item" && cell.text === "") continue;
+    cells[column.key] = cell.value ?? emptied(column);
+    // The currency that the program put beside a price of the builder's.
+    if (column.key === "currency" && cell.value === currency) continue;
+    changes.push({
+      kind: "kept",
+      item: made.item,
+      line: made.line,
+      at: row.at,
+      heading: column.heading,
+      made: fresh,
+      read: cell.text,
+    });
+  }
+  const line = { ...made, ...cells, extra: row.extra } as BillLine;
+  return { line: RECKONED.some((key) => Object.hasOwn(cells, key)) ? reckoned(line) : line, changes };
+}
+
+function isBuilders({ mark }: EditedRow, { key }: BillColumn, text: string, fresh: string): boolean {
+  return mark === "" ? isOpen(fresh) && !isOpen(text) : isChanged(mark, key, text);
+}
+
+/** A line that the bank does not take: the builder's own, or one that is no longer counted. */
+function lineOf(row: EditedRow, needed?: number): BillLine {
+  const bare = toBeChosen({ item: "", line: "own line", needed: null, note: "", value: "", rating: "" });
+  const cells = BUILDERS_COLUMNS.flatMap((column) => {
+    const value = row.cells.get(column.key)?.value;
+    return value === undefined || value === null ? [] : [[column.key, value] as const];
+  });
+  return { ...bare, ...Object.fromEntries(cells), ...(needed === undefined ? {} : { needed }), extra: row.extra };
+}
+
+/** Of a row that the bank no longer takes: whether its builder wrote anything in it. */
+const isTouched = (row: EditedRow): boolean =>
+  BUILDERS_COLUMNS.some(({ key }) => {
+    const cell = row.cells.get(key);
+    if (cell === undefined) return false;
+    return row.mark === "" ? key === "unitPrice" && !isOpen(cell.text) : isChanged(row.mark, key, cell.text);
+  });
+
+/** Joins a fresh bill and an edited copy. Refused: a price whose currency nothing says. */
+export function withEdits(bill: Bill, edited: EditedFile, money: Money): Read<Bill> {
+  const faults: Refusal[] = [];
+  const changes: BillChange[] = [];
+  const priced = (line: BillLine, row: EditedRow): BillLine => {
+    if (line.currency !== null || (line.unitPrice === null && line.purchase === null)) return line;
+    if (money.currency !== null) return reckoned({ ...line, currency: money.currency });
+    if (line.unitPrice === null) return line;
+    const place = row.cells.get("currency")?.place ?? row.place;
+    faults.push({ code: "missing-value", place, read: "a price without a currency", want: "a currency such as EUR" });
+    return line;
+  };
+  const lines = bill.lines.map((made) => {
+    const row = edited.rows.find(({ line }) => line === made.line);
+    if (row === undefined) {
+      changes.push({ kind: "put back", item: made.item, line: made.line, at: null, heading: "", made: "", read: "" });
+      return made;
+    }
+    const { line, changes: kept } = merged(made, row, money.currency);
+    changes.push(...kept);
+    return priced(line, row);
+  });
+  const own = edited.rows.flatMap((row) => {
+    const known = bill.lines.some(({ line }) => line === row.line);
+    if (known || (row.line !== "own line" && !isTouched(row))) return [];
+    const line = reckoned(lineOf(row, row.line === "own line" ? undefined : 0));
+    const kind = row.line === "own line" ? "own line" : "not counted";
+    changes.push({ kind, item: line.item, line: row.line, at: row.at, heading: "", made: "", read: "" });
+    return [priced(line, row)];
+  });
+  if (faults.length > 0) return refused(...faults);
+  const all = [...lines, ...own];
+  const currency = money.currency ?? own.concat(lines).find((line) => line.purchase !== null)?.currency ?? null;
+  return accepted({
+    ...bill,
+    lines: all,
+    totals: totalsOf({ lines: all, currency, exchange: money.exchange }),
+    ...(edited.extraHeadings.length > 0 ? { extraHeadings: edited.extraHeadings } : {}),
+    changes,
+  });
+}

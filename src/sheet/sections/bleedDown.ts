@@ -1,0 +1,166 @@
+/*
+ * How long the bank takes to become harmless, from full and from each fault, by each way of emptying it alone.
+ *
+ * All times are at the high capacitance and the high resistance. A unit shorted with the charger on leaves n - 1 stages at V:
+ * cross-tied, C grows by n/(n - 1) and the chain loses a resistor, so the time constant is the same; strings, one string of
+ * n - 1 beside p - 1 whole ones. A unit open takes capacitance away, so the time from full is an upper bound.
+ * Source: [methods-derived] 3.1, 8.
+ */
+
+import { recovery } from "../../hazard/index.ts";
+import { cell, said, up, wait } from "../cells.ts";
+import { type Facts, type Fall, factsOf, type Ways, waysDown } from "../facts.ts";
+import type { SheetInput } from "../input.ts";
+import { type Block, type Cell, list, type Section, type Table, text } from "../model.ts";
+import { positionWord } from "../names.ts";
+
+interface Start {
+  readonly state: string;
+  readonly from: number | null;
+  readonly ways: Ways;
+  readonly note: string;
+}
+
+const NONE: Ways = { chains: null, oneOpen: null, dump: null };
+
+/** The ways down of the bank with one unit shorted and the charger on, from V. */
+function shortedWays(input: SheetInput, facts: Facts, fall: Fall): Ways {
+  const { series: n, parallel: p, ties } = input.layout;
+  const { capacitance, chain, chains } = facts;
+  if (capacitance === null) return NONE;
+  const grows = n / (n - 1);
+  if (ties === "cross-tied" || p === 1)
+    return waysDown({ ...facts, capacitance: capacitance * grows, chain: chain === null ? null : chain / grows }, fall);
+  const grown = { ...facts, capacitance: (capacitance * (p - 1 + grows)) / p };
+  // The chains side by side as so many equal ones of the same conductance; the worst one to lose is the short string's own.
+  const even = chain === null ? null : (chain * chains) / (p - 1 + grows);
+  return { ...waysDown({ ...grown, chain: even }, fall), oneOpen: waysDown(grown, fall).oneOpen };
+}
+
+function starts(input: SheetInput, facts: Facts): readonly Start[] {
+  const { layout, brief, shot } = input;
+  const { voltage, clear } = facts;
+  const highest = brief.charger?.highest ?? brief.charger?.supply ?? null;
+  const at = (from: number | null): Ways => (from === null ? NONE : waysDown(facts, { from, to: clear }));
+  const left = shot === null ? null : Math.sqrt((2 * shot.discharge.energy.left) / shot.bank.capacitance);
+  const full = at(voltage);
+  const rows: Start[] = [
+    { state: "full", from: voltage, ways: full, note: "" },
+    {
+      state: "charger ran on",
+      from: highest === null ? null : Math.max(highest, voltage),
+      ways: at(highest === null ? null : Math.max(highest, voltage)),
+      note:
+        highest === null
+          ? "the charger's highest voltage is not known: this row stays open"
+          : "the charger's highest voltage",
+    },
+    layout.series > 1
+      ? {
+          state: "one unit shorted, charger on",
+          from: voltage,
+          ways: shortedWays(input, facts, { from: voltage, to: clear }),
+          note: "the others stand higher, the ends at V",
+        }
+      : { state: "one unit shorted", from: 0, ways: at(0), note: "the whole bank has emptied into it" },
+    {
+      state: "one unit open",
+      from: voltage,
+      ways: full,
+      note:
+        layout.ties === "strings" && layout.series > 1
+          ? "upper bound; its string is cut off from the ends: only resistors across its own units empty them"
+          : "upper bound",
+    },
+    {
+      state: "dump stuck open",
+      from: voltage,
+      ways: { ...full, dump: Number.POSITIVE_INFINITY },
+      note: "chains alone",
+    },
+    {
+      state: "after a shot, or fired early",
+      from: left,
+      ways: at(left),
+      note: left === null ? "no load in the brief: what a shot leaves is not known" : "what the shot leaves",
+    },
+  ];
+  return layout.balance === null
+    ? rows
+    : [
+        ...rows,
+        {
+          state: `balancing resistor of one ${positionWord(layout)} open`,
+          from: voltage,
+          ways: { ...full, chains: full.oneOpen },
+          note: "that position keeps its charge while the ends read zero: short it by hand",
+        },
+      ];
+}
+
+function recoveryBlocks({ unit }: SheetInput, { voltage, capacitance }: Facts): readonly Block[] {
+  if (capacitance === null) return [];
+  const back = recovery({ soak: voltage, capacitance, polarised: unit.polarised !== false });
+  const range =
+    back.low === null
+      ? `up to ${up(back.high, "voltage")}`
+      : `${up(back.low, "voltage")} to ${up(back.high, "voltage")}`;
+  return [
+    text(
+      `After a short has been taken off, ${range} may come back within minutes (${said(up(back.energy, "energy"))} at the most; ${back.tag}). Leave the strap on.`,
+    ),
+  ];
+}
+
+/** What is said of a bank that never breaks the rule. */
+export const clearWords = ({ clear, rule }: Facts): string =>
+  Number.isFinite(clear) ? `${cell(clear, "voltage")} (${rule})` : `any voltage (${rule}: this bank never passes it)`;
+
+export function bleedDownSection(input: SheetInput): Section {
+  const facts = factsOf(input);
+  const { allowed, chains, chain } = facts;
+  const rows = starts(input, facts).map(({ state, from, ways, note }): readonly Cell[] => [
+    state,
+    up(from, "voltage"),
+    chain === null ? "no chain" : wait(ways.chains),
+    chain === null ? "no chain" : wait(ways.oneOpen),
+    wait(ways.dump),
+    note,
+  ]);
+  const table: Table = {
+    kind: "table",
+    id: "bleed-down",
+    caption: `Time to ${clearWords(facts)}, each way alone`,
+    columns: [
+      { heading: "from" },
+      { heading: "voltage", side: "right" },
+      { heading: "bleed chains", side: "right" },
+      { heading: "one bleeder open", side: "right" },
+      { heading: "dump resistor", side: "right" },
+      { heading: "remark" },
+    ],
+    rows,
+  };
+  return {
+    id: "bleed-down",
+    title: "Bleed-down",
+    blocks: [
+      text(
+        `The rule that governs here: ${facts.rule}.${allowed === null ? "" : ` It allows ${cell(allowed, "time")}.`} Times are the longest: high capacitance, high resistance, none of the units' own leakage.`,
+      ),
+      table,
+      list([
+        chains === 0
+          ? "No balancing chain: until a bleed resistor is wired in, nothing but the dump empties this bank."
+          : chains === 1
+            ? "There is one chain: with any one of its resistors open the ends are not emptied by it at all."
+            : `There are ${chains} chains side by side; with one resistor open the others still empty the ends, and the unit under the open one keeps its charge.`,
+        ...(facts.dump === null ? ["Dump resistor: its resistance is not stated, so its times are blank."] : []),
+        ...(facts.capacitance === null
+          ? ["The tolerance of the unit is unknown: no longest time can be given, and none is."]
+          : []),
+      ]),
+      ...recoveryBlocks(input, facts),
+    ],
+  };
+}

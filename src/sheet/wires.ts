@@ -1,0 +1,100 @@
+/*
+ * The joints of a bank as its schematic has it, one row each: what is joined to what, and the conductor where it follows.
+ *
+ *   symbol  unit   meaning
+ *   A       A^2 s  action integral of one shot through the conductor
+ *   S       m^2    least area that one shot heats from 20 degC to 90 degC with no time to cool
+ *
+ * Bars and the leads of switch and load carry the bank's action, a unit's leads its own share at worst. Charging, balancing and
+ * dump leads carry little: their area is a matter of strength, and is left blank. 90 degC is an assumed limit (common practice, no
+ * source: what ordinary insulation bears). Source: [IEC60949] adiabatic heating.
+ */
+
+import { leastArea } from "../pulse/index.ts";
+import type { ShotReport } from "../search/index.ts";
+import { squareMillimetres } from "./cells.ts";
+import { partNames } from "./draw/partNames.ts";
+import type { SchematicProps } from "./draw/schematicProps.ts";
+import type { Cell } from "./model.ts";
+import { barsOf, pointsOf, positionsOf, spotsOf, unitName } from "./names.ts";
+
+/** One joint. A terminal is written "C3.7 +"; a bar or point is one place. */
+export interface Wire {
+  readonly from: string;
+  readonly to: string;
+  readonly conductor: Cell;
+}
+
+const RISE = { from: 293.15, to: 363.15 } as const;
+
+const copper = (action: number | null | undefined): Cell =>
+  action === null || action === undefined
+    ? null
+    : `copper, at least ${squareMillimetres(leastArea("copper", action, RISE))}`;
+
+/** What the bars are made of at least; null where no action integral is known. */
+export const barConductor = (shot: ShotReport | null): Cell => copper(shot?.discharge.action);
+
+/** Every joint of the bank and of what hangs on it, in the order that it is wired. */
+export const wiresOf = (props: SchematicProps, shot: ShotReport | null): readonly Wire[] => [
+  ...unitWires(props, copper(shot?.discharge.unit.action)),
+  ...balanceWires(props),
+  ...clampWires(props),
+  ...outsideWires(props, barConductor(shot)),
+];
+
+const joint = (from: string, to: string, conductor: Cell = null): Wire => ({ from, to, conductor });
+
+/** Parts with terminals a and b, in a row between two places. */
+function chain(from: string, parts: readonly string[], to: string, conductor: Cell = null): readonly Wire[] {
+  const starts = [from, ...parts.map((part) => `${part} b`)];
+  const ends = [...parts.map((part) => `${part} a`), to];
+  return starts.map((start, i) => joint(start, ends[i] as string, conductor));
+}
+
+/** From the negative point through unit, fuse and isolating resistor to the positive one. */
+function unitWires(props: SchematicProps, conductor: Cell): readonly Wire[] {
+  const { series, fuse, isolating } = props;
+  return spotsOf(props).flatMap((spot) => {
+    const { low, high } = pointsOf(props, spot);
+    const name = unitName(spot);
+    const at = `${spot.group}.${spot.place}`;
+    const parts = [
+      ...(fuse?.at === "unit" ? [`F${at}`] : []),
+      ...(isolating === null ? [] : [`RI${at}`]),
+      ...(fuse?.at === "string" && spot.place === series ? [`F${spot.group}`] : []),
+    ];
+    return [joint(low, `${name} -`, conductor), ...chain(`${name} +`, parts, high, conductor)];
+  });
+}
+
+/** A position as a whole: its elements are joined end to end on their mount beforehand. */
+const balanceWires = (props: SchematicProps): readonly Wire[] =>
+  props.balance === null ? [] : positionsOf(props, "RB").flatMap(({ name, low, high }) => chain(low, [name], high));
+
+/** Cathodes to the positive side. */
+function clampWires(props: SchematicProps): readonly Wire[] {
+  if (!props.clamps.positions) return [];
+  return positionsOf(props, "DC").flatMap(({ name, low, high }) => [
+    joint(low, `${name} anode`),
+    joint(`${name} cathode`, high),
+  ]);
+}
+
+/** Charger, dump, bleed, meter, switch and load; the earth point. */
+function outsideWires(props: SchematicProps, thick: Cell): readonly Wire[] {
+  const bars = barsOf(props);
+  const [minus, plus] = [bars[0] as string, bars[bars.length - 1] as string];
+  const { isolation, dump, dumpRelay, bleeds, clamp } = partNames(props);
+  const earthed = { negative: minus, positive: plus, unknown: "the end to be decided", none: null }[props.earth];
+  return [
+    ...chain("G1 +", isolation, plus),
+    joint("G1 -", minus),
+    ...(props.dump === null ? [] : chain(plus, [dumpRelay, dump], minus)),
+    ...bleeds.flatMap((name) => chain(plus, [name], minus)),
+    ...(props.clamps.bank ? [joint(minus, `${clamp} anode`), joint(`${clamp} cathode`, plus)] : []),
+    ...chain(plus, ["meter divider"], minus),
+    ...chain(plus, ["S1", ...(props.load.coil ? ["L1"] : []), "X1"], minus, thick),
+    ...(earthed === null ? [] : [joint(earthed, "E1")]),
+  ];
+}

@@ -1,0 +1,28 @@
+import { expect, test } from "vitest";
+import { changeLines } from "../../src/cli/billChanges.ts";
+import type { BillChange } from "../../src/order/index.ts";
+
+const change: BillChange = { kind: "kept", item: "lug", line: "lugs", at: 4, heading: "value", made: "", read: "M6" };
+
+test("changeLines(bill, path): nothing for a bill made anew; a sentence where nothing in the file is the builder's", () => {
+  expect(changeLines({}, "a.csv")).toEqual([]);
+  expect(changeLines({ changes: [] }, "a.csv")).toEqual(["a.csv: nothing in it is yours; the bill is made anew"]);
+});
+
+test("changeLines(bill, path): file, line, what was written over what; nothing hidden comes through", () => {
+  const whole = { ...change, heading: "", read: "" };
+  const changes: readonly BillChange[] = [
+    change,
+    { ...change, read: "", made: "x" },
+    { ...whole, kind: "own line", line: "own line", item: "wire\u202e" },
+    { ...whole, kind: "put back", at: null },
+    { ...whole, kind: "not counted" },
+  ];
+  expect(changeLines({ changes }, "-")).toEqual([
+    'standard input:4: lug (lugs), value: yours is kept, "M6" in place of a blank',
+    'standard input:4: lug (lugs), value: yours is kept, a blank in place of "x"',
+    "standard input:4: wire\\u{202e}: your own line is kept",
+    "standard input: lug (lugs): the line was missing and is put back",
+    "standard input:4: lug (lugs): the bank no longer takes it; what you wrote is kept, at a quantity of 0",
+  ]);
+});
