@@ -28,6 +28,8 @@ export interface Files {
   readonly read: (path: string) => Read<string>;
   /** Writes a whole file or nothing. An existing file is replaced only with `force`. */
   readonly write: (path: string, text: string, force: boolean) => Read<string>;
+  /** Gives a file another name, whatever its bytes; what has that name is replaced. */
+  readonly move: (path: string, to: string) => Read<string>;
 }
 
 /** Largest text that is read, bytes: a catalogue of a million rows has about 200 MB. */
@@ -198,6 +200,14 @@ export function filesOn(fs: FileSystem = nodeFs): Files {
       return readText(fs, path);
     },
     write: (path, text, force) => writeText(fs, path, text, force),
+    move: (path, to) => {
+      try {
+        fs.renameSync(path, to);
+        return accepted(to);
+      } catch (error) {
+        return trouble(error, path);
+      }
+    },
   };
 }
 

@@ -19,7 +19,8 @@ export interface Asker {
 }
 
 export interface AskerOptions {
-  readonly engine: EnginePort;
+  /** Null while the catalogues are read: what is asked then is asked again by the state once they are. */
+  readonly engine: () => EnginePort | null;
   readonly state: () => State;
   readonly send: (message: Message) => void;
   /** Milliseconds from any beginning. */
@@ -33,10 +34,12 @@ export function makeAsker({ engine, state, send, now }: AskerOptions): Asker {
   let rest: ReturnType<typeof setTimeout> | undefined;
 
   const answer = (quick: boolean): void => {
+    const at = engine();
     wanted = false;
+    if (at === null) return;
     const asked = state().asked;
     const begun = now();
-    const found = answerFor(state(), engine, quick);
+    const found = answerFor(state(), at, quick);
     if (quick) lastTook = now() - begun;
     const slow = lastTook > TOO_SLOW_MS;
     send({ type: "answered", asked, answer: found, slow });

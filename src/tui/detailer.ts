@@ -15,7 +15,8 @@ export interface Detailer {
 }
 
 export interface DetailerOptions {
-  readonly engine: EnginePort;
+  /** Null while the catalogues are read. */
+  readonly engine: () => EnginePort | null;
   readonly state: () => State;
   readonly send: (message: Message) => void;
 }
@@ -34,7 +35,8 @@ export function makeDetailer({ engine, state, send }: DetailerOptions): Detailer
   const work = (): void => {
     next = undefined;
     const piece = wantedPiece(state());
-    const details = piece === null ? null : withPiece(state(), piece, engine);
+    const at = engine();
+    const details = piece === null || at === null ? null : withPiece(state(), piece, at);
     if (details === null) return;
     keep(details);
     send({ type: "detailed", details });

@@ -1,12 +1,22 @@
 // Answers a state's question to the engine: reads the brief, plans, assesses what is pinned and chosen, and counts the order.
 
-import type { LayoutResult } from "../search/index.ts";
+import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
+import type { FrontPoint } from "./axes.ts";
 import { briefInput } from "./briefInput.ts";
 import type { EnginePort } from "./ports.ts";
 import type { Answer, State } from "./state.ts";
 
 /** Beside the form only the first few are seen, and every key waits for them; the list itself is longer. */
 export const mostListed = (state: State): number => (state.screen === "brief" ? 50 : 200);
+
+/** The whole front, on the map alone; with lives when an axis shows them. */
+function frontFor({ screen, map }: State, engine: EnginePort, brief: Brief, plan: PlanResult) {
+  if (screen !== "map") return null;
+  const lives = map.x === "life" || map.y === "life";
+  return engine
+    .front(brief, plan)
+    .map((layout): FrontPoint => ({ layout, life: lives ? engine.life(brief, layout) : null }));
+}
 
 export function answerFor(state: State, engine: EnginePort, quick: boolean): Answer {
   const read = engine.readBrief(briefInput(state));
@@ -25,6 +35,7 @@ export function answerFor(state: State, engine: EnginePort, quick: boolean): Ans
     plan,
     pinned: state.pins.map(assessed),
     chosen,
+    front: frontFor(state, engine, brief, plan),
     bill: chosen === null ? null : engine.bill(brief, chosen),
   };
 }

@@ -1,5 +1,6 @@
 // What the screens need from outside: the engine, the files, the clock and the terminal, handed in by main.
 import type { Layout } from "../bank/index.ts";
+import type { clampWords, rateBlocks, refusalWords, titleOf, withoutBalanceWords } from "../cli/index.ts";
 import type { Bill } from "../order/index.ts";
 import type { Read } from "../quantity/index.ts";
 import type {
@@ -65,11 +66,18 @@ export interface Details {
 
 export type Piece = Exclude<keyof Details, "key">;
 
+/** Most layouts of a front that are worked out for the map. */
+export const MOST_FRONT = 1000;
+
 export interface EnginePort {
   /** Reads a brief from text by key; each refusal's place.field is the key. */
   readonly readBrief: (values: Readonly<Record<string, unknown>>) => Read<Brief>;
   /** Refuses only what cannot be planned at all, such as two currencies without a rate. */
   readonly plan: (brief: Brief, request: PlanRequest) => Read<PlanResult>;
+  /** The layouts of a plan's front worked out in full, the cheapest first, at most MOST_FRONT. */
+  readonly front: (brief: Brief, plan: PlanResult) => readonly LayoutResult[];
+  /** Life of the worst unit over that at its ratings, for the brief's load; null is unknown. */
+  readonly life: (brief: Brief, layout: LayoutResult) => number | null;
   /** Assesses one arrangement under a brief; null when the catalogue has no such part. */
   readonly check: (brief: Brief, arrangement: Arrangement) => LayoutResult | null;
   /** What must be bought for a layout; null when the catalogue has no such part. */
@@ -94,8 +102,28 @@ export interface StockFacts {
   readonly note: string;
 }
 
-export interface ScreenPorts {
+/** Words that the screens share with the commands. They come with the engine, so that the first frame does not wait for them. */
+export interface SharedWords {
+  readonly titleOf: typeof titleOf;
+  readonly clampWords: typeof clampWords;
+  readonly withoutBalanceWords: typeof withoutBalanceWords;
+  readonly rateBlocks: typeof rateBlocks;
+  readonly refusalWords: typeof refusalWords;
+}
+
+/** What is read and loaded once the first frame stands. */
+export interface Workshop {
   readonly engine: EnginePort;
+  readonly stock: StockFacts;
+  readonly words: SharedWords;
+  /** Writes the order of a bank to a file whose ending names the format. */
+  readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
+}
+
+export interface ScreenPorts {
+  /** Reads the catalogues and loads the engine; refused, the screens end and the refusals are for the caller to tell. */
+  readonly open: () => Promise<Read<Workshop>>;
+  /** What is known of the catalogues before they are read. */
   readonly stock: StockFacts;
   /** The brief to start with when none was saved: text by key. */
   readonly brief: Readonly<Record<string, string>>;
@@ -109,8 +137,6 @@ export interface ScreenPorts {
   readonly saveSession: (text: string) => string | null;
   /** Puts a saved text that could not be read aside, so that it is not overwritten; where it is now, or null. */
   readonly keepSession: () => string | null;
-  /** Writes the order of a bank to a file whose ending names the format. */
-  readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
   readonly stdin: TerminalInput;
   readonly stdout: TerminalOutput;
   /** Writes to the terminal at once. */

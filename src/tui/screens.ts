@@ -5,7 +5,7 @@ import { makeDetailer } from "./detailer.ts";
 import { openInput } from "./input.ts";
 import { messageFor } from "./keys.ts";
 import { PaintStream } from "./paint.ts";
-import type { ScreenPorts } from "./ports.ts";
+import type { EnginePort, ScreenPorts, Workshop } from "./ports.ts";
 import { startState } from "./restore.ts";
 import { openSession } from "./session.ts";
 import { ask, type Effect, type Message } from "./state.ts";
@@ -20,7 +20,7 @@ const HANG_UP = 129;
 
 /** Runs the screens. Result: the exit status. Rejects with what went wrong when it is a bug of ours; the terminal is restored by then. */
 export function openScreens(ports: ScreenPorts): Promise<number> {
-  const { stdin, stdout, env, process, writeSync, engine, complain } = ports;
+  const { stdin, stdout, env, process, writeSync, complain } = ports;
   const trouble = screenTrouble({
     env,
     inputIsTerminal: stdin.isTTY === true,
@@ -35,11 +35,14 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
 
   return new Promise((resolve, reject) => {
     const begun = ask(startState(ports)).state;
+    let workshop: Workshop | null = null;
+    const engine = (): EnginePort | null => workshop?.engine ?? null;
     const paint = new PaintStream(begun, (text) => stdout.write(text));
     let mounted: Mounted | null = null;
     let frame: ReturnType<typeof setImmediate> | undefined;
     let over = false;
     let loading = false;
+    let opening = false;
 
     const draw = (): void => {
       frame = undefined;
@@ -54,7 +57,19 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else mounted.show(drawn.rows);
       paint.settle();
       detailer.afterFrame();
+      if (workshop === null) openWorkshop();
       if (store.state().answer !== null) loadInk();
+    };
+    /** The catalogues are read, and the engine is loaded, once the first frame stands. */
+    const openWorkshop = (): void => {
+      if (opening) return;
+      opening = true;
+      ports.open().then((read) => {
+        if (over) return;
+        if (!read.ok) return session.end(WRONG_USE);
+        workshop = read.value;
+        store.send({ type: "opened", stock: workshop.stock, words: workshop.words });
+      }, session.fail);
     };
     /** Ink is loaded once what fits is on screen: the first list does not wait for it either. */
     const loadInk = (): void => {
@@ -69,7 +84,8 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else if (effect.type === "quit") session.end(0);
       else if (effect.type === "suspend") session.suspend();
       else if (effect.type === "redraw") paint.redraw();
-      else send({ type: "saved", answer: ports.exportBill(effect.bill, effect.path, effect.replace) });
+      else if (workshop !== null)
+        send({ type: "saved", answer: workshop.exportBill(effect.bill, effect.path, effect.replace) });
     };
     const store = createStore({
       initial: begun,
@@ -129,7 +145,6 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     session.enter();
     stdout.on("resize", onResize);
     stdout.on("error", onLost);
-    asker.ask();
     draw();
   });
 }

@@ -203,3 +203,14 @@ describe("write(path, text, force)", () => {
     expect(left()).toEqual([]);
   });
 });
+
+describe("move(path, to)", () => {
+  test("another name for the same bytes, over what had it; a file that is not there is told", () => {
+    fs.writeFileSync(join(folder, "a"), Buffer.from([0xff, 0xfe, 0x00]));
+    fs.writeFileSync(join(folder, "b"), "old");
+    expect(files.move(join(folder, "a"), join(folder, "b"))).toEqual({ ok: true, value: join(folder, "b") });
+    expect([...fs.readFileSync(join(folder, "b"))]).toEqual([0xff, 0xfe, 0x00]);
+    expect(left()).toEqual(["b"]);
+    expect(codeOf(files.move(join(folder, "a"), join(folder, "c")))).toBe("no-such-file");
+  });
+});

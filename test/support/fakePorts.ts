@@ -34,6 +34,7 @@ export function fakePorts(texts: Readonly<Record<string, string>> = {}, columns 
         written.set(path, text);
         return { ok: true, value: path };
       },
+      move: real.move,
     },
     printed: () => out,
     told: () => err,

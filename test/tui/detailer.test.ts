@@ -28,7 +28,7 @@ function rig(begun: State) {
   const counted = { ...engine, rest: told("rest"), margin: told("margin"), spread: told("spread"), shot: told("shot") };
   const at = { state: begun };
   const detailer = makeDetailer({
-    engine: counted,
+    engine: () => counted,
     state: () => at.state,
     send: (message) => {
       at.state = update(at.state, message).state;

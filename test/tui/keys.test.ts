@@ -3,7 +3,7 @@ import { describe, expect, test } from "vitest";
 import { answerFor } from "../../src/tui/engine.ts";
 import { helpLineKeys, KEYS, liveKeys, messageFor } from "../../src/tui/keys.ts";
 import { lineOf } from "../../src/tui/line.ts";
-import { SCREENS, type State } from "../../src/tui/state.ts";
+import { SCREEN_KEYS, SCREENS, type State } from "../../src/tui/state.ts";
 import { BRIEF, engine, stateWith } from "../support/stock.ts";
 
 const planned = (changes: Partial<State> = {}): State => {
@@ -62,10 +62,10 @@ describe("messageFor(state, event)", () => {
     for (const screen of SCREENS) {
       const state = planned({ screen });
       SCREENS.forEach((goal, index) => {
-        expect(press(state, `alt+${index + 1}`)).toEqual({ type: "go", screen: goal });
+        const key = SCREEN_KEYS[goal];
+        expect(press(state, `alt+${key}`)).toEqual({ type: "go", screen: goal });
         expect(press(state, `f${index + 2}`)).toEqual({ type: "go", screen: goal });
-        if (screen !== "brief")
-          expect(press(state, `${index + 1}`, `${index + 1}`)).toEqual({ type: "go", screen: goal });
+        if (screen !== "brief") expect(press(state, key, key)).toEqual({ type: "go", screen: goal });
       });
     }
   });
@@ -88,16 +88,16 @@ describe("the words", () => {
   test("every named key can be pressed, and every row has words", () => {
     expect(KEYS.filter((row) => row.words === "")).toEqual([]);
     const covers = KEYS.filter((row) => row.keys.length === 0).map((row) => row.shown);
-    expect(covers).toEqual(["1 to 7", "Alt-1 to 7"]);
+    expect(covers).toEqual([Object.values(SCREEN_KEYS).join(" "), "Alt-1 2 ..."]);
   });
   test.each([
-    ["brief", {}, ["Up/Down", "Ctrl-U", "Alt-1 to 7", "Esc", "F1", "Ctrl-Q"]],
-    ["brief, choices", { field: 3 }, ["Up/Down", "Left/Right", "Alt-1 to 7", "Esc", "F1", "Ctrl-Q"]],
-    ["layouts", { screen: "layouts" }, ["Space", "Enter", "r", "f", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
-    ["compare without pins", { screen: "compare" }, ["Esc", "F1", "Ctrl-Q"]],
-    ["sharing", { screen: "sharing", chosen: BANK }, ["c", "Space", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
-    ["shot", { screen: "shot", chosen: BANK }, ["l", "Space", "Up/Down", "Esc", "F1", "Ctrl-Q"]],
-    ["shot without a bank", { screen: "shot" }, ["l", "Esc", "F1", "Ctrl-Q"]],
+    ["brief", {}, ["Up/Down", "Ctrl-U", "Alt-1 2 ...", "Esc", "F1", "Ctrl-Q"]],
+    ["brief, choices", { field: 3 }, ["Up/Down", "Left/Right", "Alt-1 2 ...", "Esc", "F1", "Ctrl-Q"]],
+    ["layouts", { screen: "layouts" }, ["Space", "Enter", "r", "f", "Up/Down", "u U", "Esc", "F1", "Ctrl-Q"]],
+    ["compare without pins", { screen: "compare" }, ["u U", "Esc", "F1", "Ctrl-Q"]],
+    ["sharing", { screen: "sharing", chosen: BANK }, ["c", "Space", "Up/Down", "u U", "Esc", "F1", "Ctrl-Q"]],
+    ["shot", { screen: "shot", chosen: BANK }, ["l", "Space", "Up/Down", "u U", "Esc", "F1", "Ctrl-Q"]],
+    ["shot without a bank", { screen: "shot" }, ["l", "u U", "Esc", "F1", "Ctrl-Q"]],
     ["help", { help: true }, ["Esc", "Up/Down", "Ctrl-Q"]],
   ] as const)("the help line on %s names what is live now, in order", (_name, changes, want) => {
     expect(helpLineKeys(planned(changes as Partial<State>)).map((row) => row.shown)).toEqual(want);

@@ -136,7 +136,7 @@ export function bankPage(state: State, room: Room): Page {
       : []),
     EMPTY_ROW,
     rowOf(span("Checks", "strong")),
-    ...findingRows(layout.findings, room.columns),
+    ...findingRows(layout.findings, room.columns, state.words),
   ];
   return scrolled(state, "bank", bankHead(state, layout), rows, room);
 }

@@ -2,19 +2,23 @@
 import { FIELDS, fieldAt, shownValue, valueIn } from "../fields.ts";
 import { helpLineKeys } from "../keys.ts";
 import type { Caret } from "../paint.ts";
-import { drawRow, EMPTY_ROW, type Row, rowOf, type Span, span } from "../row.ts";
-import { SCREENS, type State } from "../state.ts";
+import { drawRow, EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
+import type { State } from "../state.ts";
 import { drawnText, wrapText } from "../text.ts";
+import { grouped } from "../values.ts";
 import { textWidth } from "../width.ts";
 import { bankPage } from "./bank.ts";
 import { briefPage, seenPart } from "./brief.ts";
 import { comparePage } from "./compare.ts";
 import { helpPage } from "./help.ts";
 import { layoutsPage } from "./layouts.ts";
+import { mapPage } from "./map.ts";
 import { orderPage } from "./order.ts";
 import type { Page, Room } from "./page.ts";
 import { sharingPage } from "./sharing.ts";
 import { shotPage } from "./shot.ts";
+import { ruleRow, tabsRow } from "./top.ts";
+import { trailPage } from "./trail.ts";
 import { CAUTIONS, refusalOf, refusalWords } from "./words.ts";
 
 export const LEAST_COLUMNS = 60;
@@ -33,6 +37,8 @@ const PAGES: Readonly<Record<State["screen"], (state: State, room: Room) => Page
   sharing: sharingPage,
   shot: shotPage,
   order: orderPage,
+  map: mapPage,
+  trail: trailPage,
 };
 
 const HEAD_ROWS = 3;
@@ -49,25 +55,10 @@ const bodyOf = (state: State): Page =>
 /** How far the screen under the eye can be scrolled. */
 export const mostScroll = (state: State): number => bodyOf(state).mostScroll;
 
-/** Where there is little room the screen in sight goes without its number, and the pins without their count. */
-const NARROW = 76;
-
-function tabsRow(state: State): Row {
-  const narrow = state.columns < NARROW;
-  const tabs = SCREENS.flatMap((screen, index): readonly Span[] => {
-    const pins = screen === "compare" && state.pins.length > 0 && !narrow ? ` (${state.pins.length})` : "";
-    const name = `${index + 1} ${screen}${pins}`;
-    const here = screen === state.screen;
-    if (narrow) return [span(here ? `[${screen}]` : name, here ? "focus" : "plain"), span(" ")];
-    return [span(here ? `[${name}]` : ` ${name} `, here ? "focus" : "plain")];
-  });
-  return { left: tabs, right: [span("joulewright", "title")] };
-}
-
 /** The brief in one line, and what it is planned from. */
 function briefRow(state: State): Row {
   const { answer, stock } = state;
-  const from = `${stock.parts.toLocaleString("en")} parts${stock.note === "" ? "" : `, ${stock.note}`}`;
+  const from = `${grouped(stock.parts)} parts${stock.note === "" ? "" : `, ${stock.note}`}`;
   if (answer?.kind !== "planned")
     return {
       left: [span(answer === null ? "" : "The brief is not whole yet.", "quiet")],
@@ -142,7 +133,7 @@ export function drawScreen(state: State): Drawn {
   const all: readonly Row[] = [
     tabsRow(state),
     briefRow(state),
-    rowOf(span("─".repeat(columns), "quiet")),
+    ruleRow(state),
     ...body,
     rowOf(span(caution, "caution")),
     notice.row,

@@ -4,7 +4,7 @@ import { chartRows } from "../chart.ts";
 import { wantsSpread } from "../detail.ts";
 import type { Point } from "../plot.ts";
 import { type Row, rowOf, span } from "../row.ts";
-import { shown, shownLimit, shownWorst } from "../values.ts";
+import { grouped, shown, shownLimit, shownWorst } from "../values.ts";
 import type { DrawnIn } from "./sharingCourse.ts";
 import { paragraph } from "./words.ts";
 
@@ -112,7 +112,7 @@ export function spreadRows(
       span(error === 0 ? "" : ` +- ${chanceWords(error)}`),
     ),
     ...paragraph(
-      `Reckoned, not counted${asked}. ${banks.toLocaleString("en")} banks drawn from seed ${seed}, each unit ${law}.`,
+      `Reckoned, not counted${asked}. ${grouped(banks)} banks drawn from seed ${seed}, each unit ${law}.`,
       columns,
       over ? "bad" : "quiet",
     ),
