@@ -18,6 +18,7 @@ import type {
 } from "../search/index.ts";
 import type { TerminalInput } from "./input.ts";
 import type { ProcessPort } from "./session.ts";
+import type { UnitsPort } from "./units/work.ts";
 
 /** One arrangement by name: what is pinned, chosen and saved. */
 export type Arrangement = Layout;
@@ -116,6 +117,7 @@ export interface Workshop {
   readonly engine: EnginePort;
   readonly stock: StockFacts;
   readonly words: SharedWords;
+  readonly units: UnitsPort;
   /** Writes the order of a bank to a file whose ending names the format. */
   readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
 }

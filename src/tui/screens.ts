@@ -11,6 +11,7 @@ import { openSession } from "./session.ts";
 import { ask, type Effect, type Message } from "./state.ts";
 import { createStore } from "./store.ts";
 import { screenTrouble } from "./terminal.ts";
+import { makeUnitsRunner } from "./units/runner.ts";
 import { update } from "./update/update.ts";
 import type { Mounted } from "./view/mount.ts";
 import { drawScreen } from "./view/screen.ts";
@@ -84,7 +85,9 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else if (effect.type === "quit") session.end(0);
       else if (effect.type === "suspend") session.suspend();
       else if (effect.type === "redraw") paint.redraw();
-      else if (workshop !== null)
+      else if (effect.type === "units") {
+        if (workshop !== null) units.run(effect.effect, workshop.units);
+      } else if (workshop !== null)
         send({ type: "saved", answer: workshop.exportBill(effect.bill, effect.path, effect.replace) });
     };
     const store = createStore({
@@ -96,6 +99,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         autosave.changed();
       },
     });
+    const units = makeUnitsRunner({ state: store.state, send: store.send, now: () => performance.now() });
     const asker = makeAsker({ engine, state: store.state, send: store.send, now: () => performance.now() });
     const detailer = makeDetailer({ engine, state: store.state, send: store.send });
     const autosave = makeAutosave({
@@ -132,6 +136,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         clearImmediate(frame);
         asker.stop();
         detailer.stop();
+        units.stop();
         paint.close();
         stdout.off("resize", onResize);
         const unsaved = autosave.finish();

@@ -7,6 +7,7 @@ import { FIRST_MAP, type FrontPoint, type MapView } from "./axes.ts";
 import type { Line, LineEdit } from "./line.ts";
 import type { Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
+import { NO_UNITS, type UnitsEffect, type UnitsMessage, type UnitsState } from "./units/state.ts";
 import { type History, NO_HISTORY, type Tried, type Work } from "./work.ts";
 
 /** The screens in their order, each with the key that goes there from anywhere. */
@@ -19,6 +20,7 @@ export const SCREEN_KEYS = {
   shot: "6",
   order: "7",
   map: "8",
+  units: "0",
   trail: "t",
 } as const;
 export type ScreenName = keyof typeof SCREEN_KEYS;
@@ -92,6 +94,7 @@ export interface State extends Work {
   /** First row shown of each screen that scrolls freely; cut to what there is when drawn. */
   readonly scroll: Readonly<Record<string, number>>;
   readonly prompt: Prompt | null;
+  readonly units: UnitsState;
   readonly notice: Notice | null;
   /** The catalogue is too large to look for least changes while one types. */
   readonly slow: boolean;
@@ -130,11 +133,13 @@ export type Message =
   | { readonly type: "answered"; readonly asked: number; readonly answer: Answer; readonly slow: boolean }
   | { readonly type: "opened"; readonly stock: StockFacts; readonly words: SharedWords }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
+  | { readonly type: "units"; readonly message: UnitsMessage }
   | { readonly type: "say"; readonly notice: Notice };
 
 export type Effect =
   | { readonly type: "ask"; readonly asked: number }
   | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
+  | { readonly type: "units"; readonly effect: UnitsEffect }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };
@@ -187,6 +192,7 @@ export const initialState = (start: Start): State => ({
   spread: false,
   scroll: {},
   prompt: null,
+  units: NO_UNITS,
   notice: null,
   slow: false,
 });

@@ -4,6 +4,7 @@ import { clampWords, type Files, rateBlocks, refusalWords, titleOf, withoutBalan
 import { saveBill } from "./billFile.ts";
 import { catalogEngine } from "./catalogEngine.ts";
 import type { SharedWords, StockFacts, Workshop } from "./ports.ts";
+import { unitsOn } from "./units/work.ts";
 
 /** What was read from the catalogues. */
 export interface ReadStock {
@@ -14,9 +15,10 @@ export interface ReadStock {
 
 export const SHARED_WORDS: SharedWords = { clampWords, rateBlocks, refusalWords, titleOf, withoutBalanceWords };
 
-export const workshopOn = ({ parts, families, stock }: ReadStock, files: Pick<Files, "write">): Workshop => ({
+export const workshopOn = ({ parts, families, stock }: ReadStock, files: Pick<Files, "read" | "write">): Workshop => ({
   engine: catalogEngine({ parts, families }),
   stock,
   words: SHARED_WORDS,
+  units: unitsOn(parts, files),
   exportBill: (bill, path, replace) => saveBill(files, bill, path, replace),
 });
