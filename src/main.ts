@@ -48,7 +48,7 @@ async function readAsked({ catalog, resistors }: ScreenFlags, ports: Ports, stoc
   if (!read.ok) return read;
   const { parts, families, sources } = read.value;
   const faults = sources.reduce((sum, source) => sum + source.faults.length, 0);
-  return { ok: true as const, value: { parts, families, stock: { ...stock, parts: parts.length, faults } } };
+  return { ok: true as const, value: { parts, families, sources, stock: { ...stock, parts: parts.length, faults } } };
 }
 
 /** The brief asked for, else the demo's beside the demo's catalogues. */
@@ -80,6 +80,15 @@ async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
       const read = await readAsked(flags, ports, stock);
       if (!read.ok) lost = read.refusals;
       return read;
+    },
+    watch: (changed) => {
+      const watched = [...flags.catalog, ...(flags.resistors === null ? [] : [flags.resistors])].filter(
+        (one) => one !== "-",
+      );
+      const stops = watched.map((path) => ports.files.watch(path, changed));
+      return () => {
+        for (const stop of stops) stop();
+      };
     },
     stock,
     brief: brief.value,

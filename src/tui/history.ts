@@ -6,15 +6,16 @@ import { differenceWords, type History, type Work } from "./work.ts";
 /** Steps that can be taken back. */
 const KEPT = 500;
 
-const KEYS: readonly (keyof Work)[] = ["values", "extra", "pins", "chosen", "rank", "frontOnly"];
+const KEYS: readonly (keyof Work)[] = ["values", "extra", "pins", "chosen", "rank", "frontOnly", "overrides"];
 
-const workOf = ({ values, extra, pins, chosen, rank, frontOnly }: State): Work => ({
+const workOf = ({ values, extra, pins, chosen, rank, frontOnly, overrides }: State): Work => ({
   values,
   extra,
   pins,
   chosen,
   rank,
   frontOnly,
+  overrides,
 });
 
 /** Messages that are no doing of the user's: they do not end what is being typed. */
@@ -41,7 +42,21 @@ function go(state: State, from: "past" | "future"): Change {
   const text = `${undo ? "Taken back" : "Brought back"}: ${words}.`;
   const caret = (target.values[fieldAt(state.field).key] ?? "").length;
   const column = Math.max(0, Math.min(state.column, target.pins.length - 1));
-  return ask({ ...state, ...target, history, caret, column, notice: { tone: "plain", text } });
+  const change = ask({ ...state, ...target, history, caret, column, notice: { tone: "plain", text } });
+  const { overrides } = target;
+  if (overrides === state.overrides) return change;
+  return { ...change, effects: [...change.effects, { type: "overrides", overrides }] };
+}
+
+/** What was set by hand elsewhere cannot be taken back here: all steps go on with it. */
+function reopened(before: State, change: Change): Change {
+  const { overrides, history } = change.state;
+  if (overrides === before.overrides) return change;
+  const on = (list: readonly Work[]): readonly Work[] => list.map((work) => ({ ...work, overrides }));
+  return {
+    ...change,
+    state: { ...change.state, history: { ...history, past: on(history.past), future: on(history.future) } },
+  };
 }
 
 /** Keeps the history about an update of the state. */
@@ -51,6 +66,7 @@ export const withHistory =
     if (message.type === "undo") return go(state, "past");
     if (message.type === "redo") return go(state, "future");
     const change = update(state, message);
+    if (message.type === "opened") return reopened(state, change);
     if (PASSIVE.includes(message.type)) return change;
     const after = change.state;
     const typing = typedInto(state, message);

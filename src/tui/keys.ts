@@ -25,8 +25,9 @@ const shows = live.all(live.on("bank", "sharing", "shot", "order"), live.hasBank
 const looks = live.all(live.on("bank", "sharing", "shot"), live.hasBank);
 const saves = live.all(live.on("bank", "order"), live.hasBank);
 const tracks = live.all(live.on("trail"), live.hasTrail);
+const sets = live.all(live.on("parts"), live.hasParts);
 const moves: live.Live = (state) =>
-  picks(state) || compares(state) || shows(state) || tracks(state) || live.onUnits(state);
+  picks(state) || compares(state) || shows(state) || tracks(state) || live.on("parts")(state) || live.onUnits(state);
 
 /** What lies on top comes first: the first live row wins. */
 const ON_TOP: readonly Short[] = [
@@ -103,6 +104,10 @@ const LISTS: readonly Short[] = [
   [["e", "s"], "e", "save order", { type: "export" }, saves, 1],
   [["c"], "c", "chance", { type: "spread" }, live.mayAskSpread, 2],
   [["l"], "l", "load", { type: "load" }, live.on("shot"), 2],
+  [["enter", "e"], "Enter", "set by hand", { type: "value" }, sets, 1],
+  [["d"], "d", "faults or parts", { type: "faults" }, live.on("parts"), 2],
+  [["left"], "Left/Right", "value", { type: "column", by: -1 }, sets, 3],
+  [["right"], "", "value", { type: "column", by: 1 }, sets],
   [["up", "k"], "Up/Down", "move", { type: "move", by: -1 }, moves, 6],
   [["down", "j"], "", "move", { type: "move", by: 1 }, moves],
   [["pageup"], "PgUp/PgDn", "page", { type: "move", by: "pageBack" }, moves, null],
@@ -114,7 +119,7 @@ const LISTS: readonly Short[] = [
     "Esc",
     "layouts",
     { type: "go", screen: "layouts" },
-    live.on("compare", "bank", "sharing", "shot", "order", "trail", "map", "units"),
+    live.on("compare", "bank", "sharing", "shot", "order", "trail", "map", "parts", "units"),
     7,
   ],
   [["escape"], "Esc", "brief", { type: "go", screen: "brief" }, live.on("layouts"), 7],

@@ -1,6 +1,7 @@
 // What the screens need from outside: the engine, the files, the clock and the terminal, handed in by main.
 import type { Layout } from "../bank/index.ts";
-import type { clampWords, rateBlocks, refusalWords, titleOf, withoutBalanceWords } from "../cli/index.ts";
+import type { Capacitor, Overrides } from "../catalog/index.ts";
+import type { clampWords, rateBlocks, refusalWords, Source, titleOf, withoutBalanceWords } from "../cli/index.ts";
 import type { Bill } from "../order/index.ts";
 import type { Read } from "../quantity/index.ts";
 import type {
@@ -103,6 +104,20 @@ export interface StockFacts {
   readonly note: string;
 }
 
+/** One value of a part in words, and where it comes from. */
+export interface PartValue {
+  readonly heading: string;
+  readonly text: string;
+  readonly state: "datasheet" | "measured" | "assumed" | "unknown";
+  readonly rule?: string;
+}
+
+/** The catalogues as they were understood. */
+export interface CatalogueFacts {
+  readonly parts: readonly Capacitor[];
+  readonly sources: readonly Source[];
+}
+
 /** Words that the screens share with the commands. They come with the engine, so that the first frame does not wait for them. */
 export interface SharedWords {
   readonly titleOf: typeof titleOf;
@@ -110,6 +125,13 @@ export interface SharedWords {
   readonly withoutBalanceWords: typeof withoutBalanceWords;
   readonly rateBlocks: typeof rateBlocks;
   readonly refusalWords: typeof refusalWords;
+  /** Headings whose values can be set by hand. */
+  readonly headings: readonly string[];
+  readonly valuesOf: (unit: Capacitor) => readonly PartValue[];
+  /** Money in the major unit of its currency. */
+  readonly majorOf: (minor: number, currency: string | undefined) => number;
+  /** Why these values cannot be set by hand; null when they can. */
+  readonly overrideTrouble: (unit: Capacitor, texts: Readonly<Record<string, string>>) => string | null;
 }
 
 /** What is read and loaded once the first frame stands. */
@@ -118,6 +140,11 @@ export interface Workshop {
   readonly stock: StockFacts;
   readonly words: SharedWords;
   readonly units: UnitsPort;
+  readonly catalogue: CatalogueFacts;
+  /** What is set by hand for all parts, as it was read. */
+  readonly overrides: Overrides;
+  /** Writes what is set by hand beside the catalogues, never into them. */
+  readonly saveOverrides: (overrides: Overrides) => SaveAnswer;
   /** Writes the order of a bank to a file whose ending names the format. */
   readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
 }
@@ -125,6 +152,8 @@ export interface Workshop {
 export interface ScreenPorts {
   /** Reads the catalogues and loads the engine; refused, the screens end and the refusals are for the caller to tell. */
   readonly open: () => Promise<Read<Workshop>>;
+  /** Calls back when a catalogue has changed on disk, until the function that it gives is called. */
+  readonly watch: (changed: () => void) => () => void;
   /** What is known of the catalogues before they are read. */
   readonly stock: StockFacts;
   /** The brief to start with when none was saved: text by key. */

@@ -1,4 +1,5 @@
 // Joins state, keys, engine, painter and terminal, and runs the screens until they end: the one owner of the end.
+import type { Overrides } from "../catalog/index.ts";
 import { makeAsker } from "./asker.ts";
 import { makeAutosave } from "./autosave.ts";
 import { makeDetailer } from "./detailer.ts";
@@ -44,6 +45,8 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     let over = false;
     let loading = false;
     let opening = false;
+    /** The catalogues changed while they were read. */
+    let again = false;
 
     const draw = (): void => {
       frame = undefined;
@@ -58,18 +61,24 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else mounted.show(drawn.rows);
       paint.settle();
       detailer.afterFrame();
-      if (workshop === null) openWorkshop();
+      if (workshop === null && !opening) openWorkshop();
       if (store.state().answer !== null) loadInk();
     };
     /** The catalogues are read, and the engine is loaded, once the first frame stands. */
     const openWorkshop = (): void => {
+      if (opening) again = true;
       if (opening) return;
       opening = true;
       ports.open().then((read) => {
+        opening = false;
         if (over) return;
-        if (!read.ok) return session.end(WRONG_USE);
-        workshop = read.value;
-        store.send({ type: "opened", stock: workshop.stock, words: workshop.words });
+        if (read.ok) workshop = read.value;
+        else if (workshop === null) return session.end(WRONG_USE);
+        else return say("bad", `${ports.stock.name} cannot be read now; what was read before holds.`);
+        const { stock, words, catalogue, overrides } = workshop;
+        store.send({ type: "opened", stock, words, catalogue, overrides });
+        if (again) openWorkshop();
+        again = false;
       }, session.fail);
     };
     /** Ink is loaded once what fits is on screen: the first list does not wait for it either. */
@@ -80,11 +89,18 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         if (!over) mounted = mount(paint, stdin as NodeJS.ReadStream, drawScreen(store.state()).rows);
       }, session.fail);
     };
+    const say = (tone: "warn" | "bad", text: string): void => store.send({ type: "say", notice: { tone, text } });
+    const setByHand = (overrides: Overrides): void => {
+      const answer = workshop?.saveOverrides(overrides);
+      if (answer?.kind === "trouble") say("bad", `Not set, for it cannot be saved: ${answer.words}`);
+      openWorkshop();
+    };
     const run = (effect: Effect, send: (message: Message) => void): void => {
       if (effect.type === "ask") asker.ask();
       else if (effect.type === "quit") session.end(0);
       else if (effect.type === "suspend") session.suspend();
       else if (effect.type === "redraw") paint.redraw();
+      else if (effect.type === "overrides") setByHand(effect.overrides);
       else if (effect.type === "units") {
         if (workshop !== null) units.run(effect.effect, workshop.units);
       } else if (workshop !== null)
@@ -137,6 +153,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         asker.stop();
         detailer.stop();
         units.stop();
+        unwatch();
         paint.close();
         stdout.off("resize", onResize);
         const unsaved = autosave.finish();
@@ -147,6 +164,10 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       },
     });
 
+    const unwatch = ports.watch(() => {
+      say("warn", `${ports.stock.name} changed on disk and is read again.`);
+      openWorkshop();
+    });
     session.enter();
     stdout.on("resize", onResize);
     stdout.on("error", onLost);

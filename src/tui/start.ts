@@ -9,6 +9,8 @@ import type { ReadStock } from "./workshop.ts";
 export interface StartOptions {
   /** Reads the catalogues; called once the first frame stands. */
   readonly read: () => Promise<Read<ReadStock>>;
+  /** Calls back when one of them changes on disk. */
+  readonly watch: ScreenPorts["watch"];
   /** What is known of them before. */
   readonly stock: StockFacts;
   /** A brief as parsed from JSON; what is no object counts as none. */
@@ -34,6 +36,7 @@ export function portsOn(options: StartOptions): ScreenPorts {
       const [read, { workshopOn }] = await Promise.all([options.read(), import("./workshop.ts")]);
       return read.ok ? accepted(workshopOn(read.value, files)) : read;
     },
+    watch: options.watch,
     stock,
     loadSession: () => {
       const read = sessionFile === null ? null : files.read(sessionFile);

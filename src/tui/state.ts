@@ -1,11 +1,12 @@
 // The whole state of the screens, and the two closed unions that change it and that it asks for.
 
+import type { Overrides } from "../catalog/index.ts";
 import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
 import { FIRST_MAP, type FrontPoint, type MapView } from "./axes.ts";
 import type { Line, LineEdit } from "./line.ts";
-import type { Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
+import type { CatalogueFacts, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
 import { NO_UNITS, type UnitsEffect, type UnitsMessage, type UnitsState } from "./units/state.ts";
 import { type History, NO_HISTORY, type Tried, type Work } from "./work.ts";
@@ -20,6 +21,7 @@ export const SCREEN_KEYS = {
   shot: "6",
   order: "7",
   map: "8",
+  parts: "9",
   units: "0",
   trail: "t",
 } as const;
@@ -52,10 +54,22 @@ export interface Notice {
 }
 
 /** The question for a file name; `replace` is set when the file named is there already. */
-export interface Prompt {
+interface FilePrompt {
+  readonly what: "order";
   readonly line: Line;
   readonly replace: boolean;
 }
+
+/** The question for a value of a part. */
+interface ValuePrompt {
+  readonly what: "value";
+  readonly line: Line;
+  readonly replace: false;
+  readonly part: string;
+  readonly heading: string;
+}
+
+export type Prompt = FilePrompt | ValuePrompt;
 
 export interface State extends Work {
   readonly columns: number;
@@ -74,6 +88,14 @@ export interface State extends Work {
   /** Place on the trail under the cursor, counted from its end; 0 is now. */
   readonly trailBack: number;
   readonly map: MapView;
+  /** The catalogues as they were understood; null until they are read. */
+  readonly catalogue: CatalogueFacts | null;
+  /** How often they were read: what was worked out on other values holds no more. */
+  readonly reads: number;
+  readonly partIndex: number;
+  readonly headingIndex: number;
+  /** Faults in place of parts. */
+  readonly showFaults: boolean;
   /** The field under the caret, which is also the value in hand on the other screens. */
   readonly field: number;
   readonly caret: number;
@@ -131,7 +153,15 @@ export type Message =
   | { readonly type: "confirm" }
   | { readonly type: "cancel" }
   | { readonly type: "answered"; readonly asked: number; readonly answer: Answer; readonly slow: boolean }
-  | { readonly type: "opened"; readonly stock: StockFacts; readonly words: SharedWords }
+  | {
+      readonly type: "opened";
+      readonly stock: StockFacts;
+      readonly words: SharedWords;
+      readonly catalogue: CatalogueFacts;
+      readonly overrides: Overrides;
+    }
+  | { readonly type: "value" }
+  | { readonly type: "faults" }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
   | { readonly type: "units"; readonly message: UnitsMessage }
   | { readonly type: "say"; readonly notice: Notice };
@@ -140,6 +170,7 @@ export type Effect =
   | { readonly type: "ask"; readonly asked: number }
   | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
   | { readonly type: "units"; readonly effect: UnitsEffect }
+  | { readonly type: "overrides"; readonly overrides: Overrides }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };
@@ -174,6 +205,12 @@ export const initialState = (start: Start): State => ({
   trailTyping: null,
   trailBack: 0,
   map: FIRST_MAP,
+  catalogue: null,
+  overrides: {},
+  reads: 0,
+  partIndex: 0,
+  headingIndex: 0,
+  showFaults: false,
   screen: "brief",
   help: false,
   field: 0,

@@ -7,6 +7,7 @@ export const LONGEST_TRAIL = 200;
 
 /** One and the same, so that nothing differs in it. */
 const NO_PINS: Work["pins"] = [];
+const NO_OVERRIDES: Work["overrides"] = {};
 
 const asWork = ({ values, extra }: Pick<Tried, "values" | "extra">): Work => ({
   values,
@@ -15,6 +16,7 @@ const asWork = ({ values, extra }: Pick<Tried, "values" | "extra">): Work => ({
   chosen: null,
   rank: "cost",
   frontOnly: false,
+  overrides: NO_OVERRIDES,
 });
 
 const pricedCost = (cost: { readonly total: number; readonly unpriced: readonly string[] } | null): number | null =>

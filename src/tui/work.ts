@@ -1,4 +1,5 @@
 // What is the user's work on the screens, what has been tried in it, and what differs between two states of it, in words.
+import type { Overrides } from "../catalog/index.ts";
 import type { Ranking } from "../search/index.ts";
 import { FIELDS } from "./fields.ts";
 import type { Arrangement } from "./ports.ts";
@@ -12,6 +13,8 @@ export interface Work {
   readonly chosen: Arrangement | null;
   readonly rank: Ranking;
   readonly frontOnly: boolean;
+  /** Values of the catalogue set by hand: text by heading by part. */
+  readonly overrides: Overrides;
 }
 
 export interface History {
@@ -51,6 +54,7 @@ export function differenceWords(before: Work, after: Work): string {
     ...(before.pins === after.pins ? [] : ["the pins"]),
     ...(before.chosen === after.chosen ? [] : ["the chosen bank"]),
     ...(before.rank === after.rank ? [] : [`order by ${before.rank} to ${after.rank}`]),
+    ...(before.overrides === after.overrides ? [] : ["values set by hand"]),
     ...(before.frontOnly === after.frontOnly ? [] : ["which layouts are listed"]),
   ];
   return [...fields, ...rest].join(", ");

@@ -214,3 +214,26 @@ describe("move(path, to)", () => {
     expect(codeOf(files.move(join(folder, "a"), join(folder, "c")))).toBe("no-such-file");
   });
 });
+
+describe("watch(path, changed)", () => {
+  test("calls back after the file has changed, also by being replaced; not after it was stopped", async () => {
+    const path = join(folder, "a.csv");
+    fs.writeFileSync(path, "one");
+    let called = 0;
+    const stop = files.watch(path, () => {
+      called += 1;
+    });
+    const until = async (count: number): Promise<void> => {
+      for (let waited = 0; called < count && waited < 6000; waited += 50) await new Promise((go) => setTimeout(go, 50));
+      expect(called).toBe(count);
+    };
+    await new Promise((go) => setTimeout(go, 100));
+    fs.writeFileSync(join(folder, "b"), "another");
+    fs.renameSync(join(folder, "b"), path);
+    await until(1);
+    stop();
+    fs.writeFileSync(path, "a third time");
+    await new Promise((go) => setTimeout(go, 700));
+    expect(called).toBe(1);
+  }, 10_000);
+});

@@ -35,6 +35,7 @@ export function fakePorts(texts: Readonly<Record<string, string>> = {}, columns 
         return { ok: true, value: path };
       },
       move: real.move,
+      watch: real.watch,
     },
     printed: () => out,
     told: () => err,

@@ -25,6 +25,11 @@ export const parts = (text = CATALOGUE): readonly Capacitor[] => {
 
 export const engine = catalogEngine({ parts: parts(), families: [DEFAULT_FAMILY] });
 
+export const CATALOGUE_FACTS = {
+  parts: parts(),
+  sources: [{ file: "test.csv", kind: "capacitors" as const, read: 4, faults: [], notes: [] }],
+};
+
 export const STOCK = { name: "test.csv", parts: 4, faults: 0, note: "invented" };
 
 export const BRIEF = { energy: "2.4 kJ", voltage: "2.2 kV", ripple: "100 %" };
@@ -39,6 +44,7 @@ export const stateWith = (changes: Partial<State> = {}): State => ({
     extra: {},
   }),
   words: SHARED_WORDS,
+  catalogue: CATALOGUE_FACTS,
   ...changes,
 });
 
@@ -96,8 +102,17 @@ export function fakePorts(
   return {
     open: async () => ({
       ok: true,
-      value: { engine: by, stock: changes.stock ?? STOCK, words: SHARED_WORDS, exportBill },
+      value: {
+        engine: by,
+        stock: changes.stock ?? STOCK,
+        words: SHARED_WORDS,
+        exportBill,
+        catalogue: CATALOGUE_FACTS,
+        overrides: {},
+        saveOverrides: () => ({ kind: "saved", path: "" }),
+      },
     }),
+    watch: () => () => {},
     stock: { ...STOCK, parts: 0 },
     brief: BRIEF,
     briefFirst: false,

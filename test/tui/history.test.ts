@@ -42,7 +42,11 @@ describe("withHistory(update)", () => {
     expect(run(state, undo, nudge, redo).notice?.text).toBe("There is nothing to bring back.");
   });
   test("an undo asks the engine again, and the caret and the column stay where something is", () => {
-    const state = { ...stateWith(), history: { past: [stateWith({ values: {} })], future: [], typing: null } };
+    const NONE = {};
+    const state = {
+      ...stateWith({ overrides: NONE }),
+      history: { past: [stateWith({ values: {}, overrides: NONE })], future: [], typing: null },
+    };
     const back = withHistory((at) => ({ state: at, effects: [] }))({ ...state, column: 3, caret: 6 }, undo);
     expect(back.effects).toEqual([{ type: "ask", asked: 1 }]);
     expect([back.state.caret, back.state.column]).toEqual([0, 0]);

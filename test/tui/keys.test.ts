@@ -29,14 +29,16 @@ describe("messageFor(state, event)", () => {
   });
   test("Escape goes one step back, whatever is on top", () => {
     expect(press(planned({ help: true }), "escape")).toEqual({ type: "help" });
-    expect(press(planned({ screen: "order", prompt: { line: lineOf("a"), replace: false } }), "escape")).toEqual({
+    expect(
+      press(planned({ screen: "order", prompt: { what: "order", line: lineOf("a"), replace: false } }), "escape"),
+    ).toEqual({
       type: "cancel",
     });
     expect(press(planned({ screen: "compare" }), "escape")).toEqual({ type: "go", screen: "layouts" });
     expect(press(planned({ screen: "layouts" }), "escape")).toEqual({ type: "go", screen: "brief" });
   });
   test("while a file name is asked for, letters and pastes go into it", () => {
-    const asking = planned({ screen: "order", prompt: { line: lineOf("a"), replace: false } });
+    const asking = planned({ screen: "order", prompt: { what: "order", line: lineOf("a"), replace: false } });
     expect(press(asking, "q", "q")).toEqual({ type: "edit", edit: { edit: "insert", text: "q" } });
     expect(press(asking, "1", "1")).toEqual({ type: "edit", edit: { edit: "insert", text: "1" } });
     expect(messageFor(asking, { kind: "paste", text: "b.csv" })).toEqual({
@@ -45,7 +47,7 @@ describe("messageFor(state, event)", () => {
     });
   });
   test("while it is asked whether to replace a file, only y, n and Escape answer", () => {
-    const asking = planned({ screen: "order", prompt: { line: lineOf("a"), replace: true } });
+    const asking = planned({ screen: "order", prompt: { what: "order", line: lineOf("a"), replace: true } });
     expect(press(asking, "y", "y")).toEqual({ type: "confirm" });
     expect(press(asking, "n", "n")).toEqual({ type: "cancel" });
     expect(press(asking, "enter")).toBeNull();
@@ -73,7 +75,7 @@ describe("messageFor(state, event)", () => {
     const tops: Partial<State>[] = [
       {},
       { help: true },
-      { screen: "order", prompt: { line: lineOf(""), replace: true } },
+      { screen: "order", prompt: { what: "order", line: lineOf(""), replace: true } },
     ];
     for (const top of tops)
       for (const key of ["ctrl+c", "ctrl+q"]) expect(press(planned(top), key)).toEqual({ type: "quit" });

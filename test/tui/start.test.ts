@@ -7,13 +7,15 @@ import { DEFAULT_FAMILY } from "../../src/catalog/index.ts";
 import { filesOn } from "../../src/cli/index.ts";
 import { accepted, refused } from "../../src/quantity/index.ts";
 import { portsOn, startScreens } from "../../src/tui/start.ts";
-import { BRIEF, fakePorts, parts, STOCK } from "../support/stock.ts";
+import { BRIEF, CATALOGUE_FACTS, fakePorts, parts, STOCK } from "../support/stock.ts";
 
 const folder = mkdtempSync(join(tmpdir(), "start-"));
 afterAll(() => rmSync(folder, { recursive: true }));
 
 const options = (sessionFile: string | null) => ({
-  read: async () => accepted({ parts: parts(), families: [DEFAULT_FAMILY], stock: STOCK }),
+  read: async () =>
+    accepted({ parts: parts(), families: [DEFAULT_FAMILY], stock: STOCK, sources: CATALOGUE_FACTS.sources }),
+  watch: () => () => {},
   stock: STOCK,
   brief: BRIEF,
   files: filesOn(),

@@ -2,7 +2,15 @@
 import { expect, test } from "vitest";
 import { differenceWords, type Work } from "../../src/tui/work.ts";
 
-const work: Work = { values: { voltage: "2.2 kV" }, extra: {}, pins: [], chosen: null, rank: "cost", frontOnly: false };
+const work: Work = {
+  values: { voltage: "2.2 kV" },
+  extra: {},
+  pins: [],
+  chosen: null,
+  rank: "cost",
+  frontOnly: false,
+  overrides: {},
+};
 
 test("differenceWords(before, after): nothing, one field, a blank, and what is no field", () => {
   expect(differenceWords(work, work)).toBe("");

@@ -1,19 +1,21 @@
 // What comes after the first frame, made of parts that were read.
 import { expect, test } from "vitest";
 import { DEFAULT_FAMILY } from "../../src/catalog/index.ts";
+import { refused } from "../../src/quantity/index.ts";
 import { SHARED_WORDS, workshopOn } from "../../src/tui/workshop.ts";
-import { BRIEF, parts, STOCK } from "../support/stock.ts";
+import { BRIEF, CATALOGUE_FACTS, parts, STOCK } from "../support/stock.ts";
 
 test("workshopOn(read, files): an engine that plans, the words of the commands, an order saved where it was said", () => {
   const written = new Map<string, string>();
   const files = {
+    read: (path: string) => refused({ code: "no-such-file", place: { file: path }, read: "", want: "" }),
     write: (path: string, text: string) => {
       written.set(path, text);
       return { ok: true as const, value: path };
     },
   };
   const { engine, stock, words, exportBill } = workshopOn(
-    { parts: parts(), families: [DEFAULT_FAMILY], stock: STOCK },
+    { parts: parts(), families: [DEFAULT_FAMILY], stock: STOCK, sources: CATALOGUE_FACTS.sources },
     files,
   );
   expect([stock, words]).toEqual([STOCK, SHARED_WORDS]);

@@ -13,6 +13,7 @@ import { mostScroll } from "../view/screen.ts";
 import { chooseField, editField, moveField } from "./form.ts";
 import { nextAxis, toggleTable, walkMap } from "./map.ts";
 import { askName, cancel, confirm, editName, saved } from "./order.ts";
+import { askValue, confirmValue, moveHeading, moveParts } from "./parts.ts";
 import { chooseBank, orderPins, togglePin } from "./pins.ts";
 import { moveSelection, type Step, scrollScreen } from "./scroll.ts";
 import { moveTrail, retry } from "./trail.ts";
@@ -23,6 +24,7 @@ function move(state: State, by: Step): Change {
   if (state.screen === "brief") return moveField(state, by);
   if (state.screen === "layouts") return moveSelection(state, by);
   if (state.screen === "map") return walkMap(state, "y", by);
+  if (state.screen === "parts") return moveParts(state, by, mostScroll(state));
   if (state.screen === "trail") return moveTrail(state, by);
   return scrollScreen(state, state.screen, by, mostScroll(state));
 }
@@ -63,6 +65,19 @@ const nextRank = (state: State): State => ({
   notice: null,
 });
 
+/** The catalogues were read, for the first time or again. Values set by hand that are the same stay the same object. */
+function opened(state: State, { stock, words, catalogue, overrides }: Message & { readonly type: "opened" }): Change {
+  const same = JSON.stringify(overrides) === JSON.stringify(state.overrides);
+  return ask({
+    ...state,
+    stock,
+    words,
+    catalogue,
+    reads: state.reads + 1,
+    overrides: same ? state.overrides : overrides,
+  });
+}
+
 function changed(state: State, message: Message): Change {
   switch (message.type) {
     case "resized":
@@ -89,6 +104,7 @@ function changed(state: State, message: Message): Change {
       return toggleTable(state);
     case "column": {
       if (state.screen === "map") return walkMap(state, "x", message.by);
+      if (state.screen === "parts") return moveHeading(state, message.by);
       const last = Math.max(0, state.pins.length - 1);
       return still({ ...state, column: Math.max(0, Math.min(last, state.column + message.by)), notice: null });
     }
@@ -122,7 +138,7 @@ function changed(state: State, message: Message): Change {
     case "export":
       return askName(state);
     case "confirm":
-      return confirm(state);
+      return state.prompt?.what === "value" ? confirmValue(state, state.prompt) : confirm(state);
     case "cancel":
       return cancel(state);
     case "answered":
@@ -130,7 +146,11 @@ function changed(state: State, message: Message): Change {
       if (message.asked !== state.asked) return still(state);
       return still(withTried({ ...state, answer: message.answer, answered: message.asked, slow: message.slow }));
     case "opened":
-      return ask({ ...state, stock: message.stock, words: message.words });
+      return opened(state, message);
+    case "value":
+      return askValue(state);
+    case "faults":
+      return still({ ...state, showFaults: !state.showFaults, scroll: { ...state.scroll, parts: 0 } });
     case "saved":
       return saved(state, message.answer);
     case "units":

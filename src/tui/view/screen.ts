@@ -3,8 +3,8 @@ import { FIELDS, fieldAt, shownValue, valueIn } from "../fields.ts";
 import { helpLineKeys } from "../keys.ts";
 import type { Caret } from "../paint.ts";
 import { drawRow, EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
-import type { State } from "../state.ts";
-import { drawnText, wrapText } from "../text.ts";
+import type { Prompt, State } from "../state.ts";
+import { cutText, drawnText, wrapText } from "../text.ts";
 import { grouped } from "../values.ts";
 import { textWidth } from "../width.ts";
 import { bankPage } from "./bank.ts";
@@ -15,6 +15,7 @@ import { layoutsPage } from "./layouts.ts";
 import { mapPage } from "./map.ts";
 import { orderPage } from "./order.ts";
 import type { Page, Room } from "./page.ts";
+import { partsPage } from "./parts.ts";
 import { sharingPage } from "./sharing.ts";
 import { shotPage } from "./shot.ts";
 import { ruleRow, tabsRow } from "./top.ts";
@@ -40,6 +41,7 @@ const PAGES: Readonly<Record<State["screen"], (state: State, room: Room) => Page
   order: orderPage,
   map: mapPage,
   units: unitsPage,
+  parts: partsPage,
   trail: trailPage,
 };
 
@@ -60,7 +62,8 @@ export const mostScroll = (state: State): number => bodyOf(state).mostScroll;
 /** The brief in one line, and what it is planned from. */
 function briefRow(state: State): Row {
   const { answer, stock } = state;
-  const from = `${grouped(stock.parts)} parts${stock.note === "" ? "" : `, ${stock.note}`}`;
+  const hand = Object.keys(state.overrides).length === 0 ? "" : ", some by hand";
+  const from = `${grouped(stock.parts)} parts${hand}${stock.note === "" ? "" : `, ${stock.note}`}`;
   if (answer?.kind !== "planned")
     return {
       left: [span(answer === null ? "" : "The brief is not whole yet.", "quiet")],
@@ -86,6 +89,12 @@ function focusedRefusal(state: State): Row {
 }
 
 const QUESTION = "Save the order as: ";
+const questionOf = (prompt: Prompt): string =>
+  prompt.what === "order" ? QUESTION : `${prompt.heading} of ${prompt.part}, blank for the catalogue's: `;
+
+/** A long question is cut, so that there is room to type. */
+const fitQuestion = (question: string, columns: number): string =>
+  textWidth(question) <= columns - 20 ? question : `${cutText(question, columns - 22)}: `;
 
 function noticeRow(state: State): { readonly row: Row; readonly caretColumn: number | null } {
   const { prompt, notice } = state;
@@ -94,9 +103,11 @@ function noticeRow(state: State): { readonly row: Row; readonly caretColumn: num
   }
   const bad = notice !== null && notice.tone === "bad";
   if (prompt !== null && !bad) {
-    const room = Math.max(8, state.columns - QUESTION.length - 2);
+    const question = fitQuestion(drawnText(questionOf(prompt), state.look.ascii), state.columns);
+    const width = textWidth(question);
+    const room = Math.max(8, state.columns - width - 2);
     const seen = seenPart(drawnText(prompt.line.text, state.look.ascii), prompt.line.caret, room);
-    return { row: rowOf(span(QUESTION, "strong"), span(seen.text)), caretColumn: QUESTION.length + seen.at };
+    return { row: rowOf(span(question, "strong"), span(seen.text)), caretColumn: width + seen.at };
   }
   if (notice === null) return { row: focusedRefusal(state), caretColumn: null };
   const mark = notice.tone === "bad" || notice.tone === "warn" ? "! " : "";
