@@ -1,19 +1,22 @@
 // The screen of measured units: the file in a field, the bank face before and after placing, the gaps against the floor of the meter.
+
 import { drawBar } from "../bar.ts";
 import { shownBank } from "../pick.ts";
 import { EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { drawnText } from "../text.ts";
-import { type Face, type FaceRoom, faceRows, gapBar, offWords } from "../units/face.ts";
+import { type Face, offWords } from "../units/face.ts";
 import type { Placed } from "../units/state.ts";
 import { bankHead, noBank } from "./bank.ts";
-import { RULE, sideBySide } from "./beside.ts";
 import { seenPart } from "./brief.ts";
 import { type Page, type Room, scrolled } from "./page.ts";
+import { faces, gapRow, proofRows } from "./unitsFigures.ts";
 import { paragraph } from "./words.ts";
 
 const PATH_LABEL = "Measured units: ";
 const SAVE_LABEL = "Save the list as: ";
+const ABOUT_FILE =
+  "The file is a table in CSV with the headings serial and capacitance [uF], and where known leakage [uA], esr [mohm], lot, part, group. Each unit then goes where the voltages come out most equal.";
 const PHASES = {
   first: "first placing",
   exchange: "exchanging units",
@@ -31,11 +34,12 @@ function field(state: State, columns: number): Field {
   const { typing, path, save, replace, lot } = state.units;
   if (replace) return { row: rowOf(span(`! Replace the file that is there? ${save.text}`, "warn")), caret: null };
   if (typing === null) {
-    const words =
-      lot === null
-        ? span("m names a file: CSV with the headings serial and capacitance [uF], and where known leakage, esr, lot.")
-        : span(`${lot.path}, ${lot.units.length} units${lot.faults.length > 0 ? `, ${lot.faults.length} faults` : ""}`);
-    return { row: rowOf(span(lot === null ? "" : PATH_LABEL, "strong"), words), caret: null };
+    if (lot === null) return { row: rowOf(span("No units were read yet. m names their file.", "strong")), caret: null };
+    const lost = lot.faults.length > 0 ? `, ${lot.faults.length} rows lost` : "";
+    return {
+      row: rowOf(span(PATH_LABEL, "strong"), span(`${lot.path}, ${lot.units.length} units${lost}`)),
+      caret: null,
+    };
   }
   const label = typing === "path" ? PATH_LABEL : SAVE_LABEL;
   const line = typing === "path" ? path : save;
@@ -43,9 +47,6 @@ function field(state: State, columns: number): Field {
   const seen = seenPart(drawnText(line.text, state.look.ascii), line.caret, room);
   return { row: rowOf(span(label, "strong"), span(seen.text)), caret: label.length + seen.at };
 }
-
-/** What is drawn in: the columns and the look of the screen. */
-type Look = Pick<State, "look">;
 
 const refusalRows = (state: State, columns: number): readonly Row[] =>
   state.units.refusals
@@ -58,38 +59,6 @@ const refusalRows = (state: State, columns: number): readonly Row[] =>
       ),
     );
 
-/** How sure the placing is, and what it cannot tell. */
-function proofRows({ placing, stopped }: Placed, columns: number): readonly Row[] {
-  const { charging, holding, floor } = placing;
-  const proof =
-    charging.proof === "optimal"
-      ? "proven optimal"
-      : `within ${offWords(charging.certified).slice(1)} of the best possible, by the bound of ${charging.boundKind}`;
-  const hold =
-    holding === null
-      ? "Holding is not assessed: leakage was not measured on every unit."
-      : `Holding ${offWords(holding.gap)} over even, by leakage.`;
-  const { findings } = placing;
-  return [
-    ...paragraph(
-      `Charging ${offWords(charging.gap)} over even, ${proof}; the meter tells nothing below ${offWords(floor).slice(1)}. ${hold}`,
-      columns,
-    ),
-    ...(stopped ? paragraph("Stopped before its end: more may be had.", columns, "warn") : []),
-    ...findings
-      .filter(({ verdict }) => verdict === "warn" || verdict === "fail")
-      .flatMap(({ note, verdict }) => paragraph(`${verdict}: ${note}`, columns, verdict === "fail" ? "bad" : "warn")),
-  ];
-}
-
-/** A gap drawn on decades; the mark is the floor. */
-const gapRow = (name: string, gap: number, floor: number, room: FaceRoom): Row =>
-  rowOf(
-    span(name.padEnd(11), "quiet"),
-    span(gapBar(gap, floor, { ...room, columns: Math.max(8, Math.min(48, room.columns - 24)) })),
-    span(offWords(gap).slice(1).padStart(12)),
-  );
-
 export function unitsPage(state: State, room: Room): Page {
   const bank = shownBank(state);
   if (bank === null) return noBank(state, room);
@@ -101,6 +70,7 @@ export function unitsPage(state: State, room: Room): Page {
   const caret = typed.caret === null ? null : { row: head.length - 1, column: typed.caret };
   const rows: Row[] = [...refusalRows(state, columns)];
   const { lot, before, running, placed } = units;
+  if (lot === null) rows.push(...paragraph(ABOUT_FILE, columns, "quiet"));
   if (lot !== null && before !== null) {
     const [count, size] = bank.ties === "cross-tied" ? [bank.series, bank.parallel] : [bank.parallel, bank.series];
     const same = ({ part, series, parallel, ties }: Placed["bank"]): boolean =>
@@ -136,7 +106,7 @@ export function unitsPage(state: State, room: Room): Page {
             "quiet",
           ),
         );
-        rows.push(...proofRows(placed, columns));
+        rows.push(...proofRows(placed, bank, columns));
       }
       const after = placed?.placing.groups ?? running?.groups ?? [];
       rows.push(EMPTY_ROW, ...faces(face(before.groups), face(after), { columns, look, done: placed !== null }));
@@ -151,21 +121,4 @@ export function unitsPage(state: State, room: Room): Page {
   }
   const page = scrolled(state, "units", head, rows, room);
   return { ...page, caret };
-}
-
-/** Before and after side by side where there is room, else one below the other, the later first. */
-function faces(
-  before: Face,
-  after: Face,
-  { columns, look, done }: Look & { readonly columns: number; readonly done: boolean },
-): readonly Row[] {
-  const titled = (name: string, face: Face, width: number): readonly Row[] => [
-    rowOf(span(name, "strong")),
-    ...faceRows(face, { columns: width, ascii: look.ascii }),
-  ];
-  const name = done ? "Placed" : "So far";
-  const half = Math.floor((columns - RULE) / 2);
-  if (after.size + 15 <= half)
-    return sideBySide(titled("As listed", before, half), titled(name, after, half), half, { look });
-  return [...titled(name, after, columns), EMPTY_ROW, ...titled("As listed", before, columns)];
 }
