@@ -1,6 +1,11 @@
 // Saves a text in a file; a file that is there is only replaced when that was said.
 import type { Files } from "../cli/index.ts";
-import type { SaveAnswer } from "./ports.ts";
+
+/** How saving ended: done, the file is there already, or why not in plain words. */
+export type SaveAnswer =
+  | { readonly kind: "saved"; readonly path: string }
+  | { readonly kind: "exists"; readonly path: string }
+  | { readonly kind: "trouble"; readonly words: string };
 
 export function saveText(files: Pick<Files, "write">, text: string, path: string, replace: boolean): SaveAnswer {
   const written = files.write(path, text, replace);

@@ -1,8 +1,9 @@
 // What the screen of measured units holds, and the messages and effects of its own.
+import type { Layout } from "../../bank/index.ts";
 import type { MeasuredUnit, Placing, SearchStep } from "../../place/index.ts";
 import type { Read, Refusal } from "../../quantity/index.ts";
 import { type Line, type LineEdit, lineOf } from "../line.ts";
-import type { Arrangement, SaveAnswer } from "../ports.ts";
+import type { SaveAnswer } from "../saveText.ts";
 
 /** A lot as read from its file. */
 export interface UnitsLot {
@@ -14,7 +15,7 @@ export interface UnitsLot {
 
 /** The places filled in the order of the file: what the bank would be without placing. */
 export interface Listed {
-  readonly bank: Arrangement;
+  readonly bank: Layout;
   readonly groups: readonly (readonly string[])[];
   readonly gap: number;
 }
@@ -29,7 +30,7 @@ export interface Running {
 }
 
 export interface Placed {
-  readonly bank: Arrangement;
+  readonly bank: Layout;
   readonly placing: Placing;
   /** The user stopped it: the best by then. */
   readonly stopped: boolean;
@@ -59,7 +60,7 @@ export type UnitsMessage =
   | { readonly type: "read"; readonly path: string; readonly read: Read<UnitsLot> }
   | { readonly type: "begun"; readonly before: Listed; readonly running: Running }
   | { readonly type: "progress"; readonly running: Running }
-  | { readonly type: "placed"; readonly bank: Arrangement; readonly read: Read<Placing>; readonly stopped: boolean }
+  | { readonly type: "placed"; readonly bank: Layout; readonly read: Read<Placing>; readonly stopped: boolean }
   | { readonly type: "listed"; readonly answer: SaveAnswer };
 
 export type UnitsEffect =

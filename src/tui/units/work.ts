@@ -4,8 +4,7 @@ import { type Files, placeCsv, readMeasuredInput } from "../../cli/index.ts";
 import { gapOfGroups, type PlaceRequest, placing, positionList } from "../../place/index.ts";
 import { accepted, type Read } from "../../quantity/index.ts";
 import type { LayoutResult } from "../../search/index.ts";
-import type { SaveAnswer } from "../ports.ts";
-import { saveText } from "../saveText.ts";
+import { type SaveAnswer, saveText } from "../saveText.ts";
 import type { Search } from "./placer.ts";
 import type { Listed, Placed, UnitsLot } from "./state.ts";
 
