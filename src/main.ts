@@ -10,6 +10,7 @@ import { filesOn, writeNow } from "./cli/files.ts";
 import { readJson } from "./cli/jsonText.ts";
 import { outputTrouble } from "./cli/output.ts";
 import { type Ports, textWidth } from "./cli/ports.ts";
+import { openThread } from "./cli/thread.ts";
 import { VERSION } from "./cli/version.ts";
 import type { Read, Refusal } from "./quantity/index.ts";
 import { type ScreenFlags, type StockFacts, screenFlags, startScreens } from "./tui/index.ts";
@@ -74,6 +75,7 @@ async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
     note: isDemo ? "invented parts" : "",
   };
   let lost: readonly Refusal[] = [];
+  const entry = ports.background?.entry;
   screensAreUp = true;
   const status = await startScreens({
     read: async () => {
@@ -90,6 +92,7 @@ async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
         for (const stop of stops) stop();
       };
     },
+    thread: entry === undefined ? undefined : () => openThread(entry),
     stock,
     brief: brief.value,
     briefFirst: flags.brief !== null,

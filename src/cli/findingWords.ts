@@ -25,6 +25,8 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   bleed: { title: "time to touch-safe by bleeding" },
   "pulse.unit.current": { title: "peak current of a unit" },
   "pulse.unit.slew": { title: "slew of a unit" },
+  "pulse.unit.action": { title: "action through a unit" },
+  "pulse.fault.action": { title: "action through a sound unit, fault" },
   "pulse.unit.reversal": { title: "reversal of a unit" },
   "pulse.unit.rms": { title: "rms current of a unit" },
   "pulse.unit.rise": { title: "temperature rise of a unit, K" },

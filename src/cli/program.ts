@@ -9,7 +9,6 @@ import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
 import type { PulseFlags } from "./commands/pulse.ts";
-import { treeOf } from "./commandTree.ts";
 import type { CommissionFlags } from "./commissionFlags.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
@@ -85,6 +84,7 @@ export function build(ports: Ports, done: Done): Command {
     .option("--brief-schema", "print the JSON Schema of the brief and stop")
     .addHelpText("after", HELP.plan)
     .option("--blend", "also find the cheapest mix of whole strings of different parts, with its proof")
+    .option("--fuses <file>", "fuse catalogue, CSV: a fuse for each unit, the cheapest that does, counted in the cost")
     .option("--explain", "with --blend: the proof in words, and what prices and limits are worth")
     .option("--max-types <count>", "with --blend: most parts in one bank; 4 unless told")
     .option("--within <fraction>", 'with --blend: other kinds of blend up to so much dearer, "2 %"')
@@ -217,6 +217,7 @@ export function build(ports: Ports, done: Done): Command {
     .addHelpText("after", HELP.completion)
     .action(async (shell: string) => {
       const { completionCommand } = await import("./commands/completion.ts");
+      const { treeOf } = await import("./commandTree.ts");
       done(completionCommand(shell, treeOf(program), ports));
     });
   program
@@ -225,6 +226,7 @@ export function build(ports: Ports, done: Done): Command {
     .addHelpText("after", HELP.manual)
     .action(async () => {
       const { manualCommand } = await import("./commands/manual.ts");
+      const { treeOf } = await import("./commandTree.ts");
       done(manualCommand(treeOf(program), ports));
     });
   return program;

@@ -1,5 +1,6 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
+export type { Band, BandRow } from "./band.ts";
 export type {
   BlendPlan,
   BlendResult,
@@ -27,6 +28,7 @@ export { type LampReport, lampReport } from "./lampReport.ts";
 export type { LifeReport } from "./life.ts";
 export { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 export { type PlanInput, plan } from "./plan.ts";
+export { isProtected, sectionCount } from "./protection.ts";
 export { RANKINGS, type Ranking } from "./rank.ts";
 export type {
   Balance,
@@ -37,6 +39,7 @@ export type {
   Improvement,
   LayoutResult,
   PlanResult,
+  Protection,
   RefusedPart,
   Shares,
   Span,

@@ -2,11 +2,11 @@
 
 import { FIT } from "../bank/index.ts";
 import type { Capacitor } from "../catalog/index.ts";
-import { atLeast, atMost, type Bound, unitShort, worstShare } from "../pulse/index.ts";
+import { atLeast, atMost, type Bound, unitShort } from "../pulse/index.ts";
 import type { Finding } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { chargeFor, firingOf } from "./charging.ts";
-import { faultUnitOf } from "./faults.ts";
+import { faultUnitOf, guardsOf } from "./faults.ts";
 import { lifeOf } from "./life.ts";
 import { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 import { type Shape, type ShotCorner, shotCorner } from "./shotCorner.ts";
@@ -58,6 +58,7 @@ function faultClaim(limit: number, { unit, worst, ...shape }: LimitCase, brief: 
     ...shape,
     unit: faultUnitOf(unit),
     voltage,
+    ...guardsOf(brief),
     worstCharging: known ? worst : voltage,
     worstHolding: null,
   };
@@ -69,7 +70,7 @@ function faultClaim(limit: number, { unit, worst, ...shape }: LimitCase, brief: 
 function heatOf(brief: Brief, unit: Capacitor, high: ShotCorner) {
   const charge = chargeFor(brief, { capacitance: high.bank.capacitance, left: high.left });
   if (!charge.ok || charge.value === null) return null;
-  const shot = { action: high.action, seconds: 0, share: worstShare(high.bank) };
+  const shot = { action: high.action, seconds: 0, share: high.unit.actionShare };
   return firingOf(brief, high.bank, unit, { charge: charge.value, shot }).heating;
 }
 

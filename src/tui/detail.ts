@@ -32,6 +32,8 @@ export const wantsSpread = (state: State): boolean =>
 export function wantedPiece(state: State): Piece | null {
   const { answer, screen } = state;
   if (answer?.kind !== "planned" || state.asked !== state.answered || shownBank(state) === null) return null;
+  // What was stopped is not begun again by itself.
+  if (state.stopped === state.asked) return null;
   const wanted: readonly Piece[] =
     screen === "sharing"
       ? ["rest", "margin", ...(wantsSpread(state) ? (["spread"] as const) : [])]

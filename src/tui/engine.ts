@@ -3,14 +3,28 @@
 import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
 import type { FrontPoint } from "./axes.ts";
 import { briefInput } from "./briefInput.ts";
-import type { EnginePort } from "./ports.ts";
+import type { EnginePort, PlanRequest } from "./ports.ts";
 import type { Answer, State } from "./state.ts";
 
 /** Beside the form only the first few are seen, and every key waits for them; the list itself is longer. */
-export const mostListed = (state: State): number => (state.screen === "brief" ? 50 : 200);
+export const mostListed = (state: Pick<State, "screen">): number => (state.screen === "brief" ? 50 : 200);
+
+/** What of a state the engine is asked: plain data, fit to be sent to a thread. */
+export type Question = Pick<State, "values" | "extra" | "rank" | "frontOnly" | "chosen" | "pins" | "screen" | "map">;
+
+export const questionOf = ({ values, extra, rank, frontOnly, chosen, pins, screen, map }: State): Question => ({
+  values,
+  extra,
+  rank,
+  frontOnly,
+  chosen,
+  pins,
+  screen,
+  map,
+});
 
 /** The whole front, on the map alone; with lives when an axis shows them. */
-function frontFor({ screen, map }: State, engine: EnginePort, brief: Brief, plan: PlanResult) {
+function frontFor({ screen, map }: Question, engine: EnginePort, brief: Brief, plan: PlanResult) {
   if (screen !== "map") return null;
   const lives = map.x === "life" || map.y === "life";
   return engine
@@ -18,11 +32,22 @@ function frontFor({ screen, map }: State, engine: EnginePort, brief: Brief, plan
     .map((layout): FrontPoint => ({ layout, life: lives ? engine.life(brief, layout) : null }));
 }
 
-export function answerFor(state: State, engine: EnginePort, quick: boolean): Answer {
+export function answerFor(
+  state: Question,
+  engine: EnginePort,
+  quick: boolean,
+  progress?: PlanRequest["progress"],
+): Answer {
   const read = engine.readBrief(briefInput(state));
   if (!read.ok) return { kind: "refused", refusals: read.refusals };
   const brief = read.value;
-  const planned = engine.plan(brief, { rank: state.rank, most: mostListed(state), frontOnly: state.frontOnly, quick });
+  const planned = engine.plan(brief, {
+    rank: state.rank,
+    most: mostListed(state),
+    frontOnly: state.frontOnly,
+    quick,
+    progress,
+  });
   if (!planned.ok) return { kind: "refused", refusals: planned.refusals };
   const plan = planned.value;
   const assessed = (arrangement: State["chosen"]): LayoutResult | null =>

@@ -31,6 +31,7 @@ const moves: live.Live = (state) =>
 
 /** What lies on top comes first: the first live row wins. */
 const ON_TOP: readonly Short[] = [
+  [["escape"], "Esc", "stop the work", { type: "stop" }, live.works, 0],
   [["enter"], "Enter", "save", { type: "confirm" }, live.asksName, 1],
   [["escape"], "Esc", "do not save", { type: "cancel" }, live.asksName, 2],
   [["y"], "y", "replace the file", { type: "confirm" }, live.asksReplace, 1],
@@ -168,6 +169,7 @@ const EVERYWHERE: readonly Short[] = [
   [["?"], "", "help", { type: "help" }, live.isFree],
   [["ctrl+q", "ctrl+c"], "Ctrl-Q", "save and quit", { type: "quit" }, live.always, 9],
   [["q"], "", "quit", { type: "quit" }, live.isFree],
+  [["ctrl+r"], "Ctrl-R", "plan again", { type: "again" }, live.isOpen, null],
   [["ctrl+z"], "Ctrl-Z", "suspend", { type: "suspend" }, live.always, null],
   [["ctrl+l"], "Ctrl-L", "draw again", { type: "redraw" }, live.always, null],
 ];

@@ -41,6 +41,7 @@ export const types: Live = (state) => asksName(state) || typesUnits(state) || (o
 export const isFree: Live = (state) => isOpen(state) && state.screen !== "brief" && !onUnitsLine(state);
 
 export const hasLayouts: Live = (state) => (planOf(state)?.layouts.length ?? 0) > 0;
+export const works: Live = (state) => isOpen(state) && state.work !== null;
 export const hasParts: Live = (state) => !state.showFaults && (state.catalogue?.parts.length ?? 0) > 0;
 export const hasTrail: Live = (state) => state.trail.length > 0;
 export const hasPins: Live = (state) => state.pins.length > 0;

@@ -1,6 +1,6 @@
 // What the screens need from outside: the engine, the files, the clock and the terminal, handed in by main.
 import type { Layout } from "../bank/index.ts";
-import type { Capacitor, Overrides } from "../catalog/index.ts";
+import type { Capacitor, Overrides, ResistorFamily } from "../catalog/index.ts";
 import type { clampWords, rateBlocks, refusalWords, Source, titleOf, withoutBalanceWords } from "../cli/index.ts";
 import type { Bill } from "../order/index.ts";
 import type { Read } from "../quantity/index.ts";
@@ -35,6 +35,8 @@ export interface PlanRequest {
   readonly frontOnly: boolean;
   /** Leave out the search for least changes: asked at every key, with the whole answer asked for when the keys rest. */
   readonly quick: boolean;
+  /** Called on the way, parts done of all parts. */
+  readonly progress?: ((done: number, total: number) => void) | undefined;
 }
 
 /** The states at rest. Ratings and tolerance are those of the unit; null is unknown. */
@@ -138,6 +140,8 @@ export interface Workshop {
   readonly words: SharedWords;
   readonly units: UnitsPort;
   readonly catalogue: CatalogueFacts;
+  /** What the engine was made of, for another one in a thread. */
+  readonly families: readonly ResistorFamily[];
   /** What is set by hand for all parts, as it was read. */
   readonly overrides: Overrides;
   /** Writes what is set by hand beside the catalogues, never into them. */
@@ -146,11 +150,23 @@ export interface Workshop {
   readonly exportBill: (bill: Bill, path: string, replace: boolean) => SaveAnswer;
 }
 
+/** A thread that can be talked to in plain data. */
+export interface ThreadPort {
+  readonly post: (ask: object) => void;
+  readonly onReply: (take: (reply: unknown) => void) => void;
+  /** It could not start, or has failed. */
+  readonly onFail: (failed: () => void) => void;
+  /** Ends it at once, whatever it does. */
+  readonly end: () => void;
+}
+
 export interface ScreenPorts {
   /** Reads the catalogues and loads the engine; refused, the screens end and the refusals are for the caller to tell. */
   readonly open: () => Promise<Read<Workshop>>;
   /** Calls back when a catalogue has changed on disk, until the function that it gives is called. */
   readonly watch: (changed: () => void) => () => void;
+  /** Opens a thread for long work; absent: all is done in this one. */
+  readonly thread?: (() => ThreadPort) | undefined;
   /** What is known of the catalogues before they are read. */
   readonly stock: StockFacts;
   /** The brief to start with when none was saved: text by key. */

@@ -1,10 +1,11 @@
 // Joins state, keys, engine, painter and terminal, and runs the screens until they end: the one owner of the end.
-import type { Overrides } from "../catalog/index.ts";
+import type { Capacitor, Overrides, ResistorFamily } from "../catalog/index.ts";
 import { makeAsker } from "./asker.ts";
 import { makeAutosave } from "./autosave.ts";
 import { makeDetailer } from "./detailer.ts";
 import { openInput } from "./input.ts";
 import { messageFor } from "./keys.ts";
+import { makeLongWork } from "./longWork.ts";
 import { PaintStream } from "./paint.ts";
 import type { EnginePort, ScreenPorts, Workshop } from "./ports.ts";
 import { startState } from "./restore.ts";
@@ -38,6 +39,8 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
   return new Promise((resolve, reject) => {
     const begun = ask(startState(ports)).state;
     let workshop: Workshop | null = null;
+    let threadStock: { readonly parts: readonly Capacitor[]; readonly families: readonly ResistorFamily[] } | null =
+      null;
     const engine = (): EnginePort | null => workshop?.engine ?? null;
     const paint = new PaintStream(begun, (text) => stdout.write(text));
     let mounted: Mounted | null = null;
@@ -72,9 +75,13 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       ports.open().then((read) => {
         opening = false;
         if (over) return;
-        if (read.ok) workshop = read.value;
-        else if (workshop === null) return session.end(WRONG_USE);
-        else return say("bad", `${ports.stock.name} cannot be read now; what was read before holds.`);
+        if (read.ok) {
+          workshop = read.value;
+          threadStock = { parts: workshop.catalogue.parts, families: workshop.families };
+        }
+        if (!read.ok && workshop === null) return session.end(WRONG_USE);
+        if (!read.ok || workshop === null)
+          return say("bad", `${ports.stock.name} cannot be read now; what was read before holds.`);
         const { stock, words, catalogue, overrides } = workshop;
         store.send({ type: "opened", stock, words, catalogue, overrides });
         if (again) openWorkshop();
@@ -96,7 +103,12 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       openWorkshop();
     };
     const run = (effect: Effect, send: (message: Message) => void): void => {
-      if (effect.type === "ask") asker.ask();
+      if (effect.type === "ask" || effect.type === "stop") {
+        longWork.stop();
+        detailer.stopped();
+      }
+      if (effect.type === "stop") asker.stop();
+      else if (effect.type === "ask") asker.ask();
       else if (effect.type === "quit") session.end(0);
       else if (effect.type === "suspend") session.suspend();
       else if (effect.type === "redraw") paint.redraw();
@@ -115,9 +127,17 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         autosave.changed();
       },
     });
-    const units = makeUnitsRunner({ state: store.state, send: store.send, now: () => performance.now() });
-    const asker = makeAsker({ engine, state: store.state, send: store.send, now: () => performance.now() });
-    const detailer = makeDetailer({ engine, state: store.state, send: store.send });
+    const now = (): number => performance.now();
+    const units = makeUnitsRunner({ state: store.state, send: store.send, now });
+    const longWork = makeLongWork({
+      open: ports.thread ?? null,
+      // One object as long as the workshop is the same, so that a thread on other parts is known by it.
+      stock: () => threadStock,
+      send: store.send,
+      now,
+    });
+    const asker = makeAsker({ engine, state: store.state, send: store.send, now, longWork });
+    const detailer = makeDetailer({ engine, state: store.state, send: store.send, longWork });
     const autosave = makeAutosave({
       state: store.state,
       save: ports.saveSession,

@@ -11,6 +11,8 @@ export interface StartOptions {
   readonly read: () => Promise<Read<ReadStock>>;
   /** Calls back when one of them changes on disk. */
   readonly watch: ScreenPorts["watch"];
+  /** Opens a thread for long work; absent: none. */
+  readonly thread?: ScreenPorts["thread"];
   /** What is known of them before. */
   readonly stock: StockFacts;
   /** A brief as parsed from JSON; what is no object counts as none. */
@@ -37,6 +39,7 @@ export function portsOn(options: StartOptions): ScreenPorts {
       return read.ok ? accepted(workshopOn(read.value, files)) : read;
     },
     watch: options.watch,
+    thread: options.thread,
     stock,
     loadSession: () => {
       const read = sessionFile === null ? null : files.read(sessionFile);

@@ -71,6 +71,14 @@ interface ValuePrompt {
 
 export type Prompt = FilePrompt | ValuePrompt;
 
+/** Long work under way. */
+export interface LongJob {
+  readonly words: string;
+  /** Part of it that is done, 0 to 1; null: not known. */
+  readonly done: number | null;
+  readonly secondsLeft: number | null;
+}
+
 export interface State extends Work {
   readonly columns: number;
   readonly rows: number;
@@ -103,6 +111,9 @@ export interface State extends Work {
   /** Number of the last question put to the engine, and of the last one answered. */
   readonly asked: number;
   readonly answered: number;
+  readonly work: LongJob | null;
+  /** The question whose answer was stopped; -1 for none. */
+  readonly stopped: number;
   /** Id of the layout under the cursor; the place in the list is derived from it. */
   readonly selected: string | null;
   /** Column under the cursor on the comparison. */
@@ -160,6 +171,9 @@ export type Message =
       readonly catalogue: CatalogueFacts;
       readonly overrides: Overrides;
     }
+  | { readonly type: "work"; readonly work: LongJob | null }
+  | { readonly type: "stop" }
+  | { readonly type: "again" }
   | { readonly type: "value" }
   | { readonly type: "faults" }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
@@ -171,6 +185,7 @@ export type Effect =
   | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
   | { readonly type: "units"; readonly effect: UnitsEffect }
   | { readonly type: "overrides"; readonly overrides: Overrides }
+  | { readonly type: "stop" }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };
@@ -220,6 +235,8 @@ export const initialState = (start: Start): State => ({
   answer: null,
   asked: 0,
   answered: 0,
+  work: null,
+  stopped: -1,
   selected: null,
   pins: [],
   column: 0,

@@ -18,7 +18,7 @@ import {
   valueText,
   withoutBalanceWords,
 } from "../cli/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import { saveBill } from "./billFile.ts";
 import { catalogEngine } from "./catalogEngine.ts";
 import type { PartValue, SaveAnswer, SharedWords, StockFacts, Workshop } from "./ports.ts";
@@ -32,7 +32,7 @@ export interface ReadStock {
   readonly sources: readonly Source[];
 }
 
-const majorOf = (minor: number, currency: string | undefined): number => minor / 10 ** minorDigits(currency ?? "EUR");
+const majorOf = (minor: number, currency: string | undefined): number => minor / tenTo(minorDigits(currency ?? "EUR"));
 
 /** "10: 3.90; 100: 3.10", as a catalogue has them. */
 const breaksText = ({ priceBreaks = [], currency }: Capacitor): string =>
@@ -91,7 +91,8 @@ function saveAll({ parts, sources }: ReadStock, files: Pick<Files, "write">, ove
 }
 
 export const workshopOn = (read: ReadStock, files: Pick<Files, "read" | "write">): Workshop => ({
-  engine: catalogEngine(read),
+  engine: catalogEngine({ ...read, files }),
+  families: read.families,
   stock: read.stock,
   units: unitsOn(read.parts, files),
   catalogue: { parts: read.parts, sources: read.sources },

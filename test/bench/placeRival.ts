@@ -3,7 +3,7 @@ import { place } from "../../src/place/place.ts";
 import { solveWithHighs } from "../../src/search/highs.ts";
 import { stagesGap } from "../place/brute.ts";
 import { capacitances, KINDS } from "../place/lots.ts";
-import type { BenchRow } from "./place.ts";
+import { atMost, type BenchRow } from "./row.ts";
 
 type Programme = Parameters<typeof solveWithHighs>[0];
 
@@ -48,7 +48,6 @@ async function rivalGap(values: readonly number[], stages: number, seconds: numb
 }
 
 const median = (list: readonly number[]): number => [...list].sort((a, b) => a - b)[list.length >> 1] ?? Number.NaN;
-const ppm = (gap: number): string => (gap * 1e6).toPrecision(3);
 
 /** One lot of each kind for each shape: ours timed, then the rival with a hundred times that. */
 export async function benchPlaceRival(seed = 901): Promise<BenchRow[]> {
@@ -62,7 +61,7 @@ export async function benchPlaceRival(seed = 901): Promise<BenchRow[]> {
   await solveWithHighs(stagesProgramme([1, 2, 3, 4], 2), { seconds: 5, gap: 1e-9 });
   const rows: BenchRow[] = [];
   for (const [series, parallel, count] of shapes) {
-    const race = { ours: [] as number[], rival: [] as number[], ms: [] as number[], none: 0, beaten: 0 };
+    const race = { ours: [] as number[], rival: [] as number[], none: 0, beaten: 0 };
     for (const kind of KINDS) {
       const lot = capacitances(kind, count, seed);
       const units = lot.map((capacitance, i) => ({ serial: String(i), capacitance }));
@@ -74,18 +73,20 @@ export async function benchPlaceRival(seed = 901): Promise<BenchRow[]> {
       if (!read.ok) throw new Error(read.refusals[0]!.code);
       const rival = await rivalGap(lot, series, (TIMES * ms) / 1000);
       race.ours.push(read.value.charging.gap);
-      race.ms.push(ms);
       if (rival === null) race.none++;
       else race.rival.push(rival);
       if (rival !== null && rival < read.value.charging.gap - 1e-12) race.beaten++;
     }
-    const theirs =
-      race.rival.length === 0 ? "" : `, median of its ${race.rival.length} placings ${ppm(median(race.rival))} ppm`;
+    const what = `${count} units, mixed-integer solver given ${TIMES} times the time`;
     rows.push({
-      what: `${count} units, mixed-integer solver given ${TIMES} times the time`,
-      value: `ours median ${ppm(median(race.ours))} ppm in ${median(race.ms).toFixed(1)} ms; it found none in ${race.none} of ${KINDS.length}${theirs}; better than ours in ${race.beaten}`,
-      promise: "better in none",
+      what: `${what}: placings better than ours, of ${KINDS.length}`,
+      value: race.beaten,
+      promise: atMost(0),
     });
+    rows.push({ what: `${what}: placings that it found none for`, value: race.none, promise: null });
+    const best = race.rival.length === 0 ? Number.NaN : median(race.rival) * 1e6;
+    rows.push({ what: `${what}: its gap, median`, value: best, unit: "ppm", promise: null });
+    rows.push({ what: `${count} units: our gap, median`, value: median(race.ours) * 1e6, unit: "ppm", promise: null });
   }
   return rows;
 }

@@ -6,7 +6,7 @@ test("LINE_KINDS: every kind of line comes from some bank, and no bank gives ano
   const seen = new Set<string>();
   for (const ties of ["cross-tied", "strings"] as const)
     for (const kind of ["choose", "none"] as const) {
-      const brief = briefOf({ spares: 1, isolating: "0.1 ohm" });
+      const brief = briefOf({ spares: 1, isolating: "0.1 ohm", section: { inductance: "1 uH" } });
       const layout = bankOf({ brief, layout: { part: "x", series: 8, parallel: 2, ties }, balance: { kind } });
       const bill = billOf({ layout, unit: UNIT, families: FAMILIES, brief, currency: "EUR", cautions: [] });
       for (const line of bill.lines) seen.add(line.line);

@@ -4,6 +4,7 @@ import { makeAsker } from "../../src/tui/asker.ts";
 import type { EnginePort } from "../../src/tui/ports.ts";
 import type { Message, State } from "../../src/tui/state.ts";
 import { engine, stateWith } from "../support/stock.ts";
+import { NO_THREAD } from "../support/threads.ts";
 
 beforeEach(() => void vi.useFakeTimers());
 afterEach(() => void vi.useRealTimers());
@@ -23,6 +24,7 @@ function open(took: number, values?: State["values"]) {
   };
   const asker = makeAsker({
     engine: () => counted,
+    longWork: NO_THREAD,
     state: () => state,
     send: (message) => answers.push(message),
     now: () => clock,

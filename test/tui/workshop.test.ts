@@ -1,14 +1,13 @@
 // What comes after the first frame, made of parts that were read.
 import { expect, test } from "vitest";
 import { DEFAULT_FAMILY } from "../../src/catalog/index.ts";
-import { refused } from "../../src/quantity/index.ts";
 import { SHARED_WORDS, workshopOn } from "../../src/tui/workshop.ts";
 import { BRIEF, CATALOGUE_FACTS, parts, STOCK } from "../support/stock.ts";
 
 test("workshopOn(read, files): an engine that plans, the words of the commands, an order saved where it was said", () => {
   const written = new Map<string, string>();
   const files = {
-    read: (path: string) => refused({ code: "no-such-file", place: { file: path }, read: "", want: "" }),
+    read: () => ({ ok: false as const, refusals: [] }),
     write: (path: string, text: string) => {
       written.set(path, text);
       return { ok: true as const, value: path };

@@ -78,6 +78,16 @@ function opened(state: State, { stock, words, catalogue, overrides }: Message & 
   });
 }
 
+/** Stops long work. What is shown stays, and is said to be of another brief where it is. */
+function stopWork(state: State): Change {
+  const isPlan = state.asked !== state.answered;
+  const text = isPlan
+    ? "Stopped: what is listed is of the brief before. Ctrl-R plans this one."
+    : "Stopped; Ctrl-R begins it again.";
+  const next: State = { ...state, work: null, stopped: state.asked, notice: { tone: "warn", text } };
+  return { state: next, effects: [{ type: "stop" }] };
+}
+
 function changed(state: State, message: Message): Change {
   switch (message.type) {
     case "resized":
@@ -147,6 +157,12 @@ function changed(state: State, message: Message): Change {
       return still(withTried({ ...state, answer: message.answer, answered: message.asked, slow: message.slow }));
     case "opened":
       return opened(state, message);
+    case "work":
+      return still({ ...state, work: message.work });
+    case "stop":
+      return stopWork(state);
+    case "again":
+      return ask({ ...state, notice: null });
     case "value":
       return askValue(state);
     case "faults":

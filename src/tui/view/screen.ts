@@ -73,7 +73,7 @@ function briefRow(state: State): Row {
     const field = FIELDS.find((candidate) => candidate.key === key);
     return field === undefined ? "" : shownValue(field, valueIn(answer.brief, field));
   };
-  const busy = state.asked === state.answered ? "" : " ...";
+  const busy = state.asked === state.answered ? "" : state.stopped === state.asked ? " (of the brief before)" : " ...";
   return {
     left: [
       span(`${value("energy")} at ${value("voltage")}, fall ${value("ripple")}, ${value("basis")}${busy}`, "accent"),

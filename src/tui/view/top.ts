@@ -1,7 +1,9 @@
 // The top of every screen: the names of the screens with their keys, and the rule under the brief, which tells the value in hand.
+
+import { drawBar } from "../bar.ts";
 import { fieldAt } from "../fields.ts";
 import { type Row, type Span, span } from "../row.ts";
-import { SCREEN_KEYS, SCREENS, type ScreenName, type State } from "../state.ts";
+import { type LongJob, SCREEN_KEYS, SCREENS, type ScreenName, type State } from "../state.ts";
 import { drawnText } from "../text.ts";
 import { textWidth } from "../width.ts";
 
@@ -33,9 +35,32 @@ export function tabsRow(state: State): Row {
 /** What can be said of the keys that step, the fullest first. */
 const STEPS: readonly string[] = ["   - + step   < > leap   [ ] other", "   - + step  [ ] other", ""];
 
+/** Seconds as one would say them: no more exact than they are. */
+function leftWords(seconds: number | null): string {
+  if (seconds === null) return "";
+  if (seconds < 1.5) return ", about a second left";
+  return seconds < 90 ? `, about ${Math.ceil(seconds)} s left` : `, about ${Math.ceil(seconds / 60)} min left`;
+}
+
+/** Long work on the rule: a bar, how much is done, how long it still takes, and how to stop it. */
+function workRow({ columns, look }: State, { words, done, secondsLeft }: LongJob): Row {
+  const cells = 12;
+  const percent = done === null ? "" : ` ${Math.floor(done * 100)} %`;
+  const bar = done === null ? "" : ` ${drawBar(done, { columns: cells, full: 1, limit: null, ascii: look.ascii })}`;
+  const text = ` ${words}${bar}${percent}${leftWords(secondsLeft)}; Esc stops it `;
+  return {
+    left: [
+      span("──", "quiet"),
+      span(text, "strong"),
+      span("─".repeat(Math.max(0, columns - text.length - 2)), "quiet"),
+    ],
+  };
+}
+
 /** The rule between the top and the body. On the form the value in hand is the one under the caret. */
 export function ruleRow(state: State): Row {
   const rule = (cells: number): Span => span("─".repeat(Math.max(0, cells)), "quiet");
+  if (state.work !== null) return workRow(state, state.work);
   if (state.screen === "brief" || state.help) return { left: [rule(state.columns)] };
   const field = fieldAt(state.field);
   const text = drawnText(state.values[field.key] ?? "", state.look.ascii);
