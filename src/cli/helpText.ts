@@ -53,6 +53,7 @@ them: for that the ESR and ESL of every part of a mix must be known, and the loa
 
 With a load, --max-peak-current, --max-reversal and the other limits on the shot are kept in the search: for each shape
 the least parallel count that keeps them all. A limit that cannot be judged, for want of a rating, refuses the part.
+--fuses, --isolating with its price and --section-inductance with its price put that protection into the cost that ranks.
 ${BRIEF}${STATUS}`,
   check: `
 Examples:
@@ -77,6 +78,8 @@ left out and every figure it bears on is called a bound. Without a bus, a load w
 (0 counts) stands for everything outside the bank. No energy and no fall need be asked here.
 A lamp with --lamp-width and --energy sets voltage and coil where they are not given; pulse then says how far the bank
 that can be built lands from that circuit. The lamp's datasheet comes first.
+With --bus-feed and the stretch of bus from unit to unit (--bus-pitch, or its measured steps) each unit's place on the
+bus counts: which one carries most, by how much, and what another feed would do.
 ${LAYOUT}${BRIEF}${STATUS}`,
   order: `
 Examples:
@@ -122,8 +125,10 @@ Examples:
   $ joulewright commission bank.json --readings readings.csv --unit-limit "324 V"
   $ joulewright commission bank.json --readings readings.csv --meter "0.2 %" --resolution "0.1 V" --json
   $ joulewright commission bank.json --readings readings.csv --next-voltage "1.6 kV" --next-hold "10 min"
+  $ joulewright commission bank.json --history log.csv --capacitance-lost "10 %" --esr-grown "100 %"
 SHEET is what place --json wrote. A row of readings is one reading: stage (cross-tied), or string and place, or serial.
-Exit status: 0 agrees; 1 differs, or stop; 2 wrong use or unreadable input; 70 a bug of ours.`,
+A row of a history is dated: shots (a counter) or fired (since the row before), and with a serial what was measured anew.
+Exit status: 0 agrees; 1 differs, stop, or a unit is due; 2 wrong use or unreadable input; 70 a bug of ours.`,
   parts: `
 Examples:
   $ joulewright parts mine.csv resistors.csv
