@@ -70,7 +70,7 @@ export function waysOf(type: StringType, most: number, place: Place, brief: Brie
     return [lazyOption(own, floor, () => costTable(type, most))];
   }
   const needed = Array.from({ length: most + 1 }, (_, x) => sendersOf(type, x, senders));
-  const sets = new Map(needed.slice(1).map((names) => [names.join("\n"), names]));
+  const sets = new Map(needed.slice(1).map((names) => [JSON.stringify(names), names]));
   return [...sets.values()].map((names) => {
     const may = (x: number): boolean => needed[x]!.every((name) => names.includes(name));
     const last = needed.findLastIndex((_, x) => x > 0 && may(x));

