@@ -58,6 +58,14 @@ export function busWords({ bus }: Brief): string | null {
 export const clampWords = ({ clamp }: Brief): string | null =>
   clamp === undefined ? null : joined(`drop ${show(clamp.drop, "voltage")}`, show(clamp.resistance, "resistance"));
 
+const each = (price: number | undefined): string | false => price !== undefined && `${price} each`;
+
+export const isolatingWords = ({ isolating, isolatingPrice }: Brief): string | null =>
+  isolating === undefined ? null : joined(show(isolating, "resistance"), each(isolatingPrice));
+
+export const sectionWords = ({ section }: Brief): string | null =>
+  section === undefined ? null : joined(show(section.inductance, "inductance"), each(section.price));
+
 export function chargerWords({ charger }: Brief): string | null {
   if (charger === undefined) return null;
   const { current, power, currentLimit, resistance, supply, highest } = charger;

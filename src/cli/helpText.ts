@@ -49,6 +49,7 @@ Examples:
 
 With a load, --max-peak-current, --max-reversal and the other limits on the shot are kept in the search: for each shape
 the least parallel count that keeps them all. A limit that cannot be judged, for want of a rating, refuses the part.
+--fuses, --isolating with its price and --section-inductance with its price put that protection into the cost that ranks.
 ${BRIEF}${STATUS}`,
   check: `
 Examples:
@@ -72,6 +73,8 @@ left out and every figure it bears on is called a bound. Without a bus, a load w
 (0 counts) stands for everything outside the bank. No energy and no fall need be asked here.
 A lamp with --lamp-width and --energy sets voltage and coil where they are not given; pulse then says how far the bank
 that can be built lands from that circuit. The lamp's datasheet comes first.
+With --bus-feed and the stretch of bus from unit to unit (--bus-pitch, or its measured steps) each unit's place on the
+bus counts: which one carries most, by how much, and what another feed would do.
 ${LAYOUT}${BRIEF}${STATUS}`,
   order: `
 Examples:

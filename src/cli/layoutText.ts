@@ -84,7 +84,10 @@ function protectionFacts({ protection = [], cost }: LayoutResult): readonly (rea
   const names = { fuse: "fuse", "isolating resistor": "isolating", "section inductance": "section" } as const;
   return protection.map(({ kind, item, count, cost: price }) => {
     const what = kind === "fuse" ? visible(item) : kind;
-    return [names[kind], `${count} x ${what}, ${money(price, cost?.currency)}, counted in the cost`] as const;
+    return [
+      names[kind],
+      `${count} x ${what}, ${price === null ? "no price, so not in the cost" : `${money(price, cost?.currency)}, in the cost`}`,
+    ] as const;
   });
 }
 

@@ -82,9 +82,9 @@ export interface UnitDuty {
 }
 
 /** Why this unit: its place on the bus and its capacitance, each with what it does to an even part. */
-function whyOf({ parallel, ties, series }: Arrangement, place: PlaceShares | null): string {
+function whyOf({ parallel, ties }: Arrangement, place: PlaceShares | null): string {
   if (parallel === 1) return "It carries all the current.";
-  const group = ties === "cross-tied" || series === 1 ? "unit of a stage" : "string";
+  const group = ties === "cross-tied" ? "unit of a stage" : "string";
   if (place === null) return `Its ${group} has the highest capacitance among low ones.`;
   const { position, feed, byPlace, byCapacitance, share, alike, otherFeed } = place;
   const times = (factor: number): string => `x ${factor.toFixed(3)}`;

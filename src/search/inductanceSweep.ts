@@ -41,7 +41,12 @@ function loopWith(
   const own = "inductance" in load ? { ...load, inductance: (load.inductance ?? 0) * factor } : load;
   return {
     bank: { ...bank, esl: bank.esl === null ? null : bank.esl * factor },
-    circuit: { ...circuit, load: own, bus: bus && { ...bus, inductance: bus.inductance * factor } },
+    circuit: {
+      ...circuit,
+      load: own,
+      section: (circuit.section ?? 0) * factor,
+      bus: bus && { ...bus, inductance: bus.inductance * factor },
+    },
   };
 }
 
@@ -59,7 +64,11 @@ export function inductanceSweep(
   const circuit = { ...found.value.circuit, place: null };
   const { load, bus } = circuit;
   if (load.kind === "steady current" || load.kind === "recorded") return null;
-  const known = (bank.esl ?? 0) + (bus?.inductance ?? 0) + ("inductance" in load ? (load.inductance ?? 0) : 0);
+  const known =
+    (bank.esl ?? 0) +
+    (circuit.section ?? 0) +
+    (bus?.inductance ?? 0) +
+    ("inductance" in load ? (load.inductance ?? 0) : 0);
   const here = known > 0 ? known : null;
   const low = here === null ? USUAL.low : here / REACH;
   const high = here === null ? USUAL.high : here * REACH;

@@ -99,7 +99,8 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   const fired = { action: discharge.action, seconds: discharge.duration, share: discharge.unit.actionShare };
   const { heating } = firingOf(brief, bank, unit, { charge: charge.value, shot: fired });
   const { highest } = firingOf(brief, bank, unit, { charge: slowest.value, shot: fired });
-  const own = bank.esl === null || circuit.bus === null ? null : bank.esl + circuit.bus.inductance;
+  const own =
+    bank.esl === null || circuit.bus === null ? null : bank.esl + (circuit.section ?? 0) + circuit.bus.inductance;
   const lamp = lampReport(brief, { capacitance: bank.capacitance, own });
   if (!lamp.ok) return lamp;
   const worst = worstVoltage(input);

@@ -1,5 +1,7 @@
 // The one table of keys: what each does, its words, and when it is live. The dispatcher and the help both read it.
+import { groundTold } from "./ground.ts";
 import * as live from "./live.ts";
+import { mouseTold } from "./mouse.ts";
 import { type Message, SCREEN_KEYS, SCREENS, type ScreenName, type State } from "./state.ts";
 import type { InputEvent } from "./tokens.ts";
 import type { UnitsMessage } from "./units/state.ts";
@@ -170,6 +172,7 @@ const EVERYWHERE: readonly Short[] = [
   [["ctrl+q", "ctrl+c"], "Ctrl-Q", "save and quit", { type: "quit" }, live.always, 9],
   [["q"], "", "quit", { type: "quit" }, live.isFree],
   [["ctrl+r"], "Ctrl-R", "plan again", { type: "again" }, live.isOpen, null],
+  [["f12"], "F12", "mouse on or off", { type: "mouse" }, live.isOpen, null],
   [["ctrl+z"], "Ctrl-Z", "suspend", { type: "suspend" }, live.always, null],
   [["ctrl+l"], "Ctrl-L", "draw again", { type: "redraw" }, live.always, null],
 ];
@@ -184,9 +187,19 @@ export const KEYS: readonly KeyRow[] = [
   ...EVERYWHERE,
 ].map(([keys, shown, words, message, isLive, rank = null]) => ({ keys, shown, words, message, live: isLive, rank }));
 
+/** What the terminal said by itself: its ground, or the mouse. The wheel moves like the keys. */
+function messageOfReport(state: State, text: string): Message | null {
+  const ground = groundTold(text);
+  if (ground !== null) return { type: "ground", ground };
+  const mouse = state.mouse ? mouseTold(text) : null;
+  if (mouse === null) return null;
+  if (mouse.kind === "wheel") return live.isOpen(state) || state.help ? { type: "move", by: mouse.by } : null;
+  return live.isOpen(state) ? { type: "click", column: mouse.column, row: mouse.row } : null;
+}
+
 /** What an event means now: a key of the table, text typed into a field, a paste; null for nothing. */
 export function messageFor(state: State, event: InputEvent): Message | null {
-  if (event.kind === "report") return null;
+  if (event.kind === "report") return messageOfReport(state, event.text);
   if (event.kind === "paste") {
     return live.types(state) ? { type: "edit", edit: { edit: "insert", text: event.text } } : null;
   }

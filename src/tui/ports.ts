@@ -190,6 +190,8 @@ export interface ScreenPorts {
   readonly process: ProcessPort;
   readonly env: Record<string, string | undefined>;
   readonly ascii?: boolean;
+  /** Asked for; absent: found out. */
+  readonly ground?: "dark" | "light";
 }
 
 /** The part of a terminal's output stream that is used. */

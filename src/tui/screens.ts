@@ -3,9 +3,11 @@ import type { Capacitor, Overrides, ResistorFamily } from "../catalog/index.ts";
 import { makeAsker } from "./asker.ts";
 import { makeAutosave } from "./autosave.ts";
 import { makeDetailer } from "./detailer.ts";
+import { ASK_GROUND } from "./ground.ts";
 import { openInput } from "./input.ts";
 import { messageFor } from "./keys.ts";
 import { makeLongWork } from "./longWork.ts";
+import { MOUSE_OFF, MOUSE_ON } from "./mouse.ts";
 import { PaintStream } from "./paint.ts";
 import type { EnginePort, ScreenPorts, Workshop } from "./ports.ts";
 import { startState } from "./restore.ts";
@@ -92,6 +94,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     const loadInk = (): void => {
       if (loading) return;
       loading = true;
+      if (ports.ground === undefined && store.state().look.colour) stdout.write(ASK_GROUND);
       import("./view/mount.ts").then(({ mount }) => {
         if (!over) mounted = mount(paint, stdin as NodeJS.ReadStream, drawScreen(store.state()).rows);
       }, session.fail);
@@ -112,6 +115,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else if (effect.type === "quit") session.end(0);
       else if (effect.type === "suspend") session.suspend();
       else if (effect.type === "redraw") paint.redraw();
+      else if (effect.type === "mouse") writeSync(effect.on ? MOUSE_ON : MOUSE_OFF);
       else if (effect.type === "overrides") setByHand(effect.overrides);
       else if (effect.type === "units") {
         if (workshop !== null) units.run(effect.effect, workshop.units);
@@ -165,6 +169,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       stopInput: input.stop,
       redraw: () => {
         onResize();
+        if (store.state().mouse) writeSync(MOUSE_ON);
         paint.redraw();
       },
       onEnd: (status, fault) => {

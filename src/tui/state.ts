@@ -5,6 +5,7 @@ import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
 import { FIRST_MAP, type FrontPoint, type MapView } from "./axes.ts";
+import type { Ground } from "./ground.ts";
 import type { Line, LineEdit } from "./line.ts";
 import type { CatalogueFacts, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
@@ -88,6 +89,8 @@ export interface State extends Work {
   readonly words: SharedWords | null;
   readonly screen: ScreenName;
   readonly help: boolean;
+  /** Clicks and the wheel are taken; the terminal's own selecting then needs its own key, mostly Shift. */
+  readonly mouse: boolean;
   readonly history: History;
   /** Every brief that was tried, the oldest first. */
   readonly trail: readonly Tried[];
@@ -173,7 +176,10 @@ export type Message =
     }
   | { readonly type: "work"; readonly work: LongJob | null }
   | { readonly type: "stop" }
+  | { readonly type: "ground"; readonly ground: Ground }
   | { readonly type: "again" }
+  | { readonly type: "mouse" }
+  | { readonly type: "click"; readonly column: number; readonly row: number }
   | { readonly type: "value" }
   | { readonly type: "faults" }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
@@ -186,6 +192,7 @@ export type Effect =
   | { readonly type: "units"; readonly effect: UnitsEffect }
   | { readonly type: "overrides"; readonly overrides: Overrides }
   | { readonly type: "stop" }
+  | { readonly type: "mouse"; readonly on: boolean }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };
@@ -228,6 +235,7 @@ export const initialState = (start: Start): State => ({
   showFaults: false,
   screen: "brief",
   help: false,
+  mouse: false,
   field: 0,
   caret: (start.values.energy ?? "").length,
   rank: "cost",

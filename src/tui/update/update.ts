@@ -2,6 +2,7 @@
 
 import { mostListed } from "../engine.ts";
 import { FIELDS } from "../fields.ts";
+import { type Ground, paletteFor } from "../ground.ts";
 import { withHistory } from "../history.ts";
 import { arrangementOf, selectedLayout } from "../pick.ts";
 import { RANKS } from "../ranks.ts";
@@ -10,6 +11,7 @@ import { withTried } from "../trail.ts";
 import type { UnitsMessage } from "../units/state.ts";
 import { updateUnits } from "../units/update.ts";
 import { mostScroll } from "../view/screen.ts";
+import { clickMeans } from "./click.ts";
 import { chooseField, editField, moveField } from "./form.ts";
 import { nextAxis, toggleTable, walkMap } from "./map.ts";
 import { askName, cancel, confirm, editName, saved } from "./order.ts";
@@ -76,6 +78,20 @@ function opened(state: State, { stock, words, catalogue, overrides }: Message & 
     reads: state.reads + 1,
     overrides: same ? state.overrides : overrides,
   });
+}
+
+/** The terminal said how light its ground is. */
+function withGround(state: State, ground: Ground): State {
+  const deep = state.look.palette?.endsWith("256") ?? true;
+  return { ...state, look: { ...state.look, palette: paletteFor(ground, deep) } };
+}
+
+function toggleMouse(state: State): Change {
+  const mouse = !state.mouse;
+  const text = mouse
+    ? "The mouse is on: click a screen's name or a row, turn the wheel. F12 leaves it to the terminal."
+    : "The mouse is the terminal's again.";
+  return { state: { ...state, mouse, notice: { tone: "plain", text } }, effects: [{ type: "mouse", on: mouse }] };
 }
 
 /** Stops long work. What is shown stays, and is said to be of another brief where it is. */
@@ -163,6 +179,14 @@ function changed(state: State, message: Message): Change {
       return stopWork(state);
     case "again":
       return ask({ ...state, notice: null });
+    case "ground":
+      return still(withGround(state, message.ground));
+    case "mouse":
+      return toggleMouse(state);
+    case "click": {
+      const means = clickMeans(state, message);
+      return means === null ? still(state) : changed(state, means);
+    }
     case "value":
       return askValue(state);
     case "faults":
