@@ -57,7 +57,7 @@ function startOf({ given, seed }: CountAsk): Counts {
   return none.value;
 }
 
-interface Thread {
+interface Counting {
   readonly entry: URL;
   readonly take: () => ChunkAsk | null;
   readonly add: (found: Counts) => void;
@@ -67,7 +67,7 @@ interface Thread {
 }
 
 /** One worker, fed until nothing is left. A worker that fails leaves its chunk, and what follows, to this thread. */
-async function inThread({ entry, take, add, here, signal }: Thread): Promise<void> {
+async function inThread({ entry, take, add, here, signal }: Counting): Promise<void> {
   let asked = take();
   if (asked === null) return;
   const worker = new Worker(entry);

@@ -9,7 +9,6 @@ import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
 import type { PulseFlags } from "./commands/pulse.ts";
-import { treeOf } from "./commandTree.ts";
 import type { CommissionFlags } from "./commissionFlags.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
@@ -213,6 +212,7 @@ export function build(ports: Ports, done: Done): Command {
     .addHelpText("after", HELP.completion)
     .action(async (shell: string) => {
       const { completionCommand } = await import("./commands/completion.ts");
+      const { treeOf } = await import("./commandTree.ts");
       done(completionCommand(shell, treeOf(program), ports));
     });
   program
@@ -221,6 +221,7 @@ export function build(ports: Ports, done: Done): Command {
     .addHelpText("after", HELP.manual)
     .action(async () => {
       const { manualCommand } = await import("./commands/manual.ts");
+      const { treeOf } = await import("./commandTree.ts");
       done(manualCommand(treeOf(program), ports));
     });
   return program;

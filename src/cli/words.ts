@@ -24,6 +24,7 @@ export const WORDS: Readonly<Record<string, string>> = {
   "binary-file": "the file is not text",
   "broken-quotes": "the quotes do not match",
   "row-too-long": "the row has more cells than there are headings",
+  "set-by-hand": "values of this catalogue are set by hand",
   commission: "the readings cannot be judged",
   contradiction: "values contradict each other",
   "disk-full": "the disk is full; nothing was written",

@@ -12,6 +12,7 @@
  * Holds for independent errors of equal spread. A gap is printed to no more digits than +-2 u/sqrt(n_p) supports.
  * Source: [Harter1961] e(n), expected values of normal order statistics; [methods-derived] the rest.
  */
+import { power } from "../quantity/index.ts";
 import type { Ties } from "./unit.ts";
 
 const REACH = 9;
@@ -37,9 +38,9 @@ export function expectedLargest(count: number): number {
   let integral = 0;
   let before = 0;
   for (let i = 0; i < STEPS; i++) {
-    const power = BELOW[i]! ** count;
-    integral += (-REACH + (i + 0.5) * STEP) * (power - before);
-    before = power;
+    const after = power(BELOW[i]!, count);
+    integral += (-REACH + (i + 0.5) * STEP) * (after - before);
+    before = after;
   }
   return integral;
 }

@@ -1,5 +1,6 @@
 // A whole shot of a ladder: each branch's peak current and action, by steps that keep to an error.
 
+import { power } from "../quantity/index.ts";
 import type { BusPath } from "./busPath.ts";
 import { type Ladder, type LadderEnd, type LadderState, ladderStep } from "./ladder.ts";
 
@@ -81,7 +82,7 @@ export function ladderCourse({ ladder, voltage, drive, seconds, toZero = false }
       error = Math.max(error, volts, largest > 0 ? amperes / largest : 0);
     }
     if (error > 4 * ERROR && step > seconds * 1e-12) {
-      step *= Math.max(0.1, 0.9 * (ERROR / error) ** (1 / 6));
+      step *= Math.max(0.1, 0.9 * power(ERROR / error, 1 / 6));
       continue;
     }
     const begun = time === 0;
@@ -112,7 +113,7 @@ export function ladderCourse({ ladder, voltage, drive, seconds, toZero = false }
     time += step;
     state = end;
     if (toZero && !begun && end.total <= 0 && totalPeak > 0) break;
-    step *= Math.min(3, 0.9 * (ERROR / Math.max(error, 1e-14)) ** (1 / 6));
+    step *= Math.min(3, 0.9 * power(ERROR / Math.max(error, 1e-14), 1 / 6));
   }
   return { peaks: [...peaks], actions: [...actions], totalPeak, totalAction, seconds: time };
 }

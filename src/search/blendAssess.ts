@@ -2,7 +2,7 @@
 
 import { pulseEnergy } from "../bank/index.ts";
 import { hazardFindings } from "../hazard/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import { assess } from "./assess.ts";
 import { bleedOf } from "./blendBleed.ts";
 import { blendFindings } from "./blendFindings.ts";
@@ -126,7 +126,7 @@ function worstOf(layouts: readonly LayoutResult[], value: (layout: LayoutResult)
 
 function costOf(strings: readonly BlendString[], lineCost: number, currency: string | null): BlendCost | null {
   if (currency === null) return null;
-  const scale = 10 ** minorDigits(currency);
+  const scale = tenTo(minorDigits(currency));
   const minor = (amount: number | null | undefined): number => Math.round((amount ?? 0) * scale);
   const capacitors = strings.reduce((sum, { cost }) => sum + minor(cost?.capacitors), 0);
   const resistors = strings.reduce((sum, { cost }) => sum + minor(cost?.resistors), 0);

@@ -2,7 +2,7 @@
 
 import { FIT, requiredCapacitance } from "../bank/index.ts";
 import { type Capacitor, DEFAULT_FAMILY, isPriced, type ResistorFamily } from "../catalog/index.ts";
-import { accepted, minorDigits, type Read, toMajor } from "../quantity/index.ts";
+import { accepted, minorDigits, type Read, tenTo, toMajor } from "../quantity/index.ts";
 import { findAlternatives } from "./blend/alternatives.ts";
 import type { settleBlend } from "./blend/fallback.ts";
 import type { FoundBlend } from "./blend/singles.ts";
@@ -53,7 +53,7 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
   const money = planCurrency(brief, input.parts, given);
   if (!money.ok) return money;
   const currency = money.value;
-  const minor = 10 ** minorDigits(currency ?? "");
+  const minor = tenTo(minorDigits(currency ?? ""));
   const lineCost = Math.round((input.lineCost ?? 0) * minor);
   const terms = { brief, families: pricedIn(given, currency, brief), lineCost };
   const parts = pricedIn(distinct(input.parts), currency, brief);

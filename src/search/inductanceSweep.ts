@@ -2,6 +2,7 @@
 
 import type { Capacitor } from "../catalog/index.ts";
 import { type Circuit, dischargeOf, type PulseBank } from "../pulse/index.ts";
+import { power } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { circuitOf, pulseBankFor } from "./circuit.ts";
 import type { LayoutResult } from "./result.ts";
@@ -73,7 +74,7 @@ export function inductanceSweep(
   const high = here === null ? USUAL.high : here * REACH;
   const points: SweepPoint[] = [];
   for (let index = 0; index < count; index += 1) {
-    const inductance = low * (high / low) ** (index / (count - 1));
+    const inductance = low * power(high / low, index / (count - 1));
     const loop = loopWith(bank, circuit, { factor: here === null ? null : inductance / here, inductance });
     const shot = dischargeOf(loop.bank, loop.circuit, brief.voltage);
     if (!shot.ok) return null;

@@ -5,7 +5,7 @@
 
 import { chargingWorst, FIT, leastParallel } from "../bank/index.ts";
 import { type Capacitor, cheapest, toBuy } from "../catalog/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing } from "./balancing.ts";
 import { type Candidate, prepare } from "./candidate.ts";
 import { type Broken, limitJudge } from "./limits.ts";
@@ -68,7 +68,7 @@ export function sweepLimited(input: SweepInput, table: LayoutTable, judge: Judge
   const { brief, families, required, currency } = input;
   const limits = limitJudge(brief);
   const voltage = brief.voltage * (1 + brief.overshoot);
-  const minor = 10 ** minorDigits(currency ?? "");
+  const minor = tenTo(minorDigits(currency ?? ""));
   const balancing = newBalancing();
   const guarded = isProtected(brief);
   const stock = { fuses: input.fuses ?? null, currency };

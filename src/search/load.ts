@@ -1,6 +1,6 @@
 // What hangs on the bank, as the brief says it: load, switch, bus, clamp, charger, and what is stated or known of them.
 
-import { z } from "zod";
+import * as z from "zod";
 import { above, fromZero, part, plain, quantity, whole, word, yesNo } from "./fields.ts";
 
 const FILL = { least: 0, most: 1e7, open: true } as const;

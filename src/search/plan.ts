@@ -33,6 +33,8 @@ export interface PlanInput {
   readonly quick?: boolean;
   /** With the measured basis: whether the measured units, placed, share safely in a shape. */
   readonly judge?: Judge;
+  /** Called after each part: how many are done, of how many. */
+  readonly progress?: ((done: number, total: number) => void) | undefined;
   /** With the statistical basis: measured capacitances of the only part, F, at least LEAST_LOT; units are drawn from them. */
   readonly lot?: readonly number[];
 }
@@ -64,6 +66,7 @@ export function plan(input: PlanInput): Read<PlanResult> {
     currency,
     fuses,
     judge: input.judge ?? null,
+    progress: input.progress,
     lot: input.lot,
   };
   const wanted = parts.length >= SIEVED_FROM && limit > 0 && limit <= MOST_SIEVED ? { limit, rank } : null;

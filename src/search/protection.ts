@@ -1,7 +1,7 @@
 // What stands between a failed unit and its neighbours, counted and priced for one shape: fuses, isolating resistors, section inductances.
 
 import type { Capacitor, Fuse } from "../catalog/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { chooseFuse, fuseCount, fuseSeesAt } from "./fuses.ts";
 import type { Protection } from "./result.ts";
@@ -37,7 +37,7 @@ export function protectionOf(
   stock: ProtectionStock,
 ): readonly Protection[] | "more" | "stuck" {
   const { unit, worst, ...shape } = given;
-  const scale = 10 ** minorDigits(stock.currency ?? "");
+  const scale = tenTo(minorDigits(stock.currency ?? ""));
   const priced = (count: number, price: number | undefined): number | null =>
     price === undefined || stock.currency === null ? null : Math.round(price * scale) * count;
   const lines: Protection[] = [];

@@ -46,6 +46,7 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
   const run: Run = { input, judge, table, sieve: null, count: 0 };
   const reasons: (Reason | null)[] = new Array(parts.length).fill(null);
   let stride = 1;
+  let done = 0;
   if (wanted !== null) while (parts.length / (stride * PASS) >= FIRST_PARTS) stride *= PASS;
   let sample: readonly number[] = [];
   for (let seen = 0; stride >= 1; seen = stride, stride /= PASS) {
@@ -60,6 +61,7 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
     for (let i = 0; i < parts.length; i += stride) {
       if (seen > 0 && i % seen === 0) continue;
       reasons[i] = sweepPart(run, i);
+      input.progress?.(++done, parts.length);
       if (stopAtFirst && run.count > 0) break;
     }
   }
@@ -79,6 +81,7 @@ function sweepByLimits(
   const refused: RefusedPart[] = [];
   for (const [i, unit] of input.parts.entries()) {
     const reason = limited(i);
+    input.progress?.(i + 1, input.parts.length);
     if (reason !== null) refused.push({ part: unit.part, ...reason });
     if (stopAtFirst && table.count > 0) break;
   }

@@ -15,6 +15,8 @@ export interface SweepInput {
   readonly fuses?: readonly Fuse[] | null;
   /** Judges sharing while charging in place of the brief's risk. */
   readonly judge?: Judge;
+  /** Called after each part: how many are done, of how many. */
+  readonly progress?: ((done: number, total: number) => void) | undefined;
   /** F: the measured lot of the only part, which the statistical basis draws its units from. */
   readonly lot?: readonly number[] | undefined;
 }

@@ -13,13 +13,14 @@ import {
   improve,
   inductanceSweep,
   type LayoutResult,
+  type PlanResult,
   plan,
   planCurrency,
   readBrief,
   shareSpread,
   shotOf,
 } from "../search/index.ts";
-import type { Arrangement, EnginePort } from "./ports.ts";
+import { type Arrangement, type EnginePort, MOST_FRONT } from "./ports.ts";
 import { recordReader } from "./record.ts";
 
 /** Said on every copy of an order: the standing cautions, and to whom this program defers. */
@@ -67,21 +68,32 @@ export function catalogEngine({ parts, families, files = null }: Stock): EngineP
     const unit = byName.get(part);
     return unit === undefined ? null : of(unit);
   };
+  /** Layouts by their names, each worked out unless the plan has it so already. */
+  const inFull = (brief: Brief, planned: PlanResult, ids: readonly string[]): readonly LayoutResult[] => {
+    const given = new Map(planned.layouts.map((layout) => [layout.id, layout]));
+    return ids
+      .map((id) => {
+        const named = arrangementNamed(id);
+        return given.get(id) ?? (named && assessed(brief, planned.currency, named));
+      })
+      .filter((layout) => layout !== null);
+  };
   return {
     readBrief: (values) => {
       const whole = recorded === null ? accepted(values) : recorded(values);
       return whole.ok ? readBrief(whole.value) : whole;
     },
-    plan: (brief, { rank, most, frontOnly, quick }) => {
-      const planned = plan({ brief, parts, families, limit: most, rank, quick });
+    plan: (brief, { rank, most, frontOnly, quick, progress }) => {
+      const planned = plan({ brief, parts, families, limit: most, rank, quick, progress });
       if (!planned.ok || !frontOnly) return planned;
-      const given = new Map(planned.value.layouts.map((layout) => [layout.id, layout]));
-      const layouts = planned.value.front.map((id) => {
-        const named = arrangementNamed(id);
-        return given.get(id) ?? (named && assessed(brief, planned.value.currency, named));
-      });
-      return accepted({ ...planned.value, layouts: layouts.filter((layout) => layout !== null) });
+      return accepted({ ...planned.value, layouts: inFull(brief, planned.value, planned.value.front) });
     },
+    front: (brief, planned) => inFull(brief, planned, planned.front.slice(0, MOST_FRONT)),
+    life: (brief, layout) =>
+      ofUnit(layout, (unit) => {
+        const report = brief.load === undefined ? null : shotOf({ layout, unit, brief });
+        return report?.ok ? report.value.life.ratio : null;
+      }),
     check: (brief, arrangement) => assessed(brief, currencyOf(brief), arrangement),
     bill: (brief, layout) => {
       const unit = byName.get(layout.part);

@@ -33,6 +33,9 @@ export const types: Live = (state) => asksName(state) || (onBrief(state) && !has
 export const isFree: Live = (state) => isOpen(state) && state.screen !== "brief";
 
 export const hasLayouts: Live = (state) => (planOf(state)?.layouts.length ?? 0) > 0;
+export const works: Live = (state) => isOpen(state) && state.work !== null;
+export const hasParts: Live = (state) => !state.showFaults && (state.catalogue?.parts.length ?? 0) > 0;
+export const hasTrail: Live = (state) => state.trail.length > 0;
 export const hasPins: Live = (state) => state.pins.length > 0;
 /** The spread is shown unasked on the statistical basis, and one in series has none. */
 export const mayAskSpread: Live = (state) => {

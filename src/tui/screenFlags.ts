@@ -9,11 +9,13 @@ export interface ScreenFlags {
   readonly ascii: boolean;
 }
 
+const OF_A_FILE: readonly string[] = ["--catalog", "--resistors", "--brief"];
+
 /**
  * No argument at all, or only the flags of the screens: `--catalog FILE...`, `--resistors FILE`, `--brief FILE`, `--ascii`.
- * Null for anything else, which is the commands' to understand or to refuse.
+ * A flag whose file is missing is named. Null for anything else, which is the commands' to understand or to refuse.
  */
-export function screenFlags(argv: readonly string[]): ScreenFlags | null {
+export function screenFlags(argv: readonly string[]): ScreenFlags | { readonly missing: string } | null {
   // "--catalog a.csv b.csv" means two catalogues, as it does for the commands.
   const spread: string[] = [];
   let list = "";
@@ -24,10 +26,10 @@ export function screenFlags(argv: readonly string[]): ScreenFlags | null {
     } else if (list !== "") spread.push(list);
     spread.push(word);
   }
-  if (argv.at(-1) === "--catalog") return null;
+  const missing = argv.find((word, at) => OF_A_FILE.includes(word) && (argv[at + 1] ?? "--").startsWith("--"));
   try {
     const { values } = parseArgs({
-      args: spread,
+      args: missing === undefined ? spread : spread.filter((word) => word !== missing),
       strict: true,
       allowPositionals: false,
       options: {
@@ -37,6 +39,7 @@ export function screenFlags(argv: readonly string[]): ScreenFlags | null {
         ascii: { type: "boolean" },
       },
     });
+    if (missing !== undefined) return { missing };
     const { catalog = [], resistors = null, brief = null, ascii = false } = values;
     return { catalog, resistors, brief, ascii };
   } catch {

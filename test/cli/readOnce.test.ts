@@ -15,6 +15,8 @@ describe("readOnce(files)", () => {
         written.push(path);
         return accepted(path);
       },
+      move: (path) => accepted(path),
+      watch: () => () => {},
     });
     expect([files.read("-"), files.read("-")]).toEqual([accepted("- text"), accepted("- text")]);
     expect([files.read("no").ok, files.read("no").ok]).toEqual([false, false]);

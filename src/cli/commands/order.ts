@@ -4,7 +4,6 @@ import {
   alternatesFor,
   BILL_FORMATS,
   type Bill,
-  type BillFormat,
   billOf,
   billText,
   type Money,
@@ -12,15 +11,17 @@ import {
   visible,
   withEdits,
 } from "../../order/index.ts";
-import { accepted, nearestWord, type Read, type Refusal } from "../../quantity/index.ts";
+import { accepted, type Read } from "../../quantity/index.ts";
 import { type FuseChoice, fittedFuse } from "../../search/index.ts";
 import { changeLines } from "../billChanges.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, checkedBank } from "../checked.ts";
+import { chosenFormat } from "../chosenFormat.ts";
 import { EXIT } from "../exit.ts";
 import { titleOf } from "../findingWords.ts";
 import { readFuseStock } from "../fuses.ts";
 import { faultLines } from "../inputNotes.ts";
+import { outputOf } from "../paperOutput.ts";
 import type { Ports } from "../ports.ts";
 import { tell } from "../tell.ts";
 
@@ -33,19 +34,12 @@ export type OrderFlags = BankFlags & {
 };
 
 export function orderCommand(brief: string | undefined, flags: OrderFlags, ports: Ports): number {
-  const format = readFormat(flags);
-  if (flags.output?.trim() === "") {
-    const want = "the name of a file; - for the output";
-    return tell(
-      ports,
-      [{ code: "empty", place: { field: "--output" }, read: JSON.stringify(flags.output), want }],
-      flags.json,
-    );
-  }
+  const format = chosenFormat(flags, BILL_FORMATS, "csv");
+  const output = outputOf(flags.output);
   const checked = checkedBank(brief, flags, ports);
-  if (!checked.ok || typeof format !== "string") {
-    const faults = [...(typeof format === "string" ? [] : [format]), ...(checked.ok ? [] : checked.refusals)];
-    return tell(ports, faults, flags.json);
+  if (!format.ok || !output.ok || !checked.ok) {
+    const refusals = [format, output, checked].flatMap((one) => (one.ok ? [] : one.refusals));
+    return tell(ports, refusals, flags.json);
   }
   const { result, unit, settings, stock, currency, notes } = checked.value;
   const cautions = cautionsOf(settings.brief, { layout: result, unit }).map(({ text }) => text);
@@ -59,7 +53,7 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
   const edited = editedOf(fresh, flags.edited, { currency, exchange: asked.exchange }, ports);
   if (!edited.ok) return tell(ports, edited.refusals, flags.json);
   const bill = edited.value;
-  const text = billText(bill, format);
+  const text = billText(bill, format.value);
   const said = [
     ...faultLines(stock),
     ...(fuses?.value.lost ?? []),
@@ -71,11 +65,11 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
     if (finding.verdict === "fail")
       said.push(`FAIL, ${titleOf(finding.id)}: ${visible(finding.note)} Do not buy this bank.`);
   if (said.length > 0) ports.err(`${said.join("\n")}\n`);
-  if (flags.output === undefined || flags.output === "-") ports.out(text);
+  if (output.value === null) ports.out(text);
   else {
-    const written = ports.files.write(flags.output, text, flags.force === true);
+    const written = ports.files.write(output.value, text, flags.force === true);
     if (!written.ok) return tell(ports, written.refusals, flags.json);
-    ports.err(`${visible(flags.output)}: ${bill.lines.length} lines written\n`);
+    ports.err(`${visible(output.value)}: ${bill.lines.length} lines written\n`);
   }
   return result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done;
 }
@@ -98,20 +92,4 @@ function fuseSaid(fuse: FuseChoice | null): readonly string[] {
   return [
     `No fuse of the catalogue is proven to do${why}: the line stays to be chosen. See: joulewright pulse --fuses.`,
   ];
-}
-
-/** The format named, else that of the file's ending, else CSV; --json is the format json. */
-function readFormat({ format, json, output }: OrderFlags): BillFormat | Refusal {
-  const ending = /\.([a-z]+)$/i
-    .exec(output ?? "")?.[1]
-    ?.toLowerCase()
-    .replace(/^htm$/, "html")
-    .replace(/^markdown$/, "md");
-  const named = format?.toLowerCase() ?? (json ? "json" : undefined);
-  const wanted = named ?? BILL_FORMATS.find((one) => one === ending) ?? "csv";
-  const found = BILL_FORMATS.find((one) => one === wanted);
-  if (found !== undefined) return found;
-  const near = nearestWord(wanted, BILL_FORMATS);
-  const want = `${near === null ? "" : `perhaps ${JSON.stringify(near)}; `}one of ${BILL_FORMATS.join(", ")}`;
-  return { code: "bad-choice", place: { field: "--format" }, read: JSON.stringify(wanted), want };
 }

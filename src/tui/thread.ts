@@ -1,0 +1,49 @@
+// What the screens and their thread say to each other, and the thread's side of it: one question at a time, answered with progress on the way.
+import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
+import { briefInput } from "./briefInput.ts";
+import { catalogEngine } from "./catalogEngine.ts";
+import { answerFor, type Question } from "./engine.ts";
+import type { Details, EnginePort, Piece } from "./ports.ts";
+import type { Answer } from "./state.ts";
+
+export type ThreadAsk =
+  | { readonly kind: "stock"; readonly parts: readonly Capacitor[]; readonly families: readonly ResistorFamily[] }
+  | { readonly kind: "plan"; readonly id: number; readonly question: Question }
+  | { readonly kind: "piece"; readonly id: number; readonly question: Question; readonly piece: Piece };
+
+export type ThreadReply =
+  | { readonly kind: "progress"; readonly id: number; readonly done: number; readonly total: number }
+  | { readonly kind: "planned"; readonly id: number; readonly answer: Answer }
+  | { readonly kind: "worked"; readonly id: number; readonly value: Details[Piece] };
+
+function pieceFor(engine: EnginePort, question: Question, piece: Piece): Details[Piece] {
+  const brief = engine.readBrief(briefInput(question));
+  const bank = brief.ok && question.chosen !== null ? engine.check(brief.value, question.chosen) : null;
+  return brief.ok && bank !== null ? engine[piece](brief.value, bank) : null;
+}
+
+/** Takes the asks of one thread. `now`: milliseconds from any beginning. */
+export function threadServer(reply: (reply: ThreadReply) => void, now: () => number): (ask: ThreadAsk) => void {
+  let engine: EnginePort = catalogEngine({ parts: [], families: [] });
+  return (ask) => {
+    if (ask.kind === "stock") {
+      engine = catalogEngine(ask);
+      return;
+    }
+    const { id, question } = ask;
+    if (ask.kind === "piece") {
+      reply({ kind: "worked", id, value: pieceFor(engine, question, ask.piece) });
+      return;
+    }
+    let told = now();
+    const progress = (done: number, total: number): void => {
+      if (now() - told < TELL_MS && done < total) return;
+      told = now();
+      reply({ kind: "progress", id, done, total });
+    };
+    reply({ kind: "planned", id, answer: answerFor(question, engine, true, progress) });
+  };
+}
+
+/** Progress is told this often: oftener is not seen. */
+const TELL_MS = 100;
