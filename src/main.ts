@@ -106,6 +106,7 @@ async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
       process,
       env: process.env,
       ...(flags.ascii ? { ascii: true } : {}),
+      ...(flags.ground === null ? {} : { ground: flags.ground }),
     },
   });
   screensAreUp = false;

@@ -10,6 +10,7 @@ export type { PriceBreak } from "./cell.ts";
 export type { Column } from "./column.ts";
 export { readRecords, separatorOf } from "./csv.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
+export { type History, type HistoryRow, readHistory } from "./history.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
 export { OVERRIDABLE, type Overrides, overridden, readOverrides, withOverrides } from "./overrides.ts";
 export { type ListedUnit, readPositions, type UnitList } from "./positions.ts";

@@ -67,6 +67,10 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "place.outlier-leakage": { title: "leakage out of the lot" },
   "place.outlier-esr": { title: "ESR out of the lot" },
   "place.mixed-parts": { title: "groups of mixed parts" },
+  "history.capacitance-lost": { title: "capacitance lost" },
+  "history.esr-grown": { title: "ESR grown" },
+  "history.leakage": { title: "leakage as last measured" },
+  "history.charging-stress": { title: "worst unit, as last measured" },
   "commission.over-limit": { title: "a reading over its limit" },
   "commission.sum": { title: "sum of the readings" },
 };

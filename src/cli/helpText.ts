@@ -120,8 +120,10 @@ Examples:
   $ joulewright commission bank.json --readings readings.csv --unit-limit "324 V"
   $ joulewright commission bank.json --readings readings.csv --meter "0.2 %" --resolution "0.1 V" --json
   $ joulewright commission bank.json --readings readings.csv --next-voltage "1.6 kV" --next-hold "10 min"
+  $ joulewright commission bank.json --history log.csv --capacitance-lost "10 %" --esr-grown "100 %"
 SHEET is what place --json wrote. A row of readings is one reading: stage (cross-tied), or string and place, or serial.
-Exit status: 0 agrees; 1 differs, or stop; 2 wrong use or unreadable input; 70 a bug of ours.`,
+A row of a history is dated: shots (a counter) or fired (since the row before), and with a serial what was measured anew.
+Exit status: 0 agrees; 1 differs, stop, or a unit is due; 2 wrong use or unreadable input; 70 a bug of ours.`,
   parts: `
 Examples:
   $ joulewright parts mine.csv resistors.csv

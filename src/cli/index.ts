@@ -2,7 +2,9 @@
 export { type CautionLine, cautionsOf } from "./cautions.ts";
 export { type Files, filesOn } from "./files.ts";
 export { titleOf } from "./findingWords.ts";
+export { readMeasuredInput } from "./measuredInput.ts";
 export { saveOverrides } from "./overrides.ts";
+export { placeCsv } from "./placeCsv.ts";
 export { type Ports, textWidth } from "./ports.ts";
 export { clampWords, withoutBalanceWords } from "./restText.ts";
 export { withRecord } from "./settings.ts";

@@ -139,6 +139,7 @@ export function build(ports: Ports, done: Done): Command {
     .option("--leakage-at <voltage>", "voltage on a unit at which leakage was read")
     .option("--unit-limit <voltage>", "highest voltage of a unit; else the part's, derated")
     .option("--pins <pins...>", "units that must stand in a stage or string: SERIAL=3, or a list in CSV")
+    .option("--rooms <rooms...>", "stages or strings that take only one polarity or size group: 3=snap-in")
     .option("--lots <wish>", "mix: every lot spread evenly; apart: one lot to a stage or string")
     .option("--outliers <wish>", "reject or keep units that do not belong to the lot")
     .option("--goal <goal>", "charging, or both: charging within its floor, then holding")
@@ -188,6 +189,10 @@ export function build(ports: Ports, done: Done): Command {
     .option("--charger <state>", "on: it held the voltage; off: taken off after the charge")
     .option("--next-voltage <voltage>", "charge voltage of the next step of the hot test")
     .option("--next-hold <time>", "how long it would be held")
+    .option("--history <file>", "shot log and units measured anew, CSV: date, shots, serial, capacitance, esr, leakage")
+    .option("--capacitance-lost <fraction>", 'end of life of a unit: this part of its capacitance lost, "20 %"')
+    .option("--esr-grown <fraction>", 'end of life of a unit: its ESR grown by this part, "100 %"')
+    .option("--leakage-most <current>", "end of life of a unit: leakage at its test voltage")
     .option("--json", "print JSON")
     .addHelpText("after", HELP.commission)
     .action(async (sheet: string, flags: CommissionFlags) => {

@@ -122,7 +122,8 @@ export function withEdits(bill: Bill, edited: EditedFile, money: Money): Read<Bi
     if (line.currency !== null || (line.unitPrice === null && line.purchase === null)) return line;
     if (money.currency !== null) return reckoned({ ...line, currency: money.currency });
     if (line.unitPrice === null) return line;
-    const place = row.cells.get("currency")?.place ?? row.place;
+    const cell = row.cells.get("currency");
+    const place = cell === undefined ? row.place : { ...row.place, column: cell.column, field: "currency" };
     faults.push({ code: "missing-value", place, read: "a price without a currency", want: "a currency such as EUR" });
     return line;
   };

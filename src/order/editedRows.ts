@@ -20,7 +20,8 @@ import { BILL_VERSION, markVersion } from "./marks.ts";
 export interface EditedCell {
   readonly text: string;
   readonly value: CellValue;
-  readonly place: Place;
+  /** Of the file, from 1. */
+  readonly column: number;
 }
 
 export interface EditedRow {
@@ -28,7 +29,7 @@ export interface EditedRow {
   /** Line of the file. */
   readonly at: number;
   readonly place: Place;
-  /** Only of columns that the file has. */
+  /** Only of the builder's columns that the file has. */
   readonly cells: ReadonlyMap<BillColumn["key"], EditedCell>;
   readonly extra: readonly string[];
   /** Empty where there is none: a row of the builder's, or of a file made before marks. */
@@ -144,11 +145,12 @@ function readRow(given: readonly string[], { bound, place, comma, faults }: RowC
   }
   const cells = new Map<BillColumn["key"], EditedCell>();
   for (const { column, index } of bound.columns) {
+    // The rest is reckoned anew, whatever stands there.
+    if (!column.builders) continue;
     const text = texts[index] ?? "";
-    const at = spot(index, column.heading);
-    const value = column.builders ? readEditedCell(text, column, comma) : accepted(null);
-    if (value.ok) cells.set(column.key, { text, value: value.value, place: at });
-    else faults.push(...value.refusals.map((one) => ({ ...one, place: at })));
+    const value = readEditedCell(text, column, comma);
+    if (value.ok) cells.set(column.key, { text, value: value.value, column: index + 1 });
+    else faults.push(...value.refusals.map((one) => ({ ...one, place: spot(index, column.heading) })));
   }
   if (kind === "own line" && cellOf("item") === "")
     faults.push({

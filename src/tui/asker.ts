@@ -1,5 +1,6 @@
 // Decides when and where the engine is asked: at once where it is quick, after the frame where it is not, in a thread where it
 // would hold up the keys, and in full when the keys rest.
+import { briefInput } from "./briefInput.ts";
 import { answerFor, questionOf } from "./engine.ts";
 import type { LongWork } from "./longWork.ts";
 import type { EnginePort } from "./ports.ts";
@@ -93,7 +94,8 @@ export function makeAsker({ engine, state, send, now, longWork }: AskerOptions):
     },
     beforeFrame: () => {
       if (!wanted) return;
-      if (isLong()) {
+      // A brief that cannot be read is told at once, whatever its plan would take.
+      if (isLong() && engine()?.readBrief(briefInput(state())).ok) {
         wanted = false;
         rest = setTimeout(inThread, REST_MS);
       } else if (lastTook() <= WITHIN_A_FRAME_MS) here(true);

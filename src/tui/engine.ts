@@ -6,8 +6,11 @@ import { briefInput } from "./briefInput.ts";
 import type { EnginePort, PlanRequest } from "./ports.ts";
 import type { Answer, State } from "./state.ts";
 
+/** Most layouts of a list. */
+export const MOST_LISTED = 200;
+
 /** Beside the form only the first few are seen, and every key waits for them; the list itself is longer. */
-export const mostListed = (state: Pick<State, "screen">): number => (state.screen === "brief" ? 50 : 200);
+export const mostListed = (state: Pick<State, "screen">): number => (state.screen === "brief" ? 50 : MOST_LISTED);
 
 /** What of a state the engine is asked: plain data, fit to be sent to a thread. */
 export type Question = Pick<State, "values" | "extra" | "rank" | "frontOnly" | "chosen" | "pins" | "screen" | "map">;

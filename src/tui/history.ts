@@ -19,7 +19,17 @@ const workOf = ({ values, extra, pins, chosen, rank, frontOnly, overrides }: Sta
 });
 
 /** Messages that are no doing of the user's: they do not end what is being typed. */
-const PASSIVE: readonly Message["type"][] = ["answered", "detailed", "resized", "say", "saved", "opened", "work"];
+const PASSIVE: readonly Message["type"][] = [
+  "answered",
+  "detailed",
+  "resized",
+  "say",
+  "saved",
+  "opened",
+  "work",
+  "ground",
+  "mouse",
+];
 
 const typedInto = (state: State, message: Message): string | null =>
   message.type === "edit" && state.prompt === null ? fieldAt(state.field).key : null;

@@ -7,12 +7,14 @@ export interface ScreenFlags {
   readonly resistors: string | null;
   readonly brief: string | null;
   readonly ascii: boolean;
+  /** The terminal's ground, for its colours; null finds out. */
+  readonly ground: "dark" | "light" | null;
 }
 
 const OF_A_FILE: readonly string[] = ["--catalog", "--resistors", "--brief"];
 
 /**
- * No argument at all, or only the flags of the screens: `--catalog FILE...`, `--resistors FILE`, `--brief FILE`, `--ascii`.
+ * No argument at all, or only the flags of the screens: `--catalog FILE...`, `--resistors FILE`, `--brief FILE`, `--ascii`, `--dark`, `--light`.
  * A flag whose file is missing is named. Null for anything else, which is the commands' to understand or to refuse.
  */
 export function screenFlags(argv: readonly string[]): ScreenFlags | { readonly missing: string } | null {
@@ -37,11 +39,14 @@ export function screenFlags(argv: readonly string[]): ScreenFlags | { readonly m
         resistors: { type: "string" },
         brief: { type: "string" },
         ascii: { type: "boolean" },
+        dark: { type: "boolean" },
+        light: { type: "boolean" },
       },
     });
     if (missing !== undefined) return { missing };
-    const { catalog = [], resistors = null, brief = null, ascii = false } = values;
-    return { catalog, resistors, brief, ascii };
+    const { catalog = [], resistors = null, brief = null, ascii = false, dark, light } = values;
+    if (dark && light) return null;
+    return { catalog, resistors, brief, ascii, ground: dark ? "dark" : light ? "light" : null };
   } catch {
     return null;
   }

@@ -3,9 +3,11 @@ import type { Capacitor, Overrides, ResistorFamily } from "../catalog/index.ts";
 import { makeAsker } from "./asker.ts";
 import { makeAutosave } from "./autosave.ts";
 import { makeDetailer } from "./detailer.ts";
+import { ASK_GROUND } from "./ground.ts";
 import { openInput } from "./input.ts";
 import { messageFor } from "./keys.ts";
 import { makeLongWork } from "./longWork.ts";
+import { MOUSE_OFF, MOUSE_ON } from "./mouse.ts";
 import { PaintStream } from "./paint.ts";
 import type { EnginePort, ScreenPorts, Workshop } from "./ports.ts";
 import { startState } from "./restore.ts";
@@ -13,6 +15,7 @@ import { openSession } from "./session.ts";
 import { ask, type Effect, type Message } from "./state.ts";
 import { createStore } from "./store.ts";
 import { screenTrouble } from "./terminal.ts";
+import { makeUnitsRunner } from "./units/runner.ts";
 import { update } from "./update/update.ts";
 import type { Mounted } from "./view/mount.ts";
 import { drawScreen } from "./view/screen.ts";
@@ -91,6 +94,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     const loadInk = (): void => {
       if (loading) return;
       loading = true;
+      if (ports.ground === undefined && store.state().look.colour) stdout.write(ASK_GROUND);
       import("./view/mount.ts").then(({ mount }) => {
         if (!over) mounted = mount(paint, stdin as NodeJS.ReadStream, drawScreen(store.state()).rows);
       }, session.fail);
@@ -111,8 +115,11 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else if (effect.type === "quit") session.end(0);
       else if (effect.type === "suspend") session.suspend();
       else if (effect.type === "redraw") paint.redraw();
+      else if (effect.type === "mouse") writeSync(effect.on ? MOUSE_ON : MOUSE_OFF);
       else if (effect.type === "overrides") setByHand(effect.overrides);
-      else if (workshop !== null)
+      else if (effect.type === "units") {
+        if (workshop !== null) units.run(effect.effect, workshop.units);
+      } else if (workshop !== null)
         send({ type: "saved", answer: workshop.exportBill(effect.bill, effect.path, effect.replace) });
     };
     const store = createStore({
@@ -125,6 +132,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       },
     });
     const now = (): number => performance.now();
+    const units = makeUnitsRunner({ state: store.state, send: store.send, now });
     const longWork = makeLongWork({
       open: ports.thread ?? null,
       // One object as long as the workshop is the same, so that a thread on other parts is known by it.
@@ -161,6 +169,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       stopInput: input.stop,
       redraw: () => {
         onResize();
+        if (store.state().mouse) writeSync(MOUSE_ON);
         paint.redraw();
       },
       onEnd: (status, fault) => {
@@ -168,6 +177,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         clearImmediate(frame);
         asker.stop();
         detailer.stop();
+        units.stop();
         unwatch();
         paint.close();
         stdout.off("resize", onResize);

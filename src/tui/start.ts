@@ -22,7 +22,10 @@ export interface StartOptions {
   readonly files: Files;
   /** Where brief and pins are kept between runs; null keeps nothing. */
   readonly sessionFile: string | null;
-  readonly terminal: Pick<ScreenPorts, "stdin" | "stdout" | "writeSync" | "process" | "env" | "complain" | "ascii">;
+  readonly terminal: Pick<
+    ScreenPorts,
+    "stdin" | "stdout" | "writeSync" | "process" | "env" | "complain" | "ascii" | "ground"
+  >;
 }
 
 /** The ports of the screens on real files. */

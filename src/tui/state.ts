@@ -5,9 +5,11 @@ import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
 import { FIRST_MAP, type FrontPoint, type MapView } from "./axes.ts";
+import type { Ground } from "./ground.ts";
 import type { Line, LineEdit } from "./line.ts";
 import type { CatalogueFacts, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
+import { NO_UNITS, type UnitsEffect, type UnitsMessage, type UnitsState } from "./units/state.ts";
 import { type History, NO_HISTORY, type Tried, type Work } from "./work.ts";
 
 /** The screens in their order, each with the key that goes there from anywhere. */
@@ -21,6 +23,7 @@ export const SCREEN_KEYS = {
   order: "7",
   map: "8",
   parts: "9",
+  units: "0",
   trail: "t",
 } as const;
 export type ScreenName = keyof typeof SCREEN_KEYS;
@@ -86,6 +89,8 @@ export interface State extends Work {
   readonly words: SharedWords | null;
   readonly screen: ScreenName;
   readonly help: boolean;
+  /** Clicks and the wheel are taken; the terminal's own selecting then needs its own key, mostly Shift. */
+  readonly mouse: boolean;
   readonly history: History;
   /** Every brief that was tried, the oldest first. */
   readonly trail: readonly Tried[];
@@ -125,6 +130,7 @@ export interface State extends Work {
   /** First row shown of each screen that scrolls freely; cut to what there is when drawn. */
   readonly scroll: Readonly<Record<string, number>>;
   readonly prompt: Prompt | null;
+  readonly units: UnitsState;
   readonly notice: Notice | null;
   /** The catalogue is too large to look for least changes while one types. */
   readonly slow: boolean;
@@ -170,17 +176,23 @@ export type Message =
     }
   | { readonly type: "work"; readonly work: LongJob | null }
   | { readonly type: "stop" }
+  | { readonly type: "ground"; readonly ground: Ground }
   | { readonly type: "again" }
+  | { readonly type: "mouse" }
+  | { readonly type: "click"; readonly column: number; readonly row: number }
   | { readonly type: "value" }
   | { readonly type: "faults" }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
+  | { readonly type: "units"; readonly message: UnitsMessage }
   | { readonly type: "say"; readonly notice: Notice };
 
 export type Effect =
   | { readonly type: "ask"; readonly asked: number }
   | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
+  | { readonly type: "units"; readonly effect: UnitsEffect }
   | { readonly type: "overrides"; readonly overrides: Overrides }
   | { readonly type: "stop" }
+  | { readonly type: "mouse"; readonly on: boolean }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };
@@ -223,6 +235,7 @@ export const initialState = (start: Start): State => ({
   showFaults: false,
   screen: "brief",
   help: false,
+  mouse: false,
   field: 0,
   caret: (start.values.energy ?? "").length,
   rank: "cost",
@@ -241,6 +254,7 @@ export const initialState = (start: Start): State => ({
   spread: false,
   scroll: {},
   prompt: null,
+  units: NO_UNITS,
   notice: null,
   slow: false,
 });

@@ -2,7 +2,7 @@
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
 import { briefInput } from "./briefInput.ts";
 import { catalogEngine } from "./catalogEngine.ts";
-import { answerFor, type Question } from "./engine.ts";
+import { answerFor, MOST_LISTED, type Question } from "./engine.ts";
 import type { Details, EnginePort, Piece } from "./ports.ts";
 import type { Answer } from "./state.ts";
 
@@ -22,12 +22,27 @@ function pieceFor(engine: EnginePort, question: Question, piece: Piece): Details
   return brief.ok && bank !== null ? engine[piece](brief.value, bank) : null;
 }
 
+/** Keeps the last plan: another bank or pin under the same brief needs no new search. The list is always the long one. */
+function remembering(engine: EnginePort): EnginePort {
+  let last: { readonly key: string; readonly planned: ReturnType<EnginePort["plan"]> } | null = null;
+  return {
+    ...engine,
+    plan: (brief, request) => {
+      const whole = { ...request, most: MOST_LISTED };
+      const { rank, frontOnly, quick } = whole;
+      const key = JSON.stringify([brief, rank, frontOnly, quick]);
+      if (last?.key !== key) last = { key, planned: engine.plan(brief, whole) };
+      return last.planned;
+    },
+  };
+}
+
 /** Takes the asks of one thread. `now`: milliseconds from any beginning. */
 export function threadServer(reply: (reply: ThreadReply) => void, now: () => number): (ask: ThreadAsk) => void {
   let engine: EnginePort = catalogEngine({ parts: [], families: [] });
   return (ask) => {
     if (ask.kind === "stock") {
-      engine = catalogEngine(ask);
+      engine = remembering(catalogEngine(ask));
       return;
     }
     const { id, question } = ask;

@@ -22,6 +22,7 @@ import { minorDigits, tenTo } from "../quantity/index.ts";
 import { saveBill } from "./billFile.ts";
 import { catalogEngine } from "./catalogEngine.ts";
 import type { PartValue, SaveAnswer, SharedWords, StockFacts, Workshop } from "./ports.ts";
+import { unitsOn } from "./units/work.ts";
 
 /** What was read from the catalogues. */
 export interface ReadStock {
@@ -93,6 +94,7 @@ export const workshopOn = (read: ReadStock, files: Pick<Files, "read" | "write">
   engine: catalogEngine({ ...read, files }),
   families: read.families,
   stock: read.stock,
+  units: unitsOn(read.parts, files),
   catalogue: { parts: read.parts, sources: read.sources },
   overrides: Object.assign({}, ...read.sources.map(({ overrides }) => overrides ?? {})),
   saveOverrides: (overrides) => saveAll(read, files, overrides),

@@ -3,6 +3,7 @@ import { cpus } from "node:os";
 import { benchBank } from "./bank.ts";
 import { benchBlend } from "./blend.ts";
 import { benchPlace } from "./place.ts";
+import { benchPlaceRival } from "./placeRival.ts";
 import { benchPulse } from "./pulse.ts";
 import { type BenchRow, keptOf, TABLE_HEAD, tableLine } from "./row.ts";
 import { benchSearch } from "./search.ts";
@@ -13,7 +14,7 @@ const GROUPS: Readonly<Record<string, () => readonly BenchRow[] | Promise<readon
   search: () => benchSearch(),
   bank: benchBank,
   pulse: benchPulse,
-  place: () => benchPlace(),
+  place: async () => [...benchPlace(), ...(await benchPlaceRival())],
   sheet: benchSheet,
   blend: () => benchBlend(),
   tui: () => benchTui(),

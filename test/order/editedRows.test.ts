@@ -123,17 +123,18 @@ describe("readEditedBill(text, file), mutated", () => {
           return;
         }
         const lines = text.split(/\r\n|\n|\r/).length;
-        for (const row of read.value.rows) {
-          expect(row.at).toBeLessThanOrEqual(lines);
-          for (const { key, kind } of BILL_COLUMNS) {
-            const value = row.cells.get(key)?.value ?? null;
-            if (value === null) continue;
-            if (kind === "text") expect(typeof value).toBe("string");
-            else expect(value as number).toBeGreaterThanOrEqual(0);
-          }
-        }
+        // One claim a reading: thousands of them would be slow.
+        const odd = read.value.rows.filter(
+          (row) =>
+            row.at > lines ||
+            BILL_COLUMNS.some(({ key, kind }) => {
+              const value = row.cells.get(key)?.value ?? null;
+              return value !== null && (kind === "text" ? typeof value !== "string" : !((value as number) >= 0));
+            }),
+        );
+        expect(odd).toEqual([]);
       }),
-      { numRuns: 400 },
+      { numRuns: 120 },
     );
   });
 });

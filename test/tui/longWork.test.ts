@@ -7,7 +7,7 @@ import type { Answer, Message } from "../../src/tui/state.ts";
 import { engine, parts, stateWith } from "../support/stock.ts";
 import { type FakeThread, fakeThread } from "../support/threads.ts";
 
-const question = questionOf(stateWith());
+const question = questionOf(stateWith({ screen: "layouts" }));
 
 function rig() {
   const threads: FakeThread[] = [];

@@ -2,7 +2,7 @@
 import { expect, test } from "vitest";
 import { screenFlags } from "../../src/tui/screenFlags.ts";
 
-const none = { catalog: [], resistors: null, brief: null, ascii: false };
+const none = { catalog: [], resistors: null, brief: null, ascii: false, ground: null };
 
 test.each([
   [[], none],
@@ -17,6 +17,9 @@ test.each([
     ["--catalog", "a.csv", "--catalog", "b.csv", "--brief", "b.json"],
     { ...none, catalog: ["a.csv", "b.csv"], brief: "b.json" },
   ],
+  [["--light"], { ...none, ground: "light" }],
+  [["--dark", "--ascii"], { ...none, ground: "dark", ascii: true }],
+  [["--dark", "--light"], null],
   // not ours
   [["plan"], null],
   [["plan", "--catalog", "a.csv"], null],

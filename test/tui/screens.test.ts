@@ -229,7 +229,7 @@ describe("the terminal's moods", () => {
     expect(ports.screen.written).not.toMatch(colours);
     ports.process.send("SIGTERM");
     await ended;
-    open(80, 24);
+    open(80, 24, { env: { TERM: "xterm-256color" } });
     await until((t) => t.includes("layouts fit"));
     expect(ports.screen.written).toMatch(colours);
   });

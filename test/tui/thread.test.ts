@@ -15,7 +15,7 @@ function rig() {
     ),
   };
 }
-const question = questionOf(stateWith());
+const question = questionOf(stateWith({ screen: "layouts" }));
 
 test("threadServer: before any stock a plan finds nothing; after it the plan is the engine's, the end always told", () => {
   const { replies, take } = rig();

@@ -2,12 +2,16 @@
 
 import { mostListed } from "../engine.ts";
 import { FIELDS } from "../fields.ts";
+import { type Ground, paletteFor } from "../ground.ts";
 import { withHistory } from "../history.ts";
 import { arrangementOf, selectedLayout } from "../pick.ts";
 import { RANKS } from "../ranks.ts";
 import { ask, type Change, type Message, type ScreenName, type State, still } from "../state.ts";
 import { withTried } from "../trail.ts";
+import type { UnitsMessage } from "../units/state.ts";
+import { updateUnits } from "../units/update.ts";
 import { mostScroll } from "../view/screen.ts";
+import { clickMeans } from "./click.ts";
 import { chooseField, editField, moveField } from "./form.ts";
 import { nextAxis, toggleTable, walkMap } from "./map.ts";
 import { askName, cancel, confirm, editName, saved } from "./order.ts";
@@ -27,7 +31,16 @@ function move(state: State, by: Step): Change {
   return scrollScreen(state, state.screen, by, mostScroll(state));
 }
 
-const OF_ONE_BANK: readonly ScreenName[] = ["bank", "sharing", "shot", "order"];
+const OF_ONE_BANK: readonly ScreenName[] = ["bank", "sharing", "shot", "order", "units"];
+
+/** The screen of measured units looks after itself; what it says is said with the rest. */
+function changeUnits(state: State, message: UnitsMessage): Change {
+  const { units, effects, notice } = updateUnits(state.units, message);
+  return {
+    state: { ...state, units, ...(notice === undefined ? {} : { notice }) },
+    effects: effects.map((effect) => ({ type: "units", effect })),
+  };
+}
 
 /** Going to the bank before one was chosen chooses the one under the cursor. */
 function goTo(state: State, screen: ScreenName): Change {
@@ -67,6 +80,20 @@ function opened(state: State, { stock, words, catalogue, overrides }: Message & 
   });
 }
 
+/** The terminal said how light its ground is. */
+function withGround(state: State, ground: Ground): State {
+  const deep = state.look.palette?.endsWith("256") ?? true;
+  return { ...state, look: { ...state.look, palette: paletteFor(ground, deep) } };
+}
+
+function toggleMouse(state: State): Change {
+  const mouse = !state.mouse;
+  const text = mouse
+    ? "The mouse is on: click a screen's name or a row, turn the wheel. F12 leaves it to the terminal."
+    : "The mouse is the terminal's again.";
+  return { state: { ...state, mouse, notice: { tone: "plain", text } }, effects: [{ type: "mouse", on: mouse }] };
+}
+
 /** Stops long work. What is shown stays, and is said to be of another brief where it is. */
 function stopWork(state: State): Change {
   const isPlan = state.asked !== state.answered;
@@ -90,6 +117,8 @@ function changed(state: State, message: Message): Change {
     case "redraw":
       return { state, effects: [{ type: message.type }] };
     case "edit":
+      if (state.prompt === null && state.units.typing !== null && state.screen === "units")
+        return changeUnits(state, { type: "edit", edit: message.edit });
       return state.prompt === null ? editField(state, message.edit) : editName(state, message.edit);
     case "choice":
       return chooseField(state, message.by);
@@ -150,12 +179,22 @@ function changed(state: State, message: Message): Change {
       return stopWork(state);
     case "again":
       return ask({ ...state, notice: null });
+    case "ground":
+      return still(withGround(state, message.ground));
+    case "mouse":
+      return toggleMouse(state);
+    case "click": {
+      const means = clickMeans(state, message);
+      return means === null ? still(state) : changed(state, means);
+    }
     case "value":
       return askValue(state);
     case "faults":
       return still({ ...state, showFaults: !state.showFaults, scroll: { ...state.scroll, parts: 0 } });
     case "saved":
       return saved(state, message.answer);
+    case "units":
+      return changeUnits(state, message.message);
     case "say":
       return still({ ...state, notice: message.notice });
   }

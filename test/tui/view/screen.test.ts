@@ -238,7 +238,7 @@ describe("order and help", () => {
       planned({ screen: "order", chosen: pins[0] ?? null, rows: 50 }),
       "to be chosen",
       "Not in that sum, for want of a price or a choice: ",
-      "Money to spend: 545.60 EUR for 1 line; 17 without a price",
+      "Money to spend: 545.60 EUR for 1 line; 18 without a price",
     );
     has(planned({ screen: "order", chosen: pins[0] ?? null, rows: 16 }), "Money to spend: 545.60 EUR");
   });
