@@ -14,7 +14,7 @@ import { sectionWords } from "../order/index.ts";
 import { partNames } from "./draw/partNames.ts";
 import type { SchematicProps } from "./draw/schematicProps.ts";
 import type { Cell } from "./model.ts";
-import { barsOf, pointsOf, positionsOf, spotsOf, unitName } from "./names.ts";
+import { barsOf, pointsOf, positionsOf, type Spot, spotsOf, unitName } from "./names.ts";
 
 /** One joint. A terminal is written "C3.7 +"; a bar or point is one place. */
 export interface Wire {
@@ -49,30 +49,46 @@ function chain(from: string, parts: readonly string[], to: string, conductor: Ce
   return starts.map((start, i) => joint(start, ends[i] as string, conductor));
 }
 
+/** What stands between a unit's positive terminal and the point above it. */
+function partsAbove({ series, fuse, isolating }: SchematicProps, { group, place }: Spot): readonly string[] {
+  return [
+    ...(fuse?.at === "unit" ? [`F${group}.${place}`] : []),
+    ...(isolating === null ? [] : [`RI${group}.${place}`]),
+    ...(fuse?.at === "string" && place === series ? [`F${group}`] : []),
+  ];
+}
+
 /** From the negative point through unit, fuse and isolating resistor to the positive one. */
 function unitWires(props: SchematicProps, conductor: Cell): readonly Wire[] {
-  const { series, fuse, isolating } = props;
   return spotsOf(props).flatMap((spot) => {
     const { low, high } = pointsOf(props, spot);
     const name = unitName(spot);
-    const at = `${spot.group}.${spot.place}`;
-    const parts = [
-      ...(fuse?.at === "unit" ? [`F${at}`] : []),
-      ...(isolating === null ? [] : [`RI${at}`]),
-      ...(fuse?.at === "string" && spot.place === series ? [`F${spot.group}`] : []),
-    ];
-    return [joint(low, `${name} -`, conductor), ...chain(`${name} +`, parts, high, conductor)];
+    return [joint(low, `${name} -`, conductor), ...chain(`${name} +`, partsAbove(props, spot), high, conductor)];
   });
 }
 
+/**
+ * What stands across each stage or unit. In a string it goes to the unit's own terminals: joined outside the fuse or isolating
+ * resistor it would be cut off by the fuse that opens, and the unit would keep its charge.
+ */
+const acrossOf = (props: SchematicProps, letters: string): ReturnType<typeof positionsOf> => {
+  const spots = spotsOf(props);
+  return positionsOf(props, letters).map((position, i) => {
+    const spot = props.ties === "strings" ? spots[i] : undefined;
+    return spot !== undefined && partsAbove(props, spot).length > 0
+      ? { ...position, high: `${unitName(spot)} +` }
+      : position;
+  });
+};
+
 /** A position as a whole: its elements are joined end to end on their mount beforehand. */
 const balanceWires = (props: SchematicProps): readonly Wire[] =>
-  props.balance === null ? [] : positionsOf(props, "RB").flatMap(({ name, low, high }) => chain(low, [name], high));
+  props.balance === null ? [] : acrossOf(props, "RB").flatMap(({ name, low, high }) => chain(low, [name], high));
 
 /** Cathodes to the positive side. */
 function clampWires(props: SchematicProps): readonly Wire[] {
   if (!props.clamps.positions) return [];
-  return positionsOf(props, "DC").flatMap(({ name, low, high }) => [
+  return acrossOf(props, "DC").flatMap(({ name, low, high }) => [
     joint(low, `${name} anode`),
     joint(`${name} cathode`, high),
   ]);

@@ -28,6 +28,18 @@ describe("wiresOf(props, shot)", () => {
     expect(strings).toEqual(expect.arrayContaining(["C1.7 + > TP1.7", "C1.8 + > F1 a", "F1 b > TP8"]));
   });
 
+  test("in strings a bleeder stays across its unit when the fuse opens: it goes to the unit's own terminals", () => {
+    const string = joints(wires({ shape: { ties: "strings" } }, { fuse: { at: "string", words: null } }));
+    expect(string.filter((row) => /RB1\.[78] /.test(row))).toEqual([
+      "TP1.6 > RB1.7 a",
+      "RB1.7 b > TP1.7",
+      "TP1.7 > RB1.8 a",
+      "RB1.8 b > C1.8 +",
+    ]);
+    const each = joints(wires({ shape: { ties: "strings" } }, { isolating: { resistance: 0.1, words: null } }));
+    expect(each.filter((row) => row.startsWith("RB2.3 b"))).toEqual(["RB2.3 b > C2.3 +"]);
+  });
+
   test("the earth goes to the end chosen, or nowhere", () => {
     const earthed = (earth: "positive" | "none" | "unknown") =>
       joints(wires({ earth })).filter((row) => row.includes("E1"));
