@@ -33,7 +33,8 @@ export const typesUnits: Live = (state) => onUnitsLine(state) && !state.units.re
 export const asksUnits: Live = (state) => onUnitsLine(state) && state.units.replace;
 export const onUnits: Live = (state) => on("units")(state) && state.units.typing === null;
 export const placesUnits: Live = (state) => onUnits(state) && state.units.running !== null;
-export const hasUnits: Live = (state) => onUnits(state) && state.units.lot !== null && state.units.running === null;
+export const hasUnits: Live = (state) =>
+  onUnits(state) && state.units.lot !== null && state.units.running === null && hasBank(state);
 export const hasPlaced: Live = (state) => onUnits(state) && state.units.placed !== null;
 /** Keys type: a field of the form, or the name of a file. */
 export const types: Live = (state) => asksName(state) || typesUnits(state) || (onBrief(state) && !hasChoices(state));

@@ -53,7 +53,7 @@ describe("unitShort(bank)", () => {
   test.each([
     ["a fuse", { fuse }, /fuse of the shorted unit/],
     ["a fuse before an isolating resistor", { fuse, isolatingResistance: 0.05 }, /fuse of the shorted unit/],
-    ["an isolating resistor", { isolatingResistance: 0.05 }, /isolating resistors spread the heat/],
+    ["an isolating resistor", { isolatingResistance: 0.05 }, /isolating resistors take part of the heat/],
     ["a resistor of nothing", { isolatingResistance: 0 }, /Nothing given stops it/],
     ["nothing", {}, /Nothing given stops it/],
     ["no neighbour, fuse or not", { parallel: 1, fuse }, /charger's trip must open/],

@@ -61,17 +61,18 @@ const refusalRows = (state: State, columns: number): readonly Row[] =>
 
 export function unitsPage(state: State, room: Room): Page {
   const bank = shownBank(state);
-  if (bank === null) return noBank(state, room);
   const { units, look } = state;
   const { ascii } = look;
   const { columns } = room;
   const typed = field(state, columns);
-  const head = [...bankHead(state, bank), typed.row];
+  // Without a bank there is nothing to place units in, but their file can be named already.
+  const top = bank === null ? [...noBank(state, room).rows, EMPTY_ROW] : bankHead(state, bank);
+  const head = [...top, typed.row];
   const caret = typed.caret === null ? null : { row: head.length - 1, column: typed.caret };
   const rows: Row[] = [...refusalRows(state, columns)];
   const { lot, before, running, placed } = units;
   if (lot === null) rows.push(...paragraph(ABOUT_FILE, columns, "quiet"));
-  if (lot !== null && before !== null) {
+  if (lot !== null && before !== null && bank !== null) {
     const [count, size] = bank.ties === "cross-tied" ? [bank.series, bank.parallel] : [bank.parallel, bank.series];
     const same = ({ part, series, parallel, ties }: Placed["bank"]): boolean =>
       part === bank.part && series === bank.series && parallel === bank.parallel && ties === bank.ties;

@@ -47,6 +47,15 @@ describe("unitsPage(state, room)", () => {
     expect(text(withUnits({}))).toMatch(/\nm file of units/);
   });
 
+  test("without a bank the file can be named all the same, and is seen to be", () => {
+    const state = { ...withUnits({ typing: "path", path: { text: "x.csv", caret: 5 } }), answer: null };
+    expect(text(state)).toContain("Measured units: x.csv");
+    expect(unitsPage(state, { columns: 80, rows: 30 }).caret?.column).toBe("Measured units: x.csv".length);
+    expect(text({ ...state, units: { ...state.units, typing: null, lot: done.lot ?? null } })).not.toMatch(
+      /Enter place/,
+    );
+  });
+
   test("typing: the caret stands behind the name; refused: why, below it", () => {
     const state = withUnits({
       typing: "path",
