@@ -1,13 +1,14 @@
-// Mutation testing, one layer at a time: LAYER=quantity npx stryker run .stryker.conf.mjs
-const layer = process.env.LAYER ?? "quantity";
-const files = process.env.FILES ?? `src/${layer}/**/*.ts`;
-const cache = `node_modules/.cache/mutation/${layer.replaceAll("/", "-")}`;
+// Mutation testing. A layer by all its tests: LAYER=quantity npx stryker run .stryker.conf.mjs
+// One file by its own test alone, which is quicker and stricter: ONE=bank/share npx stryker run .stryker.conf.mjs
+const one = process.env.ONE;
+const layer = one === undefined ? (process.env.LAYER ?? "quantity") : one.slice(0, one.lastIndexOf("/"));
+const cache = `node_modules/.cache/mutation/${(one ?? layer).replaceAll("/", "-")}`;
 
 export default {
   testRunner: "vitest",
   plugins: ["@stryker-mutator/vitest-runner"],
-  vitest: { dir: `test/${layer}`, related: false },
-  mutate: [files, "!src/**/index.ts"],
+  vitest: { configFile: ".stryker.vitest.mjs", dir: one === undefined ? `test/${layer}` : "test", related: false },
+  mutate: one === undefined ? [`src/${layer}/**/*.ts`, "!src/**/index.ts"] : [`src/${one}.ts`],
   ignorePatterns: ["dist", ".git"],
   tempDirName: `${cache}/work`,
   incremental: true,

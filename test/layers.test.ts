@@ -131,6 +131,22 @@ describe("owners", () => {
   });
 });
 
+describe("the same numbers on every engine", () => {
+  test("no power but a square, or one of two written numbers, outside quantity/power.ts", () => {
+    // Engines round x ** 3, x ** -1, x ** 1.5 and 10 ** -5 differently in the last figure.
+    const faults = files
+      .filter((file) => file !== "quantity/power.ts")
+      .flatMap((file) =>
+        code(file)
+          .replace(/(["'`])(?:\\.|(?!\1)[^\\])*\1/g, "")
+          .split("\n")
+          .filter((line) => /Math\.pow|\*\*(?! *2\b(?!\.))/.test(line.replace(/\b2 \*\* -?\d+\b/g, "")))
+          .map((line) => `${file}: ${line.trim()}`),
+      );
+    expect(faults).toEqual([]);
+  });
+});
+
 describe("companions", () => {
   test("every source file but an index, the entry and the tables of looks has a test of the same name", () => {
     const exempt = /(^|\/)(index|main|worker|theme)\.tsx?$|^tui\/view\//;

@@ -69,7 +69,7 @@ interface Task {
 function chooseBelow({ bank, limit, family, line, straight }: Task, most: number, choice: Choice): boolean {
   const { base, slope } = line;
   const { values, voltage, lowest, highest, tolerance, step } = family;
-  if (!(most > 0) || most < lowest * (1 - 1e-9)) return false;
+  if (!(most >= lowest * (1 - 1e-9))) return false;
   const watts = family.power * family.derating * (1 - tolerance);
   // Whatever k is, R lies between these two: at most one step of the series below the smaller of R_max and one largest element.
   const least = Math.min(most, highest) / step;
@@ -107,7 +107,6 @@ function chooseBelow({ bank, limit, family, line, straight }: Task, most: number
 export function surelyChooses(bank: FiniteHold, limit: number, family: ResistorFamily): boolean {
   if (bank.hold !== Number.POSITIVE_INFINITY) return false;
   const most = largestBalance(bank, limit);
-  if (!(most > 0)) return false;
   const watts = family.power * family.derating * (1 - family.tolerance);
   const least = Math.min(most, family.highest) / family.step;
   const elements = Math.ceil(Math.max(1, limit / family.voltage, (limit * limit) / (watts * least)));

@@ -80,17 +80,16 @@ export function holdHighest(bank: FiniteHold, resistance: number): number {
 
 /**
  * Largest balancing resistance for which the end of the hold keeps every stage at most `limit`, ohm, by bisection to 1e-9 relative.
- * Infinity when none is needed, 0 when none does.
+ * Infinity when none is needed. `endless` (ohm) is that of an endless hold: what it is where it does no better, or is 0.
  */
 export function largestBalanceForHold(bank: FiniteHold, limit: number, endless: number): number {
   // With a limit above all the volts no share is in question; the endless rule still sets a resistor that bleeds.
   if (bank.hold === Number.POSITIVE_INFINITY || limit >= bank.voltage) return endless;
   const safe = (resistance: number): boolean => holdWorst(bank, resistance) <= limit * (1 + 1e-12);
   if (safe(Number.POSITIVE_INFINITY)) return Number.POSITIVE_INFINITY;
-  let low = endless > 0 ? Math.log(endless) : Math.log(1e-6);
+  if (endless <= 0 || !safe(endless)) return endless;
+  let low = Math.log(endless);
   let high = Math.log(1e18);
-  if (endless <= 0 && !safe(1e-6)) return 0;
-  if (!safe(Math.exp(low))) return endless;
   while (high - low > 1e-9) {
     const middle = (low + high) / 2;
     if (safe(Math.exp(middle))) low = middle;

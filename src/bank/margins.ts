@@ -54,10 +54,8 @@ function weight(joined: number, causes: number): number {
 export function marginCauses(given: MarginCase): Margins {
   const unknown = given.leakage === null || given.insulation === null;
   const causes = SWITCHED.filter((cause) => !(unknown && cause === "leakage"));
-  const on = (set: number, cause: Cause): boolean => {
-    const bit = causes.indexOf(cause as (typeof causes)[number]);
-    return bit >= 0 && (set & (1 << bit)) !== 0;
-  };
+  const on = (set: number, cause: Cause): boolean =>
+    causes.some((one, bit) => one === cause && (set & (1 << bit)) !== 0);
   const worstOf = (set: number): number =>
     worstAtHold({
       ...given,

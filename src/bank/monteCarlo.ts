@@ -1,4 +1,5 @@
 // The seeded witness of the tail: banks drawn at random and counted, in chunks that add up the same in any order.
+import { FIT } from "./energy.ts";
 import { type Drawn, drawStrings, drawTied } from "./monteCarloDraw.ts";
 import { lawRange, type TailCase } from "./tailLaw.ts";
 
@@ -31,8 +32,10 @@ export function monteCarloChunk(given: TailCase, at: Drawn): Counts {
   const perBin = width > 0 ? 1 / width : 0;
   const bins = new Float64Array(BINS);
   let exceed = 0;
+  // One unit in series, or units all alike, may stand just at the limit: rounding must not count that as above it.
+  const limit = given.share * (1 + FIT);
   const count = (highest: number): void => {
-    if (highest > given.share) exceed++;
+    if (highest > limit) exceed++;
     bins[Math.min(Math.max(((highest - first) * perBin) | 0, 0), BINS - 1)]!++;
   };
   // With one unit a stage the two ties are the same bank.

@@ -87,17 +87,18 @@ export function holdingLine({ voltage, series, sharing, spread, leak }: HoldingC
 
 /**
  * Largest balancing resistance for which an endless hold keeps every stage at most `limit`, ohm.
- * Infinity when any does; 0 or less when none does (the resistor's own spread is too wide, or the limit too low).
+ * Infinity when any does; 0 when none does (the resistor's own spread is too wide, or the limit too low).
  */
 export function largestBalance(chain: HoldingChain, limit: number): number {
   const { voltage, series, sharing, spread, leak } = chain;
   const [below, above] = [1 - spread, 1 + spread];
   const reach = limit * ((series - 1) * below + above);
   const room = reach - voltage * above;
-  const drawn = leak.kind === "current" ? (series - 1) * sharing * leak.amperes : 0;
-  if (leak.kind === "current" && drawn === 0) return room >= -FIT * reach ? Number.POSITIVE_INFINITY : 0;
-  if (room <= 0) return 0;
-  if (leak.kind === "current") return room / (below * above * drawn);
-  const pull = (voltage - limit) * sharing;
-  return pull > 0 ? (room * leak.ohms) / (below * above * pull) : Number.POSITIVE_INFINITY;
+  if (leak.kind === "insulation") {
+    if (limit >= voltage) return Number.POSITIVE_INFINITY;
+    return Math.max(0, (room * leak.ohms) / (below * above * (voltage - limit) * sharing));
+  }
+  const drawn = (series - 1) * sharing * leak.amperes;
+  if (drawn === 0) return room >= -FIT * reach ? Number.POSITIVE_INFINITY : 0;
+  return Math.max(0, room / (below * above * drawn));
 }

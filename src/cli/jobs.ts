@@ -3,6 +3,9 @@
 import { Worker } from "node:worker_threads";
 import { CHUNK, type Counts, mergedCounts, monteCarlo, monteCarloChunk, type TailCase } from "../bank/index.ts";
 
+/** A worker; whoever starts it ends it. */
+export const startThread = (entry: URL): Worker => new Worker(entry);
+
 export interface CountAsk {
   readonly given: TailCase;
   readonly seed: number;
@@ -70,7 +73,7 @@ interface Counting {
 async function inThread({ entry, take, add, here, signal }: Counting): Promise<void> {
   let asked = take();
   if (asked === null) return;
-  const worker = new Worker(entry);
+  const worker = startThread(entry);
   const failed = await new Promise<boolean>((resolve) => {
     worker.on("message", (found: Counts) => {
       add(found);

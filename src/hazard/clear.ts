@@ -17,15 +17,13 @@ import { ARTICLE_360, type Tier } from "./energyClass.ts";
 /** The voltage below which no tier is ever hazardous again, V; Infinity when C is too small for any. Range: C > 0. */
 export function clearingVoltage(capacitance: number, tiers: readonly Tier[] = ARTICLE_360): number {
   const ladder = [...tiers].sort((a, b) => a.fromVoltage - b.fromVoltage);
-  let lowest = Number.POSITIVE_INFINITY;
-  ladder.forEach((tier, index) => {
-    // A stricter tier below keeps holding: the threshold never rises with voltage.
+  // A stricter tier below keeps holding: the threshold never rises with voltage, so a tier that is hazardous only from where the next
+  // begins is never the lowest.
+  const from = ladder.map((tier, index) => {
     const energy = Math.min(...ladder.slice(0, index + 1).map((one) => one.energy));
-    const from = Math.max(tier.fromVoltage, Math.sqrt((2 * energy) / capacitance));
-    const next = ladder[index + 1]?.fromVoltage ?? Number.POSITIVE_INFINITY;
-    if (from < next) lowest = Math.min(lowest, from);
+    return Math.max(tier.fromVoltage, Math.sqrt((2 * energy) / capacitance));
   });
-  return lowest;
+  return Math.min(...from);
 }
 
 /**

@@ -46,22 +46,26 @@ const OWN_SCALE: Partial<Record<Dimension, readonly (readonly [limit: number, un
   count: [[Number.POSITIVE_INFINITY, "", 1]],
 };
 
-/** Rounds to significant digits. Range: any finite value; zero stays zero. */
+/** value times 10^power, by its decimal figures, so that no binary error enters. */
+function shifted(value: number, power: number): number {
+  const [figure, exponent] = value.toExponential().split("e");
+  return Number(`${figure}e${Number(exponent) + power}`);
+}
+
+/** Rounds to significant digits. Range: any value; zero stays zero, what is not finite stays itself. */
 export function roundTo(value: number, digits: number, rounding: Rounding = "nearest"): number {
-  if (value === 0 || !Number.isFinite(value)) return value;
   const near = Number(value.toPrecision(digits));
   if (rounding === "nearest" || Math.abs(near - value) <= Math.abs(value) * 1e-12) return near;
   const wrong = rounding === "down" ? near > value : near < value;
   if (!wrong) return near;
   // Counted in the last figure of the value itself: of what it was rounded to, 0.99999 down would lose a figure (0.999).
-  const power = Number(value.toExponential(15).split("e")[1] ?? 0) - (digits - 1);
-  const last = Math.round(Number(`${near}`.includes("e") ? near / 10 ** power : `${near}e${-power}`));
+  const power = Number(value.toExponential(15).split("e")[1]) - (digits - 1);
+  const last = Math.round(shifted(near, -power));
   return Number(`${last + (rounding === "down" ? -1 : 1)}e${power}`);
 }
 
 /** A number with exactly `digits` significant figures and no exponent, where it has up to seven places before the point. */
 function figures(value: number, digits: number): string {
-  if (value === 0) return "0";
   const before = Math.floor(Math.log10(Math.abs(value))) + 1;
   return value.toFixed(Math.min(Math.max(digits - before, 0), 20));
 }
@@ -73,23 +77,22 @@ export function formatQuantity(
   options: FormatOptions = {},
 ): string {
   const { digits = 4, rounding = "nearest" } = options;
-  if (value === null || value === undefined) return "unknown";
-  if (!Number.isFinite(value)) return value > 0 ? "unlimited" : "unknown";
-  const rounded = roundTo(value, digits, rounding);
-  const own = OWN_SCALE[dimension];
-  if (own) {
-    const [, unit, factor] = own.find(([limit]) => Math.abs(rounded) < limit) ?? own[own.length - 1] ?? [0, "", 1];
-    const shown = trimZeros(figures(roundTo(value / factor, digits, rounding), digits));
+  const known = value ?? Number.NaN;
+  if (!Number.isFinite(known)) return known > 0 ? "unlimited" : "unknown";
+  const rounded = roundTo(known, digits, rounding);
+  for (const [limit, unit, factor] of OWN_SCALE[dimension] ?? []) {
+    if (Math.abs(rounded) >= limit) continue;
+    const shown = trimZeros(figures(roundTo(known / factor, digits, rounding), digits));
     return unit === "" ? shown : `${shown} ${unit}`;
   }
-  if (dimension === "time") return formatTime(value, digits, rounding);
+  if (dimension === "time") return formatTime(known, digits, rounding);
   const { symbol } = DIMENSIONS[dimension];
   if (rounded === 0) return `0 ${symbol}`;
   const power = Math.min(Math.max(Math.floor(Math.floor(Math.log10(Math.abs(rounded)) + 1e-12) / 3) * 3, -15), 12);
-  const mantissa = Number(`${rounded}`.includes("e") ? rounded / 10 ** power : `${rounded}e${-power}`);
-  return `${trimZeros(figures(roundTo(mantissa, digits), digits))} ${PRINTED[power] ?? ""}${symbol}`;
+  return `${trimZeros(figures(shifted(rounded, -power), digits))} ${PRINTED[power]}${symbol}`;
 }
 
+/** Units of time below one day, each up to where the next is easier to read. */
 const TIME_STEPS: readonly (readonly [below: number, unit: string, seconds: number])[] = [
   [1e-6, "ns", 1e-9],
   [1e-3, "µs", 1e-6],
@@ -97,17 +100,16 @@ const TIME_STEPS: readonly (readonly [below: number, unit: string, seconds: numb
   [600, "s", 1],
   [7200, "min", 60],
   [172800, "h", 3600],
-  [Number.POSITIVE_INFINITY, "d", 86400],
 ];
+const DAY = [Number.POSITIVE_INFINITY, "d", 86400] as const;
 
 /** Seconds with prefixes below one second, then s, min, h, d; rounded before the unit is chosen. */
 function formatTime(value: number, digits: number, rounding: Rounding): string {
   if (value === 0) return "0 s";
-  for (const [below, unit, seconds] of TIME_STEPS) {
-    const rounded = roundTo(value / seconds, digits, rounding);
-    if (Math.abs(rounded) * seconds < below * (1 - 1e-12)) return `${trimZeros(figures(rounded, digits))} ${unit}`;
-  }
-  return "unlimited";
+  const inUnits = (seconds: number): number => roundTo(value / seconds, digits, rounding);
+  const [, unit, seconds] =
+    TIME_STEPS.find(([below, , size]) => Math.abs(inUnits(size)) * size < below * (1 - 1e-12)) ?? DAY;
+  return `${trimZeros(figures(inUnits(seconds), digits))} ${unit}`;
 }
 
 function trimZeros(text: string): string {

@@ -49,12 +49,13 @@ export function parsePrice(text: string, currency: string, decimalComma: boolean
     });
   }
   if (mark === (decimalComma === true ? "." : ",") && fraction.length === 3 && !/^0+$/.test(whole)) {
-    const want = `${whole}${fraction} or ${whole}.${fraction}, without the mark between`;
+    const [name, other] = mark === "," ? ["comma", "."] : ["point", ","];
+    const want = `${whole}${fraction} if the ${name} groups thousands, ${whole}${other}${fraction} if it is the decimal mark`;
     return refused({ code: "ambiguous-comma", place: {}, read: JSON.stringify(text), want });
   }
-  const major = Number(`${whole}.${fraction || "0"}`);
+  const major = Number(`${whole}.${fraction}`);
   if (!(major <= 1e9)) return refused({ code: "bad-price", place: {}, read: JSON.stringify(text), want: WANT });
-  return accepted(Number(`${whole}.${fraction || "0"}e${minorDigits(currency)}`));
+  return accepted(Number(`${whole}.${fraction}e${minorDigits(currency)}`));
 }
 
 /** Cost of a quantity at a unit price, whole minor units, halves up. */
@@ -65,6 +66,7 @@ export const toMajor = (minor: number, currency: string): number => Number(`${mi
 
 /** Minor units as text: `12.34 EUR`. Unknown prints `no price`. */
 export function formatMoney(minor: number | null | undefined, currency: string): string {
-  if (minor === null || minor === undefined || !Number.isFinite(minor)) return "no price";
-  return `${toMajor(Math.round(minor), currency).toFixed(minorDigits(currency))} ${currency}`;
+  const known = minor ?? Number.NaN;
+  if (!Number.isFinite(known)) return "no price";
+  return `${toMajor(Math.round(known), currency).toFixed(minorDigits(currency))} ${currency}`;
 }

@@ -3,7 +3,7 @@
 // The decimal number and the unit's power of ten are joined before conversion, so that 470 uF is the double nearest to 0.00047.
 // Codes with a letter for the decimal point follow IEC 60062. Source: [IEC60062] (letters read second hand; T from memory).
 
-import { DIMENSIONS, type Dimension, dimensionOf, PREFIXES, type Scale, unitScale } from "./dimension.ts";
+import { type Dimension, dimensionOf, PREFIXES, type Scale, unitScale } from "./dimension.ts";
 import { accepted, type Read, refused } from "./refusal.ts";
 
 export interface ParseOptions {
@@ -58,7 +58,9 @@ const EXAMPLES: Readonly<Record<Dimension, string>> = {
 
 /** What would be accepted for a dimension, in words. */
 export const example = (dimension: Dimension): string =>
-  dimension === "count" ? "a number such as 12" : `a number with a unit such as "${EXAMPLES[dimension]}"`;
+  dimension === "count"
+    ? `a number such as ${EXAMPLES.count}`
+    : `a number with a unit such as "${EXAMPLES[dimension]}"`;
 
 /**
  * Reads a quantity. Result: SI number, finite. Refuses, with what was read and what would be accepted: empty text, no number,
@@ -76,7 +78,7 @@ export function parseQuantity(text: string, dimension: Dimension, options: Parse
   if (coded !== null) return finite(coded, text, dimension);
   const match = NUMBER.exec(cell);
   if (match === null) return no("not-a-number", example(dimension));
-  const [, sign = "", whole = "", fraction = "", power = "0", unitText = ""] = match;
+  const [, sign = "", whole = "", fraction = "", power = "0", unit = ""] = match;
   const integer = whole.replace(/[^\d]/g, "");
   if (
     fraction.startsWith(options.decimalComma === true ? "." : ",") &&
@@ -95,8 +97,7 @@ export function parseQuantity(text: string, dimension: Dimension, options: Parse
       `${integer || "0"}.${fraction.slice(1)}, with a point: commas separate the cells of this table`,
     );
   }
-  const digits = `${sign === "" || sign === "+" ? "" : "-"}${integer || "0"}.${fraction.slice(1) || "0"}`;
-  const unit = unitText.trim();
+  const digits = `${sign === "" || sign === "+" ? "" : "-"}${integer}.${fraction.slice(1)}`;
   let scale: Scale | null = bare;
   if (unit !== "") {
     scale = unitScale(unit, dimension) ?? barePrefix(unit, dimension);
@@ -116,7 +117,10 @@ function finite(value: number, text: string, dimension: Dimension): Read<number>
   return refused({ code: "not-finite", place: {}, read: JSON.stringify(text), want: example(dimension) });
 }
 
-/** Quantities that are written with a prefix alone, as on parts and their diagrams. A hold of "5 m" is minutes to one reader, not to another. */
+/**
+ * Quantities that are written with a prefix alone, as on parts and their diagrams. A hold of "5 m" or "1m30" is minutes to one reader
+ * and not to another, a height of "1m50" metres; so those take no prefix without its unit. The bare unit of every one of these is SI.
+ */
 const MARKED: readonly Dimension[] = [
   "capacitance",
   "resistance",
@@ -129,10 +133,8 @@ const MARKED: readonly Dimension[] = [
 
 /** "470u": a prefix without its unit. */
 function barePrefix(unit: string, dimension: Dimension): Scale | null {
-  if (!MARKED.includes(dimension)) return null;
-  const [first] = DIMENSIONS[dimension].prefixed;
-  if (first === undefined || !Object.hasOwn(PREFIXES, unit)) return null;
-  return { exponent: (PREFIXES[unit] ?? 0) + first.exponent, factor: 1 };
+  const exponent = MARKED.includes(dimension) && Object.hasOwn(PREFIXES, unit) ? PREFIXES[unit] : undefined;
+  return exponent === undefined ? null : { exponent, factor: 1 };
 }
 
 /** "4m7", "R47", "47K3": the letter is the decimal point and the multiplier. Null when the text is no such code. */
@@ -140,11 +142,9 @@ function codeValue(cell: string, dimension: Dimension): number | null {
   const match = CODE.exec(cell);
   if (match === null) return null;
   const [, before = "", letter = "", after = "", unit = ""] = match;
-  const [first] = DIMENSIONS[dimension].prefixed;
-  if (first === undefined) return null;
   const letters = CODE_LETTERS[dimension] ?? PREFIXES;
-  const power = Object.hasOwn(letters, letter) ? letters[letter] : undefined;
-  if (power === undefined || letter === "e" || letter === "E") return null;
-  if (unit !== "" && unitScale(unit, dimension)?.exponent !== first.exponent) return null;
-  return Number(`${before || "0"}.${after}e${power + first.exponent}`);
+  const power = MARKED.includes(dimension) && Object.hasOwn(letters, letter) ? letters[letter] : undefined;
+  if (power === undefined) return null;
+  if (unit !== "" && unitScale(unit, dimension)?.exponent !== 0) return null;
+  return Number(`${before}.${after}e${power}`);
 }

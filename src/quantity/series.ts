@@ -42,7 +42,7 @@ export function seriesBetween(name: SeriesName, low: number, high: number): read
   const table = SERIES[name];
   const width = table[0] === 100 ? 2 : 1;
   const values: number[] = [];
-  for (let decade = Math.floor(Math.log10(low)) - 1; decade <= Math.floor(Math.log10(high)) + 1; decade++) {
+  for (let decade = Math.floor(Math.log10(low)); decade <= Math.floor(Math.log10(high)) + 1; decade++) {
     for (const digits of table) {
       const value = Number(`${digits}e${decade - width}`);
       if (value >= low * (1 - SAME) && value <= high * (1 + SAME)) values.push(value);

@@ -38,7 +38,22 @@ export const TOLERANCE_LETTERS: Readonly<Record<string, Tolerance>> = {
 const WANT =
   'a tolerance such as "20 %", "+-20 %", "-10/+50 %" or a letter such as M, below 100 % downwards and at most 100 % upwards';
 const PAIR = /^([+\-−])\s*([\d.,]+)\s*%?\s*[/;\s]\s*([+\-−])\s*([\d.,]+)\s*(%?)$/u;
-const ZERO_PAIR = /^0\s*\/\s*\+\s*([\d.,]+)\s*(%?)$/u;
+const ZERO_PAIR = /^0\s*\/\s*\+\s*([\d.,]+\s*%?)$/u;
+
+/** The two sides as written, each with the percent sign of the pair; null when both point the same way. */
+function sides(cell: string): readonly [low: string, high: string] | null {
+  const pair = PAIR.exec(cell);
+  if (pair) {
+    const [, sign, first, otherSign, second, percent] = pair;
+    if ((sign === "+") === (otherSign === "+")) return null;
+    const [low, high] = sign === "+" ? [second, first] : [first, second];
+    return [`${low}${percent}`, `${high}${percent}`];
+  }
+  const zero = ZERO_PAIR.exec(cell);
+  if (zero) return ["0 %", `${zero[1]}`];
+  const body = cell.replace(/^(\+\/?-|±|\+\/−)/u, "");
+  return [body, body];
+}
 
 /** Reads a tolerance; a bare number takes the scale of its heading (`bare`), null refuses it. */
 export function parseTolerance(
@@ -50,31 +65,13 @@ export function parseTolerance(
   const no = (code: string): Read<never> => refused({ code, place: {}, read: JSON.stringify(text), want: WANT });
   const letter = Object.hasOwn(TOLERANCE_LETTERS, cell) ? TOLERANCE_LETTERS[cell] : undefined;
   if (letter) return accepted(letter);
-  const part = (digits: string, sign: string): number | null => {
-    const scale = sign === "%" ? { exponent: -2, factor: 1 } : bare;
-    const read = parseQuantity(digits, "fraction", { bare: scale, decimalComma });
-    return read.ok ? read.value : null;
-  };
-  const pair = PAIR.exec(cell);
-  const zero = ZERO_PAIR.exec(cell);
-  let low: number | null;
-  let high: number | null;
-  if (pair) {
-    const [, s1, a = "", s2, b = "", percent = ""] = pair;
-    if ((s1 === "+") === (s2 === "+")) return no("bad-tolerance");
-    low = part(s1 === "+" ? b : a, percent);
-    high = part(s1 === "+" ? a : b, percent);
-  } else if (zero) {
-    low = 0;
-    high = part(zero[1] ?? "", zero[2] ?? "");
-  } else {
-    const body = cell.replace(/^(\+\/?-|±|\+\/−)\s*/u, "");
-    const read = parseQuantity(body, "fraction", { bare, decimalComma });
-    if (!read.ok) return no(read.refusals[0]?.code === "missing-unit" ? "missing-unit" : "bad-tolerance");
-    low = read.value;
-    high = read.value;
-  }
-  if (low === null || high === null) return no("bad-tolerance");
-  if (low < 0 || high < 0 || low >= 1 || high > 1) return no("tolerance-range");
-  return accepted({ low, high });
+  const written = sides(cell);
+  if (written === null) return no("bad-tolerance");
+  const side = (digits: string): Read<number> => parseQuantity(digits, "fraction", { bare, decimalComma });
+  const [low, high] = [side(written[0]), side(written[1])];
+  if (!low.ok) return no(low.refusals[0]?.code === "missing-unit" ? "missing-unit" : "bad-tolerance");
+  if (!high.ok) return no(high.refusals[0]?.code === "missing-unit" ? "missing-unit" : "bad-tolerance");
+  // A sign that is left stands in both sides alike, so the lower one tells.
+  if (low.value < 0 || low.value >= 1 || high.value > 1) return no("tolerance-range");
+  return accepted({ low: low.value, high: high.value });
 }

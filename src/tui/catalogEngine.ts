@@ -1,6 +1,6 @@
 // The engine behind the screens: the search on one set of parts and resistors, each answer pure.
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
-import { cautionsOf } from "../cli/index.ts";
+import { cautionsOf, type Files } from "../cli/index.ts";
 import { cautionsFor, DEFERENCE } from "../hazard/index.ts";
 import { billOf } from "../order/index.ts";
 import { accepted } from "../quantity/index.ts";
@@ -21,6 +21,7 @@ import {
   shotOf,
 } from "../search/index.ts";
 import { type Arrangement, type EnginePort, MOST_FRONT } from "./ports.ts";
+import { recordReader } from "./record.ts";
 
 /** Said on every copy of an order: the standing cautions, and to whom this program defers. */
 const BILL_CAUTIONS: readonly string[] = [...cautionsFor({}), ...DEFERENCE].map(({ short }) => short);
@@ -33,6 +34,8 @@ const SWEPT = 41;
 export interface Stock {
   readonly parts: readonly Capacitor[];
   readonly families: readonly ResistorFamily[];
+  /** Where the file of a recorded current is read; null or left out: such a load stays unread. */
+  readonly files?: Pick<Files, "read"> | null;
 }
 
 /** A layout's own name taken apart; the part may hold any text. */
@@ -50,7 +53,8 @@ export function arrangementNamed(id: string): Arrangement | null {
   };
 }
 
-export function catalogEngine({ parts, families }: Stock): EnginePort {
+export function catalogEngine({ parts, families, files = null }: Stock): EnginePort {
+  const recorded = files === null ? null : recordReader(files);
   const byName = new Map(parts.map((unit) => [unit.part, unit]));
   const currencyOf = (brief: Brief): string | null => {
     const read = planCurrency(brief, parts, families);
@@ -75,7 +79,10 @@ export function catalogEngine({ parts, families }: Stock): EnginePort {
       .filter((layout) => layout !== null);
   };
   return {
-    readBrief: (values) => readBrief(values),
+    readBrief: (values) => {
+      const whole = recorded === null ? accepted(values) : recorded(values);
+      return whole.ok ? readBrief(whole.value) : whole;
+    },
     plan: (brief, { rank, most, frontOnly, quick, progress }) => {
       const planned = plan({ brief, parts, families, limit: most, rank, quick, progress });
       if (!planned.ok || !frontOnly) return planned;

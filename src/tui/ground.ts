@@ -14,7 +14,7 @@ const LIGHT_FROM = 0.7;
 export function groundTold(report: string): Ground | null {
   const match = /^\x1b\]11;rgba?:([0-9a-f]{1,4})\/([0-9a-f]{1,4})\/([0-9a-f]{1,4})/i.exec(report);
   if (match === null) return null;
-  const part = (hex: string): number => (Number.parseInt(hex, 16) / (16 ** hex.length - 1)) * 255;
+  const part = (hex: string): number => (Number.parseInt(hex, 16) / Number.parseInt("f".repeat(hex.length), 16)) * 255;
   const light = luminance([part(match[1] ?? "0"), part(match[2] ?? "0"), part(match[3] ?? "0")]);
   return light <= DARK_UP_TO ? "dark" : light >= LIGHT_FROM ? "light" : "unknown";
 }

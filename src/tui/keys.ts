@@ -4,6 +4,7 @@ import * as live from "./live.ts";
 import { mouseTold } from "./mouse.ts";
 import { type Message, SCREEN_KEYS, SCREENS, type ScreenName, type State } from "./state.ts";
 import type { InputEvent } from "./tokens.ts";
+import type { UnitsMessage } from "./units/state.ts";
 
 export interface KeyRow {
   readonly keys: readonly string[];
@@ -28,7 +29,7 @@ const saves = live.all(live.on("bank", "order"), live.hasBank);
 const tracks = live.all(live.on("trail"), live.hasTrail);
 const sets = live.all(live.on("parts"), live.hasParts);
 const moves: live.Live = (state) =>
-  picks(state) || compares(state) || shows(state) || tracks(state) || live.on("parts")(state);
+  picks(state) || compares(state) || shows(state) || tracks(state) || live.on("parts")(state) || live.onUnits(state);
 
 /** What lies on top comes first: the first live row wins. */
 const ON_TOP: readonly Short[] = [
@@ -42,6 +43,19 @@ const ON_TOP: readonly Short[] = [
   [["down"], "", "scroll", { type: "move", by: 1 }, live.inHelp],
   [["pageup"], "", "scroll", { type: "move", by: "pageBack" }, live.inHelp],
   [["pagedown", "space"], "", "scroll", { type: "move", by: "page" }, live.inHelp],
+];
+
+const units = (message: UnitsMessage): Message => ({ type: "units", message });
+
+const UNITS: readonly Short[] = [
+  [["enter"], "Enter", "read or save", units({ type: "confirm" }), live.typesUnits, 1],
+  [["escape"], "Esc", "leave the name", units({ type: "cancel" }), live.typesUnits, 2],
+  [["y"], "y", "replace the file", units({ type: "confirm" }), live.asksUnits, 1],
+  [["n", "escape"], "n", "keep the file", units({ type: "cancel" }), live.asksUnits, 2],
+  [["escape"], "Esc", "stop with the best so far", units({ type: "cancel" }), live.placesUnits, 1],
+  [["m"], "m", "file of units", units({ type: "name" }), live.onUnits, 1],
+  [["enter"], "Enter", "place", units({ type: "place" }), live.hasUnits, 2],
+  [["e", "s"], "e", "save list", units({ type: "list" }), live.hasPlaced, 3],
 ];
 
 const FORM: readonly Short[] = [
@@ -108,7 +122,7 @@ const LISTS: readonly Short[] = [
     "Esc",
     "layouts",
     { type: "go", screen: "layouts" },
-    live.on("compare", "bank", "sharing", "shot", "order", "trail", "map", "parts"),
+    live.on("compare", "bank", "sharing", "shot", "order", "trail", "map", "parts", "units"),
     7,
   ],
   [["escape"], "Esc", "brief", { type: "go", screen: "brief" }, live.on("layouts"), 7],
@@ -163,9 +177,15 @@ const EVERYWHERE: readonly Short[] = [
   [["ctrl+l"], "Ctrl-L", "draw again", { type: "redraw" }, live.always, null],
 ];
 
-export const KEYS: readonly KeyRow[] = [...ON_TOP, ...FORM, ...TYPING, ...LISTS, ...WHAT_IF, ...EVERYWHERE].map(
-  ([keys, shown, words, message, isLive, rank = null]) => ({ keys, shown, words, message, live: isLive, rank }),
-);
+export const KEYS: readonly KeyRow[] = [
+  ...ON_TOP,
+  ...UNITS,
+  ...FORM,
+  ...TYPING,
+  ...LISTS,
+  ...WHAT_IF,
+  ...EVERYWHERE,
+].map(([keys, shown, words, message, isLive, rank = null]) => ({ keys, shown, words, message, live: isLive, rank }));
 
 /** What the terminal said by itself: its ground, or the mouse. The wheel moves like the keys. */
 function messageOfReport(state: State, text: string): Message | null {

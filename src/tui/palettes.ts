@@ -3,6 +3,7 @@
 // Contrast (L1 + 0.05) / (L2 + 0.05) of relative luminances, as WCAG 2.2 has them (1.4.3 and "relative luminance", from memory).
 // Numbers from 16 on are fixed the world over (a cube of six levels and 24 greys); the first sixteen are the terminal's own, so
 // few are used, and on an unknown ground none.
+import { power } from "../quantity/index.ts";
 
 /** Meanings that have a colour; the rest of the styles live by bold and inverse alone. */
 export type Hue = "title" | "quiet" | "good" | "warn" | "bad" | "accent";
@@ -47,7 +48,7 @@ export function rgbOf(number: number): Rgb {
 
 const linear = (part: number): number => {
   const share = part / 255;
-  return share <= 0.04045 ? share / 12.92 : ((share + 0.055) / 1.055) ** 2.4;
+  return share <= 0.04045 ? share / 12.92 : power((share + 0.055) / 1.055, 2.4);
 };
 
 /** Relative luminance, 0 black to 1 white. */

@@ -18,16 +18,14 @@ import type {
   ShotReport,
 } from "../search/index.ts";
 import type { TerminalInput } from "./input.ts";
+import type { SaveAnswer } from "./saveText.ts";
 import type { ProcessPort } from "./session.ts";
+import type { UnitsPort } from "./units/work.ts";
+
+export type { SaveAnswer };
 
 /** One arrangement by name: what is pinned, chosen and saved. */
 export type Arrangement = Layout;
-
-/** How saving ended: done, the file is there already, or why not in plain words. */
-export type SaveAnswer =
-  | { readonly kind: "saved"; readonly path: string }
-  | { readonly kind: "exists"; readonly path: string }
-  | { readonly kind: "trouble"; readonly words: string };
 
 export interface PlanRequest {
   readonly rank: Ranking;
@@ -140,6 +138,7 @@ export interface Workshop {
   readonly engine: EnginePort;
   readonly stock: StockFacts;
   readonly words: SharedWords;
+  readonly units: UnitsPort;
   readonly catalogue: CatalogueFacts;
   /** What the engine was made of, for another one in a thread. */
   readonly families: readonly ResistorFamily[];

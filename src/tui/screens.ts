@@ -15,6 +15,7 @@ import { openSession } from "./session.ts";
 import { ask, type Effect, type Message } from "./state.ts";
 import { createStore } from "./store.ts";
 import { screenTrouble } from "./terminal.ts";
+import { makeUnitsRunner } from "./units/runner.ts";
 import { update } from "./update/update.ts";
 import type { Mounted } from "./view/mount.ts";
 import { drawScreen } from "./view/screen.ts";
@@ -116,7 +117,9 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else if (effect.type === "redraw") paint.redraw();
       else if (effect.type === "mouse") writeSync(effect.on ? MOUSE_ON : MOUSE_OFF);
       else if (effect.type === "overrides") setByHand(effect.overrides);
-      else if (workshop !== null)
+      else if (effect.type === "units") {
+        if (workshop !== null) units.run(effect.effect, workshop.units);
+      } else if (workshop !== null)
         send({ type: "saved", answer: workshop.exportBill(effect.bill, effect.path, effect.replace) });
     };
     const store = createStore({
@@ -129,6 +132,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       },
     });
     const now = (): number => performance.now();
+    const units = makeUnitsRunner({ state: store.state, send: store.send, now });
     const longWork = makeLongWork({
       open: ports.thread ?? null,
       // One object as long as the workshop is the same, so that a thread on other parts is known by it.
@@ -173,6 +177,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         clearImmediate(frame);
         asker.stop();
         detailer.stop();
+        units.stop();
         unwatch();
         paint.close();
         stdout.off("resize", onResize);

@@ -9,6 +9,7 @@ import type { Ground } from "./ground.ts";
 import type { Line, LineEdit } from "./line.ts";
 import type { CatalogueFacts, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
+import { NO_UNITS, type UnitsEffect, type UnitsMessage, type UnitsState } from "./units/state.ts";
 import { type History, NO_HISTORY, type Tried, type Work } from "./work.ts";
 
 /** The screens in their order, each with the key that goes there from anywhere. */
@@ -22,6 +23,7 @@ export const SCREEN_KEYS = {
   order: "7",
   map: "8",
   parts: "9",
+  units: "0",
   trail: "t",
 } as const;
 export type ScreenName = keyof typeof SCREEN_KEYS;
@@ -128,6 +130,7 @@ export interface State extends Work {
   /** First row shown of each screen that scrolls freely; cut to what there is when drawn. */
   readonly scroll: Readonly<Record<string, number>>;
   readonly prompt: Prompt | null;
+  readonly units: UnitsState;
   readonly notice: Notice | null;
   /** The catalogue is too large to look for least changes while one types. */
   readonly slow: boolean;
@@ -180,11 +183,13 @@ export type Message =
   | { readonly type: "value" }
   | { readonly type: "faults" }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
+  | { readonly type: "units"; readonly message: UnitsMessage }
   | { readonly type: "say"; readonly notice: Notice };
 
 export type Effect =
   | { readonly type: "ask"; readonly asked: number }
   | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
+  | { readonly type: "units"; readonly effect: UnitsEffect }
   | { readonly type: "overrides"; readonly overrides: Overrides }
   | { readonly type: "stop" }
   | { readonly type: "mouse"; readonly on: boolean }
@@ -249,6 +254,7 @@ export const initialState = (start: Start): State => ({
   spread: false,
   scroll: {},
   prompt: null,
+  units: NO_UNITS,
   notice: null,
   slow: false,
 });

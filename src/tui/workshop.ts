@@ -18,10 +18,11 @@ import {
   valueText,
   withoutBalanceWords,
 } from "../cli/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import { saveBill } from "./billFile.ts";
 import { catalogEngine } from "./catalogEngine.ts";
 import type { PartValue, SaveAnswer, SharedWords, StockFacts, Workshop } from "./ports.ts";
+import { unitsOn } from "./units/work.ts";
 
 /** What was read from the catalogues. */
 export interface ReadStock {
@@ -31,7 +32,7 @@ export interface ReadStock {
   readonly sources: readonly Source[];
 }
 
-const majorOf = (minor: number, currency: string | undefined): number => minor / 10 ** minorDigits(currency ?? "EUR");
+const majorOf = (minor: number, currency: string | undefined): number => minor / tenTo(minorDigits(currency ?? "EUR"));
 
 /** "10: 3.90; 100: 3.10", as a catalogue has them. */
 const breaksText = ({ priceBreaks = [], currency }: Capacitor): string =>
@@ -89,10 +90,11 @@ function saveAll({ parts, sources }: ReadStock, files: Pick<Files, "write">, ove
   return { kind: "saved", path };
 }
 
-export const workshopOn = (read: ReadStock, files: Pick<Files, "write">): Workshop => ({
-  engine: catalogEngine(read),
+export const workshopOn = (read: ReadStock, files: Pick<Files, "read" | "write">): Workshop => ({
+  engine: catalogEngine({ ...read, files }),
   families: read.families,
   stock: read.stock,
+  units: unitsOn(read.parts, files),
   catalogue: { parts: read.parts, sources: read.sources },
   overrides: Object.assign({}, ...read.sources.map(({ overrides }) => overrides ?? {})),
   saveOverrides: (overrides) => saveAll(read, files, overrides),

@@ -27,6 +27,13 @@ const stage = (capacitance: number, leakageCurrent = 0, conductance = 0, resista
 
 const draw = uniformFrom(streamState(7, 0));
 
+describe("crossTiedChain(stages, resistances)", () => {
+  test("units of a stage in parallel: C, leakage and conductance add, the resistor is its own; without one Infinity", () => {
+    const unit = (k: number) => ({ capacitance: k, leakageCurrent: 10 * k, conductance: 100 * k });
+    expect(crossTiedChain([[unit(1), unit(2)], [unit(4)]], [47])).toEqual([stage(3, 30, 300, 47), stage(4, 40, 400)]);
+  });
+});
+
 describe("chargingShares(chain)", () => {
   test("one stage has all of it", () => {
     expect(chargingShares([stage(1e-3)])).toEqual([1]);

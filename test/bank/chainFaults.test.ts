@@ -72,8 +72,27 @@ describe("shortInStage({ capacitance, units, voltage, isolation })", () => {
     expect(found.action).toBeNull();
   });
 
-  test("a unit alone in its stage has no neighbours: zero, known", () => {
-    expect(shortInStage({ capacitance: 1, units: 1, voltage: 1, isolation: null }).peakCurrent).toBe(0);
+  test.each([null, 0.05])("a unit alone in its stage has no neighbours: zero, known, isolation %s", (isolation) =>
+    expect(shortInStage({ capacitance: 2, units: 1, voltage: 3, isolation })).toEqual({
+      ownEnergy: 9,
+      neighbourEnergy: 0,
+      peakCurrent: 0,
+      faultedLegEnergy: 0,
+      neighbourLegEnergy: 0,
+      action: 0,
+    }),
+  );
+
+  test("two to six units: the legs' joules are the neighbours' energy, and the action is the decay of the peak, i^2 tau/2", () => {
+    for (let units = 2; units <= 6; units++) {
+      const [capacitance, voltage, isolation] = [47e-6, 900, 0.3];
+      const found = shortInStage({ capacitance, units, voltage, isolation });
+      const neighbours = units - 1;
+      expect(found.faultedLegEnergy! + neighbours * found.neighbourLegEnergy!).toBeCloseTo(found.neighbourEnergy, 9);
+      // All neighbours together see their own legs in parallel and then the faulted one.
+      const tau = (isolation + isolation / neighbours) * neighbours * capacitance;
+      expect(found.action).toBeCloseTo((found.peakCurrent! ** 2 * tau) / 2, 9);
+    }
   });
 });
 
@@ -81,7 +100,20 @@ describe("withShort(chain, k), afterShortHeld(chain, voltages, k)", () => {
   test("methods A15: held at 1600 V the three that remain stand at 533.333 V [methods-derived A15]", () => {
     const chain = string([1, 1, 1, 1]);
     for (const v of afterShortHeld(chain, [400, 400, 400, 400], 2)) expect(v).toBeCloseTo(533.333333333, 8);
+    expect(withShort(chain, 2).chain).toEqual([chain[0], chain[1], chain[3]]);
     expect(withShort(chain, 2)).toMatchObject({ positions: [0, 1, 3], seriesResistance: 0 });
+  });
+});
+
+describe("afterShortHeld(chain, voltages, k) of unlike stages", () => {
+  test("every stage that remains takes the same charge, and the sum stays what the ends are held at", () => {
+    const chain = string([1, 2, 4, 8]);
+    const before = [100, 80, 60, 40];
+    const after = afterShortHeld(chain, before, 1);
+    expect(total(after)).toBeCloseTo(280, 10);
+    const charges = [0, 2, 3].map((i, at) => chain[i]!.capacitance * (after[at]! - before[i]!));
+    for (const charge of charges) expect(charge).toBeCloseTo(charges[0]!, 10);
+    expect(charges[0]).toBeGreaterThan(0);
   });
 });
 

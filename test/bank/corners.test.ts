@@ -107,6 +107,25 @@ describe("holdingCorners(ranges, V)", () => {
     );
   });
 
+  test("where nothing conducts a hold leaves what charging gave: 533.333 V and 290.909 V of methods A1, and a dump nothing", () => {
+    const ranges = Array.from({ length: 4 }, () =>
+      stageRange({
+        units: 5,
+        capacitance: 3300e-6,
+        tLow: 0.2,
+        tHigh: 0.2,
+        leakage: 0,
+        insulation: Infinity,
+        resistance: null,
+        q: 0,
+      }),
+    );
+    const { highest, lowest } = holdingCorners(ranges, 1600);
+    expect(highest.voltage).toBeCloseTo(533.333333333, 8);
+    expect(lowest.voltage).toBeCloseTo(290.909090909, 8);
+    expect(dumpedCorners(ranges, 1600, "held").lowest.voltage).toBeCloseTo(0, 9);
+  });
+
   test("equals the best of all 4^n corners of leakage and resistor, n = 2..5, even where stages run dry", () => {
     for (let k = 0; k < 40; k++) {
       const n = 2 + (k % 4);
@@ -164,6 +183,25 @@ describe("dumpedCorners(ranges, V, from)", () => {
     expect(lowest.voltage).toBeCloseTo(-133.333333333, 8);
     expect(highest.voltage).toBeCloseTo(109.090909091, 8);
     expect(lowest.words).toBe("stage 1 at -20 %, the rest at +20 %");
+  });
+
+  test("held: the words name what the hold did as well as the capacitance", () => {
+    const ranges = Array.from({ length: 4 }, () =>
+      stageRange({
+        units: 1,
+        capacitance: 1,
+        tLow: 0.2,
+        tHigh: 0.2,
+        leakage: 1e-3,
+        insulation: Infinity,
+        resistance: 24e3,
+        q: 0.05,
+      }),
+    );
+    expect(dumpedCorners(ranges, 1600, "held").lowest.words).toBe(
+      "stage 1 at -20 %, the rest at +20 %; stage 1 with the greatest leakage, the rest with no leakage; stage 1 resistor at -5 %, the rest resistor at +5 %",
+    );
+    expect(dumpedCorners(ranges, 1600, "equalised").lowest.words).toBe("stage 1 at -20 %, the rest at +20 %");
   });
 
   test("held: equals the best of all 8^n corners of C, leakage and resistor, n = 2..4", () => {

@@ -57,6 +57,38 @@ function bruteForce(given: HoldCase): number {
   return best;
 }
 
+/** The worst of a hold, held to the exact course of the corner that it names: that voltage at that time, and none higher. */
+function asNamed(given: HoldCase) {
+  const { n, R } = given;
+  const { voltage, seconds, lowOthers } = worstAtHold(given);
+  const { m, C, tLow, tHigh, leakage, insulation, q, V, hold } = given;
+  const other = (capacitance: number): Stage => ({
+    capacitance,
+    leakageCurrent: m * leakage,
+    conductance: m / insulation,
+    resistance: R === null ? NONE : R * (1 - q),
+  });
+  const chain: readonly Stage[] = [
+    {
+      capacitance: m * C * (1 - tLow),
+      leakageCurrent: 0,
+      conductance: 0,
+      resistance: R === null ? NONE : R * (1 + q),
+    },
+    ...Array.from({ length: n - 1 }, (_, i) => other(m * C * (i < lowOthers ? 1 - tLow : 1 + tHigh))),
+  ];
+  const phase = phaseFrom({
+    name: "hold",
+    chain,
+    drive: { kind: "source", voltage: V, resistance: 0 },
+    start: chargingShares(chain).map((share) => share * V),
+    seconds: hold,
+  });
+  expect(voltage / phase.peaks()[0]!.voltage).toBeCloseTo(1, 10);
+  expect(voltage / phase.voltagesAt(seconds)[0]!).toBeCloseTo(1, 10);
+  return { phase, seconds, lowOthers };
+}
+
 describe("worstAtHold(case)", () => {
   test("one stage: V", () => {
     expect(worstAtHold({ ...BASE, n: 1 }).voltage).toBe(1600);
@@ -85,6 +117,55 @@ describe("worstAtHold(case)", () => {
   test("units that share a stage scale C and leakage alike", () => {
     const given = { ...BASE, R: null, hold: 60 };
     expect(worstAtHold({ ...given, m: 7 }).voltage).toBeCloseTo(worstAtHold(given).voltage, 9);
+  });
+
+  test("when, and in which company: at once, at the end, only approached", () => {
+    expect(worstAtHold({ ...BASE, hold: 0 })).toMatchObject({ seconds: 0, lowOthers: 0 });
+    expect(worstAtHold({ ...BASE, n: 1 })).toEqual({ voltage: 1600, seconds: 0, lowOthers: 0 });
+    expect(worstAtHold({ ...BASE, R: null, leakage: 0 })).toMatchObject({ seconds: 0, lowOthers: 0 });
+    expect(worstAtHold({ ...BASE, R: null, hold: 60 })).toMatchObject({ seconds: 60, lowOthers: 0 });
+    expect(worstAtHold({ ...BASE, R: null })).toEqual({ voltage: 1600, seconds: NONE, lowOthers: 0 });
+    expect(worstAtHold({ ...BASE, tLow: 0, tHigh: 0 })).toMatchObject({ seconds: NONE, lowOthers: 0 });
+  });
+
+  test("the corner that it names has just that voltage at just that time, and no higher one: 400 random cases, n = 2..8", () => {
+    const draw = uniformFrom(streamState(4, 2));
+    const seen = { start: 0, end: 0, dry: 0 };
+    for (let k = 0; k < 400; k++) {
+      const n = 2 + (k % 7);
+      const R = draw() < 0.3 ? null : 10 ** (2.5 * draw() - 1.5) / n;
+      const given: HoldCase = {
+        n,
+        m: 1 + (k % 3),
+        C: 1,
+        tLow: 0.3 * draw(),
+        tHigh: 0.5 * draw(),
+        leakage: k % 3 === 0 ? 0 : 1,
+        insulation: k % 3 === 1 ? NONE : n * (0.2 + 2 * draw()),
+        R,
+        q: 0.1 * draw(),
+        V: 1,
+        hold: 10 ** (2.5 * draw() - 2) * Math.min(1, (R ?? 1) * n),
+      };
+      const { phase, seconds } = asNamed(given);
+      if (seconds === 0) seen.start++;
+      else seen.end++;
+      if (phase.voltagesAt(given.hold).some((v) => v <= 0)) seen.dry++;
+    }
+    for (const [kind, count] of Object.entries(seen)) expect(count, kind).toBeGreaterThan(3);
+  });
+
+  // Long holds in which resistors settle a little above what charging gave: some of the others low, it is higher still on the way.
+  test.each([
+    { n: 7, m: 7, V: 446, leakage: 287e-6, tLow: 0.1975, tHigh: 0.1978, R: 11000, hold: 3600 },
+    { n: 6, m: 2, V: 1507.5, leakage: 1.556e-3, tLow: 0.1525, tHigh: 0.2457, R: 26100, hold: 3600 },
+    { n: 4, m: 7, V: 1097, leakage: 1.4463e-3, tLow: 0.1609, tHigh: 0.1083, R: 5230, hold: 300 },
+  ])("highest on the way: %o", (over) => {
+    const { seconds, lowOthers } = asNamed({ ...BASE, C: 1e-4, ...over });
+    expect(seconds).toBeGreaterThan(0);
+    expect(seconds).toBeLessThan(over.hold / 10);
+    expect(lowOthers).toBeGreaterThan(0);
+    expect(lowOthers).toBeLessThan(over.n - 1);
   });
 
   test("never below and never above every corner's exact time course: 200 random cases, n = 2..4", {

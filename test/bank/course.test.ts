@@ -137,6 +137,31 @@ describe("courseOf(chain, program)", () => {
     expect(after!.end[0]).toBeGreaterThan(-10);
   });
 
+  test("only what lasts is a phase of its own; an instant dump begins where the hold ended", () => {
+    const chain = [stage(0.8, 0, 0, 10), stage(1.2, 0, 0, 10)];
+    const names = (over: Partial<Program>) => courseOf(chain, program(over)).phases.map(({ name }) => name);
+    expect(names({})).toEqual(["charge"]);
+    expect(names({ hold: 1, rest: 1 })).toEqual(["charge", "hold", "rest"]);
+    expect(names({ dump: { resistance: 0, seconds: 0 } })).toEqual(["charge", "dump"]);
+    expect(names({ dump: { resistance: 0, seconds: 5 } })).toEqual(["charge", "dump", "dump"]);
+    const course = courseOf(chain, program({ voltage: 100, hold: 3, dump: { resistance: 0, seconds: 0 } }));
+    const [, hold, dump] = course.phases;
+    expect(dump!.start).toEqual(hold!.end);
+    expect(total(dump!.end)).toBeCloseTo(0, 12);
+    // At the very moment of the dump it has happened.
+    expect([...course.voltagesAt(3)]).toEqual([...dump!.end]);
+    expect(total([...course.voltagesAt(2.999)])).toBeCloseTo(100, 9);
+  });
+
+  test("charged from what was left in it: every stage takes the same charge, and the sum is the voltage", () => {
+    const chain = [stage(1e-3), stage(2e-3)];
+    const { phases } = courseOf(chain, program({ start: [70, -40] }));
+    expect(phases[0]!.start).toEqual([70, -40]);
+    const [first, second] = phases[0]!.end;
+    expect(first! + second!).toBeCloseTo(1000, 9);
+    expect(1e-3 * (first! - 70)).toBeCloseTo(2e-3 * (second! + 40), 12);
+  });
+
   test("energy: what a dump resistor takes is what the stages lose", () => {
     const chain = [stage(1), stage(2), stage(0.5)];
     const dump = phaseFrom({

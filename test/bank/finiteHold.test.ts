@@ -1,9 +1,13 @@
 // The finite hold against a fine numerical integration of the pair of lumps, and against every corner of a whole chain in time.
 import { EigenvalueDecomposition, Matrix, solve } from "ml-matrix";
-import { describe, expect, test } from "vitest";
-import { type FiniteHold, holdWorst, largestBalanceForHold } from "../../src/bank/finiteHold.ts";
+import { describe, expect, test, vi } from "vitest";
+import { worstAtHold } from "../../src/bank/cornersHold.ts";
+import { type FiniteHold, holdHighest, holdWorst, largestBalanceForHold } from "../../src/bank/finiteHold.ts";
 import { chargingWorst, holdingWorst, largestBalance } from "../../src/bank/share.ts";
 import { chance } from "../support/random.ts";
+
+// Seconds of arithmetic here may be a minute on a busy machine.
+vi.setConfig({ testTimeout: 120_000 });
 
 const EVER = Number.POSITIVE_INFINITY;
 const bank = (over: Partial<FiniteHold> = {}): FiniteHold => ({
@@ -60,6 +64,16 @@ describe("holdWorst(bank, resistance)", () => {
     near(holdWorst(one, EVER), 400 + (5 * 1e-4 * 10) / (5 * 3300e-6 * (1 + 1 / 3)));
   });
   test("never more than all the volts", () => expect(holdWorst(bank({ hold: 1e9 }), EVER)).toBe(1600));
+  test("insulation without a resistor: the exponential of m C_1 + m C_2/(n - 1) through the others' leak, to all the volts", () => {
+    const one = bank({ hold: 500, tolerance: { low: 0, high: 0 }, leak: { kind: "insulation", ohms: 1e6 } });
+    const tau = (3300e-6 * (1 + 1 / 3)) / (1 / 1e6 / 3);
+    near(holdWorst(one, EVER), 1600 - 1200 * Math.exp(-500 / tau), 1e-12);
+  });
+  test("nothing leaks and no resistor: the charging share, however long", () =>
+    near(
+      holdWorst(bank({ hold: 1e9, leak: { kind: "current", amperes: 0 } }), EVER),
+      chargingWorst(1600, 4, { low: 0.2, high: 0.2 }),
+    ));
 
   test("against Runge-Kutta of the two lumps, 30 random banks, both kinds of leak: 1e-6", () => {
     // 2000 steps over at most a few time constants: the integration is good to about 1e-9; 1e-6 leaves room for the longest.
@@ -164,11 +178,70 @@ function worstInTime(one: FiniteHold, resistance: number): number {
   return most;
 }
 
+describe("holdHighest(bank, resistance)", () => {
+  test("for ever, or one in series: the end is the highest", () => {
+    for (const one of [bank({ hold: EVER }), bank({ series: 1 })])
+      for (const resistance of [24000, EVER]) expect(holdHighest(one, resistance)).toBe(holdWorst(one, resistance));
+  });
+
+  // Most often the end or the start is the highest; now and then the way between, with some of the others low, is, by a little.
+  test("never below the end, and as high as the exact course of every mix of others where that beats both ends: 300 random holds", () => {
+    const c = chance(24);
+    let higher = 0;
+    for (let i = 0; i < 300; i++) {
+      const leak = c.maybe(0.7)
+        ? ({ kind: "current", amperes: c.between(1e-5, 2e-3) } as const)
+        : ({ kind: "insulation", ohms: c.between(1e5, 1e7) } as const);
+      const one = bank({
+        series: c.whole(2, 7),
+        sharing: c.whole(1, 8),
+        leak,
+        capacitance: c.pick([1e-4, 1e-3]),
+        tolerance: { low: c.between(0, 0.2), high: c.between(0, 0.3) },
+        hold: c.pick([30, 300, 3600]),
+      });
+      const resistance = c.maybe(0.2) ? EVER : 10 ** c.between(3, 5.5);
+      const start = chargingWorst(one.voltage, one.series, one.tolerance);
+      const ends = holdWorst(one, resistance);
+      const exact = worstAtHold({
+        n: one.series,
+        m: one.sharing,
+        C: one.capacitance,
+        tLow: one.tolerance.low,
+        tHigh: one.tolerance.high,
+        leakage: leak.kind === "current" ? leak.amperes : 0,
+        insulation: leak.kind === "insulation" ? leak.ohms : EVER,
+        R: resistance === EVER ? null : resistance,
+        q: one.spread,
+        V: one.voltage,
+        hold: one.hold,
+      }).voltage;
+      const found = holdHighest(one, resistance);
+      expect(found).toBeGreaterThanOrEqual(ends);
+      near(Math.max(found, start), Math.max(exact, ends, start), 2e-9);
+      if (found > ends) higher++;
+    }
+    expect(higher).toBeGreaterThan(3);
+    expect(higher).toBeLessThan(150);
+  });
+});
+
 describe("largestBalanceForHold(bank, limit, endless)", () => {
   const most = (one: FiniteHold, limit: number): number =>
     largestBalanceForHold(one, limit, largestBalance(one, limit));
 
   test("for ever: what it was given", () => expect(largestBalanceForHold(bank({ hold: EVER }), 450, 123)).toBe(123));
+  test("a limit of all the volts, or more: what it was given, a resistor that bleeds", () => {
+    expect(largestBalanceForHold(bank(), 1600, 123)).toBe(123);
+    expect(largestBalanceForHold(bank(), 1700, 123)).toBe(123);
+  });
+  test("where no resistor does for ever, none does for a while that drifts over the limit: 0", () =>
+    expect(most(bank({ spread: 0.2, hold: 3600, tolerance: { low: 0.05, high: 0.05 } }), 430)).toBe(0));
+  test("a limit below the charging share, which a short hold leaves standing: no more than for ever", () => {
+    const one = bank({ hold: 1 });
+    expect(largestBalance(one, 520)).toBeGreaterThan(0);
+    expect(most(one, 520)).toBe(largestBalance(one, 520));
+  });
   test("a hold too short to drift: none needed", () =>
     expect(most(bank({ hold: 1, tolerance: { low: 0.05, high: 0.05 } }), 450)).toBe(EVER));
   test("a shorter hold never asks a smaller resistor", () => {

@@ -1,6 +1,6 @@
 // The causes of a lost margin: they add up, each alone is the whole, unknown is said.
 import { describe, expect, test, vi } from "vitest";
-import { worstAtHold } from "../../src/bank/cornersHold.ts";
+import { type HoldCase, worstAtHold } from "../../src/bank/cornersHold.ts";
 import { type MarginCase, marginCauses } from "../../src/bank/margins.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
 
@@ -77,6 +77,10 @@ describe("marginCauses(case)", () => {
       const found = marginCauses(given);
       const derated = given.rating * (1 - given.derating);
       expect(sum(found)).toBeCloseTo(found.worst! - found.even + derated, 8);
+      expect(found.worst).toBeCloseTo(
+        worstAtHold({ ...given, V: given.V * (1 + given.overshoot) } as HoldCase).voltage,
+        8,
+      );
       expect(found.free).toBeCloseTo(given.rating - found.even - sum(found), 8);
       const leakage = found.causes.find(({ cause }) => cause === "leakage")!;
       const tight = worstAtHold({
@@ -89,10 +93,35 @@ describe("marginCauses(case)", () => {
     }
   });
 
-  test("leakage unknown: said as unknown, not as zero, and no worst", () => {
-    const found = marginCauses({ ...BASE, leakage: null });
-    expect(found.worst).toBeNull();
-    expect(found.free).toBeNull();
-    expect(found.causes.at(-1)).toMatchObject({ cause: "leakage", volts: null });
+  test("insulation alone is leakage too: it takes all that is lost", () => {
+    const found = marginCauses({
+      ...BASE,
+      tLow: 0,
+      tHigh: 0,
+      leakage: 0,
+      insulation: 1e6,
+      q: 0,
+      overshoot: 0,
+      derating: 1,
+    });
+    expect(found.causes[0]).toMatchObject({ cause: "leakage", volts: expect.closeTo(found.worst! - 400, 8) });
+    expect(found.worst).toBeGreaterThan(401);
   });
+
+  test.each(["leakage", "insulation"])(
+    "%s unknown: said once as unknown, not as zero, no worst, and the others as without any",
+    (what) => {
+      const found = marginCauses({ ...BASE, [what]: null });
+      expect(found.worst).toBeNull();
+      expect(found.free).toBeNull();
+      expect(found.causes.at(-1)).toMatchObject({ cause: "leakage", volts: null });
+      const tight = marginCauses({ ...BASE, leakage: 0, insulation: NONE });
+      const others = (of: typeof found) => of.causes.filter(({ cause }) => cause !== "leakage");
+      expect(others(found)).toEqual(
+        others(tight).map((cause) => ({ ...cause, volts: expect.closeTo(cause.volts!, 9) })),
+      );
+      expect(found.causes.length).toBe(5);
+      expect(found.causes.at(-1)?.without).toBeCloseTo(tight.worst!, 9);
+    },
+  );
 });

@@ -69,6 +69,8 @@ describe("monteCarloChunk(case, at)", () => {
       const state = streamState(3, 5);
       const draw = (): number => (nextWord(state) >>> 1) * 2 ** -31;
       let over = 0;
+      const { first, width } = binEdges(GIVEN);
+      const bins = new Float64Array(BINS);
       for (let bank = 0; bank < 2000; bank++) {
         let highest = 0;
         for (let string = 0; string < (ties === "strings" ? 3 : 1); string++) {
@@ -80,9 +82,28 @@ describe("monteCarloChunk(case, at)", () => {
           highest = Math.max(highest, Math.max(...inverse) / inverse.reduce((sum, x) => sum + x, 0));
         }
         if (highest > 0.28) over++;
+        bins[Math.floor((highest - first) / width)]!++;
       }
-      expect(monteCarloChunk({ ...GIVEN, ties }, { seed: 3, chunk: 5, banks: 2000 }).exceed).toBe(over);
+      const counts = monteCarloChunk({ ...GIVEN, ties }, { seed: 3, chunk: 5, banks: 2000 });
+      expect(counts).toMatchObject({ banks: 2000, exceed: over });
+      // A share within rounding of an edge may fall to either side of it.
+      const moved = bins.reduce((sum, count, i) => sum + Math.abs(count - counts.bins[i]!), 0);
+      expect(moved).toBeLessThanOrEqual(2);
       expect(over).toBeGreaterThan(10);
+    }
+  });
+
+  test("one unit a stage: both ties are the same bank, drawn alike", () => {
+    const at = { seed: 3, chunk: 5, banks: 2000 };
+    const strings = monteCarloChunk({ ...GIVEN, p: 1, ties: "strings" }, at);
+    expect(monteCarloChunk({ ...GIVEN, p: 1 }, at)).toEqual(strings);
+  });
+
+  test("units all alike, or one in series: every bank in the first bin, and a share just reached is not exceeded", () => {
+    const alike: TailCase = { ...GIVEN, law: { kind: "uniform", low: 1, high: 1 }, share: 0.25 };
+    for (const given of [alike, { ...GIVEN, n: 1, share: 1 }]) {
+      const counts = monteCarloChunk(given, { seed: 1, chunk: 0, banks: 100 });
+      expect([counts.bins[0], counts.exceed]).toEqual([100, 0]);
     }
   });
 
@@ -107,7 +128,20 @@ describe("monteCarloChunk(case, at)", () => {
   });
 });
 
+describe("binEdges(case)", () => {
+  test("from the even share to the worst corner of methods A1, 0.333333 of the volts, in even bins [methods-derived A1]", () => {
+    const { first, width } = binEdges(GIVEN);
+    expect(first).toBe(0.25);
+    expect(first + BINS * width).toBeCloseTo(1 / 3, 12);
+  });
+});
+
 describe("countedRisk(counts)", () => {
+  test("250 of 1000: a quarter, with the binomial's standard error", () =>
+    expect(countedRisk({ banks: 1000, exceed: 250, bins: new Float64Array(BINS) })).toEqual({
+      exceed: 0.25,
+      error: expect.closeTo(Math.sqrt(0.1875 / 1000), 12),
+    }));
   test("nothing seen in N banks is not zero risk: 3/N", () => {
     expect(countedRisk({ banks: 1000, exceed: 0, bins: new Float64Array(BINS) })).toEqual({ exceed: 0, error: 0.003 });
   });

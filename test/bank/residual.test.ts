@@ -3,8 +3,8 @@ import { describe, expect, test } from "vitest";
 import { stageRange } from "../../src/bank/cornersRange.ts";
 import { residualAfterDump } from "../../src/bank/residual.ts";
 
-const ranges = (tolerance: number, leakage = 0) =>
-  Array.from({ length: 4 }, () =>
+const ranges = (tolerance: number, leakage = 0, stages = 4) =>
+  Array.from({ length: stages }, () =>
     stageRange({
       units: 1,
       capacitance: 3300e-6,
@@ -25,6 +25,13 @@ describe("residualAfterDump({ ranges, voltage, hold, allowed, polarised })", () 
     expect(straight).toMatchObject({ reverse: 0, forward: 0, verdict: "pass" });
   });
 
+  test("units exactly alike of any number at any voltage: what rounding leaves is no reverse", () => {
+    for (const stages of [3, 6, 7, 11])
+      for (let volts = 100.1; volts < 2000; volts += 77.7) {
+        const found = residualAfterDump({ ...asked, ranges: ranges(0, 0, stages), voltage: volts });
+        expect(found).toMatchObject({ verdict: "pass", clampNeeded: false });
+      }
+  });
   test("methods A3: 133.333 V reverse, 109.091 V forward, the low stage [methods-derived A3]", () => {
     const found = residualAfterDump({ ...asked, ranges: ranges(0.2) });
     expect(found.reverse).toBeCloseTo(133.333333333, 8);

@@ -5,6 +5,7 @@ import {
   chargingLeast,
   chargingWorst,
   type HoldingChain,
+  holdingLine,
   holdingWorst,
   largestBalance,
   leftAfterDump,
@@ -87,7 +88,10 @@ describe("chargingWorst(voltage, series, tolerance)", () => {
 });
 
 describe("leftAfterDump(voltage, series, tolerance)", () => {
-  test("one in series keeps nothing", () => expect(leftAfterDump(1000, 1, TWENTY)).toEqual({ low: 0, high: 0 }));
+  test("one in series keeps nothing, not a rounding, 300 volts and tolerances", () => {
+    for (let i = 1; i <= 300; i++)
+      expect(leftAfterDump(i * 7.7, 1, { low: i / 1000, high: i / 700 })).toEqual({ low: 0, high: 0 });
+  });
   test("worked number A3: -133.333333 V and 109.090909 V", () => {
     const left = leftAfterDump(1600, 4, TWENTY);
     near(left.low, -400 / 3);
@@ -121,7 +125,15 @@ const chain = (over: Partial<HoldingChain>): HoldingChain => ({
 });
 
 describe("holdingWorst(chain, resistance)", () => {
-  test("one in series: all of it", () => expect(holdingWorst(chain({ series: 1 }), 24000)).toBe(1600));
+  test("one in series: all of it and not a rounding more or less, 300 volts and spreads", () => {
+    for (let i = 1; i <= 300; i++) {
+      const one = { series: 1, voltage: i * 7.7, spread: i / 1000 };
+      expect(holdingWorst(chain(one), 24000)).toBe(one.voltage);
+      expect(holdingWorst(chain({ ...one, leak: { kind: "insulation", ohms: i * 1e6 } }), 24000)).toBe(one.voltage);
+    }
+  });
+  test("no resistor and no leak: the even share", () =>
+    expect(holdingWorst(chain({ leak: { kind: "current", amperes: 0 } }), Number.POSITIVE_INFINITY)).toBe(400));
   test("no resistor and a leak: the tight stage ends with all of it", () =>
     expect(holdingWorst(chain({}), Number.POSITIVE_INFINITY)).toBe(1600));
   test("no resistor and insulation: the same", () =>
@@ -193,16 +205,60 @@ describe("holdingWorst(chain, resistance)", () => {
   });
 });
 
+describe("holdingLine(chain)", () => {
+  test("base + slope R is the worst share of a hold, until that is all the volts: 200 random chains", () => {
+    const c = chance(5);
+    let cut = 0;
+    for (let i = 0; i < 200; i++) {
+      const one = chain({
+        voltage: c.between(400, 3000),
+        series: c.whole(2, 8),
+        sharing: c.whole(1, 9),
+        spread: c.between(0, 0.2),
+        leak: { kind: "current", amperes: c.between(0, 5e-3) },
+      });
+      const [line, resistance] = [holdingLine(one), c.between(0, 2e5)];
+      const volts = line.base + line.slope * resistance;
+      near(holdingWorst(one, resistance), Math.min(volts, one.voltage));
+      if (volts > one.voltage) cut++;
+    }
+    expect(cut).toBeGreaterThan(20);
+    expect(cut).toBeLessThan(180);
+  });
+  test("worked number A4: 449.184615 V at 24 kohm and 5 %", () => {
+    const { base, slope } = holdingLine(chain({}));
+    near(base + slope * 24000, 449.184615, 1e-8);
+  });
+  test("insulation draws by its own volts: no line of its own, the resistors' spread alone", () =>
+    expect(holdingLine(chain({ leak: { kind: "insulation", ohms: 1e6 } })).slope).toBe(0));
+});
+
 describe("largestBalance(chain, limit)", () => {
   test("no leak at all: any resistor", () =>
     expect(largestBalance(chain({ leak: { kind: "current", amperes: 0 } }), 450)).toBe(Number.POSITIVE_INFINITY));
-  test("a limit below the even share: none", () => expect(largestBalance(chain({}), 399)).toBeLessThanOrEqual(0));
-  test("a spread that alone breaks the limit: none", () =>
-    expect(largestBalance(chain({ spread: 0.2 }), 450)).toBeLessThanOrEqual(0));
+  const LEAKS = [
+    { kind: "current", amperes: 1e-3 },
+    { kind: "current", amperes: 0 },
+    { kind: "insulation", ohms: 1e8 },
+  ] as const;
+  test.each(LEAKS)("a limit below the even share, or a spread that alone breaks it: none, %o", (leak) => {
+    expect(largestBalance(chain({ leak, spread: 0 }), 399)).toBe(0);
+    expect(largestBalance(chain({ leak, spread: 0.2 }), 450)).toBe(0);
+  });
+  test("insulation and a limit of all the volts, or more: any resistor", () => {
+    expect(largestBalance(chain({ leak: LEAKS[2] }), 1600)).toBe(Number.POSITIVE_INFINITY);
+    expect(largestBalance(chain({ leak: LEAKS[2] }), 1700)).toBe(Number.POSITIVE_INFINITY);
+    expect(largestBalance(chain({ leak: LEAKS[2] }), 1599)).toBeLessThan(1e13);
+  });
   // An exact fit is a fit: four units of 400 V hold 1600 V when nothing leaks and resistors are alike.
   test("even share exactly at the limit, nothing leaks, no spread: any resistor", () => {
     const exact = chain({ voltage: 2.1, series: 3, spread: 0, leak: { kind: "current", amperes: 0 } });
     expect(largestBalance(exact, 0.7)).toBe(Number.POSITIVE_INFINITY);
+    for (let tenths = 1; tenths < 200; tenths++) {
+      const limit = Number((7000 + tenths / 10).toFixed(1));
+      const voltage = Number((3 * (7000 + tenths / 10)).toFixed(1));
+      expect(largestBalance({ ...exact, voltage }, limit), `${voltage} V`).toBe(Number.POSITIVE_INFINITY);
+    }
   });
 
   test("worked number A4: 25062.6566 ohm at 5 %, 58339.1673 ohm at 1 %, 66666.6667 ohm without spread", () => {
@@ -218,7 +274,7 @@ describe("largestBalance(chain, limit)", () => {
 
   test("sits on the edge: at it the share is the limit, 1 % above it is over, both kinds of leak, 200 random chains", () => {
     const c = chance(4);
-    let edges = 0;
+    const edges = { current: 0, insulation: 0 };
     for (let i = 0; i < 200; i++) {
       const leak = c.maybe(0.5)
         ? ({ kind: "current", amperes: c.between(1e-6, 5e-3) } as const)
@@ -233,10 +289,11 @@ describe("largestBalance(chain, limit)", () => {
       const limit = (one.voltage / one.series) * c.between(1, 1.6);
       const most = largestBalance(one, limit);
       if (!(most > 0) || !Number.isFinite(most) || limit >= one.voltage) continue;
-      edges++;
+      edges[leak.kind]++;
       near(holdingWorst(one, most), limit);
       expect(holdingWorst(one, most * 1.01)).toBeGreaterThan(limit);
     }
-    expect(edges).toBeGreaterThan(80);
+    expect(edges.current).toBeGreaterThan(40);
+    expect(edges.insulation).toBeGreaterThan(40);
   });
 });

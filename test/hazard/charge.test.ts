@@ -17,6 +17,12 @@ describe("chargeChecks({ capacitance, voltage })", () => {
     expect(found(4.4e-6, 80)["iec-60204-residual 0.00006"]).toBe(true);
   });
 
+  test("0.1 uF is just what is allowed, and no more is; every row names its rule", () => {
+    expect(found(1e-7, 100)["iec-60335-charge 1e-7"]).toBe(false);
+    expect(found(1.001e-7, 100)["iec-60335-charge 1e-7"]).toBe(true);
+    for (const check of chargeChecks({ capacitance: 1e-7, voltage: 100 })) expect(check.ruleId).toMatch(/^iec-/);
+  });
+
   test("nothing held exceeds nothing", () =>
     expect(Object.values(found(1e-3, 0)).some((exceeded) => exceeded)).toBe(false));
 

@@ -42,7 +42,12 @@ describe("hazardFindings(bank)", () => {
 
   test("no limit given for the bleed: not assessed, never passed", () => {
     const { bleedLimit: _, ...unlimited } = demo;
-    expect(one(unlimited, "bleed-time")).toMatchObject({ verdict: "not assessed", limit: null, margin: null });
+    expect(one(unlimited, "bleed-time")).toMatchObject({
+      verdict: "not assessed",
+      limit: null,
+      margin: null,
+      note: expect.stringMatching(/no limit was given/),
+    });
   });
 
   test("no bleed at all: fails a limit, and says so even without one", () => {

@@ -17,6 +17,57 @@ describe("chargeOf(charger, task)", () => {
     expect(codesOf(chargeOf({ kind: "resistor", resistance: 1, supply: 1600 }, task))).toEqual(["pulse.charge.supply"]);
   });
 
+  test("each refusal names its field, shows the number and says what would do; a start below zero too", () => {
+    const told = (charger: Charger, over: Partial<typeof task>) => {
+      const read = chargeOf(charger, { ...task, ...over });
+      return read.ok ? [] : read.refusals.map(({ code, place, read: shown, want }) => [code, place.field, shown, want]);
+    };
+    const current: Charger = { kind: "constant current", current: 1 };
+    expect(told(current, { to: Number.POSITIVE_INFINITY })).toEqual([
+      ["pulse.charge.to", "to", "Infinity", "a number above zero"],
+    ]);
+    expect(told(current, { from: -1 })).toEqual([
+      ["pulse.charge.from", "from", "-1", expect.stringContaining("below the end voltage")],
+    ]);
+    expect(told({ kind: "resistor", resistance: 1, supply: 1500 }, {})).toEqual([
+      ["pulse.charge.supply", "supply", "1500", expect.stringContaining("above the end voltage")],
+    ]);
+    expect(told({ kind: "resistor", resistance: 0, supply: 1700 }, {})[0]?.[1]).toBe("resistance");
+    expect(told({ kind: "constant power", power: 0, currentLimit: 0 }, {}).map(([, field]) => field)).toEqual([
+      "power",
+      "currentLimit",
+    ]);
+  });
+
+  test("from 600 V: each way gains C(V_f^2 - V_i^2)/2, wastes what it says, and its mean power over its time is the sum", () => {
+    const warm = { ...task, from: 600 };
+    const gained = (825e-6 * (1600 ** 2 - 600 ** 2)) / 2;
+    const chargers: readonly Charger[] = [
+      { kind: "constant current", current: 0.05 },
+      { kind: "constant power", power: 200, currentLimit: 0.25 },
+      { kind: "resistor", resistance: 2000, supply: 1700 },
+    ];
+    for (const charger of chargers) {
+      const charge = got(chargeOf(charger, warm));
+      near(charge.meanPower * charge.seconds, gained + charge.resistorHeat, 1e-12);
+      near(charge.efficiency, gained / (gained + charge.resistorHeat), 1e-12);
+      if (charger.kind === "resistor") near(charge.resistorHeat, charge.action * charger.resistance, 1e-12);
+      else expect(charge.resistorHeat).toBe(0);
+    }
+  });
+
+  test("the most amperes and watts, and where constant power takes over", () => {
+    const peaks = (charger: Charger, over: Partial<typeof task> = {}) => {
+      const { peakCurrent, peakPower, crossover } = got(chargeOf(charger, { ...task, ...over }));
+      return [peakCurrent, peakPower, crossover];
+    };
+    expect(peaks({ kind: "constant current", current: 0.05 })).toEqual([0.05, 80, null]);
+    expect(peaks({ kind: "constant power", power: 200, currentLimit: 0.25 })).toEqual([0.25, 200, 800]);
+    expect(peaks({ kind: "resistor", resistance: 2000, supply: 1700 })).toEqual([0.85, 1445, null]);
+    expect(peaks({ kind: "resistor", resistance: 2000, supply: 1700 }, { from: 700 })).toEqual([0.5, 850, null]);
+    near(got(chargeOf({ kind: "constant current", current: 0.05 }, task)).action, 0.05 ** 2 * 26.4, 1e-12);
+  });
+
   test("worked: 0.05 A takes 26.4 s, 80 W at the end and 40 W on average", () => {
     const charge = got(chargeOf({ kind: "constant current", current: 0.05 }, task));
     near(charge.seconds, 26.4, 1e-12);

@@ -22,6 +22,50 @@ describe("loadShort(bank), earlyFire(bank)", () => {
   });
 });
 
+describe("loadShort(bank): joules", () => {
+  test("at most each unit's own, at its worst voltage", () => {
+    const fault = loadShort({ ...tied, worstHolding: 440 });
+    near(fault.energyIntoUnit, (3300e-6 * 440 ** 2) / 2, 1e-12);
+    expect(fault).toMatchObject({ id: "load-short", worstVoltage: 440, verdict: "pass" });
+  });
+});
+
+describe("what stops it, and what it means, in words", () => {
+  const balance = { resistance: 24e3, hold: null };
+  test.each([
+    ["load-short", loadShort(tied), /until the bank is empty/, /ring may reverse/],
+    ["early-fire", earlyFire(tied), /charger must stand the short/, /charger still feeding/],
+    ["bleeder-open", bleederOpen(tied), /meter on every stage/, /were not told/],
+    ["bleeder-open", bleederOpen({ ...tied, balance: null }), /meter on every stage/, /No balancing resistor/],
+    ["bleeder-open", bleederOpen({ ...tied, series: 1, balance }), /meter/, /No balancing resistor/],
+    [
+      "bleeder-open",
+      bleederOpen({ ...tied, balance }),
+      /short each unit by hand/,
+      /climbs.*After the dump its units keep/,
+    ],
+    ["dump-stuck", dumpStuck(tied), /stays charged/, /Open: .* Closed: /],
+    ["dump-stuck", dumpStuck({ ...tied, balance: null }), /stays charged/, /Open: .* Closed: /],
+    ["charger-running", chargerRunning(tied), /second, independent trip/, /highest voltage is unknown/],
+    ["charger-running", chargerRunning({ ...tied, chargerHighest: 2000 }), /trip on voltage/, /Every unit rises/],
+  ] as const)("%s", (id, fault, stops, note) => {
+    expect(fault.id).toBe(id);
+    expect(fault.stops).toMatch(stops);
+    expect(fault.note).toMatch(note);
+  });
+
+  test("where nothing flows the amperes and joules are zero, known", () => {
+    for (const fault of [bleederOpen({ ...tied, balance }), dumpStuck(tied), chargerRunning(tied)])
+      expect(fault).toMatchObject({ peakCurrent: 0, peakIs: "value", energyIntoUnit: 0 });
+    expect(dumpStuck({ ...tied, worstHolding: 440 }).worstVoltage).toBe(440);
+  });
+
+  test("a shot whose amperes are unknown gives none, not zero", () => {
+    const shot = { peakCurrent: null, unitAction: null, unitHeat: 12 };
+    expect(earlyFire({ ...tied, shot })).toMatchObject({ peakCurrent: null, energyIntoUnit: 12, worstVoltage: 400 });
+  });
+});
+
 describe("bleederOpen(bank)", () => {
   test("not told is not assessed; none fitted changes nothing", () => {
     expect(bleederOpen(tied)).toMatchObject({ worstVoltage: null, verdict: "not assessed" });

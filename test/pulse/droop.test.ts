@@ -31,6 +31,19 @@ describe("driftOf(use)", () => {
     expect(driftOf({ ...use, bleeder: 100, leakage: 1 }).energyLost).toBe(1);
   });
 
+  test("a bleeder and leakage together follow C dV/dt = -V/R - I, in 100 000 small steps", () => {
+    const both = { ...use, leakage: 5e-3, seconds: 60 };
+    let volts = both.voltage;
+    const dt = both.seconds / 100000;
+    for (let k = 0; k < 100000; k++) {
+      const slope = (v: number) => -(v / both.bleeder + both.leakage) / both.capacitance;
+      volts += dt * slope(volts + (dt / 2) * slope(volts));
+    }
+    const drift = driftOf(both);
+    near(drift.voltage, volts, 1e-9);
+    near(drift.energyLost, 1 - (volts / 1600) ** 2, 1e-9);
+  });
+
   test("energy falls by twice the part of the voltage when the fall is small", () => {
     const drift = driftOf({ ...use, seconds: 1e-6 });
     near(drift.energyLost, (2 * 1e-6) / (82000 * 825e-6), 1e-5);

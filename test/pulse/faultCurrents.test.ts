@@ -35,6 +35,49 @@ describe("faultPeak(loop), faultAction(loop)", () => {
     expect(whole?.amperes ?? 0).toBeLessThan(half?.amperes ?? 0);
   });
 
+  test("a section inductance holds the peak down, the more the larger, and leaves the action as it is", () => {
+    const peak = (sectionInductance: number) => faultPeak(unitShortLoop({ ...tied, unit: known, sectionInductance }));
+    const loop = unitShortLoop({ ...tied, unit: known, sectionInductance: 1e-6 });
+    near(loop?.inductance, 25e-9 / 4 + 1e-6 * (1 + 1 / 4), 1e-12);
+    expect(peak(1e-6)?.amperes).toBeLessThan(peak(0)?.amperes as number);
+    expect(peak(1e-5)?.amperes).toBeLessThan(peak(1e-6)?.amperes as number);
+    near(faultAction(loop), faultAction(unitShortLoop({ ...tied, unit: known })) as number, 1e-12);
+    near(loadShortLoop({ ...tied, unit: known, sectionInductance: 1e-6 }).inductance, (4 * (25e-9 + 1e-6)) / 5, 1e-12);
+    near(loadShortLoop({ ...strings, unit: known, sectionInductance: 1e-6 }).inductance, (4 * 25e-9 + 1e-6) / 5, 1e-12);
+    near(rowShortLoop({ ...tied, unit: known, sectionInductance: 1e-6 })?.inductance, (25e-9 + 1e-6) / 5, 1e-12);
+  });
+
+  test("action needs the whole resistance: with the bus unknown there is none, with nothing known none either", () => {
+    expect(faultAction(null)).toBeNull();
+    expect(faultAction(loadShortLoop({ ...tied, unit: known }))).toBeNull();
+    expect(faultAction(unitShortLoop({ ...tied, unit: { ...known, esr: 0 } }))).toBeNull();
+    near(faultAction(unitShortLoop({ ...tied, unit: known })), (4 * 3300e-6 * 400 ** 2) / 2 / 0.005, 1e-12);
+  });
+
+  test("two units side by side have a loop, of one neighbour", () => {
+    near(unitShortLoop({ ...tied, parallel: 2, unit: known })?.resistance, 0.02, 1e-12);
+    expect(rowShortLoop({ ...strings, parallel: 2, unit: known })?.resistance).toBeCloseTo(0.08, 12);
+  });
+
+  test("one in series: strings are the same as tied; the loop has its own capacitance, voltage and inductance", () => {
+    const one = { ...tied, series: 1, worstHolding: 440, unit: known };
+    const loop = unitShortLoop({ ...one, ties: "strings" })!;
+    expect(loop).toEqual(unitShortLoop(one));
+    expect(rowShortLoop({ ...one, ties: "strings" })).toEqual(rowShortLoop(one));
+    expect(loop).toMatchObject({ voltage: 440, resistanceKnown: true, inductanceKnown: true });
+    near(loop.capacitance, 4 * 3300e-6, 1e-12);
+    near(loop.inductance, 25e-9 / 4, 1e-12);
+    near(rowShortLoop(one)?.capacitance, 5 * 3300e-6, 1e-12);
+    expect(rowShortLoop(one)?.voltage).toBe(440);
+  });
+
+  test("an inductance alone bounds it, by V sqrt(C/L); what is unknown is told apart", () => {
+    const coil = unitShortLoop({ ...tied, unit: { ...tied.unit, esl: 25e-9 } })!;
+    expect(coil).toMatchObject({ resistance: 0, resistanceKnown: false, inductanceKnown: true });
+    near(faultPeak(coil)?.amperes, 400 * Math.sqrt((4 * 3300e-6) / (25e-9 / 4)), 1e-9);
+    expect(faultPeak(coil)?.bound).toBe("upper bound");
+  });
+
   test("strings: the fault current passes other strings and its own survivors", () => {
     near(unitShortLoop({ ...strings, unit: known })?.resistance, 0.02 * (4 / 4 + 3), 1e-12);
   });
@@ -44,6 +87,8 @@ describe("rowShortLoop(bank), loadShortLoop(bank)", () => {
   test("a tied row shorts through all its units at once; a string through the other strings", () => {
     near(rowShortLoop({ ...tied, unit: known })?.resistance, 0.004, 1e-12);
     near(rowShortLoop({ ...strings, unit: known })?.resistance, 0.02, 1e-12);
+    near(rowShortLoop({ ...strings, unit: known })?.capacitance, (4 * 3300e-6) / 4, 1e-12);
+    expect(rowShortLoop({ ...strings, unit: known })?.voltage).toBe(1600);
     expect(rowShortLoop({ ...strings, parallel: 1, unit: known })).toBeNull();
   });
 
@@ -51,6 +96,8 @@ describe("rowShortLoop(bank), loadShortLoop(bank)", () => {
     const loop = loadShortLoop({ ...tied, unit: known, bus: { resistance: 1e-3, inductance: 60e-9 } });
     near(loop.resistance, 0.017, 1e-12);
     near(loop.inductance, 80e-9, 1e-12);
+    near(loop.capacitance, (5 * 3300e-6) / 4, 1e-12);
+    expect(loop.voltage).toBe(1600);
     expect(faultPeak(loop)?.bound).toBe("value");
     expect(faultPeak(loadShortLoop({ ...tied, unit: known }))?.bound).toBe("upper bound");
   });

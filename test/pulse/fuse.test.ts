@@ -28,6 +28,20 @@ describe("fuseFindings(fuse, duty, part)", () => {
     expect(verdicts({ dcVoltage: 250 })[2]).toBe("fail");
   });
 
+  test("each finding compares its own value with its own limit, and says which way to mend it", () => {
+    const found = fuseFindings(fuse, duty);
+    expect(found.map(({ id, state, value, limit, unit, source }) => [id, state, value, limit, unit, source])).toEqual([
+      ["pulse.fuse.lives", "pulse", 2250, 2500, "A2s", "common-practice"],
+      ["pulse.fuse.clears", "faulted", 16896, 15000, "A2s", "methods-derived"],
+      ["pulse.fuse.voltage", "faulted", 400, 450, "V", "methods-derived"],
+    ]);
+    expect(found.map(({ note }) => note)).toEqual([
+      expect.stringMatching(/0\.25 of melting.*larger fuse/),
+      expect.stringMatching(/needs to clear/),
+      expect.stringMatching(/an ac rating does not count/),
+    ]);
+  });
+
   test("the part of melting is the user's when given", () =>
     expect(verdicts({ meltingAction: 8000 }, {}, 0.3)[0]).toBe("pass"));
 });

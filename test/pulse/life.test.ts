@@ -12,6 +12,27 @@ describe("lifeRatio(stresses)", () => {
     expect(lifeRatio({ voltage: { ...voltage, value: 1 } })).toMatchObject({ ratio: 1, missing: [] });
   });
 
+  test("every missing exponent is named, in order; a law that has no value is not", () => {
+    const stress = { value: 2, reference: 1, exponent: null };
+    expect(lifeRatio({ voltage: stress, reversal: stress, temperature: stress })).toEqual({
+      voltage: null,
+      reversal: null,
+      temperature: null,
+      ratio: null,
+      missing: ["voltage", "reversal", "temperature"],
+    });
+    const known = { value: 1, reference: 2, exponent: 3 };
+    expect(lifeRatio({ voltage: known, reversal: known, temperature: stress })).toMatchObject({
+      voltage: 8,
+      reversal: 8,
+      temperature: null,
+      ratio: null,
+      missing: ["temperature"],
+    });
+    expect(lifeRatio({ voltage: stress, temperature: known }).ratio).toBeNull();
+    expect(lifeRatio({ reversal: stress, temperature: known }).ratio).toBeNull();
+  });
+
   test("no reversal at all has no law: unknown, never infinite", () => {
     const reversal = { value: 0, reference: 0.1, exponent: 1.6 };
     expect(lifeRatio({ reversal })).toMatchObject({ reversal: null, ratio: null, missing: [] });

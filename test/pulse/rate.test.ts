@@ -37,6 +37,22 @@ describe("highestRate(cycle), rateFindings(heating, wanted, limits)", () => {
     near(highestRate({ charge: 7.5, wait: 2.5, pulse: 0 }), 0.1, 1e-12);
   });
 
+  test("each finding compares its own value with its own limit, in its unit", () => {
+    const heating = heatingOf(duty);
+    near(heating.unitRms, 75.0002 / 5, 1e-8);
+    const found = rateFindings(heating, { rate: 0.2, highest: 0.1 }, { rippleCurrent: 8, temperatureRise: 20 });
+    expect(found.map(({ id, state, value, limit, unit, source }) => [id, state, value, limit, unit, source])).toEqual([
+      ["pulse.rate", "pulse", 0.2, 0.1, "Hz", "textbook-charging"],
+      ["pulse.unit.rms", "pulse", heating.unitRms, 8, "A", "textbook-charging"],
+      ["pulse.unit.rise", "pulse", heating.unitRise, 20, "K", "textbook-charging"],
+    ]);
+    expect(found.map(({ note }) => note)).toEqual([
+      expect.stringMatching(/stronger charger or fire less often/),
+      expect.stringMatching(/ripple ratings hold at their own frequency/),
+      expect.stringMatching(/temperature rise/i),
+    ]);
+  });
+
   test("faster than the charger fails; unknown limits are not assessed", () => {
     const heating = heatingOf(duty);
     const verdicts = (rate: number, highest: number | null) =>

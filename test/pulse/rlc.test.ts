@@ -17,7 +17,26 @@ describe("checkLoop(loop, voltage)", () => {
   });
 
   test("refuses a loop with neither resistance nor inductance", () => {
-    expect(codesOf(checkLoop({ capacitance: 1, inductance: 0, resistance: 0 }, 1))).toEqual(["pulse.loop.none"]);
+    const bad = checkLoop({ capacitance: 1, inductance: 0, resistance: 0 }, 1);
+    expect(codesOf(bad)).toEqual(["pulse.loop.none"]);
+    expect(bad).toMatchObject({
+      refusals: [{ place: { field: "inductance" }, read: "0 H and 0 ohm", want: expect.stringContaining("no bound") }],
+    });
+  });
+
+  test("each refusal names its field, shows the number and says whether zero would do", () => {
+    const bad = checkLoop({ capacitance: 0, inductance: -1, resistance: -2 }, 0);
+    const [above, orMore] = ["a number above zero", "a number, zero or more"];
+    expect(bad.ok ? [] : bad.refusals.map(({ place, read, want }) => [place.field, read, want])).toEqual([
+      ["capacitance", "0", above],
+      ["inductance", "-1", orMore],
+      ["resistance", "-2", orMore],
+      ["voltage", "0", above],
+    ]);
+    // A bad number is told alone: with it nothing can be said of the loop.
+    expect(codesOf(checkLoop({ capacitance: -1, inductance: 0, resistance: 0 }, 1))).toEqual([
+      "pulse.loop.capacitance",
+    ]);
   });
 
   test("accepts a sound loop and both limits", () => {

@@ -35,7 +35,11 @@ describe("shortedUnit(bank)", () => {
     near(result.held, 533.333333);
   });
 
-  test("worked, cross-tied: the neighbours pour in 1056 J", () => near(shortedUnit(tied).neighbours, 1056, 1e-12));
+  test("worked, cross-tied: the neighbours pour in 1056 J; alone the other stages keep 400 V, 1200 V in all", () => {
+    const result = shortedUnit(tied);
+    near(result.neighbours, 1056, 1e-12);
+    expect(result).toMatchObject({ survivorAlone: 400, bankAlone: 1200 });
+  });
 
   test("strings: energy before is energy after plus own plus equalising, for any bank at even shares", () => {
     fc.assert(
@@ -61,6 +65,9 @@ describe("isolationOf(bank, resistance)", () => {
   test("null without neighbours or without a resistor", () => {
     expect(isolationOf({ ...tied, parallel: 1 }, 0.05)).toBeNull();
     expect(isolationOf(tied, 0)).toBeNull();
+    expect(isolationOf(tied, -1)).toBeNull();
+    near(isolationOf({ ...tied, parallel: 2 }, 0.05)?.peakCurrent, 4000, 1e-12);
+    expect(isolationOf(strings, 0.05)).toEqual(isolationOf(tied, 0.05));
   });
 
   test("worked: 50 mohm each gives 6400 A, 844.8 J in the faulted leg, 52.8 J in each other, 16 896 A^2 s", () => {

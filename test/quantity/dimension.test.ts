@@ -13,6 +13,7 @@ describe("unitScale(unit, dimension)", () => {
     ["kΩ", "resistance", 3],
     ["g", "mass", -3],
     ["kg", "mass", 0],
+    ["k ohm", "resistance", 3],
     ["L", "volume", -3],
     ["mL", "volume", -6],
     ["%", "fraction", -2],

@@ -25,13 +25,29 @@ describe("withinMost(claim)", () => {
     expect(withinMost({ ...draft, value: 6, limit: 5, exceeded: "warn" }).verdict).toBe("warn"));
 });
 
+describe("a limit of zero", () => {
+  test("has no fraction left of it: the verdict stands, the margin is unknown", () => {
+    expect(withinMost({ ...draft, value: 5, limit: 0 })).toMatchObject({ verdict: "fail", margin: null });
+    expect(withinLeast({ ...draft, value: 5, limit: 0 })).toMatchObject({ verdict: "pass", margin: null });
+  });
+});
+
 describe("withinLeast(claim)", () => {
   test.each([
     [5000, 5000, "pass"],
     [5000 * (1 - 5e-10), 5000, "pass"],
     [4999, 5000, "fail"],
     [6000, 5000, "pass"],
+    [0, 0, "pass"],
   ])("%d for %d: %s", (value, limit, verdict) => expect(withinLeast({ ...draft, value, limit }).verdict).toBe(verdict));
-  test("unknown: not assessed", () =>
-    expect(withinLeast({ ...draft, value: null, limit: 5 }).verdict).toBe("not assessed"));
+  test("margin is what is left above the limit, as a fraction of it", () => {
+    expect(withinLeast({ ...draft, value: 6000, limit: 5000 }).margin).toBeCloseTo(0.2, 12);
+    expect(withinLeast({ ...draft, value: 4000, limit: 5000 }).margin).toBeCloseTo(-0.2, 12);
+  });
+  test("either unknown: not assessed, no margin", () => {
+    expect(withinLeast({ ...draft, value: null, limit: 5 })).toMatchObject({ verdict: "not assessed", margin: null });
+    expect(withinLeast({ ...draft, value: 5, limit: null })).toMatchObject({ verdict: "not assessed", margin: null });
+  });
+  test("what is only a warning warns", () =>
+    expect(withinLeast({ ...draft, value: 4, limit: 5, exceeded: "warn" }).verdict).toBe("warn"));
 });

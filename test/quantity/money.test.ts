@@ -4,7 +4,7 @@ import { describe, expect, test } from "vitest";
 import { formatMoney, isCurrency, lineCost, minorDigits, parsePrice, toMajor } from "../../src/quantity/money.ts";
 import fc from "../support/property.ts";
 
-const price = (text: string, currency = "EUR", decimalComma = false): number | string => {
+const price = (text: string, currency = "EUR", decimalComma: boolean | "never" = false): number | string => {
   const read = parsePrice(text, currency, decimalComma);
   return read.ok ? read.value : (read.refusals[0]?.code ?? "none");
 };
@@ -29,6 +29,7 @@ describe("minorDigits(currency)", () => {
     ["KWD", 3],
     ["TND", 3],
     ["HUF", 2],
+    ["IQD", 3],
     ["ISK", 0],
   ])("%s: %d", (code, digits) => expect(minorDigits(code)).toBe(digits));
 });
@@ -58,14 +59,46 @@ describe("parsePrice(text, currency)", () => {
     ["NaN", "bad-price"],
     ["1000000000", 1e11],
     ["1000000001", "bad-price"],
+    ["1000000000.5", "bad-price"],
     ["1,500", "ambiguous-comma"],
+    ["10,500", "ambiguous-comma"],
+    ["05,500", "ambiguous-comma"],
     ["0,500", 50],
+    ["00,500", 50],
+    ["1.500", 150],
   ])("%j: %s", (text, minor) => expect(price(text)).toBe(minor));
   test("no error of binary fractions: 0.29 is 29, 1.15 is 115, 8.41 is 841, all cents to 100", () => {
     for (let cents = 0; cents <= 10000; cents++) expect(price((cents / 100).toFixed(2))).toBe(cents);
   });
   // Where commas are decimal marks a point groups thousands: 1.234 EUR for a thousand is a thousand times too cheap.
   test("1.234 among decimal commas is refused", () => expect(price("1.234", "EUR", true)).toBe("ambiguous-comma"));
+  test("without a word on commas, 1.234 is 1.234 EUR and not a thousand", () =>
+    expect(parsePrice("1.234", "EUR")).toEqual({ ok: true, value: 123.4 }));
+  test.each([
+    ["1,500", false],
+    ["1.500", true],
+  ])(
+    "%s, decimal comma %s: the refusal names both readings, each of them is accepted, and they are a thousand apart",
+    (text, comma) => {
+      const read = parsePrice(text, "EUR", comma);
+      const [, thousands = "", decimal = ""] =
+        /^(\S+) if .* thousands, (\S+) if .* decimal mark$/.exec(read.ok ? "" : read.refusals[0]!.want) ?? [];
+      expect([price(thousands, "EUR", comma), price(decimal, "EUR", comma)]).toEqual([150000, 150]);
+      expect(read.ok ? "" : read.refusals[0]?.want).toContain(comma ? "point" : "comma");
+    },
+  );
+  test("a comma in a table whose cells commas part: refused with the price written with a point", () => {
+    const read = parsePrice("3,90", "EUR", "never");
+    expect(read).toMatchObject({ ok: false, refusals: [{ code: "ambiguous-comma", read: '"3,90"' }] });
+    const [meant = ""] = (read.ok ? "" : read.refusals[0]!.want).split(", ");
+    expect(price(meant, "EUR", "never")).toBe(390);
+    expect(price("12", "EUR", "never")).toBe(1200);
+  });
+  test.each(["ask", "2e9", "1000000001"])("%s: the refusal shows a price that is accepted", (text) => {
+    const read = parsePrice(text, "EUR");
+    expect(read).toMatchObject({ ok: false, refusals: [{ code: "bad-price", read: `"${text}"` }] });
+    expect(price(/"(.*)"/.exec(read.ok ? "" : read.refusals[0]!.want)?.[1] ?? "")).toBe(390);
+  });
   test("by the digits of its currency", () => {
     expect(price("3.90", "JPY")).toBe(3.9);
     expect(price("3.9", "KWD")).toBe(3900);

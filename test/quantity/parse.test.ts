@@ -4,11 +4,18 @@ import { describe, expect, test } from "vitest";
 import { DIMENSIONS, type Dimension } from "../../src/quantity/dimension.ts";
 import { formatQuantity } from "../../src/quantity/format.ts";
 import { example, parseQuantity } from "../../src/quantity/parse.ts";
+import type { Refusal } from "../../src/quantity/refusal.ts";
 import fc from "../support/property.ts";
 
 const value = (text: string, dimension: Dimension, options = {}): number | string => {
   const read = parseQuantity(text, dimension, options);
   return read.ok ? read.value : (read.refusals[0]?.code ?? "none");
+};
+
+const refusal = (text: string, dimension: Dimension, options = {}): Refusal => {
+  const read = parseQuantity(text, dimension, options);
+  if (read.ok) throw new Error(`${text} was accepted`);
+  return read.refusals[0]!;
 };
 
 describe("parseQuantity(text, dimension): bad numbers", () => {
@@ -42,6 +49,16 @@ describe("parseQuantity(text, dimension): bad numbers", () => {
     ["4M7", "capacitance", "unknown-unit"],
     ["4R7", "capacitance", "unknown-unit"],
     ["470 kkF", "capacitance", "unknown-unit"],
+    ["5 V\n6 V", "voltage", "not-a-number"],
+    ["4K7/2", "resistance", "unknown-unit"],
+    ["-4k7", "voltage", "unknown-unit"],
+    ["4m7V", "capacitance", "unknown-unit"],
+    ["4m7 uF", "capacitance", "unknown-unit"],
+    ["2k2A", "voltage", "unknown-unit"],
+    ["150,500 V", "voltage", "ambiguous-comma"],
+    ["10,500", "voltage", "ambiguous-comma"],
+    ["constructor", "voltage", "not-a-number"],
+    ["5 constructor", "voltage", "unknown-unit"],
   ] as const)("%j as %s: %s", (text, dimension, code) => expect(value(text, dimension)).toBe(code));
 
   test("a bare number where a unit is needed: missing-unit", () =>
@@ -53,9 +70,56 @@ describe("parseQuantity(text, dimension): bad numbers", () => {
   // m is milli by the prefixes, but "5 m" of time is five minutes to everyone who writes it: five milliseconds hold no bank.
   test("5 m of time is refused: milliseconds or minutes, nobody can tell", () =>
     expect(typeof value("5 m", "time")).toBe("string"));
+  // 1m30 is a minute and a half, 1m50 a metre and a half to those who write so; 4k7 of percent is nothing.
+  test.each([
+    ["1m30", "time"],
+    ["1m50", "length"],
+    ["2k2", "mass"],
+    ["4k7", "fraction"],
+    ["45u", "charge"],
+    ["5 k", "count"],
+  ] as const)("%s as %s is refused: no code", (text, dimension) =>
+    expect(typeof value(text, dimension)).toBe("string"),
+  );
   // Where commas are decimal marks, a point before three digits groups thousands.
-  test("1.500 V among decimal commas is refused", () =>
-    expect(value("1.500 V", "voltage", { decimalComma: true })).toBe("ambiguous-comma"));
+  test.each(["1.500 V", "1.500", "-1.500"])("%s among decimal commas is refused", (text) =>
+    expect(value(text, "voltage", { decimalComma: true })).toBe("ambiguous-comma"),
+  );
+  test.each([
+    ["1,500", false, "comma"],
+    ["1.500", true, "point"],
+  ])(
+    "%s, decimal comma %s: the refusal names both readings, each is accepted, and they are a thousand apart",
+    (text, decimalComma, mark) => {
+      const want = refusal(text, "voltage", { decimalComma }).want;
+      const [, thousands = "", decimal = ""] = /^(\S+) if .* thousands, (\S+) if .* decimal mark$/.exec(want) ?? [];
+      expect(value(thousands, "voltage", { decimalComma })).toBe(1500);
+      expect(value(decimal, "voltage", { decimalComma })).toBe(1.5);
+      expect(want).toContain(mark);
+    },
+  );
+  test.each([
+    ["2,2", 2.2],
+    [",5", 0.5],
+    ["22,", 22],
+  ])("%s V in a table whose cells commas part: refused, and the number as shown there is accepted", (text, meant) => {
+    const { code, want } = refusal(`${text} V`, "voltage", { decimalComma: "never" });
+    expect(code).toBe("ambiguous-comma");
+    expect(value(want.split(", with")[0]!, "voltage", { decimalComma: "never" })).toBe(meant);
+  });
+  test("a point in such a table is the decimal mark, also before three digits", () => {
+    expect(value("2.2 kV", "voltage", { decimalComma: "never" })).toBe(2200);
+    expect(value("1.500 V", "voltage", { decimalComma: "never" })).toBe(1.5);
+  });
+  test("a refused unit is named, with the quantity that it belongs to, and so is where a missing one may stand", () => {
+    expect(refusal("470 jar", "capacitance").want).toContain('"jar"');
+    expect(refusal("450 kV", "capacitance").want).toMatch(/"kV".*voltage/);
+    expect(refusal("470", "capacitance", { bare: null }).want).toMatch(/heading.*square brackets/);
+  });
+  test.each(["", "ask", "470 jar", "450 kV", "1e999"])(
+    "%j as capacitance: the refusal shows an accepted example",
+    (text) => expect(value(/"(.*?)"/.exec(refusal(text, "capacitance").want)?.[1] ?? "", "capacitance")).toBe(470e-6),
+  );
 });
 
 describe("parseQuantity(text, dimension): IEC 60062 codes", () => {
@@ -70,6 +134,15 @@ describe("parseQuantity(text, dimension): IEC 60062 codes", () => {
     ["1G0", "resistance", 1e9],
     ["1T0", "resistance", 1e12],
     ["4L7", "resistance", 4.7e-3],
+    ["4m7", "resistance", 4.7e-3],
+    ["4.7k", "resistance", 4700],
+    ["30u", "inductance", 30e-6],
+    ["30μ", "inductance", 30e-6],
+    ["4μ7", "inductance", 4.7e-6],
+    ["2.2k", "voltage", 2200],
+    ["50m", "current", 0.05],
+    ["2.4k", "energy", 2400],
+    ["2k", "power", 2000],
     ["4n7", "capacitance", 4.7e-9],
     ["1u0", "capacitance", 1e-6],
     ["p47", "capacitance", 0.47e-12],
@@ -116,6 +189,9 @@ describe("parseQuantity(text, dimension): units", () => {
     [".5 V", "voltage", 0.5],
     [",5 V", "voltage", 0.5],
     ["0,500 V", "voltage", 0.5],
+    ["00,500 V", "voltage", 0.5],
+    [",500 V", "voltage", 0.5],
+    ["1500,500 V", "voltage", 1500.5],
     ["5. V", "voltage", 5],
     ["4.7 kΩ", "resistance", 4700],
     ["4.7 kΩ", "resistance", 4700],
@@ -161,9 +237,10 @@ describe("parseQuantity(text, dimension): units", () => {
   });
   test("with decimal commas known, 1,500 is 1.5", () =>
     expect(value("1,500 V", "voltage", { decimalComma: true })).toBe(1.5));
+  test("a count has no unit to give", () => expect(example("count")).not.toContain("unit"));
   test("every example that we give is accepted", () => {
     for (const dimension of Object.keys(DIMENSIONS) as Dimension[]) {
-      const shown = /"(.*)"/.exec(example(dimension))?.[1] ?? "12";
+      const shown = /such as "?([^"]+)"?$/.exec(example(dimension))?.[1] ?? "none";
       expect(typeof value(shown, dimension), dimension).toBe("number");
     }
   });

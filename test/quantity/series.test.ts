@@ -105,6 +105,8 @@ describe("seriesBetween(name, low, high)", () => {
     expect(seriesBetween("E3", 10, 100)).toEqual([10, 22, 47, 100]);
     expect(seriesBetween("E3", 11, 21)).toEqual([]);
     expect(seriesBetween("E3", 22, 22)).toEqual([22]);
+    expect(seriesBetween("E3", 5, 10 * (1 - 1e-10))).toEqual([10]);
+    expect(seriesBetween("E96", 1, 1.02)).toEqual([1, 1.02]);
     const all = seriesBetween("E24", 1, 1e7);
     expect(all.length).toBe(169);
     expect(all.every((v, i) => i === 0 || v > all[i - 1]!)).toBe(true);

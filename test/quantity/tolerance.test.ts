@@ -22,6 +22,11 @@ describe("parseTolerance(text, bare)", () => {
     ["-10 / +50", "-10/+50"],
     ["−10/+50 %", "-10/+50"],
     ["-10 +50 %", "-10/+50"],
+    [" -10 %/+50 % ", "-10/+50"],
+    ["-10% /+50%", "-10/+50"],
+    [" M ", "-20/+20"],
+    ["0 /+20", "-0/+20"],
+    ["0/ + 20%", "-0/+20"],
     ["0/+20", "-0/+20"],
     ["-0/+20 %", "-0/+20"],
     ["0", "-0/+0"],
@@ -39,15 +44,41 @@ describe("parseTolerance(text, bare)", () => {
     ["X", "bad-tolerance"],
     ["NaN", "bad-tolerance"],
     ["20 V", "bad-tolerance"],
+    ["1±9 %", "bad-tolerance"],
+    ["5 -10/+50", "bad-tolerance"],
+    ["-10x/+50 %", "bad-tolerance"],
+    ["-10%x/+50 %", "bad-tolerance"],
+    ["10/+50 %", "bad-tolerance"],
+    ["0x/+20 %", "bad-tolerance"],
+    ["0/x+20 %", "bad-tolerance"],
+    ["0/+20 %x", "bad-tolerance"],
+    ["0/+20x%", "bad-tolerance"],
+    ["0/+2.0.0", "bad-tolerance"],
+    ["-1.0.0/+20", "bad-tolerance"],
   ])("%j below [%%]: %s", (text, read) => expect(tolerance(text)).toBe(read));
 
   test("without a unit anywhere, 20 may be 20 % or 20: missing-unit", () => {
     expect(tolerance("20", null)).toBe("missing-unit");
     expect(tolerance("20 %", null)).toBe("-20/+20");
     expect(tolerance("-10/+50 %", null)).toBe("-10/+50");
+    expect(tolerance("0/+20 %", null)).toBe("-0/+20");
+    expect(tolerance("-10/+50", null)).toBe("missing-unit");
+    expect(tolerance("0/+20", null)).toBe("missing-unit");
     expect(tolerance("M", null)).toBe("-20/+20");
   });
   test("decimal commas", () => expect(tolerance("-2,5/+7,5 %")).toBe("-2.5/+7.5"));
+  test("1.125 % is little more than one, unless commas are known to be decimal marks, when it may be 125 %", () => {
+    expect(parseTolerance("1.125 %", null)).toEqual({ ok: true, value: { low: 0.01125, high: 0.01125 } });
+    expect(tolerance("1.125 %", null, true)).toBe("bad-tolerance");
+  });
+  test("a refusal shows what was read, and every example it gives is accepted", () => {
+    const read = parseTolerance("half", null);
+    const want = read.ok ? "" : read.refusals[0]!.want;
+    expect(read).toMatchObject({ ok: false, refusals: [{ read: '"half"' }] });
+    const shown = [...want.matchAll(/"(.*?)"/g)].map(([, text = ""]) => text);
+    expect(shown.map((text) => tolerance(text, null))).toEqual(["-20/+20", "-20/+20", "-10/+50"]);
+    expect(tolerance(/letter such as (\w)/.exec(want)?.[1] ?? "", null)).toBe("-20/+20");
+  });
 });
 
 describe("TOLERANCE_LETTERS", () => {

@@ -2,9 +2,11 @@
 
 import { EventEmitter } from "node:events";
 import { type Capacitor, DEFAULT_FAMILY, readCapacitors } from "../../src/catalog/index.ts";
+import { accepted, refused } from "../../src/quantity/index.ts";
 import { catalogEngine } from "../../src/tui/catalogEngine.ts";
 import type { EnginePort, SaveAnswer, ScreenPorts, Workshop } from "../../src/tui/ports.ts";
 import { initialState, type State } from "../../src/tui/state.ts";
+import { unitsOn } from "../../src/tui/units/work.ts";
 import { SHARED_WORDS } from "../../src/tui/workshop.ts";
 import { Screen } from "./screen.ts";
 import { FakeKeyboard, FakeProcess } from "./tty.ts";
@@ -107,6 +109,10 @@ export function fakePorts(
         stock: changes.stock ?? STOCK,
         words: SHARED_WORDS,
         exportBill,
+        units: unitsOn(parts(), {
+          read: (path) => refused({ code: "no-such-file", place: { file: path }, read: "nothing", want: "a file" }),
+          write: (path) => accepted(path),
+        }),
         catalogue: CATALOGUE_FACTS,
         overrides: {},
         saveOverrides: () => ({ kind: "saved", path: "" }),

@@ -7,6 +7,7 @@ import { BRIEF, CATALOGUE_FACTS, parts, STOCK } from "../support/stock.ts";
 test("workshopOn(read, files): an engine that plans, the words of the commands, an order saved where it was said", () => {
   const written = new Map<string, string>();
   const files = {
+    read: () => ({ ok: false as const, refusals: [] }),
     write: (path: string, text: string) => {
       written.set(path, text);
       return { ok: true as const, value: path };

@@ -8,6 +8,8 @@ import { arrangementOf, selectedLayout } from "../pick.ts";
 import { RANKS } from "../ranks.ts";
 import { ask, type Change, type Message, type ScreenName, type State, still } from "../state.ts";
 import { withTried } from "../trail.ts";
+import type { UnitsMessage } from "../units/state.ts";
+import { updateUnits } from "../units/update.ts";
 import { mostScroll } from "../view/screen.ts";
 import { clickMeans } from "./click.ts";
 import { chooseField, editField, moveField } from "./form.ts";
@@ -29,7 +31,16 @@ function move(state: State, by: Step): Change {
   return scrollScreen(state, state.screen, by, mostScroll(state));
 }
 
-const OF_ONE_BANK: readonly ScreenName[] = ["bank", "sharing", "shot", "order"];
+const OF_ONE_BANK: readonly ScreenName[] = ["bank", "sharing", "shot", "order", "units"];
+
+/** The screen of measured units looks after itself; what it says is said with the rest. */
+function changeUnits(state: State, message: UnitsMessage): Change {
+  const { units, effects, notice } = updateUnits(state.units, message);
+  return {
+    state: { ...state, units, ...(notice === undefined ? {} : { notice }) },
+    effects: effects.map((effect) => ({ type: "units", effect })),
+  };
+}
 
 /** Going to the bank before one was chosen chooses the one under the cursor. */
 function goTo(state: State, screen: ScreenName): Change {
@@ -106,6 +117,8 @@ function changed(state: State, message: Message): Change {
     case "redraw":
       return { state, effects: [{ type: message.type }] };
     case "edit":
+      if (state.prompt === null && state.units.typing !== null && state.screen === "units")
+        return changeUnits(state, { type: "edit", edit: message.edit });
       return state.prompt === null ? editField(state, message.edit) : editName(state, message.edit);
     case "choice":
       return chooseField(state, message.by);
@@ -180,6 +193,8 @@ function changed(state: State, message: Message): Change {
       return still({ ...state, showFaults: !state.showFaults, scroll: { ...state.scroll, parts: 0 } });
     case "saved":
       return saved(state, message.answer);
+    case "units":
+      return changeUnits(state, message.message);
     case "say":
       return still({ ...state, notice: message.notice });
   }

@@ -22,6 +22,8 @@ const ABOUT: Readonly<Record<State["screen"], string>> = {
   map: "Every unbeaten layout as a point: no other is as good in cost, volume, mass, units and stress and better in one. X is the cursor, A to D are pinned. As text: joulewright plan BRIEF --json, its front.",
   parts:
     "What was understood of the catalogues. Enter sets the value in hand; it is kept in a file beside the catalogue, never in it, and planned with at once. A catalogue that changes on disk is read again. As text: joulewright parts FILE.",
+  units:
+    "Measured units, each where the voltages come out most equal. A mark is a unit, low to high capacitance in the lot; a gap is how far the worst stands over an even share; the mark on its bar is what the meter can tell. As text: joulewright place.",
   order:
     "What must be bought: needed, less what is on hand, in whole packs and at the price for the quantity. As text: joulewright order LAYOUT.",
 };

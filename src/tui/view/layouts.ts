@@ -87,8 +87,40 @@ export function listColumns(state: State, layouts: readonly LayoutResult[]): rea
   return layoutColumns(state).map((column, index) => ({ ...column, width: widths[index]?.width ?? column.width }));
 }
 
+interface ListTable {
+  readonly columns: readonly Column<LayoutResult>[];
+  readonly rowOf: (layout: LayoutResult) => Row;
+}
+
+const tables = new WeakMap<readonly LayoutResult[], { readonly of: readonly unknown[]; readonly table: ListTable }>();
+
+/** The table of a list, kept while the list, the pins and the width are the same: scrolling then draws no row twice. */
+function tableFor(state: State, layouts: readonly LayoutResult[], width: number): ListTable {
+  const of = [state.pins, planOf(state)?.front, width];
+  const known = tables.get(layouts);
+  if (known?.of.every((one, index) => one === of[index])) return known.table;
+  const columns = widen(columnsFor(listColumns(state, layouts), width), "part", width, 40);
+  const rows = new Map<LayoutResult, Row>();
+  const rowOf = (layout: LayoutResult): Row => {
+    const row = rows.get(layout) ?? { left: [span("  "), ...tableRow(columns, layout).left] };
+    rows.set(layout, row);
+    return row;
+  };
+  const table: ListTable = { columns, rowOf };
+  tables.set(layouts, { of, table });
+  return table;
+}
+
+const sentences = new WeakMap<LayoutResult, readonly string[]>();
+
 /** The layout in a few sentences, the most wanted first. */
 export function layoutSentences(layout: LayoutResult): readonly string[] {
+  const found = sentences.get(layout) ?? newSentences(layout);
+  sentences.set(layout, found);
+  return found;
+}
+
+function newSentences(layout: LayoutResult): readonly string[] {
   const { share, balance, bleed } = layout;
   const holding = layout.series === 1 ? "" : `, ${shownWorst(share.holding, "voltage")} holding`;
   return [
@@ -108,7 +140,7 @@ export function layoutsPage(state: State, room: Room): Page {
   if (empty.length > 0) return pageOf(empty);
   const layouts = listed(state);
   const plan = planOf(state);
-  const columns = widen(columnsFor(listColumns(state, layouts), room.columns - 2), "part", room.columns - 2, 40);
+  const { columns, rowOf: rowFor } = tableFor(state, layouts, room.columns - 2);
   const count = grouped(plan?.searched.layouts ?? 0);
   const which = state.frontOnly
     ? `${layouts.length} unbeaten in every respect, of ${count}`
@@ -124,10 +156,9 @@ export function layoutsPage(state: State, room: Room): Page {
   // Derived from the cursor each time: a kept offset would hide the cursor when the terminal shrinks.
   const from = Math.max(0, Math.min(layouts.length - space, selected - Math.floor(space / 2)));
   const rows = layouts.slice(from, from + space).map((layout, index): Row => {
-    const row = tableRow(columns, layout);
-    const here = from + index === selected;
-    const left = here ? row.left.map((cell) => ({ ...cell, style: "focus" as const })) : row.left;
-    return { left: [span(here ? "> " : "  ", "key"), ...left] };
+    const row = rowFor(layout);
+    if (from + index !== selected) return row;
+    return { left: [span("> ", "key"), ...row.left.slice(1).map((cell) => ({ ...cell, style: "focus" as const }))] };
   });
   const proof = plan?.searched.proof === "exhaustive" ? "all were tried" : (plan?.searched.proof ?? "");
   return pageOf([

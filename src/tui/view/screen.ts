@@ -20,6 +20,7 @@ import { sharingPage } from "./sharing.ts";
 import { shotPage } from "./shot.ts";
 import { ruleRow, tabsRow } from "./top.ts";
 import { trailPage } from "./trail.ts";
+import { unitsPage } from "./units.ts";
 import { CAUTIONS, refusalOf, refusalWords } from "./words.ts";
 
 export const LEAST_COLUMNS = 60;
@@ -39,6 +40,7 @@ const PAGES: Readonly<Record<State["screen"], (state: State, room: Room) => Page
   shot: shotPage,
   order: orderPage,
   map: mapPage,
+  units: unitsPage,
   parts: partsPage,
   trail: trailPage,
 };
