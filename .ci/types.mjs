@@ -5,7 +5,7 @@ import { createRequire } from "node:module";
 import { tmpdir } from "node:os";
 import { dirname, join, resolve } from "node:path";
 
-const IMPORT = /((?:from|import\()\s*")(\.[^"]+)\.ts"/g;
+const IMPORT = /((?:from|import\()\s*")(\.[^"]+)\.tsx?"/g;
 
 /** Writes them below `folder`. Throws with the compiler's own words when the types do not hold. */
 export function declarations(root, folder) {

@@ -154,3 +154,13 @@ export {
   type ShotReport,
   shotOf,
 } from "./search/index.ts";
+export * as sheet from "./sheet/index.ts";
+export {
+  type Labels,
+  labelsOf,
+  labelsToHtml,
+  type Sheet,
+  type SheetInput,
+  sheetOf,
+  sheetText,
+} from "./sheet/index.ts";

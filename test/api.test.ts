@@ -61,6 +61,12 @@ describe("the package", () => {
     expect(Object.keys(scripts).filter((name) => /^(pre|post)?install$/.test(name))).toEqual([]);
   });
 
+  test("its manual page is one that an installation links: a list, of files that it brings, of section 1", () => {
+    const { man } = JSON.parse(readFileSync(join(library.installed, "package.json"), "utf8"));
+    expect(man).toEqual(["./dist/joulewright.1"]);
+    expect(readFileSync(join(library.installed, man[0]), "utf8")).toMatch(/^\.TH JOULEWRIGHT 1 /);
+  });
+
   test("the program runs from where it was installed", () => {
     const version = execFileSync(process.execPath, [join(library.installed, "dist/main.js"), "--version"], {
       encoding: "utf8",

@@ -16,6 +16,7 @@
  * Units are independent. What a whole lot has in common (all 5 % high) divides out of every share.
  * Source: [methods-derived] 1.3; [Galambos1996] I.1, I.3 for the bounds of a union (place from memory)
  */
+import { power } from "../quantity/index.ts";
 import { riskBound } from "./tailBound.ts";
 import { LEAST_LOT, lawRange, type TailCase } from "./tailLaw.ts";
 import { lotStages } from "./tailLot.ts";
@@ -121,7 +122,7 @@ function lotSingle(given: TailCase, kappa: number): Single | null {
 /** Chance that every unit lies where an excess needs it, over all stages: an upper bound. */
 function vanishing({ victim, other }: Stages, n: number): number {
   const all = (masses: Float64Array): number => masses.reduce((sum, mass) => sum + mass, 0);
-  return Math.max(Number.MIN_VALUE, n * all(victim.masses) * all(other.masses) ** (n - 1));
+  return Math.max(Number.MIN_VALUE, n * all(victim.masses) * power(all(other.masses), n - 1));
 }
 
 /** A chance spans decades, so it is its logarithm that goes as the square of the step. */

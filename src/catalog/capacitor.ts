@@ -45,6 +45,8 @@ export interface Capacitor extends PurchaseTerms {
   readonly peakCurrent?: number;
   readonly rippleCurrent?: number;
   readonly slew?: number;
+  /** Action integral of one shot that the unit may bear, A^2 s. */
+  readonly action?: number;
   /** First opposite peak over charge voltage that the unit may bear in a shot. */
   readonly reversal?: number;
   readonly ratedShots?: number;
@@ -99,6 +101,12 @@ export const CAPACITOR_COLUMNS: readonly Column[] = [
   { heading: "peak current", key: "peakCurrent", type: above("current", 1e-6, 1e8) },
   { heading: "ripple current", key: "rippleCurrent", type: above("current", 1e-6, 1e6) },
   { heading: "slew", also: ["dv/dt"], key: "slew", type: above("slew", 1, 1e15) },
+  {
+    heading: "action",
+    also: ["i2t", "i\u00b2t", "action integral", "unit action", "peak i2t"],
+    key: "action",
+    type: above("action", 1e-9, 1e12),
+  },
   { heading: "reversal", key: "reversal", type: fromZero("fraction", 1) },
   { heading: "rated shots", key: "ratedShots", type: { kind: "quantity", dimension: "count", least: 1, most: 1e12 } },
   { heading: "life exponent", key: "lifeExponent", type: { kind: "quantity", dimension: "count", least: 0, most: 40 } },

@@ -10,9 +10,20 @@ export type { PriceBreak } from "./cell.ts";
 export type { Column } from "./column.ts";
 export { readRecords, separatorOf } from "./csv.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
+export { type History, type HistoryRow, readHistory } from "./history.ts";
 export { type MeasuredLot, type MeasuredUnit, readMeasured } from "./measured.ts";
+export { OVERRIDABLE, type Overrides, overridden, readOverrides, withOverrides } from "./overrides.ts";
 export { type ListedUnit, readPositions, type UnitList } from "./positions.ts";
-export { cheapest, isPriced, leastBuyable, type Purchase, purchase, toBuy, unitPriceAt } from "./purchase.ts";
+export {
+  breaksRise,
+  cheapest,
+  isPriced,
+  leastBuyable,
+  type Purchase,
+  purchase,
+  toBuy,
+  unitPriceAt,
+} from "./purchase.ts";
 export { type Catalogue, readCapacitors } from "./readCapacitors.ts";
 export { READING_COLUMNS, type Reading, type Readings, readReadings } from "./readings.ts";
 export {

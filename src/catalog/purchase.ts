@@ -35,6 +35,12 @@ const inPacks = (quantity: number, pack: number): number => Math.ceil(quantity /
 export const isPriced = (terms: PurchaseTerms): boolean =>
   terms.price !== undefined || (terms.priceBreaks?.length ?? 0) > 0;
 
+/** True when some larger quantity has a higher unit price than a smaller one. */
+export function breaksRise({ price, priceBreaks = [] }: PurchaseTerms): boolean {
+  const prices = [...(price === undefined ? [] : [price]), ...priceBreaks.map((step) => step.price)];
+  return prices.some((one, at) => at > 0 && one > prices[at - 1]!);
+}
+
 /** What must be bought to have `needed`, packs and minimum order included, whether or not it can be had; zero when the hand suffices. */
 export function toBuy(terms: PurchaseTerms, needed: number): number {
   const short = needed - (terms.onHand ?? 0);

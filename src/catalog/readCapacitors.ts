@@ -92,6 +92,7 @@ function draft({ values, line }: Row, file: string): Mutable {
     peakCurrent: values[AT.peakCurrent] as never,
     rippleCurrent: values[AT.rippleCurrent] as never,
     slew: values[AT.slew] as never,
+    action: values[AT.action] as never,
     reversal: values[AT.reversal] as never,
     ratedShots: values[AT.ratedShots] as never,
     lifeExponent: values[AT.lifeExponent] as never,

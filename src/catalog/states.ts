@@ -9,6 +9,7 @@ export const RULES = {
   polarity: "polarity from the technology named",
   builder: "assumed by the catalogue's own `assumed` column",
   plate: "computed from the plates",
+  hand: "set by hand beside the catalogue",
 } as const;
 
 /** State of one value of a capacitor, by its key; `unknown` when the row has no value. */

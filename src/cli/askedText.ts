@@ -3,7 +3,16 @@
 import { visible } from "../order/index.ts";
 import { type Dimension, formatQuantity } from "../quantity/index.ts";
 import { type Brief, LIMIT_KEYS } from "../search/index.ts";
-import { busWords, chargerWords, clampWords, limitWords, loadWords, switchWords } from "./circuitWords.ts";
+import {
+  busWords,
+  chargerWords,
+  clampWords,
+  isolatingWords,
+  limitWords,
+  loadWords,
+  sectionWords,
+  switchWords,
+} from "./circuitWords.ts";
 import { pad, wrap } from "./wrap.ts";
 
 interface Asked {
@@ -62,7 +71,14 @@ const ASKED: readonly Asked[] = [
   { label: "switch", key: "switch", value: switchWords },
   { label: "bus", key: "bus", value: busWords },
   { label: "clamp diode", key: "clamp", value: clampWords },
-  { label: "isolating resistor", key: "isolating", value: (b) => show(b.isolating, "resistance") },
+  { label: "isolating resistor", key: "isolating", value: isolatingWords },
+  { label: "section inductance", key: "section", value: sectionWords },
+  {
+    label: "fuses",
+    key: "fused",
+    value: (b) => (b.fused ? "one to each unit or string, the cheapest that does" : null),
+  },
+  { label: "a short resists with", key: "shortResistance", value: (b) => show(b.shortResistance, "resistance") },
   { label: "charger", key: "charger", value: chargerWords },
   { label: "limits of a unit", key: LIMIT_KEYS, value: limitWords },
 ];

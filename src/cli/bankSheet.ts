@@ -16,6 +16,10 @@ export interface BankSheet {
   readonly chains: readonly Chain[];
   /** Serials by stage or string; empty when the units are not known. */
   readonly groups: readonly (readonly string[])[];
+  /** The measured units, spares too, as the sheet has them; empty when it has none. */
+  readonly units: readonly MeasuredUnit[];
+  /** Of a measured capacitance, relative. */
+  readonly uncertainty: number;
   readonly doubt: PriorDoubt;
   /** V; null when not known. */
   readonly limit: number | null;
@@ -28,6 +32,8 @@ export interface SheetWishes {
   /** ohm; overrides that of the sheet. `none` for none. */
   readonly resistance?: number | "none";
   readonly limit?: number;
+  /** Units measured anew since the sheet was written, by serial: the bank is what they are now. */
+  readonly latest?: ReadonlyMap<string, Partial<MeasuredUnit>>;
 }
 
 /** Version of a placing in JSON, as place writes it. */
@@ -89,7 +95,11 @@ function fromPlacing(facts: Facts, shape: Shape, wishes: SheetWishes, no: No): R
   if (stray !== undefined) return no(JSON.stringify(stray), "a serial among the sheet's units");
   const voltage = numberOr(bank.voltage);
   const leakageVoltage = numberOr(bank.leakageVoltage);
-  const placed = lists.map((group) => (group as unknown[]).map((serial) => bySerial.get(serial) as MeasuredUnit));
+  const placed = lists.map((group) =>
+    (group as string[]).map(
+      (serial): MeasuredUnit => ({ ...(bySerial.get(serial) as MeasuredUnit), ...wishes.latest?.get(serial) }),
+    ),
+  );
   const known = leakageVoltage !== null && placed.flat().every((unit) => numberOr(unit.leakage) !== null);
   const at = leakageVoltage ?? 1;
   const filled = placed.map((group) =>
@@ -101,6 +111,8 @@ function fromPlacing(facts: Facts, shape: Shape, wishes: SheetWishes, no: No): R
     ...shape,
     chains: chainsOf({ groups: filled, ties: shape.ties, leakageVoltage: at, resistance }),
     groups: lists as readonly string[][],
+    units: [...bySerial.values()],
+    uncertainty: u,
     doubt: {
       ...DOUBT,
       capacitance: u / Math.sqrt(shape.ties === "cross-tied" ? shape.parallel : 1),
@@ -139,6 +151,8 @@ function fromLayout(facts: Facts, shape: Shape, wishes: SheetWishes, no: No): Re
     ...shape,
     chains: chainsOf({ groups, ties, leakageVoltage, resistance }),
     groups: [],
+    units: [],
+    uncertainty: DOUBT.capacitance,
     doubt: {
       ...DOUBT,
       capacitance: spread / Math.sqrt(cross ? parallel : 1),

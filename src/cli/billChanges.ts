@@ -9,6 +9,10 @@ function words({ kind, item, line, heading, made, read }: BillChange): string {
   switch (kind) {
     case "kept":
       return `${what}, ${heading}: yours is kept, ${quoted(read)} in place of ${quoted(made)}`;
+    case "not taken over":
+      return `${what}, ${heading}: yours, ${quoted(read)}, was beside another part and is not taken over`;
+    case "check again":
+      return `${what}: CHECK AGAIN what you chose: ${heading} was ${quoted(read)}, now it is ${quoted(made)}`;
     case "own line":
       return `${what}: your own line is kept`;
     case "put back":

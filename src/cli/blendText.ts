@@ -3,6 +3,7 @@
 import { visible } from "../order/index.ts";
 import { formatQuantity } from "../quantity/index.ts";
 import type { BlendPlan, BlendResult, BlendString, LayoutResult, WorstShare } from "../search/index.ts";
+import { frontText, ladderText } from "./blendFrontText.ts";
 import { loosenWords, proofSentence } from "./blendWords.ts";
 import { titleOf, VERDICTS } from "./findingWords.ts";
 import { findingsText, hanging, money } from "./layoutText.ts";
@@ -28,9 +29,11 @@ export function blendText({ plan, single, width }: BlendText): string {
     ...disagreementText(plan, width),
     ...(best === undefined
       ? nothing(plan, width)
-      : [whole("Cheapest blend", best, width), ...besideSingle(best, single, width)]),
-    ...kept.map((one) => whole("The other engine's blend", one, width)),
+      : [wholeText("Cheapest blend", best, width), ...besideSingle(best, single, width)]),
+    ...kept.map((one) => wholeText("The other engine's blend", one, width)),
     ...rivalText(plan, rivals, width),
+    ...plan.fronts.map((front) => frontText(front, plan.currency, width)),
+    ...(plan.ladder === null ? [] : [ladderText(plan.ladder, plan.currency, width)]),
     ...priceText(plan, width),
     leftOutText(plan, width),
     ...plan.notes.map((note) => wrap(`Note: ${note}`, width)),
@@ -62,7 +65,8 @@ function stringsTable(strings: readonly BlendString[], width: number): string {
   );
 }
 
-function whole(title: string, blend: BlendResult, width: number): string {
+/** One blend with its groups, its figures and its findings. */
+export function wholeText(title: string, blend: Omit<BlendResult, "certificate">, width: number): string {
   const { cost, bleed, capacitance, energy } = blend;
   const span = (of: BlendResult["capacitance"], dimension: "capacitance" | "energy"): string => {
     const show = (x: number, rounding: "up" | "down" | "nearest"): string => formatQuantity(x, dimension, { rounding });
@@ -79,6 +83,7 @@ function whole(title: string, blend: BlendResult, width: number): string {
   const together = bleed.together === null ? "" : `; ${seconds(bleed.together)} together`;
   const left = cost !== null && cost.unpriced.length > 0 ? `; without a price: ${cost.unpriced.join(", ")}` : "";
   const lines = cost !== null && cost.lines > 0 ? `, lines ${cost.lines.toFixed(2)}` : "";
+  const sent = cost !== null && cost.shipments > 0 ? `, shipments ${cost.shipments.toFixed(2)}` : "";
   const facts: readonly (readonly [string, string])[] = [
     ["units", `${blend.units} in ${blend.strings.length} ${blend.strings.length === 1 ? "group" : "groups"}`],
     ["capacitance", span(capacitance, "capacitance")],
@@ -90,8 +95,9 @@ function whole(title: string, blend: BlendResult, width: number): string {
       "cost",
       cost === null
         ? "no price"
-        : `${money(cost.total, cost.currency)} (capacitors ${(cost.capacitors ?? 0).toFixed(2)}, resistors ${cost.resistors === null ? "no price" : cost.resistors.toFixed(2)}${lines})${left}`,
+        : `${money(cost.total, cost.currency)} (capacitors ${(cost.capacitors ?? 0).toFixed(2)}, resistors ${cost.resistors === null ? "no price" : cost.resistors.toFixed(2)}${lines}${sent})${left}`,
     ],
+    ...(blend.shipments.length === 0 ? [] : [["shipments", shipmentWords(blend)] as const]),
     ["volume", formatQuantity(blend.volume, "volume", { digits: 3, rounding: "up" })],
     ["mass", formatQuantity(blend.mass, "mass", { digits: 3, rounding: "up" })],
   ];
@@ -110,6 +116,11 @@ function whole(title: string, blend: BlendResult, width: number): string {
     ...(groups.length > 0 ? ["", "  Group by group", ...groups] : []),
   ].join("\n");
 }
+
+const shipmentWords = ({ shipments, cost }: Pick<BlendResult, "shipments" | "cost">): string =>
+  shipments
+    .map(({ supplier, cost: each }) => `${visible(supplier ?? "not named")} ${money(each, cost?.currency)}`)
+    .join(", ");
 
 function worstWords(worst: WorstShare | null): string {
   if (worst === null) return "not assessed";

@@ -2,14 +2,17 @@
 
 import { visible } from "../order/index.ts";
 import { type Dimension, formatMoney, formatQuantity } from "../quantity/index.ts";
-import type { BlendPlan, CeilingWorth, Loosen, NamedCertificate } from "../search/index.ts";
+import type { BlendPlan, Loosen, NamedCertificate } from "../search/index.ts";
+import { movesText, stockText, worthText } from "./blendMoveWords.ts";
 import { money } from "./layoutText.ts";
-import { bullet, wrap } from "./wrap.ts";
+import { wrap } from "./wrap.ts";
 
 /** How sure it is. */
 export function proofSentence(plan: BlendPlan): string {
   const { status, compared, provenBy, lowerBound, gap, currency, blends } = plan;
-  const among = `${compared} kinds of string compared.`;
+  const among = `${compared} ${compared === 1 ? "kind" : "kinds"} of string compared.`;
+  if (status === "optimal" && plan.limited !== null)
+    return `${among} The cheapest that keeps the limits on shot and faults is proven by trying: ${triedWords(plan)}`;
   if (status === "optimal") {
     const check =
       blends[0]?.certificate?.verdict === "valid"
@@ -17,6 +20,10 @@ export function proofSentence(plan: BlendPlan): string {
         : "its proof was too long to be checked again here";
     return `${among} The cheapest is proven (${provenBy ?? "own search"}): ${check}.`;
   }
+  if (status === "infeasible" && plan.limited !== null)
+    return `${among} It is proven by trying that no blend keeps the limits on shot and faults: ${triedWords(plan)}`;
+  if (plan.limited !== null)
+    return `${among} Not settled: no blend was found that keeps the limits on shot and faults, and not all could be tried. ${triedWords(plan)}`;
   if (status === "infeasible")
     return `${among} ${plan.loosen.some(({ field }) => field === "maxCost") ? "The cheapest costs more than the limit" : "It is proven that none meets the need within the limits"} (${provenBy ?? "own search"}).`;
   if (plan.certificate?.verdict === "invalid")
@@ -26,11 +33,26 @@ export function proofSentence(plan: BlendPlan): string {
   return `${among} NOT PROVEN: the best found in the time allowed (--solver-time).${least} it is at most ${formatQuantity(gap, "fraction", { digits: 3, rounding: "up" })} too dear.`;
 }
 
+/** How many were turned down, and what the cheapest of all broke. */
+function triedWords({ limited, currency }: BlendPlan): string {
+  if (limited === null) return "";
+  const { rejected, cheapest } = limited;
+  const count = `${rejected} cheaper ${rejected === 1 ? "one breaks one of them, or is" : "ones each break one of them, or are"} not proven to keep it.`;
+  const { broken, id, cost } = cheapest;
+  if (broken === null) return count;
+  const show = (x: number | null): string =>
+    x === null ? "unknown" : `${Number(x.toPrecision(4))} ${broken.unit === "1" ? "" : broken.unit}`.trim();
+  const price = cost === null ? "" : ` at ${money(cost, currency ?? undefined)}`;
+  const how = broken.open ? "is not proven to keep" : "breaks";
+  return `${count} The cheapest of all, ${visible(id)}${price}, ${how} the limit on ${broken.limit.replaceAll("-", " ")}: ${show(broken.value)} on a unit of ${visible(broken.part)}, allowed ${show(broken.allowed)}.`;
+}
+
 const LIMITS: Readonly<Record<Loosen["field"], readonly [name: string, dimension: Dimension | "money"]>> = {
   maxCost: ["the most it may cost", "money"],
   maxVolume: ["the most room", "volume"],
   maxMass: ["the most mass", "mass"],
   maxUnits: ["the most units", "count"],
+  "all ceilings": ["all limits on room, mass and units together", "count"],
   maxTypes: ["the most parts in one bank", "count"],
   energy: ["the energy of a pulse", "energy"],
 };
@@ -50,6 +72,8 @@ export function loosenWords({ field, from, to, change, cost, proven }: Loosen, c
   const then =
     cost === null || field === "maxCost" ? "" : `: then the cheapest costs ${money(cost, currency ?? undefined)}`;
   const least = proven ? "" : "; less may do";
+  if (field === "all ceilings")
+    return `raise ${name} by ${formatQuantity(change ?? 0, "fraction", { digits: 3, rounding: "up" })}${then}${least}`;
   return `${lower ? "lower" : "raise"} ${name} from ${show(from, "nearest")} to ${show(to ?? from, lower ? "down" : "up")}${percent}${then}${least}`;
 }
 
@@ -61,13 +85,21 @@ export function explainText(plan: BlendPlan, width: number): string {
       ? ["There is no proof to explain: the search was stopped before one."]
       : proofSteps(certificate, plan);
   const numbered = steps.map((step, at) => wrap(`${at + 1}. ${step}`, width, "  "));
-  return `${[`How this is known\n${numbered.join("\n")}`, ...movesText(plan, width), ...worthText(plan, width)].join("\n\n")}\n`;
+  return `${[`How this is known\n${numbered.join("\n")}`, ...movesText(plan, width), ...stockText(plan, width), ...worthText(plan, width)].join("\n\n")}\n`;
 }
 
 function proofSteps(proof: NamedCertificate, plan: BlendPlan): readonly string[] {
   const show = (minor: number): string => formatMoney(minor, proof.currency ?? "XXX");
   const { prices, bound, survivors, cost } = proof;
-  const compared = `${proof.compared} kinds of string were compared, each part in its least safe series count. For every count of strings the cheapest purchase was worked out whole: stock, packs, minimum order, price breaks, resistors. At most ${proof.maxTypes} parts may be mixed.`;
+  const sent =
+    proof.shipments === undefined
+      ? ""
+      : ` A shipment is paid once for each supplier (${Object.entries(proof.shipments)
+          .map(([name, minor]) => `${visible(name === "" ? "not named" : name)} ${show(minor)}`)
+          .join(
+            ", ",
+          )}); in the bound each kind of string bears only the share that is left if as many as may be mixed come in it.`;
+  const compared = `${proof.compared} kinds of string were compared, each part in its least safe series count. For every count of strings the cheapest purchase was worked out whole: stock, packs, minimum order, price breaks, resistors.${sent} At most ${proof.maxTypes} parts may be mixed.`;
   const ceilings = (["volume", "mass", "units"] as const)
     .filter((name) => Math.round(prices[name]) > 0)
     .map((name) => `${show(prices[name])} on using up the whole limit on ${name}`);
@@ -91,48 +123,17 @@ function proofSteps(proof: NamedCertificate, plan: BlendPlan): readonly string[]
     ];
   const bar = `Put a price of ${show(prices.capacity)} on the whole capacitance needed${ceilings.length > 0 ? ` and ${ceilings.join(", ")}` : ""}. Then any mix that meets the need within the limits costs at least ${show(bound)}: each part's gain over its cost counts at its best, for the best ${proof.maxTypes} parts.`;
   const open = survivors.reduce((sum, { strings }) => sum + strings.length, 0);
+  const parts = new Set(survivors.map(({ part }) => part)).size;
   const target = cost === null ? "than any blend could cost" : `than ${show(cost)}`;
   const rest =
     open === 0
       ? `Costs are whole, so nothing cheaper ${target} is left to try.`
-      : `By the same arithmetic only ${open} ${open === 1 ? "count" : "counts"} of ${survivors.length} ${survivors.length === 1 ? "part" : "parts"} could be in a mix cheaper ${target}: ${named(survivors)}. Every mix of these was tried, and none is.`;
+      : `By the same arithmetic only ${open} ${open === 1 ? "count" : "counts"} of ${parts} ${parts === 1 ? "part" : "parts"} could be in a mix cheaper ${target}: ${named(survivors)}. Every mix of these was tried, and none is.`;
   return [compared, bar, rest, verdict + second];
 }
 
 function named(survivors: NamedCertificate["survivors"]): string {
-  const first = survivors.slice(0, 6).map(({ part }) => visible(part));
-  return survivors.length > 6 ? `${first.join(", ")} and ${survivors.length - 6} more` : first.join(", ");
-}
-
-function movesText({ priceMoves, currency }: BlendPlan, width: number): readonly string[] {
-  if (priceMoves.length === 0) return [];
-  const lines = priceMoves.map(({ part, move, perUnit, next, proven }) => {
-    const way = move === "rise" ? "rises" : "falls";
-    return bullet(
-      `if ${visible(part)} ${way} by more than ${money(perUnit, currency ?? undefined)} a unit, at the quantities now best, ${visible(next)} is cheaper${proven ? "" : "; a smaller change may do"}`,
-      width,
-    );
-  });
-  return [`What prices would change the choice\n${lines.join("\n")}`];
-}
-
-const ROOM: readonly (readonly [keyof CeilingWorth, number, string])[] = [
-  ["volume", 1e-3, "one more litre of room"],
-  ["mass", 1, "one more kilogram"],
-  ["units", 1, "one more unit allowed"],
-  ["types", 1, "one more part allowed"],
-];
-
-function worthText({ worth, currency }: BlendPlan, width: number): readonly string[] {
-  if (worth === null) return [];
-  const lines = ROOM.flatMap(([key, each, words]) =>
-    worth[key] * each >= 0.005
-      ? [bullet(`${words} is worth about ${money(worth[key] * each, currency ?? undefined)}`, width)]
-      : [],
-  );
-  if (lines.length === 0)
-    return [
-      wrap("No limit holds the cost up: more room would save nothing, as far as fractions of strings tell.", width),
-    ];
-  return [`What the limits cost (a guide, from fractions of strings)\n${lines.join("\n")}`];
+  const names = [...new Set(survivors.map(({ part }) => visible(part)))];
+  const first = names.slice(0, 6);
+  return names.length > 6 ? `${first.join(", ")} and ${names.length - 6} more` : first.join(", ");
 }

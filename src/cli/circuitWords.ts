@@ -36,19 +36,35 @@ export function switchWords({ switch: sw }: Brief): string | null {
 
 export function busWords({ bus }: Brief): string | null {
   if (bus === undefined) return null;
+  const fed = bus.feed !== undefined && `fed at ${bus.feed === "end" ? "one end" : "the centre"}`;
   if (bus.shape === undefined)
-    return joined(show(bus.resistance ?? 0, "resistance"), show(bus.inductance ?? 0, "inductance"));
+    return joined(
+      show(bus.resistance ?? 0, "resistance"),
+      show(bus.inductance ?? 0, "inductance"),
+      fed,
+      bus.stepResistance !== undefined &&
+        `${show(bus.stepResistance, "resistance")} and ${show(bus.stepInductance ?? 0, "inductance")} from unit to unit`,
+    );
   const lengths = (["length", "width", "gap", "thickness", "radius", "spacing", "inner", "outer", "wall"] as const).map(
     (key) => {
       const value = bus[key];
       return value !== undefined && `${key} ${show(value, "length")}`;
     },
   );
-  return joined(`${bus.shape} of ${bus.metal}`, ...lengths);
+  const pitch = bus.pitch !== undefined && `pitch ${show(bus.pitch, "length")}`;
+  return joined(`${bus.shape} of ${bus.metal}`, ...lengths, fed, pitch);
 }
 
 export const clampWords = ({ clamp }: Brief): string | null =>
   clamp === undefined ? null : joined(`drop ${show(clamp.drop, "voltage")}`, show(clamp.resistance, "resistance"));
+
+const each = (price: number | undefined): string | false => price !== undefined && `${price} each`;
+
+export const isolatingWords = ({ isolating, isolatingPrice }: Brief): string | null =>
+  isolating === undefined ? null : joined(show(isolating, "resistance"), each(isolatingPrice));
+
+export const sectionWords = ({ section }: Brief): string | null =>
+  section === undefined ? null : joined(show(section.inductance, "inductance"), each(section.price));
 
 export function chargerWords({ charger }: Brief): string | null {
   if (charger === undefined) return null;

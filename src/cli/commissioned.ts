@@ -13,6 +13,7 @@ import { type BankSheet, readSheet } from "./bankSheet.ts";
 import { type CommissionChoices, type CommissionFlags, readCommissionFlags } from "./commissionFlags.ts";
 import type { Ports } from "./ports.ts";
 import { readRows } from "./readingRows.ts";
+import { latestOf, readLog, type Watched, watched } from "./watched.ts";
 
 /** A place of the bank, counted from 1 as on the position list. */
 export interface Spot {
@@ -55,13 +56,32 @@ export interface Commissioned {
 
 const RANK = { agrees: 0, differs: 1, stop: 2 } as const;
 
-export function commissionedBank(path: string, flags: CommissionFlags, ports: Ports): Read<Commissioned> {
+/** What was asked of a bank: its readings judged, its log, or both. */
+export interface Answered {
+  readonly found: Commissioned | null;
+  readonly watched: Watched | null;
+  readonly sheet: BankSheet;
+  readonly choices: CommissionChoices;
+}
+
+/** A log by itself needs no readings. */
+export function commissionedBank(path: string, flags: CommissionFlags, ports: Ports): Read<Answered> {
   const { choices, faults } = readCommissionFlags(flags);
-  const sheet = readSheet(path, choices, ports.files);
-  if (faults.length > 0 || !sheet.ok) return refused(...faults, ...(sheet.ok ? [] : sheet.refusals));
+  const log = flags.history === undefined ? accepted(null) : readLog(flags.history, ports.files);
+  const latest = log.ok && log.value !== null ? { latest: latestOf(log.value) } : {};
+  const sheet = readSheet(path, { ...choices, ...latest }, ports.files);
+  if (faults.length > 0 || !sheet.ok || !log.ok)
+    return refused(...faults, ...[sheet, log].flatMap((read) => (read.ok ? [] : read.refusals)));
+  const answer = {
+    watched: log.value === null ? null : watched(log.value, sheet.value, choices),
+    sheet: sheet.value,
+    choices,
+  };
+  if (flags.readings === undefined && log.value !== null) return accepted({ ...answer, found: null });
   const rows = readRows(flags.readings, sheet.value, ports.files);
   if (!rows.ok) return rows;
-  return commissioned(sheet.value, rows.value.chains, choices);
+  const found = commissioned(sheet.value, rows.value.chains, choices);
+  return found.ok ? accepted({ ...answer, found: found.value }) : found;
 }
 
 /** Diagnoses every chain that was read. */

@@ -9,6 +9,14 @@ import { bullet } from "./wrap.ts";
 
 type Faults = ReturnType<typeof joinedFacts>["faults"];
 
+/** What the isolating resistors take of a fault, where the short's own resistance tells the split. */
+function isolatingLine({ id, energyIntoIsolating: taken }: Faults[number], width: number): readonly string[] {
+  if (!taken) return [];
+  const joules = (x: number): string => formatQuantity(x, "energy", { digits: 4 });
+  const words = `isolating resistors take ${joules(taken.faulted)} in the failed unit's leg and ${joules(taken.others)} in all the others`;
+  return [bullet(`${id.replaceAll("-", " ")}: ${words}`, width)];
+}
+
 /** A table of figures, then what stops each fault that does not pass. Figures round up. */
 export function faultsText(faults: Faults, width: number): string {
   const up = { digits: 4, rounding: "up" } as const;
@@ -27,5 +35,5 @@ export function faultsText(faults: Faults, width: number): string {
   const stops = faults
     .filter((one) => one.verdict !== "pass")
     .map((one) => bullet(`${one.id.replaceAll("-", " ")}: ${visible(one.stops)}`, width));
-  return [table, ...stops].join("\n");
+  return [table, ...faults.flatMap((one) => isolatingLine(one, width)), ...stops].join("\n");
 }

@@ -21,6 +21,8 @@ export type FileSystem = Pick<
   | "linkSync"
   | "unlinkSync"
   | "chmodSync"
+  | "watchFile"
+  | "unwatchFile"
 >;
 
 export interface Files {
@@ -28,11 +30,17 @@ export interface Files {
   readonly read: (path: string) => Read<string>;
   /** Writes a whole file or nothing. An existing file is replaced only with `force`. */
   readonly write: (path: string, text: string, force: boolean) => Read<string>;
+  /** Calls back after a file changed, until the function that it gives is called. */
+  readonly watch: (path: string, changed: () => void) => () => void;
+  /** Gives a file another name, whatever its bytes; what has that name is replaced. */
+  readonly move: (path: string, to: string) => Read<string>;
 }
 
 /** Largest text that is read, bytes: a catalogue of a million rows has about 200 MB. */
 export const LARGEST = 384 * 1024 * 1024;
 const CHUNK = 1 << 20;
+/** How often a watched file is looked at: by its state, which works on every disk and over every way of saving. */
+const WATCH_MS = 500;
 
 /** Reads to the end from an open file; null when it is larger than LARGEST. A pipe that has nothing yet is waited for. */
 function readAll(fs: FileSystem, handle: number): Buffer | null {
@@ -198,6 +206,22 @@ export function filesOn(fs: FileSystem = nodeFs): Files {
       return readText(fs, path);
     },
     write: (path, text, force) => writeText(fs, path, text, force),
+    watch: (path, changed) => {
+      const listener = (now: nodeFs.Stats, before: nodeFs.Stats): void => {
+        // A file that is gone is being replaced by its editor: the next look finds it.
+        if (now.mtimeMs !== 0 && (now.mtimeMs !== before.mtimeMs || now.size !== before.size)) changed();
+      };
+      fs.watchFile(path, { interval: WATCH_MS, persistent: false }, listener);
+      return () => fs.unwatchFile(path, listener);
+    },
+    move: (path, to) => {
+      try {
+        fs.renameSync(path, to);
+        return accepted(to);
+      } catch (error) {
+        return trouble(error, path);
+      }
+    },
   };
 }
 

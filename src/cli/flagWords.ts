@@ -2,6 +2,7 @@
 
 import { BILL_FORMATS } from "../order/index.ts";
 import { BASES, RANKINGS } from "../search/index.ts";
+import { GOVERNING } from "./governing.ts";
 
 export const SHELLS = ["bash", "zsh", "fish"] as const;
 export type Shell = (typeof SHELLS)[number];
@@ -12,6 +13,9 @@ const WORDS: Readonly<Record<string, readonly string[]>> = {
   "--bus-metal": ["copper", "aluminium"],
   "--bus-shape": ["flat bars", "wire pair", "coax"],
   "--charger": ["on", "off"],
+  "--earth": ["negative", "positive", "none", "unknown"],
+  "--paper": ["A4", "Letter"],
+  "--rule": GOVERNING,
   "--distribution": ["uniform", "normal"],
   "--goal": ["charging", "both"],
   "--hold": ["for ever"],
@@ -26,6 +30,8 @@ const WORDS: Readonly<Record<string, readonly string[]>> = {
 const FORMATS: Readonly<Record<string, readonly string[]>> = {
   order: BILL_FORMATS,
   place: ["text", "csv", "json"],
+  sheet: ["html", "md", "json"],
+  labels: ["html", "json"],
 };
 
 /** Empty where a value is free. */

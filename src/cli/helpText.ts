@@ -45,10 +45,15 @@ Examples:
   $ joulewright plan brief.json --catalog mine.csv --rank volume --limit 5
   $ joulewright plan - --catalog mine.csv --json < brief.json
   $ joulewright plan brief.json --catalog mine.csv --resistors resistors.csv --blend --explain --within "2 %"
+  $ joulewright plan brief.json --catalog mine.csv --blend --shipment-cost "North: 4.90; 6.50" --front volume --ladder "50 %"
   $ joulewright plan --brief-schema
+
+A blend is a mix of whole strings of different parts. With limits on the shot it is the cheapest that is proven to keep
+them: for that the ESR and ESL of every part of a mix must be known, and the load be a resistance, a coil or a short.
 
 With a load, --max-peak-current, --max-reversal and the other limits on the shot are kept in the search: for each shape
 the least parallel count that keeps them all. A limit that cannot be judged, for want of a rating, refuses the part.
+--fuses, --isolating with its price and --section-inductance with its price put that protection into the cost that ranks.
 ${BRIEF}${STATUS}`,
   check: `
 Examples:
@@ -57,6 +62,7 @@ Examples:
   $ joulewright check brief.json --layout chosen.json --balance "24 kohm" --balance-tolerance "5 %" --catalog mine.csv
   $ joulewright check brief.json --layout chosen.json --basis statistical --witness 1e6 --seed 7 --catalog mine.csv
   $ joulewright check brief.json --layout chosen.json --basis statistical --measured lot.csv --catalog mine.csv
+  $ joulewright check brief.json --blend "el-470 4s7p cross-tied + pf-330 2s3p strings" --catalog mine.csv
 ${LAYOUT}${BRIEF}${STATUS}`,
   pulse: `
 Examples:
@@ -72,6 +78,8 @@ left out and every figure it bears on is called a bound. Without a bus, a load w
 (0 counts) stands for everything outside the bank. No energy and no fall need be asked here.
 A lamp with --lamp-width and --energy sets voltage and coil where they are not given; pulse then says how far the bank
 that can be built lands from that circuit. The lamp's datasheet comes first.
+With --bus-feed and the stretch of bus from unit to unit (--bus-pitch, or its measured steps) each unit's place on the
+bus counts: which one carries most, by how much, and what another feed would do.
 ${LAYOUT}${BRIEF}${STATUS}`,
   order: `
 Examples:
@@ -83,7 +91,8 @@ Examples:
 of your own, and what you wrote under item, value, rating, quantity needed, on hand, pack, unit price, currency, supplier,
 order code, alternates, status and note; all else is reckoned anew. A row with your quantity or price is reckoned from its
 own cells, without price breaks. A blank cell of yours stays blank; delete a row to have it made anew. The column "mark"
-tells what is yours: leave it as it is. What was taken over is told.
+tells what is yours: leave it as it is. What was taken over is told, what was beside another part is not taken over, and
+where the bank now asks something else of what you chose, it says so.
 ${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,
   place: `
 Examples:
@@ -116,8 +125,10 @@ Examples:
   $ joulewright commission bank.json --readings readings.csv --unit-limit "324 V"
   $ joulewright commission bank.json --readings readings.csv --meter "0.2 %" --resolution "0.1 V" --json
   $ joulewright commission bank.json --readings readings.csv --next-voltage "1.6 kV" --next-hold "10 min"
+  $ joulewright commission bank.json --history log.csv --capacitance-lost "10 %" --esr-grown "100 %"
 SHEET is what place --json wrote. A row of readings is one reading: stage (cross-tied), or string and place, or serial.
-Exit status: 0 agrees; 1 differs, or stop; 2 wrong use or unreadable input; 70 a bug of ours.`,
+A row of a history is dated: shots (a counter) or fired (since the row before), and with a serial what was measured anew.
+Exit status: 0 agrees; 1 differs, stop, or a unit is due; 2 wrong use or unreadable input; 70 a bug of ours.`,
   parts: `
 Examples:
   $ joulewright parts mine.csv resistors.csv

@@ -3,6 +3,9 @@
 import { Worker } from "node:worker_threads";
 import { CHUNK, type Counts, mergedCounts, monteCarlo, monteCarloChunk, type TailCase } from "../bank/index.ts";
 
+/** A worker; whoever starts it ends it. */
+export const startThread = (entry: URL): Worker => new Worker(entry);
+
 export interface CountAsk {
   readonly given: TailCase;
   readonly seed: number;
@@ -57,7 +60,7 @@ function startOf({ given, seed }: CountAsk): Counts {
   return none.value;
 }
 
-interface Thread {
+interface Counting {
   readonly entry: URL;
   readonly take: () => ChunkAsk | null;
   readonly add: (found: Counts) => void;
@@ -67,10 +70,10 @@ interface Thread {
 }
 
 /** One worker, fed until nothing is left. A worker that fails leaves its chunk, and what follows, to this thread. */
-async function inThread({ entry, take, add, here, signal }: Thread): Promise<void> {
+async function inThread({ entry, take, add, here, signal }: Counting): Promise<void> {
   let asked = take();
   if (asked === null) return;
-  const worker = new Worker(entry);
+  const worker = startThread(entry);
   const failed = await new Promise<boolean>((resolve) => {
     worker.on("message", (found: Counts) => {
       add(found);

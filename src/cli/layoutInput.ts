@@ -41,6 +41,8 @@ export interface FiledBalance {
 }
 
 const MOST = 1e6;
+/** Most in series or in parallel. */
+export const MOST_COUNT = MOST;
 /** Version of a layout in JSON, as plan and check write it. */
 export const LAYOUT_VERSION = 1;
 const refuse = (code: string, field: string, read: string, want: string): Refusal => ({

@@ -79,6 +79,18 @@ export function assumptionsOf(unit: Capacitor, layout: LayoutResult): readonly s
   return named;
 }
 
+/** What the brief asks for between a failed unit and the others, each with its count and cost. */
+function protectionFacts({ protection = [], cost }: LayoutResult): readonly (readonly [string, string])[] {
+  const names = { fuse: "fuse", "isolating resistor": "isolating", "section inductance": "section" } as const;
+  return protection.map(({ kind, item, count, cost: price }) => {
+    const what = kind === "fuse" ? visible(item) : kind;
+    return [
+      names[kind],
+      `${count} x ${what}, ${price === null ? "no price, so not in the cost" : `${money(price, cost?.currency)}, in the cost`}`,
+    ] as const;
+  });
+}
+
 /** The layout in full, as `check` and the best of a plan print it. */
 export function layoutText(layout: LayoutResult, unit: Capacitor, width: number): string {
   const { cost } = layout;
@@ -92,6 +104,7 @@ export function layoutText(layout: LayoutResult, unit: Capacitor, width: number)
     ["balancing", balanceWords(layout)],
     ...(without === "" ? [] : [["without resistors", without] as const]),
     ["bleed", bleedWords(layout)],
+    ...protectionFacts(layout),
     ["cost", cost === null ? "no price" : `${money(cost.total, cost.currency)}${left}`],
     [
       "volume",

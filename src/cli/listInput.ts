@@ -1,7 +1,7 @@
 // Lists of serials with their stage or string: pins, and the builder's own positions.
 
 import { type ListedUnit, readPositions } from "../catalog/index.ts";
-import type { Pin, Ties } from "../place/index.ts";
+import type { Pin, Room, Ties } from "../place/index.ts";
 import { accepted, type Read, refused } from "../quantity/index.ts";
 import type { Files } from "./files.ts";
 
@@ -28,6 +28,20 @@ export function readPins(given: readonly string[], files: Files): Read<readonly 
     for (const { serial, group } of list.value) if (group !== undefined) pins.push({ serial, group: group - 1 });
   }
   return accepted(pins);
+}
+
+/** Rooms written `3=snap-in`: stage or string 3 takes only units of that group. */
+export function readRooms(given: readonly string[]): Read<readonly Room[]> {
+  const rooms: Room[] = [];
+  for (const text of given) {
+    const written = /^(\d{1,6})=(.+)$/.exec(text.trim());
+    if (written === null) {
+      const want = "a stage or string and what it takes: 3=snap-in";
+      return refused({ code: "bad-value", place: { field: "--rooms" }, read: JSON.stringify(text), want });
+    }
+    rooms.push({ group: Number(written[1]) - 1, takes: written[2] as string });
+  }
+  return accepted(rooms);
 }
 
 export interface Shape {

@@ -17,7 +17,7 @@ export interface MeasuredInput {
 export function readMeasuredInput(
   path: string | undefined,
   part: string | undefined,
-  files: Files,
+  files: Pick<Files, "read">,
 ): Read<MeasuredInput> {
   if (path === undefined) {
     const want = "a file of measured units: --measured FILE";

@@ -12,6 +12,7 @@ export type PlaceFlags = BankFlags & {
   readonly seed?: string;
   readonly moves?: string;
   readonly pins?: readonly string[];
+  readonly rooms?: readonly string[];
   readonly lots?: string;
   readonly outliers?: string;
   readonly goal?: string;
@@ -45,14 +46,14 @@ const QUANTITIES: readonly (readonly [key: keyof PlaceChoices & keyof PlaceFlags
   ["unitLimit", "--unit-limit", "voltage"],
 ];
 
-/** A quantity above zero from a flag; a fraction is below one. */
-export function flagQuantity(text: string, flag: string, dimension: Dimension): number | Refusal {
+/** A quantity above zero from a flag; a fraction is below `most`, by default one. */
+export function flagQuantity(text: string, flag: string, dimension: Dimension, most = 1): number | Refusal {
   const read = parseQuantity(text, dimension);
-  const most = dimension === "fraction" ? 1 : Number.POSITIVE_INFINITY;
-  if (read.ok && read.value > 0 && read.value < most) return read.value;
+  const ceiling = dimension === "fraction" ? most : Number.POSITIVE_INFINITY;
+  if (read.ok && read.value > 0 && read.value < ceiling) return read.value;
   const want = read.ok
     ? dimension === "fraction"
-      ? "above 0 and below 100 %"
+      ? `above 0 and below ${most * 100} %`
       : "more than 0"
     : (read.refusals[0]?.want ?? "a number");
   return { code: "bad-value", place: { field: flag }, read: JSON.stringify(text), want };

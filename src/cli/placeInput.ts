@@ -6,7 +6,7 @@ import type { MeasuredUnit, PlaceRequest } from "../place/index.ts";
 import { accepted, type Read, refused } from "../quantity/index.ts";
 import { assess, type LayoutResult, unitLimit } from "../search/index.ts";
 import { type LayoutInput, readLayout, readShape } from "./layoutInput.ts";
-import { readPins } from "./listInput.ts";
+import { readPins, readRooms } from "./listInput.ts";
 import { type MeasuredInput, readMeasuredInput } from "./measuredInput.ts";
 import { type PlaceChoices, type PlaceFlags, readPlaceFlags } from "./placeFlags.ts";
 import type { Ports } from "./ports.ts";
@@ -62,8 +62,9 @@ export function readPlaceInput(brief: string | undefined, flags: PlaceFlags, por
   const part = layout.ok && layout.value.layout.part !== "" ? layout.value.layout.part : undefined;
   const measured = readMeasuredInput(flags.measured, part, ports.files);
   const pins = readPins(flags.pins ?? [], ports.files);
-  if (faults.length > 0 || !settings.ok || !stock.ok || !layout.ok || !measured.ok || !pins.ok) {
-    const others = [settings, stock, layout, measured, pins].flatMap((read) => (read.ok ? [] : read.refusals));
+  const rooms = readRooms(flags.rooms ?? []);
+  if (faults.length > 0 || !settings.ok || !stock.ok || !layout.ok || !measured.ok || !pins.ok || !rooms.ok) {
+    const others = [settings, stock, layout, measured, pins, rooms].flatMap((read) => (read.ok ? [] : read.refusals));
     return refused(...faults, ...others);
   }
   let unit: Capacitor | null = null;
@@ -93,6 +94,7 @@ export function readPlaceInput(brief: string | undefined, flags: PlaceFlags, por
     ...asked,
     ...(flags.stopAtFloor === true ? { stopAtFloor: true } : large ? { stopAt: SMALL_STOP } : { stopAtFloor: false }),
     ...(pins.value.length > 0 ? { pins: pins.value } : {}),
+    ...(rooms.value.length > 0 ? { rooms: rooms.value } : {}),
     ...(known.bank.resistance === null ? {} : { balanceConductance: 1 / known.bank.resistance }),
     ...(known.bank.leakageVoltage === null ? {} : { leakageVoltage: known.bank.leakageVoltage }),
   };

@@ -9,7 +9,6 @@ import type { OrderFlags } from "./commands/order.ts";
 import type { PartsFlags } from "./commands/parts.ts";
 import type { PlanFlags } from "./commands/plan.ts";
 import type { PulseFlags } from "./commands/pulse.ts";
-import { treeOf } from "./commandTree.ts";
 import type { CommissionFlags } from "./commissionFlags.ts";
 import { EXIT } from "./exit.ts";
 import { HELP } from "./helpText.ts";
@@ -38,7 +37,7 @@ function withLayout(command: Command): Command {
     .option("--series <count>", "units in series")
     .option("--parallel <count>", "units or strings in parallel")
     .option("--ties <ties>", "cross-tied or strings")
-    .option("--layout <file>", "one layout of plan --json; - is standard input")
+    .option("--layout <file>", "one layout (check and order: or blend) of plan --json; - is standard input")
     .option("--balance <resistance>", 'fix the balancing resistor, "24 kohm", or none')
     .option("--balance-tolerance <tolerance>", 'its tolerance, "5 %"');
 }
@@ -85,10 +84,14 @@ export function build(ports: Ports, done: Done): Command {
     .option("--brief-schema", "print the JSON Schema of the brief and stop")
     .addHelpText("after", HELP.plan)
     .option("--blend", "also find the cheapest mix of whole strings of different parts, with its proof")
+    .option("--fuses <file>", "fuse catalogue, CSV: a fuse for each unit, the cheapest that does, counted in the cost")
     .option("--explain", "with --blend: the proof in words, and what prices and limits are worth")
     .option("--max-types <count>", "with --blend: most parts in one bank; 4 unless told")
     .option("--within <fraction>", 'with --blend: other kinds of blend up to so much dearer, "2 %"')
     .option("--line-cost <amount>", "with --blend: what ordering each part costs as such")
+    .option("--shipment-cost <amounts>", 'with --blend: what a shipment costs, "6.50" or "North: 4.90; South: 12"')
+    .option("--front <names>", 'with --blend: least cost against "volume, mass, units, stress"')
+    .option("--ladder <fraction>", 'with --blend: cost steps from so much less energy to so much more, "50 %"')
     .option("--solver-time <time>", 'with --blend: time for the outside solver in hard cases; "10 s" unless told')
     .action(async (brief: string | undefined, flags: PlanFlags & BlendFlags) => {
       if (wantsBlend(flags)) {
@@ -100,6 +103,8 @@ export function build(ports: Ports, done: Done): Command {
     });
   withLayout(program.command("check"))
     .description("Check one layout in every state at rest.")
+    .option("--blend <text>", 'a blend instead of one layout, "PART 6s10p cross-tied + PART 2s3p strings"')
+    .option("--shipment-cost <amounts>", 'with a blend: what a shipment costs, "6.50" or "North: 4.90; South: 12"')
     .option("--measured <file>", "measured units, CSV: the statistical basis draws from them")
     .option("--witness <banks>", "draw so many banks beside the statistical chance, 1e6")
     .option("--seed <number>", "seed of the drawing (default: 1)")
@@ -121,6 +126,8 @@ export function build(ports: Ports, done: Done): Command {
     });
   withLayout(program.command("order"))
     .description("Write the bill of materials of one layout.")
+    .option("--blend <text>", 'a blend instead of one layout, "PART 6s10p cross-tied + PART 2s3p strings"')
+    .option("--shipment-cost <amounts>", 'with a blend: what a shipment costs, "6.50" or "North: 4.90; South: 12"')
     .option("--fuses <file>", "fuse catalogue, CSV: adds a fuse for each unit to the bill")
     .option("--edited <file>", "an edited bill, CSV: its own lines, prices and choices are kept; - is standard input")
     .option("--format <format>", "csv, json, md or html; else by the ending of --output, else csv")
@@ -139,6 +146,7 @@ export function build(ports: Ports, done: Done): Command {
     .option("--leakage-at <voltage>", "voltage on a unit at which leakage was read")
     .option("--unit-limit <voltage>", "highest voltage of a unit; else the part's, derated")
     .option("--pins <pins...>", "units that must stand in a stage or string: SERIAL=3, or a list in CSV")
+    .option("--rooms <rooms...>", "stages or strings that take only one polarity or size group: 3=snap-in")
     .option("--lots <wish>", "mix: every lot spread evenly; apart: one lot to a stage or string")
     .option("--outliers <wish>", "reject or keep units that do not belong to the lot")
     .option("--goal <goal>", "charging, or both: charging within its floor, then holding")
@@ -188,6 +196,10 @@ export function build(ports: Ports, done: Done): Command {
     .option("--charger <state>", "on: it held the voltage; off: taken off after the charge")
     .option("--next-voltage <voltage>", "charge voltage of the next step of the hot test")
     .option("--next-hold <time>", "how long it would be held")
+    .option("--history <file>", "shot log and units measured anew, CSV: date, shots, serial, capacitance, esr, leakage")
+    .option("--capacitance-lost <fraction>", 'end of life of a unit: this part of its capacitance lost, "20 %"')
+    .option("--esr-grown <fraction>", 'end of life of a unit: its ESR grown by this part, "100 %"')
+    .option("--leakage-most <current>", "end of life of a unit: leakage at its test voltage")
     .option("--json", "print JSON")
     .addHelpText("after", HELP.commission)
     .action(async (sheet: string, flags: CommissionFlags) => {
@@ -212,6 +224,7 @@ export function build(ports: Ports, done: Done): Command {
     .addHelpText("after", HELP.completion)
     .action(async (shell: string) => {
       const { completionCommand } = await import("./commands/completion.ts");
+      const { treeOf } = await import("./commandTree.ts");
       done(completionCommand(shell, treeOf(program), ports));
     });
   program
@@ -220,6 +233,7 @@ export function build(ports: Ports, done: Done): Command {
     .addHelpText("after", HELP.manual)
     .action(async () => {
       const { manualCommand } = await import("./commands/manual.ts");
+      const { treeOf } = await import("./commandTree.ts");
       done(manualCommand(treeOf(program), ports));
     });
   return program;

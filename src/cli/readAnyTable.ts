@@ -1,8 +1,16 @@
 // A table of any known kind to rows that can be told: its headings say which reader it gets.
 
-import { RESISTOR_COLUMNS, readCapacitors, readFuses, readMeasured, readResistors } from "../catalog/index.ts";
+import {
+  type Capacitor,
+  RESISTOR_COLUMNS,
+  readCapacitors,
+  readFuses,
+  readMeasured,
+  readResistors,
+} from "../catalog/index.ts";
 import { accepted, type Dimension, formatQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { type TableKind, tableKind } from "./kind.ts";
+import type { Laid } from "./overrides.ts";
 import { capacitorValues, type ValueWords, valueText } from "./valueWords.ts";
 
 export interface ToldRow {
@@ -44,8 +52,11 @@ const told = (row: object, facts: Facts, state: "datasheet" | "measured"): reado
       : { heading, key, value, text, state };
   });
 
+/** Lays what is set by hand over the parts of a capacitor catalogue. */
+export type Lay = (parts: readonly Capacitor[]) => Read<Laid>;
+
 /** Reads by kind. Refuses what holds no table, with every place. */
-export function readAnyTable(text: string, file: string): Read<ToldTable> {
+export function readAnyTable(text: string, file: string, lay?: Lay): Read<ToldTable> {
   const kind = tableKind(text);
   switch (kind) {
     case "json": {
@@ -55,7 +66,11 @@ export function readAnyTable(text: string, file: string): Read<ToldTable> {
     case "capacitors": {
       const read = readCapacitors(text, file);
       if (!read.ok) return read;
-      const { parts, faults, notes } = read.value;
+      const laid = lay?.(read.value.parts);
+      if (laid !== undefined && !laid.ok) return laid;
+      const parts = laid?.value.parts ?? read.value.parts;
+      const faults = [...read.value.faults, ...(laid?.value.faults ?? [])];
+      const notes = [...read.value.notes, ...(laid?.value.notes ?? [])];
       const row = (i: number): ToldRow => {
         const unit = parts[i] as (typeof parts)[number];
         return { name: unit.part, line: unit.line, values: capacitorValues(unit) };

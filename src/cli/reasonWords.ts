@@ -134,6 +134,11 @@ export const REASONS: Readonly<Record<string, Reason>> = {
     dimension: "money",
   },
   ...limitReasons(),
+  "no-fuse": {
+    words: "",
+    plain: "no fuse of the catalogue is proven to live through its shot and clear its fault at any count in parallel",
+    dimension: "count",
+  },
   "no-shot": {
     words: "",
     plain: "its shot cannot be reckoned with this load, so no limit on it can be held",

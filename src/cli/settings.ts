@@ -43,7 +43,7 @@ function readExchange(entries: readonly string[]): Read<Readonly<Record<string, 
 }
 
 /** The input with the file of a recorded current read in its place. */
-function withRecord(input: Nest, files: Files): Read<Nest> {
+export function withRecord(input: Nest, files: Pick<Files, "read">): Read<Nest> {
   const load = input.load as Nest | undefined;
   const path = typeof load === "object" && load !== null ? load.recorded : undefined;
   if (typeof path !== "string") return accepted(input);

@@ -1,6 +1,16 @@
 // One shot as the plain data of `pulse --json`: the figures asked for at the top, the rest by its own name.
 
 import type { InductanceSweep, LayoutResult, ShotReport } from "../search/index.ts";
+import { waveformTimes } from "./waveform.ts";
+
+/** Rows of the band that are printed; the waveform file has more. */
+const BAND_ROWS = 101;
+
+/** The course with its lowest and highest, row by row; null when nothing spreads. A sample of so many shots, not a proof. */
+function bandJson({ band, discharge }: ShotReport) {
+  if (band === null) return null;
+  return { courses: band.courses, rows: waveformTimes(discharge, BAND_ROWS).map(band.at) };
+}
 
 /** SI values; null is unknown or without bound, and `bounds` says what a figure is when parts of the loop are unknown. */
 export function shotJson(
@@ -30,9 +40,10 @@ export function shotJson(
     method: discharge.method,
     voltage: report.voltage,
     bank: { capacitance: bank.capacitance, resistance: bank.esr, inductance: bank.esl },
-    bus: { ...bus.path, known: bus.path !== null, frequency: bus.frequency },
+    bus: { ...bus.path, known: bus.path !== null, frequency: bus.frequency, place: bus.place },
     unit: discharge.unit,
     envelope: report.envelope,
+    band: bandJson(report),
     charging: charge,
     highestRate,
     heating,

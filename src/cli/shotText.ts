@@ -1,7 +1,7 @@
 // One shot in words: its figures with their spread, where the energy goes, and what the worst unit bears.
 
 import { visible } from "../order/index.ts";
-import type { Bound, DischargeEnergy } from "../pulse/index.ts";
+import type { Bound, DischargeEnergy, UnitDuty } from "../pulse/index.ts";
 import { type Dimension, formatQuantity } from "../quantity/index.ts";
 import type { ShotReport } from "../search/index.ts";
 import { hanging } from "./layoutText.ts";
@@ -102,11 +102,25 @@ function energyText({ discharge: { energy, bounds } }: ShotReport): string {
   return [`Where the ${show(energy.stored, "energy")} go`, ...lines].join("\n");
 }
 
+/** How the peak divides along the bus, all units alike; none where the place is not told. */
+export function placeLines(place: UnitDuty["place"], width: number): readonly string[] {
+  if (place === null) return [];
+  const { alike, segment } = place;
+  const [low, high] = [Math.min(...alike), Math.max(...alike)];
+  const at = (share: number): string =>
+    `${show(share * alike.length, "count")} at position ${alike.indexOf(share) + 1}`;
+  const step = `${show(segment.resistance, "resistance")} and ${show(segment.inductance, "inductance")}`;
+  return [
+    hanging("along the bus", `alike units carry ${at(low)} to ${at(high)} of an even part; ${step} lie between`, width),
+  ];
+}
+
 function unitText({ discharge: { unit }, bank }: ShotReport, width: number): string {
   const each = bank.parallel === 1 ? "" : `, ${show(unit.evenCurrent, "current")} if all were alike`;
   return [
     "Worst unit, nominal bank",
     hanging("peak current", `${show(unit.peakCurrent, "current")}${each}. ${visible(unit.why)}`, width),
+    ...placeLines(unit.place, width),
     hanging("slew", show(unit.slew, "slew"), width),
     hanging("action", unit.action === null ? "no bound" : show(unit.action, "action"), width),
     hanging(

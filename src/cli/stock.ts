@@ -3,6 +3,7 @@
 import {
   type Capacitor,
   DEFAULT_FAMILY,
+  type Overrides,
   type ResistorFamily,
   readCapacitors,
   readResistors,
@@ -10,6 +11,7 @@ import {
 import { accepted, nearestWord, type Read, type Refusal, refused } from "../quantity/index.ts";
 import type { Files } from "./files.ts";
 import { tableKind } from "./kind.ts";
+import { laidOver } from "./overrides.ts";
 
 /** What was read from one file. */
 export interface Source {
@@ -18,6 +20,8 @@ export interface Source {
   readonly read: number;
   readonly faults: readonly Refusal[];
   readonly notes: readonly Refusal[];
+  /** What is set by hand beside it; absent for resistors. */
+  readonly overrides?: Overrides;
 }
 
 export interface Stock {
@@ -44,8 +48,13 @@ function readParts(path: string, files: Files): Read<Source & { readonly parts: 
     return refused({ code: "wrong-kind", place: { file }, read: kind, want: WANTED[kind] as string });
   const catalogue = readCapacitors(text.value, file);
   if (!catalogue.ok) return catalogue;
-  const { parts, faults, notes } = catalogue.value;
-  return accepted({ file, kind: "capacitors", read: parts.length, faults, notes, parts });
+  const laid = laidOver(path, catalogue.value.parts, files);
+  if (!laid.ok) return laid;
+  const { parts, overrides } = laid.value;
+  const faults = [...catalogue.value.faults, ...laid.value.faults];
+  const notes = [...catalogue.value.notes, ...laid.value.notes];
+  const own = Object.keys(overrides).length > 0 ? { overrides } : {};
+  return accepted({ file, kind: "capacitors", read: parts.length, faults, notes, parts, ...own });
 }
 
 /** Reads the catalogues. A part that an earlier file has already is lost, and told. Refuses a file that cannot be read, and no part at all. */

@@ -1,6 +1,7 @@
-// A shot as CSV: time, load current and bank voltage, the peak among the rows.
+// A shot as CSV: time, load current and bank voltage with the band they may run in, the peak among the rows.
 
 import { type Discharge, traceOf } from "../pulse/index.ts";
+import type { ShotReport } from "../search/index.ts";
 
 /** Evenly spaced rows of a written waveform. */
 const ROWS = 1001;
@@ -19,9 +20,19 @@ function endOf({ at, duration, peakCurrent, peakTime }: Discharge): number {
   return end;
 }
 
-/** The text of the file, lines ended as CSV has them. */
-export function waveformCsv(discharge: Discharge): string {
-  const trace = traceOf(discharge, ROWS, endOf(discharge));
-  const rows = trace.map(({ time, current, voltage }) => `${time},${current},${voltage}`);
-  return `time [s],current [A],voltage [V]\r\n${rows.join("\r\n")}\r\n`;
+/** Times [s] of so many even rows, the peak's own among them. */
+export function waveformTimes(discharge: Discharge, rows: number): readonly number[] {
+  return traceOf(discharge, rows, endOf(discharge)).map(({ time }) => time);
+}
+
+/** The text of the file, lines ended as CSV has them; with a band, the lowest and highest of current and voltage beside them. */
+export function waveformCsv({ discharge, band }: Pick<ShotReport, "discharge" | "band">): string {
+  const ends = band === null ? "" : ",current low [A],current high [A],voltage low [V],voltage high [V]";
+  const rows = waveformTimes(discharge, ROWS).map((time) => {
+    const { current, voltage } = discharge.at(time);
+    if (band === null) return `${time},${current},${voltage}`;
+    const { current: amperes, voltage: volts } = band.at(time);
+    return [time, current, voltage, amperes.low, amperes.high, volts.low, volts.high].join(",");
+  });
+  return `time [s],current [A],voltage [V]${ends}\r\n${rows.join("\r\n")}\r\n`;
 }

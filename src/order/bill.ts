@@ -10,6 +10,7 @@ export const LINE_KINDS = [
   "fuses",
   "fuse holders",
   "isolating resistors",
+  "section inductances",
   "dump resistor",
   "dump relay",
   "earthing stick",
@@ -25,6 +26,7 @@ export const LINE_KINDS = [
   "meter with divider",
   "screen",
   "test resistor",
+  "shipment",
   "own line",
 ] as const;
 export type LineKind = (typeof LINE_KINDS)[number];
@@ -78,11 +80,13 @@ export interface Totals {
 }
 
 /**
- * `kept`: the builder's cell stands in place of the program's. `own line`: a line of the builder's own. `put back`: the edited copy
- * lacks a line that the bank takes. `not counted`: the bank no longer takes it; what the builder wrote is kept at a quantity of 0.
+ * `kept`: the builder's cell stands in place of the program's. `not taken over`: it was written beside another part than the bank takes now.
+ * `check again`: something was chosen for what the bank asked then (`read`), and it asks something else now (`made`). `own line`: a line of the
+ * builder's own. `put back`: the edited copy lacks a line that the bank takes. `not counted`: the bank no longer takes it; what the builder
+ * wrote is kept at a quantity of 0.
  */
 export interface BillChange {
-  readonly kind: "kept" | "own line" | "put back" | "not counted";
+  readonly kind: "kept" | "not taken over" | "check again" | "own line" | "put back" | "not counted";
   readonly item: string;
   readonly line: LineKind;
   /** Line of the edited file; null where it has none. */

@@ -47,7 +47,7 @@ export function billOf({
     ...resistorLines(layout, family),
     ...clampLines({ layout, unit, brief }),
     ...fuseLines(layout, fuse),
-    ...isolatingLines(layout, brief),
+    ...isolatingLines(layout, brief, currency),
     ...otherLines({ layout, unit, brief }).filter(({ line }) => line !== "fuses" || !fuse?.chosen),
     ...busLines({ layout, unit, brief }),
   ]

@@ -12,7 +12,7 @@ import { countsOf } from "./counts.ts";
 import type { OtherInput } from "./otherLines.ts";
 
 /** K in one shot. Common practice, no source. */
-const WARMING = 20;
+export const WARMING = 20;
 const CELSIUS_ZERO = 273.15;
 const ROOM = 25;
 
@@ -38,9 +38,9 @@ export function shotSection({ layout, unit, brief }: OtherInput): number | null 
 }
 
 /** mm^2, rounded up to two figures. */
-const sectionWords = (section: number): string => {
+export const sectionWords = (section: number): string => {
   const square = section * 1e6;
-  const step = 10 ** (Math.floor(Math.log10(square)) - 1);
+  const step = Number(`1e${Math.floor(Math.log10(square)) - 1}`);
   return `at least ${Number((Math.ceil(square / step - 1e-9) * step).toPrecision(2))} mm2 of copper`;
 };
 
@@ -51,7 +51,10 @@ function barWish(input: OtherInput, section: number | null): Wish {
     ...(section === null ? [] : [sectionWords(section)]),
   ];
   const long = bar === null ? "length unknown, because the unit's size is" : "length for units side by side in one row";
-  const wide = section === null ? "Section by the shot's current." : `Section for ${WARMING} K in one whole shot.`;
+  const wide =
+    section === null
+      ? "Section by the shot's current."
+      : `Section for ${WARMING} K in one whole shot through one bar; a dead short may pass more.`;
   return {
     item: "bus bar",
     line: "bus bars",

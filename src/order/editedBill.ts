@@ -8,7 +8,7 @@ import type { Bill, BillChange, BillLine } from "./bill.ts";
 import { toBeChosen } from "./chosenLine.ts";
 import { type BillColumn, cellText, isOpen } from "./columns.ts";
 import type { CellValue } from "./editedCell.ts";
-import type { EditedFile, EditedRow } from "./editedRows.ts";
+import type { EditedCell, EditedFile, EditedRow } from "./editedRows.ts";
 import { BUILDERS_COLUMNS, isChanged, plainCell } from "./marks.ts";
 import { reckoned } from "./reckon.ts";
 import { totalsOf } from "./totals.ts";
@@ -37,32 +37,59 @@ interface Merged {
 
 const emptied = (column: BillColumn): CellValue => (column.kind === "text" && column.key !== "currency" ? "" : null);
 
-/** The builder's cells over the line as the program makes it. */
-function merged(made: BillLine, row: EditedRow, currency: string | null): Merged {
-  const changes: BillChange[] = [];
-  const cells: Partial<Record<BillColumn["key"], CellValue>> = {};
-  for (const column of BUILDERS_COLUMNS) {
+/** What the builder chose or paid: another part, or another thing asked of it, may make it wrong. */
+const CHOICE: readonly BillColumn["key"][] = ["item", "value", "unitPrice", "supplier", "orderCode"];
+/** What the bank asks of a part. */
+const ASKED: readonly BillColumn["key"][] = ["value", "rating"];
+
+interface KeptCell {
+  readonly column: BillColumn;
+  readonly cell: EditedCell;
+  readonly fresh: string;
+}
+
+/** Cells of the builder's that differ from what the program writes now. A line always has a name. */
+function keptCells(made: BillLine, row: EditedRow): readonly KeptCell[] {
+  return BUILDERS_COLUMNS.flatMap((column) => {
     const cell = row.cells.get(column.key);
     const fresh = cellText(made, column);
-    if (cell === undefined || plainCell(cell.text) === plainCell(fresh) || !isBuilders(row, column, cell.text, fresh))
-      continue;
-    // A line has a name.
-    if (column.key === "item" && cell.text === "") continue;
-    cells[column.key] = cell.value ?? emptied(column);
-    // The currency that the program put beside a price of the builder's.
-    if (column.key === "currency" && cell.value === currency) continue;
-    changes.push({
-      kind: "kept",
-      item: made.item,
-      line: made.line,
-      at: row.at,
-      heading: column.heading,
-      made: fresh,
-      read: cell.text,
-    });
-  }
+    if (cell === undefined || plainCell(cell.text) === plainCell(fresh)) return [];
+    const named = column.key !== "item" || cell.text !== "";
+    return named && isBuilders(row, column, cell.text, fresh) ? [{ column, cell, fresh }] : [];
+  });
+}
+
+/** The program's own cells in which the row stands as it was made for another bank. */
+const movedCells = (made: BillLine, row: EditedRow, keys: readonly BillColumn["key"][]): readonly KeptCell[] =>
+  BUILDERS_COLUMNS.filter(({ key }) => keys.includes(key)).flatMap((column) => {
+    const cell = row.cells.get(column.key);
+    const fresh = cellText(made, column);
+    const same = cell === undefined || plainCell(cell.text) === plainCell(fresh);
+    return same || isBuilders(row, column, cell.text, fresh) ? [] : [{ column, cell, fresh }];
+  });
+
+/** The builder's cells over the line as the program makes it. */
+function merged(made: BillLine, row: EditedRow, currency: string | null): Merged {
+  const told = (kind: BillChange["kind"], { column, cell, fresh }: KeptCell): BillChange => {
+    const { item, line } = made;
+    return { kind, item, line, at: row.at, heading: column.heading, made: fresh, read: cell.text };
+  };
+  const kept = keptCells(made, row);
+  // A price or a code of one part says nothing of another.
+  const other = movedCells(made, row, ["item"]).length > 0;
+  const taken = other ? kept.filter(({ column }) => column.key === "note") : kept;
+  const cells = Object.fromEntries(taken.map(({ column, cell }) => [column.key, cell.value ?? emptied(column)]));
   const line = { ...made, ...cells, extra: row.extra } as BillLine;
-  return { line: RECKONED.some((key) => Object.hasOwn(cells, key)) ? reckoned(line) : line, changes };
+  // The currency that the program put beside a price of the builder's is no choice.
+  const loud = kept.filter(({ column, cell }) => column.key !== "currency" || cell.value !== currency);
+  const chosen = taken.some(({ column }) => CHOICE.includes(column.key));
+  return {
+    line: RECKONED.some((key) => Object.hasOwn(cells, key)) ? reckoned(line) : line,
+    changes: [
+      ...loud.map((one) => told(taken.includes(one) ? "kept" : "not taken over", one)),
+      ...(chosen ? movedCells(made, row, ASKED).map((one) => told("check again", one)) : []),
+    ],
+  };
 }
 
 function isBuilders({ mark }: EditedRow, { key }: BillColumn, text: string, fresh: string): boolean {
@@ -95,7 +122,8 @@ export function withEdits(bill: Bill, edited: EditedFile, money: Money): Read<Bi
     if (line.currency !== null || (line.unitPrice === null && line.purchase === null)) return line;
     if (money.currency !== null) return reckoned({ ...line, currency: money.currency });
     if (line.unitPrice === null) return line;
-    const place = row.cells.get("currency")?.place ?? row.place;
+    const cell = row.cells.get("currency");
+    const place = cell === undefined ? row.place : { ...row.place, column: cell.column, field: "currency" };
     faults.push({ code: "missing-value", place, read: "a price without a currency", want: "a currency such as EUR" });
     return line;
   };

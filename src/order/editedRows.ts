@@ -11,15 +11,17 @@ import {
   versionFault,
 } from "../quantity/index.ts";
 import { LINE_KINDS, type LineKind } from "./bill.ts";
-import { BILL_COLUMNS, type BillColumn } from "./columns.ts";
+import type { BillColumn } from "./columns.ts";
 import { csvPlain, FOOTER_KINDS, MARK_HEADING, SUM_ITEM } from "./csv.ts";
 import { type CellValue, readEditedCell } from "./editedCell.ts";
+import { type Headings, plainWord, readHeadings } from "./editedHeadings.ts";
 import { BILL_VERSION, markVersion } from "./marks.ts";
 
 export interface EditedCell {
   readonly text: string;
   readonly value: CellValue;
-  readonly place: Place;
+  /** Of the file, from 1. */
+  readonly column: number;
 }
 
 export interface EditedRow {
@@ -27,7 +29,7 @@ export interface EditedRow {
   /** Line of the file. */
   readonly at: number;
   readonly place: Place;
-  /** Only of columns that the file has. */
+  /** Only of the builder's columns that the file has. */
   readonly cells: ReadonlyMap<BillColumn["key"], EditedCell>;
   readonly extra: readonly string[];
   /** Empty where there is none: a row of the builder's, or of a file made before marks. */
@@ -39,49 +41,9 @@ export interface EditedFile {
   readonly extraHeadings: readonly string[];
 }
 
-interface Headings {
-  readonly columns: readonly { readonly column: BillColumn; readonly index: number }[];
-  readonly extra: readonly { readonly heading: string; readonly index: number }[];
-  /** Position of the mark; -1 where there is none. */
-  readonly mark: number;
-  readonly count: number;
-}
-
-const plain = (text: string): string => text.trim().toLowerCase().replace(/\s+/g, " ");
-
-function readHeadings(cells: readonly string[], at: Place): Read<Headings> {
-  const faults: Refusal[] = [];
-  const seen = new Set<string>();
-  const columns: { column: BillColumn; index: number }[] = [];
-  const extra: { heading: string; index: number }[] = [];
-  let mark = -1;
-  for (const [index, text] of cells.entries()) {
-    const heading = plain(csvPlain(text));
-    if (heading === "") continue;
-    if (seen.has(heading)) {
-      const place = { ...at, column: index + 1 };
-      faults.push({ code: "duplicate-heading", place, read: JSON.stringify(text), want: `"${heading}" once only` });
-    }
-    seen.add(heading);
-    const column = BILL_COLUMNS.find((one) => one.heading === heading);
-    if (heading === MARK_HEADING) mark = index;
-    else if (column !== undefined) columns.push({ column, index });
-    else extra.push({ heading: csvPlain(text), index });
-  }
-  for (const heading of ["item", "line"])
-    if (!seen.has(heading))
-      faults.push({
-        code: "missing-heading",
-        place: at,
-        read: [...seen].join(", "),
-        want: `the heading "${heading}" of a bill as CSV`,
-      });
-  return faults.length > 0 ? refused(...faults) : accepted({ columns, extra, mark, count: cells.length });
-}
-
 /** The kind of a row; null for a sum or a caution; a refusal for a word that is none. */
 function kindOf(text: string, item: string): LineKind | null | { readonly want: string } {
-  const word = plain(text);
+  const word = plainWord(text);
   if (FOOTER_KINDS.some((kind) => kind === word)) return null;
   // So they were written before the footer had kinds of its own.
   if (word === "" && (item === SUM_ITEM || item === "caution")) return null;
@@ -183,11 +145,12 @@ function readRow(given: readonly string[], { bound, place, comma, faults }: RowC
   }
   const cells = new Map<BillColumn["key"], EditedCell>();
   for (const { column, index } of bound.columns) {
+    // The rest is reckoned anew, whatever stands there.
+    if (!column.builders) continue;
     const text = texts[index] ?? "";
-    const at = spot(index, column.heading);
-    const value = column.builders ? readEditedCell(text, column, comma) : accepted(null);
-    if (value.ok) cells.set(column.key, { text, value: value.value, place: at });
-    else faults.push(...value.refusals.map((one) => ({ ...one, place: at })));
+    const value = readEditedCell(text, column, comma);
+    if (value.ok) cells.set(column.key, { text, value: value.value, column: index + 1 });
+    else faults.push(...value.refusals.map((one) => ({ ...one, place: spot(index, column.heading) })));
   }
   if (kind === "own line" && cellOf("item") === "")
     faults.push({

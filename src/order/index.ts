@@ -10,6 +10,8 @@ export {
   type Totals,
 } from "./bill.ts";
 export { type BillInput, billOf } from "./billOf.ts";
+export { type BlendBillInput, blendBillOf } from "./blendBill.ts";
+export { sectionWords, shotSection, WARMING } from "./busLines.ts";
 export { BILL_COLUMNS, type BillColumn } from "./columns.ts";
 export { type Counts, countsOf } from "./counts.ts";
 export { csvText } from "./csv.ts";

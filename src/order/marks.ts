@@ -13,7 +13,8 @@ export const BUILDERS_COLUMNS: readonly BillColumn[] = BILL_COLUMNS.filter(({ bu
 /** Version of the file format of an edited bill. */
 export const BILL_VERSION = 1;
 const SIZE = 6;
-const MOST = 36 ** SIZE;
+/** 36^6, written out: powers differ in their last figure from one engine to the next. */
+const MOST = 2_176_782_336;
 
 /** A cell as it is compared: blanks and unseen characters do not count. */
 export const plainCell = (text: string): string => visible(text).trim().replace(/\s+/g, " ");
@@ -27,7 +28,7 @@ function sumOf(text: string): string {
   }
   a = Math.imul(a ^ (a >>> 16), 0x85ebca6b) ^ Math.imul(b ^ (b >>> 13), 0xc2b2ae35);
   b = Math.imul(b ^ (b >>> 16), 0x85ebca6b) ^ Math.imul(a ^ (a >>> 13), 0xc2b2ae35);
-  const mixed = (b & 0x1fffff) * 2 ** 32 + (a >>> 0);
+  const mixed = (b & 0x1fffff) * 0x1_0000_0000 + (a >>> 0);
   return (mixed % MOST).toString(36).padStart(SIZE, "0");
 }
 

@@ -9,6 +9,12 @@ const NOT_TO_BE_HAD = "Not enough can be had: ask the supplier, or choose anothe
 
 const WITH_SPARES = "Packs and surplus are those of units and spares together.";
 
+/** Pieces of text one after the other, each ended before the next begins. */
+const sentences = (...parts: readonly string[]): string =>
+  parts
+    .filter((part) => part !== "")
+    .reduce((text, part) => (text === "" ? part : `${text}${/[.!?]$/.test(text) ? "" : "."} ${part}`), "");
+
 /** How much of one purchase a line takes: the rest of it belongs to another line. */
 interface Take {
   readonly needed: number;
@@ -74,7 +80,7 @@ const shortLine = (wording: Wording, terms: PurchaseTerms, needed: number): Bill
   alternates: "",
   status: "",
   mark: "",
-  note: [NOT_TO_BE_HAD, wording.note].filter((part) => part !== "").join(" "),
+  note: sentences(NOT_TO_BE_HAD, wording.note),
   state: "no price",
 });
 
@@ -101,7 +107,7 @@ export function unitLines(layout: LayoutResult, unit: Capacitor, spares: number)
     line: "units",
     value: formatQuantity(unit.capacitance, "capacitance"),
     rating: unitRating(unit),
-    note: [unit.note ?? "", spares > 0 ? WITH_SPARES : ""].filter((part) => part !== "").join(" "),
+    note: sentences(unit.note ?? "", spares > 0 ? WITH_SPARES : ""),
   };
   const spareWording: Wording = {
     ...wording,

@@ -9,7 +9,7 @@ export function reckoned(line: BillLine): BillLine {
   const { needed, onHand, pack, unitPrice, currency } = line;
   const short = needed === null ? null : Math.max(0, needed - (onHand ?? 0));
   // A quantity may be a length or a weight; only what comes in packs is rounded up to them.
-  const packs = short === null || pack === null ? null : Math.ceil(short / pack - 1e-9);
+  const packs = short === null || pack === null ? null : Math.max(0, Math.ceil(short / pack - 1e-9));
   const toBuy = packs === null || pack === null ? short : packs * pack;
   const cost = (quantity: number | null): number | null => {
     if (quantity === 0) return 0;

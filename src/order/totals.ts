@@ -1,6 +1,6 @@
 // The sums of a bill: priced lines alone, in one currency; what they leave out is listed.
 
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import type { BillLine, Totals } from "./bill.ts";
 
 export interface TotalsInput {
@@ -19,7 +19,7 @@ export function totalsOf({ lines, currency, exchange }: TotalsInput): Totals {
   let purchase = 0;
   let consumed = 0;
   let pricedLines = 0;
-  const scale = 10 ** minorDigits(currency ?? "");
+  const scale = tenTo(minorDigits(currency ?? ""));
   for (const line of lines) {
     const rate = line.currency === null ? undefined : line.currency === currency ? 1 : exchange?.[line.currency];
     if (line.purchase === null || rate === undefined || currency === null) {

@@ -6,7 +6,8 @@
  *   T       sum of all units used;   U any upper bound on m, the least stage sum
  *
  *   L0  gap >= 0
- *   L1  gap >= n / ((n-1) + U/(T-(n-1)U)) - 1    for U <= T/n: 1/S is convex, so one stage taking all the rest is the best case
+ *   L1  gap >= n / sum_j(U/x_j) - 1  for U <= T/n, x the most uneven sums that could be: 1/S is convex, so the fuller the fullest the
+ *       better, the rest at U. The k fullest hold at most the top k n_p units, and together T - (n-k) U (then x is spread over them)
  *   L2  whole-number data, T = nq + r: U = q
  *   L3  pigeonhole: A = top p units, t = floor(p/n), D = n(t+1) - p. Either every stage has t of A, and then D stages share
  *       at most [top D t of A + top D(n_p-t) of the rest], or one stage has at most t-1 of A
@@ -24,12 +25,80 @@ export interface Bound {
   readonly kind: BoundKind;
 }
 
-/** L1: the least gap when the least of `stages` sums, together `total`, is at most `most`. */
-export function gapFromLeast(stages: number, total: number, most: number): number {
-  const rest = total - (stages - 1) * most;
-  // gap = (rest - most) / ((n-1) rest + most), written so that an even division gives exactly 0.
-  return Math.max(0, (rest - most) / ((stages - 1) * rest + most));
+/**
+ * L1 for stages still to be filled: the least sum of (S - least)/S over `stages` sums of `least` or more, together `total`, of which the
+ * k fullest hold at most `tops[k - 1]`. Infinite when there are no such sums. Summed from the evenest: partial sums as large as they can
+ * be, each leaving `least` for every stage after it; 1/S is convex, so no sums that could be are more uneven in its eyes.
+ */
+export function leastShortfall(tops: ArrayLike<number>, stages: number, total: number, least: number): number {
+  let partial = total;
+  let short = 0;
+  for (let k = stages - 1; k >= 1; k--) {
+    const before = Math.min(tops[k - 1]!, partial - least);
+    const sum = partial - before;
+    short += (sum - least) / sum;
+    partial = before;
+  }
+  return partial < least * (1 - ROUNDING) ? Number.POSITIVE_INFINITY : short + (partial - least) / partial;
 }
+
+/** Sums of the largest `size`, 2 `size`, ... of the values. */
+export function topsOf(descending: ArrayLike<number>, stages: number, size: number, out: Float64Array): Float64Array {
+  let sum = 0;
+  for (let k = 0, i = 0; k < stages; k++) {
+    for (const to = i + size; i < to; i++) sum += descending[i]!;
+    out[k] = sum;
+  }
+  return out;
+}
+
+/**
+ * Lowers `tops` where the units fall in two heaps: when every stage must hold t of the upper heap to reach `least`, the k fullest have
+ * no more of it than the others leave. The heaps part at the widest step between neighbours.
+ */
+export function sharedTops(
+  descending: ArrayLike<number>,
+  { stages, size, least }: { readonly stages: number; readonly size: number; readonly least: number },
+  tops: Float64Array,
+): void {
+  const count = stages * size;
+  let heap = 1;
+  let widest = -1;
+  for (let i = 1; i < count; i++) {
+    const step = descending[i - 1]! - descending[i]!;
+    if (step > widest) {
+      widest = step;
+      heap = i;
+    }
+  }
+  // A stage of t from the upper heap holds at most its t largest and the largest of the lower heap.
+  let t = 0;
+  for (; t < size; t++) {
+    let most = t + count - heap < size ? Number.NEGATIVE_INFINITY : 0;
+    for (let i = 0; i < t && i < heap; i++) most += descending[i]!;
+    for (let i = heap; i < heap + size - t && i < count; i++) most += descending[i]!;
+    if (most >= least) break;
+  }
+  let sum = 0;
+  for (let k = 1; k < stages; k++) {
+    const upper = Math.min(k * size, heap - (stages - k) * t);
+    const lower = k * size - upper;
+    if (upper < 0 || lower > count - heap) continue;
+    sum = 0;
+    for (let i = 0; i < upper; i++) sum += descending[i]!;
+    for (let i = heap; i < heap + lower; i++) sum += descending[i]!;
+    if (sum < tops[k - 1]!) tops[k - 1] = sum;
+  }
+}
+
+/** L1: the least gap when the least of the stage sums is at most `most`. */
+export function gapFromLeast(tops: ArrayLike<number>, stages: number, most: number): number {
+  const short = leastShortfall(tops, stages, tops[stages - 1]!, most);
+  // An even division gives exactly 0.
+  return Math.max(0, short / (stages - short));
+}
+
+const ROUNDING = 1e-12;
 
 const scratch = { head: new Float64Array(64) };
 
@@ -71,10 +140,11 @@ export function matrixBound(
 ): Bound {
   let best: Bound = { gap: 0, kind: "even share" };
   if (values.length !== stages * size || stages === 1) return best;
-  const total = values.reduce((sum, v) => sum + v, 0);
   const descending = Float64Array.from(values).sort().reverse();
+  const tops = topsOf(descending, stages, size, new Float64Array(stages));
+  const total = tops[stages - 1]!;
   const offer = (most: number, kind: BoundKind): void => {
-    const gap = gapFromLeast(stages, total, whole ? Math.floor(most * (1 + 1e-13)) : most);
+    const gap = gapFromLeast(tops, stages, whole ? Math.floor(most * (1 + 1e-13)) : most);
     if (gap > best.gap) best = { gap, kind };
   };
   if (whole) offer(Math.floor(total / stages), "whole numbers");

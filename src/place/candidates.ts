@@ -45,6 +45,7 @@ export function wildFindings(
   { outliers, fitted, gap }: { outliers: readonly Outlier[]; fitted: ReadonlySet<string>; gap: number },
 ): Finding[] {
   const wild = outliers.filter((o) => o.quantity === "capacitance").slice(0, MOST_WILD);
+  if (wild.length === 0) return [];
   const order = keepOrder(units, new Set(outliers.map((o) => o.serial)));
   return wild.flatMap((o) => {
     const effect = wildEffect(units, request, { serial: o.serial, gap, fitted: fitted.has(o.serial), order });

@@ -34,13 +34,19 @@ export function constraintsOf(units: readonly MeasuredUnit[], request: PlaceRequ
   for (const pin of request.pins ?? []) pinnedTo[units.findIndex((unit) => unit.serial === pin.serial)] = pin.group;
   const takes: (string | undefined)[] = new Array(groups).fill(undefined);
   for (const room of request.rooms ?? []) if (room.group < groups) takes[room.group] = room.takes;
-  const names = [...new Set(units.map((_, i) => label[i]! + SEPARATOR + lot[i]!))];
+  const names = new Map<string, number>();
+  const classOf = Int32Array.from(units, (_, i) => {
+    const name = label[i]! + SEPARATOR + lot[i]!;
+    const found = names.get(name) ?? names.size;
+    if (found === names.size) names.set(name, found);
+    return found;
+  });
   const rules: BoardRules = {
-    classOf: Int32Array.from(units, (_, i) => names.indexOf(label[i]! + SEPARATOR + lot[i]!)),
-    classes: names.length,
+    classOf,
+    classes: names.size,
     fixed: Uint8Array.from(pinnedTo, (group) => (group >= 0 ? 1 : 0)),
   };
-  const any = names.length > 1 || pinnedTo.some((group) => group >= 0) || takes.some((t) => t !== undefined);
+  const any = names.size > 1 || pinnedTo.some((group) => group >= 0) || takes.some((t) => t !== undefined);
   return { any, groups, size, pinnedTo, label, lot, kind, takes, rules };
 }
 

@@ -19,6 +19,9 @@ const DEPTHS = [3, DEEPEST] as const;
 /** Other samples of the lowest and highest stage that are tried before all pairs are. */
 const REDRAWS = 3;
 const YIELD_AFTER = 50_000;
+/** What a look at two stages and a kick cost besides the sums they step through: on a small board they are most of the work. */
+const A_LOOK = 20;
+const A_KICK = 300;
 
 interface Change {
   one: number;
@@ -44,7 +47,7 @@ export function* descend(at: Board, goal: DescentGoal, random: Random, work: Eff
 
   const consider = (one: number, other: number, cls: number, depth: number, wanted: number): void => {
     const found = lists.nearest(one, other, cls, depth, wanted);
-    work.spent += found.steps;
+    work.spent += found.steps + A_LOOK;
     if (found.size === 0 || found.gain === 0) return;
     const before = sums[one]!;
     const beforeOther = other < stages ? sums[other]! : 0;
@@ -142,6 +145,7 @@ export function* descend(at: Board, goal: DescentGoal, random: Random, work: Eff
     recount(at);
     gap = stageGap(sums, stages);
     for (let j = 0; j <= stages; j++) lists.forget(j);
+    work.spent += A_KICK + at.slots.length;
   };
 
   const redraw = (): void => {

@@ -5,6 +5,7 @@
  * The integral by Laplace's method about the best size. The covariance is that of the sound bank first; for the faults that come near,
  * it is made anew about each of them. Source: [MacKay2003] ch. 27, 28.
  */
+import { power } from "../quantity/index.ts";
 import { covariance, observed, predicted, type Question } from "./diagnoseEvidence.ts";
 import { faultyCourse, type Hypothesis, hypotheses, SOUND_ODDS } from "./diagnoseFaults.ts";
 import type { Course } from "./diagnoseModel.ts";
@@ -46,7 +47,7 @@ interface Peak {
 }
 
 const sizesOnGrid = (from: number, to: number): number[] =>
-  Array.from({ length: GRID }, (_, k) => from * (to / from) ** (k / (GRID - 1)));
+  Array.from({ length: GRID }, (_, k) => from * power(to / from, k / (GRID - 1)));
 
 /** The integral as a mean over a coarse grid: enough where the readings do not point at this fault. */
 function coarsePeak(log: LogLikelihood, from: number, to: number): Peak {

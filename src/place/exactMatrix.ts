@@ -4,10 +4,11 @@
  *   Window: sum_j (1 - m/S_j) = n g/(1+g) with every term >= 0, so a placing of gap <= g has all its stage sums in
  *   [m, m/(1 - eta)], eta = n g/(1+g). Stages are taken in rising order of sum, each a subset out of that window that shares no
  *   unit with those before, and a branch is left when sum_j m/S_j can no longer exceed n/(1+g).
- * Without spares the last stage is what is left over, and m falls from T/n until the convexity bound meets the gap in hand.
+ * Without spares the last stage is what is left over, m falls from T/n until the convexity bound meets the gap in hand, and the sums
+ * still to come are no more uneven than the largest units left allow (majorised by them: the same bound).
  * Holds for at most 31 units (bit masks). Source: [Korf2009] for the recursion over subsets; [methods-derived] window and bounds.
  */
-import { gapFromLeast, pigeonholeLeast } from "./boundMatrix.ts";
+import { gapFromLeast, leastShortfall, pigeonholeLeast, sharedTops, topsOf } from "./boundMatrix.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 import { stageGap } from "./gap.ts";
 import { choose, subsetBuilder } from "./subsetSums.ts";
@@ -16,6 +17,8 @@ import { choose, subsetBuilder } from "./subsetSums.ts";
 export const MOST_SUBSETS = 750_000;
 const MOST_UNITS = 31;
 const CHECK_EVERY = 4096;
+/** Of rounding in a bound. */
+const HAIR = 1e-12;
 
 export const fitsExactSearch = (units: number, size: number): boolean =>
   units <= MOST_UNITS && choose(units, size) <= MOST_SUBSETS;
@@ -90,12 +93,36 @@ export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<num
     best = Array.from(held, unitsOf);
   };
 
-  /** The most that the least of `many` stages made of the unused units can hold. */
-  const reach = (used: number, many: number): number => {
+  const leave = (used: number): void => {
     let at = 0;
     for (let i = 0; i < units; i++) if (!(used & (1 << order[i]!))) rest[at++] = values[order[i]!]!;
     pending += units;
+  };
+  /** The most that the least of `many` stages made of the unused units can hold. */
+  const reach = (used: number, many: number): number => {
+    leave(used);
     return pigeonholeLeast(rest, many, size);
+  };
+  const tops = Array.from({ length: stages }, () => new Float64Array(stages));
+  /** List entries before this one leave hope of a smaller gap, when they are the least of the `remaining` stages. Without spares. */
+  const hopeful = (depth: number, from: number, used: number, shares: number, left: number): number => {
+    const remaining = stages - depth;
+    leave(used);
+    const mine = topsOf(rest, remaining, size, tops[depth]!);
+    if (from < count) sharedTops(rest, { stages: remaining, size, least: sums[from]! }, mine);
+    const wanted = stages / (1 + gap) - shares;
+    let low = from;
+    let high = count;
+    while (low < high) {
+      const middle = (low + high) >> 1;
+      const sum = sums[middle]!;
+      // sum_j least/S_j = (least/sum) (remaining - shortfall), at the most; a hair is given for rounding.
+      const most = ((remaining - leastShortfall(mine, remaining, left, sum)) * chosen[0]!) / sum;
+      if (sum * remaining <= left * (1 + HAIR) && most > wanted - HAIR) low = middle + 1;
+      else high = middle;
+    }
+    pending += 4 * remaining;
+    return low;
   };
 
   /** Stages `depth`.. from list entry `from` on; `used` units are taken, `shares` = sum of m/S so far, `left` = what no stage has. */
@@ -111,7 +138,15 @@ export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<num
       return;
     }
     const least = chosen[0]!;
-    for (let i = from; i < count; i++) {
+    const bounded = !spares && remaining > 2;
+    let until = bounded ? hopeful(depth, from, used, shares, left) : count;
+    let known = gap;
+    for (let i = from; i < until; i++) {
+      if (bounded && gap < known) {
+        known = gap;
+        until = hopeful(depth, i, used, shares, left);
+        if (i >= until) return;
+      }
       if (++pending >= CHECK_EVERY) {
         stopped = !mayGoOn(work, pending);
         pending = 0;
@@ -140,6 +175,8 @@ export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<num
   if (!spares) {
     while (below > 0 && sums[below - 1]! * stages > total) below--;
   }
+  const falling = Float64Array.from(order, (i) => values[i]!);
+  const fullest = topsOf(falling, stages, size, new Float64Array(stages));
   const starts = spares
     ? outwards(count >> 1, count)
     : (function* () {
@@ -148,7 +185,7 @@ export function* exactMatrix(problem: ExactProblem, work: Effort): Generator<num
   for (const start of starts) {
     if (stopped || gap <= problem.target) break;
     const least = sums[start]!;
-    if (!spares && gapFromLeast(stages, total, least) >= gap) break;
+    if (!spares && gapFromLeast(fullest, stages, least) >= gap) break;
     chosen[0] = least;
     held[0] = masks[start]!;
     place(1, start + 1, masks[start]!, 1, total - least);

@@ -82,7 +82,7 @@ export function outlierFinding({ serial, quantity, value, high }: Outlier, fitte
 export function mixedParts(units: readonly MeasuredUnit[], groups: readonly (readonly number[])[]): Finding[] {
   const mixed = groups.flatMap((group, g) => (new Set(group.map((i) => units[i]!.part)).size > 1 ? [g + 1] : []));
   if (mixed.length === 0) return [];
-  const note = `Different parts share group ${list(mixed.map(String))}: they age and leak differently.`;
+  const note = `Different parts share one stage or string (${list(mixed.map(String))}): they age and leak differently.`;
   return [
     finding({
       id: "place.mixed-parts",

@@ -12,6 +12,7 @@
  * Holds for independent errors of equal spread. A gap is printed to no more digits than +-2 u/sqrt(n_p) supports.
  * Source: [Harter1961] e(n), expected values of normal order statistics; [methods-derived] the rest.
  */
+import { power } from "../quantity/index.ts";
 import type { Ties } from "./unit.ts";
 
 const REACH = 9;
@@ -30,16 +31,26 @@ const BELOW: readonly number[] = (() => {
   });
 })();
 
+/** Every count is asked for again and again; there are few of them. */
+const known = new Map<number, number>([[1, 0]]);
+
 /** e(n), to about 1e-5. e(1) = 0, e(2) = 1/sqrt(pi). */
 export function expectedLargest(count: number): number {
-  if (count === 1) return 0;
+  const before = known.get(count);
+  if (before !== undefined) return before;
+  const made = integrated(count);
+  known.set(count, made);
+  return made;
+}
+
+function integrated(count: number): number {
   // e(n) = integral of x d(F^n), as a sum of midpoints.
   let integral = 0;
   let before = 0;
   for (let i = 0; i < STEPS; i++) {
-    const power = BELOW[i]! ** count;
-    integral += (-REACH + (i + 0.5) * STEP) * (power - before);
-    before = power;
+    const after = power(BELOW[i]!, count);
+    integral += (-REACH + (i + 0.5) * STEP) * (after - before);
+    before = after;
   }
   return integral;
 }

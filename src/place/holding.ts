@@ -81,6 +81,15 @@ export function* holdAgain(
 /** What holding may lose again while charging is levelled to the end: a third, or up to what no leakage meter can tell. */
 const CAP_OVER = 1.3;
 const CAP_LEAST = 0.0045;
+const BOTH_TRIES = 5;
+/** Parts of the effort for levelling: where the cap leaves no way down, it is widened and levelling begins again. */
+const LEVEL_PARTS = [0.5, 0.5, 1] as const;
+const WIDER = 1.6;
+/** Above the slack, so much of charging may still be given up for a holding gap this many times better: no meter tells it. */
+const UNSEEN = 5e-6;
+/** Levelling aims lower, so that what it ends at is still within this. */
+const PROMISED = 1e-6;
+const FAR_BETTER = 2;
 
 /**
  * Holding as even as it gets without loss of charging: among placings of the same charging gap, and for large cross-tied banks without
@@ -94,13 +103,24 @@ export function* holdFreely(
   const { values, rule, conductances } = task;
   const same = yield* holdBetter(from.groups, { ...task, limit: from.gap }, random, work);
   if (slack === 0 || task.ties === "strings" || rule.any || !mayGoOn(work, 0)) return same;
-  const both = yield* holdAgain(from.groups, task, { tries: 2, random, work });
-  const cap = Math.max(CAP_OVER * both.gaps.holding, CAP_LEAST);
-  const at = board(values, both.groups, rule.rules);
+  const aim = Math.min(task.target, CAP_LEAST / CAP_OVER);
+  const both = yield* holdAgain(from.groups, { ...task, target: aim }, { tries: BOTH_TRIES, random, work });
   const { perUnit, perStage } = conductances;
-  const steps = levelBoth(at, { conductances: perUnit, perStage, cap, target: from.gap + slack }, random, work);
-  for (let step = steps.next(); !step.done; step = steps.next()) yield bothGaps(at, perUnit, perStage);
-  const gaps = bothGaps(at, perUnit, perStage);
-  const better = gaps.charging <= from.gap + slack && gaps.holding < same.gaps.holding;
-  return better ? { groups: groupsOf(at), gaps } : same;
+  let cap = Math.max(CAP_OVER * both.gaps.holding, CAP_LEAST);
+  let best = same;
+  for (const part of LEVEL_PARTS) {
+    const at = board(values, both.groups, rule.rules);
+    const mine = share(work, part * (work.moves - work.spent));
+    const steps = levelBoth(at, { conductances: perUnit, perStage, cap, target: from.gap + slack }, random, mine);
+    for (let step = steps.next(); !step.done; step = steps.next()) yield bothGaps(at, perUnit, perStage);
+    settle(work, mine);
+    const gaps = bothGaps(at, perUnit, perStage);
+    const level = gaps.charging <= Math.max(from.gap + slack, PROMISED);
+    if (level && gaps.holding < best.gaps.holding) return { groups: groupsOf(at), gaps };
+    const unseen = gaps.charging <= from.gap + UNSEEN && FAR_BETTER * gaps.holding < same.gaps.holding;
+    if (unseen && (best === same || gaps.charging < best.gaps.charging)) best = { groups: groupsOf(at), gaps };
+    if (!mayGoOn(work, 0)) break;
+    cap *= WIDER;
+  }
+  return best;
 }

@@ -10,6 +10,8 @@ export { type Course, type CourseRow, chargerOff, chargerOn, type StageModel } f
 export type { NextMeasurement } from "./diagnoseNext.ts";
 export type { Diagnosis, DiagnosisRequest, GoOn, Suspect } from "./diagnoseRequest.ts";
 export { STOP_ACTIONS } from "./diagnoseSafety.ts";
+export type { Drift, DriftKind, Due, LifeLimits, Remeasured } from "./drift.ts";
+export { type LotDrift, lotDrift, type UnitDrift, type UnitReadings } from "./driftLot.ts";
 export { exactCourse } from "./exactCourse.ts";
 export { expectedLargest, gapFloor, honestDigits, voltageUncertainty } from "./floor.ts";
 export { type Front, type FrontPoint, placingFront } from "./front.ts";

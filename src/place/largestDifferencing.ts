@@ -31,9 +31,13 @@ export function largestDifferencing(values: ArrayLike<number>, stages: number): 
     const row = order.slice(at, at + stages);
     rows.push({ sums: row.map((i) => values[i]!), members: row.map((i) => [i]) });
   }
+  rows.sort((a, b) => spread(a) - spread(b));
   while (rows.length > 1) {
-    rows.sort((a, b) => spread(a) - spread(b));
-    rows.push(fold(rows.pop()!, rows.pop()!));
+    const made = fold(rows.pop()!, rows.pop()!);
+    // After those of the same spread, as a stable sort of the whole would put it.
+    let at = rows.length;
+    while (at > 0 && spread(rows[at - 1]!) > spread(made)) at--;
+    rows.splice(at, 0, made);
   }
   return rows[0]!.members;
 }

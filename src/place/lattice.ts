@@ -1,5 +1,7 @@
 // Turns measured values into whole numbers, so that sums of them are exact whatever the order of adding.
 
+import { tenTo } from "../quantity/index.ts";
+
 /** Values as whole multiples of one quantum. */
 export interface Lattice {
   /** Whole numbers, in the order of the input. */
@@ -21,7 +23,7 @@ const greatestDivisor = (a: number, b: number): number => {
 function decade(values: readonly number[], room: number): number | null {
   const greatest = Math.max(...values);
   for (let k = -3; k <= FINEST_DECADE; k++) {
-    const scale = 10 ** k;
+    const scale = tenTo(k);
     if (greatest * scale > room) return null;
     // Reading a decimal costs half a unit in the last place; so does the scaling.
     if (values.every((v) => Math.abs(v * scale - Math.round(v * scale)) <= v * scale * 1e-15 && v * scale > 0.5)) {

@@ -17,7 +17,7 @@ export const OUTLIER_RULE = "beyond Tukey's outer fence (3 interquartile ranges 
 const LEAST_COUNT = 5;
 const FENCE = 3;
 
-function quantile(sorted: readonly number[], part: number): number {
+function quantile(sorted: ArrayLike<number>, part: number): number {
   const at = part * (sorted.length - 1);
   const below = Math.floor(at);
   const above = Math.min(sorted.length - 1, below + 1);
@@ -32,7 +32,7 @@ export interface Fences {
 /** Outer fences widened to `slack` about the median; infinite for fewer than 5 values. */
 export function outerFences(values: readonly number[], slack: number): Fences {
   if (values.length < LEAST_COUNT) return { low: Number.NEGATIVE_INFINITY, high: Number.POSITIVE_INFINITY };
-  const sorted = [...values].sort((a, b) => a - b);
+  const sorted = Float64Array.from(values).sort();
   const [q1, median, q3] = [quantile(sorted, 0.25), quantile(sorted, 0.5), quantile(sorted, 0.75)];
   const reach = FENCE * (q3 - q1);
   return { low: Math.min(q1 - reach, median - slack), high: Math.max(q3 + reach, median + slack) };
@@ -57,14 +57,9 @@ const MOST_STRAYS = 2;
 
 /** Every outlier of the lot, in the order of the units; a unit may be named for more than one quantity. */
 export function outliersOf(units: readonly MeasuredUnit[], uncertainty: number): Outlier[] {
-  const median = quantile(
-    units.map((unit) => unit.capacitance).sort((a, b) => a - b),
-    0.5,
-  );
-  const capacitance = outerFences(
-    units.map((unit) => unit.capacitance),
-    3 * uncertainty * median,
-  );
+  const capacitances = units.map((unit) => unit.capacitance);
+  const median = quantile(Float64Array.from(capacitances).sort(), 0.5);
+  const capacitance = outerFences(capacitances, 3 * uncertainty * median);
   const highOf = (quantity: "leakage" | "esr"): number => {
     const known = units.flatMap((unit) => ((unit[quantity] ?? 0) > 0 ? [Math.log(unit[quantity]!)] : []));
     return Math.exp(outerFences(known, 3 * COARSE).high);

@@ -37,7 +37,10 @@ const HOLDING_TRIES = 2;
  * @returns the placing with its gaps, lower bound and findings; refusals for duplicate serials, too few units, bad numbers,
  *   pins or lots that cannot be honoured
  */
-export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest): Generator<SearchStep, Read<Placing>> {
+export function* placing(
+  units: readonly MeasuredUnit[],
+  request: PlaceRequest,
+): Generator<SearchStep<string>, Read<Placing>> {
   const checked = checkRequest(units, request);
   if (!checked.ok) return checked;
   const { series, parallel, ties } = request;
@@ -72,7 +75,11 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
     : 0;
   const charging = share(work, work.moves - reserve);
   const task = { ties, values, rule, order, start: start.groups, stopAt, prove };
-  const solution = yield* solveCharging(task, random, charging);
+  const named = (standing: SearchStep["standing"]) => () => serialsOf(pool, standing());
+  const search = solveCharging(task, random, charging);
+  let found = search.next();
+  for (; !found.done; found = search.next()) yield { ...found.value, standing: named(found.value.standing) };
+  const solution = found.value;
   settle(work, charging);
 
   const holdingFloor = gapFloor({ ...shape, uncertainty: request.leakageUncertainty ?? DEFAULTS.leakageUncertainty });
@@ -87,7 +94,8 @@ export function* placing(units: readonly MeasuredUnit[], request: PlaceRequest):
         : holdAgain(solution.groups, { ...both, moves }, { tries: HOLDING_TRIES, random, work });
     let step = steps.next();
     for (; !step.done; step = steps.next()) {
-      yield { phase: "holding", gap: step.value.charging, moves: work.spent };
+      const standing = named(() => solution.groups);
+      yield { phase: "holding", gap: step.value.charging, moves: work.spent, standing };
     }
     held = step.value;
   }

@@ -112,6 +112,22 @@ function faultsOfPins(units: readonly MeasuredUnit[], request: PlaceRequest, gro
   return faults;
 }
 
+/** A room that nothing fits, or that is not there, is a slip of the pen: it is never passed over. */
+function faultsOfRooms(units: readonly MeasuredUnit[], { rooms = [] }: PlaceRequest, groups: number): Refusal[] {
+  const marked = [...new Set(units.flatMap((unit) => (unit.group === undefined ? [] : [unit.group])))];
+  const faults: Refusal[] = [];
+  const seen = new Set<number>();
+  for (const { group, takes } of rooms) {
+    const text = `${takes} in ${group + 1}`;
+    const known = marked.length === 0 ? "a column `group` in the measured file" : `one of ${marked.join(", ")}`;
+    if (!marked.includes(takes)) faults.push(refusal("place.room-unknown", "rooms", text, known));
+    if (!whole(group, 0) || group >= groups) faults.push(refusal("place.room-group", "rooms", text, `1 to ${groups}`));
+    if (seen.has(group)) faults.push(refusal("place.room-twice", "rooms", text, "one group for a stage or string"));
+    seen.add(group);
+  }
+  return faults;
+}
+
 /** The request as it stands, or every fault of it. */
 export function checkRequest(units: readonly MeasuredUnit[], request: PlaceRequest): Read<PlaceRequest> {
   const faults: Refusal[] = [];
@@ -137,5 +153,6 @@ export function checkRequest(units: readonly MeasuredUnit[], request: PlaceReque
   const cross = request.ties === "cross-tied";
   const groups = cross ? request.series : request.parallel;
   faults.push(...faultsOfUnits(units), ...faultsOfPins(units, request, groups, positions / groups));
+  faults.push(...faultsOfRooms(units, request, groups));
   return faults.length > 0 ? refused(...faults) : accepted(request);
 }

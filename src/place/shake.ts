@@ -1,4 +1,5 @@
 // Random swaps under a falling temperature: frees a placing of unequal lots on which exchanges stick.
+import { power } from "../quantity/index.ts";
 import { type Board, exchange, mayExchange, recount } from "./board.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 import type { Random } from "./random.ts";
@@ -18,7 +19,7 @@ export function shake(at: Board, moves: number, random: Random, work: Effort): v
   let step = 0;
   for (let i = 0; i < placed; i++) step += Math.abs(at.values[at.slots[i]!]! - mean / at.size);
   let heat = (step / placed) ** 2;
-  const fall = COOLING ** (1 / moves);
+  const fall = power(COOLING, 1 / moves);
   for (let move = 0; move < moves; move++) {
     heat *= fall;
     const one = Math.floor(random() * placed);

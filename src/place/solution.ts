@@ -11,11 +11,13 @@ export interface Solution {
   readonly boundKind: BoundKind;
 }
 
-/** Where a search stands, for a screen. */
-export interface SearchStep {
+/** Where a search stands, for a screen. `Unit`: an index within the searches, a serial outside. */
+export interface SearchStep<Unit = number> {
   readonly phase: "first" | "exchange" | "proof" | "holding";
   readonly gap: number;
   readonly moves: number;
+  /** The groups as they stand, made when asked for and only before the next step. */
+  readonly standing: () => readonly (readonly Unit[])[];
 }
 
 /** Two gaps count as equal within this. */

@@ -27,8 +27,8 @@ export interface StagesTask {
   readonly prove: boolean;
 }
 
-/** So many trials are spent even on a first placing that is good enough: they cost a fraction of a millisecond. */
-const ALWAYS = 12_000;
+/** So many trials are spent without looking at the goal: they cost a fraction of a millisecond. */
+const ALWAYS = 5_000;
 /** The choice of spares is left alone for so many trials, then they join the exchange. */
 const BEFORE_SPARES = 60_000;
 /** Before a proof, so many trials look for a good placing: it makes the proof shorter. */
@@ -103,7 +103,8 @@ export function* solveStages(task: StagesTask, random: Random, work: Effort): Ge
   let gap = stageGap(at.sums, stages);
   const begun = { gap, slots: Int32Array.from(at.slots) };
   const done = (): Solution => ({ groups: groupsOf(at), gap, lowerBound: bound.gap, boundKind: bound.kind });
-  yield { phase: "first", gap, moves: work.spent };
+  const standing = () => groupsOf(at);
+  yield { phase: "first", gap, moves: work.spent, standing };
   const test = task.prove && fitsExactSearch(values.length, size) ? maskTest(rule) : null;
   const target = bound.gap + (test === null ? stopAt : 0);
   const spares = values.length > stages * size;
@@ -117,11 +118,11 @@ export function* solveStages(task: StagesTask, random: Random, work: Effort): Ge
     for (let step = steps.next(); ; step = steps.next()) {
       gap = step.value;
       if (step.done) break;
-      yield { phase: "exchange", gap, moves: work.spent + part.spent };
+      yield { phase: "exchange", gap, moves: work.spent + part.spent, standing };
     }
     settle(work, part);
   };
-  if (gap > bound.gap && mayGoOn(work, 0)) yield* refine(false, ALWAYS, bound.gap);
+  if (gap > (task.prove ? bound.gap : target) && mayGoOn(work, 0)) yield* refine(false, ALWAYS, bound.gap);
   if (gap > target && mayGoOn(work, 0)) {
     const quickly = test === null ? Number.POSITIVE_INFINITY : BEFORE_PROOF;
     if (spares) {
@@ -141,7 +142,8 @@ export function* solveStages(task: StagesTask, random: Random, work: Effort): Ge
   const problem = { values, stages, size, inHand: gap, target: bound.gap, allowed: test, must };
   const search = exactMatrix(problem, part);
   let step = search.next();
-  for (; !step.done; step = search.next()) yield { phase: "proof", gap: step.value, moves: work.spent + part.spent };
+  for (; !step.done; step = search.next())
+    yield { phase: "proof", gap: step.value, moves: work.spent + part.spent, standing };
   settle(work, part);
   const { groups, proven } = step.value;
   gap = step.value.gap;

@@ -43,7 +43,9 @@ export function* solveStrings(task: StringsTask, random: Random, work: Effort): 
     lowerBound: proven ? gapAt(least) : Math.min(lowerBound, gapAt(least)),
     boundKind: proven ? "exhaustive" : bound.kind,
   });
-  yield { phase: "first", gap: gapAt(least), moves: work.spent };
+  const standing = () =>
+    Array.from({ length: strings }, (_, s) => Array.from(slots.subarray(s * series, (s + 1) * series)));
+  yield { phase: "first", gap: gapAt(least), moves: work.spent, standing };
   if (!rule.any && (series <= 2 || strings === 1)) return done(bound.gap, true);
   const target = bound.gap + (task.prove && values.length <= SMALL ? 0 : stopAt);
   const wanted = series / (1 + target);
@@ -54,17 +56,18 @@ export function* solveStrings(task: StringsTask, random: Random, work: Effort): 
   for (let step = descent.next(); ; step = descent.next()) {
     least = step.value;
     if (step.done) break;
-    yield { phase: "exchange", gap: gapAt(least), moves: work.spent + swaps.spent };
+    yield { phase: "exchange", gap: gapAt(least), moves: work.spent + swaps.spent, standing };
   }
   settle(work, swaps);
-  groups = Array.from({ length: strings }, (_, s) => Array.from(slots.subarray(s * series, (s + 1) * series)));
+  groups = standing();
   if (rule.any || least >= wanted || !mayGoOn(work, 0)) return done(bound.gap, false);
   const order = all.sort((a, b) => values[a]! - values[b]! || a - b);
   const part = share(work, Number.POSITIVE_INFINITY);
   const falling = Float64Array.from(order, (i) => elastances[i]!);
   const search = exactStrings({ falling, series, strings, inHand: least, target: wanted }, part);
   let step = search.next();
-  for (; !step.done; step = search.next()) yield { phase: "proof", gap: gapAt(step.value), moves: work.spent };
+  for (; !step.done; step = search.next())
+    yield { phase: "proof", gap: gapAt(step.value), moves: work.spent, standing };
   settle(work, part);
   if (step.value.groups) groups = step.value.groups.map((string) => string.map((k) => order[k]!));
   least = step.value.least;

@@ -8,7 +8,7 @@ export const SPARE_RULE =
 const NOTABLE = 1.5;
 
 const medianOf = (values: readonly number[]): number => {
-  const sorted = [...values].sort((a, b) => a - b);
+  const sorted = Float64Array.from(values).sort();
   return sorted.length === 0 ? Number.NaN : sorted[Math.floor(sorted.length / 2)]!;
 };
 

@@ -8,6 +8,7 @@
  * Random swaps under a falling temperature on  holding gap + weight * (charging gap above the limit). Leakage is taken as a
  * conductance: in proportion to voltage. Source: [Kirkpatrick1983] for the method; [methods-derived] the two gaps.
  */
+import { power } from "../quantity/index.ts";
 import { type Board, mayExchange, recount, stageOf } from "./board.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 import { stageGap } from "./gap.ts";
@@ -70,7 +71,7 @@ export function* holdLevel(at: Board, goals: TwoGoals, random: Random, work: Eff
   const cost = (charging: number, holding: number): number => holding + WEIGHT * Math.max(0, charging - limit);
   let now = cost(best.charging, best.holding);
   let heat = HOTTEST;
-  const fall = (COLDEST / HOTTEST) ** (1 / moves);
+  const fall = power(COLDEST / HOTTEST, 1 / moves);
   for (let move = 0; move < moves && stages > 1; move++) {
     heat *= fall;
     if (move % CHUNK === CHUNK - 1) {

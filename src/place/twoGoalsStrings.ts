@@ -8,6 +8,7 @@
  * A unit of a string cannot average its leakage with others, so large holding gaps are the rule. Random swaps under a falling
  * temperature on  holding gap + weight * (charging gap above the limit). Source: [Kirkpatrick1983], [methods-derived].
  */
+import { power } from "../quantity/index.ts";
 import type { BoardRules } from "./board.ts";
 import { type Effort, mayGoOn } from "./effort.ts";
 import type { Random } from "./random.ts";
@@ -65,7 +66,7 @@ export function* holdStrings(
   const best = { slots: Int32Array.from(slots), gaps: gaps() };
   let now = cost(best.gaps);
   let heat = HOTTEST;
-  const fall = (COLDEST / HOTTEST) ** (1 / moves);
+  const fall = power(COLDEST / HOTTEST, 1 / moves);
   const refresh = (string: number): void => {
     if (string >= strings) return;
     tC[string] = evenness(goals.elastances, string);

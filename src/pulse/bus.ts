@@ -12,7 +12,7 @@
  * Source: [Palmer-strip] edge term through L'C' = mu0 eps0; [Grover] (from memory) wires, coax and inner terms.
  */
 import { accepted, type Finding, type Read, type Refusal, refused } from "../quantity/index.ts";
-import type { BusPath } from "./load.ts";
+import type { BusPath } from "./busPath.ts";
 import { MU0, skinDepth } from "./skin.ts";
 import { atLeast } from "./verdict.ts";
 

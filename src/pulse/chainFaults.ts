@@ -2,17 +2,39 @@
 import { formatQuantity } from "../quantity/index.ts";
 import { cornerShare, type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
 import { faultAction, faultPeak, rowShortLoop, unitShortLoop } from "./faultCurrents.ts";
+import { faultEnergy } from "./faultEnergy.ts";
 import { type Fault, row } from "./faultRow.ts";
 import { fuseFindings } from "./fuse.ts";
 import { shortedUnit } from "./shortedUnit.ts";
+import { atMost } from "./verdict.ts";
 
 /** What stands between a shorted unit and its neighbours. */
-function guardOf({ fuse = null, isolatingResistance = null, parallel }: FaultBank): string {
+function guardOf({
+  fuse = null,
+  isolatingResistance = null,
+  sectionInductance = null,
+  shortResistance = null,
+  parallel,
+}: FaultBank): string {
   if (parallel === 1) return "No neighbours feed it; the charger's trip must open.";
   if (fuse !== null) return "The fuse of the shorted unit, if it clears; see its findings.";
   if (isolatingResistance !== null && isolatingResistance > 0)
-    return "The isolating resistors spread the heat; nothing opens.";
+    return shortResistance === null
+      ? "The isolating resistors take part of the heat, how much rests on the short itself: state its resistance. Nothing opens."
+      : "The isolating resistors take their part of the heat; nothing opens.";
+  if (sectionInductance !== null && sectionInductance > 0)
+    return "The section inductance holds the current down, not the joules; nothing opens.";
   return "Nothing given stops it: a fuse, an isolating resistor or smaller sections would.";
+}
+
+/** Action through the sound unit that carries most of the fault, against its rating; none where either is unknown. */
+function soundFindings({ unit, series, parallel, ties }: FaultBank, action: number | null) {
+  if (action === null || !unit.action) return [];
+  // in strings the rest of the faulted string carries the whole of it
+  const value = ties === "strings" && series > 1 ? action : action / (parallel - 1) ** 2;
+  const note = "Action of the fault through a sound unit against its rating for one shot.";
+  const claim = { id: "pulse.fault.action", state: "faulted", unit: "A2s", source: "methods-derived" } as const;
+  return [atMost({ ...claim, value, limit: unit.action, note })];
 }
 
 /** One unit shorted: the others empty into it. */
@@ -20,6 +42,7 @@ export function unitShort(bank: FaultBank): Fault {
   const result = shortedUnit(shortCaseOf(bank));
   const loop = unitShortLoop(bank);
   const n = bank.series;
+  const energy = faultEnergy(bank, loop, result.neighbours);
   const duty = {
     normalAction: bank.shot?.unitAction ?? null,
     faultAction: faultAction(loop),
@@ -34,11 +57,12 @@ export function unitShort(bank: FaultBank): Fault {
     volts: result.held,
     spread: n > 1 ? cornerShare(bank, { units: 1, others: 1, stages: n - 2 }) : 0,
     peak: faultPeak(loop),
-    joules: result.neighbours,
-    outside: result.neighbours,
+    joules: energy.unit,
+    outside: energy.unit,
+    isolating: energy.isolating,
     stops: guardOf(bank),
     note: n > 1 ? note : "The whole bank empties into the shorted unit; nothing is left standing.",
-    findings: bank.fuse ? fuseFindings(bank.fuse, duty) : [],
+    findings: [...(bank.fuse ? fuseFindings(bank.fuse, duty) : []), ...soundFindings(bank, duty.faultAction)],
   });
 }
 

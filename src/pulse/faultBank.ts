@@ -1,7 +1,7 @@
 // What the fault table must know of a bank, and the figures of it that several faults share.
 import type { Ties } from "../bank/index.ts";
+import type { BusPath } from "./busPath.ts";
 import type { Fuse } from "./fuse.ts";
-import type { BusPath } from "./load.ts";
 import type { ShortCase } from "./shortedUnit.ts";
 
 /** One unit as the fault table sees it; SI, null or left out is unknown. */
@@ -15,6 +15,8 @@ export interface FaultUnit {
   readonly esl?: number | null;
   /** Energy from outside that the case is known to hold [J]. */
   readonly ruptureEnergy?: number | null;
+  /** Action integral that one shot may drive through it [A^2 s]. */
+  readonly action?: number | null;
 }
 
 /** A bank and what guards it. `worstCharging`, `worstHolding`: highest voltage of any unit before a fault [V]. */
@@ -28,6 +30,10 @@ export interface FaultBank {
   readonly worstHolding: number | null;
   /** Resistor in series with each unit [ohm]; left out or null: none. */
   readonly isolatingResistance?: number | null;
+  /** Inductance in series with each unit of a stage, or with each string [H]; left out or null: none. */
+  readonly sectionInductance?: number | null;
+  /** What a shorted unit itself still resists with [ohm]; left out or null: not told. */
+  readonly shortResistance?: number | null;
   /** Fuse in series with each unit; left out or null: none. */
   readonly fuse?: Fuse | null;
   /** Bus up to the point of a load short; left out or null: unknown. */

@@ -3,13 +3,14 @@
  * and with nothing known in the loop there is no figure at all.
  *
  *   loop        capacitance                 resistance                               inductance
- *   unit short  cross-tied (m - 1)C         (r + R_i)/(m - 1) + R_i                  l/(m - 1)
- *               strings     C1 C2/(C1 + C2) (r + R_i)(n/(m - 1) + n - 1) + R_i       l (n/(m - 1) + n - 1)
- *   row short   cross-tied m C              (r + R_i)/m                              l/m
- *   load short  m C/n                       n (r + R_i)/m + bus                      n l/m + bus
+ *   unit short  cross-tied (m - 1)C         (r + R_i)/(m - 1) + R_i + R_f            (l + L_s)/(m - 1) + L_s
+ *               strings     C1 C2/(C1 + C2) (r + R_i)(n/(m - 1) + n - 1) + R_i + R_f l (n/(m - 1) + n - 1) + L_s/(m - 1) + L_s
+ *   row short   cross-tied m C              (r + R_i)/m                              (l + L_s)/m
+ *   load short  m C/n                       n (r + R_i)/m + bus                      n l/m + bus; L_s n/m cross-tied, L_s/m strings
  *
- * r, l ESR and ESL of one unit; R_i isolating resistor. A shorted unit's own r and l are left out: the short may sit at its
- * terminals. Source: [methods-derived].
+ * r, l ESR and ESL of one unit; R_i isolating resistor of each unit; L_s section inductance of each unit (of each string);
+ * R_f what the shorted unit itself still resists with, none unless told: its own r and l are left out, for the short may sit
+ * at its terminals. Source: [methods-derived].
  */
 import { type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
 import { peakCurrentOf } from "./peaks.ts";
@@ -34,16 +35,29 @@ export interface FaultLoop {
 
 function loopOf(
   bank: FaultBank,
-  parts: { capacitance: number; voltage: number; units: number; extra?: number; bus?: boolean },
+  parts: {
+    capacitance: number;
+    voltage: number;
+    /** Units in series, as the loop sees them. */
+    units: number;
+    /** The same of section inductances; left out: as many as units. */
+    sections?: number;
+    /** The leg of the shorted unit itself. */
+    faulted?: boolean;
+    bus?: boolean;
+  },
 ): FaultLoop {
   const { esr = null, esl = null } = bank.unit;
   const isolating = bank.isolatingResistance ?? 0;
+  const section = bank.sectionInductance ?? 0;
+  const own = parts.faulted ? 1 : 0;
   const bus = parts.bus ? (bank.bus ?? null) : { resistance: 0, inductance: 0 };
   return {
     capacitance: parts.capacitance,
     voltage: parts.voltage,
-    resistance: ((esr ?? 0) + isolating) * parts.units + (parts.extra ?? 0) * isolating + (bus?.resistance ?? 0),
-    inductance: (esl ?? 0) * parts.units + (bus?.inductance ?? 0),
+    resistance:
+      ((esr ?? 0) + isolating) * parts.units + own * (isolating + (bank.shortResistance ?? 0)) + (bus?.resistance ?? 0),
+    inductance: (esl ?? 0) * parts.units + section * ((parts.sections ?? parts.units) + own) + (bus?.inductance ?? 0),
     resistanceKnown: esr !== null && bus !== null,
     inductanceKnown: esl !== null && bus !== null,
   };
@@ -53,12 +67,14 @@ function loopOf(
 export function unitShortLoop(bank: FaultBank): FaultLoop | null {
   const { series: n, parallel: m, ties } = bank;
   if (m < 2) return null;
-  const units = ties === "cross-tied" || n === 1 ? 1 / (m - 1) : n / (m - 1) + n - 1;
+  const tied = ties === "cross-tied" || n === 1;
+  const units = tied ? 1 / (m - 1) : n / (m - 1) + n - 1;
   return loopOf(bank, {
     capacitance: drivingCapacitance(shortCaseOf(bank)),
     voltage: worstBefore(bank),
     units,
-    extra: 1,
+    sections: 1 / (m - 1),
+    faulted: true,
   });
 }
 
@@ -69,13 +85,19 @@ export function rowShortLoop(bank: FaultBank): FaultLoop | null {
     return loopOf(bank, { capacitance: m * unit.capacitance, voltage: worstBefore(bank), units: 1 / m });
   }
   if (m < 2) return null;
-  return loopOf(bank, { capacitance: ((m - 1) * unit.capacitance) / n, voltage, units: n / (m - 1) });
+  return loopOf(bank, {
+    capacitance: ((m - 1) * unit.capacitance) / n,
+    voltage,
+    units: n / (m - 1),
+    sections: 1 + 1 / (m - 1),
+  });
 }
 
 /** The loop of a short across the bus. */
 export function loadShortLoop(bank: FaultBank): FaultLoop {
-  const { series: n, parallel: m, unit, voltage } = bank;
-  return loopOf(bank, { capacitance: (m * unit.capacitance) / n, voltage, units: n / m, bus: true });
+  const { series: n, parallel: m, ties, unit, voltage } = bank;
+  const sections = ties === "cross-tied" || n === 1 ? n / m : 1 / m;
+  return loopOf(bank, { capacitance: (m * unit.capacitance) / n, voltage, units: n / m, sections, bus: true });
 }
 
 /** Peak of a fault loop; null when nothing known limits it, or there is no loop. Source: [Cona] closed form. */

@@ -24,6 +24,8 @@ export interface Fault {
   readonly peakCurrent: number | null;
   readonly peakIs: Bound;
   readonly energyIntoUnit: number | null;
+  /** Joules that the isolating resistors take off: the one of the failed unit, and all the others together; null: not told. */
+  readonly energyIntoIsolating: { readonly faulted: number; readonly others: number } | null;
   readonly verdict: Verdict;
   /** What stops it, plain words. */
   readonly stops: string;
@@ -55,6 +57,7 @@ export interface RowParts {
   readonly joules: number | null;
   /** Joules that come from other units. */
   readonly outside?: number;
+  readonly isolating?: Fault["energyIntoIsolating"];
   readonly stops: string;
   readonly note: string;
   readonly findings?: readonly Finding[];
@@ -71,6 +74,7 @@ export function row(bank: FaultBank, parts: RowParts): Fault {
     peakCurrent: parts.peak?.amperes ?? null,
     peakIs: parts.peak?.bound ?? "value",
     energyIntoUnit: parts.joules,
+    energyIntoIsolating: parts.isolating ?? null,
     verdict: judge(bank, judged, parts.outside ?? 0),
     stops: parts.stops,
     note: parts.note,

@@ -1,5 +1,8 @@
 // Contents page of pulse.
+export { type Branch, branchShot } from "./branchShot.ts";
 export { type Bus, type BusGeometry, busOf } from "./bus.ts";
+export type { BusPath, BusPlace, Feed, PlaceShares } from "./busPath.ts";
+export { taperOf } from "./busPlace.ts";
 export { unitShort } from "./chainFaults.ts";
 export { type Charge, type Charger, type ChargeTask, chargeOf } from "./charge.ts";
 export {
@@ -17,6 +20,7 @@ export { type Crowbar, crowbarOf } from "./crowbar.ts";
 export { chargerRipple, constantPowerSeconds, type Drift, driftOf, steadyDroop, voltageAfter } from "./droop.ts";
 export { type Corner, type Envelope, envelopeOf, type Figures, type LoopSpread, type Spread } from "./envelope.ts";
 export { type FaultBank, type FaultUnit, worstBefore } from "./faultBank.ts";
+export { faultAction, unitShortLoop } from "./faultCurrents.ts";
 export type { Fault, FaultId } from "./faultRow.ts";
 export { faultTable } from "./faultTable.ts";
 export { type Fuse, type FuseDuty, fuseFindings } from "./fuse.ts";
@@ -32,7 +36,7 @@ export {
 export { type BuiltLampCircuit, type LampFit, lampFit } from "./lampFit.ts";
 export { EXPLOSION_PART, type Explosion, explosionOf, lampFindings } from "./lampLimits.ts";
 export { type LifeCase, type LifeRatio, lifeRatio, type Stress } from "./life.ts";
-export { type BusPath, type Circuit, type Clamp, checkCircuit, IDEAL_SWITCH, type Load, type Switch } from "./load.ts";
+export { type Circuit, type Clamp, checkCircuit, IDEAL_SWITCH, type Load, type Switch } from "./load.ts";
 export { type Bounds, boundsOf, type PulseBank, pulseBankOf, unknownsOf } from "./loopMesh.ts";
 export { actionToZeroOf, type Peaks, peakCurrentOf, peaksOf } from "./peaks.ts";
 export { type QuickLayout, quickBankPeak, quickPeakFactor } from "./peakTable.ts";

@@ -1,4 +1,5 @@
 // Integrates a small system of differential equations to a tolerance, stopping at or noting the events it is given.
+import { power } from "../quantity/index.ts";
 import { type Piece, pieceOf, type Scratch, type Slope, scratchOf, step, within } from "./dormandPrince.ts";
 
 /** Something to watch for: `value` passing zero in `direction` (+1 rising, -1 falling). */
@@ -91,7 +92,7 @@ export function integrate(problem: Problem): Course {
     step(slope, { x, h }, y, s);
     const error = errorNorm(y, s, problem);
     if (!(error <= 1)) {
-      h *= Number.isFinite(error) ? Math.max(0.2, 0.9 * error ** -0.2) : 0.1;
+      h *= Number.isFinite(error) ? Math.max(0.2, 0.9 * power(error, -0.2)) : 0.1;
       continue;
     }
     let piece = pieceOf({ x, h }, y, s);
@@ -121,7 +122,7 @@ export function integrate(problem: Problem): Course {
     y.set(s.next);
     [before, after] = [after, before];
     s.k[0]!.set(s.k[6]!);
-    h *= Math.min(5, 0.9 * Math.max(error, 1e-10) ** -0.2);
+    h *= Math.min(5, 0.9 * power(Math.max(error, 1e-10), -0.2));
   }
   return { x, y, pieces, hits, ended: "end", steps };
 }

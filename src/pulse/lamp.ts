@@ -12,7 +12,7 @@
  * above it is an extrapolation, and the lamp's datasheet comes first. Source: [lamp-faq] the constant; [Goncz1965] (from
  * memory) resistivity 1.13/sqrt(j) ohm cm, which gives 1.2751 l/d and so agrees to 0.4 %.
  */
-import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
+import { accepted, power, type Read, type Refusal, refused } from "../quantity/index.ts";
 
 /** Lamps in series: bore and arc length of one [m], fill pressure [Pa], count. */
 export interface Lamp {
@@ -45,4 +45,4 @@ export function checkLamp(lamp: Lamp): Read<Lamp> {
 
 /** K0 of the whole chain [ohm A^0.5]. Source: [lamp-faq]. */
 export const lampConstant = ({ bore, arcLength, gas, pressure, count }: Lamp): number =>
-  count * 1.28 * (arcLength / bore) * (pressure / REFERENCE_PRESSURE[gas]) ** 0.2;
+  count * 1.28 * (arcLength / bore) * power(pressure / REFERENCE_PRESSURE[gas], 0.2);

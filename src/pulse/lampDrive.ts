@@ -12,7 +12,7 @@
  * "exact" keeps the constant 2 alpha^4/9; "rounded 0.09" is the printed rule for alpha = 0.8, C lower by 0.376 %.
  * Source: [ME1966]; [lamp-faq] for the rounded rule.
  */
-import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
+import { accepted, power, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { meshShot } from "./meshShot.ts";
 import type { Shot } from "./shot.ts";
 import { widthOf } from "./width.ts";
@@ -51,8 +51,8 @@ export function lampCircuit(brief: LampBrief): Read<LampCircuit> {
   if (faults.length > 0) return refused(...faults);
   const { constant, energy, width, alpha, rule } = brief;
   const timeScale = width / 3;
-  const factor = rule === "exact" ? (2 * alpha ** 4) / 9 : 0.09;
-  const capacitance = Math.cbrt((factor * energy * width * width) / constant ** 4);
+  const factor = rule === "exact" ? (2 * power(alpha, 4)) / 9 : 0.09;
+  const capacitance = Math.cbrt((factor * energy * width * width) / power(constant, 4));
   const inductance = (timeScale * timeScale) / capacitance;
   const voltage = Math.sqrt((2 * energy) / capacitance);
   return accepted({

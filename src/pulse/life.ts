@@ -10,6 +10,7 @@
  * ratio with it, unless that quantity stays at its reference. Published exponents disagree widely, and any such law is a
  * guide, not a promise. Source: [bank-lists] the form; the film form as in [capacitor-life].
  */
+import { power } from "../quantity/index.ts";
 
 /** One stress: where it is, where the life is known, and the exponent (temperature: kelvins per halving), null if not given. */
 export interface Stress {
@@ -42,13 +43,13 @@ function factorOf(stress: Stress | undefined, law: (stress: Stress, exponent: nu
   return Number.isFinite(factor) ? factor : null;
 }
 
-const power = ({ value, reference }: Stress, exponent: number): number => (reference / value) ** exponent;
-const halving = ({ value, reference }: Stress, kelvins: number): number => 2 ** ((reference - value) / kelvins);
+const raised = ({ value, reference }: Stress, exponent: number): number => power(reference / value, exponent);
+const halving = ({ value, reference }: Stress, kelvins: number): number => power(2, (reference - value) / kelvins);
 
 /** Life over reference life. Source: file head. */
 export function lifeRatio(stresses: LifeCase): LifeRatio {
-  const voltage = factorOf(stresses.voltage, power);
-  const reversal = factorOf(stresses.reversal, power);
+  const voltage = factorOf(stresses.voltage, raised);
+  const reversal = factorOf(stresses.reversal, raised);
   const temperature = factorOf(stresses.temperature, halving);
   const known = voltage !== null && reversal !== null && temperature !== null;
   const names = ["voltage", "reversal", "temperature"] as const;

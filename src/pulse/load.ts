@@ -1,5 +1,6 @@
 // What hangs on the bank: the load, the bus, the switch and the clamp, as data; and the faults such data can have.
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
+import type { BusPath, BusPlace } from "./busPath.ts";
 import type { Lamp } from "./lamp.ts";
 import { checkLamp } from "./lamp.ts";
 import { type CurrentSample, checkSamples } from "./samples.ts";
@@ -33,12 +34,6 @@ export interface Clamp {
   readonly resistance: number;
 }
 
-/** What the bus adds to the loop. */
-export interface BusPath {
-  readonly resistance: number;
-  readonly inductance: number;
-}
-
 /** Everything outside the bank. `bus: null` is an unknown bus, which is not a bus of nothing. */
 export interface Circuit {
   readonly load: Load;
@@ -47,6 +42,10 @@ export interface Circuit {
   readonly clamp: Clamp | null;
   /** Resistors in series with the units, as the loop sees them [ohm]: n/m of one. Left out: none. */
   readonly isolating?: number;
+  /** Inductance in series with the units or strings, as the loop sees it [H]. Left out: none. */
+  readonly section?: number;
+  /** How the branches hang on the bus; left out or null: not told, so that place has no say. Its taper is in `bus` already. */
+  readonly place?: BusPlace | null;
 }
 
 /** A switch without drop or resistance that carries both ways. */
@@ -80,6 +79,11 @@ export function checkCircuit(circuit: Circuit): Read<Circuit> {
     need("clampResistance", clamp.resistance);
   }
   need("isolatingResistance", circuit.isolating ?? 0);
+  need("sectionInductance", circuit.section ?? 0);
+  if (circuit.place) {
+    need("segmentResistance", circuit.place.segment.resistance);
+    need("segmentInductance", circuit.place.segment.inductance);
+  }
   const part = linearPartOf(load);
   need("loadResistance", part.resistance);
   need("loadInductance", part.inductance);

@@ -44,7 +44,10 @@ export function meshOf(bank: PulseBank, circuit: Circuit, voltage: number): Mesh
     capacitance: bank.capacitance,
     voltage,
     // inside the bank's terminals, and so behind a clamp across them
-    bank: { resistance: (bank.esr ?? 0) + (circuit.isolating ?? 0), inductance: bank.esl ?? 0 },
+    bank: {
+      resistance: (bank.esr ?? 0) + (circuit.isolating ?? 0),
+      inductance: (bank.esl ?? 0) + (circuit.section ?? 0),
+    },
     bus: circuit.bus ?? { resistance: 0, inductance: 0 },
     load: linearPartOf(circuit.load),
     switch: circuit.switch,

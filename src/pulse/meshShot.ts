@@ -6,7 +6,7 @@
  * the stored energy is a check and not a definition. Needs some inductance; noInductanceShot takes the mesh without.
  * Source: [ME1966] lamp mesh; [methods-derived] the clamp.
  */
-import { accepted, type Read, refused } from "../quantity/index.ts";
+import { accepted, power, type Read, refused } from "../quantity/index.ts";
 import { within } from "./dormandPrince.ts";
 import { courseOf, type MeshCourse } from "./meshCourse.ts";
 import * as eq from "./meshSlopes.ts";
@@ -87,11 +87,11 @@ export function meshShot(mesh: Mesh, tolerance: number = FINE): Read<Shot> {
   const action = end[eq.ACTION]! * current * current * time;
   const bankAction = end[eq.BANK_ACTION]! * current * current * time;
   const charge = end[eq.CHARGE]! * current * time;
-  const lampIntegral = end[eq.LAMP]! * current ** 1.5 * time;
+  const lampIntegral = end[eq.LAMP]! * power(current, 1.5) * time;
   const clampHeat =
     (mesh.clamp?.drop ?? 0) * end[eq.CLAMP_CHARGE]! * current * time +
     (mesh.clamp?.resistance ?? 0) * end[eq.CLAMP_ACTION]! * current * current * time;
-  const loadEnd = end[eq.ROOT]! ** 4;
+  const loadEnd = power(end[eq.ROOT]!, 4);
   const bankEnd = course.clamped && normal.bankL > 0 ? end[eq.BANK_CURRENT]! ** 2 : loadEnd;
   const coil = normal.bankL * bankEnd + normal.outerL * loadEnd;
   const stored = storedIn(mesh);

@@ -8,7 +8,7 @@
  * The lamp's tail lasts for ever, so the integrals run to zero current, where C d^2/2 is left. A clamp has nothing to do here:
  * without inductance the bank never goes negative. Source: [methods-derived] by dV = -u^2 dt/C.
  */
-import { accepted, type Read, refused } from "../quantity/index.ts";
+import { accepted, power, type Read, refused } from "../quantity/index.ts";
 import { type Mesh, resistanceOf, type Shot, storedIn } from "./shot.ts";
 
 /** Part of the peak current at which a drawing of the shot may stop. */
@@ -33,8 +33,8 @@ export function noInductanceShot(mesh: Mesh): Read<Shot> {
     return refused({ code: "pulse.loop.none", place: { field: "inductance" }, read: "0 H and 0 ohm", want });
   }
   const start = rootOf(lamp, resistance, voltage - drop);
-  const action = capacitance * ((lamp * start ** 3) / 3 + (resistance * start ** 4) / 2);
-  const lampIntegral = capacitance * ((lamp * start ** 2) / 2 + (2 * resistance * start ** 3) / 3);
+  const action = capacitance * ((lamp * power(start, 3)) / 3 + (resistance * power(start, 4)) / 2);
+  const lampIntegral = capacitance * ((lamp * start ** 2) / 2 + (2 * resistance * power(start, 3)) / 3);
   const timeAt = (u: number): number =>
     capacitance * (lamp * (1 / u - 1 / start) + 2 * resistance * Math.log(start / u));
   const stateAt = (time: number): { current: number; voltage: number } => {

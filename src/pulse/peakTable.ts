@@ -9,8 +9,9 @@
  * layouts are compared; `peakCurrentOf` has the last digits. The table is made from the exact form when first imported.
  * Source: [methods-derived]; the error is measured in the tests.
  */
+
+import type { BusPath } from "./busPath.ts";
 import { peakFactor } from "./damping.ts";
-import type { BusPath } from "./load.ts";
 
 const PIECES_PER_ONE = 512;
 const END = 8;

@@ -7,6 +7,7 @@ import { type Circuit, checkCircuit } from "./load.ts";
 import { type Bounds, boundsOf, meshOf, type PulseBank, unknownNotes, unknownsOf } from "./loopMesh.ts";
 import { meshShot } from "./meshShot.ts";
 import { noInductanceShot } from "./noInductanceShot.ts";
+import { placedOf } from "./placed.ts";
 import { checkLoop, dampingOf } from "./rlc.ts";
 import { inductanceOf, type Mesh, resistanceOf, type Shot } from "./shot.ts";
 import { shotFindings } from "./shotFindings.ts";
@@ -90,6 +91,18 @@ function limitNotes(mesh: Mesh, given: boolean): readonly string[] {
   ];
 }
 
+/** What the shares by place leave out, or why there are none. */
+function placeNotes(
+  { parallel, esr, esl }: PulseBank,
+  { place = null, clamp }: Circuit,
+  placed: boolean,
+): readonly string[] {
+  if (parallel < 2 || place === null) return [];
+  const lacking = [...(esr === null ? ["ESR"] : []), ...(esl === null ? ["ESL"] : [])].join(" and ");
+  if (!placed) return [`place on the bus not assessed: the units' ${lacking || "bus"} is unknown`];
+  return clamp === null ? [] : ["shares by place on the bus are those until the clamp takes over"];
+}
+
 /**
  * The discharge of `bank` from `voltage` [V] into `circuit`. zeta, peak and energies are of the whole loop: bank, bus, switch
  * and load. Unknown ESR, ESL or bus are left out only as a bound that `bounds` and `notes` name. Refused: faults of the
@@ -112,7 +125,9 @@ export function dischargeOf(bank: PulseBank, circuit: Circuit, voltage: number):
   if (!read.ok) return read;
   const shot = read.value;
   const bounds = boundsOf(unknown, given);
-  const unit = unitDutyOf(bank, { peakCurrent: shot.peakCurrent, action: shot.bankAction, reversal: shot.reversal });
+  const place = placedOf(bank, circuit, shot, mesh);
+  const duty = { peakCurrent: shot.peakCurrent, action: shot.bankAction, reversal: shot.reversal };
+  const unit = unitDutyOf(bank, duty, place);
   const isolating = inIsolating(mesh, circuit, shot.energy.bank);
   const hasAlpha = mesh.lampConstant > 0 && loop.inductance > 0;
   return accepted({
@@ -132,7 +147,7 @@ export function dischargeOf(bank: PulseBank, circuit: Circuit, voltage: number):
     },
     bounds,
     findings: shotFindings({ bank, circuit, mesh, shot, unit, bounds }),
-    notes: [...unknownNotes(unknown), ...limitNotes(mesh, given)],
+    notes: [...unknownNotes(unknown), ...limitNotes(mesh, given), ...placeNotes(bank, circuit, place !== null)],
     method: shot.method,
     duration: shot.duration,
     at: shot.at,

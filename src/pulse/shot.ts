@@ -1,5 +1,6 @@
 // The words that every way of computing a shot shares: the mesh that goes in, the figures and the course that come out.
-import type { BusPath, Clamp, Switch } from "./load.ts";
+import type { BusPath } from "./busPath.ts";
+import type { Clamp, Switch } from "./load.ts";
 
 /** One closed mesh with every number known: SI, constant. `lampConstant` [ohm A^0.5] is 0 without a lamp. */
 export interface Mesh {

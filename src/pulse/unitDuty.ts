@@ -8,11 +8,12 @@
  *   dv/dt   slew        V/s    fastest unit: I/(m C_lo) cross-tied; strings: I/(C_lo + (m - 1) C_lo ((n - 1) C_lo/C_hi + 1)/n)
  *
  * Units of a cross-tied stage share by capacitance, strings by string capacitance (one string all high, the rest all low), so
- * one formula serves both. Holds while capacitance decides; when resistance or lead length does, sharing is as those are.
+ * one formula serves both. Holds while capacitance decides; where the place on the bus is told, the ladder's shares stand instead.
  * Source: [methods-derived], corners checked by brute force.
  */
 import type { Ties } from "../bank/index.ts";
 import type { Finding } from "../quantity/index.ts";
+import type { PlaceShares } from "./busPath.ts";
 import { atMost, type Bound } from "./verdict.ts";
 
 /** What the maker allows one unit in one shot; null is not known. A, V/s, fraction of the charge voltage, A^2 s. */
@@ -63,9 +64,14 @@ export interface BankDuty {
   readonly reversal: number;
 }
 
-/** What the worst unit carries. `evenCurrent` is what each would carry if all were alike; heat [J] null when ESR is unknown. */
+/**
+ * What the worst unit carries. `evenCurrent` is what each would carry if all were alike; heat [J] null when ESR is unknown.
+ * `share` is its part of the peak, `actionShare` squared that of the action; `place` null: its place on the bus is not counted.
+ */
 export interface UnitDuty {
   readonly share: number;
+  readonly actionShare: number;
+  readonly place: PlaceShares | null;
   readonly evenCurrent: number;
   readonly peakCurrent: number;
   readonly action: number | null;
@@ -75,20 +81,41 @@ export interface UnitDuty {
   readonly why: string;
 }
 
-export function unitDutyOf(arrangement: Arrangement, duty: BankDuty): UnitDuty {
-  const { unit, parallel, ties } = arrangement;
-  const share = worstShare(arrangement);
-  const action = duty.action === null ? null : duty.action * share * share;
+/** Why this unit: its place on the bus and its capacitance, each with what it does to an even part. */
+function whyOf({ parallel, ties }: Arrangement, place: PlaceShares | null): string {
+  if (parallel === 1) return "It carries all the current.";
   const group = ties === "cross-tied" ? "unit of a stage" : "string";
+  if (place === null) return `Its ${group} has the highest capacitance among low ones.`;
+  const { position, feed, byPlace, byCapacitance, share, alike, otherFeed } = place;
+  const times = (factor: number): string => `x ${factor.toFixed(3)}`;
+  const other = feed === "end" ? "the centre" : "one end";
+  const gain = otherFeed / Math.max(...alike);
+  return [
+    `Position ${position} of ${parallel} on a bus fed at ${feed === "end" ? "one end" : "the centre"}:`,
+    `${times(byPlace)} by its place, ${times(byCapacitance)} by the highest capacitance among low ones,`,
+    `${times(share * parallel)} by both. Fed at ${other} the place's part would be ${times(gain)} of this.`,
+  ].join(" ");
+}
+
+/** `place`: how the branches share by where they hang on the bus; null: by capacitance alone. */
+export function unitDutyOf(arrangement: Arrangement, duty: BankDuty, place: PlaceShares | null = null): UnitDuty {
+  const { unit, parallel } = arrangement;
+  const share = place?.share ?? worstShare(arrangement);
+  const part = place?.action ?? share * share;
+  const action = duty.action === null ? null : duty.action * part;
+  // with all units low the place alone decides which one falls fastest
+  const crowding = place === null ? 1 : Math.max(...place.alike) * parallel;
   return {
     share,
+    actionShare: Math.sqrt(part),
+    place,
     evenCurrent: duty.peakCurrent / parallel,
     peakCurrent: duty.peakCurrent * share,
     action,
-    slew: worstSlew(arrangement, duty.peakCurrent),
+    slew: worstSlew(arrangement, duty.peakCurrent) * crowding,
     reversal: duty.reversal,
     heat: unit.esr === null || action === null ? null : unit.esr * action,
-    why: parallel === 1 ? "It carries all the current." : `Its ${group} has the highest capacitance among low ones.`,
+    why: whyOf(arrangement, place),
   };
 }
 

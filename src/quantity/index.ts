@@ -7,6 +7,7 @@ export { type Claim, withinLeast, withinMost } from "./judge.ts";
 export { formatMoney, isCurrency, lineCost, minorDigits, parsePrice, toMajor } from "./money.ts";
 export { nearestWord } from "./nearest.ts";
 export { example, type ParseOptions, parseQuantity } from "./parse.ts";
+export { power, tenTo } from "./power.ts";
 export { accepted, type Place, type Read, type Refusal, refused } from "./refusal.ts";
 export {
   lastAtMost,

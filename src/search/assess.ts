@@ -12,14 +12,15 @@ import {
   pulseEnergy,
   unitCount,
 } from "../bank/index.ts";
-import { type Capacitor, type Purchase, purchase, type ResistorFamily } from "../catalog/index.ts";
+import { type Capacitor, type Fuse, type Purchase, purchase, type ResistorFamily } from "../catalog/index.ts";
 import { toMajor } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing, positionsOf, shapedChain, sharingOf } from "./balancing.ts";
 import type { Brief } from "./brief.ts";
 import { type Candidate, prepare } from "./candidate.ts";
 import { pricedIn } from "./currency.ts";
 import { findingsOf } from "./findings.ts";
-import type { Balance, Cost, LayoutResult, Shares, Span } from "./result.ts";
+import { isProtected, protectionCost, protectionOf } from "./protection.ts";
+import type { Balance, Cost, LayoutResult, Protection, Shares, Span } from "./result.ts";
 import { type Risk, riskOf } from "./risk.ts";
 import { balanceMends } from "./sharing/mends.ts";
 import { withoutBalance } from "./sharing/withoutBalance.ts";
@@ -37,6 +38,8 @@ export interface AssessInput {
   readonly families: readonly ResistorFamily[];
   readonly currency: string | null;
   readonly balance?: BalanceWish;
+  /** Fuses to choose from where the brief asks for them; null or left out: no fuse catalogue. */
+  readonly fuses?: readonly Fuse[] | null;
   /** Measured capacitances, F, that the statistical basis draws from instead of the tolerance; at least LEAST_LOT. */
   readonly lot?: readonly number[];
 }
@@ -76,6 +79,7 @@ export function assess(input: AssessInput): LayoutResult {
   const family = chosen === null ? null : families.find((f) => f.family === chosen.family);
   const resistors = chosen === null || !family ? null : purchase(family, chosen.positions * chosen.elements);
   const worst = series === 1 ? voltage : worstOf(share.charging, candidate.leak === null ? 0 : share.holding);
+  const guards = guardsFor(input, unit, layout, worst);
   const result: Omit<LayoutResult, "findings"> = {
     id: layoutId(layout),
     part: unit.part,
@@ -101,8 +105,10 @@ export function assess(input: AssessInput): LayoutResult {
       capacitors,
       resistors,
       needsResistors: chosen !== null || (series > 1 && candidate.leak === null),
+      guards,
       currency,
     }),
+    ...(guards === null ? {} : { protection: guards.map((one) => ({ ...one, cost: major(one.cost, currency) })) }),
     volume: candidate.volume === null ? null : candidate.volume * units,
     mass: candidate.mass === null ? null : candidate.mass * units,
     stress: worst === null ? null : worst / unit.voltage,
@@ -112,6 +118,25 @@ export function assess(input: AssessInput): LayoutResult {
   const lacking = series > 1 && chosen === null && wish.kind === "choose" && candidate.leak !== null;
   const mends = lacking ? balanceMends({ unit, brief, families, shape: layout }) : null;
   return { ...result, findings: findingsOf({ result, unit, brief, candidate, family: family ?? null, mends }) };
+}
+
+const major = (minor: number | null, currency: string | null): number | null =>
+  minor === null || currency === null ? null : toMajor(minor, currency);
+
+/** The protection that the brief asks for; null when none. Where no fuse of the catalogue does, they stay to be chosen. */
+function guardsFor(
+  { brief, currency, fuses = null }: AssessInput,
+  unit: Capacitor,
+  { series, parallel, ties }: Layout,
+  worst: number | null,
+): readonly Protection[] | null {
+  if (!isProtected(brief)) return null;
+  const given = { unit, series, parallel, ties, worst: worst ?? Number.POSITIVE_INFINITY };
+  const rows = fuses === null ? null : pricedIn(fuses, currency, brief);
+  const lines = protectionOf(brief, given, { fuses: rows, currency });
+  if (typeof lines !== "string") return lines;
+  const open = protectionOf(brief, given, { fuses: null, currency });
+  return typeof open === "string" ? [] : open;
 }
 
 /** Chance of an excess while charging, or null when the tolerance is unknown. */
@@ -217,14 +242,21 @@ function bleedSeconds(balance: Balance, layout: Layout, capacitance: number, bri
   return resistance * capacitance * Math.log(voltage / brief.touchSafe);
 }
 
+const PLURAL: Readonly<Record<Protection["kind"], string>> = {
+  fuse: "fuses",
+  "isolating resistor": "isolating resistors",
+  "section inductance": "section inductances",
+};
+
 /** What the priced lines come to; null when none has a price. Resistors that cannot be sized have none. */
 function costOf(of: {
   readonly capacitors: Purchase | null;
   readonly resistors: Purchase | null;
   readonly needsResistors: boolean;
+  readonly guards: readonly Protection[] | null;
   readonly currency: string | null;
 }): Cost | null {
-  const { currency, needsResistors } = of;
+  const { currency, needsResistors, guards } = of;
   if (currency === null) return null;
   const capacitors = of.capacitors?.cost ?? null;
   const resistors = needsResistors ? (of.resistors?.cost ?? null) : 0;
@@ -232,8 +264,13 @@ function costOf(of: {
   return {
     capacitors: capacitors === null ? null : toMajor(capacitors, currency),
     resistors: resistors === null ? null : toMajor(resistors, currency),
-    total: toMajor((capacitors ?? 0) + (resistors ?? 0), currency),
+    ...(guards === null ? {} : { protection: toMajor(protectionCost(guards), currency) }),
+    total: toMajor((capacitors ?? 0) + (resistors ?? 0) + protectionCost(guards ?? []), currency),
     currency,
-    unpriced: [...(capacitors === null ? ["capacitors"] : []), ...(resistors === null ? ["balancing resistors"] : [])],
+    unpriced: [
+      ...(capacitors === null ? ["capacitors"] : []),
+      ...(resistors === null ? ["balancing resistors"] : []),
+      ...(guards ?? []).filter(({ cost }) => cost === null).map(({ kind }) => PLURAL[kind]),
+    ],
   };
 }

@@ -2,13 +2,18 @@
 
 import { pulseEnergy } from "../bank/index.ts";
 import { hazardFindings } from "../hazard/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { toMajor } from "../quantity/index.ts";
 import { assess } from "./assess.ts";
 import { bleedOf } from "./blendBleed.ts";
+import { type BuiltGroup, costOf, shipmentsOf } from "./blendCost.ts";
 import { blendFindings } from "./blendFindings.ts";
-import type { BlendCost, BlendResult, BlendString, WorstShare } from "./blendResult.ts";
+import { groupLimits, isLimitFinding } from "./blendLimits.ts";
+import type { BlendResult, BlendString, WorstShare } from "./blendResult.ts";
 import { type BuyingTerms, resistorsOf, type StringType } from "./blendString.ts";
+import type { Brief } from "./brief.ts";
+import { pricedIn } from "./currency.ts";
 import type { LayoutResult, Span } from "./result.ts";
+import { type ShipmentWish, shipmentTerms } from "./shipmentTerms.ts";
 
 /** So many strings of one type. */
 export interface Group {
@@ -22,6 +27,12 @@ export interface BlendMade {
   readonly currency: string | null;
 }
 
+export interface BlendBuilt {
+  readonly groups: readonly BuiltGroup[];
+  readonly terms: BuyingTerms;
+  readonly currency: string | null;
+}
+
 /** Parts and ties of the groups, by name. */
 export const kindOf = (groups: readonly Group[]): string =>
   groups
@@ -30,21 +41,36 @@ export const kindOf = (groups: readonly Group[]): string =>
     .join(" + ");
 
 export function assessBlend({ groups, terms, currency }: BlendMade): Omit<BlendResult, "certificate"> {
-  const { brief, families } = terms;
-  const layouts = groups.map(({ type, strings }) => {
+  const built = groups.map(({ type, strings }): BuiltGroup => {
+    const { unit, series } = type;
     const { ties } = resistorsOf(type, strings);
-    const layout = { part: type.unit.part, series: type.series, parallel: strings, ties };
-    return assess({ unit: type.unit, layout, brief, families, currency });
+    return { unit, layout: { part: unit.part, series, parallel: strings, ties }, families: type.terms.families };
   });
+  return assessGroups({ groups: built, terms, currency });
+}
+
+/** Assesses a blend as it is given: nothing is refused here, everything is found. */
+export function assessGroups({ groups, terms, currency }: BlendBuilt): Omit<BlendResult, "certificate"> {
+  const { brief } = terms;
+  const layouts = groups.map(({ unit, layout, families }) => assess({ unit, layout, brief, families, currency }));
   const capacitance = totalOf(layouts.map((one) => one.capacitance));
   const energyOf = (c: number | null): number | null =>
     c === null ? null : pulseEnergy(c, brief.voltage, brief.ripple);
   const bleed = bleedOf(layouts, brief);
+  const limited = groupLimits(
+    layouts,
+    groups.map(({ unit }) => unit),
+    brief,
+  );
   const strings = layouts.map((layout, at): BlendString => {
-    const { unit } = groups[at]!.type;
+    const { unit } = groups[at]!;
     return {
       ...layout,
-      findings: layout.findings.filter(({ id }) => !OF_THE_WHOLE.has(id)),
+      // A group's shot is that of the whole bank, and so are its limits on the shot.
+      findings: [
+        ...layout.findings.filter((finding) => !OF_THE_WHOLE.has(finding.id) && !isLimitFinding(finding)),
+        ...limited[at]!,
+      ],
       bought: layout.purchase.capacitors?.bought ?? 0,
       fromHand: layout.purchase.capacitors?.fromHand ?? 0,
       supplier: unit.supplier ?? null,
@@ -52,6 +78,7 @@ export function assessBlend({ groups, terms, currency }: BlendMade): Omit<BlendR
     };
   });
   const bought = strings.filter((one) => one.bought > 0);
+  const shipments = shipmentsOf(groups, layouts, terms);
   const whole = {
     capacitance,
     energy: {
@@ -61,7 +88,7 @@ export function assessBlend({ groups, terms, currency }: BlendMade): Omit<BlendR
     },
     bleed,
   };
-  const polarised = groups.some(({ type }) => type.unit.polarised !== false);
+  const polarised = groups.some(({ unit }) => unit.polarised !== false);
   return {
     id: layouts.map(({ id }) => id).join(" + "),
     strings,
@@ -72,14 +99,41 @@ export function assessBlend({ groups, terms, currency }: BlendMade): Omit<BlendR
       holding: worstOf(layouts, (one) => one.share.holding),
       leftAfterDump: worstOf(layouts, (one) => one.share.leftAfterDump),
     },
-    cost: costOf(strings, terms.lineCost, currency),
+    cost: costOf(strings, terms.lineCost, shipments, currency),
+    shipments:
+      currency === null ? [] : shipments.map(({ supplier, cost }) => ({ supplier, cost: toMajor(cost, currency) })),
     volume: sumOf(layouts.map(({ volume }) => volume)),
     mass: sumOf(layouts.map(({ mass }) => mass)),
     stress: layouts.some(({ stress }) => stress === null) ? null : Math.max(...layouts.map(({ stress }) => stress!)),
     suppliers: new Set(bought.map(({ supplier }) => supplier)).size,
     findings: blendFindings({ ...whole, brief, polarised }),
-    kind: kindOf(groups),
+    kind: layouts
+      .map(({ part, ties }) => `${part} ${ties}`)
+      .sort()
+      .join(" + "),
   };
+}
+
+export interface BuiltBlend {
+  readonly groups: readonly BuiltGroup[];
+  readonly brief: Brief;
+  /** Major money; default 0. */
+  readonly shipments?: ShipmentWish | undefined;
+  readonly currency: string | null;
+  /** Minor units of the currency in one of the major. */
+  readonly minor: number;
+}
+
+/** A blend somebody has or means to build, in money as the brief has it. */
+export function assessBuiltBlend({ groups, brief, shipments, currency, minor }: BuiltBlend) {
+  const terms = { brief, families: [], lineCost: 0, shipments: shipmentTerms(shipments, minor) };
+  // The groups' own prices are brought into the plan's currency by `assess`; suppliers are told by those.
+  const priced = groups.map((group) => ({
+    ...group,
+    unit: pricedIn([group.unit], currency, brief)[0] ?? group.unit,
+    families: pricedIn(group.families, currency, brief),
+  }));
+  return assessGroups({ groups: priced, terms, currency });
 }
 
 /** Ids that speak of the bank as a whole: a single group cannot be judged by them. */
@@ -122,23 +176,4 @@ function worstOf(layouts: readonly LayoutResult[], value: (layout: LayoutResult)
     if (worst === null || here / limit > worst.value / worst.limit) worst = { part: layout.part, value: here, limit };
   }
   return worst;
-}
-
-function costOf(strings: readonly BlendString[], lineCost: number, currency: string | null): BlendCost | null {
-  if (currency === null) return null;
-  const scale = 10 ** minorDigits(currency);
-  const minor = (amount: number | null | undefined): number => Math.round((amount ?? 0) * scale);
-  const capacitors = strings.reduce((sum, { cost }) => sum + minor(cost?.capacitors), 0);
-  const resistors = strings.reduce((sum, { cost }) => sum + minor(cost?.resistors), 0);
-  const lines = lineCost * strings.filter((one) => one.bought > 0).length;
-  const unpriced = new Set(strings.flatMap(({ cost }) => cost?.unpriced ?? []));
-  const known = !unpriced.has("balancing resistors");
-  return {
-    capacitors: capacitors / scale,
-    resistors: known || resistors > 0 ? resistors / scale : null,
-    lines: lines / scale,
-    total: (capacitors + resistors + lines) / scale,
-    currency,
-    unpriced: [...unpriced],
-  };
 }

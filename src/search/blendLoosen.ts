@@ -12,6 +12,7 @@ const FIELDS: Readonly<Record<Loosening["limit"], Loosen["field"]>> = {
   volume: "maxVolume",
   mass: "maxMass",
   units: "maxUnits",
+  ceilings: "all ceilings",
   types: "maxTypes",
   requirement: "energy",
 };

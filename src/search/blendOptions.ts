@@ -3,16 +3,19 @@
 import { FIT } from "../bank/index.ts";
 import { type Capacitor, cheapest, isPriced, toBuy } from "../catalog/index.ts";
 import { capacityNeeded } from "./blend/evaluate.ts";
-import { type BlendModel, type BlendOption, type CostFloor, LARGEST_COST } from "./blend/model.ts";
+import { type BlendModel, type BlendOption, LARGEST_COST } from "./blend/model.ts";
 import { stringsToReach } from "./blend/pool.ts";
-import { lazyOption } from "./blend/tabulate.ts";
-import { type BuyingTerms, type StringType, stringsCost, stringType } from "./blendString.ts";
-import type { Brief } from "./brief.ts";
+import { paidSenders, shipmentOf } from "./blendShipments.ts";
+import { type BuyingTerms, type StringType, stringsCost } from "./blendString.ts";
+import { typesOf, waysOf } from "./blendWays.ts";
+import { hasLimits, unratedFor } from "./limits.ts";
 import type { RefusedPart } from "./result.ts";
 
 export interface BlendWork {
   /** What each option of the model is made of. */
   readonly types: readonly StringType[];
+  /** Suppliers of the model's shipments, by name; "" for those who are not named. */
+  readonly senders: readonly string[];
   readonly model: BlendModel;
   readonly leftOut: readonly RefusedPart[];
   /** Strings that are sound but have no price; they are named in `leftOut` too. */
@@ -25,6 +28,9 @@ export interface BlendDemand {
   readonly required: number;
   readonly maxTypes: number;
 }
+
+/** With limits on the shot, so many times the strings that would meet the need alone are looked at. */
+const SURPLUS = 2;
 
 /** Units that can be had, on hand or bought at a known price. */
 function mostUnits(unit: Capacitor): number {
@@ -43,7 +49,9 @@ function mostStrings(type: StringType, had: number, demand: BlendDemand): number
   const byUnits = Math.floor(brief.maxUnits / type.series);
   const capped = Math.max(0, Math.min(byStock, byUnits));
   const each = type.candidate.basis / type.series;
-  const most = Math.min(capped, stringsToReach(capacityNeeded(demand.required), each));
+  // More strings than the need asks for lower what each unit bears: where the brief limits that, they are of use.
+  const enough = (hasLimits(brief) ? SURPLUS : 1) * stringsToReach(capacityNeeded(demand.required), each);
+  const most = Math.min(capped, enough);
   // Sums of costs stay exact whole numbers only below the largest cost of the model.
   let [good, bad] = [0, most + 1];
   while (bad - good > 1) {
@@ -53,38 +61,6 @@ function mostStrings(type: StringType, had: number, demand: BlendDemand): number
     else bad = middle;
   }
   return good;
-}
-
-/** A bound on the table that needs no table: the least unit price for what is not on hand; resistors count nothing. */
-function floorOf({ unit, series, terms }: StringType): CostFloor {
-  const hand = unit.onHand ?? 0;
-  const prices = [unit.price ?? Number.POSITIVE_INFINITY, ...(unit.priceBreaks ?? []).map((step) => step.price)];
-  const least = Math.min(...prices);
-  const bill = { quantity: 0, cost: 0 };
-  const first = cheapest(unit, series + terms.brief.spares, bill) && Number.isFinite(bill.cost) ? bill.cost : 0;
-  if (!Number.isFinite(least)) return { fixed: 0, perString: 0 };
-  // A line is rounded to whole minor units, at most half of one down.
-  return { fixed: least * (terms.brief.spares - hand) - 1, perString: series * least, least: first };
-}
-
-/** Costs of 0 to `most` strings, levelled from above: whoever wants few may build more. */
-export function costTable(type: StringType, most: number): Float64Array {
-  const costs = Float64Array.from({ length: most + 1 }, (_, x) => stringsCost(type, x) ?? LARGEST_COST);
-  for (let x = most - 1; x >= 1; x -= 1) costs[x] = Math.min(costs[x]!, costs[x + 1]!);
-  return costs;
-}
-
-function optionOf(type: StringType, partIndex: number, maxStrings: number, brief: Brief): BlendOption {
-  const { series, candidate } = type;
-  const facts = {
-    capacity: candidate.basis / series,
-    volume: brief.maxVolume === undefined ? 0 : series * (candidate.volume as number),
-    mass: brief.maxMass === undefined ? 0 : series * (candidate.mass as number),
-    units: series,
-    maxStrings,
-    partIndex,
-  };
-  return lazyOption(facts, floorOf(type), () => costTable(type, maxStrings));
 }
 
 /** Why a sound string cannot be used even once; null when it can. */
@@ -109,34 +85,46 @@ function shut(type: StringType, had: number, demand: BlendDemand): Omit<RefusedP
     : { reason: "price-missing", value, limit: unit.onHand ?? 0 };
 }
 
-/** The whole model. Its cost tables are made when first read. */
+/** The whole model. Its cost tables are made when first read, but for parts whose hand may spare a shipment. */
 export function blendWork(demand: BlendDemand): BlendWork {
   const { brief } = demand.terms;
+  const senders = paidSenders(demand.parts, demand.terms);
   const types: StringType[] = [];
   const options: BlendOption[] = [];
   const leftOut: RefusedPart[] = [];
   const unpriced: StringType[] = [];
-  for (const unit of demand.parts) {
-    const type = stringType(unit, demand.terms);
-    if ("reason" in type) {
-      leftOut.push({ part: unit.part, ...type });
+  for (const [partIndex, unit] of demand.parts.entries()) {
+    const made = typesOf(unit, demand.terms, senders);
+    if ("reason" in made) {
+      leftOut.push({ part: unit.part, ...made });
       continue;
     }
     const had = mostUnits(unit);
-    const why = shut(type, had, demand);
-    // More of it could be had without a price, so a price could let it win.
-    if (!isPriced(unit) && (why === null || why.reason === "price-missing") && unit.available !== 0)
-      unpriced.push(type);
-    const most = why === null ? mostStrings(type, had, demand) : 0;
-    if (why !== null || most === 0) {
-      leftOut.push({ part: unit.part, ...(why ?? { reason: "stock", value: type.series, limit: had }) });
+    const unrated = unratedFor(brief, unit);
+    if (unrated !== null) {
+      leftOut.push({ part: unit.part, ...unrated });
       continue;
     }
-    options.push(optionOf(type, options.length, most, brief));
-    types.push(type);
+    const why = shut(made[0]!, had, demand);
+    // More of it could be had without a price, so a price could let it win.
+    if (!isPriced(unit) && (why === null || why.reason === "price-missing") && unit.available !== 0)
+      unpriced.push(made[0]!);
+    const before = options.length;
+    for (const type of made) {
+      const most = why === null ? mostStrings(type, had, demand) : 0;
+      if (most === 0) continue;
+      for (const way of waysOf(type, most, { partIndex, senders }, brief)) {
+        options.push(way);
+        types.push(type);
+      }
+    }
+    if (options.length === before)
+      leftOut.push({ part: unit.part, ...(why ?? { reason: "stock", value: made[0]!.series, limit: had }) });
   }
   const open = Number.POSITIVE_INFINITY;
   const ceilings = { volume: brief.maxVolume ?? open, mass: brief.maxMass ?? open, units: brief.maxUnits };
-  const model = { options, requirement: demand.required, ceilings, maxTypes: demand.maxTypes };
-  return { types, model, leftOut, unpriced };
+  const plain = { options, requirement: demand.required, ceilings, maxTypes: demand.maxTypes };
+  const shipments = senders.map((name) => shipmentOf(demand.terms, name));
+  const model = senders.length === 0 ? plain : { ...plain, shipments };
+  return { types, senders, model, leftOut, unpriced };
 }

@@ -3,10 +3,11 @@
 import { type Capacitor, purchase } from "../catalog/index.ts";
 import { toMajor } from "../quantity/index.ts";
 import type { BlendLimits } from "./blend/findBlend.ts";
-import type { BlendModel } from "./blend/model.ts";
+import type { BlendCount, BlendModel } from "./blend/model.ts";
 import { bestWith, priceSwitches } from "./blend/priceSwitch.ts";
 import type { FoundBlend } from "./blend/singles.ts";
 import type { PriceMove, WinningPrice } from "./blendResult.ts";
+import { sendersOf } from "./blendShipments.ts";
 import { resistorsOf, type StringType } from "./blendString.ts";
 
 /** Counts of one unpriced part that are tried, and parts; each is a search of its own. */
@@ -16,6 +17,8 @@ const MOST_PARTS = 20;
 export interface PriceQuestion {
   readonly model: BlendModel;
   readonly types: readonly StringType[];
+  /** Names of the suppliers of the model's shipments. */
+  readonly senders: readonly string[];
   /** The cheapest blend, or null when none fits yet: then any price would do that lets the part in. */
   readonly cheapest: FoundBlend | null;
   readonly currency: string;
@@ -31,7 +34,7 @@ export function winningPrices(question: PriceQuestion, unpriced: readonly String
 }
 
 function winningPrice(question: PriceQuestion, cheapest: FoundBlend, type: StringType): WinningPrice {
-  const { model, types, currency } = question;
+  const { model, types, senders, currency } = question;
   const { unit, series, candidate, terms } = type;
   const { brief } = terms;
   const own = types.findIndex((one) => one.unit.part === unit.part);
@@ -52,7 +55,9 @@ function winningPrice(question: PriceQuestion, cheapest: FoundBlend, type: Strin
     const rest = resistorsOf(type, x).cost + terms.lineCost;
     if ((cheapest.cost - rest) / bought <= best) continue;
     const costs = new Float64Array(x + 1).fill(rest, 1);
+    const suppliers = sendersOf(type, x, senders).map((name) => senders.indexOf(name));
     const option = {
+      suppliers,
       capacity: candidate.basis / series,
       volume: amount(candidate.volume, model.ceilings.volume),
       mass: amount(candidate.mass, model.ceilings.mass),
@@ -90,12 +95,15 @@ export function priceMoves(
   const { model, types, cheapest, currency, limits } = question;
   if (cheapest === null) return [];
   const used = cheapest.counts.map(({ option }) => option);
-  return [...new Set([...used, ...others])]
-    .flatMap((option) => {
-      const { unit, series, terms } = types[option]!;
-      const bought = (strings: number): number =>
-        strings === 0 ? 0 : (purchase(unit, series * strings + terms.brief.spares)?.bought ?? 0);
-      return priceSwitches(model, cheapest, option, limits, bought);
+  const partOf = (option: number): number => model.options[option]!.partIndex;
+  return [...new Set([...used, ...others].map(partOf))]
+    .flatMap((part) => {
+      const ways = model.options.flatMap(({ partIndex }, at) => (partIndex === part ? [at] : []));
+      const bought = ({ option, strings }: BlendCount): number => {
+        const { unit, series, terms } = types[option]!;
+        return strings === 0 ? 0 : (purchase(unit, series * strings + terms.brief.spares)?.bought ?? 0);
+      };
+      return priceSwitches(model, cheapest, ways, limits, bought);
     })
     .map(({ option, move, perUnit, next, proven }) => ({
       part: types[option]!.unit.part,

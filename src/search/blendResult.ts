@@ -22,6 +22,14 @@ export interface WorstShare {
 export interface BlendCost extends Cost {
   /** What ordering each part costs as such. */
   readonly lines: number;
+  /** What the shipments cost. */
+  readonly shipments: number;
+}
+
+/** One supplier who sends something; null is one who is not named. Major money. */
+export interface Shipment {
+  readonly supplier: string | null;
+  readonly cost: number;
 }
 
 export interface BlendResult {
@@ -42,6 +50,8 @@ export interface BlendResult {
   readonly mass: number | null;
   readonly stress: number | null;
   readonly suppliers: number;
+  /** Shipments that cost something. */
+  readonly shipments: readonly Shipment[];
   /** Of the bank as a whole. */
   readonly findings: readonly Finding[];
   /** Parts and ties: two blends of one kind differ only in counts. */
@@ -73,7 +83,11 @@ export interface NamedCertificate {
     readonly part: string;
     readonly series: number;
     readonly strings: readonly number[];
+    /** Who must send something for it, where shipments cost anything. */
+    readonly suppliers?: readonly string[];
   }[];
+  /** Minor units, each charged once, where shipments cost anything. */
+  readonly shipments?: Readonly<Record<string, number>>;
   /** What the separate verifier said of it. */
   readonly verdict: "valid" | "invalid" | "unsettled";
   readonly why: string | null;
@@ -81,7 +95,8 @@ export interface NamedCertificate {
 
 /** One limit loosened alone; the least change first. */
 export interface Loosen {
-  readonly field: "maxCost" | "maxVolume" | "maxMass" | "maxUnits" | "maxTypes" | "energy";
+  /** `all ceilings` is a factor on volume, mass and units together, from 1. */
+  readonly field: "maxCost" | "maxVolume" | "maxMass" | "maxUnits" | "all ceilings" | "maxTypes" | "energy";
   readonly from: number;
   readonly to: number | null;
   /** Relative change; null where this limit alone cannot. */
@@ -118,11 +133,77 @@ export interface CeilingWorth {
   readonly types: number;
 }
 
+/** How far the stock of a part may move before another blend is the cheapest. */
+export interface StockMove {
+  readonly part: string;
+  readonly move: "fewer" | "more";
+  /** `fewer`: with less than so many of them, on hand and bought, the blend cannot be built. `more`: so many must be on sale. */
+  readonly units: number;
+  /** Major money: what the cheapest costs more (or less) then; null when nothing fits. */
+  readonly change: number | null;
+  readonly next: string | null;
+  readonly proven: boolean;
+}
+
+export const FRONT_NAMES = ["volume", "mass", "units", "stress"] as const;
+export type FrontName = (typeof FRONT_NAMES)[number];
+
+/** SI (m3, kg, number, fraction of the rating), major money. */
+export interface BlendFrontPoint {
+  readonly amount: number;
+  readonly cost: number;
+  readonly lowerBound: number;
+  readonly id: string;
+  readonly proven: boolean;
+}
+
+export interface BlendFront {
+  readonly against: FrontName;
+  readonly points: readonly BlendFrontPoint[];
+}
+
+/** One step of the cost ladder: the cheapest blend for every need above `from` up to `to`. */
+export interface BlendLadderStep {
+  /** F of the basis; and J of a pulse. */
+  readonly from: number;
+  readonly to: number;
+  readonly energy: { readonly from: number; readonly to: number };
+  readonly cost: number;
+  readonly id: string;
+  readonly units: number;
+  readonly proven: boolean;
+  /** The brief's own need stands on this step. */
+  readonly asked: boolean;
+}
+
+export interface BlendLadder {
+  readonly end: "complete" | "out of reach" | "cut";
+  readonly steps: readonly BlendLadderStep[];
+}
+
 export interface EngineAnswer {
   readonly engine: string;
   /** Minor units; null where it says that nothing fits, or nothing cheaper. */
   readonly cost: number | null;
   readonly id: string | null;
+}
+
+/** The first limit of the brief that a group is not proven to keep. */
+export interface BrokenLimit {
+  readonly part: string;
+  readonly limit: string;
+  readonly value: number | null;
+  readonly allowed: number | null;
+  readonly unit: string;
+  /** False: known to be over; true: it cannot be told, or only a bound is known. */
+  readonly open: boolean;
+}
+
+/** The brief's limits on shot and faults, where the cheapest blend of all does not keep them. */
+export interface LimitedBlend {
+  /** Blends that cost no more, each judged and each breaking a limit. */
+  readonly rejected: number;
+  readonly cheapest: { readonly id: string; readonly cost: number | null; readonly broken: BrokenLimit | null };
 }
 
 export interface BlendPlan {
@@ -137,6 +218,8 @@ export interface BlendPlan {
   readonly blends: readonly BlendResult[];
   /** The proof where no blend carries it: that none exists or all cost too much, or one that the verifier rejected. */
   readonly certificate: NamedCertificate | null;
+  /** Null when the brief sets no limits on shot and faults, or the cheapest of all keeps them. */
+  readonly limited: LimitedBlend | null;
   /** What the second engine said on the core, or why it was not asked. */
   readonly secondOpinion: "agrees" | "disagrees" | "no answer" | "not asked";
   /** Answers that contradict each other, all of them; empty as a rule. */
@@ -147,6 +230,10 @@ export interface BlendPlan {
   readonly loosen: readonly Loosen[];
   readonly winningPrices: readonly WinningPrice[];
   readonly priceMoves: readonly PriceMove[];
+  readonly stockMoves: readonly StockMove[];
+  /** Those that were asked for. */
+  readonly fronts: readonly BlendFront[];
+  readonly ladder: BlendLadder | null;
   readonly worth: CeilingWorth | null;
   readonly notes: readonly string[];
 }

@@ -7,7 +7,7 @@ import { leastAmount } from "./blend/loosen.ts";
 import type { BlendModel } from "./blend/model.ts";
 import type { FoundBlend } from "./blend/singles.ts";
 import type { BlendWork } from "./blendOptions.ts";
-import { type Proof, proofOf, type SecondOpinion, secondOpinion } from "./blendProof.ts";
+import { type Proof, proofOf, type SecondOpinion, type SolveApart, secondOpinion } from "./blendProof.ts";
 
 export interface SettleWish {
   readonly currency: string | null;
@@ -15,6 +15,8 @@ export interface SettleWish {
   readonly seconds: number;
   /** A steady clock, ms; without it the second engine is not asked, for it cannot tell its own time-out. */
   readonly clock?: (() => number) | undefined;
+  /** Where the second engine runs so that it can be ended. */
+  readonly apart?: SolveApart | undefined;
   readonly stop?: (() => boolean) | undefined;
   /** Limits of each question beside the main one. */
   readonly side: BlendLimits;
@@ -35,12 +37,16 @@ export interface Settled {
   readonly disagreements: readonly { readonly engine: string; readonly blend: FoundBlend | null }[];
 }
 
-export async function settleWork({ model, types }: BlendWork, wish: SettleWish): Promise<Settled> {
-  const { currency, seconds, clock, stop, side, settle = settleBlend } = wish;
-  const answer = await settle(model, { ...(stop === undefined ? {} : { stop }), seconds });
+export async function settleWork(work: BlendWork, wish: SettleWish): Promise<Settled> {
+  const { model } = work;
+  const { currency, seconds, clock, apart, stop, side, settle = settleBlend } = wish;
+  const answer = await settle(model, {
+    ...(stop === undefined ? {} : { stop }),
+    seconds,
+  });
   const stopped = answer.status === "stopped";
-  const proof = stopped ? null : proofOf(model, types, answer, currency);
-  const second = proof === null ? null : secondOpinion(model, proof, clock);
+  const proof = stopped ? null : proofOf(work, answer, currency);
+  const second = proof === null ? null : await secondOpinion(model, proof, { clock, apart });
   const best = answer.best ?? (stopped ? anyBlend(model, side) : null);
   const rival = second?.blend ?? null;
   const disagreements = [

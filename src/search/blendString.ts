@@ -6,6 +6,7 @@ import { bestBalance, chainOf, newBalancing, type SearchChain } from "./balancin
 import type { Brief } from "./brief.ts";
 import { type Candidate, prepare } from "./candidate.ts";
 import type { RefusedPart } from "./result.ts";
+import type { ShipmentTerms } from "./shipmentTerms.ts";
 import { leastSeries } from "./sweep.ts";
 
 /** How strings are bought: the brief's spares are had for every part used, and a line may cost something of its own. */
@@ -14,6 +15,8 @@ export interface BuyingTerms {
   readonly families: readonly ResistorFamily[];
   /** Charged once for every part that must be bought, whole minor units. */
   readonly lineCost: number;
+  /** Charged once for every supplier who sends anything; absent: nothing. */
+  readonly shipments?: ShipmentTerms;
 }
 
 export interface StringType {
@@ -31,6 +34,8 @@ export interface Resistors {
   readonly ties: Ties;
   /** Minor units; families without a price count nothing, and the result says so. */
   readonly cost: number;
+  /** The priced family of which some must be bought; null when none must. */
+  readonly from: ResistorFamily | null;
 }
 
 export type NoString = Omit<RefusedPart, "part">;
@@ -67,28 +72,35 @@ function elementsOf(chain: SearchChain, limit: number, family: ResistorFamily): 
 }
 
 /** Resistors of so many independent strings: the cheapest family that serves. */
-function inStrings({ series, elements, terms }: StringType, strings: number): number {
+function inStrings({ series, elements, terms }: StringType, strings: number): Omit<Resistors, "ties"> {
   let cost = Number.POSITIVE_INFINITY;
+  let from: ResistorFamily | null = null;
   terms.families.forEach((family, at) => {
     const each = elements[at]!;
-    if (each > 0 && isPriced(family) && cheapest(family, series * strings * each, bill))
-      cost = Math.min(cost, bill.cost);
+    if (each === 0 || !isPriced(family) || !cheapest(family, series * strings * each, bill) || bill.cost >= cost)
+      return;
+    cost = bill.cost;
+    from = bill.quantity > 0 ? family : null;
   });
-  return Number.isFinite(cost) ? cost : 0;
+  return { cost: Number.isFinite(cost) ? cost : 0, from };
 }
 
 /** The cheaper ties of so many strings; cross-tied when equal, as the ranking of layouts has it. */
 export function resistorsOf(type: StringType, strings: number): Resistors {
   const { series, candidate, terms } = type;
-  if (series === 1 || strings === 0) return { ties: "strings", cost: 0 };
+  if (series === 1 || strings === 0) return { ties: "strings", cost: 0, from: null };
   const apart = inStrings(type, strings);
-  if (strings === 1) return { ties: "strings", cost: apart };
+  if (strings === 1) return { ties: "strings", ...apart };
   const chain = chainOf(candidate, terms.brief) as SearchChain;
   chain.series = series;
   chain.sharing = strings;
-  if (!bestBalance(chain, candidate.limit, series, terms.families, balancing)) return { ties: "strings", cost: apart };
-  const tied = Number.isFinite(balancing.cost) ? balancing.cost : 0;
-  return tied <= apart ? { ties: "cross-tied", cost: tied } : { ties: "strings", cost: apart };
+  if (!bestBalance(chain, candidate.limit, series, terms.families, balancing)) return { ties: "strings", ...apart };
+  const priced = Number.isFinite(balancing.cost);
+  const tied = priced ? balancing.cost : 0;
+  if (tied > apart.cost) return { ties: "strings", ...apart };
+  const family = terms.families[balancing.family]!;
+  const bought = priced && cheapest(family, series * balancing.elements, bill) && bill.quantity > 0;
+  return { ties: "cross-tied", cost: tied, from: bought ? family : null };
 }
 
 /** Cheapest purchase for so many strings, minor units, or null when it cannot be had or has no price. */

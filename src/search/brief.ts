@@ -14,7 +14,7 @@ import {
   versionFault,
 } from "../quantity/index.ts";
 import { crossFaults } from "./briefFaults.ts";
-import { above, quantity, whole, word } from "./fields.ts";
+import { above, fromZero, quantity, whole, word, yesNo } from "./fields.ts";
 import { withLampDrive } from "./lampDrive.ts";
 import { limitKeys } from "./limitKeys.ts";
 import {
@@ -23,6 +23,7 @@ import {
   clampSchema,
   lifeSchema,
   loadSchema,
+  sectionSchema,
   spreadSchema,
   statedSchema,
   switchSchema,
@@ -104,6 +105,13 @@ export const briefSchema = z.strictObject({
   charger: chargerSchema.optional(),
   /** A resistor in series with each unit. */
   isolating: above("resistance").optional(),
+  /** Price of one such resistor, in the plan's currency. */
+  isolatingPrice: quantity("count", { least: 0, most: 1e9 }).optional(),
+  section: sectionSchema.optional(),
+  /** A fuse in series with each unit (each string): the cheapest of the fuse catalogue that does. */
+  fused: yesNo.optional(),
+  /** What a shorted unit itself still resists with. */
+  shortResistance: fromZero("resistance").optional(),
   life: lifeSchema.optional(),
   spread: spreadSchema.optional(),
   stated: statedSchema.optional(),
@@ -134,6 +142,7 @@ const KEYS_AT: Readonly<Record<string, readonly string[]>> = {
       bus: busSchema,
       clamp: clampSchema,
       charger: chargerSchema,
+      section: sectionSchema,
       life: lifeSchema,
       spread: spreadSchema,
       stated: statedSchema,

@@ -9,6 +9,8 @@ export interface CrossBrief {
   readonly bus?: BusBrief | undefined;
   readonly charger?: ChargerBrief | undefined;
   readonly life?: { readonly halving?: number | undefined; readonly reference?: number | undefined } | undefined;
+  readonly isolating?: number | undefined;
+  readonly isolatingPrice?: number | undefined;
   readonly rate?: number | undefined;
   readonly maxPeakCurrent?: unknown;
   readonly maxSlew?: unknown;
@@ -54,7 +56,32 @@ function loadFaults(load: LoadBrief, say: Say): void {
     say("missing-value", "load.current", "nothing", 'the steady current, "100 A"');
 }
 
+/** How the units hang on the bus: told whole or not at all. */
+function placeFaults({ shape, feed, pitch, stepResistance, stepInductance }: BusBrief, say: Say): void {
+  const steps = stepResistance !== undefined || stepInductance !== undefined;
+  if (feed === undefined) {
+    if (pitch !== undefined || steps)
+      say("missing-value", "bus.feed", "nothing", "where the load's leads join the units: end or centre");
+    return;
+  }
+  if (shape !== undefined) {
+    if (pitch === undefined)
+      say("missing-value", "bus.pitch", "nothing", 'a length from one unit to the next, such as "80 mm"');
+    if (steps)
+      say("contradiction", "bus.stepInductance", "beside a shape", "the pitch alone; the shape gives the rest");
+    return;
+  }
+  if (pitch !== undefined) say("contradiction", "bus.pitch", "no shape", "stepResistance and stepInductance");
+  for (const [key, value, example] of [
+    ["stepResistance", stepResistance, "50 uohm"],
+    ["stepInductance", stepInductance, "10 nH"],
+  ] as const)
+    if (value === undefined)
+      say("missing-value", `bus.${key}`, "nothing", `that of the bus from one unit to the next, "${example}"`);
+}
+
 function busFaults(bus: BusBrief, say: Say): void {
+  placeFaults(bus, say);
   const { shape, resistance, inductance } = bus;
   if (shape === undefined) {
     if (inductance === undefined) say("missing-value", "bus.inductance", "nothing", "an inductance, or a shape");
@@ -113,6 +140,8 @@ export function crossFaults(brief: CrossBrief, file?: string): readonly Refusal[
     const field = halving === undefined ? "life.halving" : "life.reference";
     say("missing-value", field, "nothing", "halving and reference together");
   }
+  if (brief.isolatingPrice !== undefined && brief.isolating === undefined)
+    say("missing-value", "isolating", "nothing", "the resistor that the price is of");
   limitFaults(brief, say);
   return faults;
 }

@@ -2,7 +2,7 @@
 
 import { requiredCapacitance } from "../bank/index.ts";
 import { type Capacitor, purchase } from "../catalog/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, power, tenTo } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { idOf } from "./rank.ts";
 import type { Change } from "./result.ts";
@@ -72,7 +72,7 @@ function safeSide(value: number, down: boolean): number {
 }
 
 /** Steps of the search for a voltage: 5 % up to a factor of four, then a quarter, up to a factor of about a thousand. */
-const ratioAt = (step: number): number => 1.05 ** Math.min(step, 28) * 1.25 ** Math.max(0, step - 28);
+const ratioAt = (step: number): number => power(1.05, Math.min(step, 28)) * power(1.25, Math.max(0, step - 28));
 
 /** A voltage that fits nearest to the wanted one, looked for each way. */
 function voltageChange(input: SweepInput): Change | null {
@@ -89,7 +89,7 @@ function voltageChange(input: SweepInput): Change | null {
 
 function energyChange(input: SweepInput): Change | null {
   for (let power = 1; power <= 9; power++) {
-    const change = edge(input, "energy", input.brief.energy, input.brief.energy * 10 ** -power);
+    const change = edge(input, "energy", input.brief.energy, input.brief.energy * tenTo(-power));
     if (change !== null) return change;
   }
   return null;
@@ -149,7 +149,7 @@ function ceilingChange(input: SweepInput, key: "maxCost" | "maxVolume" | "maxMas
   }
   if (best < 0) return null;
   const raw = column[best] as number;
-  const to = key === "maxCost" ? raw / 10 ** minorDigits(input.currency ?? "") : raw;
+  const to = key === "maxCost" ? raw / tenTo(minorDigits(input.currency ?? "")) : raw;
   return { field: key, from, to: safeSide(to, false), layout: idOf(table, input.parts, best), note: "" };
 }
 

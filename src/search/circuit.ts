@@ -5,6 +5,7 @@ import type { Capacitor } from "../catalog/index.ts";
 import {
   type BusGeometry,
   type BusPath,
+  type BusPlace,
   busOf,
   type Circuit,
   IDEAL_SWITCH,
@@ -13,6 +14,7 @@ import {
   pulseBankOf,
   RESISTIVITY,
   ringBus,
+  taperOf,
 } from "../pulse/index.ts";
 import { accepted, type Finding, type Read, refused } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
@@ -38,7 +40,7 @@ export function pulseBankFor(unit: Capacitor, { series, parallel, ties }: Shape)
         peakCurrent: unit.peakCurrent ?? null,
         slew: unit.slew ?? null,
         reversal: unit.reversal ?? null,
-        action: null,
+        action: unit.action ?? null,
       },
     },
   });
@@ -85,6 +87,8 @@ export interface BusFound {
   readonly frequency: number | null;
   readonly findings: readonly Finding[];
   readonly note: string | null;
+  /** How the units hang on it; null: not told. Its taper is counted in `path`. */
+  readonly place: BusPlace | null;
 }
 
 const COUNTED =
@@ -94,7 +98,7 @@ const COUNTED =
  * The bus. Without one, the load's own figures stand for the whole outer circuit when both were given; else the bus is
  * unknown, and every figure that it bears on is a bound.
  */
-function busFor(brief: Brief, bank: PulseBank, load: Load): Read<BusFound> {
+function runFor(brief: Brief, bank: PulseBank, load: Load): Read<Omit<BusFound, "place">> {
   const { bus, load: keys } = brief;
   const given = load.kind === "steady current" || load.kind === "recorded";
   if (bus === undefined) {
@@ -126,6 +130,44 @@ function busFor(brief: Brief, bank: PulseBank, load: Load): Read<BusFound> {
   return accepted({ path: found, frequency, findings: found.findings, note: null });
 }
 
+/** The piece of bus from one unit to the next, at the frequency of the run; null when the brief does not tell how units hang. */
+function placeFor({ bus }: Brief, run: Omit<BusFound, "place">): Read<BusPlace | null> {
+  if (bus?.feed === undefined) return accepted(null);
+  const { feed, pitch, stepResistance = 0, stepInductance = 0 } = bus;
+  const geometry = geometryOf(bus);
+  if (geometry === null || pitch === undefined)
+    return accepted({ feed, segment: { resistance: stepResistance, inductance: stepInductance } });
+  const step = busOf(
+    { ...geometry, length: pitch },
+    { resistivity: RESISTIVITY[bus.metal], frequency: run.frequency ?? 0 },
+  );
+  if (!step.ok) return step;
+  const { resistance, inductance } = step.value;
+  return accepted({ feed, segment: { resistance, inductance } });
+}
+
+/** The whole bus: the run to the first unit, and along the row of units what the loop sees of it. */
+function busFor(brief: Brief, bank: PulseBank, load: Load): Read<BusFound> {
+  const run = runFor(brief, bank, load);
+  if (!run.ok) return run;
+  const place = placeFor(brief, run.value);
+  if (!place.ok) return place;
+  const { path } = run.value;
+  if (place.value === null || path === null) return accepted({ ...run.value, place: null });
+  const taper = taperOf(bank.parallel, place.value);
+  const whole = {
+    resistance: path.resistance + taper.resistance,
+    inductance: path.inductance + taper.inductance,
+  };
+  return accepted({ ...run.value, path: whole, place: place.value });
+}
+
+/** The section inductance as the loop sees it: one to each unit that shares both ends with others, else one to each string. */
+function sectionOf({ section }: Brief, { series, parallel, ties }: PulseBank): number {
+  if (section === undefined) return 0;
+  return (section.inductance * (ties === "cross-tied" ? series : 1)) / parallel;
+}
+
 /** A circuit, and what was found about its bus. */
 export interface CircuitFound {
   readonly circuit: Circuit;
@@ -149,6 +191,8 @@ export function circuitOf(brief: Brief, bank: PulseBank): Read<CircuitFound> {
     switch: brief.switch ?? IDEAL_SWITCH,
     clamp: brief.clamp ?? null,
     isolating: ((brief.isolating ?? 0) * bank.series) / bank.parallel,
+    section: sectionOf(brief, bank),
+    place: bus.value.place,
   };
   return accepted({ circuit, bus: bus.value });
 }

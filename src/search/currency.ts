@@ -1,7 +1,7 @@
 // The currency of a plan, and the prices of parts and resistors brought into it by the brief's rates.
 
 import { isPriced, type PurchaseTerms } from "../catalog/index.ts";
-import { accepted, minorDigits, type Read, refused } from "../quantity/index.ts";
+import { accepted, minorDigits, type Read, refused, tenTo } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 
 /** Decimals in which a price without a currency was read. */
@@ -44,7 +44,7 @@ export function pricedIn<T extends PurchaseTerms>(
     if (!isPriced(thing) || thing.currency === currency) return thing;
     const { currency: own, price, priceBreaks } = thing;
     const rate = own === undefined ? 1 : (brief.exchange?.[own] ?? 1);
-    const factor = rate * 10 ** (minorDigits(currency) - (own === undefined ? PLAIN_DIGITS : minorDigits(own)));
+    const factor = rate * tenTo(minorDigits(currency) - (own === undefined ? PLAIN_DIGITS : minorDigits(own)));
     const breaks = priceBreaks?.map((step) => ({ from: step.from, price: step.price * factor }));
     return { ...thing, currency, price: price === undefined ? undefined : price * factor, priceBreaks: breaks };
   });

@@ -4,11 +4,13 @@ import type { Capacitor } from "../catalog/index.ts";
 import {
   type Circuit,
   type Corner,
+  type Discharge,
   dischargeOf,
   type Envelope,
   envelopeOf,
   type Figures,
   type Load,
+  type LoopSpread,
   type PulseBank,
   type Spread,
 } from "../pulse/index.ts";
@@ -42,13 +44,10 @@ function scaled(load: Load, resistance: number, inductance: number): Load {
   };
 }
 
-/**
- * The envelope. Spreads of resistance and inductance are those of the outer circuit; the bank's ESL spreads with the
- * inductance. A tolerance that is unknown spreads nothing, and the caller says so.
- */
-export function shotEnvelope({ brief, unit, shape, circuit, bank }: EnvelopeInput): Read<Envelope> {
+/** How far each part of the loop may lie from its nominal. ESR, resistance and inductance as factors. */
+export function spreadOf({ brief, unit, shape, bank }: EnvelopeInput): LoopSpread {
   const { esr = 0, resistance = 0, inductance = 0 } = brief.spread ?? {};
-  const spread = {
+  return {
     capacitance: {
       low: bankAt(unit, shape, "low").capacitance,
       nominal: bank.capacitance,
@@ -58,29 +57,44 @@ export function shotEnvelope({ brief, unit, shape, circuit, bank }: EnvelopeInpu
     inductance: about(1, inductance),
     resistance: about(1, resistance),
   };
-  const plain = circuit.load.kind !== "lamp" && circuit.clamp === null && circuit.switch.drop === 0;
-  const figures = (corner: Corner): Read<Figures> => {
-    const { bus } = circuit;
-    const shot = dischargeOf(
-      {
-        ...bank,
-        capacitance: corner.capacitance,
-        esr: bank.esr === null ? null : bank.esr * corner.esr,
-        esl: bank.esl === null ? null : bank.esl * corner.inductance,
+}
+
+/** Whether the loop has constant R, L and C only. */
+export const isLinear = ({ load, clamp, switch: sw }: Circuit): boolean =>
+  load.kind !== "lamp" && clamp === null && sw.drop === 0;
+
+/** The shot with every part at one place of its spread, shared by capacitance alone. */
+export function dischargeWith({ brief, circuit, bank }: EnvelopeInput, corner: Corner): Read<Discharge> {
+  const { bus } = circuit;
+  return dischargeOf(
+    {
+      ...bank,
+      capacitance: corner.capacitance,
+      esr: bank.esr === null ? null : bank.esr * corner.esr,
+      esl: bank.esl === null ? null : bank.esl * corner.inductance,
+    },
+    {
+      ...circuit,
+      place: null,
+      load: scaled(circuit.load, corner.resistance, corner.inductance),
+      bus: bus && {
+        resistance: bus.resistance * corner.resistance,
+        inductance: bus.inductance * corner.inductance,
       },
-      {
-        ...circuit,
-        load: scaled(circuit.load, corner.resistance, corner.inductance),
-        bus: bus && {
-          resistance: bus.resistance * corner.resistance,
-          inductance: bus.inductance * corner.inductance,
-        },
-      },
-      brief.voltage,
-    );
+    },
+    brief.voltage,
+  );
+}
+
+/**
+ * The envelope. Spreads of resistance and inductance are those of the outer circuit; the bank's ESL spreads with the
+ * inductance. A tolerance that is unknown spreads nothing, and the caller says so.
+ */
+export function shotEnvelope(input: EnvelopeInput): Read<Envelope> {
+  return envelopeOf(spreadOf(input), isLinear(input.circuit), (corner): Read<Figures> => {
+    const shot = dischargeWith(input, corner);
     if (!shot.ok) return shot;
     const { peakCurrent, peakTime, reversal, action } = shot.value;
     return accepted({ peakCurrent, peakTime, reversal, action });
-  };
-  return envelopeOf(spread, plain, figures);
+  });
 }

@@ -20,6 +20,14 @@ export const faultUnitOf = (unit: Capacitor): FaultUnit => ({
   esr: unit.esr ?? null,
   esl: unit.esl ?? null,
   ruptureEnergy: unit.ruptureEnergy ?? null,
+  action: unit.action ?? null,
+});
+
+/** What of the brief stands between a failed unit and the others, fuses apart. */
+export const guardsOf = ({ isolating, section, shortResistance }: Brief) => ({
+  isolatingResistance: isolating ?? null,
+  sectionInductance: section?.inductance ?? null,
+  shortResistance: shortResistance ?? null,
 });
 
 /** An assessed layout as the fault table wants it; what is unknown stays unknown. */
@@ -32,6 +40,7 @@ export function faultBankOf({ result, unit, brief }: FaultedBank): FaultBank {
     ties: result.ties,
     unit: faultUnitOf(unit),
     voltage,
+    ...guardsOf(brief),
     // Without the tolerance nothing less than the whole voltage bounds what one unit may see.
     worstCharging: share.charging ?? voltage,
     worstHolding: share.holding,

@@ -1,6 +1,6 @@
 // The readers of one value of the brief: a number in SI or text with a unit, a whole number, a word of a list.
 
-import { z } from "zod";
+import * as z from "zod";
 import { accepted, type Dimension, example, formatQuantity, nearestWord, parseQuantity } from "../quantity/index.ts";
 
 export interface Range {

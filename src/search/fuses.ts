@@ -1,11 +1,12 @@
 // A fuse for each unit (each string, for strings): the cheapest of a catalogue that lives through the shot and clears the fault.
 
-import { type Fuse as FuseRow, type Purchase, purchase } from "../catalog/index.ts";
-import { type Fault, type Fuse, faultTable, fuseFindings } from "../pulse/index.ts";
+import { type Capacitor, type Fuse as FuseRow, type Purchase, purchase } from "../catalog/index.ts";
+import { type Fuse, faultAction, fuseFindings, unitShortLoop } from "../pulse/index.ts";
 import type { Finding } from "../quantity/index.ts";
-import { faultBankOf } from "./faults.ts";
+import type { Brief } from "./brief.ts";
+import { faultBankOf, faultUnitOf, guardsOf } from "./faults.ts";
 import type { LayoutResult } from "./result.ts";
-import { type ShotInput, shotOf } from "./shot.ts";
+import { type Shape, shotCorner } from "./shotCorner.ts";
 
 /** A fuse row in the pulse layer's words; blank is unknown. */
 export const fuseOf = ({ melting, clearing, voltage }: FuseRow): Fuse => ({
@@ -63,27 +64,38 @@ export function chooseFuse(
   };
 }
 
-/** What each fuse sees, from the fault table's findings of a fuse without ratings. */
-export function fuseSees(faults: readonly Fault[]): FuseSees {
-  const findings = faults.flatMap((fault) => fault.findings);
-  const of = (id: string): number | null => findings.find((one) => one.id === id)?.value ?? null;
+/**
+ * What a fuse sees in one shape whose worst unit stands at `worst` V before a fault (not finite: unknown). The shot with every
+ * unit high and the worst share; without a load, or with sharing that no tolerance bounds, the normal action is unknown.
+ */
+export function fuseSeesAt(brief: Brief, unit: Capacitor, shape: Shape, worst: number): FuseSees {
+  const voltage = brief.voltage * (1 + brief.overshoot);
+  const before = Number.isFinite(worst) ? worst : voltage;
+  const shared = unit.tolerance !== undefined || shape.parallel === 1;
+  const shot = brief.load === undefined || !shared ? null : shotCorner(brief, unit, shape, "high");
+  const { series, parallel, ties } = shape;
+  const loop = unitShortLoop({
+    series,
+    parallel,
+    ties,
+    unit: faultUnitOf(unit),
+    voltage,
+    ...guardsOf(brief),
+    worstCharging: before,
+    worstHolding: null,
+  });
   return {
-    normalAction: of("pulse.fuse.lives"),
-    faultAction: of("pulse.fuse.clears"),
-    voltage: of("pulse.fuse.voltage"),
+    normalAction: shot?.ok ? shot.value.unit.action : null,
+    faultAction: faultAction(loop),
+    voltage: before,
   };
 }
 
-/** A fuse of which nothing is known, to ask the fault table what one would see. */
-const UNRATED: Fuse = { meltingAction: null, clearingAction: null, dcVoltage: null };
-
 /** The fuse for an assessed layout. Without a load in the brief the normal shot is unknown, and so no fuse can be chosen. */
-export function fittedFuse(input: ShotInput, rows: readonly FuseRow[]): FuseChoice {
-  const { layout, unit, brief } = input;
-  const asked = { ...input, fuse: UNRATED };
-  const shot = brief.load === undefined ? null : shotOf(asked);
-  const faults = shot?.ok
-    ? shot.value.faults
-    : faultTable({ ...faultBankOf({ result: layout, unit, brief }), fuse: UNRATED });
-  return chooseFuse(layout, rows, fuseSees(faults));
+export function fittedFuse(
+  { layout, unit, brief }: { readonly layout: LayoutResult; readonly unit: Capacitor; readonly brief: Brief },
+  rows: readonly FuseRow[],
+): FuseChoice {
+  const { worstCharging, worstHolding } = faultBankOf({ result: layout, unit, brief });
+  return chooseFuse(layout, rows, fuseSeesAt(brief, unit, layout, Math.max(worstCharging, worstHolding ?? 0)));
 }

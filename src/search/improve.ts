@@ -1,7 +1,7 @@
 // What to improve: what each cause eats of the margin, and what tightening it saves, by searching again with the tightened value.
 
 import { type Cause, marginCauses, requiredCapacitance } from "../bank/index.ts";
-import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
+import type { Capacitor, Fuse, ResistorFamily } from "../catalog/index.ts";
 import { toMajor } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { pricedIn } from "./currency.ts";
@@ -16,6 +16,8 @@ export interface ImproveInput {
   readonly brief: Brief;
   readonly families: readonly ResistorFamily[];
   readonly currency: string | null;
+  /** Fuses that the search chooses from; null or left out: no fuse catalogue. */
+  readonly fuses?: readonly Fuse[] | null;
 }
 
 /** Resistor tolerance that is tried: E96, the closest that is sold everywhere. */
@@ -141,7 +143,14 @@ function tighten(input: ImproveInput, cause: Cause): Tried | null {
 function bestOf({ result, unit, brief, currency, ...input }: ImproveInput): Found | null {
   const parts = pricedIn([unit], currency, brief);
   const families = pricedIn(input.families, currency, brief);
-  const { table } = sweep({ parts, families, brief, required: requiredCapacitance(brief), currency });
+  const { table } = sweep({
+    parts,
+    families,
+    brief,
+    required: requiredCapacitance(brief),
+    currency,
+    fuses: input.fuses ?? null,
+  });
   const kept = Array.from({ length: table.count }, (_, row) => row).filter((row) => {
     const plain = table.series[row] === 1 || table.parallel[row] === 1;
     return plain || tiesOf(table, row) === result.ties;

@@ -1,19 +1,30 @@
 // Finds and ranks layouts: the brief, the search, the front, and one arrangement assessed.
 export { type AssessInput, assess, type BalanceWish } from "./assess.ts";
+export type { Band, BandRow } from "./band.ts";
+export { assessBuiltBlend, type BuiltBlend } from "./blendAssess.ts";
+export type { BuiltGroup } from "./blendCost.ts";
+export { type BlendFault, blendFaults } from "./blendFaults.ts";
+export type { SolveApart } from "./blendProof.ts";
 export type {
+  BlendFront,
+  BlendLadder,
   BlendPlan,
   BlendResult,
   BlendString,
   CeilingWorth,
   EngineAnswer,
+  FrontName,
+  LimitedBlend,
   Loosen,
   NamedCertificate,
   PriceMove,
+  Shipment,
   WinningPrice,
   WorstShare,
 } from "./blendResult.ts";
+export { FRONT_NAMES } from "./blendResult.ts";
 export type { BlendInput } from "./blends.ts";
-export { planBlends } from "./blendsLoader.ts";
+export { planBlends, solveWholeHere } from "./blendsLoader.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";
 export { BUS_LENGTHS } from "./briefFaults.ts";
 export { unitLimit } from "./candidate.ts";
@@ -27,6 +38,7 @@ export { type LampReport, lampReport } from "./lampReport.ts";
 export type { LifeReport } from "./life.ts";
 export { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 export { type PlanInput, plan } from "./plan.ts";
+export { isProtected, sectionCount } from "./protection.ts";
 export { RANKINGS, type Ranking } from "./rank.ts";
 export type {
   Balance,
@@ -37,6 +49,7 @@ export type {
   Improvement,
   LayoutResult,
   PlanResult,
+  Protection,
   RefusedPart,
   Shares,
   Span,
@@ -48,5 +61,6 @@ export { type BankCorners, type CornerFact, cornersOf } from "./sharing/corners.
 export type { BalanceMends } from "./sharing/mends.ts";
 export { type ShareSpread, shareSpread } from "./sharing/shareSpread.ts";
 export type { WithoutBalance } from "./sharing/withoutBalance.ts";
+export type { ShipmentWish } from "./shipmentTerms.ts";
 export { type ShotInput, type ShotReport, shotOf } from "./shot.ts";
 export type { Judge } from "./sweepKinds.ts";

@@ -2,6 +2,7 @@
 
 import type { Capacitor } from "../catalog/index.ts";
 import { type Circuit, dischargeOf, type PulseBank } from "../pulse/index.ts";
+import { power } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { circuitOf, pulseBankFor } from "./circuit.ts";
 import type { LayoutResult } from "./result.ts";
@@ -40,7 +41,12 @@ function loopWith(
   const own = "inductance" in load ? { ...load, inductance: (load.inductance ?? 0) * factor } : load;
   return {
     bank: { ...bank, esl: bank.esl === null ? null : bank.esl * factor },
-    circuit: { ...circuit, load: own, bus: bus && { ...bus, inductance: bus.inductance * factor } },
+    circuit: {
+      ...circuit,
+      load: own,
+      section: (circuit.section ?? 0) * factor,
+      bus: bus && { ...bus, inductance: bus.inductance * factor },
+    },
   };
 }
 
@@ -55,16 +61,20 @@ export function inductanceSweep(
   const bank = pulseBankFor(unit, layout);
   const found = circuitOf(brief, bank);
   if (!found.ok) return null;
-  const { circuit } = found.value;
+  const circuit = { ...found.value.circuit, place: null };
   const { load, bus } = circuit;
   if (load.kind === "steady current" || load.kind === "recorded") return null;
-  const known = (bank.esl ?? 0) + (bus?.inductance ?? 0) + ("inductance" in load ? (load.inductance ?? 0) : 0);
+  const known =
+    (bank.esl ?? 0) +
+    (circuit.section ?? 0) +
+    (bus?.inductance ?? 0) +
+    ("inductance" in load ? (load.inductance ?? 0) : 0);
   const here = known > 0 ? known : null;
   const low = here === null ? USUAL.low : here / REACH;
   const high = here === null ? USUAL.high : here * REACH;
   const points: SweepPoint[] = [];
   for (let index = 0; index < count; index += 1) {
-    const inductance = low * (high / low) ** (index / (count - 1));
+    const inductance = low * power(high / low, index / (count - 1));
     const loop = loopWith(bank, circuit, { factor: here === null ? null : inductance / here, inductance });
     const shot = dischargeOf(loop.bank, loop.circuit, brief.voltage);
     if (!shot.ok) return null;

@@ -1,6 +1,6 @@
 // The limits that a brief may set on the shot and on a fault, each for the worst unit of the bank.
 
-import { z } from "zod";
+import * as z from "zod";
 import { type Dimension, example, parseQuantity } from "../quantity/index.ts";
 import { part, plain, quantity } from "./fields.ts";
 

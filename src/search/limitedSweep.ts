@@ -1,14 +1,15 @@
-// The search of one part when the brief limits its shot or its faults: every shape, and from the least parallel count on upward
+// The search of one part when the brief limits its shot or its faults, or asks for protection, whose cost then counts: every shape, and from the least parallel count on upward
 // until a shape keeps the limits, because more in parallel is what lowers a unit's current.
 //
 // Apart from the plain sweep, which is written for speed; a test holds the two together where no limit binds.
 
 import { chargingWorst, FIT, leastParallel } from "../bank/index.ts";
 import { type Capacitor, cheapest, toBuy } from "../catalog/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import { bestBalance, chainOf, newBalancing } from "./balancing.ts";
 import { type Candidate, prepare } from "./candidate.ts";
 import { type Broken, limitJudge } from "./limits.ts";
+import { isProtected, protectionCost, protectionOf } from "./protection.ts";
 import { type Judge, leastSeries, type Reason, type SweepInput } from "./sweepKinds.ts";
 import { type LayoutTable, pushRow } from "./table.ts";
 
@@ -67,8 +68,10 @@ export function sweepLimited(input: SweepInput, table: LayoutTable, judge: Judge
   const { brief, families, required, currency } = input;
   const limits = limitJudge(brief);
   const voltage = brief.voltage * (1 + brief.overshoot);
-  const minor = 10 ** minorDigits(currency ?? "");
+  const minor = tenTo(minorDigits(currency ?? ""));
   const balancing = newBalancing();
+  const guarded = isProtected(brief);
+  const stock = { fuses: input.fuses ?? null, currency };
   return (part) => {
     const unit = input.parts[part] as Capacitor;
     const candidate = prepare(unit, brief);
@@ -105,13 +108,18 @@ export function sweepLimited(input: SweepInput, table: LayoutTable, judge: Judge
         worst = Math.max(worst, balancing.worst);
         resistors = Number.isFinite(balancing.cost) ? balancing.cost : 0;
       }
-      const cost = bulk.cost + resistors;
+      const known = n === 1 || chain !== null ? worst : Number.POSITIVE_INFINITY;
+      const guards = guarded ? protectionOf(brief, { unit, series: n, parallel: p, ties, worst: known }, stock) : [];
+      if (typeof guards === "string") {
+        keep({ reason: "no-fuse", value: null, limit: null });
+        return guards === "more" ? "more" : "settled";
+      }
+      const cost = bulk.cost + resistors + protectionCost(guards);
       if (brief.maxCost !== undefined && over(cost / minor, brief.maxCost)) {
         const reason = Number.isFinite(cost) ? "cost-limit" : "price-unknown";
         keep({ reason, value: finiteOrNull(cost / minor), limit: brief.maxCost });
         return "settled";
       }
-      const known = n === 1 || chain !== null ? worst : Number.POSITIVE_INFINITY;
       const broken: Broken | null =
         limits === null ? null : limits({ unit, series: n, parallel: p, ties, worst: known });
       if (broken !== null) {

@@ -2,19 +2,23 @@
 
 import { FIT } from "../bank/index.ts";
 import type { Capacitor } from "../catalog/index.ts";
-import { atLeast, atMost, type Bound, unitShort, worstShare } from "../pulse/index.ts";
-import type { Finding } from "../quantity/index.ts";
+import { atLeast, atMost, type Bound, unitShort } from "../pulse/index.ts";
+import type { Finding, Read } from "../quantity/index.ts";
+import { pouredIntoShort } from "./blendPoured.ts";
+import { type Beside, besideShot, othersNominal } from "./blendShot.ts";
 import type { Brief } from "./brief.ts";
 import { chargeFor, firingOf } from "./charging.ts";
-import { faultUnitOf } from "./faults.ts";
+import { faultUnitOf, guardsOf } from "./faults.ts";
 import { lifeOf } from "./life.ts";
 import { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
-import { type Shape, type ShotCorner, shotCorner } from "./shotCorner.ts";
+import { type CornerName, type Shape, type ShotCorner, shotCorner } from "./shotCorner.ts";
 
 export interface LimitCase extends Shape {
   readonly unit: Capacitor;
   /** Highest voltage of any unit before a fault, V; not finite where it is unknown. */
   readonly worst: number;
+  /** The other groups, where the shape is one group of a blend. */
+  readonly beside?: Beside | undefined;
 }
 
 /** One limit and the figure it bears on. `stuck`: more in parallel does not lower the figure. */
@@ -51,17 +55,21 @@ const ratedLimit = (limit: RatedLimit, rating: number | undefined): number | nul
   limit.kind === "absolute" ? limit.value : rating === undefined ? null : limit.value * rating;
 
 /** The joules that the others pour into a shorted unit, as in the fault table. */
-function faultClaim(limit: number, { unit, worst, ...shape }: LimitCase, brief: Brief): LimitClaim {
+function faultClaim(limit: number, { unit, worst, beside, ...shape }: LimitCase, brief: Brief): LimitClaim {
   const voltage = brief.voltage * (1 + brief.overshoot);
   const known = Number.isFinite(worst);
   const bank = {
     ...shape,
     unit: faultUnitOf(unit),
     voltage,
+    ...guardsOf(brief),
     worstCharging: known ? worst : voltage,
     worstHolding: null,
   };
-  const value = known ? unitShort(bank).energyIntoUnit : null;
+  const own = known ? unitShort(bank).energyIntoUnit : null;
+  const others = beside === undefined ? 0 : othersNominal(beside);
+  const value =
+    own === null ? null : own + pouredIntoShort({ ...shape, capacitance: unit.capacitance, others, voltage });
   return { key: "maxFaultEnergy", value, limit, bound: "value", unit: "J", stuck: true };
 }
 
@@ -69,7 +77,7 @@ function faultClaim(limit: number, { unit, worst, ...shape }: LimitCase, brief: 
 function heatOf(brief: Brief, unit: Capacitor, high: ShotCorner) {
   const charge = chargeFor(brief, { capacitance: high.bank.capacitance, left: high.left });
   if (!charge.ok || charge.value === null) return null;
-  const shot = { action: high.action, seconds: 0, share: worstShare(high.bank) };
+  const shot = { action: high.action, seconds: 0, share: high.unit.actionShare };
   return firingOf(brief, high.bank, unit, { charge: charge.value, shot }).heating;
 }
 
@@ -84,12 +92,18 @@ export function limitClaims(brief: Brief, given: LimitCase): readonly LimitClaim
   if (brief.maxFaultEnergy !== undefined) claims.push(faultClaim(brief.maxFaultEnergy, given, brief));
   if (!LIMIT_KEYS.some((key) => key !== "maxFaultEnergy" && asked(key))) return claims;
   const ends = brief.basis === "nominal" ? (["nominal", "nominal"] as const) : (["low", "high"] as const);
-  const low = shotCorner(brief, unit, given, ends[0]);
-  const high = shotCorner(brief, unit, given, ends[1]);
+  const { beside } = given;
+  const at = (end: CornerName): Read<ShotCorner> =>
+    beside === undefined ? shotCorner(brief, unit, given, end) : besideShot(brief, given, beside);
+  const low = at(ends[0]);
+  const high = at(ends[1]);
   if (!low.ok || !high.ok) return null;
   // without the tolerance neither the worst unit's part of the current nor the corners are known
   const spread = unit.tolerance !== undefined || brief.basis === "nominal";
-  const shared = spread && (unit.tolerance !== undefined || given.parallel === 1);
+  const alone = given.parallel === 1 && beside === undefined;
+  const others = beside?.others ?? [];
+  const shared =
+    spread && (unit.tolerance !== undefined || alone) && others.every((one) => one.unit.tolerance !== undefined);
   const { bounds } = high.value;
   const claim = (key: LimitClaim["key"], figure: Omit<LimitClaim, "key" | "stuck">): void => {
     claims.push({ key, stuck: false, ...figure });
@@ -145,6 +159,17 @@ function brokenBy({ key, value, limit, bound, stuck }: LimitClaim): Broken | nul
   if (fits) return { reason: `${name}-unproven`, value, limit, stuck: true };
   const sure = bound === "value" || bound === (least ? "upper bound" : "lower bound");
   return { reason: sure ? `${name}-limit` : `${name}-unproven`, value, limit, stuck };
+}
+
+/** The first limit that is a part of a rating which the unit does not have: no shape of it can be proven to keep that. */
+export function unratedFor(brief: Brief, unit: Capacitor): Omit<Broken, "stuck"> | null {
+  const rated = [
+    ["maxPeakCurrent", unit.peakCurrent],
+    ["maxSlew", unit.slew],
+    ["maxRms", unit.rippleCurrent],
+  ] as const;
+  const lacking = rated.find(([key, rating]) => brief[key] !== undefined && ratedLimit(brief[key], rating) === null);
+  return lacking === undefined ? null : { reason: `${LIMIT_NAMES[lacking[0]]}-unknown`, value: null, limit: null };
 }
 
 /** True when the brief sets any of the limits. */

@@ -1,6 +1,6 @@
 // What hangs on the bank, as the brief says it: load, switch, bus, clamp, charger, and what is stated or known of them.
 
-import { z } from "zod";
+import * as z from "zod";
 import { above, fromZero, part, plain, quantity, whole, word, yesNo } from "./fields.ts";
 
 const FILL = { least: 0, most: 1e7, open: true } as const;
@@ -41,7 +41,10 @@ export const switchSchema = z.strictObject({
   oneWay: yesNo.default(false),
 });
 
-/** The bus, as measured (resistance, inductance) or by its shape, go and return together. */
+/**
+ * The bus, as measured (resistance, inductance) or by its shape, go and return together: the run from the load to the first
+ * unit. What lies along the row of units is told by `feed` with `pitch` or the two steps.
+ */
 export const busSchema = z.strictObject({
   resistance: fromZero("resistance").optional(),
   inductance: fromZero("inductance").optional(),
@@ -56,6 +59,13 @@ export const busSchema = z.strictObject({
   outer: above("length").optional(),
   wall: above("length").optional(),
   metal: word(["copper", "aluminium"]).default("copper"),
+  /** Where the load's leads join the row of units; without it their place on the bus is not counted. */
+  feed: word(["end", "centre"]).optional(),
+  /** From one unit (or string) to the next along a bus of this shape. */
+  pitch: above("length").optional(),
+  /** The same stretch of a bus of measured values, go and return together. */
+  stepResistance: fromZero("resistance").optional(),
+  stepInductance: fromZero("inductance").optional(),
 });
 
 /** A diode across the bank that blocks while the bank is the right way round. */
@@ -80,6 +90,12 @@ export const lifeSchema = z.strictObject({
   reversalExponent: plain({ least: 0, most: 40 }).optional(),
   halving: plain({ least: 1, most: 100 }).optional(),
   reference: quantity("temperature", { least: -60, most: 250 }).optional(),
+});
+
+/** An inductance in series with each unit of a stage, or with each string; price of one, in the plan's currency. */
+export const sectionSchema = z.strictObject({
+  inductance: above("inductance"),
+  price: quantity("count", { least: 0, most: 1e9 }).optional(),
 });
 
 /** How far ESR, and the loop's outer resistance and inductance, may lie from what is given; capacitance has its tolerance. */

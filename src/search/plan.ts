@@ -1,8 +1,8 @@
 // The front door: brief and parts to ranked layouts, their front, every refusal, and what would have to give way.
 
 import { leastParallel, requiredCapacitance } from "../bank/index.ts";
-import { type Capacitor, DEFAULT_FAMILY, type ResistorFamily } from "../catalog/index.ts";
-import { accepted, type Read } from "../quantity/index.ts";
+import { type Capacitor, DEFAULT_FAMILY, type Fuse, type ResistorFamily } from "../catalog/index.ts";
+import { accepted, type Read, refused } from "../quantity/index.ts";
 import { assess } from "./assess.ts";
 import type { Brief } from "./brief.ts";
 import { prepare } from "./candidate.ts";
@@ -24,6 +24,8 @@ export interface PlanInput {
   readonly parts: readonly Capacitor[];
   /** Default: the assumed family. */
   readonly families?: readonly ResistorFamily[];
+  /** Fuses to choose from where the brief asks for them. */
+  readonly fuses?: readonly Fuse[] | null;
   /** How many layouts are worked out in full; 0 for all. Default 20. */
   readonly limit?: number;
   readonly rank?: Ranking;
@@ -31,6 +33,8 @@ export interface PlanInput {
   readonly quick?: boolean;
   /** With the measured basis: whether the measured units, placed, share safely in a shape. */
   readonly judge?: Judge;
+  /** Called after each part: how many are done, of how many. */
+  readonly progress?: ((done: number, total: number) => void) | undefined;
   /** With the statistical basis: measured capacitances of the only part, F, at least LEAST_LOT; units are drawn from them. */
   readonly lot?: readonly number[];
 }
@@ -43,13 +47,28 @@ const SIEVED_FROM = 500;
 export function plan(input: PlanInput): Read<PlanResult> {
   const { brief, limit = 20, rank = "cost", quick = false } = input;
   const given = input.families ?? [DEFAULT_FAMILY];
-  const money = planCurrency(brief, input.parts, given);
+  if (brief.fused === true && !input.fuses?.length) {
+    const want = "a fuse catalogue to choose from; or leave the fuses out of the brief";
+    return refused({ code: "missing-value", place: { field: "fuses" }, read: "nothing", want });
+  }
+  const money = planCurrency(brief, input.fuses ? [...input.parts, ...input.fuses] : input.parts, given);
   if (!money.ok) return money;
   const currency = money.value;
   const parts = pricedIn(distinct(input.parts), currency, brief);
   const families = pricedIn(given, currency, brief);
   const required = requiredCapacitance(brief);
-  const work: SweepInput = { parts, families, brief, required, currency, judge: input.judge ?? null, lot: input.lot };
+  const fuses = input.fuses ? pricedIn(input.fuses, currency, brief) : null;
+  const work: SweepInput = {
+    parts,
+    families,
+    brief,
+    required,
+    currency,
+    fuses,
+    judge: input.judge ?? null,
+    progress: input.progress,
+    lot: input.lot,
+  };
   const wanted = parts.length >= SIEVED_FROM && limit > 0 && limit <= MOST_SIEVED ? { limit, rank } : null;
   const { table, count, refused: refusals } = sweep(work, { wanted });
   const rows = firstRows(table.count, limit, comparison(table, parts, rank));
@@ -99,9 +118,9 @@ function withMends(work: SweepInput, refusals: readonly RefusedPart[]): readonly
   });
 }
 
-function improveBest({ parts, brief, families, currency }: SweepInput, best: LayoutResult | undefined) {
+function improveBest({ parts, brief, families, currency, fuses = null }: SweepInput, best: LayoutResult | undefined) {
   const unit = best && parts.find(({ part }) => part === best.part);
-  return best && unit ? improve({ result: best, unit, brief, families, currency }) : null;
+  return best && unit ? improve({ result: best, unit, brief, families, currency, fuses }) : null;
 }
 
 /** What the same brief takes when every unit may be at its worst: the price of certainty. */
@@ -119,8 +138,8 @@ function layoutAt(work: SweepInput, table: LayoutTable, row: number): LayoutResu
     parallel: table.parallel[row] as number,
     ties: tiesOf(table, row),
   };
-  const { brief, families, currency, lot } = work;
-  return assess({ unit, layout, brief, families, currency, ...(lot === undefined ? {} : { lot }) });
+  const { brief, families, currency, fuses = null, lot } = work;
+  return assess({ unit, layout, brief, families, currency, fuses, ...(lot === undefined ? {} : { lot }) });
 }
 
 function notesOf(brief: Brief): readonly string[] {

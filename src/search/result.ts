@@ -44,9 +44,19 @@ export interface Balance {
   readonly assumed: boolean;
 }
 
+/** One kind of protection between a failed unit and the others; cost null when it has no price. */
+export interface Protection {
+  readonly kind: "fuse" | "isolating resistor" | "section inductance";
+  readonly item: string;
+  readonly count: number;
+  readonly cost: number | null;
+}
+
 export interface Cost {
   readonly capacitors: number | null;
   readonly resistors: number | null;
+  /** Fuses, isolating resistors and section inductances that the brief asks for; left out when it asks for none. */
+  readonly protection?: number | null;
   /** Sum of the priced lines. */
   readonly total: number;
   readonly currency: string;
@@ -69,6 +79,8 @@ export interface LayoutResult {
   readonly withoutBalance: WithoutBalance | null;
   readonly bleed: { readonly seconds: number | null; readonly toVoltage: number };
   readonly cost: Cost | null;
+  /** What the brief asks for between a failed unit and the others; left out when nothing. `cost` in the major unit. */
+  readonly protection?: readonly Protection[];
   /** m^3 in square packing without gaps; kg; null when sizes are unknown. Capacitors only. */
   readonly volume: number | null;
   readonly mass: number | null;

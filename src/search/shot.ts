@@ -17,11 +17,13 @@ import {
   rateFindings,
 } from "../pulse/index.ts";
 import { accepted, type Finding, type Read } from "../quantity/index.ts";
+import { type Band, shotBand } from "./band.ts";
 import type { Brief } from "./brief.ts";
 import { chargeFor, driftFor, firingOf, rippleFor } from "./charging.ts";
 import { type BusFound, circuitOf, pulseBankFor } from "./circuit.ts";
 import { shotEnvelope } from "./envelope.ts";
 import { faultBankOf } from "./faults.ts";
+import { fuseSeesAt } from "./fuses.ts";
 import { type LampReport, lampReport } from "./lampReport.ts";
 import { type LifeReport, lifeOf } from "./life.ts";
 import { limitFindings } from "./limits.ts";
@@ -43,6 +45,8 @@ export interface ShotReport {
   readonly discharge: Discharge;
   readonly bus: BusFound;
   readonly envelope: Envelope;
+  /** Current and voltage over time with everything that spreads; null when nothing does. */
+  readonly band: Band | null;
   readonly charge: Charge | null;
   /** Highest rate that the charger keeps up with, all units at their high capacitance, Hz. */
   readonly highestRate: number | null;
@@ -85,15 +89,18 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   const discharge = shot.value;
   const envelope = shotEnvelope({ brief, unit, shape: layout, circuit, bank });
   if (!envelope.ok) return envelope;
+  const band = shotBand({ brief, unit, shape: layout, circuit, bank });
+  if (!band.ok) return band;
   const left = Math.sqrt((2 * discharge.energy.left) / bank.capacitance);
   const charge = chargeFor(brief, { capacitance: bank.capacitance, left });
   const slowest = chargeFor(brief, { capacitance: layout.capacitance.high ?? bank.capacitance, left });
   if (!charge.ok) return charge;
   if (!slowest.ok) return slowest;
-  const fired = { action: discharge.action, seconds: discharge.duration, share: discharge.unit.share };
+  const fired = { action: discharge.action, seconds: discharge.duration, share: discharge.unit.actionShare };
   const { heating } = firingOf(brief, bank, unit, { charge: charge.value, shot: fired });
   const { highest } = firingOf(brief, bank, unit, { charge: slowest.value, shot: fired });
-  const own = bank.esl === null || circuit.bus === null ? null : bank.esl + circuit.bus.inductance;
+  const own =
+    bank.esl === null || circuit.bus === null ? null : bank.esl + (circuit.section ?? 0) + circuit.bus.inductance;
   const lamp = lampReport(brief, { capacitance: bank.capacitance, own });
   if (!lamp.ok) return lamp;
   const worst = worstVoltage(input);
@@ -102,11 +109,13 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   const faults = faultTable({
     ...faultBankOf({ result: layout, unit, brief }),
     fuse,
-    isolatingResistance: brief.isolating ?? null,
     bus: circuit.bus,
     shot: {
       peakCurrent: discharge.peakCurrent,
-      unitAction: discharge.unit.action,
+      unitAction:
+        fuse === null
+          ? discharge.unit.action
+          : fuseSeesAt(brief, unit, layout, worst ?? Number.POSITIVE_INFINITY).normalAction,
       unitHeat: discharge.unit.heat,
     },
     chargerHighest: brief.charger?.highest ?? brief.charger?.supply ?? null,
@@ -125,6 +134,7 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
     discharge,
     bus,
     envelope: envelope.value,
+    band: band.value,
     charge: charge.value,
     highestRate: highest,
     heating,

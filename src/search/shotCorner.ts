@@ -39,9 +39,12 @@ export function bankAt(unit: Capacitor, shape: Shape, corner: CornerName): Pulse
   return { ...bank, capacitance: bank.capacitance * factor };
 }
 
-/** Plain R, L and C, which the closed form has in one go. */
-const isPlain = ({ load, clamp, switch: sw }: Circuit): boolean =>
-  (load.kind === "resistor" || load.kind === "coil" || load.kind === "short") && clamp === null && sw.drop === 0;
+/** Plain R, L and C, shared by capacitance alone, which the closed form has in one go. */
+export const isPlain = ({ load, clamp, switch: sw, place = null }: Circuit): boolean =>
+  place === null &&
+  (load.kind === "resistor" || load.kind === "coil" || load.kind === "short") &&
+  clamp === null &&
+  sw.drop === 0;
 
 /** The shot at a corner. Refused as by `circuitOf` and `dischargeOf`. */
 export function shotCorner(brief: Brief, unit: Capacitor, shape: Shape, corner: CornerName): Read<ShotCorner> {
@@ -62,14 +65,14 @@ export function shotCorner(brief: Brief, unit: Capacitor, shape: Shape, corner: 
       left: Math.sqrt((2 * energy.left) / bank.capacitance),
     });
   }
-  const { load, bus, isolating = 0 } = circuit;
+  const { load, bus, isolating = 0, section = 0 } = circuit;
   const outer = {
     resistance: "resistance" in load ? (load.resistance ?? 0) : 0,
     inductance: "inductance" in load ? (load.inductance ?? 0) : 0,
   };
   const loop = {
     capacitance: bank.capacitance,
-    inductance: (bank.esl ?? 0) + (bus?.inductance ?? 0) + outer.inductance,
+    inductance: (bank.esl ?? 0) + section + (bus?.inductance ?? 0) + outer.inductance,
     resistance: (bank.esr ?? 0) + isolating + (bus?.resistance ?? 0) + outer.resistance + circuit.switch.resistance,
   };
   const peaks = peaksOf(loop, brief.voltage);

@@ -6,6 +6,7 @@ import type { Capacitor } from "../catalog/index.ts";
 import { frontRows } from "./front.ts";
 import { sweepLimited } from "./limitedSweep.ts";
 import { hasLimits } from "./limits.ts";
+import { isProtected } from "./protection.ts";
 import type { RefusedPart } from "./result.ts";
 import { riskJudge } from "./risk.ts";
 import { sieveOf, type Wanted } from "./sieve.ts";
@@ -41,10 +42,11 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
   const { parts, brief } = input;
   const table = newTable(Math.max(256, Math.min(parts.length, wanted === null ? 1 << 17 : FIRST_PARTS) * 32));
   const judge = input.judge ?? (brief.basis === "statistical" ? riskJudge(brief, input.lot) : null);
-  if (hasLimits(brief)) return sweepByLimits(input, table, judge);
+  if (hasLimits(brief) || isProtected(brief)) return sweepByLimits(input, { table, judge, stopAtFirst });
   const run: Run = { input, judge, table, sieve: null, count: 0 };
   const reasons: (Reason | null)[] = new Array(parts.length).fill(null);
   let stride = 1;
+  let done = 0;
   if (wanted !== null) while (parts.length / (stride * PASS) >= FIRST_PARTS) stride *= PASS;
   let sample: readonly number[] = [];
   for (let seen = 0; stride >= 1; seen = stride, stride /= PASS) {
@@ -59,6 +61,7 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
     for (let i = 0; i < parts.length; i += stride) {
       if (seen > 0 && i % seen === 0) continue;
       reasons[i] = sweepPart(run, i);
+      input.progress?.(++done, parts.length);
       if (stopAtFirst && run.count > 0) break;
     }
   }
@@ -70,12 +73,17 @@ export function sweep(input: SweepInput, { stopAtFirst = false, wanted = null }:
 }
 
 /** The search under limits on shot, fault and life: each layout is worked out in full. */
-function sweepByLimits(input: SweepInput, table: LayoutTable, judge: Judge): Sweep {
+function sweepByLimits(
+  input: SweepInput,
+  { table, judge, stopAtFirst }: { readonly table: LayoutTable; readonly judge: Judge; readonly stopAtFirst: boolean },
+): Sweep {
   const limited = sweepLimited(input, table, judge);
   const refused: RefusedPart[] = [];
   for (const [i, unit] of input.parts.entries()) {
     const reason = limited(i);
+    input.progress?.(i + 1, input.parts.length);
     if (reason !== null) refused.push({ part: unit.part, ...reason });
+    if (stopAtFirst && table.count > 0) break;
   }
   return { table, count: table.count, refused };
 }

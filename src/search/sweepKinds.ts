@@ -1,7 +1,7 @@
 // What the two ways of searching a part share: what goes in, why a part gives nothing, and the least series count.
 
 import { chargingWorst, FIT } from "../bank/index.ts";
-import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
+import type { Capacitor, Fuse, ResistorFamily } from "../catalog/index.ts";
 import type { Brief } from "./brief.ts";
 import type { RiskCase } from "./risk.ts";
 
@@ -11,8 +11,12 @@ export interface SweepInput {
   readonly brief: Brief;
   readonly required: number;
   readonly currency: string | null;
+  /** Fuses to choose from, in the plan's currency; null or left out: no fuse catalogue. */
+  readonly fuses?: readonly Fuse[] | null;
   /** Judges sharing while charging in place of the brief's risk. */
   readonly judge?: Judge;
+  /** Called after each part: how many are done, of how many. */
+  readonly progress?: ((done: number, total: number) => void) | undefined;
   /** F: the measured lot of the only part, which the statistical basis draws its units from. */
   readonly lot?: readonly number[] | undefined;
 }

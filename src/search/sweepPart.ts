@@ -2,7 +2,7 @@
 
 import { chargingWorst, FIT, leastParallel } from "../bank/index.ts";
 import { type Capacitor, cheapest, leastBuyable, toBuy } from "../catalog/index.ts";
-import { minorDigits } from "../quantity/index.ts";
+import { minorDigits, tenTo } from "../quantity/index.ts";
 import { bestBalance, chainOf, holdingFloor, newBalancing, type SearchChain, surelyBalances } from "./balancing.ts";
 import { type Candidate, prepare } from "./candidate.ts";
 import { mayMatter, remember, type Sieve } from "./sieve.ts";
@@ -29,7 +29,7 @@ export function sweepPart(run: Run, index: number): Reason | null {
   const unit = parts[index] as Capacitor;
   const candidate = prepare(unit, brief);
   const voltage = brief.voltage * (1 + brief.overshoot);
-  const minor = 10 ** minorDigits(currency ?? "");
+  const minor = tenTo(minorDigits(currency ?? ""));
   const worstSeries = leastSeries(voltage, candidate.limit, candidate.tolerance);
   const least = judge === null ? worstSeries : leastSeries(voltage, candidate.limit, null);
   if (least > brief.maxSeries) return { reason: "series-limit", value: least, limit: brief.maxSeries };

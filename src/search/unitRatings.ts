@@ -8,6 +8,7 @@ import { type Finding, formatQuantity } from "../quantity/index.ts";
 const GROWS: Readonly<Record<string, "peakCurrent" | "reversal" | "action">> = {
   "pulse.unit.current": "peakCurrent",
   "pulse.unit.slew": "peakCurrent",
+  "pulse.unit.action": "action",
   "pulse.unit.reversal": "reversal",
   "pulse.polarity": "reversal",
 };
@@ -37,19 +38,17 @@ function spared(finding: Finding, { unit, series, clampDrop }: Rated, voltage: n
   return { ...finding, verdict: "warn", note };
 }
 
-/** The discharge's findings, each value at the high end of its figure; no finding on a rating that no catalogue has. */
+/** The discharge's findings, each value at the high end of its figure. */
 export function unitRatingFindings(discharge: Discharge, of: Rated): readonly Finding[] {
   const { unit, envelope, parallel } = of;
   const voltage = Math.sqrt((2 * discharge.energy.stored) / (of.unit.capacitance * (of.parallel / of.series)));
   const alike = unit.tolerance === undefined && parallel > 1;
-  return discharge.findings
-    .filter(({ id }) => id !== "pulse.unit.action")
-    .map((finding) => {
-      const raised = spared(atEnd(finding, discharge, envelope), of, voltage);
-      if (!alike || !SHARED.includes(finding.id) || raised.verdict !== "pass") return raised;
-      const note = `${raised.note} The tolerance is unknown, so the worst unit may carry more.`;
-      return { ...raised, verdict: "not assessed", note };
-    });
+  return discharge.findings.map((finding) => {
+    const raised = spared(atEnd(finding, discharge, envelope), of, voltage);
+    if (!alike || !SHARED.includes(finding.id) || raised.verdict !== "pass") return raised;
+    const note = `${raised.note} The tolerance is unknown, so the worst unit may carry more.`;
+    return { ...raised, verdict: "not assessed", note };
+  });
 }
 
 /** The finding with its value at the high end of the envelope. */
@@ -60,7 +59,7 @@ function atEnd(finding: Finding, discharge: Discharge, envelope: Envelope): Find
   if (high === null || nominal === null || !(high > nominal)) return finding;
   const value = figure === "reversal" ? high : (finding.value * high) / nominal;
   const { id, state, limit, unit, source, note, verdict } = finding;
-  const bound = figure === "reversal" ? discharge.bounds.reversal : discharge.bounds.peakCurrent;
+  const bound = discharge.bounds[figure];
   const told = note.replace(/ \((?:upper|lower) bound\)$| \(side unknown\)$/, "");
   const judged = atMost({
     id,

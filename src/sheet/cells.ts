@@ -22,10 +22,3 @@ export const said = (value: Cell, missing = "not known"): string => value ?? mis
 /** Used part of a rating; null when either is unknown. */
 export const partOf = (value: number | null | undefined, rating: number | null | undefined): number | null =>
   value === null || value === undefined || !rating ? null : value / rating;
-
-/** m^2 as square millimetres, rounded up to three figures. */
-export function squareMillimetres(area: number): string {
-  const figures = Number((area * 1e6).toPrecision(3));
-  const safe = figures < area * 1e6 ? Number((area * 1e6 * 1.01).toPrecision(3)) : figures;
-  return `${safe} mm2`;
-}

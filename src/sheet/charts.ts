@@ -6,10 +6,11 @@ import { traceOf } from "../pulse/index.ts";
 import { formatMoney } from "../quantity/index.ts";
 import { cell, said, up } from "./cells.ts";
 import { type BleedCurve, costSteps } from "./draw/index.ts";
-import { factsOf, waysDown } from "./facts.ts";
+import { factsOf } from "./facts.ts";
 import type { SheetInput } from "./input.ts";
 import type { Drawing } from "./model.ts";
 import { positionWord } from "./names.ts";
+import { waysDown } from "./ways.ts";
 
 /** Worst voltages in each state, with the limit and the rating across. */
 export function voltageChart(input: SheetInput): Drawing {

@@ -7,12 +7,12 @@
  *   n R     chain            ohm   one whole balancing chain, at the high end of its tolerance; null without one
  *   -       chains           1     how many: one when cross-tied, one for each string
  *   Vs      clear            V     below it the governing rule is cleared for good
- *
- * Source: [methods-derived] 3.1 for the times.
+ * Source: [methods-derived] 3.1
  */
 
-import { bleedPaths, clearingOf, type RuleId, ruleOf } from "../hazard/index.ts";
+import { clearingOf, ruleOf } from "../hazard/index.ts";
 import type { SheetInput } from "./input.ts";
+import { toldRule } from "./rules.ts";
 
 export interface Facts {
   readonly voltage: number;
@@ -27,25 +27,19 @@ export interface Facts {
   readonly rule: string;
   /** J stored at V, C at its high end. */
   readonly stored: number | null;
-}
-
-/** The rule's name with where it stands: "NFPA 70E Article 360 (2021, 2024)". */
-export const ruleName = (id: RuleId): string => {
-  const { body, clause, edition } = ruleOf(id);
-  return [body, clause, edition === "" ? "" : `(${edition})`].filter((part) => part !== "").join(" ");
-};
-
-/** The name, and how far its text was read where that is not the whole way. */
-export function toldRule(id: RuleId): string {
-  const { tag } = ruleOf(id);
-  const read = { read: "", "second hand": ", second hand", memory: ", from memory: confirm against the text" }[tag];
-  return `${ruleName(id)}${read}`;
+  /** V that the charger reaches when it runs on, and J stored then; null when that is not known. */
+  readonly highest: number | null;
+  readonly ranOn: number | null;
 }
 
 export function factsOf({ layout, brief, rule }: SheetInput): Facts {
   const voltage = brief.voltage * (1 + brief.overshoot);
   const capacitance = layout.capacitance.high;
   const { balance, series } = layout;
+  const reached = brief.charger?.highest ?? brief.charger?.supply ?? null;
+  const highest = reached === null ? null : Math.max(reached, voltage);
+  const storedAt = (volts: number | null): number | null =>
+    capacitance === null || volts === null ? null : (capacitance * volts ** 2) / 2;
   const clearing = rule === null ? null : clearingOf(ruleOf(rule), capacitance ?? layout.capacitance.nominal);
   const own = brief.touchSafeRule
     ? `the brief's touch-safe voltage (${brief.touchSafeRule})`
@@ -59,33 +53,8 @@ export function factsOf({ layout, brief, rule }: SheetInput): Facts {
     clear: clearing?.voltage ?? brief.touchSafe,
     allowed: clearing?.seconds ?? null,
     rule: rule === null ? own : toldRule(rule),
-    stored: capacitance === null ? null : (capacitance * voltage ** 2) / 2,
+    stored: storedAt(voltage),
+    highest,
+    ranOn: storedAt(highest),
   };
-}
-
-/** Seconds from a voltage to another by each path alone; null where C is not known, or there is no such path. */
-export interface Ways {
-  readonly chains: number | null;
-  readonly oneOpen: number | null;
-  readonly dump: number | null;
-}
-
-export interface Fall {
-  readonly from: number;
-  readonly to: number;
-}
-
-/** `capacitance` and `chain` may stand in for the bank's own: those of a bank with a fault. */
-export function waysDown(facts: Pick<Facts, "capacitance" | "chain" | "chains" | "dump">, { from, to }: Fall): Ways {
-  const { capacitance, chain, chains, dump } = facts;
-  if (capacitance === null) return { chains: null, oneOpen: null, dump: null };
-  const paths = bleedPaths({
-    capacitance,
-    voltage: from,
-    safeVoltage: to,
-    chainResistance: chain ?? Number.POSITIVE_INFINITY,
-    chains,
-    ...(dump === null ? {} : { dump }),
-  });
-  return { chains: paths.chains, oneOpen: paths.oneOpen, dump: paths.dump };
 }

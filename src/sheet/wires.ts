@@ -1,22 +1,20 @@
 /*
  * The joints of a bank as its schematic has it, one row each: what is joined to what, and the conductor where it follows.
  *
- *   symbol  unit   meaning
- *   A       A^2 s  action integral of one shot through the conductor
- *   S       m^2    least area that one shot heats from 20 degC to 90 degC with no time to cool
+ *   symbol  unit  meaning
+ *   S       m^2   least section that carries the whole shot (order's own reckoning)
+ *   s       1     the worst unit's part of the bank's current
  *
- * Bars and the leads of switch and load carry the bank's action, a unit's leads its own share at worst. Charging, balancing and
- * dump leads carry little: their area is a matter of strength, and is left blank. 90 degC is an assumed limit (common practice, no
- * source: what ordinary insulation bears). Source: [IEC60949] adiabatic heating.
+ * Bars and the leads of switch and load carry the whole shot; a unit's leads s of it, so s S: heat goes with (current/section)^2.
+ * Charging, balancing and dump leads carry little: their section is a matter of strength, and is left blank.
+ * Source: [methods-derived] the scaling; the section as in the order.
  */
 
-import { leastArea } from "../pulse/index.ts";
-import type { ShotReport } from "../search/index.ts";
-import { squareMillimetres } from "./cells.ts";
+import { sectionWords } from "../order/index.ts";
 import { partNames } from "./draw/partNames.ts";
 import type { SchematicProps } from "./draw/schematicProps.ts";
 import type { Cell } from "./model.ts";
-import { barsOf, pointsOf, positionsOf, spotsOf, unitName } from "./names.ts";
+import { barsOf, pointsOf, positionsOf, type Spot, spotsOf, unitName } from "./names.ts";
 
 /** One joint. A terminal is written "C3.7 +"; a bar or point is one place. */
 export interface Wire {
@@ -25,23 +23,22 @@ export interface Wire {
   readonly conductor: Cell;
 }
 
-const RISE = { from: 293.15, to: 363.15 } as const;
-
-const copper = (action: number | null | undefined): Cell =>
-  action === null || action === undefined
-    ? null
-    : `copper, at least ${squareMillimetres(leastArea("copper", action, RISE))}`;
-
-/** What the bars are made of at least; null where no action integral is known. */
-export const barConductor = (shot: ShotReport | null): Cell => copper(shot?.discharge.action);
+/** Section that carries the whole shot, m^2, and the worst unit's part of the current; null without a shot. */
+export interface Carried {
+  readonly section: number;
+  readonly unitShare: number;
+}
 
 /** Every joint of the bank and of what hangs on it, in the order that it is wired. */
-export const wiresOf = (props: SchematicProps, shot: ShotReport | null): readonly Wire[] => [
-  ...unitWires(props, copper(shot?.discharge.unit.action)),
-  ...balanceWires(props),
-  ...clampWires(props),
-  ...outsideWires(props, barConductor(shot)),
-];
+export function wiresOf(props: SchematicProps, carried: Carried | null): readonly Wire[] {
+  const words = (part: number): Cell => (carried === null ? null : sectionWords(carried.section * part));
+  return [
+    ...unitWires(props, words(carried?.unitShare ?? 1)),
+    ...balanceWires(props),
+    ...clampWires(props),
+    ...outsideWires(props, words(1)),
+  ];
+}
 
 const joint = (from: string, to: string, conductor: Cell = null): Wire => ({ from, to, conductor });
 
@@ -52,30 +49,46 @@ function chain(from: string, parts: readonly string[], to: string, conductor: Ce
   return starts.map((start, i) => joint(start, ends[i] as string, conductor));
 }
 
+/** What stands between a unit's positive terminal and the point above it. */
+function partsAbove({ series, fuse, isolating }: SchematicProps, { group, place }: Spot): readonly string[] {
+  return [
+    ...(fuse?.at === "unit" ? [`F${group}.${place}`] : []),
+    ...(isolating === null ? [] : [`RI${group}.${place}`]),
+    ...(fuse?.at === "string" && place === series ? [`F${group}`] : []),
+  ];
+}
+
 /** From the negative point through unit, fuse and isolating resistor to the positive one. */
 function unitWires(props: SchematicProps, conductor: Cell): readonly Wire[] {
-  const { series, fuse, isolating } = props;
   return spotsOf(props).flatMap((spot) => {
     const { low, high } = pointsOf(props, spot);
     const name = unitName(spot);
-    const at = `${spot.group}.${spot.place}`;
-    const parts = [
-      ...(fuse?.at === "unit" ? [`F${at}`] : []),
-      ...(isolating === null ? [] : [`RI${at}`]),
-      ...(fuse?.at === "string" && spot.place === series ? [`F${spot.group}`] : []),
-    ];
-    return [joint(low, `${name} -`, conductor), ...chain(`${name} +`, parts, high, conductor)];
+    return [joint(low, `${name} -`, conductor), ...chain(`${name} +`, partsAbove(props, spot), high, conductor)];
   });
 }
 
+/**
+ * What stands across each stage or unit. In a string it goes to the unit's own terminals: joined outside the fuse or isolating
+ * resistor it would be cut off by the fuse that opens, and the unit would keep its charge.
+ */
+const acrossOf = (props: SchematicProps, letters: string): ReturnType<typeof positionsOf> => {
+  const spots = spotsOf(props);
+  return positionsOf(props, letters).map((position, i) => {
+    const spot = props.ties === "strings" ? spots[i] : undefined;
+    return spot !== undefined && partsAbove(props, spot).length > 0
+      ? { ...position, high: `${unitName(spot)} +` }
+      : position;
+  });
+};
+
 /** A position as a whole: its elements are joined end to end on their mount beforehand. */
 const balanceWires = (props: SchematicProps): readonly Wire[] =>
-  props.balance === null ? [] : positionsOf(props, "RB").flatMap(({ name, low, high }) => chain(low, [name], high));
+  props.balance === null ? [] : acrossOf(props, "RB").flatMap(({ name, low, high }) => chain(low, [name], high));
 
 /** Cathodes to the positive side. */
 function clampWires(props: SchematicProps): readonly Wire[] {
   if (!props.clamps.positions) return [];
-  return positionsOf(props, "DC").flatMap(({ name, low, high }) => [
+  return acrossOf(props, "DC").flatMap(({ name, low, high }) => [
     joint(low, `${name} anode`),
     joint(`${name} cathode`, high),
   ]);

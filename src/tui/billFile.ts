@@ -2,6 +2,7 @@
 import type { Files } from "../cli/index.ts";
 import { BILL_FORMATS, type Bill, type BillFormat, billText } from "../order/index.ts";
 import type { SaveAnswer } from "./ports.ts";
+import { saveText } from "./saveText.ts";
 
 /** Format by the file's ending; null for one that is not known. */
 export function formatOf(path: string): BillFormat | null {
@@ -14,12 +15,5 @@ export function saveBill(files: Pick<Files, "write">, bill: Bill, path: string, 
   if (format === null) {
     return { kind: "trouble", words: `the name must end in one of ${BILL_FORMATS.map((one) => `.${one}`).join(", ")}` };
   }
-  const written = files.write(path, billText(bill, format), replace);
-  if (written.ok) return { kind: "saved", path };
-  const [refusal] = written.refusals;
-  if (refusal?.code === "file-exists") return { kind: "exists", path };
-  return {
-    kind: "trouble",
-    words: `${(refusal?.code ?? "unknown").replaceAll("-", " ")}; needed: ${refusal?.want ?? ""}`,
-  };
+  return saveText(files, billText(bill, format), path, replace);
 }

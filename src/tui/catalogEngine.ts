@@ -1,6 +1,6 @@
 // The engine behind the screens: the search on one set of parts and resistors, each answer pure.
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
-import { cautionsOf } from "../cli/index.ts";
+import { cautionsOf, type Files } from "../cli/index.ts";
 import { cautionsFor, DEFERENCE } from "../hazard/index.ts";
 import { billOf } from "../order/index.ts";
 import { accepted } from "../quantity/index.ts";
@@ -13,13 +13,15 @@ import {
   improve,
   inductanceSweep,
   type LayoutResult,
+  type PlanResult,
   plan,
   planCurrency,
   readBrief,
   shareSpread,
   shotOf,
 } from "../search/index.ts";
-import type { Arrangement, EnginePort } from "./ports.ts";
+import { type Arrangement, type EnginePort, MOST_FRONT } from "./ports.ts";
+import { recordReader } from "./record.ts";
 
 /** Said on every copy of an order: the standing cautions, and to whom this program defers. */
 const BILL_CAUTIONS: readonly string[] = [...cautionsFor({}), ...DEFERENCE].map(({ short }) => short);
@@ -32,6 +34,8 @@ const SWEPT = 41;
 export interface Stock {
   readonly parts: readonly Capacitor[];
   readonly families: readonly ResistorFamily[];
+  /** Where the file of a recorded current is read; null or left out: such a load stays unread. */
+  readonly files?: Pick<Files, "read"> | null;
 }
 
 /** A layout's own name taken apart; the part may hold any text. */
@@ -49,7 +53,8 @@ export function arrangementNamed(id: string): Arrangement | null {
   };
 }
 
-export function catalogEngine({ parts, families }: Stock): EnginePort {
+export function catalogEngine({ parts, families, files = null }: Stock): EnginePort {
+  const recorded = files === null ? null : recordReader(files);
   const byName = new Map(parts.map((unit) => [unit.part, unit]));
   const currencyOf = (brief: Brief): string | null => {
     const read = planCurrency(brief, parts, families);
@@ -63,18 +68,32 @@ export function catalogEngine({ parts, families }: Stock): EnginePort {
     const unit = byName.get(part);
     return unit === undefined ? null : of(unit);
   };
-  return {
-    readBrief: (values) => readBrief(values),
-    plan: (brief, { rank, most, frontOnly, quick }) => {
-      const planned = plan({ brief, parts, families, limit: most, rank, quick });
-      if (!planned.ok || !frontOnly) return planned;
-      const given = new Map(planned.value.layouts.map((layout) => [layout.id, layout]));
-      const layouts = planned.value.front.map((id) => {
+  /** Layouts by their names, each worked out unless the plan has it so already. */
+  const inFull = (brief: Brief, planned: PlanResult, ids: readonly string[]): readonly LayoutResult[] => {
+    const given = new Map(planned.layouts.map((layout) => [layout.id, layout]));
+    return ids
+      .map((id) => {
         const named = arrangementNamed(id);
-        return given.get(id) ?? (named && assessed(brief, planned.value.currency, named));
-      });
-      return accepted({ ...planned.value, layouts: layouts.filter((layout) => layout !== null) });
+        return given.get(id) ?? (named && assessed(brief, planned.currency, named));
+      })
+      .filter((layout) => layout !== null);
+  };
+  return {
+    readBrief: (values) => {
+      const whole = recorded === null ? accepted(values) : recorded(values);
+      return whole.ok ? readBrief(whole.value) : whole;
     },
+    plan: (brief, { rank, most, frontOnly, quick, progress }) => {
+      const planned = plan({ brief, parts, families, limit: most, rank, quick, progress });
+      if (!planned.ok || !frontOnly) return planned;
+      return accepted({ ...planned.value, layouts: inFull(brief, planned.value, planned.value.front) });
+    },
+    front: (brief, planned) => inFull(brief, planned, planned.front.slice(0, MOST_FRONT)),
+    life: (brief, layout) =>
+      ofUnit(layout, (unit) => {
+        const report = brief.load === undefined ? null : shotOf({ layout, unit, brief });
+        return report?.ok ? report.value.life.ratio : null;
+      }),
     check: (brief, arrangement) => assessed(brief, currencyOf(brief), arrangement),
     bill: (brief, layout) => {
       const unit = byName.get(layout.part);

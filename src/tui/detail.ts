@@ -12,8 +12,13 @@ function textOf(value: object): string {
 }
 
 /** Names the brief and the chosen bank; null while none is chosen. */
-export const detailKey = ({ values, extra, chosen }: Pick<State, "values" | "extra" | "chosen">): string | null =>
-  chosen === null ? null : `${textOf(values)}\n${textOf(extra)}\n${textOf(chosen)}`;
+export const detailKey = ({
+  values,
+  extra,
+  chosen,
+  reads,
+}: Pick<State, "values" | "extra" | "chosen" | "reads">): string | null =>
+  chosen === null ? null : `${reads}\n${textOf(values)}\n${textOf(extra)}\n${textOf(chosen)}`;
 
 /** The pieces that hold for what is shown now; null when there are none. */
 export const detailsOf = (state: State): Details | null =>
@@ -27,6 +32,8 @@ export const wantsSpread = (state: State): boolean =>
 export function wantedPiece(state: State): Piece | null {
   const { answer, screen } = state;
   if (answer?.kind !== "planned" || state.asked !== state.answered || shownBank(state) === null) return null;
+  // What was stopped is not begun again by itself.
+  if (state.stopped === state.asked) return null;
   const wanted: readonly Piece[] =
     screen === "sharing"
       ? ["rest", "margin", ...(wantsSpread(state) ? (["spread"] as const) : [])]

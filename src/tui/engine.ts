@@ -1,18 +1,56 @@
 // Answers a state's question to the engine: reads the brief, plans, assesses what is pinned and chosen, and counts the order.
 
-import type { LayoutResult } from "../search/index.ts";
+import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
+import type { FrontPoint } from "./axes.ts";
 import { briefInput } from "./briefInput.ts";
-import type { EnginePort } from "./ports.ts";
+import type { EnginePort, PlanRequest } from "./ports.ts";
 import type { Answer, State } from "./state.ts";
 
-/** Beside the form only the first few are seen, and every key waits for them; the list itself is longer. */
-export const mostListed = (state: State): number => (state.screen === "brief" ? 50 : 200);
+/** Most layouts of a list. */
+export const MOST_LISTED = 200;
 
-export function answerFor(state: State, engine: EnginePort, quick: boolean): Answer {
+/** Beside the form only the first few are seen, and every key waits for them; the list itself is longer. */
+export const mostListed = (state: Pick<State, "screen">): number => (state.screen === "brief" ? 50 : MOST_LISTED);
+
+/** What of a state the engine is asked: plain data, fit to be sent to a thread. */
+export type Question = Pick<State, "values" | "extra" | "rank" | "frontOnly" | "chosen" | "pins" | "screen" | "map">;
+
+export const questionOf = ({ values, extra, rank, frontOnly, chosen, pins, screen, map }: State): Question => ({
+  values,
+  extra,
+  rank,
+  frontOnly,
+  chosen,
+  pins,
+  screen,
+  map,
+});
+
+/** The whole front, on the map alone; with lives when an axis shows them. */
+function frontFor({ screen, map }: Question, engine: EnginePort, brief: Brief, plan: PlanResult) {
+  if (screen !== "map") return null;
+  const lives = map.x === "life" || map.y === "life";
+  return engine
+    .front(brief, plan)
+    .map((layout): FrontPoint => ({ layout, life: lives ? engine.life(brief, layout) : null }));
+}
+
+export function answerFor(
+  state: Question,
+  engine: EnginePort,
+  quick: boolean,
+  progress?: PlanRequest["progress"],
+): Answer {
   const read = engine.readBrief(briefInput(state));
   if (!read.ok) return { kind: "refused", refusals: read.refusals };
   const brief = read.value;
-  const planned = engine.plan(brief, { rank: state.rank, most: mostListed(state), frontOnly: state.frontOnly, quick });
+  const planned = engine.plan(brief, {
+    rank: state.rank,
+    most: mostListed(state),
+    frontOnly: state.frontOnly,
+    quick,
+    progress,
+  });
   if (!planned.ok) return { kind: "refused", refusals: planned.refusals };
   const plan = planned.value;
   const assessed = (arrangement: State["chosen"]): LayoutResult | null =>
@@ -25,6 +63,7 @@ export function answerFor(state: State, engine: EnginePort, quick: boolean): Ans
     plan,
     pinned: state.pins.map(assessed),
     chosen,
+    front: frontFor(state, engine, brief, plan),
     bill: chosen === null ? null : engine.bill(brief, chosen),
   };
 }

@@ -32,6 +32,7 @@ export const FIELDS: readonly Field[] = [
   { key: "touchSafe", label: "Safe to touch below", dimension: "voltage", blank: "60 V" },
   { key: "load.resistance", label: "Load resistance", dimension: "resistance", blank: "such as 50 mohm" },
   { key: "load.inductance", label: "Load inductance", dimension: "inductance", blank: "such as 20 uH" },
+  { key: "load.recorded", label: "Recorded current", dimension: null, blank: "or a CSV file: time, current" },
   { key: "maxSeries", label: "Most in series", dimension: "count", blank: "40" },
   { key: "maxUnits", label: "Most units", dimension: "count", blank: "2000" },
   { key: "spares", label: "Spares", dimension: "count", blank: "none" },
@@ -52,6 +53,8 @@ export const valueIn = (brief: Brief, field: Field): unknown =>
 /** A value of the brief as text for the screen. */
 export function shownValue(field: Field, value: unknown): string {
   if (typeof value === "string") return value;
+  // a recorded current, read from the file that the field names
+  if (Array.isArray(value)) return `${value.length} samples`;
   if (typeof value !== "number") return "";
   if (field.key === "hold" && value === Number.POSITIVE_INFINITY) return "for ever";
   return field.dimension === null ? String(value) : formatQuantity(value, field.dimension);

@@ -1,6 +1,5 @@
 // The terminal screens: draws, takes keys, and reaches everything else through ports.
 
-export { catalogEngine, type Stock } from "./catalogEngine.ts";
 export type {
   Arrangement,
   EnginePort,

@@ -27,12 +27,24 @@ export const on =
 export const onBrief = on("brief");
 const hasChoices: Live = (state) => fieldAt(state.field).choices !== undefined;
 export const onChoice: Live = all(onBrief, hasChoices);
+/** A line of the screen of measured units is open: the name of a file, or the question whether to replace one. */
+const onUnitsLine: Live = (state) => on("units")(state) && state.units.typing !== null;
+export const typesUnits: Live = (state) => onUnitsLine(state) && !state.units.replace;
+export const asksUnits: Live = (state) => onUnitsLine(state) && state.units.replace;
+export const onUnits: Live = (state) => on("units")(state) && state.units.typing === null;
+export const placesUnits: Live = (state) => onUnits(state) && state.units.running !== null;
+export const hasUnits: Live = (state) =>
+  onUnits(state) && state.units.lot !== null && state.units.running === null && hasBank(state);
+export const hasPlaced: Live = (state) => onUnits(state) && state.units.placed !== null;
 /** Keys type: a field of the form, or the name of a file. */
-export const types: Live = (state) => asksName(state) || (onBrief(state) && !hasChoices(state));
+export const types: Live = (state) => asksName(state) || typesUnits(state) || (onBrief(state) && !hasChoices(state));
 /** Letters are keys, because nothing is typed here. */
-export const isFree: Live = (state) => isOpen(state) && state.screen !== "brief";
+export const isFree: Live = (state) => isOpen(state) && state.screen !== "brief" && !onUnitsLine(state);
 
 export const hasLayouts: Live = (state) => (planOf(state)?.layouts.length ?? 0) > 0;
+export const works: Live = (state) => isOpen(state) && state.work !== null;
+export const hasParts: Live = (state) => !state.showFaults && (state.catalogue?.parts.length ?? 0) > 0;
+export const hasTrail: Live = (state) => state.trail.length > 0;
 export const hasPins: Live = (state) => state.pins.length > 0;
 /** The spread is shown unasked on the statistical basis, and one in series has none. */
 export const mayAskSpread: Live = (state) => {

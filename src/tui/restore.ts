@@ -8,12 +8,13 @@ import { terminalLook } from "./terminal.ts";
 const USUAL = { columns: 80, rows: 24 };
 
 export function startState(ports: ScreenPorts): State {
-  const { stdin, stdout, env, ascii, stock, brief, briefFirst, extra } = ports;
+  const { stdin, stdout, env, ascii, ground, stock, brief, briefFirst, extra } = ports;
   const look = terminalLook({
     env,
     inputIsTerminal: stdin.isTTY === true,
     outputIsTerminal: stdout.isTTY === true,
     ...(ascii === undefined ? {} : { ascii }),
+    ...(ground === undefined ? {} : { ground }),
   });
   const fresh = initialState({
     columns: stdout.columns || USUAL.columns,

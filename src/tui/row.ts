@@ -45,7 +45,7 @@ export function drawRow(row: Row, columns: number, look: Look): string {
   const put = (piece: Piece): void => {
     if (used >= columns || piece.width === 0) return;
     const text = piece.width <= columns - used ? piece.text : cutText(piece.text, columns - used, mark);
-    out += styled(text, piece.style, look.colour);
+    out += styled(text, piece.style, look);
     used += textWidth(text);
     if (text !== piece.text) used = columns;
   };

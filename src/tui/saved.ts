@@ -1,9 +1,9 @@
 // The brief, the pins and where one was, as text to keep and back; text that cannot be trusted gives nothing.
 
-import { RANKINGS } from "../search/index.ts";
 import { FIELDS } from "./fields.ts";
 import { LONGEST_LINE } from "./line.ts";
 import type { Arrangement } from "./ports.ts";
+import { RANKS } from "./ranks.ts";
 import { MOST_PINS, SCREENS, type State } from "./state.ts";
 
 const VERSION = 1;
@@ -63,7 +63,7 @@ export function readSaved(text: string): SavedPart | null {
     extra: typeof extra === "object" && extra !== null && !Array.isArray(extra) ? { ...extra } : {},
     pins: pins.slice(0, MOST_PINS),
     chosen: arrangement(saved.chosen),
-    rank: oneOf(RANKINGS, saved.rank, "cost"),
+    rank: oneOf(RANKS, saved.rank, "cost"),
     frontOnly: saved.frontOnly === true,
     screen: oneOf(SCREENS, saved.screen, "brief"),
     selected: typeof saved.selected === "string" ? saved.selected : null,

@@ -1,5 +1,7 @@
 // Takes the terminal over and gives it back in every way of ending: quit, signal, hang-up, suspend, exception.
 
+import { MOUSE_OFF } from "./mouse.ts";
+
 /** What of a process is needed; `process` itself fits. */
 export interface ProcessPort {
   readonly pid: number;
@@ -33,7 +35,7 @@ export interface Session {
 /** Alternate screen, clear, hide the cursor, no autowrap, mark pastes. */
 export const ENTER = "\x1b[?1049h\x1b[2J\x1b[H\x1b[?25l\x1b[?7l\x1b[?2004h";
 /** The way back, in the other order; the plain style first, so that none leaks into the shell. */
-export const LEAVE = "\x1b[0m\x1b[?7h\x1b[?2004l\x1b[?25h\x1b[?1049l";
+export const LEAVE = `\x1b[0m${MOUSE_OFF}\x1b[?7h\x1b[?2004l\x1b[?25h\x1b[?1049l`;
 
 /** Status a shell reports for a death by this signal: 128 and its number. */
 const SIGNAL_STATUS: Readonly<Record<string, number>> = { SIGINT: 130, SIGQUIT: 131, SIGTERM: 143, SIGHUP: 129 };

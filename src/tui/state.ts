@@ -1,13 +1,33 @@
 // The whole state of the screens, and the two closed unions that change it and that it asks for.
+
+import type { Overrides } from "../catalog/index.ts";
 import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
-import type { Brief, LayoutResult, PlanResult, Ranking } from "../search/index.ts";
+import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
+import { FIRST_MAP, type FrontPoint, type MapView } from "./axes.ts";
+import type { Ground } from "./ground.ts";
 import type { Line, LineEdit } from "./line.ts";
-import type { Arrangement, Details, SaveAnswer, StockFacts } from "./ports.ts";
+import type { CatalogueFacts, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
 import type { Look } from "./terminal.ts";
+import { NO_UNITS, type UnitsEffect, type UnitsMessage, type UnitsState } from "./units/state.ts";
+import { type History, NO_HISTORY, type Tried, type Work } from "./work.ts";
 
-export const SCREENS = ["brief", "layouts", "compare", "bank", "sharing", "shot", "order"] as const;
-export type ScreenName = (typeof SCREENS)[number];
+/** The screens in their order, each with the key that goes there from anywhere. */
+export const SCREEN_KEYS = {
+  brief: "1",
+  layouts: "2",
+  compare: "3",
+  bank: "4",
+  sharing: "5",
+  shot: "6",
+  order: "7",
+  map: "8",
+  parts: "9",
+  units: "0",
+  trail: "t",
+} as const;
+export type ScreenName = keyof typeof SCREEN_KEYS;
+export const SCREENS = Object.keys(SCREEN_KEYS) as readonly ScreenName[];
 
 /** Most layouts side by side. */
 export const MOST_PINS = 4;
@@ -24,6 +44,8 @@ export type Answer =
       /** Pinned arrangements assessed under this brief; null where the catalogue has no such part. */
       readonly pinned: readonly (LayoutResult | null)[];
       readonly chosen: LayoutResult | null;
+      /** The front in full; null where it was not asked for. */
+      readonly front: readonly FrontPoint[] | null;
       readonly bill: Bill | null;
     };
 
@@ -33,39 +55,74 @@ export interface Notice {
 }
 
 /** The question for a file name; `replace` is set when the file named is there already. */
-export interface Prompt {
+interface FilePrompt {
+  readonly what: "order";
   readonly line: Line;
   readonly replace: boolean;
 }
 
-export interface State {
+/** The question for a value of a part. */
+interface ValuePrompt {
+  readonly what: "value";
+  readonly line: Line;
+  readonly replace: false;
+  readonly part: string;
+  readonly heading: string;
+}
+
+export type Prompt = FilePrompt | ValuePrompt;
+
+/** Long work under way. */
+export interface LongJob {
+  readonly words: string;
+  /** Part of it that is done, 0 to 1; null: not known. */
+  readonly done: number | null;
+  readonly secondsLeft: number | null;
+}
+
+export interface State extends Work {
   readonly columns: number;
   readonly rows: number;
   readonly look: Look;
   readonly stock: StockFacts;
+  /** Null until the catalogues are read. */
+  readonly words: SharedWords | null;
   readonly screen: ScreenName;
   readonly help: boolean;
-  /** Text of the brief's fields by key; a key that is absent is blank. */
-  readonly values: Readonly<Record<string, string>>;
-  /** What else the brief says, which the form has no field for. */
-  readonly extra: Readonly<Record<string, unknown>>;
+  /** Clicks and the wheel are taken; the terminal's own selecting then needs its own key, mostly Shift. */
+  readonly mouse: boolean;
+  readonly history: History;
+  /** Every brief that was tried, the oldest first. */
+  readonly trail: readonly Tried[];
+  /** The field whose typing gave the last of the trail. */
+  readonly trailTyping: string | null;
+  /** Place on the trail under the cursor, counted from its end; 0 is now. */
+  readonly trailBack: number;
+  readonly map: MapView;
+  /** The catalogues as they were understood; null until they are read. */
+  readonly catalogue: CatalogueFacts | null;
+  /** How often they were read: what was worked out on other values holds no more. */
+  readonly reads: number;
+  readonly partIndex: number;
+  readonly headingIndex: number;
+  /** Faults in place of parts. */
+  readonly showFaults: boolean;
+  /** The field under the caret, which is also the value in hand on the other screens. */
   readonly field: number;
   readonly caret: number;
-  readonly rank: Ranking;
-  /** Only layouts that no other beats in everything. */
-  readonly frontOnly: boolean;
   readonly answer: Answer | null;
   /** Number of the last question put to the engine, and of the last one answered. */
   readonly asked: number;
   readonly answered: number;
+  readonly work: LongJob | null;
+  /** The question whose answer was stopped; -1 for none. */
+  readonly stopped: number;
   /** Id of the layout under the cursor; the place in the list is derived from it. */
   readonly selected: string | null;
-  readonly pins: readonly Arrangement[];
   /** Column under the cursor on the comparison. */
   readonly column: number;
   /** Rows on which the pinned layouts agree are shown too. */
   readonly unfolded: boolean;
-  readonly chosen: Arrangement | null;
   /** What was worked out of the chosen bank for the screens that look closer; null before. */
   readonly details: Details | null;
   /** The spread of the worst unit is wanted on any basis. */
@@ -73,6 +130,7 @@ export interface State {
   /** First row shown of each screen that scrolls freely; cut to what there is when drawn. */
   readonly scroll: Readonly<Record<string, number>>;
   readonly prompt: Prompt | null;
+  readonly units: UnitsState;
   readonly notice: Notice | null;
   /** The catalogue is too large to look for least changes while one types. */
   readonly slow: boolean;
@@ -89,11 +147,19 @@ export type Message =
   | { readonly type: "choice"; readonly by: number }
   | { readonly type: "move"; readonly by: number | "first" | "last" | "page" | "pageBack" }
   | { readonly type: "column"; readonly by: number }
+  | { readonly type: "nudge"; readonly up: boolean; readonly coarse: boolean }
+  | { readonly type: "hand"; readonly by: 1 | -1 }
+  | { readonly type: "undo" }
+  | { readonly type: "redo" }
+  | { readonly type: "retry" }
+  | { readonly type: "axis"; readonly which: "x" | "y" }
+  | { readonly type: "table" }
   | { readonly type: "pin" }
   | { readonly type: "choose" }
   | { readonly type: "rank" }
   | { readonly type: "front" }
   | { readonly type: "fold" }
+  | { readonly type: "orderPins" }
   | { readonly type: "spread" }
   | { readonly type: "load" }
   | { readonly type: "detailed"; readonly details: Details }
@@ -101,12 +167,32 @@ export type Message =
   | { readonly type: "confirm" }
   | { readonly type: "cancel" }
   | { readonly type: "answered"; readonly asked: number; readonly answer: Answer; readonly slow: boolean }
+  | {
+      readonly type: "opened";
+      readonly stock: StockFacts;
+      readonly words: SharedWords;
+      readonly catalogue: CatalogueFacts;
+      readonly overrides: Overrides;
+    }
+  | { readonly type: "work"; readonly work: LongJob | null }
+  | { readonly type: "stop" }
+  | { readonly type: "ground"; readonly ground: Ground }
+  | { readonly type: "again" }
+  | { readonly type: "mouse" }
+  | { readonly type: "click"; readonly column: number; readonly row: number }
+  | { readonly type: "value" }
+  | { readonly type: "faults" }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
+  | { readonly type: "units"; readonly message: UnitsMessage }
   | { readonly type: "say"; readonly notice: Notice };
 
 export type Effect =
   | { readonly type: "ask"; readonly asked: number }
   | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
+  | { readonly type: "units"; readonly effect: UnitsEffect }
+  | { readonly type: "overrides"; readonly overrides: Overrides }
+  | { readonly type: "stop" }
+  | { readonly type: "mouse"; readonly on: boolean }
   | { readonly type: "quit" }
   | { readonly type: "suspend" }
   | { readonly type: "redraw" };
@@ -135,8 +221,21 @@ export interface Start {
 
 export const initialState = (start: Start): State => ({
   ...start,
+  words: null,
+  history: NO_HISTORY,
+  trail: [],
+  trailTyping: null,
+  trailBack: 0,
+  map: FIRST_MAP,
+  catalogue: null,
+  overrides: {},
+  reads: 0,
+  partIndex: 0,
+  headingIndex: 0,
+  showFaults: false,
   screen: "brief",
   help: false,
+  mouse: false,
   field: 0,
   caret: (start.values.energy ?? "").length,
   rank: "cost",
@@ -144,6 +243,8 @@ export const initialState = (start: Start): State => ({
   answer: null,
   asked: 0,
   answered: 0,
+  work: null,
+  stopped: -1,
   selected: null,
   pins: [],
   column: 0,
@@ -153,6 +254,7 @@ export const initialState = (start: Start): State => ({
   spread: false,
   scroll: {},
   prompt: null,
+  units: NO_UNITS,
   notice: null,
   slow: false,
 });

@@ -12,7 +12,8 @@ const UNSEEN = /[\p{Cc}\p{Cf}\p{Mn}\p{Me}\u115f\u1160\u3164\uffa0]/gu;
 const UNSURE =
   /[\p{Cs}\p{Co}\p{Cn}\p{Mc}\p{Emoji_Presentation}\u06de\u1161-\u11ff\u2630-\u2637\u268a-\u268f\u31e4-\u31ef\u3248-\u324f\u4dc0-\u4dff\ua960-\ua97f\ud7b0-\ud7ff\ufe10-\ufe19\u{10000}-\u{1ffff}]/gu;
 
-const PLAIN = /^[ -~]*$/;
+/** What nearly all rows are made of: the classes above are slow to be built, and the first frame needs none of them. */
+const PLAIN = /^[ -~±µ·×Ω…≤≥─│█\u2800-\u28ff]*$/;
 
 /**
  * Text fit to draw. Composed first (e and an acute accent become one character), so that few marks are lost.

@@ -6,6 +6,9 @@ import type { StyleName } from "./theme.ts";
 export const UNKNOWN = "unknown";
 export const NOT_ASSESSED = "not assessed";
 
+/** A whole number, thousands apart by commas. By hand: the runtime loads its tables of languages for it, and the first frame would wait. */
+export const grouped = (count: number): string => String(count).replace(/\B(?=(\d{3})+$)/g, ",");
+
 const DIGITS = 3;
 
 /** A value at three figures; `otherwise` for null. */

@@ -28,7 +28,9 @@ const WIDE: readonly (readonly [number, number])[] = [
   [0x30000, 0x3fffd],
 ];
 
-const isWideCode = (code: number): boolean => WIDE.some(([first, last]) => code >= first && code <= last);
+/** Between Hangul and the first radicals stand rules, blocks and braille, which nearly every row has. */
+const isWideCode = (code: number): boolean =>
+  code < 0x2e80 ? code <= 0x115f : WIDE.some(([first, last]) => code >= first && code <= last);
 
 /** Cells of one code point that text.ts lets through: 2 for East Asian wide characters, else 1. */
 export function cellsOf(char: string): 1 | 2 {

@@ -7,13 +7,7 @@ import { streamState, uniformFrom } from "../../src/bank/random.ts";
 import { exceedRisk } from "../../src/bank/tail.ts";
 import type { TailCase } from "../../src/bank/tailLaw.ts";
 import { type SimulatedChain, simulate, startSimulator } from "../bank/simulate.ts";
-
-export interface BenchRow {
-  readonly what: string;
-  readonly value: number;
-  /** What was promised of the value, as a limit and which side of it is good. */
-  readonly promise: { readonly limit: number; readonly good: "at least" | "at most" };
-}
+import { atLeast, atMost, type BenchRow } from "./row.ts";
 
 /** Best of several timings, s; interleaved by the caller where two are compared. */
 function seconds(work: () => unknown): number {
@@ -75,17 +69,17 @@ function tailRows(): readonly BenchRow[] {
     {
       what: `8s12p tail at ${exceed.toExponential(2)} (+-${((100 * error) / exceed).toFixed(2)} %) against Monte Carlo of equal standard error, times faster`,
       value: ((needed / BANKS) * tied) / tail,
-      promise: { limit: 1000, good: "at least" },
+      promise: atLeast(1000),
     },
     {
       what: "Monte Carlo 8s12p cross-tied against a bare loop of the same draws, times as long",
       value: tied / bare,
-      promise: { limit: 3, good: "at most" },
+      promise: atMost(3),
     },
     {
       what: "Monte Carlo 8s12p strings against a bare loop of the same draws, times as long",
       value: strings / bare,
-      promise: { limit: 3, good: "at most" },
+      promise: atMost(3),
     },
   ];
 }
@@ -131,7 +125,7 @@ async function courseRows(): Promise<readonly BenchRow[]> {
     rows.push({
       what: `20 stages at 1,000 instants against the circuit simulator ${name}, off by ${worst.toExponential(1)}, times faster`,
       value: theirs / mine,
-      promise: { limit: 200, good: "at least" },
+      promise: atLeast(200),
     });
   }
   return rows;

@@ -4,12 +4,7 @@ import { parse } from "csv-parse/sync";
 import { readCapacitors } from "../../src/catalog/index.ts";
 import { type Brief, plan, readBrief } from "../../src/search/index.ts";
 import { bigCatalogue } from "../support/bigCatalogue.ts";
-
-export interface BenchRow {
-  readonly what: string;
-  readonly value: number;
-  readonly promise: { readonly limit: number; readonly good: "at least" | "at most" };
-}
+import { atMost, type BenchRow } from "./row.ts";
 
 const brief = (over: object = {}): Brief => {
   const read = readBrief({ energy: "2.4 kJ", voltage: "2.2 kV", ripple: "100 %", ...over });
@@ -45,12 +40,12 @@ function largeRows(turns: number): readonly BenchRow[] {
     {
       what: "100,000 rows: reading, planning and ranking, times csv-parse alone",
       value: median(all),
-      promise: { limit: 3, good: "at most" },
+      promise: atMost(3),
     },
     {
       what: "100,000 rows: planning alone, times csv-parse alone",
       value: median(planning),
-      promise: { limit: 0.5, good: "at most" },
+      promise: atMost(0.5),
     },
   ];
 }
@@ -64,9 +59,10 @@ function changedField(): BenchRow {
     milliseconds(() => plan({ brief: brief({ energy: 2000 + 37 * k }), parts, quick: true })),
   );
   return {
-    what: "1,000 parts: one field changed, new ranked list, ms at the median",
+    what: "1,000 parts: one field changed, new ranked list, median",
     value: median(times),
-    promise: { limit: 16, good: "at most" },
+    unit: "ms",
+    promise: atMost(16),
   };
 }
 
@@ -82,7 +78,7 @@ function startUp(): BenchRow {
   return {
     what: "headless plan of the demo, times node with zod and commander loaded",
     value: median(ratios),
-    promise: { limit: 2, good: "at most" },
+    promise: atMost(2),
   };
 }
 

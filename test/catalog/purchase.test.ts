@@ -2,7 +2,7 @@
 
 import { describe, expect, test } from "vitest";
 import type { PurchaseTerms } from "../../src/catalog/capacitor.ts";
-import { cheapest, isPriced, leastBuyable, purchase, unitPriceAt } from "../../src/catalog/purchase.ts";
+import { breaksRise, cheapest, isPriced, leastBuyable, purchase, unitPriceAt } from "../../src/catalog/purchase.ts";
 import fc from "../support/property.ts";
 import { slowPurchase } from "../support/slowBank.ts";
 
@@ -144,4 +144,16 @@ describe("purchase(terms, needed)", () => {
       { numRuns: 500, seed: 6 },
     );
   });
+});
+
+test("breaksRise(terms): true where a larger quantity costs more a unit, from the price or from a break", () => {
+  const breaks = [
+    { from: 10, price: 90 },
+    { from: 50, price: 95 },
+  ];
+  expect(breaksRise({ price: 100, priceBreaks: breaks })).toBe(true);
+  expect(breaksRise({ price: 80, priceBreaks: breaks.slice(0, 1) })).toBe(true);
+  expect(breaksRise({ price: 100, priceBreaks: breaks.slice(0, 1) })).toBe(false);
+  expect(breaksRise({ priceBreaks: breaks.slice(1) })).toBe(false);
+  expect(breaksRise({})).toBe(false);
 });

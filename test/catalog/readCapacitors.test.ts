@@ -281,3 +281,14 @@ describe("readCapacitors(text, file): values not given", () => {
     expect(made.ok && made.value.faults.at(-1)?.code).toBe("more-faults");
   });
 });
+
+test("readCapacitors(text, file): the action of a shot under any of its names, in A2s or with a prefix; blank is unknown", () => {
+  for (const heading of ["action [A2s]", "I2t [A2s]", "i\u00b2t [A2s]", "Action integral [A2s]"]) {
+    const read = readCapacitors(`part,capacitance [uF],voltage [V],${heading}\na,1,10,250\nb,1,10,\n`, "c.csv");
+    if (!read.ok) throw new Error(heading);
+    expect(
+      read.value.parts.map(({ action }) => action),
+      heading,
+    ).toEqual([250, undefined]);
+  }
+});

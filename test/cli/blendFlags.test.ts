@@ -30,3 +30,23 @@ test("a flag of blends without --blend is refused by name", () => {
   expect(read).toMatchObject({ ok: false, refusals: [{ code: "missing-option", place: { field: "--within" } }] });
   expect([wantsBlend({}), wantsBlend({ blend: true }), wantsBlend({ explain: true })]).toEqual([false, true, true]);
 });
+
+test("--shipment-cost: one amount for all, by supplier, or both; nothing twice", () => {
+  const shipments = (text: string) => wish({ shipmentCost: text });
+  expect(shipments("6.50")).toEqual({ explain: false, shipments: { each: 6.5, named: {} } });
+  expect(shipments("North: 4.90; South & Co: 12; 0")).toEqual({
+    explain: false,
+    shipments: { each: 0, named: { North: 4.9, "South & Co": 12 } },
+  });
+  for (const bad of ["", "-1", "North", "North: ", ": 4", "1; 2", "North: 1; North: 2", "North: 1;"])
+    expect(shipments(bad), bad).toEqual(["--shipment-cost"]);
+});
+
+test("--front and --ladder: names once each, a fraction below one", () => {
+  expect(wish({ front: "volume, stress", ladder: "50 %" })).toMatchObject({
+    fronts: ["volume", "stress"],
+    ladder: 0.5,
+  });
+  for (const front of ["", "life", "volume,volume", "volume;mass"]) expect(wish({ front })).toEqual(["--front"]);
+  for (const ladder of ["0 %", "100 %", "much"]) expect(wish({ ladder })).toEqual(["--ladder"]);
+});

@@ -1,5 +1,14 @@
 import { expect, test } from "vitest";
-import { busWords, chargerWords, clampWords, limitWords, loadWords, switchWords } from "../../src/cli/circuitWords.ts";
+import {
+  busWords,
+  chargerWords,
+  clampWords,
+  isolatingWords,
+  limitWords,
+  loadWords,
+  sectionWords,
+  switchWords,
+} from "../../src/cli/circuitWords.ts";
 import { shotBrief } from "../support/shotBank.ts";
 
 test("loads in words", () => {
@@ -32,4 +41,16 @@ test("switch, bus, clamp, charger and limits; null where not given", () => {
   expect(limitWords(shotBrief({ maxPeakCurrent: "80 %", maxFaultEnergy: "50 J" }))).toBe(
     "peak 80 % of its rating, into a shorted unit 50 J",
   );
+});
+
+test("protection and the place on the bus in words", () => {
+  expect(isolatingWords(shotBrief())).toBeNull();
+  expect(isolatingWords(shotBrief({ isolating: "50 mohm", isolatingPrice: 1.2 }))).toBe("50 mohm, 1.2 each");
+  expect(sectionWords(shotBrief({ section: { inductance: "1 uH" } }))).toBe("1 µH");
+  const step = { stepResistance: "50 uohm", stepInductance: "10 nH" };
+  expect(busWords(shotBrief({ bus: { resistance: 0, inductance: 0, feed: "centre", ...step } }))).toMatch(
+    /fed at the centre, 50 µohm and 10 nH from unit to unit/,
+  );
+  const pair = { shape: "wire pair", length: "1 m", radius: "1 mm", spacing: "10 mm", feed: "end", pitch: "80 mm" };
+  expect(busWords(shotBrief({ bus: pair }))).toMatch(/fed at one end, pitch 80 mm$/);
 });

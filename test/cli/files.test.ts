@@ -203,3 +203,37 @@ describe("write(path, text, force)", () => {
     expect(left()).toEqual([]);
   });
 });
+
+describe("move(path, to)", () => {
+  test("another name for the same bytes, over what had it; a file that is not there is told", () => {
+    fs.writeFileSync(join(folder, "a"), Buffer.from([0xff, 0xfe, 0x00]));
+    fs.writeFileSync(join(folder, "b"), "old");
+    expect(files.move(join(folder, "a"), join(folder, "b"))).toEqual({ ok: true, value: join(folder, "b") });
+    expect([...fs.readFileSync(join(folder, "b"))]).toEqual([0xff, 0xfe, 0x00]);
+    expect(left()).toEqual(["b"]);
+    expect(codeOf(files.move(join(folder, "a"), join(folder, "c")))).toBe("no-such-file");
+  });
+});
+
+describe("watch(path, changed)", () => {
+  test("calls back after the file has changed, also by being replaced; not after it was stopped", async () => {
+    const path = join(folder, "a.csv");
+    fs.writeFileSync(path, "one");
+    let called = 0;
+    const stop = files.watch(path, () => {
+      called += 1;
+    });
+    const until = async (count: number): Promise<void> => {
+      for (let waited = 0; called < count && waited < 6000; waited += 50) await new Promise((go) => setTimeout(go, 50));
+      expect(called).toBe(count);
+    };
+    await new Promise((go) => setTimeout(go, 100));
+    fs.writeFileSync(join(folder, "b"), "another");
+    fs.renameSync(join(folder, "b"), path);
+    await until(1);
+    stop();
+    fs.writeFileSync(path, "a third time");
+    await new Promise((go) => setTimeout(go, 700));
+    expect(called).toBe(1);
+  }, 10_000);
+});

@@ -21,6 +21,8 @@ const REST: Readonly<Record<string, readonly string[]>> = {
   pulse: [...BANK, ...LAYOUT],
   order: [...BANK, ...LAYOUT],
   place: LOT,
+  sheet: [...BANK, ...LAYOUT],
+  labels: [...BANK, ...LAYOUT],
   commission: [at("catalogs/drawer.csv"), "--readings", at("catalogs/drawer.csv")],
 };
 /** Beside a free value, or told by the command only once all else is right. */

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { readGroups, readPins } from "../../src/cli/listInput.ts";
+import { readGroups, readPins, readRooms } from "../../src/cli/listInput.ts";
 import { fakePorts } from "../support/fakePorts.ts";
 
 const { files } = fakePorts({
@@ -22,6 +22,22 @@ describe("readPins(given, files)", () => {
   test("a row that cannot be read refuses the list", () => {
     expect(readPins(["bad.csv"], files)).toMatchObject({ ok: false, refusals: [{ place: { line: 2 } }] });
     expect(readPins(["none.csv"], files)).toMatchObject({ ok: false, refusals: [{ code: "no-such-file" }] });
+  });
+});
+
+describe("readRooms(given)", () => {
+  test("counted from 1; the group may hold anything", () => {
+    expect(readRooms(["3=snap-in", "1=a=b"])).toEqual({
+      ok: true,
+      value: [
+        { group: 2, takes: "snap-in" },
+        { group: 0, takes: "a=b" },
+      ],
+    });
+  });
+  test("anything else is refused", () => {
+    for (const text of ["snap-in", "snap-in=3", "3=", ""])
+      expect(readRooms([text])).toMatchObject({ ok: false, refusals: [{ place: { field: "--rooms" } }] });
   });
 });
 

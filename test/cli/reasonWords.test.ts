@@ -13,7 +13,7 @@ const limits = Object.values(LIMIT_NAMES).flatMap((name) =>
 
 describe("reasonWords(reason, currency)", () => {
   test("every reason of the search has words, and no other", () => {
-    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown|missing))|stock|balance|risk|no-shot)"/g);
+    const found = sweep.matchAll(/"([a-z]+(?:-(?:limit|unknown|missing))|stock|balance|risk|no-shot|no-fuse)"/g);
     const used = new Set([...[...found].map((match) => match[1] as string), ...limits]);
     expect(used.size).toBeGreaterThan(7);
     expect([...used].sort()).toEqual(Object.keys(REASONS).sort());

@@ -19,6 +19,23 @@ describe("shotBlocks(report, width)", () => {
     expect(text).not.toMatch(/clamp|isolating/);
   });
 
+  test("the place on the bus: why this unit, and how the others divide; none where it is not told", () => {
+    const brief = shotBrief({
+      load: { resistance: "20 mohm", inductance: "1 uH" },
+      bus: { resistance: 0, inductance: 0, feed: "end", stepResistance: "1 mohm", stepInductance: "50 nH" },
+    });
+    const unit = { ...FILM, esr: 0.02, esl: 4e-8 };
+    const shape = { series: 1, parallel: 4, ties: "strings" } as const;
+    const shot = shotOf({ layout: shotLayout(brief, shape, unit), unit, brief });
+    if (!shot.ok) throw new Error("the shot must be");
+    const text = shotBlocks(shot.value, 80).join("\n").replace(/\s+/g, " ");
+    expect(text).toMatch(/Position \d of 4 on a bus fed at one end: x \d\.\d+ by its place, x \d\.\d+ by the highest/);
+    expect(text).toMatch(
+      /along the bus alike units carry \S+ at position \d to \S+ at position \d of an even part; 1 mohm/,
+    );
+    expect(blocks()).not.toMatch(/along the bus/);
+  });
+
   test("unknown and without bound say so", () => {
     const bare = { ...FILM, esr: undefined, esl: undefined } as unknown as typeof FILM;
     expect(blocks({}, bare)).toMatch(/ESR unknown, ESL unknown/);

@@ -6,7 +6,7 @@ test("LINE_KINDS: every kind of line comes from some bank, and no bank gives ano
   const seen = new Set<string>();
   for (const ties of ["cross-tied", "strings"] as const)
     for (const kind of ["choose", "none"] as const) {
-      const brief = briefOf({ spares: 1, isolating: "0.1 ohm" });
+      const brief = briefOf({ spares: 1, isolating: "0.1 ohm", section: { inductance: "1 uH" } });
       const layout = bankOf({ brief, layout: { part: "x", series: 8, parallel: 2, ties }, balance: { kind } });
       const bill = billOf({ layout, unit: UNIT, families: FAMILIES, brief, currency: "EUR", cautions: [] });
       for (const line of bill.lines) seen.add(line.line);
@@ -14,6 +14,6 @@ test("LINE_KINDS: every kind of line comes from some bank, and no bank gives ano
         bill.lines.map((line) => LINE_KINDS.indexOf(line.line)).sort((a, b) => a - b),
       );
     }
-  // The last kind is what a builder adds.
-  expect([...seen, "own line"].sort()).toEqual([...LINE_KINDS].sort());
+  // A shipment stands on the bill of a blend (its own test); the last kind is what a builder adds.
+  expect([...seen, "shipment", "own line"].sort()).toEqual([...LINE_KINDS].sort());
 });

@@ -75,6 +75,6 @@ describe("billToCsv(bill)", () => {
     const rows = records(text);
     for (const row of rows) for (const cell of Object.values(row)) expect(/^[=+\-@\t\r]/.test(cell), cell).toBe(false);
     expect(rows[0]?.item).toBe(`'${hostile}`);
-    expect(rows[0]?.note).toMatch(/^'-2\+3\\u\{202e\}\\u\{7\} /);
+    expect(rows[0]?.note).toMatch(/^'-2\+3\\u\{202e\}\\u\{7\}\. /);
   });
 });

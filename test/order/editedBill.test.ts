@@ -2,7 +2,9 @@ import { parse } from "csv-parse/sync";
 import { describe, expect, test } from "vitest";
 import type { Layout } from "../../src/bank/index.ts";
 import { type Bill, billOf, billText, readEditedBill, withEdits } from "../../src/order/index.ts";
+import { BUILDERS_COLUMNS } from "../../src/order/marks.ts";
 import { bankOf, briefOf, FAMILIES, UNIT } from "../support/bank.ts";
+import fc from "../support/property.ts";
 
 const EUR = { currency: "EUR" };
 const made = (
@@ -106,6 +108,54 @@ describe("withEdits(bill, edited, money)", () => {
       surplus: 7,
       purchase: 42,
       consumed: 27.3,
+    });
+  });
+
+  test("what was chosen for another demand is kept, and to be checked again; what was left alone is made anew in silence", () => {
+    const copy = edit(made(), (rows) =>
+      at(rows, "dump relay", { value: "2.5 kV, normally closed", "unit price": "80" }),
+    );
+    const now = made();
+    const lines = now.lines.map((line) => ({ ...line, rating: line.rating.replaceAll("2 kV", "3 kV") }));
+    const bill = joined({ ...now, lines }, copy);
+    expect(lineOf(bill, "dump relay")).toMatchObject({
+      value: "2.5 kV, normally closed",
+      rating: "at least 3 kV dc",
+      purchase: 80,
+    });
+    expect(bill.changes?.filter(({ kind }) => kind === "check again")).toEqual([
+      expect.objectContaining({
+        line: "dump relay",
+        heading: "rating",
+        made: "at least 3 kV dc",
+        read: "at least 2 kV dc",
+      }),
+    ]);
+  });
+
+  test("a price that was written beside another part is not taken over, and that is told; a note is kept", () => {
+    const copy = edit(made(), (rows) =>
+      at(rows, "units", { "unit price": "2.10", "order code": "Z-9", note: "ask Ada" }),
+    );
+    const now = made({ price: 300 });
+    const lines = now.lines.map((line) => (line.line === "units" ? { ...line, item: "another-1000-400" } : line));
+    const bill = joined({ ...now, lines }, copy);
+    expect(lineOf(bill, "units")).toMatchObject({
+      item: "another-1000-400",
+      unitPrice: 3,
+      orderCode: "X-1",
+      note: "ask Ada",
+    });
+    expect(told(bill)).toEqual([
+      ["not taken over", "units", "unit price"],
+      ["not taken over", "units", "order code"],
+      ["kept", "units", "note"],
+    ]);
+    // With the part named by the builder the row is the builder's.
+    const named = edit(made(), (rows) => at(rows, "units", { item: "surplus-1000-400", "unit price": "2.10" }));
+    expect(lineOf(joined({ ...now, lines }, named), "units")).toMatchObject({
+      item: "surplus-1000-400",
+      unitPrice: 2.1,
     });
   });
 
@@ -235,4 +285,84 @@ describe("totals, from the CSV alone", () => {
       ]);
     },
   );
+});
+
+describe("any edit", () => {
+  const fresh = made();
+  const kinds = fresh.lines.map(({ line }) => line);
+  const texts: Readonly<Record<string, fc.Arbitrary<string>>> = {
+    number: fc.integer({ min: 1, max: 9999 }).map(String),
+    money: fc.integer({ min: 0, max: 99_999 }).map((cents) => (cents / 100).toFixed(2)),
+    text: fc.constantFrom("M6 ring", "=1+1", "<b>", "a;b", 'say "x"', "ü, ö", "12", "-", "@x", "to be bought"),
+    currency: fc.constant("EUR"),
+  };
+  const edits = fc.array(
+    fc
+      .record({ kind: fc.constantFrom(...kinds), column: fc.constantFrom(...BUILDERS_COLUMNS) })
+      .chain(({ kind, column }) =>
+        (texts[column.key === "currency" ? "currency" : column.kind] as fc.Arbitrary<string>).map((text) => ({
+          kind,
+          column,
+          text,
+        })),
+      ),
+    { minLength: 1, maxLength: 5 },
+  );
+
+  test("is in the new bill as it was written, costs what its cells say, and stays when read again", () => {
+    fc.assert(
+      fc.property(edits, (list) => {
+        const copy = edit(fresh, (rows) =>
+          list.reduce((now, { kind, column, text }) => at(now, kind, { [column.heading]: text }), rows),
+        );
+        const bill = joined(fresh, copy);
+        const last = new Map(list.map((one) => [`${one.kind} ${one.column.key}`, one]));
+        for (const { kind, column, text } of last.values()) {
+          const cell = lineOf(bill, kind)?.[column.key];
+          expect(column.kind === "text" ? cell : Number(cell)).toBe(column.kind === "text" ? text : Number(text));
+        }
+        const untouched = kinds.filter((kind) => !list.some((one) => one.kind === kind));
+        for (const kind of untouched)
+          expect({ ...lineOf(bill, kind), extra: undefined }).toEqual({ ...lineOf(fresh, kind), extra: undefined });
+        const cents = bill.lines.reduce((sum, { purchase }) => sum + Math.round((purchase ?? 0) * 100), 0);
+        expect(Math.round((bill.totals.purchase ?? Number.NaN) * 100)).toBe(cents);
+        const written = billText(bill, "csv");
+        expect(billText(joined(fresh, written), "csv")).toBe(written);
+      }),
+      { numRuns: 60 },
+    );
+  });
+
+  test("payloads in own headings, own lines and cells end no cell, start no tag and run nowhere", () => {
+    const payloads = [
+      "=cmd|'/C calc'!A0",
+      "<script>alert(1)</script>",
+      "a|b`c`",
+      "[x](https://y)",
+      "\u202etxt",
+      "+1",
+      "]]>--><svg onload=x>",
+    ];
+    for (const payload of payloads) {
+      const copy = edit(fresh, (rows) => [
+        ...at(rows, "lugs", { note: payload, supplier: payload }).map((row) => ({
+          ...row,
+          [`own ${payload}`]: payload,
+        })),
+        { item: payload, line: "own line", "quantity needed": "1" },
+      ]);
+      const bill = joined(fresh, copy);
+      expect(bill.lines.at(-1)?.line).toBe("own line");
+      expect(billText(bill, "html")).not.toMatch(/<(script|svg)|\u202e/);
+      const markdown = billText(bill, "md");
+      const widths = markdown
+        .split("\n")
+        .filter((line) => line.startsWith("|"))
+        .map((line) => line.replace(/\\\|/g, "").split("|").length);
+      expect(new Set(widths).size).toBe(1);
+      expect(markdown).not.toMatch(/<(script|svg)|\]\(https:/);
+      for (const row of parse(billText(bill, "csv"), { columns: false }) as string[][])
+        for (const cell of row) expect(cell).not.toMatch(/^[=+\-@\t\r]/);
+    }
+  });
 });

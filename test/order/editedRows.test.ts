@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { BILL_COLUMNS, billOf, billText, readEditedBill } from "../../src/order/index.ts";
 import { bankOf, briefOf, FAMILIES, UNIT } from "../support/bank.ts";
+import fc from "../support/property.ts";
 
 const brief = briefOf();
 const CSV = billText(
@@ -80,5 +81,60 @@ describe("readEditedBill(text, file)", () => {
       ok: true,
       value: { extraHeadings: ["who buys", "shelf"], rows: [{ extra: ["me", "3"] }] },
     });
+  });
+});
+
+describe("readEditedBill(text, file), mutated", () => {
+  const MARKS = [
+    ",",
+    ";",
+    "\t",
+    '"',
+    "\n",
+    "\r",
+    "'",
+    "=",
+    "0",
+    "-1",
+    "1e309",
+    "NaN",
+    "\u202e",
+    "\u0000",
+    "v2.",
+    "€",
+    "lugs",
+    "sum",
+    "",
+  ];
+  const cut = fc.record({ at: fc.nat(CSV.length), drop: fc.nat(40), put: fc.constantFrom(...MARKS) });
+
+  test("whatever is cut and put: no throw, every refusal names the file, every row taken is a row of the file with values of its kind", () => {
+    fc.assert(
+      fc.property(fc.array(cut, { minLength: 1, maxLength: 6 }), (cuts) => {
+        let text = CSV;
+        for (const { at, drop, put } of cuts) text = text.slice(0, at) + put + text.slice(at + drop);
+        const read = readEditedBill(text, "bill.csv");
+        if (!read.ok) {
+          expect(read.refusals.length).toBeGreaterThan(0);
+          for (const { code, place } of read.refusals) {
+            expect(place.file, code).toBe("bill.csv");
+            if (!["empty-file", "binary-file"].includes(code)) expect(place.line, code).toBeGreaterThan(0);
+          }
+          return;
+        }
+        const lines = text.split(/\r\n|\n|\r/).length;
+        // One claim a reading: thousands of them would be slow.
+        const odd = read.value.rows.filter(
+          (row) =>
+            row.at > lines ||
+            BILL_COLUMNS.some(({ key, kind }) => {
+              const value = row.cells.get(key)?.value ?? null;
+              return value !== null && (kind === "text" ? typeof value !== "string" : !((value as number) >= 0));
+            }),
+        );
+        expect(odd).toEqual([]);
+      }),
+      { numRuns: 120 },
+    );
   });
 });

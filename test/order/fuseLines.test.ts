@@ -30,6 +30,12 @@ describe("fuseLines(layout, choice)", () => {
 });
 
 test("isolatingLines(layout, brief): one to a unit, none when not asked", () => {
-  expect(isolatingLines(layout, brief)).toMatchObject([{ needed: 4, value: "100 mohm", state: "to be chosen" }]);
-  expect(isolatingLines(layout, shotBrief())).toEqual([]);
+  expect(isolatingLines(layout, brief, "EUR")).toMatchObject([{ needed: 4, value: "100 mohm", state: "to be chosen" }]);
+  const priced = shotBrief({ isolating: "0.1 ohm", isolatingPrice: 2.5, section: { inductance: "1 uH", price: 4 } });
+  expect(isolatingLines(layout, priced, "EUR")).toMatchObject([
+    { line: "isolating resistors", needed: 4, unitPrice: 2.5, purchase: 10, state: "priced" },
+    { line: "section inductances", needed: 4, unitPrice: 4, purchase: 16, state: "priced" },
+  ]);
+  expect(isolatingLines(layout, priced, null)[0]).toMatchObject({ purchase: null, state: "to be chosen" });
+  expect(isolatingLines(layout, shotBrief(), "EUR")).toEqual([]);
 });

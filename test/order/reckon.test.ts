@@ -1,6 +1,7 @@
 import { describe, expect, test } from "vitest";
 import { toBeChosen } from "../../src/order/chosenLine.ts";
 import { reckoned } from "../../src/order/reckon.ts";
+import fc from "../support/property.ts";
 
 const lug = { ...toBeChosen({ item: "lug", line: "lugs", needed: 32, note: "" }), currency: "EUR" };
 
@@ -39,5 +40,31 @@ describe("reckoned(line)", () => {
       purchase: 13.75,
     });
     expect(reckoned({ ...lug, needed: 1e6, unitPrice: 1e-7 }).purchase).toBe(0.1);
+  });
+});
+
+describe("reckoned(line), for any line", () => {
+  const lines = fc.record({
+    needed: fc.integer({ min: 0, max: 100_000 }),
+    onHand: fc.option(fc.integer({ min: 0, max: 100_000 })),
+    pack: fc.option(fc.integer({ min: 1, max: 1000 })),
+    cents: fc.integer({ min: 0, max: 1_000_000 }),
+  });
+
+  test("what is bought covers what is short in whole packs, with less than a pack over; the cost is that many cents", () => {
+    fc.assert(
+      fc.property(lines, ({ needed, onHand, pack, cents }) => {
+        const short = Math.max(0, needed - (onHand ?? 0));
+        const line = reckoned({ ...lug, needed, onHand, pack, unitPrice: Number(`${cents}e-2`) });
+        const bought = line.toBuy ?? Number.NaN;
+        expect(bought % (pack ?? 1)).toBe(0);
+        expect(line.surplus).toBe(bought - short);
+        expect(bought - short).toBeGreaterThanOrEqual(0);
+        expect(bought - short).toBeLessThan(pack ?? 1);
+        // Whole numbers below 2^53: exact.
+        expect(Math.round((line.purchase ?? Number.NaN) * 100)).toBe(bought * cents);
+        expect(Math.round((line.consumed ?? Number.NaN) * 100)).toBe(short * cents);
+      }),
+    );
   });
 });

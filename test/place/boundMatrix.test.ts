@@ -1,15 +1,46 @@
 import { describe, expect, test } from "vitest";
-import { gapFromLeast, matrixBound, pigeonholeLeast } from "../../src/place/boundMatrix.ts";
+import {
+  gapFromLeast,
+  leastShortfall,
+  matrixBound,
+  pigeonholeLeast,
+  sharedTops,
+  topsOf,
+} from "../../src/place/boundMatrix.ts";
 import { bestGap, stagesGap } from "./brute.ts";
 import { wholes } from "./lots.ts";
 
 const bound = (values: readonly number[], stages: number, size: number, whole = true) =>
   matrixBound(Float64Array.from(values), { stages, size, whole });
 
-describe("gapFromLeast(stages, total, most)", () => {
+describe("leastShortfall(tops, stages, total, least), gapFromLeast(tops, stages, most)", () => {
+  const open = [1e9, 1e9, 75];
   test("an even division gives 0; the whole-number case is attained by (q, ..., q, q + r)", () => {
-    expect(gapFromLeast(3, 75, 25)).toBe(0);
-    expect(gapFromLeast(3, 75, 24)).toBeCloseTo(1 / 26, 15);
+    expect(gapFromLeast(open, 3, 25)).toBe(0);
+    expect(gapFromLeast(open, 3, 24)).toBeCloseTo(1 / 26, 15);
+  });
+  test("the fullest stage holds no more than its largest units: 24, 25, 26 in place of 24, 24, 27", () => {
+    expect(leastShortfall([26, 1e9, 75], 3, 75, 24)).toBeCloseTo(1 / 25 + 2 / 26, 15);
+  });
+  test("sums that cannot be, because the fullest cannot hold enough, are told by infinity", () => {
+    expect(leastShortfall([26, 49, 75], 3, 75, 26)).toBe(Number.POSITIVE_INFINITY);
+  });
+});
+
+describe("topsOf and sharedTops", () => {
+  const falling = [13, 12, 11, 10, 3, 2, 2, 1, 1];
+  test("the k fullest of three stages of three hold at most the 3 k largest", () => {
+    expect([...topsOf(falling, 3, 3, new Float64Array(3))]).toEqual([36, 51, 55]);
+  });
+  test("when every stage must hold one of the four large units, the fullest holds two of them, the two fullest three", () => {
+    const tops = topsOf(falling, 3, 3, new Float64Array(3));
+    sharedTops(falling, { stages: 3, size: 3, least: 12 }, tops);
+    expect([...tops]).toEqual([13 + 12 + 3, 13 + 12 + 11 + 3 + 2 + 2, 55]);
+  });
+  test("no stage needs a large unit: nothing is lowered", () => {
+    const tops = topsOf(falling, 3, 3, new Float64Array(3));
+    sharedTops(falling, { stages: 3, size: 3, least: 4 }, tops);
+    expect([...tops]).toEqual([36, 51, 55]);
   });
 });
 

@@ -35,6 +35,17 @@ describe("exactMatrix(problem, work)", () => {
     }
   });
 
+  test("equals full enumeration on 60 lots in two heaps of uneven count, 12 units: what the bound on the fullest stages is for", () => {
+    for (let seed = 1; seed <= 60; seed++) {
+      const [stages, size] = seed % 2 === 0 ? [4, 3] : [3, 4];
+      const high = 1 + (seed % 11);
+      const values = wholes(12, seed, 960, 990).map((v, i) => (i < high ? v + 60 + (seed % 3) * 200 : v));
+      const answer = solve(values, stages, size);
+      expect(answer.proven).toBe(true);
+      expect(answer.gap).toBeCloseTo(bestGap(values, { groups: stages, size }, stagesGap), 12);
+    }
+  });
+
   test("a test of what may share a stage is honoured: no two of the first three units together", () => {
     for (let seed = 1; seed <= 30; seed++) {
       const values = wholes(9, seed);

@@ -31,4 +31,12 @@ describe("checkRequest(units, request)", () => {
     const four = ["U001", "U002", "U003", "U004"].map((serial) => pin(serial, 1));
     expect(codes(lot, { ...asked, pins: four })).toEqual(["place.pin-full"]);
   });
+  test("rooms: a group that no unit is of, a stage that is not there, two groups for one stage", () => {
+    const tall = lot.map((unit) => ({ ...unit, group: "tall" }));
+    const room = (group: number, takes: string) => ({ group, takes });
+    expect(codes(tall, { ...asked, rooms: [room(0, "tall"), room(1, "tall")] })).toEqual([]);
+    expect(codes(lot, { ...asked, rooms: [room(0, "tall")] })).toEqual(["place.room-unknown"]);
+    expect(codes(tall, { ...asked, rooms: [room(2, "tall")] })).toEqual(["place.room-group"]);
+    expect(codes(tall, { ...asked, rooms: [room(1, "tall"), room(1, "tall")] })).toEqual(["place.room-twice"]);
+  });
 });

@@ -31,6 +31,15 @@ describe("unitShort(bank)", () => {
   });
 
   test("a fuse brings its own three findings, an isolating resistor its amperes", () => {
+    // through a sound unit goes a sixteenth of the action, in strings the rest of the faulted string takes it all
+    const rated = { ...tied.unit, esr: 0.02, esl: 0, action: 1000 };
+    const beside = unitShort({ ...tied, unit: rated });
+    const [sound] = beside.findings;
+    near(sound?.value, (beside.energyIntoUnit as number) / (0.02 / 4) / 16, 1e-12);
+    expect(sound).toMatchObject({ id: "pulse.fault.action", limit: 1000 });
+    expect(unitShort({ ...tied, unit: { ...rated, action: null } }).findings).toEqual([]);
+    const apart = unitShort({ ...strings, unit: rated });
+    near(apart.findings[0]?.value, (apart.energyIntoUnit as number) / (0.02 * (4 / 4 + 3)), 1e-12);
     const fuse = { meltingAction: 10000, clearingAction: 15000, dcVoltage: 450 };
     const unit = { ...tied.unit, esr: 0, esl: 0 };
     const shot = { peakCurrent: 1e4, unitAction: 2250, unitHeat: null };
@@ -44,7 +53,7 @@ describe("unitShort(bank)", () => {
   test.each([
     ["a fuse", { fuse }, /fuse of the shorted unit/],
     ["a fuse before an isolating resistor", { fuse, isolatingResistance: 0.05 }, /fuse of the shorted unit/],
-    ["an isolating resistor", { isolatingResistance: 0.05 }, /isolating resistors spread the heat/],
+    ["an isolating resistor", { isolatingResistance: 0.05 }, /isolating resistors take part of the heat/],
     ["a resistor of nothing", { isolatingResistance: 0 }, /Nothing given stops it/],
     ["nothing", {}, /Nothing given stops it/],
     ["no neighbour, fuse or not", { parallel: 1, fuse }, /charger's trip must open/],

@@ -35,6 +35,18 @@ describe("faultPeak(loop), faultAction(loop)", () => {
     expect(whole?.amperes ?? 0).toBeLessThan(half?.amperes ?? 0);
   });
 
+  test("a section inductance holds the peak down, the more the larger, and leaves the action as it is", () => {
+    const peak = (sectionInductance: number) => faultPeak(unitShortLoop({ ...tied, unit: known, sectionInductance }));
+    const loop = unitShortLoop({ ...tied, unit: known, sectionInductance: 1e-6 });
+    near(loop?.inductance, 25e-9 / 4 + 1e-6 * (1 + 1 / 4), 1e-12);
+    expect(peak(1e-6)?.amperes).toBeLessThan(peak(0)?.amperes as number);
+    expect(peak(1e-5)?.amperes).toBeLessThan(peak(1e-6)?.amperes as number);
+    near(faultAction(loop), faultAction(unitShortLoop({ ...tied, unit: known })) as number, 1e-12);
+    near(loadShortLoop({ ...tied, unit: known, sectionInductance: 1e-6 }).inductance, (4 * (25e-9 + 1e-6)) / 5, 1e-12);
+    near(loadShortLoop({ ...strings, unit: known, sectionInductance: 1e-6 }).inductance, (4 * 25e-9 + 1e-6) / 5, 1e-12);
+    near(rowShortLoop({ ...tied, unit: known, sectionInductance: 1e-6 })?.inductance, (25e-9 + 1e-6) / 5, 1e-12);
+  });
+
   test("action needs the whole resistance: with the bus unknown there is none, with nothing known none either", () => {
     expect(faultAction(null)).toBeNull();
     expect(faultAction(loadShortLoop({ ...tied, unit: known }))).toBeNull();

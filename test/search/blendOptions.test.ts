@@ -1,8 +1,8 @@
 // The model of a blend: sound for the search, floors below tables, and every part in it or named.
 import { describe, expect, test } from "vitest";
 import { blendModelFaults } from "../../src/search/blend/model.ts";
-import { costTable } from "../../src/search/blendOptions.ts";
 import { stringsCost } from "../../src/search/blendString.ts";
+import { costTable } from "../../src/search/blendWays.ts";
 import { draw } from "../support/blendDraw.ts";
 import { partsOf, workOf } from "../support/blendLab.ts";
 import { briefOf, fixtureBrief, labParts, labResistors } from "../support/labParts.ts";

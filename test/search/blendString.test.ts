@@ -45,7 +45,7 @@ describe("stringType(unit, terms)", () => {
 describe("resistorsOf(type, strings)", () => {
   test("one string and single units are `strings`", () => {
     expect(resistorsOf(typeOf({}), 1).ties).toBe("strings");
-    expect(resistorsOf(typeOf({}, { voltage: 400 }), 7)).toEqual({ ties: "strings", cost: 0 });
+    expect(resistorsOf(typeOf({}, { voltage: 400 }), 7)).toEqual({ ties: "strings", cost: 0, from: null });
   });
   test("the cheaper of one a unit and one a stage, each by the slow rule", () => {
     const type = typeOf({ leakage: 200 });
@@ -69,7 +69,7 @@ describe("resistorsOf(type, strings)", () => {
       const cents = (count: number) => Math.ceil(count / 10) * 100;
       const apart = cents(4 * x * elements(1));
       const tied = cents(4 * elements(x));
-      expect(resistorsOf(type, x), `${x}`).toEqual(
+      expect(resistorsOf(type, x), `${x}`).toMatchObject(
         tied <= apart ? { ties: "cross-tied", cost: tied } : { ties: "strings", cost: apart },
       );
     }

@@ -4,7 +4,7 @@ import type { BlendModel } from "../../src/search/blend/model.ts";
 import { verifyCertificate } from "../../src/search/blend/verify.ts";
 import type { NamedCertificate } from "../../src/search/index.ts";
 import { type HandType, handBlend, handTypes } from "../support/blendByHand.ts";
-import { type Drawn, draw, planned } from "../support/blendDraw.ts";
+import { type Drawn, draw, drawShipped, planned } from "../support/blendDraw.ts";
 import { slowRequired } from "../support/slowPlan.ts";
 
 /** The model rebuilt by hand; whoever wants few may build more. */
@@ -112,3 +112,31 @@ describe("plan --blend --json on 300 random small catalogues", () => {
     console.log(seen);
   });
 });
+
+test("plan --blend --shipment-cost on 150 random catalogues: each supplier paid once, the same integer cents as every mix tried", async () => {
+  const seen = { fits: 0, sent: 0, changed: 0, none: 0 };
+  for (let seed = 9261; seed < 9411; seed += 1) {
+    const drawn = drawShipped(seed);
+    const { shipments } = drawn;
+    const types = handTypes(drawn.brief, drawn.parts, drawn.families);
+    const best = handBlend(drawn.brief, types, drawn.maxTypes, (name) => shipments[name]!);
+    const { blends, blendSearch } = await planned(drawn, ["--shipment-cost", drawn.flag]);
+    const at = `seed ${seed}`;
+    if (best === null) {
+      expect(blends, at).toEqual([]);
+      expect(blendSearch.status, at).toBe("infeasible");
+      seen.none += 1;
+      continue;
+    }
+    expect(Math.round(blends[0].cost.total * 100), at).toBe(best.cost);
+    expect(blendSearch.status, at).toBe("optimal");
+    expect(blends[0].certificate.verdict, at).toBe("valid");
+    seen.fits += 1;
+    if (blends[0].cost.shipments > 0) seen.sent += 1;
+    const plain = handBlend(drawn.brief, types, drawn.maxTypes);
+    if (JSON.stringify(plain?.counts) !== JSON.stringify(best.counts)) seen.changed += 1;
+  }
+  expect(seen.fits).toBeGreaterThan(30);
+  expect(seen.sent).toBeGreaterThan(20);
+  expect(seen.changed).toBeGreaterThan(3);
+}, 60_000);

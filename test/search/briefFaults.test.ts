@@ -22,6 +22,27 @@ describe("crossFaults(brief)", () => {
       { bus: { shape: "wire pair", length: 1, radius: 0.001, spacing: 0.01, inductance: 1e-7 } },
       "contradiction bus.shape",
     ],
+    [{ bus: { resistance: 0, inductance: 0, feed: "end", stepInductance: 1e-8 } }, "missing-value bus.stepResistance"],
+    [{ bus: { resistance: 0, inductance: 0, stepInductance: 1e-8 } }, "missing-value bus.feed"],
+    [
+      { bus: { shape: "wire pair", length: 1, radius: 0.001, spacing: 0.01, feed: "centre" } },
+      "missing-value bus.pitch",
+    ],
+    [
+      {
+        bus: {
+          shape: "wire pair",
+          length: 1,
+          radius: 0.001,
+          spacing: 0.01,
+          feed: "end",
+          pitch: 0.1,
+          stepResistance: 0,
+        },
+      },
+      "contradiction bus.stepInductance",
+    ],
+    [{ isolatingPrice: 2 }, "missing-value isolating"],
     [{ charger: { current: 1, power: 5, currentLimit: 1 } }, "contradiction charger.power"],
     [{ charger: { power: 5 } }, "missing-value charger.currentLimit"],
     [{ charger: { supply: 5 } }, "missing-value charger.resistance"],

@@ -39,6 +39,32 @@ describe("circuitOf(brief, bank)", () => {
     });
   });
 
+  test("units told to hang on the bus: segments by the pitch, and their taper on top of the run; a section inductance by ties", () => {
+    const four = pulseBankFor(FILM, { series: 2, parallel: 4, ties: "cross-tied" });
+    const of = (more: Record<string, unknown>, bankOf = four) => {
+      const read = circuitOf(shotBrief(more), bankOf);
+      if (!read.ok) throw new Error(JSON.stringify(read.refusals));
+      return read.value.circuit;
+    };
+    const bus = { shape: "flat bars", width: "100 mm", gap: "3 mm", thickness: "1 mm", length: "0.4 m" };
+    const run = of({ bus }).bus?.inductance as number;
+    const { place, bus: whole } = of({ bus: { ...bus, feed: "end", pitch: "0.1 m" } });
+    expect((place?.segment.inductance as number) / run).toBeCloseTo(0.25, 6);
+    // (9 + 4 + 1)/16 of a segment
+    expect((whole?.inductance as number) / run).toBeCloseTo(1 + (14 / 16) * 0.25, 6);
+    const told = of({
+      bus: { resistance: 0, inductance: 0, feed: "centre", stepResistance: 1e-4, stepInductance: 1e-8 },
+    });
+    expect(told.place).toEqual({ feed: "centre", segment: { resistance: 1e-4, inductance: 1e-8 } });
+    expect(of({}).place).toBeNull();
+    const section = { inductance: "1 uH" };
+    expect(of({ section }).section).toBeCloseTo(0.5e-6, 15);
+    expect(of({ section }, pulseBankFor(FILM, { series: 2, parallel: 4, ties: "strings" })).section).toBeCloseTo(
+      0.25e-6,
+      15,
+    );
+  });
+
   test("Source: methods A17: strip pair 100 mm by 3 mm gap, 0.4 m: 14.2182345 nH outside, more with the field inside", () => {
     const bus = { shape: "flat bars", width: "100 mm", gap: "3 mm", thickness: "1 mm", length: "0.4 m" };
     const { circuit: found, bus: ring } = circuit({ bus });

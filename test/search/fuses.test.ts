@@ -1,7 +1,7 @@
 // Source: [methods-derived] A15 for what a fuse sees: 3/2 C V^2 of three neighbours over the loop's resistance.
 import { describe, expect, test } from "vitest";
 import type { Fuse } from "../../src/catalog/index.ts";
-import { chooseFuse, fittedFuse, fuseCount, fuseOf, fuseSees } from "../../src/search/fuses.ts";
+import { chooseFuse, fittedFuse, fuseCount, fuseOf, fuseSeesAt } from "../../src/search/fuses.ts";
 import { FILM, shotBrief, shotLayout } from "../support/shotBank.ts";
 
 const fuse = (name: string, melting: number | undefined, clearing: number | undefined, price: number): Fuse =>
@@ -61,8 +61,14 @@ describe("fittedFuse({ layout, unit, brief }, rows)", () => {
     expect(choice).toMatchObject({ chosen: null, sees: { normalAction: null } });
   });
 
-  test("fuseOf, fuseSees: blank is unknown", () => {
+  test("fuseOf: blank is unknown; fuseSeesAt: an unknown tolerance or load leaves the normal action unknown, an unknown worst unit the whole voltage", () => {
     expect(fuseOf({ fuse: "x" } as Fuse)).toEqual({ meltingAction: null, clearingAction: null, dcVoltage: null });
-    expect(fuseSees([])).toEqual({ normalAction: null, faultAction: null, voltage: null });
+    const loose = { ...FILM, tolerance: undefined } as unknown as typeof FILM;
+    const sees = fuseSeesAt(shotBrief(), loose, shape, Number.POSITIVE_INFINITY);
+    expect(sees).toMatchObject({ normalAction: null, voltage: 2000 });
+    const { ties, series, parallel } = shape;
+    const short = fuseSeesAt(shotBrief({ shortResistance: "0.1 ohm" }), FILM, { ties, series, parallel }, 2000);
+    // the short's own resistance joins a third of the neighbours' 100 mohm
+    expect(short.faultAction).toBeCloseTo(600 / (0.1 / 3 + 0.1), 6);
   });
 });

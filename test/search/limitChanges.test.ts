@@ -18,6 +18,14 @@ describe("limitChanges(input), when limits leave nothing", () => {
     expect(run({ maxPeakCurrent: change?.to }).layouts.length).toBeGreaterThan(0);
   });
 
+  test("it is the least: a thousandth less fits nothing, though more in parallel than the other limits ask for is tried", () => {
+    const asked = { maxUnits: 12, maxSeries: 1, maxPeakCurrent: "100 A" };
+    const [change] = run(asked).changes;
+    expect(change?.layout).toMatch(/1s12p/);
+    expect(run({ ...asked, maxPeakCurrent: change?.to }).layouts.length).toBeGreaterThan(0);
+    expect(run({ ...asked, maxPeakCurrent: (change?.to ?? 0) * 0.999 }).layouts).toEqual([]);
+  });
+
   test("a part of the rating stays a part; a least life goes down", () => {
     const part = run({ maxPeakCurrent: "5 %" }).changes[0];
     expect(part).toMatchObject({ note: "rating", from: 0.05 });

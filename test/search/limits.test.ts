@@ -1,7 +1,8 @@
 import { describe, expect, test } from "vitest";
 import { LIMIT_KEYS } from "../../src/search/limitKeys.ts";
 import { hasLimits, LIMIT_NAMES, limitClaims, limitFindings, limitJudge } from "../../src/search/limits.ts";
-import { FILM, shotBrief } from "../support/shotBank.ts";
+import { shotOf } from "../../src/search/shot.ts";
+import { FILM, shotBrief, shotLayout } from "../support/shotBank.ts";
 
 const CASE = { unit: FILM, series: 1, parallel: 1, ties: "strings", worst: 2000 } as const;
 const judge = (more: Record<string, unknown>, given: Record<string, unknown> = {}) =>
@@ -14,6 +15,29 @@ describe("limitJudge(brief)", () => {
     expect(limitJudge(shotBrief())).toBeNull();
     expect(hasLimits(shotBrief())).toBe(false);
     expect(hasLimits(shotBrief({ maxReversal: "5 %" }))).toBe(true);
+  });
+
+  test("the place on the bus counts: the limit is judged by the figure that the shot's own finding has", () => {
+    const unit = { ...FILM, esr: 0.02, esl: 4e-8 };
+    const load = { resistance: "20 mohm", inductance: "1 uH" };
+    const bus = { resistance: 0, inductance: 0, feed: "end", stepResistance: "1 mohm", stepInductance: "50 nH" };
+    const shape = { series: 1, parallel: 6, ties: "strings" } as const;
+    const given = { unit, worst: 2000, ...shape };
+    const [placed] = limitClaims(shotBrief({ load, bus, maxPeakCurrent: "1 A" }), given) ?? [];
+    const [even] =
+      limitClaims(
+        shotBrief({
+          load,
+          bus: { ...bus, feed: undefined, stepResistance: undefined, stepInductance: undefined },
+          maxPeakCurrent: "1 A",
+        }),
+        given,
+      ) ?? [];
+    expect(placed?.value).toBeGreaterThan(1.02 * (even?.value as number));
+    const brief = shotBrief({ load, bus });
+    const shot = shotOf({ layout: shotLayout(brief, shape, unit), unit, brief });
+    const finding = shot.ok ? shot.value.findings.find(({ id }) => id === "pulse.unit.current") : undefined;
+    expect((placed?.value as number) / (finding?.value as number)).toBeCloseTo(1, 2);
   });
 
   test("over the limit: reason, value and limit; within it: null", () => {

@@ -28,11 +28,15 @@ function ratings(unit = FILM, parallel = 2, more: Record<string, unknown> = {}) 
 }
 
 describe("unitRatingFindings(discharge, { unit, envelope, parallel })", () => {
-  test("values stand at the high end, and no finding is about a rating that catalogues lack", () => {
+  test("values stand at the high end; the action too, and not assessed where the catalogue has no rating of it", () => {
     const { shot, findings } = ratings();
     const current = findings.find(({ id }) => id === "pulse.unit.current");
     expect(current?.value).toBeGreaterThan(shot.unitPeakCurrent);
-    expect(findings.map(({ id }) => id)).not.toContain("pulse.unit.action");
+    const action = findings.find(({ id }) => id === "pulse.unit.action");
+    expect(action).toMatchObject({ verdict: "not assessed", limit: null });
+    expect(action?.value).toBeGreaterThan(shot.unit.action as number);
+    const rated = ratings({ ...FILM, action: 1 }).findings.find(({ id }) => id === "pulse.unit.action");
+    expect(rated).toMatchObject({ verdict: "fail", limit: 1 });
   });
 
   test("rated for no reversal: fails unclamped, warns with the volts when only the clamp's own drop is left", () => {

@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { cell, down, partOf, said, squareMillimetres, up, wait } from "../../src/sheet/cells.ts";
+import { cell, down, partOf, said, up, wait } from "../../src/sheet/cells.ts";
 
 describe("cells", () => {
   test("cell(value, dimension, rounding): what is not known is a blank, nought is nought", () => {
@@ -17,15 +17,5 @@ describe("cells", () => {
 
   test("partOf(value, rating): no rating, or none above zero, is no part", () => {
     expect([partOf(1, 4), partOf(null, 4), partOf(1, null), partOf(1, 0)]).toEqual([0.25, null, null, null]);
-  });
-
-  test("squareMillimetres(area) never says less than the area", () => {
-    expect(squareMillimetres(3.1e-6)).toBe("3.1 mm2");
-    expect(squareMillimetres(3.1234e-6)).toBe("3.15 mm2");
-    for (const area of [1.2345e-7, 9.999e-6, 1.0004e-5]) {
-      const printed = Number(squareMillimetres(area).split(" ")[0]) * 1e-6;
-      expect(printed).toBeGreaterThanOrEqual(area);
-      expect(printed).toBeLessThan(area * 1.02);
-    }
   });
 });

@@ -1,5 +1,7 @@
 import { describe, expect, test } from "vitest";
-import { factsOf, ruleName, toldRule, waysDown } from "../../src/sheet/facts.ts";
+import { factsOf } from "../../src/sheet/facts.ts";
+import { ruleName, toldRule } from "../../src/sheet/rules.ts";
+import { waysDown } from "../../src/sheet/ways.ts";
 import { BARE, sheetInput } from "../support/sheet.ts";
 
 describe("factsOf(input)", () => {
@@ -35,23 +37,5 @@ describe("factsOf(input)", () => {
     const facts = factsOf(sheetInput({ unit: BARE, brief: { dumpResistance: "1 kohm" } }));
     expect(facts).toMatchObject({ capacitance: null, stored: null });
     expect(waysDown(facts, { from: 2000, to: 60 })).toEqual({ chains: null, oneOpen: null, dump: null });
-  });
-});
-
-describe("waysDown(facts, fall)", () => {
-  // t = R C ln(V/Vs), textbook.
-  test("each way alone, one chain fewer with a bleeder open, never when it was the only one", () => {
-    const facts = { capacitance: 1e-3, chain: 1e4, chains: 2, dump: 100 };
-    const fall = { from: 1000, to: 50 };
-    const ways = waysDown(facts, fall);
-    expect(ways.chains).toBeCloseTo(5 * Math.log(20), 9);
-    expect(ways.oneOpen).toBeCloseTo(10 * Math.log(20), 9);
-    expect(ways.dump).toBeCloseTo(0.1 * Math.log(20), 9);
-    expect(waysDown({ ...facts, chains: 1 }, fall).oneOpen).toBe(Number.POSITIVE_INFINITY);
-    expect(waysDown({ ...facts, chain: null, chains: 0, dump: null }, fall)).toEqual({
-      chains: Number.POSITIVE_INFINITY,
-      oneOpen: Number.POSITIVE_INFINITY,
-      dump: null,
-    });
   });
 });

@@ -1,6 +1,8 @@
 import { describe, expect, test } from "vitest";
-import { sheetOf } from "../../src/sheet/index.ts";
-import { LOAD, largeInput, placedIn, sheetInput } from "../support/sheet.ts";
+import type { Capacitor } from "../../src/catalog/index.ts";
+import { sheetOf, sheetText } from "../../src/sheet/index.ts";
+import fc from "../support/property.ts";
+import { LOAD, largeInput, placedIn, RATED, sheetInput } from "../support/sheet.ts";
 
 /** Everything that is printed as text of a sheet. */
 const printed = (sheet: ReturnType<typeof sheetOf>): readonly string[] =>
@@ -61,4 +63,79 @@ describe("sheetOf(input)", () => {
     expect(sheetOf(sheetInput({ brief: { touchSafeRule: "house rule 7" } })).rule).toMatch(/\(house rule 7\)$/);
     expect(sheetOf(sheetInput({ rule: "nec-460-6" })).rule).toMatch(/^NEC \(NFPA 70\) 460\.6, second hand$/);
   });
+});
+
+describe("whatever is known and whatever is not", () => {
+  /** Keys that a catalogue may lack. */
+  const OPTIONAL = [
+    "technology",
+    "polarised",
+    "tolerance",
+    "leakage",
+    "esr",
+    "esl",
+    "peakCurrent",
+    "reversal",
+    "ruptureEnergy",
+    "diameter",
+    "price",
+    "currency",
+  ] as const;
+  const known = fc.subarray([...OPTIONAL]);
+  const keys = fc.record(
+    {
+      dumpResistance: fc.constantFrom("1 ohm", "10 kohm"),
+      hold: fc.constantFrom("0 s", "30 s"),
+      overshoot: fc.constantFrom("0 %", "5 %"),
+      charger: fc.constantFrom({ current: "10 mA" }, { supply: "9 kV", resistance: "1 kohm" }),
+      load: fc.constantFrom(LOAD.load, { short: true }, { resistance: "10 ohm" }),
+      isolating: fc.constant("10 mohm"),
+      rate: fc.constant("0.1 Hz"),
+      spares: fc.nat(20),
+    },
+    { requiredKeys: [] },
+  );
+  const shape = fc.record({
+    series: fc.integer({ min: 1, max: 7 }),
+    parallel: fc.integer({ min: 1, max: 5 }),
+    ties: fc.constantFrom("cross-tied" as const, "strings" as const),
+  });
+
+  test("a sheet is made: rows as wide as their tables, no number that is none, the same in both formats", () => {
+    fc.assert(
+      fc.property(
+        known,
+        keys,
+        shape,
+        fc.boolean(),
+        fc.constantFrom(null, "nfpa-70e-360", "iec-60335-charge"),
+        (has, brief, form, measured, rule) => {
+          const unit = Object.fromEntries(
+            Object.entries(RATED).filter(
+              ([key]) => !(OPTIONAL as readonly string[]).includes(key) || has.includes(key as never),
+            ),
+          ) as unknown as Capacitor;
+          const voltage = `${240 * form.series} V`;
+          const bare = sheetInput({
+            unit,
+            shape: form,
+            brief: { ...brief, voltage, energy: "1 J" },
+            rule: rule as null,
+          });
+          const sheet = sheetOf(measured ? { ...bare, placed: placedIn(bare) } : bare);
+          const tables = sheet.sections.flatMap(({ blocks }) => blocks).filter((block) => block.kind === "table");
+          for (const { id, rows, columns } of tables)
+            for (const row of rows) if (row.length !== columns.length) throw new Error(`${id}: ${row.join()}`);
+          expect(
+            printed(sheet).filter((words) => /NaN|undefined|Infinity|\[object|unlimited|\bnull\b/.test(words)),
+          ).toEqual([]);
+          const html = sheetText(sheet, "html");
+          expect(html).not.toMatch(/NaN|undefined|Infinity|\[object/);
+          expect(html.match(/<table/g)).toHaveLength(tables.length + 1);
+          expect(sheetText(sheet, "md")).not.toMatch(/NaN|undefined|Infinity/);
+        },
+      ),
+      { numRuns: 25 },
+    );
+  }, 30_000);
 });

@@ -5,7 +5,7 @@ import { LOAD, sheetInput } from "../support/sheet.ts";
 
 const wires = (wishes: Parameters<typeof sheetInput>[0] = {}, over: object = {}) => {
   const input = sheetInput(wishes);
-  return wiresOf({ ...schematicOf(input), ...over }, input.shot);
+  return wiresOf({ ...schematicOf(input), ...over }, null);
 };
 const joints = (list: ReturnType<typeof wires>) => list.map(({ from, to }) => `${from} > ${to}`);
 
@@ -28,6 +28,18 @@ describe("wiresOf(props, shot)", () => {
     expect(strings).toEqual(expect.arrayContaining(["C1.7 + > TP1.7", "C1.8 + > F1 a", "F1 b > TP8"]));
   });
 
+  test("in strings a bleeder stays across its unit when the fuse opens: it goes to the unit's own terminals", () => {
+    const string = joints(wires({ shape: { ties: "strings" } }, { fuse: { at: "string", words: null } }));
+    expect(string.filter((row) => /RB1\.[78] /.test(row))).toEqual([
+      "TP1.6 > RB1.7 a",
+      "RB1.7 b > TP1.7",
+      "TP1.7 > RB1.8 a",
+      "RB1.8 b > C1.8 +",
+    ]);
+    const each = joints(wires({ shape: { ties: "strings" } }, { isolating: { resistance: 0.1, words: null } }));
+    expect(each.filter((row) => row.startsWith("RB2.3 b"))).toEqual(["RB2.3 b > C2.3 +"]);
+  });
+
   test("the earth goes to the end chosen, or nowhere", () => {
     const earthed = (earth: "positive" | "none" | "unknown") =>
       joints(wires({ earth })).filter((row) => row.includes("E1"));
@@ -38,15 +50,14 @@ describe("wiresOf(props, shot)", () => {
     ]);
   });
 
-  test("conductors follow from the shot alone: none without a load, thicker for the bank than for a unit", () => {
+  test("conductors: none without a shot; the whole section for the bank, the worst unit's part of it for a unit", () => {
     expect(wires().every(({ conductor }) => conductor === null)).toBe(true);
-    const fired = wires({ brief: LOAD });
-    const area = (from: string): number =>
-      Number(/([\d.]+) mm2/.exec(fired.find((wire) => wire.from === from)?.conductor ?? "")?.[1]);
-    expect(area("S1 b")).toBeGreaterThan(area("C1.1 +"));
-    expect(fired.find((wire) => wire.from === "K1 b")?.conductor).toBeNull();
-    // IEC 60949 for copper from 20 to 90 degC: K^2 ln((90 + 234.5)/(20 + 234.5)), K = 226 A s^0.5/mm^2.
-    const action = sheetInput({ brief: LOAD }).shot?.discharge.action ?? Number.NaN;
-    expect(area("S1 b")).toBeCloseTo(Math.sqrt(action / (226 ** 2 * Math.log(324.5 / 254.5))), 1);
+    const fired = wiresOf(schematicOf(sheetInput({ brief: LOAD })), { section: 40e-6, unitShare: 0.6 });
+    const conductor = (from: string) => fired.find((wire) => wire.from === from)?.conductor;
+    expect([conductor("S1 b"), conductor("C1.1 +"), conductor("K1 b")]).toEqual([
+      "at least 40 mm2 of copper",
+      "at least 24 mm2 of copper",
+      null,
+    ]);
   });
 });

@@ -12,11 +12,16 @@ export function bruteForce(
   const need = capacityNeeded(model.requirement);
   let best: number | null = null;
   const path: BlendCount[] = [];
+  const sent = (): number => {
+    const senders = new Set(path.flatMap(({ option }) => options[option]!.suppliers ?? []));
+    return [...senders].reduce((sum, supplier) => sum + (model.shipments?.[supplier] ?? 0), 0);
+  };
   const go = (from: number, cost: number, capacity: number, volume: number, mass: number, units: number): void => {
     if (capacity >= need) {
       if (isFittingBlend(model, path)) {
-        visit?.([...path], cost);
-        if (best === null || cost < best) best = cost;
+        const total = cost + sent();
+        visit?.([...path], total);
+        if (best === null || total < best) best = total;
       }
       return;
     }

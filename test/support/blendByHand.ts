@@ -16,7 +16,16 @@ export interface HandType {
   readonly mass: number;
   /** Minor units for 0, 1, 2 ... strings, as long as they can be had at a known price. */
   readonly costs: readonly number[];
+  /** Every way to buy and balance 0, 1, 2 ... strings: its cost and whom it needs something from ("" for one without a name). */
+  readonly ways: readonly (readonly HandWay[])[];
 }
+
+export interface HandWay {
+  readonly cost: number;
+  readonly senders: readonly string[];
+}
+
+export type HandShipments = (supplier: string) => number;
 
 export interface HandBlend {
   readonly cost: number;
@@ -45,24 +54,30 @@ function chainOf(unit: Capacitor, brief: Brief, n: number, m: number, q: number)
   };
 }
 
-/** Cheapest resistors over the families; a family without a price counts nothing; Infinity when none serves. */
-function resistors(
+/** Resistors of each priced family that serves; one that costs nothing where only families without a price do; none when none serves. */
+function resistorWays(
   unit: Capacitor,
   brief: Brief,
   at: { readonly n: number; readonly m: number; readonly positions: number; readonly limit: number },
   families: readonly ResistorFamily[],
-): number {
-  let best = Number.POSITIVE_INFINITY;
+): readonly HandWay[] {
+  const ways: HandWay[] = [];
   let any = false;
   for (const family of families) {
     const choice = slowBalance(chainOf(unit, brief, at.n, at.m, family.tolerance), at.limit, family);
     if (choice === null) continue;
     any = true;
     const count = at.positions * choice.elements;
-    best = Math.min(best, slowPurchase(family, count, count + BOUND)?.cost ?? Number.POSITIVE_INFINITY);
+    const bought = slowPurchase(family, count, count + BOUND);
+    if (bought === null || !Number.isFinite(bought.cost)) continue;
+    ways.push({ cost: bought.cost, senders: count > (family.onHand ?? 0) ? [family.supplier ?? ""] : [] });
   }
-  return any && !Number.isFinite(best) ? 0 : best;
+  return any && ways.length === 0 ? [{ cost: 0, senders: [] }] : ways;
 }
+
+/** The cheapest of them; Infinity when none serves. */
+const resistors = (...given: Parameters<typeof resistorWays>): number =>
+  Math.min(...resistorWays(...given).map(({ cost }) => cost));
 
 /** The string types that can be vouched for and had at a price. */
 export function handTypes(
@@ -92,27 +107,52 @@ export function handTypes(
     const each = brief.basis === "nominal" ? unit.capacitance : unit.capacitance * (1 - low) * (1 - brief.ageing);
     const capacity = each / n;
     const costs = [0];
+    const ways: HandWay[][] = [[{ cost: 0, senders: [] }]];
     for (let x = 1; x * n <= brief.maxUnits && (x - 1) * capacity < required; x += 1) {
       const bought = slowPurchase(unit, n * x + brief.spares, n * x + brief.spares + BOUND);
       if (bought === null || !Number.isFinite(bought.cost)) break;
       const apart = n === 1 ? 0 : resistors(unit, brief, { n, m: 1, positions: n * x, limit }, families);
       const tied = n === 1 || x === 1 ? apart : resistors(unit, brief, { n, m: x, positions: n, limit }, families);
       costs.push(bought.cost + Math.min(apart, tied));
+      const own = n * x + brief.spares > (unit.onHand ?? 0) ? [unit.supplier ?? ""] : [];
+      const balances =
+        n === 1
+          ? [{ cost: 0, senders: [] }]
+          : [
+              ...resistorWays(unit, brief, { n, m: 1, positions: n * x, limit }, families),
+              ...(x === 1 ? [] : resistorWays(unit, brief, { n, m: x, positions: n, limit }, families)),
+            ];
+      ways.push(balances.map((one) => ({ cost: bought.cost + one.cost, senders: [...own, ...one.senders] })));
     }
-    if (costs.length > 1) types.push({ part: unit.part, series: n, capacity, volume, mass, costs });
+    if (costs.length > 1) types.push({ part: unit.part, series: n, capacity, volume, mass, costs, ways });
   }
   return types;
 }
 
 /** Every mix of at most `maxTypes`; null when none meets the need within the limits. */
-export function handBlend(brief: Brief, types: readonly HandType[], maxTypes: number): HandBlend | null {
+export function handBlend(
+  brief: Brief,
+  types: readonly HandType[],
+  maxTypes: number,
+  shipment: HandShipments = () => 0,
+): HandBlend | null {
   const need = slowRequired(brief) * (1 - 1e-9);
   let best: HandBlend | null = null;
   const path: { part: string; strings: number }[] = [];
-  const go = (from: number, cost: number, capacity: number, volume: number, mass: number, units: number): void => {
-    if (best !== null && cost >= best.cost) return;
+  const sent = (senders: ReadonlySet<string>): number => [...senders].reduce((sum, name) => sum + shipment(name), 0);
+  const go = (
+    from: number,
+    cost: number,
+    capacity: number,
+    volume: number,
+    mass: number,
+    units: number,
+    senders: ReadonlySet<string>,
+  ): void => {
+    const total = cost + sent(senders);
+    if (best !== null && total >= best.cost) return;
     if (capacity >= need) {
-      if (brief.maxCost === undefined || within(cost / 100, brief.maxCost)) best = { cost, counts: [...path] };
+      if (brief.maxCost === undefined || within(total / 100, brief.maxCost)) best = { cost: total, counts: [...path] };
       return;
     }
     if (path.length === maxTypes) return;
@@ -124,11 +164,12 @@ export function handBlend(brief: Brief, types: readonly HandType[], maxTypes: nu
         if (brief.maxVolume !== undefined && !within(v, brief.maxVolume)) break;
         if (brief.maxMass !== undefined && !within(m, brief.maxMass)) break;
         path.push({ part: type.part, strings: x });
-        go(k + 1, cost + type.costs[x]!, capacity + x * type.capacity, v, m, u);
+        for (const way of type.ways[x]!)
+          go(k + 1, cost + way.cost, capacity + x * type.capacity, v, m, u, new Set([...senders, ...way.senders]));
         path.pop();
       }
     }
   };
-  go(0, 0, 0, 0, 0, 0);
+  go(0, 0, 0, 0, 0, 0, new Set());
   return best;
 }

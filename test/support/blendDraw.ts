@@ -72,3 +72,22 @@ export async function planned(drawn: Drawn, more: readonly string[] = []) {
   const status = await run([...line, "--max-types", String(drawn.maxTypes), ...more], ports);
   return { status, err: ports.told(), ...JSON.parse(ports.printed()) };
 }
+
+/** The same with resistors from two suppliers and what the shipments cost, cents. */
+export function drawShipped(
+  seed: number,
+): Drawn & { readonly shipments: Readonly<Record<string, number>>; readonly flag: string } {
+  const drawn = draw(seed);
+  const c = chance(seed + 77);
+  const [heading = "", ...rows] = drawn.texts["r.csv"]!.split("\n");
+  const families = rows.map((row) => `${row},${c.pick(["North", "West", ""])}`);
+  const texts = { ...drawn.texts, "r.csv": [`${heading},supplier`, ...families].join("\n") };
+  const shipments = { North: c.whole(0, 15_000), "": c.whole(0, 15_000), South: 0, West: 0 };
+  const cents = (amount: number): string => (amount / 100).toFixed(2);
+  const names = ["North", "South", "West"].filter((name) => Object.values(texts).some((text) => text.includes(name)));
+  for (const name of names) shipments[name as "South"] = c.whole(0, 15_000);
+  const flag = [...names.map((name) => `${name}: ${cents(shipments[name as "South"])}`), cents(shipments[""])].join(
+    "; ",
+  );
+  return { ...drawn, texts, families: must(readResistors(texts["r.csv"], "r.csv")).families, shipments, flag };
+}

@@ -76,6 +76,19 @@ export function tinyModel(seed: number): BlendModel {
   };
 }
 
+/** The same with suppliers: up to four, some options from the hand, some with two senders, some shipments free. */
+export function shippedModel(seed: number): BlendModel {
+  const model = tinyModel(seed);
+  const random = chance(seed * 7 + 3);
+  const whole = (low: number, high: number): number => low + Math.floor(random() * (high - low + 1));
+  const shipments = Array.from({ length: whole(1, 4) }, () => (random() < 0.15 ? 0 : whole(1, 80)));
+  const options = model.options.map((option): BlendOption => {
+    const senders = shipments.map((_, at) => at).filter(() => random() < (random() < 0.2 ? 0.9 : 0.4));
+    return senders.length === 0 ? option : { ...option, suppliers: senders.slice(0, 2) };
+  });
+  return { ...model, options, shipments };
+}
+
 /** Prices drawn near those that matter for a model whose blends cost about `cost`. */
 export function anyPrices(seed: number, cost: number) {
   const random = chance(seed + 5);

@@ -34,6 +34,8 @@ export function fakePorts(texts: Readonly<Record<string, string>> = {}, columns 
         written.set(path, text);
         return { ok: true, value: path };
       },
+      move: real.move,
+      watch: real.watch,
     },
     printed: () => out,
     told: () => err,

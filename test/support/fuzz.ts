@@ -13,6 +13,7 @@ import {
   readWaveform,
 } from "../../src/catalog/index.ts";
 import { readJson } from "../../src/cli/jsonText.ts";
+import { readEditedBill } from "../../src/order/index.ts";
 import type { Read, Refusal } from "../../src/quantity/index.ts";
 import { readBrief } from "../../src/search/index.ts";
 import { readSaved, savedText } from "../../src/tui/saved.ts";
@@ -173,6 +174,17 @@ export const TARGETS: readonly Target[] = [
   },
   { name: "brief", seeds: texts("fixtures/briefs", ".json"), read: brief },
   { name: "saved screens", seeds: [SAVED], read: saved },
+  {
+    name: "edited bill",
+    seeds: texts("fixtures/versions", ".csv"),
+    read: table(
+      (text, file) => {
+        const got = readEditedBill(text, file);
+        return got.ok ? { ok: true, value: { rows: got.value.rows, faults: [], notes: [] } } : got;
+      },
+      ({ rows }) => oddNumber(rows.flatMap(({ cells }) => [...cells.values()].map(({ value }) => value))),
+    ),
+  },
 ];
 
 /** Pieces that readers stumble over. */

@@ -128,7 +128,15 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
     wanted = false;
     const state = store.state();
     const { asked, values, pins, chosen, rank, frontOnly, screen: name } = state;
-    const question = JSON.stringify([values, pins, chosen, rank, frontOnly, name === "brief"]);
+    const question = JSON.stringify([
+      values,
+      pins,
+      chosen,
+      rank,
+      frontOnly,
+      name === "brief",
+      name === "map" && state.map,
+    ]);
     const found = answers.get(question) ?? answerFor(state, engine, true);
     answers.set(question, found);
     send({ type: "answered", asked, answer: found, slow: false });

@@ -51,11 +51,6 @@ export interface SheetWishes extends Partial<Omit<SheetInput, "layout" | "brief"
   readonly shape?: Partial<AssessInput["layout"]>;
 }
 
-const must = <T>(read: { readonly ok: boolean; readonly value?: T }): T => {
-  if (!read.ok) throw new Error(JSON.stringify(read));
-  return read.value as T;
-};
-
 /** The small bank, 8s2p cross-tied of 1000 uF units at 2 kV, with what is laid over it. */
 export function sheetInput({ brief: keys = {}, shape = {}, unit = RATED, ...rest }: SheetWishes = {}): SheetInput {
   const brief: Brief = briefOf(keys);
@@ -64,7 +59,8 @@ export function sheetInput({ brief: keys = {}, shape = {}, unit = RATED, ...rest
     brief,
     layout: { part: unit.part, series: 8, parallel: 2, ties: "cross-tied", ...shape },
   });
-  const shot: ShotReport | null = brief.load === undefined ? null : must(shotOf({ layout, unit, brief }));
+  const fired = brief.load === undefined ? null : shotOf({ layout, unit, brief });
+  const shot: ShotReport | null = fired?.ok ? fired.value : null;
   return {
     layout,
     unit,
@@ -73,7 +69,7 @@ export function sheetInput({ brief: keys = {}, shape = {}, unit = RATED, ...rest
     currency: "EUR",
     words: WORDS,
     shot,
-    shotOpen: shot === null ? "no load is in the brief" : null,
+    shotOpen: shot === null ? (fired === null ? "no load is in the brief" : "the load has no bound") : null,
     faults: shot?.faults ?? faultsOf({ result: layout, unit, brief }),
     fuse: null,
     alternatives: null,

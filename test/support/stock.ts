@@ -2,8 +2,12 @@
 
 import { EventEmitter } from "node:events";
 import { type Capacitor, DEFAULT_FAMILY, readCapacitors } from "../../src/catalog/index.ts";
-import { catalogEngine, type SaveAnswer, type ScreenPorts } from "../../src/tui/index.ts";
+import { accepted, refused } from "../../src/quantity/index.ts";
+import { catalogEngine } from "../../src/tui/catalogEngine.ts";
+import type { EnginePort, SaveAnswer, ScreenPorts, Workshop } from "../../src/tui/ports.ts";
 import { initialState, type State } from "../../src/tui/state.ts";
+import { unitsOn } from "../../src/tui/units/work.ts";
+import { SHARED_WORDS } from "../../src/tui/workshop.ts";
 import { Screen } from "./screen.ts";
 import { FakeKeyboard, FakeProcess } from "./tty.ts";
 
@@ -23,6 +27,11 @@ export const parts = (text = CATALOGUE): readonly Capacitor[] => {
 
 export const engine = catalogEngine({ parts: parts(), families: [DEFAULT_FAMILY] });
 
+export const CATALOGUE_FACTS = {
+  parts: parts(),
+  sources: [{ file: "test.csv", kind: "capacitors" as const, read: 4, faults: [], notes: [] }],
+};
+
 export const STOCK = { name: "test.csv", parts: 4, faults: 0, note: "invented" };
 
 export const BRIEF = { energy: "2.4 kJ", voltage: "2.2 kV", ripple: "100 %" };
@@ -36,6 +45,8 @@ export const stateWith = (changes: Partial<State> = {}): State => ({
     values: BRIEF,
     extra: {},
   }),
+  words: SHARED_WORDS,
+  catalogue: CATALOGUE_FACTS,
   ...changes,
 });
 
@@ -75,14 +86,40 @@ export interface FakePorts extends ScreenPorts {
   readonly complaints: string[];
 }
 
-export function fakePorts(columns = 80, rows = 24, changes: Partial<ScreenPorts> = {}): FakePorts {
+export function fakePorts(
+  columns = 80,
+  rows = 24,
+  { engine: by = engine, ...changes }: Partial<ScreenPorts> & { readonly engine?: EnginePort } = {},
+): FakePorts {
   const screen = new Screen(columns, rows);
   const kept: FakePorts["kept"] = { session: null, aside: null };
   const files = new Map<string, string>();
   const complaints: string[] = [];
+  const exportBill: Workshop["exportBill"] = (bill, path, replace): SaveAnswer => {
+    if (files.has(path) && !replace) return { kind: "exists", path };
+    if (path.startsWith("/full/")) return { kind: "trouble", words: "the disk is full" };
+    files.set(path, bill.layout);
+    return { kind: "saved", path };
+  };
   return {
-    engine,
-    stock: STOCK,
+    open: async () => ({
+      ok: true,
+      value: {
+        engine: by,
+        stock: changes.stock ?? STOCK,
+        words: SHARED_WORDS,
+        exportBill,
+        units: unitsOn(parts(), {
+          read: (path) => refused({ code: "no-such-file", place: { file: path }, read: "nothing", want: "a file" }),
+          write: (path) => accepted(path),
+        }),
+        catalogue: CATALOGUE_FACTS,
+        overrides: {},
+        saveOverrides: () => ({ kind: "saved", path: "" }),
+      },
+    }),
+    watch: () => () => {},
+    stock: { ...STOCK, parts: 0 },
     brief: BRIEF,
     briefFirst: false,
     extra: {},
@@ -94,12 +131,6 @@ export function fakePorts(columns = 80, rows = 24, changes: Partial<ScreenPorts>
     keepSession: () => {
       kept.aside = kept.session;
       return "session.unread";
-    },
-    exportBill: (bill, path, replace): SaveAnswer => {
-      if (files.has(path) && !replace) return { kind: "exists", path };
-      if (path.startsWith("/full/")) return { kind: "trouble", words: "the disk is full" };
-      files.set(path, bill.layout);
-      return { kind: "saved", path };
     },
     complain: (line) => complaints.push(line),
     stdin: new FakeKeyboard(),

@@ -1,8 +1,10 @@
 // When the engine is asked: within the frame when quick, after it when slow, in full when the keys rest.
 import { afterEach, beforeEach, expect, test, vi } from "vitest";
 import { makeAsker } from "../../src/tui/asker.ts";
+import type { EnginePort } from "../../src/tui/ports.ts";
 import type { Message, State } from "../../src/tui/state.ts";
 import { engine, stateWith } from "../support/stock.ts";
+import { NO_THREAD } from "../support/threads.ts";
 
 beforeEach(() => void vi.useFakeTimers());
 afterEach(() => void vi.useRealTimers());
@@ -12,15 +14,17 @@ function open(took: number, values?: State["values"]) {
   let clock = 0;
   const quick: boolean[] = [];
   const answers: Message[] = [];
-  const asker = makeAsker({
-    engine: {
-      ...engine,
-      plan: (brief, request) => {
-        quick.push(request.quick);
-        clock += took;
-        return engine.plan(brief, request);
-      },
+  const counted: EnginePort = {
+    ...engine,
+    plan: (brief, request) => {
+      quick.push(request.quick);
+      clock += took;
+      return engine.plan(brief, request);
     },
+  };
+  const asker = makeAsker({
+    engine: () => counted,
+    longWork: NO_THREAD,
     state: () => state,
     send: (message) => answers.push(message),
     now: () => clock,

@@ -1,6 +1,7 @@
 // The engine behind the screens against the search itself.
 import { describe, expect, test } from "vitest";
 import { DEFAULT_FAMILY } from "../../src/catalog/index.ts";
+import { accepted, refused } from "../../src/quantity/index.ts";
 import { plan, readBrief } from "../../src/search/index.ts";
 import { arrangementNamed, catalogEngine } from "../../src/tui/catalogEngine.ts";
 import { BRIEF, engine, parts } from "../support/stock.ts";
@@ -67,4 +68,34 @@ test.each([
   ["a 6s10p", null],
 ])("arrangementNamed(%j)", (id, want) => {
   expect(arrangementNamed(id)).toEqual(want);
+});
+
+describe("readBrief(values) with files", () => {
+  const files = {
+    read: (path: string) =>
+      path === "shot.csv"
+        ? accepted("time [ms],current [A]\n0,0\n1,100\n2,0\n")
+        : refused({ code: "no-file", place: { file: path }, read: path, want: "a file that can be read" }),
+  };
+  const own = catalogEngine({ parts: parts(), families: [DEFAULT_FAMILY], files });
+
+  test("a recorded current named on the form is read, and its shot is reckoned", () => {
+    const values = { ...BRIEF, load: { recorded: "shot.csv" } };
+    const found = own.readBrief(values);
+    expect(found.ok && found.value.load?.recorded).toEqual([
+      [0, 0],
+      [0.001, 100],
+      [0.002, 0],
+    ]);
+    const planned = found.ok ? own.plan(found.value, request) : found;
+    const first = planned.ok ? planned.value.layouts[0] : undefined;
+    const shot = found.ok && first ? own.shot(found.value, first) : null;
+    expect(shot?.report.ok && shot.report.value.discharge.peakCurrent).toBe(100);
+  });
+
+  test("a file that is not there is refused at its field; without files at all the path stays unread", () => {
+    const found = own.readBrief({ ...BRIEF, load: { recorded: "gone.csv" } });
+    expect(found.ok ? [] : found.refusals.map(({ place }) => place.field)).toEqual(["load.recorded"]);
+    expect(engine.readBrief({ ...BRIEF, load: { recorded: "gone.csv" } }).ok).toBe(true);
+  });
 });

@@ -1,7 +1,7 @@
 // Side by side: the best and the worst found by the right end, unknown never the best, agreement seen.
 import { describe, expect, test } from "vitest";
 import type { LayoutResult } from "../../src/search/index.ts";
-import { compareLayouts } from "../../src/tui/comparison.ts";
+import { compareLayouts, foldedRows } from "../../src/tui/comparison.ts";
 import { BRIEF, engine } from "../support/stock.ts";
 
 const read = engine.readBrief(BRIEF);
@@ -59,5 +59,36 @@ describe("compareLayouts(layouts)", () => {
     const near = made({ mass: (base.mass ?? 1) * (1 + 1e-9) });
     expect(row([base, near], "mass").agrees).toBe(true);
     expect(standings([base, near], "mass")).toEqual([null, null]);
+  });
+});
+
+describe("differences and order", () => {
+  test("the difference to the best has its sign and unit, absolute and relative; the best has none", () => {
+    const masses = [3, 2].map((mass) => made({ mass }));
+    expect(row(masses, "mass").cells.map(({ difference, beyondBest }) => [difference, beyondBest])).toEqual([
+      ["+1 kg", 0.5],
+      [null, null],
+    ]);
+    const energies = [1e3, 2e3].map((low) => made({ energy: { low, nominal: low, high: low } }));
+    expect(row(energies, "energy, least").cells[0]).toMatchObject({ difference: "-1 kJ", beyondBest: -0.5 });
+  });
+  test("a part of a whole differs in points, not in percent of a percent", () => {
+    const cell = row([made({ stress: 0.9 }), made({ stress: 0.8 })], "worst of rating").cells[0];
+    expect(cell).toMatchObject({ difference: "+10 points", beyondBest: null });
+  });
+  test("order: best first by its right end, unknown last, names by letter, alike as they stand", () => {
+    const masses = [3, null, 1, 2].map((mass) => made({ mass }));
+    expect(row(masses, "mass").order).toEqual([2, 3, 0, 1]);
+    const energies = [1, 3, 2].map((low) => made({ energy: { low, nominal: low, high: low } }));
+    expect(row(energies, "energy, least").order).toEqual([1, 2, 0]);
+    expect(row([made({ part: "b" }), made({ part: "a" })], "part").order).toEqual([1, 0]);
+    expect(row([base, base], "mass").order).toEqual([0, 1]);
+  });
+  test("foldedRows: what agrees is folded unless asked for; one layout has all its rows", () => {
+    const pair = [base, made({ mass: 1 })];
+    expect(foldedRows(pair, false).shown.map(({ label }) => label)).toEqual(["mass"]);
+    expect(foldedRows(pair, false).folded.length + 1).toBe(compareLayouts(pair).length);
+    expect(foldedRows(pair, true).folded).toEqual([]);
+    expect(foldedRows([base], false).shown.length).toBeGreaterThan(10);
   });
 });

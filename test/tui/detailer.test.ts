@@ -7,6 +7,7 @@ import type { EnginePort } from "../../src/tui/ports.ts";
 import type { State } from "../../src/tui/state.ts";
 import { update } from "../../src/tui/update/update.ts";
 import { engine, stateWith } from "../support/stock.ts";
+import { NO_THREAD } from "../support/threads.ts";
 
 afterEach(() => void vi.useRealTimers());
 
@@ -28,7 +29,8 @@ function rig(begun: State) {
   const counted = { ...engine, rest: told("rest"), margin: told("margin"), spread: told("spread"), shot: told("shot") };
   const at = { state: begun };
   const detailer = makeDetailer({
-    engine: counted,
+    engine: () => counted,
+    longWork: NO_THREAD,
     state: () => at.state,
     send: (message) => {
       at.state = update(at.state, message).state;

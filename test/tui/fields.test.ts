@@ -37,6 +37,13 @@ test("valueIn(brief, field): a point in the key goes one level down; without a l
   const without = readBrief({ energy: 1, voltage: 1, ripple: 1 });
   if (!read.ok || !without.ok) throw new Error("a brief with a load is refused");
   const fields = FIELDS.filter(({ key }) => key.startsWith("load."));
-  expect(fields.map((field) => shownValue(field, valueIn(read.value, field)))).toEqual(["50 mohm", "20 \u00b5H"]);
-  expect(fields.map((field) => shownValue(field, valueIn(without.value, field)))).toEqual(["", ""]);
+  expect(fields.map((field) => shownValue(field, valueIn(read.value, field)))).toEqual(["50 mohm", "20 \u00b5H", ""]);
+  expect(fields.map((field) => shownValue(field, valueIn(without.value, field)))).toEqual(["", "", ""]);
+  const field = FIELDS.find(({ key }) => key === "load.recorded") ?? fieldAt(0);
+  expect(
+    shownValue(field, [
+      [0, 0],
+      [1, 2],
+    ]),
+  ).toBe("2 samples");
 });

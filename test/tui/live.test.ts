@@ -4,7 +4,7 @@ import { lineOf } from "../../src/tui/line.ts";
 import * as live from "../../src/tui/live.ts";
 import { stateWith } from "../support/stock.ts";
 
-const question = { line: lineOf("a.csv"), replace: false };
+const question = { what: "order" as const, line: lineOf("a.csv"), replace: false };
 
 test.each([
   ["open form", stateWith(), { isOpen: true, types: true, isFree: false, onChoice: false, asksName: false }],

@@ -23,8 +23,11 @@ describe("drawRow(row, columns, look)", () => {
     expect(drawRow(rowOf(span("24 kΩ")), 6, { ...look, ascii: true })).toBe("24 ko~");
   });
   test("styles with colour and without: no colour code under NO_COLOR", () => {
-    expect(drawRow(rowOf(span("x", "bad")), 5, { colour: true, ascii: false })).toBe(
+    expect(drawRow(rowOf(span("x", "bad")), 5, { colour: true, ascii: false, palette: "light16" })).toBe(
       "\x1b[1m\x1b[31mx\x1b[39m\x1b[22m",
+    );
+    expect(drawRow(rowOf(span("x", "good")), 5, { colour: true, ascii: false, palette: "dark256" })).toBe(
+      "\x1b[38;5;114mx\x1b[39m",
     );
     expect(drawRow(rowOf(span("x", "bad")), 5, look)).toBe("\x1b[1mx\x1b[22m");
     expect(drawRow(rowOf(span("x", "good")), 5, look)).toBe("x");

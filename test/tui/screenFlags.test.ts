@@ -2,7 +2,7 @@
 import { expect, test } from "vitest";
 import { screenFlags } from "../../src/tui/screenFlags.ts";
 
-const none = { catalog: [], resistors: null, brief: null, ascii: false };
+const none = { catalog: [], resistors: null, brief: null, ascii: false, ground: null };
 
 test.each([
   [[], none],
@@ -17,14 +17,19 @@ test.each([
     ["--catalog", "a.csv", "--catalog", "b.csv", "--brief", "b.json"],
     { ...none, catalog: ["a.csv", "b.csv"], brief: "b.json" },
   ],
+  [["--light"], { ...none, ground: "light" }],
+  [["--dark", "--ascii"], { ...none, ground: "dark", ascii: true }],
+  [["--dark", "--light"], null],
   // not ours
   [["plan"], null],
   [["plan", "--catalog", "a.csv"], null],
   [["--help"], null],
   [["--version"], null],
-  [["--catalog"], null],
-  [["--catalog", "--ascii"], { ...none, ascii: true }],
-  [["--resistors"], null],
+  [["--catalog"], { missing: "--catalog" }],
+  [["--catalog", "--ascii"], { missing: "--catalog" }],
+  [["--ascii", "--brief"], { missing: "--brief" }],
+  [["plan", "--catalog"], null],
+  [["--resistors"], { missing: "--resistors" }],
   [["--ascii=yes"], null],
   [["--catalogue", "a.csv"], null],
   [["a.csv"], null],

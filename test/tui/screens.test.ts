@@ -2,7 +2,7 @@
 import { afterEach, describe, expect, test } from "vitest";
 import { savedText } from "../../src/tui/saved.ts";
 import { openScreens } from "../../src/tui/screens.ts";
-import { SCREENS } from "../../src/tui/state.ts";
+import { SCREEN_KEYS, SCREENS } from "../../src/tui/state.ts";
 import { BRIEF, type FakePorts, fakePorts, stateWith } from "../support/stock.ts";
 
 let ports: FakePorts;
@@ -102,9 +102,9 @@ describe("from the list to the order", () => {
   test("the caution stands on every screen", async () => {
     open(60, 20);
     await until((t) => t.includes("layouts fit"));
-    for (const key of ["\x1b1", "\x1b2", "\x1b3", "\x1b4", "\x1b5", "\x1b6", "\x1b7"]) {
-      type(key);
-      await until((t) => t.includes(`[${SCREENS[Number(key.at(-1)) - 1]}]`) && t.includes("energy can kill"));
+    for (const screen of SCREENS) {
+      type(`\x1b${SCREEN_KEYS[screen]}`);
+      await until((t) => t.includes(`[${SCREEN_KEYS[screen]} ${screen}]`) && t.includes("energy can kill"));
     }
   });
 });
@@ -229,7 +229,7 @@ describe("the terminal's moods", () => {
     expect(ports.screen.written).not.toMatch(colours);
     ports.process.send("SIGTERM");
     await ended;
-    open(80, 24);
+    open(80, 24, { env: { TERM: "xterm-256color" } });
     await until((t) => t.includes("layouts fit"));
     expect(ports.screen.written).toMatch(colours);
   });

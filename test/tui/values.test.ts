@@ -81,3 +81,7 @@ describe("worstVerdict(layout), shownVerdict(layout)", () => {
     expect(list.map((f) => f.id)).toEqual(["a", "b", "c", "d"]);
   });
 });
+
+test("grouped(count): thousands apart by commas", () => {
+  expect([0, 999, 1000, 65_536, 1_234_567].map(values.grouped)).toEqual(["0", "999", "1,000", "65,536", "1,234,567"]);
+});

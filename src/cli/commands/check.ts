@@ -6,6 +6,7 @@ import { formatQuantity } from "../../quantity/index.ts";
 import { askedText } from "../askedText.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, type Checked, checkedBank } from "../checked.ts";
+import { type BlendBankFlags, checkedBlend } from "../checkedBlend.ts";
 import { cornerLines } from "../cornerLines.ts";
 import { courseText } from "../courseText.ts";
 import { EXIT } from "../exit.ts";
@@ -22,7 +23,7 @@ import { toJson } from "../toJson.ts";
 import { readWitness, unwitnessed, type Witness, type WitnessFlags, witnessOf } from "../witness.ts";
 import { bullet, wrap } from "../wrap.ts";
 
-export type CheckFlags = BankFlags & WitnessFlags;
+export type CheckFlags = BlendBankFlags & WitnessFlags;
 
 export function checkCommand(brief: string | undefined, flags: BankFlags, ports: Ports): number {
   const checked = checkedBank(brief, flags, ports);
@@ -34,6 +35,13 @@ export function checkCommand(brief: string | undefined, flags: BankFlags, ports:
 export async function checkWitnessed(brief: string | undefined, flags: CheckFlags, ports: Ports): Promise<number> {
   const ask = readWitness(flags);
   if (!ask.ok) return tell(ports, ask.refusals, flags.json);
+  const mixed = checkedBlend(brief, flags, ports);
+  if (!mixed.ok) return tell(ports, mixed.refusals, flags.json);
+  if (mixed.value !== null) {
+    if (ask.value === null) return (await import("./checkBlend.ts")).blendChecked(mixed.value, flags.json, ports);
+    const want = "one layout: a blend shares safely in the worst case, so there is no chance to draw";
+    return tell(ports, [{ code: "contradiction", place: { field: "--witness" }, read: "a blend", want }], flags.json);
+  }
   if (ask.value === null) return checkCommand(brief, flags, ports);
   const checked = checkedBank(brief, flags, ports);
   if (!checked.ok) return tell(ports, checked.refusals, flags.json);

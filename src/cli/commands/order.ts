@@ -7,24 +7,28 @@ import {
   type BillFormat,
   billOf,
   billText,
+  blendBillOf,
   type Money,
   readEditedBill,
   visible,
   withEdits,
 } from "../../order/index.ts";
-import { accepted, nearestWord, type Read, type Refusal } from "../../quantity/index.ts";
+import { accepted, type Read } from "../../quantity/index.ts";
 import { type FuseChoice, fittedFuse } from "../../search/index.ts";
 import { changeLines } from "../billChanges.ts";
 import { cautionsOf } from "../cautions.ts";
-import { type BankFlags, checkedBank } from "../checked.ts";
+import { checkedBank } from "../checked.ts";
+import { type BlendBankFlags, type CheckedBlend, checkedBlend } from "../checkedBlend.ts";
+import { chosenFormat } from "../chosenFormat.ts";
 import { EXIT } from "../exit.ts";
 import { titleOf } from "../findingWords.ts";
 import { readFuseStock } from "../fuses.ts";
 import { faultLines } from "../inputNotes.ts";
+import { outputOf } from "../paperOutput.ts";
 import type { Ports } from "../ports.ts";
 import { tell } from "../tell.ts";
 
-export type OrderFlags = BankFlags & {
+export type OrderFlags = BlendBankFlags & {
   readonly format?: string;
   readonly fuses?: string;
   readonly edited?: string;
@@ -33,19 +37,22 @@ export type OrderFlags = BankFlags & {
 };
 
 export function orderCommand(brief: string | undefined, flags: OrderFlags, ports: Ports): number {
-  const format = readFormat(flags);
-  if (flags.output?.trim() === "") {
-    const want = "the name of a file; - for the output";
+  const format = chosenFormat(flags, BILL_FORMATS, "csv");
+  const output = outputOf(flags.output);
+  const mixed = checkedBlend(brief, flags, ports);
+  if (!mixed.ok || mixed.value !== null) {
+    if (format.ok && output.ok && mixed.ok && mixed.value !== null)
+      return orderBlend(mixed.value, { format: format.value, path: output.value }, flags, ports);
     return tell(
       ports,
-      [{ code: "empty", place: { field: "--output" }, read: JSON.stringify(flags.output), want }],
+      [format, output, mixed].flatMap((one) => (one.ok ? [] : one.refusals)),
       flags.json,
     );
   }
   const checked = checkedBank(brief, flags, ports);
-  if (!checked.ok || typeof format !== "string") {
-    const faults = [...(typeof format === "string" ? [] : [format]), ...(checked.ok ? [] : checked.refusals)];
-    return tell(ports, faults, flags.json);
+  if (!format.ok || !output.ok || !checked.ok) {
+    const refusals = [format, output, checked].flatMap((one) => (one.ok ? [] : one.refusals));
+    return tell(ports, refusals, flags.json);
   }
   const { result, unit, settings, stock, currency, notes } = checked.value;
   const cautions = cautionsOf(settings.brief, { layout: result, unit }).map(({ text }) => text);
@@ -59,7 +66,7 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
   const edited = editedOf(fresh, flags.edited, { currency, exchange: asked.exchange }, ports);
   if (!edited.ok) return tell(ports, edited.refusals, flags.json);
   const bill = edited.value;
-  const text = billText(bill, format);
+  const text = billText(bill, format.value);
   const said = [
     ...faultLines(stock),
     ...(fuses?.value.lost ?? []),
@@ -70,14 +77,65 @@ export function orderCommand(brief: string | undefined, flags: OrderFlags, ports
   for (const finding of result.findings)
     if (finding.verdict === "fail")
       said.push(`FAIL, ${titleOf(finding.id)}: ${visible(finding.note)} Do not buy this bank.`);
+  const lost = handOut({ text, lines: bill.lines.length, said, path: output.value }, flags, ports);
+  return lost ?? (result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done);
+}
+
+interface Written {
+  readonly text: string;
+  readonly lines: number;
+  readonly said: readonly string[];
+  /** Null for the output. */
+  readonly path: string | null;
+}
+
+/** Writes the bill where it was asked for; the exit status when it could not be. */
+function handOut({ text, lines, said, path }: Written, flags: OrderFlags, ports: Ports): number | null {
   if (said.length > 0) ports.err(`${said.join("\n")}\n`);
-  if (flags.output === undefined || flags.output === "-") ports.out(text);
+  if (path === null) ports.out(text);
   else {
-    const written = ports.files.write(flags.output, text, flags.force === true);
+    const written = ports.files.write(path, text, flags.force === true);
     if (!written.ok) return tell(ports, written.refusals, flags.json);
-    ports.err(`${visible(flags.output)}: ${bill.lines.length} lines written\n`);
+    ports.err(`${visible(path)}: ${lines} lines written\n`);
   }
-  return result.findings.some((f) => f.verdict === "fail") ? EXIT.unsafe : EXIT.done;
+  return null;
+}
+
+/** The bill of a blend. Fuses are chosen for one layout at a time. */
+function orderBlend(
+  checked: CheckedBlend,
+  { format, path }: { readonly format: BillFormat; readonly path: string | null },
+  flags: OrderFlags,
+  ports: Ports,
+): number {
+  if (flags.edited !== undefined) {
+    const want = "one layout: what its builder wrote is kept by line, and a blend has the same line for every group";
+    return tell(ports, [{ code: "contradiction", place: { field: "--edited" }, read: "a blend", want }], flags.json);
+  }
+  if (flags.fuses !== undefined) {
+    const want =
+      "one layout: a fuse of a blend must clear on what all the other groups bring, which is not reckoned yet";
+    return tell(ports, [{ code: "contradiction", place: { field: "--fuses" }, read: "a blend", want }], flags.json);
+  }
+  const { blend, units, settings, stock, currency, cautions, notes } = checked;
+  const { brief } = settings;
+  const bill = blendBillOf({
+    blend,
+    units,
+    families: stock.families,
+    brief,
+    currency,
+    cautions: cautions.map(({ text }) => text),
+  });
+  const findings = [...blend.findings, ...blend.strings.flatMap((one) => one.findings)];
+  const fails = findings.filter((f) => f.verdict === "fail");
+  const said = [
+    ...faultLines(stock),
+    ...notes,
+    ...fails.map(({ id, note }) => `FAIL, ${titleOf(id)}: ${visible(note)} Do not buy this bank.`),
+  ];
+  const lost = handOut({ text: billText(bill, format), lines: bill.lines.length, said, path }, flags, ports);
+  return lost ?? (fails.length > 0 ? EXIT.unsafe : EXIT.done);
 }
 
 /** The bill with what its builder wrote in an earlier copy. */
@@ -98,20 +156,4 @@ function fuseSaid(fuse: FuseChoice | null): readonly string[] {
   return [
     `No fuse of the catalogue is proven to do${why}: the line stays to be chosen. See: joulewright pulse --fuses.`,
   ];
-}
-
-/** The format named, else that of the file's ending, else CSV; --json is the format json. */
-function readFormat({ format, json, output }: OrderFlags): BillFormat | Refusal {
-  const ending = /\.([a-z]+)$/i
-    .exec(output ?? "")?.[1]
-    ?.toLowerCase()
-    .replace(/^htm$/, "html")
-    .replace(/^markdown$/, "md");
-  const named = format?.toLowerCase() ?? (json ? "json" : undefined);
-  const wanted = named ?? BILL_FORMATS.find((one) => one === ending) ?? "csv";
-  const found = BILL_FORMATS.find((one) => one === wanted);
-  if (found !== undefined) return found;
-  const near = nearestWord(wanted, BILL_FORMATS);
-  const want = `${near === null ? "" : `perhaps ${JSON.stringify(near)}; `}one of ${BILL_FORMATS.join(", ")}`;
-  return { code: "bad-choice", place: { field: "--format" }, read: JSON.stringify(wanted), want };
 }

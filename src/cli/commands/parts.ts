@@ -4,6 +4,7 @@ import { visible, visibleJson } from "../../order/index.ts";
 import type { Refusal } from "../../quantity/index.ts";
 import { EXIT } from "../exit.ts";
 import { withWords } from "../inputNotes.ts";
+import { laidOver } from "../overrides.ts";
 import type { Ports } from "../ports.ts";
 import { readAnyTable, type ToldRow, type ToldTable } from "../readAnyTable.ts";
 import { tell } from "../tell.ts";
@@ -38,7 +39,7 @@ export function partsCommand(paths: readonly string[], flags: PartsFlags, ports:
   for (const path of paths) {
     const file = path === "-" ? "standard input" : path;
     const text = ports.files.read(path);
-    const read = text.ok ? readAnyTable(text.value, file) : text;
+    const read = text.ok ? readAnyTable(text.value, file, (parts) => laidOver(path, parts, ports.files)) : text;
     if (!read.ok) {
       lost.push(...read.refusals);
       continue;

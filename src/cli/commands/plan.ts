@@ -4,6 +4,7 @@ import { accepted, nearestWord, type Read, type Refusal, refused } from "../../q
 import { briefJsonSchema, type PlanResult, plan, RANKINGS, type Ranking } from "../../search/index.ts";
 import { cautionsOf } from "../cautions.ts";
 import { EXIT } from "../exit.ts";
+import { readFuseStock } from "../fuses.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { lampFits } from "../lampFits.ts";
 import { LAYOUT_VERSION } from "../layoutInput.ts";
@@ -20,6 +21,7 @@ import { refusalWords } from "../words.ts";
 export interface PlanFlags extends Flags {
   readonly catalog?: readonly string[];
   readonly resistors?: string;
+  readonly fuses?: string;
   readonly limit?: string;
   readonly rank?: string;
   readonly json?: boolean;
@@ -70,6 +72,10 @@ export function planFrom(brief: string | undefined, flags: PlanFlags, ports: Por
   const { parts, families } = stock.value;
   const given = { settings: settings.value, stock: stock.value, rank };
   const { basis } = settings.value.brief;
+  if (flags.measured !== undefined && (flags.fuses !== undefined || settings.value.brief.fused === true)) {
+    const want = "fuses counted by the order or the pulse of the bank chosen; a plan on a measured lot leaves them out";
+    return refused({ code: "contradiction", place: { field: "--fuses" }, read: "beside --measured", want });
+  }
   if (basis === "statistical" && flags.measured !== undefined) {
     const lot = planLot(flags, { ...given, limit }, ports);
     if (!lot.ok) return lot;
@@ -87,9 +93,20 @@ export function planFrom(brief: string | undefined, flags: PlanFlags, ports: Por
     if (lot.value.faults.length > 0) ports.err(`${lot.value.faults.map(refusalWords).join("\n")}\n`);
     return accepted({ ...given, result: lot.value.result, lot: lot.value, drawn: null });
   }
-  const planned = plan({ brief: settings.value.brief, parts, families, limit, rank });
+  const fuses = flags.fuses === undefined ? null : readFuseStock(flags.fuses, ports.files, settings.value.brief, null);
+  if (fuses !== null && !fuses.ok) return fuses;
+  if (fuses !== null && fuses.value.lost.length > 0) ports.err(`${fuses.value.lost.join("\n")}\n`);
+  // a fuse catalogue that is named is meant to be used
+  const asked = fuses === null ? settings.value.brief : { ...settings.value.brief, fused: true };
+  const planned = plan({ brief: asked, parts, families, fuses: fuses?.value.fuses ?? null, limit, rank });
   if (!planned.ok) return planned;
-  return accepted({ ...given, result: planned.value, lot: null, drawn: null });
+  return accepted({
+    ...given,
+    settings: { ...settings.value, brief: asked },
+    result: planned.value,
+    lot: null,
+    drawn: null,
+  });
 }
 
 /** Rows that were lost, on the error stream. */

@@ -71,11 +71,11 @@ export function pulseCommand(brief: string | undefined, flags: PulseFlags, ports
   const lines = [...faultLines(stock), ...lost];
   if (lines.length > 0) ports.err(`${lines.join("\n")}\n`);
   if (flags.waveform !== undefined && flags.waveform !== "-") {
-    const written = ports.files.write(flags.waveform, waveformCsv(report.discharge), flags.force === true);
+    const written = ports.files.write(flags.waveform, waveformCsv(report), flags.force === true);
     if (!written.ok) return tell(ports, written.refusals, flags.json);
     ports.err(`${visible(flags.waveform)}: waveform written\n`);
   }
-  if (flags.waveform === "-") ports.out(waveformCsv(report.discharge));
+  if (flags.waveform === "-") ports.out(waveformCsv(report));
   else ports.out(flags.json ? pulseJson(fired.value) : pulseText(fired.value, ports.columns));
   return failed(report.findings) > 0 ? EXIT.unsafe : EXIT.done;
 }

@@ -58,6 +58,7 @@ function write(model: BlendModel, runs: readonly Run[]): BlendProgram {
     .map((name) => ({ name, room: roomUnder(model.ceilings[name]), terms: [] as [number, number][] }));
   const types: [number, number][] = [];
   const perPart = new Map<number, [number, number][]>();
+  const uses = new Map<number, [number, number][]>();
   const rows: ProgramRow[] = [];
   const strings: { option: number; each: number }[] = [];
   const need = capacityNeeded(model.requirement);
@@ -74,6 +75,7 @@ function write(model: BlendModel, runs: readonly Run[]): BlendProgram {
     const from = model.options[run.option]!;
     const chosen = column(run.option, run.base, from.costs[run.base]!, 1);
     types.push([chosen, 1]);
+    uses.set(run.option, [...(uses.get(run.option) ?? []), [chosen, 1]]);
     perPart.set(from.partIndex, [...(perPart.get(from.partIndex) ?? []), [chosen, 1]]);
     if (run.last === run.base) continue;
     const span = run.last - run.base;
@@ -91,7 +93,30 @@ function write(model: BlendModel, runs: readonly Run[]): BlendProgram {
   for (const { terms, room } of ceilings) rows.push({ terms, least: Number.NEGATIVE_INFINITY, most: room > 0 ? 1 : 0 });
   rows.push({ terms: types, least: Number.NEGATIVE_INFINITY, most: model.maxTypes });
   for (const terms of perPart.values()) rows.push({ terms, least: Number.NEGATIVE_INFINITY, most: 1 });
+  addShipments(model, uses, columns, rows);
   return { program: { columns, rows }, read: (values) => readCounts(strings, values) };
+}
+
+/** A binary for each shipment that costs something, 1 as soon as an option that needs it is used. Last, for they bring no strings. */
+function addShipments(
+  model: BlendModel,
+  uses: ReadonlyMap<number, readonly (readonly [number, number])[]>,
+  columns: ProgramColumn[],
+  rows: ProgramRow[],
+): void {
+  const sent = new Map<number, number>();
+  for (const [option, chosen] of uses) {
+    for (const supplier of model.options[option]!.suppliers ?? []) {
+      const cost = model.shipments![supplier]!;
+      if (cost === 0) continue;
+      let at = sent.get(supplier);
+      if (at === undefined) {
+        at = columns.push({ cost, most: 1, whole: true }) - 1;
+        sent.set(supplier, at);
+      }
+      rows.push({ terms: [...chosen, [at, -1]], least: Number.NEGATIVE_INFINITY, most: 0 });
+    }
+  }
 }
 
 function readCounts(

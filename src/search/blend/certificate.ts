@@ -5,13 +5,14 @@ import { BOUND_SLACK, dualPoint, evaluateDual, type Multipliers } from "./dual.t
 import { type BlendAnswer, NO_PRICES } from "./findBlend.ts";
 import type { BlendCount, BlendModel } from "./model.ts";
 import { buildPool } from "./pool.ts";
+import { allShipments, withShares } from "./shipments.ts";
 
 export interface BlendCertificate {
   /** The claim: this blend is the cheapest; null with no counts claims that no blend exists. */
   readonly cost: number | null;
   readonly counts: readonly BlendCount[];
   readonly prices: Multipliers;
-  /** Value of the Lagrangian bound at the prices, over all options. */
+  /** Value of the Lagrangian bound at the prices, over all options, each charged its share of the shipments it needs. */
   readonly bound: number;
   /** Every option and count that a cheaper blend could use by that bound: all else is ruled out by arithmetic alone. */
   readonly survivors: readonly { readonly option: number; readonly strings: readonly number[] }[];
@@ -20,7 +21,7 @@ export interface BlendCertificate {
 /** One more than any blend of so many types could cost, from the last entries of the tables. */
 export function costBeyond(model: BlendModel): number {
   const last = model.options.map((option) => option.costs[option.maxStrings]!).sort((a, b) => b - a);
-  return last.slice(0, model.maxTypes).reduce((sum, cost) => sum + cost, 0) + 1;
+  return last.slice(0, model.maxTypes).reduce((sum, cost) => sum + cost, 0) + allShipments(model) + 1;
 }
 
 /** Writes the proof of a settled answer; null when the search was stopped. Builds every cost table. */
@@ -28,7 +29,8 @@ export function certify(model: BlendModel, answer: BlendAnswer): BlendCertificat
   if (answer.status === "stopped") return null;
   const cost = answer.best?.cost ?? null;
   const counts = answer.best?.counts ?? [];
-  const pool = buildPool(model, null, true);
+  const shared = withShares(model);
+  const pool = buildPool(shared, null, true);
   const point = dualPoint();
   if (cost === null && answer.prices.cost === 0) {
     evaluateDual(pool, answer.prices, model.maxTypes, point);
@@ -44,7 +46,7 @@ export function certify(model: BlendModel, answer: BlendAnswer): BlendCertificat
   const settled = point.value >= threshold - 1 + BOUND_SLACK;
   const survivors = settled
     ? []
-    : buildCore(model, pool, prices, threshold).columns.map(({ option, strings }) => ({
+    : buildCore(shared, pool, prices, threshold).columns.map(({ option, strings }) => ({
         option,
         strings: [...strings].sort((a, b) => a - b),
       }));

@@ -2,6 +2,7 @@
 import { BOUND_SLACK, dualPoint, evaluateDual, type Multipliers, worth } from "./dual.ts";
 import type { BlendModel } from "./model.ts";
 import type { Pool } from "./pool.ts";
+import { shareOf, shipmentShares } from "./shipments.ts";
 
 /** Least reduced cost of column k with at least one string, over its hull. */
 export function reducedCost(pool: Pool, k: number, prices: Multipliers): number {
@@ -52,6 +53,9 @@ export interface CoreColumn {
   readonly mass: number;
   readonly units: number;
   readonly most: number;
+  /** Whom it needs a shipment from, and the part of `costs` that is its share of them. */
+  readonly suppliers: readonly number[];
+  readonly share: number;
   readonly costs: Float64Array;
   /** Surviving counts and their reduced costs, ascending by the latter. */
   readonly strings: Int32Array;
@@ -72,6 +76,7 @@ export interface Core {
 export function buildCore(model: BlendModel, pool: Pool, prices: Multipliers, threshold: number): Core {
   const at = standing(pool, prices, model.maxTypes);
   const slack = Math.max(0, threshold - 1 + BOUND_SLACK - at.value);
+  const shares = shipmentShares(model);
   const columns: CoreColumn[] = [];
   let pairs = 0;
   for (let k = 0; k < pool.size; k += 1) {
@@ -95,6 +100,8 @@ export function buildCore(model: BlendModel, pool: Pool, prices: Multipliers, th
       mass: pool.mass[k]!,
       units: pool.units[k]!,
       most: pool.most[k]!,
+      suppliers: from.suppliers ?? [],
+      share: shareOf(from, shares),
       costs: from.costs,
       strings: Int32Array.from(kept, ({ x }) => x),
       reduced: Float64Array.from(kept, ({ reduced }) => reduced),

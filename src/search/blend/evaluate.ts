@@ -1,8 +1,9 @@
 // Adds up a blend from the model alone and says whether it fits; every engine's answer goes through here.
 import { type BlendCount, type BlendModel, FIT_TOLERANCE } from "./model.ts";
+import { shipmentCost } from "./shipments.ts";
 
 export interface BlendTotals {
-  /** Whole minor units of money. */
+  /** Whole minor units of money, shipments included. */
   readonly cost: number;
   /** F, m3, kg, number of units, number of string types. */
   readonly capacity: number;
@@ -29,6 +30,8 @@ export function blendTotals(model: BlendModel, counts: readonly BlendCount[]): B
     totals.units += option.units * strings;
     totals.types += 1;
   }
+  const used = counts.filter(({ strings }) => strings > 0).map(({ option }) => option);
+  totals.cost += shipmentCost(model, used);
   return totals;
 }
 

@@ -3,10 +3,11 @@ import { type Ascent, ascendCost, ascendFeasibility, ascendFrom } from "./ascent
 import { buildCapacityBound, type CapacityBound, rootBound, stepsWithin } from "./capacityBound.ts";
 import { buildCore, standing, survivingOptions } from "./core.ts";
 import { BOUND_SLACK, type Multipliers, wholeBound } from "./dual.ts";
-import { isFittingBlend, tidyCounts } from "./evaluate.ts";
+import { blendTotals, isFittingBlend, tidyCounts } from "./evaluate.ts";
 import type { BlendModel } from "./model.ts";
 import { buildPool } from "./pool.ts";
 import { pricedCeilings } from "./pricedCeilings.ts";
+import { withShares } from "./shipments.ts";
 import { bestSingle, beyondAnyCost, type FoundBlend } from "./singles.ts";
 import { thinCore } from "./thinCore.ts";
 import { tightenCore } from "./tightenCore.ts";
@@ -65,7 +66,9 @@ export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAns
     most: limits.work ?? Number.POSITIVE_INFINITY,
     stop: limits.stop ?? (() => false),
   };
-  const pool = buildPool(model, null, false);
+  // Bounds and walks see shipments as shares, never too much of them; what is found is counted in full.
+  const shared = withShares(model);
+  const pool = buildPool(shared, null, false);
   let best = bestSingle(model, pool);
   let core = { options: 0, pairs: 0 };
   let lower = 0;
@@ -105,12 +108,12 @@ export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAns
         options = all;
       }
     }
-    const near = buildPool(model, options, true);
+    const near = buildPool(shared, options, true);
     const closer = ascendFrom(near, model.maxTypes, ascent.prices, threshold - 1 + 2 * BOUND_SLACK, 16);
     lower = Math.max(lower, Math.min(threshold, wholeBound(closer.value)));
     rise *= RISE;
     if (lower >= threshold) continue;
-    const whole = buildCore(model, near, closer.value >= ascent.value ? closer.prices : ascent.prices, threshold);
+    const whole = buildCore(shared, near, closer.value >= ascent.value ? closer.prices : ascent.prices, threshold);
     let left = whole.pairs > FEW_PAIRS ? thinCore(whole) : whole;
     // What was ruled out under a threshold stays ruled out under every lower one.
     if (known === null || threshold > known.under || threshold >= ceiling) {
@@ -145,8 +148,9 @@ export function findBlend(model: BlendModel, limits: BlendLimits = {}): BlendAns
       budget,
       bound,
       most: stage < 0 ? PLAIN_WORK : STAGES[stage]!.work,
-      found: (counts, cost) => {
-        if ((best !== null && cost >= best.cost) || !isFittingBlend(model, counts))
+      found: (counts, shares) => {
+        const cost = shared === model ? shares : blendTotals(model, counts)!.cost;
+        if (cost >= Math.min(threshold, best?.cost ?? threshold) || !isFittingBlend(model, counts))
           return Math.min(threshold, best?.cost ?? threshold);
         best = { counts: tidyCounts(counts), cost };
         met = true;

@@ -21,12 +21,12 @@ export function leastAmount(model: BlendModel, row: CeilingName, limits: BlendLi
   const total = largest.slice(0, model.maxTypes).reduce((sum, amount) => sum + amount, 0);
   const step = row === "units" ? 1 : total / FINENESS || 1;
   const options = model.options.map((option): BlendOption => {
-    const { floor: _, ...facts } = option;
+    const { floor: _floor, suppliers: _suppliers, ...facts } = option;
     const costs = Float64Array.from({ length: option.maxStrings + 1 }, (_, x) => Math.round((option[row] * x) / step));
     return { ...facts, costs };
   });
   const answer = findBlend(
-    { ...model, options, ceilings: { ...model.ceilings, [row]: Number.POSITIVE_INFINITY } },
+    { ...model, shipments: [], options, ceilings: { ...model.ceilings, [row]: Number.POSITIVE_INFINITY } },
     limits,
   );
   const counts = answer.best?.counts ?? null;
@@ -34,7 +34,8 @@ export function leastAmount(model: BlendModel, row: CeilingName, limits: BlendLi
 }
 
 export interface Loosening {
-  readonly limit: CeilingName | "types" | "requirement";
+  readonly limit: CeilingName | "ceilings" | "types" | "requirement";
+  /** For all ceilings together a factor, from 1. */
   readonly from: number;
   /** Least change that makes a blend possible; null when this limit alone cannot. */
   readonly to: number | null;
@@ -51,6 +52,7 @@ export function findLoosenings(model: BlendModel, limits: BlendLimits = {}): rea
     ...(["volume", "mass", "units"] as const)
       .filter((row) => model.ceilings[row] < Number.POSITIVE_INFINITY)
       .map((row) => loosenCeiling(model, row, limits)),
+    ...loosenTogether(model, limits),
     loosenTypes(model, limits),
     loosenRequirement(model, limits),
   ];
@@ -75,6 +77,39 @@ function loosenCeiling(model: BlendModel, row: CeilingName, limits: BlendLimits)
   const to = Math.max(from, least.amount);
   const priced = findBlend({ ...model, ceilings: { ...model.ceilings, [row]: to } }, limits);
   return outcome(row, from, to, priced, least.status === "optimal");
+}
+
+/** Where two or more ceilings stand in the way: the least factor on all of them, by halving, good to 1e-6. */
+function loosenTogether(model: BlendModel, limits: BlendLimits): readonly Loosening[] {
+  const rows = (["volume", "mass", "units"] as const).filter((row) => model.ceilings[row] < Number.POSITIVE_INFINITY);
+  if (rows.length < 2 || rows.some((row) => model.ceilings[row] === 0)) return [];
+  const under = (factor: number): BlendAnswer => {
+    const { volume, mass, units } = model.ceilings;
+    const ceilings = { volume: volume * factor, mass: mass * factor, units: units * factor };
+    return findBlend({ ...model, ceilings }, limits);
+  };
+  let [low, high] = [1, 2];
+  let best = under(high);
+  while (best.best === null && high < 1e6) {
+    low = high;
+    high *= 4;
+    best = under(high);
+  }
+  if (best.best === null) return [outcome("ceilings", 1, null, null, best.status === "infeasible")];
+  let proven = true;
+  while (high - low > 1e-6 * low) {
+    const middle = (low + high) / 2;
+    const answer = under(middle);
+    proven &&= answer.status !== "stopped";
+    if (answer.best === null) low = middle;
+    else {
+      // No less than what this blend takes of the row that it fills most.
+      const totals = blendTotals(model, answer.best.counts)!;
+      best = answer;
+      high = Math.min(middle, Math.max(low, ...rows.map((row) => totals[row] / model.ceilings[row])));
+    }
+  }
+  return [outcome("ceilings", 1, high, best, proven)];
 }
 
 function loosenTypes(model: BlendModel, limits: BlendLimits): Loosening {

@@ -30,6 +30,8 @@ export interface BlendOption {
   readonly floor?: CostFloor;
   /** Which part the string is made of. A blend uses each part in at most one way, for two ways would share its stock. */
   readonly partIndex: number;
+  /** Who must send something once a string of it is in the blend: places in the model's shipments, each once. Absent: nobody. */
+  readonly suppliers?: readonly number[];
 }
 
 /** Upper limits on the whole bank: m3, kg, number; Infinity where there is none. */
@@ -46,6 +48,8 @@ export interface BlendModel {
   readonly ceilings: BlendCeilings;
   /** Most string types in one bank, a whole number >= 1. */
   readonly maxTypes: number;
+  /** What a shipment of each supplier costs, whole minor units of money, charged once a blend. Absent: none costs anything. */
+  readonly shipments?: readonly number[];
 }
 
 /** So many strings of one option, named by its place in `options`. */
@@ -83,6 +87,11 @@ function optionFault(option: BlendOption): string | null {
   return costFault(option.costs, option.maxStrings);
 }
 
+function supplierFault({ suppliers = [] }: BlendOption, shipments: readonly number[]): string | null {
+  if (new Set(suppliers).size < suppliers.length) return "it names a supplier twice";
+  return suppliers.every((one) => shipments[one] !== undefined) ? null : "it names a supplier without a shipment";
+}
+
 /** Everything that makes a model unusable, one sentence each; empty when it is sound. Builds every cost table. */
 export function blendModelFaults(model: BlendModel): readonly string[] {
   const faults: string[] = [];
@@ -91,8 +100,11 @@ export function blendModelFaults(model: BlendModel): readonly string[] {
   for (const [name, value] of Object.entries(model.ceilings)) {
     if (Number.isNaN(value) || value < 0) faults.push(`the ceiling on ${name} is unknown or negative`);
   }
+  const { shipments = [] } = model;
+  if (!shipments.every((cost) => isCount(cost, 0) && cost <= LARGEST_COST))
+    faults.push("the cost of a shipment is not a whole number up to 1e11");
   model.options.forEach((option, index) => {
-    const fault = optionFault(option);
+    const fault = optionFault(option) ?? supplierFault(option, shipments);
     if (fault !== null) faults.push(`option ${index}: ${fault}`);
   });
   return faults;

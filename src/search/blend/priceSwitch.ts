@@ -6,6 +6,7 @@ import { tidyCounts } from "./evaluate.ts";
 import { type BlendLimits, findBlend } from "./findBlend.ts";
 import { type BlendCount, type BlendModel, FIT_TOLERANCE } from "./model.ts";
 import { buildPool, usefulStrings } from "./pool.ts";
+import { facts, shipmentCost, withShares } from "./shipments.ts";
 import type { FoundBlend } from "./singles.ts";
 
 export interface PriceSwitch {
@@ -28,15 +29,13 @@ export function withSettled(model: BlendModel, { option: at, strings }: BlendCou
   if (Object.values(ceilings).some((room) => room < 0)) return null;
   const requirement = (model.requirement * (1 - slack) - settled.capacity * strings) / (1 - slack);
   const options = model.options.map((option) =>
-    option.partIndex === settled.partIndex ? { ...plain(option), maxStrings: 0 } : option,
+    option.partIndex === settled.partIndex ? { ...facts(option), costs: new Float64Array(1), maxStrings: 0 } : option,
   );
-  return { options, requirement, ceilings, maxTypes: model.maxTypes - (strings > 0 ? 1 : 0) };
+  const sent = strings > 0 ? (settled.suppliers ?? []) : [];
+  // What the settled strings have sent is paid for, whoever else is in it.
+  const shipments = (model.shipments ?? []).map((cost, supplier) => (sent.includes(supplier) ? 0 : cost));
+  return { options, requirement, ceilings, shipments, maxTypes: model.maxTypes - (strings > 0 ? 1 : 0) };
 }
-
-const plain = (option: BlendModel["options"][number]) => {
-  const { capacity, volume, mass, units, partIndex } = option;
-  return { capacity, volume, mass, units, partIndex, costs: new Float64Array(1) };
-};
 
 /** The cheapest blend with exactly so many strings of one option; null when there is none. */
 export function bestWith(
@@ -46,7 +45,8 @@ export function bestWith(
 ): { readonly blend: FoundBlend | null; readonly proven: boolean } {
   const rest = withSettled(model, count);
   if (rest === null) return { blend: null, proven: true };
-  const own = model.options[count.option]!.costs[count.strings]!;
+  const sent = count.strings > 0 ? shipmentCost(model, [count.option]) : 0;
+  const own = model.options[count.option]!.costs[count.strings]! + sent;
   if (rest.requirement <= 0) return { blend: { counts: tidyCounts([count]), cost: own }, proven: true };
   if (rest.maxTypes < 1) return { blend: null, proven: true };
   const answer = findBlend(rest, limits);
@@ -58,34 +58,45 @@ export function bestWith(
 }
 
 /**
- * Moves of one option's price at which the cheapest blend changes: a rise that sheds some of it, a fall that takes more.
- * `bought` says how many units are paid for so many strings; unless told, all that are in them.
+ * Moves of the price of one part's units at which the cheapest blend changes: a rise that sheds some of them, a fall that takes
+ * more. `ways` are all options of the part. `bought` says how many units are paid for so many strings of one of them; unless
+ * told, all that are in them.
  */
 export function priceSwitches(
   model: BlendModel,
   cheapest: FoundBlend,
-  option: number,
+  ways: readonly number[],
   limits: BlendLimits = {},
-  bought: (strings: number) => number = (strings) => model.options[option]!.units * strings,
+  bought: (count: BlendCount) => number = ({ option, strings }) => model.options[option]!.units * strings,
 ): readonly PriceSwitch[] {
-  const from = model.options[option]!;
-  const now = cheapest.counts.find((count) => count.option === option)?.strings ?? 0;
-  const floor = costFloors(model, option);
+  const first = ways[0]!;
+  const own = cheapest.counts.find(({ option }) => ways.includes(option)) ?? { option: first, strings: 0 };
+  const now = bought(own);
+  const floors = new Map(ways.map((option) => [option, costFloors(model, option)]));
+  const others = [
+    { option: first, strings: 0 },
+    ...ways.flatMap((option) =>
+      range(1, usefulStrings(model, model.options[option]!)).map((strings) => ({ option, strings })),
+    ),
+  ].filter(({ option, strings }) => option !== own.option || strings !== own.strings);
   const moves: PriceSwitch[] = [];
   for (const move of ["rise", "fall"] as const) {
     let best: PriceSwitch | null = null;
     let proven = true;
-    const counts = move === "rise" ? range(0, now - 1).reverse() : range(now + 1, usefulStrings(model, from));
-    for (const strings of counts) {
-      const units = Math.abs(bought(strings) - bought(now));
+    // Nearest counts first: what they cost rules out those further off.
+    const counts = others
+      .map((count) => ({ count, apart: move === "rise" ? now - bought(count) : bought(count) - now }))
       // Where the same units are paid for, no price of theirs can tell the two apart.
-      if (units === 0) continue;
-      if (best !== null && (floor(strings) - cheapest.cost) / units >= best.perUnit) continue;
-      const other = bestWith(model, { option, strings }, limits);
+      .filter(({ apart }) => apart > 0)
+      .sort((a, b) => a.apart - b.apart);
+    for (const { count, apart } of counts) {
+      if (best !== null && (floors.get(count.option)!(count.strings) - cheapest.cost) / apart >= best.perUnit) continue;
+      const other = bestWith(model, count, limits);
       proven &&= other.proven;
       if (other.blend === null) continue;
-      const perUnit = Math.max(0, other.blend.cost - cheapest.cost) / units;
-      if (best === null || perUnit < best.perUnit) best = { option, move, perUnit, next: other.blend, proven: true };
+      const perUnit = Math.max(0, other.blend.cost - cheapest.cost) / apart;
+      if (best === null || perUnit < best.perUnit)
+        best = { option: count.option, move, perUnit, next: other.blend, proven: true };
     }
     if (best !== null) moves.push({ ...best, proven });
   }
@@ -96,7 +107,8 @@ const range = (first: number, last: number): number[] =>
   Array.from({ length: Math.max(0, last - first + 1) }, (_, at) => first + at);
 
 /** Lower bounds on the cost of a blend with so many strings of one option, by the Lagrangian bound. */
-function costFloors(model: BlendModel, option: number): (strings: number) => number {
+function costFloors(given: BlendModel, option: number): (strings: number) => number {
+  const model = withShares(given);
   const pool = buildPool(model, null, false);
   const { prices } = ascendCost(pool, model.maxTypes, Number.POSITIVE_INFINITY);
   const at = standing(pool, prices, model.maxTypes);

@@ -4,6 +4,7 @@ import { capacityNeeded, roomUnder } from "./evaluate.ts";
 import type { BlendModel } from "./model.ts";
 import { lowerHull, usefulStrings } from "./pool.ts";
 import type { Program, ProgramColumn } from "./program.ts";
+import { withShares } from "./shipments.ts";
 
 export interface RowWorth {
   /** Cost of the relaxation, minor units: no blend of these options costs less. */
@@ -21,7 +22,9 @@ export interface RowWorth {
  * The relaxation in which an option may be taken in parts, along the lower hull of its costs: the tightest linear view of the
  * tables. Its worth is exact for small changes of the relaxation and a guide for whole blends.
  */
-export function hullProgram(model: BlendModel, among: readonly number[]): Program {
+export function hullProgram(given: BlendModel, among: readonly number[]): Program {
+  // A part of a shipment counts for each string type that could share it, so the relaxation stays below every blend.
+  const model = withShares(given);
   const columns: ProgramColumn[] = [];
   const terms = { capacity: [], volume: [], mass: [], units: [], types: [] } as Record<string, [number, number][]>;
   const once: [number, number][][] = [];

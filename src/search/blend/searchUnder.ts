@@ -2,16 +2,19 @@
 import { ascendCost, ascendFrom } from "./ascent.ts";
 import { buildCapacityBound, type CapacityBound, stepsWithin } from "./capacityBound.ts";
 import { buildCore, type Core, standing, survivingOptions } from "./core.ts";
+import { blendTotals } from "./evaluate.ts";
 import type { BlendLimits } from "./findBlend.ts";
 import type { BlendCount, BlendModel } from "./model.ts";
 import { buildPool } from "./pool.ts";
+import { withShares } from "./shipments.ts";
 import { type Budget, walkCore } from "./walk.ts";
 
 /** Work after which the capacity bound is worth its making. */
 const PLAIN_WORK = 125_000;
 
 /** The options and counts of which every blend cheaper than `threshold` is made. */
-export function coreUnder(model: BlendModel, threshold: number): Core {
+export function coreUnder(given: BlendModel, threshold: number): Core {
+  const model = withShares(given);
   const pool = buildPool(model, null, false);
   const ascent = ascendCost(pool, model.maxTypes, Number.POSITIVE_INFINITY);
   const left = survivingOptions(pool, standing(pool, ascent.prices, model.maxTypes), threshold);
@@ -21,7 +24,7 @@ export function coreUnder(model: BlendModel, threshold: number): Core {
 }
 
 /**
- * Tells `found` of every blend cheaper than the threshold that it last answered, none with a string to spare in its last
+ * Tells `found` of every blend (shipments counted) cheaper than the threshold that it last answered, none with a string to spare in its last
  * option. False when the limits ended the walk. A blend may be told twice.
  */
 export function searchUnder(
@@ -45,8 +48,9 @@ export function searchUnder(
       budget,
       bound,
       most,
-      found: (counts, cost) => {
-        current = found(counts, cost);
+      found: (counts, shares) => {
+        const cost = withShares(model) === model ? shares : blendTotals(model, counts)!.cost;
+        if (cost < current) current = found(counts, cost);
         return current;
       },
     });

@@ -12,7 +12,7 @@ interface Pair {
 
 /**
  * A pair goes when pairs of `maxTypes` other parts (or one of its own part) each cost no more, bring no less, and take no more
- * volume, mass and units. A blend with it uses at most maxTypes - 1 other parts, so one such pair can take its place, and the
+ * volume, mass and units, and need no shipment that it does not need itself. A blend with it uses at most maxTypes - 1 other parts, so one such pair can take its place, and the
  * blend stays under any threshold it was under. Replacements always stand earlier in one fixed order, so no circle forms; and
  * only kept pairs need be asked, for whatever replaces a dropped one replaces what that would have.
  */
@@ -31,12 +31,13 @@ export function thinCore(core: Core): Core {
   };
   const others = { mass: new Float64Array(rivals), units: new Float64Array(rivals), part: new Int32Array(rivals) };
   const keep: number[][] = core.columns.map(() => []);
+  const senders: (readonly number[])[] = [];
   const parts: number[] = [];
   let known = 0;
   for (const { column: k, at } of pairs) {
     const column = core.columns[k]!;
     const x = column.strings[at]!;
-    const cost = column.costs[x]!;
+    const cost = column.costs[x]! - column.share;
     // Beyond the whole need more capacity is worth nothing.
     const capacity = Math.min(1, column.capacity * x);
     const [volume, mass, units] = [column.volume * x, column.mass * x, column.units * x];
@@ -45,6 +46,7 @@ export function thinCore(core: Core): Core {
     for (let r = 0; r < known && !dropped; r += 1) {
       if (amounts.cost[r]! > cost || amounts.capacity[r]! < capacity || amounts.volume[r]! > volume) continue;
       if (others.mass[r]! > mass || others.units[r]! > units) continue;
+      if (!senders[r]!.every((supplier) => column.suppliers.includes(supplier))) continue;
       const part = others.part[r]!;
       if (part === column.part) dropped = true;
       else if (!parts.includes(part)) {
@@ -61,6 +63,7 @@ export function thinCore(core: Core): Core {
     others.mass[known] = mass;
     others.units[known] = units;
     others.part[known] = column.part;
+    senders.push(column.suppliers);
     known += 1;
   }
   const columns = core.columns.flatMap((column, k) => (keep[k]!.length === 0 ? [] : [withOnly(column, keep[k]!)]));

@@ -23,7 +23,8 @@ export function verifyCertificate(model: BlendModel, certificate: BlendCertifica
   const fault = cost === null ? (counts.length > 0 ? "counts without a cost" : null) : claimFault(model, certificate);
   if (fault !== null) return invalid(fault);
 
-  const columns = model.options.map((option) => columnOf(model, option, weights));
+  const shares = sharesOf(model);
+  const columns = model.options.map((option) => columnOf(model, option, weights, shares));
   const least = columns.map((column) => leastReduced(column, prices.cost));
   const negative = least.filter((value) => value < 0).sort((a, b) => a - b);
   const best = negative.slice(0, model.maxTypes);
@@ -49,7 +50,7 @@ export function verifyCertificate(model: BlendModel, certificate: BlendCertifica
     const limit = slack + Math.min(least[at]!, bar);
     const mine = listed.get(at) ?? new Set<number>();
     for (let x = 1; x <= column.last; x += 1) {
-      const reduced = column.option.costs[x]! - column.gain * x;
+      const reduced = column.option.costs[x]! + column.share - column.gain * x;
       if (mine.has(x) ? slack < -blur || reduced > limit + blur : slack > blur && reduced < limit - blur) {
         return invalid(
           mine.has(x) ? "a survivor is ruled out by the bound" : "a pair that the bound leaves open is missing",
@@ -70,6 +71,7 @@ export function verifyCertificate(model: BlendModel, certificate: BlendCertifica
 function claimFault(model: BlendModel, { cost, counts }: BlendCertificate): string | null {
   const sum = { cost: 0, capacity: 0, volume: 0, mass: 0, units: 0 };
   const parts = new Set<number>();
+  const senders = new Set<number>();
   for (const { option: at, strings } of counts) {
     const option = model.options[at];
     if (!option || !Number.isInteger(strings) || strings < 1 || strings > option.maxStrings)
@@ -77,16 +79,32 @@ function claimFault(model: BlendModel, { cost, counts }: BlendCertificate): stri
     if (parts.has(option.partIndex)) return "a part is used in two ways";
     parts.add(option.partIndex);
     sum.cost += option.costs[strings]!;
+    for (const supplier of option.suppliers ?? []) senders.add(supplier);
     sum.capacity += option.capacity * strings;
     for (const row of ROWS) sum[row] += option[row] * strings;
   }
   if (counts.length > model.maxTypes) return "too many types";
   if (sum.capacity < model.requirement * (1 - FIT_TOLERANCE)) return "short of the requirement";
   for (const row of ROWS) if (sum[row] > model.ceilings[row] * (1 + FIT_TOLERANCE)) return `over the ceiling on ${row}`;
+  for (const supplier of senders) sum.cost += model.shipments?.[supplier] ?? 0;
   return sum.cost === cost ? null : "the cost is not that of the counts";
 }
 
-function columnOf(model: BlendModel, option: BlendOption, weights: readonly number[]): VerifyColumn {
+/** As many string types as could come in one shipment each bear an equal part of it, in whole minor units: together never more. */
+function sharesOf({ options, maxTypes, shipments = [] }: BlendModel): readonly number[] {
+  return shipments.map((cost, supplier) => {
+    const able = options.filter(({ maxStrings, suppliers }) => maxStrings > 0 && suppliers?.includes(supplier));
+    const parts = new Set(able.map(({ partIndex }) => partIndex)).size;
+    return Math.floor(cost / Math.max(1, Math.min(parts, maxTypes)));
+  });
+}
+
+function columnOf(
+  model: BlendModel,
+  option: BlendOption,
+  weights: readonly number[],
+  shares: readonly number[],
+): VerifyColumn {
   const need = model.requirement * (1 - FIT_TOLERANCE);
   const amounts = [option.capacity / need, ...ROWS.map((row) => part(option[row], model.ceilings[row]))];
   let last = 0;
@@ -94,7 +112,8 @@ function columnOf(model: BlendModel, option: BlendOption, weights: readonly numb
   // Beyond the count that meets the need alone, or over a ceiling alone, no blend gains anything.
   while (last < option.maxStrings && option.capacity * last < need && fits(last + 1)) last += 1;
   const gain = amounts.reduce((sum, amount, row) => sum + (row === 0 ? amount : -amount) * weights[row]!, 0);
-  return { option, amounts, last, gain };
+  const share = (option.suppliers ?? []).reduce((sum, supplier) => sum + shares[supplier]!, 0);
+  return { option, amounts, last, gain, share };
 }
 
 const part = (amount: number, ceiling: number): number =>
@@ -102,11 +121,13 @@ const part = (amount: number, ceiling: number): number =>
 
 function leastReduced(column: VerifyColumn, weight: number): number {
   let low = Number.POSITIVE_INFINITY;
-  for (let x = 1; x <= column.last; x += 1) low = Math.min(low, weight * column.option.costs[x]! - column.gain * x);
+  const { costs } = column.option;
+  for (let x = 1; x <= column.last; x += 1) low = Math.min(low, weight * (costs[x]! + column.share) - column.gain * x);
   return low;
 }
 
 function beyond(model: BlendModel): number {
   const last = model.options.map((option) => option.costs[option.maxStrings]!).sort((a, b) => b - a);
-  return 1 + last.slice(0, model.maxTypes).reduce((sum, cost) => sum + cost, 0);
+  const sent = (model.shipments ?? []).reduce((sum, cost) => sum + cost, 0);
+  return 1 + sent + last.slice(0, model.maxTypes).reduce((sum, cost) => sum + cost, 0);
 }

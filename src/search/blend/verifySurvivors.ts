@@ -11,6 +11,8 @@ export interface VerifyColumn {
   readonly amounts: readonly number[];
   readonly last: number;
   readonly gain: number;
+  /** Its part of the shipments it needs. */
+  readonly share: number;
 }
 
 /** Tries every blend of survivors that the bound does not rule out, the cheapest-looking options first. */
@@ -26,7 +28,7 @@ export function trySurvivors(
     .filter(({ strings }) => strings.length > 0)
     .map(({ option, strings }) => {
       const column = columns[option]!;
-      const pairs = strings.map((x) => ({ x, reduced: column.option.costs[x]! - column.gain * x }));
+      const pairs = strings.map((x) => ({ x, reduced: column.option.costs[x]! + column.share - column.gain * x }));
       pairs.sort((a, b) => a.reduced - b.reduced);
       return { column, pairs, least: pairs[0]!.reduced };
     })
@@ -35,9 +37,14 @@ export function trySurvivors(
   let spent = 0;
   let cheaper = false;
   const parts: number[] = [];
+  const chosen: BlendOption[] = [];
+  const sent = (): number => {
+    const senders = new Set(chosen.flatMap(({ suppliers = [] }) => suppliers));
+    return [...senders].reduce((sum, supplier) => sum + model.shipments![supplier]!, 0);
+  };
   const go = (from: number, types: number, cost: number, reduced: number, sums: readonly number[]): void => {
     if (sums[0]! >= 1) {
-      if (cost <= limit && sums.every((sum, row) => row === 0 || sum <= 1)) cheaper = true;
+      if (cost + sent() <= limit && sums.every((sum, row) => row === 0 || sum <= 1)) cheaper = true;
       return;
     }
     if (types === 0) return;
@@ -48,6 +55,7 @@ export function trySurvivors(
       if (offset + reduced + least + rest > limit) return;
       if (parts.includes(column.option.partIndex)) continue;
       parts.push(column.option.partIndex);
+      chosen.push(column.option);
       for (const pair of pairs) {
         if (offset + reduced + pair.reduced + rest > limit) break;
         spent += 1;
@@ -56,6 +64,7 @@ export function trySurvivors(
         go(at + 1, types - 1, cost + column.option.costs[pair.x]!, reduced + pair.reduced, next);
       }
       parts.pop();
+      chosen.pop();
     }
   };
   go(0, model.maxTypes, 0, 0, [0, 0, 0, 0]);

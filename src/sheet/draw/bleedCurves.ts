@@ -5,6 +5,7 @@
  *   between two points  ln V is linear in t: exact for one time constant, t = t1 + (t2 - t1) ln(V1/V)/ln(V1/V2)
  * Holds while nothing switches between two points. Source: [textbook] exponential decay.
  */
+import { power } from "../../quantity/index.ts";
 
 export interface BleedPoint {
   readonly time: number;
@@ -55,5 +56,5 @@ export function until(points: readonly BleedPoint[], time: number): readonly Ble
   if (after <= 0) return after < 0 ? points : [];
   const [from, to] = [points[after - 1]!, points[after]!];
   const share = (time - from.time) / (to.time - from.time);
-  return [...points.slice(0, after), { time, voltage: from.voltage * (to.voltage / from.voltage) ** share }];
+  return [...points.slice(0, after), { time, voltage: from.voltage * power(to.voltage / from.voltage, share) }];
 }

@@ -1,6 +1,6 @@
 // Lines of the bleed-down chart as ink: scales, one style and one letter to a line, thresholds with their crossings.
 
-import { formatQuantity } from "../../quantity/index.ts";
+import { formatQuantity, power } from "../../quantity/index.ts";
 import { apart } from "./axes.ts";
 import { type BleedCurve, cutAt, drawable, timeAt, until } from "./bleedCurves.ts";
 import { SIZES } from "./drawing.tsx";
@@ -59,7 +59,7 @@ export function curveInk({ points }: BleedCurve, index: number, of: BleedScales 
   if (first === undefined) return {};
   const last = shown.at(-1)!;
   // Where the line has fallen by its own share of its height; a level line has none, and takes its share of the time.
-  const level = first.voltage * (last.voltage / first.voltage) ** ((index + 1) / (count + 1));
+  const level = first.voltage * power(last.voltage / first.voltage, (index + 1) / (count + 1));
   const when = last.voltage < first.voltage ? timeAt(shown, level) : (last.time * (index + 1)) / (count + 1);
   return {
     curves: [{ role: "curve", d: linePath(spots), ...styleOf(index) }],

@@ -1,7 +1,7 @@
 // Values to places on paper and round ticks, by d3-scale: chosen for its ticks, which are round on linear and log scales alike.
 
 import { scaleLinear, scaleLog } from "d3-scale";
-import { formatQuantity, roundTo } from "../../quantity/index.ts";
+import { formatQuantity, roundTo, tenTo } from "../../quantity/index.ts";
 
 export interface Scale {
   /** Place of a value, points. */
@@ -37,7 +37,7 @@ export function logScale({ low, high, from, to }: Extent): Scale {
 /** Of the ticks of a log scale those that begin with 1, then with 1, 2 and 5, as room allows. */
 function thinned(ticks: readonly number[], count: number): readonly number[] {
   const begins = (digits: readonly number[]) =>
-    ticks.filter((tick) => digits.includes(Math.round(tick / 10 ** Math.floor(Math.log10(tick) + 1e-9))));
+    ticks.filter((tick) => digits.includes(Math.round(tick / tenTo(Math.floor(Math.log10(tick) + 1e-9)))));
   if (ticks.length <= count) return ticks;
   const some = begins([1, 2, 5]);
   return some.length <= count ? some : begins([1]);

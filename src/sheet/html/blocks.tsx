@@ -10,7 +10,7 @@ const classOf = ({ side, written }: Column): string | undefined => side ?? (writ
 /** Longest word that a column is kept wide enough for; longer ones may be broken anywhere. */
 const LONGEST_WORD = 16;
 /** Longest figure that is kept on one line with its unit. */
-const LONGEST_FIGURE = 16;
+const LONGEST_FIGURE = 12;
 
 function looksOf(value: string, { side }: Column): string | undefined {
   if (value.split(/[\s-]/).some((word) => word.length > LONGEST_WORD))

@@ -39,6 +39,7 @@ figcaption { font-size: 8pt; }
 .stop p { margin: 0 0 1mm; }
 .foot { border-top: 1pt solid #000; font-size: 7pt; line-height: 1.2; }
 .foot p { margin: 0; padding: 1mm 0 0; }
+#limits { break-inside: avoid; }
 #door { font-size: 12pt; }
 #door table { font-size: 13pt; }
 #door h2 { font-size: 24pt; border: 3pt solid #000; padding: 3mm; text-align: center; }

@@ -1,18 +1,12 @@
-/*
- * How long the bank takes to become harmless, from full and from each fault, by each way of emptying it alone.
- *
- * All times are at the high capacitance and the high resistance. A unit shorted with the charger on leaves n - 1 stages at V:
- * cross-tied, C grows by n/(n - 1) and the chain loses a resistor, so the time constant is the same; strings, one string of
- * n - 1 beside p - 1 whole ones. A unit open takes capacitance away, so the time from full is an upper bound.
- * Source: [methods-derived] 3.1, 8.
- */
+// How long the bank takes to become harmless, from full and from each fault, by each way of emptying it alone.
 
-import { recovery } from "../../hazard/index.ts";
 import { cell, said, up, wait } from "../cells.ts";
-import { type Facts, type Fall, factsOf, type Ways, waysDown } from "../facts.ts";
+import { type Facts, factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
-import { type Block, type Cell, list, type Section, type Table, text } from "../model.ts";
+import { type Cell, list, type Section, type Table, text } from "../model.ts";
 import { positionWord } from "../names.ts";
+import { rangeWords, recoveryOf } from "../recovery.ts";
+import { againstRule, clearWords, NO_WAYS, shortedWays, type Ways, waysDown } from "../ways.ts";
 
 interface Start {
   readonly state: string;
@@ -21,35 +15,18 @@ interface Start {
   readonly note: string;
 }
 
-const NONE: Ways = { chains: null, oneOpen: null, dump: null };
-
-/** The ways down of the bank with one unit shorted and the charger on, from V. */
-function shortedWays(input: SheetInput, facts: Facts, fall: Fall): Ways {
-  const { series: n, parallel: p, ties } = input.layout;
-  const { capacitance, chain, chains } = facts;
-  if (capacitance === null) return NONE;
-  const grows = n / (n - 1);
-  if (ties === "cross-tied" || p === 1)
-    return waysDown({ ...facts, capacitance: capacitance * grows, chain: chain === null ? null : chain / grows }, fall);
-  const grown = { ...facts, capacitance: (capacitance * (p - 1 + grows)) / p };
-  // The chains side by side as so many equal ones of the same conductance; the worst one to lose is the short string's own.
-  const even = chain === null ? null : (chain * chains) / (p - 1 + grows);
-  return { ...waysDown({ ...grown, chain: even }, fall), oneOpen: waysDown(grown, fall).oneOpen };
-}
-
 function starts(input: SheetInput, facts: Facts): readonly Start[] {
-  const { layout, brief, shot } = input;
-  const { voltage, clear } = facts;
-  const highest = brief.charger?.highest ?? brief.charger?.supply ?? null;
-  const at = (from: number | null): Ways => (from === null ? NONE : waysDown(facts, { from, to: clear }));
+  const { layout, shot } = input;
+  const { voltage, clear, highest } = facts;
+  const at = (from: number | null): Ways => (from === null ? NO_WAYS : waysDown(facts, { from, to: clear }));
   const left = shot === null ? null : Math.sqrt((2 * shot.discharge.energy.left) / shot.bank.capacitance);
   const full = at(voltage);
   const rows: Start[] = [
     { state: "full", from: voltage, ways: full, note: "" },
     {
       state: "charger ran on",
-      from: highest === null ? null : Math.max(highest, voltage),
-      ways: at(highest === null ? null : Math.max(highest, voltage)),
+      from: highest,
+      ways: at(highest),
       note:
         highest === null
           ? "the charger's highest voltage is not known: this row stays open"
@@ -98,27 +75,10 @@ function starts(input: SheetInput, facts: Facts): readonly Start[] {
       ];
 }
 
-function recoveryBlocks({ unit }: SheetInput, { voltage, capacitance }: Facts): readonly Block[] {
-  if (capacitance === null) return [];
-  const back = recovery({ soak: voltage, capacitance, polarised: unit.polarised !== false });
-  const range =
-    back.low === null
-      ? `up to ${up(back.high, "voltage")}`
-      : `${up(back.low, "voltage")} to ${up(back.high, "voltage")}`;
-  return [
-    text(
-      `After a short has been taken off, ${range} may come back within minutes (${said(up(back.energy, "energy"))} at the most; ${back.tag}). Leave the strap on.`,
-    ),
-  ];
-}
-
-/** What is said of a bank that never breaks the rule. */
-export const clearWords = ({ clear, rule }: Facts): string =>
-  Number.isFinite(clear) ? `${cell(clear, "voltage")} (${rule})` : `any voltage (${rule}: this bank never passes it)`;
-
 export function bleedDownSection(input: SheetInput): Section {
   const facts = factsOf(input);
-  const { allowed, chains, chain } = facts;
+  const { allowed, chains, chain, voltage, clear } = facts;
+  const back = recoveryOf(input, facts);
   const rows = starts(input, facts).map(({ state, from, ways, note }): readonly Cell[] => [
     state,
     up(from, "voltage"),
@@ -150,6 +110,7 @@ export function bleedDownSection(input: SheetInput): Section {
       ),
       table,
       list([
+        ...againstRule(facts, waysDown(facts, { from: voltage, to: clear })),
         chains === 0
           ? "No balancing chain: until a bleed resistor is wired in, nothing but the dump empties this bank."
           : chains === 1
@@ -160,7 +121,13 @@ export function bleedDownSection(input: SheetInput): Section {
           ? ["The tolerance of the unit is unknown: no longest time can be given, and none is."]
           : []),
       ]),
-      ...recoveryBlocks(input, facts),
+      ...(back === null
+        ? []
+        : [
+            text(
+              `After a short has been taken off, ${rangeWords(back)} may come back within minutes (${said(up(back.energy, "energy"))} at the most; ${back.tag}). Leave the strap on.`,
+            ),
+          ]),
     ],
   };
 }

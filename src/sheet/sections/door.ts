@@ -2,11 +2,11 @@
 
 import { countsOf } from "../../order/index.ts";
 import { said, up, wait } from "../cells.ts";
-import { factsOf, waysDown } from "../facts.ts";
+import { factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
 import { list, type Section, type Table, text } from "../model.ts";
 import { barsOf } from "../names.ts";
-import { clearWords } from "./bleedDown.ts";
+import { clearWords, waysDown } from "../ways.ts";
 
 export function doorSection(input: SheetInput): Section {
   const { layout } = input;

@@ -1,9 +1,10 @@
 // What the finished bank may be used at: the figures that nobody on shift may pass.
 
 import { cell, down, up, wait } from "../cells.ts";
-import { factsOf, waysDown } from "../facts.ts";
+import { factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
 import { type Cell, type Section, type Table, text } from "../model.ts";
+import { waysDown } from "../ways.ts";
 
 /** Shots an hour that the charger keeps up with, rounded down; null without a charger or a load. */
 const hourly = ({ shot }: SheetInput): Cell =>

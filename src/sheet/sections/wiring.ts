@@ -1,15 +1,21 @@
 // The wiring list: every joint with its conductor, and room for length, lug, torque and the initials of who made it.
 
+import { sectionWords, shotSection, WARMING } from "../../order/index.ts";
 import { up } from "../cells.ts";
 import type { SheetInput } from "../input.ts";
 import { list, type Section, type Table, text } from "../model.ts";
 import { barsOf, groupWord } from "../names.ts";
-import { barConductor, type Wire, wiresOf } from "../wires.ts";
+import { type Carried, type Wire, wiresOf } from "../wires.ts";
 import { schematicOf } from "./drawings.ts";
 
+/** What the conductors must carry; null without a shot whose action has a bound. */
+function carriedOf({ layout, unit, brief, shot }: SheetInput): Carried | null {
+  const section = shot === null ? null : shotSection({ layout, unit, brief });
+  return shot === null || section === null ? null : { section, unitShare: shot.discharge.unit.share };
+}
+
 /** The bars, each with the joints that it takes. */
-function barTable(input: SheetInput, wires: readonly Wire[]): Table {
-  const { layout, unit, shot } = input;
+function barTable({ layout, unit }: SheetInput, wires: readonly Wire[], carried: Carried | null): Table {
   const bars = barsOf(layout);
   const pitch = unit.diameter ?? unit.width;
   const joints = new Map<string, number>();
@@ -32,7 +38,7 @@ function barTable(input: SheetInput, wires: readonly Wire[]): Table {
       bar,
       ends(i),
       String(joints.get(bar) ?? 0),
-      barConductor(shot),
+      carried === null ? null : sectionWords(carried.section),
       pitch === undefined ? null : `at least ${up(pitch * layout.parallel, "length")}`,
       null,
     ]),
@@ -40,8 +46,9 @@ function barTable(input: SheetInput, wires: readonly Wire[]): Table {
 }
 
 export function wiringSection(input: SheetInput): Section {
-  const wires = wiresOf(schematicOf(input), input.shot);
-  const { layout, shot } = input;
+  const carried = carriedOf(input);
+  const wires = wiresOf(schematicOf(input), carried);
+  const { layout } = input;
   const bars = barsOf(layout);
   const elements = layout.balance?.elements ?? 0;
   const inside = layout.ties === "strings" ? ", TP2.3 the point of string 2 above its unit 3" : "";
@@ -69,9 +76,9 @@ export function wiringSection(input: SheetInput): Section {
         `TP0 is the bar of the negative end, ${bars[bars.length - 1]} that of the positive end; C3.7 is unit 7 of ${groupWord(layout)} 3${inside}. Terminals are + and - of a unit, a and b of a part without polarity. Names are those of the schematic.`,
       ),
       list([
-        shot === null
+        carried === null
           ? "Conductor of bars and unit leads: blank, because no action integral is known without a load in the brief. It blocks the choice of section."
-          : "Conductor: the least copper that one normal shot heats from 20 degC to 90 degC. A fault may carry more; repeated shots need more. Blank: chosen by strength, insulated for the full voltage.",
+          : `Conductor: the least copper that warms by ${WARMING} K in one whole shot, as on the order (common practice, no source). A fault may carry more; repeated shots need more. Blank: chosen by strength, insulated for the full voltage.`,
         ...(elements > 1
           ? [
               `Each RB is made beforehand of ${elements} equal elements, joined end to end on its mount: ${elements - 1} joints in each.`,
@@ -79,7 +86,7 @@ export function wiringSection(input: SheetInput): Section {
           : []),
         "A bar's length is for units side by side in one row; other lengths and the lugs are blank until the bank is laid out. Torque: the unit maker's figure for its terminal; without it no joint is signed off.",
       ]),
-      barTable(input, wires),
+      barTable(input, wires, carried),
       table,
     ],
   };

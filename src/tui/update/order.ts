@@ -16,7 +16,7 @@ export function askName(state: State): Change {
   const bank = shownBank(state);
   if (bank === null) return still(state);
   const name = orderFileName(bank.part, `${bank.series}s${bank.parallel}p`);
-  return still({ ...state, prompt: { line: lineOf(name), replace: false }, notice: null });
+  return still({ ...state, prompt: { what: "order", line: lineOf(name), replace: false }, notice: null });
 }
 
 export function editName(state: State, edit: LineEdit): Change {
@@ -35,7 +35,8 @@ export function confirm(state: State): Change {
 
 /** "Keep the file" goes back to the name; "do not save" closes the question. */
 export function cancel(state: State): Change {
-  if (state.prompt?.replace) return still({ ...state, prompt: { ...state.prompt, replace: false }, notice: null });
+  if (state.prompt?.what === "order" && state.prompt.replace)
+    return still({ ...state, prompt: { ...state.prompt, replace: false }, notice: null });
   return still({ ...state, prompt: null, notice: { tone: "plain", text: "Nothing was saved." } });
 }
 
@@ -44,7 +45,7 @@ export function saved(state: State, answer: SaveAnswer): Change {
     case "saved":
       return still({ ...state, prompt: null, notice: { tone: "good", text: `The order is saved in ${answer.path}.` } });
     case "exists":
-      if (state.prompt === null) return still(state);
+      if (state.prompt?.what !== "order") return still(state);
       return still({ ...state, prompt: { ...state.prompt, replace: true }, notice: null });
     case "trouble":
       if (state.prompt === null)

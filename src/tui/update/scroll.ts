@@ -7,7 +7,7 @@ export type Step = number | "first" | "last" | "page" | "pageBack";
 /** Rows of a page: what a screen shows, less a little overlap. */
 export const pageOf = (state: State): number => Math.max(1, state.rows - 10);
 
-function stepFrom(at: number, by: Step, page: number): number {
+export function stepFrom(at: number, by: Step, page: number): number {
   if (typeof by === "number") return at + by;
   if (by === "first") return 0;
   if (by === "last") return Number.MAX_SAFE_INTEGER;

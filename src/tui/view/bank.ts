@@ -112,6 +112,12 @@ export function noBank(state: State, room: Room): Page {
   ]);
 }
 
+/** Values of the unit that are set by hand: nothing here comes from its catalogue alone. */
+export function handRows({ overrides }: State, { part }: LayoutResult, columns: number): readonly Row[] {
+  const set = Object.entries(overrides[part] ?? {}).map(([heading, text]) => `${heading} ${text}`);
+  return set.length === 0 ? [] : paragraph(`! Set by hand, not in the catalogue: ${set.join(", ")}.`, columns, "warn");
+}
+
 export function bankPage(state: State, room: Room): Page {
   const layout = shownBank(state);
   if (layout === null) return noBank(state, room);
@@ -134,9 +140,10 @@ export function bankPage(state: State, room: Room): Page {
     ...(layout.cost !== null && layout.cost.unpriced.length > 0
       ? paragraph(`Without a price, and not in the cost: ${layout.cost.unpriced.join(", ")}.`, room.columns, "warn")
       : []),
+    ...handRows(state, layout, room.columns),
     EMPTY_ROW,
     rowOf(span("Checks", "strong")),
-    ...findingRows(layout.findings, room.columns),
+    ...findingRows(layout.findings, room.columns, state.words),
   ];
   return scrolled(state, "bank", bankHead(state, layout), rows, room);
 }

@@ -5,7 +5,7 @@ import { planOf } from "../pick.ts";
 import { type Row, rowOf, type Span, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { drawnText, fitText } from "../text.ts";
-import { shown } from "../values.ts";
+import { grouped, shown } from "../values.ts";
 import { textWidth } from "../width.ts";
 import { sideBySide } from "./beside.ts";
 import { listColumns } from "./layouts.ts";
@@ -73,7 +73,7 @@ function resultRows(state: State, { columns, rows }: Room): readonly Row[] {
   if (plan === null || empty.length > 0) return empty.slice(0, rows);
   const table = widen(columnsFor(listColumns(state, plan.layouts), columns), "part", columns, 40);
   const listed = plan.layouts.slice(0, Math.max(1, rows - 2));
-  const count = plan.searched.layouts.toLocaleString("en");
+  const count = grouped(plan.searched.layouts);
   const first = listed.length === 1 ? "the first" : `the first ${listed.length}`;
   return [
     rowOf(

@@ -1,6 +1,6 @@
 // Findings as rows: the verdict by mark and word, what it is about, its figure against its limit, and what would mend it.
-import { titleOf } from "../../cli/index.ts";
 import { type Finding, formatQuantity } from "../../quantity/index.ts";
+import type { SharedWords } from "../ports.ts";
 import { type Row, rowOf, span } from "../row.ts";
 import { fitText } from "../text.ts";
 import { bySeverity, type shown, VERDICT_STYLE } from "../values.ts";
@@ -37,14 +37,14 @@ function findingValue(value: number | null, unit: string): string {
 }
 
 /** The worst first; only what did not pass says its note. */
-export function findingRows(findings: readonly Finding[], columns: number): readonly Row[] {
+export function findingRows(findings: readonly Finding[], columns: number, words: SharedWords | null): readonly Row[] {
   return bySeverity(findings).flatMap((finding): readonly Row[] => {
     const limit = finding.limit === null ? "" : ` of ${findingValue(finding.limit, finding.unit)}`;
     const value =
       finding.value === null && finding.limit === null ? "" : `: ${findingValue(finding.value, finding.unit)}${limit}`;
     const line = rowOf(
       span(fitText(VERDICT_MARK[finding.verdict], 15), VERDICT_STYLE[finding.verdict]),
-      span(`${finding.state}, ${titleOf(finding.id)}${value}`),
+      span(`${finding.state}, ${words?.titleOf(finding.id) ?? finding.id}${value}`),
     );
     const notes =
       finding.verdict === "pass" || finding.note === "" ? [] : paragraph(finding.note, columns - 15, "quiet");

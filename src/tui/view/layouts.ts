@@ -6,6 +6,7 @@ import { isPinned, listed, planOf, selectedIndex } from "../pick.ts";
 import { EMPTY_ROW, type Row, span } from "../row.ts";
 import type { State } from "../state.ts";
 import {
+  grouped,
   nameOf,
   shapeOf,
   shareOfLimit,
@@ -91,7 +92,7 @@ export function layoutsPage(state: State, room: Room): Page {
   const layouts = listed(state);
   const plan = planOf(state);
   const columns = widen(columnsFor(listColumns(state, layouts), room.columns - 2), "part", room.columns - 2, 40);
-  const count = (plan?.searched.layouts ?? 0).toLocaleString("en");
+  const count = grouped(plan?.searched.layouts ?? 0);
   const which = state.frontOnly
     ? `${layouts.length} unbeaten in every respect, of ${count}`
     : `the first ${layouts.length} of ${count}`;

@@ -6,7 +6,7 @@ import { shownBank } from "../pick.ts";
 import { EMPTY_ROW, type Row, rowOf, type Span, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { shownMoney } from "../values.ts";
-import { bankHead, noBank } from "./bank.ts";
+import { bankHead, handRows, noBank } from "./bank.ts";
 import { type Page, pageOf, type Room, scrolled } from "./page.ts";
 import { paragraph } from "./words.ts";
 
@@ -57,6 +57,7 @@ export function orderPage(state: State, room: Room): Page {
   const { unpriced } = bill.totals;
   const fails = layout.findings.some(({ verdict }) => verdict === "fail");
   const rows: readonly Row[] = [
+    ...handRows(state, layout, room.columns),
     ...bill.lines.map((line) => tableRow(columns, line)),
     EMPTY_ROW,
     ...(unpriced.length === 0

@@ -2,19 +2,25 @@
 import { FIELDS, fieldAt, shownValue, valueIn } from "../fields.ts";
 import { helpLineKeys } from "../keys.ts";
 import type { Caret } from "../paint.ts";
-import { drawRow, EMPTY_ROW, type Row, rowOf, type Span, span } from "../row.ts";
-import { SCREENS, type State } from "../state.ts";
-import { drawnText, wrapText } from "../text.ts";
+import { drawRow, EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
+import type { Prompt, State } from "../state.ts";
+import { cutText, drawnText, wrapText } from "../text.ts";
+import { grouped } from "../values.ts";
 import { textWidth } from "../width.ts";
 import { bankPage } from "./bank.ts";
 import { briefPage, seenPart } from "./brief.ts";
 import { comparePage } from "./compare.ts";
 import { helpPage } from "./help.ts";
 import { layoutsPage } from "./layouts.ts";
+import { mapPage } from "./map.ts";
 import { orderPage } from "./order.ts";
 import type { Page, Room } from "./page.ts";
+import { partsPage } from "./parts.ts";
 import { sharingPage } from "./sharing.ts";
 import { shotPage } from "./shot.ts";
+import { ruleRow, tabsRow } from "./top.ts";
+import { trailPage } from "./trail.ts";
+import { unitsPage } from "./units.ts";
 import { CAUTIONS, refusalOf, refusalWords } from "./words.ts";
 
 export const LEAST_COLUMNS = 60;
@@ -33,6 +39,10 @@ const PAGES: Readonly<Record<State["screen"], (state: State, room: Room) => Page
   sharing: sharingPage,
   shot: shotPage,
   order: orderPage,
+  map: mapPage,
+  units: unitsPage,
+  parts: partsPage,
+  trail: trailPage,
 };
 
 const HEAD_ROWS = 3;
@@ -49,25 +59,11 @@ const bodyOf = (state: State): Page =>
 /** How far the screen under the eye can be scrolled. */
 export const mostScroll = (state: State): number => bodyOf(state).mostScroll;
 
-/** Where there is little room the screen in sight goes without its number, and the pins without their count. */
-const NARROW = 76;
-
-function tabsRow(state: State): Row {
-  const narrow = state.columns < NARROW;
-  const tabs = SCREENS.flatMap((screen, index): readonly Span[] => {
-    const pins = screen === "compare" && state.pins.length > 0 && !narrow ? ` (${state.pins.length})` : "";
-    const name = `${index + 1} ${screen}${pins}`;
-    const here = screen === state.screen;
-    if (narrow) return [span(here ? `[${screen}]` : name, here ? "focus" : "plain"), span(" ")];
-    return [span(here ? `[${name}]` : ` ${name} `, here ? "focus" : "plain")];
-  });
-  return { left: tabs, right: [span("joulewright", "title")] };
-}
-
 /** The brief in one line, and what it is planned from. */
 function briefRow(state: State): Row {
   const { answer, stock } = state;
-  const from = `${stock.parts.toLocaleString("en")} parts${stock.note === "" ? "" : `, ${stock.note}`}`;
+  const hand = Object.keys(state.overrides).length === 0 ? "" : ", some by hand";
+  const from = `${grouped(stock.parts)} parts${hand}${stock.note === "" ? "" : `, ${stock.note}`}`;
   if (answer?.kind !== "planned")
     return {
       left: [span(answer === null ? "" : "The brief is not whole yet.", "quiet")],
@@ -77,7 +73,7 @@ function briefRow(state: State): Row {
     const field = FIELDS.find((candidate) => candidate.key === key);
     return field === undefined ? "" : shownValue(field, valueIn(answer.brief, field));
   };
-  const busy = state.asked === state.answered ? "" : " ...";
+  const busy = state.asked === state.answered ? "" : state.stopped === state.asked ? " (of the brief before)" : " ...";
   return {
     left: [
       span(`${value("energy")} at ${value("voltage")}, fall ${value("ripple")}, ${value("basis")}${busy}`, "accent"),
@@ -93,6 +89,12 @@ function focusedRefusal(state: State): Row {
 }
 
 const QUESTION = "Save the order as: ";
+const questionOf = (prompt: Prompt): string =>
+  prompt.what === "order" ? QUESTION : `${prompt.heading} of ${prompt.part}, blank for the catalogue's: `;
+
+/** A long question is cut, so that there is room to type. */
+const fitQuestion = (question: string, columns: number): string =>
+  textWidth(question) <= columns - 20 ? question : `${cutText(question, columns - 22)}: `;
 
 function noticeRow(state: State): { readonly row: Row; readonly caretColumn: number | null } {
   const { prompt, notice } = state;
@@ -101,9 +103,11 @@ function noticeRow(state: State): { readonly row: Row; readonly caretColumn: num
   }
   const bad = notice !== null && notice.tone === "bad";
   if (prompt !== null && !bad) {
-    const room = Math.max(8, state.columns - QUESTION.length - 2);
+    const question = fitQuestion(drawnText(questionOf(prompt), state.look.ascii), state.columns);
+    const width = textWidth(question);
+    const room = Math.max(8, state.columns - width - 2);
     const seen = seenPart(drawnText(prompt.line.text, state.look.ascii), prompt.line.caret, room);
-    return { row: rowOf(span(QUESTION, "strong"), span(seen.text)), caretColumn: QUESTION.length + seen.at };
+    return { row: rowOf(span(question, "strong"), span(seen.text)), caretColumn: width + seen.at };
   }
   if (notice === null) return { row: focusedRefusal(state), caretColumn: null };
   const mark = notice.tone === "bad" || notice.tone === "warn" ? "! " : "";
@@ -142,7 +146,7 @@ export function drawScreen(state: State): Drawn {
   const all: readonly Row[] = [
     tabsRow(state),
     briefRow(state),
-    rowOf(span("─".repeat(columns), "quiet")),
+    ruleRow(state),
     ...body,
     rowOf(span(caution, "caution")),
     notice.row,

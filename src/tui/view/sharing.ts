@@ -1,10 +1,9 @@
 // How one bank divides its voltage: every state as a bar, the worst corners, the course, the spread, and what eats the margin.
 
-import { clampWords, withoutBalanceWords } from "../../cli/index.ts";
 import type { LayoutResult } from "../../search/index.ts";
 import { detailsOf } from "../detail.ts";
 import { shownBank } from "../pick.ts";
-import type { RestDetail } from "../ports.ts";
+import type { RestDetail, SharedWords } from "../ports.ts";
 import { EMPTY_ROW, type Row } from "../row.ts";
 import type { State } from "../state.ts";
 import { bankHead, noBank } from "./bank.ts";
@@ -19,11 +18,11 @@ import { spreadRows } from "./sharingSpread.ts";
 import { paragraph } from "./words.ts";
 
 /** With no resistors, and with clamp diodes. */
-function mendRows(layout: LayoutResult, rest: RestDetail, columns: number): readonly Row[] {
-  const without = withoutBalanceWords(layout);
+function mendRows(layout: LayoutResult, rest: RestDetail, words: SharedWords, columns: number): readonly Row[] {
+  const without = words.withoutBalanceWords(layout);
   return [
     ...(without === "" ? [] : paragraph(`Without balancing resistors: ${without}.`, columns)),
-    ...(rest.clamp === null ? [] : paragraph(`Against reversal: ${clampWords(rest.clamp)}.`, columns)),
+    ...(rest.clamp === null ? [] : paragraph(`Against reversal: ${words.clampWords(rest.clamp)}.`, columns)),
   ];
 }
 
@@ -33,7 +32,8 @@ const chartHeight = ({ columns, rows }: Room): number =>
 
 export function sharingPage(state: State, room: Room): Page {
   const layout = shownBank(state);
-  if (layout === null || state.answer?.kind !== "planned") return noBank(state, room);
+  const { words } = state;
+  if (layout === null || state.answer?.kind !== "planned" || words === null) return noBank(state, room);
   const { brief, plan } = state.answer;
   const { rest, margin, spread } = detailsOf(state) ?? {};
   const wide = room.columns >= TWO_COLUMNS;
@@ -42,7 +42,7 @@ export function sharingPage(state: State, room: Room): Page {
   const size = { columns: right, rows: chartHeight(room) };
   const bars = barRows(layout, { rest, spread, state, columns: left });
   const corners = rest ? cornerRows(layout, rest, left, brief.hold === Number.POSITIVE_INFINITY) : working(left);
-  const mends = rest ? mendRows(layout, rest, left) : [];
+  const mends = rest ? mendRows(layout, rest, words, left) : [];
   const course = [
     heading("Time course at the worst corner"),
     ...(rest ? courseRows(layout, rest, { brief, state, size }) : working(right)),

@@ -1,10 +1,11 @@
 // How the worst unit's voltage is spread over many such banks, the limit across it, and the chance of passing it.
+import { tenTo } from "../../quantity/index.ts";
 import type { LayoutResult, ShareSpread } from "../../search/index.ts";
 import { chartRows } from "../chart.ts";
 import { wantsSpread } from "../detail.ts";
 import type { Point } from "../plot.ts";
 import { type Row, rowOf, span } from "../row.ts";
-import { shown, shownLimit, shownWorst } from "../values.ts";
+import { grouped, shown, shownLimit, shownWorst } from "../values.ts";
 import type { DrawnIn } from "./sharingCourse.ts";
 import { paragraph } from "./words.ts";
 
@@ -14,7 +15,7 @@ export function chanceWords(chance: number): string {
   if (chance >= 0.01) return shownWorst(chance, "fraction");
   const power = Math.floor(Math.log10(chance)) - 2;
   // A subnormal chance has no third figure to round.
-  const scale = 10 ** power;
+  const scale = tenTo(power);
   return scale > 0
     ? (Math.ceil(Number((chance / scale).toPrecision(12))) * scale).toExponential(2)
     : chance.toExponential(2);
@@ -112,7 +113,7 @@ export function spreadRows(
       span(error === 0 ? "" : ` +- ${chanceWords(error)}`),
     ),
     ...paragraph(
-      `Reckoned, not counted${asked}. ${banks.toLocaleString("en")} banks drawn from seed ${seed}, each unit ${law}.`,
+      `Reckoned, not counted${asked}. ${grouped(banks)} banks drawn from seed ${seed}, each unit ${law}.`,
       columns,
       over ? "bad" : "quiet",
     ),

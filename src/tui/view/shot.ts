@@ -1,11 +1,10 @@
 // One shot of the chosen bank into the brief's load: its course, figures, energies, faults, and what is not assessed.
 
-import { rateBlocks, refusalWords } from "../../cli/index.ts";
 import type { Bound } from "../../pulse/index.ts";
 import type { ShotReport } from "../../search/index.ts";
 import { detailsOf } from "../detail.ts";
 import { shownBank } from "../pick.ts";
-import type { ShotDetail } from "../ports.ts";
+import type { SharedWords, ShotDetail } from "../ports.ts";
 import { EMPTY_ROW, type Row, rowOf, span } from "../row.ts";
 import type { State } from "../state.ts";
 import { shown, shownVerdict, VERDICT_STYLE, worstVerdict } from "../values.ts";
@@ -21,6 +20,10 @@ import { openRows } from "./shotOpen.ts";
 import { sweepRows } from "./shotSweep.ts";
 import { traceRows } from "./shotTrace.ts";
 import { paragraph } from "./words.ts";
+
+/** A state once the engine is there. */
+type Worded = State & { readonly words: SharedWords };
+const isWorded = (state: State): state is Worded => state.words !== null;
 
 /** Without a load there is no shot: how to give one. */
 function noLoad(head: readonly Row[], { columns }: Room): Page {
@@ -39,10 +42,14 @@ function noLoad(head: readonly Row[], { columns }: Room): Page {
   ]);
 }
 
-function refusedRows(read: Extract<ShotDetail["report"], { readonly ok: false }>, columns: number): readonly Row[] {
+function refusedRows(
+  read: Extract<ShotDetail["report"], { readonly ok: false }>,
+  columns: number,
+  words: SharedWords,
+): readonly Row[] {
   return [
     ...paragraph("This shot cannot be reckoned:", columns, "strong"),
-    ...read.refusals.flatMap((refusal) => paragraph(`- ${refusalWords(refusal)}`, columns, "warn")),
+    ...read.refusals.flatMap((refusal) => paragraph(`- ${words.refusalWords(refusal)}`, columns, "warn")),
     ...paragraph("l goes to the load on the brief; the rest of it is in the brief's file.", columns),
   ];
 }
@@ -67,13 +74,15 @@ function glance({ discharge, findings }: ShotReport): Row {
 }
 
 /** Charging, heat, life and lamp, in the words of the pulse command. */
-const rateRows = (report: ShotReport, columns: number): readonly Row[] =>
-  rateBlocks(report, columns).flatMap((block, index) => [
-    ...(index === 0 ? [] : [EMPTY_ROW]),
-    ...block.split("\n").map((line, at) => rowOf(span(line, at === 0 ? "strong" : "plain"))),
-  ]);
+const rateRows = (report: ShotReport, columns: number, words: SharedWords): readonly Row[] =>
+  words
+    .rateBlocks(report, columns)
+    .flatMap((block, index) => [
+      ...(index === 0 ? [] : [EMPTY_ROW]),
+      ...block.split("\n").map((line, at) => rowOf(span(line, at === 0 ? "strong" : "plain"))),
+    ]);
 
-function shotRows(report: ShotReport, detail: ShotDetail, state: State, room: Room): readonly Row[] {
+function shotRows(report: ShotReport, detail: ShotDetail, state: Worded, room: Room): readonly Row[] {
   const wide = room.columns >= TWO_COLUMNS;
   const left = wide ? Math.floor((room.columns - RULE) / 2) : room.columns;
   const right = wide ? room.columns - left - RULE : room.columns;
@@ -90,8 +99,8 @@ function shotRows(report: ShotReport, detail: ShotDetail, state: State, room: Ro
   const faults = [heading("If one thing fails"), ...faultRows(report.faults, right)];
   const last = [
     [heading("Not assessed"), ...openRows(report, room.columns)],
-    [heading("Checks of the shot"), ...findingRows(report.findings, room.columns)],
-    rateRows(report, room.columns),
+    [heading("Checks of the shot"), ...findingRows(report.findings, room.columns, state.words)],
+    rateRows(report, room.columns, state.words),
     cautionRows(detail.cautions, room.columns),
   ] as const;
   return wide
@@ -101,13 +110,13 @@ function shotRows(report: ShotReport, detail: ShotDetail, state: State, room: Ro
 
 export function shotPage(state: State, room: Room): Page {
   const layout = shownBank(state);
-  if (layout === null || state.answer?.kind !== "planned") return noBank(state, room);
+  if (layout === null || state.answer?.kind !== "planned" || !isWorded(state)) return noBank(state, room);
   const head = bankHead(state, layout);
   if (state.answer.brief.load === undefined) return noLoad(head, room);
   const { shot } = detailsOf(state) ?? {};
   if (shot === undefined) return pageOf([...head, ...working(room.columns)]);
   if (shot === null) return pageOf([...head, ...paragraph("The catalogue has no such part.", room.columns, "warn")]);
   const { report } = shot;
-  if (!report.ok) return scrolled(state, "shot", head, refusedRows(report, room.columns), room);
+  if (!report.ok) return scrolled(state, "shot", head, refusedRows(report, room.columns, state.words), room);
   return scrolled(state, "shot", [...head, glance(report.value)], shotRows(report.value, shot, state, room), room);
 }

@@ -2,7 +2,7 @@
 import type { Fault, FaultId } from "../../pulse/index.ts";
 import { type Column, columnsFor, headingRow, snug, tableRow } from "../columns.ts";
 import { type Row, span } from "../row.ts";
-import { shownWorst, UNKNOWN, VERDICT_STYLE } from "../values.ts";
+import { shown, shownWorst, UNKNOWN, VERDICT_STYLE } from "../values.ts";
 import { VERDICT_MARK } from "./findings.ts";
 import { paragraph } from "./words.ts";
 
@@ -55,6 +55,15 @@ export function faultRows(faults: readonly Fault[], columns: number): readonly R
   return [
     headingRow(table),
     ...faults.map((fault) => tableRow(table, fault)),
+    ...faults.flatMap(({ id, energyIntoIsolating: taken }) =>
+      taken === null
+        ? []
+        : paragraph(
+            `- ${nameOf(id)}: isolating resistors take ${shown(taken.faulted, "energy")} in the failed unit's leg and ${shown(taken.others, "energy")} in all the others.`,
+            columns,
+            "quiet",
+          ),
+    ),
     ...faults
       .filter(({ verdict }) => verdict !== "pass")
       .flatMap(({ id, stops }) => paragraph(`- ${nameOf(id)}: ${stops}`, columns, "quiet")),

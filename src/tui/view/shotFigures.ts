@@ -1,4 +1,5 @@
 // The figures of a shot at their low, nominal and high, and what the worst unit bears.
+import type { PlaceShares } from "../../pulse/index.ts";
 import type { Dimension } from "../../quantity/index.ts";
 import type { ShotReport } from "../../search/index.ts";
 import { type Column, columnsFor, headingRow, snug, tableRow } from "../columns.ts";
@@ -92,10 +93,20 @@ export function figureRows(report: ShotReport, columns: number): readonly Row[] 
   ];
 }
 
+function placeRows({ alike, segment }: PlaceShares, columns: number): readonly Row[] {
+  const [low, high] = [Math.min(...alike), Math.max(...alike)];
+  const at = (share: number): string =>
+    `${shown(share * alike.length, "count")} at position ${alike.indexOf(share) + 1}`;
+  const step = `${shown(segment.resistance, "resistance")} and ${shown(segment.inductance, "inductance")}`;
+  const words = `alike units carry ${at(low)} to ${at(high)} of an even part; ${step} lie between`;
+  return hangingRows("along the bus", words, columns);
+}
+
 export function unitRows({ discharge: { unit }, bank }: ShotReport, columns: number): readonly Row[] {
   const even = bank.parallel === 1 ? "" : `, ${shown(unit.evenCurrent, "current")} if all were alike`;
   return [
     ...hangingRows("peak current", `${shown(unit.peakCurrent, "current")}${even}. ${unit.why}`, columns),
+    ...(unit.place === null ? [] : placeRows(unit.place, columns)),
     ...hangingRows("slew", shown(unit.slew, "slew"), columns),
     ...hangingRows("action", unit.action === null ? "no bound" : shown(unit.action, "action"), columns),
     ...hangingRows(

@@ -6,6 +6,7 @@ import type { Row } from "../row.ts";
 import type { State } from "../state.ts";
 import { shown } from "../values.ts";
 import type { Room } from "./page.ts";
+import { dotted } from "./sharingCourse.ts";
 import { paragraph } from "./words.ts";
 
 export interface ShotDrawn {
@@ -44,20 +45,39 @@ function lowestOf(
   return { time, voltage: -reversal * voltage };
 }
 
-export function traceRows({ discharge, voltage }: ShotReport, { state, size }: ShotDrawn): readonly Row[] {
+export function traceRows({ discharge, voltage, band }: ShotReport, { state, size }: ShotDrawn): readonly Row[] {
   const { peakTime, at, duration } = discharge;
   const until = drawnSeconds(discharge);
   const count = size.columns * 2;
   const times = Array.from({ length: count }, (_, index) => (until * index) / (count - 1));
   const samples = times.map((time) => ({ time, ...at(time) }));
+  const ends = band === null ? [] : times.map(band.at);
+  const edges = (key: "current" | "voltage") =>
+    (["low", "high"] as const).map((end) => ({
+      points: dotted(
+        ends.map((one) => ({ x: one.time, y: one[key][end] })),
+        size.columns,
+      ),
+      joined: false,
+      glyph: ".",
+    }));
   const peak = { x: peakTime, y: at(peakTime).current };
   const lowest = lowestOf(discharge, { voltage, until });
   const range = (values: readonly number[]) => {
     const [low, high] = [Math.min(0, ...values), Math.max(0, ...values)];
     return { low: low * 1.05, high: high > low ? high * 1.05 : low + 1 };
   };
-  const amperes = range([...samples.map(({ current }) => current), peak.y]);
-  const volts = range([...samples.map((one) => one.voltage), voltage, lowest.voltage]);
+  const amperes = range([
+    ...samples.map(({ current }) => current),
+    ...ends.flatMap(({ current }) => [current.low, current.high]),
+    peak.y,
+  ]);
+  const volts = range([
+    ...samples.map((one) => one.voltage),
+    ...ends.flatMap((one) => [one.voltage.low, one.voltage.high]),
+    voltage,
+    lowest.voltage,
+  ]);
   const under = ["0", "time", shown(until, "time")] as const;
   const zero = (low: number) => (low < 0 ? [{ y: 0, words: "0" }] : []);
   const common = { ...size, x: { low: 0, high: until > 0 ? until : 1 }, ascii: state.look.ascii };
@@ -67,13 +87,17 @@ export function traceRows({ discharge, voltage }: ShotReport, { state, size }: S
     reversed
       ? `R most reversed ${shown(lowest.voltage, "voltage")} after ${shown(lowest.time, "time")}.`
       : "The voltage does not reverse.",
+    ...(band === null ? [] : ["Dots: lowest and highest of both with all that spreads."]),
     ...(until < duration ? [`Drawn to ${shown(until, "time")}; it is over after ${shown(duration, "time")}.`] : []),
   ];
   return [
     ...chartRows({
       ...common,
       y: amperes,
-      curves: [{ points: samples.map(({ time: x, current: y }) => ({ x, y })), joined: true, glyph: "*" }],
+      curves: [
+        { points: samples.map(({ time: x, current: y }) => ({ x, y })), joined: true, glyph: "*" },
+        ...edges("current"),
+      ],
       levels: zero(amperes.low),
       marks: [{ at: peak, letter: "P" }],
       top: shown(amperes.high, "current"),
@@ -83,7 +107,10 @@ export function traceRows({ discharge, voltage }: ShotReport, { state, size }: S
     ...chartRows({
       ...common,
       y: volts,
-      curves: [{ points: samples.map(({ time: x, voltage: y }) => ({ x, y })), joined: true, glyph: "*" }],
+      curves: [
+        { points: samples.map(({ time: x, voltage: y }) => ({ x, y })), joined: true, glyph: "*" },
+        ...edges("voltage"),
+      ],
       levels: zero(volts.low),
       marks: reversed ? [{ at: { x: lowest.time, y: lowest.voltage }, letter: "R" }] : [],
       top: shown(volts.high, "voltage"),

@@ -56,6 +56,7 @@ export function changeSentence(change: Change): string {
 
 /** Why there is nothing to list, in sentences; empty when there is something. */
 export function emptySentences(state: State): readonly string[] {
+  if (state.words === null) return [`Reading ${state.stock.name}.`];
   if (state.stock.parts === 0) {
     return [
       "There is no catalogue yet, so there is nothing to build from.",

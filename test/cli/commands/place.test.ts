@@ -197,3 +197,22 @@ describe("place: limits, lists, goals", () => {
     expect(quick.bank.moves).toBeLessThan(2e5);
   });
 });
+
+describe("place --rooms", () => {
+  const lot = lotCsv([470, 471, 472, 473, 474, 475, 476, 477], "uF", {
+    group: ["tall", "tall", "tall", "tall", "short", "short", "short", "short"],
+  });
+  const argv = ["place", ...shape(2, 3, "cross-tied"), "--measured", "l.csv", "--json"];
+
+  test("a stage takes only its group", async () => {
+    const { status, out } = await cli([...argv, "--rooms", "2=tall"], { "l.csv": lot });
+    expect(status).toBe(0);
+    const [, second] = JSON.parse(out).groups as string[][];
+    expect(second?.every((serial) => ["u0", "u1", "u2", "u3"].includes(serial))).toBe(true);
+  });
+
+  test("a group that no unit is of ends with 2", async () => {
+    const { status, err } = await cli([...argv, "--rooms", "2=wide"], { "l.csv": lot });
+    expect([status, err]).toEqual([2, expect.stringMatching(/no measured unit is of this group/)]);
+  });
+});

@@ -130,3 +130,43 @@ test("rows that are lost are told on the error stream, and the rest is planned",
   expect(err).toMatch(/nan\.csv:3:2 capacitance: this is no number/);
   expect(out).toMatch(/1 fault costs its row/);
 });
+
+describe("plan --fuses", () => {
+  const CHEAP = {
+    catalog: [at("catalogs/oil-and-paper.csv")],
+    energy: "2 kJ",
+    voltage: "2 kV",
+    ripple: "100 %",
+    loadResistance: "0.2 ohm",
+    loadInductance: "10 uH",
+    limit: "3",
+  } as unknown as PlanFlags;
+
+  test("a fuse for each unit is in the cost and said; without it the same bank costs so much less", () => {
+    const fused = plan(undefined, { ...CHEAP, limit: "40", fuses: at("catalogs/fuses.csv"), json: true });
+    const layouts: readonly { id: string; protection: { cost: number }[]; cost: { total: number } }[] = JSON.parse(
+      fused.out,
+    ).layouts;
+    // a fuse may ask for more in parallel than the energy does; this one is in both plans
+    const ids: readonly string[] = JSON.parse(plan(undefined, { ...CHEAP, limit: "40", json: true }).out).layouts.map(
+      ({ id }: { id: string }) => id,
+    );
+    const best = layouts.find(({ id, protection }) => ids.includes(id) && protection.length > 0);
+    if (best === undefined) throw new Error("no layout is in both plans");
+    expect(best.protection).toMatchObject([{ kind: "fuse", count: expect.any(Number), cost: expect.any(Number) }]);
+    const bare = JSON.parse(plan(undefined, { ...CHEAP, limit: "40", json: true }).out).layouts;
+    const same = bare.find(({ id }: { id: string }) => id === best.id);
+    expect(best.cost.total - same.cost.total).toBeCloseTo(best.protection[0]?.cost as number, 9);
+    expect(plan(undefined, { ...CHEAP, fuses: at("catalogs/fuses.csv") }).out).toMatch(
+      /fuse +\d+ x lab-fu-\S+ \S+ EUR, in/,
+    );
+  });
+
+  test("fuses asked by the brief without a catalogue of them, and beside a measured lot, are refused", () => {
+    const asked = plan(undefined, { ...CHEAP, fused: true } as unknown as PlanFlags);
+    expect([asked.status, asked.err]).toEqual([2, expect.stringMatching(/fuse catalogue/)]);
+    const lot = { measured: at("fixtures/units/lot.csv"), basis: "measured", fuses: at("catalogs/fuses.csv") };
+    const beside = plan(undefined, { ...CHEAP, ...lot } as unknown as PlanFlags);
+    expect([beside.status, beside.err]).toEqual([2, expect.stringMatching(/--fuses/)]);
+  });
+});

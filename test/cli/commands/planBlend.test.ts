@@ -126,3 +126,56 @@ describe("engines", () => {
     expect(blends[0].certificate).toBeNull();
   }, 30_000);
 });
+
+describe("plan --blend refuses or flags", () => {
+  const asked = ["--energy", "80 J", "--voltage", "400 V", "--ripple", "100 %", "--basis", "nominal", "--limit", "1"];
+  const line = [...asked, "--catalog", "c.csv", "--blend"];
+  test("the price under which the best part without one would win, and what is known ranked", async () => {
+    const { out } = await cli([...line, "--json"], { "c.csv": rowsOf({ price: "" }, { price: 5 }) });
+    const { blends, blendSearch } = JSON.parse(out);
+    expect(blends[0].strings[0].part).toBe("b");
+    expect(blendSearch.winningPrices).toEqual([{ part: "a", below: 5, computed: true, proven: true }]);
+  });
+  test("a larger quantity at a higher unit price is taken as it stands, and said", async () => {
+    const { out, status } = await cli(line, { "c.csv": rowsOf({ price: 5, "price breaks": "10: 6.50" }) });
+    expect(status).toBe(0);
+    expect(out.replace(/\s+/g, " ")).toContain("A larger quantity has a higher unit price in the list of a");
+    expect((await cli(line, { "c.csv": rowsOf({ price: 5 }) })).out).not.toContain("A larger quantity");
+  });
+  test("a pack larger than the stock: the part is named with both figures", async () => {
+    const { out } = await cli([...line, "--json"], { "c.csv": rowsOf({ pack: 25, available: 20 }, { price: 9 }) });
+    expect(JSON.parse(out).blendSearch.leftOut).toEqual([{ part: "a", reason: "stock", value: 25, limit: 20 }]);
+  });
+  test("two currencies without a rate are refused; with one they are one list", async () => {
+    const texts = { "c.csv": rowsOf({ currency: "EUR" }, { currency: "USD", price: 3 }) };
+    const refused = await cli(line, texts);
+    expect([refused.status, refused.err]).toEqual([2, expect.stringContaining("EUR and USD")]);
+    const brief = JSON.stringify({
+      energy: 80,
+      voltage: 400,
+      ripple: 1,
+      basis: "nominal",
+      currency: "EUR",
+      exchange: { USD: 0.5 },
+    });
+    const rated = await cli(["b.json", "--catalog", "c.csv", "--blend", "--limit", "1", "--json"], {
+      ...texts,
+      "b.json": brief,
+    });
+    // 10 of b at 3 USD are 15 EUR.
+    expect(JSON.parse(rated.out).blends[0].cost).toMatchObject({ total: 15, currency: "EUR" });
+  });
+  test("ceilings that no bank meets: which to loosen first, alone and together, computed", async () => {
+    const tight = [...line, "--max-volume", "0.5 L", "--max-mass", "0.5 kg", "--json"];
+    const { out, status } = await cli(tight, { "c.csv": rowsOf({}) });
+    const { blends, blendSearch } = JSON.parse(out);
+    expect([status, blends, blendSearch.status]).toEqual([1, [], "infeasible"]);
+    const by = Object.fromEntries(blendSearch.loosen.map((one: { field: string }) => [one.field, one]));
+    // Ten units of 96 cm3 and 100 g: neither limit alone lets them in, twice both does.
+    expect([by.maxVolume.to, by.maxMass.to]).toEqual([null, null]);
+    expect(by["all ceilings"].to).toBeCloseTo(2, 4);
+    expect(by.energy.to).toBeCloseTo(40, 3);
+    const text = await cli(tight.slice(0, -1), { "c.csv": rowsOf({}) });
+    expect(text.out.replace(/\s+/g, " ")).toContain("raise all limits on room, mass and units together by 100 %");
+  });
+});

@@ -1,6 +1,7 @@
 // The least loosening of each limit, against trying everything.
 import { expect, test } from "vitest";
 import { blendTotals } from "../../../src/search/blend/evaluate.ts";
+import { findBlend } from "../../../src/search/blend/findBlend.ts";
 import { findLoosenings, leastAmount } from "../../../src/search/blend/loosen.ts";
 import { bruteForce } from "../../support/blendBrute.ts";
 import { plainModel, tinyModel } from "../../support/blendModels.ts";
@@ -43,8 +44,9 @@ test("findLoosenings by hand: one more litre is the least change", () => {
   const found = findLoosenings(model);
   expect(found[0]).toMatchObject({ limit: "volume", cost: 70, proven: true });
   expect(found[0]!.change).toBeCloseTo(10 / 9.5 - 1, 7);
-  expect(found[1]).toMatchObject({ limit: "requirement", cost: 63, proven: true });
-  expect(found[1]!.to).toBeCloseTo(9, 5);
+  const energy = found.find(({ limit }) => limit === "requirement")!;
+  expect(energy).toMatchObject({ limit: "requirement", cost: 63, proven: true });
+  expect(energy.to).toBeCloseTo(9, 5);
   expect(found.find(({ limit }) => limit === "types")).toMatchObject({ to: 2, proven: true });
   expect(found.find(({ limit }) => limit === "mass")).toMatchObject({ to: null, cost: null, proven: true });
 });
@@ -66,4 +68,26 @@ test("findLoosenings: what it says works, and a hair less does not: impossible o
     }
   }
   expect(met).toBeGreaterThan(20);
+});
+
+test("findLoosenings: where two ceilings stand in the way, the least factor on all of them, against trying factors", () => {
+  const model = plainModel(
+    10,
+    [
+      { capacity: 1, most: 12, price: 5, volume: 1, mass: 2 },
+      { capacity: 2, most: 3, price: 20, volume: 1, mass: 7 },
+    ],
+    { volume: 6, mass: 15 },
+  );
+  expect(findBlend(model).best).toBeNull();
+  const found = findLoosenings(model).find(({ limit }) => limit === "ceilings")!;
+  // Every mix: the least of what each takes of the ceiling that it fills most.
+  let least = Number.POSITIVE_INFINITY;
+  for (let x = 0; x <= 12; x += 1)
+    for (let y = 0; y <= 3; y += 1)
+      if (x + 2 * y >= 10) least = Math.min(least, Math.max((x + y) / 6, (2 * x + 7 * y) / 15));
+  expect(found.to! / least).toBeCloseTo(1, 5);
+  expect(found).toMatchObject({ from: 1, proven: true });
+  const one = plainModel(10, [{ capacity: 1, most: 12, price: 5, volume: 1 }], { volume: 6 });
+  expect(findLoosenings(one).some(({ limit }) => limit === "ceilings")).toBe(false);
 });

@@ -13,10 +13,10 @@ const model = plainModel(6, [
 test("priceSwitches by hand: 6 of the first for 60; at half a cent more a unit the second (66) wins", () => {
   const cheapest = findBlend(model).best!;
   expect(cheapest.cost).toBe(60);
-  const [rise] = priceSwitches(model, cheapest, 0);
+  const [rise] = priceSwitches(model, cheapest, [0]);
   // Every pair of strings given up (4 units) costs 2 more: half a cent a unit.
   expect(rise).toMatchObject({ option: 0, move: "rise", perUnit: 0.5, proven: true });
-  const [fall] = priceSwitches(model, cheapest, 1);
+  const [fall] = priceSwitches(model, cheapest, [1]);
   expect(fall).toMatchObject({ option: 1, move: "fall", perUnit: 0.5, proven: true });
 });
 
@@ -27,7 +27,7 @@ test("priceSwitches against trying everything with the price moved: 100 models, 
     const best = findBlend(tiny).best;
     if (best === null) continue;
     tiny.options.forEach((option, at) => {
-      for (const { move, perUnit, next } of priceSwitches(tiny, best, at)) {
+      for (const { move, perUnit, next } of priceSwitches(tiny, best, [at])) {
         met += 1;
         const sign = move === "rise" ? 1 : -1;
         // Brute force with a price for each string beside the table; costs need not be whole there.

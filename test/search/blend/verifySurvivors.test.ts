@@ -17,6 +17,7 @@ const columns: VerifyColumn[] = model.options.map((option) => ({
   amounts: [option.capacity / 10, 0, 0, 0],
   last: 4,
   gain: 0,
+  share: 0,
 }));
 const certificate = (cost: number): BlendCertificate => ({
   cost,

@@ -1,7 +1,8 @@
 import { describe, expect, test } from "vitest";
 import { RULES } from "../../../src/hazard/index.ts";
 import { factsOf } from "../../../src/sheet/facts.ts";
-import { hazardSection, pathCount } from "../../../src/sheet/sections/hazard.ts";
+import { hazardSection } from "../../../src/sheet/sections/hazard.ts";
+import { pathCount } from "../../../src/sheet/ways.ts";
 import { BARE, sheetInput, tableOf, wordsIn } from "../../support/sheet.ts";
 
 const section = (wishes: Parameters<typeof sheetInput>[0] = {}) => hazardSection(sheetInput(wishes));

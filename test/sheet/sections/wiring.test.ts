@@ -1,6 +1,7 @@
 import { Matrix, solve } from "ml-matrix";
 import { describe, expect, test } from "vitest";
 import { chargingShares } from "../../../src/bank/index.ts";
+import { sectionWords, shotSection } from "../../../src/order/index.ts";
 import { chainsOf } from "../../../src/place/index.ts";
 import { parseQuantity } from "../../../src/quantity/index.ts";
 import { type SheetInput, sheetOf, sheetText } from "../../../src/sheet/index.ts";
@@ -195,6 +196,11 @@ describe("wiringSection(input)", () => {
     const { rows } = tableOf({ sections: [section] }, "wiring");
     expect(rows.every((row) => row.slice(3).every((cell) => cell === null))).toBe(true);
     expect(wordsIn(section)).toMatch(/without it no joint is signed off/);
+    // The same section as on the order.
+    const input = sheetInput({ brief: LOAD });
+    const order = sectionWords(shotSection(input) ?? Number.NaN);
+    expect(rows.find((row) => row[0] === "S1 b")?.[2]).toBe(order);
+    expect(tableOf({ sections: [section] }, "bars").rows[0]?.[3]).toBe(order);
     expect(wordsIn(wiringSection(sheetInput()))).toMatch(/no action integral is known without a load/);
   });
 });

@@ -11,11 +11,15 @@ const withBank = (changes: Partial<State> = {}): State => {
   const state = stateWith({ screen: "order", chosen: pin, ...changes });
   return { ...state, answer: answerFor(state, engine, true) };
 };
-const asked = (text: string, replace = false) => withBank({ prompt: { line: lineOf(text), replace } });
+const asked = (text: string, replace = false) => withBank({ prompt: { what: "order", line: lineOf(text), replace } });
 
 test("askName without a bank asks nothing, with one offers its name", () => {
   expect(askName(stateWith({ screen: "order" })).state.prompt).toBeNull();
-  expect(askName(withBank()).state.prompt).toEqual({ line: lineOf("order-flash-a-7s4p.csv"), replace: false });
+  expect(askName(withBank()).state.prompt).toEqual({
+    what: "order",
+    line: lineOf("order-flash-a-7s4p.csv"),
+    replace: false,
+  });
 });
 
 test.each([
@@ -38,7 +42,7 @@ test("a file that is there asks once more, and only then is replaced", () => {
   expect(state.prompt?.replace).toBe(true);
   expect(confirm(state).effects[0]).toMatchObject({ replace: true });
   const kept = cancel(state).state;
-  expect(kept.prompt).toEqual({ line: lineOf("a.csv"), replace: false });
+  expect(kept.prompt).toEqual({ what: "order", line: lineOf("a.csv"), replace: false });
   expect(cancel(kept).state.prompt).toBeNull();
 });
 

@@ -1,9 +1,10 @@
 // Pins and the chosen bank.
 import { expect, test } from "vitest";
+import { foldedRows } from "../../../src/tui/comparison.ts";
 import { answerFor } from "../../../src/tui/engine.ts";
-import { arrangementOf, listed } from "../../../src/tui/pick.ts";
+import { arrangementOf, listed, pinnedLayouts } from "../../../src/tui/pick.ts";
 import { MOST_PINS, type State } from "../../../src/tui/state.ts";
-import { chooseBank, togglePin } from "../../../src/tui/update/pins.ts";
+import { chooseBank, orderPins, togglePin } from "../../../src/tui/update/pins.ts";
 import { engine, stateWith } from "../../support/stock.ts";
 
 const planned = (changes: Partial<State> = {}): State => {
@@ -47,4 +48,20 @@ test("chooseBank goes to the bank and begins at its top", () => {
   expect(state.chosen).toEqual(arrangementOf(listed(planned())[0] as never));
   expect(state.scroll.bank).toBe(0);
   expect(effects).toEqual([{ type: "ask", asked: 1 }]);
+});
+
+test("orderPins(state): the pins in the order of the row under the cursor, best first; alone or in order nothing is asked", () => {
+  const layouts = listed(planned()).filter(({ part }, i, all) => all.findIndex((one) => one.part === part) === i);
+  const pins = layouts.slice(0, 3).map(arrangementOf);
+  expect(pins).toHaveLength(3);
+  const state = planned({ screen: "compare", pins });
+  const rows = foldedRows(pinnedLayouts(state), false).shown;
+  const units = rows.findIndex(({ label }) => label === "units");
+  const ordered = orderPins({ ...state, scroll: { compare: units } });
+  const after = planned({ screen: "compare", pins: ordered.state.pins });
+  const counts = pinnedLayouts(after).map((layout) => layout?.units ?? 0);
+  expect(counts).toEqual([...counts].sort((a, b) => a - b));
+  expect(new Set(ordered.state.pins)).toEqual(new Set(pins));
+  expect(orderPins({ ...after, scroll: { compare: units } }).effects).toEqual([]);
+  expect(orderPins(planned({ screen: "compare", pins: pins.slice(0, 1) })).effects).toEqual([]);
 });

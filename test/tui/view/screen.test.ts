@@ -77,7 +77,7 @@ describe("drawScreen(state): never outside the terminal", () => {
     ),
     planned({ pins: oddPins, chosen: oddPins[0] ?? null, unfolded: true }, false, oddEngine),
     planned({ help: true }),
-    planned({ chosen: pins[0] ?? null, prompt: { line: lineOf("x".repeat(200)), replace: false } }),
+    planned({ chosen: pins[0] ?? null, prompt: { what: "order", line: lineOf("x".repeat(200)), replace: false } }),
     planned({ field: FIELDS.length - 1, values: { ...BRIEF, title: "漢".repeat(90) }, caret: 90 }),
     planned({ values: { energy: "1 GJ", voltage: "9 MV", ripple: "1 %" } }, true),
   ];
@@ -122,7 +122,7 @@ describe("empty states", () => {
       "part, capacitance [uF] and voltage [V]",
     );
   });
-  test.each(SCREENS)("a brief that is not whole, on %s", (screen) => {
+  test.each(SCREENS.filter((screen) => screen !== "parts"))("a brief that is not whole, on %s", (screen) => {
     has(
       planned({ screen, values: { energy: "x", ripple: "20" } }),
       "No plan yet; to be mended: Energy of one pulse, Allowed fall; still needed: Charge voltage.",
@@ -238,7 +238,7 @@ describe("order and help", () => {
       planned({ screen: "order", chosen: pins[0] ?? null, rows: 50 }),
       "to be chosen",
       "Not in that sum, for want of a price or a choice: ",
-      "Money to spend: 545.60 EUR for 1 line; 17 without a price",
+      "Money to spend: 545.60 EUR for 1 line; 18 without a price",
     );
     has(planned({ screen: "order", chosen: pins[0] ?? null, rows: 16 }), "Money to spend: 545.60 EUR");
   });

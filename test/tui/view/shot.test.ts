@@ -47,6 +47,7 @@ describe.each(SIZES)("%i by %i", (...size) => {
         "Low and high are the extremes",
         "damping",
         "Where the ",
+        "Dots: lowest and highest",
         "L load",
         "unknown, and counted as none",
         ". left in the bank",

@@ -1,0 +1,139 @@
+// Of the ten figures those on what the parts bear: units, fault currents, the bus, resistors, reversal.
+
+import { DEFAULT_FAMILY } from "../../catalog/index.ts";
+import { fittedFuse } from "../../search/index.ts";
+import { busForce } from "../busForce.ts";
+import { cell, down, partOf, up } from "../cells.ts";
+import { factsOf } from "../facts.ts";
+import type { SheetInput } from "../input.ts";
+import type { Cell } from "../model.ts";
+import type { FigureRow } from "./figuresDanger.ts";
+
+function stress({ layout, unit, faults }: SheetInput): readonly FigureRow[] {
+  const { share } = layout;
+  const rated = (x: number | null): Cell => {
+    const part = partOf(x, unit.voltage);
+    return part === null ? null : `${up(part, "fraction")} of ${cell(unit.voltage, "voltage")} rated`;
+  };
+  const short = faults.find(({ id }) => id === "unit-short");
+  return [
+    ["3", "worst unit while charging", up(share.charging, "voltage"), rated(share.charging)],
+    ["3", "worst unit while holding", up(share.holding, "voltage"), rated(share.holding)],
+    [
+      "3",
+      "sound unit with one shorted",
+      up(short?.worstVoltageSpread, "voltage"),
+      rated(short?.worstVoltageSpread ?? null),
+    ],
+    [
+      "4",
+      "peak fault current, one unit shorted",
+      up(short?.peakCurrent, "current"),
+      short?.peakCurrent == null ? "ESR or ESL is not known, or no neighbour feeds it" : short.peakIs,
+    ],
+    [
+      "4",
+      "energy into the shorted unit",
+      up(short?.energyIntoUnit, "energy"),
+      unit.ruptureEnergy === undefined
+        ? "what the case contains is not known: contain it by a screen"
+        : `case contains ${down(unit.ruptureEnergy, "energy")}`,
+    ],
+  ];
+}
+
+function bus({ layout, unit, brief, faults, shot, fuse }: SheetInput): readonly FigureRow[] {
+  const amperes = faults.find(({ id }) => id === "load-short")?.peakCurrent ?? null;
+  const force = amperes === null ? null : busForce(brief.bus, amperes);
+  const voltage = brief.voltage * (1 + brief.overshoot);
+  // What a fuse would see, also where no catalogue of fuses was given.
+  const { faultAction } = (fuse ?? fittedFuse({ layout, unit, brief }, [])).sees;
+  return [
+    [
+      "4",
+      "action integral through a shorted unit",
+      up(faultAction, "action"),
+      faultAction === null
+        ? "needs the units' ESR, and neighbours that feed it"
+        : "what a fuse of the unit must open on",
+    ],
+    [
+      "5",
+      "force on the bus, load shorted",
+      force === null ? null : `${Number(force.toPrecision(3))} N/m`,
+      force === null
+        ? "needs the bus by its shape, and ESR or ESL"
+        : `at ${cell(amperes, "current")}, go and return pushed apart`,
+    ],
+    [
+      "5",
+      "spacing at the highest voltage",
+      null,
+      `for ${cell(voltage, "voltage")}: measured on the built bank, against the hazard file's advice`,
+    ],
+    [
+      "7",
+      "reversal",
+      up(shot?.envelope.reversal.high ?? shot?.discharge.reversal, "fraction"),
+      shot === null ? "needs a load in the brief" : "high end of the spread",
+    ],
+  ];
+}
+
+function resistor(input: SheetInput): readonly FigureRow[] {
+  const { balance } = input.layout;
+  if (balance === null) return [["6", "balancing resistor", "none fitted", ""]];
+  const { stored } = factsOf(input);
+  const family = [...input.families, DEFAULT_FAMILY].find((one) => one.family === balance.family);
+  const part = (x: number | null, rating: number | undefined): Cell => up(partOf(x, rating), "fraction");
+  return [
+    [
+      "6",
+      "balancing element, watts of rated",
+      part(balance.powerEach, family?.power),
+      family === undefined
+        ? "the family's ratings are not known"
+        : `${cell(family.power, "power")}, ${cell(family.derating, "fraction")} used`,
+    ],
+    [
+      "6",
+      "balancing element, volts of rated",
+      part(balance.voltageEach, family?.voltage),
+      cell(family?.voltage, "voltage"),
+    ],
+    [
+      "6",
+      "balancing element, joules of rated",
+      part(stored === null ? null : stored / (balance.positions * balance.elements), family?.pulseEnergy),
+      family?.pulseEnergy === undefined
+        ? "the pulse rating is not known"
+        : `pulse rating ${cell(family.pulseEnergy, "energy")}, one whole bleed-down; it is slow, so watts judge it`,
+    ],
+  ];
+}
+
+function units({ shot, unit }: SheetInput): readonly FigureRow[] {
+  const peak = shot?.discharge.unit.peakCurrent ?? null;
+  return [
+    [
+      "7",
+      "peak current of a unit",
+      up(peak, "current"),
+      unit.peakCurrent === undefined ? "the unit's limit is not known" : `limit ${cell(unit.peakCurrent, "current")}`,
+    ],
+    [
+      "7",
+      "shots used of rated",
+      null,
+      unit.ratedShots === undefined ? "the rated shots are not known" : `${unit.ratedShots} rated; from the shot log`,
+    ],
+  ];
+}
+
+/** Figures 3 to 7. */
+export const dutyFigures = (input: SheetInput): readonly FigureRow[] => [
+  ...stress(input),
+  ...bus(input),
+  ...resistor(input),
+  ...units(input),
+];

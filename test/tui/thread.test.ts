@@ -1,0 +1,40 @@
+// The thread's side: no stock yet, a plan, a piece of a part that is not there.
+import { expect, test } from "vitest";
+import { DEFAULT_FAMILY } from "../../src/catalog/index.ts";
+import { answerFor, questionOf } from "../../src/tui/engine.ts";
+import { type ThreadReply, threadServer } from "../../src/tui/thread.ts";
+import { engine, parts, stateWith } from "../support/stock.ts";
+
+function rig() {
+  const replies: ThreadReply[] = [];
+  return {
+    replies,
+    take: threadServer(
+      (reply) => replies.push(reply),
+      () => 0,
+    ),
+  };
+}
+const question = questionOf(stateWith({ screen: "layouts" }));
+
+test("threadServer: before any stock a plan finds nothing; after it the plan is the engine's, the end always told", () => {
+  const { replies, take } = rig();
+  take({ kind: "plan", id: 1, question });
+  expect(replies.at(-1)).toMatchObject({ kind: "planned", id: 1, answer: { plan: { layouts: [] } } });
+  take({ kind: "stock", parts: parts(), families: [DEFAULT_FAMILY] });
+  take({ kind: "plan", id: 2, question });
+  // The clock stands still: only the last part is told.
+  expect(replies.slice(-2)).toEqual([
+    { kind: "progress", id: 2, done: 4, total: 4 },
+    { kind: "planned", id: 2, answer: answerFor(question, engine, true) },
+  ]);
+});
+
+test("a piece without a bank, of a part that is gone, or of a brief that cannot be read: null", () => {
+  const { replies, take } = rig();
+  const chosen = { part: "gone", series: 2, parallel: 1, ties: "strings" } as const;
+  take({ kind: "piece", id: 1, question, piece: "rest" });
+  take({ kind: "piece", id: 2, question: { ...question, chosen }, piece: "rest" });
+  take({ kind: "piece", id: 3, question: { ...question, values: {} }, piece: "shot" });
+  expect(replies).toEqual([1, 2, 3].map((id) => ({ kind: "worked", id, value: null })));
+});
