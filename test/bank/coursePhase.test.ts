@@ -91,6 +91,60 @@ describe("phaseFrom({ name, chain, drive, start, seconds, until })", () => {
     for (const peak of phase.peaks()) expect(peak).toEqual({ voltage: 10, seconds: 0 });
   });
 
+  test("leaks of odd numbers, one of them after a pull through a resistor, end at zero itself and not a rounding beside it", () => {
+    for (let k = 1; k <= 40; k++) {
+      const chain = [stage(1.3 + k / 7, 0.71), stage(0.9, 0.37 + k / 11), stage(2.1, 0.13 * k)];
+      const rest = phaseFrom({
+        name: "rest",
+        chain,
+        drive: { kind: "current", current: 0 },
+        start: [10.1, 7.3, 3.7 + k / 3],
+        seconds: 1e4,
+      });
+      expect(
+        rest.end.every((v) => v === 0),
+        `rest ${k}: ${rest.end}`,
+      ).toBe(true);
+      const held = phaseFrom({
+        name: "hold",
+        chain: [...chain, stage(1.7)],
+        drive: { kind: "source", voltage: 30, resistance: 0 },
+        start: [7.1, 8.3, 5.9, 30 - 7.1 - 8.3 - 5.9],
+        seconds: Number.POSITIVE_INFINITY,
+      });
+      expect(
+        held.end.slice(0, 3).every((v) => v === 0),
+        `hold ${k}: ${held.end}`,
+      ).toBe(true);
+      expect(held.end[3]).toBeCloseTo(30, 9);
+    }
+  });
+
+  test("cut off on its way: at many instants as at one, and beyond its end it stays there", () => {
+    const dump = phaseFrom({
+      name: "dump",
+      chain: [stage(1), stage(1)],
+      drive: { kind: "source", voltage: 0, resistance: 2 },
+      start: [10, 5],
+      seconds: 0.5,
+    });
+    const fallen = (t: number) => 7.5 * Math.exp(-Math.min(t, 0.5));
+    const rows = dump.voltagesOver({ from: 0.3, step: 0.1, count: 6 });
+    for (let k = 0; k < 6; k++) {
+      const wanted = [fallen(0.3 + 0.1 * k) + 2.5, fallen(0.3 + 0.1 * k) - 2.5].map((v) => expect.closeTo(v, 9));
+      // The sixth figure of time at the very end may fall on either side of it.
+      expect([...rows.subarray(2 * k, 2 * k + 2)], `row ${k}`).toEqual(wanted);
+      expect([...dump.voltagesAt(0.3 + 0.1 * k)]).toEqual(wanted);
+    }
+    expect([...dump.voltagesOver({ from: 3, step: 1, count: 2 })]).toEqual(
+      [...dump.end, ...dump.end].map((v) => expect.closeTo(v, 9)),
+    );
+    const later = charge([stage(1, 0.5), stage(1)], [-2, 0], 10);
+    expect([...later.voltagesOver({ from: 7, step: 2, count: 3 })].slice(2)).toEqual(
+      [...later.end, ...later.end].map((v) => expect.closeTo(v, 9)),
+    );
+  });
+
   test("through a resistor, before and after a leak stops, the current is the volts of the ends over the ohms", () => {
     const phase = phaseFrom({
       name: "dump",
