@@ -11,6 +11,8 @@
  * | R, q   | R, q       | ohm  | balancing resistor and its tolerance; null: none               |
  * | V      | V          | V    | held at the ends, after a charge too fast to leak              |
  *
+ * | k      | victim.units | 1  | units left of the victim's stage, m unless told; `balanced` false: its resistor is open     |
+ *
  * The victim has the least C and no leakage and the greatest R; all others leak most and have the least R. Of the others some
  * have the greatest C (they begin lower) and some the least (they sag faster); how many of each depends on the length of the hold, so
  * every number is tried. Three kinds of stage under one sum leave two modes: closed form.
@@ -32,6 +34,8 @@ export interface HoldCase {
   readonly V: number;
   /** s, 0 to Infinity. */
   readonly hold: number;
+  /** A fault of the victim's own stage: units left in it, and whether its resistor is still there; left out: none. */
+  readonly victim?: { readonly units: number; readonly balanced: boolean };
 }
 
 export interface HoldWorst {
@@ -48,7 +52,7 @@ export function worstAtHold(given: HoldCase): HoldWorst {
   if (n === 1) return { voltage: V, seconds: 0, lowOthers: 0 };
   const at = holdConstants(given);
   const others = n - 1;
-  let best: HoldWorst = { voltage: (V * at.high) / (at.high + others * at.low), seconds: 0, lowOthers: 0 };
+  let best: HoldWorst = { voltage: (V * at.high) / (at.high + others * at.victim), seconds: 0, lowOthers: 0 };
   if (at.drain === 0 && at.slack === 0 && at.keep === 0) return best;
   const settled = (V * at.slack + others * at.drain) / (others * at.keep + at.slack);
   // Nothing stands higher on the way than at the higher of the two ends: brute-forced, see the corner tests.
@@ -67,6 +71,7 @@ export function worstAtHold(given: HoldCase): HoldWorst {
 
 interface HoldConstants {
   /** Stage capacitances, F. */
+  readonly victim: number;
   readonly low: number;
   readonly high: number;
   /** Conductance of the victim and of each other, S; leakage of each other, A. */
@@ -75,11 +80,12 @@ interface HoldConstants {
   readonly drain: number;
 }
 
-function holdConstants({ m, C, tLow, tHigh, leakage, insulation, R, q }: HoldCase): HoldConstants {
+function holdConstants({ m, C, tLow, tHigh, leakage, insulation, R, q, victim }: HoldCase): HoldConstants {
   return {
+    victim: (victim?.units ?? m) * C * (1 - tLow),
     low: m * C * (1 - tLow),
     high: m * C * (1 + tHigh),
-    keep: R === null ? 0 : 1 / (R * (1 + q)),
+    keep: R === null || victim?.balanced === false ? 0 : 1 / (R * (1 + q)),
     slack: m / insulation + (R === null ? 0 : 1 / (R * (1 - q))),
     drain: m * leakage,
   };
@@ -89,40 +95,42 @@ function holdConstants({ m, C, tLow, tHigh, leakage, insulation, R, q }: HoldCas
 function ofMix(given: HoldCase, at: HoldConstants, lowOthers: number): HoldWorst {
   const { n, V, hold } = given;
   const { keep, slack, drain } = at;
-  const wv = 1 / at.low;
+  const wv = 1 / at.victim;
+  const wl = 1 / at.low;
   const wh = 1 / at.high;
   const highOthers = n - 1 - lowOthers;
-  const sum = wv + highOthers * wh + lowOthers * wv;
+  const sum = wv + highOthers * wh + lowOthers * wl;
   const v = (V * wv) / sum;
   const h = (V * wh) / sum;
+  const l = (V * wl) / sum;
   // Currents out of each kind of stage, then the current that holds the ends.
   const outVictim = keep * v;
   const outHigh = slack * h + drain;
-  const outLow = slack * v + drain;
-  const feed = (wv * outVictim + highOthers * wh * outHigh + lowOthers * wv * outLow) / sum;
+  const outLow = slack * l + drain;
+  const feed = (wv * outVictim + highOthers * wh * outHigh + lowOthers * wl * outLow) / sum;
   const dv = wv * (feed - outVictim);
   const dh = wh * (feed - outHigh);
-  const dl = wv * (feed - outLow);
-  const feedSlope = (wv * keep * dv + highOthers * wh * slack * dh + lowOthers * wv * slack * dl) / sum;
+  const dl = wl * (feed - outLow);
+  const feedSlope = (wv * keep * dv + highOthers * wh * slack * dh + lowOthers * wl * slack * dl) / sum;
   const bend = wv * (feedSlope - keep * dv);
-  // Modes: wv/(dV - x) + highOthers wh/(dH - x) + lowOthers wv/(dL - x) = 0, a quadratic in x.
+  // Modes: wv/(dV - x) + highOthers wh/(dH - x) + lowOthers wl/(dL - x) = 0, a quadratic in x.
   const rateV = keep * wv;
   const rateH = slack * wh;
-  const rateL = slack * wv;
+  const rateL = slack * wl;
   const wH = highOthers * wh;
-  const wL = lowOthers * wv;
+  const wL = lowOthers * wl;
   const half = (wv * (rateH + rateL) + wH * (rateV + rateL) + wL * (rateV + rateH)) / (2 * sum);
   const product = (wv * rateH * rateL + wH * rateV * rateL + wL * rateV * rateH) / sum;
   const fast = half + Math.sqrt(Math.max(0, half * half - product));
   const slow = fast === 0 ? 0 : product / fast;
   const victimAt = (t: number): number => v + dv * rise(slow, t) + (bend + slow * dv) * secondRise(slow, fast, t);
   const bendHigh = wh * (feedSlope - slack * dh);
-  const bendLow = wv * (feedSlope - slack * dl);
+  const bendLow = wl * (feedSlope - slack * dl);
   const end = victimAt(hold);
   const dry =
     drain > 0 &&
     ((highOthers > 0 && h + dh * rise(slow, hold) + (bendHigh + slow * dh) * secondRise(slow, fast, hold) < 0) ||
-      (lowOthers > 0 && v + dl * rise(slow, hold) + (bendLow + slow * dl) * secondRise(slow, fast, hold) < 0));
+      (lowOthers > 0 && l + dl * rise(slow, hold) + (bendLow + slow * dl) * secondRise(slow, fast, hold) < 0));
   if (dry)
     return lowOthers === 0 || highOthers === 0
       ? { voltage: V, seconds: hold, lowOthers }
@@ -160,7 +168,7 @@ function exactMix(given: HoldCase, at: HoldConstants, lowOthers: number): HoldWo
     resistance: Number.POSITIVE_INFINITY,
   });
   const chain = [
-    stage(at.low, 0, at.keep),
+    stage(at.victim, 0, at.keep),
     ...Array.from({ length: given.n - 1 }, (_, i) => stage(i < lowOthers ? at.low : at.high, at.drain, at.slack)),
   ];
   const course = courseOf(chain, {

@@ -40,6 +40,7 @@ export {
   largestBalance,
   leftAfterDump,
 } from "./share.ts";
+export { shortedHold } from "./shortedHold.ts";
 export { exceedRisk, type Tail } from "./tail.ts";
 export { riskBound } from "./tailBound.ts";
 export { LEAST_LOT, type TailCase, type UnitLaw } from "./tailLaw.ts";

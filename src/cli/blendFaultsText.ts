@@ -18,6 +18,7 @@ export function blendFaultsText(faults: readonly BlendFault[], width: number): s
       { heading: "group", cell: (one) => one.part, least: 12 },
       { heading: "fault", cell: named, least: 12 },
       { heading: "sound unit", cell: (one) => formatQuantity(one.worstVoltageSpread, "voltage", UP), side: "right" },
+      { heading: "after the hold", cell: (one) => formatQuantity(one.worstHeld, "voltage", UP), side: "right" },
       { heading: "into the unit", cell: (one) => formatQuantity(one.energyIntoUnit, "energy", UP), side: "right" },
       { heading: "of it others", cell: (one) => formatQuantity(one.fromOthers, "energy", UP), side: "right", rank: 1 },
     ],

@@ -25,6 +25,7 @@ export function faultsText(faults: Faults, width: number): string {
       { heading: "verdict", cell: (one) => VERDICTS[one.verdict] },
       { heading: "fault", cell: (one) => one.id.replaceAll("-", " "), least: 12 },
       { heading: "sound unit", cell: (one) => formatQuantity(one.worstVoltageSpread, "voltage", up), side: "right" },
+      { heading: "after the hold", cell: (one) => formatQuantity(one.worstHeld, "voltage", up), side: "right" },
       { heading: "into the unit", cell: (one) => formatQuantity(one.energyIntoUnit, "energy", up), side: "right" },
       { heading: "peak", cell: (one) => formatQuantity(one.peakCurrent, "current", up), side: "right", rank: 1 },
     ],

@@ -3,6 +3,7 @@ import { formatQuantity } from "../quantity/index.ts";
 import { cornerShare, type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
 import { faultAction, faultPeak, rowShortLoop, unitShortLoop } from "./faultCurrents.ts";
 import { faultEnergy } from "./faultEnergy.ts";
+import { heldWithOpen, heldWithShort } from "./faultHold.ts";
 import { type Fault, row } from "./faultRow.ts";
 import { fuseFindings } from "./fuse.ts";
 import { shortedUnit } from "./shortedUnit.ts";
@@ -56,6 +57,7 @@ export function unitShort(bank: FaultBank): Fault {
     id: "unit-short",
     volts: result.held,
     spread: n > 1 ? cornerShare(bank, { units: 1, others: 1, stages: n - 2 }) : 0,
+    held: heldWithShort(bank),
     peak: faultPeak(loop),
     joules: energy.unit,
     outside: energy.unit,
@@ -75,6 +77,7 @@ export function unitOpen(bank: FaultBank): Fault {
     id: "unit-open",
     volts,
     spread: tied ? cornerShare(bank, { units: p - 1, others: p, stages: n - 1 }) : volts,
+    held: tied ? heldWithOpen(bank) : volts,
     peak: { amperes: 0, bound: "value" },
     joules: 0,
     stops: "Nothing opens; the stage voltages tell it while charging.",
@@ -94,6 +97,7 @@ export function rowShort(bank: FaultBank): Fault {
     id: "row-short",
     volts: tied && n > 1 ? voltage / (n - 1) : 0,
     spread: tied && n > 1 ? cornerShare(bank, { units: 1, others: 1, stages: n - 2 }) : 0,
+    held: tied ? heldWithShort(bank) : 0,
     peak: faultPeak(rowShortLoop(bank)),
     joules: tied ? own : poured,
     outside: poured,

@@ -1,6 +1,7 @@
 // Faults around the chain: load short, early fire, bleeder open, dump stuck, charger running on.
 import { type FaultBank, worstBefore } from "./faultBank.ts";
 import { type FaultCurrent, faultPeak, loadShortLoop } from "./faultCurrents.ts";
+import { heldWithoutResistor } from "./faultHold.ts";
 import { type Fault, row } from "./faultRow.ts";
 
 /** A short across the bus: the whole bank empties through itself. */
@@ -30,7 +31,7 @@ export function earlyFire(bank: FaultBank): Fault {
 
 /** One balancing resistor opens: its position climbs. */
 export function bleederOpen(bank: FaultBank): Fault {
-  const { balance, series: n, parallel: p, ties, unit, voltage } = bank;
+  const { balance, series: n } = bank;
   const stops = "A meter on every stage; short each unit by hand before touching.";
   const peak: FaultCurrent = { amperes: 0, bound: "value" };
   const base = { id: "bleeder-open", peak, joules: 0, stops } as const;
@@ -38,11 +39,9 @@ export function bleederOpen(bank: FaultBank): Fault {
   if (balance === null || n === 1) {
     return row(bank, { ...base, volts: worstBefore(bank), note: "No balancing resistor is there to open." });
   }
-  const units = ties === "cross-tied" ? p : 1;
-  const tau = n * units * unit.capacitance * balance.resistance;
-  const start = worstBefore(bank);
-  const volts = balance.hold === null ? voltage : voltage - (voltage - start) * Math.exp(-balance.hold / tau);
-  const note = "The position without its resistor climbs toward the whole voltage when its units do not leak.";
+  const volts = heldWithoutResistor(bank);
+  const note =
+    "The position without its resistor climbs toward the whole voltage; told with its units not leaking and the others leaking most.";
   return row(bank, { ...base, volts, note: `${note} After the dump its units keep their charge.` });
 }
 

@@ -1,5 +1,5 @@
 // What the fault table must know of a bank, and the figures of it that several faults share.
-import type { Ties } from "../bank/index.ts";
+import type { HoldCase, Ties } from "../bank/index.ts";
 import type { BusPath } from "./busPath.ts";
 import type { Fuse } from "./fuse.ts";
 import type { ShortCase } from "./shortedUnit.ts";
@@ -46,6 +46,8 @@ export interface FaultBank {
   } | null;
   /** Balancing resistor of one position [ohm] and the hold [s] (null: for ever); null: none fitted; left out: not told. */
   readonly balance?: { readonly resistance: number; readonly hold: number | null } | null;
+  /** The hold of the sound bank; null or left out: its leakage or tolerance is unknown. */
+  readonly hold?: HoldCase | null;
   /** Highest voltage the charger can reach when it runs on [V]; left out or null: unknown. */
   readonly chargerHighest?: number | null;
 }

@@ -19,8 +19,10 @@ export interface Fault {
   readonly id: FaultId;
   /** Highest voltage of a sound unit, all units alike before the fault unless it says otherwise [V]. */
   readonly worstVoltage: number | null;
-  /** The same at the worst corner of the capacitance tolerance [V]; this is what is judged. */
+  /** The same at the worst corner of the capacitance tolerance [V]. */
   readonly worstVoltageSpread: number | null;
+  /** The highest in the hold with the fault standing, leakage and resistors at their worst [V]; null: not known. The higher is judged. */
+  readonly worstHeld: number | null;
   readonly peakCurrent: number | null;
   readonly peakIs: Bound;
   readonly energyIntoUnit: number | null;
@@ -33,13 +35,18 @@ export interface Fault {
   readonly findings: readonly Finding[];
 }
 
+/** The highest volts known of, and whether anything higher is ruled out. */
+interface Volts {
+  readonly most: number;
+  readonly known: boolean;
+}
+
 /** Volts are judged by the rated, then the surge voltage; joules from outside by what the case is known to hold. */
-function judge(bank: FaultBank, volts: number | null, outsideJoules: number): Verdict {
+function judge(bank: FaultBank, volts: Volts, outsideJoules: number): Verdict {
   const { ratedVoltage, surgeVoltage = null, ruptureEnergy = null } = bank.unit;
-  const within = (limit: number): boolean => volts !== null && volts <= limit * (1 + 1e-9);
-  const rank: Verdict[] = [];
-  if (volts === null) rank.push("not assessed");
-  else if (within(ratedVoltage)) rank.push("pass");
+  const within = (limit: number): boolean => volts.most <= limit * (1 + 1e-9);
+  const rank: Verdict[] = volts.known ? [] : ["not assessed"];
+  if (within(ratedVoltage)) rank.push("pass");
   else rank.push(surgeVoltage !== null && within(surgeVoltage) ? "warn" : "fail");
   if (outsideJoules > 0) {
     if (ruptureEnergy === null) rank.push("not assessed");
@@ -53,6 +60,8 @@ export interface RowParts {
   readonly id: FaultId;
   readonly volts: number | null;
   readonly spread?: number | null;
+  /** Left out: the hold adds nothing. */
+  readonly held?: number | null;
   readonly peak?: FaultCurrent | null;
   readonly joules: number | null;
   /** Joules that come from other units. */
@@ -66,11 +75,14 @@ export interface RowParts {
 /** A judged row. */
 export function row(bank: FaultBank, parts: RowParts): Fault {
   const spread = parts.spread === undefined ? parts.volts : parts.spread;
-  const judged = parts.volts === null ? null : Math.max(parts.volts, spread ?? 0);
+  const start = parts.volts === null ? null : Math.max(parts.volts, spread ?? 0);
+  const held = parts.held === undefined ? start : parts.held;
+  const judged = { most: Math.max(start ?? 0, held ?? 0), known: start !== null && held !== null };
   return {
     id: parts.id,
     worstVoltage: parts.volts,
     worstVoltageSpread: spread,
+    worstHeld: held === null ? null : judged.most,
     peakCurrent: parts.peak?.amperes ?? null,
     peakIs: parts.peak?.bound ?? "value",
     energyIntoUnit: parts.joules,
@@ -81,3 +93,7 @@ export function row(bank: FaultBank, parts: RowParts): Fault {
     findings: parts.findings ?? [],
   };
 }
+
+/** The higher of what a sound unit sees at once and after the hold [V]; null when what is known of neither is all. */
+export const worstOfFault = ({ worstVoltageSpread, worstHeld }: Pick<Fault, "worstVoltageSpread" | "worstHeld">) =>
+  worstVoltageSpread === null || worstHeld === null ? null : Math.max(worstVoltageSpread, worstHeld);

@@ -21,7 +21,7 @@ export { chargerRipple, constantPowerSeconds, type Drift, driftOf, steadyDroop, 
 export { type Corner, type Envelope, envelopeOf, type Figures, type LoopSpread, type Spread } from "./envelope.ts";
 export { type FaultBank, type FaultUnit, worstBefore } from "./faultBank.ts";
 export { faultAction, unitShortLoop } from "./faultCurrents.ts";
-export type { Fault, FaultId } from "./faultRow.ts";
+export { type Fault, type FaultId, worstOfFault } from "./faultRow.ts";
 export { faultTable } from "./faultTable.ts";
 export { type Fuse, type FuseDuty, fuseFindings } from "./fuse.ts";
 export { checkLamp, type Lamp, lampConstant, TORR } from "./lamp.ts";

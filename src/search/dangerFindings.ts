@@ -1,7 +1,7 @@
 // Findings on what can hurt: stored energy and recovery, one shorted unit, and the brief's own limits on shot, fault and life.
 
 import { hazardFindings } from "../hazard/index.ts";
-import { unitShort } from "../pulse/index.ts";
+import { unitShort, worstOfFault } from "../pulse/index.ts";
 import { type Finding, withinMost } from "../quantity/index.ts";
 import { faultBankOf } from "./faults.ts";
 import type { FindingsInput } from "./findingsInput.ts";
@@ -23,9 +23,11 @@ export function hazards({ result, unit, brief }: FindingsInput): readonly Findin
 export function oneShorted({ result, unit, brief }: FindingsInput): readonly Finding[] {
   if (result.series === 1) return [];
   const fault = unitShort(faultBankOf({ result, unit, brief }));
-  const value = fault.worstVoltageSpread;
   const note = `One unit shorted with the charger still on: the sound ones against their ${unit.surgeVoltage === undefined ? "rated" : "surge"} voltage. ${fault.stops}`;
   const limit = unit.surgeVoltage ?? unit.voltage;
+  // what the hold adds may be unknown: over at once is over all the same
+  const atOnce = fault.worstVoltageSpread ?? 0;
+  const value = worstOfFault(fault) ?? (atOnce > limit ? atOnce : null);
   return [
     withinMost({
       id: "unit-short",

@@ -4,6 +4,7 @@ import type { Capacitor } from "../catalog/index.ts";
 import { type Fault, type FaultBank, type FaultUnit, faultTable } from "../pulse/index.ts";
 import type { Brief } from "./brief.ts";
 import type { LayoutResult } from "./result.ts";
+import { holdCaseOf } from "./sharing/holdCase.ts";
 
 export interface FaultedBank {
   readonly result: Pick<LayoutResult, "series" | "parallel" | "ties" | "share" | "balance">;
@@ -44,6 +45,7 @@ export function faultBankOf({ result, unit, brief }: FaultedBank): FaultBank {
     // Without the tolerance nothing less than the whole voltage bounds what one unit may see.
     worstCharging: share.charging ?? voltage,
     worstHolding: share.holding,
+    hold: holdCaseOf({ result, unit, brief }),
     balance: balance && { resistance: balance.resistance, hold: Number.isFinite(brief.hold) ? brief.hold : null },
   };
 }

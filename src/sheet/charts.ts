@@ -2,7 +2,7 @@
 
 import { isPriced } from "../catalog/index.ts";
 import { voltageAfter } from "../hazard/index.ts";
-import { traceOf } from "../pulse/index.ts";
+import { traceOf, worstOfFault } from "../pulse/index.ts";
 import { formatMoney } from "../quantity/index.ts";
 import { cell, said, up } from "./cells.ts";
 import { type BleedCurve, costSteps } from "./draw/index.ts";
@@ -23,9 +23,7 @@ export function voltageChart(input: SheetInput): Drawing {
     { words: "charging", nominal: share.even, worst: share.charging },
     { words: "holding", nominal: share.even, worst: share.holding },
     ...(measured === null ? [] : [{ words: "charging, as measured and placed", nominal: share.even, worst: measured }]),
-    ...(short === null
-      ? []
-      : [{ words: "one unit shorted", nominal: short.worstVoltage, worst: short.worstVoltageSpread }]),
+    ...(short === null ? [] : [{ words: "one unit shorted", nominal: short.worstVoltage, worst: worstOfFault(short) }]),
   ];
   const limits = [
     { words: "limit, derating in it", value: share.limit },

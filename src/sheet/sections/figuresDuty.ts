@@ -1,6 +1,7 @@
 // Of the ten figures those on what the parts bear: units, fault currents, the bus, resistors, reversal.
 
 import { DEFAULT_FAMILY } from "../../catalog/index.ts";
+import { worstOfFault } from "../../pulse/index.ts";
 import { fittedFuse } from "../../search/index.ts";
 import { busForce } from "../busForce.ts";
 import { cell, down, partOf, up } from "../cells.ts";
@@ -16,15 +17,11 @@ function stress({ layout, unit, faults }: SheetInput): readonly FigureRow[] {
     return part === null ? null : `${up(part, "fraction")} of ${cell(unit.voltage, "voltage")} rated`;
   };
   const short = faults.find(({ id }) => id === "unit-short");
+  const shorted = short === undefined ? null : worstOfFault(short);
   return [
     ["3", "worst unit while charging", up(share.charging, "voltage"), rated(share.charging)],
     ["3", "worst unit while holding", up(share.holding, "voltage"), rated(share.holding)],
-    [
-      "3",
-      "sound unit with one shorted",
-      up(short?.worstVoltageSpread, "voltage"),
-      rated(short?.worstVoltageSpread ?? null),
-    ],
+    ["3", "sound unit with one shorted", up(shorted, "voltage"), rated(shorted)],
     [
       "4",
       "peak fault current, one unit shorted",

@@ -27,6 +27,13 @@ const COLUMNS: readonly Column<Fault>[] = [
     cell: ({ worstVoltageSpread }) => span(worst(worstVoltageSpread, "voltage")),
   },
   {
+    title: "after hold",
+    width: 10,
+    side: "right",
+    priority: 0,
+    cell: ({ worstHeld }) => span(worst(worstHeld, "voltage")),
+  },
+  {
     title: "into unit",
     width: 10,
     side: "right",
