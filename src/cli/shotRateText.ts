@@ -122,7 +122,8 @@ export function fuseText(choice: FuseChoice | null, width: number): string {
   const { chosen, count, sees, tried } = choice;
   const words = [
     `a normal shot ${unless(sees.normalAction, (x) => show(x, "action"), "unknown")}`,
-    `a shorted unit ${unless(sees.faultAction, (x) => show(x, "action"), "unknown")}`,
+    `a shorted unit at most ${unless(sees.faultAction, (x) => show(x, "action"), "unknown")}`,
+    `at least ${unless(sees.leastFaultAction, (x) => formatQuantity(x, "action", { digits: 4, rounding: "down" }), "unknown")}`,
     `breaks ${unless(sees.voltage, (x) => show(x, "voltage"), "unknown")}`,
   ];
   const lines = [hanging("sees", words.join(", "), width)];

@@ -1,7 +1,7 @@
 // Faults inside the chain: a unit shorted, a unit open, a whole row shorted.
 import { formatQuantity } from "../quantity/index.ts";
 import { cornerShare, type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
-import { faultAction, faultPeak, rowShortLoop, unitShortLoop } from "./faultCurrents.ts";
+import { faultAction, faultPeak, leastFaultAction, rowShortLoop, unitShortLoop } from "./faultCurrents.ts";
 import { faultEnergy } from "./faultEnergy.ts";
 import { heldWithOpen, heldWithShort } from "./faultHold.ts";
 import { type Fault, row } from "./faultRow.ts";
@@ -46,7 +46,7 @@ export function unitShort(bank: FaultBank): Fault {
   const energy = faultEnergy(bank, loop, result.neighbours);
   const duty = {
     normalAction: bank.shot?.unitAction ?? null,
-    faultAction: faultAction(loop),
+    leastFaultAction: leastFaultAction(bank),
     voltage: worstBefore(bank),
   };
   const note =
@@ -64,7 +64,7 @@ export function unitShort(bank: FaultBank): Fault {
     isolating: energy.isolating,
     stops: guardOf(bank),
     note: n > 1 ? note : "The whole bank empties into the shorted unit; nothing is left standing.",
-    findings: [...(bank.fuse ? fuseFindings(bank.fuse, duty) : []), ...soundFindings(bank, duty.faultAction)],
+    findings: [...(bank.fuse ? fuseFindings(bank.fuse, duty) : []), ...soundFindings(bank, faultAction(loop))],
   });
 }
 

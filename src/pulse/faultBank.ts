@@ -26,6 +26,8 @@ export interface FaultBank {
   readonly ties: Ties;
   readonly unit: FaultUnit;
   readonly voltage: number;
+  /** The same without the charger's overshoot [V]; left out: none. */
+  readonly leastVoltage?: number;
   readonly worstCharging: number;
   readonly worstHolding: number | null;
   /** Resistor in series with each unit [ohm]; left out or null: none. */
@@ -75,3 +77,9 @@ export function cornerShare(
   const low = (1 - (bank.unit.toleranceLow ?? 0)) * counts.units;
   return (bank.voltage * high) / (high + counts.stages * low);
 }
+
+/** The bank with every unit at its high capacitance, as far as the tolerance is known. */
+export const atHigh = (bank: FaultBank): FaultBank => ({
+  ...bank,
+  unit: { ...bank.unit, capacitance: bank.unit.capacitance * (1 + (bank.unit.toleranceHigh ?? 0)) },
+});

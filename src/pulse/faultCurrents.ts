@@ -12,6 +12,7 @@
  * R_f what the shorted unit itself still resists with, none unless told: its own r and l are left out, for the short may sit
  * at its terminals. Source: [methods-derived].
  */
+import { chargingLeast } from "../bank/index.ts";
 import { type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
 import { peakCurrentOf } from "./peaks.ts";
 import { drivingCapacitance } from "./shortedUnit.ts";
@@ -111,4 +112,17 @@ export function faultPeak(loop: FaultLoop | null): FaultCurrent | null {
 export function faultAction(loop: FaultLoop | null): number | null {
   if (loop === null || !loop.resistanceKnown || loop.resistance === 0) return null;
   return (loop.capacitance * loop.voltage ** 2) / 2 / loop.resistance;
+}
+
+/**
+ * Action that the neighbours surely drive through a shorted unit [A^2 s]: the least share while charging, every unit low. A stage that
+ * leaked down in a hold has less, and less to pour. null when resistance or tolerance is not known. Source: [methods-derived].
+ */
+export function leastFaultAction(bank: FaultBank): number | null {
+  const { unit, series, voltage, leastVoltage = voltage } = bank;
+  const { toleranceLow: low, toleranceHigh: high } = unit;
+  if (low === undefined || high === undefined) return null;
+  const worstCharging = chargingLeast(leastVoltage, series, { low, high });
+  const weakest = { ...unit, capacitance: unit.capacitance * (1 - low) };
+  return faultAction(unitShortLoop({ ...bank, unit: weakest, worstCharging, worstHolding: null }));
 }

@@ -3,7 +3,7 @@
  *
  *   symbol  name            unit    meaning
  *   A_u     normalAction    A^2 s   action of one shot through the worst unit
- *   A_f     faultAction     A^2 s   action that the neighbours can drive through it: their energy over the loop's resistance
+ *   A_f     leastFaultAction A^2 s  least that the neighbours drive through it: least share, low capacitance, energy over resistance
  *   A_m A_c melting, clearing   A^2 s   of the fuse; both from its maker
  *
  * Lives when A_u <= part A_m (part 0.25 when the user gives none: common practice, no source); clears when A_f >= A_c and the
@@ -22,7 +22,7 @@ export interface Fuse {
 /** What the fuse sees; null when unknown. */
 export interface FuseDuty {
   readonly normalAction: number | null;
-  readonly faultAction: number | null;
+  readonly leastFaultAction: number | null;
   readonly voltage: number | null;
 }
 
@@ -45,11 +45,11 @@ export function fuseFindings(fuse: Fuse, duty: FuseDuty, part: number = SHOT_PAR
     atLeast({
       id: "pulse.fuse.clears",
       state,
-      value: duty.faultAction,
+      value: duty.leastFaultAction,
       limit: fuse.clearingAction,
       unit: "A2s",
       source: "methods-derived",
-      note: "Action that the neighbours can drive into a shorted unit against what the fuse needs to clear.",
+      note: "Least action that the neighbours drive into a shorted unit, least share and low capacitance, against what the fuse needs to clear.",
     }),
     atMost({
       id: "pulse.fuse.voltage",

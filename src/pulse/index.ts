@@ -19,8 +19,8 @@ export { type Consistency, checkStated, type StatedDischarge } from "./consisten
 export { type Crowbar, crowbarOf } from "./crowbar.ts";
 export { chargerRipple, constantPowerSeconds, type Drift, driftOf, steadyDroop, voltageAfter } from "./droop.ts";
 export { type Corner, type Envelope, envelopeOf, type Figures, type LoopSpread, type Spread } from "./envelope.ts";
-export { type FaultBank, type FaultUnit, worstBefore } from "./faultBank.ts";
-export { faultAction, unitShortLoop } from "./faultCurrents.ts";
+export { atHigh, type FaultBank, type FaultUnit, worstBefore } from "./faultBank.ts";
+export { faultAction, leastFaultAction, unitShortLoop } from "./faultCurrents.ts";
 export { type Fault, type FaultId, worstOfFault } from "./faultRow.ts";
 export { faultTable } from "./faultTable.ts";
 export { type Fuse, type FuseDuty, fuseFindings } from "./fuse.ts";

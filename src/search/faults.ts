@@ -41,6 +41,7 @@ export function faultBankOf({ result, unit, brief }: FaultedBank): FaultBank {
     ties: result.ties,
     unit: faultUnitOf(unit),
     voltage,
+    leastVoltage: brief.voltage,
     ...guardsOf(brief),
     // Without the tolerance nothing less than the whole voltage bounds what one unit may see.
     worstCharging: share.charging ?? voltage,

@@ -1,7 +1,15 @@
 // A fuse for each unit (each string, for strings): the cheapest of a catalogue that lives through the shot and clears the fault.
 
 import { type Capacitor, type Fuse as FuseRow, type Purchase, purchase } from "../catalog/index.ts";
-import { type Fuse, faultAction, fuseFindings, unitShortLoop } from "../pulse/index.ts";
+import {
+  atHigh,
+  type FaultBank,
+  type Fuse,
+  faultAction,
+  fuseFindings,
+  leastFaultAction,
+  unitShortLoop,
+} from "../pulse/index.ts";
 import type { Finding } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { faultBankOf, faultUnitOf, guardsOf } from "./faults.ts";
@@ -24,7 +32,9 @@ export function fuseCount({ series, parallel, ties }: Pick<LayoutResult, "series
 /** What a fuse sees; null where unknown. A^2 s, A^2 s, V. */
 export interface FuseSees {
   readonly normalAction: number | null;
+  /** The most that the neighbours drive through a shorted unit, and the least: the fuse must clear on the least. */
   readonly faultAction: number | null;
+  readonly leastFaultAction: number | null;
   readonly voltage: number | null;
 }
 
@@ -74,19 +84,21 @@ export function fuseSeesAt(brief: Brief, unit: Capacitor, shape: Shape, worst: n
   const shared = unit.tolerance !== undefined || shape.parallel === 1;
   const shot = brief.load === undefined || !shared ? null : shotCorner(brief, unit, shape, "high");
   const { series, parallel, ties } = shape;
-  const loop = unitShortLoop({
+  const bank: FaultBank = {
     series,
     parallel,
     ties,
     unit: faultUnitOf(unit),
     voltage,
+    leastVoltage: brief.voltage,
     ...guardsOf(brief),
     worstCharging: before,
     worstHolding: null,
-  });
+  };
   return {
     normalAction: shot?.ok ? shot.value.unit.action : null,
-    faultAction: faultAction(loop),
+    faultAction: faultAction(unitShortLoop(atHigh(bank))),
+    leastFaultAction: leastFaultAction(bank),
     voltage: before,
   };
 }

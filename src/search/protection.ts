@@ -46,7 +46,7 @@ export function protectionOf(
     else {
       const { chosen, count, sees } = chooseFuse(shape, stock.fuses, fuseSeesAt(brief, unit, shape, worst));
       if (chosen === null) {
-        const unknown = sees.normalAction === null || sees.faultAction === null;
+        const unknown = sees.normalAction === null || sees.leastFaultAction === null;
         const breaks = stock.fuses.some(({ voltage }) => voltage !== undefined && voltage >= (sees.voltage ?? 0));
         return unknown || !breaks ? "stuck" : "more";
       }

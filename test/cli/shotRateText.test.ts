@@ -31,7 +31,7 @@ describe("rateBlocks(report, width)", () => {
 });
 
 describe("fuseText(choice, width)", () => {
-  const sees = { normalAction: 1, faultAction: null, voltage: 2000 };
+  const sees = { normalAction: 1, faultAction: null, leastFaultAction: null, voltage: 2000 };
   test("nothing asked, no neighbours, none that does", () => {
     expect(fuseText(null, 80)).toBe("");
     expect(fuseText({ count: 0, sees, chosen: null, tried: [] }, 80)).toMatch(/without neighbours/);

@@ -41,7 +41,7 @@ describe("unitShort(bank)", () => {
     const apart = unitShort({ ...strings, unit: rated });
     near(apart.findings[0]?.value, (apart.energyIntoUnit as number) / (0.02 * (4 / 4 + 3)), 1e-12);
     const fuse = { meltingAction: 10000, clearingAction: 15000, dcVoltage: 450 };
-    const unit = { ...tied.unit, esr: 0, esl: 0 };
+    const unit = { ...tied.unit, esr: 0, esl: 0, toleranceLow: 0, toleranceHigh: 0 };
     const shot = { peakCurrent: 1e4, unitAction: 2250, unitHeat: null };
     const fault = unitShort({ ...tied, unit, fuse, isolatingResistance: 0.05, shot });
     near(fault.peakCurrent, 6400, 1e-12);
@@ -77,7 +77,7 @@ describe("unitShort(bank)", () => {
   });
 
   test("no shot known: a fuse's life is not assessed, its clearing is", () => {
-    const unit = { ...tied.unit, esr: 0, esl: 0 };
+    const unit = { ...tied.unit, esr: 0, esl: 0, toleranceLow: 0, toleranceHigh: 0 };
     const known = { meltingAction: 10000, clearingAction: 15000, dcVoltage: 399 };
     const { findings } = unitShort({ ...tied, unit, fuse: known, isolatingResistance: 0.05 });
     expect(findings.map(({ verdict }) => verdict)).toEqual(["not assessed", "pass", "fail"]);

@@ -1,6 +1,13 @@
 // faultCurrents: nothing known gives nothing, then the worked loop, then bounds.
 import { describe, expect, test } from "vitest";
-import { faultAction, faultPeak, loadShortLoop, rowShortLoop, unitShortLoop } from "../../src/pulse/faultCurrents.ts";
+import {
+  faultAction,
+  faultPeak,
+  leastFaultAction,
+  loadShortLoop,
+  rowShortLoop,
+  unitShortLoop,
+} from "../../src/pulse/faultCurrents.ts";
 import { strings, tied } from "./faultBanks.ts";
 import { near } from "./near.ts";
 
@@ -100,5 +107,25 @@ describe("rowShortLoop(bank), loadShortLoop(bank)", () => {
     expect(loop.voltage).toBe(1600);
     expect(faultPeak(loop)?.bound).toBe("value");
     expect(faultPeak(loadShortLoop({ ...tied, unit: known }))?.bound).toBe("upper bound");
+  });
+});
+
+describe("leastFaultAction(bank)", () => {
+  test("an unknown tolerance or resistance proves nothing", () => {
+    expect(leastFaultAction({ ...tied, unit: { ...tied.unit, esr: 0.04 } })).toBeNull();
+    expect(leastFaultAction({ ...tied, unit: { ...tied.unit, toleranceLow: 0, toleranceHigh: 0 } })).toBeNull();
+  });
+
+  // 9s10p of 3300 uF -10/+50 % at 2000 V, 40 mohm, 50 mohm isolating: one high stage among low ones stands at 139.5 V, where
+  // nine low neighbours bring 260 J over 60 mohm: an eighth of the 35 540 A^2 s that the worst stage after a hold would give.
+  test("the least share with every unit low, without the overshoot", () => {
+    const unit = { capacitance: 3300e-6, ratedVoltage: 450, toleranceLow: 0.1, toleranceHigh: 0.5, esr: 0.04 };
+    const bank = { ...tied, unit, series: 9, parallel: 10, voltage: 2000, isolatingResistance: 0.05 };
+    const least = (2000 * 0.9) / (0.9 + 8 * 1.5);
+    const expected = (9 * 0.9 * 3300e-6 * least ** 2) / 2 / 0.06;
+    expect(Math.round(expected)).toBe(4336);
+    near(leastFaultAction({ ...bank, worstCharging: 379 }), expected, 1e-12);
+    near(leastFaultAction({ ...bank, voltage: 2200, leastVoltage: 2000 }), expected, 1e-12);
+    expect(faultAction(unitShortLoop({ ...bank, worstCharging: 378.9 }))).toBeGreaterThan(35000);
   });
 });

@@ -4,7 +4,7 @@ import { type Fuse, type FuseDuty, fuseFindings } from "../../src/pulse/fuse.ts"
 
 const fuse: Fuse = { meltingAction: 10000, clearingAction: 15000, dcVoltage: 450 };
 // a bank of 56 250 A^2 s with five units a stage puts 2250 A^2 s through each
-const duty: FuseDuty = { normalAction: 2250, faultAction: 16896, voltage: 400 };
+const duty: FuseDuty = { normalAction: 2250, leastFaultAction: 16896, voltage: 400 };
 const verdicts = (f: Partial<Fuse>, d: Partial<FuseDuty> = {}, part?: number) =>
   fuseFindings({ ...fuse, ...f }, { ...duty, ...d }, part).map(({ verdict }) => verdict);
 
@@ -13,7 +13,7 @@ describe("fuseFindings(fuse, duty, part)", () => {
     expect(verdicts({ meltingAction: null, clearingAction: null, dcVoltage: null })).toEqual(
       Array(3).fill("not assessed"),
     );
-    expect(verdicts({}, { normalAction: null, faultAction: null, voltage: null })).toEqual(
+    expect(verdicts({}, { normalAction: null, leastFaultAction: null, voltage: null })).toEqual(
       Array(3).fill("not assessed"),
     );
   });

@@ -6,7 +6,7 @@ import { FILM, shotBrief, shotLayout } from "../support/shotBank.ts";
 
 const fuse = (name: string, melting: number | undefined, clearing: number | undefined, price: number): Fuse =>
   ({ fuse: name, melting, clearing, voltage: 3000, currency: "EUR", price }) as Fuse;
-const SEES = { normalAction: 10, faultAction: 4000, voltage: 2000 };
+const SEES = { normalAction: 10, faultAction: 9000, leastFaultAction: 4000, voltage: 2000 };
 const shape = { series: 1, parallel: 4, ties: "strings" } as const;
 
 describe("chooseFuse(layout, rows, sees)", () => {
@@ -23,7 +23,7 @@ describe("chooseFuse(layout, rows, sees)", () => {
     expect(choice.chosen?.purchase.cost).toBe(2000);
     expect(choice.tried).toHaveLength(5);
     expect(chooseFuse(shape, rows.slice(2), SEES).chosen).toBeNull();
-    expect(chooseFuse(shape, rows, { ...SEES, faultAction: null }).chosen).toBeNull();
+    expect(chooseFuse(shape, rows, { ...SEES, leastFaultAction: null }).chosen).toBeNull();
     expect(chooseFuse(shape, rows, { ...SEES, voltage: 3001 }).chosen).toBeNull();
   });
 

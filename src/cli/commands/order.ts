@@ -151,7 +151,7 @@ function editedOf(bill: Bill, path: string | undefined, money: Money, ports: Por
 function fuseSaid(fuse: FuseChoice | null): readonly string[] {
   if (fuse === null || fuse.chosen !== null) return [];
   if (fuse.count === 0) return ["No fuses: without neighbours there is nothing to cut a failed unit off from."];
-  const open = fuse.sees.normalAction === null || fuse.sees.faultAction === null;
+  const open = fuse.sees.normalAction === null || fuse.sees.leastFaultAction === null;
   const why = open ? "; without a load in the brief or the units' ESR none can be judged" : "";
   return [
     `No fuse of the catalogue is proven to do${why}: the line stays to be chosen. See: joulewright pulse --fuses.`,

@@ -44,7 +44,7 @@ function bus({ layout, unit, brief, faults, shot, fuse }: SheetInput): readonly 
   const force = amperes === null ? null : busForce(brief.bus, amperes);
   const voltage = brief.voltage * (1 + brief.overshoot);
   // What a fuse would see, also where no catalogue of fuses was given.
-  const { faultAction } = (fuse ?? fittedFuse({ layout, unit, brief }, [])).sees;
+  const { faultAction, leastFaultAction } = (fuse ?? fittedFuse({ layout, unit, brief }, [])).sees;
   return [
     [
       "4",
@@ -52,7 +52,7 @@ function bus({ layout, unit, brief, faults, shot, fuse }: SheetInput): readonly 
       up(faultAction, "action"),
       faultAction === null
         ? "needs the units' ESR, and neighbours that feed it"
-        : "what a fuse of the unit must open on",
+        : `at most; a fuse of the unit must clear on the least, ${leastFaultAction === null ? "which needs the tolerance" : down(leastFaultAction, "action")}`,
     ],
     [
       "5",

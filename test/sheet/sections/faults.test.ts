@@ -15,9 +15,9 @@ describe("faultSection(input)", () => {
 
   test("a peak that is a bound says so; one that nothing known limits is a blank", () => {
     const bound = tableOf({ sections: [faultSection(sheetInput({ unit: { ...BARE, esr: 0.05 } }))] }, "faults").rows;
-    expect(bound[0]?.[3]).toMatch(/\(upper bound\)$/);
+    expect(bound[0]?.[4]).toMatch(/\(upper bound\)$/);
     const bare = faultSection(sheetInput({ unit: BARE }));
-    expect(tableOf({ sections: [bare] }, "faults").rows[0]?.[3]).toBeNull();
+    expect(tableOf({ sections: [bare] }, "faults").rows[0]?.[4]).toBeNull();
     expect(wordsIn(bare)).toMatch(/whether a shorted unit bursts is not assessed/);
     expect(wordsIn(bare)).toMatch(/No fuse catalogue was given/);
   });
