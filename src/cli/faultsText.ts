@@ -17,6 +17,16 @@ function isolatingLine({ id, energyIntoIsolating: taken }: Faults[number], width
   return [bullet(`${id.replaceAll("-", " ")}: ${words}`, width)];
 }
 
+/** What ends in a shorted unit: its own, what the others pour in, and both at the worst; none where no unit is shorted alone. */
+function joulesLine(fault: Faults[number], width: number): readonly string[] {
+  if (fault.id !== "unit-short") return [];
+  const joules = (x: number | null): string => formatQuantity(x, "energy", { digits: 4, rounding: "up" });
+  const parts = `its own ${joules(fault.energyOwn)}, ${joules(fault.energyIntoUnit)} from others`;
+  return [
+    bullet(`unit short: ${parts}; both at most ${joules(fault.energyWorst)}, every unit at high capacitance`, width),
+  ];
+}
+
 /** A table of figures, then what stops each fault that does not pass. Figures round up. */
 export function faultsText(faults: Faults, width: number): string {
   const up = { digits: 4, rounding: "up" } as const;
@@ -26,8 +36,19 @@ export function faultsText(faults: Faults, width: number): string {
       { heading: "fault", cell: (one) => one.id.replaceAll("-", " "), least: 12 },
       { heading: "sound unit", cell: (one) => formatQuantity(one.worstVoltageSpread, "voltage", up), side: "right" },
       { heading: "after the hold", cell: (one) => formatQuantity(one.worstHeld, "voltage", up), side: "right" },
-      { heading: "into the unit", cell: (one) => formatQuantity(one.energyIntoUnit, "energy", up), side: "right" },
-      { heading: "peak", cell: (one) => formatQuantity(one.peakCurrent, "current", up), side: "right", rank: 1 },
+      {
+        heading: "into the unit",
+        cell: (one) => formatQuantity(one.energyIntoUnit, "energy", up),
+        side: "right",
+        rank: 2,
+      },
+      { heading: "both at most", cell: (one) => formatQuantity(one.energyWorst, "energy", up), side: "right" },
+      {
+        heading: "peak",
+        cell: (one) => formatQuantity(one.peakCurrentWorst ?? one.peakCurrent, "current", up),
+        side: "right",
+        rank: 1,
+      },
     ],
     faults,
     width,
@@ -36,5 +57,7 @@ export function faultsText(faults: Faults, width: number): string {
   const stops = faults
     .filter((one) => one.verdict !== "pass")
     .map((one) => bullet(`${one.id.replaceAll("-", " ")}: ${visible(one.stops)}`, width));
-  return [table, ...faults.flatMap((one) => isolatingLine(one, width)), ...stops].join("\n");
+  return [table, ...faults.flatMap((one) => [...joulesLine(one, width), ...isolatingLine(one, width)]), ...stops].join(
+    "\n",
+  );
 }

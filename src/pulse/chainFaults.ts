@@ -1,6 +1,6 @@
 // Faults inside the chain: a unit shorted, a unit open, a whole row shorted.
 import { formatQuantity } from "../quantity/index.ts";
-import { cornerShare, type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
+import { atHigh, cornerShare, type FaultBank, shortCaseOf, worstBefore } from "./faultBank.ts";
 import { faultAction, faultPeak, leastFaultAction, rowShortLoop, unitShortLoop } from "./faultCurrents.ts";
 import { faultEnergy } from "./faultEnergy.ts";
 import { heldWithOpen, heldWithShort } from "./faultHold.ts";
@@ -32,16 +32,22 @@ function guardOf({
 function soundFindings({ unit, series, parallel, ties }: FaultBank, action: number | null) {
   if (action === null || !unit.action) return [];
   // in strings the rest of the faulted string carries the whole of it
-  const value = ties === "strings" && series > 1 ? action : action / (parallel - 1) ** 2;
-  const note = "Action of the fault through a sound unit against its rating for one shot.";
+  const whole = ties === "strings" && series > 1;
+  // of the neighbours one high among low ones carries most, by capacitance
+  const { toleranceLow: low, toleranceHigh: high } = unit;
+  const part = (1 + (high ?? 0)) / (1 + (high ?? 0) + (parallel - 2) * (1 - (low ?? 0)));
+  const value = whole ? action : action * part * part;
+  const note = "Action of the fault, every unit high, through the worst sound unit against its rating for one shot.";
   const claim = { id: "pulse.fault.action", state: "faulted", unit: "A2s", source: "methods-derived" } as const;
-  return [atMost({ ...claim, value, limit: unit.action, note })];
+  const bound = low === undefined || high === undefined ? "lower bound" : "value";
+  return [atMost({ ...claim, value, limit: unit.action, note, bound })];
 }
 
 /** One unit shorted: the others empty into it. */
 export function unitShort(bank: FaultBank): Fault {
   const result = shortedUnit(shortCaseOf(bank));
   const loop = unitShortLoop(bank);
+  const high = unitShortLoop(atHigh(bank));
   const n = bank.series;
   const energy = faultEnergy(bank, loop, result.neighbours);
   const duty = {
@@ -59,12 +65,13 @@ export function unitShort(bank: FaultBank): Fault {
     spread: n > 1 ? cornerShare(bank, { units: 1, others: 1, stages: n - 2 }) : 0,
     held: heldWithShort(bank),
     peak: faultPeak(loop),
+    peakWorst: faultPeak(high),
     joules: energy.unit,
-    outside: energy.unit,
+    own: result.own,
     isolating: energy.isolating,
     stops: guardOf(bank),
     note: n > 1 ? note : "The whole bank empties into the shorted unit; nothing is left standing.",
-    findings: [...(bank.fuse ? fuseFindings(bank.fuse, duty) : []), ...soundFindings(bank, faultAction(loop))],
+    findings: [...(bank.fuse ? fuseFindings(bank.fuse, duty) : []), ...soundFindings(bank, faultAction(high))],
   });
 }
 
@@ -99,8 +106,10 @@ export function rowShort(bank: FaultBank): Fault {
     spread: tied && n > 1 ? cornerShare(bank, { units: 1, others: 1, stages: n - 2 }) : 0,
     held: tied ? heldWithShort(bank) : 0,
     peak: faultPeak(rowShortLoop(bank)),
+    peakWorst: faultPeak(rowShortLoop(atHigh(bank))),
     joules: tied ? own : poured,
-    outside: poured,
+    own,
+    alone: tied,
     stops: "The charger's trip; nothing inside the bank opens.",
     note: tied
       ? "Each unit of the row spends its own energy in the short; with the charger on the other rows take its share."

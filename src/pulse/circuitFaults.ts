@@ -1,5 +1,5 @@
 // Faults around the chain: load short, early fire, bleeder open, dump stuck, charger running on.
-import { type FaultBank, worstBefore } from "./faultBank.ts";
+import { atHigh, type FaultBank, worstBefore } from "./faultBank.ts";
 import { type FaultCurrent, faultPeak, loadShortLoop } from "./faultCurrents.ts";
 import { heldWithoutResistor } from "./faultHold.ts";
 import { type Fault, row } from "./faultRow.ts";
@@ -10,6 +10,7 @@ export function loadShort(bank: FaultBank): Fault {
     id: "load-short",
     volts: worstBefore(bank),
     peak: faultPeak(loadShortLoop(bank)),
+    peakWorst: faultPeak(loadShortLoop(atHigh(bank))),
     joules: (bank.unit.capacitance * worstBefore(bank) ** 2) / 2,
     stops: "Nothing opens until the bank is empty; bus and units must bear it.",
     note: "At most each unit's own energy turns to heat in it; the ring may reverse the units.",

@@ -24,8 +24,14 @@ export interface Fault {
   /** The highest in the hold with the fault standing, leakage and resistors at their worst [V]; null: not known. The higher is judged. */
   readonly worstHeld: number | null;
   readonly peakCurrent: number | null;
+  /** The same with every unit at its high capacitance [A]; null where the tolerance is not known either. */
+  readonly peakCurrentWorst: number | null;
   readonly peakIs: Bound;
   readonly energyIntoUnit: number | null;
+  /** What a shorted unit itself held, at its worst voltage [J]; 0 where none is shorted. */
+  readonly energyOwn: number;
+  /** Both together with every unit at its high capacitance [J]; this is what is judged. null where the tolerance is not known. */
+  readonly energyWorst: number | null;
   /** Joules that the isolating resistors take off: the one of the failed unit, and all the others together; null: not told. */
   readonly energyIntoIsolating: { readonly faulted: number; readonly others: number } | null;
   readonly verdict: Verdict;
@@ -41,16 +47,24 @@ interface Volts {
   readonly known: boolean;
 }
 
-/** Volts are judged by the rated, then the surge voltage; joules from outside by what the case is known to hold. */
-function judge(bank: FaultBank, volts: Volts, outsideJoules: number): Verdict {
+/** Joules that end in a shorted unit: at least, and at most (null: not known). */
+interface Joules {
+  readonly least: number;
+  readonly most: number | null;
+}
+
+/** Volts are judged by the rated, then the surge voltage; joules in a shorted unit by what its case is known to hold. */
+function judge(bank: FaultBank, volts: Volts, joules: Joules): Verdict {
   const { ratedVoltage, surgeVoltage = null, ruptureEnergy = null } = bank.unit;
   const within = (limit: number): boolean => volts.most <= limit * (1 + 1e-9);
   const rank: Verdict[] = volts.known ? [] : ["not assessed"];
   if (within(ratedVoltage)) rank.push("pass");
   else rank.push(surgeVoltage !== null && within(surgeVoltage) ? "warn" : "fail");
-  if (outsideJoules > 0) {
-    if (ruptureEnergy === null) rank.push("not assessed");
-    else rank.push(outsideJoules <= ruptureEnergy * (1 + 1e-9) ? "pass" : "fail");
+  const most = ruptureEnergy === null ? null : ruptureEnergy * (1 + 1e-9);
+  if (joules.least > 0) {
+    if (most === null) rank.push("not assessed");
+    else if (joules.least > most || (joules.most ?? 0) > most) rank.push("fail");
+    else rank.push(joules.most === null ? "not assessed" : "pass");
   }
   return (["fail", "not assessed", "warn", "pass"] as const).find((verdict) => rank.includes(verdict)) ?? "pass";
 }
@@ -64,8 +78,14 @@ export interface RowParts {
   readonly held?: number | null;
   readonly peak?: FaultCurrent | null;
   readonly joules: number | null;
-  /** Joules that come from other units. */
-  readonly outside?: number;
+  /** The same at the high capacitance; left out: the same. */
+  readonly peakWorst?: FaultCurrent | null;
+  /** The highest of `joules` and `own` together; left out: theirs with the high capacitance. */
+  readonly joulesWorst?: number | null;
+  /** Joules that a shorted unit itself held; left out: none is shorted. */
+  readonly own?: number;
+  /** `joules` are the unit's own, counted once. */
+  readonly alone?: boolean;
   readonly isolating?: Fault["energyIntoIsolating"];
   readonly stops: string;
   readonly note: string;
@@ -78,16 +98,25 @@ export function row(bank: FaultBank, parts: RowParts): Fault {
   const start = parts.volts === null ? null : Math.max(parts.volts, spread ?? 0);
   const held = parts.held === undefined ? start : parts.held;
   const judged = { most: Math.max(start ?? 0, held ?? 0), known: start !== null && held !== null };
+  const { own = 0, peak = null, peakWorst = peak } = parts;
+  const { toleranceHigh } = bank.unit;
+  const together = parts.joules === null ? null : parts.joules + (parts.alone ? 0 : own);
+  const raised =
+    together === null || (together > 0 && toleranceHigh === undefined) ? null : together * (1 + (toleranceHigh ?? 0));
+  const energyWorst = parts.joulesWorst === undefined ? raised : parts.joulesWorst;
   return {
     id: parts.id,
     worstVoltage: parts.volts,
     worstVoltageSpread: spread,
     worstHeld: held === null ? null : judged.most,
-    peakCurrent: parts.peak?.amperes ?? null,
-    peakIs: parts.peak?.bound ?? "value",
+    peakCurrent: peak?.amperes ?? null,
+    peakCurrentWorst: toleranceHigh === undefined && peak?.amperes !== 0 ? null : (peakWorst?.amperes ?? null),
+    peakIs: peak?.bound ?? "value",
     energyIntoUnit: parts.joules,
+    energyOwn: own,
+    energyWorst,
     energyIntoIsolating: parts.isolating ?? null,
-    verdict: judge(bank, judged, parts.outside ?? 0),
+    verdict: judge(bank, judged, own > 0 ? { least: together ?? own, most: energyWorst } : { least: 0, most: 0 }),
     stops: parts.stops,
     note: parts.note,
     findings: parts.findings ?? [],

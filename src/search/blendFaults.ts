@@ -41,22 +41,34 @@ export function blendFaults(
             : 0;
       if (poured === 0) return { ...fault, part: group.part, fromOthers: 0 };
       const joules = fault.energyIntoUnit === null ? null : fault.energyIntoUnit + poured;
+      // the others at their high capacitance too; a loss that is concave in it is no more than so much larger
+      const highest = Math.max(
+        ...strings.map((one) => (one.capacitance.high ?? Number.POSITIVE_INFINITY) / one.capacitance.nominal),
+      );
+      const raised = Number.isFinite(highest) ? poured * highest : null;
+      const energyWorst = fault.energyWorst === null || raised === null ? null : fault.energyWorst + raised;
+      const least = joules === null ? null : joules + fault.energyOwn;
       return {
         ...fault,
         part: group.part,
         fromOthers: poured,
         energyIntoUnit: joules,
+        energyWorst,
         // The other groups add to it by ways whose resistance is not known.
         peakIs: fault.peakCurrent === null ? fault.peakIs : "lower bound",
-        verdict: worse(fault.verdict, held(joules, unit.ruptureEnergy)),
+        verdict: worse(fault.verdict, held({ least, most: energyWorst }, unit.ruptureEnergy)),
         note: `${fault.note} The other groups pour in up to what is told here.`,
       };
     });
   });
 }
 
-const held = (joules: number | null, most: number | undefined): Verdict =>
-  joules === null || most === undefined ? "not assessed" : joules <= most * (1 + 1e-9) ? "pass" : "fail";
+const held = (joules: { readonly least: number | null; readonly most: number | null }, limit?: number): Verdict => {
+  if (limit === undefined) return "not assessed";
+  const over = (value: number | null): boolean => value !== null && value > limit * (1 + 1e-9);
+  if (over(joules.least) || over(joules.most)) return "fail";
+  return joules.most === null ? "not assessed" : "pass";
+};
 
 const worse = (one: Verdict, other: Verdict): Verdict =>
   (["fail", "not assessed", "warn"] as const).find((verdict) => verdict === one || verdict === other) ?? "pass";

@@ -10,5 +10,7 @@ test("faultsText(faults, width): one row a fault, unknown peaks said, within the
   for (const { id } of faults) expect(text).toContain(id.replaceAll("-", " "));
   for (const line of text.split("\n")) expect(widthOf(line)).toBeLessThanOrEqual(80);
   expect(text).toMatch(/unknown/);
+  expect(text).toMatch(/after the hold/);
+  expect(text.replace(/\s+/g, " ")).toMatch(/its own [\d.]+ \w*J, [\d.]+ \w*J from others; both at most/);
   expect(text).not.toMatch(/NaN|null|undefined/);
 });

@@ -70,10 +70,47 @@ describe("unitShort(bank)", () => {
     expect(unitShort(wide)).toMatchObject({ id: "unit-short", worstVoltage: 1600, worstVoltageSpread: 1600 });
   });
 
-  test("the joules come from outside: a case that is known to hold them passes, one that does not fails", () => {
+  // Source: [methods-derived] 8: "its own plus (m - 1) times that": 264 J and 1056 J.
+  test("its own joules and the neighbours' together are judged: a case that holds 1320 J passes", () => {
     const held = (ruptureEnergy: number) => ({ ...tied, unit: { ...tied.unit, ratedVoltage: 600, ruptureEnergy } });
-    expect(unitShort(held(1056.1)).verdict).toBe("pass");
-    expect(unitShort(held(1055.9)).verdict).toBe("fail");
+    expect(unitShort(held(1320.1)).verdict).toBe("pass");
+    expect(unitShort(held(1319.9)).verdict).toBe("fail");
+    expect(unitShort(held(1320.1)).energyOwn).toBeCloseTo(264, 9);
+    near(unitShort(held(1320.1)).energyWorst, 1320, 1e-12);
+  });
+
+  test("a single unit of 20 kV and 20 kJ with no neighbour still bursts a case that holds 3 kJ", () => {
+    const unit = { ...tied.unit, capacitance: 1e-4, ratedVoltage: 20e3 };
+    const one = { ...tied, series: 1, parallel: 1, voltage: 20e3, worstCharging: 20e3 };
+    expect(unitShort({ ...one, unit: { ...unit, ruptureEnergy: 3000 } })).toMatchObject({
+      energyIntoUnit: 0,
+      energyOwn: 20000,
+      verdict: "fail",
+    });
+    expect(unitShort({ ...one, unit: { ...unit, ruptureEnergy: 20001 } }).verdict).toBe("pass");
+    expect(unitShort({ ...one, unit }).verdict).toBe("not assessed");
+  });
+
+  test("the high capacitance at the worst voltage is judged: + 50 % makes 1320 J 1980 J, and raises amperes and action", () => {
+    const wide = { toleranceLow: 0.1, toleranceHigh: 0.5, ratedVoltage: 900, esr: 0.02, esl: 1e-8, action: 1 };
+    const held = (ruptureEnergy: number) => ({ ...tied, unit: { ...tied.unit, ...wide, ruptureEnergy } });
+    expect(unitShort(held(1979)).verdict).toBe("fail");
+    expect(unitShort(held(1981)).verdict).toBe("pass");
+    const fault = unitShort(held(1979));
+    near(fault.energyIntoUnit, 1056, 1e-12);
+    near(fault.energyWorst, 1980, 1e-12);
+    expect(fault.peakCurrentWorst).toBeGreaterThan(fault.peakCurrent as number);
+    // one high neighbour among three low ones carries 1.5/(1.5 + 2.7) of the amperes
+    near(fault.findings[0]?.value, ((1.5 * 1056) / 0.005) * (1.5 / 4.2) ** 2, 1e-12);
+  });
+
+  test("an unknown tolerance leaves the highest unknown: only a certain failure is told", () => {
+    const held = (ruptureEnergy: number) => ({
+      ...tied,
+      unit: { capacitance: 3300e-6, ratedVoltage: 600, ruptureEnergy },
+    });
+    expect(unitShort(held(1e6))).toMatchObject({ energyWorst: null, peakCurrentWorst: null, verdict: "not assessed" });
+    expect(unitShort(held(1319)).verdict).toBe("fail");
   });
 
   test("no shot known: a fuse's life is not assessed, its clearing is", () => {
@@ -133,10 +170,11 @@ describe("rowShort(bank)", () => {
     expect(fault.stops).toMatch(/charger's trip/);
   });
 
-  test("its own joules are at the worst voltage and come from nowhere else: volts alone judge it", () => {
+  test("its own joules are at the worst voltage, counted once, and judged by the case", () => {
     const high = { ...tied, worstHolding: 440, unit: { ...tied.unit, ratedVoltage: 600 } };
     near(rowShort(high).energyIntoUnit, (3300e-6 * 440 ** 2) / 2, 1e-12);
-    expect(rowShort(high).verdict).toBe("pass");
+    const held = (ruptureEnergy: number) => rowShort({ ...high, unit: { ...high.unit, ruptureEnergy } }).verdict;
+    expect([held(319), held(320), rowShort(high).verdict]).toEqual(["fail", "pass", "not assessed"]);
   });
 
   test("tolerance raises what the rest stand at; one stage alone leaves nothing", () => {

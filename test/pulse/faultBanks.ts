@@ -21,7 +21,7 @@ export const tied: FaultBank = {
   series: 4,
   parallel: 5,
   ties: "cross-tied",
-  unit: { capacitance: 3300e-6, ratedVoltage: 450 },
+  unit: { capacitance: 3300e-6, ratedVoltage: 450, toleranceLow: 0, toleranceHigh: 0 },
   voltage: 1600,
   worstCharging: 400,
   worstHolding: null,

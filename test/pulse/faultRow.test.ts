@@ -4,10 +4,10 @@ import { row } from "../../src/pulse/faultRow.ts";
 import { tied } from "./faultBanks.ts";
 
 const parts = { id: "unit-short", joules: 0, stops: "", note: "" } as const;
-const verdict = (volts: number | null, outside = 0, unit = {}, spread?: number) =>
+const verdict = (volts: number | null, own = 0, unit = {}, spread?: number) =>
   row(
     { ...tied, unit: { ...tied.unit, ...unit } },
-    { ...parts, volts, outside, ...(spread === undefined ? {} : { spread }) },
+    { ...parts, volts, own, ...(spread === undefined ? {} : { spread }) },
   ).verdict;
 
 describe("row(bank, parts)", () => {
@@ -25,7 +25,7 @@ describe("row(bank, parts)", () => {
 
   test("the corner of the tolerance is what is judged", () => expect(verdict(440, 0, {}, 470)).toBe("fail"));
 
-  test("joules from outside want a known case: unknown is not assessed, but a failure of volts stays one", () => {
+  test("joules in a shorted unit want a known case: unknown is not assessed, but a failure of volts stays one", () => {
     expect(verdict(400, 1000)).toBe("not assessed");
     expect(verdict(400, 1000, { ruptureEnergy: 2000 })).toBe("pass");
     expect(verdict(400, 1000, { ruptureEnergy: 500 })).toBe("fail");

@@ -16,11 +16,13 @@ export function faultSection({ faults, unit, fuse }: SheetInput): Section {
       { heading: "after the hold", side: "right" },
       { heading: "peak", side: "right" },
       { heading: "into one unit", side: "right" },
+      { heading: "its own", side: "right" },
+      { heading: "both at most", side: "right" },
       { heading: "what stops it" },
       { heading: "remark" },
     ],
     rows: faults.map((f): readonly Cell[] => {
-      const peak = up(f.peakCurrent, "current");
+      const peak = up(f.peakCurrentWorst ?? f.peakCurrent, "current");
       return [
         f.id.replaceAll("-", " "),
         f.verdict,
@@ -28,6 +30,8 @@ export function faultSection({ faults, unit, fuse }: SheetInput): Section {
         up(f.worstHeld, "voltage"),
         peak === null || f.peakIs === "value" ? peak : `${peak} (${f.peakIs})`,
         up(f.energyIntoUnit, "energy"),
+        up(f.energyOwn, "energy"),
+        up(f.energyWorst, "energy"),
         f.stops,
         f.note,
       ];

@@ -18,6 +18,7 @@ function stress({ layout, unit, faults }: SheetInput): readonly FigureRow[] {
   };
   const short = faults.find(({ id }) => id === "unit-short");
   const shorted = short === undefined ? null : worstOfFault(short);
+  const parts = `at high capacitance; nominally its own ${cell(short?.energyOwn, "energy") ?? "unknown"}, from others ${cell(short?.energyIntoUnit, "energy") ?? "unknown"}`;
   return [
     ["3", "worst unit while charging", up(share.charging, "voltage"), rated(share.charging)],
     ["3", "worst unit while holding", up(share.holding, "voltage"), rated(share.holding)],
@@ -25,22 +26,23 @@ function stress({ layout, unit, faults }: SheetInput): readonly FigureRow[] {
     [
       "4",
       "peak fault current, one unit shorted",
-      up(short?.peakCurrent, "current"),
+      up(short?.peakCurrentWorst ?? short?.peakCurrent, "current"),
       short?.peakCurrent == null ? "ESR or ESL is not known, or no neighbour feeds it" : short.peakIs,
     ],
     [
       "4",
       "energy into the shorted unit",
-      up(short?.energyIntoUnit, "energy"),
+      up(short?.energyWorst, "energy"),
       unit.ruptureEnergy === undefined
-        ? "what the case contains is not known: contain it by a screen"
-        : `case contains ${down(unit.ruptureEnergy, "energy")}`,
+        ? `${parts}; what the case contains is not known: contain it by a screen`
+        : `${parts}; case contains ${down(unit.ruptureEnergy, "energy")}`,
     ],
   ];
 }
 
 function bus({ layout, unit, brief, faults, shot, fuse }: SheetInput): readonly FigureRow[] {
-  const amperes = faults.find(({ id }) => id === "load-short")?.peakCurrent ?? null;
+  const loadShort = faults.find(({ id }) => id === "load-short");
+  const amperes = loadShort?.peakCurrentWorst ?? loadShort?.peakCurrent ?? null;
   const force = amperes === null ? null : busForce(brief.bus, amperes);
   const voltage = brief.voltage * (1 + brief.overshoot);
   // What a fuse would see, also where no catalogue of fuses was given.

@@ -41,11 +41,25 @@ const COLUMNS: readonly Column<Fault>[] = [
     cell: ({ energyIntoUnit }) => span(worst(energyIntoUnit, "energy")),
   },
   {
+    title: "its own",
+    width: 10,
+    side: "right",
+    priority: 2,
+    cell: ({ energyOwn }) => span(worst(energyOwn, "energy")),
+  },
+  {
+    title: "both most",
+    width: 10,
+    side: "right",
+    priority: 1,
+    cell: ({ energyWorst }) => span(worst(energyWorst, "energy")),
+  },
+  {
     title: "peak",
     width: 10,
     side: "right",
     priority: 2,
-    cell: ({ peakCurrent }) => span(worst(peakCurrent, "current")),
+    cell: ({ peakCurrent, peakCurrentWorst }) => span(worst(peakCurrentWorst ?? peakCurrent, "current")),
   },
   {
     title: "peak is",
