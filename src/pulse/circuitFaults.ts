@@ -19,14 +19,16 @@ export function loadShort(bank: FaultBank): Fault {
 
 /** The switch closes while the charger still feeds. */
 export function earlyFire(bank: FaultBank): Fault {
-  const amperes = bank.shot?.peakCurrent ?? null;
+  const { shot } = bank;
+  const amperes = shot?.highest?.peakCurrent ?? shot?.peakCurrent ?? null;
   return row(bank, {
     id: "early-fire",
     volts: worstBefore(bank),
-    peak: amperes === null ? null : { amperes, bound: "upper bound" },
-    joules: bank.shot?.unitHeat ?? null,
+    peak: amperes === null ? null : { amperes, bound: shot?.highest?.bound ?? "side unknown" },
+    joules: shot?.unitHeat ?? null,
+    joulesWorst: shot?.highest?.unitHeat ?? null,
     stops: "The charger must stand the short: its trip, and a resistor or diode between it and the bank.",
-    note: "At most the normal shot, with the charger still feeding the load.",
+    note: "At most the shot at the highest voltage, with the charger still feeding the load.",
   });
 }
 

@@ -3,6 +3,7 @@ import type { HoldCase, Ties } from "../bank/index.ts";
 import type { BusPath } from "./busPath.ts";
 import type { Fuse } from "./fuse.ts";
 import type { ShortCase } from "./shortedUnit.ts";
+import type { Bound } from "./verdict.ts";
 
 /** One unit as the fault table sees it; SI, null or left out is unknown. */
 export interface FaultUnit {
@@ -45,6 +46,8 @@ export interface FaultBank {
     readonly peakCurrent: number | null;
     readonly unitAction: number | null;
     readonly unitHeat: number | null;
+    /** The same with the overshoot and everything that spreads at its worst, and what that current is; left out: not told. */
+    readonly highest?: { readonly peakCurrent: number | null; readonly unitHeat: number | null; readonly bound: Bound };
   } | null;
   /** Balancing resistor of one position [ohm] and the hold [s] (null: for ever); null: none fitted; left out: not told. */
   readonly balance?: { readonly resistance: number; readonly hold: number | null } | null;

@@ -13,6 +13,7 @@ import {
 import type { Finding } from "../quantity/index.ts";
 import type { Brief } from "./brief.ts";
 import { faultBankOf, faultUnitOf, guardsOf } from "./faults.ts";
+import { atHighest } from "./highestShot.ts";
 import type { LayoutResult } from "./result.ts";
 import { type Shape, shotCorner } from "./shotCorner.ts";
 
@@ -82,7 +83,7 @@ export function fuseSeesAt(brief: Brief, unit: Capacitor, shape: Shape, worst: n
   const voltage = brief.voltage * (1 + brief.overshoot);
   const before = Number.isFinite(worst) ? worst : voltage;
   const shared = unit.tolerance !== undefined || shape.parallel === 1;
-  const shot = brief.load === undefined || !shared ? null : shotCorner(brief, unit, shape, "high");
+  const shot = brief.load === undefined || !shared ? null : shotCorner(atHighest(brief), unit, shape, "high");
   const { series, parallel, ties } = shape;
   const bank: FaultBank = {
     series,

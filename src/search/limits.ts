@@ -9,6 +9,7 @@ import { type Beside, besideShot, othersNominal } from "./blendShot.ts";
 import type { Brief } from "./brief.ts";
 import { chargeFor, firingOf } from "./charging.ts";
 import { faultUnitOf, guardsOf } from "./faults.ts";
+import { atHighest } from "./highestShot.ts";
 import { lifeOf } from "./life.ts";
 import { LIMIT_KEYS, type RatedLimit } from "./limitKeys.ts";
 import { type CornerName, type Shape, type ShotCorner, shotCorner } from "./shotCorner.ts";
@@ -93,11 +94,14 @@ export function limitClaims(brief: Brief, given: LimitCase): readonly LimitClaim
   if (!LIMIT_KEYS.some((key) => key !== "maxFaultEnergy" && asked(key))) return claims;
   const ends = brief.basis === "nominal" ? (["nominal", "nominal"] as const) : (["low", "high"] as const);
   const { beside } = given;
-  const at = (end: CornerName): Read<ShotCorner> =>
-    beside === undefined ? shotCorner(brief, unit, given, end) : besideShot(brief, given, beside);
+  const at = (end: CornerName, fired: Brief = brief): Read<ShotCorner> =>
+    beside === undefined ? shotCorner(fired, unit, given, end) : besideShot(fired, given, beside);
   const low = at(ends[0]);
   const high = at(ends[1]);
-  if (!low.ok || !high.ok) return null;
+  // amperes and their slope are judged at the highest voltage the charger reaches
+  const top =
+    brief.overshoot > 0 && (asked("maxPeakCurrent") || asked("maxSlew")) ? at(ends[1], atHighest(brief)) : high;
+  if (!low.ok || !high.ok || !top.ok) return null;
   // without the tolerance neither the worst unit's part of the current nor the corners are known
   const spread = unit.tolerance !== undefined || brief.basis === "nominal";
   const alone = given.parallel === 1 && beside === undefined;
@@ -111,12 +115,12 @@ export function limitClaims(brief: Brief, given: LimitCase): readonly LimitClaim
   const { maxPeakCurrent, maxSlew, maxReversal, maxRms, maxTemperatureRise, minLife } = brief;
   if (maxPeakCurrent !== undefined) {
     const limit = ratedLimit(maxPeakCurrent, unit.peakCurrent);
-    const value = shared ? high.value.unit.peakCurrent : null;
+    const value = shared ? top.value.unit.peakCurrent : null;
     claim("maxPeakCurrent", { value, limit, bound: bounds.peakCurrent, unit: "A" });
   }
   if (maxSlew !== undefined) {
     const limit = ratedLimit(maxSlew, unit.slew);
-    claim("maxSlew", { value: shared ? high.value.unit.slew : null, limit, bound: bounds.peakCurrent, unit: "V/s" });
+    claim("maxSlew", { value: shared ? top.value.unit.slew : null, limit, bound: bounds.peakCurrent, unit: "V/s" });
   }
   const reversal = spread ? Math.max(low.value.reversal, high.value.reversal) : null;
   if (maxReversal !== undefined)

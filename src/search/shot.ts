@@ -24,6 +24,7 @@ import { type BusFound, circuitOf, pulseBankFor } from "./circuit.ts";
 import { shotEnvelope } from "./envelope.ts";
 import { faultBankOf } from "./faults.ts";
 import { fuseSeesAt } from "./fuses.ts";
+import { highestShot } from "./highestShot.ts";
 import { type LampReport, lampReport } from "./lampReport.ts";
 import { type LifeReport, lifeOf } from "./life.ts";
 import { limitFindings } from "./limits.ts";
@@ -91,6 +92,9 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   if (!envelope.ok) return envelope;
   const band = shotBand({ brief, unit, shape: layout, circuit, bank });
   if (!band.ok) return band;
+  const highest = highestShot({ brief, unit, shape: layout, circuit, bank });
+  if (!highest.ok) return highest;
+  const top = highest.value;
   const left = Math.sqrt((2 * discharge.energy.left) / bank.capacitance);
   const charge = chargeFor(brief, { capacitance: bank.capacitance, left });
   const slowest = chargeFor(brief, { capacitance: layout.capacitance.high ?? bank.capacitance, left });
@@ -98,7 +102,7 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   if (!slowest.ok) return slowest;
   const fired = { action: discharge.action, seconds: discharge.duration, share: discharge.unit.actionShare };
   const { heating } = firingOf(brief, bank, unit, { charge: charge.value, shot: fired });
-  const { highest } = firingOf(brief, bank, unit, { charge: slowest.value, shot: fired });
+  const { highest: highestRate } = firingOf(brief, bank, unit, { charge: slowest.value, shot: fired });
   const own =
     bank.esl === null || circuit.bus === null ? null : bank.esl + (circuit.section ?? 0) + circuit.bus.inductance;
   const lamp = lampReport(brief, { capacitance: bank.capacitance, own });
@@ -114,9 +118,10 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
       peakCurrent: discharge.peakCurrent,
       unitAction:
         fuse === null
-          ? discharge.unit.action
+          ? top.discharge.unit.action
           : fuseSeesAt(brief, unit, layout, worst ?? Number.POSITIVE_INFINITY).normalAction,
       unitHeat: discharge.unit.heat,
+      highest: top,
     },
     chargerHighest: brief.charger?.highest ?? brief.charger?.supply ?? null,
   });
@@ -125,7 +130,7 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
       ? []
       : rateFindings(
           heating,
-          { rate: brief.rate, highest },
+          { rate: brief.rate, highest: highestRate },
           { rippleCurrent: unit.rippleCurrent ?? null, temperatureRise: brief.maxTemperatureRise ?? null },
         ).filter(({ id }) => id !== "pulse.unit.rise" || brief.maxTemperatureRise === undefined);
   return accepted({
@@ -136,7 +141,7 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
     envelope: envelope.value,
     band: band.value,
     charge: charge.value,
-    highestRate: highest,
+    highestRate,
     heating,
     drift: driftFor(brief, bank, unit, layout.balance),
     ripple: rippleFor(brief, bank),
@@ -145,9 +150,9 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
     stated,
     faults,
     findings: [
-      ...unitRatingFindings(discharge, {
+      ...unitRatingFindings(top.discharge, {
         unit,
-        envelope: envelope.value,
+        envelope: top.envelope,
         series: layout.series,
         parallel: layout.parallel,
         clampDrop: circuit.clamp?.drop ?? null,

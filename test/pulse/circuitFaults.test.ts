@@ -11,15 +11,15 @@ describe("loadShort(bank), earlyFire(bank)", () => {
     expect(earlyFire(tied)).toMatchObject({ peakCurrent: null, energyIntoUnit: null });
   });
 
-  test("with ESR and bus they are the closed form's, and early fire is the normal shot", () => {
+  test("with ESR and bus they are the closed form's, and early fire is the shot at its highest, a bound only if one is told", () => {
     const unit = { ...tied.unit, esr: 0.02, esl: 0 };
     near(loadShort({ ...tied, unit, bus: { resistance: 0.004, inductance: 0 } }).peakCurrent, 1600 / 0.02, 1e-12);
     const shot = { peakCurrent: 9000, unitAction: null, unitHeat: 12 };
-    expect(earlyFire({ ...tied, shot })).toMatchObject({
-      peakCurrent: 9000,
-      peakIs: "upper bound",
-      energyIntoUnit: 12,
-    });
+    const alone = { peakCurrent: 9000, peakIs: "side unknown", energyIntoUnit: 12, energyWorst: null };
+    expect(earlyFire({ ...tied, shot })).toMatchObject(alone);
+    const highest = { peakCurrent: 11000, unitHeat: 20, bound: "upper bound" } as const;
+    const told = { peakCurrent: 11000, peakIs: "upper bound", energyIntoUnit: 12, energyWorst: 20 };
+    expect(earlyFire({ ...tied, shot: { ...shot, highest } })).toMatchObject(told);
   });
 });
 
