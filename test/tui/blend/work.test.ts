@@ -1,0 +1,39 @@
+// The thread's side: the same blend as the search itself, the layout that the command compares with, stages in order, and a stop.
+import { expect, test } from "vitest";
+import { DEFAULT_FAMILY } from "../../../src/catalog/index.ts";
+import { plan, planBlends } from "../../../src/search/index.ts";
+import { type BlendAsk, blendAnswer, LADDER, WITHIN } from "../../../src/tui/blend/work.ts";
+import { briefOf } from "../../support/labParts.ts";
+import { parts } from "../../support/stock.ts";
+
+const brief = briefOf({ energy: 2400, voltage: 2200, ripple: 1 });
+const families = [DEFAULT_FAMILY];
+const ask = (changes: Partial<BlendAsk> = {}): Promise<Awaited<ReturnType<typeof blendAnswer>>> =>
+  blendAnswer({ brief, parts: parts(), families, told: () => {}, stop: () => false, now: () => 0, ...changes });
+
+test("blendAnswer(ask): what planBlends and plan say, each stage told once and in order, cautions once each", async () => {
+  const stages: string[] = [];
+  const { plan: read, single, cautions } = await ask({ told: (stage) => stages.push(stage) });
+  const same = await planBlends({ brief, parts: parts(), families, within: WITHIN, ladder: LADDER, clock: () => 0 });
+  expect(read).toEqual(same);
+  const layouts = plan({ brief, parts: parts(), families, rank: "cost" });
+  expect(layouts.ok && layouts.value.layouts[0]?.id).toBe(single?.id);
+  expect(stages).toEqual(["one part", "cheapest", "kinds", "ladder"]);
+  expect(read.ok && read.value.ladder?.steps.some(({ asked }) => asked)).toBe(true);
+  expect(new Set(cautions).size).toBe(cautions.length);
+  expect(cautions.length).toBeGreaterThan(3);
+});
+
+test("stopped from the start: nothing is claimed, and the cautions stand all the same", async () => {
+  const { plan: read, cautions } = await ask({ stop: () => true });
+  expect(read).toMatchObject({ ok: true, value: { status: "stopped" } });
+  expect(cautions.length).toBeGreaterThan(0);
+});
+
+test("nothing has a price: no blend, no layout to compare with, the parts left out by name", async () => {
+  const bare = parts().map(({ price: _, currency: __, onHand: ___, ...part }) => part);
+  const { plan: read, single } = await ask({ parts: bare });
+  expect(single).toBeNull();
+  expect(read).toMatchObject({ ok: true, value: { blends: [], compared: 0 } });
+  expect(read.ok && read.value.leftOut.map(({ reason }) => reason)).toContain("price-missing");
+});
