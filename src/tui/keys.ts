@@ -67,7 +67,7 @@ const UNITS: readonly Short[] = [
 const blend = (message: BlendMessage): Message => ({ type: "blend", message });
 
 const BLEND: readonly Short[] = [
-  [["escape"], "Esc", "stop with the best so far", blend({ type: "cancel" }), live.seeksBlend, 1],
+  [["escape"], "Esc", "stop, keep the best", blend({ type: "cancel" }), live.seeksBlend, 1],
   [["enter"], "Enter", "find the blend", blend({ type: "find" }), live.mayFindBlend, 1],
 ];
 

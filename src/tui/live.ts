@@ -1,5 +1,5 @@
 // When a key is live: questions about the state, for the table of keys.
-import { blendKey } from "./blend/key.ts";
+import { keyInForce } from "./blend/key.ts";
 import { fieldAt } from "./fields.ts";
 import { planOf, shownBank } from "./pick.ts";
 import type { ScreenName, State } from "./state.ts";
@@ -40,7 +40,7 @@ export const hasPlaced: Live = (state) => onUnits(state) && state.units.placed !
 export const seeksBlend: Live = (state) => on("blend")(state) && state.blend.running !== null;
 /** There is a brief in force whose blend is neither found nor being sought. */
 export const mayFindBlend: Live = (state) => {
-  const key = blendKey(state);
+  const key = keyInForce(state);
   const { running, found } = state.blend;
   const has = running?.key === key || (found?.key === key && !found.stopped);
   return on("blend")(state) && state.words !== null && key !== null && !has;

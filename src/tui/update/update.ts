@@ -1,6 +1,6 @@
 // State and message to state and effects: the one place where the screens change. Pure.
 
-import { blendKey } from "../blend/key.ts";
+import { keyInForce } from "../blend/key.ts";
 import type { BlendMessage } from "../blend/state.ts";
 import { updateBlend } from "../blend/update.ts";
 import { mostListed } from "../engine.ts";
@@ -47,7 +47,7 @@ function changeUnits(state: State, message: UnitsMessage): Change {
 
 /** So does the screen of blends; it finds one for the brief in force. */
 function changeBlend(state: State, message: BlendMessage): Change {
-  const key = blendKey(state);
+  const key = keyInForce(state);
   const { answer } = state;
   const wanted =
     answer?.kind !== "planned" || key === null ? null : { what: "find" as const, brief: answer.brief, key };

@@ -28,7 +28,8 @@ function runningRows({ stage, seconds, stopping }: Seeking, columns: number): re
   const words = stopping ? "Stopping; Esc again gives it up." : "Esc stops with the best so far.";
   return [
     rowOf(span("Working out ", "strong"), span(STAGES[stage], "accent")),
-    ...paragraph(`${Math.floor(seconds)} s so far; how long it still takes cannot be told. ${words}`, columns),
+    ...paragraph(`${Math.floor(seconds)} s so far; how long it still takes cannot be told.`, columns),
+    ...paragraph(words, columns),
   ];
 }
 
@@ -43,9 +44,9 @@ export function blendPage(state: State, room: Room): Page {
         : paragraph("This is for the brief before; Enter begins anew.", columns, "warn");
     return pageOf([...runningRows(running, columns), ...other, EMPTY_ROW, ...paragraph(ABOUT, columns, "quiet")]);
   }
+  if (found !== null && found.key === key && state.words !== null) return foundPage(found, state, room);
   const empty = notYet(state, columns);
   if (empty.length > 0) return pageOf(empty);
-  if (found !== null && found.key === key) return foundPage(found, state, room);
   const why =
     ended !== null && ended.key === key
       ? ended.why === "cancelled"

@@ -24,10 +24,23 @@ test("blendAnswer(ask): what planBlends and plan say, each stage told once and i
   expect(cautions.length).toBeGreaterThan(3);
 });
 
-test("stopped from the start: nothing is claimed, and the cautions stand all the same", async () => {
-  const { plan: read, cautions } = await ask({ stop: () => true });
-  expect(read).toMatchObject({ ok: true, value: { status: "stopped" } });
-  expect(cautions.length).toBeGreaterThan(0);
+test("stopped at once or on the way: the best so far and a bound between which the cheapest lies; the cautions stand", async () => {
+  const whole = await ask();
+  const cheapest = (whole.plan.ok && whole.plan.value.blends[0]?.cost?.total) || Number.NaN;
+  for (const most of [0, 1]) {
+    let polls = 0;
+    const { plan: read, cautions } = await ask({ stop: () => ++polls > most });
+    if (!read.ok) throw new Error("refused");
+    const { status, blends, lowerBound, gap, ladder } = read.value;
+    const cost = blends[0]?.cost?.total ?? 0;
+    expect(status).toBe("stopped");
+    expect(lowerBound).toBeGreaterThan(0);
+    expect(lowerBound).toBeLessThanOrEqual(cheapest);
+    expect(cost).toBeGreaterThanOrEqual(cheapest);
+    expect(gap).toBeCloseTo((cost - (lowerBound ?? 0)) / cost, 9);
+    expect(ladder?.end).not.toBe("complete");
+    expect(cautions).toEqual(expect.arrayContaining(["This is a calculation, not an approval."]));
+  }
 });
 
 test("nothing has a price: no blend, no layout to compare with, the parts left out by name", async () => {

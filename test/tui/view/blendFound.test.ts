@@ -95,6 +95,6 @@ describe("foundPage(found, state, room)", () => {
       columns: 80,
       rows: 20,
     });
-    expect(page.rows[0]?.left[0]?.text).toMatch(/^! .*one currency/);
+    expect(page.rows[0]?.left[0]?.text).toMatch(/^! currency: prices are in different currencies/);
   });
 });
