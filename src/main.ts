@@ -74,6 +74,9 @@ async function openScreens(flags: ScreenFlags, ports: Ports): Promise<number> {
     faults: 0,
     note: isDemo ? "invented parts" : "",
   };
+  // Resistors alone are refused before anything is opened, whatever stands at the other end.
+  const alone = isDemo && flags.resistors !== null ? await readAsked(flags, ports, stock) : null;
+  if (alone !== null && !alone.ok) return tellAll(alone.refusals);
   let lost: readonly Refusal[] = [];
   const entry = ports.background?.entry;
   screensAreUp = true;

@@ -18,12 +18,13 @@ function writeRun(cells: readonly Cell[], from: number, to: number): string {
     const cell = cellAt(cells, column);
     const keeps = cell.text === " " && cell.style === "" && isUnseenOnBlanks(style);
     if (cell.style !== style && !keeps) {
-      out += style === "" ? `\x1b[${cell.style}m` : `\x1b[0${cell.style === "" ? "" : `;${cell.style}`}m`;
+      // An absent number is nought, which takes all styles away: a byte less than saying it.
+      out += style === "" ? `\x1b[${cell.style}m` : `\x1b[${cell.style === "" ? "" : `;${cell.style}`}m`;
       style = cell.style;
     }
     out += cell.text;
   }
-  return style === "" ? out : `${out}\x1b[0m`;
+  return style === "" ? out : `${out}\x1b[m`;
 }
 
 /** What turns one row of cells into another; empty when they look alike. */
@@ -32,6 +33,8 @@ function rowChange(before: readonly Cell[], after: readonly Cell[], row: number)
   let filled = after.length;
   while (filled > 0 && sameCell(cellAt(after, filled - 1), BLANK)) filled -= 1;
   let out = "";
+  /** Within a row the column alone is told, which is shorter and as absolute. */
+  const place = (column: number): string => (out === "" ? `\x1b[${row + 1};${column + 1}H` : `\x1b[${column + 1}G`);
   for (let column = 0; column < end; ) {
     if (sameCell(cellAt(before, column), cellAt(after, column))) {
       column += 1;
@@ -40,13 +43,13 @@ function rowChange(before: readonly Cell[], after: readonly Cell[], row: number)
     // Never start inside a wide character, old or new: half of one cannot be written.
     let from = column;
     while (from > 0 && (cellAt(before, from).text === "" || cellAt(after, from).text === "")) from -= 1;
-    if (from >= filled) return `${out}\x1b[${row + 1};${from + 1}H\x1b[K`;
+    if (from >= filled) return `${out}${place(from)}\x1b[K`;
     let to = column + 1;
     for (let look = to; look < filled && look - to < CHEAPER_THAN_A_JUMP; look += 1) {
       if (!sameCell(cellAt(before, look), cellAt(after, look))) to = look + 1;
     }
     while (to < end && (cellAt(before, to).text === "" || cellAt(after, to).text === "")) to += 1;
-    out += `\x1b[${row + 1};${from + 1}H${writeRun(after, from, to)}`;
+    out += `${place(from)}${writeRun(after, from, to)}`;
     column = to;
   }
   return out;
@@ -55,6 +58,11 @@ function rowChange(before: readonly Cell[], after: readonly Cell[], row: number)
 export interface Size {
   readonly columns: number;
   readonly rows: number;
+}
+
+export interface StyledRow {
+  readonly plain: string;
+  readonly text: string;
 }
 
 /**
@@ -66,6 +74,8 @@ export class PaintStream extends EventEmitter {
   columns: number;
   rows: number;
   caret: Caret = null;
+  /** The rows that were given to ink as plain text, with their styles: laying out styled text takes ink twice as long. */
+  styled: readonly StyledRow[] = [];
   /** What stands on the terminal; null: not known, so clear first. */
   #shown: string[] | null = null;
   #given: readonly string[] = [];
@@ -109,8 +119,14 @@ export class PaintStream extends EventEmitter {
     if (caret !== "") this.#out(caret);
   }
 
+  /** A frame of ink's layout: its rows are known by their plain text, and are painted in the styles that they were given with. */
   write(frame: string): boolean {
-    this.paint(frame.split("\n"));
+    const styled = this.styled;
+    this.paint(
+      frame
+        .split("\n")
+        .map((line, row) => (line === styled[row]?.plain.trimEnd() ? (styled[row]?.text ?? line) : line)),
+    );
     return true;
   }
 

@@ -34,8 +34,19 @@ function pieces(spans: readonly Span[], ascii: boolean): readonly Piece[] {
 
 const widthOf = (list: readonly Piece[]): number => list.reduce((sum, piece) => sum + piece.width, 0);
 
-/** The row as text with style codes, at most `columns` cells; the right part gives way before the left is cut. */
+const drawn = new WeakMap<Row, { readonly columns: number; readonly look: Look; readonly text: string }>();
+
+/** The row as text, worked out once for a row that stays the same object while a list scrolls. */
 export function drawRow(row: Row, columns: number, look: Look): string {
+  const known = drawn.get(row);
+  if (known !== undefined && known.columns === columns && known.look === look) return known.text;
+  const text = composed(row, columns, look);
+  drawn.set(row, { columns, look, text });
+  return text;
+}
+
+/** The row as text with style codes, at most `columns` cells; the right part gives way before the left is cut. */
+function composed(row: Row, columns: number, look: Look): string {
   const left = pieces(row.left, look.ascii);
   const right = pieces(row.right ?? [], look.ascii);
   const mark = look.ascii ? "~" : "…";

@@ -64,6 +64,24 @@ describe("clampDiode(case)", () => {
     });
   });
 
+  test("units alike carry nothing, known, even where nothing limits a current", () => {
+    for (const ties of ["cross-tied", "strings"] as const)
+      expect(clampDiode({ ...BASE, ties, tLow: 0, tHigh: 0, dumpResistance: 0 })).toMatchObject({
+        surgeCurrent: 0,
+        action: 0,
+      });
+  });
+
+  test("strings by hand: 400 V left, 3960 uF/3 of that and two strings of 2640 uF/4 on 2 ohm; alone through 3 x 0.1 ohm", () => {
+    const [own, others] = [3960e-6 / 3, (2 * 2640e-6) / 4];
+    const part = own / (own + others);
+    const shared = clampDiode({ ...BASE, ties: "strings", p: 3 });
+    expect(shared.surgeCurrent).toBeCloseTo((part * 400) / 2, 9);
+    expect(shared.action).toBeCloseTo((part * own * 400 ** 2) / 4, 9);
+    const alone = clampDiode({ ...BASE, ties: "strings", p: 3, dumpResistance: 0, esr: 0.1 });
+    expect(alone.action).toBeCloseTo((own * 400 ** 2) / 0.6, 9);
+  });
+
   test("neither resistor nor ESR known: current and action unknown, not zero", () => {
     for (const ties of ["cross-tied", "strings"] as const)
       expect(clampDiode({ ...BASE, ties, dumpResistance: 0 })).toMatchObject({ surgeCurrent: null, action: null });
@@ -102,6 +120,8 @@ describe("clampDiode(case)", () => {
     ];
     const seen = stepped(worst, start, 2, 4e5);
     expect(seen.surge / found.surgeCurrent!).toBeCloseTo(1, 2);
+    expect(seen.action / found.action!).toBeGreaterThan(0.9);
+    expect(seen.action / found.action!).toBeLessThan(1.001);
     for (let set = 0; set < 20; set++) {
       const mixed = [1, 2].map((s) =>
         start.map((_, i) => ((set * 7 + s * 3) >> i) & 1).map((bit) => (bit ? low : high)),

@@ -27,6 +27,20 @@ describe("sourceModes({ rates, weights, slopes, resistance })", () => {
     expect([...modes.slopes]).toEqual([2, -1, -1]);
   });
 
+  test("stages of one rate apart from what moves them all: what is equal to rounding leaves no drift of its own", () => {
+    // Slopes in the very ratio of the weights, but for the last digit: one mode alone, in which all move together.
+    const weights = [1, 3, 7];
+    const modes = sourceModes({
+      rates: [0, 0, 0],
+      weights,
+      slopes: weights.map((w) => w * 0.1 * (1 + 2e-16)),
+      resistance: 5,
+    });
+    const width = modes.rates.length;
+    for (let i = 0; i < 3; i++) for (let k = 1; k < width; k++) expect(modes.slopes[i * width + k]).toBe(0);
+    expect(modes.rates[0]).toBeCloseTo(11 / 5, 12);
+  });
+
   test("eigenvalues agree with ml-matrix to 1e-9, fed through a resistor, 100 random chains", () => {
     for (let k = 0; k < 100; k++) {
       const n = 1 + (k % 8);

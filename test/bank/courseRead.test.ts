@@ -7,7 +7,7 @@ import { segmentFrom } from "../../src/bank/courseSegment.ts";
 import { streamState, uniformFrom } from "../../src/bank/random.ts";
 
 const draw = uniformFrom(streamState(21, 0));
-const chain: readonly Stage[] = Array.from({ length: 7 }, () => ({
+const chain: readonly Stage[] = Array.from({ length: 11 }, () => ({
   capacitance: 0.5 + draw(),
   leakageCurrent: 0,
   conductance: draw(),
@@ -26,14 +26,22 @@ describe("segmentAt(segment, t)", () => {
   });
 });
 
+describe("segmentAt(segment, t) of a stage that nothing moves", () => {
+  test("for ever it stays where it was", () => {
+    const still: Stage = { capacitance: 1, leakageCurrent: 0, conductance: 0, resistance: Number.POSITIVE_INFINITY };
+    const at = segmentFrom([still, { ...still, conductance: 1 }], { kind: "current", current: 0 }, [5, 7]);
+    expect([...segmentAt(at, Number.POSITIVE_INFINITY)]).toEqual([5, expect.closeTo(0, 12)]);
+  });
+});
+
 describe("segmentOver(segment, grid, out, row)", () => {
   test("2,000 steps of the recurrence stay within 1e-11 of asking one by one, from the row given", () => {
-    const out = new Float64Array(2001 * 7).fill(-1);
+    const out = new Float64Array(2001 * 11).fill(-1);
     segmentOver(segment, { from: 0.1, step: 0.004, count: 2000 }, out, 1);
-    expect([...out.subarray(0, 7)]).toEqual(chain.map(() => -1));
+    expect([...out.subarray(0, 11)]).toEqual(chain.map(() => -1));
     for (let k = 0; k < 2000; k += 37)
       for (const [i, v] of segmentAt(segment, 0.1 + 0.004 * k).entries())
-        expect(Math.abs(out[(k + 1) * 7 + i]! - v)).toBeLessThan(1e-11 * 100);
+        expect(Math.abs(out[(k + 1) * 11 + i]! - v)).toBeLessThan(1e-11 * 100);
   });
 });
 

@@ -88,6 +88,38 @@ describe("lotStages(case)", () => {
     expect(lotStages(asked(12, 1, 0.3, many))!.blur).toBeGreaterThan(0);
   });
 
+  test("two stages: the one other is the unit's own, and there are no two others", () => {
+    const { stages } = lotStages(asked(2, 1, 0.5))!;
+    expect(stages.butTwoBelow).toBeNull();
+    expect([0.9, 0.95, 0.97, 1.01, 1.045, 1.11].map((x) => stages.butOneBelow(x))).toEqual(
+      [0, 1, 2, 4, 5, 6].map((count) => expect.closeTo(count / 6, 12)),
+    );
+  });
+
+  test("too many sums to keep apart: on a lattice, and off by no more than the blur that it states", () => {
+    const values = Array.from({ length: 60 }, (_, k) => 1 + 0.1 * Math.sqrt(k));
+    const { stages, blur } = lotStages(asked(4, 1, 0.3, values))!;
+    expect(blur).toBeGreaterThan(0);
+    expect(blur).toBeLessThan(1e-4);
+    const inverse = values.map((c) => 1 / c);
+    const two = inverse.flatMap((a) => inverse.map((b) => a + b));
+    const three = two.flatMap((a) => inverse.map((b) => a + b));
+    const share = (sums: readonly number[], x: number) => sums.filter((sum) => sum < x).length / sums.length;
+    for (const [below, sums, at] of [
+      [stages.butTwoBelow!, two, [1.2, 1.3, 1.5, 1.8]],
+      [stages.butOneBelow, three, [1.8, 2, 2.2, 2.6]],
+    ] as const)
+      for (const x of at) {
+        expect(below(x)).toBeGreaterThanOrEqual(share(sums, x - 4 * blur) - 1e-9);
+        expect(below(x)).toBeLessThanOrEqual(share(sums, x + 4 * blur) + 1e-9);
+      }
+    // One other on its rough lattice: the mass of one, and the mean of 1/C.
+    const { first, step, masses } = stages.other;
+    expect(masses.reduce((sum, mass) => sum + mass, 0)).toBeCloseTo(1, 12);
+    const mean = masses.reduce((sum, mass, k) => sum + mass * (first + k * step), 0);
+    expect(mean).toBeCloseTo(inverse.reduce((sum, x) => sum + x, 0) / 60, 12);
+  });
+
   test("the stage that is over: descending 1/C, chances summing to 1", () => {
     const { victim } = lotStages(asked(3, 2, 0.35))!.stages;
     expect(victim.values[0]).toBeCloseTo(1 / (2 * 0.91), 14);

@@ -9,6 +9,7 @@ import { type BenchRow, keptOf, TABLE_HEAD, tableLine } from "./row.ts";
 import { benchSearch } from "./search.ts";
 import { benchSheet } from "./sheet.ts";
 import { benchTui } from "./tui.ts";
+import { benchTuiFrames } from "./tuiFrames.ts";
 
 const GROUPS: Readonly<Record<string, () => readonly BenchRow[] | Promise<readonly BenchRow[]>>> = {
   search: () => benchSearch(),
@@ -17,7 +18,7 @@ const GROUPS: Readonly<Record<string, () => readonly BenchRow[] | Promise<readon
   place: async () => [...benchPlace(), ...(await benchPlaceRival())],
   sheet: benchSheet,
   blend: () => benchBlend(),
-  tui: () => benchTui(),
+  tui: async () => [...(await benchTui()), ...(await benchTuiFrames())],
 };
 
 const asked = process.argv.slice(2);

@@ -6,14 +6,16 @@ import { answerFor } from "../../src/tui/engine.ts";
 import { FIELDS } from "../../src/tui/fields.ts";
 import { messageFor } from "../../src/tui/keys.ts";
 import { PaintStream } from "../../src/tui/paint.ts";
+import type { EnginePort } from "../../src/tui/ports.ts";
 import { readSaved, savedText } from "../../src/tui/saved.ts";
 import type { Answer, Message, State } from "../../src/tui/state.ts";
 import { createStore } from "../../src/tui/store.ts";
 import { makeTokeniser } from "../../src/tui/tokens.ts";
 import { update } from "../../src/tui/update/update.ts";
 import { drawScreen } from "../../src/tui/view/screen.ts";
+import { SHARED_WORDS } from "../../src/tui/workshop.ts";
 import { Screen } from "./screen.ts";
-import { engine, stateWith } from "./stock.ts";
+import { CATALOGUE_FACTS, engine, STOCK, stateWith } from "./stock.ts";
 
 /** Small numbers from a seed (mulberry32). */
 export function randomFrom(seed: number): () => number {
@@ -57,6 +59,22 @@ const KEYS = [
   "\x1b6",
   "\x1b7",
   "\x1b7",
+  "\x1b8",
+  "\x1b9",
+  "\x1bt",
+  "\x1bu",
+  "\x1bU",
+  ..."+<>[]uUtdvxyoh89",
+  "\x1b[1;3A",
+  "\x1b[1;3B",
+  "\x1b[5;3~",
+  "\x1b[6;3~",
+  "\x12",
+  "\x1b[24~",
+  "\x1b[<0;10;7M",
+  "\x1b[<0;30;1M",
+  "\x1b[<65;3;9M",
+  "\x1b]11;rgb:ffff/ffff/ffff\x07",
   "\x1bOP",
   "\x1b[12~",
   "\x1b[13~",
@@ -93,6 +111,12 @@ export interface MonkeyReport {
   readonly screens: ReadonlySet<string>;
 }
 
+/** Most of a plan's time is its list in full: a few screens of it scroll as well as many. */
+const short: EnginePort = {
+  ...engine,
+  plan: (brief, request) => engine.plan(brief, { ...request, most: Math.min(60, request.most) }),
+};
+
 /** Types `count` keys. Every `look`th frame is compared cell by cell with a full repaint. */
 export async function runMonkey(seed: number, count: number, look: number): Promise<MonkeyReport> {
   const random = randomFrom(seed);
@@ -112,6 +136,11 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
     update,
     run: (effect, send) => {
       if (effect.type === "ask") wanted = true;
+      if (effect.type === "overrides") {
+        // Saved, and read again as it was saved.
+        const { overrides } = effect;
+        send({ type: "opened", stock: STOCK, words: SHARED_WORDS, catalogue: CATALOGUE_FACTS, overrides });
+      }
       if (effect.type !== "export") return;
       const there = files.has(effect.path) && !effect.replace;
       files.add(effect.path);
@@ -137,7 +166,7 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
       name === "brief",
       name === "map" && state.map,
     ]);
-    const found = answers.get(question) ?? answerFor(state, engine, true);
+    const found = answers.get(question) ?? answerFor(state, short, true);
     answers.set(question, found);
     send({ type: "answered", asked, answer: found, slow: false });
   };

@@ -3,7 +3,7 @@ import { expect, test } from "vitest";
 import { runMonkey } from "../support/monkey.ts";
 
 test("1,500 random keys at random sizes: nothing thrown, nothing outside, no stale cell, all saved whole", async () => {
-  const { faults, screens } = await runMonkey(5, 1500, 40);
+  const { faults, screens } = await runMonkey(8, 1500, 40);
   expect(faults).toEqual([]);
   // The run is worth something only if it got about.
   const wanted = [
@@ -17,6 +17,10 @@ test("1,500 random keys at random sizes: nothing thrown, nothing outside, no sta
     "order+prompt",
     "sharing",
     "shot",
+    "map",
+    "parts",
+    "trail",
+    "parts+prompt",
   ];
   const stages = [
     "compare listed 2",
@@ -26,4 +30,4 @@ test("1,500 random keys at random sizes: nothing thrown, nothing outside, no sta
     "shot with key shot",
   ];
   expect([...wanted, ...stages].filter((name) => !screens.has(name))).toEqual([]);
-}, 30_000);
+}, 120_000);

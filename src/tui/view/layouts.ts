@@ -3,7 +3,7 @@
 import type { LayoutResult } from "../../search/index.ts";
 import { type Column, columnsFor, headingRow, snug, tableRow, widen } from "../columns.ts";
 import { isPinned, listed, planOf, selectedIndex } from "../pick.ts";
-import { EMPTY_ROW, type Row, span } from "../row.ts";
+import { EMPTY_ROW, type Row, type Span, span } from "../row.ts";
 import type { State } from "../state.ts";
 import {
   grouped,
@@ -23,6 +23,17 @@ import {
 import { type Page, pageOf, type Room } from "./page.ts";
 import { emptyRows, paragraph } from "./words.ts";
 
+const cells = new WeakMap<LayoutResult, Map<string, Span>>();
+
+/** A cell that follows from its layout alone is worked out once: rows are drawn again at every key. */
+function cellOnce(layout: LayoutResult, title: string, text: (layout: LayoutResult) => string): Span {
+  const known = cells.get(layout) ?? new Map<string, Span>();
+  cells.set(layout, known);
+  const found = known.get(title) ?? span(text(layout));
+  known.set(title, found);
+  return found;
+}
+
 /** Every column the list can have; those there is room for are shown. */
 export function layoutColumns(state: State): readonly Column<LayoutResult>[] {
   const unbeaten = new Set(planOf(state)?.front ?? []);
@@ -32,7 +43,13 @@ export function layoutColumns(state: State): readonly Column<LayoutResult>[] {
     priority: number,
     text: (layout: LayoutResult) => string,
     side: "left" | "right" = "right",
-  ): Column<LayoutResult> => ({ title, width, priority, side, cell: (layout) => span(text(layout)) });
+  ): Column<LayoutResult> => ({
+    title,
+    width,
+    priority,
+    side,
+    cell: (layout) => (title === "" || title === "unbeaten" ? span(text(layout)) : cellOnce(layout, title, text)),
+  });
   return [
     column("", 1, 0, (l) => (isPinned(state, l) ? "*" : " "), "left"),
     column("part", 24, 0, (l) => l.part, "left"),
@@ -70,8 +87,40 @@ export function listColumns(state: State, layouts: readonly LayoutResult[]): rea
   return layoutColumns(state).map((column, index) => ({ ...column, width: widths[index]?.width ?? column.width }));
 }
 
+interface ListTable {
+  readonly columns: readonly Column<LayoutResult>[];
+  readonly rowOf: (layout: LayoutResult) => Row;
+}
+
+const tables = new WeakMap<readonly LayoutResult[], { readonly of: readonly unknown[]; readonly table: ListTable }>();
+
+/** The table of a list, kept while the list, the pins and the width are the same: scrolling then draws no row twice. */
+function tableFor(state: State, layouts: readonly LayoutResult[], width: number): ListTable {
+  const of = [state.pins, planOf(state)?.front, width];
+  const known = tables.get(layouts);
+  if (known?.of.every((one, index) => one === of[index])) return known.table;
+  const columns = widen(columnsFor(listColumns(state, layouts), width), "part", width, 40);
+  const rows = new Map<LayoutResult, Row>();
+  const rowOf = (layout: LayoutResult): Row => {
+    const row = rows.get(layout) ?? { left: [span("  "), ...tableRow(columns, layout).left] };
+    rows.set(layout, row);
+    return row;
+  };
+  const table: ListTable = { columns, rowOf };
+  tables.set(layouts, { of, table });
+  return table;
+}
+
+const sentences = new WeakMap<LayoutResult, readonly string[]>();
+
 /** The layout in a few sentences, the most wanted first. */
 export function layoutSentences(layout: LayoutResult): readonly string[] {
+  const found = sentences.get(layout) ?? newSentences(layout);
+  sentences.set(layout, found);
+  return found;
+}
+
+function newSentences(layout: LayoutResult): readonly string[] {
   const { share, balance, bleed } = layout;
   const holding = layout.series === 1 ? "" : `, ${shownWorst(share.holding, "voltage")} holding`;
   return [
@@ -91,7 +140,7 @@ export function layoutsPage(state: State, room: Room): Page {
   if (empty.length > 0) return pageOf(empty);
   const layouts = listed(state);
   const plan = planOf(state);
-  const columns = widen(columnsFor(listColumns(state, layouts), room.columns - 2), "part", room.columns - 2, 40);
+  const { columns, rowOf: rowFor } = tableFor(state, layouts, room.columns - 2);
   const count = grouped(plan?.searched.layouts ?? 0);
   const which = state.frontOnly
     ? `${layouts.length} unbeaten in every respect, of ${count}`
@@ -107,10 +156,9 @@ export function layoutsPage(state: State, room: Room): Page {
   // Derived from the cursor each time: a kept offset would hide the cursor when the terminal shrinks.
   const from = Math.max(0, Math.min(layouts.length - space, selected - Math.floor(space / 2)));
   const rows = layouts.slice(from, from + space).map((layout, index): Row => {
-    const row = tableRow(columns, layout);
-    const here = from + index === selected;
-    const left = here ? row.left.map((cell) => ({ ...cell, style: "focus" as const })) : row.left;
-    return { left: [span(here ? "> " : "  ", "key"), ...left] };
+    const row = rowFor(layout);
+    if (from + index !== selected) return row;
+    return { left: [span("> ", "key"), ...row.left.slice(1).map((cell) => ({ ...cell, style: "focus" as const }))] };
   });
   const proof = plan?.searched.proof === "exhaustive" ? "all were tried" : (plan?.searched.proof ?? "");
   return pageOf([

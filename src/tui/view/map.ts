@@ -58,7 +58,7 @@ function scatterRows(state: State, points: readonly Placed[], here: Placed, room
 
 const headWords = (state: State, shown: number, all: number): string => {
   const { x, y, table } = state.map;
-  const what = table ? "in series across, in parallel down" : `${AXES[y].words} up, ${AXES[x].words} across`;
+  const what = table ? "series across, parallel down" : `${AXES[y].words} up, ${AXES[x].words} across`;
   return `${grouped(shown)} of ${grouped(all)} unbeaten layouts: ${what}`;
 };
 

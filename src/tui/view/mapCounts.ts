@@ -51,6 +51,6 @@ export function countRows(points: readonly Placed[], here: Placed, { columns, ro
   return [
     rowOf(span("series ".padStart(LABEL), "quiet"), ...heads),
     ...table,
-    rowOf(span("A mark is how many layouts: 1 to 9, + for more; [ ] is the cursor.", "quiet")),
+    rowOf(span("Marks: 1 to 9 layouts, + for more; [ ] is the cursor.", "quiet")),
   ];
 }

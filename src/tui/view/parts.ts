@@ -88,7 +88,7 @@ function faultPage(state: State, words: SharedWords, room: Room): Page {
   const { sources = [] } = state.catalogue ?? {};
   const rows = sources.flatMap(({ file, read, kind, faults, notes }): readonly Row[] => [
     ...paragraph(
-      `${file}: ${kind}, ${grouped(read)} understood, ${faults.length === 0 ? "no faults" : `${faults.length} faults`}`,
+      `${file}: ${kind}, ${grouped(read)} understood, ${faults.length === 0 ? "no faults" : faults.length === 1 ? "1 fault" : `${faults.length} faults`}`,
       room.columns,
       "strong",
     ),
