@@ -1,4 +1,6 @@
 // The thread's side: the same blend as the search itself, the layout that the command compares with, stages in order, and a stop.
+import { readFileSync } from "node:fs";
+import { dirname, join } from "node:path";
 import { expect, test } from "vitest";
 import { DEFAULT_FAMILY } from "../../../src/catalog/index.ts";
 import { plan, planBlends } from "../../../src/search/index.ts";
@@ -49,4 +51,24 @@ test("nothing has a price: no blend, no layout to compare with, the parts left o
   expect(single).toBeNull();
   expect(read).toMatchObject({ ok: true, value: { blends: [], compared: 0 } });
   expect(read.ok && read.value.leftOut.map(({ reason }) => reason)).toContain("price-missing");
+});
+
+/** All files that one reaches by imports that are taken at once; types vanish before. */
+function reached(file: string, seen = new Set<string>()): ReadonlySet<string> {
+  if (seen.has(file)) return seen;
+  seen.add(file);
+  for (const [, from = ""] of readFileSync(file, "utf8").matchAll(
+    /^(?:import|export) (?!type\b)[^;]*?from "(\.[^"]+)"/gm,
+  ))
+    reached(join(dirname(file), from), seen);
+  return seen;
+}
+
+test("the first frame loads nothing of the search: neither it nor the thread's side is reached from the start but by need", () => {
+  const files = [...reached("src/tui/start.ts")];
+  expect(files).toContain("src/tui/view/blendFound.ts");
+  expect(
+    files.filter((file) => /search\/blends\.ts|tui\/blend\/work\.ts|tui\/thread\.ts|search\/solve\.ts/.test(file)),
+  ).toEqual([]);
+  expect(reached("src/search/blends.ts")).toContain("src/search/blend/findBlend.ts");
 });
