@@ -62,7 +62,9 @@ function planRows(
 ): readonly Row[] {
   const { words, look } = state;
   const [best] = plan.blends;
-  const beside = best === undefined ? null : (words?.besideWords(best, answer.single ?? undefined) ?? null);
+  const alone =
+    answer.single === null ? "No layout of one part fits, or none that does has a price to compare with." : null;
+  const beside = best === undefined ? null : (words?.besideWords(best, answer.single ?? undefined) ?? alone);
   const ended = stopped ? "by the time it was stopped" : "in the time allowed";
   const took = stopped
     ? `Stopped after ${secondsWords(seconds)}; Enter begins again.`

@@ -34,6 +34,12 @@ describe("foundPage(found, state, room)", () => {
     for (const caution of found.answer.cautions) expect(shown).toContain(caution);
   });
 
+  test("no layout of one part to compare with: said", () => {
+    expect(text({ ...found, answer: { ...found.answer, single: null } })).toContain(
+      "No layout of one part fits, or none that does has a price to compare with.",
+    );
+  });
+
   test("stopped with a gap: the best found, its bound, and that Enter begins again; never called the cheapest", () => {
     const shown = changed({ status: "stopped", lowerBound: 500, gap: 0.0443 }, { stopped: true });
     expect(shown).toMatch(
