@@ -31,6 +31,7 @@ export { type Layout, layoutId, plainTies, shapeOf, type Ties, unitCount } from 
 export { type Cause, type CauseShare, type MarginCase, type Margins, marginCauses } from "./margins.ts";
 export { CHUNK, type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";
 export { type Residual, residualAfterDump } from "./residual.ts";
+export { type ReversedHold, reversedByHold, reversedMix } from "./reversedHold.ts";
 export {
   chargingLeast,
   chargingWorst,

@@ -14,6 +14,8 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "holding-share": { title: "worst unit while holding" },
   "balance-power": { title: "power in a balancing element" },
   "balance-voltage": { title: "voltage on a balancing element" },
+  "balance-power-start": { title: "power in a balancing element, as the hold begins" },
+  "balance-voltage-start": { title: "voltage on a balancing element, as the hold begins" },
   "reverse-after-dump": { title: "reverse voltage left by a dump" },
   "pulse-energy": { title: "energy of one pulse", least: true },
   "steady-current": { title: "capacitance for the steady current", least: true },
