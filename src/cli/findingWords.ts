@@ -72,6 +72,7 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "history.leakage": { title: "leakage as last measured" },
   "history.charging-stress": { title: "worst unit, as last measured" },
   "commission.over-limit": { title: "a reading over its limit" },
+  "commission.whole": { title: "the readings as a whole" },
   "commission.sum": { title: "sum of the readings" },
 };
 
