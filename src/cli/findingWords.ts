@@ -66,6 +66,7 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "place.outlier-capacitance": { title: "capacitance out of the lot" },
   "place.outlier-leakage": { title: "leakage out of the lot" },
   "place.outlier-esr": { title: "ESR out of the lot" },
+  "place.outside-tolerance": { title: "units outside the part's tolerance" },
   "place.mixed-parts": { title: "groups of mixed parts" },
   "history.capacitance-lost": { title: "capacitance lost" },
   "history.esr-grown": { title: "ESR grown" },

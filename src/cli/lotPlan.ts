@@ -2,7 +2,8 @@
 
 import { LEAST_LOT } from "../bank/index.ts";
 import { visible } from "../order/index.ts";
-import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
+import { anotherPart, DEFAULTS, ofPartFindings } from "../place/index.ts";
+import { accepted, type Finding, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { type PlanResult, plan, type Ranking } from "../search/index.ts";
 import { lotPart } from "./lotPart.ts";
 import { readMeasuredInput } from "./measuredInput.ts";
@@ -15,6 +16,8 @@ export interface LotPlanned {
   readonly result: PlanResult;
   readonly part: string;
   readonly units: number;
+  /** The units against the tolerance of the part. */
+  readonly findings: readonly Finding[];
   /** Rows of the measured file that were lost. */
   readonly faults: readonly Refusal[];
 }
@@ -41,11 +44,14 @@ export function planLot(
     const want = `at least ${LEAST_LOT} measured units: fewer say nothing about how a lot is spread`;
     return refused(...faults, { code: "small-lot", place: { file }, read: `${units.length} units`, want });
   }
+  const other = anotherPart(units, part.value, DEFAULTS.uncertainty);
+  if (other !== null) return refused(...faults, other);
   const { brief } = settings;
   const lot = units.map((unit) => unit.capacitance);
   const planned = plan({ brief, parts: [part.value], families: stock.families, limit, rank, lot });
   if (!planned.ok) return planned;
-  return accepted({ result: planned.value, part: part.value.part, units: units.length, faults });
+  const findings = ofPartFindings(units, part.value, DEFAULTS.uncertainty);
+  return accepted({ result: planned.value, part: part.value.part, units: units.length, faults, findings });
 }
 
 /** What the lot stands for, and for what it does not. */

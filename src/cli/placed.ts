@@ -66,7 +66,7 @@ export function placedBank(brief: string | undefined, flags: PlaceFlags, ports: 
     input,
     placing: value,
     course,
-    findings: [...stress, ...value.findings],
+    findings: [...input.ofPart, ...stress, ...value.findings],
     positions: positionList(units, value),
     spares: replacements(units, request, sound),
     resistors: resistorsOf(input, value),

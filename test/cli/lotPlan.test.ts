@@ -20,7 +20,7 @@ describe("plan --basis statistical --measured FILE", () => {
     expect(lot.searched.parts).toBe(1);
     expect(least(lot)).toBeLessThanOrEqual(least(stated));
     expect(lot.layouts[0].risk.law).toMatch(/as the 200 measured units/);
-    expect(lot.measured).toEqual({ part: "drawer-pf-330-360", units: 200 });
+    expect(lot.measured).toEqual({ part: "drawer-pf-330-360", units: 200, findings: [] });
     for (const { risk } of lot.layouts) expect(risk.exceed).toBeLessThanOrEqual(1e-4);
   }, 30_000);
 
