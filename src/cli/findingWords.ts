@@ -117,7 +117,8 @@ export function findingFigures({ id, value, limit, margin, unit }: Finding): {
   const show = (x: number | null, rounding: "up" | "down"): string =>
     tiny(x) ? roundTo(x, 3, rounding).toExponential() : formatQuantity(x, dimension, { rounding });
   return {
-    value: show(value, least ? "down" : "up"),
+    // A chance of nought is what was reckoned from, not that it cannot be.
+    value: id === "charging-risk" && value === 0 ? "none found" : show(value, least ? "down" : "up"),
     limit: limit === null ? "unknown" : `${least ? ">=" : "<="} ${show(limit, least ? "up" : "down")}`,
     margin: marginText(margin),
   };

@@ -54,7 +54,10 @@ export function planLot(
   return accepted({ result: planned.value, part: part.value.part, units: units.length, faults, findings });
 }
 
+/** Where none of n is seen, up to 3/n may be so, at 95 %. Source: [HanleyLippmanHand1983]. */
+const RULE_OF_THREE = 3;
+
 /** What the lot stands for, and for what it does not. */
 export const lotSentence = ({ part, units }: LotPlanned): string =>
   `Only ${visible(part)} was planned with: each unit is drawn from the ${units} measured ones, every value equally likely; ` +
-  "what no unit of the lot shows is not in the risk.";
+  `what no unit of the lot shows is not in the risk, and up to one in ${Math.max(1, Math.floor(units / RULE_OF_THREE))} of all such units may lie outside the lot (95 %).`;

@@ -74,8 +74,13 @@ export function savedText({ result, least, worstCase, placed, units, part }: Mea
   const share = placed.find(({ id }) => id === best.id);
   const volts = share && formatQuantity(share.charging, "voltage", { rounding: "up" });
   const energy = share && formatQuantity(share.energy, "energy", { rounding: "down" });
+  const asked = result.brief.energy;
+  const below =
+    share !== undefined && share.energy < asked
+      ? `, less than the ${formatQuantity(asked, "energy")} asked: the mean of the lot gives it, these units do not`
+      : "";
   const now = share
-    ? `Placed, ${visible(best.id)} has its worst unit at ${volts} while charging, the meter's doubt counted, and gives ${energy} a pulse. `
+    ? `Placed, ${visible(best.id)} has its worst unit at ${volts} while charging, the meter's doubt counted, and gives ${energy} a pulse${below}. `
     : "";
   const fewest = `Fewest in series that the measured units support: ${least.series}, with ${least.units} units; `;
   if (worstCase === null) return `${now}${fewest}by the worst case of the datasheet no shape does it.`;

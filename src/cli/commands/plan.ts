@@ -147,7 +147,17 @@ export function planWords({ settings, stock, rank, result, lot, drawn }: Planned
     ...(lot === null ? [] : [savedText(lot)]),
     ...(drawn === null ? [] : [lotSentence(drawn)]),
   ];
-  return planText({ result, parts: stock.parts, given, rank, width, inputs });
+  const placedEnergy = new Map(lot?.placed.map(({ id, energy }) => [id, energy]) ?? []);
+  return planText({
+    result,
+    parts: stock.parts,
+    given,
+    rank,
+    width,
+    inputs,
+    lot: drawn?.units ?? null,
+    placedEnergy,
+  });
 }
 
 function readLimit(text = "20"): number | Refusal {
