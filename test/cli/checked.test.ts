@@ -30,6 +30,18 @@ describe("checkedBank(brief, flags, ports)", () => {
     expect(read.ok ? null : read.refusals[0]).toMatchObject({ code: "unknown-part", place: { field: "--part" } });
   });
 
+  test("a resistance that takes an absurd count of elements is refused with the least that does not", () => {
+    const read = run({ ...FLAGS, balance: "1e-9 ohm" });
+    expect(read.ok ? null : read.refusals).toMatchObject([
+      { code: "bad-balance", place: { field: "--balance" }, read: expect.stringMatching(/100000 elements/) },
+    ]);
+    // 250 V on each of 8: 62.5 kW/ohm at 5 % low, in elements of 1 W used; 100 000 of them stand 0.658 ohm or more.
+    const least = /^(\S+ \S+) or more/.exec(read.ok ? "" : (read.refusals[0]?.want ?? ""))?.[1] ?? "";
+    expect(least).toBe("658 mohm");
+    expect(run({ ...FLAGS, balance: least }).ok).toBe(true);
+    expect(run({ ...FLAGS, balance: "650 mohm" }).ok).toBe(false);
+  });
+
   test("the rule chooses the resistor when nothing else is said", () => {
     expect(good(FLAGS).result.balance?.family).toBe("assumed 2 W leaded");
     expect(good(FLAGS).notes).toEqual([]);
