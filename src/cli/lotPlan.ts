@@ -54,7 +54,7 @@ export function planLot(
   return accepted({ result: planned.value, part: part.value.part, units: units.length, faults, findings });
 }
 
-/** Where none of n is seen, up to 3/n may be so, at 95 %. Source: [HanleyLippmanHand1983]. */
+/** (1 - p)^n = 5 % at p near 3/n: so many may be what none of n was. Source: [methods-derived]. */
 const RULE_OF_THREE = 3;
 
 /** What the lot stands for, and for what it does not. */
