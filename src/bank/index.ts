@@ -1,5 +1,5 @@
 // An arrangement at rest: its name, energy, shares and balancing resistors.
-export { type Choice, chooseBalance, elementPower, leastHolding, surelyChooses } from "./balance.ts";
+export { type Choice, chooseBalance, elementPower, leastHolding, MOST_ELEMENTS, surelyChooses } from "./balance.ts";
 export {
   type Chain,
   type ChainUnit,

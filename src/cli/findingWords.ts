@@ -68,12 +68,14 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "place.outlier-capacitance": { title: "capacitance out of the lot" },
   "place.outlier-leakage": { title: "leakage out of the lot" },
   "place.outlier-esr": { title: "ESR out of the lot" },
+  "place.outside-tolerance": { title: "units outside the part's tolerance" },
   "place.mixed-parts": { title: "groups of mixed parts" },
   "history.capacitance-lost": { title: "capacitance lost" },
   "history.esr-grown": { title: "ESR grown" },
   "history.leakage": { title: "leakage as last measured" },
   "history.charging-stress": { title: "worst unit, as last measured" },
   "commission.over-limit": { title: "a reading over its limit" },
+  "commission.whole": { title: "the readings as a whole" },
   "commission.sum": { title: "sum of the readings" },
 };
 
@@ -117,7 +119,8 @@ export function findingFigures({ id, value, limit, margin, unit }: Finding): {
   const show = (x: number | null, rounding: "up" | "down"): string =>
     tiny(x) ? roundTo(x, 3, rounding).toExponential() : formatQuantity(x, dimension, { rounding });
   return {
-    value: show(value, least ? "down" : "up"),
+    // A chance of nought is what was reckoned from, not that it cannot be.
+    value: id === "charging-risk" && value === 0 ? "none found" : show(value, least ? "down" : "up"),
     limit: limit === null ? "unknown" : `${least ? ">=" : "<="} ${show(limit, least ? "up" : "down")}`,
     margin: marginText(margin),
   };

@@ -116,7 +116,7 @@ function checkText(checked: Checked, width: number, witness: Witness | null): st
         : "No check failed.";
   const cautions = cautionsOf(settings.brief, { layout: result, unit });
   const blocks = [
-    `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width)}`,
+    `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width, checked.lot?.length ?? null)}`,
     `Found\n${layoutText(result, unit, width)}`,
     [
       ...cornerLines(corners, width),
