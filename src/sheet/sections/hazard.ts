@@ -5,6 +5,7 @@
 import { dumpDuty, dumpWindow, ruleOf } from "../../hazard/index.ts";
 import { cell, said, up } from "../cells.ts";
 import { type Facts, factsOf } from "../facts.ts";
+import { governedLines } from "../governed.ts";
 import type { SheetInput } from "../input.ts";
 import { type Block, list, type Section, text } from "../model.ts";
 import { rangeWords, recoveryOf } from "../recovery.ts";
@@ -24,7 +25,7 @@ function dumpBlock({ capacitance, voltage, clear, allowed, dump, stored }: Facts
       `Dump resistor of ${cell(dump, "resistance")}: ${up(duty.energy, "energy")} in one go, ${up(duty.peakCurrent, "current")} and ${up(duty.peakVoltage, "voltage")} at its first moment, ${up(duty.peakPower, "power")} for that moment, time constant ${up(duty.timeConstant, "time")}. ${needs}`,
     );
   }
-  if (allowed === null || !Number.isFinite(clear))
+  if (allowed === null)
     return text(`Dump resistor: its resistance is blank, and the governing rule gives no time to size it by. ${needs}`);
   const window = dumpWindow({
     capacitance,
@@ -52,6 +53,7 @@ export function hazardSection(input: SheetInput): Section {
     ownPage: true,
     blocks: [
       text(governs),
+      ...governedLines(input).map((line) => text(line)),
       classTable(facts),
       text(
         back === null

@@ -61,7 +61,10 @@ function figures(input: SheetInput): Table {
           ? "none"
           : `${cell(balance.resistance, "resistance")} across each ${tied ? "stage" : "unit"}, ${balance.positions} positions`,
       ],
-      ["bleed to touch-safe by the chains", balance === null ? "no chain empties it" : wait(layout.bleed.seconds)],
+      [
+        `bleed to ${said(cell(layout.bleed.toVoltage, "voltage"))} by the chains`,
+        balance === null ? "no chain empties it" : wait(layout.bleed.seconds),
+      ],
       ["volume and mass of the units", `${said(cell(layout.volume, "volume"))}, ${said(cell(layout.mass, "mass"))}`],
       ["purchase cost of units and resistors", cost(layout)],
     ],
