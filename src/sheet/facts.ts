@@ -14,6 +14,7 @@
 import { clearingOf, ruleOf, TOUCH_SAFE } from "../hazard/index.ts";
 import { cell } from "./cells.ts";
 import type { SheetInput } from "./input.ts";
+import { measuredOf } from "./measured.ts";
 import { toldRule } from "./rules.ts";
 
 export interface Facts {
@@ -37,9 +38,14 @@ export interface Facts {
   readonly ranOn: number | null;
 }
 
-export function factsOf({ layout, brief, rule }: Pick<SheetInput, "layout" | "brief" | "rule">): Facts {
+type Bank = Pick<SheetInput, "layout" | "brief" | "rule"> & Partial<Pick<SheetInput, "placed">>;
+
+export function factsOf({ layout, brief, rule, placed = null }: Bank): Facts {
   const voltage = brief.voltage * (1 + brief.overshoot);
-  const capacitance = layout.capacitance.high;
+  // The tolerance's high end stays where the units were measured: a wait is never shortened by a meter.
+  const measured = measuredOf({ layout, placed });
+  const read = measured === null ? null : measured.bank * (1 + measured.doubt);
+  const capacitance = read === null ? layout.capacitance.high : Math.max(layout.capacitance.high ?? 0, read);
   const { balance, series } = layout;
   const reached = brief.charger?.highest ?? brief.charger?.supply ?? null;
   const highest = reached === null ? null : Math.max(reached, voltage);
