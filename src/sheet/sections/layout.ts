@@ -137,14 +137,17 @@ function why({ layout, alternatives, alternativesOpen }: SheetInput): readonly B
 }
 
 /** A bank that fails is not to be built: it is said before anything else. */
-function verdict({ words }: SheetInput): string {
+function verdict({ words, faults }: SheetInput): string {
   const fails = words.findings.filter((f) => f.verdict === "fail").map((f) => f.title);
   const open = words.findings.filter((f) => f.verdict === "not assessed").map((f) => f.title);
   const failed =
     fails.length > 0 ? `DO NOT BUILD: ${fails.length} checks fail (${fails.join("; ")}). ` : "No check failed. ";
   const blank =
     open.length > 0 ? `Not assessed, which is not a pass: ${open.join("; ")}.` : "Every check was assessed.";
-  return `${failed}${blank}`;
+  const bad = faults.filter((f) => f.verdict === "fail").map((f) => f.id.replaceAll("-", " "));
+  const faulted =
+    bad.length > 0 ? ` OF THE FAULTS ${bad.length} FAIL (${bad.join("; ")}): see Faults for what stops each.` : "";
+  return `${failed}${blank}${faulted}`;
 }
 
 export function layoutSection(input: SheetInput): Section {
