@@ -50,7 +50,7 @@ export function doorSection(input: SheetInput): Section {
       list([
         ...governedLines(input),
         "Cut the supply, take the key, wait. A short wait by the dump is no leave to touch: it may not have closed.",
-        `After any dump: ${afterDumpWords(input, facts)}.`,
+        `Dump, ${afterDumpWords(input, facts)}.`,
         "Measure across the ends and across every stage with a meter rated for the full voltage.",
         "Discharge through the stick with its resistor, at every point above; measure again; then the solid short, and leave the straps on.",
         facts.stored === null

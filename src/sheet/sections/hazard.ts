@@ -10,7 +10,7 @@ import type { SheetInput } from "../input.ts";
 import { type Block, list, type Section, text } from "../model.ts";
 import { rangeWords, recoveryOf } from "../recovery.ts";
 import { READ, ruleName } from "../rules.ts";
-import { pathCount } from "../ways.ts";
+import { clearWords, pathCount } from "../ways.ts";
 import { clearanceBlocks } from "./clearances.ts";
 import { classTable } from "./hazardClasses.ts";
 import { ruleTable } from "./hazardRules.ts";
@@ -45,7 +45,7 @@ export function hazardSection(input: SheetInput): Section {
   const paths = pathCount(facts);
   const governs =
     input.rule === null
-      ? `No rule was chosen: ${facts.rule}, ${cell(input.brief.touchSafe, "voltage")}, governs the times on this sheet. The person responsible chooses the rule that applies.`
+      ? `No rule was chosen: the times on this sheet go down to ${clearWords(facts)}. The person responsible chooses the rule that applies.`
       : `${ruleName(input.rule)} governs the times on this sheet, by the user's choice (${READ[ruleOf(input.rule).tag]}). Whether it is the right rule for this place is for the person responsible to say.`;
   return {
     id: "hazard",

@@ -74,7 +74,7 @@ describe("bleedDownSection(input)", () => {
   });
 
   test("after a shot the units may keep their own; a second open bleeder of one chain is never; the dump is nominal", () => {
-    const found = rows({ brief: LOAD });
+    const found = rows({ brief: { ...LOAD, hold: "30 s" } });
     expect(found.get("after a shot, or fired early")?.at(-1)).toMatch(/units may keep 103 V/);
     const section = bleedDownSection(sheetInput({ shape: { ties: "strings", parallel: 2 } }));
     const open = tableOf({ sections: [section] }, "bleed-down").rows.find(([name]) =>

@@ -23,7 +23,7 @@ describe("doorSection(input)", () => {
     (wishes) => {
       const found = rows({
         ...wishes,
-        brief: { dumpResistance: "1 kohm", ...("brief" in wishes ? wishes.brief : {}) },
+        brief: { dumpResistance: "1 kohm", hold: "30 s", ...("brief" in wishes ? wishes.brief : {}) },
       });
       const waits = [...found].filter(([name]) => name?.startsWith("wait for") || name?.startsWith("by the dump"));
       expect(waits).toHaveLength(2);
