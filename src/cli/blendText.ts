@@ -3,6 +3,7 @@
 import { visible } from "../order/index.ts";
 import { formatQuantity } from "../quantity/index.ts";
 import type { BlendPlan, BlendResult, BlendString, LayoutResult, WorstShare } from "../search/index.ts";
+import { besideWords } from "./blendBeside.ts";
 import { frontText, ladderText } from "./blendFrontText.ts";
 import { loosenWords, proofSentence } from "./blendWords.ts";
 import { titleOf, VERDICTS } from "./findingWords.ts";
@@ -129,18 +130,8 @@ function worstWords(worst: WorstShare | null): string {
 }
 
 function besideSingle(best: BlendResult, single: LayoutResult | undefined, width: number): readonly string[] {
-  if (!single?.cost || !best.cost || single.cost.currency !== best.cost.currency) return [];
-  const apart = single.cost.total - best.cost.total;
-  const { currency } = best.cost;
-  const unlike =
-    single.cost.unpriced.length !== best.cost.unpriced.length ? " Not all of their lines have a price." : "";
-  const words =
-    apart > 0
-      ? `The cheapest layout of one part, ${visible(single.id)}, costs ${money(apart, currency)} more.`
-      : apart === 0
-        ? `The cheapest layout of one part, ${visible(single.id)}, costs the same.`
-        : `A layout of one part, ${visible(single.id)}, costs ${money(-apart, currency)} less: it has more in series than is needed, or something of it is not assessed, which a blend leaves out.`;
-  return [wrap(words + unlike, width)];
+  const words = besideWords(best, single);
+  return words === null ? [] : [wrap(words, width)];
 }
 
 function nothing({ loosen, currency, status }: BlendPlan, width: number): readonly string[] {

@@ -7,8 +7,8 @@ import { movesText, stockText, worthText } from "./blendMoveWords.ts";
 import { money } from "./layoutText.ts";
 import { wrap } from "./wrap.ts";
 
-/** How sure it is. */
-export function proofSentence(plan: BlendPlan): string {
+/** How sure it is. `ended`: what kept it from being settled, where it is not. */
+export function proofSentence(plan: BlendPlan, ended = "in the time allowed (--solver-time)"): string {
   const { status, compared, provenBy, lowerBound, gap, currency, blends } = plan;
   const among = `${compared} ${compared === 1 ? "kind" : "kinds"} of string compared.`;
   if (status === "optimal" && plan.limited !== null)
@@ -28,9 +28,9 @@ export function proofSentence(plan: BlendPlan): string {
     return `${among} ${plan.loosen.some(({ field }) => field === "maxCost") ? "The cheapest costs more than the limit" : "It is proven that none meets the need within the limits"} (${provenBy ?? "own search"}).`;
   if (plan.certificate?.verdict === "invalid")
     return `${among} NOT PROVEN: the separate verifier rejects the proof (${plan.certificate.why}). Please report this with the catalogue and the brief.`;
-  if (blends.length === 0 || gap === null) return `${among} Not settled in the time allowed (--solver-time).`;
+  if (blends.length === 0 || gap === null) return `${among} Not settled ${ended}.`;
   const least = lowerBound === null ? "" : ` No blend costs less than ${money(lowerBound, currency ?? undefined)}:`;
-  return `${among} NOT PROVEN: the best found in the time allowed (--solver-time).${least} it is at most ${formatQuantity(gap, "fraction", { digits: 3, rounding: "up" })} too dear.`;
+  return `${among} NOT PROVEN: the best found ${ended}.${least} it is at most ${formatQuantity(gap, "fraction", { digits: 3, rounding: "up" })} too dear.`;
 }
 
 /** How many were turned down, and what the cheapest of all broke. */

@@ -104,6 +104,8 @@ export const SCREEN_OPTIONS: readonly OptionFacts[] = [
   screen("--resistors", "<file>", "resistor catalogue of the screens, CSV"),
   screen("--brief", "<file>", "brief that the screens open with, JSON"),
   screen("--ascii", null, "draw the screens in plain ASCII"),
+  screen("--dark", null, "colours for a dark ground, when the terminal does not tell its own"),
+  screen("--light", null, "colours for a light ground"),
 ];
 
 /** Everything that can be typed. */

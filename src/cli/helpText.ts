@@ -27,7 +27,7 @@ function governing(): string {
 export const HELP = {
   program: `
 Without a command the screens open, on the invented demo catalogues or on your own:
-  joulewright [--catalog FILE...] [--resistors FILE] [--brief FILE] [--ascii]
+  joulewright [--catalog FILE...] [--resistors FILE] [--brief FILE] [--ascii] [--dark|--light]
 Where there is no terminal, joulewright alone prints the plan of the demo brief.
 
 Examples:

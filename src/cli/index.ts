@@ -1,4 +1,6 @@
 // The command line: what the screens and the entry share with it.
+export { besideWords } from "./blendBeside.ts";
+export { loosenWords, proofSentence } from "./blendWords.ts";
 export { type CautionLine, cautionsOf } from "./cautions.ts";
 export { type Files, filesOn } from "./files.ts";
 export { titleOf } from "./findingWords.ts";
@@ -6,6 +8,7 @@ export { readMeasuredInput } from "./measuredInput.ts";
 export { saveOverrides } from "./overrides.ts";
 export { placeCsv } from "./placeCsv.ts";
 export { type Ports, textWidth } from "./ports.ts";
+export { reasonWords } from "./reasonWords.ts";
 export { clampWords, withoutBalanceWords } from "./restText.ts";
 export { withRecord } from "./settings.ts";
 export { rateBlocks } from "./shotRateText.ts";

@@ -26,6 +26,9 @@ import { hasLimits } from "./limits.ts";
 import { distinct } from "./plan.ts";
 import { type ShipmentWish, shipmentTerms } from "./shipmentTerms.ts";
 
+/** What is being worked out: the cheapest blend, those of another kind, the cost ladder. */
+export type BlendStage = "cheapest" | "kinds" | "ladder";
+
 export interface BlendInput {
   readonly brief: Brief;
   readonly parts: readonly Capacitor[];
@@ -52,6 +55,8 @@ export interface BlendInput {
   /** Where the second engine runs so that it can be ended; without it, in this thread, on smaller cores. */
   readonly apart?: SolveApart;
   readonly stop?: () => boolean;
+  /** Called as each stage begins. */
+  readonly told?: (stage: BlendStage) => void;
   /** Settles the model; another may be put in its place, as a test does. */
   readonly settle?: typeof settleBlend;
 }
@@ -64,7 +69,7 @@ const SIDE_WORK = 1e6;
 
 /** Refuses only what cannot be understood (two currencies); that nothing fits is an answer, with what to loosen. */
 export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
-  const { brief, maxTypes = MOST_TYPES, explain = false, stop } = input;
+  const { brief, maxTypes = MOST_TYPES, explain = false, stop, told } = input;
   const given = input.families ?? [DEFAULT_FAMILY];
   const money = planCurrency(brief, input.parts, given);
   if (!money.ok) return money;
@@ -77,6 +82,7 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
   const demand = { parts, terms, required: requiredCapacitance(brief), maxTypes };
   const work = blendWork(demand);
   const side = { work: SIDE_WORK, ...(stop === undefined ? {} : { stop }) };
+  told?.("cheapest");
   const settled = await settleWork(work, { ...input, currency, side, seconds: input.seconds ?? SECONDS });
 
   const made = (one: FoundBlend): Omit<BlendResult, "certificate"> =>
@@ -98,6 +104,7 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
   const ruledOut = none && (proven || (dear && lower !== null && lower > most));
   const certain = limited === null ? blends[0]?.certificate !== null : proven;
   const status = ruledOut ? "infeasible" : !none && certain ? "optimal" : "stopped";
+  if (input.within !== undefined && !none) told?.("kinds");
   const others =
     input.within === undefined || none
       ? null
@@ -126,6 +133,8 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
       assessBlend({ groups: groupsOf(of, one.counts), terms: its.terms, currency }),
   };
   const asked = { ...work, cheapest, currency: currency ?? "", limits: side };
+  if (input.ladder !== undefined) told?.("ladder");
+  const ladder = currency === null || input.ladder === undefined ? null : blendLadder(input.ladder, sweeps);
   // What a price or a limit is worth is reckoned without the limits on the shot, so not where those decide.
   const detailed = explain && currency !== null && !none && limited === null;
   return accepted({
@@ -159,7 +168,7 @@ export async function planBlends(input: BlendInput): Promise<Read<BlendPlan>> {
     priceMoves: detailed ? priceMoves(asked, nearOptions(proof, cheapest!), (blend) => made(blend).id) : [],
     stockMoves: detailed ? stockMoves({ work, demand, cheapest: cheapest!, currency, limits: side, nameOf }) : [],
     fronts: currency === null ? [] : blendFronts(input.fronts ?? [], sweeps),
-    ladder: currency === null || input.ladder === undefined ? null : blendLadder(input.ladder, sweeps),
+    ladder,
     worth: detailed ? worthOf(work.model, proof, cheapest!, minor) : null,
     notes: notesOf(input, work),
   });

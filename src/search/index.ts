@@ -23,7 +23,7 @@ export type {
   WorstShare,
 } from "./blendResult.ts";
 export { FRONT_NAMES } from "./blendResult.ts";
-export type { BlendInput } from "./blends.ts";
+export type { BlendInput, BlendStage } from "./blends.ts";
 export { planBlends, solveWholeHere } from "./blendsLoader.ts";
 export { BASES, BRIEF_KEYS, type Brief, type BriefInput, briefJsonSchema, readBrief } from "./brief.ts";
 export { BUS_LENGTHS } from "./briefFaults.ts";

@@ -5,7 +5,7 @@ import type { State } from "./state.ts";
 
 /** Texts of objects that never change once made, so that a long record in a brief is written out once. */
 const texts = new WeakMap<object, string>();
-function textOf(value: object): string {
+export function textOf(value: object): string {
   const known = texts.get(value) ?? JSON.stringify(value);
   texts.set(value, known);
   return known;

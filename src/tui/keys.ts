@@ -1,4 +1,5 @@
 // The one table of keys: what each does, its words, and when it is live. The dispatcher and the help both read it.
+import type { BlendMessage } from "./blend/state.ts";
 import { groundTold } from "./ground.ts";
 import * as live from "./live.ts";
 import { mouseTold } from "./mouse.ts";
@@ -29,7 +30,12 @@ const saves = live.all(live.on("bank", "order"), live.hasBank);
 const tracks = live.all(live.on("trail"), live.hasTrail);
 const sets = live.all(live.on("parts"), live.hasParts);
 const moves: live.Live = (state) =>
-  picks(state) || compares(state) || shows(state) || tracks(state) || live.on("parts")(state) || live.onUnits(state);
+  picks(state) ||
+  compares(state) ||
+  shows(state) ||
+  tracks(state) ||
+  live.on("parts", "blend")(state) ||
+  live.onUnits(state);
 
 /** What lies on top comes first: the first live row wins. */
 const ON_TOP: readonly Short[] = [
@@ -56,6 +62,13 @@ const UNITS: readonly Short[] = [
   [["m"], "m", "file of units", units({ type: "name" }), live.onUnits, 1],
   [["enter"], "Enter", "place", units({ type: "place" }), live.hasUnits, 2],
   [["e", "s"], "e", "save list", units({ type: "list" }), live.hasPlaced, 3],
+];
+
+const blend = (message: BlendMessage): Message => ({ type: "blend", message });
+
+const BLEND: readonly Short[] = [
+  [["escape"], "Esc", "stop, keep the best", blend({ type: "cancel" }), live.seeksBlend, 1],
+  [["enter"], "Enter", "find the blend", blend({ type: "find" }), live.mayFindBlend, 1],
 ];
 
 const FORM: readonly Short[] = [
@@ -122,14 +135,23 @@ const LISTS: readonly Short[] = [
     "Esc",
     "layouts",
     { type: "go", screen: "layouts" },
-    live.on("compare", "bank", "sharing", "shot", "order", "trail", "map", "parts", "units"),
+    live.on("compare", "bank", "sharing", "shot", "order", "trail", "map", "parts", "units", "blend"),
     7,
   ],
   [["escape"], "Esc", "brief", { type: "go", screen: "brief" }, live.on("layouts"), 7],
 ];
 
+/** This function key turns the mouse on and off; screens beyond the one before have none. */
+const MOUSE_KEY = 12;
+
 const go = (screen: ScreenName, index: number): readonly Short[] => [
-  [[`alt+${SCREEN_KEYS[screen]}`, `f${index + 2}`], "", screen, { type: "go", screen }, live.noQuestion],
+  [
+    [`alt+${SCREEN_KEYS[screen]}`, ...(index + 2 < MOUSE_KEY ? [`f${index + 2}`] : [])],
+    "",
+    screen,
+    { type: "go", screen },
+    live.noQuestion,
+  ],
   [[SCREEN_KEYS[screen]], "", screen, { type: "go", screen }, live.isFree],
 ];
 
@@ -172,7 +194,7 @@ const EVERYWHERE: readonly Short[] = [
   [["ctrl+q", "ctrl+c"], "Ctrl-Q", "save and quit", { type: "quit" }, live.always, 9],
   [["q"], "", "quit", { type: "quit" }, live.isFree],
   [["ctrl+r"], "Ctrl-R", "plan again", { type: "again" }, live.isOpen, null],
-  [["f12"], "F12", "mouse on or off", { type: "mouse" }, live.isOpen, null],
+  [[`f${MOUSE_KEY}`], `F${MOUSE_KEY}`, "mouse on or off", { type: "mouse" }, live.isOpen, null],
   [["ctrl+z"], "Ctrl-Z", "suspend", { type: "suspend" }, live.always, null],
   [["ctrl+l"], "Ctrl-L", "draw again", { type: "redraw" }, live.always, null],
 ];
@@ -180,6 +202,7 @@ const EVERYWHERE: readonly Short[] = [
 export const KEYS: readonly KeyRow[] = [
   ...ON_TOP,
   ...UNITS,
+  ...BLEND,
   ...FORM,
   ...TYPING,
   ...LISTS,

@@ -1,4 +1,5 @@
 // When a key is live: questions about the state, for the table of keys.
+import { keyInForce } from "./blend/key.ts";
 import { fieldAt } from "./fields.ts";
 import { planOf, shownBank } from "./pick.ts";
 import type { ScreenName, State } from "./state.ts";
@@ -36,6 +37,14 @@ export const placesUnits: Live = (state) => onUnits(state) && state.units.runnin
 export const hasUnits: Live = (state) =>
   onUnits(state) && state.units.lot !== null && state.units.running === null && hasBank(state);
 export const hasPlaced: Live = (state) => onUnits(state) && state.units.placed !== null;
+export const seeksBlend: Live = (state) => on("blend")(state) && state.blend.running !== null;
+/** There is a brief in force whose blend is neither found nor being sought. */
+export const mayFindBlend: Live = (state) => {
+  const key = keyInForce(state);
+  const { running, found } = state.blend;
+  const has = running?.key === key || (found?.key === key && !found.stopped);
+  return on("blend")(state) && state.words !== null && key !== null && !has;
+};
 /** Keys type: a field of the form, or the name of a file. */
 export const types: Live = (state) => asksName(state) || typesUnits(state) || (onBrief(state) && !hasChoices(state));
 /** Letters are keys, because nothing is typed here. */

@@ -1,7 +1,18 @@
 // What the screens need from outside: the engine, the files, the clock and the terminal, handed in by main.
 import type { Layout } from "../bank/index.ts";
 import type { Capacitor, Overrides, ResistorFamily } from "../catalog/index.ts";
-import type { clampWords, rateBlocks, refusalWords, Source, titleOf, withoutBalanceWords } from "../cli/index.ts";
+import type {
+  besideWords,
+  clampWords,
+  loosenWords,
+  proofSentence,
+  rateBlocks,
+  reasonWords,
+  refusalWords,
+  Source,
+  titleOf,
+  withoutBalanceWords,
+} from "../cli/index.ts";
 import type { Bill } from "../order/index.ts";
 import type { Read } from "../quantity/index.ts";
 import type {
@@ -123,6 +134,10 @@ export interface SharedWords {
   readonly clampWords: typeof clampWords;
   readonly withoutBalanceWords: typeof withoutBalanceWords;
   readonly rateBlocks: typeof rateBlocks;
+  readonly besideWords: typeof besideWords;
+  readonly loosenWords: typeof loosenWords;
+  readonly proofSentence: typeof proofSentence;
+  readonly reasonWords: typeof reasonWords;
   readonly refusalWords: typeof refusalWords;
   /** Headings whose values can be set by hand. */
   readonly headings: readonly string[];

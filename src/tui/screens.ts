@@ -2,6 +2,7 @@
 import type { Capacitor, Overrides, ResistorFamily } from "../catalog/index.ts";
 import { makeAsker } from "./asker.ts";
 import { makeAutosave } from "./autosave.ts";
+import { makeBlendRunner } from "./blend/runner.ts";
 import { makeDetailer } from "./detailer.ts";
 import { ASK_GROUND } from "./ground.ts";
 import { openInput } from "./input.ts";
@@ -117,6 +118,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
       else if (effect.type === "redraw") paint.redraw();
       else if (effect.type === "mouse") writeSync(effect.on ? MOUSE_ON : MOUSE_OFF);
       else if (effect.type === "overrides") setByHand(effect.overrides);
+      else if (effect.type === "blend") blend.run(effect.effect);
       else if (effect.type === "units") {
         if (workshop !== null) units.run(effect.effect, workshop.units);
       } else if (workshop !== null)
@@ -133,13 +135,10 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
     });
     const now = (): number => performance.now();
     const units = makeUnitsRunner({ state: store.state, send: store.send, now });
-    const longWork = makeLongWork({
-      open: ports.thread ?? null,
-      // One object as long as the workshop is the same, so that a thread on other parts is known by it.
-      stock: () => threadStock,
-      send: store.send,
-      now,
-    });
+    // One object as long as the workshop is the same, so that a thread on other parts is known by it.
+    const threads = { open: ports.thread ?? null, stock: () => threadStock, send: store.send, now };
+    const longWork = makeLongWork(threads);
+    const blend = makeBlendRunner(threads);
     const asker = makeAsker({ engine, state: store.state, send: store.send, now, longWork });
     const detailer = makeDetailer({ engine, state: store.state, send: store.send, longWork });
     const autosave = makeAutosave({
@@ -178,6 +177,7 @@ export function openScreens(ports: ScreenPorts): Promise<number> {
         asker.stop();
         detailer.stop();
         units.stop();
+        blend.stop();
         unwatch();
         paint.close();
         stdout.off("resize", onResize);

@@ -5,6 +5,7 @@ import type { Bill } from "../order/index.ts";
 import type { Refusal } from "../quantity/index.ts";
 import type { Brief, LayoutResult, PlanResult } from "../search/index.ts";
 import { FIRST_MAP, type FrontPoint, type MapView } from "./axes.ts";
+import { type BlendEffect, type BlendMessage, type BlendState, NO_BLEND } from "./blend/state.ts";
 import type { Ground } from "./ground.ts";
 import type { Line, LineEdit } from "./line.ts";
 import type { CatalogueFacts, Details, SaveAnswer, SharedWords, StockFacts } from "./ports.ts";
@@ -24,6 +25,7 @@ export const SCREEN_KEYS = {
   map: "8",
   parts: "9",
   units: "0",
+  blend: "b",
   trail: "t",
 } as const;
 export type ScreenName = keyof typeof SCREEN_KEYS;
@@ -131,6 +133,7 @@ export interface State extends Work {
   readonly scroll: Readonly<Record<string, number>>;
   readonly prompt: Prompt | null;
   readonly units: UnitsState;
+  readonly blend: BlendState;
   readonly notice: Notice | null;
   /** The catalogue is too large to look for least changes while one types. */
   readonly slow: boolean;
@@ -184,12 +187,14 @@ export type Message =
   | { readonly type: "faults" }
   | { readonly type: "saved"; readonly answer: SaveAnswer }
   | { readonly type: "units"; readonly message: UnitsMessage }
+  | { readonly type: "blend"; readonly message: BlendMessage }
   | { readonly type: "say"; readonly notice: Notice };
 
 export type Effect =
   | { readonly type: "ask"; readonly asked: number }
   | { readonly type: "export"; readonly bill: Bill; readonly path: string; readonly replace: boolean }
   | { readonly type: "units"; readonly effect: UnitsEffect }
+  | { readonly type: "blend"; readonly effect: BlendEffect }
   | { readonly type: "overrides"; readonly overrides: Overrides }
   | { readonly type: "stop" }
   | { readonly type: "mouse"; readonly on: boolean }
@@ -255,6 +260,7 @@ export const initialState = (start: Start): State => ({
   scroll: {},
   prompt: null,
   units: NO_UNITS,
+  blend: NO_BLEND,
   notice: null,
   slow: false,
 });

@@ -1,7 +1,9 @@
 // What the screens and their thread say to each other, and the thread's side of it: one question at a time, answered with progress on the way.
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
+import type { Brief } from "../search/index.ts";
+import type { BlendAnswer, Stage } from "./blend/state.ts";
 import { briefInput } from "./briefInput.ts";
-import { catalogEngine } from "./catalogEngine.ts";
+import { catalogEngine, type Stock } from "./catalogEngine.ts";
 import { answerFor, MOST_LISTED, type Question } from "./engine.ts";
 import type { Details, EnginePort, Piece } from "./ports.ts";
 import type { Answer } from "./state.ts";
@@ -9,11 +11,20 @@ import type { Answer } from "./state.ts";
 export type ThreadAsk =
   | { readonly kind: "stock"; readonly parts: readonly Capacitor[]; readonly families: readonly ResistorFamily[] }
   | { readonly kind: "plan"; readonly id: number; readonly question: Question }
-  | { readonly kind: "piece"; readonly id: number; readonly question: Question; readonly piece: Piece };
+  | { readonly kind: "piece"; readonly id: number; readonly question: Question; readonly piece: Piece }
+  | {
+      readonly kind: "blend";
+      readonly id: number;
+      readonly brief: Brief;
+      /** Looked at on the way: not 0 is stop. */
+      readonly stop: Int32Array<SharedArrayBuffer>;
+    };
 
 export type ThreadReply =
   | { readonly kind: "progress"; readonly id: number; readonly done: number; readonly total: number }
   | { readonly kind: "planned"; readonly id: number; readonly answer: Answer }
+  | { readonly kind: "stage"; readonly id: number; readonly stage: Stage }
+  | { readonly kind: "blended"; readonly id: number; readonly answer: BlendAnswer }
   | { readonly kind: "worked"; readonly id: number; readonly value: Details[Piece] };
 
 function pieceFor(engine: EnginePort, question: Question, piece: Piece): Details[Piece] {
@@ -39,10 +50,21 @@ function remembering(engine: EnginePort): EnginePort {
 
 /** Takes the asks of one thread. `now`: milliseconds from any beginning. */
 export function threadServer(reply: (reply: ThreadReply) => void, now: () => number): (ask: ThreadAsk) => void {
-  let engine: EnginePort = catalogEngine({ parts: [], families: [] });
+  let stock: Stock = { parts: [], families: [] };
+  let engine: EnginePort = catalogEngine(stock);
   return (ask) => {
     if (ask.kind === "stock") {
+      stock = ask;
       engine = remembering(catalogEngine(ask));
+      return;
+    }
+    if (ask.kind === "blend") {
+      const { id, brief, stop } = ask;
+      const told = (stage: Stage): void => reply({ kind: "stage", id, stage });
+      // What goes wrong here ends the thread, as in any other work of its own.
+      void import("./blend/work.ts")
+        .then(({ blendAnswer }) => blendAnswer({ ...stock, brief, told, stop: () => Atomics.load(stop, 0) !== 0, now }))
+        .then((answer) => reply({ kind: "blended", id, answer }));
       return;
     }
     const { id, question } = ask;

@@ -8,9 +8,13 @@ import {
   stateOf,
 } from "../catalog/index.ts";
 import {
+  besideWords,
   clampWords,
   type Files,
+  loosenWords,
+  proofSentence,
   rateBlocks,
+  reasonWords,
   refusalWords,
   type Source,
   saveOverrides,
@@ -57,7 +61,11 @@ const valuesOf = (unit: Capacitor): readonly PartValue[] =>
   });
 
 export const SHARED_WORDS: SharedWords = {
+  besideWords,
   clampWords,
+  loosenWords,
+  proofSentence,
+  reasonWords,
   rateBlocks,
   refusalWords,
   titleOf,

@@ -93,7 +93,12 @@ describe("phaseFrom({ name, chain, drive, start, seconds, until })", () => {
 
   test("leaks of odd numbers, one of them after a pull through a resistor, end at zero itself and not a rounding beside it", () => {
     for (let k = 1; k <= 40; k++) {
-      const chain = [stage(1.3 + k / 7, 0.71), stage(0.9, 0.37 + k / 11), stage(2.1, 0.13 * k)];
+      // Through insulation as well the fall is no straight line, and where it meets zero is found to rounding only.
+      const conductance = k % 2 === 0 ? 0 : k / 90;
+      const chain = [stage(1.3 + k / 7, 0.71), stage(0.9, 0.37 + k / 11), stage(2.1, 0.13 * k)].map((one) => ({
+        ...one,
+        conductance,
+      }));
       const rest = phaseFrom({
         name: "rest",
         chain,

@@ -23,6 +23,11 @@ describe("proofSentence(plan)", () => {
       /NOT PROVEN.*No blend costs less than 20\.00 EUR: it is at most 1\.24 % too dear/,
     );
   });
+  test("not settled: why not, in the words of who asks", () => {
+    const stopped: BlendPlan = { ...plan, status: "stopped", lowerBound: 20, gap: 0.1 };
+    expect(proofSentence(stopped, "by noon")).toMatch(/the best found by noon\. No blend/);
+    expect(proofSentence({ ...stopped, blends: [] }, "by noon")).toMatch(/Not settled by noon\.$/);
+  });
   test("nothing found is not called impossible unless it is", () => {
     expect(proofSentence({ ...plan, status: "stopped", blends: [], gap: null })).toMatch(/Not settled/);
     expect(proofSentence({ ...plan, status: "infeasible", blends: [] })).toMatch(/proven that none meets the need/);

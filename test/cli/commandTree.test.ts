@@ -26,7 +26,11 @@ describe("treeOf(program)", () => {
   test("the options of the screens are those that open them", () => {
     for (const { long, value } of SCREEN_OPTIONS)
       expect(screenFlags(value === null ? [long] : [long, "x"]), long).not.toBeNull();
-    expect(SCREEN_OPTIONS).toHaveLength(Object.keys(screenFlags([]) ?? {}).length);
+    // Every fact that the flags settle has its option, the ground two of them.
+    const settled = Object.keys(screenFlags([]) ?? {});
+    expect(settled.sort()).toEqual(["ascii", "brief", "catalog", "ground", "resistors"]);
+    const named = SCREEN_OPTIONS.map(({ long }) => long.slice(2)).sort();
+    expect(named).toEqual(["ascii", "brief", "catalog", "dark", "light", "resistors"]);
   });
 
   test("what names a file is a file, and takes a value", () => {

@@ -1,6 +1,7 @@
 // chainFaults: a unit shorted, a unit open, a row shorted, on the worked bank.
 import { describe, expect, test } from "vitest";
 import { rowShort, unitOpen, unitShort } from "../../src/pulse/chainFaults.ts";
+import type { FaultBank } from "../../src/pulse/faultBank.ts";
 import { strings, tied } from "./faultBanks.ts";
 import { near } from "./near.ts";
 
@@ -54,6 +55,13 @@ describe("unitShort(bank)", () => {
     ["a fuse", { fuse }, /fuse of the shorted unit/],
     ["a fuse before an isolating resistor", { fuse, isolatingResistance: 0.05 }, /fuse of the shorted unit/],
     ["an isolating resistor", { isolatingResistance: 0.05 }, /isolating resistors take part of the heat/],
+    [
+      "an isolating resistor, and a short whose ohms are stated",
+      { isolatingResistance: 0.05, shortResistance: 0.01 },
+      /take their part of the heat/,
+    ],
+    ["an inductance between sections", { sectionInductance: 1e-6 }, /section inductance holds the current down/],
+    ["an inductance of nothing", { sectionInductance: 0 }, /Nothing given stops it/],
     ["a resistor of nothing", { isolatingResistance: 0 }, /Nothing given stops it/],
     ["nothing", {}, /Nothing given stops it/],
     ["no neighbour, fuse or not", { parallel: 1, fuse }, /charger's trip must open/],
@@ -74,6 +82,22 @@ describe("unitShort(bank)", () => {
     const held = (ruptureEnergy: number) => ({ ...tied, unit: { ...tied.unit, ratedVoltage: 600, ruptureEnergy } });
     expect(unitShort(held(1056.1)).verdict).toBe("pass");
     expect(unitShort(held(1055.9)).verdict).toBe("fail");
+  });
+
+  test("a sound unit's action against its own rating: shared by four neighbours if tied, whole in the rest of a string", () => {
+    const unit = { ...tied.unit, esr: 0, esl: 0, action: 1000 };
+    const found = (over: Partial<FaultBank>) =>
+      unitShort({ ...tied, unit, isolatingResistance: 0.05, ...over }).findings.filter(
+        ({ id }) => id === "pulse.fault.action",
+      );
+    expect(found({})[0]).toMatchObject({ verdict: "fail", limit: 1000, unit: "A2s", state: "faulted" });
+    near(found({})[0]?.value, 16896 / 16, 1e-12);
+    expect(found({})[0]?.note).toMatch(/sound unit against its rating/);
+    const whole = found({ ties: "strings" })[0]?.value ?? 0;
+    near(whole, 66 / (0.05 * (4 / 4 + 3) + 0.05), 1e-12);
+    expect(found({ ties: "strings", series: 1 })[0]?.value).toBe(found({ series: 1 })[0]?.value);
+    expect(found({ unit: { ...unit, action: null } })).toEqual([]);
+    expect(found({ unit: { ...tied.unit, action: 1000 } })).toEqual([]);
   });
 
   test("no shot known: a fuse's life is not assessed, its clearing is", () => {

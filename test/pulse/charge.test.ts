@@ -54,6 +54,7 @@ describe("chargeOf(charger, task)", () => {
       if (charger.kind === "resistor") near(charge.resistorHeat, charge.action * charger.resistance, 1e-12);
       else expect(charge.resistorHeat).toBe(0);
     }
+    near(got(chargeOf(chargers[2]!, warm)).seconds, 2000 * 825e-6 * Math.log(1100 / 100), 1e-12);
   });
 
   test("the most amperes and watts, and where constant power takes over", () => {
@@ -93,6 +94,7 @@ describe("chargeOf(charger, task)", () => {
     const power = got(chargeOf({ kind: "constant power", power: 200, currentLimit: 10 }, warm));
     near(power.seconds, (825e-6 * (1600 ** 2 - 800 ** 2)) / 400, 1e-12);
     near(power.peakCurrent, 0.25, 1e-12);
+    near(power.peakPower, 200, 1e-12);
     const current = got(chargeOf({ kind: "constant power", power: 1e6, currentLimit: 0.05 }, task));
     near(current.seconds, 26.4, 1e-12);
     near(current.peakPower, 80, 1e-12);

@@ -1,5 +1,6 @@
 // Random keys at random sizes against the screens without their process: what must hold after every key is checked.
 
+import type { BlendEffect, BlendMessage } from "../../src/tui/blend/state.ts";
 import { rowCells } from "../../src/tui/cells.ts";
 import { detailKey, detailsOf, wantedPiece, withPiece } from "../../src/tui/detail.ts";
 import { answerFor } from "../../src/tui/engine.ts";
@@ -14,6 +15,7 @@ import { makeTokeniser } from "../../src/tui/tokens.ts";
 import { update } from "../../src/tui/update/update.ts";
 import { drawScreen } from "../../src/tui/view/screen.ts";
 import { SHARED_WORDS } from "../../src/tui/workshop.ts";
+import { foundFor, plannedOn } from "./blendScreen.ts";
 import { Screen } from "./screen.ts";
 import { CATALOGUE_FACTS, engine, STOCK, stateWith } from "./stock.ts";
 
@@ -100,6 +102,10 @@ const MEND = `\x1b1\x1b[5~\x152.4 kJ\t\x152.2 kV\t\x15100 %${"\t\x15".repeat(FIE
 /** Pins two layouts and goes to compare them. */
 const PIN = "\x1b2 \x1b[B \x1b3";
 
+/** Goes to the blends and has one found, or stopped. */
+const BLEND = "\x1bb\r";
+const STOP_BLEND = "\x1bb\x1b";
+
 /** Gives a load and goes to see the shot, or asks for the spread. */
 const LOAD = "\x1b6l\x1550 mohm\t\x1520 uH\x1b6";
 const SPREAD = "\x1b5c";
@@ -141,6 +147,7 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
         const { overrides } = effect;
         send({ type: "opened", stock: STOCK, words: SHARED_WORDS, catalogue: CATALOGUE_FACTS, overrides });
       }
+      if (effect.type === "blend") blend(effect.effect);
       if (effect.type !== "export") return;
       const there = files.has(effect.path) && !effect.replace;
       files.add(effect.path);
@@ -152,6 +159,13 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
     changed: () => {},
   });
   const send = (message: Message): void => store.send(message);
+  /** One answer does for every brief: what is drawn of it is looked at, not what it says. */
+  const { answer: blended } = await foundFor(plannedOn());
+  const blend = (effect: BlendEffect): void => {
+    const tell = (message: BlendMessage): void => send({ type: "blend", message });
+    if (effect.what === "find") tell({ type: "begun", key: effect.key });
+    else tell({ type: "found", answer: blended, seconds: 1 });
+  };
   const answer = (): void => {
     if (!wanted) return;
     wanted = false;
@@ -193,7 +207,14 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
   const tokens = makeTokeniser();
   answer();
   for (let key = 0; key < count && faults.length < 5; key += 1) {
-    const typed = random() < 0.02 ? MEND : random() < 0.01 ? PIN : random() < 0.02 ? pick([LOAD, SPREAD]) : pick(KEYS);
+    const typed =
+      random() < 0.02
+        ? MEND
+        : random() < 0.01
+          ? PIN
+          : random() < 0.02
+            ? pick([LOAD, SPREAD, BLEND, STOP_BLEND])
+            : pick(KEYS);
     trail.push(typed);
     if (random() < 0.01) {
       const [columns, rows] = pick(SIZES);
@@ -212,6 +233,7 @@ export async function runMonkey(seed: number, count: number, look: number): Prom
     const listed = state.answer?.kind === "planned" && state.answer.plan.layouts.length > 0;
     seen.add(state.screen + (state.help ? "+help" : "") + (state.prompt ? "+prompt" : ""));
     seen.add(`${state.screen} ${listed ? "listed" : "empty"} ${state.pins.length}`);
+    if (state.screen === "blend" && state.blend.found !== null) seen.add("blend found");
     seen.add(`${state.screen} with ${Object.keys(detailsOf(state) ?? {}).join(" ")}`);
     const drawn = drawScreen(state);
     if (drawn.rows.length > rows || drawn.rows.some((row) => rowCells(row, 9999).length > columns))

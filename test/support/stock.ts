@@ -114,6 +114,7 @@ export function fakePorts(
           write: (path) => accepted(path),
         }),
         catalogue: CATALOGUE_FACTS,
+        families: [DEFAULT_FAMILY],
         overrides: {},
         saveOverrides: () => ({ kind: "saved", path: "" }),
       },

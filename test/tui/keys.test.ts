@@ -21,6 +21,13 @@ describe("messageFor(state, event)", () => {
     expect(press(planned(), "q", "q")).toEqual({ type: "edit", edit: { edit: "insert", text: "q" } });
     expect(press(planned({ screen: "layouts" }), "q", "q")).toEqual({ type: "quit" });
   });
+  test("every function key up to F11 has its screen, and F12 is the mouse's, however many screens there are", () => {
+    expect(press(planned(), "f2")).toEqual({ type: "go", screen: "brief" });
+    expect(press(planned(), "f11")).toEqual({ type: "go", screen: SCREENS[9] });
+    expect(press(planned(), "f12")).toEqual({ type: "mouse" });
+    expect(press(planned({ screen: "layouts" }), "b")).toEqual({ type: "go", screen: "blend" });
+    expect(press(planned(), "alt+b")).toEqual({ type: "go", screen: "blend" });
+  });
   test("a letter on a field of choices does nothing, left and right choose", () => {
     const onBasis = planned({ field: 3 });
     expect(press(onBasis, "x", "x")).toBeNull();
@@ -66,7 +73,7 @@ describe("messageFor(state, event)", () => {
       SCREENS.forEach((goal, index) => {
         const key = SCREEN_KEYS[goal];
         expect(press(state, `alt+${key}`)).toEqual({ type: "go", screen: goal });
-        expect(press(state, `f${index + 2}`)).toEqual({ type: "go", screen: goal });
+        if (index + 2 < 12) expect(press(state, `f${index + 2}`)).toEqual({ type: "go", screen: goal });
         if (screen !== "brief") expect(press(state, key, key)).toEqual({ type: "go", screen: goal });
       });
     }

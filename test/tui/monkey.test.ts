@@ -21,6 +21,8 @@ test("1,500 random keys at random sizes: nothing thrown, nothing outside, no sta
     "parts",
     "trail",
     "parts+prompt",
+    "blend",
+    "blend found",
   ];
   const stages = [
     "compare listed 2",

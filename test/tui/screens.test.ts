@@ -1,9 +1,11 @@
 // The screens whole, in process: real input bytes in, a real grid of cells out.
-import { afterEach, describe, expect, test } from "vitest";
+import { afterEach, beforeAll, describe, expect, test } from "vitest";
 import { savedText } from "../../src/tui/saved.ts";
 import { openScreens } from "../../src/tui/screens.ts";
 import { SCREEN_KEYS, SCREENS } from "../../src/tui/state.ts";
+import { foundFor, plannedOn } from "../support/blendScreen.ts";
 import { BRIEF, type FakePorts, fakePorts, stateWith } from "../support/stock.ts";
+import { type FakeThread, fakeThread } from "../support/threads.ts";
 
 let ports: FakePorts;
 let ended: Promise<number>;
@@ -106,6 +108,83 @@ describe("from the list to the order", () => {
       type(`\x1b${SCREEN_KEYS[screen]}`);
       await until((t) => t.includes(`[${SCREEN_KEYS[screen]} ${screen}]`) && t.includes("energy can kill"));
     }
+  });
+});
+
+describe("the blend", () => {
+  // The search is loaded when it is first asked for; what is seen here should not wait for that.
+  beforeAll(() => foundFor(plannedOn()), 30_000);
+  const BLEND_SIZES = [
+    [60, 20],
+    [80, 24],
+    [200, 50],
+  ] as const;
+  test.each(BLEND_SIZES)(
+    "at %i by %i: Enter finds it in a thread, the list is walked meanwhile, and it is shown",
+    async (columns, rows) => {
+      const threads: FakeThread[] = [];
+      open(columns, rows, {
+        env: { NO_COLOR: "1" },
+        ascii: columns === 60,
+        thread: () => {
+          const thread = fakeThread();
+          threads.push(thread);
+          return thread;
+        },
+      });
+      await until((t) => t.includes("layouts fit"));
+      type("\x1bb");
+      await until((t) => t.includes("[b blend]") && t.includes("No blend was sought for this brief yet"));
+      expect(threads).toHaveLength(0);
+      type("\r");
+      await until((t) => t.includes("Working out") && t.includes("Esc stops with the best so far"));
+      type("2");
+      await until((t) => t.includes("[2 layouts]"));
+      threads[0]?.work();
+      type("b");
+      await until((t) => t.includes("Cheapest blend, 120 units in 2 groups") && t.includes("523.20 EUR"));
+      expect(ports.screen.text()).toMatch(/flash-a +8s6p +cross-tied +48 +0 +48 +148\.80 EUR/);
+      type("G");
+      await until((t) => t.includes("not an approval") && t.includes("energy can kill"));
+      expect(ports.screen.written).not.toMatch(/\x1b\[(?:\d+;)*(?:3[0-8]|4[0-8]|9[0-7])(?:;\d+)*m/);
+      if (columns === 60) expect(ports.screen.written.replace(/\x1b/g, "")).toMatch(/^[\x20-\x7e\r\n]*$/);
+    },
+  );
+
+  test("Esc stops it with what is in hand; Esc again goes back to the layouts", async () => {
+    const threads: FakeThread[] = [];
+    open(80, 24, {
+      thread: () => {
+        const thread = fakeThread();
+        threads.push(thread);
+        return thread;
+      },
+    });
+    await until((t) => t.includes("layouts fit"));
+    type("\x1bb");
+    await until((t) => t.includes("Enter finds it"));
+    type("\r");
+    await until((t) => t.includes("Working out"));
+    type("\x1b");
+    await until((t) => t.includes("Stopping; Esc again gives it up."));
+    threads[0]?.work();
+    await until(
+      (t) =>
+        t.includes("Best blend found, 176 units in 1 group") &&
+        t.includes("No blend costs less than 522.14 EUR") &&
+        t.includes("Stopped after"),
+    );
+    type("\x1b");
+    await until((t) => t.includes("[2 layouts]"));
+  });
+
+  test("without a thread: says so, and which command finds it", async () => {
+    open();
+    await until((t) => t.includes("layouts fit"));
+    type("\x1bb");
+    await until((t) => t.includes("Enter finds it"));
+    type("\r");
+    await until((t) => t.includes("No thread can be had for it here") && t.includes("plan BRIEF --blend"));
   });
 });
 

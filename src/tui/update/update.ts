@@ -1,5 +1,8 @@
 // State and message to state and effects: the one place where the screens change. Pure.
 
+import { keyInForce } from "../blend/key.ts";
+import type { BlendMessage } from "../blend/state.ts";
+import { updateBlend } from "../blend/update.ts";
 import { mostListed } from "../engine.ts";
 import { FIELDS } from "../fields.ts";
 import { type Ground, paletteFor } from "../ground.ts";
@@ -39,6 +42,19 @@ function changeUnits(state: State, message: UnitsMessage): Change {
   return {
     state: { ...state, units, ...(notice === undefined ? {} : { notice }) },
     effects: effects.map((effect) => ({ type: "units", effect })),
+  };
+}
+
+/** So does the screen of blends; it finds one for the brief in force. */
+function changeBlend(state: State, message: BlendMessage): Change {
+  const key = keyInForce(state);
+  const { answer } = state;
+  const wanted =
+    answer?.kind !== "planned" || key === null ? null : { what: "find" as const, brief: answer.brief, key };
+  const { blend, effects, notice } = updateBlend(state.blend, message, wanted);
+  return {
+    state: { ...state, blend, ...(notice === undefined ? {} : { notice }) },
+    effects: effects.map((effect) => ({ type: "blend", effect })),
   };
 }
 
@@ -195,6 +211,8 @@ function changed(state: State, message: Message): Change {
       return saved(state, message.answer);
     case "units":
       return changeUnits(state, message.message);
+    case "blend":
+      return changeBlend(state, message.message);
     case "say":
       return still({ ...state, notice: message.notice });
   }

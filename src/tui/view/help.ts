@@ -24,6 +24,8 @@ const ABOUT: Readonly<Record<State["screen"], string>> = {
     "What was understood of the catalogues. Enter sets the value in hand; it is kept in a file beside the catalogue, never in it, and planned with at once. A catalogue that changes on disk is read again. As text: joulewright parts FILE.",
   units:
     "Measured units, each where the voltages come out most equal. A mark is a unit, low to high capacitance in the lot; a gap is how far the worst stands over an even share; the mark on its bar is what the meter can tell. As text: joulewright place.",
+  blend:
+    "The cheapest mix of whole strings of different parts for the brief, with its proof, others of another kind up to a tenth dearer, and what less and more energy would cost. > on the ladder is the energy asked. As text: joulewright plan BRIEF --blend --within 10% --ladder 10%.",
   order:
     "What must be bought: needed, less what is on hand, in whole packs and at the price for the quantity. As text: joulewright order LAYOUT.",
 };

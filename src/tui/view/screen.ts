@@ -8,6 +8,7 @@ import { cutText, drawnText, wrapText } from "../text.ts";
 import { grouped } from "../values.ts";
 import { textWidth } from "../width.ts";
 import { bankPage } from "./bank.ts";
+import { blendPage } from "./blend.ts";
 import { briefPage, seenPart } from "./brief.ts";
 import { comparePage } from "./compare.ts";
 import { helpPage } from "./help.ts";
@@ -41,6 +42,7 @@ const PAGES: Readonly<Record<State["screen"], (state: State, room: Room) => Page
   order: orderPage,
   map: mapPage,
   units: unitsPage,
+  blend: blendPage,
   parts: partsPage,
   trail: trailPage,
 };
