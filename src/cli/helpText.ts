@@ -106,7 +106,7 @@ Same file, seed and moves: same list, byte for byte.${STATUS}`,
 Examples:
   $ joulewright sheet brief.json --layout chosen.json --catalog mine.csv --output sheet.html
   $ joulewright sheet brief.json --layout chosen.json --catalog mine.csv --measured lot.csv --paper letter \\
-      --revision B --date "2 March" --rule nec-460-6 --output sheet.html
+      --revision B --date "2 March" --rule nec-460-28 --output sheet.html
   $ joulewright sheet brief.json --layout chosen.json --catalog mine.csv --format md
 
 One HTML file that needs nothing else: no script, nothing fetched; print it from any browser. What is not known is left

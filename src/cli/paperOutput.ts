@@ -16,15 +16,18 @@ export function outputOf(output: string | undefined): Read<string | null> {
   return refused({ code: "empty", place: { field: "--output" }, read: JSON.stringify(output), want });
 }
 
+/** Said of a bank that fails by a sheet that tells how. */
+const FAILING = "Checks FAIL: the sheet says which. Do not build this bank.";
+
 /** Writes a paper; the exit status. `what` says what was written: "20 sections". */
 export function writePaper(
-  paper: { readonly text: string; readonly what: string; readonly output: string | null },
+  paper: { readonly text: string; readonly what: string; readonly output: string | null; readonly failing?: string },
   { lost, failed }: Pick<ReadSheet, "lost" | "failed">,
   flags: SheetFlags,
   ports: Ports,
 ): number {
-  const { text, what, output } = paper;
-  const said = [...lost, ...(failed ? ["Checks FAIL: the sheet says which. Do not build this bank."] : [])];
+  const { text, what, output, failing = FAILING } = paper;
+  const said = [...lost, ...(failed ? [failing] : [])];
   if (said.length > 0) ports.err(`${said.join("\n")}\n`);
   if (output === null) ports.out(text);
   else {

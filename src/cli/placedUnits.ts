@@ -18,13 +18,14 @@ export interface PlacesFound {
 export function placesOf(brief: string | undefined, flags: PlaceFlags, ports: Ports): Read<PlacesFound> {
   const found = placedBank(brief, flags, ports);
   if (!found.ok) return found;
-  const { placing, positions, notes, input } = found.value;
+  const { placing, positions, notes, input, course } = found.value;
   return accepted({
     placed: {
       positions,
       groups: placing.groups,
       spares: placing.spares,
       plusMinus: placing.charging.plusMinus,
+      holding: course?.holding.voltage ?? null,
     },
     notes,
     lost: input.measured.faults.map((fault) => `Not placed, ${refusalWords(fault)}`),

@@ -42,6 +42,28 @@ function words(flag: string, text: string | undefined): Read<string | null> {
   return accepted(text.trim());
 }
 
+/** Flags that speak of measured units say nothing without any. */
+function unmeasured(flags: SheetFlags): readonly Refusal[] {
+  if (flags.measured !== undefined) return [];
+  const given = [
+    ["--positions", flags.positions],
+    ["--uncertainty", flags.uncertainty],
+    ["--leakage-at", flags.leakageAt],
+  ] as const;
+  return given.flatMap(([field, text]): readonly Refusal[] =>
+    text === undefined
+      ? []
+      : [
+          {
+            code: "contradiction",
+            place: { field },
+            read: JSON.stringify(text),
+            want: "--measured beside it: it speaks of measured units",
+          },
+        ],
+  );
+}
+
 /** What the flags choose. The negative end at earth is the usual way, assumed and said where nothing is chosen. */
 export function readSheetFlags(flags: SheetFlags): Read<SheetChoices> {
   const paper = among("--paper", flags.paper ?? "A4", PAPERS);
@@ -49,7 +71,8 @@ export function readSheetFlags(flags: SheetFlags): Read<SheetChoices> {
   const rule = flags.rule === undefined ? accepted(null) : among("--rule", flags.rule, GOVERNING);
   const date = words("--date", flags.date);
   const revision = words("--revision", flags.revision);
-  if (paper.ok && earth.ok && rule.ok && date.ok && revision.ok)
+  const unused = unmeasured(flags);
+  if (unused.length === 0 && paper.ok && earth.ok && rule.ok && date.ok && revision.ok)
     return accepted({
       paper: paper.value,
       earth: earth.value,
@@ -58,6 +81,7 @@ export function readSheetFlags(flags: SheetFlags): Read<SheetChoices> {
       revision: revision.value,
     });
   return refused(
+    ...unused,
     ...[paper, earth, rule, date, revision].flatMap((read): readonly Refusal[] => (read.ok ? [] : read.refusals)),
   );
 }

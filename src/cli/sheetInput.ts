@@ -2,7 +2,7 @@
 
 import { accepted, type Finding, type Read, refused } from "../quantity/index.ts";
 import { type FuseChoice, faultsOf, fittedFuse, plan, shotOf } from "../search/index.ts";
-import type { FindingLine, SheetInput } from "../sheet/index.ts";
+import { type FindingLine, governedOf, type SheetInput } from "../sheet/index.ts";
 import { askedLines } from "./askedText.ts";
 import { cautionsOf } from "./cautions.ts";
 import { type Checked, checkedBank } from "./checked.ts";
@@ -53,7 +53,7 @@ export function sheetInput(brief: string | undefined, flags: SheetFlags, ports: 
   const found = fuse?.ok ? fuse.value : null;
   const units = placed?.ok ? placed.value : null;
   const { paper: _, ...chosen } = choices.value;
-  const { input, findings } = joined(bank, found?.choice ?? null, beside);
+  const { input, findings } = joined(bank, found?.choice ?? null, { beside, rule: choices.value.rule });
   return accepted({
     choices: choices.value,
     lost: [...faultLines(bank.stock), ...(found?.lost ?? []), ...(units?.lost ?? [])],
@@ -79,7 +79,7 @@ type Joined = Omit<SheetInput, "placed" | "rule" | "earth" | "date" | "revision"
 function joined(
   bank: Checked,
   fuse: FuseChoice | null,
-  beside: boolean,
+  { beside, rule }: { readonly beside: boolean } & Pick<SheetInput, "rule">,
 ): { readonly input: Joined; readonly findings: readonly Finding[] } {
   const { result: layout, unit, settings, stock, currency, notes } = bank;
   const { brief, given } = settings;
@@ -93,7 +93,11 @@ function joined(
   const others = beside
     ? plan({ brief, parts: stock.parts, families: stock.families, limit: BESIDE, quick: true })
     : null;
-  const findings = [...layout.findings, ...(report?.findings ?? [])];
+  const governed = governedOf({ layout, brief, rule });
+  // The governing rule's own time is the limit of the bleed, where the bank's finding had none.
+  const timed = governed.some(({ id }) => id === "rule-time");
+  const own = layout.findings.filter(({ id, limit }) => !(timed && id === "bleed" && limit === null));
+  const findings = [...own, ...governed, ...(report?.findings ?? [])];
   return {
     findings,
     input: {

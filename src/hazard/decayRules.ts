@@ -98,6 +98,7 @@ export const DECAY_RULES = [
     edition: "",
     tag: "second hand",
     words: "A power capacitor for up to 1 kV falls to 75 V within 3 min.",
+    scope: { upTo: 1000 },
     limits: [volts(75), seconds(180)],
   },
   {
@@ -107,6 +108,7 @@ export const DECAY_RULES = [
     edition: "",
     tag: "memory",
     words: "A power capacitor for more than 1 kV falls to 75 V within 10 min.",
+    scope: { from: 1000 },
     limits: [volts(75), seconds(600)],
   },
   {
@@ -116,6 +118,7 @@ export const DECAY_RULES = [
     edition: "",
     tag: "second hand",
     words: "A capacitor for up to 600 V (1000 V in newer editions) falls to 50 V within 1 min.",
+    scope: { upTo: 600 },
     limits: [volts(50), seconds(60)],
   },
   {
@@ -125,6 +128,7 @@ export const DECAY_RULES = [
     edition: "",
     tag: "memory",
     words: "A capacitor for more than 600 V falls to 50 V within 5 min.",
+    scope: { from: 600 },
     limits: [volts(50), seconds(300)],
   },
 ] as const satisfies readonly Rule[];

@@ -2,6 +2,7 @@
 
 import type { Finding, Verdict } from "../quantity/index.ts";
 import { energyClass } from "./energyClass.ts";
+import { TOUCH_SAFE } from "./governed.ts";
 import { recovery } from "./recovery.ts";
 import { ruleOf } from "./rules.ts";
 
@@ -66,7 +67,10 @@ export function hazardFindings(bank: HazardOf): readonly Finding[] {
       source: "NFPA-70E",
       value: left,
       limit: safe.threshold,
-      bad: "safe to touch by voltage, but a short still burns: discharge to zero before work",
+      bad:
+        atSafe > TOUCH_SAFE
+          ? "not safe to touch, whatever the brief calls it: discharge to zero before work"
+          : "safe to touch by voltage, but a short still burns: discharge to zero before work",
       good: "below the threshold of stored energy at the touch-safe voltage",
     }),
     finding({

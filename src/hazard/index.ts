@@ -24,6 +24,7 @@ export {
 export { type DumpDuty, type DumpUse, dumpDuty, dumpUse, dumpWindow, SPECIFIC_HEATS } from "./dump.ts";
 export { ARTICLE_360, type EnergyClass, energyClass, type Tier, tierAt } from "./energyClass.ts";
 export { type HazardOf, hazardFindings } from "./findings.ts";
+export { type Governed, governedFindings, inScope, TOUCH_SAFE } from "./governed.ts";
 export { type Clearing, clearingOf } from "./governing.ts";
 export { type Recovery, recovery } from "./recovery.ts";
 export type { HowRead, Limit, Rule, VoltageRange } from "./rule.ts";

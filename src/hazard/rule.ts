@@ -21,6 +21,8 @@ export interface Rule {
   readonly tag: HowRead;
   /** What it asks, in words of our own. */
   readonly words: string;
+  /** Voltages that the rule as a whole speaks of; absent: those of its limits. */
+  readonly scope?: VoltageRange;
   readonly limits: readonly Limit[];
 }
 
@@ -40,7 +42,7 @@ export const farads = (value: number, at: VoltageRange): Limit => ({ quantity: "
 export const share = (value: number): Limit => ({ quantity: "share of voltage", value, unit: "1" });
 
 /** Whether a limit speaks of a voltage. Range: voltage >= 0. */
-export const applies = ({ at }: Limit, voltage: number): boolean =>
+export const applies = ({ at }: Pick<Limit, "at">, voltage: number): boolean =>
   voltage >= (at?.from ?? 0) &&
   voltage < (at?.below ?? Number.POSITIVE_INFINITY) &&
   voltage <= (at?.upTo ?? Number.POSITIVE_INFINITY);

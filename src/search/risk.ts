@@ -39,9 +39,12 @@ export function tailCaseOf({ series: n, parallel: p, ties, share, tolerance, lot
   return { n, p, ties, share, law };
 }
 
-function lawWords({ lot }: RiskCase, { distribution }: Brief): string {
+function lawWords({ lot, tolerance }: RiskCase, { distribution }: Brief): string {
   if (lot !== undefined) return `as the ${lot.length} measured units, each value equally likely`;
-  return distribution === "normal" ? "normal over its tolerance, cut at three sigma" : "uniform over its tolerance";
+  if (distribution !== "normal") return "uniform over its tolerance";
+  return tolerance.low === tolerance.high
+    ? "normal over its tolerance, cut at three sigma"
+    : "normal in two pieces about nominal, a third of each side of its tolerance the sigma there, cut at three sigma";
 }
 
 export function riskOf(given: RiskCase, brief: Brief): Risk {

@@ -54,7 +54,7 @@ export function bleedChart(input: SheetInput): Drawing | null {
   const facts = factsOf(input);
   const { capacitance, chain, chains, dump, voltage, clear } = facts;
   if (capacitance === null) return null;
-  const floor = Math.min(Number.isFinite(clear) ? clear : input.brief.touchSafe, input.brief.touchSafe, voltage) / 3;
+  const floor = Math.min(clear, voltage) / 3;
   const curve = (words: string, resistance: number | null): readonly BleedCurve[] => {
     if (resistance === null || !Number.isFinite(resistance)) return [];
     const bank = { capacitance, voltage, resistance };
@@ -78,11 +78,9 @@ export function bleedChart(input: SheetInput): Drawing | null {
   if (curves.length === 0) return null;
   const thresholds = [
     { words: "touch-safe by the brief", value: input.brief.touchSafe },
-    ...(Number.isFinite(clear) && clear !== input.brief.touchSafe
-      ? [{ words: "the governing rule clears", value: clear }]
-      : []),
+    ...(clear === input.brief.touchSafe ? [] : [{ words: "what a wait is for", value: clear }]),
   ];
-  const ways = waysDown(facts, { from: voltage, to: input.brief.touchSafe });
+  const ways = waysDown(facts, { from: voltage, to: clear });
   const told = [
     ...(chain === null ? [] : [`bleed chains ${said(up(ways.chains, "time"))}`]),
     ...(dump === null ? [] : [`dump resistor ${said(up(ways.dump, "time"))}`]),
@@ -93,7 +91,7 @@ export function bleedChart(input: SheetInput): Drawing | null {
       kind: "bleed",
       props: { id: "chart-bleed", title: "Bleed-down from full, log scale", curves, thresholds },
     },
-    words: `From ${cell(voltage, "voltage")} to ${cell(input.brief.touchSafe, "voltage")}: ${told.join("; ")}${chains === 1 ? "; with one bleeder open never, so that curve is not drawn" : ""}.`,
+    words: `From ${cell(voltage, "voltage")} to ${cell(clear, "voltage")}: ${told.join("; ")}${chains === 1 ? "; with one bleeder open never, so that curve is not drawn" : ""}.`,
   };
 }
 

@@ -1,6 +1,7 @@
 // The paper: build sheet, drawings, labels.
 export type { Earth } from "./draw/schematicProps.ts";
 export { SHEET_FORMATS, type SheetFormat, sheetText } from "./formats.ts";
+export { governedOf } from "./governed.ts";
 export { labelsToHtml } from "./html/labelsPage.tsx";
 export { PAPERS, type Paper } from "./html/style.ts";
 export type { Alternatives, AskedLine, FindingLine, PlacedUnits, SheetInput, SheetWords } from "./input.ts";

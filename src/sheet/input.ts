@@ -57,6 +57,8 @@ export interface PlacedUnits {
   readonly spares: readonly string[];
   /** Two standard deviations of a stage (unit) voltage, relative. */
   readonly plusMinus: number;
+  /** V of the worst at the end of the hold, as placed; null where leakage is not known. */
+  readonly holding: number | null;
 }
 
 export interface SheetInput {

@@ -5,6 +5,7 @@ import { potentialOf } from "./draw/potential.ts";
 import { factsOf } from "./facts.ts";
 import { footerOf, titleOf } from "./heading.ts";
 import type { SheetInput } from "./input.ts";
+import { measuredOf } from "./measured.ts";
 import { groupWord, type Spot, spotsOf } from "./names.ts";
 import { sparesShown } from "./sections/placed.ts";
 
@@ -37,6 +38,7 @@ function labelList(input: SheetInput): readonly Label[] {
   const { layout, unit, placed, brief } = input;
   const { series, parallel, ties } = layout;
   const tied = ties === "cross-tied";
+  const measured = measuredOf(input);
   const polarised = unit.polarised ?? null;
   const common = { part: unit.part, polarised, voltage: unit.voltage };
   const standing = new Map(placed?.positions.map((p) => [`${p.group}.${p.place}`, p]));
@@ -57,7 +59,7 @@ function labelList(input: SheetInput): readonly Label[] {
     kind: groupWord(layout),
     position: String(group),
     voltage: tied ? unit.voltage : unit.voltage * series,
-    capacitance: tied ? unit.capacitance * parallel : unit.capacitance / series,
+    capacitance: measured?.groups[group - 1] ?? (tied ? unit.capacitance * parallel : unit.capacitance / series),
     toEarth: tied ? toEarth(input, group - 1, group) : toEarth(input, 0, series),
   });
   const spares =

@@ -72,9 +72,9 @@ export function pathCount({ chains, dump }: Pick<Facts, "chains" | "dump">): {
   };
 }
 
-/** What is said of a bank that never breaks the rule. */
-export const clearWords = ({ clear, rule }: Pick<Facts, "clear" | "rule">): string =>
-  Number.isFinite(clear) ? `${cell(clear, "voltage")} (${rule})` : `any voltage (${rule}: this bank never passes it)`;
+/** What a wait is for, and what sets it. */
+export const clearWords = ({ clear, clearBy }: Pick<Facts, "clear" | "clearBy">): string =>
+  `${cell(clear, "voltage")} (${clearBy})`;
 
 /** Each way against the time that the rule gives; nothing where it gives none, or a time is not known. */
 export function againstRule({ allowed, chain }: Pick<Facts, "allowed" | "chain">, ways: Ways): readonly string[] {

@@ -26,6 +26,12 @@ describe("writePaper(paper, read, flags, ports)", () => {
     expect(ports.told()).toBe("x\\u{7}.html: 3 labels written\n");
   });
 
+  test("a paper that tells no checks names where they are told", () => {
+    const ports = fakePorts();
+    writePaper({ ...paper, failing: "FAIL: see check." }, { lost: [], failed: true }, {}, ports);
+    expect(ports.told()).toBe("FAIL: see check.\n");
+  });
+
   test("what was lost and what fails is told; a failing bank ends with 1", () => {
     const ports = fakePorts();
     expect(writePaper(paper, { lost: ["a row"], failed: true }, {}, ports)).toBe(1);

@@ -21,6 +21,8 @@ describe("placesOf(brief, flags, ports)", () => {
       groups: placing.groups,
       spares: placing.spares,
       plusMinus: placing.charging.plusMinus,
+      // Capacitance alone was measured.
+      holding: null,
     });
     expect(found.value.lost).toEqual([]);
   });

@@ -37,3 +37,13 @@ describe("readSheetFlags(flags)", () => {
     });
   });
 });
+
+describe("readSheetFlags(flags): of measured units", () => {
+  test.each(["positions", "uncertainty", "leakageAt"] as const)(
+    "%s without --measured is refused, beside it not",
+    (key) => {
+      expect(readSheetFlags({ [key]: "1 %" })).toMatchObject({ ok: false, refusals: [{ code: "contradiction" }] });
+      expect(readSheetFlags({ [key]: "1 %", measured: "lot.csv" }).ok).toBe(true);
+    },
+  );
+});

@@ -102,3 +102,9 @@ describe("hazardFindings(bank)", () => {
       expect(margin).toBeCloseTo((limit! - value!) / limit!, 12);
   });
 });
+
+test("volts that the brief calls touch-safe and are not: no word of safe to touch", () => {
+  const note = (safeVoltage: number) => one({ ...demo, safeVoltage, capacitance: 0.1 }, "energy-at-safe").note;
+  expect(note(5000)).toMatch(/^not safe to touch/);
+  expect(note(60)).toMatch(/^safe to touch by voltage/);
+});

@@ -109,3 +109,13 @@ describe("riskJudge(brief)", () => {
     expect(judge(one)).toBe(judge(one));
   });
 });
+
+describe("riskOf(given, brief): the law in words", () => {
+  test("a lopsided normal says that it is two pieces about nominal, an even one does not", () => {
+    const normal = briefOf({ basis: "statistical", risk: 1e-4, distribution: "normal" });
+    const given = { series: 2, parallel: 2, ties: "cross-tied", share: 0.6 } as const;
+    const law = (low: number, high: number) => riskOf({ ...given, tolerance: { low, high } }, normal).law;
+    expect(law(0.1, 0.3)).toMatch(/two pieces about nominal/);
+    expect(law(0.2, 0.2)).toBe("normal over its tolerance, cut at three sigma");
+  });
+});

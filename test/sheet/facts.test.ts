@@ -39,3 +39,31 @@ describe("factsOf(input)", () => {
     expect(waysDown(facts, { from: 2000, to: 60 })).toEqual({ chains: null, oneOpen: null, dump: null });
   });
 });
+
+describe("factsOf(input): a wait is never for more than the usual touch-safe voltage", () => {
+  test.each(["lbnl-thermal", "iec-61010-energy"] as const)(
+    "%s, which this bank never breaks, shortens nothing",
+    (rule) => {
+      const facts = factsOf(sheetInput({ rule }));
+      expect(facts).toMatchObject({ clear: 60 });
+      expect(facts.clearBy).toMatch(/^touch-safe by default; .* is never passed by this bank$/);
+    },
+  );
+
+  test("a brief's 5 kV, and a rule of 75 V: down to 60 V all the same, and why; a stricter brief or rule goes lower", () => {
+    expect(factsOf(sheetInput({ brief: { touchSafe: "5 kV" } }))).toMatchObject({
+      clear: 60,
+      clearBy: "touch-safe by default; the brief's touch-safe voltage, is never passed by this bank",
+    });
+    expect(factsOf(sheetInput({ rule: "iec-60831-decay" }))).toMatchObject({ clear: 60, level: 75 });
+    expect(factsOf(sheetInput({ rule: "iec-60831-decay", brief: { touchSafe: "30 V" } }))).toMatchObject({
+      clear: 30,
+      clearBy: expect.stringMatching(/^the brief's touch-safe voltage; IEC 60831-1.*asks only 75 V$/),
+    });
+    expect(factsOf(sheetInput({ rule: "nec-460-28", brief: { touchSafe: "5 kV" } })).clear).toBe(50);
+  });
+
+  test("a rule that gives a time and no level is held to 60 V where the brief is laxer", () => {
+    expect(factsOf(sheetInput({ rule: "iec-61010-plug", brief: { touchSafe: "5 kV" } })).level).toBe(60);
+  });
+});

@@ -31,6 +31,14 @@ describe("labelsOf(input)", () => {
     ).toEqual(placed.spares);
   });
 
+  test("measured: a stage is the sum of its units", () => {
+    const bare = sheetInput();
+    const placed = placedIn(bare);
+    const sum = placed.positions.filter(({ group }) => group === 2).reduce((all, p) => all + p.capacitance, 0);
+    expect(sum).not.toBeCloseTo(2e-3, 6);
+    expect(find({ ...bare, placed }, "stage", "2")?.capacitance).toBeCloseTo(sum, 12);
+  });
+
   test("a stage is rated as its unit, a string as all of its units together", () => {
     expect(find(sheetInput(), "stage", "2")).toMatchObject({ voltage: 400, capacitance: 2e-3 });
     expect(find(sheetInput({ shape: { ties: "strings" } }), "string", "2")).toMatchObject({

@@ -107,7 +107,13 @@ export function placedIn({ layout }: Pick<SheetInput, "layout">): PlacedUnits {
     units.slice(g * size, (g + 1) * size).map(({ serial }) => serial),
   );
   const spares = units.slice(count * size).map(({ serial }) => serial);
-  return { positions: positionList(units, { ties, groups, spares, rejected: [] }), groups, spares, plusMinus: 0.004 };
+  return {
+    positions: positionList(units, { ties, groups, spares, rejected: [] }),
+    groups,
+    spares,
+    plusMinus: 0.004,
+    holding: 260,
+  };
 }
 
 /** The table of that id; an error when the sheet has none. */

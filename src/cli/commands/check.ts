@@ -15,6 +15,7 @@ import { faultsText } from "../faultsText.ts";
 import { improveText } from "../improveText.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
 import { joinedFacts, restFacts } from "../joined.ts";
+import { lastLine } from "../lastLine.ts";
 import { LAYOUT_VERSION } from "../layoutInput.ts";
 import { hanging, layoutText } from "../layoutText.ts";
 import type { Ports } from "../ports.ts";
@@ -106,14 +107,7 @@ function checkText(checked: Checked, width: number, witness: Witness | null): st
     left.low === null
       ? "not assessed: the tolerance is unknown"
       : `${volts(left.low)} to ${volts(left.high)} on a stage, from equal sharing${keptAfterHold(corners.dumpedFromHold, left.low)}`;
-  const fails = result.findings.filter((f) => f.verdict === "fail").length;
-  const open = result.findings.filter((f) => f.verdict === "not assessed").length;
-  const verdict =
-    fails > 0
-      ? `${fails} CHECKS FAILED.`
-      : open > 0
-        ? `No check failed; ${open} could not be assessed.`
-        : "No check failed.";
+  const { faults } = joinedFacts({ layout: result, unit, brief: settings.brief });
   const cautions = cautionsOf(settings.brief, { layout: result, unit });
   const blocks = [
     `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width, checked.lot?.length ?? null)}`,
@@ -127,8 +121,8 @@ function checkText(checked: Checked, width: number, witness: Witness | null): st
     ].join("\n"),
     ...(course === null ? [] : [`Time course at the worst corner\n${courseText(course, width)}`]),
     ...(improve === null ? [] : [`What eats the margin\n${improveText(improve, checked.currency, width)}`]),
-    `If one thing fails\n${faultsText(joinedFacts({ layout: result, unit, brief: settings.brief }).faults, width)}`,
-    verdict,
+    `If one thing fails\n${faultsText(faults, width)}`,
+    wrap(lastLine(result.findings, faults), width),
     ...[...inputSentences(stock), ...notes].map((text) => wrap(text, width)),
     ["Cautions", ...cautions.map(({ text }) => bullet(text, width))].join("\n"),
   ];

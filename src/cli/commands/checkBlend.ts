@@ -6,6 +6,7 @@ import { wholeText } from "../blendText.ts";
 import type { CheckedBlend } from "../checkedBlend.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
+import { lastLine } from "../lastLine.ts";
 import type { Ports } from "../ports.ts";
 import { toJson } from "../toJson.ts";
 import { bullet, wrap } from "../wrap.ts";
@@ -26,19 +27,11 @@ function blendJson({ blend, faults, settings, stock, notes, cautions }: CheckedB
 function blendText(checked: CheckedBlend, width: number): string {
   const { blend, faults, settings, stock, notes, cautions } = checked;
   const findings = findingsOf(checked);
-  const fails = findings.filter((f) => f.verdict === "fail").length;
-  const open = findings.filter((f) => f.verdict === "not assessed").length;
-  const verdict =
-    fails > 0
-      ? `${fails} ${fails === 1 ? "CHECK" : "CHECKS"} FAILED.`
-      : open > 0
-        ? `No check failed; ${open} could not be assessed.`
-        : "No check failed.";
   const blocks = [
     `Asked\n${askedText(settings.brief, settings.given, width)}`,
     wholeText("Blend", blend, width),
     `If one thing fails\n${blendFaultsText(faults, width)}`,
-    verdict,
+    wrap(lastLine(findings, faults), width),
     ...[...inputSentences(stock), ...notes].map((text) => wrap(text, width)),
     ["Cautions", ...cautions.map(({ text }) => bullet(text, width))].join("\n"),
   ];

@@ -20,5 +20,11 @@ export function labelsCommand(brief: string | undefined, flags: SheetFlags, port
   }
   const labels = labelsOf(read.value.input);
   const text = format.value === "json" ? toJson(labels) : labelsToHtml(labels, read.value.choices.paper);
-  return writePaper({ text, what: `${labels.labels.length} labels`, output: output.value }, read.value, flags, ports);
+  const failing = "Checks FAIL: the check command says which. Do not build this bank.";
+  return writePaper(
+    { text, what: `${labels.labels.length} labels`, output: output.value, failing },
+    read.value,
+    flags,
+    ports,
+  );
 }

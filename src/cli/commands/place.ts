@@ -2,6 +2,7 @@
 
 import { visible } from "../../order/index.ts";
 import type { Refusal } from "../../quantity/index.ts";
+import { endingOf, strangeEnding } from "../chosenFormat.ts";
 import { EXIT } from "../exit.ts";
 import { faultLines } from "../inputNotes.ts";
 import { placeCsv } from "../placeCsv.ts";
@@ -48,9 +49,13 @@ function written(placed: Placed, format: Format, width: number): string {
 /** The format named, else JSON with --json on the output, else that of the file's ending, else text. */
 function readFormat({ format, json, output }: PlaceFlags): Format | Refusal {
   const toFile = output !== undefined && output !== "-";
-  const ending = toFile ? /\.([a-z]+)$/i.exec(output)?.[1]?.toLowerCase() : undefined;
+  const ending = toFile ? endingOf(output) : null;
+  if (format === undefined && ending !== null && !FORMATS.some((one) => (one === "text" ? "txt" : one) === ending))
+    return strangeEnding(output, ["csv", "json", "txt"]);
   const wanted =
-    format?.toLowerCase() ?? FORMATS.find((one) => one === ending) ?? (toFile ? "csv" : json ? "json" : "text");
+    format?.toLowerCase() ??
+    FORMATS.find((one) => (one === "text" ? "txt" : one) === ending) ??
+    (toFile ? "csv" : json ? "json" : "text");
   const found = FORMATS.find((one) => one === wanted);
   if (found !== undefined) return found;
   const want = `one of ${FORMATS.join(", ")}`;

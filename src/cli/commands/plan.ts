@@ -53,6 +53,9 @@ export function planCommand(brief: string | undefined, flags: PlanFlags, ports: 
   if (!planned.ok) return tell(ports, planned.refusals, flags.json);
   const { result, stock } = planned.value;
   tellFaults(stock, ports);
+  const { basis } = planned.value.settings.brief;
+  if (flags.risk !== undefined && basis !== "statistical")
+    ports.err(`--risk is not used: the basis is ${basis}; --basis statistical would use it.\n`);
   ports.out(flags.json ? toJson(planJson(planned.value)) : planWords(planned.value, ports.columns));
   return result.layouts.length > 0 ? EXIT.done : EXIT.unsafe;
 }
@@ -73,6 +76,10 @@ export function planFrom(brief: string | undefined, flags: PlanFlags, ports: Por
   const { parts, families } = stock.value;
   const given = { settings: settings.value, stock: stock.value, rank };
   const { basis } = settings.value.brief;
+  if (flags.measured === undefined && flags.part !== undefined) {
+    const want = "--measured beside it: it names the part of the measured units; a catalogue of one row plans one part";
+    return refused({ code: "contradiction", place: { field: "--part" }, read: JSON.stringify(flags.part), want });
+  }
   if (flags.measured !== undefined && (flags.fuses !== undefined || settings.value.brief.fused === true)) {
     const want = "fuses counted by the order or the pulse of the bank chosen; a plan on a measured lot leaves them out";
     return refused({ code: "contradiction", place: { field: "--fuses" }, read: "beside --measured", want });

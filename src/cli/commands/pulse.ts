@@ -10,6 +10,7 @@ import { EXIT } from "../exit.ts";
 import { faultsText } from "../faultsText.ts";
 import { readFuseStock } from "../fuses.ts";
 import { faultLines, inputSentences, inputsJson } from "../inputNotes.ts";
+import { lastLine } from "../lastLine.ts";
 import { findingsText } from "../layoutText.ts";
 import type { Ports } from "../ports.ts";
 import type { Nest } from "../settings.ts";
@@ -121,13 +122,6 @@ function pulseJson(fired: Fired): string {
   });
 }
 
-function verdictWords(findings: readonly Finding[]): string {
-  const fails = failed(findings);
-  const open = findings.filter(({ verdict }) => verdict === "not assessed").length;
-  if (fails > 0) return `${fails} CHECKS FAILED.`;
-  return open > 0 ? `No check failed; ${open} could not be assessed.` : "No check failed.";
-}
-
 function pulseText(fired: Fired, width: number): string {
   const { result, unit, settings, stock, report, fuse } = fired;
   const { brief, given } = settings;
@@ -143,7 +137,7 @@ function pulseText(fired: Fired, width: number): string {
     ...rateBlocks(report, width),
     `If one thing fails\n${faultsText(report.faults, width)}`,
     fuseText(fuse, width),
-    verdictWords(report.findings),
+    wrap(lastLine(report.findings, report.faults), width),
     ...[...report.notes, ...restNotes(fired), ...inputSentences(stock), ...fired.notes].map((text) =>
       wrap(`Note: ${visible(text)}`, width),
     ),

@@ -1,5 +1,6 @@
 // How long the bank takes to become harmless, from full and from each fault, by each way of emptying it alone.
 
+import { afterDumpWords } from "../afterDump.ts";
 import { cell, said, up, wait } from "../cells.ts";
 import { type Facts, factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
@@ -15,6 +16,15 @@ interface Start {
   readonly note: string;
 }
 
+/** With two chains gone; never where there were no more than two. */
+function secondOpen(facts: Facts): number | null {
+  const { capacitance, chains, voltage, clear } = facts;
+  if (capacitance === null) return null;
+  return chains <= 2
+    ? Number.POSITIVE_INFINITY
+    : waysDown({ ...facts, chains: chains - 2 }, { from: voltage, to: clear }).chains;
+}
+
 function starts(input: SheetInput, facts: Facts): readonly Start[] {
   const { layout, shot } = input;
   const { voltage, clear, highest } = facts;
@@ -22,7 +32,7 @@ function starts(input: SheetInput, facts: Facts): readonly Start[] {
   const left = shot === null ? null : Math.sqrt((2 * shot.discharge.energy.left) / shot.bank.capacitance);
   const full = at(voltage);
   const rows: Start[] = [
-    { state: "full", from: voltage, ways: full, note: "" },
+    { state: "full", from: voltage, ways: full, note: full.dump === null ? "" : afterDumpWords(input, facts) },
     {
       state: "charger ran on",
       from: highest,
@@ -59,7 +69,10 @@ function starts(input: SheetInput, facts: Facts): readonly Start[] {
       state: "after a shot, or fired early",
       from: left,
       ways: at(left),
-      note: left === null ? "no load in the brief: what a shot leaves is not known" : "what the shot leaves",
+      note:
+        left === null
+          ? "no load in the brief: what a shot leaves is not known"
+          : `what the shot leaves at the ends; ${afterDumpWords(input, facts)}`,
     },
   ];
   return layout.balance === null
@@ -69,15 +82,16 @@ function starts(input: SheetInput, facts: Facts): readonly Start[] {
         {
           state: `balancing resistor of one ${positionWord(layout)} open`,
           from: voltage,
-          ways: { ...full, chains: full.oneOpen },
-          note: "that position keeps its charge while the ends read zero: short it by hand",
+          // The column of one bleeder open is then a second one, of another chain or of none.
+          ways: { ...full, chains: full.oneOpen, oneOpen: secondOpen(facts) },
+          note: "one open already, so one more in the column beside it; that position keeps its charge while the ends read zero: short it by hand",
         },
       ];
 }
 
 export function bleedDownSection(input: SheetInput): Section {
   const facts = factsOf(input);
-  const { allowed, chains, chain, voltage, clear } = facts;
+  const { allowed, chains, chain, voltage, level } = facts;
   const back = recoveryOf(input, facts);
   const rows = starts(input, facts).map(({ state, from, ways, note }): readonly Cell[] => [
     state,
@@ -106,11 +120,11 @@ export function bleedDownSection(input: SheetInput): Section {
     title: "Bleed-down",
     blocks: [
       text(
-        `The rule that governs here: ${facts.rule}.${allowed === null ? "" : ` It allows ${cell(allowed, "time")}.`} Times are the longest: high capacitance, high resistance, none of the units' own leakage.`,
+        `The rule that governs here: ${facts.rule}.${allowed === null ? "" : ` It allows ${cell(allowed, "time")}.`} Times are the longest: high capacitance, balancing resistors at their high end, the dump resistor at its nominal resistance (no tolerance of it is stated), none of the units' own leakage.`,
       ),
       table,
       list([
-        ...againstRule(facts, waysDown(facts, { from: voltage, to: clear })),
+        ...againstRule(facts, waysDown(facts, { from: voltage, to: level })),
         chains === 0
           ? "No balancing chain: until a bleed resistor is wired in, nothing but the dump empties this bank."
           : chains === 1

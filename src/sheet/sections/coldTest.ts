@@ -1,7 +1,8 @@
 // The record of the tests at no voltage: what must be found before anything is charged, its limits, and room for the reading.
 
-import { cell, down, said, up } from "../cells.ts";
+import { cell, down, up } from "../cells.ts";
 import type { SheetInput } from "../input.ts";
+import { measuredOf } from "../measured.ts";
 import { type Cell, type Section, type Table, text } from "../model.ts";
 import { groupWord, positionsOf } from "../names.ts";
 
@@ -10,25 +11,32 @@ type Row = readonly [test: string, predicted: Cell, band: Cell];
 const band = (low: number | null, high: number | null): Cell =>
   low === null || high === null ? null : `${down(low, "capacitance")} to ${up(high, "capacitance")}`;
 
-/** Capacitance of each stage (cross-tied) or string, as it stands on the meter. */
-function groups({ layout, unit, placed }: SheetInput): readonly Row[] {
-  const { ties, series, parallel } = layout;
+/** Capacitance of each stage (cross-tied) or string, and of the bank, as it stands on the meter. */
+function capacitances(input: SheetInput): readonly Row[] {
+  const { layout, unit } = input;
   const word = groupWord(layout);
+  const measured = measuredOf(input);
+  if (measured !== null) {
+    const row = (test: string, value: number): Row => [
+      `capacitance of ${test}`,
+      cell(value, "capacitance"),
+      band(value * (1 - measured.doubt), value * (1 + measured.doubt)),
+    ];
+    return [...measured.groups.map((value, g) => row(`${word} ${g + 1}`, value)), row("the bank", measured.bank)];
+  }
+  const { ties, series, parallel, capacitance: c } = layout;
   const tied = ties === "cross-tied";
-  const count = tied ? series : parallel;
-  const bySerial = new Map(placed?.positions.map((p) => [p.serial, p.capacitance]));
-  return Array.from({ length: count }, (_, g): Row => {
-    const test = `capacitance of ${word} ${g + 1}`;
-    if (placed !== null) {
-      const values = (placed.groups[g] ?? []).map((serial) => bySerial.get(serial) ?? Number.NaN);
-      const sum = tied ? values.reduce((a, b) => a + b, 0) : 1 / values.reduce((a, b) => a + 1 / b, 0);
-      return [test, cell(sum, "capacitance"), band(sum * (1 - placed.plusMinus), sum * (1 + placed.plusMinus))];
-    }
-    const nominal = tied ? unit.capacitance * parallel : unit.capacitance / series;
-    const { tolerance } = unit;
-    const limits = tolerance === undefined ? null : band(nominal * (1 - tolerance.low), nominal * (1 + tolerance.high));
-    return [test, cell(nominal, "capacitance"), limits];
-  });
+  const { tolerance } = unit;
+  const nominal = tied ? unit.capacitance * parallel : unit.capacitance / series;
+  // Without the tolerance there is no band to accept by.
+  const limits = tolerance === undefined ? null : band(nominal * (1 - tolerance.low), nominal * (1 + tolerance.high));
+  return [
+    ...Array.from(
+      { length: tied ? series : parallel },
+      (_, g): Row => [`capacitance of ${word} ${g + 1}`, cell(nominal, "capacitance"), limits],
+    ),
+    ["capacitance of the bank", cell(c.nominal, "capacitance"), band(c.low, c.high)],
+  ];
 }
 
 /** Each balancing position, read after the meter has settled: the units beside it charge through the meter first. */
@@ -43,8 +51,7 @@ function resistors({ layout }: SheetInput): readonly Row[] {
 }
 
 export function coldTestSection(input: SheetInput): Section {
-  const { layout, unit } = input;
-  const c = layout.capacitance;
+  const { unit } = input;
   const polarity: Row[] =
     unit.polarised === false
       ? []
@@ -54,15 +61,7 @@ export function coldTestSection(input: SheetInput): Section {
     ...polarity,
     ["continuity of every joint on the wiring list", null, null],
     ["insulation, bars to frame, at full voltage", null, null],
-    ...groups(input),
-    [
-      "capacitance of the bank",
-      cell(c.nominal, "capacitance"),
-      // Without the tolerance there is no band to accept by.
-      c.low === null || c.high === null
-        ? null
-        : `${said(down(c.low, "capacitance"))} to ${said(up(c.high, "capacitance"))}`,
-    ],
+    ...capacitances(input),
     ...resistors(input),
     ["dump resistance, relay closed", cell(input.brief.dumpResistance, "resistance"), null],
     ["dump closes when its power fails", "closes", "no exception"],
@@ -92,7 +91,7 @@ export function coldTestSection(input: SheetInput): Section {
     ownPage: true,
     blocks: [
       text(
-        "Every row is done and signed before anything is charged. A resistance read beside capacitors is true only once the meter has settled. Blank limits are those of the meter, the standard or the maker: fill them in first; a test without a limit cannot pass.",
+        "Every row is done and signed before anything is charged. A resistance read beside capacitors is true only once the meter has settled. Blank limits are those of the meter, the standard or the maker: fill them in first; a test without a limit cannot pass. Bands of measured capacitances allow for the gain of the list's meter and of the one that reads (0.3 % each, assumed).",
       ),
       table,
     ],

@@ -1,8 +1,10 @@
 // One page to hang at the door: what is behind it, how long to wait, where to put the stick, whom to call.
 
 import { countsOf } from "../../order/index.ts";
+import { afterDump, afterDumpWords } from "../afterDump.ts";
 import { said, up, wait } from "../cells.ts";
 import { factsOf } from "../facts.ts";
+import { governedLines } from "../governed.ts";
 import type { SheetInput } from "../input.ts";
 import { list, type Section, type Table, text } from "../model.ts";
 import { barsOf } from "../names.ts";
@@ -29,7 +31,7 @@ export function doorSection(input: SheetInput): Section {
         facts.chain === null ? "no chain: NEVER by itself" : wait(ways.chains),
       ],
       ["with one bleeder open", facts.chain === null ? "no chain: NEVER by itself" : wait(ways.oneOpen)],
-      ["by the dump resistor alone", wait(ways.dump)],
+      ["by the dump resistor alone, at its nominal resistance", afterDump(ways.dump, input, facts)],
       ["stick points, touched in turn", `${points}: bars ${bars[0]} to ${bars[bars.length - 1]}${inner}`],
       ["responsible person", null],
       ["second person", null],
@@ -46,7 +48,9 @@ export function doorSection(input: SheetInput): Section {
       text("Stored energy kills with the supply switched off and unplugged. Nobody enters alone."),
       table,
       list([
-        "Cut the supply, take the key, wait.",
+        ...governedLines(input),
+        "Cut the supply, take the key, wait. A short wait by the dump is no leave to touch: it may not have closed.",
+        `Dump, ${afterDumpWords(input, facts)}.`,
         "Measure across the ends and across every stage with a meter rated for the full voltage.",
         "Discharge through the stick with its resistor, at every point above; measure again; then the solid short, and leave the straps on.",
         facts.stored === null

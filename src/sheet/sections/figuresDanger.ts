@@ -1,7 +1,8 @@
 // Of the ten figures those on what can hurt: stored energy, the time until it is gone, and the ways to empty the bank.
 
 import { energyClass } from "../../hazard/index.ts";
-import { cell, up, wait } from "../cells.ts";
+import { afterDump } from "../afterDump.ts";
+import { cell, said, up, wait } from "../cells.ts";
 import { factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
 import type { Cell } from "../model.ts";
@@ -37,12 +38,15 @@ function times(input: SheetInput): readonly FigureRow[] {
   const facts = factsOf(input);
   const ways = waysDown(facts, { from: facts.voltage, to: facts.clear });
   const back = recoveryOf(input, facts);
-  const allowed = facts.allowed === null ? "the rule gives no time" : `${cell(facts.allowed, "time")} allowed`;
+  const allowed =
+    facts.allowed === null
+      ? "the rule gives no time"
+      : `${cell(facts.allowed, "time")} allowed by the rule for ${said(cell(facts.level, "voltage"))}`;
   const chains = (x: number | null): Cell => (facts.chain === null ? "no chain" : wait(x));
   return [
     ["2", `time to ${clearWords(facts)}: bleed chains alone`, chains(ways.chains), allowed],
     ["2", "the same with one bleeder open", chains(ways.oneOpen), allowed],
-    ["2", "the same by the dump alone", wait(ways.dump), allowed],
+    ["2", "the same by the dump alone, nominal resistance", afterDump(ways.dump, input, facts), allowed],
     [
       "2",
       "voltage that may come back after a short",

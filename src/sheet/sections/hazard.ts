@@ -5,11 +5,12 @@
 import { dumpDuty, dumpWindow, ruleOf } from "../../hazard/index.ts";
 import { cell, said, up } from "../cells.ts";
 import { type Facts, factsOf } from "../facts.ts";
+import { governedLines } from "../governed.ts";
 import type { SheetInput } from "../input.ts";
 import { type Block, list, type Section, text } from "../model.ts";
 import { rangeWords, recoveryOf } from "../recovery.ts";
 import { READ, ruleName } from "../rules.ts";
-import { pathCount } from "../ways.ts";
+import { clearWords, pathCount } from "../ways.ts";
 import { clearanceBlocks } from "./clearances.ts";
 import { classTable } from "./hazardClasses.ts";
 import { ruleTable } from "./hazardRules.ts";
@@ -24,7 +25,7 @@ function dumpBlock({ capacitance, voltage, clear, allowed, dump, stored }: Facts
       `Dump resistor of ${cell(dump, "resistance")}: ${up(duty.energy, "energy")} in one go, ${up(duty.peakCurrent, "current")} and ${up(duty.peakVoltage, "voltage")} at its first moment, ${up(duty.peakPower, "power")} for that moment, time constant ${up(duty.timeConstant, "time")}. ${needs}`,
     );
   }
-  if (allowed === null || !Number.isFinite(clear))
+  if (allowed === null)
     return text(`Dump resistor: its resistance is blank, and the governing rule gives no time to size it by. ${needs}`);
   const window = dumpWindow({
     capacitance,
@@ -44,7 +45,7 @@ export function hazardSection(input: SheetInput): Section {
   const paths = pathCount(facts);
   const governs =
     input.rule === null
-      ? `No rule was chosen: ${facts.rule}, ${cell(input.brief.touchSafe, "voltage")}, governs the times on this sheet. The person responsible chooses the rule that applies.`
+      ? `No rule was chosen: the times on this sheet go down to ${clearWords(facts)}. The person responsible chooses the rule that applies.`
       : `${ruleName(input.rule)} governs the times on this sheet, by the user's choice (${READ[ruleOf(input.rule).tag]}). Whether it is the right rule for this place is for the person responsible to say.`;
   return {
     id: "hazard",
@@ -52,6 +53,7 @@ export function hazardSection(input: SheetInput): Section {
     ownPage: true,
     blocks: [
       text(governs),
+      ...governedLines(input).map((line) => text(line)),
       classTable(facts),
       text(
         back === null

@@ -15,6 +15,17 @@ const volts = (value: number, side: "up" | "down"): string => {
   return rounded.toFixed(1);
 };
 
+/** Of the measured units in their places; the worst case of the tolerance stands beside it, as nobody may forget it where leakage was not measured. */
+function holdingWords({ layout, placed }: SheetInput): string {
+  const whole = up(layout.share.holding, "voltage");
+  const worst = `the worst unit while holding is predicted at ${whole ?? "______ (leakage or tolerance not known)"}`;
+  if (placed === null) return worst;
+  const here = up(placed.holding, "voltage");
+  return here === null
+    ? `${worst}, by the whole tolerance: leakage was not measured on every unit`
+    : `the worst unit while holding, of the measured units in their places, is predicted at ${here}`;
+}
+
 export function hotTestSection(input: SheetInput): Section {
   const { layout, brief, placed } = input;
   const rows = predictedShares(input);
@@ -78,7 +89,7 @@ export function hotTestSection(input: SheetInput): Section {
         "A reading out of its band ends the test: dump, short, and find out why. The commission command reads the readings and says which unit is suspect.",
         `No unit may pass ${cell(layout.share.limit, "voltage", "down")}, whatever its band says.`,
         "Then a ring test into a known load, and the real load at the lowest step first. Predicted and measured figures stand side by side among the ten figures.",
-        `Hold at 100 %: ${Number.isFinite(brief.hold) ? cell(brief.hold, "time") : "until nothing moves any more"}; the worst unit while holding is predicted at ${up(layout.share.holding, "voltage") ?? "______ (leakage or tolerance not known)"}.`,
+        `Hold at 100 %: ${Number.isFinite(brief.hold) ? cell(brief.hold, "time") : "until nothing moves any more"}; ${holdingWords(input)}.`,
       ]),
       steps,
       table,

@@ -61,7 +61,10 @@ function figures(input: SheetInput): Table {
           ? "none"
           : `${cell(balance.resistance, "resistance")} across each ${tied ? "stage" : "unit"}, ${balance.positions} positions`,
       ],
-      ["bleed to touch-safe by the chains", balance === null ? "no chain empties it" : wait(layout.bleed.seconds)],
+      [
+        `bleed to ${said(cell(layout.bleed.toVoltage, "voltage"))} by the chains`,
+        balance === null ? "no chain empties it" : wait(layout.bleed.seconds),
+      ],
       ["volume and mass of the units", `${said(cell(layout.volume, "volume"))}, ${said(cell(layout.mass, "mass"))}`],
       ["purchase cost of units and resistors", cost(layout)],
     ],
@@ -134,14 +137,17 @@ function why({ layout, alternatives, alternativesOpen }: SheetInput): readonly B
 }
 
 /** A bank that fails is not to be built: it is said before anything else. */
-function verdict({ words }: SheetInput): string {
+function verdict({ words, faults }: SheetInput): string {
   const fails = words.findings.filter((f) => f.verdict === "fail").map((f) => f.title);
   const open = words.findings.filter((f) => f.verdict === "not assessed").map((f) => f.title);
   const failed =
     fails.length > 0 ? `DO NOT BUILD: ${fails.length} checks fail (${fails.join("; ")}). ` : "No check failed. ";
   const blank =
     open.length > 0 ? `Not assessed, which is not a pass: ${open.join("; ")}.` : "Every check was assessed.";
-  return `${failed}${blank}`;
+  const bad = faults.filter((f) => f.verdict === "fail").map((f) => f.id.replaceAll("-", " "));
+  const faulted =
+    bad.length > 0 ? ` OF THE FAULTS ${bad.length} FAIL (${bad.join("; ")}): see Faults for what stops each.` : "";
+  return `${failed}${blank}${faulted}`;
 }
 
 export function layoutSection(input: SheetInput): Section {

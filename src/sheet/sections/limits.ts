@@ -1,10 +1,11 @@
 // What the finished bank may be used at: the figures that nobody on shift may pass.
 
+import { afterDump } from "../afterDump.ts";
 import { cell, down, up, wait } from "../cells.ts";
 import { factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
 import { type Cell, type Section, type Table, text } from "../model.ts";
-import { waysDown } from "../ways.ts";
+import { clearWords, waysDown } from "../ways.ts";
 
 /** Shots an hour that the charger keeps up with, rounded down; null without a charger or a load. */
 const hourly = ({ shot }: SheetInput): Cell =>
@@ -20,8 +21,8 @@ export function limitRows(input: SheetInput): readonly (readonly [string, Cell, 
     ["highest voltage of any unit", down(layout.share.limit, "voltage"), "derating in it"],
     ["longest hold", Number.isFinite(brief.hold) ? cell(brief.hold, "time") : "for ever", "as asked"],
     [
-      "reversal of the voltage, predicted",
-      up(shot?.discharge.unit.reversal, "fraction"),
+      "reversal of the voltage, predicted, high end of the spread, the worst unit",
+      up(worstReversal(shot), "fraction"),
       unit.reversal === undefined ? "the unit's limit is not known" : `unit's limit ${cell(unit.reversal, "fraction")}`,
     ],
     [
@@ -37,8 +38,16 @@ export function limitRows(input: SheetInput): readonly (readonly [string, Cell, 
     ["rate asked", brief.rate === undefined ? null : `${Number((brief.rate * 3600).toPrecision(4))} an hour`, ""],
     ["ambient", brief.ambient === undefined ? null : cell(brief.ambient, "temperature"), ""],
     ["rated shots of a unit", life === null ? null : String(life), "at its ratings; replace by then"],
-    ["wait before approach, bleed chains alone", facts.chain === null ? "no chain" : wait(ways.chains), "then measure"],
-    ["wait before approach, dump alone", wait(ways.dump), "then measure"],
+    [
+      "wait before approach, bleed chains alone",
+      facts.chain === null ? "no chain" : wait(ways.chains),
+      `to ${clearWords(facts)}; then measure`,
+    ],
+    [
+      "wait before approach, dump alone",
+      afterDump(ways.dump, input, facts),
+      `to ${clearWords(facts)}, nominal dump resistance`,
+    ],
   ];
 }
 
@@ -58,4 +67,11 @@ export function limitsSection(input: SheetInput): Section {
       table,
     ],
   };
+}
+
+/** The unit's own where its place on the bus counts, never below the high end of the bank's. */
+function worstReversal(shot: SheetInput["shot"]): number | undefined {
+  if (shot === null || shot === undefined) return undefined;
+  const bank = shot.envelope.reversal.high ?? shot.discharge.reversal;
+  return Math.max(bank, shot.discharge.unit.reversal ?? 0);
 }

@@ -47,7 +47,8 @@ function barTable({ layout, unit }: SheetInput, wires: readonly Wire[], carried:
 
 export function wiringSection(input: SheetInput): Section {
   const carried = carriedOf(input);
-  const wires = wiresOf(schematicOf(input), carried);
+  const schematic = schematicOf(input);
+  const wires = wiresOf(schematic, carried);
   const { layout } = input;
   const bars = barsOf(layout);
   const elements = layout.balance?.elements ?? 0;
@@ -79,6 +80,11 @@ export function wiringSection(input: SheetInput): Section {
         carried === null
           ? "Conductor of bars and unit leads: blank, because no action integral is known without a load in the brief. It blocks the choice of section."
           : `Conductor: the least copper that warms by ${WARMING} K in one whole shot, as on the order (common practice, no source). A fault may carry more; repeated shots need more. Blank: chosen by strength, insulated for the full voltage.`,
+        ...(schematic.fuse === null
+          ? [
+              "No fuse stands in this list: none is chosen. Where fuses are fitted, each goes between the + of its unit (or the top unit of its string) and the point above: put them in a new list with --fuses before anything is joined.",
+            ]
+          : []),
         ...(elements > 1
           ? [
               `Each RB is made beforehand of ${elements} equal elements, joined end to end on its mount: ${elements - 1} joints in each.`,

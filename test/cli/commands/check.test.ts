@@ -65,7 +65,7 @@ describe("check as text", () => {
     const { status, out } = check({ ...FLAGS, voltage: "2 kV" });
     expect(status).toBe(1);
     expect(out).toMatch(/FAIL {2,}worst unit while charging/);
-    expect(out).toMatch(/CHECKS FAILED/);
+    expect(out).toMatch(/^1 CHECK FAILED\. OF THE FAULTS 7 FAIL, 1 could not be assessed\.$/m);
   });
 
   test("unknown tolerance is not assessed, and no pass", () => {

@@ -170,3 +170,13 @@ describe("plan --fuses", () => {
     expect([beside.status, beside.err]).toEqual([2, expect.stringMatching(/--fuses/)]);
   });
 });
+
+describe("plan and flags that would be ignored", () => {
+  test("--part without --measured is refused", () => {
+    expect(plan(BRIEF, { part: "lab-pf-330-360" })).toMatchObject({ status: 2, err: expect.stringMatching(/--part/) });
+  });
+  test("--risk beside the worst case is said not to be used", () => {
+    const { status, err } = plan(BRIEF, { risk: "1 %", limit: "1", catalog: [SMALL] });
+    expect([status, err]).toEqual([0, expect.stringMatching(/--risk is not used: the basis is worst case/)]);
+  });
+});

@@ -73,6 +73,19 @@ describe("bleedDownSection(input)", () => {
     expect(tableOf({ sections: [bleedDownSection(single)] }, "bleed-down").rows[0]?.[2]).toBe("no chain");
   });
 
+  test("after a shot the units may keep their own; a second open bleeder of one chain is never; the dump is nominal", () => {
+    const found = rows({ brief: { ...LOAD, hold: "30 s" } });
+    expect(found.get("after a shot, or fired early")?.at(-1)).toMatch(/units may keep 103 V/);
+    const section = bleedDownSection(sheetInput({ shape: { ties: "strings", parallel: 2 } }));
+    const open = tableOf({ sections: [section] }, "bleed-down").rows.find(([name]) =>
+      name?.includes("of one unit open"),
+    );
+    // Two chains: one open is the row, a second the column.
+    expect(open?.[3]).toBe("never");
+    expect(open?.[2]).not.toBe("never");
+    expect(wordsIn(section)).toMatch(/the dump resistor at its nominal resistance/);
+  });
+
   test("the rule that governs is named with its time, and what comes back after a short", () => {
     const section = bleedDownSection(sheetInput({ rule: "iec-60204-residual" }));
     expect(wordsIn(section)).toMatch(/IEC 60204-1 6\.2\.4, second hand\. It allows 5 s\./);

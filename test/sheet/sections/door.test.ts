@@ -18,6 +18,26 @@ describe("doorSection(input)", () => {
     );
   });
 
+  test.each([{ rule: "lbnl-thermal" }, { rule: "iec-61010-energy" }, { brief: { touchSafe: "5 kV" } }] as const)(
+    "no wait of 0 s at a charged bank, with %o",
+    (wishes) => {
+      const found = rows({
+        ...wishes,
+        brief: { dumpResistance: "1 kohm", hold: "30 s", ...("brief" in wishes ? wishes.brief : {}) },
+      });
+      const waits = [...found].filter(([name]) => name?.startsWith("wait for") || name?.startsWith("by the dump"));
+      expect(waits).toHaveLength(2);
+      expect(waits[0]?.[0]).toMatch(/^wait for 60 V \(touch-safe by default; /);
+      for (const [, value] of waits) expect(value).not.toMatch(/^0 s/);
+      expect(waits[1]?.[1]).toMatch(/^1\.052 s, then measure each unit and short it: units may keep 103 V/);
+    },
+  );
+
+  test("a rule out of its scope is said on the door", () => {
+    expect(wordsIn(doorSection(sheetInput({ rule: "nec-460-6" })))).toMatch(/out of its scope/);
+    expect(wordsIn(doorSection(sheetInput({ rule: "nec-460-28" })))).not.toMatch(/out of its scope/);
+  });
+
   test("people and places are lines to fill in", () => {
     const found = rows({});
     for (const name of ["responsible person", "second person", "emergency call", "where the stick hangs"])

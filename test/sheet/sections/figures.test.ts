@@ -1,6 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { figuresSection } from "../../../src/sheet/sections/figures.ts";
-import { BARE, LOAD, sheetInput, tableOf } from "../../support/sheet.ts";
+import { BARE, LOAD, placedIn, RATED, sheetInput, tableOf } from "../../support/sheet.ts";
 
 const rows = (wishes: Parameters<typeof sheetInput>[0] = {}) =>
   tableOf({ sections: [figuresSection(sheetInput(wishes))] }, "ten-figures").rows;
@@ -35,6 +35,28 @@ describe("figuresSection(input)", () => {
     expect(value(/charger run on/)?.slice(2)).toEqual([null, "the charger's highest voltage is not known"]);
     expect(value(/^reversal/)?.slice(2)).toEqual([null, "needs a load in the brief"]);
     expect(value(/peak fault current/, { unit: BARE })?.[2]).toBeNull();
+  });
+
+  test("measured units: bank capacitance, peak and bleed time follow from them", () => {
+    const bare = sheetInput({ brief: LOAD });
+    const placed = placedIn(bare);
+    const positions = placed.positions.map((p) => ({ ...p, capacitance: 1.1e-3 }));
+    const input = { ...bare, placed: { ...placed, positions } };
+    const of = (from: typeof bare) =>
+      tableOf({ sections: [figuresSection(from)] }, "ten-figures").rows.filter((row) => row[0] === "9");
+    const [nominal, measured] = [of(bare), of(input)];
+    // 1.1 mF each, 2 in parallel, 8 in series.
+    expect(measured[0]?.slice(1, 3)).toEqual(["capacitance, predicted from the measured units", "275 µF"]);
+    const heavier = sheetInput({ brief: LOAD, unit: { ...RATED, capacitance: 1.1e-3 } }).shot!.discharge.peakCurrent;
+    expect(Number.parseFloat(measured[3]![2]!)).toBeCloseTo(heavier / 1000, 2);
+    const seconds = (rows: typeof nominal) => Number.parseFloat(rows[4]![2]!);
+    expect(seconds(measured) / seconds(nominal)).toBeCloseTo(1.1, 3);
+  });
+
+  test("the bank's resistance follows from the units' ESR with no load in the brief", () => {
+    // 50 mohm, 8 in series, 2 in parallel.
+    expect(value(/^resistance of the bank/)?.[2]).toBe("200 mohm");
+    expect(value(/^resistance of the bank/, { unit: BARE })?.[2]).toBeNull();
   });
 
   test("predictions to be compared have room for the reading", () => {

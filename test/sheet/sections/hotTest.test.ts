@@ -31,6 +31,17 @@ describe("hotTestSection(input)", () => {
     expect(high).toBeCloseTo(((2000 * 1.2) / 6.8) * 1.005 + 0.1, 0);
   });
 
+  test("the holding prediction is that of the measured units; without their leakage the worst case, and that is said", () => {
+    const bare = sheetInput();
+    const placed = placedIn(bare);
+    expect(wordsIn(hotTestSection({ ...bare, placed }))).toMatch(
+      /measured units in their places, is predicted at 260 V/,
+    );
+    const open = wordsIn(hotTestSection({ ...bare, placed: { ...placed, holding: null } }));
+    expect(open).toMatch(/by the whole tolerance: leakage was not measured on every unit/);
+    expect(open).not.toMatch(/260 V/);
+  });
+
   test("strings are read unit by unit", () => {
     expect(bands(sheetInput({ shape: { ties: "strings" } })).map((row) => row[0])).toContain("C2.8");
   });

@@ -48,7 +48,18 @@ describe("layoutSection(input)", () => {
         /^DO NOT BUILD: 1 checks fail \(a fail\)\. Not assessed, which is not a pass: a not assessed\./,
       ),
     });
-    expect(layoutSection(input).blocks[0]).toMatchObject({ text: "No check failed. Every check was assessed." });
+    expect(layoutSection({ ...input, faults: [] }).blocks[0]).toMatchObject({
+      text: "No check failed. Every check was assessed.",
+    });
+  });
+
+  test("faults that fail are counted beside the checks", () => {
+    const fault = { ...input.faults[0]!, verdict: "fail" as const, id: "unit-short" as const };
+    const text = (faults: typeof input.faults) => layoutSection({ ...input, faults }).blocks[0];
+    expect(text([fault])).toMatchObject({
+      text: expect.stringMatching(/^No check failed.*OF THE FAULTS 1 FAIL \(unit short\)/),
+    });
+    expect(text([{ ...fault, verdict: "warn" }])).not.toMatchObject({ text: expect.stringMatching(/FAULTS/) });
   });
 
   test("figures as assessed; unknown ones are blanks or said to be unknown", () => {

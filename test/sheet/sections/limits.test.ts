@@ -11,7 +11,7 @@ describe("limitRows(input)", () => {
     expect(found.get("highest charge voltage, with overshoot")).toBe("2 kV");
     expect(found.get("highest voltage of any unit")).toBe("360 V");
     expect(found.get("longest hold")).toBe("30 s");
-    expect(found.get("wait before approach, dump alone")).toBe("1.052 s");
+    expect(found.get("wait before approach, dump alone")).toMatch(/^1\.052 s, then measure each unit/);
     expect(found.get("wait before approach, bleed chains alone")).toMatch(/ (s|min|h)$/);
   });
 
@@ -24,6 +24,16 @@ describe("limitRows(input)", () => {
     expect(of({}).get("fastest rate by the charger")).toBeNull();
     expect(of({}).get("peak current, predicted")).toBeNull();
     expect(of({ brief: { rate: "0.01 Hz", ambient: "25 degC" } }).get("rate asked")).toBe("36 an hour");
+  });
+
+  test("reversal is the high end of its spread and says so; no rule makes a wait of nought", () => {
+    const input = sheetInput({ brief: LOAD });
+    const [name, value] = limitRows(input).find(([label]) => label.startsWith("reversal"))!;
+    expect(name).toMatch(/high end of the spread/);
+    expect(Number.parseFloat(value ?? "")).toBeGreaterThanOrEqual(input.shot!.envelope.reversal.high! * 100 - 1e-9);
+    const lax = of({ rule: "lbnl-thermal", brief: { dumpResistance: "1 kohm" } });
+    for (const way of ["dump alone", "bleed chains alone"])
+      expect(lax.get(`wait before approach, ${way}`)).not.toMatch(/^0 s/);
   });
 
   test("limitsSection(input) says that a blank is not no limit", () => {

@@ -203,4 +203,8 @@ describe("wiringSection(input)", () => {
     expect(tableOf({ sections: [section] }, "bars").rows[0]?.[3]).toBe(order);
     expect(wordsIn(wiringSection(sheetInput()))).toMatch(/no action integral is known without a load/);
   });
+
+  test("without a fuse chosen it is said that none stands in the list; with one they do", () => {
+    expect(wordsIn(wiringSection(sheetInput()))).toMatch(/No fuse stands in this list: none is chosen/);
+  });
 });
