@@ -15,7 +15,7 @@ import { type FiniteHold, holdHighest, holdWorst, largestBalanceForHold } from "
 import { holdingLine, holdingWorst, largestBalance } from "./share.ts";
 
 /** More elements than this in one position is no balancing resistor that anyone builds. */
-const MOST_ELEMENTS = 100_000;
+export const MOST_ELEMENTS = 100_000;
 
 /** A chosen resistor of one position. */
 export interface Choice {

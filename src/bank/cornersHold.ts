@@ -20,6 +20,7 @@
  * Source: [methods-derived] 1.2, 2.2, 2.4 made a function of time
  */
 import { courseOf } from "./course.ts";
+import { holdModes } from "./holdModes.ts";
 
 export interface HoldCase {
   readonly n: number;
@@ -69,7 +70,7 @@ export function worstAtHold(given: HoldCase): HoldWorst {
   return best;
 }
 
-interface HoldConstants {
+export interface HoldConstants {
   /** Stage capacitances, F. */
   readonly victim: number;
   readonly low: number;
@@ -80,7 +81,8 @@ interface HoldConstants {
   readonly drain: number;
 }
 
-function holdConstants({ m, C, tLow, tHigh, leakage, insulation, R, q, victim }: HoldCase): HoldConstants {
+/** The corner sides of a case in SI. */
+export function holdConstants({ m, C, tLow, tHigh, leakage, insulation, R, q, victim }: HoldCase): HoldConstants {
   return {
     victim: (victim?.units ?? m) * C * (1 - tLow),
     low: m * C * (1 - tLow),
@@ -94,69 +96,27 @@ function holdConstants({ m, C, tLow, tHigh, leakage, insulation, R, q, victim }:
 /** The victim's highest voltage with `lowOthers` of the others at the least capacitance. */
 function ofMix(given: HoldCase, at: HoldConstants, lowOthers: number): HoldWorst {
   const { n, V, hold } = given;
-  const { keep, slack, drain } = at;
-  const wv = 1 / at.victim;
-  const wl = 1 / at.low;
-  const wh = 1 / at.high;
   const highOthers = n - 1 - lowOthers;
-  const sum = wv + highOthers * wh + lowOthers * wl;
-  const v = (V * wv) / sum;
-  const h = (V * wh) / sum;
-  const l = (V * wl) / sum;
-  // Currents out of each kind of stage, then the current that holds the ends.
-  const outVictim = keep * v;
-  const outHigh = slack * h + drain;
-  const outLow = slack * l + drain;
-  const feed = (wv * outVictim + highOthers * wh * outHigh + lowOthers * wl * outLow) / sum;
-  const dv = wv * (feed - outVictim);
-  const dh = wh * (feed - outHigh);
-  const dl = wl * (feed - outLow);
-  const feedSlope = (wv * keep * dv + highOthers * wh * slack * dh + lowOthers * wl * slack * dl) / sum;
-  const bend = wv * (feedSlope - keep * dv);
-  // Modes: wv/(dV - x) + highOthers wh/(dH - x) + lowOthers wl/(dL - x) = 0, a quadratic in x.
-  const rateV = keep * wv;
-  const rateH = slack * wh;
-  const rateL = slack * wl;
-  const wH = highOthers * wh;
-  const wL = lowOthers * wl;
-  const half = (wv * (rateH + rateL) + wH * (rateV + rateL) + wL * (rateV + rateH)) / (2 * sum);
-  const product = (wv * rateH * rateL + wH * rateV * rateL + wL * rateV * rateH) / sum;
-  const fast = half + Math.sqrt(Math.max(0, half * half - product));
-  const slow = fast === 0 ? 0 : product / fast;
-  const victimAt = (t: number): number => v + dv * rise(slow, t) + (bend + slow * dv) * secondRise(slow, fast, t);
-  const bendHigh = wh * (feedSlope - slack * dh);
-  const bendLow = wl * (feedSlope - slack * dl);
-  const end = victimAt(hold);
-  const dry =
-    drain > 0 &&
-    ((highOthers > 0 && h + dh * rise(slow, hold) + (bendHigh + slow * dh) * secondRise(slow, fast, hold) < 0) ||
-      (lowOthers > 0 && l + dl * rise(slow, hold) + (bendLow + slow * dl) * secondRise(slow, fast, hold) < 0));
+  const { start, oneAt, highAt, lowAt, turn } = holdModes({
+    voltage: V,
+    one: at.victim,
+    low: at.low,
+    high: at.high,
+    own: { conductance: at.keep, leakage: 0 },
+    others: { conductance: at.slack, leakage: at.drain },
+    highOthers,
+    lowOthers,
+  });
+  const dry = at.drain > 0 && ((highOthers > 0 && highAt(hold) < 0) || (lowOthers > 0 && lowAt(hold) < 0));
   if (dry)
     return lowOthers === 0 || highOthers === 0
       ? { voltage: V, seconds: hold, lowOthers }
       : exactMix(given, at, lowOthers);
-  let found = end > v ? { voltage: end, seconds: hold, lowOthers } : { voltage: v, seconds: 0, lowOthers };
-  // The slope is dv e^(-slow t) plus (bend + slow dv) times a second part: it can change sign once.
-  if (fast > slow) {
-    const late = (bend + fast * dv) / (fast - slow);
-    const turn = Math.log(1 - dv / late) / (fast - slow);
-    if (turn > 0 && turn < hold) {
-      const voltage = victimAt(turn);
-      if (voltage > found.voltage) found = { voltage, seconds: turn, lowOthers };
-    }
-  }
-  return found;
-}
-
-/** (1 - exp(-x t))/x, t at x = 0. */
-const rise = (x: number, t: number): number => (x === 0 ? t : -Math.expm1(-x * t) / x);
-
-/** (rise(a) - rise(b))/(b - a) for a <= b, kept exact when they meet. */
-function secondRise(a: number, b: number, t: number): number {
-  const gap = (b - a) * t;
-  if (gap > 1e-5) return (rise(a, t) - rise(b, t)) / (b - a);
-  const x = ((a + b) / 2) * t;
-  return x < 1e-5 ? t * t * (0.5 - x / 3) : (t * t * (-Math.expm1(-x) - x * Math.exp(-x))) / (x * x);
+  const end = oneAt(hold);
+  const found = end > start ? { voltage: end, seconds: hold, lowOthers } : { voltage: start, seconds: 0, lowOthers };
+  if (turn === null || turn >= hold) return found;
+  const voltage = oneAt(turn);
+  return voltage > found.voltage ? { voltage, seconds: turn, lowOthers } : found;
 }
 
 /** A mix in which some stage runs dry before the hold ends. */

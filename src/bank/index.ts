@@ -1,5 +1,5 @@
 // An arrangement at rest: its name, energy, shares and balancing resistors.
-export { type Choice, chooseBalance, elementPower, leastHolding, surelyChooses } from "./balance.ts";
+export { type Choice, chooseBalance, elementPower, leastHolding, MOST_ELEMENTS, surelyChooses } from "./balance.ts";
 export {
   type Chain,
   type ChainUnit,
@@ -31,6 +31,7 @@ export { type Layout, layoutId, plainTies, shapeOf, type Ties, unitCount } from 
 export { type Cause, type CauseShare, type MarginCase, type Margins, marginCauses } from "./margins.ts";
 export { CHUNK, type Counts, countedRisk, mergedCounts, monteCarlo, monteCarloChunk } from "./monteCarlo.ts";
 export { type Residual, residualAfterDump } from "./residual.ts";
+export { type ReversedHold, reversedByHold, reversedMix } from "./reversedHold.ts";
 export {
   chargingLeast,
   chargingWorst,

@@ -7,7 +7,7 @@ export {
   type ValueState,
 } from "./capacitor.ts";
 export type { PriceBreak } from "./cell.ts";
-export type { Column } from "./column.ts";
+export { type Column, PURCHASE_COLUMNS } from "./column.ts";
 export { readRecords, separatorOf } from "./csv.ts";
 export { type Fuse, type FuseCatalogue, readFuses } from "./fuse.ts";
 export { type History, type HistoryRow, readHistory } from "./history.ts";

@@ -19,7 +19,7 @@ interface Asked {
   readonly label: string;
   /** Key of the brief, or several that one line tells. */
   readonly key: string | readonly string[];
-  readonly value: (brief: Brief) => string | null;
+  readonly value: (brief: Brief, lot: number | null) => string | null;
 }
 
 const show = (x: number | undefined, dimension: Dimension): string | null =>
@@ -42,8 +42,11 @@ const ASKED: readonly Asked[] = [
   {
     label: "basis",
     key: "basis",
-    value: (b) =>
-      b.basis === "statistical" ? `statistical, risk ${b.risk}, ${b.distribution} within the tolerance` : b.basis,
+    value: (b, lot) => {
+      if (b.basis !== "statistical") return b.basis;
+      const spread = lot === null ? `${b.distribution} within the tolerance` : `drawn from the ${lot} measured units`;
+      return `statistical, risk ${b.risk}, ${spread}`;
+    },
   },
   { label: "derating", key: "derating", value: (b) => show(b.derating, "fraction") },
   { label: "overshoot", key: "overshoot", value: (b) => show(b.overshoot, "fraction") },
@@ -90,17 +93,17 @@ export interface AskedLine {
   readonly given: boolean;
 }
 
-/** The brief as lines of words; what it does not have is left out. */
-export const askedLines = (brief: Brief, given: ReadonlySet<string>): readonly AskedLine[] =>
+/** The brief as lines of words; what it does not have is left out. `lot`: measured units that stand in for the tolerance. */
+export const askedLines = (brief: Brief, given: ReadonlySet<string>, lot: number | null = null): readonly AskedLine[] =>
   ASKED.flatMap(({ label, key, value }) => {
-    const text = value(brief);
+    const text = value(brief, lot);
     const keys = typeof key === "string" ? [key] : key;
     return text === null ? [] : [{ label, value: text, given: keys.some((one) => given.has(one)) }];
   });
 
 /** The brief in lines; the defaults together in the last. */
-export function askedText(brief: Brief, given: ReadonlySet<string>, width: number): string {
-  const asked = askedLines(brief, given);
+export function askedText(brief: Brief, given: ReadonlySet<string>, width: number, lot: number | null = null): string {
+  const asked = askedLines(brief, given, lot);
   const lines = asked
     .filter((line) => line.given)
     .map(({ label, value }) => wrap(`${pad(label, 20)} ${value}`, width, "  "));

@@ -39,6 +39,8 @@ export interface SheetWishes {
 /** Version of a placing in JSON, as place writes it. */
 export const PLACING_VERSION = 1;
 
+const SHEETS = "the JSON of place (place ... --json), or one layout of plan or check, not the sheet made from it";
+
 type Facts = Readonly<Record<string, unknown>>;
 
 const isFacts = (value: unknown): value is Facts =>
@@ -60,14 +62,14 @@ export function readSheet(path: string, wishes: SheetWishes, files: Files): Read
   if (!json.ok) return json;
   const no = (read: string, want: string): Read<never> => refused({ code: "bad-sheet", place: { file }, read, want });
   const facts = json.value.value;
-  if (!isFacts(facts)) return no("no object", "the JSON of place, or one layout of plan or check");
+  if (!isFacts(facts)) return no("no object", SHEETS);
   const newest = Array.isArray(facts.groups) ? PLACING_VERSION : LAYOUT_VERSION;
   const place = { ...(json.value.placeOf("version") ?? { file }), field: "version" };
   const old = versionFault({ found: facts.version, newest, place });
   if (old !== null) return refused(old);
   const { series, parallel, ties } = facts;
   const whole = (n: unknown): n is number => Number.isInteger(n) && (n as number) >= 1 && (n as number) <= 1e6;
-  if (!whole(series) || !whole(parallel)) return no("no series and parallel", "whole numbers from 1");
+  if (!whole(series) || !whole(parallel)) return no(`no series and parallel from 1 in it`, SHEETS);
   if (ties !== "cross-tied" && ties !== "strings")
     return no(JSON.stringify(ties) ?? "nothing", "cross-tied or strings");
   const shape: Shape = { series, parallel, ties };
@@ -130,8 +132,7 @@ function fromPlacing(facts: Facts, shape: Shape, wishes: SheetWishes, no: No): R
 function fromLayout(facts: Facts, shape: Shape, wishes: SheetWishes, no: No): Read<BankSheet> {
   const { capacitance, share, balance } = facts;
   const bank = isFacts(capacitance) ? numberOr(capacitance.nominal) : null;
-  if (bank === null || !isFacts(capacitance))
-    return no("no capacitance", "the JSON of place, or one layout of plan or check");
+  if (bank === null || !isFacts(capacitance)) return no("no capacitance", SHEETS);
   const { series, parallel, ties } = shape;
   const low = numberOr(capacitance.low) ?? bank;
   const high = numberOr(capacitance.high) ?? bank;

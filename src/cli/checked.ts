@@ -1,7 +1,8 @@
 // The bank that `check` and `order` are about: inputs read, part found, layout assessed.
 
+import { MOST_ELEMENTS } from "../bank/index.ts";
 import type { Capacitor, ResistorFamily } from "../catalog/index.ts";
-import { accepted, type Read, refused } from "../quantity/index.ts";
+import { accepted, formatQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { assess, type BalanceWish, type LayoutResult, planCurrency } from "../search/index.ts";
 import { type LayoutFlags, type LayoutInput, readLayout } from "./layoutInput.ts";
 import { readLot } from "./measuredLot.ts";
@@ -68,6 +69,8 @@ export function checkedBank(
       ...values,
     });
   const { result, notes } = balanced(input.value, families, flags.balanceTolerance !== undefined, of);
+  const absurd = tooManyElements(result, flags);
+  if (absurd !== null) return refused(absurd);
   return accepted({
     result,
     unit: unit.value,
@@ -136,4 +139,17 @@ function balanced(
   const note =
     "The resistor is the one of the layout's file; by this brief and these families another would be chosen.";
   return { result: fixedAmong({ kind: "fixed", resistance, tolerance }, families, family, of), notes: [note] };
+}
+
+/** A resistor that nobody can build: so low that its watts take more elements than any position has. */
+function tooManyElements({ balance }: LayoutResult, { balance: given, layout }: BankFlags): Refusal | null {
+  if (balance === null || balance.elements <= MOST_ELEMENTS) return null;
+  // At so low a resistance the voltage across it is the even share, and the count goes as 1/R.
+  const least = formatQuantity((balance.resistance * balance.elements) / MOST_ELEMENTS, "resistance", {
+    digits: 3,
+    rounding: "up",
+  });
+  const field = given === undefined && layout !== undefined ? `${layout} balance` : "--balance";
+  const read = `${given === undefined ? `${balance.resistance} ohm` : JSON.stringify(given)}, more than ${MOST_ELEMENTS} elements in one position`;
+  return { code: "bad-balance", place: { field }, read, want: `${least} or more here, or none` };
 }

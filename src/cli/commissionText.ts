@@ -54,6 +54,8 @@ export function nextWords({ next, verdict }: Pick<Commissioned, "next" | "verdic
     }
     case "read after a hold":
       return `read every stage again after a hold of ${formatQuantity(next.seconds, "time", { digits: 2 })}: leakage has not had time to show`;
+    case "check the meter":
+      return "treat the bank as charged; check the meter and its leads on a known source of about the stage voltage, then read every stage again, each across its own two terminals";
     case "with the bank dead":
       return `discharge, prove every stage dead, then at ${where} ${MEASURES[next.measure]}`;
     case "change the leads and read again":
@@ -80,14 +82,15 @@ function suspectsText({ suspects, unexplained, sound }: Commissioned, width: num
       width,
     );
   });
-  const open = unexplained
-    ? [
-        bullet(
-          "No single fault explains these readings: more than one thing is wrong, or the sheet is not of this bank.",
-          width,
-        ),
-      ]
-    : [];
+  const open =
+    unexplained && suspects.length > 0
+      ? [
+          bullet(
+            "No single fault explains these readings: more than one thing is wrong, or the sheet is not of this bank.",
+            width,
+          ),
+        ]
+      : [];
   return [`Likelihoods by the meter, nothing wrong ${chance(sound)}`, ...lines, ...open].join("\n");
 }
 

@@ -1,7 +1,7 @@
 // The corner behind each worst case, a line each.
 
 import { formatQuantity } from "../quantity/index.ts";
-import type { BankCorners, CornerFact } from "../search/index.ts";
+import { type BankCorners, type CornerFact, heldWords } from "../search/index.ts";
 import { hanging } from "./layoutText.ts";
 
 /** Labels and texts; what is not assessed is left to its finding. */
@@ -23,6 +23,6 @@ export function cornerLines(
     ...line("worst, charging", charging),
     ...line("worst, holding", holding, when),
     ...line("worst, dumped", dumped, " from equal sharing"),
-    ...(worse ? line("worst, dumped", dumpedFromHold, " from an endless hold") : []),
+    ...(worse ? line("worst, dumped", dumpedFromHold, ` from ${heldWords(dumpedFromHold.hold)}`) : []),
   ];
 }

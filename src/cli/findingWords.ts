@@ -14,6 +14,8 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "holding-share": { title: "worst unit while holding" },
   "balance-power": { title: "power in a balancing element" },
   "balance-voltage": { title: "voltage on a balancing element" },
+  "balance-power-start": { title: "power in a balancing element, as the hold begins" },
+  "balance-voltage-start": { title: "voltage on a balancing element, as the hold begins" },
   "reverse-after-dump": { title: "reverse voltage left by a dump" },
   "pulse-energy": { title: "energy of one pulse", least: true },
   "steady-current": { title: "capacitance for the steady current", least: true },
@@ -66,12 +68,14 @@ export const FINDINGS: Readonly<Record<string, Title>> = {
   "place.outlier-capacitance": { title: "capacitance out of the lot" },
   "place.outlier-leakage": { title: "leakage out of the lot" },
   "place.outlier-esr": { title: "ESR out of the lot" },
+  "place.outside-tolerance": { title: "units outside the part's tolerance" },
   "place.mixed-parts": { title: "groups of mixed parts" },
   "history.capacitance-lost": { title: "capacitance lost" },
   "history.esr-grown": { title: "ESR grown" },
   "history.leakage": { title: "leakage as last measured" },
   "history.charging-stress": { title: "worst unit, as last measured" },
   "commission.over-limit": { title: "a reading over its limit" },
+  "commission.whole": { title: "the readings as a whole" },
   "commission.sum": { title: "sum of the readings" },
 };
 
@@ -115,7 +119,8 @@ export function findingFigures({ id, value, limit, margin, unit }: Finding): {
   const show = (x: number | null, rounding: "up" | "down"): string =>
     tiny(x) ? roundTo(x, 3, rounding).toExponential() : formatQuantity(x, dimension, { rounding });
   return {
-    value: show(value, least ? "down" : "up"),
+    // A chance of nought is what was reckoned from, not that it cannot be.
+    value: id === "charging-risk" && value === 0 ? "none found" : show(value, least ? "down" : "up"),
     limit: limit === null ? "unknown" : `${least ? ">=" : "<="} ${show(limit, least ? "up" : "down")}`,
     margin: marginText(margin),
   };

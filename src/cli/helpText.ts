@@ -89,8 +89,8 @@ Examples:
 
 --edited takes a bill as CSV back from a spreadsheet. Kept are rows of your own (a blank or "own line" under line), columns
 of your own, and what you wrote under item, value, rating, quantity needed, on hand, pack, unit price, currency, supplier,
-order code, alternates, status and note; all else is reckoned anew. A row with your quantity or price is reckoned from its
-own cells, without price breaks. A blank cell of yours stays blank; delete a row to have it made anew. The column "mark"
+order code, alternates, status and note; all else is reckoned anew. A row with your quantity is reckoned from its own
+cells, without price breaks; a price alone leaves the quantities. A blank cell of yours stays blank; delete a row to have it made anew. The column "mark"
 tells what is yours: leave it as it is. What was taken over is told, what was beside another part is not taken over, and
 where the bank now asks something else of what you chose, it says so.
 ${LAYOUT} A file that exists is replaced only with --force.${BRIEF}${STATUS}`,

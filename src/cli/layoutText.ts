@@ -1,6 +1,6 @@
 // One layout in words: what it is, its figures, every finding with its verdict, and what was assumed.
 
-import type { Capacitor } from "../catalog/index.ts";
+import { type Capacitor, toBuy } from "../catalog/index.ts";
 import { visible } from "../order/index.ts";
 import { type Finding, formatQuantity } from "../quantity/index.ts";
 import type { LayoutResult } from "../search/index.ts";
@@ -91,11 +91,28 @@ function protectionFacts({ protection = [], cost }: LayoutResult): readonly (rea
   });
 }
 
+/** Of units that cannot be bought as the catalogue stands; empty when they can. */
+function tooFew({ purchase, units }: LayoutResult, unit: Capacitor): string {
+  if (purchase.capacitors !== null || unit.available === undefined) return "";
+  const hand = Math.min(unit.onHand ?? 0, units);
+  const least = toBuy(unit, units);
+  const spares = least <= unit.available ? ", spares not counted" : "";
+  const beside = hand > 0 ? ` beside ${hand} on hand` : "";
+  return `not enough can be had: ${least} needed${beside}${spares}, ${unit.available} available`;
+}
+
+function costText(layout: LayoutResult, unit: Capacitor): string {
+  const { cost } = layout;
+  const few = tooFew(layout, unit);
+  if (cost === null) return few === "" ? "no price" : few;
+  const without = cost.unpriced.map((line) => (few !== "" && line === "capacitors" ? `capacitors, ${few}` : line));
+  const left = without.length > 0 ? `; without a price: ${without.join(", ")}` : "";
+  return `${money(cost.total, cost.currency)}${left}`;
+}
+
 /** The layout in full, as `check` and the best of a plan print it. */
 export function layoutText(layout: LayoutResult, unit: Capacitor, width: number): string {
-  const { cost } = layout;
   const without = withoutBalanceWords(layout);
-  const left = cost !== null && cost.unpriced.length > 0 ? `; without a price: ${cost.unpriced.join(", ")}` : "";
   const facts: readonly (readonly [string, string])[] = [
     ["shape", `${layout.series} in series, ${layout.parallel} in parallel, ${layout.ties}, ${layout.units} units`],
     ["capacitance", span(layout, "capacitance")],
@@ -105,7 +122,7 @@ export function layoutText(layout: LayoutResult, unit: Capacitor, width: number)
     ...(without === "" ? [] : [["without resistors", without] as const]),
     ["bleed", bleedWords(layout)],
     ...protectionFacts(layout),
-    ["cost", cost === null ? "no price" : `${money(cost.total, cost.currency)}${left}`],
+    ["cost", costText(layout, unit)],
     [
       "volume",
       layout.volume === null

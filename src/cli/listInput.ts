@@ -24,6 +24,11 @@ export function readPins(given: readonly string[], files: Files): Read<readonly 
       continue;
     }
     const list = readList(text, files);
+    // What looks like no path is a serial without its place.
+    if (!list.ok && list.refusals[0]?.code === "no-such-file" && !/[./\\]/.test(text)) {
+      const want = "SERIAL=PLACE, the stage or string from 1, such as K001=2; or the path of a list of positions";
+      return refused({ code: "bad-value", place: { field: "--pins" }, read: JSON.stringify(text), want });
+    }
     if (!list.ok) return list;
     for (const { serial, group } of list.value) if (group !== undefined) pins.push({ serial, group: group - 1 });
   }

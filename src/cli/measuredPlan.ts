@@ -1,8 +1,8 @@
 // `plan` by the measured basis: which part was measured, the plan, and what measuring saved in words.
 
 import { visible } from "../order/index.ts";
-import { type MeasuredPlan, measuredPlan } from "../place/index.ts";
-import { accepted, formatQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
+import { anotherPart, DEFAULTS, type MeasuredPlan, measuredPlan, ofPartFindings } from "../place/index.ts";
+import { accepted, type Finding, formatQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
 import type { LayoutResult, Ranking } from "../search/index.ts";
 import { lotPart } from "./lotPart.ts";
 import { readMeasuredInput } from "./measuredInput.ts";
@@ -17,6 +17,8 @@ export type MeasuredPlanFlags = Pick<PlaceFlags, "measured" | "uncertainty" | "p
 export interface MeasuredPlanned extends MeasuredPlan {
   readonly part: string;
   readonly units: number;
+  /** The units against the tolerance of the part. */
+  readonly findings: readonly Finding[];
   /** Rows of the measured file that were lost. */
   readonly faults: readonly Refusal[];
 }
@@ -40,6 +42,9 @@ export function planMeasured(
   const given =
     flags.uncertainty === undefined ? undefined : flagQuantity(flags.uncertainty, "--uncertainty", "fraction");
   if (typeof given === "object") return refused(given);
+  const doubt = given ?? DEFAULTS.uncertainty;
+  const other = anotherPart(units, part.value, doubt);
+  if (other !== null) return refused(other);
   const planned = measuredPlan({
     brief: settings.brief,
     part: part.value,
@@ -49,14 +54,16 @@ export function planMeasured(
     rank,
     ...(given === undefined ? {} : { uncertainty: given }),
   });
-  return planned.ok ? accepted({ ...planned.value, part: part.value.part, units: units.length, faults }) : planned;
+  if (!planned.ok) return planned;
+  const findings = ofPartFindings(units, part.value, doubt);
+  return accepted({ ...planned.value, part: part.value.part, units: units.length, faults, findings });
 }
 
 /** What `plan --json` adds: the lot, what the placed units do in each listed layout, and the least in series either way. */
-export const measuredJson = ({ part, units, placed, least, worstCase }: MeasuredPlanned) => {
+export const measuredJson = ({ part, units, placed, least, worstCase, findings }: MeasuredPlanned) => {
   const shown = (layout: LayoutResult | null) =>
     layout && { id: layout.id, series: layout.series, units: layout.units, worst: layout.share.charging };
-  return { part, units, placed, leastSeries: { measured: shown(least), worstCase: shown(worstCase) } };
+  return { part, units, findings, placed, leastSeries: { measured: shown(least), worstCase: shown(worstCase) } };
 };
 
 /** What measuring saved against the worst case of the datasheet. */
@@ -67,8 +74,13 @@ export function savedText({ result, least, worstCase, placed, units, part }: Mea
   const share = placed.find(({ id }) => id === best.id);
   const volts = share && formatQuantity(share.charging, "voltage", { rounding: "up" });
   const energy = share && formatQuantity(share.energy, "energy", { rounding: "down" });
+  const asked = result.brief.energy;
+  const below =
+    share !== undefined && share.energy < asked
+      ? `, less than the ${formatQuantity(asked, "energy")} asked: the mean of the lot gives it, these units do not`
+      : "";
   const now = share
-    ? `Placed, ${visible(best.id)} has its worst unit at ${volts} while charging, the meter's doubt counted, and gives ${energy} a pulse. `
+    ? `Placed, ${visible(best.id)} has its worst unit at ${volts} while charging, the meter's doubt counted, and gives ${energy} a pulse${below}. `
     : "";
   const fewest = `Fewest in series that the measured units support: ${least.series}, with ${least.units} units; `;
   if (worstCase === null) return `${now}${fewest}by the worst case of the datasheet no shape does it.`;

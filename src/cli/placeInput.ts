@@ -2,8 +2,8 @@
 
 import type { Layout } from "../bank/index.ts";
 import type { Capacitor } from "../catalog/index.ts";
-import type { MeasuredUnit, PlaceRequest } from "../place/index.ts";
-import { accepted, type Read, refused } from "../quantity/index.ts";
+import { anotherPart, DEFAULTS, type MeasuredUnit, ofPartFindings, type PlaceRequest } from "../place/index.ts";
+import { accepted, type Finding, type Read, refused } from "../quantity/index.ts";
 import { assess, type LayoutResult, unitLimit } from "../search/index.ts";
 import { type LayoutInput, readLayout, readShape } from "./layoutInput.ts";
 import { readPins, readRooms } from "./listInput.ts";
@@ -38,6 +38,8 @@ export interface PlaceInput {
   readonly assessed: LayoutResult | null;
   readonly settings: Settings;
   readonly stock: Stock | null;
+  /** The measured units against the part they are said to be; none without a catalogue. */
+  readonly ofPart: readonly Finding[];
   readonly notes: readonly string[];
 }
 
@@ -72,6 +74,8 @@ export function readPlaceInput(brief: string | undefined, flags: PlaceFlags, por
     const found = findPart(part, stock.value.parts, { field: flags.layout === undefined ? "--part" : flags.layout });
     if (!found.ok) return found;
     unit = found.value;
+    const other = anotherPart(measured.value.units, unit, choices.uncertainty ?? DEFAULTS.uncertainty);
+    if (other !== null) return refused(other);
   }
   const leaks = measured.value.units.some((unit) => unit.leakage !== undefined);
   const known = knownOf(layout.value, {
@@ -104,6 +108,8 @@ export function readPlaceInput(brief: string | undefined, flags: PlaceFlags, por
     measured: measured.value,
     settings: settings.value,
     stock: stock.value,
+    ofPart:
+      unit === null ? [] : ofPartFindings(measured.value.units, unit, choices.uncertainty ?? DEFAULTS.uncertainty),
     ...known,
   });
 }

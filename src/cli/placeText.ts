@@ -48,11 +48,11 @@ function holdingWords({ placing, course, input }: Placed): string {
   const share = formatQuantity(holding.worst, "fraction", { digits: 3 });
   const end = `worst at ${share}${volts} after an endless hold ${with_}; ${gapWords(holding.gap)} above an even share`;
   if (course === null) return end;
-  const { peak, above } = course;
+  const { peak, above, holding: held } = course;
   const top = formatQuantity(peak.voltage, "voltage", { digits: 4, rounding: "up" });
   return above > 1e-6
     ? `${end}. Between the two ends ${top} after ${formatQuantity(peak.seconds, "time", { digits: 3 })}, ${gapWords(above)} above the higher end`
-    : `${end}. Between the two ends nothing stands higher`;
+    : `${end}. From the end of the charge to the end of the hold${Number.isFinite(held.seconds) ? ` of ${formatQuantity(held.seconds, "time", { digits: 3 })}` : ""} nothing stands higher than ${top}, the meter's doubt left out`;
 }
 
 /** One line a group: its number and its serials. */

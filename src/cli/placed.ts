@@ -66,7 +66,7 @@ export function placedBank(brief: string | undefined, flags: PlaceFlags, ports: 
     input,
     placing: value,
     course,
-    findings: [...stress, ...value.findings],
+    findings: [...input.ofPart, ...stress, ...value.findings],
     positions: positionList(units, value),
     spares: replacements(units, request, sound),
     resistors: resistorsOf(input, value),
@@ -76,8 +76,14 @@ export function placedBank(brief: string | undefined, flags: PlaceFlags, ports: 
   });
 }
 
-function placingOf(flags: PlaceFlags, { units, request }: PlaceInput, ports: Ports): Read<Placing> {
-  if (flags.positions === undefined) return place(units, request);
+/** Too few units is a fault of the file that they came from. */
+const fromFile = (placing: Read<Placing>, file: string): Read<Placing> =>
+  placing.ok
+    ? placing
+    : refused(...placing.refusals.map((one) => (one.code === "place.too-few" ? { ...one, place: { file } } : one)));
+
+function placingOf(flags: PlaceFlags, { units, request, measured }: PlaceInput, ports: Ports): Read<Placing> {
+  if (flags.positions === undefined) return fromFile(place(units, request), measured.file);
   const groups = readGroups(flags.positions, request, ports.files);
   return groups.ok ? asBuilt(units, request, groups.value) : groups;
 }

@@ -24,6 +24,10 @@ export interface PlanText {
   readonly width: number;
   /** Sentences about what was read. */
   readonly inputs: readonly string[];
+  /** Count of the measured units that the statistical basis draws from. */
+  readonly lot?: number | null;
+  /** J of the units that would be fitted, by layout; with the measured basis. */
+  readonly placedEnergy?: ReadonlyMap<string, number>;
 }
 
 /** The lamp's ideal circuit, and how far the best bank lands from it. */
@@ -47,7 +51,7 @@ export function planText(of: PlanText): string {
   const need = formatQuantity(result.required.capacitance, "capacitance", { rounding: "up" });
   const how = proof === "exhaustive" ? "every part, series count and tie was tried" : `proof: ${proof}`;
   const blocks = [
-    `${title}\n\nAsked\n${askedText(result.brief, of.given, width)}`,
+    `${title}\n\nAsked\n${askedText(result.brief, of.given, width, of.lot ?? null)}`,
     wrap(
       `Capacitance needed: ${need}. Searched ${parts} ${parts === 1 ? "part" : "parts"}; ${layouts} ${layouts === 1 ? "layout does" : "layouts do"} it; ${proof}: ${how}.`,
       width,
@@ -62,7 +66,7 @@ export function planText(of: PlanText): string {
   return `${blocks.filter((block) => block !== "").join("\n\n")}\n`;
 }
 
-function fitting({ result, parts, rank, width }: PlanText): readonly string[] {
+function fitting({ result, parts, rank, width, placedEnergy }: PlanText): readonly string[] {
   const best = result.layouts[0] as LayoutResult;
   const unit = parts.find((part) => part.part === best.part) as Capacitor;
   const shown = result.layouts.length;
@@ -71,7 +75,7 @@ function fitting({ result, parts, rank, width }: PlanText): readonly string[] {
   const unpriced = result.layouts.some((one) => (one.cost?.unpriced.length ?? 0) > 0);
   const legend = `worst: highest voltage of a unit over its limit; open: something is not assessed${unpriced ? "; +: lines without a price are left out" : ""}`;
   return [
-    `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width)}\n${wrap(legend, width, "  ")}`,
+    `Layouts by ${rank}${more}\n${rankedTable(result.layouts, width, placedEnergy)}\n${wrap(legend, width, "  ")}`,
     `Best: ${visible(best.id)}\n${wrap(whyBest(result, rank), width, "  ")}\n${layoutText(best, unit, width)}`,
     ...(result.worstCase === undefined ? [] : [wrap(worstCaseText(result), width)]),
     ...(result.improve ? [`What eats its margin\n${improveText(result.improve, result.currency, width)}`] : []),

@@ -6,8 +6,12 @@ import { VERDICTS } from "./findingWords.ts";
 import { costWords } from "./layoutText.ts";
 import { textTable } from "./table.ts";
 
-/** One row a layout, indented by two. */
-export function rankedTable(layouts: readonly LayoutResult[], width: number): string {
+/** One row a layout, indented by two. The energy is the least by the tolerance, or `placedEnergy` (J) of the units themselves where it is known. */
+export function rankedTable(
+  layouts: readonly LayoutResult[],
+  width: number,
+  placedEnergy: ReadonlyMap<string, number> = new Map(),
+): string {
   const worst = (one: LayoutResult): string => {
     const { charging, holding, limit } = one.share;
     if (charging === null || holding === null) return "not assessed";
@@ -27,8 +31,9 @@ export function rankedTable(layouts: readonly LayoutResult[], width: number): st
       { heading: "units", cell: (one) => String(one.units), side: "right" },
       { heading: "cost", cell: costWords, side: "right" },
       {
-        heading: "energy",
-        cell: (one) => formatQuantity(one.energy.low, "energy", { digits: 4, rounding: "down" }),
+        heading: placedEnergy.size > 0 ? "energy placed" : "energy",
+        cell: (one) =>
+          formatQuantity(placedEnergy.get(one.id) ?? one.energy.low, "energy", { digits: 4, rounding: "down" }),
         side: "right",
         rank: 3,
       },

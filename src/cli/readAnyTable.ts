@@ -11,12 +11,14 @@ import {
 import { accepted, type Dimension, formatQuantity, type Read, type Refusal, refused } from "../quantity/index.ts";
 import { type TableKind, tableKind } from "./kind.ts";
 import type { Laid } from "./overrides.ts";
-import { capacitorValues, type ValueWords, valueText } from "./valueWords.ts";
+import { capacitorValues, purchaseValues, type ValueWords, valueText } from "./valueWords.ts";
 
 export interface ToldRow {
   readonly name: string;
   readonly line?: number;
   readonly values: readonly ValueWords[];
+  /** Terms of purchase, of what is bought. */
+  readonly purchase?: readonly ValueWords[];
 }
 
 export interface ToldTable {
@@ -73,7 +75,7 @@ export function readAnyTable(text: string, file: string, lay?: Lay): Read<ToldTa
       const notes = [...read.value.notes, ...(laid?.value.notes ?? [])];
       const row = (i: number): ToldRow => {
         const unit = parts[i] as (typeof parts)[number];
-        return { name: unit.part, line: unit.line, values: capacitorValues(unit) };
+        return { name: unit.part, line: unit.line, values: capacitorValues(unit), purchase: purchaseValues(unit) };
       };
       return accepted({ kind, count: parts.length, row, faults, notes });
     }
@@ -89,7 +91,7 @@ export function readAnyTable(text: string, file: string, lay?: Lay): Read<ToldTa
           const state = value === undefined ? "unknown" : "datasheet";
           return { heading: column.heading, key: column.key, value: plain, text: valueText(plain, column), state };
         });
-        return { name: family.family, values };
+        return { name: family.family, values, purchase: purchaseValues(family) };
       };
       return accepted({ kind, count: families.length, row, faults, notes });
     }

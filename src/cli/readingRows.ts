@@ -52,7 +52,7 @@ function spotOf(reading: Reading, sheet: Sheet, file: string): Spot | Refusal {
 /** Reads the file. Any row that cannot be read or placed refuses the whole: a reading passed over could be the one that matters. */
 export function readRows(path: string | undefined, sheet: Sheet, files: Files): Read<ReadRows> {
   if (path === undefined) {
-    const want = "a file of readings: --readings FILE";
+    const want = "a file of readings: --readings FILE; or a log of the bank: --history FILE";
     return refused({ code: "missing-option", place: { field: "--readings" }, read: "nothing", want });
   }
   const file = path === "-" ? "standard input" : path;

@@ -9,7 +9,7 @@ const BAND_ROWS = 101;
 /** The course with its lowest and highest, row by row; null when nothing spreads. A sample of so many shots, not a proof. */
 function bandJson({ band, discharge }: ShotReport) {
   if (band === null) return null;
-  return { courses: band.courses, rows: waveformTimes(discharge, BAND_ROWS).map(band.at) };
+  return { kind: band.kind, courses: band.courses, rows: waveformTimes(discharge, BAND_ROWS).map(band.at) };
 }
 
 /** SI values; null is unknown or without bound, and `bounds` says what a figure is when parts of the loop are unknown. */

@@ -141,6 +141,11 @@ export function findPart(
     name,
     parts.map((one) => one.part),
   );
-  const want = near === null ? `one of the ${parts.length} parts of the catalogues` : `perhaps ${JSON.stringify(near)}`;
+  const want =
+    near === null
+      ? parts.length === 1
+        ? `${JSON.stringify(parts[0]?.part)}, the only part of the catalogues`
+        : `one of the ${parts.length} parts of the catalogues`
+      : `perhaps ${JSON.stringify(near)}`;
   return refused({ code: "unknown-part", place, read: JSON.stringify(name), want });
 }

@@ -1,7 +1,15 @@
 // One value of a catalogue row as text with its state.
 
-import { CAPACITOR_COLUMNS, type Capacitor, type Column, stateOf } from "../catalog/index.ts";
-import { formatMoney, formatQuantity, type Tolerance } from "../quantity/index.ts";
+import {
+  CAPACITOR_COLUMNS,
+  type Capacitor,
+  type Column,
+  type PriceBreak,
+  PURCHASE_COLUMNS,
+  type PurchaseTerms,
+  stateOf,
+} from "../catalog/index.ts";
+import { formatMoney, formatQuantity, minorDigits, type Tolerance, toMajor } from "../quantity/index.ts";
 
 export interface ValueWords {
   readonly heading: string;
@@ -37,6 +45,10 @@ const STATELESS = new Set([
   "breakdownField",
 ]);
 
+/** "10: 3.90; 100: 3.10", as a catalogue has them. */
+const breaksText = (breaks: readonly PriceBreak[], currency: string): string =>
+  breaks.map(({ from, price }) => `${from}: ${toMajor(price, currency).toFixed(minorDigits(currency))}`).join("; ");
+
 const percent = (x: number): string => String(Number((x * 100).toPrecision(6)));
 
 export function valueText(value: unknown, { type }: Pick<Column, "type">, currency = "EUR"): string {
@@ -52,6 +64,8 @@ export function valueText(value: unknown, { type }: Pick<Column, "type">, curren
       return value === true ? "yes" : "no";
     case "price":
       return formatMoney(value as number, currency);
+    case "price-breaks":
+      return breaksText(value as readonly PriceBreak[], currency);
     default:
       return typeof value === "object" ? JSON.stringify(value) : String(value);
   }
@@ -72,3 +86,15 @@ export function capacitorValues(unit: Capacitor): readonly ValueWords[] {
     };
   });
 }
+
+/** Terms of purchase as the catalogue has them; what it leaves blank is unknown. Money in words alone, so that no minor unit is read for a major one. */
+export const purchaseValues = (terms: PurchaseTerms): readonly ValueWords[] =>
+  PURCHASE_COLUMNS.map((column): ValueWords => {
+    const key = column.key as keyof PurchaseTerms;
+    const value = terms[key];
+    const text = valueText(value, column, terms.currency);
+    const { heading } = column;
+    if (value === undefined) return { heading, key, text, state: "unknown" };
+    const money = key === "price" || key === "priceBreaks";
+    return { heading, key, ...(money ? {} : { value }), text, state: "datasheet" };
+  });

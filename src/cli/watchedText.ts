@@ -19,10 +19,10 @@ const LAST_DAY = 2_932_896;
 export const dateOf = (day: number): string | null =>
   day > LAST_DAY ? null : new Date(Math.round(day) * 86_400_000).toISOString().slice(0, 10);
 
-const at = (value: number, axis: Due["axis"], rounding: "up" | "down" | "nearest"): string =>
+/** Due is said early rather than late: down, but for the latest. */
+const at = (value: number, axis: Due["axis"], rounding: "up" | "down"): string =>
   axis === "day"
-    ? (dateOf(rounding === "up" ? Math.ceil(value) : rounding === "down" ? Math.floor(value) : value) ??
-      "after the year 9999")
+    ? (dateOf(rounding === "up" ? Math.ceil(value) : Math.floor(value)) ?? "after the year 9999")
     : formatQuantity(value, "count", { digits: 3, rounding });
 
 /** When a unit is due by one axis, with what the readings leave open. */
@@ -32,7 +32,7 @@ export function dueWords({ axis, best, soonest, latest, stretch }: Due): string 
   if (best === null) return soonest === null ? "" : `not before ${at(soonest, axis, "down")}`;
   const early = soonest === null ? "" : at(soonest, axis, "down");
   const late = latest === null ? "no telling how late" : at(latest, axis, "up");
-  return `${at(best, axis, "nearest")} (${early} to ${late})`;
+  return `${at(best, axis, "down")} (${early} to ${late})`;
 }
 
 function changeWords({ kind, change, plusMinus }: UnitDrift): string {

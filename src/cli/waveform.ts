@@ -1,4 +1,4 @@
-// A shot as CSV: time, load current and bank voltage with the band they may run in, the peak among the rows.
+// A shot as CSV: time, load current and bank voltage with the band of the sampled courses, the peak among the rows.
 
 import { type Discharge, traceOf } from "../pulse/index.ts";
 import type { ShotReport } from "../search/index.ts";
@@ -25,9 +25,12 @@ export function waveformTimes(discharge: Discharge, rows: number): readonly numb
   return traceOf(discharge, rows, endOf(discharge)).map(({ time }) => time);
 }
 
-/** The text of the file, lines ended as CSV has them; with a band, the lowest and highest of current and voltage beside them. */
+/** The text of the file, lines ended as CSV has them; with a band, the lowest and highest of the sampled currents and voltages beside them, which is no bound. */
 export function waveformCsv({ discharge, band }: Pick<ShotReport, "discharge" | "band">): string {
-  const ends = band === null ? "" : ",current low [A],current high [A],voltage low [V],voltage high [V]";
+  const ends =
+    band === null
+      ? ""
+      : ",current lowest sampled [A],current highest sampled [A],voltage lowest sampled [V],voltage highest sampled [V]";
   const rows = waveformTimes(discharge, ROWS).map((time) => {
     const { current, voltage } = discharge.at(time);
     if (band === null) return `${time},${current},${voltage}`;

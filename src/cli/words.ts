@@ -55,6 +55,7 @@ export const WORDS: Readonly<Record<string, string>> = {
   "not-utf8": "the text is not UTF-8",
   "out-of-range": "the value is out of range",
   place: "the measured units or the shape cannot be placed",
+  "place.another-part": "the measured units are not of this part",
   "place.duplicate-serial": "a serial stands twice",
   "place.list-shape": "the list does not fit the shape of the bank",
   "place.list-unknown": "no measured unit has this serial",

@@ -4,13 +4,14 @@
 // builder's are the cells that are filled where the program leaves them open.
 
 import { accepted, type Read, type Refusal, refused } from "../quantity/index.ts";
-import type { Bill, BillChange, BillLine } from "./bill.ts";
+import type { Bill, BillChange, BillLine, LineKind } from "./bill.ts";
+import { boughtTogether } from "./boughtTogether.ts";
 import { toBeChosen } from "./chosenLine.ts";
-import { type BillColumn, cellText, isOpen } from "./columns.ts";
+import { type BillColumn, cellText, isOpen, plainNumber } from "./columns.ts";
 import type { CellValue } from "./editedCell.ts";
 import type { EditedCell, EditedFile, EditedRow } from "./editedRows.ts";
 import { BUILDERS_COLUMNS, isChanged, plainCell } from "./marks.ts";
-import { reckoned } from "./reckon.ts";
+import { reckoned, repriced } from "./reckon.ts";
 import { totalsOf } from "./totals.ts";
 
 export interface Money {
@@ -19,18 +20,13 @@ export interface Money {
   readonly exchange?: Readonly<Record<string, number>> | undefined;
 }
 
-/** Cells from which quantities and costs follow. */
-const RECKONED: readonly BillColumn["key"][] = [
-  "value",
-  "needed",
-  "onHand",
-  "pack",
-  "unitPrice",
-  "currency",
-  "orderCode",
-];
+/** Cells from which quantities follow, and from which costs and the state of the line follow. */
+const COUNTED: readonly BillColumn["key"][] = ["item", "needed", "onHand", "pack"];
+const PRICED: readonly BillColumn["key"][] = ["value", "unitPrice", "currency", "orderCode"];
 
 interface Merged {
+  /** Columns in which the builder's cell stands. */
+  readonly own: readonly string[];
   readonly line: BillLine;
   readonly changes: readonly BillChange[];
 }
@@ -53,9 +49,9 @@ function keptCells(made: BillLine, row: EditedRow): readonly KeptCell[] {
   return BUILDERS_COLUMNS.flatMap((column) => {
     const cell = row.cells.get(column.key);
     const fresh = cellText(made, column);
-    if (cell === undefined || plainCell(cell.text) === plainCell(fresh)) return [];
+    if (cell === undefined || isSame(cell, fresh)) return [];
     const named = column.key !== "item" || cell.text !== "";
-    return named && isBuilders(row, column, cell.text, fresh) ? [{ column, cell, fresh }] : [];
+    return named && isBuilders(row, column, cell, fresh) ? [{ column, cell, fresh }] : [];
   });
 }
 
@@ -64,8 +60,9 @@ const movedCells = (made: BillLine, row: EditedRow, keys: readonly BillColumn["k
   BUILDERS_COLUMNS.filter(({ key }) => keys.includes(key)).flatMap((column) => {
     const cell = row.cells.get(column.key);
     const fresh = cellText(made, column);
-    const same = cell === undefined || plainCell(cell.text) === plainCell(fresh);
-    return same || isBuilders(row, column, cell.text, fresh) ? [] : [{ column, cell, fresh }];
+    return cell === undefined || isSame(cell, fresh) || isBuilders(row, column, cell, fresh)
+      ? []
+      : [{ column, cell, fresh }];
   });
 
 /** The builder's cells over the line as the program makes it. */
@@ -80,11 +77,20 @@ function merged(made: BillLine, row: EditedRow, currency: string | null): Merged
   const taken = other ? kept.filter(({ column }) => column.key === "note") : kept;
   const cells = Object.fromEntries(taken.map(({ column, cell }) => [column.key, cell.value ?? emptied(column)]));
   const line = { ...made, ...cells, extra: row.extra } as BillLine;
+  const own = Object.keys(cells);
+  const touches = (keys: readonly string[]): boolean => keys.some((key) => own.includes(key));
   // The currency that the program put beside a price of the builder's is no choice.
   const loud = kept.filter(({ column, cell }) => column.key !== "currency" || cell.value !== currency);
   const chosen = taken.some(({ column }) => CHOICE.includes(column.key));
   return {
-    line: RECKONED.some((key) => Object.hasOwn(cells, key)) ? reckoned(line) : line,
+    own,
+    // A price says nothing of how many: the packs that were reckoned for units and spares together stay.
+    line:
+      touches(COUNTED) || (touches(PRICED) && line.toBuy === null)
+        ? reckoned(line)
+        : touches(PRICED)
+          ? repriced(line)
+          : line,
     changes: [
       ...loud.map((one) => told(taken.includes(one) ? "kept" : "not taken over", one)),
       ...(chosen ? movedCells(made, row, ASKED).map((one) => told("check again", one)) : []),
@@ -92,8 +98,17 @@ function merged(made: BillLine, row: EditedRow, currency: string | null): Merged
   };
 }
 
-function isBuilders({ mark }: EditedRow, { key }: BillColumn, text: string, fresh: string): boolean {
-  return mark === "" ? isOpen(fresh) && !isOpen(text) : isChanged(mark, key, text);
+/** A number as the program writes it, however the spreadsheet wrote it: 6,4 and 6.40 are 6.4. */
+const plainText = ({ text, value }: EditedCell): string => (typeof value === "number" ? plainNumber(value) : text);
+
+const isSame = (cell: EditedCell, fresh: string): boolean =>
+  [cell.text, plainText(cell)].some((text) => plainCell(text) === plainCell(fresh));
+
+const isCellChanged = (mark: string, key: BillColumn["key"], cell: EditedCell): boolean =>
+  isChanged(mark, key, cell.text) && isChanged(mark, key, plainText(cell));
+
+function isBuilders({ mark }: EditedRow, { key }: BillColumn, cell: EditedCell, fresh: string): boolean {
+  return mark === "" ? isOpen(fresh) && !isOpen(cell.text) : isCellChanged(mark, key, cell);
 }
 
 /** A line that the bank does not take: the builder's own, or one that is no longer counted. */
@@ -111,7 +126,7 @@ const isTouched = (row: EditedRow): boolean =>
   BUILDERS_COLUMNS.some(({ key }) => {
     const cell = row.cells.get(key);
     if (cell === undefined) return false;
-    return row.mark === "" ? key === "unitPrice" && !isOpen(cell.text) : isChanged(row.mark, key, cell.text);
+    return row.mark === "" ? key === "unitPrice" && !isOpen(cell.text) : isCellChanged(row.mark, key, cell);
   });
 
 /** Joins a fresh bill and an edited copy. Refused: a price whose currency nothing says. */
@@ -120,23 +135,26 @@ export function withEdits(bill: Bill, edited: EditedFile, money: Money): Read<Bi
   const changes: BillChange[] = [];
   const priced = (line: BillLine, row: EditedRow): BillLine => {
     if (line.currency !== null || (line.unitPrice === null && line.purchase === null)) return line;
-    if (money.currency !== null) return reckoned({ ...line, currency: money.currency });
+    if (money.currency !== null) return repriced({ ...line, currency: money.currency });
     if (line.unitPrice === null) return line;
     const cell = row.cells.get("currency");
     const place = cell === undefined ? row.place : { ...row.place, column: cell.column, field: "currency" };
     faults.push({ code: "missing-value", place, read: "a price without a currency", want: "a currency such as EUR" });
     return line;
   };
-  const lines = bill.lines.map((made) => {
+  const owned = new Map<LineKind, readonly string[]>();
+  const each = bill.lines.map((made) => {
     const row = edited.rows.find(({ line }) => line === made.line);
     if (row === undefined) {
       changes.push({ kind: "put back", item: made.item, line: made.line, at: null, heading: "", made: "", read: "" });
       return made;
     }
-    const { line, changes: kept } = merged(made, row, money.currency);
+    const { line, own, changes: kept } = merged(made, row, money.currency);
+    owned.set(made.line, own);
     changes.push(...kept);
     return priced(line, row);
   });
+  const lines = boughtTogether(each, owned);
   const own = edited.rows.flatMap((row) => {
     const known = bill.lines.some(({ line }) => line === row.line);
     if (known || (row.line !== "own line" && !isTouched(row))) return [];

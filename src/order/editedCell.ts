@@ -29,5 +29,7 @@ export function readEditedCell(text: string, { key, kind }: BillColumn, comma: b
   const whole = key === "pack";
   if (value <= MOST && (!whole || (Number.isInteger(value) && value >= 1))) return accepted(value);
   if (!read.ok && read.refusals[0]?.code === "ambiguous-comma") return read;
-  return no("bad-count", text, whole ? `a whole number from 1 to ${MOST}` : `a number from 0 to ${MOST}`);
+  if (whole) return no("bad-count", text, `a whole number from 1 to ${MOST}`);
+  const want = `a quantity from 0 to ${MOST} in plain digits, such as 12.5: no sign, no exponent`;
+  return no(Number.isFinite(Number(text)) ? "out-of-range" : "not-a-number", text, want);
 }

@@ -7,7 +7,9 @@ import type { BillLine, LineKind } from "./bill.ts";
 
 const NOT_TO_BE_HAD = "Not enough can be had: ask the supplier, or choose another layout.";
 
-const WITH_SPARES = "Packs and surplus are those of units and spares together.";
+export const WITH_SPARES = "Packs and surplus are those of units and spares together.";
+
+export const WITH_UNITS = "Bought with the units: packs and surplus stand there.";
 
 /** Pieces of text one after the other, each ended before the next begins. */
 const sentences = (...parts: readonly string[]): string =>
@@ -112,7 +114,7 @@ export function unitLines(layout: LayoutResult, unit: Capacitor, spares: number)
   const spareWording: Wording = {
     ...wording,
     line: "spares",
-    note: spares > 0 ? "Bought with the units: packs and surplus stand there." : "",
+    note: spares > 0 ? WITH_UNITS : "",
   };
   if (bought === null) {
     const lines = [shortLine(wording, unit, layout.units)];

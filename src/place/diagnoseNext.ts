@@ -19,6 +19,7 @@ export type NextMeasurement =
       readonly expect: readonly [number, number];
     }
   | { readonly action: "read after a hold"; readonly seconds: number }
+  | { readonly action: "check the meter" }
   | {
       readonly action: "with the bank dead";
       readonly position: number;

@@ -93,12 +93,19 @@ export function drift(kind: DriftKind, readings: readonly Remeasured[], limit: n
     straight: lines.every(({ line }) => line.scatter <= STRAY),
   };
   if (limit === undefined || once) return { ...base, used: null, verdict: "not assessed", due: [] };
-  const gone = kind === "leakage" ? last.value : kind === "esr" ? change : -change;
+  const goneAt = ({ value }: Remeasured): number => {
+    if (kind === "leakage") return value;
+    return kind === "esr" ? value / first.value - 1 : 1 - value / first.value;
+  };
+  const gone = goneAt(last);
   const doubt = kind === "leakage" ? COVERAGE * last.uncertainty * last.value : plusMinus;
   const due = lines.map(({ axis, line, span }): Due => {
     const { best, soonest, latest } = dueAfter(line, wearOf(kind, limit, first[axis] === undefined ? first : null));
-    const ahead = best ?? soonest;
-    const at = (after: number | null): number | null => (after === null ? null : line.from + after);
+    // A value that was read within its limit had not reached it by then, whatever the line through the readings says.
+    const seen = readings.flatMap((one) => (one[axis] !== undefined && goneAt(one) < limit ? [one[axis]] : []));
+    const held = seen.length === 0 ? 0 : Math.max(...seen) - line.from;
+    const ahead = best === null && soonest === null ? null : Math.max(held, (best ?? soonest)!);
+    const at = (after: number | null): number | null => (after === null ? null : line.from + Math.max(held, after));
     return {
       axis,
       best: at(best),

@@ -18,6 +18,7 @@ export { type Front, type FrontPoint, placingFront } from "./front.ts";
 export { chainsOf, type HeldBank, type HoldCourse, holdCourse, type Stand } from "./holdCourse.ts";
 export { type MeasuredPlan, type MeasuredPlanInput, measuredPlan, type PlacedShare } from "./measuredPlan.ts";
 export { type Mend, type Mending, mend } from "./mend.ts";
+export { anotherPart, ofPartFindings } from "./ofPart.ts";
 export { OUTLIER_RULE, type Outlier, outliersOf } from "./outliers.ts";
 export { place, placing } from "./place.ts";
 export type { ChargingShare, HoldingShare, Placing } from "./placing.ts";

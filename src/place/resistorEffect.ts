@@ -11,9 +11,12 @@ export interface ResistorEffect {
   readonly resistance: number;
   /** Holding gap of the placing as it stands; null when it cannot be judged. */
   readonly asPlaced: number | null;
-  /** Holding gap after placing anew beside these resistors. */
+  /** Holding gap after placing anew beside these resistors; that of the placing at hand where the search found no better. */
   readonly replaced: number | null;
 }
+
+const leastOf = (asPlaced: number | null, anew: number | null): number | null =>
+  asPlaced === null || anew === null ? anew : Math.min(asPlaced, anew);
 
 /** One row for no resistor and one for each resistance (ohm, > 0). `units` are those of the placing. */
 export function resistorEffect(
@@ -28,10 +31,11 @@ export function resistorEffect(
     const asked = { ...request, balanceConductance: 1 / resistance };
     const anew = place(units, asked);
     if (!anew.ok) return anew;
+    const asPlaced = bankGaps(groups, asked).holding;
     rows.push({
       resistance,
-      asPlaced: bankGaps(groups, asked).holding,
-      replaced: anew.value.holding?.gap ?? null,
+      asPlaced,
+      replaced: leastOf(asPlaced, anew.value.holding?.gap ?? null),
     });
   }
   return accepted(rows);

@@ -36,6 +36,10 @@ export interface PlaceShares extends BusPlace {
   readonly byCapacitance: number;
   /** Most that any position carries when all are alike and the feed is the other one. */
   readonly otherFeed: number;
+  /** Lowest voltage of any branch over the charge voltage, below zero; with the tolerance at its worst where the drive is a load. */
+  readonly lowest: number;
+  /** Position that stands at it. */
+  readonly lowestPosition: number;
   /** s followed. */
   readonly seconds: number;
 }

@@ -88,6 +88,29 @@ export interface PlaceCourse {
   readonly toZero: boolean;
 }
 
+/** A bank of at most so many branches is tried with the odd one at every place. */
+const EVERY_PLACE = 4;
+
+/** Which branches may be reversed most: all low, all high, and an odd one of either kind at the ends of the bus and at those that lead. */
+function reversalCorners(of: {
+  readonly parallel: number;
+  readonly low: number;
+  readonly high: number;
+  readonly leads: readonly number[];
+}): readonly { readonly at: number; readonly one: number; readonly rest: number }[] {
+  const { parallel, low, high, leads } = of;
+  const places =
+    parallel <= EVERY_PLACE ? Array.from({ length: parallel }, (_, k) => k) : [...new Set([0, parallel - 1, ...leads])];
+  return [
+    { at: 0, one: low, rest: low },
+    { at: 0, one: high, rest: high },
+    ...places.flatMap((at) => [
+      { at, one: low, rest: high },
+      { at, one: high, rest: low },
+    ]),
+  ];
+}
+
 /** The division of one shot. Source: [methods-derived] file head. */
 export function placeShares(branches: Branches, place: BusPlace, course: PlaceCourse): PlaceShares {
   const { parallel, unit } = branches;
@@ -113,11 +136,20 @@ export function placeShares(branches: Branches, place: BusPlace, course: PlaceCo
   // more capacitance draws more at every place, so the place that leads when all are alike is tried, and the nearest one
   const candidates = new Set([most(alike), nominal.order[0] as number, nominal.order[most(nominal.actions)] as number]);
   let worst = { position: 0, share: 0, action: 0 };
+  let lowest = { position: 0, voltage: course.voltage };
+  const lower = ({ lowest: found, order }: ReturnType<typeof run>): void => {
+    order.forEach((position, k) => {
+      const voltage = found[k] as number;
+      if (voltage < lowest.voltage) lowest = { position, voltage };
+    });
+  };
+  lower(nominal);
   for (const position of candidates) {
     const found = run(
       even.map((_, k) => (k === position ? high : low)),
       place,
     );
+    if (course.drive.kind === "load") lower(found);
     const at = found.order.indexOf(position);
     const share = (found.peaks[at] as number) / found.totalPeak;
     const action = (found.actions[at] as number) / found.totalAction;
@@ -127,6 +159,15 @@ export function placeShares(branches: Branches, place: BusPlace, course: PlaceCo
       action: Math.max(action, worst.action),
     };
   }
+  // A given current is that of the nominal bank: another capacitance under it would be emptied by a charge that is not its own.
+  if (course.drive.kind === "load" && low < high)
+    for (const { at, one, rest } of reversalCorners({ parallel, low, high, leads: [...candidates, lowest.position] }))
+      lower(
+        run(
+          even.map((_, k) => (k === at ? one : rest)),
+          place,
+        ),
+      );
   const other = run(even, { ...place, feed: place.feed === "end" ? "centre" : "end" });
   return {
     ...place,
@@ -137,6 +178,8 @@ export function placeShares(branches: Branches, place: BusPlace, course: PlaceCo
     byPlace: (alike[worst.position] as number) * parallel,
     byCapacitance: (high / (high + (parallel - 1) * low)) * parallel,
     otherFeed: Math.max(...byPosition(other)),
+    lowest: lowest.voltage / course.voltage,
+    lowestPosition: lowest.position + 1,
     seconds: nominal.seconds,
   };
 }

@@ -20,10 +20,14 @@ export interface LadderCase {
   readonly toZero?: boolean;
 }
 
-/** Per branch, arm by arm from the feed outward: A and A^2 s; the same of their sum. `seconds` is how far it was followed. */
+/**
+ * Per branch, arm by arm from the feed outward: A, A^2 s, and the lowest V; the same currents of their sum. `seconds` is how far
+ * they were followed; where that was to the zero of the sum, the lowest voltages are followed as long again, the load being off.
+ */
 export interface LadderFigures {
   readonly peaks: readonly number[];
   readonly actions: readonly number[];
+  readonly lowest: readonly number[];
   readonly totalPeak: number;
   readonly totalAction: number;
   readonly seconds: number;
@@ -56,6 +60,17 @@ function turn(a: number, b: number, c: number): number | null {
   return bend !== 0 && Math.abs(slope) < Math.abs(bend) ? (1 - slope / bend) / 2 : null;
 }
 
+/** The lowest of a parabola through three even samples. */
+function lowestOf([a, b, c]: readonly [number, number, number]): number {
+  const bend = a - 2 * b + c;
+  const turned = turn(a, b, c);
+  const least = Math.min(a, b, c);
+  return turned === null || bend <= 0 ? least : Math.min(least, b - ((c - a) / 2) ** 2 / (2 * bend));
+}
+
+/** The load is off: the branches go on among themselves. */
+const OPEN: LadderDrive = { kind: "given", current: () => 0 };
+
 /** Follows the ladder; every step is one whole against two halves, whose difference sets the next. */
 export function ladderCourse({ ladder, voltage, drive, seconds, toZero = false }: LadderCase): LadderFigures {
   const count = ladder.reduce((sum, arm) => sum + arm.length, 0);
@@ -66,14 +81,18 @@ export function ladderCourse({ ladder, voltage, drive, seconds, toZero = false }
   };
   const peaks = new Float64Array(count);
   const actions = new Float64Array(count);
+  const lowest = new Float64Array(count).fill(voltage);
   let [totalPeak, totalAction, time, largest] = [0, 0, 0, 0];
+  let until = seconds;
+  let opened: number | null = null;
   let step = seconds * 1e-7;
   const most = Math.min(MOST, Math.max(FEWEST, Math.floor(WORK / count)));
-  for (let tried = 0; tried < most && time < seconds; tried++) {
-    step = Math.min(step, seconds - time);
-    const whole = ladderStep(ladder, state, step, endOf(drive, time));
-    const half = ladderStep(ladder, state, step / 2, endOf(drive, time));
-    const end = ladderStep(ladder, half, step / 2, endOf(drive, time + step / 2));
+  for (let tried = 0; tried < most && time < until; tried++) {
+    step = Math.min(step, until - time);
+    const driven = opened === null ? drive : OPEN;
+    const whole = ladderStep(ladder, state, step, endOf(driven, time));
+    const half = ladderStep(ladder, state, step / 2, endOf(driven, time));
+    const end = ladderStep(ladder, half, step / 2, endOf(driven, time + step / 2));
     let error = 0;
     for (let k = 0; k < count; k++) largest = Math.max(largest, Math.abs(end.currents[k] as number));
     for (let k = 0; k < count; k++) {
@@ -98,6 +117,16 @@ export function ladderCourse({ ladder, voltage, drive, seconds, toZero = false }
       if (count > MANY) return Math.max(seen, Math.abs(b - ((c - a) / 2) ** 2 / (2 * (a - 2 * b + c))));
       return Math.max(seen, Math.abs(of(ladderStep(ladder, from, length * turned, endOf(drive, at)))));
     };
+    for (let k = 0; k < count; k++) {
+      const three = [state, half, end].map(({ voltages }) => voltages[k] as number) as [number, number, number];
+      lowest[k] = Math.min(lowest[k] as number, lowestOf(three));
+    }
+    if (opened !== null) {
+      time += step;
+      state = end;
+      step *= Math.min(3, 0.9 * power(ERROR / Math.max(error, 1e-14), 1 / 6));
+      continue;
+    }
     const add = (a: number, b: number, c: number): number => (step / 6) * (a * a + 4 * b * b + c * c);
     for (let k = 0; k < count; k++) {
       // without inductance the current starts at its peak, not at the zero that the state begins with
@@ -112,8 +141,20 @@ export function ladderCourse({ ladder, voltage, drive, seconds, toZero = false }
     totalAction += add(first, half.total, end.total);
     time += step;
     state = end;
-    if (toZero && !begun && end.total <= 0 && totalPeak > 0) break;
+    if (toZero && !begun && end.total <= 0 && totalPeak > 0) {
+      opened = time;
+      until = 2 * time;
+      step *= 1e-3;
+      continue;
+    }
     step *= Math.min(3, 0.9 * power(ERROR / Math.max(error, 1e-14), 1 / 6));
   }
-  return { peaks: [...peaks], actions: [...actions], totalPeak, totalAction, seconds: time };
+  return {
+    peaks: [...peaks],
+    actions: [...actions],
+    lowest: [...lowest],
+    totalPeak,
+    totalAction,
+    seconds: opened ?? time,
+  };
 }

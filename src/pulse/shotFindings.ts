@@ -5,7 +5,7 @@ import type { Circuit } from "./load.ts";
 import type { Bounds, PulseBank } from "./loopMesh.ts";
 import { inductanceOf, type Mesh, resistanceOf, type Shot } from "./shot.ts";
 import { type UnitDuty, unitFindings } from "./unitDuty.ts";
-import { atMost, remark } from "./verdict.ts";
+import { atMost, type Bound, remark } from "./verdict.ts";
 
 /** Everything the findings are drawn from. */
 export interface ShotFacts {
@@ -18,7 +18,7 @@ export interface ShotFacts {
 }
 
 /** Reversal into a unit that has a polarity: none is allowed, unless the unit's own rating says otherwise. */
-function polarityFindings({ bank, circuit, shot, bounds }: ShotFacts): readonly Finding[] {
+function polarityFindings({ bank, circuit, unit, bounds }: ShotFacts): readonly Finding[] {
   const { polarised, ratings } = bank.unit;
   if (!polarised || ratings.reversal !== null) return [];
   const mend =
@@ -27,7 +27,7 @@ function polarityFindings({ bank, circuit, shot, bounds }: ShotFacts): readonly 
       : "The clamp's own drop remains.";
   const finding = atMost({
     id: "pulse.polarity",
-    value: shot.reversal,
+    value: unit.reversal,
     limit: 0,
     unit: "1",
     source: "methods-derived",
@@ -37,12 +37,27 @@ function polarityFindings({ bank, circuit, shot, bounds }: ShotFacts): readonly 
   return [circuit.clamp !== null && finding.verdict === "fail" ? { ...finding, verdict: "warn" } : finding];
 }
 
+/**
+ * What a unit's reversal is where its place on the bus is told. The place can only add to the bank's; unknown ESR or ESL leave that
+ * open, and behind a clamp the units are followed until it takes over, after which they may go on among themselves.
+ */
+function reversalBound({ bank, circuit, unit, bounds }: ShotFacts): Bound {
+  const { place = null, clamp } = circuit;
+  if (place === null || bank.parallel < 2) return bounds.reversal;
+  if (unit.place !== null && clamp === null) return bounds.reversal;
+  return bounds.reversal === "value" || bounds.reversal === "lower bound" ? "lower bound" : "side unknown";
+}
+
 /** All findings of one shot. */
 export function shotFindings(facts: ShotFacts): readonly Finding[] {
   const { bank, circuit, mesh, shot, unit, bounds } = facts;
   const { load } = circuit;
   const given = load.kind === "steady current" || load.kind === "recorded";
-  const found: Finding[] = [...unitFindings(unit, bank.unit.ratings, bounds), ...polarityFindings(facts)];
+  const told = { ...bounds, reversal: reversalBound(facts) };
+  const found: Finding[] = [
+    ...unitFindings(unit, bank.unit.ratings, told),
+    ...polarityFindings({ ...facts, bounds: told }),
+  ];
   if (load.kind === "lamp") {
     const width = 3 * Math.sqrt(inductanceOf(mesh) * mesh.capacitance);
     found.push(...lampFindings(load.lamp, { energy: shot.energy.load, width, peakCurrent: shot.peakCurrent }));

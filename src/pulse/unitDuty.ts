@@ -66,7 +66,8 @@ export interface BankDuty {
 
 /**
  * What the worst unit carries. `evenCurrent` is what each would carry if all were alike; heat [J] null when ESR is unknown.
- * `share` is its part of the peak, `actionShare` squared that of the action; `place` null: its place on the bus is not counted.
+ * `share` is its part of the peak, `actionShare` squared that of the action; `place` null: its place on the bus is not counted. `reversal` is that
+ * of the bank, or of the unit that its place reverses more.
  */
 export interface UnitDuty {
   readonly share: number;
@@ -97,6 +98,19 @@ function whyOf({ parallel, ties }: Arrangement, place: PlaceShares | null): stri
   ].join(" ");
 }
 
+/** Below this part of the charge voltage the ladder's own error stands, V/V. */
+const NOTHING = 1e-5;
+
+/** Reversal of the branch that its place reverses most; 0 where the place is not told. */
+const ownReversal = (place: PlaceShares | null): number =>
+  place === null || place.lowest > -NOTHING ? 0 : -place.lowest;
+
+/** Why the reversal is that: the place on the bus, where it says more than the bank as one. */
+function reversalWords({ place, reversal }: UnitDuty): string {
+  if (place === null || ownReversal(place) < reversal) return "";
+  return ` The unit at position ${place.lowestPosition} on the bus is reversed more than the bank as one.`;
+}
+
 /** `place`: how the branches share by where they hang on the bus; null: by capacitance alone. */
 export function unitDutyOf(arrangement: Arrangement, duty: BankDuty, place: PlaceShares | null = null): UnitDuty {
   const { unit, parallel } = arrangement;
@@ -113,7 +127,7 @@ export function unitDutyOf(arrangement: Arrangement, duty: BankDuty, place: Plac
     peakCurrent: duty.peakCurrent * share,
     action,
     slew: worstSlew(arrangement, duty.peakCurrent) * crowding,
-    reversal: duty.reversal,
+    reversal: Math.max(duty.reversal, ownReversal(place)),
     heat: unit.esr === null || action === null ? null : unit.esr * action,
     why: whyOf(arrangement, place),
   };
@@ -164,7 +178,7 @@ export function unitFindings(duty: UnitDuty, ratings: UnitRatings, bounds: DutyB
       unit: "1",
       source,
       bound: bounds.reversal,
-      note: "First opposite voltage over the charge voltage, against the unit's rating.",
+      note: `First opposite voltage over the charge voltage, against the unit's rating.${reversalWords(duty)}`,
     }),
   ];
 }

@@ -32,7 +32,7 @@ export function minorDigits(currency: string): number {
 
 export const isCurrency = (text: string): boolean => /^[A-Z]{3}$/.test(text);
 
-const WANT = 'a price such as "3.90", zero or more, at most 1e9';
+const WANT = 'a price such as "3.90", zero or more, at most 1 000 000 000, in plain digits without an exponent';
 
 /** A unit price in minor units; it may be a fraction of one ("0.0034"). Refuses what is negative, absurd or no number. */
 export function parsePrice(text: string, currency: string, decimalComma: boolean | "never" = false): Read<number> {

@@ -40,12 +40,12 @@ const hold = z
     if (read.ok && read.value >= 0 && read.value <= 1e9) return read.value;
     context.addIssue({
       code: "custom",
-      message: '"for ever", or a time such as "30 s" from 0 s up',
+      message: '"for ever", or a time such as "30 s" from 0 s to 1e9 s, some 30 years',
       params: { read: JSON.stringify(raw) },
     });
     return z.NEVER;
   })
-  .describe('"for ever", or a time such as "30 s" from 0 s up');
+  .describe('"for ever", or a time such as "30 s" from 0 s to 1e9 s, some 30 years');
 
 /** None and certainty are no risks to plan with: each is told what it would mean. */
 const risk = z.union([z.number(), z.string()]).transform((raw, context): number => {

@@ -57,7 +57,7 @@ export type {
 export { type Risk, type RiskCase, riskOf, tailCaseOf } from "./risk.ts";
 export { type BankCourse, bankCourse, type CourseInstant, type CoursePeak } from "./sharing/bankCourse.ts";
 export { type BankClamp, clampOf } from "./sharing/clamp.ts";
-export { type BankCorners, type CornerFact, cornersOf } from "./sharing/corners.ts";
+export { type BankCorners, type CornerFact, cornersOf, heldWords } from "./sharing/corners.ts";
 export type { BalanceMends } from "./sharing/mends.ts";
 export { type ShareSpread, shareSpread } from "./sharing/shareSpread.ts";
 export type { WithoutBalance } from "./sharing/withoutBalance.ts";

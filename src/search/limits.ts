@@ -122,7 +122,9 @@ export function limitClaims(brief: Brief, given: LimitCase): readonly LimitClaim
     const limit = ratedLimit(maxSlew, unit.slew);
     claim("maxSlew", { value: shared ? top.value.unit.slew : null, limit, bound: bounds.peakCurrent, unit: "V/s" });
   }
-  const reversal = spread ? Math.max(low.value.reversal, high.value.reversal) : null;
+  // The unit that its place on the bus reverses more than the bank decides.
+  const reversals = [low.value, high.value].flatMap((one) => [one.reversal, one.unit.reversal]);
+  const reversal = spread ? Math.max(...reversals) : null;
   if (maxReversal !== undefined)
     claim("maxReversal", { value: reversal, limit: maxReversal, bound: bounds.reversal, unit: "1" });
   const heat =

@@ -3,6 +3,7 @@
 import { stateOf } from "../catalog/index.ts";
 import { type Finding, formatQuantity, withinMost } from "../quantity/index.ts";
 import type { Cornered, FindingsInput } from "./findingsInput.ts";
+import { heldEndWords, heldWords } from "./sharing/corners.ts";
 import { mendWords, widestTolerance } from "./sharing/mendWords.ts";
 
 /** With the statistical basis: the chance against the brief's risk, its error counted against it. */
@@ -39,7 +40,10 @@ export function chargingShare({ result, brief, corners }: Cornered): Finding {
 
 export function holdingShare({ result, candidate, unit, brief, corners, mends }: Cornered): Finding {
   const leak = stateOf(unit, "leakage");
-  let note = `Worst unit at the end of the hold: ${corners.holding?.words ?? "one that does not leak with its resistor high, the rest leaking with theirs low"}.`;
+  // Where the start of the hold stands highest, the corner of its end is another one.
+  const later = corners.holding !== null && corners.holding.hold > 0 ? corners.holding.words : null;
+  const end = corners.holding === null ? null : (later ?? heldEndWords({ result, unit, brief }));
+  let note = `Worst unit at the end of the hold: ${end ?? "one that does not leak with its resistor high, the rest leaking with theirs low"}.`;
   if (candidate.leak === null && result.series > 1) {
     note =
       "Leakage and insulation are unknown, so no balancing resistor can be sized: measure the leakage of each unit at the working voltage.";
@@ -63,37 +67,41 @@ export function holdingShare({ result, candidate, unit, brief, corners, mends }:
   });
 }
 
-export function reverse({ result, unit, corners }: Cornered): Finding {
-  const { leftAfterDump } = result.share;
+/** The worse of equal sharing and of what the brief's own hold makes of it. */
+export function reverse({ result, unit, brief, corners }: Cornered): Finding {
+  const { leftAfterDump, charging, limit: most } = result.share;
   const polarity = unit.polarised;
+  const held = corners.dumpedFromHold;
+  const worse = held !== null && leftAfterDump !== null && -held.voltage > leftAfterDump ? held : null;
   const base = {
     id: "reverse-after-dump",
     state: "dumped",
-    value: leftAfterDump,
+    value: worse === null ? leftAfterDump : -worse.voltage,
     unit: "V",
     source: "methods-derived",
   } as const;
   if (result.series === 1)
     return withinMost({ ...base, limit: 0, note: "One in series: a dump leaves nothing reversed." });
-  if (polarity === false) {
-    return withinMost({
-      ...base,
-      limit: result.share.limit,
-      note: "The low stage keeps this with the other sign after a dump; the unit is not polarised. The ends read zero while units are charged: measure each stage.",
-    });
-  }
-  const limit = unit.reverseVoltage ?? null;
-  const held = corners.dumpedFromHold;
-  const fromHold =
-    held !== null && leftAfterDump !== null && -held.voltage > leftAfterDump
-      ? ` After an endless hold with unequal leakage it may be ${formatQuantity(-held.voltage, "voltage", { rounding: "up" })}: ${held.words}.`
-      : "";
-  const clamp =
-    "Fit a clamp diode across each stage, and measure each stage after a dump: the ends read zero while units are charged.";
-  return withinMost({
+  const from =
+    worse === null
+      ? `After a hold that shares equally and a dump the low stage is left reversed by this much: ${corners.dumped?.words ?? "corner unknown"}.`
+      : `After ${heldWords(worse.hold)} with unequal leakage and a dump the worst stage is left reversed by this much: ${worse.words}. From equal sharing it would be ${formatQuantity(leftAfterDump, "voltage", { rounding: "up" })}.`;
+  const limit = polarity === false ? most : polarity === undefined ? null : (unit.reverseVoltage ?? null);
+  const measure = "measure each stage after a dump: the ends read zero while units are charged.";
+  const tail =
+    polarity === false
+      ? `The unit is not polarised. Still ${measure}`
+      : `Fit a clamp diode across each stage, and ${measure}`;
+  const unknown = polarity !== false && limit === null ? "The reverse rating is unknown. " : "";
+  const found = withinMost({
     ...base,
-    limit: polarity === undefined ? null : limit,
-    exceeded: "warn",
-    note: `${limit === null ? "The reverse rating is unknown. " : ""}After a hold and a dump the low stage is left reversed by this much: ${corners.dumped?.words ?? "corner unknown"}.${fromHold} ${clamp}`,
+    limit,
+    ...(polarity === false ? {} : { exceeded: "warn" as const }),
+    note: `${unknown}${from} ${tail}`,
   });
+  // Unequal leakage can do no more than empty a stage, which a dump then reverses by all that it was charged to.
+  const bounded = charging !== null && limit !== null && charging <= limit;
+  if (held !== null || found.verdict !== "pass" || brief.hold === 0 || bounded) return found;
+  const open = "The leakage is unknown, so what an unequal hold adds to this is not known.";
+  return { ...found, verdict: "not assessed", note: `${found.note} ${open}` };
 }

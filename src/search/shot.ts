@@ -145,7 +145,7 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
     heating,
     drift: driftFor(brief, bank, unit, layout.balance),
     ripple: rippleFor(brief, bank),
-    life: lifeOf(brief, unit, { voltage: worst, reversal: discharge.reversal, rise }),
+    life: lifeOf(brief, unit, { voltage: worst, reversal: discharge.unit.reversal, rise }),
     lamp: lamp.value,
     stated,
     faults,

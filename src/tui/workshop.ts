@@ -38,20 +38,13 @@ export interface ReadStock {
 
 const majorOf = (minor: number, currency: string | undefined): number => minor / tenTo(minorDigits(currency ?? "EUR"));
 
-/** "10: 3.90; 100: 3.10", as a catalogue has them. */
-const breaksText = ({ priceBreaks = [], currency }: Capacitor): string =>
-  priceBreaks
-    .map(({ from, price }) => `${from}: ${majorOf(price, currency).toFixed(minorDigits(currency ?? "EUR"))}`)
-    .join("; ");
-
 /** Every value that can be set by hand, as it stands. A blank of a word or of a term of purchase is unknown too. */
 const valuesOf = (unit: Capacitor): readonly PartValue[] =>
   OVERRIDABLE.map((column): PartValue => {
     const key = column.key as keyof Capacitor;
     const state = stateOf(unit, key);
     const value = unit[key];
-    const text =
-      key === "priceBreaks" && value !== undefined ? breaksText(unit) : valueText(value, column, unit.currency);
+    const text = valueText(value, column, unit.currency);
     return {
       heading: column.heading,
       text,

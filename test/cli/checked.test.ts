@@ -30,6 +30,18 @@ describe("checkedBank(brief, flags, ports)", () => {
     expect(read.ok ? null : read.refusals[0]).toMatchObject({ code: "unknown-part", place: { field: "--part" } });
   });
 
+  test("a resistance that takes an absurd count of elements is refused with the least that does not", () => {
+    const read = run({ ...FLAGS, balance: "1e-9 ohm" });
+    expect(read.ok ? null : read.refusals).toMatchObject([
+      { code: "bad-balance", place: { field: "--balance" }, read: expect.stringMatching(/100000 elements/) },
+    ]);
+    // Of 2 kV the one 5 % high beside seven 5 % low has 272.7 V; squared over 0.95 R, 1 W used of each of 100 000: 0.783 ohm.
+    const least = /^(\S+ \S+) or more/.exec(read.ok ? "" : (read.refusals[0]?.want ?? ""))?.[1] ?? "";
+    expect(least).toBe("783 mohm");
+    expect(run({ ...FLAGS, balance: least }).ok).toBe(true);
+    expect(run({ ...FLAGS, balance: "775 mohm" }).ok).toBe(false);
+  });
+
   test("the rule chooses the resistor when nothing else is said", () => {
     expect(good(FLAGS).result.balance?.family).toBe("assumed 2 W leaded");
     expect(good(FLAGS).notes).toEqual([]);

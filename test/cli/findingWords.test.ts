@@ -44,6 +44,7 @@ describe("findingFigures(finding)", () => {
   test("a small chance is a power of ten, rounded up; a limit passed more than twice says how many times", () => {
     const chance = { ...finding, id: "charging-risk", unit: "1", value: 5.5961e-8, limit: 1e-4, margin: 0.999 };
     expect(findingFigures(chance)).toMatchObject({ value: "5.6e-8", limit: "<= 1e-4" });
+    expect(findingFigures({ ...chance, value: 0 }).value).toBe("none found");
     expect(findingFigures({ ...finding, value: 1800, limit: 324, margin: (324 - 1800) / 324 }).margin).toBe("x 5.56");
     expect(findingFigures({ ...finding, value: 396, limit: 360, margin: -0.1 }).margin).toBe("-10 %");
   });

@@ -34,6 +34,13 @@ describe("layoutText(layout, unit, width)", () => {
     expect(text).toMatch(/capacitance +200 µF low, 250 µF nominal, 300 µF high/);
   });
 
+  test("too few to be had is said in place of a price", () => {
+    const unit = { ...UNIT, available: 10, onHand: 3, pack: 10, minimumOrder: 1 };
+    expect(layoutText(bankOf({ unit }), unit, 120).replace(/\s+/g, " ")).toMatch(
+      /cost .*price: capacitors, not enough can be had: 20 needed beside 3 on hand, 10 available/,
+    );
+  });
+
   test("unknown tolerance, size, price and leakage are said to be unknown", () => {
     const { tolerance: _t, price: _p, diameter: _d, leakage: _l, mass: _m, ...unit } = UNIT;
     const text = layoutText(bankOf({ unit, families: [DEFAULT_FAMILY] }), unit, 80);

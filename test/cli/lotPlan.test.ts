@@ -20,7 +20,7 @@ describe("plan --basis statistical --measured FILE", () => {
     expect(lot.searched.parts).toBe(1);
     expect(least(lot)).toBeLessThanOrEqual(least(stated));
     expect(lot.layouts[0].risk.law).toMatch(/as the 200 measured units/);
-    expect(lot.measured).toEqual({ part: "drawer-pf-330-360", units: 200 });
+    expect(lot.measured).toEqual({ part: "drawer-pf-330-360", units: 200, findings: [] });
     for (const { risk } of lot.layouts) expect(risk.exceed).toBeLessThanOrEqual(1e-4);
   }, 30_000);
 
@@ -60,6 +60,9 @@ describe("plan --basis statistical --measured FILE", () => {
   test("said in words; fewer than five units are no lot; a basis that does not ask for units refuses them", async () => {
     const text = await cli(["plan", ...GIVEN, "--limit", "1"]);
     expect(text.out.replace(/\s+/g, " ")).toContain("each unit is drawn from the 200 measured ones");
+    expect(text.out.replace(/\s+/g, " ")).toMatch(/up to one in 66 of all such units may lie outside the lot/);
+    expect(text.out.replace(/\s+/g, " ")).toMatch(/statistical, risk 0\.0001, drawn from the 200 measured units/);
+    expect(text.out.replace(/\s+/g, " ")).not.toMatch(/uniform within the tolerance/);
     const few = "serial,capacitance [uF]\na,330\nb,331\nc,329\n";
     const small = await cli(
       ["plan", ...ASKED, "--basis", "statistical", "--part", "drawer-pf-330-360", "--measured", "few.csv"],

@@ -35,6 +35,21 @@ describe("plan --basis measured", () => {
     expect(await say(...LOT, "--basis", "measured", "--part", "x")).toMatch(/no catalogue has this part/);
   });
 
+  test("a lot that is not the part is refused, and strays of it are named, by plan and by place", async () => {
+    const lot = (...micro: number[]) => ["serial,capacitance [uF]", ...micro.map((c, i) => `u${i},${c}`)].join("\n");
+    const near = [330, 331, 332, 333, 334, 335, 336, 337, 338];
+    const texts = { "other.csv": lot(...near.map((c) => c / 2)), "stray.csv": lot(185, ...near) };
+    const plan = ["plan", ...ASKED, ...PART, "--basis", "measured", "--limit", "1", "--measured"];
+    const place = ["place", "--series", "2", "--parallel", "2", "--ties", "cross-tied", "--catalog"];
+    const placed = [...place, at("catalogs/drawer.csv"), ...PART, "--measured"];
+    for (const argv of [plan, placed]) {
+      const other = await cli([...argv, "other.csv"], texts);
+      expect([other.status, other.err]).toEqual([2, expect.stringMatching(/not of this part: read 9 of 9 units/)]);
+      const stray = await cli([...argv, "stray.csv"], texts);
+      expect(stray.out.replace(/\s+/g, " ")).toMatch(/1 of 10 units lie outside the tolerance .*u0 \(185 µF\)/);
+    }
+  }, 30_000);
+
   test("check does not take the basis on trust", async () => {
     const argv = ["check", ...ASKED, ...PART, "--series", "6", "--parallel", "2", "--ties", "cross-tied"];
     const { status, err } = await cli([...argv, "--basis", "measured"]);

@@ -12,6 +12,14 @@ describe("rankedTable(layouts, width)", () => {
     expect(head(60)).toMatch(/^# part shape ties units cost/);
   });
 
+  test("the energy of the placed units stands in place of the least of the tolerance", () => {
+    const bank = bankOf();
+    const table = rankedTable([bank], 200, new Map([[bank.id, 123.45]]));
+    expect(table.split("\n")[0]).toMatch(/energy placed/);
+    expect(table).toMatch(/123\.4 J/);
+    expect(rankedTable([bank], 200)).toMatch(/400 J/);
+  });
+
   test("fits every width from 60 up, also with the longest name a catalogue may have", () => {
     const long = bankOf({ unit: { ...UNIT, part: "p".repeat(120) } });
     for (const width of [60, 80, 100, 140, 200])

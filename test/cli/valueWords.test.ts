@@ -1,5 +1,5 @@
 import { describe, expect, test } from "vitest";
-import { capacitorValues, valueText } from "../../src/cli/valueWords.ts";
+import { capacitorValues, purchaseValues, valueText } from "../../src/cli/valueWords.ts";
 import { UNIT } from "../support/bank.ts";
 
 describe("capacitorValues(unit)", () => {
@@ -22,6 +22,26 @@ test("valueText(value, column): by kind", () => {
   expect(valueText(false, { type: { kind: "yes-no" } })).toBe("no");
   expect(valueText({ low: 0.1, high: 0.5 }, { type: { kind: "tolerance" } })).toBe("-10/+50 %");
   expect(valueText(250, { type: { kind: "price" } }, "EUR")).toBe("2.50 EUR");
-  expect(valueText([{ from: 1 }], { type: { kind: "price-breaks" } })).toBe('[{"from":1}]');
+  const breaks = [
+    { from: 10, price: 390 },
+    { from: 100, price: 310 },
+  ];
+  expect(valueText(breaks, { type: { kind: "price-breaks" } })).toBe("10: 3.90; 100: 3.10");
   expect(valueText("x", { type: { kind: "text", longest: 9 } })).toBe("x");
+});
+
+test("purchaseValues(terms): every term, blank ones unknown, money in words alone", () => {
+  const told = purchaseValues({ currency: "EUR", price: 640, pack: 10, onHand: 0 });
+  expect(told.map(({ heading, text }) => `${heading} ${text}`)).toEqual([
+    "currency EUR",
+    "price 6.40 EUR",
+    "price breaks unknown",
+    "pack 10",
+    "minimum order unknown",
+    "on hand 0",
+    "available unknown",
+    "supplier unknown",
+    "order code unknown",
+  ]);
+  expect(told.find(({ key }) => key === "price")).not.toHaveProperty("value");
 });

@@ -6,6 +6,7 @@ describe("dueWords(due)", () => {
   const due = { axis: "shots", best: 5000, soonest: 4120.4, latest: 7001, stretch: 2 } as const;
   test("the interval is rounded outward; no more is said than the readings hold", () => {
     expect(dueWords(due)).toBe("5000 (4120 to 7010)");
+    expect(dueWords({ ...due, best: 8116, soonest: 8116 })).toBe("8110 (8110 to 7010)");
     expect(dueWords({ ...due, latest: null })).toBe("5000 (4120 to no telling how late)");
     expect(dueWords({ ...due, best: null, latest: null })).toBe("not before 4120");
     expect(dueWords({ ...due, stretch: 11 })).toBe("not within 10 times what was watched");

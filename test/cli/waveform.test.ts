@@ -27,7 +27,7 @@ test("waveformCsv(report): the band stands beside the course and holds it; witho
   if (!shot.ok) throw new Error("the shot must be");
   const [head = "", ...rows] = waveformCsv(shot.value).trim().split("\r\n");
   expect(head).toBe(
-    "time [s],current [A],voltage [V],current low [A],current high [A],voltage low [V],voltage high [V]",
+    "time [s],current [A],voltage [V],current lowest sampled [A],current highest sampled [A],voltage lowest sampled [V],voltage highest sampled [V]",
   );
   let wide = 0;
   for (const row of rows) {

@@ -111,6 +111,35 @@ describe("withEdits(bill, edited, money)", () => {
     });
   });
 
+  test("saved again with decimal commas, or with noughts after the point, nothing is edited", () => {
+    const odd = made({ price: 640 });
+    const copy = edit(odd, (rows) => rows);
+    const table = copy.replaceAll('","', '";"').replace(/"(\d+)\.(\d+)"/g, (_, whole, part) => `"${whole},${part}"`);
+    expect(table).toContain('"6,4"');
+    expect(told(joined(odd, table))).toEqual([]);
+    expect(joined(odd, table).totals).toEqual(odd.totals);
+    const padded = copy.replace(/"(\d+)\.(\d+)"/g, (_, whole, part) => `"${whole}.${part}0"`);
+    expect(told(joined(odd, padded))).toEqual([]);
+  });
+
+  test("a price alone leaves the packs of units and spares together as they were", () => {
+    const bill = made();
+    const [units, spares] = [lineOf(bill, "units"), lineOf(bill, "spares")];
+    const now = joined(
+      bill,
+      edit(bill, (rows) => at(rows, "units", { "unit price": "5" })),
+    );
+    for (const [kind, before] of [
+      ["units", units],
+      ["spares", spares],
+    ] as const) {
+      const { toBuy, packs, surplus, note } = before!;
+      expect(lineOf(now, kind)).toMatchObject({ toBuy, packs, surplus, note, unitPrice: 5, purchase: 5 * toBuy! });
+    }
+    // 8 x 2 + 2 - 3 on hand = 15: two packs of ten, bought once.
+    expect(units!.toBuy! + spares!.toBuy!).toBe(20);
+  });
+
   test("what was chosen for another demand is kept, and to be checked again; what was left alone is made anew in silence", () => {
     const copy = edit(made(), (rows) =>
       at(rows, "dump relay", { value: "2.5 kV, normally closed", "unit price": "80" }),
@@ -321,7 +350,11 @@ describe("any edit", () => {
           const cell = lineOf(bill, kind)?.[column.key];
           expect(column.kind === "text" ? cell : Number(cell)).toBe(column.kind === "text" ? text : Number(text));
         }
-        const untouched = kinds.filter((kind) => !list.some((one) => one.kind === kind));
+        // Units and spares are one purchase: what is written beside one moves the other.
+        const together = new Set(["units", "spares"]);
+        const untouched = kinds.filter(
+          (kind) => !list.some((one) => one.kind === kind || (together.has(one.kind) && together.has(kind))),
+        );
         for (const kind of untouched)
           expect({ ...lineOf(bill, kind), extra: undefined }).toEqual({ ...lineOf(fresh, kind), extra: undefined });
         const cents = bill.lines.reduce((sum, { purchase }) => sum + Math.round((purchase ?? 0) * 100), 0);

@@ -19,9 +19,12 @@ describe("readEditedCell(text, column, comma)", () => {
   });
 
   test("what is no number, below nought, absurd or half a pack is refused", () => {
-    expect(["x", "-1", "1e3", "NaN", "2e9"].map((text) => value(text, "quantity needed"))).toEqual(
-      Array(5).fill("bad-count"),
-    );
+    expect(["-1", "1e3", "2e9"].map((text) => value(text, "quantity needed"))).toEqual(Array(3).fill("out-of-range"));
+    expect(["x", "NaN"].map((text) => value(text, "quantity needed"))).toEqual(Array(2).fill("not-a-number"));
+    const minus = readEditedCell("-5", column("quantity needed"), false);
+    expect(minus.ok ? null : minus.refusals[0]?.want).toMatch(/from 0 .* no sign, no exponent/);
+    const price = readEditedCell("1e3", column("unit price"), false);
+    expect(price.ok ? null : price.refusals[0]?.want).toMatch(/without an exponent/);
     expect(["0", "1.5", "ten"].map((text) => value(text, "pack"))).toEqual(Array(3).fill("bad-count"));
     expect(["12 EUR", "-3", "free"].map((text) => value(text, "unit price"))).toEqual(Array(3).fill("bad-price"));
     expect(["eur", "€", "EURO"].map((text) => value(text, "currency"))).toEqual(Array(3).fill("bad-currency"));

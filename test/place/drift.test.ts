@@ -41,6 +41,20 @@ describe("drift(kind, readings, limit)", () => {
     ]);
   });
 
+  test("what was read within its limit is not due before that reading, whatever the line says", () => {
+    const strayed = drift("capacitance", series([1, 0.8, 0.95]), 0.1);
+    expect(strayed.verdict).toBe("pass");
+    for (const { axis, best, soonest, stretch } of strayed.due) {
+      const last = axis === "shots" ? 2000 : 20_200;
+      expect(best ?? last).toBeGreaterThanOrEqual(last);
+      expect(soonest!).toBeGreaterThanOrEqual(last);
+      expect(stretch ?? 1).toBeGreaterThanOrEqual(1);
+    }
+    // A line that is already over its limit at the start, by its doubt, is not due at the start.
+    const wide = drift("capacitance", series([1, 0.99, 0.98], 0.2), 0.1);
+    expect(wide.due.map(({ soonest }) => soonest)).toEqual([2000, 20_200]);
+  });
+
   test("a first reading without a date still is what the loss is counted from", () => {
     const [first, ...later] = series([1, 0.98, 0.96]);
     const undated = [{ value: first?.value ?? 0, uncertainty: 0.003, shots: 0 }, ...later];

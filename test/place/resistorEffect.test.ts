@@ -19,4 +19,17 @@ describe("resistorEffect(units, request, { placing, resistances })", () => {
     expect(much!.asPlaced!).toBeLessThan(some!.asPlaced! / 3);
     for (const row of read.value) expect(row.replaced!).toBeLessThanOrEqual(row.asPlaced! + 1e-9);
   });
+
+  test("a search too short to find anything better keeps the placing at hand", () => {
+    for (const seed of [1, 2, 3, 4, 5, 6]) {
+      const lot = units("uniform", 24, seed, 0.5);
+      const request = { series: 4, parallel: 6, ties: "cross-tied", leakageVoltage: 400 } as const;
+      const placed = place(lot, { ...request, moves: 1e6 });
+      if (!placed.ok) throw new Error("refused");
+      const few = { ...request, moves: 1, goal: "charging" } as const;
+      const read = resistorEffect(lot, few, { placing: placed.value, resistances: [250e3] });
+      if (!read.ok) throw new Error("refused");
+      for (const row of read.value) expect(row.replaced!).toBeLessThanOrEqual(row.asPlaced!);
+    }
+  });
 });

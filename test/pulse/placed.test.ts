@@ -46,6 +46,26 @@ describe("placedOf(bank, circuit, shot, mesh), through dischargeOf", () => {
     expect(findings.find(({ id }) => id === "pulse.unit.action")?.limit).toBe(500);
   });
 
+  test("a ring: the unit that the bus reverses most is judged, the bank's own figure stays; with a clamp or an unknown ESL none passes", () => {
+    const rated = (on: Partial<typeof UNIT> = {}) =>
+      pulseBankOf({
+        ...bank,
+        unit: { ...UNIT, ...on, ratings: { ...UNIT.ratings, reversal: 0.5 } as unknown as typeof UNIT.ratings },
+      });
+    const ring = { load: { kind: "coil", resistance: 0.005, inductance: 2e-7 } } as const;
+    const reversalOf = (one: ReturnType<typeof shot>) => one.findings.find(({ id }) => id === "pulse.unit.reversal");
+    const [plain, told] = [shot({ ...ring, place: null }, rated()), shot(ring, rated())];
+    expect(plain.unit.reversal).toBe(plain.reversal);
+    expect(told.reversal).toBe(plain.reversal);
+    expect(told.unit.reversal).toBeGreaterThan(told.reversal * 1.05);
+    expect(reversalOf(told)?.value).toBe(told.unit.reversal);
+    expect(reversalOf(told)?.note).toMatch(/position \d on the bus is reversed more/);
+    const quiet = { load: { kind: "coil", resistance: 0.5, inductance: 2e-7 } } as const;
+    expect(reversalOf(shot(quiet, rated()))?.verdict).toBe("pass");
+    expect(reversalOf(shot({ ...quiet, clamp: { drop: 1, resistance: 1e-3 } }, rated()))?.verdict).toBe("not assessed");
+    expect(reversalOf(shot(quiet, rated({ esl: null as unknown as number })))?.verdict).toBe("not assessed");
+  });
+
   test("solved with the load or driven by the load's current, alike units share within 1.5 %, what the lumped loop leaves out", () => {
     const given = shot({ switch: { ...IDEAL_SWITCH, drop: 1e-6 } }).unit.place?.alike ?? [];
     const solved = shot({}).unit.place?.alike ?? [];

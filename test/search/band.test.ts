@@ -66,6 +66,7 @@ describe("shotBand({ brief, unit, shape, circuit, bank })", () => {
   test("four spreads take 81 courses and the nominal one; a clamp fewer", () => {
     const spread = { esr: "20 %", resistance: "5 %", inductance: "10 %" };
     expect(bandOf(inputOf({ spread }))?.courses).toBe(82);
+    expect(bandOf(inputOf({ spread }))?.kind).toBe("sample");
     expect(bandOf(inputOf({ spread, clamp: { drop: 1 } }))?.courses).toBe(17);
   });
 });

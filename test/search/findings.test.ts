@@ -52,15 +52,15 @@ describe("findingsOf: the corner behind a worst case", () => {
   const noteOf = (bank: ReturnType<typeof bankOf>, id: string): string =>
     bank.findings.find((f) => f.id === id)?.note ?? "";
 
-  test("charging, holding and dumped name their corner; after an endless hold the worse reverse is told beside the contract's", () => {
+  test("charging, holding and dumped name their corner; after an endless hold the worse reverse is judged and the contract's told beside", () => {
     const bank = bankOf();
     expect(noteOf(bank, "charging-share")).toMatch(/stage 1 at -20 %, the rest at \+20 %/);
     expect(noteOf(bank, "holding-share")).toMatch(
       /with no leakage, the rest with the greatest leakage|one stage at -20 %; the rest at \+20 %/,
     );
     const reverse = noteOf(bank, "reverse-after-dump");
-    expect(reverse).toMatch(/reversed by this much: stage 1 at -20 %, the rest at \+20 %/);
-    expect(reverse).toMatch(/unequal leakage it may be [\d.]+ V: stage 1 at -20 %.*resistor at -5 %/);
+    expect(reverse).toMatch(/unequal leakage and a dump .* reversed by this much: stage 1 at -20 %.*resistor at -5 %/);
+    expect(reverse).toMatch(/From equal sharing it would be 103 V/);
   });
 
   test("a company of unlike stages that passes the limit on the way fails, where the two ends of the hold pass", () => {

@@ -3,6 +3,7 @@
 import { leftAfterDump } from "../../bank/index.ts";
 import { visible } from "../../order/index.ts";
 import { formatQuantity } from "../../quantity/index.ts";
+import { type BankCorners, heldWords } from "../../search/index.ts";
 import { askedText } from "../askedText.ts";
 import { cautionsOf } from "../cautions.ts";
 import { type BankFlags, type Checked, checkedBank } from "../checked.ts";
@@ -73,6 +74,12 @@ function leftOf({ result, unit, settings }: Checked): { readonly low: number | n
   return leftAfterDump(brief.voltage * (1 + brief.overshoot), result.series, unit.tolerance);
 }
 
+/** What the hold itself adds to that, where it is worse. */
+function keptAfterHold(held: BankCorners["dumpedFromHold"], low: number): string {
+  if (held === null || held.voltage >= low) return "";
+  return `; down to ${formatQuantity(held.voltage, "voltage", { rounding: "down" })} from ${heldWords(held.hold)}`;
+}
+
 function checkJson(checked: Checked, witness: Witness | null): string {
   const { result, unit, settings, stock, notes } = checked;
   const { brief } = settings;
@@ -98,7 +105,7 @@ function checkText(checked: Checked, width: number, witness: Witness | null): st
   const kept =
     left.low === null
       ? "not assessed: the tolerance is unknown"
-      : `${volts(left.low)} to ${volts(left.high)} on a stage`;
+      : `${volts(left.low)} to ${volts(left.high)} on a stage, from equal sharing${keptAfterHold(corners.dumpedFromHold, left.low)}`;
   const fails = result.findings.filter((f) => f.verdict === "fail").length;
   const open = result.findings.filter((f) => f.verdict === "not assessed").length;
   const verdict =
@@ -109,7 +116,7 @@ function checkText(checked: Checked, width: number, witness: Witness | null): st
         : "No check failed.";
   const cautions = cautionsOf(settings.brief, { layout: result, unit });
   const blocks = [
-    `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width)}`,
+    `${visible(result.id)}\n\nAsked\n${askedText(settings.brief, settings.given, width, checked.lot?.length ?? null)}`,
     `Found\n${layoutText(result, unit, width)}`,
     [
       ...cornerLines(corners, width),

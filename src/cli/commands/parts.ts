@@ -34,6 +34,7 @@ export function partsCommand(paths: readonly string[], flags: PartsFlags, ports:
   const most = limit === "0" ? Number.POSITIVE_INFINITY : Number(limit);
   const lost: Refusal[] = [];
   let understood = 0;
+  let flaws = 0;
   let first = true;
   if (flags.json) ports.out('{"files":[');
   for (const path of paths) {
@@ -45,6 +46,7 @@ export function partsCommand(paths: readonly string[], flags: PartsFlags, ports:
       continue;
     }
     understood += read.value.count;
+    flaws += read.value.faults.length;
     if (flags.json) {
       ports.out(first ? "\n" : ",\n");
       tableJson(file, read.value, most, ports);
@@ -52,6 +54,8 @@ export function partsCommand(paths: readonly string[], flags: PartsFlags, ports:
     first = false;
   }
   if (flags.json) ports.out(`\n],"refusals":${compactJson(lost.map(withWords))}}\n`);
+  else if (flaws > 0)
+    ports.out(`${flaws} ${flaws === 1 ? "fault" : "faults"} in all, each told above with its line.\n`);
   if (lost.length > 0) ports.err(`${lost.map(refusalWords).join("\n")}\n`);
   return understood > 0 && lost.length === 0 ? EXIT.done : EXIT.wrongUse;
 }
@@ -88,18 +92,21 @@ function inPieces(table: ToldTable, most: number, take: (rows: readonly ToldRow[
 }
 
 /** One row: its name and line, then values by state; what is unknown is named. */
-function rowText({ name, line, values }: ToldRow, width: number): string {
-  const of = (state: string): string =>
-    values
+function rowText({ name, line, values, purchase = [] }: ToldRow, width: number): string {
+  const of = (state: string, among = values): string =>
+    among
       .filter((value) => value.state === state)
       .map(({ heading, text, rule }) => `${heading} ${visible(text)}${rule === undefined ? "" : ` (${rule})`}`)
       .join(", ");
   const unknown = values.filter((value) => value.state === "unknown").map((value) => value.heading);
+  const blank = purchase.filter((value) => value.state === "unknown").map((value) => value.heading);
   const parts = [
     ["datasheet", of("datasheet")],
     ["measured", of("measured")],
     ["assumed", of("assumed")],
     ["unknown", unknown.join(", ")],
+    ["purchase", of("datasheet", purchase)],
+    ["purchase unknown", blank.join(", ")],
   ] as const;
   const lines = parts.flatMap(([state, text]) => (text === "" ? [] : [wrap(`${state}: ${text}`, width, "      ")]));
   return [`  ${line === undefined ? "" : `line ${line}: `}${visible(name)}`, ...lines].join("\n");

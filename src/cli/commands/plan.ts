@@ -1,5 +1,6 @@
 // `plan`: brief and catalogues to ranked layouts.
 
+import { visible } from "../../order/index.ts";
 import { accepted, nearestWord, type Read, type Refusal, refused } from "../../quantity/index.ts";
 import { briefJsonSchema, type PlanResult, plan, RANKINGS, type Ranking } from "../../search/index.ts";
 import { cautionsOf } from "../cautions.ts";
@@ -123,7 +124,7 @@ export function planJson({ settings, stock, result, lot, drawn }: Planned): obje
     lot !== null
       ? { measured: measuredJson(lot) }
       : drawn !== null
-        ? { measured: { part: drawn.part, units: drawn.units } }
+        ? { measured: { part: drawn.part, units: drawn.units, findings: drawn.findings } }
         : {};
   const layouts = result.layouts.map((layout) => ({ version: LAYOUT_VERSION, ...layout }));
   return {
@@ -140,10 +141,23 @@ export function planWords({ settings, stock, rank, result, lot, drawn }: Planned
   const { given } = settings;
   const inputs = [
     ...inputSentences(stock),
+    ...[...(lot?.findings ?? []), ...(drawn?.findings ?? [])].map(
+      ({ verdict, note }) => `${verdict}: ${visible(note)}`,
+    ),
     ...(lot === null ? [] : [savedText(lot)]),
     ...(drawn === null ? [] : [lotSentence(drawn)]),
   ];
-  return planText({ result, parts: stock.parts, given, rank, width, inputs });
+  const placedEnergy = new Map(lot?.placed.map(({ id, energy }) => [id, energy]) ?? []);
+  return planText({
+    result,
+    parts: stock.parts,
+    given,
+    rank,
+    width,
+    inputs,
+    lot: drawn?.units ?? null,
+    placedEnergy,
+  });
 }
 
 function readLimit(text = "20"): number | Refusal {

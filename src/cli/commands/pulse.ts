@@ -1,7 +1,7 @@
 // `pulse`: one arrangement fired into its load, once and again.
 
 import { visible } from "../../order/index.ts";
-import { accepted, type Finding, type Read } from "../../quantity/index.ts";
+import { accepted, type Finding, type Read, type Refusal, refused } from "../../quantity/index.ts";
 import { type FuseChoice, fittedFuse, inductanceSweep, type ShotReport, shotOf } from "../../search/index.ts";
 import { askedText } from "../askedText.ts";
 import { cautionsOf } from "../cautions.ts";
@@ -44,6 +44,16 @@ interface Fired extends Checked {
   readonly lost: readonly string[];
 }
 
+/** Faults of the load by the flags that would mend them. */
+function asAsked(fault: Refusal): Refusal {
+  const { field } = fault.place;
+  if (field === "seconds") return { ...fault, place: { ...fault.place, field: "--load-time" } };
+  if (field !== "load" || fault.code !== "missing-value") return fault;
+  const want =
+    "a load in the brief, or one of --load-resistance, --load-inductance, --load-current with --load-time, --load-recorded, --lamp-bore";
+  return { ...fault, place: { ...fault.place, field: "--load-resistance" }, want };
+}
+
 function fire(brief: string | undefined, flags: PulseFlags, ports: Ports): Read<Fired> {
   const checked = checkedBank(brief, flags, ports, fill);
   if (!checked.ok) return checked;
@@ -58,7 +68,7 @@ function fire(brief: string | undefined, flags: PulseFlags, ports: Ports): Read<
       ? null
       : { meltingAction: row.melting ?? null, clearingAction: row.clearing ?? null, dcVoltage: row.voltage ?? null };
   const report = shotOf({ ...input, fuse: rated });
-  if (!report.ok) return report;
+  if (!report.ok) return refused(...report.refusals.map(asAsked));
   return accepted({ ...checked.value, report: report.value, fuse, lost: stock?.value.lost ?? [] });
 }
 

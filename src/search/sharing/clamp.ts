@@ -1,9 +1,8 @@
 // What clamp diodes of one arrangement must stand, when a dump would reverse a unit beyond what it may see.
 
-import { type ClampDiode, clampDiode, endOfHold } from "../../bank/index.ts";
+import { type ClampDiode, clampDiode, reversedByHold, reversedMix } from "../../bank/index.ts";
 import { unitLimit } from "../candidate.ts";
 import { fullVoltage, holdCaseOf, type RestingBank } from "./holdCase.ts";
-import { reversedLumps } from "./lumps.ts";
 
 export interface BankClamp extends Omit<ClampDiode, "reverseVoltage"> {
   /** Greatest voltage that each blocks while the bank is charged, V; null when sharing is not assessed. */
@@ -39,7 +38,9 @@ export function clampOf(bank: ClampInput): BankClamp | null {
   const { victim, others } = beforeDump(bank, volts);
   const ratio = (1 - low) / (1 + high);
   // Charge of the victim less what the same charge leaves on the others: below zero it is reversed.
-  const reverse = (volts * (1 / ratio)) / (1 / ratio + n - 1) - victim;
+  const given = holdCaseOf(bank);
+  const held = given === null ? 0 : -reversedByHold(given).voltage;
+  const reverse = Math.max((volts * (1 / ratio)) / (1 / ratio + n - 1) - victim, held);
   if (reverse <= NOTHING * volts) return null;
   if (polarityKnown && unit.reverseVoltage !== undefined && reverse <= unit.reverseVoltage * (1 + 1e-9)) return null;
   const dump = brief.dumpResistance;
@@ -66,15 +67,12 @@ export function clampOf(bank: ClampInput): BankClamp | null {
   return { ...duty, reverseVoltage, before: { victim, others }, through, polarityKnown };
 }
 
-/** Equal sharing, or what an endless hold with unequal leakage and resistors leaves when that reverses more. */
+/** Equal sharing, or what unequal leakage and resistors make of the hold when that reverses more; the others all at their greatest capacitance. */
 function beforeDump(bank: RestingBank, volts: number): { readonly victim: number; readonly others: number } {
   const { series: n } = bank.result;
   const even = { victim: volts / n, others: volts / n };
   const given = holdCaseOf(bank);
-  if (given === null || given.R === null || given.hold !== Number.POSITIVE_INFINITY) return even;
-  const chain = reversedLumps(given).map(({ stage }) => stage);
-  const end = endOfHold(chain, volts);
-  if (end === null) return even;
-  const [victim, rest] = end as [number, number];
-  return victim < even.victim ? { victim, others: rest / (n - 1) } : even;
+  if (given === null) return even;
+  const { before } = reversedMix(given, 0);
+  return before < even.victim ? { victim: before, others: (volts - before) / (n - 1) } : even;
 }

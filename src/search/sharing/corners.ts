@@ -1,19 +1,18 @@
 // The corner behind each worst case of one arrangement, in words and volts: charging, holding, and what a dump leaves.
 
 import {
-  chargingShares,
   chargingWorst,
   cornerWords,
-  endOfHold,
   holdCornerWords,
+  reversedByHold,
   type Sides,
   type Stage,
   stageRange,
   worstAtHold,
 } from "../../bank/index.ts";
+import { formatQuantity } from "../../quantity/index.ts";
 import { leakOf } from "../candidate.ts";
 import { fullVoltage, holdCaseOf, type RestingBank } from "./holdCase.ts";
-import { reversedLumps } from "./lumps.ts";
 
 export interface CornerFact {
   /** V on the stage named. */
@@ -27,9 +26,10 @@ export interface BankCorners {
   readonly charging: CornerFact | null;
   /** Highest voltage at any moment from the end of the charge to the end of the hold; `hold` is s into it, Infinity for its endless end. */
   readonly holding: (CornerFact & { readonly hold: number }) | null;
-  /** Most reverse (below zero) after a dump from equal sharing, and after the hold's own unequal sharing where that is worse. */
+  /** Most reverse (below zero) after a dump from equal sharing. */
   readonly dumped: CornerFact | null;
-  readonly dumpedFromHold: CornerFact | null;
+  /** The same after the hold's own unequal sharing, at the worst moment of the hold to dump: `hold` is s into it, Infinity for its endless end. */
+  readonly dumpedFromHold: (CornerFact & { readonly hold: number }) | null;
 }
 
 export const NO_CORNERS: BankCorners = { charging: null, holding: null, dumped: null, dumpedFromHold: null };
@@ -91,14 +91,31 @@ function holdingCorner(bank: RestingBank): BankCorners["holding"] {
   return { voltage: worst.voltage, hold: worst.seconds, words };
 }
 
-/** Only an endless hold with something that conducts has an end that is known whatever came before. */
 function fromHold(bank: RestingBank): Pick<BankCorners, "dumpedFromHold"> {
   const given = holdCaseOf(bank);
-  if (given === null || given.hold !== Number.POSITIVE_INFINITY || given.R === null) return { dumpedFromHold: null };
-  const lumps = reversedLumps(given);
-  const chain = lumps.map(({ stage }) => stage);
-  const end = endOfHold(chain, given.V);
-  if (end === null) return { dumpedFromHold: null };
-  const voltage = (end[0] as number) - given.V * (chargingShares(chain)[0] as number);
-  return { dumpedFromHold: { voltage, words: wordsOf(bank, ["capacitance", ...CONDUCTING], REVERSED, FORWARD) } };
+  if (given === null) return { dumpedFromHold: null };
+  const { voltage, seconds, lowOthers } = reversedByHold(given);
+  return { dumpedFromHold: { voltage, hold: seconds, words: reversedWords(bank, lowOthers) } };
 }
+
+function reversedWords(bank: RestingBank, lowOthers: number): string {
+  const others = bank.result.series - 1;
+  const named = (rest: Sides): string => wordsOf(bank, ["capacitance", ...CONDUCTING], REVERSED, rest);
+  if (lowOthers === 0) return named(FORWARD);
+  const low = { ...FORWARD, capacitance: "low" } as const;
+  return lowOthers === others ? named(low) : `${named(FORWARD)}; but ${lowOthers} of the rest as low as stage 1`;
+}
+
+/** The corner of the voltage at the end of a hold, as against its start: an endless end does not depend on capacitance. */
+export function heldEndWords(bank: RestingBank): string {
+  const words = wordsOf(bank, CONDUCTING, TIGHT, LOOSE);
+  return bank.brief.hold === Number.POSITIVE_INFINITY || words === "every stage alike"
+    ? words
+    : `${words}; capacitance at whichever end is worse by then`;
+}
+
+/** The hold after which a dump is worst: `seconds` into it, Infinity for its endless end. */
+export const heldWords = (seconds: number): string =>
+  seconds === Number.POSITIVE_INFINITY
+    ? "an endless hold"
+    : `${formatQuantity(seconds, "time", { digits: 3 })} of hold`;

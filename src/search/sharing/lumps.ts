@@ -58,9 +58,3 @@ export function tightLumps(given: HoldCase, lowOthers: number): readonly Lump[] 
     ...(lowOthers > 0 ? [lumped(lowOthers, leaky("low"))] : []),
   ];
 }
-
-/** The corner that a dump reverses most after a hold: one leaky stage of least capacitance, the rest tight at the greatest. */
-export const reversedLumps = (given: HoldCase): readonly Lump[] => [
-  lumped(1, stageAtCorner(given, { capacitance: "low", leaks: true, resistor: "low" })),
-  lumped(given.n - 1, stageAtCorner(given, { capacitance: "high", leaks: false, resistor: "high" })),
-];

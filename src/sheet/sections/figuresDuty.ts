@@ -5,10 +5,10 @@ import { worstOfFault } from "../../pulse/index.ts";
 import { fittedFuse } from "../../search/index.ts";
 import { busForce } from "../busForce.ts";
 import { cell, down, partOf, up } from "../cells.ts";
-import { factsOf } from "../facts.ts";
 import type { SheetInput } from "../input.ts";
 import type { Cell } from "../model.ts";
 import type { FigureRow } from "./figuresDanger.ts";
+import { bledInElement } from "./resistors.ts";
 
 function stress({ layout, unit, faults }: SheetInput): readonly FigureRow[] {
   const { share } = layout;
@@ -73,8 +73,8 @@ function bus({ layout, unit, brief, faults, shot, fuse }: SheetInput): readonly 
     [
       "7",
       "reversal",
-      up(shot?.envelope.reversal.high ?? shot?.discharge.reversal, "fraction"),
-      shot === null ? "needs a load in the brief" : "high end of the spread",
+      up(reversalOf(shot), "fraction"),
+      shot === null ? "needs a load in the brief" : "high end of the spread, or of the unit worst placed on the bus",
     ],
   ];
 }
@@ -82,7 +82,6 @@ function bus({ layout, unit, brief, faults, shot, fuse }: SheetInput): readonly 
 function resistor(input: SheetInput): readonly FigureRow[] {
   const { balance } = input.layout;
   if (balance === null) return [["6", "balancing resistor", "none fitted", ""]];
-  const { stored } = factsOf(input);
   const family = [...input.families, DEFAULT_FAMILY].find((one) => one.family === balance.family);
   const part = (x: number | null, rating: number | undefined): Cell => up(partOf(x, rating), "fraction");
   return [
@@ -103,7 +102,7 @@ function resistor(input: SheetInput): readonly FigureRow[] {
     [
       "6",
       "balancing element, joules of rated",
-      part(stored === null ? null : stored / (balance.positions * balance.elements), family?.pulseEnergy),
+      part(bledInElement(input, balance.elements), family?.pulseEnergy),
       family?.pulseEnergy === undefined
         ? "the pulse rating is not known"
         : `pulse rating ${cell(family.pulseEnergy, "energy")}, one whole bleed-down; it is slow, so watts judge it`,
@@ -136,3 +135,7 @@ export const dutyFigures = (input: SheetInput): readonly FigureRow[] => [
   ...resistor(input),
   ...units(input),
 ];
+
+/** The bank's over all that spreads, or that of the unit which its place on the bus reverses more. */
+const reversalOf = (shot: SheetInput["shot"]): number | null =>
+  shot === null ? null : Math.max(shot.envelope.reversal.high ?? shot.discharge.reversal, shot.discharge.unit.reversal);

@@ -21,7 +21,7 @@ export function limitRows(input: SheetInput): readonly (readonly [string, Cell, 
     ["longest hold", Number.isFinite(brief.hold) ? cell(brief.hold, "time") : "for ever", "as asked"],
     [
       "reversal of the voltage, predicted",
-      up(shot?.discharge.reversal, "fraction"),
+      up(shot?.discharge.unit.reversal, "fraction"),
       unit.reversal === undefined ? "the unit's limit is not known" : `unit's limit ${cell(unit.reversal, "fraction")}`,
     ],
     [

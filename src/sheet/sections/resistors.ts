@@ -1,7 +1,8 @@
 /*
  * The resistors of the bank, each with the watts, volts and joules that it bears against what it is rated for.
  *
- *   balancing element  W: worst power at the worst voltage, all the time; J: its part of the whole stored energy in one bleed-down
+ *   balancing element  W: worst power at the worst voltage, all the time; J: its part of what its own stage or unit holds at most,
+ *                      the larger of C_hi v_hold^2/2 and C_lo v_charge^2/2, which empties through it alone in one bleed-down
  *   dump               J: the whole stored energy in one go; W: V^2/R for a moment; A: V/R
  *   isolating          J: its part of one shot, n p of them alike; into a shorted unit its leg takes far more (see the fault table)
  *
@@ -41,7 +42,6 @@ function balancing(input: SheetInput): readonly Resistor[] {
   const { balance } = layout;
   if (balance === null) return [];
   const family = [...families, DEFAULT_FAMILY].find((one) => one.family === balance.family);
-  const { stored } = factsOf(input);
   const pieces = balance.positions * balance.elements;
   return [
     {
@@ -52,10 +52,20 @@ function balancing(input: SheetInput): readonly Resistor[] {
       ratedWatts: family === undefined ? null : family.power * family.derating,
       volts: balance.voltageEach,
       ratedVolts: family?.voltage ?? null,
-      joules: stored === null ? null : stored / pieces,
+      joules: bledInElement(input, balance.elements),
       ratedJoules: family?.pulseEnergy ?? null,
     },
   ];
+}
+
+/** J in one element when its stage (cross-tied) or unit empties through it; null when tolerance or leakage is unknown. */
+export function bledInElement({ layout, unit }: SheetInput, elements: number): number | null {
+  const { charging, holding } = layout.share;
+  if (unit.tolerance === undefined || charging === null || holding === null) return null;
+  const capacitance = (layout.ties === "cross-tied" ? layout.parallel : 1) * unit.capacitance;
+  const held = capacitance * (1 + unit.tolerance.high) * holding ** 2;
+  const charged = capacitance * (1 - unit.tolerance.low) * charging ** 2;
+  return Math.max(held, charged) / 2 / elements;
 }
 
 function others(input: SheetInput): readonly Resistor[] {
@@ -126,7 +136,7 @@ export function resistorSection(input: SheetInput): Section {
     title: "Resistors",
     blocks: [
       text(
-        "Watts of a balancing element are those that last, against its derated rating. Joules are those of one bleed-down or dump of the whole bank from the highest voltage. A blank rating is not a passed check.",
+        "Watts of a balancing element are those that last, against its derated rating. Joules of a balancing element are all that its own worst stage or unit holds, bled through it; those of other resistors are of one bleed-down or dump of the whole bank from the highest voltage. A blank rating is not a passed check.",
       ),
       table,
       list([

@@ -1,5 +1,5 @@
 // The corner behind each worst case, in volts and words, or what is unknown.
-import type { CornerFact, LayoutResult } from "../../search/index.ts";
+import { type CornerFact, heldWords, type LayoutResult } from "../../search/index.ts";
 import type { RestDetail } from "../ports.ts";
 import { type Row, rowOf, span } from "../row.ts";
 import { fitText, wrapText } from "../text.ts";
@@ -46,6 +46,6 @@ export function cornerRows(
     ...row("charging", charging, ""),
     ...row("holding", holding, holding === null ? "" : whenWords(holding.hold, endless ? share.holding : null)),
     ...row("after a dump", dumped, "from equal sharing"),
-    ...(worse ? row("", dumpedFromHold, "from an endless hold") : []),
+    ...(worse ? row("", dumpedFromHold, `from ${heldWords(dumpedFromHold.hold)}`) : []),
   ];
 }

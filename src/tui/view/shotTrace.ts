@@ -87,7 +87,9 @@ export function traceRows({ discharge, voltage, band }: ShotReport, { state, siz
     reversed
       ? `R most reversed ${shown(lowest.voltage, "voltage")} after ${shown(lowest.time, "time")}.`
       : "The voltage does not reverse.",
-    ...(band === null ? [] : ["Dots: lowest and highest of both with all that spreads."]),
+    ...(band === null
+      ? []
+      : [`Dots: lowest and highest of both among ${band.courses} sampled shots of all that spreads, not a bound.`]),
     ...(until < duration ? [`Drawn to ${shown(until, "time")}; it is over after ${shown(duration, "time")}.`] : []),
   ];
   return [

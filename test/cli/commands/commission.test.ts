@@ -45,7 +45,7 @@ describe("commission SHEET --readings FILE", () => {
     expect(bank.series).toBe(3);
     const text = "charge voltage [V],stage,voltage [V],total [V]\n900,1,300,800\n900,2,300,\n900,3,300,\n";
     const found = await cli(["commission", "b", "--readings", "r", "--json"], { b: out, r: text });
-    expect(JSON.parse(found.out).findings).toMatchObject([{ id: "commission.sum" }]);
+    expect(JSON.parse(found.out).findings).toMatchObject([{ id: "commission.whole" }, { id: "commission.sum" }]);
   });
 
   test("unreadable sheet or readings end with 2", async () => {

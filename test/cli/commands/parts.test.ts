@@ -47,6 +47,26 @@ describe("parts FILE...", () => {
     expect(parts([at("fixtures/briefs/flash-lamp.json")]).err).toMatch(/another kind of file/);
   });
 
+  test("terms of purchase are told, and what is blank among them is named", () => {
+    const text =
+      "part,capacitance [uF],voltage [V],price,currency,price breaks,pack,minimum order,on hand,available,supplier\n" +
+      'k,820,450,6.40,EUR,"10: 5.90; 100: 5.10",10,20,13,40,Shelf\nm,820,450,,,,,,,,\n';
+    const flat = parts(["-"], {}, { "-": text }).out.replace(/\s+/g, " ");
+    expect(flat).toMatch(
+      /purchase: currency EUR, price 6\.40 EUR, price breaks 10: 5\.90; 100: 5\.10, pack 10, minimum order 20, on hand 13, available 40, supplier Shelf purchase unknown: order code/,
+    );
+    expect(flat).toMatch(/purchase unknown: currency, price, price breaks, pack, minimum order, on hand, available/);
+    const json = JSON.parse(parts(["-"], { json: true }, { "-": text }).out);
+    expect(json.files[0].rows[0].purchase).toContainEqual(expect.objectContaining({ key: "available", value: 40 }));
+  });
+
+  test("faults of rows leave the status at 0 and are counted at the end", () => {
+    const text = "part,capacitance [uF],voltage [V]\nk,820,450\nm,x,450\nn,820,y\n";
+    const { status, out } = parts(["-"], {}, { "-": text });
+    expect(status).toBe(0);
+    expect(out).toMatch(/2 faults in all, each told above with its line\.\n$/);
+  });
+
   test("every good catalogue reads to the same values", () => {
     const values = (name: string): unknown =>
       JSON.parse(parts([at(`fixtures/catalogs/good/${name}`)], { json: true }).out).files[0].rows.map(

@@ -1,7 +1,7 @@
 // Lumps against the whole chain, stage by stage, at the same corner.
 import { describe, expect, test } from "vitest";
 import { type Chain, courseOf, type HoldCase } from "../../../src/bank/index.ts";
-import { lumped, reversedLumps, stageAtCorner, tightLumps } from "../../../src/search/sharing/lumps.ts";
+import { lumped, stageAtCorner, tightLumps } from "../../../src/search/sharing/lumps.ts";
 import { chance } from "../../support/random.ts";
 
 const GIVEN: HoldCase = {
@@ -81,12 +81,4 @@ describe("tightLumps(case, lowOthers)", () => {
 test("lumped(count, stage): one stage is itself", () => {
   const stage = stageAtCorner(GIVEN, { capacitance: "high", leaks: true, resistor: "low" });
   expect(lumped(1, stage).stage).toEqual(stage);
-});
-
-test("reversedLumps(case): the leaky stage has the least capacitance and the low resistor", () => {
-  const [victim, rest] = reversedLumps(GIVEN);
-  expect(victim?.stage.capacitance).toBeCloseTo(2.4e-3, 12);
-  expect(victim?.stage.leakageCurrent).toBeCloseTo(3e-3, 12);
-  expect(victim?.stage.resistance).toBeCloseTo(19000, 6);
-  expect(rest).toMatchObject({ count: 6, stage: { leakageCurrent: 0, conductance: 0 } });
 });
