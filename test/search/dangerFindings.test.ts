@@ -14,10 +14,13 @@ describe("hazards(input)", () => {
 });
 
 describe("oneShorted(input)", () => {
-  test("seven left of eight, one low and six high: 400 V on units rated 400 V passes, with a surge rating it has room", () => {
+  test("seven left of eight, one low and six high: 400 V on units rated 400 V passes at once, not after a hold without end", () => {
     const worst = (2000 * 1.2) / (1.2 + 6 * 0.8);
-    const [found] = oneShorted(findingsInput());
+    const [found] = oneShorted(findingsInput({ brief: briefOf({ hold: "0 s" }) }));
     expect(found?.value).toBeCloseTo(worst, 9);
+    const [held] = oneShorted(findingsInput());
+    expect(held?.value).toBeGreaterThan(worst);
+    expect(held?.verdict).toBe("warn");
     expect(found).toMatchObject({ verdict: "pass", limit: 400, state: "faulted" });
     expect(oneShorted(findingsInput({ unit: { ...UNIT, surgeVoltage: 450 } }))[0]).toMatchObject({ limit: 450 });
   });
