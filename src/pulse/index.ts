@@ -46,6 +46,7 @@ export { type RingBus, ringBus } from "./ringBus.ts";
 export { checkLoop, dampingOf, dischargeAt, limitOf, type SeriesLoop } from "./rlc.ts";
 export { type CurrentSample, checkSamples } from "./samples.ts";
 export { type Isolation, isolationOf, type ShortCase, type ShortResult, shortedUnit } from "./shortedUnit.ts";
+export { reversalBound } from "./shotFindings.ts";
 export { pulseFrequency, RESISTIVITY, skinDepth } from "./skin.ts";
 export { type TraceRow, traceOf } from "./trace.ts";
 export {

@@ -41,7 +41,12 @@ function polarityFindings({ bank, circuit, unit, bounds }: ShotFacts): readonly 
  * What a unit's reversal is where its place on the bus is told. The place can only add to the bank's; unknown ESR or ESL leave that
  * open, and behind a clamp the units are followed until it takes over, after which they may go on among themselves.
  */
-function reversalBound({ bank, circuit, unit, bounds }: ShotFacts): Bound {
+export function reversalBound({
+  bank,
+  circuit,
+  unit,
+  bounds,
+}: Pick<ShotFacts, "bank" | "circuit" | "unit" | "bounds">): Bound {
   const { place = null, clamp } = circuit;
   if (place === null || bank.parallel < 2) return bounds.reversal;
   if (unit.place !== null && clamp === null) return bounds.reversal;

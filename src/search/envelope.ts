@@ -2,6 +2,7 @@
 
 import type { Capacitor } from "../catalog/index.ts";
 import {
+  type BusPath,
   type Circuit,
   type Corner,
   type Discharge,
@@ -63,9 +64,17 @@ export function spreadOf({ brief, unit, shape, bank }: EnvelopeInput): LoopSprea
 export const isLinear = ({ load, clamp, switch: sw }: Circuit): boolean =>
   load.kind !== "lamp" && clamp === null && sw.drop === 0;
 
-/** The shot with every part at one place of its spread, shared by capacitance alone. */
-export function dischargeWith({ brief, circuit, bank }: EnvelopeInput, corner: Corner): Read<Discharge> {
-  const { bus } = circuit;
+/** The shot with every part at one point of its spread, shared by capacitance alone or, with `placed`, by place on the bus too. */
+export function dischargeWith(
+  { brief, circuit, bank }: EnvelopeInput,
+  corner: Corner,
+  placed = false,
+): Read<Discharge> {
+  const { bus, place = null } = circuit;
+  const along = (path: BusPath): BusPath => ({
+    resistance: path.resistance * corner.resistance,
+    inductance: path.inductance * corner.inductance,
+  });
   return dischargeOf(
     {
       ...bank,
@@ -75,12 +84,9 @@ export function dischargeWith({ brief, circuit, bank }: EnvelopeInput, corner: C
     },
     {
       ...circuit,
-      place: null,
+      place: placed && place !== null ? { ...place, segment: along(place.segment) } : null,
       load: scaled(circuit.load, corner.resistance, corner.inductance),
-      bus: bus && {
-        resistance: bus.resistance * corner.resistance,
-        inductance: bus.inductance * corner.inductance,
-      },
+      bus: bus && along(bus),
     },
     brief.voltage,
   );
@@ -97,4 +103,21 @@ export function shotEnvelope(input: EnvelopeInput): Read<Envelope> {
     const { peakCurrent, peakTime, reversal, action } = shot.value;
     return accepted({ peakCurrent, peakTime, reversal, action });
   });
+}
+
+/**
+ * Reversal of the unit that its place on the bus reverses most, where the loop damps least: ESR and resistance low, inductance high.
+ * The ladder itself goes through the corners of the capacitances. 0 where no place is told.
+ */
+export function placedReversal(input: EnvelopeInput): Read<number> {
+  if ((input.circuit.place ?? null) === null || input.bank.parallel < 2) return accepted(0);
+  const { capacitance, esr, inductance, resistance } = spreadOf(input);
+  const corner = {
+    capacitance: capacitance.nominal,
+    esr: esr.low,
+    inductance: inductance.high,
+    resistance: resistance.low,
+  };
+  const shot = dischargeWith(input, corner, true);
+  return shot.ok ? accepted(shot.value.unit.reversal) : shot;
 }

@@ -15,13 +15,14 @@ import {
   type Heating,
   type PulseBank,
   rateFindings,
+  reversalBound,
 } from "../pulse/index.ts";
 import { accepted, type Finding, type Read } from "../quantity/index.ts";
 import { type Band, shotBand } from "./band.ts";
 import type { Brief } from "./brief.ts";
 import { chargeFor, driftFor, firingOf, rippleFor } from "./charging.ts";
 import { type BusFound, circuitOf, pulseBankFor } from "./circuit.ts";
-import { shotEnvelope } from "./envelope.ts";
+import { placedReversal, shotEnvelope } from "./envelope.ts";
 import { faultBankOf } from "./faults.ts";
 import { fuseSeesAt } from "./fuses.ts";
 import { highestShot } from "./highestShot.ts";
@@ -90,6 +91,8 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
   const discharge = shot.value;
   const envelope = shotEnvelope({ brief, unit, shape: layout, circuit, bank });
   if (!envelope.ok) return envelope;
+  const placed = placedReversal({ brief, unit, shape: layout, circuit, bank });
+  if (!placed.ok) return placed;
   const band = shotBand({ brief, unit, shape: layout, circuit, bank });
   if (!band.ok) return band;
   const highest = highestShot({ brief, unit, shape: layout, circuit, bank });
@@ -156,6 +159,10 @@ export function shotOf(input: ShotInput): Read<ShotReport> {
         series: layout.series,
         parallel: layout.parallel,
         clampDrop: circuit.clamp?.drop ?? null,
+        placed: {
+          reversal: placed.value,
+          bound: reversalBound({ bank, circuit, unit: discharge.unit, bounds: discharge.bounds }),
+        },
       }),
       ...bus.findings,
       ...rated,

@@ -1,7 +1,7 @@
 // The shot's findings on the worst unit, judged at the worst end of the envelope and never passed on an unknown tolerance.
 
 import type { Capacitor } from "../catalog/index.ts";
-import { atMost, type Discharge, type Envelope } from "../pulse/index.ts";
+import { atMost, type Bound, type Discharge, type Envelope } from "../pulse/index.ts";
 import { type Finding, formatQuantity } from "../quantity/index.ts";
 
 /** By which figure of the envelope a finding grows. */
@@ -23,6 +23,8 @@ export interface Rated {
   readonly series: number;
   readonly parallel: number;
   readonly clampDrop: number | null;
+  /** Reversal of the unit worst placed on the bus, at the corner that damps least; 0 where no place is told. And what it is. */
+  readonly placed: { readonly reversal: number; readonly bound: Bound };
 }
 
 /**
@@ -40,11 +42,11 @@ function spared(finding: Finding, { unit, series, clampDrop }: Rated, voltage: n
 
 /** The discharge's findings, each value at the high end of its figure. */
 export function unitRatingFindings(discharge: Discharge, of: Rated): readonly Finding[] {
-  const { unit, envelope, parallel } = of;
+  const { unit, parallel } = of;
   const voltage = Math.sqrt((2 * discharge.energy.stored) / (of.unit.capacitance * (of.parallel / of.series)));
   const alike = unit.tolerance === undefined && parallel > 1;
   return discharge.findings.map((finding) => {
-    const raised = spared(atEnd(finding, discharge, envelope), of, voltage);
+    const raised = spared(atEnd(finding, discharge, of), of, voltage);
     if (!alike || !SHARED.includes(finding.id) || raised.verdict !== "pass") return raised;
     const note = `${raised.note} The tolerance is unknown, so the worst unit may carry more.`;
     return { ...raised, verdict: "not assessed", note };
@@ -52,14 +54,17 @@ export function unitRatingFindings(discharge: Discharge, of: Rated): readonly Fi
 }
 
 /** The finding with its value at the high end of the envelope. */
-function atEnd(finding: Finding, discharge: Discharge, envelope: Envelope): Finding {
+function atEnd(finding: Finding, discharge: Discharge, { envelope, placed }: Rated): Finding {
   const figure = GROWS[finding.id];
   if (figure === undefined || finding.value === null) return finding;
   const { high, nominal } = envelope[figure];
-  if (high === null || nominal === null || !(high > nominal)) return finding;
-  const value = figure === "reversal" ? high : (finding.value * high) / nominal;
+  if (high === null || nominal === null) return finding;
+  const reversal = Math.max(high, placed.reversal, finding.value);
+  const raised = figure === "reversal" ? reversal > finding.value : high > nominal;
+  if (!raised) return finding;
+  const value = figure === "reversal" ? reversal : (finding.value * high) / nominal;
   const { id, state, limit, unit, source, note, verdict } = finding;
-  const bound = discharge.bounds[figure];
+  const bound = figure === "reversal" ? placed.bound : discharge.bounds[figure];
   const told = note.replace(/ \((?:upper|lower) bound\)$| \(side unknown\)$/, "");
   const judged = atMost({
     id,

@@ -2,10 +2,12 @@ import { describe, expect, test } from "vitest";
 import { dischargeOf } from "../../src/pulse/index.ts";
 import { circuitOf, pulseBankFor } from "../../src/search/circuit.ts";
 import { shotEnvelope } from "../../src/search/envelope.ts";
-import { unitRatingFindings } from "../../src/search/unitRatings.ts";
+import { type Rated, unitRatingFindings } from "../../src/search/unitRatings.ts";
 import { FILM, shotBrief } from "../support/shotBank.ts";
 
-function ratings(unit = FILM, parallel = 2, more: Record<string, unknown> = {}) {
+const NOT_PLACED = { reversal: 0, bound: "value" } as const;
+
+function ratings(unit = FILM, parallel = 2, more: Record<string, unknown> = {}, placed: Rated["placed"] = NOT_PLACED) {
   const brief = shotBrief(more);
   const shape = { series: 1, parallel, ties: "strings" } as const;
   const bank = pulseBankFor(unit, shape);
@@ -23,6 +25,7 @@ function ratings(unit = FILM, parallel = 2, more: Record<string, unknown> = {}) 
       series: 1,
       parallel,
       clampDrop: brief.clamp?.drop ?? null,
+      placed,
     }),
   };
 }
@@ -50,6 +53,18 @@ describe("unitRatingFindings(discharge, { unit, envelope, parallel })", () => {
     expect(clamped?.note).toMatch(/1\.2 V on a unit/);
     // a clamp with a resistance of its own leaves far more than its drop
     expect(of({ clamp: { drop: "1.2 V", resistance: "50 mohm" } })?.verdict).toBe("fail");
+  });
+
+  test("a unit whose place reverses it more than the bank's worst end is judged by that; a lower bound never passes", () => {
+    const unit = { ...FILM, reversal: 0.9 };
+    const load = { resistance: "20 mohm", inductance: "25 uH" };
+    const of = (placed: Rated["placed"]) =>
+      ratings(unit, 2, { load }, placed).findings.find(({ id }) => id === "pulse.unit.reversal");
+    const plain = of(NOT_PLACED)?.value as number;
+    expect(of({ reversal: plain / 2, bound: "value" })?.value).toBe(plain);
+    expect(of({ reversal: 0.89, bound: "value" })).toMatchObject({ value: 0.89, verdict: "pass" });
+    expect(of({ reversal: 0.89, bound: "lower bound" })?.verdict).toBe("not assessed");
+    expect(of({ reversal: 0.96, bound: "lower bound" })?.verdict).toBe("fail");
   });
 
   test("an unknown tolerance takes the pass away from what rests on sharing, when there are several", () => {

@@ -78,7 +78,15 @@ describe("check as text", () => {
 
   test("holds the signed voltages that a dump leaves, and the cautions", () => {
     const { out } = check(FLAGS);
-    expect(out).toMatch(/left after a dump +-133\.3 V to 109\.1 V/);
+    expect(out).toMatch(/left after a dump +-133\.3 V to 109\.1 V on a stage, from equal\s+sharing/);
+    // Unequal leakage does worse for ever, and the finding is judged by that.
+    const held = JSON.parse(check({ ...FLAGS, json: true }).out);
+    const { voltage, hold } = held.corners.dumpedFromHold;
+    expect(hold).toBe("for ever");
+    expect(voltage).toBeLessThan(held.left.low);
+    expect(held.share.leftAfterDump).toBe(-held.left.low);
+    expect(held.findings.find(({ id }: { id: string }) => id === "reverse-after-dump").value).toBe(-voltage);
+    expect(out.replaceAll(/\s+/g, " ")).toMatch(/from equal sharing; down to -[\d.]+ V from an endless hold/);
     expect(out).toMatch(/can kill/);
     expect(Math.max(...out.split("\n").map((line) => line.length))).toBeLessThanOrEqual(80);
   });
