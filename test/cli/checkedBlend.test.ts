@@ -44,7 +44,7 @@ test("check of a blend as text: groups, faults with what the others bring, cauti
   const good = await cli(["check", ...line, "--blend", "a 4s6p cross-tied + b 4s2p cross-tied"]);
   expect(good.out).toMatch(/In?f? one thing fails/i);
   expect(good.out).toContain("Cautions");
-  expect(good.out).toContain("into the unit");
+  expect(good.out).toContain("both at most");
   const short = await cli(["check", ...line, "--blend", "a 2s6p cross-tied + b 4s1p"]);
   expect([short.status, /CHECKS? FAILED/.test(short.out)]).toEqual([1, true]);
   const bill = await cli(["order", ...line, "--blend", "a 2s6p cross-tied + b 4s1p", "--format", "md"]);
